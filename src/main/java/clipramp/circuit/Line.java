@@ -1,0 +1,41 @@
+package clipramp.circuit;
+
+import java.util.List;
+
+/**
+ * The alternating line. v(t) = sqrt(2) V [sin wt + sum of share_k sin(k wt + phase_k)].
+ *
+ * @param volts rms of the fundamental, V
+ * @param hertz frequency, Hz
+ * @param lowVolts lowest rms that the design must work at, V
+ * @param highVolts highest rms that the design must work at, V
+ * @param harmonics shares of the fundamental, may be empty
+ */
+public record Line(double volts, double hertz, double lowVolts, double highVolts, List<Harmonic> harmonics) {
+    /**
+     * @param order 2 or more
+     * @param share amplitude as a fraction of the fundamental, 0..1
+     * @param phaseRad phase at the fundamental's positive-going zero, in the harmonic's own angle
+     */
+    public record Harmonic(int order, double share, double phaseRad) {
+        public Harmonic {
+            if (order < 2 || order > 100) {
+                throw new IllegalArgumentException("harmonic order must lie in 2..100, is " + order);
+            }
+            Require.fraction("harmonic share", share);
+            Require.finite("harmonic phase", phaseRad);
+        }
+    }
+
+    public Line {
+        Require.positive("line voltage", volts);
+        Require.positive("line frequency", hertz);
+        Require.positive("low line voltage", lowVolts);
+        Require.positive("high line voltage", highVolts);
+        if (lowVolts > volts || highVolts < volts) {
+            throw new IllegalArgumentException(
+                    "line voltages out of order: low " + lowVolts + ", nominal " + volts + ", high " + highVolts);
+        }
+        harmonics = List.copyOf(harmonics);
+    }
+}

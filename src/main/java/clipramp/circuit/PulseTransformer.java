@@ -1,0 +1,33 @@
+package clipramp.circuit;
+
+import java.util.OptionalDouble;
+
+/**
+ * Pulse transformer between base one and the gate or gates.
+ *
+ * @param ratio primary over secondary turns
+ * @param secondaries one or two
+ * @param magnetisingHenries L_m at the primary, H
+ * @param primaryOhms primary winding resistance, ohm
+ * @param secondaryOhms resistance of one secondary, ohm
+ * @param clampDiode whether a diode clamps the primary
+ * @param voltSeconds rated volt-seconds at the primary, Vs, if stated
+ */
+public record PulseTransformer(
+        double ratio,
+        int secondaries,
+        double magnetisingHenries,
+        double primaryOhms,
+        double secondaryOhms,
+        boolean clampDiode,
+        OptionalDouble voltSeconds) {
+    public PulseTransformer {
+        Require.positive("transformer ratio", ratio);
+        Require.positive("magnetising inductance", magnetisingHenries);
+        Require.notNegative("primary resistance", primaryOhms);
+        Require.notNegative("secondary resistance", secondaryOhms);
+        if (secondaries != 1 && secondaries != 2) {
+            throw new IllegalArgumentException("a pulse transformer has one or two secondaries, not " + secondaries);
+        }
+    }
+}

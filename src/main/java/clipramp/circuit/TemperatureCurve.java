@@ -1,0 +1,63 @@
+package clipramp.circuit;
+
+import java.util.Comparator;
+import java.util.List;
+
+/**
+ * A current that depends on junction temperature, given at one or more points: trigger, latching or holding current.
+ *
+ * <p>Between points the logarithm of the current is linear in temperature; outside them the end slope goes on. A single
+ * point doubles at -40 °C seen from 25 °C (common practice, as most SCR sheets show).
+ *
+ * @param points at least one point, in rising temperature
+ */
+public record TemperatureCurve(List<Point> points) {
+    /** Growth from 25 °C down to -40 °C where a sheet gives one point only: common practice. */
+    private static final double COLD_GROWTH = 2;
+
+    private static final double COLD_SPAN_KELVIN = 65;
+
+    /**
+     * @param celsius junction temperature
+     * @param amps current there, above zero
+     */
+    public record Point(double celsius, double amps) {
+        public Point {
+            Require.finite("temperature", celsius);
+            Require.positive("current", amps);
+        }
+    }
+
+    public TemperatureCurve {
+        if (points.isEmpty()) {
+            throw new IllegalArgumentException("a current against temperature needs at least one point");
+        }
+        points = points.stream().sorted(Comparator.comparingDouble(Point::celsius)).toList();
+    }
+
+    public static TemperatureCurve at25(double amps) {
+        return new TemperatureCurve(List.of(new Point(25, amps)));
+    }
+
+    /** Current in amperes at a junction temperature in °C. */
+    public double ampsAt(double celsius) {
+        if (points.size() == 1) {
+            Point only = points.get(0);
+            return only.amps() * Math.pow(COLD_GROWTH, (only.celsius() - celsius) / COLD_SPAN_KELVIN);
+        }
+        int upper = 1;
+        while (upper < points.size() - 1 && points.get(upper).celsius() < celsius) {
+            upper++;
+        }
+        Point a = points.get(upper - 1);
+        Point b = points.get(upper);
+        double share = (celsius - a.celsius()) / (b.celsius() - a.celsius());
+        return a.amps() * Math.pow(b.amps() / a.amps(), share);
+    }
+
+    /** Whether a temperature lies outside the sheet's points, so that the answer is extended and should say so. */
+    public boolean isExtendedAt(double celsius) {
+        return celsius < points.get(0).celsius()
+                || celsius > points.get(points.size() - 1).celsius();
+    }
+}

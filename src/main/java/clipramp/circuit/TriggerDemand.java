@@ -1,0 +1,66 @@
+package clipramp.circuit;
+
+import java.util.Comparator;
+import java.util.List;
+
+/**
+ * I_GT and V_GT against junction temperature: log I_GT and V_GT linear in temperature, end slopes extended. With a
+ * single point, I_GT doubles and V_GT gains 1 V at -40 °C seen from 25 °C (common practice).
+ *
+ * @param points at least one, in rising temperature
+ */
+public record TriggerDemand(List<Point> points) {
+    private static final double COLD_GAIN_VOLTS = 1;
+    private static final double COLD_SPAN_KELVIN = 65;
+
+    /**
+     * @param celsius junction temperature
+     * @param amps I_GT, A
+     * @param volts V_GT, V
+     */
+    public record Point(double celsius, double amps, double volts) {
+        public Point {
+            Require.finite("temperature", celsius);
+            Require.positive("trigger current", amps);
+            Require.positive("trigger voltage", volts);
+        }
+    }
+
+    public TriggerDemand {
+        if (points.isEmpty()) {
+            throw new IllegalArgumentException("trigger data need at least one point");
+        }
+        points = points.stream().sorted(Comparator.comparingDouble(Point::celsius)).toList();
+    }
+
+    /** I_GT in amperes at a junction temperature in °C. */
+    public double ampsAt(double celsius) {
+        return currents().ampsAt(celsius);
+    }
+
+    /** V_GT in volts at a junction temperature in °C. */
+    public double voltsAt(double celsius) {
+        if (points.size() == 1) {
+            Point only = points.get(0);
+            return only.volts() + COLD_GAIN_VOLTS * (only.celsius() - celsius) / COLD_SPAN_KELVIN;
+        }
+        int upper = 1;
+        while (upper < points.size() - 1 && points.get(upper).celsius() < celsius) {
+            upper++;
+        }
+        Point a = points.get(upper - 1);
+        Point b = points.get(upper);
+        return a.volts() + (b.volts() - a.volts()) * (celsius - a.celsius()) / (b.celsius() - a.celsius());
+    }
+
+    /** Whether a temperature lies outside the sheet's points, so that the answer is extended and should say so. */
+    public boolean isExtendedAt(double celsius) {
+        return currents().isExtendedAt(celsius);
+    }
+
+    private TemperatureCurve currents() {
+        return new TemperatureCurve(points.stream()
+                .map(p -> new TemperatureCurve.Point(p.celsius(), p.amps()))
+                .toList());
+    }
+}

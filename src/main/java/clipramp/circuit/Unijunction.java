@@ -1,0 +1,129 @@
+package clipramp.circuit;
+
+import java.util.Optional;
+import java.util.OptionalDouble;
+
+/**
+ * Unijunction transistor, data-sheet figures at 25 °C.
+ *
+ * @param id profile or in-place name
+ * @param standoff intrinsic standoff ratio eta, 0..1
+ * @param interbaseOhms R_BB, ohm
+ * @param interbaseDriftPerKelvin relative drift of R_BB, 1/K
+ * @param emitterDropVolts V_D, V
+ * @param emitterDriftVoltsPerKelvin drift of V_D, V/K, negative
+ * @param peakCurrentAmps I_P, A
+ * @param valley the valley point
+ * @param saturation a point of the saturated emitter line
+ * @param modulated interbase current with the emitter conducting, if the sheet has it
+ * @param baseOnePulse V_OB1 in its test circuit, if the sheet has it
+ * @param limits absolute ratings
+ */
+public record Unijunction(
+        String id,
+        Characteristic standoff,
+        Characteristic interbaseOhms,
+        Characteristic interbaseDriftPerKelvin,
+        Characteristic emitterDropVolts,
+        Characteristic emitterDriftVoltsPerKelvin,
+        Characteristic peakCurrentAmps,
+        Valley valley,
+        Saturation saturation,
+        Optional<Modulated> modulated,
+        Optional<BaseOnePulse> baseOnePulse,
+        Limits limits) {
+
+    /**
+     * @param amps I_V, A
+     * @param volts V_V, emitter to base one, V
+     * @param atVolts interbase voltage V_spec of both, V
+     */
+    public record Valley(Characteristic amps, Characteristic volts, double atVolts) {
+        public Valley {
+            Require.positive("valley current", amps.nominal());
+            Require.positive("valley voltage", volts.nominal());
+            Require.positive("interbase voltage of the valley point", atVolts);
+        }
+    }
+
+    /**
+     * @param volts V_EB1(sat), V
+     * @param amps emitter current of that point, A
+     * @param atVolts interbase voltage of that point, V
+     */
+    public record Saturation(Characteristic volts, double amps, double atVolts) {
+        public Saturation {
+            Require.positive("saturation voltage", volts.nominal());
+            Require.positive("saturation current", amps);
+            Require.positive("interbase voltage of the saturation point", atVolts);
+        }
+    }
+
+    /**
+     * @param amps I_B2(mod), A
+     * @param atVolts interbase voltage of that point, V
+     */
+    public record Modulated(Characteristic amps, double atVolts) {
+        public Modulated {
+            Require.positive("modulated interbase current", amps.nominal());
+            Require.positive("interbase voltage of the modulated current", atVolts);
+        }
+    }
+
+    /**
+     * V_OB1 and the circuit that it is measured in.
+     *
+     * @param minVolts least base-one pulse of any device, V
+     * @param typVolts typical base-one pulse, V
+     * @param supplyVolts supply of the test circuit, V
+     * @param capacitorFarads capacitor of the test circuit, F
+     * @param baseOneOhms base-one resistor of the test circuit, ohm
+     */
+    public record BaseOnePulse(
+            OptionalDouble minVolts,
+            OptionalDouble typVolts,
+            double supplyVolts,
+            double capacitorFarads,
+            double baseOneOhms) {
+        public BaseOnePulse {
+            if (minVolts.isEmpty() && typVolts.isEmpty()) {
+                throw new IllegalArgumentException("a base-one pulse needs min or typ");
+            }
+            Require.positive("test supply", supplyVolts);
+            Require.positive("test capacitor", capacitorFarads);
+            Require.positive("test base-one resistor", baseOneOhms);
+        }
+
+        /** Typical where stated, else the minimum. */
+        public double nominalVolts() {
+            return typVolts.orElseGet(minVolts::getAsDouble);
+        }
+    }
+
+    /**
+     * @param interbaseVolts V
+     * @param emitterPeakAmps A
+     * @param emitterRmsAmps A
+     * @param emitterReverseVolts V
+     * @param capacitorFarads largest capacitor that the peak current rating holds for, F
+     * @param capacitorVolts voltage that goes with it, V
+     * @param watts dissipation at 25 °C, W
+     * @param deratingWattsPerKelvin what the dissipation loses above 25 °C, W/K
+     */
+    public record Limits(
+            OptionalDouble interbaseVolts,
+            OptionalDouble emitterPeakAmps,
+            OptionalDouble emitterRmsAmps,
+            OptionalDouble emitterReverseVolts,
+            OptionalDouble capacitorFarads,
+            OptionalDouble capacitorVolts,
+            OptionalDouble watts,
+            OptionalDouble deratingWattsPerKelvin) {}
+
+    public Unijunction {
+        Require.fraction("standoff ratio", standoff.nominal());
+        Require.positive("interbase resistance", interbaseOhms.nominal());
+        Require.notNegative("emitter diode drop", emitterDropVolts.nominal());
+        Require.notNegative("peak-point current", peakCurrentAmps.nominal());
+    }
+}

@@ -1,0 +1,42 @@
+package clipramp.circuit;
+
+import java.util.Optional;
+
+/**
+ * What the knob is to reach at its ends.
+ *
+ * @param lowest at or under this, if stated
+ * @param highest at or over this, if stated
+ */
+public record Wanted(Optional<Goal> lowest, Optional<Goal> highest) {
+    /** What a goal is measured in. */
+    public enum Measure {
+        /** Share of full-wave full power, 0..1. */
+        FRACTION,
+        /** Load power, W. */
+        WATTS,
+        /** Load rms voltage, V. */
+        VOLTS,
+        /** Firing angle, rad. */
+        ANGLE
+    }
+
+    /**
+     * @param measure what from and to are in
+     * @param from low end of the band; equal to {@code to} where no band was given
+     * @param to high end of the band
+     * @param position knob position 0..1
+     */
+    public record Goal(Measure measure, double from, double to, double position) {
+        public Goal {
+            if (!(from <= to)) {
+                throw new IllegalArgumentException("a wanted band runs from low to high, not " + from + ".." + to);
+            }
+            Require.fraction("knob position", position);
+        }
+
+        public boolean isBand() {
+            return from < to;
+        }
+    }
+}
