@@ -33,8 +33,7 @@ public sealed interface Load {
      * @param inductanceHenries inductance, H
      * @param freewheel diode across the load, if there is one
      */
-    record Inductive(double resistanceOhms, double inductanceHenries, Optional<StageDiodes> freewheel)
-            implements Load {
+    record Inductive(double resistanceOhms, double inductanceHenries, Optional<StageDiodes> freewheel) implements Load {
         public Inductive {
             Require.positive("load resistance", resistanceOhms);
             Require.positive("load inductance", inductanceHenries);

@@ -32,7 +32,9 @@ public record TemperatureCurve(List<Point> points) {
         if (points.isEmpty()) {
             throw new IllegalArgumentException("a current against temperature needs at least one point");
         }
-        points = points.stream().sorted(Comparator.comparingDouble(Point::celsius)).toList();
+        points = points.stream()
+                .sorted(Comparator.comparingDouble(Point::celsius))
+                .toList();
     }
 
     public static TemperatureCurve at25(double amps) {

@@ -30,7 +30,9 @@ public record TriggerDemand(List<Point> points) {
         if (points.isEmpty()) {
             throw new IllegalArgumentException("trigger data need at least one point");
         }
-        points = points.stream().sorted(Comparator.comparingDouble(Point::celsius)).toList();
+        points = points.stream()
+                .sorted(Comparator.comparingDouble(Point::celsius))
+                .toList();
     }
 
     /** I_GT in amperes at a junction temperature in °C. */

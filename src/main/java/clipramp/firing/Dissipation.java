@@ -1,0 +1,39 @@
+package clipramp.firing;
+
+/**
+ * What the firing circuit's parts bear in the periodic state; means are over whole periods of the line.
+ *
+ * @param dropperWatts mean of i_D squared times R_D, W
+ * @param dropperPeakVolts largest voltage across the dropper, V
+ * @param zenerWatts mean of V_S i_Z, W
+ * @param zenerPeakAmps largest zener current, A
+ * @param baseOneWatts R1, W
+ * @param baseTwoWatts R2, W
+ * @param rampWatts R_E, W
+ * @param deviceWatts trigger device, base bar and emitter together, W
+ * @param emitterRmsAmps rms emitter current, A
+ * @param emitterPeakAmps largest emitter current, A
+ * @param emitterReverseVolts largest reverse voltage between emitter and base two (V_S less V_C), V
+ * @param interbaseVolts largest interbase voltage, V
+ * @param capacitorVolts largest capacitor voltage, V
+ * @param gateWatts mean power into the gate junction, W
+ * @param gateSeriesWatts R_G, W
+ * @param gateShuntWatts R_GK, W
+ */
+public record Dissipation(
+        double dropperWatts,
+        double dropperPeakVolts,
+        double zenerWatts,
+        double zenerPeakAmps,
+        double baseOneWatts,
+        double baseTwoWatts,
+        double rampWatts,
+        double deviceWatts,
+        double emitterRmsAmps,
+        double emitterPeakAmps,
+        double emitterReverseVolts,
+        double interbaseVolts,
+        double capacitorVolts,
+        double gateWatts,
+        double gateSeriesWatts,
+        double gateShuntWatts) {}

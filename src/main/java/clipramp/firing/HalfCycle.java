@@ -1,0 +1,53 @@
+package clipramp.firing;
+
+import java.util.List;
+import java.util.Optional;
+import java.util.OptionalDouble;
+
+/**
+ * One solved half cycle of the firing circuit (a whole period for a half-wave supply).
+ *
+ * @param positive whether it is the half cycle in which the line's fundamental is positive
+ * @param seconds its length, s
+ * @param startVolts ramp capacitor at the line zero that begins it, V
+ * @param endVolts ramp capacitor at the line zero that ends it, V
+ * @param clipFromRad angle from which the zener conducts, rad; empty if it never does
+ * @param stalled whether the ramp was held at the peak point for want of peak-point current
+ * @param latchedOn whether the trigger device stayed on after a pulse until the supply collapsed
+ * @param pulses every pulse that began in it, in order
+ * @param firingIndex index of the first pulse that turns the thyristor on and latches it; -1 for none
+ */
+public record HalfCycle(
+        boolean positive,
+        double seconds,
+        double startVolts,
+        double endVolts,
+        OptionalDouble clipFromRad,
+        boolean stalled,
+        boolean latchedOn,
+        List<Pulse> pulses,
+        int firingIndex) {
+    public HalfCycle {
+        pulses = List.copyOf(pulses);
+    }
+
+    /** The pulse that fires the thyristor, if one does. */
+    public Optional<Pulse> firingPulse() {
+        return firingIndex < 0 ? Optional.empty() : Optional.of(pulses.get(firingIndex));
+    }
+
+    /** The firing pulse; else the first pulse of all; else empty. */
+    public Optional<Pulse> shownPulse() {
+        return firingPulse().or(() -> pulses.stream().findFirst());
+    }
+
+    /** The first pulse that begins after the zener's last conduction, if there is one. */
+    public Optional<Pulse> endPulse() {
+        return pulses.stream().filter(Pulse::endPulse).findFirst();
+    }
+
+    /** Firing angle, rad; empty when the thyristor stays off. */
+    public OptionalDouble firingRad() {
+        return firingPulse().stream().mapToDouble(Pulse::startRad).findFirst();
+    }
+}

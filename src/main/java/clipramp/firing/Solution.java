@@ -1,0 +1,58 @@
+package clipramp.firing;
+
+import clipramp.circuit.Condition;
+import java.util.List;
+
+/**
+ * The periodic state of the firing circuit at one ramp resistance and condition.
+ *
+ * @param condition line and temperature
+ * @param rampOhms R_E, ohm
+ * @param settling whether and how it repeats
+ * @param halves every half cycle that differs: one where all are alike; two (positive half first, or the two that
+ *     alternate) otherwise; more only when it hunts without settling
+ */
+public record Solution(Condition condition, double rampOhms, Settling settling, List<HalfCycle> halves) {
+    /** How successive half cycles follow each other. */
+    public enum Settling {
+        /** Every line period is like the one before. */
+        STEADY,
+        /** Only every second half cycle repeats although supply and load treat both alike: the load gets dc. */
+        HUNTS,
+        /** Not even that; the halves are the last ones computed. */
+        NEVER
+    }
+
+    public Solution {
+        halves = List.copyOf(halves);
+        if (halves.isEmpty()) {
+            throw new IllegalArgumentException("a solution has at least one half cycle");
+        }
+    }
+
+    public boolean hunts() {
+        return settling != Settling.STEADY;
+    }
+
+    /** The half cycle that a single row shows: the positive one. */
+    public HalfCycle shown() {
+        return halves.stream().filter(HalfCycle::positive).findFirst().orElse(halves.get(0));
+    }
+
+    public FiringState state() {
+        HalfCycle half = shown();
+        if (half.pulses().isEmpty()) {
+            return FiringState.SILENT;
+        }
+        if (hunts()) {
+            return FiringState.HUNTS;
+        }
+        if (half.stalled()) {
+            return FiringState.STALLS;
+        }
+        if (half.latchedOn()) {
+            return FiringState.LATCHED_ON;
+        }
+        return half.endPulse().isPresent() ? FiringState.END_PULSE : FiringState.FIRES;
+    }
+}

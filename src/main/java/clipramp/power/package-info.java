@@ -1,0 +1,5 @@
+/** Stage and load: watts, currents, heat. */
+@NullMarked
+package clipramp.power;
+
+import org.jspecify.annotations.NullMarked;
