@@ -48,4 +48,256 @@ public record Design(
     public Condition nominalCondition() {
         return new Condition(line.volts(), line.hertz(), 25);
     }
+
+    /** The same design on another line. */
+    public Design withLine(Line newLine) {
+        return new Design(
+                title,
+                notes,
+                document,
+                newLine,
+                stage,
+                stageDiodes,
+                load,
+                clip,
+                ramp,
+                trigger,
+                gate,
+                thyristor,
+                surroundings,
+                wanted,
+                resistorDerating,
+                designators);
+    }
+
+    /** The same design with another stage. */
+    public Design withStage(Stage newStage) {
+        return new Design(
+                title,
+                notes,
+                document,
+                line,
+                newStage,
+                stageDiodes,
+                load,
+                clip,
+                ramp,
+                trigger,
+                gate,
+                thyristor,
+                surroundings,
+                wanted,
+                resistorDerating,
+                designators);
+    }
+
+    /** The same design with other bridge diodes. */
+    public Design withStageDiodes(StageDiodes newStageDiodes) {
+        return new Design(
+                title,
+                notes,
+                document,
+                line,
+                stage,
+                newStageDiodes,
+                load,
+                clip,
+                ramp,
+                trigger,
+                gate,
+                thyristor,
+                surroundings,
+                wanted,
+                resistorDerating,
+                designators);
+    }
+
+    /** The same design with another load. */
+    public Design withLoad(Load newLoad) {
+        return new Design(
+                title,
+                notes,
+                document,
+                line,
+                stage,
+                stageDiodes,
+                newLoad,
+                clip,
+                ramp,
+                trigger,
+                gate,
+                thyristor,
+                surroundings,
+                wanted,
+                resistorDerating,
+                designators);
+    }
+
+    /** The same design with another clipped supply. */
+    public Design withClip(ClipSupply newClip) {
+        return new Design(
+                title,
+                notes,
+                document,
+                line,
+                stage,
+                stageDiodes,
+                load,
+                newClip,
+                ramp,
+                trigger,
+                gate,
+                thyristor,
+                surroundings,
+                wanted,
+                resistorDerating,
+                designators);
+    }
+
+    /** The same design with another ramp. */
+    public Design withRamp(Ramp newRamp) {
+        return new Design(
+                title,
+                notes,
+                document,
+                line,
+                stage,
+                stageDiodes,
+                load,
+                clip,
+                newRamp,
+                trigger,
+                gate,
+                thyristor,
+                surroundings,
+                wanted,
+                resistorDerating,
+                designators);
+    }
+
+    /** The same design with another trigger. */
+    public Design withTrigger(Trigger newTrigger) {
+        return new Design(
+                title,
+                notes,
+                document,
+                line,
+                stage,
+                stageDiodes,
+                load,
+                clip,
+                ramp,
+                newTrigger,
+                gate,
+                thyristor,
+                surroundings,
+                wanted,
+                resistorDerating,
+                designators);
+    }
+
+    /** The same design with another gate drive. */
+    public Design withGate(GateDrive newGate) {
+        return new Design(
+                title,
+                notes,
+                document,
+                line,
+                stage,
+                stageDiodes,
+                load,
+                clip,
+                ramp,
+                trigger,
+                newGate,
+                thyristor,
+                surroundings,
+                wanted,
+                resistorDerating,
+                designators);
+    }
+
+    /** The same design with another thyristor. */
+    public Design withThyristor(Thyristor newThyristor) {
+        return new Design(
+                title,
+                notes,
+                document,
+                line,
+                stage,
+                stageDiodes,
+                load,
+                clip,
+                ramp,
+                trigger,
+                gate,
+                newThyristor,
+                surroundings,
+                wanted,
+                resistorDerating,
+                designators);
+    }
+
+    /** The same design in other surroundings. */
+    public Design withSurroundings(Surroundings newSurroundings) {
+        return new Design(
+                title,
+                notes,
+                document,
+                line,
+                stage,
+                stageDiodes,
+                load,
+                clip,
+                ramp,
+                trigger,
+                gate,
+                thyristor,
+                newSurroundings,
+                wanted,
+                resistorDerating,
+                designators);
+    }
+
+    /** The same design with other wishes. */
+    public Design withWanted(Wanted newWanted) {
+        return new Design(
+                title,
+                notes,
+                document,
+                line,
+                stage,
+                stageDiodes,
+                load,
+                clip,
+                ramp,
+                trigger,
+                gate,
+                thyristor,
+                surroundings,
+                newWanted,
+                resistorDerating,
+                designators);
+    }
+
+    /** The same design with another derating of its resistors. */
+    public Design withResistorDerating(double newResistorDerating) {
+        return new Design(
+                title,
+                notes,
+                document,
+                line,
+                stage,
+                stageDiodes,
+                load,
+                clip,
+                ramp,
+                trigger,
+                gate,
+                thyristor,
+                surroundings,
+                wanted,
+                newResistorDerating,
+                designators);
+    }
 }

@@ -38,4 +38,25 @@ public record Line(double volts, double hertz, double lowVolts, double highVolts
         }
         harmonics = List.copyOf(harmonics);
     }
+
+    /**
+     * The line's voltage at an angle.
+     *
+     * @param fundamentalVolts rms of the fundamental, V
+     * @param thetaRad angle from the positive-going zero of the fundamental, rad
+     * @return V
+     */
+    public double voltsAt(double fundamentalVolts, double thetaRad) {
+        double sum = Math.sin(thetaRad);
+        for (Harmonic harmonic : harmonics) {
+            sum += harmonic.share() * Math.sin(harmonic.order() * thetaRad + harmonic.phaseRad());
+        }
+        return Math.sqrt(2) * fundamentalVolts * sum;
+    }
+
+    /** True rms of the line over the rms of its fundamental: sqrt(1 + sum of shares squared). */
+    public double rmsFactor() {
+        return Math.sqrt(
+                1 + harmonics.stream().mapToDouble(h -> h.share() * h.share()).sum());
+    }
 }

@@ -89,6 +89,11 @@ public record ThyristorDevice(
             Require.positive("gate slope resistance", slopeOhms);
             quadrants = Map.copyOf(quadrants);
         }
+
+        /** The same gate with another junction i_G = max(0, (v_GK - knee)/slope). */
+        public Gate withJunction(double newKneeVolts, double newSlopeOhms) {
+            return new Gate(newKneeVolts, newSlopeOhms, trigger, quadrants, nonTrigger, turnOnSeconds, limits);
+        }
     }
 
     /**
@@ -157,5 +162,20 @@ public record ThyristorDevice(
         return polarity == GateDrive.Polarity.POSITIVE
                 ? List.of(Quadrant.I_PLUS, Quadrant.III_PLUS)
                 : List.of(Quadrant.I_MINUS, Quadrant.III_MINUS);
+    }
+
+    /** The same device with other gate data. */
+    public ThyristorDevice withGate(Gate newGate) {
+        return new ThyristorDevice(
+                kind,
+                id,
+                newGate,
+                latching,
+                holding,
+                turnOffSeconds,
+                commutating,
+                onState,
+                limits,
+                junctionToCaseKelvinPerWatt);
     }
 }

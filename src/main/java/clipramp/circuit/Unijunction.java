@@ -126,4 +126,21 @@ public record Unijunction(
         Require.notNegative("emitter diode drop", emitterDropVolts.nominal());
         Require.notNegative("peak-point current", peakCurrentAmps.nominal());
     }
+
+    /** The same device with another base-one pulse, which its emitter line is calibrated on. */
+    public Unijunction withBaseOnePulse(Optional<BaseOnePulse> newBaseOnePulse) {
+        return new Unijunction(
+                id,
+                standoff,
+                interbaseOhms,
+                interbaseDriftPerKelvin,
+                emitterDropVolts,
+                emitterDriftVoltsPerKelvin,
+                peakCurrentAmps,
+                valley,
+                saturation,
+                modulated,
+                newBaseOnePulse,
+                limits);
+    }
 }
