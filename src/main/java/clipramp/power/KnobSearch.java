@@ -1,0 +1,159 @@
+package clipramp.power;
+
+import clipramp.circuit.Condition;
+import clipramp.circuit.Design;
+import clipramp.circuit.Ramp;
+import clipramp.circuit.Winding;
+import clipramp.firing.Firing;
+import clipramp.firing.Pulse;
+import clipramp.firing.Solution;
+import java.util.Comparator;
+import java.util.OptionalDouble;
+import org.apache.commons.math3.analysis.UnivariateFunction;
+import org.apache.commons.math3.analysis.solvers.BrentSolver;
+
+/**
+ * The knob backwards: which R_E, and which position, gives a firing angle, a power or a voltage. Roots of the exact
+ * engine over the logarithm of R_E; more R_E fires later and gives less.
+ */
+public final class KnobSearch {
+    private static final double LEAST_OHMS = 1;
+    private static final double MOST_OHMS = 1e9;
+    private static final double STEP = Math.log(1.6);
+    /** 1e-10 of R_E moves the angle by less than 1e-8 of a degree. */
+    private static final double LOG_ACCURACY = 1e-10;
+
+    /** Share of pi, or of full power, from which a step across the root is a jump. */
+    private static final double LEAST_JUMP = 1e-4;
+
+    private static final int TRIALS = 80;
+
+    private KnobSearch() {}
+
+    /**
+     * The whole R_E that fires at an angle.
+     *
+     * @param firingRad wanted firing angle, rad, 0..pi
+     * @return ohms; empty where no R_E fires there
+     */
+    public static OptionalDouble rampOhmsForAngle(Design design, Condition condition, double firingRad) {
+        return search(guessOhms(design, condition, firingRad), ohms -> {
+            Solution solution = Firing.solve(design, condition, ohms);
+            return (firstFiringRad(design, solution) - firingRad) / Math.PI;
+        });
+    }
+
+    /**
+     * The whole R_E that gives a load power.
+     *
+     * @param watts wanted load power, W
+     * @return ohms; empty where no R_E gives it
+     */
+    public static OptionalDouble rampOhmsForWatts(Design design, Condition condition, double watts) {
+        OptionalDouble angle = firingRadForWatts(design, condition, watts);
+        if (angle.isEmpty()) {
+            return OptionalDouble.empty();
+        }
+        double full = LoadPower.fullWatts(design, condition);
+        return search(guessOhms(design, condition, angle.getAsDouble()), ohms -> {
+            Solution solution = Firing.solve(design, condition, ohms);
+            return (watts - LoadPower.of(design, condition, solution).watts()) / full;
+        });
+    }
+
+    /** The whole R_E, ohm, that gives a load rms voltage in volts; empty where none does. */
+    public static OptionalDouble rampOhmsForVolts(Design design, Condition condition, double volts) {
+        return rampOhmsForWatts(design, condition, volts * volts / design.load().resistanceOhms());
+    }
+
+    /**
+     * The firing angle that gives a load power when both half cycles fire at it.
+     *
+     * @param watts wanted load power, W
+     * @return rad; empty where no angle gives it
+     */
+    public static OptionalDouble firingRadForWatts(Design design, Condition condition, double watts) {
+        UnivariateFunction lacking =
+                rad -> watts - LoadPower.atFiringAngle(design, condition, rad).watts();
+        if (!(watts > 0) || lacking.value(0) > 0) {
+            return OptionalDouble.empty();
+        }
+        return OptionalDouble.of(new BrentSolver(1e-13).solve(TRIALS, lacking, 0, Math.PI));
+    }
+
+    /**
+     * The knob position that gives a whole R_E, nominal parts.
+     *
+     * @param ramp the ramp
+     * @param rampOhms R_E, ohm
+     * @return 0..1; empty for a fixed ramp or an R_E out of the pot's reach
+     */
+    public static OptionalDouble position(Ramp ramp, double rampOhms) {
+        if (ramp.pot().isEmpty()) {
+            return OptionalDouble.empty();
+        }
+        UnivariateFunction over = position -> ramp.rampOhms(position) - rampOhms;
+        double atStart = over.value(0);
+        double atEnd = over.value(1);
+        double near = 1e-9 * rampOhms;
+        if (Math.abs(atStart) <= near) {
+            return OptionalDouble.of(0);
+        }
+        if (Math.abs(atEnd) <= near) {
+            return OptionalDouble.of(1);
+        }
+        return atStart * atEnd > 0
+                ? OptionalDouble.empty()
+                : OptionalDouble.of(new BrentSolver(1e-13).solve(TRIALS, over, 0, 1));
+    }
+
+    /**
+     * The angle of the first pulse that latches the thyristor, not folded to the load's half cycle, so that it grows
+     * with R_E through the load's zero; a whole period where the thyristor stays off.
+     */
+    private static double firstFiringRad(Design design, Solution solution) {
+        double lagRad = design.clip().winding().map(Winding::lagRad).orElse(0.0);
+        return solution.shown().pulses().stream()
+                .filter(Pulse::latches)
+                .min(Comparator.comparingDouble(Pulse::startSeconds))
+                .map(pulse -> solution.condition().omega() * pulse.startSeconds() + lagRad)
+                .orElse(2 * Math.PI);
+    }
+
+    /** delay = R_E C_E ln(1/(1-eta)) turned round, with a standoff ratio of 0.63: near enough to start from. */
+    private static double guessOhms(Design design, Condition condition, double firingRad) {
+        double seconds = Math.max(firingRad, 0.05) / condition.omega();
+        return seconds / design.ramp().capacitor().value();
+    }
+
+    private static OptionalDouble search(double guessOhms, UnivariateFunction over) {
+        double low = Math.log(Math.min(MOST_OHMS, Math.max(LEAST_OHMS, guessOhms)));
+        double high = low;
+        double atLow = over.value(Math.exp(low));
+        double atHigh = atLow;
+        while (atLow > 0 && low > Math.log(LEAST_OHMS)) {
+            high = low;
+            atHigh = atLow;
+            low -= STEP;
+            atLow = over.value(Math.exp(low));
+        }
+        while (atHigh < 0 && high < Math.log(MOST_OHMS)) {
+            low = high;
+            atLow = atHigh;
+            high += STEP;
+            atHigh = over.value(Math.exp(high));
+        }
+        if (atLow > 0 || atHigh < 0) {
+            return OptionalDouble.empty();
+        }
+        double root = new BrentSolver(LOG_ACCURACY).solve(TRIALS, log -> over.value(Math.exp(log)), low, high);
+        return confirmed(root, over);
+    }
+
+    /** A jump through zero (from firing to silent) is no root: the thyristor fires on one side of it only. */
+    private static OptionalDouble confirmed(double logOhms, UnivariateFunction over) {
+        double below = over.value(Math.exp(logOhms - 2 * LOG_ACCURACY));
+        double above = over.value(Math.exp(logOhms + 2 * LOG_ACCURACY));
+        return Math.abs(above - below) > LEAST_JUMP ? OptionalDouble.empty() : OptionalDouble.of(Math.exp(logOhms));
+    }
+}
