@@ -1,0 +1,108 @@
+package clipramp.figures;
+
+import java.awt.Graphics2D;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import java.util.OptionalDouble;
+
+/**
+ * One half cycle as five lanes over a shared angle axis, with the firing instant as one heavy line through all of them.
+ *
+ * @param lanes what is shown
+ * @param fromRad first angle shown, rad
+ * @param toRad last angle shown, rad
+ * @param crosshairRad angle whose values are lettered beside the lanes, rad, if wanted
+ * @param band angles between which the firing instant falls over a spread, if wanted
+ */
+public record LanesFigure(Lanes lanes, double fromRad, double toRad, OptionalDouble crosshairRad, Optional<Band> band)
+        implements Figure {
+    /**
+     * @param fromRad rad
+     * @param toRad rad, not below {@code fromRad}
+     */
+    public record Band(double fromRad, double toRad) {}
+
+    private static final double TABLE_STEP_DEGREES = 15;
+
+    public LanesFigure {
+        if (!(fromRad < toRad)) {
+            throw new IllegalArgumentException("shown angles run from low to high, not " + fromRad + ".." + toRad);
+        }
+    }
+
+    /** The whole half cycle (or period), without crosshair and band. */
+    public LanesFigure(Lanes lanes) {
+        this(lanes, 0, lanes.spanRad(), OptionalDouble.empty(), Optional.empty());
+    }
+
+    /** A closer look at some of its angles. */
+    public LanesFigure withView(double from, double to) {
+        return new LanesFigure(lanes, from, to, crosshairRad, band);
+    }
+
+    public LanesFigure withCrosshair(OptionalDouble angleRad) {
+        return new LanesFigure(lanes, fromRad, toRad, angleRad, band);
+    }
+
+    public LanesFigure withBand(Optional<Band> wanted) {
+        return new LanesFigure(lanes, fromRad, toRad, crosshairRad, wanted);
+    }
+
+    @Override
+    public String title() {
+        return lanes.spanRad() > Math.PI ? "One period of the line" : "One half cycle of the line";
+    }
+
+    @Override
+    public String sentence() {
+        double[] supply = lanes.values(Lane.SUPPLY);
+        double clipped = java.util.Arrays.stream(supply).max().orElse(0);
+        double pulse = java.util.Arrays.stream(lanes.values(Lane.PULSE)).max().orElse(0);
+        String fires = lanes.firingRad().isPresent()
+                ? "the thyristor is turned on at "
+                        + Numerals.fixed(Math.toDegrees(lanes.firingRad().getAsDouble()), 1) + "°"
+                : "no pulse turns the thyristor on";
+        return title() + ": the supply is clipped at " + Numerals.significant(clipped, 3) + " V, " + fires
+                + ", and the gate pulse peaks at " + Numerals.significant(pulse * 1000, 3) + " mA.";
+    }
+
+    @Override
+    public NumberTable numbers() {
+        List<Double> angles = new ArrayList<>(Ticks.between(0, Math.toDegrees(lanes.spanRad()), TABLE_STEP_DEGREES));
+        lanes.firingRad().ifPresent(rad -> angles.add(Math.toDegrees(rad)));
+        List<List<String>> rows = angles.stream()
+                .distinct()
+                .sorted()
+                .map(degrees -> row(Math.toRadians(degrees)))
+                .toList();
+        return new NumberTable(
+                List.of("angle °", "line V", "clipped supply V", "ramp V", "peak point V", "gate mA", "load V"), rows);
+    }
+
+    private List<String> row(double angleRad) {
+        return List.of(
+                Numerals.fixed(Math.toDegrees(angleRad), 1),
+                Numerals.fixed(lanes.valueAt(Lane.LINE, angleRad), 1),
+                Numerals.fixed(lanes.valueAt(Lane.SUPPLY, angleRad), 2),
+                Numerals.fixed(lanes.valueAt(Lane.RAMP, angleRad), 2),
+                Numerals.fixed(lanes.peakPointAt(angleRad), 2),
+                Numerals.fixed(lanes.valueAt(Lane.PULSE, angleRad) * 1000, 1),
+                Numerals.fixed(lanes.valueAt(Lane.LOAD, angleRad), 1));
+    }
+
+    @Override
+    public double proportion() {
+        return 1.5;
+    }
+
+    /** Where the lanes lie when drawn at a size. */
+    public LanesFrame frame(double width, double height, Style style) {
+        return LanesPainter.frame(this, width, height, style);
+    }
+
+    @Override
+    public void draw(Graphics2D g, double width, double height, Style style) {
+        new LanesPainter(this, g, width, height, style).paint();
+    }
+}

@@ -1,0 +1,5 @@
+/** The design record as a PDF. */
+@NullMarked
+package clipramp.record;
+
+import org.jspecify.annotations.NullMarked;
