@@ -1,0 +1,462 @@
+package clipramp.firing;
+
+import clipramp.circuit.Condition;
+import clipramp.circuit.Design;
+import clipramp.firing.ReferenceHalf.Event;
+import clipramp.firing.ReferenceHalf.Kind;
+import clipramp.firing.ReferenceHalf.Periodic;
+import clipramp.firing.ReferenceHalf.Settling;
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.List;
+import java.util.function.DoubleUnaryOperator;
+import org.apache.commons.math3.ode.FirstOrderDifferentialEquations;
+import org.apache.commons.math3.ode.events.EventHandler;
+import org.apache.commons.math3.ode.nonstiff.DormandPrince853Integrator;
+import org.apache.commons.math3.ode.sampling.StepHandler;
+import org.apache.commons.math3.ode.sampling.StepInterpolator;
+
+/**
+ * The laws of model.md sections 1 to 6 put before a general-purpose adaptive integrator, half cycle by half cycle, to
+ * the periodic state: the independent truth for the engine (model.md section 11). It knows no closed forms: node
+ * equations are solved by elimination at every evaluation, events are sign changes that the integrator finds.
+ *
+ * <p>Between two events the set of conducting branches stands still, so that the integrator sees a smooth right-hand
+ * side; every sign change of a branch's own law ends the piece.
+ */
+final class ReferenceIntegrator {
+    enum Emitter {
+        OFF,
+        HELD,
+        ON
+    }
+
+    private static final double RELATIVE = 1e-12;
+    private static final double ROOT_SECONDS = 1e-14;
+    private static final int HALF_CYCLES = 60;
+    private static final double SETTLED_VOLTS = 1e-9;
+
+    private final ReferenceParameters p;
+    private final ReferenceNodes nodes;
+    private final ReferenceNodes probe;
+
+    private double zeroRad;
+    private double halfSeconds;
+    private boolean thyristorOn;
+    private Emitter emitter = Emitter.OFF;
+    private double volts;
+    private double now;
+    private boolean stalled;
+    private boolean held;
+    private List<Event> events = new ArrayList<>();
+    private List<Pulse> pulses = new ArrayList<>();
+    private ReferencePulseMeter meter;
+
+    ReferenceIntegrator(Design design, Condition condition, double rampOhms) {
+        p = new ReferenceParameters(design, condition, rampOhms);
+        nodes = new ReferenceNodes(p);
+        probe = new ReferenceNodes(p);
+    }
+
+    static Periodic solve(Design design, Condition condition, double rampOhms) {
+        return new ReferenceIntegrator(design, condition, rampOhms).periodic();
+    }
+
+    ReferenceParameters parameters() {
+        return p;
+    }
+
+    private record AtZero(double volts, Emitter emitter) {
+        boolean repeats(AtZero other) {
+            return emitter == other.emitter && Math.abs(volts - other.volts) <= SETTLED_VOLTS;
+        }
+    }
+
+    private Periodic periodic() {
+        List<ReferenceHalf> halves = new ArrayList<>();
+        List<AtZero> zeros = new ArrayList<>();
+        zeros.add(new AtZero(volts, emitter));
+        boolean alike = !p.bridge || p.isSymmetric();
+        for (int k = 0; k < HALF_CYCLES; k++) {
+            halves.add(half(!p.bridge ? !p.opposite : k % 2 == 0));
+            AtZero end = new AtZero(volts, emitter);
+            zeros.add(end);
+            if (alike && end.repeats(zeros.get(k))) {
+                return new Periodic(Settling.STEADY, List.of(halves.get(k)));
+            }
+            if (k >= 2 && end.repeats(zeros.get(k - 1)) && zeros.get(k).repeats(zeros.get(k - 2))) {
+                return new Periodic(
+                        alike ? Settling.HUNTS : Settling.STEADY, List.of(halves.get(k - 1), halves.get(k)));
+            }
+        }
+        return new Periodic(Settling.NEVER, halves);
+    }
+
+    /** One half cycle from the state at hand, which it leaves at the next zero. */
+    private ReferenceHalf half(boolean positive) {
+        zeroRad = p.zeroRad(positive);
+        double endRad = p.bridge ? p.zeroRad(!positive) : zeroRad + 2 * Math.PI;
+        if (endRad <= zeroRad) {
+            endRad += 2 * Math.PI;
+        }
+        halfSeconds = (endRad - zeroRad) / p.omega;
+        events = new ArrayList<>();
+        pulses = new ArrayList<>();
+        stalled = false;
+        thyristorOn = false;
+        now = 0;
+        meter = null;
+        double start = volts;
+        nodes.search(emitter, e(0), eRate(0), volts);
+        while (now < halfSeconds) {
+            piece();
+        }
+        closePulse();
+        int firing = -1;
+        for (int i = pulses.size() - 1; i >= 0; i--) {
+            firing = pulses.get(i).latches() ? i : firing;
+        }
+        return new ReferenceHalf(positive, halfSeconds, start, volts, events, markEnds(), stalled, firing);
+    }
+
+    /** What stands behind the dropping resistor, V. */
+    private double e(double t) {
+        if (thyristorOn) {
+            return Math.max(0, p.thyristorVolts);
+        }
+        return supply(t, p.shape(zeroRad + p.omega * t)) - p.rectifierVolts;
+    }
+
+    private double eRate(double t) {
+        if (thyristorOn) {
+            return 0;
+        }
+        double rad = zeroRad + p.omega * t;
+        double rate = p.supplyCrestVolts * p.omega * p.shapeRate(rad);
+        return p.bridge ? rate * Math.signum(p.shape(rad)) : p.opposite ? -rate : rate;
+    }
+
+    private double supply(double t, double shape) {
+        double v = p.supplyCrestVolts * shape;
+        return p.bridge ? Math.abs(v) : p.opposite ? -v : v;
+    }
+
+    /** The load's line angle of an instant, folded to the half cycle of the load's line in which it lies, rad. */
+    private double loadRad(double t) {
+        double rad = zeroRad + p.omega * t + p.lagRad;
+        double first = p.zeroRad(true);
+        double second = p.zeroRad(false);
+        while (rad >= first + 2 * Math.PI) {
+            rad -= 2 * Math.PI;
+        }
+        while (rad < first) {
+            rad += 2 * Math.PI;
+        }
+        return rad > second ? rad - Math.PI : rad;
+    }
+
+    /** Integrates until the next event or the zero, and does what the event asks. */
+    private void piece() {
+        double[] y = emitter == Emitter.ON
+                ? new double[] {volts, meter == null ? 0 : meter.joules, meter == null ? 0 : meter.coulombs}
+                : new double[] {volts};
+        double scale = 1 + Math.abs(p.zenerFootVolts);
+        double[] absolute = {1e-13 * scale, 1e-13 * p.rampFarads * scale * scale, 1e-13 * p.rampFarads * scale};
+        double[] relative = {RELATIVE, RELATIVE, RELATIVE};
+        DormandPrince853Integrator integrator = new DormandPrince853Integrator(
+                1e-18, halfSeconds / 60, Arrays.copyOf(absolute, y.length), Arrays.copyOf(relative, y.length));
+        Watch watch = new Watch(integrator);
+        watch.add(t -> nodes.rectifierSlack, () -> toggle(1, Kind.RECTIFIER_ON, Kind.RECTIFIER_OFF));
+        watch.add(t -> nodes.zenerSlack, () -> toggle(2, Kind.ZENER_ON, Kind.ZENER_OFF));
+        switch (emitter) {
+            case OFF -> watch.add(t -> nodes.peakVolts - watch.volts, this::reach);
+            case HELD -> {
+                watch.add(t -> nodes.emitterAmps / p.peakCurrentAmps, this::release);
+                watch.add(t -> -fireSlack(t), this::fire);
+            }
+            case ON -> {
+                watch.add(t -> nodes.junctionSlack, () -> toggle(4, Kind.JUNCTION_ON, Kind.JUNCTION_OFF));
+                watch.add(t -> nodes.valleySlack, this::valley);
+                if (meter != null && nodes.junction) {
+                    watch.note(t -> nodes.gateAmps - p.triggerAmps, meter);
+                }
+                if (meter != null) {
+                    integrator.addStepHandler(watch.measuring(meter));
+                }
+            }
+        }
+        double reached = integrator.integrate(new Laws(y.length), now, y, halfSeconds, y);
+        now = reached;
+        volts = y[0];
+        if (emitter == Emitter.ON && meter != null) {
+            meter.joules = y[1];
+            meter.coulombs = y[2];
+        }
+        nodes.evaluate(emitter, e(now), eRate(now), volts);
+        if (emitter == Emitter.HELD) {
+            volts = nodes.peakVolts;
+        }
+        if (watch.action != null) {
+            watch.action.run();
+        }
+    }
+
+    private void toggle(int bit, Kind on, Kind off) {
+        boolean conducts = (nodes.branches() & bit) == 0;
+        log(conducts ? on : off);
+        nodes.set(nodes.branches() ^ bit);
+        nodes.evaluate(emitter, e(now), eRate(now), volts);
+        if (emitter == Emitter.HELD) {
+            hold();
+        }
+    }
+
+    private void log(Kind kind) {
+        events.add(new Event(kind, now));
+    }
+
+    /** V_C has reached V_P: fire, or be held. */
+    private void reach() {
+        emitter = Emitter.HELD;
+        nodes.evaluate(emitter, e(now), eRate(now), volts);
+        held = fireSlack(now) < 0;
+        if (!held) {
+            fire();
+            return;
+        }
+        log(Kind.STALL);
+        hold();
+    }
+
+    /** At the beginning of every piece of a hold: the emitter current jumps where a branch starts or stops. */
+    private void hold() {
+        if (fireSlack(now) >= 0) {
+            fire();
+        } else if (nodes.emitterAmps < 0) {
+            release();
+        } else if (nodes.emitterAmps < p.peakCurrentAmps) {
+            stalled = true;
+        }
+    }
+
+    private void release() {
+        log(Kind.RELEASE);
+        emitter = Emitter.OFF;
+        nodes.search(emitter, e(now), eRate(now), volts);
+    }
+
+    /**
+     * Not negative when the emitter gets its peak-point current and the saturated line would carry more than the valley
+     * current; relative to those currents.
+     */
+    private double fireSlack(double t) {
+        double peak = nodes.emitterAmps / p.peakCurrentAmps - 1;
+        if (peak < 0) {
+            return peak;
+        }
+        probe.search(Emitter.ON, e(t), 0, nodes.peakVolts);
+        double regenerates = probe.valleySlack / p.peakCurrentAmps;
+        return regenerates <= 0 ? Math.min(regenerates, -1e-300) : Math.min(peak, regenerates);
+    }
+
+    private void fire() {
+        log(Kind.FIRE);
+        double supply = nodes.supplyVolts;
+        double peak = nodes.peakVolts;
+        if (!p.tapThyristor || thyristorOn) {
+            conduct(supply, peak);
+            return;
+        }
+        // Tried with the supply collapsed; a pulse that does not turn the thyristor on gets its supply back at once.
+        double startSeconds = now;
+        double startVolts = volts;
+        int branches = nodes.branches();
+        List<Event> eventsBefore = new ArrayList<>(events);
+        int count = pulses.size();
+        thyristorOn = true;
+        conduct(supply, peak);
+        while (now < halfSeconds && pulses.size() == count) {
+            piece();
+        }
+        closePulse();
+        Pulse pulse = pulses.get(count);
+        if (pulse.turnsOn()) {
+            thyristorOn = pulse.latches();
+            nodes.search(emitter, e(now), eRate(now), volts);
+            return;
+        }
+        pulses.remove(count);
+        events = eventsBefore;
+        now = startSeconds;
+        volts = startVolts;
+        thyristorOn = false;
+        nodes.set(branches);
+        conduct(supply, peak);
+    }
+
+    private void conduct(double supply, double peak) {
+        meter = new ReferencePulseMeter(p, now, supply, peak, volts, held);
+        emitter = Emitter.ON;
+        nodes.search(emitter, e(now), eRate(now), volts);
+        meter.observe(nodes);
+        if (nodes.gateAmps >= p.triggerAmps) {
+            meter.rise(now);
+        }
+    }
+
+    private void valley() {
+        log(Kind.VALLEY);
+        closePulse();
+        emitter = Emitter.OFF;
+        nodes.search(emitter, e(now), eRate(now), volts);
+        if (nodes.peakVolts <= volts) {
+            throw new IllegalStateException("the valley lies above the peak point at " + now);
+        }
+    }
+
+    private void closePulse() {
+        if (meter == null) {
+            return;
+        }
+        double rad = loadRad(meter.startSeconds());
+        pulses.add(meter.close(now, volts, rad, this::anodeAmps));
+        meter = null;
+    }
+
+    /** Load current that there would be with the thyristor on, A. */
+    private double anodeAmps(double t) {
+        double rad = zeroRad + p.omega * t + p.lagRad;
+        double v = p.crestVolts * p.shape(rad);
+        double forward = p.halfWaveStage ? v : Math.abs(v);
+        return Math.max(0, (forward - p.loadDropVolts) / p.loadOhms);
+    }
+
+    /** Marks the pulses that began after the zener's last conduction (or the supply's crest where it never did). */
+    private List<Pulse> markEnds() {
+        double last = -1;
+        for (Event event : events) {
+            if (event.kind() == Kind.ZENER_OFF) {
+                last = event.seconds();
+            }
+        }
+        boolean conducts = events.stream().anyMatch(event -> event.kind() == Kind.ZENER_ON);
+        double from = conducts ? last : 0.25 * 2 * Math.PI / p.omega;
+        boolean open = conducts && last < 0;
+        return pulses.stream()
+                .map(pulse -> ReferencePulseMeter.withEnd(pulse, !open && pulse.startSeconds() > from))
+                .toList();
+    }
+
+    /** The right-hand side with the branches as they stand. */
+    private final class Laws implements FirstOrderDifferentialEquations {
+        private final int dimension;
+
+        Laws(int dimension) {
+            this.dimension = dimension;
+        }
+
+        @Override
+        public int getDimension() {
+            return dimension;
+        }
+
+        @Override
+        public void computeDerivatives(double t, double[] y, double[] rate) {
+            nodes.evaluate(emitter, e(t), emitter == Emitter.HELD ? eRate(t) : 0, y[0]);
+            if (emitter == Emitter.HELD) {
+                rate[0] = nodes.heldRate;
+                return;
+            }
+            rate[0] = (nodes.rampAmps - nodes.emitterAmps) / p.rampFarads;
+            if (dimension == 3) {
+                rate[1] = nodes.gateVolts * nodes.gateAmps;
+                rate[2] = nodes.gateAmps;
+            }
+        }
+    }
+
+    /** The events of one piece. */
+    private final class Watch {
+        private final DormandPrince853Integrator integrator;
+        private double seconds = Double.NaN;
+        private double volts = Double.NaN;
+        private Runnable action;
+
+        Watch(DormandPrince853Integrator integrator) {
+            this.integrator = integrator;
+        }
+
+        private void see(double t, double capacitorVolts) {
+            nodes.evaluate(emitter, e(t), emitter == Emitter.HELD ? eRate(t) : 0, capacitorVolts);
+            seconds = t;
+            volts = capacitorVolts;
+        }
+
+        /** Ends the piece where a slack falls through zero. */
+        void add(DoubleUnaryOperator slack, Runnable then) {
+            register(slack, then, null);
+        }
+
+        /** Only notes the crossings, both ways. */
+        void note(DoubleUnaryOperator slack, ReferencePulseMeter notes) {
+            register(slack, null, notes);
+        }
+
+        private void register(DoubleUnaryOperator slack, Runnable then, ReferencePulseMeter notes) {
+            double check = emitter == Emitter.ON ? Double.POSITIVE_INFINITY : halfSeconds / 100;
+            integrator.addEventHandler(
+                    new EventHandler() {
+                        @Override
+                        public void init(double t0, double[] y0, double t) {}
+
+                        @Override
+                        public double g(double t, double[] y) {
+                            see(t, y[0]);
+                            return slack.applyAsDouble(t);
+                        }
+
+                        @Override
+                        public Action eventOccurred(double t, double[] y, boolean increasing) {
+                            if (notes != null) {
+                                if (increasing) {
+                                    notes.rise(t);
+                                } else {
+                                    notes.fall(t);
+                                }
+                                return Action.CONTINUE;
+                            }
+                            if (increasing) {
+                                return Action.CONTINUE;
+                            }
+                            action = then;
+                            return Action.STOP;
+                        }
+
+                        @Override
+                        public void resetState(double t, double[] y) {}
+                    },
+                    check,
+                    ROOT_SECONDS,
+                    200);
+        }
+
+        StepHandler measuring(ReferencePulseMeter target) {
+            return new StepHandler() {
+                @Override
+                public void init(double t0, double[] y0, double t) {}
+
+                @Override
+                public void handleStep(StepInterpolator interpolator, boolean isLast) {
+                    double a = interpolator.getPreviousTime();
+                    double b = interpolator.getCurrentTime();
+                    for (int i = 0; i <= 4; i++) {
+                        double t = a + (b - a) * i / 4;
+                        interpolator.setInterpolatedTime(t);
+                        see(t, interpolator.getInterpolatedState()[0]);
+                        target.observe(nodes);
+                    }
+                }
+            };
+        }
+    }
+}
