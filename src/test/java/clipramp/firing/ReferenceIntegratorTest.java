@@ -20,8 +20,7 @@ class ReferenceIntegratorTest {
     @ParameterizedTest
     @MethodSource("rows")
     void agreesWithTheSolvedCircuits(ReferenceCases.Row row) {
-        Periodic periodic =
-                ReferenceIntegrator.solve(row.design(), row.design().nominalCondition(), row.rampOhms());
+        Periodic periodic = ReferenceIntegrator.solve(row.design(), row.design().nominalCondition(), row.rampOhms());
         assertThat(periodic.settling()).isEqualTo(row.hunts() ? Settling.HUNTS : Settling.STEADY);
         List<ReferenceHalf> halves = periodic.halves().stream()
                 .sorted(Comparator.comparingDouble(h -> h.pulses().get(0).startRad()))
@@ -33,7 +32,8 @@ class ReferenceIntegratorTest {
             JsonNode want = expected.get(i);
             ReferenceHalf half = halves.get(i);
             Pulse first = half.pulses().get(0);
-            // Held rows: the solved circuits leave a hold up to 1e-9 s before the zener stops, where the emitter current
+            // Held rows: the solved circuits leave a hold up to 1e-9 s before the zener stops, where the emitter
+            // current
             // jumps (0.1 microvolt above the zener's foot); no second solver checked those rows.
             double degrees = half.stalled() ? 2e-5 : 1e-6;
             assertThat(Math.toDegrees(first.startRad()))

@@ -90,8 +90,7 @@ final class ReferenceNodes {
         baseOneVolts = x[1];
         gateVolts = x[1] - x[2] * p.seriesOhms;
         gateAmps = junction ? (gateVolts - p.kneeVolts) / p.gateSlopeOhms : 0;
-        emitterAmps =
-                (capacitorVolts - baseOneVolts - p.emitterDropVolts - p.intercept * supplyVolts) / p.slopeOhms;
+        emitterAmps = (capacitorVolts - baseOneVolts - p.emitterDropVolts - p.intercept * supplyVolts) / p.slopeOhms;
         rampAmps = (supplyVolts - capacitorVolts) / p.rampOhms;
         slacks(e);
         junctionSlack = junction ? gateVolts - p.kneeVolts : p.kneeVolts - gateVolts;

@@ -91,14 +91,12 @@ final class ReferenceParameters {
         double valleyAmps = ujt.valley().amps().nominal();
         double valleyVolts = ujt.valley().volts().nominal();
         valleySiemens = valleyAmps / spec;
-        onBaseTwoOhms = ujt.modulated()
-                .map(m -> m.atVolts() / m.amps().nominal())
-                .orElse((1 - standoff) * interbaseOhms);
+        onBaseTwoOhms =
+                ujt.modulated().map(m -> m.atVolts() / m.amps().nominal()).orElse((1 - standoff) * interbaseOhms);
         if (ujt.baseOnePulse().isPresent()) {
             Unijunction.BaseOnePulse test = ujt.baseOnePulse().get();
-            double onBaseTwo25 = ujt.modulated()
-                    .map(m -> m.atVolts() / m.amps().nominal())
-                    .orElse((1 - standoff) * bar25);
+            double onBaseTwo25 =
+                    ujt.modulated().map(m -> m.atVolts() / m.amps().nominal()).orElse((1 - standoff) * bar25);
             UnivariateFunction excess = slope -> {
                 double xi = (valleyVolts - slope * valleyAmps - drop25) / spec;
                 double bar = test.supplyVolts() / (bar25 + test.baseOneOhms());
@@ -130,12 +128,13 @@ final class ReferenceParameters {
         triggerAmps = thyristor.gate().trigger().ampsAt(condition.celsius());
         turnOnSeconds = thyristor.gate().turnOnSeconds().orElse(0);
         boolean scr = thyristor.kind() == ThyristorDevice.Kind.SCR;
-        latchingAmps = thyristor.latching().map(c -> c.ampsAt(condition.celsius())).orElse(0.0)
-                + (scr ? 0.7 * (shuntSiemens + 1 / (seriesOhms + baseOneOhms)) : 0);
+        latchingAmps =
+                thyristor.latching().map(c -> c.ampsAt(condition.celsius())).orElse(0.0)
+                        + (scr ? 0.7 * (shuntSiemens + 1 / (seriesOhms + baseOneOhms)) : 0);
         thyristorVolts = thyristor.onState().thresholdVolts();
         Stage stage = design.stage();
-        loadDropVolts = thyristorVolts
-                + stage.bridgeDiodes() * design.stageDiodes().dropVolts();
+        loadDropVolts =
+                thyristorVolts + stage.bridgeDiodes() * design.stageDiodes().dropVolts();
         loadOhms = design.load().resistanceOhms()
                 + thyristor.onState().slopeOhms()
                 + stage.bridgeDiodes() * design.stageDiodes().slopeOhms();
