@@ -15,7 +15,7 @@ public final class Firing {
      * @param rampOhms R_E, ohm, above zero
      */
     public static Solution solve(Design design, Condition condition, double rampOhms) {
-        throw new UnsupportedOperationException();
+        return PeriodicState.solve(FiringCase.of(design, condition, rampOhms), PieceSink.NONE);
     }
 
     /**

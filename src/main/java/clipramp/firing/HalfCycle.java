@@ -50,4 +50,28 @@ public record HalfCycle(
     public OptionalDouble firingRad() {
         return firingPulse().stream().mapToDouble(Pulse::startRad).findFirst();
     }
+
+    /** Index of the first pulse that turns the thyristor on and latches it; -1 for none. */
+    static int firingIndexOf(List<Pulse> pulses) {
+        for (int i = 0; i < pulses.size(); i++) {
+            if (pulses.get(i).latches()) {
+                return i;
+            }
+        }
+        return -1;
+    }
+
+    /** The same half cycle with other pulses. */
+    HalfCycle withPulses(List<Pulse> others) {
+        return new HalfCycle(
+                positive,
+                seconds,
+                startVolts,
+                endVolts,
+                clipFromRad,
+                stalled,
+                latchedOn,
+                others,
+                firingIndexOf(others));
+    }
 }

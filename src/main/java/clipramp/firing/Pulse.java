@@ -43,4 +43,27 @@ public record Pulse(
         double capacitorJoules,
         boolean turnsOn,
         double anodeAmps,
-        boolean latches) {}
+        boolean latches) {
+    /** The same pulse counted from another zero of the line. */
+    Pulse withStartRad(double otherStartRad) {
+        return new Pulse(
+                otherStartRad,
+                startSeconds,
+                endSeconds,
+                supplyVolts,
+                peakPointVolts,
+                afterStall,
+                endPulse,
+                peakGateAmps,
+                peakGateVolts,
+                peakGateWatts,
+                peakBaseOneVolts,
+                aboveTriggerSeconds,
+                gateCoulombs,
+                gateJoules,
+                capacitorJoules,
+                turnsOn,
+                anodeAmps,
+                latches);
+    }
+}

@@ -1,0 +1,106 @@
+package clipramp.engine;
+
+/**
+ * The firing circuit as numbers at one condition. A mutable kitchen vessel: whoever draws a million units fills the
+ * same instance again and calls {@link #derive()}; everybody else gets one from {@link NetworkOfDesign}.
+ *
+ * <p>SI units throughout. The device is described generally enough for both trigger devices: off, it loads the supply
+ * with {@code standingSiemens} and fires at kappa V_S + V_D; on, its emitter carries (V_C - V_B1 - onDrop - xi
+ * V_S)/r_on, and base two carries g2 (V_S - V_B1 - gateDrop), of which lowerSiemens (V_B1 + gateDrop) is lost to a
+ * programmable device's lower resistor.
+ */
+public final class Network {
+    /** R_D, ohm. */
+    public double dropperOhms;
+    /** V_Z0 = V_Z - r_z I_ZT, V. */
+    public double zenerKneeVolts;
+    /** r_z, ohm. */
+    public double zenerSlopeOhms;
+    /** R_E, ohm. */
+    public double rampOhms;
+    /** C_E, F. */
+    public double capacitorFarads;
+    /** R1, ohm. */
+    public double baseOneOhms;
+    /** R2, ohm. */
+    public double baseTwoOhms;
+    /** R_BB at the condition's temperature, ohm. */
+    public double interbaseOhms;
+    /** eta. */
+    public double standoff;
+    /** V_D at the condition's temperature, V. */
+    public double emitterDropVolts;
+    /** I_P, A. */
+    public double peakCurrentAmps;
+    /** r_on, ohm. */
+    public double onOhms;
+    /** xi: intercept of the saturated emitter line per volt of supply. */
+    public double onIntercept;
+    /** iota: valley current per volt of supply, A/V. */
+    public double valleySiemens;
+    /** R_B2on, ohm. */
+    public double modulatedOhms;
+    /** R_G, ohm. */
+    public double gateSeriesOhms;
+    /** 1/R_GK, S; 0 for none. */
+    public double gateShuntSiemens;
+    /** V_G0, V. */
+    public double gateKneeVolts;
+    /** r_G, ohm. */
+    public double gateSlopeOhms;
+    /** I_GT at the condition's temperature, A. */
+    public double triggerAmps;
+    /** t_gt, s. */
+    public double turnOnSeconds;
+    /** I_L at the condition's temperature with this gate network, A; 0 where unknown. */
+    public double latchingAmps;
+
+    /** kappa: peak point per volt of supply. */
+    double peakShare;
+    /** What base bar or divider draws from the supply with the device off, S. */
+    double standingSiemens;
+    /** Base-one voltage per volt of supply with the device off. */
+    double quiescentShare;
+    /** g2, S. */
+    double baseTwoOnSiemens;
+    /** Drop between emitter and base one with the device on, V. */
+    double onDropVolts;
+    /** Drop between gate node and cathode of a programmable device with it on, V; 0 for a unijunction transistor. */
+    double gateDropVolts;
+    /** 1/R_B of a programmable device, S; 0 for a unijunction transistor. */
+    double lowerSiemens;
+    /** Gate network seen from base one with the junction off, S. */
+    double gateOffSiemens;
+    /** Gate network seen from base one with the junction on, S. */
+    double gateOnSiemens;
+    /** Open-circuit voltage of the gate network with the junction on, V. */
+    double gateOnVolts;
+
+    /** Works out what follows from the fields above (unijunction transistor, direct coupling). */
+    public void derive() {
+        gateOffSiemens = gateShuntSiemens == 0 ? 0 : 1 / (gateSeriesOhms + 1 / gateShuntSiemens);
+        double junctionSiemens = gateShuntSiemens + 1 / gateSlopeOhms;
+        gateOnVolts = gateKneeVolts / gateSlopeOhms / junctionSiemens;
+        gateOnSiemens = 1 / (gateSeriesOhms + 1 / junctionSiemens);
+        // R1p: R1 parallel to the gate network with its junction off.
+        double baseOneParallel = 1 / (1 / baseOneOhms + gateOffSiemens);
+        double bar = baseTwoOhms + interbaseOhms + baseOneParallel;
+        peakShare = (baseOneParallel + standoff * interbaseOhms) / bar;
+        standingSiemens = 1 / bar;
+        quiescentShare = baseOneParallel / bar;
+        baseTwoOnSiemens = 1 / (baseTwoOhms + modulatedOhms);
+        onDropVolts = emitterDropVolts;
+        gateDropVolts = 0;
+        lowerSiemens = 0;
+    }
+
+    /** kappa: peak-point voltage per volt of supply. */
+    public double peakShare() {
+        return peakShare;
+    }
+
+    /** Base-one voltage per volt of supply with the device off. */
+    public double quiescentShare() {
+        return quiescentShare;
+    }
+}

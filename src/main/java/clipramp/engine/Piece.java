@@ -1,0 +1,274 @@
+package clipramp.engine;
+
+/**
+ * The circuit between two events: node voltages as linear forms of ramp and source voltage, and the ramp voltage as one
+ * exponential and the source's sinusoids, exactly.
+ *
+ * <p>Times are seconds since the line zero that begins the half cycle. Mutable, reused for every piece; {@link #copy()}
+ * keeps one.
+ */
+public final class Piece {
+    Mode mode = Mode.OFF;
+    boolean rectifies;
+    boolean clips;
+    boolean gateConducts;
+
+    final Affine supply = new Affine();
+    final Affine baseOne = new Affine();
+    final Affine emitter = new Affine();
+    final Affine gate = new Affine();
+
+    /** dV_C/dt = -rate V_C + driveSource e + driveConstant. */
+    private double rate;
+
+    private double startSeconds;
+    private double exponential;
+    private double steady;
+    private SourceWave wave = new SourceWave();
+    private double[] sines = new double[1];
+    private double[] cosines = new double[1];
+
+    // Where the piece was last looked at.
+    double rampVolts;
+    double rampSlope;
+    double sourceVolts;
+    double sourceSlope;
+    double sourceBend;
+    private double decay;
+
+    /** Fills in the piece that begins at a time with a ramp voltage; node equations must be set already. */
+    void begin(Network n, SourceWave source, double seconds, double startVolts) {
+        wave = source;
+        startSeconds = seconds;
+        if (sines.length < source.count) {
+            sines = new double[source.count];
+            cosines = new double[source.count];
+        }
+        if (mode == Mode.STALLED) {
+            follow(n, source);
+        } else {
+            charge(n, source, startVolts);
+        }
+        look(seconds);
+    }
+
+    /** The capacitor held at the peak point: V_C = kappa V_S + V_D. */
+    private void follow(Network n, SourceWave source) {
+        rate = 0;
+        exponential = 0;
+        double share = n.peakShare * supply.source;
+        steady = n.peakShare * supply.constant + n.emitterDropVolts - share * source.dropVolts;
+        for (int i = 0; i < source.count; i++) {
+            sines[i] = share * source.amplitudes[i];
+            cosines[i] = 0;
+        }
+    }
+
+    /** C_E dV_C/dt = (V_S - V_C)/R_E - I_E, solved by its particular solution and one exponential. */
+    private void charge(Network n, SourceWave source, double startVolts) {
+        double perOhm = 1 / (n.rampOhms * n.capacitorFarads);
+        double perFarad = 1 / n.capacitorFarads;
+        rate = (1 - supply.ramp) * perOhm + emitter.ramp * perFarad;
+        double driveSource = supply.source * perOhm - emitter.source * perFarad;
+        double driveConstant = supply.constant * perOhm - emitter.constant * perFarad;
+        steady = (driveConstant - driveSource * source.dropVolts) / rate;
+        double standing = steady;
+        for (int i = 0; i < source.count; i++) {
+            double w = source.rates[i];
+            double force = driveSource * source.amplitudes[i] / (rate * rate + w * w);
+            sines[i] = force * rate;
+            cosines[i] = -force * w;
+            if (force != 0) {
+                double angle = w * startSeconds + source.phases[i];
+                standing += sines[i] * Math.sin(angle) + cosines[i] * Math.cos(angle);
+            }
+        }
+        exponential = startVolts - standing;
+    }
+
+    /** Works out ramp and source voltage with their slopes at a time; the getters below then speak of that time. */
+    public void look(double seconds) {
+        decay = exponential == 0 ? 0 : exponential * Math.exp(-rate * (seconds - startSeconds));
+        double ramp = steady + decay;
+        double slope = -rate * decay;
+        double source = -wave.dropVolts;
+        double sourceRate = 0;
+        double bend = 0;
+        for (int i = 0; i < wave.count; i++) {
+            double w = wave.rates[i];
+            double angle = w * seconds + wave.phases[i];
+            double sin = Math.sin(angle);
+            double cos = Math.cos(angle);
+            ramp += sines[i] * sin + cosines[i] * cos;
+            slope += w * (sines[i] * cos - cosines[i] * sin);
+            source += wave.amplitudes[i] * sin;
+            sourceRate += w * wave.amplitudes[i] * cos;
+            bend -= w * w * wave.amplitudes[i] * sin;
+        }
+        rampVolts = ramp;
+        rampSlope = slope;
+        sourceVolts = source;
+        sourceSlope = sourceRate;
+        sourceBend = bend;
+    }
+
+    /** A linear form where the piece was last looked at. */
+    double value(Affine form) {
+        return form.ramp * rampVolts
+                + form.source * sourceVolts
+                + form.sourceSlope * sourceSlope
+                + form.constant;
+    }
+
+    /** Time derivative of a linear form where the piece was last looked at. */
+    double slope(Affine form) {
+        return form.ramp * rampSlope + form.source * sourceSlope + form.sourceSlope * sourceBend;
+    }
+
+    /**
+     * An upper bound of a linear form's second derivative from where the piece was last looked at to any later time:
+     * the sinusoids at full swing, and the exponential only where it bends upwards.
+     */
+    double bendBound(Affine form) {
+        double bound = Math.max(0, form.ramp * decay) * rate * rate;
+        for (int i = 0; i < wave.count; i++) {
+            double w = wave.rates[i];
+            double sin = form.ramp * sines[i] + form.source * wave.amplitudes[i];
+            double cos = form.ramp * cosines[i] + form.sourceSlope * w * wave.amplitudes[i];
+            bound += w * w * Math.sqrt(sin * sin + cos * cos);
+        }
+        return bound;
+    }
+
+    /** Size of a linear form's terms where the piece was last looked at: what its rounding is measured against. */
+    double magnitude(Affine form) {
+        return Math.abs(form.ramp * rampVolts)
+                + Math.abs(form.source * sourceVolts)
+                + Math.abs(form.sourceSlope * sourceSlope)
+                + Math.abs(form.constant);
+    }
+
+    /** V_C where last looked at, V. */
+    public double rampVolts() {
+        return rampVolts;
+    }
+
+    /** Source voltage behind the dropper where last looked at, V. */
+    public double sourceVolts() {
+        return sourceVolts;
+    }
+
+    /** V_S where last looked at, V. */
+    public double supplyVolts() {
+        return value(supply);
+    }
+
+    /** Slope of V_S where last looked at, V/s. */
+    public double supplySlope() {
+        return slope(supply);
+    }
+
+    /** V_B1 where last looked at, V. */
+    public double baseOneVolts() {
+        return value(baseOne);
+    }
+
+    /** v_GK where last looked at, V. */
+    public double gateVolts() {
+        return value(gate);
+    }
+
+    /** Slope of v_GK where last looked at, V/s. */
+    public double gateSlope() {
+        return slope(gate);
+    }
+
+    /** Emitter current where last looked at, A. */
+    public double emitterAmps() {
+        return value(emitter);
+    }
+
+    /** Current into the gate junction where last looked at, A. */
+    public double gateAmps(Network n) {
+        return gateConducts ? (value(gate) - n.gateKneeVolts) / n.gateSlopeOhms : 0;
+    }
+
+    /** Current into base two where last looked at, A. */
+    public double baseTwoAmps(Network n) {
+        return mode == Mode.ON
+                ? n.baseTwoOnSiemens * (value(supply) - value(baseOne) - n.gateDropVolts)
+                : n.standingSiemens * value(supply);
+    }
+
+    /**
+     * First time at which the gate current crosses a level.
+     *
+     * @param amps the level, A, above zero
+     * @param rising whether it must rise to the level or fall to it
+     * @param from start of the search, s
+     * @param limit end of the search, s
+     * @return s; POSITIVE_INFINITY for none
+     */
+    public double gateReaches(Network n, double amps, boolean rising, double from, double limit) {
+        if (!gateConducts) {
+            return Double.POSITIVE_INFINITY;
+        }
+        Affine form = new Affine();
+        double sign = rising ? 1 : -1;
+        double level = n.gateKneeVolts + amps * n.gateSlopeOhms;
+        form.set(sign * gate.ramp, sign * gate.source, sign * (gate.constant - level));
+        return FirstCrossing.after(this, form, from, limit);
+    }
+
+    /** Decay rate of the piece's exponential, 1/s. */
+    public double ratePerSecond() {
+        return rate;
+    }
+
+    /** Time at which the piece begins, s. */
+    public double startSeconds() {
+        return startSeconds;
+    }
+
+    public Mode mode() {
+        return mode;
+    }
+
+    public boolean isRectifying() {
+        return rectifies;
+    }
+
+    public boolean isClipping() {
+        return clips;
+    }
+
+    /** Fastest angular frequency of the source, rad/s; 0 for a constant one. */
+    public double fastestRate() {
+        double fastest = 0;
+        for (int i = 0; i < wave.count; i++) {
+            fastest = Math.max(fastest, wave.rates[i]);
+        }
+        return fastest;
+    }
+
+    /** A copy that stays as it is for as long as the source wave does. */
+    public Piece copy() {
+        Piece other = new Piece();
+        other.mode = mode;
+        other.rectifies = rectifies;
+        other.clips = clips;
+        other.gateConducts = gateConducts;
+        other.supply.copy(supply);
+        other.baseOne.copy(baseOne);
+        other.emitter.copy(emitter);
+        other.gate.copy(gate);
+        other.rate = rate;
+        other.startSeconds = startSeconds;
+        other.exponential = exponential;
+        other.steady = steady;
+        other.wave = wave;
+        other.sines = sines.clone();
+        other.cosines = cosines.clone();
+        return other;
+    }
+}

@@ -1,0 +1,321 @@
+package clipramp.engine;
+
+/**
+ * Leads the firing circuit from event to event through a half cycle, exactly. Allocates nothing once made.
+ *
+ * <p>Use: {@link #start} at a line zero, then {@link #advance} again and again; between two calls {@link #piece()} is
+ * the piece just passed, from its own start to {@link #seconds()}.
+ */
+public final class Stepper {
+    /** Looks at a stall that waits for a live supply: coarse, since it happens on a nearly dead supply only. */
+    private static final int REGENERATION_LOOKS = 400;
+
+    private static final int BISECTIONS = 60;
+
+    private final Network n;
+    private final Piece piece = new Piece();
+    private final Piece trial = new Piece();
+    private final Affine form = new Affine();
+    private SourceWave wave = new SourceWave();
+
+    private Mode mode = Mode.OFF;
+    private boolean rectifies;
+    private boolean clips;
+    private boolean gateConducts;
+    private double seconds;
+    private double rampVolts;
+
+    public Stepper(Network network) {
+        n = network;
+    }
+
+    /** Begins a half cycle with the state that the last one ended in. */
+    public void start(SourceWave source, Mode startMode, double startRampVolts) {
+        wave = source;
+        mode = startMode;
+        seconds = 0;
+        rampVolts = startRampVolts;
+        settle();
+    }
+
+    /** Puts another source behind the dropper from here on: the thyristor takes the supply away or gives it back. */
+    public void switchSource(SourceWave source) {
+        wave = source;
+        settle();
+    }
+
+    /** Goes back to an instant just after firing. */
+    public void returnToFiring(double firingSeconds, double firingRampVolts) {
+        seconds = firingSeconds;
+        rampVolts = firingRampVolts;
+        mode = Mode.ON;
+        settle();
+    }
+
+    /**
+     * Moves to the next event and through it.
+     *
+     * @param limitSeconds where to stop if nothing happens before, s
+     * @return what happened; {@link #seconds()} says when
+     */
+    public Event advance(double limitSeconds) {
+        piece.mode = mode;
+        piece.rectifies = rectifies;
+        piece.clips = clips;
+        piece.gateConducts = gateConducts;
+        NodeLaws.shape(n, piece);
+        piece.begin(n, wave, seconds, rampVolts);
+        double time = limitSeconds;
+        Event event = Event.END;
+        double at;
+        switch (mode) {
+            case OFF -> {
+                at = peakReached(time);
+                if (at < time) {
+                    time = at;
+                    event = Event.STALLS;
+                }
+            }
+            case ON -> {
+                at = valleyReached(time);
+                if (at < time) {
+                    time = at;
+                    event = Event.VALLEY;
+                }
+                at = gateSwitches(time);
+                if (at < time) {
+                    time = at;
+                    event = Event.GATE;
+                }
+            }
+            case STALLED -> {
+                at = stallFires(time);
+                if (at < time) {
+                    time = at;
+                    event = Event.FIRES;
+                }
+                at = stallLeaves(time);
+                if (at < time) {
+                    time = at;
+                    event = Event.UNSTALLS;
+                }
+            }
+        }
+        at = zenerSwitches(time);
+        if (at < time) {
+            time = at;
+            event = Event.ZENER;
+        }
+        at = rectifierSwitches(time);
+        if (at < time) {
+            time = at;
+            event = Event.RECTIFIER;
+        }
+        seconds = time;
+        piece.look(time);
+        rampVolts = piece.rampVolts;
+        return pass(event);
+    }
+
+    private Event pass(Event event) {
+        switch (event) {
+            case RECTIFIER -> rectifies = !rectifies;
+            case ZENER -> clips = !clips;
+            case GATE -> gateConducts = !gateConducts;
+            case UNSTALLS -> mode = Mode.OFF;
+            case VALLEY -> {
+                mode = Mode.OFF;
+                settle();
+            }
+            case FIRES -> {
+                mode = Mode.ON;
+                settle();
+            }
+            case STALLS -> {
+                if (canFire()) {
+                    mode = Mode.ON;
+                    settle();
+                    return Event.FIRES;
+                }
+                mode = Mode.STALLED;
+            }
+            case END -> {}
+        }
+        return event;
+    }
+
+    // --- what may end a piece ---------------------------------------------------------------------------------------
+
+    private double search(double limit) {
+        return FirstCrossing.after(piece, form, seconds, limit);
+    }
+
+    private double rectifierSwitches(double limit) {
+        form.copy(piece.supply);
+        form.source -= 1;
+        if (!rectifies) {
+            negate();
+        }
+        return search(limit);
+    }
+
+    private double zenerSwitches(double limit) {
+        form.copy(piece.supply);
+        form.constant -= n.zenerKneeVolts;
+        if (clips) {
+            negate();
+        }
+        return search(limit);
+    }
+
+    private double gateSwitches(double limit) {
+        form.copy(piece.gate);
+        form.constant -= n.gateKneeVolts;
+        if (gateConducts) {
+            negate();
+        }
+        return search(limit);
+    }
+
+    /** V_C - kappa V_S - V_D rises to zero. */
+    private double peakReached(double limit) {
+        form.copy(piece.supply);
+        form.ramp = 1 - n.peakShare * form.ramp;
+        form.source *= -n.peakShare;
+        form.constant = -n.peakShare * form.constant - n.emitterDropVolts;
+        return search(limit);
+    }
+
+    /** iota V_S - I_E rises to zero. */
+    private double valleyReached(double limit) {
+        form.ramp = n.valleySiemens * piece.supply.ramp - piece.emitter.ramp;
+        form.source = n.valleySiemens * piece.supply.source - piece.emitter.source;
+        form.sourceSlope = 0;
+        form.constant = n.valleySiemens * piece.supply.constant - piece.emitter.constant;
+        return search(limit);
+    }
+
+    private double stallLeaves(double limit) {
+        form.copy(piece.emitter);
+        form.sourceSlope = piece.emitter.sourceSlope;
+        negate();
+        return search(limit);
+    }
+
+    /** The emitter gets its peak-point current, and the pulse would be regenerative. */
+    private double stallFires(double limit) {
+        form.copy(piece.emitter);
+        form.sourceSlope = piece.emitter.sourceSlope;
+        form.constant -= n.peakCurrentAmps;
+        double enough = search(limit);
+        if (enough >= limit) {
+            return enough;
+        }
+        if (regenerates(enough)) {
+            return enough;
+        }
+        return waitForRegeneration(enough, limit);
+    }
+
+    private double waitForRegeneration(double from, double limit) {
+        double low = from;
+        for (int i = 1; i <= REGENERATION_LOOKS; i++) {
+            double high = from + (limit - from) * i / REGENERATION_LOOKS;
+            if (hasPeakCurrent(high) && regenerates(high)) {
+                for (int b = 0; b < BISECTIONS; b++) {
+                    double middle = (low + high) / 2;
+                    if (hasPeakCurrent(middle) && regenerates(middle)) {
+                        high = middle;
+                    } else {
+                        low = middle;
+                    }
+                }
+                return high;
+            }
+            low = high;
+        }
+        return Double.POSITIVE_INFINITY;
+    }
+
+    private boolean hasPeakCurrent(double time) {
+        piece.look(time);
+        return piece.value(piece.emitter) >= n.peakCurrentAmps;
+    }
+
+    private boolean regenerates(double time) {
+        piece.look(time);
+        return regenerates(piece.rampVolts, piece.sourceVolts);
+    }
+
+    private void negate() {
+        form.ramp = -form.ramp;
+        form.source = -form.source;
+        form.sourceSlope = -form.sourceSlope;
+        form.constant = -form.constant;
+    }
+
+    // --- firing ----------------------------------------------------------------------------------------------------
+
+    /** With the ramp at the peak point: does the emitter get the peak-point current, and would the pulse regenerate? */
+    private boolean canFire() {
+        trial.mode = Mode.STALLED;
+        trial.rectifies = rectifies;
+        trial.clips = clips;
+        NodeLaws.shape(n, trial);
+        double source = wave.at(seconds);
+        double emitter = trial.emitter.at(rampVolts, source) + trial.emitter.sourceSlope * wave.slopeAt(seconds);
+        return emitter >= n.peakCurrentAmps && regenerates(rampVolts, source);
+    }
+
+    /** Whether the saturated emitter line would carry more than the valley current at a ramp and source voltage. */
+    private boolean regenerates(double ramp, double source) {
+        trial.mode = Mode.ON;
+        trial.rectifies = rectifies;
+        trial.clips = clips;
+        trial.gateConducts = false;
+        NodeLaws.settle(n, trial, ramp, source);
+        return trial.emitter.at(ramp, source) > n.valleySiemens * trial.supply.at(ramp, source);
+    }
+
+    private void settle() {
+        trial.mode = mode;
+        trial.rectifies = rectifies;
+        trial.clips = clips;
+        trial.gateConducts = gateConducts;
+        NodeLaws.settle(n, trial, rampVolts, wave.at(seconds));
+        rectifies = trial.rectifies;
+        clips = trial.clips;
+        gateConducts = trial.gateConducts;
+    }
+
+    // --- what the caller sees --------------------------------------------------------------------------------------
+
+    /** The piece just passed; valid until the next call. */
+    public Piece piece() {
+        return piece;
+    }
+
+    /** Time since the line zero, s. */
+    public double seconds() {
+        return seconds;
+    }
+
+    /** Ramp voltage now, V. */
+    public double rampVolts() {
+        return rampVolts;
+    }
+
+    /** What the device does now. */
+    public Mode mode() {
+        return mode;
+    }
+
+    /** Whether the zener conducts now. */
+    public boolean clips() {
+        return clips;
+    }
+
+    public Network network() {
+        return n;
+    }
+}

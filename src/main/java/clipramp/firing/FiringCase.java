@@ -1,0 +1,61 @@
+package clipramp.firing;
+
+import clipramp.circuit.ClipSupply;
+import clipramp.circuit.Condition;
+import clipramp.circuit.Design;
+import clipramp.circuit.Stage;
+import clipramp.engine.LineWave;
+import clipramp.engine.LoadCurrent;
+import clipramp.engine.Network;
+import clipramp.engine.NetworkOfDesign;
+import clipramp.engine.SourceWave;
+
+/** A design at one condition and ramp resistance, made ready to be solved. */
+record FiringCase(
+        Design design,
+        Condition condition,
+        Network network,
+        LineWave line,
+        SupplyTiming timing,
+        LoadCurrent load,
+        boolean tapsThyristor,
+        double conductingVolts) {
+
+    static FiringCase of(Design design, Condition condition, double rampOhms) {
+        LineWave line = new LineWave(design.line(), condition);
+        return new FiringCase(
+                design,
+                condition,
+                NetworkOfDesign.of(design, condition, rampOhms),
+                line,
+                SupplyTiming.of(design, line),
+                new LoadCurrent(design, condition),
+                design.clip().tap() == ClipSupply.Tap.THYRISTOR,
+                conductingVolts(design));
+    }
+
+    /** What a supply across the conducting thyristor is fed with: V_T0 less the drops of a rectifier of its own, V. */
+    private static double conductingVolts(Design design) {
+        ClipSupply clip = design.clip();
+        boolean stageBridge = clip.rectifier() == ClipSupply.Rectifier.BRIDGE
+                && (design.stage() == Stage.BRIDGE_DC || design.stage() == Stage.BRIDGE_AC);
+        double ownDrops = stageBridge ? 0 : clip.rectifier().diodesInPath() * clip.diodeDropVolts();
+        return Math.max(0, design.thyristor().device().onState().thresholdVolts() - ownDrops);
+    }
+
+    SourceWave conductingWave(double seconds) {
+        SourceWave wave = new SourceWave();
+        wave.setConstant(conductingVolts, seconds);
+        return wave;
+    }
+
+    /** Line angle of the load at a time within a half cycle, not folded, rad. */
+    double lineRad(int half, double seconds) {
+        return timing.startRad(half) + condition.omega() * seconds;
+    }
+
+    /** Current that the load would take with the thyristor on, A, at a time within a half cycle. */
+    double anodeAmps(int half, double seconds) {
+        return load.ampsAt(lineRad(half, seconds));
+    }
+}

@@ -1,0 +1,244 @@
+package clipramp.firing;
+
+import clipramp.engine.Event;
+import clipramp.engine.Mode;
+import clipramp.engine.Piece;
+import clipramp.engine.SourceWave;
+import clipramp.engine.Stepper;
+import java.util.ArrayList;
+import java.util.List;
+import org.jspecify.annotations.Nullable;
+
+/** Runs the firing circuit through half cycles, one after the other, and keeps what the last one showed. */
+final class HalfCycleRun {
+    /** Events in one half cycle beyond which something is wrong with the laws, not with the circuit. */
+    private static final int MOST_EVENTS = 200_000;
+
+    private static final int BISECTIONS = 60;
+
+    /** With less capacitor current than this share of the emitter's, the ramp resistor alone holds the device on. */
+    private static final double HELD_BY_RESISTOR = 0.5;
+
+    private final FiringCase firing;
+    private final Stepper stepper;
+
+    private int half;
+    private Mode mode = Mode.OFF;
+    private double rampVolts;
+    /** The pulse that is going on, if one is; it may have begun in the half cycle before. */
+    private @Nullable PulseMeter going;
+
+    private List<PulseMeter> begun = new ArrayList<>();
+    private double startVolts;
+    private double clipFrom;
+    private double clipUntil;
+    private double crestVolts;
+    private double crestSeconds;
+    private boolean stalled;
+    private boolean latchedOn;
+
+    private boolean conducting;
+    private double triedFrom;
+    private double triedRampVolts;
+    private boolean trying;
+
+    HalfCycleRun(FiringCase firing) {
+        this.firing = firing;
+        stepper = new Stepper(firing.network());
+    }
+
+    /** Runs through the next half cycle and shows its pieces. */
+    void next(PieceSink sink) {
+        SourceWave wave = firing.timing().wave(half);
+        double end = wave.seconds();
+        begin();
+        stepper.start(wave, mode, rampVolts);
+        noteClipping(false, 0);
+        for (int events = 0; ; events++) {
+            if (events > MOST_EVENTS) {
+                throw new ArithmeticException("a half cycle with more than " + MOST_EVENTS + " events");
+            }
+            double from = stepper.seconds();
+            boolean clippedBefore = stepper.clips();
+            Event event = stepper.advance(end);
+            passed(sink, stepper.piece(), from, stepper.seconds());
+            handle(event, wave, sink);
+            noteClipping(clippedBefore, stepper.seconds());
+            if (event == Event.END) {
+                break;
+            }
+        }
+        if (stepper.clips()) {
+            clipUntil = end;
+        }
+        mode = stepper.mode();
+        rampVolts = stepper.rampVolts();
+        half++;
+    }
+
+    private void begin() {
+        begun = new ArrayList<>();
+        startVolts = rampVolts;
+        clipFrom = Double.POSITIVE_INFINITY;
+        clipUntil = Double.NEGATIVE_INFINITY;
+        crestVolts = Double.NEGATIVE_INFINITY;
+        crestSeconds = 0;
+        stalled = mode == Mode.STALLED;
+        latchedOn = false;
+        conducting = false;
+        trying = false;
+    }
+
+    private void passed(PieceSink sink, Piece piece, double from, double to) {
+        if (clipFrom == Double.POSITIVE_INFINITY) {
+            noteCrest(piece, from, to);
+        }
+        if (going != null && piece.mode() == Mode.ON) {
+            double offset = going.half() == half ? 0 : firing.timing().wave(going.half()).seconds();
+            going.passed(piece, from, to, offset);
+        }
+        sink.passed(piece, from, to);
+    }
+
+    private void handle(Event event, SourceWave wave, PieceSink sink) {
+        switch (event) {
+            case FIRES -> fire(wave);
+            case STALLS -> stalled = true;
+            case VALLEY -> endPulse(wave, sink);
+            case ZENER -> noteLatchedOn();
+            case RECTIFIER, GATE, UNSTALLS, END -> {}
+        }
+    }
+
+    private void fire(SourceWave wave) {
+        Piece before = stepper.piece();
+        double supply = before.supplyVolts();
+        boolean afterStall = before.mode() == Mode.STALLED;
+        going = new PulseMeter(
+                firing.network(), half, stepper.seconds(), stepper.rampVolts(), supply, afterStall);
+        begun.add(going);
+        if (firing.tapsThyristor() && !conducting && firing.anodeAmps(half, stepper.seconds()) > 0) {
+            triedFrom = stepper.seconds();
+            triedRampVolts = stepper.rampVolts();
+            trying = true;
+            stepper.switchSource(firing.conductingWave(wave.seconds()));
+        }
+    }
+
+    /**
+     * The pulse is over. Across the thyristor it was computed with the supply taken away: that stays so if the pulse
+     * latched; the supply comes back if it only turned on; and it never went if the pulse did not even do that.
+     */
+    private void endPulse(SourceWave wave, PieceSink sink) {
+        PulseMeter pulse = going;
+        going = null;
+        if (!trying || pulse == null) {
+            return;
+        }
+        trying = false;
+        if (pulse.latches(firing)) {
+            conducting = true;
+        } else if (pulse.turnsOn(firing)) {
+            stepper.switchSource(wave);
+        } else {
+            sink.takeBack(triedFrom);
+            begun.remove(begun.size() - 1);
+            Pulse measured = pulse.pulse(firing, 0, false);
+            stepper.switchSource(wave);
+            stepper.returnToFiring(triedFrom, triedRampVolts);
+            going = new PulseMeter(
+                    firing.network(),
+                    half,
+                    triedFrom,
+                    triedRampVolts,
+                    measured.supplyVolts(),
+                    measured.afterStall());
+            begun.add(going);
+        }
+    }
+
+    private void noteClipping(boolean before, double time) {
+        if (stepper.clips()) {
+            clipFrom = Math.min(clipFrom, time);
+        } else if (before) {
+            clipUntil = time;
+        }
+    }
+
+    /** The supply collapses: if the device is still on and the ramp resistor alone feeds it, it was latched on. */
+    private void noteLatchedOn() {
+        if (stepper.clips() || going == null || stepper.mode() != Mode.ON) {
+            return;
+        }
+        Piece piece = stepper.piece();
+        double throughResistor = (piece.supplyVolts() - piece.rampVolts()) / firing.network().rampOhms;
+        if (throughResistor > HELD_BY_RESISTOR * piece.emitterAmps()) {
+            latchedOn = true;
+        }
+    }
+
+    private void noteCrest(Piece piece, double from, double to) {
+        piece.look(from);
+        boolean rises = piece.supplySlope() > 0;
+        noteCrestAt(piece, from);
+        piece.look(to);
+        boolean falls = piece.supplySlope() < 0;
+        noteCrestAt(piece, to);
+        if (rises && falls) {
+            double low = from;
+            double high = to;
+            for (int i = 0; i < BISECTIONS; i++) {
+                double middle = (low + high) / 2;
+                piece.look(middle);
+                if (piece.supplySlope() > 0) {
+                    low = middle;
+                } else {
+                    high = middle;
+                }
+            }
+            noteCrestAt(piece, low);
+            piece.look(to);
+        }
+    }
+
+    private void noteCrestAt(Piece piece, double time) {
+        piece.look(time);
+        if (piece.supplyVolts() > crestVolts) {
+            crestVolts = piece.supplyVolts();
+            crestSeconds = time;
+        }
+    }
+
+    // --- what the half cycle just run showed ------------------------------------------------------------------------
+
+    /** Running number of the half cycle just run. */
+    int lastHalf() {
+        return half - 1;
+    }
+
+    Mode mode() {
+        return mode;
+    }
+
+    double rampVolts() {
+        return rampVolts;
+    }
+
+    boolean pulseIsGoing() {
+        return going != null;
+    }
+
+    /** What the half cycle just run showed; a pulse still going on is filled in by running on. */
+    HalfCycleDraft draft() {
+        boolean clipped = clipFrom < Double.POSITIVE_INFINITY;
+        return new HalfCycleDraft(
+                lastHalf(),
+                startVolts,
+                rampVolts,
+                clipFrom,
+                clipped ? clipUntil : crestSeconds,
+                stalled,
+                latchedOn,
+                begun);
+    }
+}

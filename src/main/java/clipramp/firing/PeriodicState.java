@@ -1,0 +1,79 @@
+package clipramp.firing;
+
+import clipramp.circuit.Stage;
+import clipramp.engine.Mode;
+import java.util.ArrayList;
+import java.util.List;
+
+/** Runs half cycles until they repeat, then once more through those that differ. */
+final class PeriodicState {
+    /** Two ramp voltages nearer than this are the same, V. */
+    private static final double SAME_VOLTS = 1e-9;
+
+    private static final int MOST_HALVES = 60;
+
+    /** How many half cycles are shown of a circuit that never settles. */
+    private static final int SHOWN_UNSETTLED = 8;
+
+    private PeriodicState() {}
+
+    private record State(Mode mode, double rampVolts) {
+        boolean isSameAs(State other) {
+            return mode == other.mode && Math.abs(rampVolts - other.rampVolts) < SAME_VOLTS;
+        }
+    }
+
+    /** Solves, and shows the sink every piece of the half cycles that make up the solution. */
+    static Solution solve(FiringCase firing, PieceSink sink) {
+        HalfCycleRun run = new HalfCycleRun(firing);
+        int period = firing.timing().period();
+        List<State> states = new ArrayList<>();
+        states.add(new State(run.mode(), run.rampVolts()));
+        Solution.Settling settling = Solution.Settling.NEVER;
+        int repeats = 0;
+        while (states.size() <= MOST_HALVES && repeats == 0) {
+            run.next(PieceSink.NONE);
+            states.add(new State(run.mode(), run.rampVolts()));
+            if (repeatsAfter(states, period)) {
+                settling = Solution.Settling.STEADY;
+                repeats = period;
+            } else if (repeatsAfter(states, 2 * period)) {
+                settling = Solution.Settling.HUNTS;
+                repeats = 2 * period;
+            }
+        }
+        int shown = repeats == 0 ? SHOWN_UNSETTLED : shownHalves(firing, repeats);
+        return new Solution(
+                firing.condition(), firing.network().rampOhms, settling, record(firing, run, shown, sink));
+    }
+
+    /** A half-wave load feels every second half cycle only, so both are told although the ramp treats them alike. */
+    private static int shownHalves(FiringCase firing, int repeats) {
+        boolean halfWaveOnBridge =
+                firing.design().stage() == Stage.HALF_WAVE && !firing.timing().isWholePeriods();
+        return halfWaveOnBridge ? Math.max(2, repeats) : repeats;
+    }
+
+    private static boolean repeatsAfter(List<State> states, int halves) {
+        int last = states.size() - 1;
+        return last >= halves && states.get(last).isSameAs(states.get(last - halves));
+    }
+
+    private static List<HalfCycle> record(FiringCase firing, HalfCycleRun run, int shown, PieceSink sink) {
+        // The positive half comes first in every answer.
+        while (!firing.timing().isPositive(run.lastHalf() + 1) && shown > 1) {
+            run.next(PieceSink.NONE);
+        }
+        List<HalfCycleDraft> drafts = new ArrayList<>();
+        for (int i = 0; i < shown; i++) {
+            run.next(sink);
+            drafts.add(run.draft());
+        }
+        if (run.pulseIsGoing()) {
+            run.next(PieceSink.NONE);
+        }
+        List<HalfCycle> halves =
+                drafts.stream().map(draft -> draft.finished(firing)).toList();
+        return LoadHalves.fromSupplyHalves(firing, halves);
+    }
+}

@@ -1,0 +1,189 @@
+package clipramp.firing;
+
+import clipramp.engine.Network;
+import clipramp.engine.Piece;
+import clipramp.engine.PieceQuadrature;
+
+/** Measures one pulse while the circuit runs through it. */
+final class PulseMeter {
+    private static final int BISECTIONS = 60;
+
+    private final Network n;
+    private final int half;
+    private final double startSeconds;
+    private final double startRampVolts;
+    private final double supplyVolts;
+    private final boolean afterStall;
+
+    private double endSeconds;
+    private double endRampVolts;
+    private double peakGateVolts;
+    private double peakGateAmps;
+    private double peakBaseOneVolts;
+    private double coulombs;
+    private double joules;
+    private double aboveSince = Double.NaN;
+    private double longestAbove;
+    private double longestAboveStart = Double.NaN;
+    private double longestAboveEnd = Double.NaN;
+
+    /**
+     * @param network the circuit
+     * @param half running number of the half cycle that the pulse begins in
+     * @param startSeconds instant of firing, s since that half cycle's line zero
+     * @param startRampVolts ramp voltage at firing, V
+     * @param supplyVolts supply just before firing, V
+     * @param afterStall whether the ramp was held before
+     */
+    PulseMeter(
+            Network network,
+            int half,
+            double startSeconds,
+            double startRampVolts,
+            double supplyVolts,
+            boolean afterStall) {
+        n = network;
+        this.half = half;
+        this.startSeconds = startSeconds;
+        this.startRampVolts = startRampVolts;
+        this.supplyVolts = supplyVolts;
+        this.afterStall = afterStall;
+        endSeconds = startSeconds;
+        endRampVolts = startRampVolts;
+    }
+
+    /**
+     * Takes in a conducting piece.
+     *
+     * @param offsetSeconds what to add to the piece's times to count from the pulse's own half cycle, s
+     */
+    void passed(Piece piece, double from, double to, double offsetSeconds) {
+        peaksAt(piece, from);
+        peakWithin(piece, from, to);
+        peaksAt(piece, to);
+        endSeconds = to + offsetSeconds;
+        endRampVolts = piece.rampVolts();
+        PieceQuadrature.visit(piece, from, to, (p, weight) -> {
+            double amps = p.gateAmps(n);
+            coulombs += weight * amps;
+            joules += weight * amps * p.gateVolts();
+        });
+        above(piece, from, to, offsetSeconds);
+    }
+
+    private void peaksAt(Piece piece, double time) {
+        piece.look(time);
+        peakBaseOneVolts = Math.max(peakBaseOneVolts, piece.baseOneVolts());
+        peakGateVolts = Math.max(peakGateVolts, piece.gateVolts());
+        peakGateAmps = Math.max(peakGateAmps, piece.gateAmps(n));
+    }
+
+    /** A gate voltage that first rises and then falls has its peak inside the piece. */
+    private void peakWithin(Piece piece, double from, double to) {
+        if (slopeAt(piece, from) <= 0 || slopeAt(piece, to) >= 0) {
+            return;
+        }
+        double low = from;
+        double high = to;
+        for (int i = 0; i < BISECTIONS; i++) {
+            double middle = (low + high) / 2;
+            if (slopeAt(piece, middle) > 0) {
+                low = middle;
+            } else {
+                high = middle;
+            }
+        }
+        peaksAt(piece, low);
+    }
+
+    private static double slopeAt(Piece piece, double time) {
+        piece.look(time);
+        return piece.gateSlope();
+    }
+
+    private void above(Piece piece, double from, double to, double offset) {
+        double time = from;
+        piece.look(from);
+        boolean above = piece.gateAmps(n) >= n.triggerAmps;
+        while (true) {
+            if (above && Double.isNaN(aboveSince)) {
+                aboveSince = time + offset;
+            }
+            double next = piece.gateReaches(n, n.triggerAmps, !above, time, to);
+            if (above) {
+                span(Math.min(next, to) + offset);
+            }
+            if (!(next < to)) {
+                return;
+            }
+            if (above) {
+                aboveSince = Double.NaN;
+            }
+            above = !above;
+            time = next;
+        }
+    }
+
+    private void span(double end) {
+        if (end - aboveSince > longestAbove) {
+            longestAbove = end - aboveSince;
+            longestAboveStart = aboveSince;
+            longestAboveEnd = end;
+        }
+    }
+
+    /** Running number of the half cycle that it began in. */
+    int half() {
+        return half;
+    }
+
+    double startSeconds() {
+        return startSeconds;
+    }
+
+    double endSeconds() {
+        return endSeconds;
+    }
+
+    /** Whether the gate current lasts for the thyristor's turn-on time, with its anode forward as it begins. */
+    boolean turnsOn(FiringCase firing) {
+        return longestAbove > 0
+                && longestAbove >= n.turnOnSeconds
+                && firing.anodeAmps(half, longestAboveStart) > 0;
+    }
+
+    /** Anode current as the gate current falls under the trigger current for good, A. */
+    double anodeAmps(FiringCase firing) {
+        return firing.anodeAmps(half, longestAbove > 0 ? longestAboveEnd : endSeconds);
+    }
+
+    boolean latches(FiringCase firing) {
+        return turnsOn(firing) && anodeAmps(firing) >= n.latchingAmps;
+    }
+
+    /**
+     * @param startRad firing angle in the load's half cycle, rad
+     * @param endPulse whether it began after the zener's last conduction
+     */
+    Pulse pulse(FiringCase firing, double startRad, boolean endPulse) {
+        return new Pulse(
+                startRad,
+                startSeconds,
+                endSeconds,
+                supplyVolts,
+                startRampVolts,
+                afterStall,
+                endPulse,
+                peakGateAmps,
+                peakGateVolts,
+                peakGateAmps * peakGateVolts,
+                peakBaseOneVolts,
+                longestAbove,
+                coulombs,
+                joules,
+                n.capacitorFarads / 2 * (startRampVolts * startRampVolts - endRampVolts * endRampVolts),
+                turnsOn(firing),
+                anodeAmps(firing),
+                latches(firing));
+    }
+}
