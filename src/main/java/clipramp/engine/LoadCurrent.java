@@ -23,8 +23,8 @@ public final class LoadCurrent {
         Stage stage = design.stage();
         fullWave = stage.isFullWave();
         var onState = design.thyristor().device().onState();
-        dropVolts =
-                onState.thresholdVolts() + stage.bridgeDiodes() * design.stageDiodes().dropVolts();
+        dropVolts = onState.thresholdVolts()
+                + stage.bridgeDiodes() * design.stageDiodes().dropVolts();
         loopOhms = design.load().resistanceOhms()
                 + onState.slopeOhms()
                 + stage.bridgeDiodes() * design.stageDiodes().slopeOhms();

@@ -71,9 +71,8 @@ public final class NetworkOfDesign {
         n.modulatedOhms = device.modulated()
                 .map(m -> m.atVolts() / m.amps().nominal())
                 .orElse((1 - n.standoff) * n.interbaseOhms);
-        double modulated25 = device.modulated()
-                .map(m -> m.atVolts() / m.amps().nominal())
-                .orElse((1 - n.standoff) * interbase25);
+        double modulated25 =
+                device.modulated().map(m -> m.atVolts() / m.amps().nominal()).orElse((1 - n.standoff) * interbase25);
         n.onOhms = EmitterLine.slopeOhms(device, interbase25, modulated25);
         n.onIntercept = EmitterLine.intercept(device, n.onOhms);
         n.valleySiemens = device.valley().amps().nominal() / device.valley().atVolts();
@@ -90,8 +89,8 @@ public final class NetworkOfDesign {
         n.gateShuntSiemens = drive.shunt().map(s -> 1 / s.value()).orElse(0.0);
         n.gateKneeVolts = thyristor.gate().kneeVolts();
         n.gateSlopeOhms = thyristor.gate().slopeOhms();
-        n.triggerAmps = triggerDemand(thyristor, drive.polarity(), condition.celsius())
-                .ampsAt(condition.celsius());
+        n.triggerAmps =
+                triggerDemand(thyristor, drive.polarity(), condition.celsius()).ampsAt(condition.celsius());
         n.turnOnSeconds = thyristor.gate().turnOnSeconds().orElse(0);
         n.latchingAmps = thyristor
                 .latching()
@@ -103,8 +102,7 @@ public final class NetworkOfDesign {
      * Trigger data that govern: an SCR's own, or the worse of the two quadrants that a triac's pulse polarity uses
      * (a quadrant that the sheet lacks is passed over here; the margins fail it).
      */
-    public static TriggerDemand triggerDemand(
-            ThyristorDevice device, GateDrive.Polarity polarity, double celsius) {
+    public static TriggerDemand triggerDemand(ThyristorDevice device, GateDrive.Polarity polarity, double celsius) {
         if (device.kind() == ThyristorDevice.Kind.SCR) {
             return device.gate().trigger();
         }
@@ -123,7 +121,8 @@ public final class NetworkOfDesign {
         if (design.thyristor().device().kind() == ThyristorDevice.Kind.TRIAC) {
             return 0;
         }
-        double path = design.gate().series().value() + design.trigger().baseOne().value();
+        double path =
+                design.gate().series().value() + design.trigger().baseOne().value();
         double shuntSiemens =
                 design.gate().shunt().map(Part::value).map(ohms -> 1 / ohms).orElse(0.0);
         return GATE_BLEED_VOLTS * (1 / path + shuntSiemens);

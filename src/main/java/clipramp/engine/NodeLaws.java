@@ -88,8 +88,7 @@ final class NodeLaws {
         double determinant = ss * bb - sb * bs;
 
         double supplyConstant = zener * n.zenerKneeVolts + baseTwo * n.gateDropVolts;
-        double baseConstant =
-                -n.onDropVolts * on - (baseTwo + n.lowerSiemens) * n.gateDropVolts + gate * gateVolts;
+        double baseConstant = -n.onDropVolts * on - (baseTwo + n.lowerSiemens) * n.gateDropVolts + gate * gateVolts;
         piece.supply.set(
                 (rampSiemens * bb - sb * on) / determinant,
                 feed * bb / determinant,

@@ -114,10 +114,7 @@ public final class Piece {
 
     /** A linear form where the piece was last looked at. */
     double value(Affine form) {
-        return form.ramp * rampVolts
-                + form.source * sourceVolts
-                + form.sourceSlope * sourceSlope
-                + form.constant;
+        return form.ramp * rampVolts + form.source * sourceVolts + form.sourceSlope * sourceSlope + form.constant;
     }
 
     /** Time derivative of a linear form where the piece was last looked at. */

@@ -2,6 +2,7 @@ package clipramp.firing;
 
 import clipramp.circuit.Condition;
 import clipramp.circuit.Design;
+import clipramp.circuit.Stage;
 
 /** The firing circuit solved: what every other room asks. */
 public final class Firing {
@@ -19,16 +20,23 @@ public final class Firing {
     }
 
     /**
-     * Waveforms of the periodic state, one half cycle (a period for half-wave).
+     * Waveforms of the periodic state, one half cycle (a period for a half-wave supply or stage).
      *
      * @param samples about how many instants, 2 or more; events are added to them
      */
     public static Waveforms waveforms(Design design, Condition condition, double rampOhms, int samples) {
-        throw new UnsupportedOperationException();
+        FiringCase firing = FiringCase.of(design, condition, rampOhms);
+        PieceLog log = new PieceLog();
+        PeriodicState.solve(firing, log);
+        int shown = design.stage() == Stage.HALF_WAVE ? Math.min(2, log.halves().size()) : 1;
+        return Sampler.sample(firing, log.halves().subList(0, shown), 0, samples);
     }
 
     /** What the firing circuit's parts bear in the periodic state. */
     public static Dissipation dissipation(Design design, Condition condition, double rampOhms) {
-        throw new UnsupportedOperationException();
+        FiringCase firing = FiringCase.of(design, condition, rampOhms);
+        PieceLog log = new PieceLog();
+        PeriodicState.solve(firing, log);
+        return Bearing.of(firing, log.halves(), 0);
     }
 }

@@ -9,7 +9,7 @@ import java.util.OptionalDouble;
  *
  * @param positive whether it is the half cycle in which the line's fundamental is positive
  * @param seconds its length, s
- * @param startVolts ramp capacitor at the line zero that begins it, V
+ * @param startVolts residual voltage: ramp capacitor at the line zero that begins it, V
  * @param endVolts ramp capacitor at the line zero that ends it, V
  * @param clipFromRad angle from which the zener conducts, rad; empty if it never does
  * @param stalled whether the ramp was held at the peak point for want of peak-point current
@@ -41,9 +41,9 @@ public record HalfCycle(
         return firingPulse().or(() -> pulses.stream().findFirst());
     }
 
-    /** The first pulse that begins after the zener's last conduction, if there is one. */
+    /** The shown pulse, if it comes of the supply's collapse only. */
     public Optional<Pulse> endPulse() {
-        return pulses.stream().filter(Pulse::endPulse).findFirst();
+        return shownPulse().filter(Pulse::endPulse);
     }
 
     /** Firing angle, rad; empty when the thyristor stays off. */

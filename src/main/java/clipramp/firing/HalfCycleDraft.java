@@ -29,10 +29,7 @@ record HalfCycleDraft(
         SupplyTiming timing = firing.timing();
         double fold = timing.isPositive(half) || timing.isWholePeriods() ? 0 : Math.PI;
         List<Pulse> done = pulses.stream()
-                .map(p -> p.pulse(
-                        firing,
-                        firing.lineRad(half, p.startSeconds()) - fold,
-                        p.startSeconds() > collapse))
+                .map(p -> p.pulse(firing, firing.lineRad(half, p.startSeconds()) - fold, p.startSeconds() > collapse))
                 .toList();
         OptionalDouble clipRad = clipFrom < Double.POSITIVE_INFINITY
                 ? OptionalDouble.of(firing.lineRad(half, clipFrom) - fold)

@@ -94,7 +94,9 @@ final class HalfCycleRun {
             noteCrest(piece, from, to);
         }
         if (going != null && piece.mode() == Mode.ON) {
-            double offset = going.half() == half ? 0 : firing.timing().wave(going.half()).seconds();
+            double offset = going.half() == half
+                    ? 0
+                    : firing.timing().wave(going.half()).seconds();
             going.passed(piece, from, to, offset);
         }
         sink.passed(piece, from, to);
@@ -114,8 +116,7 @@ final class HalfCycleRun {
         Piece before = stepper.piece();
         double supply = before.supplyVolts();
         boolean afterStall = before.mode() == Mode.STALLED;
-        going = new PulseMeter(
-                firing.network(), half, stepper.seconds(), stepper.rampVolts(), supply, afterStall);
+        going = new PulseMeter(firing.network(), half, stepper.seconds(), stepper.rampVolts(), supply, afterStall);
         begun.add(going);
         if (firing.tapsThyristor() && !conducting && firing.anodeAmps(half, stepper.seconds()) > 0) {
             triedFrom = stepper.seconds();
@@ -147,12 +148,7 @@ final class HalfCycleRun {
             stepper.switchSource(wave);
             stepper.returnToFiring(triedFrom, triedRampVolts);
             going = new PulseMeter(
-                    firing.network(),
-                    half,
-                    triedFrom,
-                    triedRampVolts,
-                    measured.supplyVolts(),
-                    measured.afterStall());
+                    firing.network(), half, triedFrom, triedRampVolts, measured.supplyVolts(), measured.afterStall());
             begun.add(going);
         }
     }

@@ -21,8 +21,12 @@ final class LoadHalves {
         List<List<Pulse>> late = lists(count);
         for (int i = 0; i < count; i++) {
             HalfCycle half = halves.get(i);
-            double start = (half.positive() ? firing.line().positiveStartRad() : firing.line().negativeStartRad() - Math.PI);
-            double end = half.positive() ? firing.line().negativeStartRad() : firing.line().positiveStartRad() + Math.PI;
+            double start = (half.positive()
+                    ? firing.line().positiveStartRad()
+                    : firing.line().negativeStartRad() - Math.PI);
+            double end = half.positive()
+                    ? firing.line().negativeStartRad()
+                    : firing.line().positiveStartRad() + Math.PI;
             for (Pulse pulse : half.pulses()) {
                 if (pulse.startRad() >= end) {
                     early.get((i + 1) % count).add(moved(pulse, -Math.PI));

@@ -43,8 +43,7 @@ final class PeriodicState {
             }
         }
         int shown = repeats == 0 ? SHOWN_UNSETTLED : shownHalves(firing, repeats);
-        return new Solution(
-                firing.condition(), firing.network().rampOhms, settling, record(firing, run, shown, sink));
+        return new Solution(firing.condition(), firing.network().rampOhms, settling, record(firing, run, shown, sink));
     }
 
     /** A half-wave load feels every second half cycle only, so both are told although the ramp treats them alike. */
@@ -61,7 +60,7 @@ final class PeriodicState {
 
     private static List<HalfCycle> record(FiringCase firing, HalfCycleRun run, int shown, PieceSink sink) {
         // The positive half comes first in every answer.
-        while (!firing.timing().isPositive(run.lastHalf() + 1) && shown > 1) {
+        if ((run.lastHalf() + 1) % 2 == 1) {
             run.next(PieceSink.NONE);
         }
         List<HalfCycleDraft> drafts = new ArrayList<>();

@@ -147,9 +147,7 @@ final class PulseMeter {
 
     /** Whether the gate current lasts for the thyristor's turn-on time, with its anode forward as it begins. */
     boolean turnsOn(FiringCase firing) {
-        return longestAbove > 0
-                && longestAbove >= n.turnOnSeconds
-                && firing.anodeAmps(half, longestAboveStart) > 0;
+        return longestAbove > 0 && longestAbove >= n.turnOnSeconds && firing.anodeAmps(half, longestAboveStart) > 0;
     }
 
     /** Anode current as the gate current falls under the trigger current for good, A. */
