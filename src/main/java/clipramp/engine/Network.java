@@ -10,6 +10,9 @@ package clipramp.engine;
  * programmable device's lower resistor.
  */
 public final class Network {
+    /** Drop of a programmable device's gate-cathode junction while it conducts, V. */
+    static final double PROGRAMMABLE_DROP_VOLTS = 0.6;
+
     /** R_D, ohm. */
     public double dropperOhms;
     /** V_Z0 = V_Z - r_z I_ZT, V. */
@@ -40,6 +43,12 @@ public final class Network {
     public double valleySiemens;
     /** R_B2on, ohm. */
     public double modulatedOhms;
+    /** Whether the trigger device is a programmable unijunction transistor, with a divider in place of R2 and bar. */
+    public boolean programmable;
+    /** R_A, upper divider resistor of a programmable device, ohm. */
+    public double upperOhms;
+    /** R_B, lower divider resistor of a programmable device, ohm. */
+    public double lowerOhms;
     /** R_G, ohm. */
     public double gateSeriesOhms;
     /** 1/R_GK, S; 0 for none. */
@@ -76,12 +85,24 @@ public final class Network {
     /** Open-circuit voltage of the gate network with the junction on, V. */
     double gateOnVolts;
 
-    /** Works out what follows from the fields above (unijunction transistor, direct coupling). */
+    /** Works out what follows from the fields above. */
     public void derive() {
+        deriveGate();
+        if (programmable) {
+            deriveDivider();
+        } else {
+            deriveBar();
+        }
+    }
+
+    private void deriveGate() {
         gateOffSiemens = gateShuntSiemens == 0 ? 0 : 1 / (gateSeriesOhms + 1 / gateShuntSiemens);
         double junctionSiemens = gateShuntSiemens + 1 / gateSlopeOhms;
         gateOnVolts = gateKneeVolts / gateSlopeOhms / junctionSiemens;
         gateOnSiemens = 1 / (gateSeriesOhms + 1 / junctionSiemens);
+    }
+
+    private void deriveBar() {
         // R1p: R1 parallel to the gate network with its junction off.
         double baseOneParallel = 1 / (1 / baseOneOhms + gateOffSiemens);
         double bar = baseTwoOhms + interbaseOhms + baseOneParallel;
@@ -92,6 +113,17 @@ public final class Network {
         onDropVolts = emitterDropVolts;
         gateDropVolts = 0;
         lowerSiemens = 0;
+    }
+
+    /** The divider sets the peak point; with the device on, its gate node stays one junction drop above the cathode. */
+    private void deriveDivider() {
+        peakShare = lowerOhms / (upperOhms + lowerOhms);
+        standingSiemens = 1 / (upperOhms + lowerOhms);
+        quiescentShare = 0;
+        baseTwoOnSiemens = 1 / upperOhms;
+        onDropVolts = PROGRAMMABLE_DROP_VOLTS;
+        gateDropVolts = PROGRAMMABLE_DROP_VOLTS;
+        lowerSiemens = 1 / lowerOhms;
     }
 
     /** kappa: peak-point voltage per volt of supply. */

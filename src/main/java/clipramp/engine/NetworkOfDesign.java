@@ -25,7 +25,7 @@ public final class NetworkOfDesign {
     private NetworkOfDesign() {}
 
     /**
-     * @param design the design; its trigger must be a unijunction transistor with direct coupling
+     * @param design the design; direct coupling
      * @param condition line and temperature; parts are at the ambient temperature
      * @param rampOhms R_E, ohm
      * @throws RefusedCircuit where the device's data contradict themselves or the circuit is not computed
@@ -37,14 +37,12 @@ public final class NetworkOfDesign {
         n.rampOhms = rampOhms;
         n.capacitorFarads = design.ramp().capacitor().value();
         n.baseOneOhms = design.trigger().baseOne().value();
-        if (!(design.trigger() instanceof Trigger.UnijunctionTrigger unijunction)) {
-            throw new RefusedCircuit(
-                    "trigger.device",
-                    "a programmable unijunction transistor is not computed by this version. Use a unijunction"
-                            + " transistor.");
+        if (design.trigger() instanceof Trigger.ProgrammableTrigger programmable) {
+            ProgrammableDevice.fill(n, programmable);
+        } else if (design.trigger() instanceof Trigger.UnijunctionTrigger unijunction) {
+            n.baseTwoOhms = unijunction.baseTwo().value();
+            device(n, unijunction.device(), condition);
         }
-        n.baseTwoOhms = unijunction.baseTwo().value();
-        device(n, unijunction.device(), condition);
         gate(n, design, condition);
         n.derive();
         return n;

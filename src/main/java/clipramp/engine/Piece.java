@@ -190,11 +190,19 @@ public final class Piece {
         return gateConducts ? (value(gate) - n.gateKneeVolts) / n.gateSlopeOhms : 0;
     }
 
-    /** Current into base two where last looked at, A. */
+    /** Current from the supply towards base two (a programmable device: through its upper resistor), A. */
     public double baseTwoAmps(Network n) {
         return mode == Mode.ON
                 ? n.baseTwoOnSiemens * (value(supply) - value(baseOne) - n.gateDropVolts)
                 : n.standingSiemens * value(supply);
+    }
+
+    /** Voltage at base two (a programmable device: at its gate node) where last looked at, V. */
+    public double baseTwoVolts(Network n) {
+        if (n.programmable) {
+            return mode == Mode.ON ? value(baseOne) + n.gateDropVolts : n.peakShare * value(supply);
+        }
+        return value(supply) - n.baseTwoOhms * baseTwoAmps(n);
     }
 
     /**

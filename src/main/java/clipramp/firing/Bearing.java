@@ -12,6 +12,7 @@ final class Bearing {
     private double zener;
     private double baseOne;
     private double baseTwo;
+    private double lower;
     private double ramp;
     private double device;
     private double emitterSquared;
@@ -57,26 +58,27 @@ final class Bearing {
         dropper += weight * dropperAmps * dropperAmps * n.dropperOhms;
         zener += weight * supply * zenerAmps;
         baseOne += weight * base * base / n.baseOneOhms;
-        baseTwo += weight * baseTwoAmps * baseTwoAmps * n.baseTwoOhms;
+        double baseTwoVolts = p.baseTwoVolts(n);
+        double lowerAmps = n.programmable ? baseTwoVolts / n.lowerOhms : 0;
+        double intoDevice = baseTwoAmps - lowerAmps;
+        baseTwo += weight * baseTwoAmps * (supply - baseTwoVolts);
+        lower += weight * lowerAmps * baseTwoVolts;
         ramp += weight * Math.pow(supply - p.rampVolts(), 2) / n.rampOhms;
-        device += weight
-                * (p.rampVolts() * emitterAmps
-                        + (supply - baseTwoAmps * n.baseTwoOhms) * baseTwoAmps
-                        - base * (emitterAmps + baseTwoAmps));
+        device +=
+                weight * (p.rampVolts() * emitterAmps + baseTwoVolts * intoDevice - base * (emitterAmps + intoDevice));
         emitterSquared += weight * emitterAmps * emitterAmps;
         gate += weight * gateAmps * gateVolts;
         gateSeries += weight * networkAmps * networkAmps * n.gateSeriesOhms;
         gateShunt += weight * gateVolts * gateVolts * n.gateShuntSiemens;
-        peaks(p, supply, base, baseTwoAmps);
+        peaks(p, supply, base, baseTwoVolts);
     }
 
     private void peaksAt(Piece piece, double time) {
         piece.look(time);
-        peaks(piece, piece.supplyVolts(), piece.baseOneVolts(), piece.baseTwoAmps(n));
+        peaks(piece, piece.supplyVolts(), piece.baseOneVolts(), piece.baseTwoVolts(n));
     }
 
-    private void peaks(Piece p, double supply, double base, double baseTwoAmps) {
-        double baseTwoVolts = supply - baseTwoAmps * n.baseTwoOhms;
+    private void peaks(Piece p, double supply, double base, double baseTwoVolts) {
         dropperPeakVolts = Math.max(dropperPeakVolts, dropperAmps(p, supply) * n.dropperOhms);
         zenerPeakAmps = Math.max(zenerPeakAmps, zenerAmps(p, supply));
         emitterPeakAmps = Math.max(emitterPeakAmps, p.emitterAmps());
@@ -101,6 +103,7 @@ final class Bearing {
                 zenerPeakAmps,
                 baseOne / seconds,
                 baseTwo / seconds,
+                lower / seconds,
                 ramp / seconds,
                 device / seconds,
                 Math.sqrt(emitterSquared / seconds),

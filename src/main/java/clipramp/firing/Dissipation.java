@@ -8,7 +8,8 @@ package clipramp.firing;
  * @param zenerWatts mean of V_S i_Z, W
  * @param zenerPeakAmps largest zener current, A
  * @param baseOneWatts R1, W
- * @param baseTwoWatts R2, W
+ * @param baseTwoWatts R2 (a programmable device: its upper resistor), W
+ * @param lowerWatts a programmable device's lower resistor, W; 0 for a unijunction transistor
  * @param rampWatts R_E, W
  * @param deviceWatts trigger device, base bar and emitter together, W
  * @param emitterRmsAmps rms emitter current, A
@@ -27,6 +28,7 @@ public record Dissipation(
         double zenerPeakAmps,
         double baseOneWatts,
         double baseTwoWatts,
+        double lowerWatts,
         double rampWatts,
         double deviceWatts,
         double emitterRmsAmps,

@@ -120,7 +120,7 @@ public final class SampleChecks {
 
     private static Dissipation dissipation() {
         return new Dissipation(
-                4.57, 324, 0.21, 0.03, 0.004, 0.003, 0.002, 0.031, 0.012, 0.41, 6.8, 19.6, 13.4, 1.1e-4, 0, 2e-6);
+                4.57, 324, 0.21, 0.03, 0.004, 0.003, 0, 0.002, 0.031, 0.012, 0.41, 6.8, 19.6, 13.4, 1.1e-4, 0, 2e-6);
     }
 
     /** Every verdict once and a long formula, worst first, none worse than asked. */

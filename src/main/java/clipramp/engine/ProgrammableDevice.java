@@ -1,0 +1,68 @@
+package clipramp.engine;
+
+import clipramp.circuit.Characteristic;
+import clipramp.circuit.ProgrammableUnijunction;
+import clipramp.circuit.ProgrammableUnijunction.AtGateResistance;
+import clipramp.circuit.RefusedCircuit;
+import clipramp.circuit.Trigger.ProgrammableTrigger;
+import java.util.List;
+import java.util.function.ToDoubleFunction;
+
+/**
+ * A programmable unijunction transistor with its divider as numbers. Offset, peak-point and valley current follow the
+ * gate resistance R_G = R_A parallel R_B: the offset linearly in log R_G, the currents as powers of it, through the data
+ * sheet's points and along the end slopes beyond them.
+ */
+public final class ProgrammableDevice {
+    /** Supply that data sheets give the valley current at, V. */
+    private static final double VALLEY_VOLTS = 10;
+
+    private ProgrammableDevice() {}
+
+    static void fill(Network n, ProgrammableTrigger trigger) {
+        ProgrammableUnijunction device = trigger.device();
+        n.programmable = true;
+        n.upperOhms = trigger.upper().value();
+        n.lowerOhms = trigger.lower().value();
+        double gateOhms = n.upperOhms * n.lowerOhms / (n.upperOhms + n.lowerOhms);
+        n.emitterDropVolts = offsetVolts(device, gateOhms, Characteristic::nominal);
+        n.peakCurrentAmps = amps(device.peakCurrentAmps(), gateOhms, Characteristic::nominal);
+        n.valleySiemens = amps(device.valleyCurrentAmps(), gateOhms, Characteristic::nominal) / VALLEY_VOLTS;
+        n.onIntercept = 0;
+        n.onOhms = (device.forwardVolts().nominal() - Network.PROGRAMMABLE_DROP_VOLTS) / device.forwardAmps();
+        if (!(n.onOhms > 0)) {
+            throw new RefusedCircuit(
+                    "trigger.device.forward",
+                    "the forward voltage of " + device.id() + " is "
+                            + device.forwardVolts().nominal() + " V; it must exceed "
+                            + Network.PROGRAMMABLE_DROP_VOLTS + " V.");
+        }
+    }
+
+    /** Peak-point voltage above the divider's at a gate resistance in ohms, V. */
+    public static double offsetVolts(
+            ProgrammableUnijunction device, double gateOhms, ToDoubleFunction<Characteristic> pick) {
+        return along(device.offsetVolts(), gateOhms, pick);
+    }
+
+    /** A tabulated current at a gate resistance in ohms, A. */
+    public static double amps(List<AtGateResistance> table, double gateOhms, ToDoubleFunction<Characteristic> pick) {
+        return Math.exp(along(table, gateOhms, c -> Math.log(pick.applyAsDouble(c))));
+    }
+
+    /** Straight lines over log R_G, the end slopes extended. */
+    private static double along(List<AtGateResistance> table, double gateOhms, ToDoubleFunction<Characteristic> pick) {
+        if (table.size() == 1) {
+            return pick.applyAsDouble(table.get(0).value());
+        }
+        int upper = 1;
+        while (upper < table.size() - 1 && table.get(upper).gateOhms() < gateOhms) {
+            upper++;
+        }
+        AtGateResistance a = table.get(upper - 1);
+        AtGateResistance b = table.get(upper);
+        double share = Math.log(gateOhms / a.gateOhms()) / Math.log(b.gateOhms() / a.gateOhms());
+        double low = pick.applyAsDouble(a.value());
+        return low + share * (pick.applyAsDouble(b.value()) - low);
+    }
+}
