@@ -12,7 +12,8 @@ import java.util.OptionalDouble;
  * @param startVolts residual voltage: ramp capacitor at the line zero that begins it, V
  * @param endVolts ramp capacitor at the line zero that ends it, V
  * @param clipFromRad angle from which the zener conducts, rad; empty if it never does
- * @param stalled whether the ramp was held at the peak point for want of peak-point current
+ * @param stalled whether the first pulse came out of a stall (the ramp held at the peak point for want of peak-point
+ *     current), or none came of one
  * @param latchedOn whether the trigger device stayed on after a pulse until the supply collapsed
  * @param pulses every pulse that began in it, in order
  * @param firingIndex index of the first pulse that turns the thyristor on and latches it; -1 for none

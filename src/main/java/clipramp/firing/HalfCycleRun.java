@@ -83,7 +83,7 @@ final class HalfCycleRun {
         clipUntil = Double.NEGATIVE_INFINITY;
         crestVolts = Double.NEGATIVE_INFINITY;
         crestSeconds = 0;
-        stalled = mode == Mode.STALLED;
+        stalled = false;
         latchedOn = false;
         conducting = false;
         trying = false;
@@ -105,7 +105,7 @@ final class HalfCycleRun {
     private void handle(Event event, SourceWave wave, PieceSink sink) {
         switch (event) {
             case FIRES -> fire(wave);
-            case STALLS -> stalled = true;
+            case STALLS -> stalled |= begun.isEmpty();
             case VALLEY -> endPulse(wave, sink);
             case ZENER -> noteLatchedOn();
             case RECTIFIER, GATE, UNSTALLS, END -> {}
@@ -114,8 +114,10 @@ final class HalfCycleRun {
 
     private void fire(SourceWave wave) {
         Piece before = stepper.piece();
+        before.look(stepper.seconds());
         double supply = before.supplyVolts();
         boolean afterStall = before.mode() == Mode.STALLED;
+        stalled = begun.isEmpty() ? afterStall : stalled;
         going = new PulseMeter(firing.network(), half, stepper.seconds(), stepper.rampVolts(), supply, afterStall);
         begun.add(going);
         if (firing.tapsThyristor() && !conducting && firing.anodeAmps(half, stepper.seconds()) > 0) {
@@ -167,6 +169,7 @@ final class HalfCycleRun {
             return;
         }
         Piece piece = stepper.piece();
+        piece.look(stepper.seconds());
         double throughResistor = (piece.supplyVolts() - piece.rampVolts()) / firing.network().rampOhms;
         if (throughResistor > HELD_BY_RESISTOR * piece.emitterAmps()) {
             latchedOn = true;
