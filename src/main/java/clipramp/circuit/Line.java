@@ -59,4 +59,18 @@ public record Line(double volts, double hertz, double lowVolts, double highVolts
         return Math.sqrt(
                 1 + harmonics.stream().mapToDouble(h -> h.share() * h.share()).sum());
     }
+
+    /** Largest magnitude of the line voltage, V, for an rms of the fundamental in V; to 1e-6 of it with harmonics. */
+    public double crestVolts(double fundamentalVolts) {
+        if (harmonics.isEmpty()) {
+            return Math.sqrt(2) * fundamentalVolts;
+        }
+        int highest = harmonics.stream().mapToInt(Harmonic::order).max().orElse(1);
+        int samples = 2000 * highest;
+        double crest = 0;
+        for (int i = 0; i < samples; i++) {
+            crest = Math.max(crest, Math.abs(voltsAt(fundamentalVolts, 2 * Math.PI * i / samples)));
+        }
+        return crest;
+    }
 }

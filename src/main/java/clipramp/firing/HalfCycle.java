@@ -12,6 +12,8 @@ import java.util.OptionalDouble;
  * @param startVolts residual voltage: ramp capacitor at the line zero that begins it, V
  * @param endVolts ramp capacitor at the line zero that ends it, V
  * @param clipFromRad angle from which the zener conducts, rad; empty if it never does
+ * @param collapseRad angle at which the supply collapses: the zener's last stop, or the supply's crest if it never
+ *     conducts, rad
  * @param stalled whether the first pulse came out of a stall (the ramp held at the peak point for want of peak-point
  *     current), or none came of one
  * @param latchedOn whether the trigger device stayed on after a pulse until the supply collapsed
@@ -24,6 +26,7 @@ public record HalfCycle(
         double startVolts,
         double endVolts,
         OptionalDouble clipFromRad,
+        double collapseRad,
         boolean stalled,
         boolean latchedOn,
         List<Pulse> pulses,
@@ -70,6 +73,7 @@ public record HalfCycle(
                 startVolts,
                 endVolts,
                 clipFromRad,
+                collapseRad,
                 stalled,
                 latchedOn,
                 others,

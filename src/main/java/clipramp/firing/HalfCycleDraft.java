@@ -40,6 +40,7 @@ record HalfCycleDraft(
                 startVolts,
                 endVolts,
                 clipRad,
+                firing.lineRad(half, collapse) - fold,
                 stalled,
                 latchedOn,
                 done,

@@ -27,23 +27,21 @@ public final class ActingPulses {
      */
     record Slot(boolean positive, OptionalDouble firingRad, int index) {}
 
-    /**
-     * By how many half cycles of the load a pulse acts later than the supply's half cycle that made it: 0, or 1 past
-     * the load's zero, or -1 where a leading winding makes it before the zero.
-     */
-    public static int halfCyclesLater(Design design, Solution solution, Pulse pulse) {
-        double lagRad = design.clip().winding().map(Winding::lagRad).orElse(0.0);
-        double madeAtRad = solution.condition().omega() * pulse.startSeconds() + lagRad;
-        return (int) Math.round((madeAtRad - pulse.startRad()) / Math.PI);
-    }
-
     /** Whether the thyristor is fired, in some half cycle, by a pulse made in the half cycle before: full power. */
     public static boolean spillOver(Design design, Solution solution) {
-        return solution.halves().stream()
-                .flatMap(half -> half.pulses().stream())
-                .anyMatch(pulse -> pulse.latches()
-                        && pulse.startRad() < Math.PI / 2
-                        && halfCyclesLater(design, solution, pulse) > 0);
+        double lagRad = design.clip().winding().map(Winding::lagRad).orElse(0.0);
+        boolean periods = spansPeriods(solution);
+        for (HalfCycle half : solution.halves()) {
+            for (Pulse pulse : half.pulses()) {
+                // A folded pulse stands early in the half cycle that it acts in, whenever it was made.
+                double madeRad = solution.condition().omega() * pulse.startSeconds() + lagRad;
+                boolean later = periods ? madeRad >= Math.PI : madeRad - pulse.startRad() > Math.PI / 2;
+                if (pulse.latches() && later) {
+                    return true;
+                }
+            }
+        }
+        return false;
     }
 
     /** Whether one of the solution's halves spans a whole period, as a single-diode supply's does. */
@@ -55,36 +53,47 @@ public final class ActingPulses {
      * Successive half cycles of the load, an even number of them where the solution has one or two halves. Of every
      * pulse that latches the thyristor in one, the earliest counts.
      */
-    static List<Slot> slots(Design design, Solution solution) {
+    static List<Slot> slots(Solution solution) {
+        return spansPeriods(solution) ? ofPeriods(solution) : ofHalves(solution);
+    }
+
+    private static List<Slot> ofHalves(Solution solution) {
         List<HalfCycle> halves = solution.halves();
-        boolean periods = spansPeriods(solution);
-        boolean doubled = periods || halves.size() == 1;
-        int count = doubled ? 2 * halves.size() : halves.size();
-        double[] earliest = new double[count];
-        Arrays.fill(earliest, Double.POSITIVE_INFINITY);
-        for (int slot = 0; slot < count; slot++) {
-            boolean unfed = periods && slot % 2 == 1;
-            if (!unfed) {
-                collect(design, solution, halves.get(doubled ? slot / 2 : slot), slot, earliest);
-            }
-        }
         List<Slot> slots = new ArrayList<>();
-        for (int slot = 0; slot < count; slot++) {
-            HalfCycle half = halves.get(doubled ? slot / 2 : slot);
-            boolean positive = half.positive() ^ (doubled && slot % 2 == 1);
-            OptionalDouble rad =
-                    Double.isInfinite(earliest[slot]) ? OptionalDouble.empty() : OptionalDouble.of(earliest[slot]);
-            slots.add(new Slot(positive, rad, doubled ? slot / 2 : slot));
+        for (int index = 0; index < halves.size(); index++) {
+            HalfCycle half = halves.get(index);
+            OptionalDouble rad = half.pulses().stream()
+                    .filter(Pulse::latches)
+                    .mapToDouble(Pulse::startRad)
+                    .min();
+            slots.add(new Slot(half.positive(), rad, index));
+            if (halves.size() == 1) {
+                slots.add(new Slot(!half.positive(), rad, index));
+            }
         }
         return slots;
     }
 
-    private static void collect(Design design, Solution solution, HalfCycle made, int slot, double[] earliest) {
-        for (Pulse pulse : made.pulses()) {
-            if (pulse.latches()) {
-                int acts = Math.floorMod(slot + halfCyclesLater(design, solution, pulse), earliest.length);
-                earliest[acts] = Math.min(earliest[acts], pulse.startRad());
+    /** Pulses of a whole period stand at 0 to 2 pi from the line's positive-going zero, a lag added. */
+    private static List<Slot> ofPeriods(Solution solution) {
+        List<HalfCycle> periods = solution.halves();
+        double[] earliest = new double[2 * periods.size()];
+        Arrays.fill(earliest, Double.POSITIVE_INFINITY);
+        for (int index = 0; index < periods.size(); index++) {
+            for (Pulse pulse : periods.get(index).pulses()) {
+                if (pulse.latches()) {
+                    int later = (int) Math.floor(pulse.startRad() / Math.PI);
+                    int slot = Math.floorMod(2 * index + later, earliest.length);
+                    earliest[slot] = Math.min(earliest[slot], pulse.startRad() - later * Math.PI);
+                }
             }
         }
+        List<Slot> slots = new ArrayList<>();
+        for (int slot = 0; slot < earliest.length; slot++) {
+            OptionalDouble rad =
+                    Double.isInfinite(earliest[slot]) ? OptionalDouble.empty() : OptionalDouble.of(earliest[slot]);
+            slots.add(new Slot(slot % 2 == 0, rad, slot / 2));
+        }
+        return slots;
     }
 }

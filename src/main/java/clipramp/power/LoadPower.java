@@ -22,7 +22,7 @@ public final class LoadPower {
      * @throws UnsupportedLoadException for a load that is not a resistor
      */
     public static LoadResult of(Design design, Condition condition, Solution solution) {
-        return of(design, condition, solution.halves().size(), ActingPulses.slots(design, solution));
+        return of(design, condition, solution.halves().size(), ActingPulses.slots(solution));
     }
 
     /** The same with every half cycle fired at one angle, rad: what a firing angle is worth, whatever makes it. */

@@ -65,6 +65,7 @@ public final class SampleChecks {
                 0.52,
                 0.52,
                 OptionalDouble.of(Math.toRadians(4.1)),
+                Math.toRadians(175),
                 false,
                 false,
                 fires ? List.of(pulse) : List.of(),

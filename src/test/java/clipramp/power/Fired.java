@@ -68,6 +68,7 @@ final class Fired {
                 0.5,
                 0.5,
                 OptionalDouble.of(0.1),
+                3.05,
                 false,
                 false,
                 List.of(pulse),

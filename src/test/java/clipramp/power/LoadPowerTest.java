@@ -254,7 +254,8 @@ class LoadPowerTest {
     void aSingleDiodeSupplyFiresOneHalfCycleOfAFullWaveStageOnly() {
         Design design = Fired.textbook(Stage.TRIAC, 50);
         HalfCycle half = Fired.half(EUROPE, true, 1.0, true);
-        HalfCycle period = new HalfCycle(true, 0.02, 0.5, 0.5, OptionalDouble.empty(), false, false, half.pulses(), 0);
+        HalfCycle period =
+                new HalfCycle(true, 0.02, 0.5, 0.5, OptionalDouble.empty(), 1.57, false, false, half.pulses(), 0);
         LoadResult load = LoadPower.of(design, EUROPE, new Solution(EUROPE, 1e4, Settling.STEADY, List.of(period)));
         LoadResult both = LoadPower.of(design, EUROPE, Fired.at(EUROPE, 1.0));
         assertThat(load.watts()).isCloseTo(both.watts() / 2, within(1e-9));
