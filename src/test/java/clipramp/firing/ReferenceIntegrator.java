@@ -76,7 +76,7 @@ final class ReferenceIntegrator {
         List<ReferenceHalf> halves = new ArrayList<>();
         List<AtZero> zeros = new ArrayList<>();
         zeros.add(new AtZero(volts, emitter));
-        boolean alike = !p.bridge || p.isSymmetric();
+        boolean alike = !p.bridge || p.isSymmetric() && !p.halfWaveStage;
         for (int k = 0; k < HALF_CYCLES; k++) {
             halves.add(half(!p.bridge ? !p.opposite : k % 2 == 0));
             AtZero end = new AtZero(volts, emitter);
@@ -107,7 +107,7 @@ final class ReferenceIntegrator {
         now = 0;
         meter = null;
         double start = volts;
-        nodes.search(emitter, e(0), eRate(0), volts);
+        settleBranches();
         while (now < halfSeconds) {
             piece();
         }
@@ -211,6 +211,19 @@ final class ReferenceIntegrator {
         }
     }
 
+    /** Finds which branches conduct now that the emitter's state has jumped. */
+    private void settleBranches() {
+        int before = nodes.branches();
+        nodes.search(emitter, e(now), eRate(now), volts);
+        int changed = (before ^ nodes.branches()) & 3;
+        if ((changed & 1) != 0) {
+            log(nodes.rectifier ? Kind.RECTIFIER_ON : Kind.RECTIFIER_OFF);
+        }
+        if ((changed & 2) != 0) {
+            log(nodes.zener ? Kind.ZENER_ON : Kind.ZENER_OFF);
+        }
+    }
+
     private void log(Kind kind) {
         events.add(new Event(kind, now));
     }
@@ -242,7 +255,7 @@ final class ReferenceIntegrator {
     private void release() {
         log(Kind.RELEASE);
         emitter = Emitter.OFF;
-        nodes.search(emitter, e(now), eRate(now), volts);
+        settleBranches();
     }
 
     /**
@@ -282,7 +295,7 @@ final class ReferenceIntegrator {
         Pulse pulse = pulses.get(count);
         if (pulse.turnsOn()) {
             thyristorOn = pulse.latches();
-            nodes.search(emitter, e(now), eRate(now), volts);
+            settleBranches();
             return;
         }
         pulses.remove(count);
@@ -297,7 +310,7 @@ final class ReferenceIntegrator {
     private void conduct(double supply, double peak) {
         meter = new ReferencePulseMeter(p, now, supply, peak, volts, held);
         emitter = Emitter.ON;
-        nodes.search(emitter, e(now), eRate(now), volts);
+        settleBranches();
         meter.observe(nodes);
         if (nodes.gateAmps >= p.triggerAmps) {
             meter.rise(now);
@@ -308,7 +321,7 @@ final class ReferenceIntegrator {
         log(Kind.VALLEY);
         closePulse();
         emitter = Emitter.OFF;
-        nodes.search(emitter, e(now), eRate(now), volts);
+        settleBranches();
         if (nodes.peakVolts <= volts) {
             throw new IllegalStateException("the valley lies above the peak point at " + now);
         }
