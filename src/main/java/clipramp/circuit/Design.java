@@ -49,6 +49,13 @@ public record Design(
         return new Condition(line.volts(), line.hertz(), 25);
     }
 
+    /** Whether the stage's own bridge feeds the firing supply too, so that there is no other rectifier. */
+    public boolean isSuppliedByStageBridge() {
+        boolean acrossIt =
+                stage == Stage.BRIDGE_DC || (stage == Stage.BRIDGE_AC && clip.tap() == ClipSupply.Tap.THYRISTOR);
+        return acrossIt && !clip.isIsolated() && clip.rectifier() == ClipSupply.Rectifier.BRIDGE;
+    }
+
     /** The same design on another line. */
     public Design withLine(Line newLine) {
         return new Design(

@@ -1,6 +1,5 @@
 package clipramp.figures;
 
-import java.awt.Color;
 import java.awt.Dimension;
 import java.awt.Graphics2D;
 import java.awt.RenderingHints;
@@ -105,7 +104,7 @@ public final class Surfaces {
         }
         BufferedImage image = new BufferedImage((int) columns, (int) rows, BufferedImage.TYPE_INT_RGB);
         Graphics2D g = image.createGraphics();
-        g.setColor(Color.WHITE);
+        g.setColor(style.palette().ground());
         g.fillRect(0, 0, image.getWidth(), image.getHeight());
         g.scale(scale, scale);
         draw(figure, g, width, height, style);

@@ -39,6 +39,15 @@ public final class Gallery {
         double rad = early.lanes().firingRad().orElseThrow();
         figures.put("lanes-early", early);
         figures.put("lanes-zoom", early.withView(rad - 0.005, rad + 0.015));
+        figures.put(
+                "circuit-bridge-dc",
+                new CircuitFigure(SampleDesigns.heater()).withChosen(java.util.Set.of("ramp.capacitor")));
+        figures.put("circuit-half-wave", new CircuitFigure(SampleDesigns.halfWaveHeater()));
+        figures.put("circuit-triac", new CircuitFigure(SampleDesigns.triacHeater()));
+        figures.put("circuit-inverse", new CircuitFigure(SampleDesigns.inverseParallelHeater()));
+        figures.put("circuit-bridge-ac", new CircuitFigure(SampleDesigns.thyristorTapHeater()));
+        figures.put("circuit-winding", new CircuitFigure(SampleDesigns.windingHeater(0.1, true)));
+        figures.put("circuit-programmable", new CircuitFigure(SampleDesigns.programmableHeater()));
         return figures;
     }
 }

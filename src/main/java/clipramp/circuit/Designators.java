@@ -1,0 +1,47 @@
+package clipramp.circuit;
+
+import java.util.LinkedHashMap;
+import java.util.Map;
+
+/** Every part's name in the drawing by its design key: the design's own names first, else letters as the formulas have. */
+public final class Designators {
+    private Designators() {}
+
+    /** Names of all parts that a design has, in the order of the signal. */
+    public static Map<String, String> of(Design design) {
+        Map<String, String> names = new LinkedHashMap<>();
+        names.put("load", "RL");
+        boolean shared = design.isSuppliedByStageBridge();
+        if (design.stage().bridgeDiodes() > 0) {
+            names.put("stage-diodes", shared ? "D1–D4" : "D5–D8");
+        }
+        if (design.clip().winding().isPresent()) {
+            names.put("clip.winding", "T2");
+        }
+        if (!shared) {
+            names.put("clip.rectifier", design.clip().rectifier() == ClipSupply.Rectifier.BRIDGE ? "D1–D4" : "D1");
+        }
+        names.put("clip.dropper", "RD");
+        names.put("clip.zener", "DZ");
+        names.put("ramp.fixed", "RF");
+        design.ramp().pot().ifPresent(pot -> {
+            names.put("ramp.pot.track", "RP");
+            pot.shunt().ifPresent(shunt -> names.put("ramp.pot.shunt", "RS"));
+        });
+        names.put("ramp.capacitor", "CE");
+        names.put("trigger.device", "Q1");
+        if (design.trigger() instanceof Trigger.UnijunctionTrigger) {
+            names.put("trigger.base-two", "R2");
+        } else {
+            names.put("trigger.upper", "RA");
+            names.put("trigger.lower", "RB");
+        }
+        names.put("trigger.base-one", "R1");
+        names.put("gate.series", "RG");
+        design.gate().shunt().ifPresent(shunt -> names.put("gate.shunt", "RGK"));
+        design.gate().transformer().ifPresent(transformer -> names.put("gate.transformer", "T1"));
+        names.put("thyristor.device", design.stage() == Stage.INVERSE_PARALLEL ? "V1, V2" : "V1");
+        names.replaceAll((key, name) -> design.designators().getOrDefault(key, name));
+        return names;
+    }
+}
