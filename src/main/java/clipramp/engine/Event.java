@@ -8,6 +8,8 @@ public enum Event {
     ZENER,
     /** The gate junction starts or stops conducting. */
     GATE,
+    /** The diode across the primary starts or stops conducting. */
+    CLAMP,
     /** The ramp has reached the peak point and the device fires, at once or out of a stall. */
     FIRES,
     /** The ramp has reached the peak point and the emitter gets too little current. */

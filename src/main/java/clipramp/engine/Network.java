@@ -49,6 +49,20 @@ public final class Network {
     public double upperOhms;
     /** R_B, lower divider resistor of a programmable device, ohm. */
     public double lowerOhms;
+    /** Whether a pulse transformer stands between base one and the gate. */
+    public boolean transformerCoupled;
+    /** L_m at the primary, H. */
+    public double magnetisingHenries;
+    /** Primary over secondary turns. */
+    public double turnsRatio;
+    /** Secondaries that carry a gate each. */
+    public int secondaries;
+    /** Primary winding resistance, ohm. */
+    public double primaryOhms;
+    /** Resistance of one secondary, ohm. */
+    public double secondaryOhms;
+    /** Drop of the diode across the primary, V; POSITIVE_INFINITY for none. */
+    public double clampVolts = Double.POSITIVE_INFINITY;
     /** R_G, ohm. */
     public double gateSeriesOhms;
     /** 1/R_GK, S; 0 for none. */
@@ -78,11 +92,17 @@ public final class Network {
     double gateDropVolts;
     /** 1/R_B of a programmable device, S; 0 for a unijunction transistor. */
     double lowerSiemens;
-    /** Gate network seen from base one with the junction off, S. */
+    /** R2 and base bar in series with the device off, S; 0 for a programmable device. */
+    double barSiemens;
+    /** Standoff point's share of the voltage across R2 and base bar. */
+    double standoffShare;
+    /** A programmable device's divider, S; 0 for a unijunction transistor. */
+    double dividerSiemens;
+    /** One gate network behind its winding with the junction off, S. */
     double gateOffSiemens;
-    /** Gate network seen from base one with the junction on, S. */
+    /** The same with the junction on, S. */
     double gateOnSiemens;
-    /** Open-circuit voltage of the gate network with the junction on, V. */
+    /** Open-circuit voltage of one gate network with the junction on, V. */
     double gateOnVolts;
 
     /** Works out what follows from the fields above. */
@@ -96,18 +116,24 @@ public final class Network {
     }
 
     private void deriveGate() {
-        gateOffSiemens = gateShuntSiemens == 0 ? 0 : 1 / (gateSeriesOhms + 1 / gateShuntSiemens);
+        double leadOhms = gateSeriesOhms + secondaryOhms;
+        gateOffSiemens = gateShuntSiemens == 0 ? 0 : 1 / (leadOhms + 1 / gateShuntSiemens);
         double junctionSiemens = gateShuntSiemens + 1 / gateSlopeOhms;
         gateOnVolts = gateKneeVolts / gateSlopeOhms / junctionSiemens;
-        gateOnSiemens = 1 / (gateSeriesOhms + 1 / junctionSiemens);
+        gateOnSiemens = 1 / (leadOhms + 1 / junctionSiemens);
     }
 
     private void deriveBar() {
-        // R1p: R1 parallel to the gate network with its junction off.
-        double baseOneParallel = 1 / (1 / baseOneOhms + gateOffSiemens);
+        // R1p: R1 parallel to the gate network with its junction off, or to the primary winding's resistance.
+        double baseOneParallel = transformerCoupled
+                ? baseOneOhms * primaryOhms / (baseOneOhms + primaryOhms)
+                : 1 / (1 / baseOneOhms + gateOffSiemens);
         double bar = baseTwoOhms + interbaseOhms + baseOneParallel;
         peakShare = (baseOneParallel + standoff * interbaseOhms) / bar;
         standingSiemens = 1 / bar;
+        barSiemens = 1 / (baseTwoOhms + interbaseOhms);
+        standoffShare = standoff * interbaseOhms * barSiemens;
+        dividerSiemens = 0;
         quiescentShare = baseOneParallel / bar;
         baseTwoOnSiemens = 1 / (baseTwoOhms + modulatedOhms);
         onDropVolts = emitterDropVolts;
@@ -119,6 +145,9 @@ public final class Network {
     private void deriveDivider() {
         peakShare = lowerOhms / (upperOhms + lowerOhms);
         standingSiemens = 1 / (upperOhms + lowerOhms);
+        barSiemens = 0;
+        standoffShare = 0;
+        dividerSiemens = standingSiemens;
         quiescentShare = 0;
         baseTwoOnSiemens = 1 / upperOhms;
         onDropVolts = PROGRAMMABLE_DROP_VOLTS;

@@ -4,6 +4,7 @@ import clipramp.circuit.Condition;
 import clipramp.circuit.Design;
 import clipramp.circuit.GateDrive;
 import clipramp.circuit.Part;
+import clipramp.circuit.PulseTransformer;
 import clipramp.circuit.RefusedCircuit;
 import clipramp.circuit.ThyristorDevice;
 import clipramp.circuit.ThyristorDevice.Quadrant;
@@ -25,7 +26,7 @@ public final class NetworkOfDesign {
     private NetworkOfDesign() {}
 
     /**
-     * @param design the design; direct coupling
+     * @param design the design
      * @param condition line and temperature; parts are at the ambient temperature
      * @param rampOhms R_E, ohm
      * @throws RefusedCircuit where the device's data contradict themselves or the circuit is not computed
@@ -78,10 +79,9 @@ public final class NetworkOfDesign {
 
     private static void gate(Network n, Design design, Condition condition) {
         GateDrive drive = design.gate();
-        if (drive.coupling() == GateDrive.Coupling.TRANSFORMER) {
-            throw new RefusedCircuit(
-                    "gate.coupling", "transformer coupling is not computed by this version. Use direct coupling.");
-        }
+        drive.transformer()
+                .ifPresent(
+                        transformer -> transformer(n, transformer, design.clip().diodeDropVolts()));
         ThyristorDevice thyristor = design.thyristor().device();
         n.gateSeriesOhms = drive.series().value();
         n.gateShuntSiemens = drive.shunt().map(s -> 1 / s.value()).orElse(0.0);
@@ -94,6 +94,16 @@ public final class NetworkOfDesign {
                 .latching()
                 .map(curve -> curve.ampsAt(condition.celsius()) + gateBleedAmps(design))
                 .orElse(0.0);
+    }
+
+    private static void transformer(Network n, PulseTransformer transformer, double diodeVolts) {
+        n.transformerCoupled = true;
+        n.turnsRatio = transformer.ratio();
+        n.secondaries = transformer.secondaries();
+        n.magnetisingHenries = transformer.magnetisingHenries();
+        n.primaryOhms = transformer.primaryOhms();
+        n.secondaryOhms = transformer.secondaryOhms();
+        n.clampVolts = transformer.clampDiode() ? diodeVolts : Double.POSITIVE_INFINITY;
     }
 
     /**
@@ -113,7 +123,7 @@ public final class NetworkOfDesign {
 
     /**
      * What a conducting SCR's gate junction loses to the gate circuit, beyond the sheet's own gate-cathode resistor: 0.7
-     * V over R_GK parallel (R_G + R1), A. It raises latching and holding current. A triac's terminals are too well joined inside to notice.
+     * V over R_GK parallel (R_G + R1, or the secondary winding), A. It raises latching and holding current. A triac's terminals are too well joined inside to notice.
      */
     public static double gateBleedAmps(Design design) {
         if (design.thyristor().device().kind() == ThyristorDevice.Kind.TRIAC) {

@@ -1,6 +1,9 @@
 package clipramp.engine;
 
-/** Kirchhoff's current law at the clipped supply and at base one, for one state of rectifier, zener and gate junction. */
+/**
+ * Kirchhoff's current law at the clipped supply and at base one, for one state of rectifier, zener and gate junction;
+ * direct coupling here, a pulse transformer in {@link TransformerLaws}.
+ */
 final class NodeLaws {
     /** More rounds than three switches have states: a network that has not settled by then never will. */
     private static final int MOST_ROUNDS = 9;
@@ -9,6 +12,10 @@ final class NodeLaws {
 
     /** Sets the piece's linear forms for its mode and switches. */
     static void shape(Network n, Piece piece) {
+        if (n.transformerCoupled) {
+            TransformerLaws.shape(n, piece);
+            return;
+        }
         switch (piece.mode) {
             case OFF -> shapeOff(n, piece);
             case ON -> shapeOn(n, piece);
@@ -20,18 +27,25 @@ final class NodeLaws {
      * Finds the state of rectifier, zener and gate junction that agrees with itself, and shapes the piece for it.
      *
      * @param rampVolts ramp voltage, V
+     * @param fluxAmps magnetising current, A; 0 without a transformer
      * @param sourceVolts source voltage, V
      */
-    static void settle(Network n, Piece piece, double rampVolts, double sourceVolts) {
+    static void settle(Network n, Piece piece, double rampVolts, double fluxAmps, double sourceVolts) {
         for (int round = 0; round < MOST_ROUNDS; round++) {
             shape(n, piece);
-            double supply = piece.supply.at(rampVolts, sourceVolts);
+            double supply = piece.supply.at(rampVolts, fluxAmps, sourceVolts);
             boolean rectifies = sourceVolts > supply;
             boolean clips = supply > n.zenerKneeVolts;
-            boolean gateConducts = piece.mode == Mode.ON && piece.gate.at(rampVolts, sourceVolts) > n.gateKneeVolts;
-            if (rectifies == piece.rectifies && clips == piece.clips && gateConducts == piece.gateConducts) {
+            boolean gateConducts =
+                    piece.mode == Mode.ON && piece.gate.at(rampVolts, fluxAmps, sourceVolts) > n.gateKneeVolts;
+            boolean clamps = n.transformerCoupled && TransformerLaws.clamps(n, piece, rampVolts, fluxAmps, sourceVolts);
+            if (rectifies == piece.rectifies
+                    && clips == piece.clips
+                    && gateConducts == piece.gateConducts
+                    && clamps == piece.clamps) {
                 return;
             }
+            piece.clamps = clamps;
             piece.rectifies = rectifies;
             piece.clips = clips;
             piece.gateConducts = gateConducts;
@@ -68,7 +82,17 @@ final class NodeLaws {
         piece.gateConducts = false;
         double base = n.quiescentShare;
         piece.baseOne.set(base * piece.supply.ramp, base * piece.supply.source, base * piece.supply.constant);
+        peakFromSupply(n, piece);
         gateFromBaseOne(n, piece);
+    }
+
+    /** V_P = kappa V_S + V_D. */
+    private static void peakFromSupply(Network n, Piece piece) {
+        double share = n.peakShare;
+        piece.peak.set(
+                share * piece.supply.ramp,
+                share * piece.supply.source,
+                share * piece.supply.constant + n.emitterDropVolts);
     }
 
     /** Two nodes at once: V_S and V_B1, by Cramer's rule, for unit ramp voltage, unit source voltage and constants. */
@@ -101,6 +125,7 @@ final class NodeLaws {
                 (1 - piece.baseOne.ramp - n.onIntercept * piece.supply.ramp) * on,
                 (-piece.baseOne.source - n.onIntercept * piece.supply.source) * on,
                 (-piece.baseOne.constant - n.onDropVolts - n.onIntercept * piece.supply.constant) * on);
+        peakFromSupply(n, piece);
         gateFromBaseOne(n, piece);
     }
 

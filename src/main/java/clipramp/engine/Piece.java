@@ -1,8 +1,8 @@
 package clipramp.engine;
 
 /**
- * The circuit between two events: node voltages as linear forms of ramp and source voltage, and the ramp voltage as one
- * exponential and the source's sinusoids, exactly.
+ * The circuit between two events: node voltages as linear forms of ramp and source voltage (and of a pulse transformer's
+ * magnetising current), and the ramp voltage as one exponential and the source's sinusoids, exactly.
  *
  * <p>Times are seconds since the line zero that begins the half cycle. Mutable, reused for every piece; {@link #copy()}
  * keeps one.
@@ -12,11 +12,23 @@ public final class Piece {
     boolean rectifies;
     boolean clips;
     boolean gateConducts;
+    boolean clamps;
 
     final Affine supply = new Affine();
     final Affine baseOne = new Affine();
     final Affine emitter = new Affine();
     final Affine gate = new Affine();
+    /** V_P, V. */
+    final Affine peak = new Affine();
+    /** Voltage across the primary, V; with a pulse transformer only. */
+    final Affine primary = new Affine();
+    /** Current through the clamp diode, A; while it conducts. */
+    final Affine clamp = new Affine();
+
+    private boolean coupled;
+    private TwoStates states = new TwoStates();
+    private final Affine rampDrive = new Affine();
+    private final Affine fluxDrive = new Affine();
 
     /** dV_C/dt = -rate V_C + driveSource e + driveConstant. */
     private double rate;
@@ -31,33 +43,63 @@ public final class Piece {
     // Where the piece was last looked at.
     double rampVolts;
     double rampSlope;
+    double fluxAmps;
+    double fluxSlope;
     double sourceVolts;
     double sourceSlope;
     double sourceBend;
     private double decay;
 
-    /** Fills in the piece that begins at a time with a ramp voltage; node equations must be set already. */
-    void begin(Network n, SourceWave source, double seconds, double startVolts) {
+    /**
+     * Fills in the piece that begins at a time with a ramp voltage and a magnetising current; node equations must be set
+     * already.
+     */
+    void begin(Network n, SourceWave source, double seconds, double startVolts, double startFlux) {
         wave = source;
         startSeconds = seconds;
+        coupled = n.transformerCoupled;
+        if (coupled) {
+            couple(n, source, startVolts, startFlux);
+            look(seconds);
+            return;
+        }
         if (sines.length < source.count) {
             sines = new double[source.count];
             cosines = new double[source.count];
         }
         if (mode == Mode.STALLED) {
-            follow(n, source);
+            follow(source);
         } else {
             charge(n, source, startVolts);
         }
         look(seconds);
     }
 
+    /**
+     * Ramp and magnetising current together: L_m dI_m/dt = V_prim. In a stall the ramp is no state of its own; a silent
+     * one that decays like the flux keeps its place.
+     */
+    private void couple(Network n, SourceWave source, double startVolts, double startFlux) {
+        fluxDrive.zero();
+        fluxDrive.add(1 / n.magnetisingHenries, primary);
+        rampDrive.zero();
+        if (mode == Mode.STALLED) {
+            rampDrive.ramp = fluxDrive.flux;
+        } else {
+            rampDrive.add(1 / (n.rampOhms * n.capacitorFarads), supply);
+            rampDrive.ramp -= 1 / (n.rampOhms * n.capacitorFarads);
+            rampDrive.add(-1 / n.capacitorFarads, emitter);
+        }
+        states.begin(rampDrive, fluxDrive, source, startSeconds, mode == Mode.STALLED ? 0 : startVolts, startFlux);
+        rate = states.fastestRate();
+    }
+
     /** The capacitor held at the peak point: V_C = kappa V_S + V_D. */
-    private void follow(Network n, SourceWave source) {
+    private void follow(SourceWave source) {
         rate = 0;
         exponential = 0;
-        double share = n.peakShare * supply.source;
-        steady = n.peakShare * supply.constant + n.emitterDropVolts - share * source.dropVolts;
+        double share = peak.source;
+        steady = peak.constant - share * source.dropVolts;
         for (int i = 0; i < source.count; i++) {
             sines[i] = share * source.amplitudes[i];
             cosines[i] = 0;
@@ -88,6 +130,10 @@ public final class Piece {
 
     /** Works out ramp and source voltage with their slopes at a time; the getters below then speak of that time. */
     public void look(double seconds) {
+        if (coupled) {
+            lookAtBoth(seconds);
+            return;
+        }
         decay = exponential == 0 ? 0 : exponential * Math.exp(-rate * (seconds - startSeconds));
         double ramp = steady + decay;
         double slope = -rate * decay;
@@ -112,14 +158,42 @@ public final class Piece {
         sourceBend = bend;
     }
 
+    private void lookAtBoth(double seconds) {
+        double source = -wave.dropVolts;
+        double sourceRate = 0;
+        double bend = 0;
+        for (int i = 0; i < wave.count; i++) {
+            double w = wave.rates[i];
+            double sin = wave.amplitudes[i] * Math.sin(w * seconds + wave.phases[i]);
+            source += sin;
+            sourceRate += w * wave.amplitudes[i] * Math.cos(w * seconds + wave.phases[i]);
+            bend -= w * w * sin;
+        }
+        sourceVolts = source;
+        sourceSlope = sourceRate;
+        sourceBend = bend;
+        states.look(this, seconds);
+        if (mode == Mode.STALLED) {
+            rampVolts = value(peak);
+            rampSlope = slope(peak);
+        }
+    }
+
     /** A linear form where the piece was last looked at. */
     double value(Affine form) {
-        return form.ramp * rampVolts + form.source * sourceVolts + form.sourceSlope * sourceSlope + form.constant;
+        return form.ramp * rampVolts
+                + form.flux * fluxAmps
+                + form.source * sourceVolts
+                + form.sourceSlope * sourceSlope
+                + form.constant;
     }
 
     /** Time derivative of a linear form where the piece was last looked at. */
     double slope(Affine form) {
-        return form.ramp * rampSlope + form.source * sourceSlope + form.sourceSlope * sourceBend;
+        return form.ramp * rampSlope
+                + form.flux * fluxSlope
+                + form.source * sourceSlope
+                + form.sourceSlope * sourceBend;
     }
 
     /**
@@ -127,6 +201,9 @@ public final class Piece {
      * the sinusoids at full swing, and the exponential only where it bends upwards.
      */
     double bendBound(Affine form) {
+        if (coupled) {
+            return states.bendBound(form);
+        }
         double bound = Math.max(0, form.ramp * decay) * rate * rate;
         for (int i = 0; i < wave.count; i++) {
             double w = wave.rates[i];
@@ -140,6 +217,7 @@ public final class Piece {
     /** Size of a linear form's terms where the piece was last looked at: what its rounding is measured against. */
     double magnitude(Affine form) {
         return Math.abs(form.ramp * rampVolts)
+                + Math.abs(form.flux * fluxAmps)
                 + Math.abs(form.source * sourceVolts)
                 + Math.abs(form.sourceSlope * sourceSlope)
                 + Math.abs(form.constant);
@@ -150,6 +228,16 @@ public final class Piece {
         return rampVolts;
     }
 
+    /** Magnetising current of the pulse transformer where last looked at, A. */
+    public double fluxAmps() {
+        return fluxAmps;
+    }
+
+    /** Voltage across the pulse transformer's primary where last looked at, V. */
+    public double primaryVolts() {
+        return value(primary);
+    }
+
     /** Source voltage behind the dropper where last looked at, V. */
     public double sourceVolts() {
         return sourceVolts;
@@ -158,6 +246,11 @@ public final class Piece {
     /** V_S where last looked at, V. */
     public double supplyVolts() {
         return value(supply);
+    }
+
+    /** V_P where last looked at, V. */
+    public double peakPointVolts() {
+        return value(peak);
     }
 
     /** Slope of V_S where last looked at, V/s. */
@@ -192,15 +285,16 @@ public final class Piece {
 
     /** Current from the supply towards base two (a programmable device: through its upper resistor), A. */
     public double baseTwoAmps(Network n) {
-        return mode == Mode.ON
-                ? n.baseTwoOnSiemens * (value(supply) - value(baseOne) - n.gateDropVolts)
-                : n.standingSiemens * value(supply);
+        if (mode == Mode.ON) {
+            return n.baseTwoOnSiemens * (value(supply) - value(baseOne) - n.gateDropVolts);
+        }
+        return n.barSiemens * (value(supply) - value(baseOne)) + n.dividerSiemens * value(supply);
     }
 
     /** Voltage at base two (a programmable device: at its gate node) where last looked at, V. */
     public double baseTwoVolts(Network n) {
         if (n.programmable) {
-            return mode == Mode.ON ? value(baseOne) + n.gateDropVolts : n.peakShare * value(supply);
+            return mode == Mode.ON ? value(baseOne) + n.gateDropVolts : value(peak) - n.emitterDropVolts;
         }
         return value(supply) - n.baseTwoOhms * baseTwoAmps(n);
     }
@@ -225,7 +319,7 @@ public final class Piece {
         return FirstCrossing.after(this, form, from, limit);
     }
 
-    /** Decay rate of the piece's exponential, 1/s. */
+    /** Decay rate of the piece's (faster) exponential, 1/s. */
     public double ratePerSecond() {
         return rate;
     }
@@ -263,10 +357,16 @@ public final class Piece {
         other.rectifies = rectifies;
         other.clips = clips;
         other.gateConducts = gateConducts;
+        other.clamps = clamps;
+        other.coupled = coupled;
+        other.states = coupled ? states.copy() : states;
         other.supply.copy(supply);
         other.baseOne.copy(baseOne);
         other.emitter.copy(emitter);
         other.gate.copy(gate);
+        other.peak.copy(peak);
+        other.primary.copy(primary);
+        other.clamp.copy(clamp);
         other.rate = rate;
         other.startSeconds = startSeconds;
         other.exponential = exponential;

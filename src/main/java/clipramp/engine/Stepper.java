@@ -22,19 +22,22 @@ public final class Stepper {
     private boolean rectifies;
     private boolean clips;
     private boolean gateConducts;
+    private boolean clamps;
     private double seconds;
     private double rampVolts;
+    private double fluxAmps;
 
     public Stepper(Network network) {
         n = network;
     }
 
-    /** Begins a half cycle with the state that the last one ended in. */
-    public void start(SourceWave source, Mode startMode, double startRampVolts) {
+    /** Begins a half cycle with the state (mode, ramp voltage, magnetising current) that the last one ended in. */
+    public void start(SourceWave source, Mode startMode, double startRampVolts, double startFluxAmps) {
         wave = source;
         mode = startMode;
         seconds = 0;
         rampVolts = startRampVolts;
+        fluxAmps = startFluxAmps;
         settle();
     }
 
@@ -45,9 +48,10 @@ public final class Stepper {
     }
 
     /** Goes back to an instant just after firing. */
-    public void returnToFiring(double firingSeconds, double firingRampVolts) {
+    public void returnToFiring(double firingSeconds, double firingRampVolts, double firingFluxAmps) {
         seconds = firingSeconds;
         rampVolts = firingRampVolts;
+        fluxAmps = firingFluxAmps;
         mode = Mode.ON;
         settle();
     }
@@ -63,8 +67,9 @@ public final class Stepper {
         piece.rectifies = rectifies;
         piece.clips = clips;
         piece.gateConducts = gateConducts;
+        piece.clamps = clamps;
         NodeLaws.shape(n, piece);
-        piece.begin(n, wave, seconds, rampVolts);
+        piece.begin(n, wave, seconds, rampVolts, fluxAmps);
         double time = limitSeconds;
         Event event = Event.END;
         double at;
@@ -111,9 +116,17 @@ public final class Stepper {
             time = at;
             event = Event.RECTIFIER;
         }
+        if (n.clampVolts < Double.POSITIVE_INFINITY) {
+            at = clampSwitches(time);
+            if (at < time) {
+                time = at;
+                event = Event.CLAMP;
+            }
+        }
         seconds = time;
         piece.look(time);
         rampVolts = piece.rampVolts;
+        fluxAmps = piece.fluxAmps;
         return pass(event);
     }
 
@@ -122,6 +135,7 @@ public final class Stepper {
             case RECTIFIER -> rectifies = !rectifies;
             case ZENER -> clips = !clips;
             case GATE -> gateConducts = !gateConducts;
+            case CLAMP -> clamps = !clamps;
             case UNSTALLS -> mode = Mode.OFF;
             case VALLEY -> {
                 mode = Mode.OFF;
@@ -154,7 +168,7 @@ public final class Stepper {
         form.copy(piece.supply);
         form.source -= 1;
         if (!rectifies) {
-            negate();
+            form.negate();
         }
         return search(limit);
     }
@@ -163,7 +177,7 @@ public final class Stepper {
         form.copy(piece.supply);
         form.constant -= n.zenerKneeVolts;
         if (clips) {
-            negate();
+            form.negate();
         }
         return search(limit);
     }
@@ -172,40 +186,47 @@ public final class Stepper {
         form.copy(piece.gate);
         form.constant -= n.gateKneeVolts;
         if (gateConducts) {
-            negate();
+            form.negate();
         }
         return search(limit);
     }
 
-    /** V_C - kappa V_S - V_D rises to zero. */
+    private double clampSwitches(double limit) {
+        if (clamps) {
+            form.copy(piece.clamp);
+        } else {
+            form.copy(piece.baseOne);
+            form.constant += n.clampVolts;
+        }
+        form.negate();
+        return search(limit);
+    }
+
+    /** V_C - V_P rises to zero. */
     private double peakReached(double limit) {
-        form.copy(piece.supply);
-        form.ramp = 1 - n.peakShare * form.ramp;
-        form.source *= -n.peakShare;
-        form.constant = -n.peakShare * form.constant - n.emitterDropVolts;
+        form.copy(piece.peak);
+        form.ramp -= 1;
+        form.negate();
         return search(limit);
     }
 
     /** iota V_S - I_E rises to zero. */
     private double valleyReached(double limit) {
-        form.ramp = n.valleySiemens * piece.supply.ramp - piece.emitter.ramp;
-        form.source = n.valleySiemens * piece.supply.source - piece.emitter.source;
-        form.sourceSlope = 0;
-        form.constant = n.valleySiemens * piece.supply.constant - piece.emitter.constant;
+        form.copy(piece.emitter);
+        form.negate();
+        form.add(n.valleySiemens, piece.supply);
         return search(limit);
     }
 
     private double stallLeaves(double limit) {
         form.copy(piece.emitter);
-        form.sourceSlope = piece.emitter.sourceSlope;
-        negate();
+        form.negate();
         return search(limit);
     }
 
     /** The emitter gets its peak-point current, and the pulse would be regenerative. */
     private double stallFires(double limit) {
         form.copy(piece.emitter);
-        form.sourceSlope = piece.emitter.sourceSlope;
         form.constant -= n.peakCurrentAmps;
         double enough = search(limit);
         if (enough >= limit) {
@@ -244,14 +265,7 @@ public final class Stepper {
 
     private boolean regenerates(double time) {
         piece.look(time);
-        return regenerates(piece.rampVolts, piece.sourceVolts);
-    }
-
-    private void negate() {
-        form.ramp = -form.ramp;
-        form.source = -form.source;
-        form.sourceSlope = -form.sourceSlope;
-        form.constant = -form.constant;
+        return regenerates(piece.rampVolts, piece.fluxAmps, piece.sourceVolts);
     }
 
     // --- firing ----------------------------------------------------------------------------------------------------
@@ -261,20 +275,23 @@ public final class Stepper {
         trial.mode = Mode.STALLED;
         trial.rectifies = rectifies;
         trial.clips = clips;
+        trial.clamps = clamps;
         NodeLaws.shape(n, trial);
         double source = wave.at(seconds);
-        double emitter = trial.emitter.at(rampVolts, source) + trial.emitter.sourceSlope * wave.slopeAt(seconds);
-        return emitter >= n.peakCurrentAmps && regenerates(rampVolts, source);
+        double emitter =
+                trial.emitter.at(rampVolts, fluxAmps, source) + trial.emitter.sourceSlope * wave.slopeAt(seconds);
+        return emitter >= n.peakCurrentAmps && regenerates(rampVolts, fluxAmps, source);
     }
 
     /** Whether the saturated emitter line would carry more than the valley current at a ramp and source voltage. */
-    private boolean regenerates(double ramp, double source) {
+    private boolean regenerates(double ramp, double flux, double source) {
         trial.mode = Mode.ON;
         trial.rectifies = rectifies;
         trial.clips = clips;
         trial.gateConducts = false;
-        NodeLaws.settle(n, trial, ramp, source);
-        return trial.emitter.at(ramp, source) > n.valleySiemens * trial.supply.at(ramp, source);
+        trial.clamps = clamps;
+        NodeLaws.settle(n, trial, ramp, flux, source);
+        return trial.emitter.at(ramp, flux, source) > n.valleySiemens * trial.supply.at(ramp, flux, source);
     }
 
     private void settle() {
@@ -282,10 +299,12 @@ public final class Stepper {
         trial.rectifies = rectifies;
         trial.clips = clips;
         trial.gateConducts = gateConducts;
-        NodeLaws.settle(n, trial, rampVolts, wave.at(seconds));
+        trial.clamps = clamps;
+        NodeLaws.settle(n, trial, rampVolts, fluxAmps, wave.at(seconds));
         rectifies = trial.rectifies;
         clips = trial.clips;
         gateConducts = trial.gateConducts;
+        clamps = trial.clamps;
     }
 
     // --- what the caller sees --------------------------------------------------------------------------------------
@@ -303,6 +322,11 @@ public final class Stepper {
     /** Ramp voltage now, V. */
     public double rampVolts() {
         return rampVolts;
+    }
+
+    /** Magnetising current now, A; 0 without a pulse transformer. */
+    public double fluxAmps() {
+        return fluxAmps;
     }
 
     /** What the device does now. */

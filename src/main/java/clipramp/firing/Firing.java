@@ -3,6 +3,7 @@ package clipramp.firing;
 import clipramp.circuit.Condition;
 import clipramp.circuit.Design;
 import clipramp.circuit.Stage;
+import java.util.Optional;
 
 /** The firing circuit solved: what every other room asks. */
 public final class Firing {
@@ -38,5 +39,16 @@ public final class Firing {
         PieceLog log = new PieceLog();
         PeriodicState.solve(firing, log);
         return Bearing.of(firing, log.halves(), 0);
+    }
+
+    /** What the pulse transformer bears in the periodic state; empty with direct coupling. */
+    public static Optional<TransformerDuty> transformerDuty(Design design, Condition condition, double rampOhms) {
+        if (design.gate().transformer().isEmpty()) {
+            return Optional.empty();
+        }
+        FiringCase firing = FiringCase.of(design, condition, rampOhms);
+        PieceLog log = new PieceLog();
+        PeriodicState.solve(firing, log);
+        return Optional.of(TransformerDuty.of(firing.network(), log.halves()));
     }
 }

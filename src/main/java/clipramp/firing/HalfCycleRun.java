@@ -25,6 +25,7 @@ final class HalfCycleRun {
     private int half;
     private Mode mode = Mode.OFF;
     private double rampVolts;
+    private double fluxAmps;
     /** The pulse that is going on, if one is; it may have begun in the half cycle before. */
     private @Nullable PulseMeter going;
 
@@ -40,6 +41,7 @@ final class HalfCycleRun {
     private boolean conducting;
     private double triedFrom;
     private double triedRampVolts;
+    private double triedFluxAmps;
     private boolean trying;
 
     HalfCycleRun(FiringCase firing) {
@@ -52,7 +54,7 @@ final class HalfCycleRun {
         SourceWave wave = firing.timing().wave(half);
         double end = wave.seconds();
         begin();
-        stepper.start(wave, mode, rampVolts);
+        stepper.start(wave, mode, rampVolts, fluxAmps);
         noteClipping(false, 0);
         for (int events = 0; ; events++) {
             if (events > MOST_EVENTS) {
@@ -73,6 +75,7 @@ final class HalfCycleRun {
         }
         mode = stepper.mode();
         rampVolts = stepper.rampVolts();
+        fluxAmps = stepper.fluxAmps();
         half++;
     }
 
@@ -108,7 +111,7 @@ final class HalfCycleRun {
             case STALLS -> stalled |= begun.isEmpty();
             case VALLEY -> endPulse(wave, sink);
             case ZENER -> noteLatchedOn();
-            case RECTIFIER, GATE, UNSTALLS, END -> {}
+            case RECTIFIER, GATE, CLAMP, UNSTALLS, END -> {}
         }
     }
 
@@ -123,6 +126,7 @@ final class HalfCycleRun {
         if (firing.tapsThyristor() && !conducting && firing.anodeAmps(half, stepper.seconds()) > 0) {
             triedFrom = stepper.seconds();
             triedRampVolts = stepper.rampVolts();
+            triedFluxAmps = stepper.fluxAmps();
             trying = true;
             stepper.switchSource(firing.conductingWave(wave.seconds()));
         }
@@ -148,7 +152,7 @@ final class HalfCycleRun {
             begun.remove(begun.size() - 1);
             Pulse measured = pulse.pulse(firing, 0, false);
             stepper.switchSource(wave);
-            stepper.returnToFiring(triedFrom, triedRampVolts);
+            stepper.returnToFiring(triedFrom, triedRampVolts, triedFluxAmps);
             going = new PulseMeter(
                     firing.network(), half, triedFrom, triedRampVolts, measured.supplyVolts(), measured.afterStall());
             begun.add(going);
@@ -221,6 +225,10 @@ final class HalfCycleRun {
 
     double rampVolts() {
         return rampVolts;
+    }
+
+    double fluxAmps() {
+        return fluxAmps;
     }
 
     boolean pulseIsGoing() {

@@ -10,6 +10,9 @@ final class PeriodicState {
     /** Two ramp voltages nearer than this are the same, V. */
     private static final double SAME_VOLTS = 1e-9;
 
+    /** Two magnetising currents nearer than this are the same, A. */
+    private static final double SAME_AMPS = 1e-10;
+
     private static final int MOST_HALVES = 60;
 
     /** How many half cycles are shown of a circuit that never settles. */
@@ -17,9 +20,11 @@ final class PeriodicState {
 
     private PeriodicState() {}
 
-    private record State(Mode mode, double rampVolts) {
+    private record State(Mode mode, double rampVolts, double fluxAmps) {
         boolean isSameAs(State other) {
-            return mode == other.mode && Math.abs(rampVolts - other.rampVolts) < SAME_VOLTS;
+            return mode == other.mode
+                    && Math.abs(rampVolts - other.rampVolts) < SAME_VOLTS
+                    && Math.abs(fluxAmps - other.fluxAmps) < SAME_AMPS;
         }
     }
 
@@ -28,12 +33,12 @@ final class PeriodicState {
         HalfCycleRun run = new HalfCycleRun(firing);
         int period = firing.timing().period();
         List<State> states = new ArrayList<>();
-        states.add(new State(run.mode(), run.rampVolts()));
+        states.add(new State(run.mode(), run.rampVolts(), run.fluxAmps()));
         Solution.Settling settling = Solution.Settling.NEVER;
         int repeats = 0;
         while (states.size() <= MOST_HALVES && repeats == 0) {
             run.next(PieceSink.NONE);
-            states.add(new State(run.mode(), run.rampVolts()));
+            states.add(new State(run.mode(), run.rampVolts(), run.fluxAmps()));
             if (repeatsAfter(states, period)) {
                 settling = Solution.Settling.STEADY;
                 repeats = period;

@@ -66,7 +66,7 @@ final class Sampler {
             firing.line().voltsAt(angle),
             supply,
             piece.rampVolts(),
-            n.peakShare() * supply + n.emitterDropVolts,
+            piece.peakPointVolts(),
             piece.baseOneVolts(),
             piece.gateVolts(),
             piece.gateAmps(n),
