@@ -214,11 +214,14 @@ public final class Piece {
         return bound;
     }
 
-    /** Size of a linear form's terms where the piece was last looked at: what its rounding is measured against. */
+    /**
+     * Size of what a linear form is summed from where the piece was last looked at: what its rounding is measured against.
+     * A source near zero is the difference of a sine and the rectifier's drops, and rounds like those.
+     */
     double magnitude(Affine form) {
-        return Math.abs(form.ramp * rampVolts)
+        return Math.abs(form.ramp) * (Math.abs(rampVolts) + Math.abs(steady) + Math.abs(decay))
                 + Math.abs(form.flux * fluxAmps)
-                + Math.abs(form.source * sourceVolts)
+                + Math.abs(form.source) * (Math.abs(sourceVolts) + 2 * Math.abs(wave.dropVolts))
                 + Math.abs(form.sourceSlope * sourceSlope)
                 + Math.abs(form.constant);
     }

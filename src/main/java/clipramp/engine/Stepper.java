@@ -12,6 +12,9 @@ public final class Stepper {
 
     private static final int BISECTIONS = 60;
 
+    /** A ramp that exceeds the peak point by more than rounding was left above it by a jump, V. */
+    private static final double ABOVE_VOLTS = 1e-9;
+
     private final Network n;
     private final Piece piece = new Piece();
     private final Piece trial = new Piece();
@@ -270,8 +273,14 @@ public final class Stepper {
 
     // --- firing ----------------------------------------------------------------------------------------------------
 
-    /** With the ramp at the peak point: does the emitter get the peak-point current, and would the pulse regenerate? */
+    /**
+     * With the ramp at the peak point: does the emitter get the peak-point current, and would the pulse regenerate? A ramp
+     * that a falling supply has left above the peak point feeds the emitter without limit.
+     */
     private boolean canFire() {
+        if (piece.rampVolts - piece.value(piece.peak) > ABOVE_VOLTS) {
+            return regenerates(rampVolts, fluxAmps, wave.at(seconds));
+        }
         trial.mode = Mode.STALLED;
         trial.rectifies = rectifies;
         trial.clips = clips;

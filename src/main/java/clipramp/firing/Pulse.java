@@ -3,10 +3,10 @@ package clipramp.firing;
 /**
  * One discharge of the ramp capacitor through the trigger device, from firing to the valley.
  *
- * @param startRad angle of the line (the load's, from the positive-going zero of its fundamental; folded to the half
- *     cycle that the pulse acts in) at which it fires, rad
+ * @param startRad angle of the line (the load's, from the positive-going zero of its fundamental; folded by pi to the
+ *     half cycle that the pulse acts in; 0..2 pi where the supply works over whole periods) at which it fires, rad
  * @param startSeconds the same instant as time since the zero of the supply's half cycle, s
- * @param endSeconds instant at which it ends (valley, or the half cycle's end), s on the same clock
+ * @param endSeconds instant of the valley, s on the same clock; beyond the half cycle's length if it goes on over the line zero
  * @param supplyVolts clipped supply at the instant before firing, V to common
  * @param peakPointVolts emitter voltage at firing, V to common
  * @param afterStall whether the ramp was held at the peak point before it fired
