@@ -160,6 +160,11 @@ public final class Network {
         return peakShare;
     }
 
+    /** What base bar or divider draws from the supply with the device off, S. */
+    public double standingSiemens() {
+        return standingSiemens;
+    }
+
     /** Base-one voltage per volt of supply with the device off. */
     public double quiescentShare() {
         return quiescentShare;

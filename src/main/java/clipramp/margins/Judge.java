@@ -1,18 +1,93 @@
 package clipramp.margins;
 
+import clipramp.circuit.Condition;
 import clipramp.circuit.Design;
+import clipramp.firing.HalfCycle;
+import clipramp.firing.Solution;
+import clipramp.gate.GatePower;
+import clipramp.gate.StandingVoltage;
+import clipramp.margins.Check.PulseSummary;
+import clipramp.power.OperatingPoint;
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+import java.util.Optional;
 import java.util.OptionalDouble;
 
 /** Solves a design and judges it. */
 public final class Judge {
+    private static final int KNOB_STEPS = 10;
+    private static final double USUAL_CELSIUS = 25;
+    private static final double MID_KNOB = 0.5;
+
     private Judge() {}
 
     /**
      * @param design the design
      * @param pinnedLineVolts judge at this line voltage only, V; empty for low, nominal and high
      * @param pinnedCelsius judge at this temperature only, °C; empty for coldest, 25 °C and hottest
+     * @throws clipramp.circuit.RefusedCircuit where the circuit is unsound or not computed
+     * @throws clipramp.power.UnsupportedLoadException for a load that cannot be solved
      */
     public static Check check(Design design, OptionalDouble pinnedLineVolts, OptionalDouble pinnedCelsius) {
-        throw new UnsupportedOperationException();
+        Condition condition = new Condition(
+                pinnedLineVolts.orElse(design.line().volts()),
+                design.line().hertz(),
+                pinnedCelsius.orElse(USUAL_CELSIUS));
+        Bench bench = new Bench(design, pinnedLineVolts, pinnedCelsius);
+        List<Margin> margins = margins(bench, condition);
+        Solution middle = bench.solution(condition, bench.midOhms());
+        return new Check(
+                design,
+                condition,
+                knob(bench, condition),
+                summary(bench, condition, middle),
+                bench.dissipation(condition, bench.midOhms()),
+                middle.shown().clipFromRad(),
+                margins,
+                margins.get(0).verdict(),
+                new Notes(bench, condition).all());
+    }
+
+    private static List<Margin> margins(Bench bench, Condition condition) {
+        List<Margin> margins = new ArrayList<>(WantedMargins.of(bench));
+        margins.addAll(new RampMargins(bench, condition).all());
+        margins.add(new AngleDrift(bench, condition).margin());
+        margins.addAll(new GateMargins(bench).all());
+        margins.addAll(new ThyristorMargins(bench).all());
+        margins.addAll(new TriggerMargins(bench).all());
+        margins.addAll(new PartMargins(bench).all());
+        margins.sort(Comparator.comparing(Margin::verdict).reversed().thenComparingDouble(Judge::closeness));
+        return margins;
+    }
+
+    /** How close to its limit a margin is: ratio over the ratio that it holds from; smaller is worse. */
+    private static double closeness(Margin margin) {
+        double absent = margin.verdict() == Verdict.FAILS ? Double.NEGATIVE_INFINITY : Double.POSITIVE_INFINITY;
+        return margin.ratio().isPresent() ? margin.ratio().getAsDouble() / margin.holdsFrom() : absent;
+    }
+
+    private static List<OperatingPoint> knob(Bench bench, Condition condition) {
+        List<OperatingPoint> rows = new ArrayList<>();
+        List<Double> settings = bench.settings();
+        for (int step = 0; step < settings.size(); step++) {
+            double ohms = settings.get(step);
+            OptionalDouble position =
+                    settings.size() == 1 ? OptionalDouble.empty() : OptionalDouble.of((double) step / KNOB_STEPS);
+            rows.add(new OperatingPoint(position, bench.solution(condition, ohms), bench.load(condition, ohms)));
+        }
+        return rows;
+    }
+
+    private static Optional<PulseSummary> summary(Bench bench, Condition condition, Solution middle) {
+        HalfCycle half = middle.shown();
+        OptionalDouble atKnob =
+                bench.design().ramp().pot().isPresent() ? OptionalDouble.of(MID_KNOB) : OptionalDouble.empty();
+        return half.shownPulse()
+                .map(pulse -> new PulseSummary(
+                        atKnob,
+                        pulse,
+                        GatePower.meanWatts(middle),
+                        StandingVoltage.of(bench.design(), condition).volts()));
     }
 }

@@ -37,8 +37,8 @@ public final class SampleDesigns {
                 new StageDiodes(0.9, 0),
                 new Load.Resistor(230.0 * 230.0 / 1200),
                 clip(Tap.LINE, Rectifier.BRIDGE, part(10_000, 0.05, 20), Optional.empty()),
-                ramp(100e-9, 4_700, 68_000),
-                unijunctionTrigger(47, 470),
+                ramp(100e-9, 5_600, 68_000),
+                unijunctionTrigger(39, 470),
                 directGate(1_000),
                 new Thyristor(scr16Amps(), OptionalDouble.of(4)),
                 new Surroundings(0, 50),
@@ -103,8 +103,10 @@ public final class SampleDesigns {
                 value, new Tolerance(tolerance, tolerance), OptionalDouble.of(ratedWatts), OptionalDouble.empty());
     }
 
+    /** A supply of a 20 V zener and a dropping resistor rated 500 V. */
     public static ClipSupply clip(Tap tap, Rectifier rectifier, Part dropper, Optional<Winding> winding) {
-        return new ClipSupply(tap, rectifier, 0.7, dropper, zener20(), winding);
+        Part rated = new Part(dropper.value(), dropper.tolerance(), dropper.ratedWatts(), OptionalDouble.of(500));
+        return new ClipSupply(tap, rectifier, 0.7, rated, zener20(), winding);
     }
 
     /** A 20 V 1 W zener, figures typical of the class. */

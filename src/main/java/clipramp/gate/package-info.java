@@ -1,0 +1,5 @@
+/** The pulse, and what the thyristor asks of it. */
+@NullMarked
+package clipramp.gate;
+
+import org.jspecify.annotations.NullMarked;

@@ -1,0 +1,183 @@
+package clipramp.margins;
+
+import clipramp.circuit.Condition;
+import clipramp.circuit.Design;
+import clipramp.firing.Dissipation;
+import clipramp.firing.Firing;
+import clipramp.firing.HalfCycle;
+import clipramp.firing.Pulse;
+import clipramp.firing.Solution;
+import clipramp.gate.TriggerNeed;
+import clipramp.gate.WeakestPulse;
+import clipramp.power.LoadPower;
+import clipramp.power.LoadResult;
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.HashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import java.util.function.ToDoubleFunction;
+
+/** A design on the bench: everything that the margins ask of it, solved once. Lives for one run of the judge. */
+final class Bench {
+    private static final int KNOB_STEPS = 10;
+
+    private record Setting(Condition condition, double rampOhms) {}
+
+    private final Design design;
+    private final List<JudgedCondition> conditions;
+    private final Map<Setting, Solution> solutions = new HashMap<>();
+    private final Map<Setting, Solution> heldSolutions = new HashMap<>();
+    private final Map<Setting, LoadResult> loads = new HashMap<>();
+    private final Map<Setting, Dissipation> dissipations = new HashMap<>();
+    private final Map<Double, Design> heldDesigns = new HashMap<>();
+    private final double leastOhms;
+    private final double mostOhms;
+
+    Bench(Design design, OptionalDouble pinnedVolts, OptionalDouble pinnedCelsius) {
+        this.design = design;
+        this.conditions = JudgedCondition.of(design, pinnedVolts, pinnedCelsius);
+        double atStart = design.ramp().rampOhms(0);
+        double atEnd = design.ramp().rampOhms(1);
+        this.leastOhms = Math.min(atStart, atEnd);
+        this.mostOhms = Math.max(atStart, atEnd);
+    }
+
+    Design design() {
+        return design;
+    }
+
+    List<JudgedCondition> conditions() {
+        return conditions;
+    }
+
+    /** The judged conditions at their lowest temperature. */
+    List<JudgedCondition> coldest() {
+        double coldest = conditions.stream()
+                .mapToDouble(c -> c.condition().celsius())
+                .min()
+                .orElseThrow();
+        return conditions.stream()
+                .filter(c -> c.condition().celsius() == coldest)
+                .toList();
+    }
+
+    /** The judged conditions at their highest temperature. */
+    List<JudgedCondition> hottest() {
+        double hottest = conditions.stream()
+                .mapToDouble(c -> c.condition().celsius())
+                .max()
+                .orElseThrow();
+        return conditions.stream()
+                .filter(c -> c.condition().celsius() == hottest)
+                .toList();
+    }
+
+    /** The judged conditions at their highest line: heat grows with the line, so the others cannot be worse. */
+    List<JudgedCondition> highest() {
+        double highest = conditions.stream()
+                .mapToDouble(c -> c.condition().lineVolts())
+                .max()
+                .orElseThrow();
+        return conditions.stream()
+                .filter(c -> c.condition().lineVolts() == highest)
+                .toList();
+    }
+
+    /** Smallest R_E of the knob's travel, ohm: the high-power end. */
+    double leastOhms() {
+        return leastOhms;
+    }
+
+    /** Largest R_E of the knob's travel, ohm: the low-power end. */
+    double mostOhms() {
+        return mostOhms;
+    }
+
+    Solution solution(Condition condition, double rampOhms) {
+        return solutions.computeIfAbsent(
+                new Setting(condition, rampOhms), s -> Firing.solve(design, s.condition(), s.rampOhms()));
+    }
+
+    LoadResult load(Condition condition, double rampOhms) {
+        return loads.computeIfAbsent(
+                new Setting(condition, rampOhms),
+                s -> LoadPower.of(design, s.condition(), solution(s.condition(), s.rampOhms())));
+    }
+
+    Dissipation dissipation(Condition condition, double rampOhms) {
+        return dissipations.computeIfAbsent(
+                new Setting(condition, rampOhms), s -> Firing.dissipation(design, s.condition(), s.rampOhms()));
+    }
+
+    /** The weakest trigger device driving a gate held at V_GT of the condition's temperature. */
+    Solution held(Condition condition, double rampOhms) {
+        return heldSolutions.computeIfAbsent(
+                new Setting(condition, rampOhms),
+                s -> Firing.solve(heldDesign(s.condition().celsius()), s.condition(), s.rampOhms()));
+    }
+
+    private Design heldDesign(double celsius) {
+        return heldDesigns.computeIfAbsent(
+                celsius,
+                c -> WeakestPulse.intoGateHeldAt(
+                        design, TriggerNeed.of(design, c).volts()));
+    }
+
+    /** The largest value of a figure at both ends of the knob. */
+    double hardest(Condition condition, ToDoubleFunction<Dissipation> figure) {
+        return Math.max(
+                figure.applyAsDouble(dissipation(condition, leastOhms)),
+                figure.applyAsDouble(dissipation(condition, mostOhms)));
+    }
+
+    /** R_E at mid-knob, ohm. */
+    double midOhms() {
+        return design.ramp().rampOhms(0.5);
+    }
+
+    /** The first pulse of every half cycle that has one. */
+    static List<Pulse> firstPulses(Solution solution) {
+        List<Pulse> first = new ArrayList<>();
+        for (HalfCycle half : solution.halves()) {
+            half.pulses().stream().findFirst().ifPresent(first::add);
+        }
+        return first;
+    }
+
+    /** Every pulse of a solution. */
+    static List<Pulse> pulses(Solution solution) {
+        return solution.halves().stream().flatMap(h -> h.pulses().stream()).toList();
+    }
+
+    /**
+     * The largest R_E, of eleven knob settings, whose first pulse comes before the supply's collapse: the latest firing
+     * that is meant as one.
+     */
+    OptionalDouble latestOhms(Condition condition) {
+        return settings().stream()
+                .sorted(Comparator.reverseOrder())
+                .filter(ohms -> properlyFired(solution(condition, ohms)))
+                .mapToDouble(Double::doubleValue)
+                .findFirst();
+    }
+
+    private static boolean properlyFired(Solution solution) {
+        Optional<Pulse> first = solution.shown().pulses().stream().findFirst();
+        return first.isPresent() && !first.get().endPulse();
+    }
+
+    /** R_E at eleven evenly spaced knob positions; one for a fixed ramp. */
+    List<Double> settings() {
+        if (design.ramp().pot().isEmpty()) {
+            return List.of(leastOhms);
+        }
+        List<Double> settings = new ArrayList<>();
+        for (int step = 0; step <= KNOB_STEPS; step++) {
+            settings.add(design.ramp().rampOhms((double) step / KNOB_STEPS));
+        }
+        return settings;
+    }
+}
