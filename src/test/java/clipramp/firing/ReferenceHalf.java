@@ -1,5 +1,6 @@
 package clipramp.firing;
 
+import java.util.ArrayList;
 import java.util.List;
 
 /**
@@ -37,7 +38,8 @@ record ReferenceHalf(
         VALLEY
     }
 
-    record Event(Kind kind, double seconds) {}
+    /** What happened, when, and at which capacitor voltage. */
+    record Event(Kind kind, double seconds, double volts) {}
 
     /** How half cycles follow each other. */
     enum Settling {
@@ -52,6 +54,22 @@ record ReferenceHalf(
     ReferenceHalf {
         events = List.copyOf(events);
         pulses = List.copyOf(pulses);
+    }
+
+    /** The same, a pulse that was still on at the zero followed to the end that it finds in the half cycle after. */
+    ReferenceHalf continuedIn(ReferenceHalf next, double rampFarads) {
+        int last = pulses.size() - 1;
+        Event valley = next.events.stream()
+                .filter(event -> event.kind() == Kind.VALLEY)
+                .findFirst()
+                .orElse(null);
+        if (last < 0 || pulses.get(last).endSeconds() < seconds || valley == null) {
+            return this;
+        }
+        double joules = 0.5 * rampFarads * (endVolts * endVolts - valley.volts() * valley.volts());
+        List<Pulse> continued = new ArrayList<>(pulses);
+        continued.set(last, ReferencePulseMeter.continued(pulses.get(last), seconds + valley.seconds(), joules));
+        return new ReferenceHalf(positive, seconds, startVolts, endVolts, events, continued, stalled, firingIndex);
     }
 
     /** The order of events, without their times: two solutions of one shape can be compared time by time. */

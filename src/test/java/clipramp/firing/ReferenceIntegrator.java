@@ -48,6 +48,8 @@ final class ReferenceIntegrator {
     private double now;
     private boolean stalled;
     private boolean held;
+    private double crestVolts;
+    private double crestSeconds;
     private List<Event> events = new ArrayList<>();
     private List<Pulse> pulses = new ArrayList<>();
     private ReferencePulseMeter meter;
@@ -82,11 +84,14 @@ final class ReferenceIntegrator {
             AtZero end = new AtZero(volts, emitter);
             zeros.add(end);
             if (alike && end.repeats(zeros.get(k))) {
-                return new Periodic(Settling.STEADY, List.of(halves.get(k)));
+                return new Periodic(Settling.STEADY, List.of(halves.get(k).continuedIn(halves.get(k), p.rampFarads)));
             }
             if (k >= 2 && end.repeats(zeros.get(k - 1)) && zeros.get(k).repeats(zeros.get(k - 2))) {
+                ReferenceHalf one = halves.get(k - 1);
+                ReferenceHalf other = halves.get(k);
                 return new Periodic(
-                        alike ? Settling.HUNTS : Settling.STEADY, List.of(halves.get(k - 1), halves.get(k)));
+                        alike ? Settling.HUNTS : Settling.STEADY,
+                        List.of(one.continuedIn(other, p.rampFarads), other.continuedIn(one, p.rampFarads)));
             }
         }
         return new Periodic(Settling.NEVER, halves);
@@ -104,10 +109,14 @@ final class ReferenceIntegrator {
         pulses = new ArrayList<>();
         stalled = false;
         thyristorOn = false;
+        crestVolts = Double.NEGATIVE_INFINITY;
         now = 0;
         meter = null;
         double start = volts;
         settleBranches();
+        if (emitter != Emitter.ON) {
+            overshoot();
+        }
         while (now < halfSeconds) {
             piece();
         }
@@ -116,7 +125,8 @@ final class ReferenceIntegrator {
         for (int i = pulses.size() - 1; i >= 0; i--) {
             firing = pulses.get(i).latches() ? i : firing;
         }
-        return new ReferenceHalf(positive, halfSeconds, start, volts, events, markEnds(), stalled, firing);
+        boolean first = pulses.isEmpty() ? stalled : pulses.get(0).afterStall();
+        return new ReferenceHalf(positive, halfSeconds, start, volts, events, markEnds(), first, firing);
     }
 
     /** What stands behind the dropping resistor, V. */
@@ -152,7 +162,7 @@ final class ReferenceIntegrator {
         while (rad < first) {
             rad += 2 * Math.PI;
         }
-        return rad > second ? rad - Math.PI : rad;
+        return rad >= second - 1e-12 ? rad - Math.PI : rad;
     }
 
     /** Integrates until the next event or the zero, and does what the event asks. */
@@ -180,11 +190,9 @@ final class ReferenceIntegrator {
                 if (meter != null && nodes.junction) {
                     watch.note(t -> nodes.gateAmps - p.triggerAmps, meter);
                 }
-                if (meter != null) {
-                    integrator.addStepHandler(watch.measuring(meter));
-                }
             }
         }
+        integrator.addStepHandler(watch.looking());
         double reached = integrator.integrate(new Laws(y.length), now, y, halfSeconds, y);
         now = reached;
         volts = y[0];
@@ -225,7 +233,7 @@ final class ReferenceIntegrator {
     }
 
     private void log(Kind kind) {
-        events.add(new Event(kind, now));
+        events.add(new Event(kind, now, volts));
     }
 
     /** V_C has reached V_P: fire, or be held. */
@@ -252,6 +260,28 @@ final class ReferenceIntegrator {
         }
     }
 
+    /**
+     * A supply that jumps (the tap across a thyristor, as its current ends) may leave the capacitor above the new peak
+     * point: its emitter is then fed without limit, and fires if the saturated line carries more than the valley current.
+     */
+    private void overshoot() {
+        nodes.evaluate(Emitter.OFF, e(now), eRate(now), volts);
+        if (nodes.peakVolts >= volts) {
+            nodes.evaluate(emitter, e(now), eRate(now), volts);
+            return;
+        }
+        probe.search(Emitter.ON, e(now), 0, volts);
+        if (probe.valleySlack > 0) {
+            held = false;
+            fire();
+            return;
+        }
+        emitter = Emitter.HELD;
+        nodes.search(emitter, e(now), eRate(now), volts);
+        volts = nodes.peakVolts;
+        hold();
+    }
+
     private void release() {
         log(Kind.RELEASE);
         emitter = Emitter.OFF;
@@ -275,7 +305,7 @@ final class ReferenceIntegrator {
     private void fire() {
         log(Kind.FIRE);
         double supply = nodes.supplyVolts;
-        double peak = nodes.peakVolts;
+        double peak = Math.max(nodes.peakVolts, volts);
         if (!p.tapThyristor || thyristorOn) {
             conduct(supply, peak);
             return;
@@ -353,10 +383,10 @@ final class ReferenceIntegrator {
             }
         }
         boolean conducts = events.stream().anyMatch(event -> event.kind() == Kind.ZENER_ON);
-        double from = conducts ? last : 0.25 * 2 * Math.PI / p.omega;
+        double from = conducts ? last : crestSeconds;
         boolean open = conducts && last < 0;
         return pulses.stream()
-                .map(pulse -> ReferencePulseMeter.withEnd(pulse, !open && pulse.startSeconds() > from))
+                .map(pulse -> ReferencePulseMeter.marked(pulse, !open && pulse.startSeconds() > from))
                 .toList();
     }
 
@@ -453,7 +483,8 @@ final class ReferenceIntegrator {
                     200);
         }
 
-        StepHandler measuring(ReferencePulseMeter target) {
+        /** Peaks of the pulse and the supply's crest, at five places of every step. */
+        StepHandler looking() {
             return new StepHandler() {
                 @Override
                 public void init(double t0, double[] y0, double t) {}
@@ -466,7 +497,13 @@ final class ReferenceIntegrator {
                         double t = a + (b - a) * i / 4;
                         interpolator.setInterpolatedTime(t);
                         see(t, interpolator.getInterpolatedState()[0]);
-                        target.observe(nodes);
+                        if (meter != null) {
+                            meter.observe(nodes);
+                        }
+                        if (nodes.supplyVolts > crestVolts) {
+                            crestVolts = nodes.supplyVolts;
+                            crestSeconds = t;
+                        }
                     }
                 }
             };

@@ -88,11 +88,19 @@ final class ReferencePulseMeter {
                 turnsOn && anode >= p.latchingAmps);
     }
 
-    static Pulse withEnd(Pulse of, boolean end) {
+    static Pulse marked(Pulse of, boolean end) {
+        return copy(of, of.endSeconds(), of.capacitorJoules(), end);
+    }
+
+    static Pulse continued(Pulse of, double endSeconds, double moreCapacitorJoules) {
+        return copy(of, endSeconds, of.capacitorJoules() + moreCapacitorJoules, of.endPulse());
+    }
+
+    private static Pulse copy(Pulse of, double endSeconds, double capacitorJoules, boolean end) {
         return new Pulse(
                 of.startRad(),
                 of.startSeconds(),
-                of.endSeconds(),
+                endSeconds,
                 of.supplyVolts(),
                 of.peakPointVolts(),
                 of.afterStall(),
@@ -104,7 +112,7 @@ final class ReferencePulseMeter {
                 of.aboveTriggerSeconds(),
                 of.gateCoulombs(),
                 of.gateJoules(),
-                of.capacitorJoules(),
+                capacitorJoules,
                 of.turnsOn(),
                 of.anodeAmps(),
                 of.latches());
