@@ -15,6 +15,9 @@ public final class Stepper {
     /** A ramp that exceeds the peak point by more than rounding was left above it by a jump, V. */
     private static final double ABOVE_VOLTS = 1e-9;
 
+    /** By how much more than the valley current a pulse must begin with, as a share of it. */
+    private static final double VALLEY_ROUNDING = 1e-9;
+
     private final Network n;
     private final Piece piece = new Piece();
     private final Piece trial = new Piece();
@@ -300,7 +303,9 @@ public final class Stepper {
         trial.gateConducts = false;
         trial.clamps = clamps;
         NodeLaws.settle(n, trial, ramp, flux, source);
-        return trial.emitter.at(ramp, flux, source) > n.valleySiemens * trial.supply.at(ramp, flux, source);
+        double valleyAmps = n.valleySiemens * trial.supply.at(ramp, flux, source);
+        // A device that has just left its valley stands on the limit: rounding must not fire it again and again.
+        return trial.emitter.at(ramp, flux, source) > valleyAmps * (1 + VALLEY_ROUNDING);
     }
 
     private void settle() {
