@@ -48,6 +48,26 @@ public final class Gallery {
         figures.put("circuit-bridge-ac", new CircuitFigure(SampleDesigns.thyristorTapHeater()));
         figures.put("circuit-winding", new CircuitFigure(SampleDesigns.windingHeater(0.1, true)));
         figures.put("circuit-programmable", new CircuitFigure(SampleDesigns.programmableHeater()));
+        figures.put(
+                "knob",
+                new KnobFigure(
+                        SampleChecks.check(SampleDesigns.heater(), clipramp.margins.Verdict.HOLDS)
+                                .knob(),
+                        SampleDesigns.heater().wanted()));
+        Lanes lanes = SampleChecks.lanes(SampleDesigns.heater(), 0.5);
+        figures.put(
+                "gate",
+                new GateFigure(
+                        SampleDesigns.heater(),
+                        lanes.waves().gateAmps(),
+                        lanes.waves().gateVolts()));
+        figures.put(
+                "gate-triac",
+                new GateFigure(
+                        SampleDesigns.triacHeater(),
+                        lanes.waves().gateAmps(),
+                        lanes.waves().gateVolts()));
+        figures.put("gate-silent", new GateFigure(SampleDesigns.heater(), new double[3], new double[3]));
         return figures;
     }
 }
