@@ -24,12 +24,11 @@ final class FirstCrossing {
      * @return time in s, or POSITIVE_INFINITY for none before the limit
      */
     static double after(Piece piece, Affine form, double from, double limit) {
-        piece.look(from);
-        return afterLook(piece, form, from, limit);
-    }
-
-    /** As {@link #after}, the piece having been looked at {@code from} already. */
-    static double afterLook(Piece piece, Affine form, double from, double limit) {
+        if (from == piece.startSeconds()) {
+            piece.lookAtStart();
+        } else {
+            piece.look(from);
+        }
         double time = from;
         double value = piece.value(form);
         if (value >= -ROUNDING * piece.magnitude(form)) {

@@ -50,6 +50,13 @@ public final class Piece {
     double sourceBend;
     private double decay;
 
+    // The same at the piece's start, where every search begins.
+    private double startRamp;
+    private double startRampSlope;
+    private double startSource;
+    private double startSourceSlope;
+    private double startSourceBend;
+
     /**
      * Fills in the piece that begins at a time with a ramp voltage and a magnetising current; node equations must be set
      * already.
@@ -73,6 +80,25 @@ public final class Piece {
             charge(n, source, startVolts);
         }
         look(seconds);
+        startRamp = rampVolts;
+        startRampSlope = rampSlope;
+        startSource = sourceVolts;
+        startSourceSlope = sourceSlope;
+        startSourceBend = sourceBend;
+    }
+
+    /** As a look at the start, without working it out again. */
+    void lookAtStart() {
+        if (coupled) {
+            look(startSeconds);
+            return;
+        }
+        decay = exponential;
+        rampVolts = startRamp;
+        rampSlope = startRampSlope;
+        sourceVolts = startSource;
+        sourceSlope = startSourceSlope;
+        sourceBend = startSourceBend;
     }
 
     /**

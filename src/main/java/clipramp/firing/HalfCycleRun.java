@@ -43,14 +43,28 @@ final class HalfCycleRun {
     private double triedRampVolts;
     private double triedFluxAmps;
     private boolean trying;
+    private boolean measures;
 
     HalfCycleRun(FiringCase firing) {
         this.firing = firing;
         stepper = new Stepper(firing.network());
     }
 
-    /** Runs through the next half cycle and shows its pieces. */
+    /**
+     * Runs through the next half cycle unseen. Its pulses are measured only where the way on depends on them: across the
+     * thyristor, which takes the supply away if it turns on.
+     */
+    void skip() {
+        next(PieceSink.NONE, firing.tapsThyristor());
+    }
+
+    /** Runs through the next half cycle, measures its pulses and shows its pieces. */
     void next(PieceSink sink) {
+        next(sink, true);
+    }
+
+    private void next(PieceSink sink, boolean measure) {
+        measures = measure;
         SourceWave wave = firing.timing().wave(half);
         double end = wave.seconds();
         begin();
@@ -93,10 +107,10 @@ final class HalfCycleRun {
     }
 
     private void passed(PieceSink sink, Piece piece, double from, double to) {
-        if (clipFrom == Double.POSITIVE_INFINITY) {
+        if (measures && clipFrom == Double.POSITIVE_INFINITY) {
             noteCrest(piece, from, to);
         }
-        if (going != null && piece.mode() == Mode.ON) {
+        if (going != null && measures && piece.mode() == Mode.ON) {
             double offset = going.half() == half
                     ? 0
                     : firing.timing().wave(going.half()).seconds();

@@ -37,7 +37,7 @@ final class PeriodicState {
         Solution.Settling settling = Solution.Settling.NEVER;
         int repeats = 0;
         while (states.size() <= MOST_HALVES && repeats == 0) {
-            run.next(PieceSink.NONE);
+            run.skip();
             states.add(new State(run.mode(), run.rampVolts(), run.fluxAmps()));
             if (repeatsAfter(states, period)) {
                 settling = Solution.Settling.STEADY;
@@ -66,7 +66,7 @@ final class PeriodicState {
     private static List<HalfCycle> record(FiringCase firing, HalfCycleRun run, int shown, PieceSink sink) {
         // The positive half comes first in every answer.
         if ((run.lastHalf() + 1) % 2 == 1) {
-            run.next(PieceSink.NONE);
+            run.skip();
         }
         List<HalfCycleDraft> drafts = new ArrayList<>();
         for (int i = 0; i < shown; i++) {
