@@ -7,6 +7,7 @@ import clipramp.firing.Firing;
 import clipramp.firing.HalfCycle;
 import clipramp.firing.Pulse;
 import clipramp.firing.Solution;
+import clipramp.firing.TransformerDuty;
 import clipramp.gate.TriggerNeed;
 import clipramp.gate.WeakestPulse;
 import clipramp.power.LoadPower;
@@ -32,6 +33,7 @@ final class Bench {
     private final Map<Setting, Solution> heldSolutions = new HashMap<>();
     private final Map<Setting, LoadResult> loads = new HashMap<>();
     private final Map<Setting, Dissipation> dissipations = new HashMap<>();
+    private final Map<Setting, TransformerDuty> duties = new HashMap<>();
     private final Map<Double, Design> heldDesigns = new HashMap<>();
     private final double leastOhms;
     private final double mostOhms;
@@ -112,6 +114,13 @@ final class Bench {
                 new Setting(condition, rampOhms), s -> Firing.dissipation(design, s.condition(), s.rampOhms()));
     }
 
+    /** What the pulse transformer bears; only for a design that has one. */
+    TransformerDuty transformerDuty(Condition condition, double rampOhms) {
+        return duties.computeIfAbsent(
+                new Setting(condition, rampOhms),
+                s -> Firing.transformerDuty(design, s.condition(), s.rampOhms()).orElseThrow());
+    }
+
     /** The weakest trigger device driving a gate held at V_GT of the condition's temperature. */
     Solution held(Condition condition, double rampOhms) {
         return heldSolutions.computeIfAbsent(
@@ -140,11 +149,17 @@ final class Bench {
 
     /** The first pulse of every half cycle that has one. */
     static List<Pulse> firstPulses(Solution solution) {
-        List<Pulse> first = new ArrayList<>();
-        for (HalfCycle half : solution.halves()) {
-            half.pulses().stream().findFirst().ifPresent(first::add);
-        }
-        return first;
+        return solution.halves().stream()
+                .flatMap(half -> firstPulse(half).stream())
+                .toList();
+    }
+
+    /**
+     * The pulse that the ramp makes first. With a lagging winding that is not the first to act in the load's half cycle:
+     * late pulses of the half cycle before come ahead of it.
+     */
+    static Optional<Pulse> firstPulse(HalfCycle half) {
+        return half.pulses().stream().min(Comparator.comparingDouble(Pulse::startSeconds));
     }
 
     /** Every pulse of a solution. */
@@ -165,7 +180,7 @@ final class Bench {
     }
 
     private static boolean properlyFired(Solution solution) {
-        Optional<Pulse> first = solution.shown().pulses().stream().findFirst();
+        Optional<Pulse> first = firstPulse(solution.shown());
         return first.isPresent() && !first.get().endPulse();
     }
 

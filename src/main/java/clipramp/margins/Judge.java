@@ -54,6 +54,7 @@ public final class Judge {
         margins.addAll(new RampMargins(bench, condition).all());
         margins.add(new AngleDrift(bench, condition).margin());
         margins.addAll(new GateMargins(bench).all());
+        margins.addAll(new TransformerMargins(bench).all());
         margins.addAll(new ThyristorMargins(bench).all());
         margins.addAll(new TriggerMargins(bench).all());
         margins.addAll(new PartMargins(bench).all());

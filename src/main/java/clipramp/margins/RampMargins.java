@@ -22,8 +22,8 @@ final class RampMargins {
     /** Share of the full rms current that may flow as dc: a rule of ours. */
     private static final double DC_SHARE = 0.01;
 
-    /** By how much alternating firing angles may differ: a rule of ours, about 1 % of full power at 90 degrees. */
-    private static final double HUNTING_DEGREES = 1;
+    /** By how much alternating firing angles may differ: a rule of ours, 0.6 % of full power at 90 degrees. */
+    private static final double HUNTING_DEGREES = 0.5;
 
     private final Bench bench;
     private final Design design;
@@ -89,7 +89,7 @@ final class RampMargins {
                 findings.add(Finding.missing(kind, at.words(), "there is no pulse at the smallest R_E"));
                 continue;
             }
-            double fires = madeRad(at.condition(), half.pulses().get(0));
+            double fires = madeRad(at.condition(), Bench.firstPulse(half).orElseThrow());
             double clips = half.clipFromRad().orElse(Math.PI);
             findings.add(new Finding(
                     at.words(),

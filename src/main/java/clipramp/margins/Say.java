@@ -61,6 +61,14 @@ final class Say {
         return QuantityText.format(rad, Unit.ANGLE, DIGITS);
     }
 
+    static String voltSeconds(double value) {
+        return QuantityText.format(value, Unit.VOLT_SECOND, DIGITS);
+    }
+
+    static String henries(double value) {
+        return QuantityText.format(value, Unit.HENRY, DIGITS);
+    }
+
     static String hertz(double value) {
         return QuantityText.format(value, Unit.HERTZ, DIGITS);
     }
