@@ -60,6 +60,7 @@ final class DesignReader {
         double derating = RestSections.derating(root);
         Map<String, String> designators = RestSections.designators(root);
         root.close("");
+        new SoundnessCheck(root, findings).check(stage, clip, gate, load, thyristor);
         if (findings.hasProblems()) {
             return Optional.empty();
         }

@@ -82,6 +82,19 @@ final class Scope {
         return node.get(name).map(Node::place).orElse(node.place());
     }
 
+    /** Where the value of a dotted key stands, or the nearest mapping around it that is there. */
+    Place placeOfPath(String dotted) {
+        Node here = node;
+        for (String step : dotted.split("\\.")) {
+            Optional<Node> below = here instanceof Mapping mapping ? mapping.get(step) : Optional.empty();
+            if (below.isEmpty()) {
+                break;
+            }
+            here = below.get();
+        }
+        return here == node ? Place.of(node.place().file(), 1, 1) : here.place();
+    }
+
     String textOf(String name) {
         return node.textOf(name);
     }
