@@ -28,6 +28,7 @@ import org.junit.jupiter.params.provider.MethodSource;
  */
 class ShippedProfilesTest {
     private static final Path PROFILES = Path.of("profiles");
+    private static final ProfileLibrary SHIPPED = ProfileLibrary.shipped();
     private static final YAMLMapper YAML = new YAMLMapper();
     private static final List<String> HEAD = List.of("clipramp", "kind", "id", "sources");
 
@@ -36,6 +37,24 @@ class ShippedProfilesTest {
             Map.of(3, 0.05, 5, 0.06, 7, 0.05, 9, 0.015, 11, 0.035, 13, 0.03);
 
     private static final double EN_50160_TOTAL = 0.08;
+
+    private static final Map<String, String> PLACE = Map.of(
+            "unijunction", "trigger.device",
+            "programmable-unijunction", "trigger.device",
+            "zener", "clip.zener",
+            "scr", "thyristor.device",
+            "triac", "thyristor.device",
+            "line", "line",
+            "winding", "clip.winding");
+
+    private static final Map<String, String> USED_IN = Map.of(
+            "unijunction", "drying-cabinet",
+            "programmable-unijunction", "seed-drawer",
+            "zener", "drying-cabinet",
+            "scr", "drying-cabinet",
+            "triac", "shed-heater",
+            "line", "drying-cabinet",
+            "winding", "shed-heater");
 
     static List<Path> profiles() {
         try (Stream<Path> files = Files.walk(PROFILES)) {
@@ -55,6 +74,31 @@ class ShippedProfilesTest {
         assertThat(profile.path("id").asText() + ".yaml")
                 .isEqualTo(file.getFileName().toString())
                 .matches("[a-z0-9-]+\\.yaml");
+    }
+
+    /** Reading a design judges every figure of the profiles that it uses: key, unit, plausible window. */
+    @ParameterizedTest
+    @MethodSource("profiles")
+    void everyProfileReadsInADesignThatUsesIt(Path file) {
+        String kind = file.getParent().getFileName().toString();
+        String id = read(file).path("id").asText();
+        LoadedDesign loaded =
+                DesignFiles.load(example(USED_IN.get(kind)), List.of(PLACE.get(kind) + "=" + id), SHIPPED);
+        assertThat(loaded.profiles()).anySatisfy(use -> {
+            assertThat(use.id()).isEqualTo(id);
+            assertThat(use.kind()).isEqualTo(kind);
+            assertThat(use.from()).isEqualTo(ProfileLibrary.PROGRAM);
+        });
+        assertThat(loaded.design().notes()).isNotBlank();
+    }
+
+    @Test
+    void everyProfileIsFoundByTheProgramWithASourceForEachFigure() {
+        assertThat(SHIPPED.all())
+                .hasSameSizeAs(profiles())
+                .allSatisfy(found -> assertThat(Profile.read(found).figures())
+                        .isNotEmpty()
+                        .noneMatch(figure -> figure.source().equals("not stated")));
     }
 
     @ParameterizedTest
@@ -173,6 +217,14 @@ class ShippedProfilesTest {
         }
         // A flat-topped wave and a peaked one: the phases are ours.
         assertThat(highest).isCloseTo(crest, within(0.005));
+    }
+
+    private static Source example(String name) {
+        try {
+            return Source.of(Path.of("examples", name + ".yaml"));
+        } catch (IOException e) {
+            throw new UncheckedIOException(e);
+        }
     }
 
     private static boolean isBetween(String name, String first, String last) {
