@@ -2,17 +2,20 @@ package clipramp.engine;
 
 import clipramp.circuit.Condition;
 import clipramp.circuit.Design;
+import clipramp.circuit.Load;
 import clipramp.circuit.Stage;
 
 /**
- * Current that a resistive load takes with the thyristor on: i = max(0, (|v| - V_T0 - n V_F)/(R + r_T + n r_F)), n
- * bridge diodes in the path (0 or 2). Half-wave stages conduct in the positive half only.
+ * Current that a load takes once the thyristor is on. A resistor: i = max(0, (|v| - V_T0 - n V_F)/(R + r_T + n r_F)), n
+ * bridge diodes in the path (0 or 2). With an inductance it grows from nothing as {@link InductiveCurrent} says. Half-wave
+ * stages conduct in the positive half only.
  */
 public final class LoadCurrent {
     private final LineWave line;
     private final boolean fullWave;
     private final double dropVolts;
     private final double loopOhms;
+    private final double henries;
 
     public LoadCurrent(Design design, Condition condition) {
         this(design, new LineWave(design.line(), condition));
@@ -22,6 +25,7 @@ public final class LoadCurrent {
         this.line = line;
         Stage stage = design.stage();
         fullWave = stage.isFullWave();
+        henries = design.load() instanceof Load.Inductive inductive ? inductive.inductanceHenries() : 0;
         var onState = design.thyristor().device().onState();
         dropVolts = onState.thresholdVolts()
                 + stage.bridgeDiodes() * design.stageDiodes().dropVolts();
@@ -30,11 +34,49 @@ public final class LoadCurrent {
                 + stage.bridgeDiodes() * design.stageDiodes().slopeOhms();
     }
 
-    /** Load current magnitude in amperes at a line angle, rad, the thyristor taken as on. */
-    public double ampsAt(double angleRad) {
+    /** What drives current through the load at a line angle, rad, drops taken off, V; negative for nothing. */
+    public double drivingVolts(double angleRad) {
         double volts = line.voltsAt(angleRad);
-        double driving = (fullWave ? Math.abs(volts) : volts) - dropVolts;
-        return driving > 0 ? driving / loopOhms : 0;
+        return (fullWave ? Math.abs(volts) : volts) - dropVolts;
+    }
+
+    /** Current of a resistive load at a line angle, rad, the thyristor taken as on, A. */
+    public double ampsAt(double angleRad) {
+        return Math.max(0, drivingVolts(angleRad)) / loopOhms;
+    }
+
+    /**
+     * Load current at an angle, the thyristor fired at an earlier one with no current flowing.
+     *
+     * @param firedRad line angle of firing, rad
+     * @param atRad line angle asked about, rad, at or after it
+     * @return A; 0 where nothing drives it
+     */
+    public double ampsSince(double firedRad, double atRad) {
+        if (henries == 0 || drivingVolts(firedRad) <= 0) {
+            return ampsAt(atRad);
+        }
+        InductiveCurrent current = begun(firedRad);
+        return current.extinctionRad(atRad) < atRad ? 0 : current.ampsAt(atRad);
+    }
+
+    /**
+     * Line angle at which the current ends that was fired with none flowing.
+     *
+     * @param firedRad line angle of firing, rad
+     * @param halfEndRad the zero that ends the half cycle: with a resistor the current ends there, rad
+     */
+    public double extinctionRad(double firedRad, double halfEndRad) {
+        if (henries == 0 || drivingVolts(firedRad) <= 0) {
+            return halfEndRad;
+        }
+        return Math.min(begun(firedRad).extinctionRad(firedRad + 2 * Math.PI), firedRad + 2 * Math.PI);
+    }
+
+    private InductiveCurrent begun(double firedRad) {
+        InductiveCurrent current = new InductiveCurrent(line, loopOhms, henries);
+        current.begin(firedRad, line.voltsAt(firedRad) > 0 ? 1 : -1, dropVolts, 0);
+        return current;
     }
 
     /** All fixed drops in the load's path, V. */

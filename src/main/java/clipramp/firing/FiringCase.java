@@ -54,8 +54,21 @@ record FiringCase(
         return timing.startRad(half) + condition.omega() * seconds;
     }
 
-    /** Current that the load would take with the thyristor on, A, at a time within a half cycle. */
-    double anodeAmps(int half, double seconds) {
-        return load.ampsAt(lineRad(half, seconds));
+    /** Whether the anode is forward at a time within a half cycle. */
+    boolean isForward(int half, double seconds) {
+        return load.drivingVolts(lineRad(half, seconds)) > 0;
+    }
+
+    /** Load current, A, at a time within a half cycle, the thyristor fired at an earlier one. */
+    double anodeAmps(int half, double firedSeconds, double seconds) {
+        return load.ampsSince(lineRad(half, firedSeconds), lineRad(half, seconds));
+    }
+
+    /** Time, s, in the clock of the half cycle that it was fired in, at which the load current ends. */
+    double extinctionSeconds(int half, double firedSeconds) {
+        double end = timing.wave(half).seconds();
+        double fired = lineRad(half, firedSeconds);
+        double extinction = load.extinctionRad(fired, lineRad(half, end));
+        return firedSeconds + (extinction - fired) / condition.omega();
     }
 }

@@ -39,6 +39,9 @@ final class HalfCycleRun {
     private boolean latchedOn;
 
     private boolean conducting;
+    /** Time in the next half cycle until which this one's load current flows on, s. */
+    private double conductsUntil;
+
     private double triedFrom;
     private double triedRampVolts;
     private double triedFluxAmps;
@@ -68,7 +71,11 @@ final class HalfCycleRun {
         SourceWave wave = firing.timing().wave(half);
         double end = wave.seconds();
         begin();
-        stepper.start(wave, mode, rampVolts, fluxAmps);
+        // Across the thyristor the supply returns when the load current dies, which an inductance puts off.
+        double returns = conductsUntil;
+        conductsUntil = 0;
+        conducting = returns > 0;
+        stepper.start(conducting ? firing.conductingWave(end) : wave, mode, rampVolts, fluxAmps);
         noteClipping(false, 0);
         for (int events = 0; ; events++) {
             if (events > MOST_EVENTS) {
@@ -76,8 +83,15 @@ final class HalfCycleRun {
             }
             double from = stepper.seconds();
             boolean clippedBefore = stepper.clips();
-            Event event = stepper.advance(end);
+            boolean returning = from < returns;
+            Event event = stepper.advance(returning ? Math.min(returns, end) : end);
             passed(sink, stepper.piece(), from, stepper.seconds());
+            if (event == Event.END && returning && returns < end) {
+                conducting = false;
+                stepper.switchSource(wave);
+                noteClipping(clippedBefore, stepper.seconds());
+                continue;
+            }
             handle(event, wave, sink);
             noteClipping(clippedBefore, stepper.seconds());
             if (event == Event.END) {
@@ -137,7 +151,7 @@ final class HalfCycleRun {
         stalled = begun.isEmpty() ? afterStall : stalled;
         going = new PulseMeter(firing.network(), half, stepper.seconds(), stepper.rampVolts(), supply, afterStall);
         begun.add(going);
-        if (firing.tapsThyristor() && !conducting && firing.anodeAmps(half, stepper.seconds()) > 0) {
+        if (firing.tapsThyristor() && !conducting && firing.isForward(half, stepper.seconds())) {
             triedFrom = stepper.seconds();
             triedRampVolts = stepper.rampVolts();
             triedFluxAmps = stepper.fluxAmps();
@@ -159,6 +173,8 @@ final class HalfCycleRun {
         trying = false;
         if (pulse.latches(firing)) {
             conducting = true;
+            double end = firing.extinctionSeconds(half, triedFrom);
+            conductsUntil = Math.max(0, end - wave.seconds());
         } else if (pulse.turnsOn(firing)) {
             stepper.switchSource(wave);
         } else {
@@ -243,6 +259,10 @@ final class HalfCycleRun {
 
     double fluxAmps() {
         return fluxAmps;
+    }
+
+    double conductsUntil() {
+        return conductsUntil;
     }
 
     boolean pulseIsGoing() {

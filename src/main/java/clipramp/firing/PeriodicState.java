@@ -13,6 +13,9 @@ final class PeriodicState {
     /** Two magnetising currents nearer than this are the same, A. */
     private static final double SAME_AMPS = 1e-10;
 
+    /** Two extinctions nearer than this are the same, s. */
+    private static final double SAME_SECONDS = 1e-12;
+
     private static final int MOST_HALVES = 60;
 
     /** How many half cycles are shown of a circuit that never settles. */
@@ -20,11 +23,16 @@ final class PeriodicState {
 
     private PeriodicState() {}
 
-    private record State(Mode mode, double rampVolts, double fluxAmps) {
+    private record State(Mode mode, double rampVolts, double fluxAmps, double conductsUntil) {
+        static State of(HalfCycleRun run) {
+            return new State(run.mode(), run.rampVolts(), run.fluxAmps(), run.conductsUntil());
+        }
+
         boolean isSameAs(State other) {
             return mode == other.mode
                     && Math.abs(rampVolts - other.rampVolts) < SAME_VOLTS
-                    && Math.abs(fluxAmps - other.fluxAmps) < SAME_AMPS;
+                    && Math.abs(fluxAmps - other.fluxAmps) < SAME_AMPS
+                    && Math.abs(conductsUntil - other.conductsUntil) < SAME_SECONDS;
         }
     }
 
@@ -33,12 +41,12 @@ final class PeriodicState {
         HalfCycleRun run = new HalfCycleRun(firing);
         int period = firing.timing().period();
         List<State> states = new ArrayList<>();
-        states.add(new State(run.mode(), run.rampVolts(), run.fluxAmps()));
+        states.add(State.of(run));
         Solution.Settling settling = Solution.Settling.NEVER;
         int repeats = 0;
         while (states.size() <= MOST_HALVES && repeats == 0) {
             run.skip();
-            states.add(new State(run.mode(), run.rampVolts(), run.fluxAmps()));
+            states.add(State.of(run));
             if (repeatsAfter(states, period)) {
                 settling = Solution.Settling.STEADY;
                 repeats = period;

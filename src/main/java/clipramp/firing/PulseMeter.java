@@ -147,12 +147,14 @@ final class PulseMeter {
 
     /** Whether the gate current lasts for the thyristor's turn-on time, with its anode forward as it begins. */
     boolean turnsOn(FiringCase firing) {
-        return longestAbove > 0 && longestAbove >= n.turnOnSeconds && firing.anodeAmps(half, longestAboveStart) > 0;
+        return longestAbove > 0 && longestAbove >= n.turnOnSeconds && firing.isForward(half, longestAboveStart);
     }
 
     /** Anode current as the gate current falls under the trigger current for good, A. */
     double anodeAmps(FiringCase firing) {
-        return firing.anodeAmps(half, longestAbove > 0 ? longestAboveEnd : endSeconds);
+        return longestAbove > 0
+                ? firing.anodeAmps(half, longestAboveStart, longestAboveEnd)
+                : firing.anodeAmps(half, startSeconds, endSeconds);
     }
 
     boolean latches(FiringCase firing) {
