@@ -16,9 +16,6 @@ final class HalfCycleRun {
 
     private static final int BISECTIONS = 60;
 
-    /** With less capacitor current than this share of the emitter's, the ramp resistor alone holds the device on. */
-    private static final double HELD_BY_RESISTOR = 0.5;
-
     private final FiringCase firing;
     private final Stepper stepper;
 
@@ -138,8 +135,8 @@ final class HalfCycleRun {
             case FIRES -> fire(wave);
             case STALLS -> stalled |= begun.isEmpty();
             case VALLEY -> endPulse(wave, sink);
-            case ZENER -> noteLatchedOn();
-            case RECTIFIER, GATE, CLAMP, UNSTALLS, END -> {}
+            case ZENER, RECTIFIER, GATE -> noteLatchedOn();
+            case CLAMP, UNSTALLS, END -> {}
         }
     }
 
@@ -197,15 +194,18 @@ final class HalfCycleRun {
         }
     }
 
-    /** The supply collapses: if the device is still on and the ramp resistor alone feeds it, it was latched on. */
+    /**
+     * The ramp resistor alone feeds more than the valley current, so the device cannot leave its valley until the supply
+     * collapses. Looked at whenever something switches: a heavily latched device pulls the supply under its clip at once.
+     */
     private void noteLatchedOn() {
-        if (stepper.clips() || going == null || stepper.mode() != Mode.ON) {
+        if (going == null || stepper.mode() != Mode.ON) {
             return;
         }
         Piece piece = stepper.piece();
         piece.look(stepper.seconds());
         double throughResistor = (piece.supplyVolts() - piece.rampVolts()) / firing.network().rampOhms;
-        if (throughResistor > HELD_BY_RESISTOR * piece.emitterAmps()) {
+        if (throughResistor > firing.network().valleySiemens * piece.supplyVolts()) {
             latchedOn = true;
         }
     }
