@@ -1,6 +1,9 @@
 package clipramp.figures;
 
 import java.awt.Color;
+import java.util.LinkedHashMap;
+import java.util.Locale;
+import java.util.Map;
 
 /**
  * One theme's colours. A colour is a signal's, never decoration: the Okabe-Ito hues (Okabe and Ito, Color Universal
@@ -88,6 +91,27 @@ public record Palette(
 
     private static int between(int from, int to, double share) {
         return (int) Math.round(from + (to - from) * share);
+    }
+
+    /** Every colour by its name as #rrggbb, for a style sheet. */
+    public Map<String, String> webColours() {
+        Map<String, String> colours = new LinkedHashMap<>();
+        colours.put("ground", web(ground));
+        colours.put("ink", web(ink));
+        colours.put("quiet", web(quiet));
+        colours.put("axis", web(axis));
+        colours.put("hairline", web(hairline));
+        colours.put("wash", web(wash));
+        colours.put("line", web(line));
+        colours.put("supply", web(supply));
+        colours.put("ramp", web(ramp));
+        colours.put("pulse", web(pulse));
+        colours.put("load", web(load));
+        return colours;
+    }
+
+    private static String web(Color colour) {
+        return String.format(Locale.ROOT, "#%06x", colour.getRGB() & 0xFFFFFF);
     }
 
     /** Contrast ratio of two colours, 1..21 (WCAG 2.1, definition of contrast ratio). */

@@ -28,19 +28,26 @@ final class ResistorCurrent {
     private final Line line;
     private final double lineVolts;
     private final double dropVolts;
+    private final double loadOhms;
     private final double pathOhms;
 
     ResistorCurrent(Design design, Condition condition) {
         this.line = design.line();
         this.lineVolts = condition.lineVolts();
         this.dropVolts = PathDrops.volts(design);
-        this.pathOhms = design.load().resistanceOhms() + PathDrops.ohms(design);
+        this.loadOhms = design.load().resistanceOhms();
+        this.pathOhms = loadOhms + PathDrops.ohms(design);
     }
 
     /** What is over for the load's path at an angle counted from the half cycle's own zero of the fundamental, V. */
     private double drivingVolts(boolean positive, double rad) {
         double volts = positive ? line.voltsAt(lineVolts, rad) : -line.voltsAt(lineVolts, rad + Math.PI);
         return volts - dropVolts;
+    }
+
+    /** Voltage across the load while the thyristor is on, V; 0 where the line does not reach over the drops. */
+    double loadVoltsAt(boolean positive, double rad) {
+        return Math.max(0, drivingVolts(positive, rad)) * loadOhms / pathOhms;
     }
 
     /**

@@ -1,0 +1,300 @@
+package clipramp.desk.model;
+
+import clipramp.files.Source;
+import java.io.IOException;
+import java.nio.charset.StandardCharsets;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.nio.file.StandardCopyOption;
+import java.util.ArrayDeque;
+import java.util.ArrayList;
+import java.util.Deque;
+import java.util.List;
+import java.util.Optional;
+import java.util.function.Consumer;
+import java.util.function.UnaryOperator;
+
+/**
+ * The design file on the desk: its text with every step back, and where it is kept. Edits are read away from home, one
+ * after the other; what cannot be read changes nothing.
+ */
+public final class Draft {
+    private record Edit(String name, UnaryOperator<String> change, Consumer<Optional<Trouble>> done) {}
+
+    private final Workers workers;
+    private final Workshop workshop;
+    private final Recovery recovery;
+    private final Consumer<Trouble> troubles;
+    private final Deque<Edit> edits = new ArrayDeque<>();
+    private final List<Runnable> listeners = new ArrayList<>();
+    private Optional<History<Sheet>> history = Optional.empty();
+    private Optional<Path> file = Optional.empty();
+    private String name = "";
+    private String saved = "";
+    private boolean editing;
+    private boolean writing;
+
+    /**
+     * @param workers where work is done
+     * @param workshop reads and edits design files
+     * @param recovery keeps unsaved work
+     * @param troubles takes what went wrong where nobody waits for the answer
+     */
+    public Draft(Workers workers, Workshop workshop, Recovery recovery, Consumer<Trouble> troubles) {
+        this.workers = workers;
+        this.workshop = workshop;
+        this.recovery = recovery;
+        this.troubles = troubles;
+    }
+
+    public Workshop workshop() {
+        return workshop;
+    }
+
+    /** Told whenever design, file or saved state changed. */
+    public void onChange(Runnable listener) {
+        listeners.add(listener);
+    }
+
+    public boolean isOpen() {
+        return history.isPresent();
+    }
+
+    /** The design as it stands. */
+    public Optional<Sheet> sheet() {
+        return history.map(History::now);
+    }
+
+    public Optional<Path> file() {
+        return file;
+    }
+
+    /** The file's name, or what the design was made from. */
+    public String name() {
+        return file.map(f -> String.valueOf(f.getFileName())).orElse(name);
+    }
+
+    /** Whether the design differs from what is saved. */
+    public boolean isDirty() {
+        return sheet().map(s -> !s.text().equals(saved)).orElse(false);
+    }
+
+    /** Whether something is being read or written. */
+    public boolean isBusy() {
+        return editing || writing || !edits.isEmpty();
+    }
+
+    /** Reads a file and puts it on the desk. */
+    public void open(Path path) {
+        Path absolute = path.toAbsolutePath().normalize();
+        start(
+                "The design cannot be opened",
+                () -> {
+                    Source source = Source.of(absolute);
+                    return workshop.read(String.valueOf(absolute.getFileName()), Optional.of(absolute), source.text());
+                },
+                sheet -> put(sheet, Optional.of(absolute), "", sheet.text()));
+    }
+
+    /** Puts a design on the desk that was never saved: an example, a proposal. */
+    public void openUnsaved(String title, String text) {
+        start(
+                "The design cannot be opened",
+                () -> {
+                    Sheet sheet = workshop.read(title, Optional.empty(), text);
+                    recovery.keep(Optional.empty(), text);
+                    return sheet;
+                },
+                sheet -> put(sheet, Optional.empty(), title, ""));
+    }
+
+    /** Puts work on the desk that a window left behind when its process ended. */
+    public void recover(Recovery.Left left) {
+        start(
+                "The work that was left cannot be read",
+                () -> {
+                    String title = left.file().map(f -> String.valueOf(f.getFileName())).orElse("recovered");
+                    Sheet sheet = workshop.read(title, left.file(), left.text());
+                    recovery.keep(left.file(), left.text());
+                    recovery.forget(left);
+                    return sheet;
+                },
+                sheet -> put(sheet, left.file(), "recovered", ""));
+    }
+
+    private interface SheetReading {
+        Sheet read() throws IOException;
+    }
+
+    private void start(String what, SheetReading reading, Consumer<Sheet> then) {
+        writing = true;
+        workers.writing().execute(() -> {
+            try {
+                Sheet sheet = reading.read();
+                workers.home().execute(() -> {
+                    writing = false;
+                    then.accept(sheet);
+                });
+            } catch (IOException | RuntimeException e) {
+                workers.home().execute(() -> {
+                    writing = false;
+                    troubles.accept(Trouble.of(what, e));
+                });
+            }
+        });
+    }
+
+    private void put(Sheet sheet, Optional<Path> belongs, String title, String savedText) {
+        edits.clear();
+        history = Optional.of(new History<>(sheet));
+        file = belongs;
+        name = title;
+        saved = savedText;
+        changed();
+    }
+
+    private void changed() {
+        listeners.forEach(Runnable::run);
+    }
+
+    /**
+     * Changes the value at a key.
+     *
+     * @param key design key
+     * @param value value as typed
+     * @param done told at home what was wrong with it, or nothing
+     */
+    public void set(String key, String value, Consumer<Optional<Trouble>> done) {
+        edit(key + " to " + value, text -> workshop.with(text, key, value), done);
+    }
+
+    /** Changes the text by one step that can be taken back. */
+    public void edit(String stepName, UnaryOperator<String> change, Consumer<Optional<Trouble>> done) {
+        edits.add(new Edit(stepName, change, done));
+        nextEdit();
+    }
+
+    private void nextEdit() {
+        if (editing || edits.isEmpty() || history.isEmpty()) {
+            return;
+        }
+        Edit edit = edits.remove();
+        Sheet before = history.get().now();
+        Optional<Path> belongs = file;
+        editing = true;
+        workers.writing().execute(() -> {
+            try {
+                String text = edit.change().apply(before.text());
+                Sheet after = text.equals(before.text()) ? before : workshop.read(before.loaded().name(), belongs, text);
+                if (!text.equals(before.text())) {
+                    recovery.keep(belongs, text);
+                }
+                workers.home().execute(() -> accept(edit, before, after));
+            } catch (IOException | RuntimeException e) {
+                workers.home().execute(() -> refuse(edit, e));
+            }
+        });
+    }
+
+    private void accept(Edit edit, Sheet before, Sheet after) {
+        editing = false;
+        if (after != before) {
+            history.ifPresent(h -> h.step(edit.name(), after));
+            changed();
+        }
+        edit.done().accept(Optional.empty());
+        nextEdit();
+    }
+
+    private void refuse(Edit edit, Exception failure) {
+        editing = false;
+        edit.done().accept(Optional.of(Trouble.of("This was not taken", failure)));
+        nextEdit();
+    }
+
+    public Optional<String> undoName() {
+        return history.flatMap(History::undoName);
+    }
+
+    public Optional<String> redoName() {
+        return history.flatMap(History::redoName);
+    }
+
+    public void undo() {
+        step(History::undo);
+    }
+
+    public void redo() {
+        step(History::redo);
+    }
+
+    private void step(Consumer<History<Sheet>> move) {
+        history.ifPresent(h -> {
+            move.accept(h);
+            String text = h.now().text();
+            Optional<Path> belongs = file;
+            write("The unsaved work could not be kept", () -> recovery.keep(belongs, text), () -> {});
+            changed();
+        });
+    }
+
+    private interface Writing {
+        void write() throws IOException;
+    }
+
+    private void write(String what, Writing task, Runnable then) {
+        writing = true;
+        workers.writing().execute(() -> {
+            try {
+                task.write();
+                workers.home().execute(() -> {
+                    writing = false;
+                    then.run();
+                });
+            } catch (IOException | RuntimeException e) {
+                workers.home().execute(() -> {
+                    writing = false;
+                    troubles.accept(Trouble.of(what, e));
+                });
+            }
+        });
+    }
+
+    /** Saves the design, whole or not at all. */
+    public void save(Path target, Runnable then) {
+        Path absolute = target.toAbsolutePath().normalize();
+        sheet().ifPresent(sheet -> write(
+                "The design cannot be saved",
+                () -> {
+                    writeWhole(absolute, sheet.text().getBytes(StandardCharsets.UTF_8));
+                    recovery.forget();
+                },
+                () -> {
+                    file = Optional.of(absolute);
+                    saved = sheet.text();
+                    changed();
+                    then.run();
+                }));
+    }
+
+    /** Writes any other file, such as a picture or the record, whole or not at all. */
+    public void export(Path target, byte[] content, Runnable then) {
+        write("The file cannot be written", () -> writeWhole(target, content), then);
+    }
+
+    private static void writeWhole(Path target, byte[] content) throws IOException {
+        Path folder = target.toAbsolutePath().getParent();
+        Path beside = Files.createTempFile(folder, ".clipramp", ".part");
+        try {
+            Files.write(beside, content);
+            Files.move(beside, target, StandardCopyOption.REPLACE_EXISTING);
+        } finally {
+            Files.deleteIfExists(beside);
+        }
+    }
+
+    /** Gives the unsaved work up. */
+    public void abandon(Runnable then) {
+        write("The unsaved work could not be forgotten", recovery::forget, then);
+    }
+}
