@@ -9,4 +9,9 @@ import java.awt.geom.Rectangle2D;
  * @param designator its name in the drawing
  * @param box its symbol and label, in user units of the surface
  */
-public record PartBox(String key, String designator, Rectangle2D box) {}
+public record PartBox(String key, String designator, Rectangle2D box) {
+    /** Whether a point lies in it. */
+    public boolean contains(double x, double y) {
+        return box.contains(x, y);
+    }
+}

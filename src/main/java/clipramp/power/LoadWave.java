@@ -30,7 +30,7 @@ public record LoadWave(double[] rad, double[] volts) {
             throw new UnsupportedLoadException(design.load());
         }
         boolean period = design.stage() == Stage.HALF_WAVE || ActingPulses.spansPeriods(solution);
-        List<ActingPulses.Slot> slots = ActingPulses.slots(design, solution);
+        List<ActingPulses.Slot> slots = ActingPulses.slots(solution);
         ResistorCurrent path = new ResistorCurrent(design, condition);
         List<double[]> samples = new ArrayList<>();
         samples.add(new double[] {0, 0});

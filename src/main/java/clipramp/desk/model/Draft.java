@@ -1,25 +1,24 @@
 package clipramp.desk.model;
 
+import clipramp.files.DesignText;
 import clipramp.files.Source;
+import clipramp.files.WholeFile;
 import java.io.IOException;
-import java.nio.charset.StandardCharsets;
-import java.nio.file.Files;
 import java.nio.file.Path;
-import java.nio.file.StandardCopyOption;
 import java.util.ArrayDeque;
 import java.util.ArrayList;
 import java.util.Deque;
 import java.util.List;
 import java.util.Optional;
 import java.util.function.Consumer;
-import java.util.function.UnaryOperator;
+import java.util.function.Function;
 
 /**
  * The design file on the desk: its text with every step back, and where it is kept. Edits are read away from home, one
  * after the other; what cannot be read changes nothing.
  */
 public final class Draft {
-    private record Edit(String name, UnaryOperator<String> change, Consumer<Optional<Trouble>> done) {}
+    private record Edit(String name, Function<Sheet, DesignText> change, Consumer<Optional<Trouble>> done) {}
 
     private final Workers workers;
     private final Workshop workshop;
@@ -76,7 +75,7 @@ public final class Draft {
 
     /** Whether the design differs from what is saved. */
     public boolean isDirty() {
-        return sheet().map(s -> !s.text().equals(saved)).orElse(false);
+        return sheet().map(s -> !s.text().text().equals(saved)).orElse(false);
     }
 
     /** Whether something is being read or written. */
@@ -90,10 +89,10 @@ public final class Draft {
         start(
                 "The design cannot be opened",
                 () -> {
-                    Source source = Source.of(absolute);
-                    return workshop.read(String.valueOf(absolute.getFileName()), Optional.of(absolute), source.text());
+                    DesignText text = DesignText.of(Source.of(absolute));
+                    return workshop.read(text.named(String.valueOf(absolute.getFileName())), Optional.of(absolute));
                 },
-                sheet -> put(sheet, Optional.of(absolute), "", sheet.text()));
+                sheet -> put(sheet, Optional.of(absolute), "", sheet.text().text()));
     }
 
     /** Puts a design on the desk that was never saved: an example, a proposal. */
@@ -101,7 +100,7 @@ public final class Draft {
         start(
                 "The design cannot be opened",
                 () -> {
-                    Sheet sheet = workshop.read(title, Optional.empty(), text);
+                    Sheet sheet = workshop.read(DesignText.of(new Source(title, text)), Optional.empty());
                     recovery.keep(Optional.empty(), text);
                     return sheet;
                 },
@@ -114,7 +113,7 @@ public final class Draft {
                 "The work that was left cannot be read",
                 () -> {
                     String title = left.file().map(f -> String.valueOf(f.getFileName())).orElse("recovered");
-                    Sheet sheet = workshop.read(title, left.file(), left.text());
+                    Sheet sheet = workshop.read(DesignText.of(new Source(title, left.text())), left.file());
                     recovery.keep(left.file(), left.text());
                     recovery.forget(left);
                     return sheet;
@@ -161,15 +160,36 @@ public final class Draft {
      * Changes the value at a key.
      *
      * @param key design key
-     * @param value value as typed
+     * @param label what the step is called by
+     * @param value value as it is to be written
      * @param done told at home what was wrong with it, or nothing
      */
-    public void set(String key, String value, Consumer<Optional<Trouble>> done) {
-        edit(key + " to " + value, text -> workshop.with(text, key, value), done);
+    public void set(String key, String label, String value, Consumer<Optional<Trouble>> done) {
+        edit(label + " to " + value, sheet -> sheet.text().withValue(key, value), done);
+    }
+
+    /** Chooses a word at a key, with whatever else must change for the circuit to stay sound. */
+    public void choose(String key, String word, Consumer<Optional<Trouble>> done) {
+        edit(
+                key + " to " + word,
+                sheet -> {
+                    DesignText text = sheet.text();
+                    for (Companions.Change change : Companions.of(key, word, sheet.design(), programmable(word))) {
+                        text = change.value().isEmpty()
+                                ? text.without(change.key())
+                                : text.withValue(change.key(), change.value());
+                    }
+                    return text;
+                },
+                done);
+    }
+
+    private boolean programmable(String word) {
+        return workshop.isProgrammable(word, file);
     }
 
     /** Changes the text by one step that can be taken back. */
-    public void edit(String stepName, UnaryOperator<String> change, Consumer<Optional<Trouble>> done) {
+    public void edit(String stepName, Function<Sheet, DesignText> change, Consumer<Optional<Trouble>> done) {
         edits.add(new Edit(stepName, change, done));
         nextEdit();
     }
@@ -184,10 +204,11 @@ public final class Draft {
         editing = true;
         workers.writing().execute(() -> {
             try {
-                String text = edit.change().apply(before.text());
-                Sheet after = text.equals(before.text()) ? before : workshop.read(before.loaded().name(), belongs, text);
-                if (!text.equals(before.text())) {
-                    recovery.keep(belongs, text);
+                DesignText text = edit.change().apply(before);
+                boolean same = text.text().equals(before.text().text());
+                Sheet after = same ? before : workshop.read(text, belongs);
+                if (!same) {
+                    recovery.keep(belongs, text.text());
                 }
                 workers.home().execute(() -> accept(edit, before, after));
             } catch (IOException | RuntimeException e) {
@@ -231,7 +252,7 @@ public final class Draft {
     private void step(Consumer<History<Sheet>> move) {
         history.ifPresent(h -> {
             move.accept(h);
-            String text = h.now().text();
+            String text = h.now().text().text();
             Optional<Path> belongs = file;
             write("The unsaved work could not be kept", () -> recovery.keep(belongs, text), () -> {});
             changed();
@@ -266,12 +287,12 @@ public final class Draft {
         sheet().ifPresent(sheet -> write(
                 "The design cannot be saved",
                 () -> {
-                    writeWhole(absolute, sheet.text().getBytes(StandardCharsets.UTF_8));
+                    WholeFile.write(absolute, sheet.text().text(), true);
                     recovery.forget();
                 },
                 () -> {
                     file = Optional.of(absolute);
-                    saved = sheet.text();
+                    saved = sheet.text().text();
                     changed();
                     then.run();
                 }));
@@ -279,18 +300,7 @@ public final class Draft {
 
     /** Writes any other file, such as a picture or the record, whole or not at all. */
     public void export(Path target, byte[] content, Runnable then) {
-        write("The file cannot be written", () -> writeWhole(target, content), then);
-    }
-
-    private static void writeWhole(Path target, byte[] content) throws IOException {
-        Path folder = target.toAbsolutePath().getParent();
-        Path beside = Files.createTempFile(folder, ".clipramp", ".part");
-        try {
-            Files.write(beside, content);
-            Files.move(beside, target, StandardCopyOption.REPLACE_EXISTING);
-        } finally {
-            Files.deleteIfExists(beside);
-        }
+        write("The file cannot be written", () -> WholeFile.write(target, out -> out.write(content), true), then);
     }
 
     /** Gives the unsaved work up. */

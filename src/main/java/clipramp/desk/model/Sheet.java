@@ -1,6 +1,7 @@
 package clipramp.desk.model;
 
 import clipramp.circuit.Design;
+import clipramp.files.DesignText;
 import clipramp.files.LoadedDesign;
 
 /**
@@ -9,7 +10,7 @@ import clipramp.files.LoadedDesign;
  * @param text the file's text
  * @param loaded what it says
  */
-public record Sheet(String text, LoadedDesign loaded) {
+public record Sheet(DesignText text, LoadedDesign loaded) {
     public Design design() {
         return loaded.design();
     }

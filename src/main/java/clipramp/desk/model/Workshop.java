@@ -1,24 +1,60 @@
 package clipramp.desk.model;
 
+import clipramp.circuit.Stage;
+import clipramp.files.DesignText;
 import clipramp.files.InvalidInputException;
+import clipramp.files.ProfileLibrary;
 import java.nio.file.Path;
+import java.util.List;
 import java.util.Optional;
+import java.util.function.Function;
+import java.util.stream.Stream;
 
-/** Reads design files and changes single values in their text. */
-public interface Workshop {
+/** Reads design texts with the profiles that go with them. */
+public final class Workshop {
+    private final Function<Optional<Path>, ProfileLibrary> libraries;
+
+    /**
+     * @param libraries the profiles that a design file sees; empty for a design that was never saved
+     */
+    public Workshop(Function<Optional<Path>, ProfileLibrary> libraries) {
+        this.libraries = libraries;
+    }
+
     /**
      * Reads a text.
      *
-     * @param name name that problems carry
-     * @param file where it lies, for profiles beside it; empty for a design that was not saved yet
      * @param text the text
+     * @param file where it lies, for profiles beside it; empty for a design that was never saved
      * @throws InvalidInputException with everything that is wrong with it
      */
-    Sheet read(String name, Optional<Path> file, String text);
+    public Sheet read(DesignText text, Optional<Path> file) {
+        DesignText.Reading reading = text.read(libraries.apply(file));
+        if (reading instanceof DesignText.Reading.Good good) {
+            return new Sheet(text, good.loaded());
+        }
+        throw new InvalidInputException(((DesignText.Reading.Bad) reading).problems());
+    }
 
-    /** The text that stands at a key, such as "100 nF ±10 %" at ramp.capacitor; empty where nothing does. */
-    Optional<String> value(String text, String key);
+    /** Ids of the profiles that may stand at a key of a design; empty where none may. */
+    public List<String> profileIds(String key, Stage stage, Optional<Path> file) {
+        ProfileLibrary library = libraries.apply(file);
+        return kinds(key, stage).flatMap(kind -> library.ids(kind).stream()).toList();
+    }
 
-    /** The same text with another value at a key; everything else, comments too, stays as it is. */
-    String with(String text, String key, String value);
+    private static Stream<String> kinds(String key, Stage stage) {
+        return switch (key) {
+            case "line" -> Stream.of("line");
+            case "clip.winding" -> Stream.of("winding");
+            case "clip.zener" -> Stream.of("zener");
+            case "trigger.device" -> Stream.of("unijunction", "programmable-unijunction");
+            case "thyristor.device" -> Stream.of(stage == Stage.TRIAC ? "triac" : "scr");
+            default -> Stream.empty();
+        };
+    }
+
+    /** Whether an id names a programmable unijunction transistor. */
+    public boolean isProgrammable(String id, Optional<Path> file) {
+        return libraries.apply(file).ids("programmable-unijunction").contains(id);
+    }
 }

@@ -1,0 +1,81 @@
+package clipramp.desk;
+
+import clipramp.desk.model.Example;
+import clipramp.desk.model.Recovery;
+import clipramp.desk.model.Settings;
+import clipramp.desk.model.ViewCondition;
+import java.nio.file.Path;
+
+/** What the user can ask of the window, from menus, keys and pages alike. */
+interface Actions {
+    void startNew();
+
+    void open();
+
+    void openFile(Path file);
+
+    void openExample(Example example);
+
+    void recover(Recovery.Left work);
+
+    void forget(Recovery.Left work);
+
+    void save();
+
+    void saveAs();
+
+    void undo();
+
+    void redo();
+
+    void showCautions();
+
+    void showShortcuts();
+
+    void showAbout();
+
+    void showNumbers(Shown what);
+
+    void copyPicture(Shown what);
+
+    void copyTable(Shown what);
+
+    void export(Shown what, FileAsk.Kind kind);
+
+    void showPage(Page page);
+
+    void zoomBy(int percent);
+
+    void zoomTo(int percent);
+
+    void setLook(Settings.Look look);
+
+    void setCondition(ViewCondition condition);
+
+    void zoomPulse();
+
+    void close();
+
+    /** A figure on the bench. */
+    enum Shown {
+        LANES("lanes"),
+        KNOB("power curve"),
+        CIRCUIT("circuit");
+
+        private final String words;
+
+        Shown(String words) {
+            this.words = words;
+        }
+
+        String words() {
+            return words;
+        }
+    }
+
+    /** The pages of a window with a design. */
+    enum Page {
+        BENCH,
+        RECORD
+    }
+}

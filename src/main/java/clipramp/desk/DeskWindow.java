@@ -1,0 +1,132 @@
+package clipramp.desk;
+
+import clipramp.desk.Actions.Page;
+import clipramp.desk.Actions.Shown;
+import clipramp.desk.model.DeskModel;
+import clipramp.desk.model.Recovery;
+import clipramp.desk.model.Settings;
+import clipramp.figures.CircuitFigure;
+import clipramp.figures.Figure;
+import java.nio.file.Path;
+import java.util.List;
+import java.util.Optional;
+import javafx.scene.Scene;
+import javafx.scene.input.TransferMode;
+import javafx.scene.layout.BorderPane;
+import javafx.scene.layout.VBox;
+import javafx.stage.Stage;
+
+/** One window: menu bar, header and a page. */
+final class DeskWindow {
+    private static final double WIDTH = 1366;
+    private static final double HEIGHT = 768;
+    private static final double LEAST_WIDTH = 640;
+    private static final double LEAST_HEIGHT = 480;
+
+    private final Stage stage;
+    private final Theme theme;
+    private final DeskModel model;
+    private final BorderPane root = new BorderPane();
+    private final StartPage start;
+    private final BenchPage bench;
+    private final HeaderView header;
+    private final Menus menus;
+    private final VBox top = new VBox();
+    private Page page = Page.BENCH;
+
+    DeskWindow(Stage stage, Theme theme, DeskModel model, Actions actions) {
+        this.stage = stage;
+        this.theme = theme;
+        this.model = model;
+        this.start = new StartPage(actions);
+        this.bench = new BenchPage(theme, model);
+        this.header = new HeaderView(model, actions, () -> bench.unfold(true));
+        this.menus = new Menus(actions, model.draft());
+        top.getChildren().setAll(menus.node());
+        root.setTop(top);
+        root.setCenter(start.node());
+        Scene scene = new Scene(root, WIDTH, HEIGHT);
+        theme.dress(scene.getStylesheets());
+        stage.setScene(scene);
+        stage.setMinWidth(LEAST_WIDTH);
+        stage.setMinHeight(LEAST_HEIGHT);
+        stage.setTitle("clipramp");
+        stage.setOnCloseRequest(event -> {
+            event.consume();
+            actions.close();
+        });
+        takeDrops(scene, actions);
+        model.draft().onChange(this::refresh);
+        scene.widthProperty().addListener(property -> mark());
+        theme.onChange(this::mark);
+    }
+
+    private static void takeDrops(Scene scene, Actions actions) {
+        scene.setOnDragOver(event -> {
+            if (event.getDragboard().hasFiles()) {
+                event.acceptTransferModes(TransferMode.COPY);
+            }
+            event.consume();
+        });
+        scene.setOnDragDropped(event -> {
+            boolean files = event.getDragboard().hasFiles();
+            if (files) {
+                actions.openFile(event.getDragboard().getFiles().get(0).toPath());
+            }
+            event.setDropCompleted(files);
+            event.consume();
+        });
+    }
+
+    private void refresh() {
+        if (model.draft().isOpen() && root.getCenter() == start.node()) {
+            top.getChildren().setAll(menus.node(), header.node());
+            showPage(Page.BENCH);
+        }
+        stage.setTitle(model.draft().name() + (model.draft().isDirty() ? " (differs from saved)" : "") + " – clipramp");
+        mark();
+    }
+
+    void showPage(Page wanted) {
+        page = wanted;
+        root.setCenter(bench);
+        mark();
+    }
+
+    private void mark() {
+        header.showPage(page, bench.isFolded());
+    }
+
+    void showSettings(Settings settings) {
+        menus.showRecent(settings.recent());
+        start.showRecent(settings.recent());
+    }
+
+    void offer(List<Recovery.Left> works) {
+        start.offer(works);
+    }
+
+    Stage stage() {
+        return stage;
+    }
+
+    Theme theme() {
+        return theme;
+    }
+
+    BenchPage bench() {
+        return bench;
+    }
+
+    Optional<Figure> figure(Shown what) {
+        return switch (what) {
+            case LANES -> bench.lanes().figure().map(f -> (Figure) f);
+            case KNOB -> bench.knob().figure().map(f -> (Figure) f);
+            case CIRCUIT -> model.draft().sheet().map(s -> new CircuitFigure(s.design()));
+        };
+    }
+
+    Optional<Path> file() {
+        return model.draft().file();
+    }
+}

@@ -1,0 +1,133 @@
+package clipramp.desk;
+
+import clipramp.circuit.Design;
+import clipramp.desk.Actions.Page;
+import clipramp.desk.model.DeskModel;
+import clipramp.desk.model.MarginRow;
+import clipramp.desk.model.Sheet;
+import clipramp.desk.model.ViewCondition;
+import java.util.List;
+import java.util.Locale;
+import javafx.scene.control.Button;
+import javafx.scene.control.ComboBox;
+import javafx.scene.control.Hyperlink;
+import javafx.scene.control.Label;
+import javafx.scene.control.ToggleButton;
+import javafx.scene.control.ToggleGroup;
+import javafx.scene.layout.HBox;
+import javafx.scene.layout.Priority;
+import javafx.scene.layout.Region;
+import javafx.scene.layout.VBox;
+
+/** Over every page: what the design is, whether it is saved, at what condition it is shown, and the verdict. */
+final class HeaderView {
+    private final DeskModel model;
+    private final Label title = new Label();
+    private final Label saved = new Label();
+    private final Label verdict = new Label();
+    private final Label counts = new Label();
+    private final Label note = new Label();
+    private final Button margins = new Button("Margins");
+    private final ComboBox<String> condition = new ComboBox<>();
+    private final ToggleButton bench = new ToggleButton("Bench");
+    private final ToggleButton record = new ToggleButton("Record");
+    private final VBox box;
+    private boolean filling;
+
+    HeaderView(DeskModel model, Actions actions, Runnable showMargins) {
+        this.model = model;
+        title.getStyleClass().add("title");
+        title.setId("title");
+        title.setMinWidth(0);
+        saved.getStyleClass().add("quiet");
+        saved.setId("saved");
+        verdict.getStyleClass().add("verdict");
+        verdict.setId("verdict");
+        counts.setId("counts");
+        margins.setId("fold-margins");
+        margins.setAccessibleText("Show margins and parts");
+        margins.setOnAction(event -> showMargins.run());
+        conditions(actions);
+        ToggleGroup pages = new ToggleGroup();
+        page(bench, Page.BENCH, pages, actions);
+        page(record, Page.RECORD, pages, actions);
+        HBox switches = new HBox(bench, record);
+        switches.getStyleClass().add("tabs");
+        Hyperlink cautions = new Hyperlink("Mains safety");
+        cautions.setId("cautions");
+        cautions.setAccessibleText("Before you build or measure: mains safety");
+        cautions.setOnAction(event -> actions.showCautions());
+        Region gap = new Region();
+        HBox.setHgrow(gap, Priority.ALWAYS);
+        HBox row = new HBox(title, saved, gap, verdict, counts, margins, condition, switches, cautions);
+        row.getStyleClass().add("header");
+        for (Region fixed : List.of(saved, verdict, counts, margins, condition, switches, cautions)) {
+            fixed.setMinWidth(Region.USE_PREF_SIZE);
+        }
+        note.getStyleClass().add("condition-note");
+        note.setId("condition-note");
+        note.setMaxWidth(Double.MAX_VALUE);
+        box = new VBox(row, note);
+        model.draft().onChange(this::refresh);
+        model.onCondition(this::refresh);
+        model.onJudgement(this::refreshVerdict);
+    }
+
+    private void conditions(Actions actions) {
+        condition.setId("condition");
+        condition.setAccessibleText("Condition that everything is shown at");
+        for (ViewCondition each : ViewCondition.values()) {
+            condition.getItems().add(each.word());
+        }
+        condition.valueProperty().addListener((property, before, now) -> {
+            int index = condition.getItems().indexOf(now);
+            if (!filling && index >= 0) {
+                actions.setCondition(ViewCondition.values()[index]);
+            }
+        });
+    }
+
+    private static void page(ToggleButton button, Page page, ToggleGroup pages, Actions actions) {
+        button.setToggleGroup(pages);
+        button.setId("page-" + button.getText().toLowerCase(Locale.ROOT));
+        button.setAccessibleText("Page " + button.getText());
+        button.setOnAction(event -> actions.showPage(page));
+    }
+
+    VBox node() {
+        return box;
+    }
+
+    /** Marks the page that is shown, and whether margins are folded away on it. */
+    void showPage(Page page, boolean folded) {
+        bench.setSelected(page == Page.BENCH);
+        record.setSelected(page == Page.RECORD);
+        margins.setVisible(folded && page == Page.BENCH);
+        margins.setManaged(folded && page == Page.BENCH);
+        counts.setVisible(!folded);
+        counts.setManaged(!folded);
+    }
+
+    private void refresh() {
+        model.draft().sheet().map(Sheet::design).ifPresent(this::show);
+    }
+
+    private void show(Design design) {
+        title.setText(design.title().isEmpty() ? "Untitled design" : design.title());
+        saved.setText(model.draft().isDirty() ? "differs from saved" : "saved");
+        filling = true;
+        condition.setValue(model.condition().word());
+        filling = false;
+        note.setText(model.condition().word() + ": " + model.condition().explained(design));
+        boolean nominal = model.condition() == ViewCondition.NOMINAL;
+        note.setVisible(!nominal);
+        note.setManaged(!nominal);
+    }
+
+    private void refreshVerdict() {
+        model.judgement().ifPresent(j -> {
+            verdict.setText(MarginRow.shape(j.check().verdict()) + " " + MarginRow.word(j.check().verdict()));
+            counts.setText(MarginRow.summary(MarginRow.all(j.check().margins())));
+        });
+    }
+}

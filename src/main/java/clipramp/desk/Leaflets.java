@@ -1,0 +1,57 @@
+package clipramp.desk;
+
+import clipramp.desk.model.Cautions;
+import java.util.List;
+import javafx.scene.Node;
+import javafx.scene.control.Label;
+import javafx.scene.layout.GridPane;
+import javafx.scene.layout.VBox;
+
+/** Texts that the window shows as they are. */
+final class Leaflets {
+    private static final List<List<String>> KEYS = List.of(
+            List.of("Lanes: Left, Right", "firing line by 1°; with Shift by 0.1°"),
+            List.of("Lanes: Enter", "look closer at the pulse, or back; Escape back"),
+            List.of("Knob: arrows", "turn by 1 %; with Shift by 0.1 %"),
+            List.of("Knob: Page up, Page down", "turn by 10 %"),
+            List.of("Knob: Home, End", "to the stops"),
+            List.of("A value: Up, Down", "next preferred value"),
+            List.of("A value: Enter, Escape", "take it, or back to what stands in the file"),
+            List.of("Ctrl+N, O, S", "new, open, save; with Shift+S save as"),
+            List.of("Ctrl+Z, Ctrl+Shift+Z", "undo, redo"),
+            List.of("Ctrl+1, 2", "bench, record"),
+            List.of("Ctrl+L", "look closer at the pulse, or back"),
+            List.of("Ctrl++, −, 0", "zoom"),
+            List.of("F1, F2", "these keys, mains safety"));
+
+    private Leaflets() {}
+
+    static Node keys() {
+        GridPane grid = new GridPane();
+        grid.getStyleClass().add("form");
+        for (int i = 0; i < KEYS.size(); i++) {
+            grid.addRow(i, new Label(KEYS.get(i).get(0)), new Label(KEYS.get(i).get(1)));
+        }
+        return grid;
+    }
+
+    static String about() {
+        return "Designs line-synchronised thyristor firing circuits from first principles: every figure can be followed"
+                + " to its formula and source. It computes what a circuit of these parts does; it cannot see your wiring,"
+                + " and it never says that a build is safe or meets a standard. Licence: Apache 2.0.";
+    }
+
+    /** The safety cautions, as the program carries them. */
+    static Node cautions(Dialogs dialogs) {
+        VBox box = new VBox();
+        box.getStyleClass().add("start-column");
+        for (Cautions.Paragraph paragraph : Cautions.read()) {
+            Label words = dialogs.words(paragraph.text());
+            if (paragraph.heading()) {
+                words.getStyleClass().add("verdict");
+            }
+            box.getChildren().add(words);
+        }
+        return box;
+    }
+}

@@ -1,0 +1,115 @@
+package clipramp.desk.model;
+
+import clipramp.circuit.Design;
+import clipramp.circuit.GateDrive;
+import clipramp.circuit.PotLaw;
+import clipramp.circuit.Trigger;
+import java.util.ArrayList;
+import java.util.List;
+
+/** The stations of the signal, in its order, and after them what is asked of the whole. */
+public enum PartGroup {
+    LINE("line") {
+        @Override
+        List<String> keys(Design design) {
+            return List.of("line", "line.voltage", "line.frequency", "line.low", "line.high");
+        }
+    },
+    CLIP("clip") {
+        @Override
+        List<String> keys(Design design) {
+            return List.of(
+                    "clip.tap", "clip.rectifier", "clip.winding", "clip.dropper", "clip.zener", "clip.diode-drop");
+        }
+    },
+    RAMP("ramp") {
+        @Override
+        List<String> keys(Design design) {
+            List<String> keys = new ArrayList<>(List.of("ramp.capacitor", "ramp.fixed"));
+            design.ramp().pot().ifPresent(pot -> {
+                keys.addAll(List.of("ramp.pot.track", "ramp.pot.end", "ramp.pot.law"));
+                if (pot.law() instanceof PotLaw.Logarithmic || pot.law() instanceof PotLaw.ReverseLogarithmic) {
+                    keys.add("ramp.pot.half");
+                }
+                keys.addAll(List.of("ramp.pot.sense", "ramp.pot.shunt"));
+            });
+            return keys;
+        }
+    },
+    TRIGGER("trigger") {
+        @Override
+        List<String> keys(Design design) {
+            return design.trigger() instanceof Trigger.UnijunctionTrigger
+                    ? List.of("trigger.device", "trigger.base-one", "trigger.base-two")
+                    : List.of("trigger.device", "trigger.base-one", "trigger.upper", "trigger.lower");
+        }
+    },
+    GATE("gate") {
+        @Override
+        List<String> keys(Design design) {
+            List<String> keys = new ArrayList<>(List.of("gate.coupling", "gate.series", "gate.shunt"));
+            if (design.gate().coupling() == GateDrive.Coupling.TRANSFORMER) {
+                keys.addAll(List.of(
+                        "gate.transformer.ratio",
+                        "gate.transformer.secondaries",
+                        "gate.transformer.magnetising",
+                        "gate.transformer.primary-resistance",
+                        "gate.transformer.secondary-resistance",
+                        "gate.transformer.clamp",
+                        "gate.transformer.volt-seconds"));
+            }
+            keys.addAll(List.of("gate.polarity", "gate.overdrive", "gate.charge-time"));
+            return keys;
+        }
+    },
+    LOAD("load") {
+        @Override
+        List<String> keys(Design design) {
+            List<String> keys = new ArrayList<>(List.of("stage", "thyristor.device", "thyristor.case-to-ambient"));
+            keys.addAll(List.of("load.kind", "load.rated", "load.resistance", "load.inductance"));
+            if (design.stage().bridgeDiodes() > 0) {
+                keys.add("stage-diodes.drop");
+            }
+            return keys;
+        }
+    },
+    ASKED("asked") {
+        @Override
+        List<String> keys(Design design) {
+            return List.of(
+                    "wanted.lowest",
+                    "wanted.highest",
+                    "surroundings.coldest",
+                    "surroundings.hottest",
+                    "derating.resistors",
+                    "title");
+        }
+    };
+
+    private final String word;
+
+    PartGroup(String word) {
+        this.word = word;
+    }
+
+    public String word() {
+        return word;
+    }
+
+    /** Keys of this station that a design can have, in the order of the signal. */
+    abstract List<String> keys(Design design);
+
+    /** The station that a part of the drawing belongs to. */
+    public static PartGroup of(String key) {
+        String head = key.contains(".") ? key.substring(0, key.indexOf('.')) : key;
+        return switch (head) {
+            case "line" -> LINE;
+            case "clip" -> CLIP;
+            case "ramp" -> RAMP;
+            case "trigger" -> TRIGGER;
+            case "gate" -> GATE;
+            case "load", "stage", "stage-diodes", "thyristor" -> LOAD;
+            default -> ASKED;
+        };
+    }
+}

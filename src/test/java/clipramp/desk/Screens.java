@@ -1,0 +1,106 @@
+package clipramp.desk;
+
+import clipramp.desk.model.DeskModel;
+import clipramp.desk.model.Places;
+import clipramp.desk.model.Settings;
+import java.io.IOException;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.Map;
+import java.util.Optional;
+import java.util.concurrent.Callable;
+import java.util.concurrent.ExecutionException;
+import java.util.concurrent.FutureTask;
+import java.util.function.BooleanSupplier;
+import javafx.application.Platform;
+import javafx.embed.swing.SwingFXUtils;
+import javafx.scene.image.WritableImage;
+import javafx.stage.Stage;
+import javax.imageio.ImageIO;
+
+/** Writes every page of the window as a picture into a folder, for a person to look at: {@code Screens FOLDER [ONLY]}. */
+public final class Screens {
+    private Screens() {}
+
+    private record Size(int width, int height, int zoom) {
+        String words() {
+            return width + "x" + height + "-" + zoom;
+        }
+    }
+
+    public static void main(String[] arguments) throws Exception {
+        Path folder = Files.createDirectories(Path.of(arguments[0]));
+        String only = arguments.length > 1 ? arguments[1] : "";
+        Path home = Files.createTempDirectory("desk");
+        new Settings(Settings.Look.PAPER, 100, true, java.util.List.of()).save(new Places(home.resolve("config"), home.resolve("state")));
+        Platform.setImplicitExit(false);
+        Platform.startup(Theme::loadFonts);
+        for (Size size : new Size[] {
+            new Size(1366, 768, 100), new Size(1920, 1080, 100), new Size(1366, 768, 200), new Size(1920, 1080, 200)
+        }) {
+            for (Settings.Look look : new Settings.Look[] {Settings.Look.PAPER, Settings.Look.INK}) {
+                if ((size.words() + "-" + look).toLowerCase(java.util.Locale.ROOT).contains(only)) {
+                    shoot(folder, home, size, look);
+                }
+            }
+        }
+        System.exit(0);
+    }
+
+    private static void shoot(Path folder, Path home, Size size, Settings.Look look) throws Exception {
+        Places places = new Places(home.resolve("config"), home.resolve("state"));
+        new Settings(look, size.zoom(), true, java.util.List.of()).save(places);
+        Desk.Setup setup = new Desk.Setup(places, Map.of(), home, stage -> null);
+        Stage stage = at(Stage::new);
+        DeskModel model = at(() -> {
+            DeskModel shown = setup.show(stage, Optional.empty(), () -> {});
+            stage.setX(0);
+            stage.setY(0);
+            stage.setWidth(size.width());
+            stage.setHeight(size.height());
+            return shown;
+        });
+        String name = size.words() + "-" + look.name().toLowerCase(java.util.Locale.ROOT);
+        Thread.sleep(1500);
+        save(stage, folder.resolve("start-" + name + ".png"));
+        at(() -> {
+            model.draft().openUnsaved("cabinet.yaml", clipramp.desk.model.Example.all().get(0).text());
+            return null;
+        });
+        settle(() -> !model.isBusy() && model.judgement().isPresent());
+        save(stage, folder.resolve("bench-" + name + ".png"));
+        at(() -> { stage.getScene().getRoot().lookup("#tab-parts").fireEvent(new javafx.event.ActionEvent()); return null; });
+        settle(() -> !model.isBusy());
+        save(stage, folder.resolve("parts-" + name + ".png"));
+        at(() -> {
+            stage.hide();
+            return null;
+        });
+    }
+
+    private static void settle(BooleanSupplier done) throws Exception {
+        for (int i = 0; i < 400 && !at(done::getAsBoolean); i++) {
+            Thread.sleep(25);
+        }
+        Thread.sleep(200);
+    }
+
+    private static <T> T at(Callable<T> task) throws Exception {
+        FutureTask<T> future = new FutureTask<>(task);
+        Platform.runLater(future);
+        try {
+            return future.get();
+        } catch (ExecutionException e) {
+            throw e;
+        }
+    }
+
+    private static void save(Stage stage, Path file) throws Exception {
+        WritableImage image = at(() -> stage.getScene().snapshot(null));
+        try {
+            ImageIO.write(SwingFXUtils.fromFXImage(image, null), "png", file.toFile());
+        } catch (IOException e) {
+            throw new IllegalStateException(e);
+        }
+    }
+}
