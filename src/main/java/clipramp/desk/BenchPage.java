@@ -54,6 +54,7 @@ final class BenchPage extends Pane {
         knob.node().setMinHeight(Region.USE_PREF_SIZE);
         left.getChildren().addAll(lanes.node(), readout.node(), knob.node());
         tabs.getStyleClass().add("tabs");
+        tabs.setMinHeight(Region.USE_PREF_SIZE);
         ToggleGroup group = new ToggleGroup();
         marginsTab.setToggleGroup(group);
         partsTab.setToggleGroup(group);

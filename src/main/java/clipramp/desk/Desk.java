@@ -71,15 +71,16 @@ public final class Desk {
             Workers workers = new Workers(Platform::runLater, worker("turning"), worker("judging"), worker("writing"));
             Recovery recovery = new Recovery(places, ProcessHandle.current(), System.identityHashCode(stage));
             WindowActions[] actions = new WindowActions[1];
-            DeskModel model = new DeskModel(
-                    workers, new Workshop(this::library), recovery, trouble -> actions[0].show(trouble));
+            DeskModel model =
+                    new DeskModel(workers, new Workshop(this::library), recovery, trouble -> actions[0].show(trouble));
             actions[0] = new WindowActions(model, recovery, places, workers, closed);
             Theme theme = new Theme(Palette.PAPER, 1);
             DeskWindow window = new DeskWindow(stage, theme, model, actions[0]);
             actions[0].serve(window, asking.of(stage));
             stage.show();
-            Thread.currentThread().setUncaughtExceptionHandler((thread, failure) ->
-                    actions[0].show(Trouble.of("Something went wrong", failure)));
+            Thread.currentThread()
+                    .setUncaughtExceptionHandler(
+                            (thread, failure) -> actions[0].show(Trouble.of("Something went wrong", failure)));
             workers.writing().execute(() -> {
                 Settings settings = Settings.load(places);
                 Platform.runLater(() -> actions[0].take(settings));
@@ -93,7 +94,8 @@ public final class Desk {
         }
 
         private ProfileLibrary library(Optional<Path> file) {
-            boolean windows = System.getProperty("os.name", "").toLowerCase(Locale.ROOT).contains("windows");
+            boolean windows =
+                    System.getProperty("os.name", "").toLowerCase(Locale.ROOT).contains("windows");
             return ProfileLibrary.usual(file, environment, home, windows);
         }
 

@@ -57,7 +57,7 @@ final class DeskWindow {
         });
         takeDrops(scene, actions);
         model.draft().onChange(this::refresh);
-        scene.widthProperty().addListener(property -> mark());
+        bench.widthProperty().addListener(property -> mark());
         theme.onChange(this::mark);
     }
 

@@ -67,8 +67,10 @@ final class Dialogs {
         view.getItems().setAll(table.rows());
         for (int i = 0; i < table.heads().size(); i++) {
             int column = i;
-            TableColumn<List<String>, String> head = new TableColumn<>(table.heads().get(i));
-            head.setCellValueFactory(row -> new ReadOnlyStringWrapper(row.getValue().get(column)));
+            TableColumn<List<String>, String> head =
+                    new TableColumn<>(table.heads().get(i));
+            head.setCellValueFactory(
+                    row -> new ReadOnlyStringWrapper(row.getValue().get(column)));
             head.setSortable(false);
             head.setReorderable(false);
             view.getColumns().add(head);

@@ -36,7 +36,8 @@ final class FigurePane extends Region {
         redraw();
     }
 
-    @Nullable Figure figure() {
+    @Nullable
+    Figure figure() {
         return figure;
     }
 

@@ -126,7 +126,8 @@ final class HeaderView {
 
     private void refreshVerdict() {
         model.judgement().ifPresent(j -> {
-            verdict.setText(MarginRow.shape(j.check().verdict()) + " " + MarginRow.word(j.check().verdict()));
+            verdict.setText(MarginRow.shape(j.check().verdict()) + " "
+                    + MarginRow.word(j.check().verdict()));
             counts.setText(MarginRow.summary(MarginRow.all(j.check().margins())));
         });
     }

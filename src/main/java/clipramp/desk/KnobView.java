@@ -39,16 +39,19 @@ final class KnobView {
     }
 
     private void refreshCurve() {
-        bench.curve().ifPresent(c -> figure = Optional.of(new KnobFigure(c.points(), c.design().wanted())));
-        boolean turns = bench.curve().map(c -> c.design().ramp().pot().isPresent()).orElse(false);
+        bench.curve()
+                .ifPresent(c -> figure =
+                        Optional.of(new KnobFigure(c.points(), c.design().wanted())));
+        boolean turns =
+                bench.curve().map(c -> c.design().ramp().pot().isPresent()).orElse(false);
         dial.node().setVisible(turns);
         dial.node().setManaged(turns);
         refreshPosition();
     }
 
     private void refreshPosition() {
-        figure.ifPresent(f -> curve.show(f.withPosition(
-                bench.reading().map(r -> r.point().position()).orElse(OptionalDouble.empty()))));
+        figure.ifPresent(f -> curve.show(
+                f.withPosition(bench.reading().map(r -> r.point().position()).orElse(OptionalDouble.empty()))));
     }
 
     private void turn(MouseEvent event) {

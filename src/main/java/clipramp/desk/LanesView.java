@@ -98,7 +98,8 @@ final class LanesView {
     private boolean isOnFiringLine(double x) {
         OptionalDouble rad = bench.reading().map(Reading::firingRad).orElse(OptionalDouble.empty());
         return rad.isPresent()
-                && frame().map(f -> Math.abs(f.xOf(rad.getAsDouble()) - x) <= GRIP * pane.style().zoom())
+                && frame().map(f -> Math.abs(f.xOf(rad.getAsDouble()) - x)
+                                <= GRIP * pane.style().zoom())
                         .orElse(false);
     }
 

@@ -34,8 +34,8 @@ final class MarginRowView {
     private final VBox box = new VBox(row);
     private final Consumer<String> chosen;
     private boolean open;
-    private MarginRow shown = new MarginRow(
-            "", "", "", "", "", 0, 0, clipramp.margins.Verdict.NOT_JUDGED, "", "", "", "", "", List.of());
+    private MarginRow shown =
+            new MarginRow("", "", "", "", "", 0, 0, clipramp.margins.Verdict.NOT_JUDGED, "", "", "", "", "", List.of());
 
     MarginRowView(Consumer<String> chosen) {
         this.chosen = chosen;

@@ -76,8 +76,10 @@ final class Menus {
     private Menu edit() {
         Menu menu = new Menu("_Edit", null, undo, redo, new SeparatorMenuItem());
         for (Shown shown : Shown.values()) {
-            menu.getItems().add(needing(item("Copy " + shown.words() + " as picture", "", () -> actions.copyPicture(shown))));
-            menu.getItems().add(needing(item("Copy " + shown.words() + " as table", "", () -> actions.copyTable(shown))));
+            menu.getItems()
+                    .add(needing(item("Copy " + shown.words() + " as picture", "", () -> actions.copyPicture(shown))));
+            menu.getItems()
+                    .add(needing(item("Copy " + shown.words() + " as table", "", () -> actions.copyTable(shown))));
         }
         return menu;
     }

@@ -40,8 +40,9 @@ final class PartsView {
         drawing.setId("circuit");
         drawing.setFocusTraversable(true);
         drawing.addEventHandler(MouseEvent.MOUSE_CLICKED, this::pick);
-        drawing.addEventHandler(MouseEvent.MOUSE_MOVED, event -> drawing.setCursor(
-                partAt(event).isPresent() ? Cursor.HAND : Cursor.DEFAULT));
+        drawing.addEventHandler(
+                MouseEvent.MOUSE_MOVED,
+                event -> drawing.setCursor(partAt(event).isPresent() ? Cursor.HAND : Cursor.DEFAULT));
         slots.getStyleClass().add("slots");
         ScrollPane scroll = new ScrollPane(slots);
         scroll.setFitToWidth(true);
@@ -94,7 +95,7 @@ final class PartsView {
     }
 
     private void refresh() {
-        stations.get(station).setSelected(true);
+        stations.forEach((group, button) -> button.setSelected(group == station));
         draft.sheet().ifPresent(sheet -> {
             circuit = Optional.of(new CircuitFigure(sheet.design()));
             mark();
@@ -108,7 +109,9 @@ final class PartsView {
 
     private void fill(Sheet sheet) {
         List<PartSlot> wanted = PartSlot.of(station, sheet, draft.workshop(), draft.file());
-        boolean same = views.stream().map(SlotView::shape).toList()
+        boolean same = views.stream()
+                .map(SlotView::shape)
+                .toList()
                 .equals(wanted.stream().map(SlotView::shapeOf).toList());
         if (!same) {
             views.clear();
@@ -128,8 +131,8 @@ final class PartsView {
     }
 
     private Optional<String> partAt(MouseEvent event) {
-        return circuit.flatMap(c -> c
-                .parts(drawing.area().getWidth(), drawing.area().getHeight()).stream()
+        return circuit.flatMap(
+                c -> c.parts(drawing.area().getWidth(), drawing.area().getHeight()).stream()
                         .filter(part -> part.contains(event.getX(), event.getY()))
                         .map(PartBox::key)
                         .findFirst());

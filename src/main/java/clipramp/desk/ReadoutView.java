@@ -16,7 +16,8 @@ import javafx.scene.layout.VBox;
 
 /** The line of figures between lanes and knob; the firing angle is a field. */
 final class ReadoutView {
-    private static final Expected ANGLE = Expected.within(Unit.ANGLE, 0, Math.PI).allowingBare();
+    private static final Expected ANGLE =
+            Expected.within(Unit.ANGLE, 0, Math.PI).allowingBare();
 
     private final Bench bench;
     private final TextField angle = new TextField();
@@ -46,14 +47,15 @@ final class ReadoutView {
         state.getStyleClass().add("state");
         box.getStyleClass().add("readout");
         box.setAlignment(Pos.BASELINE_LEFT);
-        box.getChildren().addAll(
-                cell("firing angle α", angle),
-                cell("after the line's zero", delay),
-                cell("ramp resistance R_E", resistance),
-                cell("knob", position),
-                cell("load", power),
-                cell("of full power", share),
-                cell("state", state));
+        box.getChildren()
+                .addAll(
+                        cell("firing angle α", angle),
+                        cell("after the line's zero", delay),
+                        cell("ramp resistance R_E", resistance),
+                        cell("knob", position),
+                        cell("load", power),
+                        cell("of full power", share),
+                        cell("state", state));
         bench.onReading(this::refresh);
     }
 
@@ -92,7 +94,7 @@ final class ReadoutView {
         try {
             bench.fireAt(LenientEntry.read(angle.getText(), ANGLE).quantity().value());
         } catch (RefusedQuantityException e) {
-            refused(e.getMessage());
+            refused(e.refusal().message());
         }
     }
 

@@ -62,7 +62,11 @@ final class StartPage {
         VBox box = column("Look at an example");
         for (Example example : Example.all()) {
             box.getChildren()
-                    .add(entry("example-" + example.id(), example.title(), example.about(), () -> actions.openExample(example)));
+                    .add(entry(
+                            "example-" + example.id(),
+                            example.title(),
+                            example.about(),
+                            () -> actions.openExample(example)));
         }
         return box;
     }
@@ -115,7 +119,6 @@ final class StartPage {
         Label title = new Label(head);
         Label words = new Label(about);
         words.getStyleClass().add("quiet");
-        words.setWrapText(true);
         Button button = new Button();
         button.setId(id);
         button.setGraphic(new VBox(title, words));

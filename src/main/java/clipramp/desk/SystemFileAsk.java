@@ -25,7 +25,9 @@ final class SystemFileAsk implements FileAsk {
         FileChooser chooser = chooser(kind);
         chooser.setInitialFileName(name);
         beside.map(Path::getParent).map(Path::toFile).filter(File::isDirectory).ifPresent(chooser::setInitialDirectory);
-        return Optional.ofNullable(chooser.showSaveDialog(owner)).map(File::toPath).map(file -> ended(file, kind));
+        return Optional.ofNullable(chooser.showSaveDialog(owner))
+                .map(File::toPath)
+                .map(file -> ended(file, kind));
     }
 
     private static FileChooser chooser(Kind kind) {

@@ -19,17 +19,21 @@ final class SystemTheme {
         String name = system.toLowerCase(Locale.ROOT);
         if (name.contains("windows")) {
             String key = "HKCU\\Software\\Microsoft\\Windows\\CurrentVersion\\Themes\\Personalize";
-            return answer(List.of("reg", "query", key, "/v", "AppsUseLightTheme")).contains("0x0");
+            return answer(List.of("reg", "query", key, "/v", "AppsUseLightTheme"))
+                    .contains("0x0");
         }
         if (name.contains("mac")) {
-            return answer(List.of("defaults", "read", "-g", "AppleInterfaceStyle")).contains("Dark");
+            return answer(List.of("defaults", "read", "-g", "AppleInterfaceStyle"))
+                    .contains("Dark");
         }
-        return answer(List.of("gsettings", "get", "org.gnome.desktop.interface", "color-scheme")).contains("dark");
+        return answer(List.of("gsettings", "get", "org.gnome.desktop.interface", "color-scheme"))
+                .contains("dark");
     }
 
     private static String answer(List<String> command) {
         try {
-            Process process = new ProcessBuilder(command).redirectErrorStream(true).start();
+            Process process =
+                    new ProcessBuilder(command).redirectErrorStream(true).start();
             if (!process.waitFor(PATIENCE_MILLIS, TimeUnit.MILLISECONDS)) {
                 process.destroy();
                 return "";

@@ -61,18 +61,21 @@ final class Theme {
     }
 
     private void fill(ObservableList<String> stylesheets) {
-        String common = Objects.requireNonNull(Theme.class.getResource("desk.css")).toExternalForm();
+        String common =
+                Objects.requireNonNull(Theme.class.getResource("desk.css")).toExternalForm();
         stylesheets.setAll(common, dataUri(variables()));
     }
 
     /** Colours under the palette's own names, and the size that everything else is a multiple of. */
     private String variables() {
         StringBuilder css = new StringBuilder(".root {");
-        style.palette().webColours().forEach((name, colour) -> css.append(" -c-")
-                .append(name)
-                .append(": ")
-                .append(colour)
-                .append(';'));
+        style.palette()
+                .webColours()
+                .forEach((name, colour) -> css.append(" -c-")
+                        .append(name)
+                        .append(": ")
+                        .append(colour)
+                        .append(';'));
         return css.append(" -fx-font-size: ")
                 .append(TEXT_PIXELS * style.zoom())
                 .append("px; }")

@@ -222,11 +222,13 @@ final class WindowActions implements Actions {
 
     @Override
     public void export(Shown what, FileAsk.Kind kind) {
-        with(what, figure -> asks().toWrite(kind, what.words().replace(' ', '-') + "." + kind.ending(), draft().file())
-                .ifPresent(file -> away(
-                        "The file cannot be written",
-                        () -> clipramp.files.WholeFile.write(file, out -> out.write(drawn(figure, kind)), true),
-                        () -> {})));
+        with(
+                what,
+                figure -> asks().toWrite(kind, what.words().replace(' ', '-') + "." + kind.ending(), draft().file())
+                        .ifPresent(file -> away(
+                                "The file cannot be written",
+                                () -> clipramp.files.WholeFile.write(file, out -> out.write(drawn(figure, kind)), true),
+                                () -> {})));
     }
 
     private static byte[] drawn(Figure figure, FileAsk.Kind kind) {

@@ -32,14 +32,17 @@ public final class Screens {
         Path folder = Files.createDirectories(Path.of(arguments[0]));
         String only = arguments.length > 1 ? arguments[1] : "";
         Path home = Files.createTempDirectory("desk");
-        new Settings(Settings.Look.PAPER, 100, true, java.util.List.of()).save(new Places(home.resolve("config"), home.resolve("state")));
+        new Settings(Settings.Look.PAPER, 100, true, java.util.List.of())
+                .save(new Places(home.resolve("config"), home.resolve("state")));
         Platform.setImplicitExit(false);
         Platform.startup(Theme::loadFonts);
         for (Size size : new Size[] {
             new Size(1366, 768, 100), new Size(1920, 1080, 100), new Size(1366, 768, 200), new Size(1920, 1080, 200)
         }) {
             for (Settings.Look look : new Settings.Look[] {Settings.Look.PAPER, Settings.Look.INK}) {
-                if ((size.words() + "-" + look).toLowerCase(java.util.Locale.ROOT).contains(only)) {
+                if ((size.words() + "-" + look)
+                        .toLowerCase(java.util.Locale.ROOT)
+                        .contains(only)) {
                     shoot(folder, home, size, look);
                 }
             }
@@ -64,12 +67,18 @@ public final class Screens {
         Thread.sleep(1500);
         save(stage, folder.resolve("start-" + name + ".png"));
         at(() -> {
-            model.draft().openUnsaved("cabinet.yaml", clipramp.desk.model.Example.all().get(0).text());
+            model.draft()
+                    .openUnsaved(
+                            "cabinet.yaml",
+                            clipramp.desk.model.Example.all().get(0).text());
             return null;
         });
         settle(() -> !model.isBusy() && model.judgement().isPresent());
         save(stage, folder.resolve("bench-" + name + ".png"));
-        at(() -> { stage.getScene().getRoot().lookup("#tab-parts").fireEvent(new javafx.event.ActionEvent()); return null; });
+        at(() -> {
+            stage.getScene().getRoot().lookup("#tab-parts").fireEvent(new javafx.event.ActionEvent());
+            return null;
+        });
         settle(() -> !model.isBusy());
         save(stage, folder.resolve("parts-" + name + ".png"));
         at(() -> {

@@ -19,7 +19,7 @@ public final class Amount {
         if (Double.isNaN(value)) {
             return "–";
         }
-        if (symbol.equals("°")) {
+        if (symbol.equals("°") || symbol.equals("deg")) {
             return QuantityText.number(value, DIGITS) + "°";
         }
         for (Unit unit : Unit.values()) {

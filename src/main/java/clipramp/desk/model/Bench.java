@@ -59,8 +59,7 @@ public final class Bench {
     }
 
     private static Curve sweep(Knob knob) {
-        return new Curve(
-                knob.design(), knob.condition(), KnobMap.of(knob.design(), knob.condition(), CURVE_POINTS));
+        return new Curve(knob.design(), knob.condition(), KnobMap.of(knob.design(), knob.condition(), CURVE_POINTS));
     }
 
     public void onReading(Runnable listener) {

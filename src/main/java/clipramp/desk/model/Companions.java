@@ -72,7 +72,9 @@ public final class Companions {
         boolean isolated = design.clip().isIsolated();
         boolean half = word.equals(Stage.HALF_WAVE.word());
         boolean acrossThyristor = word.equals(Stage.BRIDGE_AC.word()) && !isolated;
-        changes.add(new Change("clip.rectifier", (half && !isolated ? ClipSupply.Rectifier.DIODE : ClipSupply.Rectifier.BRIDGE).word()));
+        changes.add(new Change(
+                "clip.rectifier",
+                (half && !isolated ? ClipSupply.Rectifier.DIODE : ClipSupply.Rectifier.BRIDGE).word()));
         changes.add(new Change("clip.tap", (acrossThyristor ? ClipSupply.Tap.THYRISTOR : ClipSupply.Tap.LINE).word()));
         boolean twin = word.equals(Stage.INVERSE_PARALLEL.word());
         boolean transformer = twin || word.equals(Stage.TRIAC.word()) && !isolated;

@@ -112,7 +112,9 @@ public final class Draft {
         start(
                 "The work that was left cannot be read",
                 () -> {
-                    String title = left.file().map(f -> String.valueOf(f.getFileName())).orElse("recovered");
+                    String title = left.file()
+                            .map(f -> String.valueOf(f.getFileName()))
+                            .orElse("recovered");
                     Sheet sheet = workshop.read(DesignText.of(new Source(title, left.text())), left.file());
                     recovery.keep(left.file(), left.text());
                     recovery.forget(left);

@@ -28,7 +28,7 @@ public record Entry(String text, String understood, String refusal) {
             LenientEntry entry = LenientEntry.read(plain, known.get().expected());
             return new Entry(entry.text(), inWords(entry.quantity()), "");
         } catch (RefusedQuantityException e) {
-            return new Entry(plain, "", e.getMessage());
+            return new Entry(plain, "", e.refusal().message());
         }
     }
 

@@ -81,7 +81,11 @@ public record PartSlot(
         for (String path : group.keys(sheet.design())) {
             Optional<String> text = sheet.text().valueAt(path);
             if (text.isPresent() || !isOneOfTwo(path)) {
-                slots.add(slot(path, text.orElse(""), sheet, workshop.profileIds(path, sheet.design().stage(), file)));
+                slots.add(slot(
+                        path,
+                        text.orElse(""),
+                        sheet,
+                        workshop.profileIds(path, sheet.design().stage(), file)));
             }
         }
         return slots;
@@ -106,7 +110,8 @@ public record PartSlot(
         }
         return new PartSlot(
                 path,
-                LABELS.getOrDefault(path, path.substring(path.lastIndexOf('.') + 1).replace('-', ' ')),
+                LABELS.getOrDefault(
+                        path, path.substring(path.lastIndexOf('.') + 1).replace('-', ' ')),
                 Designators.of(sheet.design()).getOrDefault(path, ""),
                 key.map(Key::meaning).orElse(""),
                 text,
@@ -121,11 +126,12 @@ public record PartSlot(
             case "line.frequency" -> QuantityText.format(design.line().hertz(), Unit.HERTZ);
             case "line.low" -> QuantityText.format(design.line().lowVolts(), Unit.VOLT);
             case "line.high" -> QuantityText.format(design.line().highVolts(), Unit.VOLT);
-            default -> loaded.assumed().stream()
-                    .filter(assumed -> assumed.path().equals(path))
-                    .map(LoadedDesign.Assumed::value)
-                    .findFirst()
-                    .orElse("none");
+            default ->
+                loaded.assumed().stream()
+                        .filter(assumed -> assumed.path().equals(path))
+                        .map(LoadedDesign.Assumed::value)
+                        .findFirst()
+                        .orElse("none");
         };
     }
 }

@@ -21,7 +21,11 @@ public record Places(Path config, Path state) {
     public static Places of(Map<String, String> environment, Path home) {
         return new Places(
                 folder(environment, "XDG_CONFIG_HOME", "APPDATA", home.resolve(".config")),
-                folder(environment, "XDG_STATE_HOME", "LOCALAPPDATA", home.resolve(".local").resolve("state")));
+                folder(
+                        environment,
+                        "XDG_STATE_HOME",
+                        "LOCALAPPDATA",
+                        home.resolve(".local").resolve("state")));
     }
 
     private static Path folder(Map<String, String> environment, String xdg, String windows, Path otherwise) {

@@ -33,9 +33,7 @@ public final class Stepping {
             return stepPart(known.get(), text, steps);
         }
         Matcher number = NUMBER.matcher(text.strip());
-        return number.matches()
-                ? Optional.of(stepNumber(number.group(1), steps) + number.group(2))
-                : Optional.empty();
+        return number.matches() ? Optional.of(stepNumber(number.group(1), steps) + number.group(2)) : Optional.empty();
     }
 
     private static String stepNumber(String number, int steps) {

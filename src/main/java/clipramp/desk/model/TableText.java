@@ -31,8 +31,9 @@ public final class TableText {
     /** Tab-separated, as spreadsheets take it from the clipboard. */
     public static String tabbed(NumberTable table) {
         StringBuilder out = new StringBuilder(String.join("\t", table.heads())).append('\n');
-        table.rows().forEach(row -> out.append(row.stream().map(TableText::plain).collect(Collectors.joining("\t")))
-                .append('\n'));
+        table.rows()
+                .forEach(row -> out.append(row.stream().map(TableText::plain).collect(Collectors.joining("\t")))
+                        .append('\n'));
         return out.toString();
     }
 

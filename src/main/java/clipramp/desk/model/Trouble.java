@@ -31,7 +31,8 @@ public record Trouble(String headline, String text) {
         }
         if (failure instanceof AccessDeniedException denied) {
             return new Trouble(
-                    what, denied.getFile() + " may not be read or written by you. Choose another place, or ask for leave.");
+                    what,
+                    denied.getFile() + " may not be read or written by you. Choose another place, or ask for leave.");
         }
         if (failure instanceof IOException) {
             return new Trouble(what, "The file system says: " + failure.getMessage());
@@ -49,10 +50,7 @@ public record Trouble(String headline, String text) {
     }
 
     private static String problems(List<Problem> problems) {
-        String shown = problems.stream()
-                .limit(MOST_PROBLEMS)
-                .map(Problem::text)
-                .collect(Collectors.joining("\n"));
+        String shown = problems.stream().limit(MOST_PROBLEMS).map(Problem::text).collect(Collectors.joining("\n"));
         int more = problems.size() - MOST_PROBLEMS;
         return more > 0 ? shown + "\nand " + more + " more" : shown;
     }

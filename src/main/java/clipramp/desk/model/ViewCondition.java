@@ -58,12 +58,13 @@ public enum ViewCondition {
     /** What holds for which figures, in words. */
     public String explained(Design design) {
         Condition at = solvedAt(design);
-        String solved = QuantityText.format(at.lineVolts(), Unit.VOLT) + ", "
-                + QuantityText.format(at.celsius(), Unit.CELSIUS);
+        String solved =
+                QuantityText.format(at.lineVolts(), Unit.VOLT) + ", " + QuantityText.format(at.celsius(), Unit.CELSIUS);
         return switch (this) {
             case WORST -> "Lanes and knob at " + solved + "; every margin where line and temperature make it worst";
             case NOMINAL -> "Everything at " + solved + ", margins too";
-            case LOW_LINE, HIGH_LINE -> "Lanes and knob at " + solved + "; margins on this line, at their worst temperature";
+            case LOW_LINE, HIGH_LINE ->
+                "Lanes and knob at " + solved + "; margins on this line, at their worst temperature";
             case COLD, HOT -> "Lanes and knob at " + solved + "; margins at this temperature, on their worst line";
         };
     }
