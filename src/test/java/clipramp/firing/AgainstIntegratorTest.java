@@ -13,6 +13,7 @@ import java.util.Comparator;
 import java.util.List;
 import java.util.Locale;
 import java.util.stream.DoubleStream;
+import java.util.stream.LongStream;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.TestReporter;
 
@@ -22,6 +23,9 @@ import org.junit.jupiter.api.TestReporter;
  */
 class AgainstIntegratorTest {
     private static final int CIRCUITS = 300;
+    /** Among so many none hunts: these do. */
+    private static final long[] HUNTING = {1283, 1639, 1772, 3508, 3648, 3700};
+
     private static final double TIME_SHARE = 1e-6;
     private static final double ENERGY_SHARE = 1e-6;
     /** A circuit whose events come and go under this relative change stands on an edge that no solver can decide. */
@@ -56,7 +60,8 @@ class AgainstIntegratorTest {
     void everyEventAndEveryPulseAgreesWithTheIntegrator(TestReporter reporter) {
         List<String> failures = new ArrayList<>();
         List<String> onTheEdge = new ArrayList<>();
-        for (long seed = 0; seed < CIRCUITS; seed++) {
+        for (long seed : LongStream.concat(LongStream.range(0, CIRCUITS), LongStream.of(HUNTING))
+                .toArray()) {
             Drawn drawn = RandomCircuits.draw(seed);
             List<String> complaints = compare(drawn);
             if (!complaints.isEmpty()) {

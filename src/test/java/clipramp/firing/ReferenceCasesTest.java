@@ -67,7 +67,8 @@ class ReferenceCasesTest {
                 Pulse first = half.pulses().get(0);
                 assertThat(Math.toDegrees(first.startRad()))
                         .isCloseTo(want.get("firingDeg").asDouble(), within(1e-6));
-                assertThat(half.startVolts()).isCloseTo(want.get("residualVolts").asDouble(), within(1e-6));
+                assertThat(half.startVolts())
+                        .isCloseTo(want.get("residualVolts").asDouble(), within(1e-6));
                 relative(first.gateJoules(), want, "gateJoules", 2e-5);
                 relative(first.gateCoulombs(), want, "gateCoulombs", 2e-5);
             });

@@ -44,7 +44,9 @@ final class ReferenceIntegrator {
     private double halfSeconds;
     private boolean thyristorOn;
     private Emitter emitter = Emitter.OFF;
-    private double volts;
+    /** Not quite empty at first, so that no branch stands exactly on its edge. */
+    private double volts = 1e-9;
+
     private double now;
     private boolean stalled;
     private boolean held;
@@ -446,7 +448,9 @@ final class ReferenceIntegrator {
         }
 
         private void register(DoubleUnaryOperator slack, Runnable then, ReferencePulseMeter notes) {
-            double check = emitter == Emitter.ON ? Double.POSITIVE_INFINITY : halfSeconds / 100;
+            // The valley's slack may dip under zero for less than the discharge's time constant.
+            double discharge = p.rampFarads * (p.slopeOhms + p.baseOneOhms);
+            double check = emitter == Emitter.ON ? Math.min(halfSeconds / 1000, discharge / 5) : halfSeconds / 200;
             integrator.addEventHandler(
                     new EventHandler() {
                         @Override
