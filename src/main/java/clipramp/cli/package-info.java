@@ -1,0 +1,5 @@
+/** Words in, answers out: the command line. */
+@NullMarked
+package clipramp.cli;
+
+import org.jspecify.annotations.NullMarked;
