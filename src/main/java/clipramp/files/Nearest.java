@@ -4,11 +4,11 @@ import java.util.List;
 import java.util.Locale;
 
 /** The nearest known word to a mistyped one. */
-final class Nearest {
+public final class Nearest {
     private Nearest() {}
 
     /** Empty where nothing is near enough to be meant. */
-    static String to(String word, List<String> known) {
+    public static String to(String word, List<String> known) {
         String best = "";
         int bestDistance = Math.max(2, word.length() / 2) + 1;
         for (String candidate : known) {
@@ -22,7 +22,7 @@ final class Nearest {
     }
 
     /** Several of them, nearest first. */
-    static List<String> several(String word, List<String> known, int most) {
+    public static List<String> several(String word, List<String> known, int most) {
         String folded = word.toLowerCase(Locale.ROOT);
         return known.stream()
                 .sorted((a, b) -> Integer.compare(distance(folded, a), distance(folded, b)))

@@ -1,0 +1,56 @@
+package clipramp.cli;
+
+import clipramp.files.LoadedDesign;
+import clipramp.margins.Check;
+import clipramp.margins.Verdict;
+import java.util.concurrent.Callable;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
+import picocli.CommandLine.Option;
+
+/** Solves a design and judges it. */
+@Command(
+        name = "check",
+        sortOptions = false,
+        sortSynopsis = false,
+        description = {
+            "Solves a design and judges it: margins worst first, knob table, pulse and supply.",
+            "Exit code 1 when a margin fails; with --strict also when one is tight or not judged."
+        })
+final class CheckCommand implements Callable<Integer> {
+    private final Session session;
+
+    @Mixin
+    DesignOptions design = new DesignOptions();
+
+    @Mixin
+    StandardOptions standard = new StandardOptions();
+
+    @Option(names = "--json", order = 10, description = "the answer for machines")
+    boolean json;
+
+    @Option(names = "--strict", order = 11, description = "tight and not judged count as failing")
+    boolean strict;
+
+    CheckCommand(Session session) {
+        this.session = session;
+    }
+
+    @Override
+    public Integer call() {
+        LoadedDesign loaded = design.load(session);
+        Check check = design.check(loaded);
+        if (json) {
+            session.out().exactly(CheckJson.of(loaded, check, session.ascii()));
+        } else {
+            new CheckText(session.out(), loaded, check).print();
+        }
+        return code(check);
+    }
+
+    private int code(Check check) {
+        boolean open = check.verdict() != Verdict.HOLDS
+                || check.margins().stream().anyMatch(m -> m.verdict() != Verdict.HOLDS);
+        return check.verdict() == Verdict.FAILS || strict && open ? ExitCode.FAILS : ExitCode.ANSWERED;
+    }
+}

@@ -1,0 +1,250 @@
+package clipramp.cli;
+
+import clipramp.circuit.Condition;
+import clipramp.cli.TextTable.Align;
+import clipramp.files.LoadedDesign;
+import clipramp.firing.Dissipation;
+import clipramp.firing.Pulse;
+import clipramp.margins.Check;
+import clipramp.margins.Margin;
+import clipramp.margins.Note;
+import clipramp.margins.Verdict;
+import clipramp.units.Unit;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.stream.Collectors;
+import java.util.stream.Stream;
+
+/** The judgement for people: verdict, margins worst first, knob, pulse, supply, and what it all rests on. */
+final class CheckText {
+    private static final String BASIS = "Nominal parts, tolerances not included.";
+
+    private final Output out;
+    private final LoadedDesign loaded;
+    private final Check check;
+
+    CheckText(Output out, LoadedDesign loaded, Check check) {
+        this.out = out;
+        this.loaded = loaded;
+        this.check = check;
+    }
+
+    void print() {
+        heading(out, loaded, check.condition());
+        out.line("");
+        verdict();
+        out.line("");
+        margins();
+        remedies();
+        out.line("");
+        out.line("Knob");
+        out.lines(KnobText.lines(check.knob(), out.spelling()));
+        out.line("");
+        pulse();
+        supply();
+        footing(out, loaded, check.notes());
+    }
+
+    /** Caution, title and what the figures hold for. */
+    static void heading(Output out, LoadedDesign loaded, Condition condition) {
+        out.line(BASIS + (Commands.has("spread") ? " See clipramp spread." : ""));
+        out.line(Caution.LINE);
+        out.line("");
+        String title = loaded.design().title();
+        out.strongLine(title.isEmpty() ? "Untitled design" : title, "  (" + loaded.name() + ")");
+        for (String override : loaded.overrides()) {
+            out.line("  with " + override);
+        }
+        out.line("  at " + condition(condition));
+    }
+
+    /** Says so where a design that is shown has a margin that fails. */
+    static void marked(Output out, Check check) {
+        List<String> failing = check.margins().stream()
+                .filter(m -> m.verdict() == Verdict.FAILS)
+                .map(Margin::name)
+                .toList();
+        if (!failing.isEmpty()) {
+            out.line("");
+            out.lines(Paragraph.wrap("This design fails: " + String.join(", ", failing) + ". See clipramp check.", ""));
+        }
+    }
+
+    static String condition(Condition condition) {
+        return Shown.amount(condition.lineVolts(), Unit.VOLT) + ", " + Shown.amount(condition.lineHertz(), Unit.HERTZ)
+                + ", " + Shown.fixed(condition.celsius(), condition.celsius() == Math.rint(condition.celsius()) ? 0 : 1)
+                + " °C";
+    }
+
+    private void verdict() {
+        List<String> counts = new ArrayList<>();
+        for (Verdict verdict : List.of(Verdict.FAILS, Verdict.TIGHT, Verdict.NOT_JUDGED, Verdict.HOLDS)) {
+            long count =
+                    check.margins().stream().filter(m -> m.verdict() == verdict).count();
+            if (count > 0) {
+                counts.add(count + " " + said(verdict, count));
+            }
+        }
+        int all = check.margins().size();
+        String summary = counts.size() == 1 && check.verdict() == Verdict.HOLDS
+                ? ".  All " + all + " margins hold."
+                : ".  Of " + all + " margins " + String.join(", ", counts) + ".";
+        out.strongLine("Verdict: " + check.verdict().word(), summary);
+    }
+
+    private static String said(Verdict verdict, long count) {
+        boolean one = count == 1;
+        return switch (verdict) {
+            case FAILS -> one ? "fails" : "fail";
+            case TIGHT -> one ? "is tight" : "are tight";
+            case NOT_JUDGED -> one ? "is not judged" : "are not judged";
+            case HOLDS -> one ? "holds" : "hold";
+        };
+    }
+
+    private void margins() {
+        TextTable table = new TextTable(out.spelling(), "  ")
+                .column(Align.LEFT, "Margins, worst first")
+                .column(Align.RIGHT, "asked")
+                .column(Align.RIGHT, "there is")
+                .column(Align.DECIMAL, "ratio")
+                .column(Align.LEFT, "verdict")
+                .column(Align.LEFT, "worst at");
+        for (Margin margin : check.margins()) {
+            String sign = margin.sense() == Margin.Sense.AT_LEAST ? "≥ " : "≤ ";
+            table.row(
+                    margin.name(),
+                    Double.isFinite(margin.demand()) ? sign + Shown.amount(margin.demand(), margin.unit()) : Shown.NONE,
+                    Shown.amount(margin.offered(), margin.unit()),
+                    ratio(margin),
+                    margin.verdict().word(),
+                    margin.condition().replace("nominal line", "nominal"));
+        }
+        out.lines(table.lines());
+    }
+
+    private static String ratio(Margin margin) {
+        double ratio = margin.ratio().orElse(Double.NaN);
+        return ratio >= 100 ? ">99" : Shown.fixed(ratio, 2);
+    }
+
+    /** What to do about every margin that does not hold. */
+    private void remedies() {
+        List<Margin> open = check.margins().stream()
+                .filter(m -> m.verdict() != Verdict.HOLDS)
+                .toList();
+        if (open.isEmpty()) {
+            return;
+        }
+        out.line("");
+        out.line("What to do");
+        for (Margin margin : open) {
+            String text = margin.name() + " (" + margin.verdict().word() + "): " + margin.remedy();
+            out.lines(Paragraph.wrap(text, "  ", "    "));
+        }
+        out.line("  More on any of them: clipramp explain MARGIN, such as clipramp explain "
+                + open.get(0).id());
+    }
+
+    private void pulse() {
+        if (check.pulse().isEmpty()) {
+            out.line("Pulse: none at mid-knob.");
+            out.line("");
+            return;
+        }
+        Check.PulseSummary summary = check.pulse().get();
+        Pulse pulse = summary.pulse();
+        out.line(
+                summary.atKnob().isPresent() ? "Pulse at knob " + KnobText.position(summary.atKnob()) + " %" : "Pulse");
+        out.lines(new TextTable(out.spelling(), "  ")
+                .column(Align.LEFT, "")
+                .column(Align.LEFT, "")
+                .column(Align.LEFT, "")
+                .column(Align.LEFT, "")
+                .row(
+                        "gate current, peak",
+                        Shown.amount(pulse.peakGateAmps(), Unit.AMPERE),
+                        "gate charge",
+                        Shown.amount(pulse.gateCoulombs(), Unit.COULOMB))
+                .row(
+                        "gate voltage, peak",
+                        Shown.amount(pulse.peakGateVolts(), Unit.VOLT),
+                        "gate energy",
+                        Shown.amount(pulse.gateJoules(), Unit.JOULE))
+                .row(
+                        "gate power, peak",
+                        Shown.amount(pulse.peakGateWatts(), Unit.WATT),
+                        "gate power, mean",
+                        Shown.amount(summary.meanGateWatts(), Unit.WATT))
+                .row(
+                        "base one, peak",
+                        Shown.amount(pulse.peakBaseOneVolts(), Unit.VOLT),
+                        "from the capacitor",
+                        Shown.amount(pulse.capacitorJoules(), Unit.JOULE))
+                .row(
+                        "above trigger current",
+                        Shown.amount(pulse.aboveTriggerSeconds(), Unit.SECOND),
+                        "gate between pulses",
+                        Shown.amount(summary.quiescentGateVolts(), Unit.VOLT))
+                .lines());
+        out.line("");
+    }
+
+    private void supply() {
+        Dissipation bears = check.dissipation();
+        out.line("Supply and trigger device" + (check.design().ramp().pot().isPresent() ? " at mid-knob" : ""));
+        out.lines(new TextTable(out.spelling(), "  ")
+                .column(Align.LEFT, "")
+                .column(Align.LEFT, "")
+                .column(Align.LEFT, "")
+                .column(Align.LEFT, "")
+                .row(
+                        "clipped from",
+                        Shown.degrees(check.clipFromRad()) + "°",
+                        "dropper",
+                        Shown.amount(bears.dropperWatts(), Unit.WATT))
+                .row(
+                        "zener",
+                        Shown.amount(bears.zenerWatts(), Unit.WATT),
+                        "zener current, peak",
+                        Shown.amount(bears.zenerPeakAmps(), Unit.AMPERE))
+                .row(
+                        "trigger device",
+                        Shown.amount(bears.deviceWatts(), Unit.WATT),
+                        "emitter current, peak",
+                        Shown.amount(bears.emitterPeakAmps(), Unit.AMPERE))
+                .lines());
+        out.line("");
+    }
+
+    /** What was assumed, which profiles were used, what else to know. */
+    static void footing(Output out, LoadedDesign loaded, List<Note> notes) {
+        if (!loaded.assumed().isEmpty()) {
+            out.lines(Paragraph.wrap(
+                    "Assumed: "
+                            + loaded.assumed().stream()
+                                    .map(a -> a.path() + " " + a.value())
+                                    .collect(Collectors.joining("; "))
+                            + ".",
+                    "",
+                    "  "));
+        }
+        if (!loaded.profiles().isEmpty()) {
+            out.lines(Paragraph.wrap(
+                    "Profiles: "
+                            + loaded.profiles().stream()
+                                    .map(p -> p.id() + " (" + p.kind() + ", " + p.from()
+                                            + (p.hides().isEmpty() ? "" : ", hides " + p.hides()) + ")")
+                                    .collect(Collectors.joining("; "))
+                            + ".",
+                    "",
+                    "  "));
+        }
+        List<String> all = Stream.concat(loaded.notes().stream(), notes.stream().map(Note::text))
+                .toList();
+        if (!all.isEmpty()) {
+            out.line("Notes:");
+            all.forEach(note -> out.lines(Paragraph.wrap(note, "  ", "    ")));
+        }
+    }
+}

@@ -1,0 +1,101 @@
+package clipramp.cli;
+
+import clipramp.circuit.Condition;
+import clipramp.circuit.Design;
+import clipramp.files.KeyCatalogue;
+import clipramp.files.LoadedDesign;
+import clipramp.margins.Check;
+import clipramp.margins.Judge;
+import clipramp.units.Expected;
+import clipramp.units.Unit;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.OptionalDouble;
+import org.jspecify.annotations.Nullable;
+import picocli.CommandLine.Option;
+import picocli.CommandLine.Parameters;
+
+/** The design that an analysis reads, and the condition that it is solved at. */
+final class DesignOptions {
+    private static final double COLDEST_CELSIUS = -65;
+    private static final double HOTTEST_CELSIUS = 175;
+
+    @Parameters(paramLabel = "FILE", description = "design file; - for standard input")
+    String file = "";
+
+    @Option(
+            names = "--line",
+            paramLabel = "VOLTS",
+            order = 1,
+            description = "solve and judge at this line voltage, such as 207V")
+    @Nullable
+    String line;
+
+    @Option(
+            names = "--temperature",
+            paramLabel = "DEGREES",
+            order = 2,
+            description = "solve and judge at this ambient temperature, such as 0degC")
+    @Nullable
+    String temperature;
+
+    @Option(
+            names = "--with",
+            paramLabel = "KEY=VALUE",
+            order = 3,
+            description = "replace a value of the design; may be repeated, the last of a key wins")
+    List<String> overrides = new ArrayList<>();
+
+    @Option(
+            names = "--profiles",
+            paramLabel = "shipped",
+            order = 4,
+            description = "shipped: look only at the program's own profiles")
+    @Nullable
+    String profiles;
+
+    LoadedDesign load(Session session) {
+        return Inputs.load(session, file, overrides, shippedOnly());
+    }
+
+    boolean shippedOnly() {
+        return profiles != null
+                && Problems.word("--profiles", profiles, List.of("shipped")).equals("shipped");
+    }
+
+    /** The line voltage asked for, V. */
+    OptionalDouble lineVolts() {
+        if (line == null) {
+            return OptionalDouble.empty();
+        }
+        Expected window = KeyCatalogue.standard()
+                .find("line.voltage")
+                .map(key -> key.expected())
+                .orElse(Expected.any(Unit.VOLT));
+        return OptionalDouble.of(Problems.quantity("--line", line, window).value());
+    }
+
+    /** The temperature asked for, °C. */
+    OptionalDouble celsius() {
+        if (temperature == null) {
+            return OptionalDouble.empty();
+        }
+        Expected window =
+                Expected.within(Unit.CELSIUS, COLDEST_CELSIUS, HOTTEST_CELSIUS).allowingBare();
+        return OptionalDouble.of(
+                Problems.quantity("--temperature", temperature, window).value());
+    }
+
+    /** What knob table and waveforms are solved at: nominal but for what was asked for. */
+    Condition condition(Design design) {
+        Condition nominal = design.nominalCondition();
+        return new Condition(
+                lineVolts().orElse(nominal.lineVolts()),
+                nominal.lineHertz(),
+                celsius().orElse(nominal.celsius()));
+    }
+
+    Check check(LoadedDesign loaded) {
+        return Judge.check(loaded.design(), lineVolts(), celsius());
+    }
+}

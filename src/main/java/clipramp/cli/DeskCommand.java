@@ -1,0 +1,35 @@
+package clipramp.cli;
+
+import java.util.Optional;
+import java.util.concurrent.Callable;
+import org.jspecify.annotations.Nullable;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
+import picocli.CommandLine.Parameters;
+
+/** Opens the window through whoever started the program. */
+@Command(
+        name = "desk",
+        sortOptions = false,
+        sortSynopsis = false,
+        description = "Opens the window, with a design where one is named.")
+final class DeskCommand implements Callable<Integer> {
+    private final Session session;
+
+    @Mixin
+    StandardOptions standard = new StandardOptions();
+
+    @Parameters(paramLabel = "FILE", arity = "0..1", description = "design file")
+    @Nullable
+    String file;
+
+    DeskCommand(Session session) {
+        this.session = session;
+    }
+
+    @Override
+    public Integer call() {
+        session.out().flush();
+        return session.launcher().map(l -> l.open(Optional.ofNullable(file))).orElse(ExitCode.UNUSABLE);
+    }
+}

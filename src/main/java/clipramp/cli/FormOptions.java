@@ -1,0 +1,27 @@
+package clipramp.cli;
+
+import picocli.CommandLine.Option;
+
+/** In which form an analysis answers. */
+final class FormOptions {
+    @Option(names = "--json", order = 30, description = "the answer for machines")
+    boolean json;
+
+    @Option(names = "--csv", order = 31, description = "comma-separated values, units in the header")
+    boolean csv;
+
+    boolean json() {
+        return json;
+    }
+
+    boolean csv() {
+        return csv;
+    }
+
+    /** Refuses what contradicts itself before anything is solved. */
+    void require() {
+        if (json && csv) {
+            throw Problems.refused("--csv", "--json and --csv cannot both go to standard output. Choose one.");
+        }
+    }
+}

@@ -1,0 +1,67 @@
+package clipramp.cli;
+
+import java.nio.charset.StandardCharsets;
+import java.util.concurrent.Callable;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
+import picocli.CommandLine.Option;
+
+/** Writes a commented design to start from. */
+@Command(
+        name = "new",
+        sortOptions = false,
+        sortSynopsis = false,
+        description = "Writes a commented design to start from.")
+final class NewCommand implements Callable<Integer> {
+    private final Session session;
+
+    @Mixin
+    StandardOptions standard = new StandardOptions();
+
+    @Option(
+            names = "--out",
+            paramLabel = "FILE",
+            required = true,
+            order = 10,
+            description = "the design file to write; - for standard output")
+    String out = "";
+
+    @Option(
+            names = "--from",
+            paramLabel = "EXAMPLE",
+            order = 11,
+            description = "drying-cabinet unless said; also shed-heater, tray-lamp, cabinet-gone-wrong")
+    String from = Examples.FIRST;
+
+    @Option(names = "--replace", order = 12, description = "write over a file that is there")
+    boolean replace;
+
+    @Option(names = "--json", order = 13, description = "the answer for machines")
+    boolean json;
+
+    NewCommand(Session session) {
+        this.session = session;
+    }
+
+    @Override
+    public Integer call() {
+        String example = Problems.word("--from", from, Examples.NAMES);
+        String text = Examples.text(example);
+        if (out.equals("-")) {
+            session.out().exactly(text);
+            return ExitCode.ANSWERED;
+        }
+        Outputs.write(out, text.getBytes(StandardCharsets.UTF_8), replace);
+        if (json) {
+            session.out()
+                    .exactly(Answer.without("new")
+                            .json(
+                                    session.ascii(),
+                                    body -> body.put("written", out).put("example", example)));
+        } else {
+            session.out().line("Written: " + out + ", from the example " + example + ".");
+            session.out().line("Next: clipramp check " + out);
+        }
+        return ExitCode.ANSWERED;
+    }
+}

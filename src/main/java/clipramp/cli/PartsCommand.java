@@ -1,0 +1,97 @@
+package clipramp.cli;
+
+import clipramp.cli.TextTable.Align;
+import clipramp.files.ProfileLibrary;
+import clipramp.files.ProfileLibrary.Found;
+import java.util.List;
+import java.util.Optional;
+import java.util.concurrent.Callable;
+import org.jspecify.annotations.Nullable;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
+import picocli.CommandLine.Option;
+import picocli.CommandLine.Parameters;
+
+/** Lists the profiles, or shows one with its sources. */
+@Command(
+        name = "parts",
+        sortOptions = false,
+        sortSynopsis = false,
+        description = "Lists the profiles; with an ID, shows that one with the source of every figure.")
+final class PartsCommand implements Callable<Integer> {
+    private final Session session;
+
+    @Mixin
+    StandardOptions standard = new StandardOptions();
+
+    @Option(
+            names = "--profiles",
+            paramLabel = "shipped",
+            order = 10,
+            description = "shipped: only the program's own profiles")
+    @Nullable
+    String profiles;
+
+    @Option(names = "--json", order = 11, description = "the answer for machines")
+    boolean json;
+
+    @Parameters(paramLabel = "ID", arity = "0..1", description = "a profile's id, such as 2n2646")
+    @Nullable
+    String id;
+
+    PartsCommand(Session session) {
+        this.session = session;
+    }
+
+    @Override
+    public Integer call() {
+        boolean shippedOnly = profiles != null
+                && Problems.word("--profiles", profiles, List.of("shipped")).equals("shipped");
+        ProfileLibrary library = Inputs.library(session, Optional.empty(), shippedOnly);
+        List<Found> found = id == null ? library.all() : library.named(id);
+        if (id != null && found.isEmpty()) {
+            throw Problems.unknown(
+                    "parts",
+                    id,
+                    "is no profile",
+                    library.all().stream().map(Found::id).toList());
+        }
+        if (json) {
+            session.out().exactly(json(found));
+        } else if (id == null) {
+            list(found);
+        } else {
+            found.forEach(this::show);
+        }
+        return ExitCode.ANSWERED;
+    }
+
+    private void list(List<Found> found) {
+        TextTable table = new TextTable(session.out().spelling(), "")
+                .column(Align.LEFT, "id")
+                .column(Align.LEFT, "kind")
+                .column(Align.LEFT, "from");
+        found.forEach(f -> table.row(f.id(), f.kind(), f.from()));
+        session.out().lines(table.lines());
+        session.out().line("");
+        session.out().line("One of them with its sources: clipramp parts ID");
+    }
+
+    private void show(Found found) {
+        session.out().strongLine(found.id(), "  " + found.kind() + ", from " + found.from());
+        session.out().line("");
+        found.source().text().stripTrailing().lines().forEach(session.out()::line);
+    }
+
+    private String json(List<Found> found) {
+        return Answer.without("parts")
+                .json(
+                        session.ascii(),
+                        body -> body.putObjects("parts", found, (part, f) -> {
+                            part.put("id", f.id()).put("kind", f.kind()).put("from", f.from());
+                            if (id != null) {
+                                part.put("text", f.source().text());
+                            }
+                        }));
+    }
+}
