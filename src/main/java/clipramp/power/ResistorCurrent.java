@@ -3,6 +3,8 @@ package clipramp.power;
 import clipramp.circuit.Condition;
 import clipramp.circuit.Design;
 import clipramp.circuit.Line;
+import clipramp.engine.LineWave;
+import clipramp.engine.LoadCurrent;
 import org.apache.commons.math3.analysis.UnivariateFunction;
 import org.apache.commons.math3.analysis.integration.gauss.GaussIntegrator;
 import org.apache.commons.math3.analysis.integration.gauss.GaussIntegratorFactory;
@@ -25,23 +27,26 @@ final class ResistorCurrent {
     private static final double LIMIT_RAD = 1e-13;
     private static final int TRIALS = 200;
 
-    private final Line line;
+    private final Design design;
+    private final LineWave line;
     private final double lineVolts;
     private final double dropVolts;
     private final double loadOhms;
     private final double pathOhms;
 
     ResistorCurrent(Design design, Condition condition) {
-        this.line = design.line();
+        this.design = design;
+        this.line = new LineWave(design.line(), condition);
         this.lineVolts = condition.lineVolts();
-        this.dropVolts = PathDrops.volts(design);
         this.loadOhms = design.load().resistanceOhms();
-        this.pathOhms = loadOhms + PathDrops.ohms(design);
+        LoadCurrent load = new LoadCurrent(design, condition);
+        this.dropVolts = load.dropVolts();
+        this.pathOhms = load.loopOhms();
     }
 
     /** What is over for the load's path at an angle counted from the half cycle's own zero of the fundamental, V. */
     private double drivingVolts(boolean positive, double rad) {
-        double volts = positive ? line.voltsAt(lineVolts, rad) : -line.voltsAt(lineVolts, rad + Math.PI);
+        double volts = positive ? line.voltsAt(rad) : -line.voltsAt(rad + Math.PI);
         return volts - dropVolts;
     }
 
@@ -57,7 +62,7 @@ final class ResistorCurrent {
      * @param firingRad firing angle from the fundamental's zero that begins this half cycle, rad
      */
     HalfCycleCurrent firedAt(boolean positive, double firingRad) {
-        return line.harmonics().isEmpty() ? closedForm(firingRad) : byQuadrature(positive, firingRad);
+        return line.isPureSine() ? closedForm(firingRad) : byQuadrature(positive, firingRad);
     }
 
     private HalfCycleCurrent closedForm(double firingRad) {
@@ -150,8 +155,10 @@ final class ResistorCurrent {
 
     /** A panel over which the highest order turns by half a radian at most: Gauss with 24 points is exact there. */
     private double panelRad() {
-        int highest =
-                line.harmonics().stream().mapToInt(Line.Harmonic::order).max().orElse(1);
+        int highest = design.line().harmonics().stream()
+                .mapToInt(Line.Harmonic::order)
+                .max()
+                .orElse(1);
         return 0.5 / highest;
     }
 }
