@@ -8,6 +8,8 @@ package clipramp.engine;
  * keeps one.
  */
 public final class Piece {
+    private static final int CREST_BISECTIONS = 60;
+
     Mode mode = Mode.OFF;
     boolean rectifies;
     boolean clips;
@@ -282,9 +284,11 @@ public final class Piece {
         return value(peak);
     }
 
-    /** Slope of V_S where last looked at, V/s. */
-    public double supplySlope() {
-        return slope(supply);
+    /**
+     * Time of V_S's greatest value between two times, s: an end, or where it stops rising in between.
+     */
+    public double supplyCrestSeconds(double from, double to) {
+        return crestSeconds(supply, from, to);
     }
 
     /** V_B1 where last looked at, V. */
@@ -297,9 +301,32 @@ public final class Piece {
         return value(gate);
     }
 
-    /** Slope of v_GK where last looked at, V/s. */
-    public double gateSlope() {
-        return slope(gate);
+    /** Time of v_GK's greatest value between two times, s: an end, or where it stops rising in between. */
+    public double gateCrestSeconds(double from, double to) {
+        return crestSeconds(gate, from, to);
+    }
+
+    private double crestSeconds(Affine form, double from, double to) {
+        look(from);
+        double atFrom = value(form);
+        boolean rises = slope(form) > 0;
+        look(to);
+        boolean falls = slope(form) < 0;
+        if (!rises || !falls) {
+            return value(form) > atFrom ? to : from;
+        }
+        double low = from;
+        double high = to;
+        for (int i = 0; i < CREST_BISECTIONS; i++) {
+            double middle = (low + high) / 2;
+            look(middle);
+            if (slope(form) > 0) {
+                low = middle;
+            } else {
+                high = middle;
+            }
+        }
+        return low;
     }
 
     /** Emitter current where last looked at, A. */

@@ -14,8 +14,6 @@ final class HalfCycleRun {
     /** Events in one half cycle beyond which something is wrong with the laws, not with the circuit. */
     private static final int MOST_EVENTS = 200_000;
 
-    private static final int BISECTIONS = 60;
-
     private final FiringCase firing;
     private final Stepper stepper;
 
@@ -28,10 +26,7 @@ final class HalfCycleRun {
 
     private List<PulseMeter> begun = new ArrayList<>();
     private double startVolts;
-    private double clipFrom;
-    private double clipUntil;
-    private double crestVolts;
-    private double crestSeconds;
+    private SupplyWatch supply = new SupplyWatch();
     private boolean stalled;
     private boolean latchedOn;
 
@@ -73,7 +68,7 @@ final class HalfCycleRun {
         conductsUntil = 0;
         conducting = returns > 0;
         stepper.start(conducting ? firing.conductingWave(end) : wave, mode, rampVolts, fluxAmps);
-        noteClipping(false, 0);
+        supply.zener(false, stepper.clips(), 0);
         for (int events = 0; ; events++) {
             if (events > MOST_EVENTS) {
                 throw new ArithmeticException("a half cycle with more than " + MOST_EVENTS + " events");
@@ -86,18 +81,16 @@ final class HalfCycleRun {
             if (event == Event.END && returning && returns < end) {
                 conducting = false;
                 stepper.switchSource(wave);
-                noteClipping(clippedBefore, stepper.seconds());
+                supply.zener(clippedBefore, stepper.clips(), stepper.seconds());
                 continue;
             }
             handle(event, wave, sink);
-            noteClipping(clippedBefore, stepper.seconds());
+            supply.zener(clippedBefore, stepper.clips(), stepper.seconds());
             if (event == Event.END) {
                 break;
             }
         }
-        if (stepper.clips()) {
-            clipUntil = end;
-        }
+        supply.end(stepper.clips(), end);
         mode = stepper.mode();
         rampVolts = stepper.rampVolts();
         fluxAmps = stepper.fluxAmps();
@@ -107,10 +100,7 @@ final class HalfCycleRun {
     private void begin() {
         begun = new ArrayList<>();
         startVolts = rampVolts;
-        clipFrom = Double.POSITIVE_INFINITY;
-        clipUntil = Double.NEGATIVE_INFINITY;
-        crestVolts = Double.NEGATIVE_INFINITY;
-        crestSeconds = 0;
+        supply = new SupplyWatch();
         stalled = false;
         latchedOn = false;
         conducting = false;
@@ -118,8 +108,8 @@ final class HalfCycleRun {
     }
 
     private void passed(PieceSink sink, Piece piece, double from, double to) {
-        if (measures && clipFrom == Double.POSITIVE_INFINITY) {
-            noteCrest(piece, from, to);
+        if (measures) {
+            supply.passed(piece, from, to);
         }
         if (going != null && measures && piece.mode() == Mode.ON) {
             double offset = going.half() == half
@@ -143,10 +133,10 @@ final class HalfCycleRun {
     private void fire(SourceWave wave) {
         Piece before = stepper.piece();
         before.look(stepper.seconds());
-        double supply = before.supplyVolts();
+        double supplyVolts = before.supplyVolts();
         boolean afterStall = before.mode() == Mode.STALLED;
         stalled = begun.isEmpty() ? afterStall : stalled;
-        going = new PulseMeter(firing.network(), half, stepper.seconds(), stepper.rampVolts(), supply, afterStall);
+        going = new PulseMeter(firing.network(), half, stepper.seconds(), stepper.rampVolts(), supplyVolts, afterStall);
         begun.add(going);
         if (firing.tapsThyristor() && !conducting && firing.isForward(half, stepper.seconds())) {
             triedFrom = stepper.seconds();
@@ -186,14 +176,6 @@ final class HalfCycleRun {
         }
     }
 
-    private void noteClipping(boolean before, double time) {
-        if (stepper.clips()) {
-            clipFrom = Math.min(clipFrom, time);
-        } else if (before) {
-            clipUntil = time;
-        }
-    }
-
     /**
      * The ramp resistor alone feeds more than the valley current, so the device cannot leave its valley until the supply
      * collapses. Looked at whenever something switches: a heavily latched device pulls the supply under its clip at once.
@@ -207,38 +189,6 @@ final class HalfCycleRun {
         double throughResistor = (piece.supplyVolts() - piece.rampVolts()) / firing.network().rampOhms;
         if (throughResistor > firing.network().valleySiemens * piece.supplyVolts()) {
             latchedOn = true;
-        }
-    }
-
-    private void noteCrest(Piece piece, double from, double to) {
-        piece.look(from);
-        boolean rises = piece.supplySlope() > 0;
-        noteCrestAt(piece, from);
-        piece.look(to);
-        boolean falls = piece.supplySlope() < 0;
-        noteCrestAt(piece, to);
-        if (rises && falls) {
-            double low = from;
-            double high = to;
-            for (int i = 0; i < BISECTIONS; i++) {
-                double middle = (low + high) / 2;
-                piece.look(middle);
-                if (piece.supplySlope() > 0) {
-                    low = middle;
-                } else {
-                    high = middle;
-                }
-            }
-            noteCrestAt(piece, low);
-            piece.look(to);
-        }
-    }
-
-    private void noteCrestAt(Piece piece, double time) {
-        piece.look(time);
-        if (piece.supplyVolts() > crestVolts) {
-            crestVolts = piece.supplyVolts();
-            crestSeconds = time;
         }
     }
 
@@ -271,15 +221,7 @@ final class HalfCycleRun {
 
     /** What the half cycle just run showed; a pulse still going on is filled in by running on. */
     HalfCycleDraft draft() {
-        boolean clipped = clipFrom < Double.POSITIVE_INFINITY;
         return new HalfCycleDraft(
-                lastHalf(),
-                startVolts,
-                rampVolts,
-                clipFrom,
-                clipped ? clipUntil : crestSeconds,
-                stalled,
-                latchedOn,
-                begun);
+                lastHalf(), startVolts, rampVolts, supply.clipFrom(), supply.collapse(), stalled, latchedOn, begun);
     }
 }

@@ -6,8 +6,6 @@ import clipramp.engine.PieceQuadrature;
 
 /** Measures one pulse while the circuit runs through it. */
 final class PulseMeter {
-    private static final int BISECTIONS = 60;
-
     private final Network n;
     private final int half;
     private final double startSeconds;
@@ -59,7 +57,7 @@ final class PulseMeter {
      */
     void passed(Piece piece, double from, double to, double offsetSeconds) {
         peaksAt(piece, from);
-        peakWithin(piece, from, to);
+        peaksAt(piece, piece.gateCrestSeconds(from, to));
         peaksAt(piece, to);
         endSeconds = to + offsetSeconds;
         endRampVolts = piece.rampVolts();
@@ -76,29 +74,6 @@ final class PulseMeter {
         peakBaseOneVolts = Math.max(peakBaseOneVolts, piece.baseOneVolts());
         peakGateVolts = Math.max(peakGateVolts, piece.gateVolts());
         peakGateAmps = Math.max(peakGateAmps, piece.gateAmps(n));
-    }
-
-    /** A gate voltage that first rises and then falls has its peak inside the piece. */
-    private void peakWithin(Piece piece, double from, double to) {
-        if (slopeAt(piece, from) <= 0 || slopeAt(piece, to) >= 0) {
-            return;
-        }
-        double low = from;
-        double high = to;
-        for (int i = 0; i < BISECTIONS; i++) {
-            double middle = (low + high) / 2;
-            if (slopeAt(piece, middle) > 0) {
-                low = middle;
-            } else {
-                high = middle;
-            }
-        }
-        peaksAt(piece, low);
-    }
-
-    private static double slopeAt(Piece piece, double time) {
-        piece.look(time);
-        return piece.gateSlope();
     }
 
     private void above(Piece piece, double from, double to, double offset) {
