@@ -1,7 +1,9 @@
 package clipramp.circuit;
 
+import java.util.HashSet;
 import java.util.LinkedHashMap;
 import java.util.Map;
+import java.util.Set;
 
 /** Every part's name in the drawing by its design key: the design's own names first, else letters as the formulas have. */
 public final class Designators {
@@ -41,7 +43,20 @@ public final class Designators {
         design.gate().shunt().ifPresent(shunt -> names.put("gate.shunt", "RGK"));
         design.gate().transformer().ifPresent(transformer -> names.put("gate.transformer", "T1"));
         names.put("thyristor.device", design.stage() == Stage.INVERSE_PARALLEL ? "V1, V2" : "V1");
-        names.replaceAll((key, name) -> design.designators().getOrDefault(key, name));
+        Set<String> taken = new HashSet<>(design.designators().values());
+        names.replaceAll((key, name) -> {
+            String own = design.designators().get(key);
+            return own == null ? free(name, taken) : own;
+        });
         return names;
+    }
+
+    /** The usual name, or where the design has given that to another part, its letter with the first free number from 10. */
+    private static String free(String usual, Set<String> taken) {
+        String name = usual;
+        for (int number = 10; !taken.add(name); number++) {
+            name = usual.charAt(0) + String.valueOf(number);
+        }
+        return name;
     }
 }

@@ -238,7 +238,8 @@ public record KnobFigure(List<OperatingPoint> points, Wanted wanted, OptionalDou
     /** A bar that the curve must stay under or over, with an arrow to the side that is good. */
     private void goal(Plot plot, Style style, Goal goal, boolean lowest) {
         OptionalDouble fraction = fraction(goal, lowest ? goal.to() : goal.from());
-        String text = "wanted " + (lowest ? "at most " : "at least ") + text(goal, lowest ? goal.to() : goal.from());
+        String text = "wanted: at " + (lowest ? "most " : "least ") + text(goal, lowest ? goal.to() : goal.from())
+                + " at knob " + QuantityText.format(goal.position(), Unit.FRACTION, 3);
         double x = plot.x(100 * goal.position());
         double reach = 14 * style.zoom();
         Rectangle2D area = plot.area();
@@ -260,29 +261,31 @@ public record KnobFigure(List<OperatingPoint> points, Wanted wanted, OptionalDou
             plot.pen().fill(palette.ink(), arrow);
         }
         double wide = Lettering.width(text, style.small());
-        double right = to + 2 * style.gap();
-        double left = from - 2 * style.gap() - wide;
-        double x0 = goal.position() < 0.5 ? right : left;
-        double level = y + 0.35 * style.small().getSize2D();
-        double step = 4.5 * style.gap();
+        double line = 1.5 * style.small().getSize2D();
+        double nearLeft = area.getMinX() + 2 * style.gap();
+        double nearRight = area.getMaxX() - 2 * style.gap() - wide;
+        double above = area.getMinY() + line;
+        double below = area.getMaxY() - line / 2;
         plot.letter(
                 text,
                 style.small(),
                 palette.ink(),
-                x0,
-                level,
-                x0,
-                level + step,
-                x0,
-                level - step,
-                x0,
-                level + 2 * step,
-                x0,
-                level - 2 * step,
-                x0,
-                level - 3 * step,
-                x0,
-                level + 3 * step);
+                nearLeft,
+                above,
+                nearLeft,
+                above + line,
+                nearRight,
+                below - line,
+                nearRight,
+                below,
+                nearRight,
+                above,
+                nearRight,
+                above + line,
+                nearLeft,
+                below - line,
+                nearLeft,
+                below);
     }
 
     private static String text(Goal goal, double value) {

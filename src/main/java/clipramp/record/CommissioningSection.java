@@ -19,12 +19,14 @@ final class CommissioningSection {
     static void write(Paper paper, RecordContent content) {
         paper.newPage();
         paper.section("Commissioning");
-        paper.text("Test the timing on a low isolated voltage first. Use isolated instruments only: a differential probe, or a"
-                + " battery instrument made for this line. Never clip an earthed probe to the firing common. A meter that"
-                + " reads averages misreads a chopped wave: true rms where it says so. The expected figures are of nominal"
-                + " parts at nominal line and 25 °C; note the line voltage first.");
-        paper.quiet("Tolerance: the parts' own, one at a time to either end, effects summed. It includes neither the line's"
-                + " nor the instrument's. The fields can be filled in on a screen or by hand.");
+        paper.text(
+                "Test the timing on a low isolated voltage first. Use isolated instruments only: a differential probe, or a"
+                        + " battery instrument made for this line. Never clip an earthed probe to the firing common. A meter that"
+                        + " reads averages misreads a chopped wave: true rms where it says so. The expected figures are of nominal"
+                        + " parts at nominal line and 25 °C; note the line voltage first.");
+        paper.quiet(
+                "Tolerance: the parts' own, one at a time to either end, effects summed. It includes neither the line's"
+                        + " nor the instrument's. The fields can be filled in on a screen or by hand.");
         Grid grid = new Grid(paper.faces(), new float[] {0.9f, 3.6f, 1.3f, 2, 1.7f, 2.6f}, 2);
         grid.heads("where", "what", "expected", "tolerance", "measured", "instrument");
         List<Expectation> lines = content.commissioning();
@@ -42,8 +44,9 @@ final class CommissioningSection {
     }
 
     private static void who(Paper paper) {
-        Grid grid = new Grid(paper.faces(), new float[] {1.2f, 2.6f, 0.8f, 1.4f, 1.2f, 2});
-        for (String[] pair : new String[][] {{"measured by", "date", "serial number"}, {"instruments", "line voltage", "ambient"}}) {
+        Grid grid = new Grid(paper.faces(), new float[] {1.1f, 2.4f, 1.1f, 1.5f, 1.2f, 1.8f});
+        for (String[] pair :
+                new String[][] {{"measured by", "date", "serial number"}, {"instruments", "line voltage", "ambient"}}) {
             for (int i = 0; i < pair.length; i++) {
                 grid.add(pair[i], paper.faces().quiet(), 2 * i);
                 grid.add(new Field(paper, pair[i].replace(' ', '-'), pair[i]), FIELD_HEIGHT);
@@ -67,11 +70,14 @@ final class CommissioningSection {
         @Override
         public void cellLayout(PdfPCell cell, Rectangle position, PdfContentByte[] canvases) {
             Rectangle box = new Rectangle(
-                    position.getLeft() + 4, position.getBottom() + 1.5f, position.getRight() - 4, position.getTop() - 1.5f);
+                    position.getLeft() + 4,
+                    position.getBottom() + 1.5f,
+                    position.getRight() - 4,
+                    position.getTop() - 1.5f);
             TextField text = new TextField(paper.writer(), box, name);
             text.setFont(paper.faces().field());
             text.setFontSize(Faces.SMALL);
-            text.setBorderColor(Faces.hairline());
+            text.setBorderColor(Faces.axis());
             text.setBorderWidth(0.5f);
             text.setTextColor(paper.faces().small().getColor());
             try {

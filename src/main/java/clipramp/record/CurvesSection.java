@@ -30,6 +30,7 @@ final class CurvesSection {
     }
 
     private void knob() {
+        paper.need(paper.width() / 2.3f + 260);
         paper.section("Knob and power");
         KnobFigure figure = new KnobFigure(check.knob(), design.wanted());
         paper.text(figure.sentence() + " Full power is what the same load would take with the thyristor always on.");
@@ -38,7 +39,7 @@ final class CurvesSection {
     }
 
     private void halfCycle() {
-        paper.newPage();
+        paper.need(paper.width() / 1.35f + 260);
         LanesFigure figure = new LanesFigure(content.lanes());
         paper.section(figure.title());
         paper.text((design.ramp().pot().isPresent() ? "At mid-knob. " : "") + figure.sentence());
@@ -47,6 +48,7 @@ final class CurvesSection {
     }
 
     private void gate() {
+        paper.need(paper.width() / 1.6f + 190);
         paper.section("Gate drive");
         double[] amps = content.lanes().waves().gateAmps();
         GateFigure figure = new GateFigure(design, amps, content.lanes().waves().gateVolts());
@@ -75,8 +77,10 @@ final class CurvesSection {
                 "peak voltage at base one", Shown.quantity(pulse.peakBaseOneVolts(), Unit.VOLT),
                 "standing gate voltage, at its highest", Shown.quantity(summary.quiescentGateVolts(), Unit.VOLT));
         grid.row(
-                "anode current as the gate's ends", Shown.quantity(pulse.anodeAmps(), Unit.AMPERE),
-                "turns on and latches", pulse.latches() ? "yes" : pulse.turnsOn() ? "turns on, does not latch" : "no");
+                "anode current as the gate's ends",
+                Shown.quantity(pulse.anodeAmps(), Unit.AMPERE),
+                "turns on and latches",
+                pulse.latches() ? "yes" : pulse.turnsOn() ? "turns on, does not latch" : "no");
         paper.add(grid.table());
     }
 

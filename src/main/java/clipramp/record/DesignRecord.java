@@ -63,7 +63,6 @@ public final class DesignRecord {
         PartsSection parts = new PartsSection(paper, design);
         parts.circuit();
         new FiringSection(paper, content).write();
-        paper.newPage();
         new CurvesSection(paper, content).write();
         paper.newPage();
         MarginsSection.write(paper, content);
@@ -118,7 +117,8 @@ public final class DesignRecord {
 
     private static String foot(RecordContent content) {
         String digest = content.loaded().inputDigest();
-        return "computed; no statement of compliance · input " + digest.substring(0, Math.min(DIGEST_SHOWN, digest.length()))
-                + " · clipramp " + content.programVersion();
+        return "computed; no statement of compliance · input "
+                + digest.substring(0, Math.min(DIGEST_SHOWN, digest.length())) + " · clipramp "
+                + content.programVersion();
     }
 }

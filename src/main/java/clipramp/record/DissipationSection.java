@@ -17,6 +17,8 @@ import java.util.OptionalDouble;
 
 /** What the parts bear at mid-knob, and the thyristor at the highest setting, beside their ratings. */
 final class DissipationSection {
+    private static final double NEGLIGIBLE = 0.001;
+
     private final Paper paper;
     private final RecordContent content;
     private final Design design;
@@ -48,15 +50,41 @@ final class DissipationSection {
         Part dropper = design.clip().dropper();
         row("clip.dropper", "mean power", bears.dropperWatts(), dropper.ratedWatts(), Unit.WATT);
         row("clip.dropper", "peak voltage", bears.dropperPeakVolts(), dropper.ratedVolts(), Unit.VOLT);
-        row("clip.zener", "mean power", bears.zenerWatts(), design.clip().zener().ratedWatts(), Unit.WATT);
-        row("ramp.capacitor", "peak voltage", bears.capacitorVolts(), design.ramp().capacitor().ratedVolts(), Unit.VOLT);
-        row("ramp.fixed", "mean power of the whole R_E", bears.rampWatts(), design.ramp().fixed().ratedWatts(), Unit.WATT);
+        row(
+                "clip.zener",
+                "mean power",
+                bears.zenerWatts(),
+                design.clip().zener().ratedWatts(),
+                Unit.WATT);
+        row(
+                "ramp.capacitor",
+                "peak voltage",
+                bears.capacitorVolts(),
+                design.ramp().capacitor().ratedVolts(),
+                Unit.VOLT);
+        row(
+                "ramp.fixed",
+                "mean power of the whole R_E",
+                bears.rampWatts(),
+                design.ramp().fixed().ratedWatts(),
+                Unit.WATT);
         trigger(bears);
-        row("trigger.base-one", "mean power", bears.baseOneWatts(), design.trigger().baseOne().ratedWatts(), Unit.WATT);
-        row("gate.series", "mean power", bears.gateSeriesWatts(), design.gate().series().ratedWatts(), Unit.WATT);
+        row(
+                "trigger.base-one",
+                "mean power",
+                bears.baseOneWatts(),
+                design.trigger().baseOne().ratedWatts(),
+                Unit.WATT);
+        row(
+                "gate.series",
+                "mean power",
+                bears.gateSeriesWatts(),
+                design.gate().series().ratedWatts(),
+                Unit.WATT);
         design.gate()
                 .shunt()
-                .ifPresent(shunt -> row("gate.shunt", "mean power", bears.gateShuntWatts(), shunt.ratedWatts(), Unit.WATT));
+                .ifPresent(shunt ->
+                        row("gate.shunt", "mean power", bears.gateShuntWatts(), shunt.ratedWatts(), Unit.WATT));
     }
 
     private void trigger(Dissipation bears) {
@@ -64,25 +92,48 @@ final class DissipationSection {
             Unijunction.Limits limits = trigger.device().limits();
             row("trigger.device", "mean power, rating at 25 °C", bears.deviceWatts(), limits.watts(), Unit.WATT);
             row("trigger.device", "emitter current, rms", bears.emitterRmsAmps(), limits.emitterRmsAmps(), Unit.AMPERE);
-            row("trigger.device", "emitter current, peak", bears.emitterPeakAmps(), limits.emitterPeakAmps(), Unit.AMPERE);
-            row("trigger.device", "emitter reverse voltage", bears.emitterReverseVolts(), limits.emitterReverseVolts(), Unit.VOLT);
+            row(
+                    "trigger.device",
+                    "emitter current, peak",
+                    bears.emitterPeakAmps(),
+                    limits.emitterPeakAmps(),
+                    Unit.AMPERE);
+            row(
+                    "trigger.device",
+                    "emitter reverse voltage",
+                    bears.emitterReverseVolts(),
+                    limits.emitterReverseVolts(),
+                    Unit.VOLT);
             row("trigger.device", "interbase voltage", bears.interbaseVolts(), limits.interbaseVolts(), Unit.VOLT);
-            row("trigger.base-two", "mean power", bears.baseTwoWatts(), trigger.baseTwo().ratedWatts(), Unit.WATT);
+            row(
+                    "trigger.base-two",
+                    "mean power",
+                    bears.baseTwoWatts(),
+                    trigger.baseTwo().ratedWatts(),
+                    Unit.WATT);
         } else if (design.trigger() instanceof Trigger.ProgrammableTrigger trigger) {
             var limits = trigger.device().limits();
             row("trigger.device", "mean power, rating at 25 °C", bears.deviceWatts(), limits.watts(), Unit.WATT);
             row("trigger.device", "anode current, peak", bears.emitterPeakAmps(), limits.peakAmps(), Unit.AMPERE);
-            row("trigger.upper", "mean power", bears.baseTwoWatts(), trigger.upper().ratedWatts(), Unit.WATT);
-            row("trigger.lower", "mean power", bears.lowerWatts(), trigger.lower().ratedWatts(), Unit.WATT);
+            row(
+                    "trigger.upper",
+                    "mean power",
+                    bears.baseTwoWatts(),
+                    trigger.upper().ratedWatts(),
+                    Unit.WATT);
+            row(
+                    "trigger.lower",
+                    "mean power",
+                    bears.lowerWatts(),
+                    trigger.lower().ratedWatts(),
+                    Unit.WATT);
         }
     }
 
     private void thyristor(OperatingPoint point) {
         LoadResult load = point.load();
         ThyristorDevice.Limits limits = design.thyristor().device().limits();
-        String at = point.position().isPresent()
-                ? " at knob " + Shown.quantity(point.position(), Unit.FRACTION)
-                : "";
+        String at = point.position().isPresent() ? " at knob " + Shown.quantity(point.position(), Unit.FRACTION) : "";
         row("thyristor.device", "mean current" + at, load.thyristorMeanAmps(), limits.meanAmps(), Unit.AMPERE);
         row("thyristor.device", "rms current" + at, load.thyristorRmsAmps(), limits.rmsAmps(), Unit.AMPERE);
         row("thyristor.device", "on-state loss" + at, load.thyristorWatts(), OptionalDouble.empty(), Unit.WATT);
@@ -103,6 +154,10 @@ final class DissipationSection {
                 what,
                 Shown.quantity(bears, unit),
                 rating.isPresent() ? Shown.quantity(rating, unit) : "not stated",
-                comparable ? Shown.brief(bears / rating.getAsDouble(), Unit.FRACTION) : Shown.NOTHING);
+                comparable ? share(bears / rating.getAsDouble()) : Shown.NOTHING);
+    }
+
+    private static String share(double share) {
+        return share < NEGLIGIBLE ? "< " + Shown.brief(NEGLIGIBLE, Unit.FRACTION) : Shown.brief(share, Unit.FRACTION);
     }
 }

@@ -66,7 +66,13 @@ final class Faces implements FontMapper {
         return new Font(bold, size, Font.NORMAL, Palette.PAPER.ramp());
     }
 
+    /** Rules between rows, which carry no meaning of their own. */
     static Color hairline() {
+        return Palette.PAPER.hairline();
+    }
+
+    /** Frames that a hand must find. */
+    static Color axis() {
         return Palette.PAPER.axis();
     }
 

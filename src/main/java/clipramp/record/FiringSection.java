@@ -37,8 +37,10 @@ final class FiringSection {
 
     void write() {
         paper.section("Firing");
-        paper.text("The textbook's delay is T = R_E C_E ln(1/(1 − η)), here with η = " + Shown.number(eta, 4) + " and C_E = "
-                + Shown.quantity(farads, Unit.FARAD) + ", counted from the line's zero. It takes the supply as constant from"
+        paper.text("The textbook's delay is T = R_E C_E ln(1/(1 − η)), here with η = " + Shown.number(eta, 4)
+                + " and C_E = "
+                + Shown.quantity(farads, Unit.FARAD)
+                + ", counted from the line's zero. It takes the supply as constant from"
                 + " there on, the capacitor as empty, and the peak point as η times the supply. The solved delay takes none"
                 + " of that for granted.");
         everyKnob();
@@ -47,7 +49,8 @@ final class FiringSection {
     }
 
     private void everyKnob() {
-        Grid grid = new Grid(paper.faces(), new float[] {0.8f, 1.2f, 1.3f, 1.2f, 1.3f, 1.2f, 1.3f, 1}, 0, 1, 2, 3, 4, 5, 6);
+        Grid grid =
+                new Grid(paper.faces(), new float[] {0.8f, 1.2f, 1.3f, 1.2f, 1.3f, 1.2f, 1.3f, 1}, 0, 1, 2, 3, 4, 5, 6);
         grid.heads("knob", "R_E", "solved delay", "α", "textbook T", "ω T", "solved − textbook", "state");
         for (OperatingPoint point : check.knob()) {
             double textbook = PublishedRelations.textbookPeriodSeconds(point.rampOhms(), farads, eta);
@@ -78,14 +81,15 @@ final class FiringSection {
         double supply = pulse.supplyVolts();
         double peak = pulse.peakPointVolts();
         if (!(peak < supply) || !(half.startVolts() < peak)) {
-            paper.text("At mid-knob the pulse comes as the supply collapses; the textbook's formula says nothing of that.");
+            paper.text(
+                    "At mid-knob the pulse comes as the supply collapses; the textbook's formula says nothing of that.");
             return;
         }
+        paper.need(130);
         paper.heading("Why they differ, at R_E = " + Shown.quantity(ohms, Unit.OHM));
         double textbook = PublishedRelations.textbookPeriodSeconds(ohms, farads, eta);
         double peakKnown = PublishedRelations.freeRunningPeriodSeconds(ohms, farads, supply, 0, peak);
-        double startKnown =
-                PublishedRelations.freeRunningPeriodSeconds(ohms, farads, supply, half.startVolts(), peak);
+        double startKnown = PublishedRelations.freeRunningPeriodSeconds(ohms, farads, supply, half.startVolts(), peak);
         Grid grid = new Grid(paper.faces(), new float[] {4.6f, 1.2f, 1, 1.2f}, 1, 2, 3);
         grid.heads("with", "delay", "angle", "difference");
         step(grid, "R_E C_E ln(1/(1 − η))", textbook, Double.NaN);
@@ -98,7 +102,8 @@ final class FiringSection {
                 peakKnown - textbook);
         step(
                 grid,
-                "the ramp from what is left on the capacitor at the zero, " + Shown.quantity(half.startVolts(), Unit.VOLT),
+                "the ramp from what is left on the capacitor at the zero, "
+                        + Shown.quantity(half.startVolts(), Unit.VOLT),
                 startKnown,
                 startKnown - peakKnown);
         step(

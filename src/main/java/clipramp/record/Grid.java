@@ -35,7 +35,14 @@ final class Grid {
         table.setSplitRows(true);
     }
 
+    /** Heads that stand again on top of every page. */
     Grid heads(String... heads) {
+        onceHeads(heads);
+        table.setHeaderRows(1);
+        return this;
+    }
+
+    Grid onceHeads(String... heads) {
         for (int i = 0; i < heads.length; i++) {
             PdfPCell cell = cell(heads[i], faces.quiet(), i);
             cell.setVerticalAlignment(Element.ALIGN_BOTTOM);
@@ -43,7 +50,6 @@ final class Grid {
             cell.setBorderColorBottom(faces.small().getColor());
             table.addCell(cell);
         }
-        table.setHeaderRows(1);
         return this;
     }
 
@@ -93,10 +99,22 @@ final class Grid {
         table.addCell(cell);
     }
 
+    /** The same without a rule under it. */
+    void bareAcross(String text, Font font) {
+        PdfPCell cell = cell(text, font, 0);
+        cell.setBorder(Rectangle.NO_BORDER);
+        cell.setPaddingTop(1);
+        cell.setPaddingBottom(2.5f);
+        cell.setHorizontalAlignment(Element.ALIGN_LEFT);
+        cell.setColspan(atRight.length);
+        table.addCell(cell);
+    }
+
     private PdfPCell cell(String text, Font font, int column) {
         PdfPCell cell = new PdfPCell(new Phrase(font.getSize() * LEADING, text, font));
+        cell.setLeading(font.getSize() * LEADING, 0);
         cell.setBorder(Rectangle.BOTTOM);
-        cell.setBorderWidthBottom(0.3f);
+        cell.setBorderWidthBottom(0.4f);
         cell.setBorderColorBottom(Faces.hairline());
         cell.setPaddingLeft(column == 0 ? 0 : 5);
         cell.setPaddingRight(column == atRight.length - 1 ? 0 : 3);

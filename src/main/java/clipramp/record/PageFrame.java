@@ -56,9 +56,9 @@ final class PageFrame extends PdfPageEventHelper {
         }
         show(page, Element.ALIGN_LEFT, foot, faces.quiet(), document.left(), bottom);
         String number = "page " + writer.getPageNumber() + " of ";
-        float digits = faces.regular().getWidthPoint("000", Faces.SMALL);
+        float digits = faces.regular().getWidthPoint("000", Faces.SMALL) + 2;
         show(page, Element.ALIGN_RIGHT, number, faces.quiet(), document.right() - digits, bottom);
-        page.addTemplate(template(), document.right() - digits, bottom);
+        page.addTemplate(template(), document.right() - digits + 2, bottom);
     }
 
     private PdfTemplate template() {

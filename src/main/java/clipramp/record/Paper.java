@@ -64,11 +64,10 @@ final class Paper {
         need(120);
         sections++;
         String place = "section-" + sections;
-        Paragraph head = new Paragraph();
+        Paragraph head = new Paragraph(Faces.HEAD * LEADING, "", faces.head());
         head.add(new Chunk(sections + "  " + title, faces.head()).setLocalDestination(place));
         head.setSpacingBefore(room() < document.top() - document.bottom() - 1 ? 14 : 0);
         head.setSpacingAfter(5);
-        head.setLeading(Faces.HEAD * LEADING);
         document.add(head);
         PdfOutline root = writer.getDirectContent().getRootOutline();
         new PdfOutline(root, PdfAction.gotoLocalPage(place, false), sections + "  " + title);
@@ -101,7 +100,7 @@ final class Paper {
     /** Sentences as a list with dashes. */
     void list(List<String> lines, Font font) {
         for (String line : lines) {
-            Paragraph paragraph = new Paragraph(font.getSize() * LEADING);
+            Paragraph paragraph = new Paragraph(font.getSize() * LEADING, "", font);
             paragraph.add(new Chunk("–  ", font));
             paragraph.add(new Chunk(line, font));
             paragraph.setIndentationLeft(12);
@@ -113,11 +112,6 @@ final class Paper {
 
     void add(Element element) {
         document.add(element);
-    }
-
-    /** A figure over the whole width, as vectors and text. */
-    void figure(Figure figure) {
-        figure(figure, width() / (float) figure.proportion());
     }
 
     /** A figure over the whole width at a height in points. */

@@ -32,9 +32,10 @@ final class PartsSection {
         paper.section("Circuit");
         CircuitFigure figure = new CircuitFigure(design);
         paper.text("Stage " + design.stage().word() + ", supply tapped from the "
-                + design.clip().tap().word() + " through a " + design.clip().rectifier().word() + ", gate drive "
+                + design.clip().tap().word() + " through a "
+                + design.clip().rectifier().word() + ", gate drive "
                 + design.gate().coupling().word() + ".");
-        paper.figure(figure);
+        paper.figure(figure, paper.width() / (float) figure.proportion());
         paper.heading("Test points");
         Grid grid = new Grid(paper.faces(), new float[] {1, 9});
         for (TestPoint point : TestPoint.values()) {
@@ -52,7 +53,13 @@ final class PartsSection {
         ramp(grid);
         trigger(grid);
         gate(grid);
-        row(grid, "thyristor.device", design.thyristor().device().kind().word(), design.thyristor().device().id(), "", sink());
+        row(
+                grid,
+                "thyristor.device",
+                design.thyristor().device().kind().word(),
+                design.thyristor().device().id(),
+                "",
+                sink());
         paper.add(grid.table());
     }
 
@@ -100,22 +107,36 @@ final class PartsSection {
         row(grid, "load", load.word() + " load", value, "", "");
         if (design.stage().bridgeDiodes() > 0) {
             String shared = design.isSuppliedByStageBridge() ? "bridge diodes, load and supply" : "bridge diodes, load";
-            row(grid, "stage-diodes", shared, QuantityText.number(design.stageDiodes().dropVolts(), 3) + " V", "", "");
+            row(
+                    grid,
+                    "stage-diodes",
+                    shared,
+                    QuantityText.number(design.stageDiodes().dropVolts(), 3) + " V",
+                    "",
+                    "");
         }
     }
 
     private void supply(Grid grid) {
-        design.clip().winding().ifPresent(winding -> row(
-                grid,
-                "clip.winding",
-                "synchronising winding" + (winding.opposite() ? ", turned over" : ""),
-                Shown.quantity(winding.primaryVolts(), Unit.VOLT) + " : "
-                        + Shown.quantity(winding.secondaryVolts(), Unit.VOLT),
-                "",
-                winding.lagRad() == 0 ? "" : "lags " + Shown.quantity(winding.lagRad(), Unit.ANGLE)));
+        design.clip()
+                .winding()
+                .ifPresent(winding -> row(
+                        grid,
+                        "clip.winding",
+                        "synchronising winding" + (winding.opposite() ? ", turned over" : ""),
+                        Shown.quantity(winding.primaryVolts(), Unit.VOLT) + " : "
+                                + Shown.quantity(winding.secondaryVolts(), Unit.VOLT),
+                        "",
+                        winding.lagRad() == 0 ? "" : "lags " + Shown.quantity(winding.lagRad(), Unit.ANGLE)));
         if (!design.isSuppliedByStageBridge()) {
             String drop = QuantityText.number(design.clip().diodeDropVolts(), 3) + " V";
-            row(grid, "clip.rectifier", "rectifier, " + design.clip().rectifier().word(), drop, "", "");
+            row(
+                    grid,
+                    "clip.rectifier",
+                    "rectifier, " + design.clip().rectifier().word(),
+                    drop,
+                    "",
+                    "");
         }
         part(grid, "clip.dropper", "dropping resistor R_D", design.clip().dropper(), Unit.OHM);
         row(
@@ -143,8 +164,9 @@ final class PartsSection {
     private void trigger(Grid grid) {
         Trigger trigger = design.trigger();
         if (trigger instanceof Trigger.UnijunctionTrigger unijunction) {
-            String standoff = "η " + Shown.number(unijunction.device().standoff().lowest(), 3) + " to "
-                    + Shown.number(unijunction.device().standoff().highest(), 3);
+            String standoff =
+                    "η " + Shown.number(unijunction.device().standoff().lowest(), 3) + " to "
+                            + Shown.number(unijunction.device().standoff().highest(), 3);
             row(grid, "trigger.device", "unijunction transistor", trigger.deviceId(), standoff, "");
             part(grid, "trigger.base-two", "base-two resistor R2", unijunction.baseTwo(), Unit.OHM);
             part(grid, "trigger.base-one", "base-one resistor R1", trigger.baseOne(), Unit.OHM);

@@ -31,7 +31,7 @@ final class RatioBar implements PdfPCellEvent {
         PdfContentByte page = canvases[PdfPTable.LINECANVAS];
         float left = position.getLeft() + 5;
         float width = position.getWidth() - 10;
-        float middle = position.getTop() - 7;
+        float middle = position.getTop() - 5.5f;
         float length = (float) (Math.min(margin.ratio().getAsDouble(), FULL_SCALE) / FULL_SCALE) * width;
         float asked = left + (float) (width / FULL_SCALE);
         float holds = left + (float) (width * margin.holdsFrom() / FULL_SCALE);

@@ -36,8 +36,11 @@ final class Reproducible {
         }
         String without = identifier.replaceFirst("");
         String digest = md5(without.getBytes(StandardCharsets.ISO_8859_1));
-        String settled = text.substring(0, identifier.start(1)) + digest
-                + text.substring(identifier.end(1), identifier.start(2)) + digest + text.substring(identifier.end(2));
+        String settled = text.substring(0, identifier.start(1))
+                + digest
+                + text.substring(identifier.end(1), identifier.start(2))
+                + digest
+                + text.substring(identifier.end(2));
         return settled.getBytes(StandardCharsets.ISO_8859_1);
     }
 

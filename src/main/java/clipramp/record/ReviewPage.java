@@ -44,14 +44,15 @@ final class ReviewPage {
         worst();
         firing();
         taken();
-        paper.quiet("Everything here is computed from the inputs named above, for this design as drawn. It is no statement"
-                + " of compliance with any standard, and no substitute for measurement, local codes and licensed work.");
+        paper.quiet(
+                "Everything here is computed from the inputs named above, for this design as drawn. It is no statement"
+                        + " of compliance with any standard, and no substitute for measurement, local codes and licensed work.");
     }
 
     private void caution() {
         PdfPTable box = new PdfPTable(1);
         box.setWidthPercentage(100);
-        Phrase phrase = new Phrase(Faces.SMALL * 1.35f);
+        Phrase phrase = new Phrase(Faces.SMALL * 1.35f, "", faces.small());
         phrase.add(new Phrase("Mains voltage kills.  ", faces.smallBold()));
         phrase.add(new Phrase(
                 "Every part of such a circuit can be at line potential, the knob's terminals too. Local codes decide what"
@@ -101,18 +102,23 @@ final class ReviewPage {
         boolean fails = check.verdict() == Verdict.FAILS;
         Font font = fails ? faces.marked(Faces.TEXT) : faces.textBold();
         paper.paragraph(
-                (fails ? "This design fails. " : "") + check.margins().size() + " margins: " + String.join(", ", counts),
+                (fails ? "This design fails. " : "") + check.margins().size() + " margins: "
+                        + String.join(", ", counts),
                 font,
                 3,
                 0);
         paper.paragraph(
-                "Nominal parts, each margin at its worst among the line's and the surroundings' extremes.", faces.quiet(), 1, 0);
+                "Nominal parts, each margin at its worst among the line's and the surroundings' extremes.",
+                faces.quiet(),
+                1,
+                0);
     }
 
     private void worst() {
-        Grid grid = new Grid(faces, new float[] {3, 2, 1.5f, 1.5f, 0.9f, 1.7f, 1.2f}, 2, 3, 4);
+        Grid grid = new Grid(faces, new float[] {2.9f, 2.3f, 1.4f, 1.4f, 0.9f, 1.6f, 1.1f}, 2, 3, 4);
         grid.heads("worst margins", "worst at", "asked", "there is", "ratio", "against what is asked", "verdict");
-        for (Margin margin : check.margins().subList(0, Math.min(WORST, check.margins().size()))) {
+        for (Margin margin :
+                check.margins().subList(0, Math.min(WORST, check.margins().size()))) {
             grid.add(margin.name(), faces.small(), 0);
             grid.add(margin.condition(), faces.small(), 1);
             grid.add(Shown.asked(margin), faces.small(), 2);
@@ -136,8 +142,8 @@ final class ReviewPage {
         float width = paper.width() * 1.35f / 2.35f - 10;
         PdfPCell right = plain();
         right.setPaddingLeft(10);
-        right.addElement(paper.picture(
-                new KnobFigure(check.knob(), check.design().wanted()), width, width / 1.9f));
+        right.addElement(
+                paper.picture(new KnobFigure(check.knob(), check.design().wanted()), width, width / 1.5f));
         two.addCell(right);
         paper.add(two);
     }
@@ -186,7 +192,9 @@ final class ReviewPage {
 
     private void taken() {
         LoadedDesign loaded = content.loaded();
-        line("Assumed: ", loaded.assumed().stream().map(a -> a.path() + " " + a.value()).toList());
+        line(
+                "Assumed: ",
+                loaded.assumed().stream().map(a -> a.path() + " " + a.value()).toList());
         line(
                 "Not judged: ",
                 check.margins().stream()
@@ -204,8 +212,10 @@ final class ReviewPage {
     private void line(String name, List<String> items) {
         String listed = items.stream().limit(MOST_LISTED).collect(Collectors.joining("; "));
         int more = items.size() - MOST_LISTED;
-        String text = items.isEmpty() ? "none" : more > 0 ? listed + "; and " + more + " more, listed with the sources" : listed;
-        Phrase phrase = new Phrase(Faces.SMALL * 1.35f);
+        String text = items.isEmpty()
+                ? "none"
+                : more > 0 ? listed + "; and " + more + " more, listed with the sources" : listed;
+        Phrase phrase = new Phrase(Faces.SMALL * 1.35f, "", faces.small());
         phrase.add(new Phrase(name, faces.smallBold()));
         phrase.add(new Phrase(text, faces.small()));
         com.lowagie.text.Paragraph paragraph = new com.lowagie.text.Paragraph(phrase);

@@ -15,7 +15,9 @@ final class Shown {
     private Shown() {}
 
     static String quantity(double value, Unit unit) {
-        return Double.isNaN(value) ? NOTHING : QuantityText.format(value, unit, DIGITS).replace("-", "−");
+        return Double.isNaN(value)
+                ? NOTHING
+                : QuantityText.format(value, unit, DIGITS).replace("-", "−");
     }
 
     static String quantity(OptionalDouble value, Unit unit) {
@@ -23,12 +25,16 @@ final class Shown {
     }
 
     static String number(double value, int digits) {
-        return Double.isNaN(value) ? NOTHING : QuantityText.number(value, digits).replace("-", "−");
+        return Double.isNaN(value)
+                ? NOTHING
+                : QuantityText.number(value, digits).replace("-", "−");
     }
 
     /** With three digits, for what is judged at a glance. */
     static String brief(double value, Unit unit) {
-        return Double.isNaN(value) ? NOTHING : QuantityText.format(value, unit, 3).replace("-", "−");
+        return Double.isNaN(value)
+                ? NOTHING
+                : QuantityText.format(value, unit, 3).replace("-", "−");
     }
 
     /** A margin's figure in its own unit. */

@@ -15,8 +15,9 @@ final class SourcesSection {
     static void write(Paper paper, RecordContent content) {
         paper.section("Sources and assumptions");
         LoadedDesign loaded = content.loaded();
-        paper.text("Circuit laws: this program's own piecewise-linear model, described in its DEVELOPERS.md; letter symbols"
-                + " after IEC 60747-6, circuit symbols after IEC 60617.");
+        paper.text(
+                "Circuit laws: this program's own piecewise-linear model, described in its DEVELOPERS.md; letter symbols"
+                        + " after IEC 60747-6, circuit symbols after IEC 60617.");
         paper.heading("Assumed, because the design says nothing");
         assumed(paper, loaded);
         paper.heading("Notes");

@@ -24,7 +24,8 @@ public final class SampleRecords {
         for (String example : List.of("drying-cabinet", "cabinet-gone-wrong", "upper-heaters", "seed-drawer")) {
             Files.write(folder.resolve(example + ".pdf"), DesignRecord.bytes(of(example), PageSize.A4));
         }
-        Files.write(folder.resolve("drying-cabinet-letter.pdf"), DesignRecord.bytes(of("drying-cabinet"), PageSize.LETTER));
+        Files.write(
+                folder.resolve("drying-cabinet-letter.pdf"), DesignRecord.bytes(of("drying-cabinet"), PageSize.LETTER));
     }
 
     /** The record's content of an example by its file's name. */
@@ -35,7 +36,8 @@ public final class SampleRecords {
                 .map(use -> Profile.read(
                         ProfileLibrary.shipped().find(use.kind(), use.id()).orElseThrow()))
                 .toList();
-        return new RecordContent(loaded, check, profiles, SampleChecks.lanes(loaded.design(), 0.5), List.of(), "0.1.0");
+        return new RecordContent(
+                loaded, check, profiles, SampleChecks.lanes(loaded.design(), 0.5), Commissioning.of(check), "0.1.0");
     }
 
     static LoadedDesign load(String example) {
