@@ -3,7 +3,13 @@ package clipramp.record;
 import clipramp.figures.Lanes;
 import clipramp.files.LoadedDesign;
 import clipramp.files.Profile;
+import clipramp.files.ProfileLibrary;
+import clipramp.firing.Firing;
+import clipramp.firing.Waveforms;
 import clipramp.margins.Check;
+import clipramp.power.KnobMap;
+import clipramp.power.LoadWave;
+import clipramp.power.OperatingPoint;
 import java.util.List;
 
 /**
@@ -23,8 +29,36 @@ public record RecordContent(
         Lanes lanes,
         List<Expectation> commissioning,
         String programVersion) {
+    private static final int SAMPLES = 2000;
+    private static final double MID_KNOB = 0.5;
+
     public RecordContent {
         profiles = List.copyOf(profiles);
         commissioning = List.copyOf(commissioning);
+    }
+
+    /**
+     * Solves what a record prints beyond the check: the half cycle at mid-knob, and how far good units may read apart.
+     *
+     * @param loaded the design as read
+     * @param check the same design judged
+     * @param library where its profiles were found, for their sources
+     * @param programVersion version of this program
+     */
+    public static RecordContent of(LoadedDesign loaded, Check check, ProfileLibrary library, String programVersion) {
+        OperatingPoint middle = KnobMap.at(check.design(), check.condition(), MID_KNOB);
+        Waveforms waves = Firing.waveforms(check.design(), check.condition(), middle.rampOhms(), SAMPLES);
+        LoadWave load = LoadWave.of(check.design(), check.condition(), middle.solution());
+        Lanes lanes = new Lanes(
+                waves,
+                load.rad(),
+                load.volts(),
+                middle.solution().shown().firingRad(),
+                check.condition().lineHertz());
+        List<Profile> profiles = loaded.profiles().stream()
+                .flatMap(use -> library.find(use.kind(), use.id()).stream())
+                .map(Profile::read)
+                .toList();
+        return new RecordContent(loaded, check, profiles, lanes, Commissioning.of(check), programVersion);
     }
 }

@@ -98,7 +98,8 @@ class DesignRecordTest {
     void titleLanguageAndTheDesignsOwnDateAreSet() throws IOException {
         try (PDDocument document = Loader.loadPDF(pdf)) {
             assertThat(document.getDocumentCatalog().getLanguage()).isEqualTo("en");
-            assertThat(document.getDocumentInformation().getTitle()).isEqualTo("Design record: Drying cabinet, lower heater");
+            assertThat(document.getDocumentInformation().getTitle())
+                    .isEqualTo("Design record: Drying cabinet, lower heater");
             assertThat(document.getDocumentInformation().getCreationDate().getTime())
                     .isEqualTo("2031-01-31T00:00:00Z");
             assertThat(document.getDocumentInformation().getModificationDate()).isNull();
@@ -113,7 +114,8 @@ class DesignRecordTest {
         try (PDDocument document = Loader.loadPDF(pdf)) {
             List<String> titles = new ArrayList<>();
             int lastPage = 0;
-            for (PDOutlineItem item : document.getDocumentCatalog().getDocumentOutline().children()) {
+            for (PDOutlineItem item :
+                    document.getDocumentCatalog().getDocumentOutline().children()) {
                 titles.add(item.getTitle());
                 PDPage page = item.findDestinationPage(document);
                 assertThat(page).as(item.getTitle()).isNotNull();
@@ -132,7 +134,8 @@ class DesignRecordTest {
 
     @Test
     void alikeInputGivesAlikeBytes() throws IOException {
-        assertThat(DesignRecord.bytes(SampleRecords.of("drying-cabinet"), PageSize.A4)).isEqualTo(pdf);
+        assertThat(DesignRecord.bytes(SampleRecords.of("drying-cabinet"), PageSize.A4))
+                .isEqualTo(pdf);
     }
 
     @Test
@@ -181,7 +184,8 @@ class DesignRecordTest {
     @Test
     void theCommissioningSheetHasAnEmptyFieldForEveryMeasurement() throws IOException {
         try (PDDocument document = Loader.loadPDF(pdf)) {
-            List<PDField> fields = document.getDocumentCatalog().getAcroForm(null).getFields();
+            List<PDField> fields =
+                    document.getDocumentCatalog().getAcroForm(null).getFields();
             long measured = fields.stream()
                     .filter(field -> field.getFullyQualifiedName().startsWith("measured-"))
                     .filter(field -> !field.getFullyQualifiedName().equals("measured-by"))

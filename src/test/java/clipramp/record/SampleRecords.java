@@ -1,9 +1,7 @@
 package clipramp.record;
 
-import clipramp.figures.SampleChecks;
 import clipramp.files.DesignFiles;
 import clipramp.files.LoadedDesign;
-import clipramp.files.Profile;
 import clipramp.files.ProfileLibrary;
 import clipramp.files.Source;
 import clipramp.margins.Judge;
@@ -32,12 +30,7 @@ public final class SampleRecords {
     public static RecordContent of(String example) {
         LoadedDesign loaded = load(example);
         var check = Judge.check(loaded.design(), OptionalDouble.empty(), OptionalDouble.empty());
-        List<Profile> profiles = loaded.profiles().stream()
-                .map(use -> Profile.read(
-                        ProfileLibrary.shipped().find(use.kind(), use.id()).orElseThrow()))
-                .toList();
-        return new RecordContent(
-                loaded, check, profiles, SampleChecks.lanes(loaded.design(), 0.5), Commissioning.of(check), "0.1.0");
+        return RecordContent.of(loaded, check, ProfileLibrary.shipped(), "0.1.0");
     }
 
     static LoadedDesign load(String example) {
