@@ -2,12 +2,10 @@ package clipramp.cli;
 
 import clipramp.circuit.Condition;
 import clipramp.circuit.Design;
-import clipramp.files.KeyCatalogue;
+import clipramp.files.Conditions;
 import clipramp.files.LoadedDesign;
 import clipramp.margins.Check;
 import clipramp.margins.Judge;
-import clipramp.units.Expected;
-import clipramp.units.Unit;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.OptionalDouble;
@@ -17,9 +15,6 @@ import picocli.CommandLine.Parameters;
 
 /** The design that an analysis reads, and the condition that it is solved at. */
 final class DesignOptions {
-    private static final double COLDEST_CELSIUS = -65;
-    private static final double HOTTEST_CELSIUS = 175;
-
     @Parameters(paramLabel = "FILE", description = "design file; - for standard input")
     String file = "";
 
@@ -64,38 +59,25 @@ final class DesignOptions {
     }
 
     /** The line voltage asked for, V. */
-    OptionalDouble lineVolts() {
-        if (line == null) {
-            return OptionalDouble.empty();
-        }
-        Expected window = KeyCatalogue.standard()
-                .find("line.voltage")
-                .map(key -> key.expected())
-                .orElse(Expected.any(Unit.VOLT));
-        return OptionalDouble.of(Problems.quantity("--line", line, window).value());
+    OptionalDouble lineVolts(Design design) {
+        return line == null ? OptionalDouble.empty() : OptionalDouble.of(Conditions.lineVolts(line, design.line()));
     }
 
     /** The temperature asked for, °C. */
     OptionalDouble celsius() {
-        if (temperature == null) {
-            return OptionalDouble.empty();
-        }
-        Expected window =
-                Expected.within(Unit.CELSIUS, COLDEST_CELSIUS, HOTTEST_CELSIUS).allowingBare();
-        return OptionalDouble.of(
-                Problems.quantity("--temperature", temperature, window).value());
+        return temperature == null ? OptionalDouble.empty() : OptionalDouble.of(Conditions.celsius(temperature));
     }
 
     /** What knob table and waveforms are solved at: nominal but for what was asked for. */
     Condition condition(Design design) {
         Condition nominal = design.nominalCondition();
         return new Condition(
-                lineVolts().orElse(nominal.lineVolts()),
+                lineVolts(design).orElse(nominal.lineVolts()),
                 nominal.lineHertz(),
                 celsius().orElse(nominal.celsius()));
     }
 
     Check check(LoadedDesign loaded) {
-        return Judge.check(loaded.design(), lineVolts(), celsius());
+        return Judge.check(loaded.design(), lineVolts(loaded.design()), celsius());
     }
 }

@@ -29,7 +29,11 @@ final class DeskCommand implements Callable<Integer> {
 
     @Override
     public Integer call() {
-        session.out().flush();
-        return session.launcher().map(l -> l.open(Optional.ofNullable(file))).orElse(ExitCode.UNUSABLE);
+        try {
+            return session.launcher().orElseThrow().open(Optional.ofNullable(file));
+        } catch (UnsupportedOperationException noScreen) {
+            throw Problems.refused(
+                    "desk", "there is no screen here to open a window on. clipramp check FILE needs none.");
+        }
     }
 }

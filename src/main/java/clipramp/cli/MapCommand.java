@@ -72,10 +72,6 @@ final class MapCommand implements Callable<Integer> {
     @Nullable
     String forVolts;
 
-    @Option(names = "--plot", paramLabel = "OUT", order = 32, description = "also draw it into OUT.svg or OUT.png")
-    @Nullable
-    String plot;
-
     @Mixin
     FormOptions form = new FormOptions();
 
@@ -86,7 +82,6 @@ final class MapCommand implements Callable<Integer> {
     @Override
     public Integer call() {
         form.require();
-        Optional.ofNullable(plot).ifPresent(Outputs::requirePlotName);
         int count = positions == null ? USUAL_POSITIONS : Problems.whole("--positions", positions, 2, MOST_POSITIONS);
         if (Stream.of(forAngle, forPower, forVolts).filter(Objects::nonNull).count() > 1) {
             throw Problems.refused(
@@ -102,7 +97,7 @@ final class MapCommand implements Callable<Integer> {
                         .toList())
                 .orElseGet(() -> KnobMap.of(circuit, condition, count));
         Check check = design.check(loaded);
-        Optional.ofNullable(plot).ifPresent(name -> Outputs.mapPlot(name, circuit, points));
+        form.plot().ifPresent(name -> Outputs.mapPlot(name, circuit, points));
         List<Note> notes = new ArrayList<>();
         backwards.flatMap(Wants.Answered::note).ifPresent(notes::add);
         if (form.json()) {
@@ -148,7 +143,7 @@ final class MapCommand implements Callable<Integer> {
             out.line("");
             out.lines(Paragraph.wrap(note.text(), ""));
         });
-        Optional.ofNullable(plot).ifPresent(name -> {
+        form.plot().ifPresent(name -> {
             out.line("");
             out.line("Plot: " + name);
         });

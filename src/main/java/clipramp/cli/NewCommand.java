@@ -1,6 +1,8 @@
 package clipramp.cli;
 
+import clipramp.files.Example;
 import java.nio.charset.StandardCharsets;
+import java.util.List;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
@@ -11,7 +13,12 @@ import picocli.CommandLine.Option;
         name = "new",
         sortOptions = false,
         sortSynopsis = false,
-        description = "Writes a commented design to start from.")
+        description = "Writes a commented design to start from.",
+        footer = {
+            "",
+            "Examples: drying-cabinet, shed-heater, upper-heaters, seed-drawer, tray-lamp, and cabinet-gone-wrong, which"
+                    + " fails on purpose."
+        })
 final class NewCommand implements Callable<Integer> {
     private final Session session;
 
@@ -31,7 +38,7 @@ final class NewCommand implements Callable<Integer> {
             paramLabel = "EXAMPLE",
             order = 11,
             description = "drying-cabinet unless said; also shed-heater, tray-lamp, cabinet-gone-wrong")
-    String from = Examples.FIRST;
+    String from = Example.all().get(0).id();
 
     @Option(names = "--replace", order = 12, description = "write over a file that is there")
     boolean replace;
@@ -45,8 +52,9 @@ final class NewCommand implements Callable<Integer> {
 
     @Override
     public Integer call() {
-        String example = Problems.word("--from", from, Examples.NAMES);
-        String text = Examples.text(example);
+        List<String> known = Example.all().stream().map(Example::id).toList();
+        Example example = Example.named(Problems.word("--from", from, known)).orElseThrow();
+        String text = example.text();
         if (out.equals("-")) {
             session.out().exactly(text);
             return ExitCode.ANSWERED;
@@ -57,9 +65,9 @@ final class NewCommand implements Callable<Integer> {
                     .exactly(Answer.without("new")
                             .json(
                                     session.ascii(),
-                                    body -> body.put("written", out).put("example", example)));
+                                    body -> body.put("written", out).put("example", example.id())));
         } else {
-            session.out().line("Written: " + out + ", from the example " + example + ".");
+            session.out().line("Written: " + out + ", from the example " + example.id() + ": " + example.about() + ".");
             session.out().line("Next: clipramp check " + out);
         }
         return ExitCode.ANSWERED;

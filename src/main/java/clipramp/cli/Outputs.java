@@ -1,10 +1,15 @@
 package clipramp.cli;
 
+import clipramp.circuit.Condition;
 import clipramp.circuit.Design;
 import clipramp.figures.Figure;
 import clipramp.figures.KnobFigure;
+import clipramp.figures.Lanes;
+import clipramp.figures.LanesFigure;
 import clipramp.figures.Surfaces;
 import clipramp.files.WholeFile;
+import clipramp.firing.Firing;
+import clipramp.power.LoadWave;
 import clipramp.power.OperatingPoint;
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;
@@ -16,6 +21,8 @@ import java.util.Locale;
 final class Outputs {
     private static final double PLOT_WIDTH = 960;
     private static final double PNG_SCALE = 2;
+
+    private static final int PLOT_SAMPLES = 1440;
 
     private Outputs() {}
 
@@ -32,6 +39,18 @@ final class Outputs {
     /** Draws the power against the knob. */
     static void mapPlot(String name, Design design, List<OperatingPoint> points) {
         draw(name, new KnobFigure(points, design.wanted()));
+    }
+
+    /** Draws the lanes of one half cycle. */
+    static void tracePlot(String name, Design design, Condition condition, OperatingPoint point) {
+        LoadWave load = LoadWave.of(design, condition, point.solution());
+        Lanes lanes = new Lanes(
+                Firing.waveforms(design, condition, point.rampOhms(), PLOT_SAMPLES),
+                load.rad(),
+                load.volts(),
+                point.solution().shown().firingRad(),
+                condition.lineHertz());
+        draw(name, new LanesFigure(lanes));
     }
 
     private static void draw(String name, Figure figure) {

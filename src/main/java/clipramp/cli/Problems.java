@@ -1,13 +1,10 @@
 package clipramp.cli;
 
+import clipramp.files.Conditions;
 import clipramp.files.InvalidInputException;
 import clipramp.files.Nearest;
 import clipramp.files.Problem;
 import clipramp.units.Expected;
-import clipramp.units.Quantity;
-import clipramp.units.QuantityReader;
-import clipramp.units.Refusal;
-import clipramp.units.RefusedQuantityException;
 import clipramp.units.Unit;
 import java.util.List;
 
@@ -44,21 +41,9 @@ final class Problems {
                 "\"" + word + "\" " + what + ". " + hint)));
     }
 
-    /** An option's value as a quantity, by the grammar of design files. */
-    static Quantity quantity(String option, String text, Expected expected) {
-        try {
-            return QuantityReader.read(text, expected);
-        } catch (RefusedQuantityException refused) {
-            Refusal why = refused.refusal();
-            throw new InvalidInputException(
-                    List.of(new Problem(option, 0, 0, option, why.read(), why.expected(), "", why.message())));
-        }
-    }
-
     /** An option's value as a whole number. */
     static int whole(String option, String text, int least, int most) {
-        double value = quantity(option, text, Expected.within(Unit.NUMBER, least, most))
-                .value();
+        double value = Conditions.of(option, text, Expected.within(Unit.NUMBER, least, most));
         if (value != Math.rint(value)) {
             throw refused(option, "read \"" + text + "\"; expected a whole number, " + least + ".." + most + ".");
         }

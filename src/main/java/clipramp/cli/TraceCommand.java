@@ -3,6 +3,7 @@ package clipramp.cli;
 import clipramp.circuit.Condition;
 import clipramp.circuit.Design;
 import clipramp.cli.TextTable.Align;
+import clipramp.files.Conditions;
 import clipramp.files.LoadedDesign;
 import clipramp.firing.Firing;
 import clipramp.firing.HalfCycle;
@@ -28,7 +29,7 @@ import picocli.CommandLine.Option;
         description = {
             "The waveforms of one half cycle (a period for half-wave) in the periodic state: line, clipped supply, ramp,"
                     + " peak point, base one, gate and currents; every event is a sample.",
-            "Without --csv or --json it lists the pulses."
+            "Without --csv, --json or --plot it lists the pulses."
         })
 final class TraceCommand implements Callable<Integer> {
     private static final int USUAL_SAMPLES = 720;
@@ -93,6 +94,7 @@ final class TraceCommand implements Callable<Integer> {
         Condition condition = design.condition(loaded.design());
         OperatingPoint point = point(loaded.design(), condition);
         Check check = design.check(loaded);
+        form.plot().ifPresent(name -> Outputs.tracePlot(name, loaded.design(), condition, point));
         if (form.json() || form.csv()) {
             Waveforms waveforms = Firing.waveforms(loaded.design(), condition, point.rampOhms(), count);
             session.out()
@@ -111,9 +113,9 @@ final class TraceCommand implements Callable<Integer> {
             return KnobMap.atRampOhms(circuit, condition, found.rampOhms().get(0));
         }
         if (resistance != null) {
-            return KnobMap.atRampOhms(circuit, condition, Wants.rampOhms("--resistance", resistance));
+            return KnobMap.atRampOhms(circuit, condition, Conditions.rampOhms(resistance));
         }
-        return KnobMap.at(circuit, condition, knob == null ? MID_KNOB : Wants.position("--knob", knob));
+        return KnobMap.at(circuit, condition, knob == null ? MID_KNOB : Conditions.knob(knob));
     }
 
     private String json(
@@ -139,7 +141,7 @@ final class TraceCommand implements Callable<Integer> {
             out.lines(pulses(half, out.spelling()));
         }
         out.line("");
-        out.line("Waveforms: add --csv or --json.");
+        out.line(form.plot().map(name -> "Plot: " + name).orElse("Waveforms: add --csv, --json or --plot=OUT.svg."));
     }
 
     private static List<String> pulses(HalfCycle half, Spelling spelling) {

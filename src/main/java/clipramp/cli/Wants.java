@@ -2,17 +2,13 @@ package clipramp.cli;
 
 import clipramp.circuit.Condition;
 import clipramp.circuit.Design;
+import clipramp.files.Conditions;
 import clipramp.files.InvalidInputException;
-import clipramp.files.Problem;
 import clipramp.margins.Note;
 import clipramp.power.KnobSearch;
 import clipramp.power.LoadPower;
 import clipramp.units.Expected;
-import clipramp.units.Quantity;
-import clipramp.units.QuantityReader;
 import clipramp.units.QuantityText;
-import clipramp.units.Refusal;
-import clipramp.units.RefusedQuantityException;
 import clipramp.units.Unit;
 import java.util.List;
 import java.util.Optional;
@@ -40,9 +36,8 @@ final class Wants {
 
     /** The angle may jump where the charge left by one half cycle changes suddenly; then the nearest are given. */
     static Answered rampOhmsForAngle(String option, String text, Design design, Condition condition) {
-        double rad = Problems.quantity(
-                        option, text, Expected.within(Unit.ANGLE, 0, Math.PI).allowingBare())
-                .value();
+        double rad = Conditions.of(
+                option, text, Expected.within(Unit.ANGLE, 0, Math.PI).allowingBare());
         OptionalDouble exact = KnobSearch.rampOhmsForAngle(design, condition, rad);
         if (exact.isPresent()) {
             return Answered.exactly(exact.getAsDouble());
@@ -73,17 +68,7 @@ final class Wants {
 
     /** A power in watts, or a share of full-wave full power. */
     static Answered rampOhmsForPower(String option, String text, Design design, Condition condition) {
-        double full = LoadPower.fullWatts(design, condition);
-        Quantity wanted;
-        try {
-            wanted = QuantityReader.readOneOf(
-                    text, List.of(Expected.within(Unit.WATT, 0, full), Expected.within(Unit.FRACTION, 0, 1)));
-        } catch (RefusedQuantityException refused) {
-            Refusal why = refused.refusal();
-            throw new InvalidInputException(
-                    List.of(new Problem(option, 0, 0, option, why.read(), why.expected(), "", why.message())));
-        }
-        double watts = wanted.unit() == Unit.FRACTION ? wanted.value() * full : wanted.value();
+        double watts = Conditions.watts(option, text, LoadPower.fullWatts(design, condition));
         return found(
                 option,
                 text,
@@ -92,24 +77,12 @@ final class Wants {
     }
 
     static Answered rampOhmsForVolts(String option, String text, Design design, Condition condition) {
-        double volts = Problems.quantity(option, text, Expected.within(Unit.VOLT, 0, condition.lineVolts() * 2))
-                .value();
+        double volts = Conditions.of(option, text, Expected.within(Unit.VOLT, 0, 2 * condition.lineVolts()));
         return found(
                 option,
                 text,
                 KnobSearch.rampOhmsForVolts(design, condition, volts),
                 "no ramp resistance gives this load that voltage");
-    }
-
-    /** A knob position in percent or as a bare share, 0..1. */
-    static double position(String option, String text) {
-        return Problems.quantity(option, text, Expected.within(Unit.FRACTION, 0, 1))
-                .value();
-    }
-
-    static double rampOhms(String option, String text) {
-        return Problems.quantity(option, text, Expected.within(Unit.OHM, 1, 1e9))
-                .value();
     }
 
     private static Answered found(String option, String text, OptionalDouble ohms, String reason) {

@@ -41,6 +41,20 @@ public final class Conditions {
     }
 
     /**
+     * A load power in W: watts, or a share of full power.
+     *
+     * @param option the option's name, which a refusal carries
+     * @param fullWatts full power, W
+     */
+    public static double watts(String option, String text, double fullWatts) {
+        return read(option, () -> {
+            var q = QuantityReader.readOneOf(
+                    text, List.of(Expected.within(Unit.WATT, 0, fullWatts), Expected.within(Unit.FRACTION, 0, 1)));
+            return q.unit() == Unit.WATT ? q.value() : q.value() * fullWatts;
+        });
+    }
+
+    /**
      * An option's quantity in SI units.
      *
      * @param option the option's name, which a refusal carries

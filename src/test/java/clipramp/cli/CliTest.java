@@ -2,6 +2,7 @@ package clipramp.cli;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import clipramp.files.Example;
 import com.fasterxml.jackson.databind.JsonNode;
 import com.fasterxml.jackson.databind.ObjectMapper;
 import java.io.ByteArrayInputStream;
@@ -10,11 +11,13 @@ import java.io.IOException;
 import java.io.OutputStream;
 import java.nio.charset.Charset;
 import java.nio.charset.StandardCharsets;
+import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Random;
+import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -57,6 +60,37 @@ class CliTest {
         assertThat(version.out()).startsWith("clipramp ");
     }
 
+    @Test
+    void everyExampleIsNamedByHelpAndCanBeStartedFrom(@TempDir Path folder) throws IOException {
+        String help = CliRun.of("new", "--help").out();
+        try (Stream<Path> files = Files.list(Path.of("examples"))) {
+            List<String> ids = files.map(f -> String.valueOf(f.getFileName()).replace(".yaml", ""))
+                    .toList();
+            assertThat(Example.all()).extracting(Example::id).containsExactlyInAnyOrderElementsOf(ids);
+        }
+        for (Example example : Example.all()) {
+            assertThat(help).contains(example.id());
+            Path out = folder.resolve(example.id() + ".yaml");
+            assertThat(CliRun.of("new", "--from=" + example.id(), "--out=" + out)
+                            .code())
+                    .isZero();
+            assertThat(Files.readString(out, StandardCharsets.UTF_8)).isEqualTo(example.text());
+            assertThat(CliRun.of("check", out.toString()).code()).isIn(0, 1);
+        }
+    }
+
+    @Test
+    void aFileThatIsThereIsOnlyReplacedOnRequest(@TempDir Path folder) throws IOException {
+        Path out = Files.writeString(folder.resolve("mine.yaml"), "mine");
+
+        CliRun refused = CliRun.of("new", "--out=" + out);
+        assertThat(refused.code()).isEqualTo(4);
+        assertThat(refused.err()).contains("exists already", "--replace");
+        assertThat(Files.readString(out)).isEqualTo("mine");
+        assertThat(CliRun.of("new", "--out=" + out, "--replace").code()).isZero();
+        assertThat(Files.readString(out)).startsWith("# ");
+    }
+
     @ParameterizedTest
     @ValueSource(strings = {"check", "map", "trace", "new", "parts", "explain"})
     void everyOptionHasALongNameOnly(String command) {
@@ -91,7 +125,7 @@ class CliTest {
         assertThat(problem.fieldNames())
                 .toIterable()
                 .containsExactly("file", "line", "column", "path", "read", "expected", "nearest", "message");
-        assertThat(problem.get("path").textValue()).isEqualTo("--line");
+        assertThat(problem.get("file").textValue()).isEqualTo("--line");
         assertThat(problem.get("read").textValue()).isEqualTo("10 mohm");
         assertThat(problem.get("line").isNull()).isTrue();
     }
