@@ -137,6 +137,18 @@ final class Devices {
         }
         List<String> known =
                 place.kinds().stream().flatMap(k -> library.ids(k).stream()).toList();
+        List<Found> others = library.named(id);
+        if (!others.isEmpty()) {
+            String other = others.get(0).kind();
+            findings.problem(
+                    scalar.place(),
+                    path,
+                    id,
+                    String.join(" or ", place.kinds()),
+                    "read \"" + id + "\", which is a profile of kind " + other + "; expected "
+                            + String.join(" or ", place.kinds()) + ".");
+            return Optional.empty();
+        }
         List<String> near = Nearest.several(id, known, 3);
         String hint =
                 near.isEmpty() ? "No profile of this kind is there." : "Nearest: " + String.join(", ", near) + ".";
@@ -154,12 +166,11 @@ final class Devices {
     }
 
     private Optional<Device> text(Found found, DevicePlace place, String path, List<String> chain) {
-        Optional<Mapping> tree = YamlTree.read(found.source(), findings);
+        Optional<Mapping> tree = library.tree(found, findings);
         if (tree.isEmpty()) {
             return Optional.empty();
         }
         Mapping mapping = tree.get();
-        Version.check(mapping, findings);
         if (!require(mapping, "kind", found.kind(), path) || !require(mapping, "id", found.id(), path)) {
             return Optional.empty();
         }

@@ -26,6 +26,8 @@ final class GateSection {
                 byTransformer ? scope.child("transformer").flatMap(GateSection::transformer) : Optional.empty();
         if (coupling.isPresent()) {
             scope.close("with coupling direct");
+        } else {
+            scope.closeUnknown();
         }
         if (coupling.isEmpty() || polarity.isEmpty() || byTransformer != transformer.isPresent()) {
             return Optional.empty();

@@ -1,8 +1,8 @@
 package clipramp.files;
 
 import clipramp.units.Expected;
-import clipramp.units.QuantityText;
 import clipramp.units.Unit;
+import java.util.ArrayList;
 import java.util.List;
 
 /**
@@ -156,15 +156,27 @@ public record Key(
         };
     }
 
+    /** Everything about the key, line by line, for a person who asks. */
+    public List<String> explained() {
+        List<String> lines = new ArrayList<>();
+        lines.add(path + ": " + meaning);
+        lines.add("takes    " + kind.inWords());
+        lines.add("range    " + range());
+        if (!unitSymbol().isEmpty()) {
+            lines.add("unit     " + unitSymbol());
+        }
+        lines.add("default  " + standardInWords());
+        if (!neededBy.isEmpty()) {
+            lines.add("needed   by " + neededBy);
+        }
+        return lines;
+    }
+
     /** A value inside the window, to go on reading with when the one that stood there was refused. */
     double standIn() {
         if (low > 0 && high < Double.POSITIVE_INFINITY) {
             return Math.sqrt(low * high);
         }
         return low <= 0 && high >= 0 && unit != Unit.FRACTION ? Math.min(high, 1) : (low + high) / 2;
-    }
-
-    String lowInWords() {
-        return QuantityText.format(low, unit);
     }
 }

@@ -1,5 +1,6 @@
 package clipramp.files;
 
+import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -15,11 +16,17 @@ public final class KeyCatalogue {
             Stream.concat(DesignKeys.all().stream(), DeviceKeys.all().stream()).toList());
 
     private final Map<String, Key> byPath = new LinkedHashMap<>();
+    private final Map<String, List<String>> under = new LinkedHashMap<>();
 
     private KeyCatalogue(List<Key> keys) {
         for (Key key : keys) {
             if (byPath.put(key.path(), key) != null) {
                 throw new IllegalStateException("a key stands twice in the catalogue: " + key.path());
+            }
+            int dot = key.path().lastIndexOf('.');
+            if (dot >= 0 || !DevicePlace.isKind(key.path())) {
+                String around = dot < 0 ? "" : key.path().substring(0, dot);
+                under.computeIfAbsent(around, p -> new ArrayList<>()).add(key.name());
             }
         }
     }
@@ -36,7 +43,8 @@ public final class KeyCatalogue {
 
     /** A key by its whole path, such as clip.dropper or unijunction.standoff. */
     public Optional<Key> find(String path) {
-        return Optional.ofNullable(byPath.get(path.replaceAll("\\[\\d+]", "")));
+        String plain = path.indexOf('[') < 0 ? path : path.replaceAll("\\[\\d+]", "");
+        return Optional.ofNullable(byPath.get(plain));
     }
 
     /**
@@ -73,11 +81,6 @@ public final class KeyCatalogue {
 
     /** Names directly under a path. */
     List<String> namesUnder(String path) {
-        String prefix = path.isEmpty() ? "" : path + ".";
-        return byPath.keySet().stream()
-                .filter(p -> p.startsWith(prefix) && p.indexOf('.', prefix.length()) < 0)
-                .filter(p -> !prefix.isEmpty() || !DevicePlace.isKind(p))
-                .map(p -> p.substring(prefix.length()))
-                .toList();
+        return under.getOrDefault(path, List.of());
     }
 }

@@ -29,6 +29,9 @@ final class LoadSection {
      */
     static Optional<Load> read(Scope scope, double lineVolts, double diodeDropVolts) {
         Optional<String> kind = scope.word("kind");
+        if (kind.isEmpty()) {
+            scope.closeUnknown();
+        }
         return kind.flatMap(k -> new LoadSection(scope, lineVolts, diodeDropVolts).ofKind(k));
     }
 

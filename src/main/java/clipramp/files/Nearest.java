@@ -11,14 +11,19 @@ public final class Nearest {
     public static String to(String word, List<String> known) {
         String best = "";
         int bestDistance = Math.max(2, word.length() / 2) + 1;
+        String folded = word.toLowerCase(Locale.ROOT);
         for (String candidate : known) {
-            int distance = distance(word.toLowerCase(Locale.ROOT), candidate);
+            int distance = isBeginning(folded, candidate) ? 1 : distance(folded, candidate);
             if (distance < bestDistance) {
                 best = candidate;
                 bestDistance = distance;
             }
         }
         return best;
+    }
+
+    private static boolean isBeginning(String a, String b) {
+        return Math.min(a.length(), b.length()) > 2 && (a.startsWith(b) || b.startsWith(a));
     }
 
     /** Several of them, nearest first. */

@@ -44,7 +44,9 @@ final class Overrides {
             Optional<List<String>> steps = steps(path);
             Optional<Node> value = steps.isPresent() ? value(path, text) : Optional.empty();
             if (value.isPresent()) {
-                changed = (Mapping) set(changed, steps.orElseThrow(), 0, value.get());
+                int before = findings.count();
+                Mapping next = (Mapping) set(changed, steps.orElseThrow(), 0, value.get());
+                changed = findings.count() == before ? next : changed;
             }
         }
         return changed;

@@ -1,5 +1,6 @@
 package clipramp.files;
 
+import clipramp.files.Node.Mapping;
 import java.io.IOException;
 import java.io.InputStream;
 import java.io.UncheckedIOException;
@@ -14,6 +15,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.concurrent.ConcurrentHashMap;
 import java.util.stream.Stream;
 import java.util.zip.ZipFile;
 
@@ -44,6 +46,10 @@ public final class ProfileLibrary {
 
     private final List<Folder> folders;
     private final List<String> shipped;
+    /** The program's own profiles do not change while it runs: each is fetched and parsed once. */
+    private final Map<String, Optional<String>> shippedTexts = new ConcurrentHashMap<>();
+
+    private final Map<String, Mapping> shippedTrees = new ConcurrentHashMap<>();
 
     private ProfileLibrary(List<Folder> folders) {
         this.folders = List.copyOf(folders);
@@ -109,10 +115,28 @@ public final class ProfileLibrary {
                 }
             }
         }
-        shippedText(kind, id)
+        shippedTexts
+                .computeIfAbsent(kind + "/" + id, n -> shippedText(kind, id))
                 .ifPresent(text -> found.add(
                         new Found(kind, id, PROGRAM, new Source("profiles/" + kind + "/" + id + ENDING, text))));
         return found;
+    }
+
+    /** A profile's tree; empty where it cannot be read, which is then among the findings. */
+    Optional<Mapping> tree(Found found, Findings findings) {
+        String name = found.kind() + "/" + found.id();
+        boolean own = found.from().equals(PROGRAM);
+        Mapping known = own ? shippedTrees.get(name) : null;
+        if (known != null) {
+            return Optional.of(known);
+        }
+        int before = findings.count();
+        Optional<Mapping> tree = YamlTree.read(found.source(), findings);
+        tree.ifPresent(t -> Version.check(t, findings));
+        if (own && findings.count() == before) {
+            tree.ifPresent(t -> shippedTrees.put(name, t));
+        }
+        return tree;
     }
 
     /** Ids of a kind in every place, sorted. */

@@ -64,6 +64,8 @@ final class RampSection {
         Optional<Part> shunt = scope.optionalPart("shunt");
         if (word.isPresent()) {
             scope.close("with law " + word.get());
+        } else {
+            scope.closeUnknown();
         }
         if (law.isEmpty() || sense.isEmpty()) {
             return Optional.empty();

@@ -86,7 +86,7 @@ final class RestSections {
                                     + QuantityText.format(hottest, Unit.CELSIUS) + ". Exchange them?");
             return Optional.empty();
         }
-        return Optional.of(new Surroundings(coldest, hottest));
+        return scope.make(before, () -> new Surroundings(coldest, hottest));
     }
 
     static double derating(Scope root) {

@@ -127,9 +127,22 @@ final class Scope {
     }
 
     void missing(String name, Key key) {
-        String example = key.range();
+        if (isMistyped(name)) {
+            return;
+        }
+        String example = key.kind() == Key.Kind.MAPPING
+                ? "{" + String.join(", ", catalogue.namesUnder(key.path())) + "}"
+                : key.range();
         findings.problem(
                 node.place(), pathOf(name), "", example, "is missing; expected " + example + ". " + key.meaning());
+    }
+
+    /** Whether an unknown key stands here that is nearest to this one: then that is the problem, and told as such. */
+    private boolean isMistyped(String name) {
+        List<String> known = catalogue.namesUnder(prefix);
+        return node.entries().stream()
+                .map(Node.Entry::key)
+                .anyMatch(k -> !known.contains(k) && Nearest.to(k, known).equals(name));
     }
 
     private <T> Optional<T> read(String name, Scalar scalar, Supplier<T> reader) {
@@ -370,6 +383,11 @@ final class Scope {
     /** The same for a device, which may also carry id, kind and sources. */
     void closeDevice() {
         close("", DEVICE_WORDS);
+    }
+
+    /** Refuses unknown keys only, where a problem leaves open which of the known ones belong. */
+    void closeUnknown() {
+        close("", Set.copyOf(catalogue.namesUnder(prefix)));
     }
 
     private void close(String why, Set<String> allowed) {

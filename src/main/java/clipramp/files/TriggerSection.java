@@ -25,6 +25,7 @@ final class TriggerSection {
         Optional<Device> device = ClipSection.device(scope, devices, "device", DevicePlace.TRIGGER);
         Part baseOne = scope.part("base-one");
         if (device.isEmpty()) {
+            scope.closeUnknown();
             return Optional.empty();
         }
         String kind = device.get().kind();

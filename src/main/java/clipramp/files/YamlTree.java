@@ -148,6 +148,9 @@ final class YamlTree {
                         read,
                         "a dot",
                         "read \"" + read + "\"; decimals take a dot: " + s.text() + "." + key + "?");
+                before.set(
+                        before.size() - 1,
+                        new Entry(last.key(), last.place(), new Scalar(s.text() + "." + key, false, s.place())));
                 return;
             }
         }

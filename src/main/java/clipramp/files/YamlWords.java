@@ -2,7 +2,9 @@ package clipramp.files;
 
 import com.fasterxml.jackson.core.JsonLocation;
 import com.fasterxml.jackson.core.JsonProcessingException;
+import java.util.ArrayList;
 import java.util.LinkedHashMap;
+import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.regex.Matcher;
@@ -27,6 +29,7 @@ final class YamlWords {
                 "a value cannot begin with this sign. Put it in quotes, or take the sign out.");
         words.put("flow mapping", "a brace { is not closed by }, or a comma is missing between two keys.");
         words.put("flow sequence", "a bracket [ is not closed by ], or a comma is missing between two items.");
+        words.put("flow node", "a brace { or a bracket [ is opened and nothing stands behind it.");
         words.put("could not find expected ':'", "a key without its colon. Write \"key: value\".");
         words.put("expected <block end>", "this line is not indented like the others of its block.");
         words.put("sequence entries are not allowed", "a list item \"- \" has no place here.");
@@ -77,25 +80,34 @@ final class YamlWords {
 
     static void translate(JsonProcessingException e, Source source, Findings findings) {
         String said = Optional.ofNullable(e.getOriginalMessage()).orElse("");
-        int line = 1;
-        int column = 1;
-        Matcher position = POSITION.matcher(said);
-        boolean placed = false;
-        while (position.find()) {
-            line = Integer.parseInt(position.group(1));
-            column = Integer.parseInt(position.group(2));
-            placed = true;
-        }
-        JsonLocation location = e.getLocation();
-        if (!placed && location != null) {
-            line = Math.max(1, location.getLineNr());
-            column = Math.max(1, location.getColumnNr());
-        }
+        Place place = place(e, said, source.name());
         String sentence = SENTENCES.entrySet().stream()
                 .filter(word -> said.contains(word.getKey()))
                 .map(Map.Entry::getValue)
                 .findFirst()
                 .orElse("this line cannot be read as YAML.");
-        findings.problem(Place.of(source.name(), line, column), "", sentence);
+        findings.problem(place, "", sentence);
+    }
+
+    // The parser names where a brace or quote was opened, then where it gave up. The opening helps more where giving up
+    // came lines later.
+    private static Place place(JsonProcessingException e, String said, String file) {
+        List<Place> named = new ArrayList<>();
+        Matcher position = POSITION.matcher(said);
+        while (position.find()) {
+            named.add(Place.of(file, Integer.parseInt(position.group(1)), Integer.parseInt(position.group(2))));
+        }
+        if (!named.isEmpty()) {
+            Place opened = named.get(0);
+            Place gaveUp = named.get(named.size() - 1);
+            return opened.line() < gaveUp.line() && (said.contains("flow ") || said.contains("quoted"))
+                    ? opened
+                    : gaveUp;
+        }
+        JsonLocation location = e.getLocation();
+        int behind = said.contains("Expected a field name") ? 1 : 0;
+        return location == null
+                ? Place.of(file, 1, 1)
+                : Place.of(file, Math.max(1, location.getLineNr()), Math.max(1, location.getColumnNr() - behind));
     }
 }

@@ -114,7 +114,12 @@ final class Refusals {
                 .mapToObj(t -> " ±" + QuantityText.format(t, Unit.FRACTION))
                 .collect(Collectors.joining());
         String meaning = QuantityText.format(farads, Unit.FARAD) + tolerance;
-        return refusal("", expected(), text + " is " + meaning + ": write that.");
+        return power == 0
+                ? refusal(
+                        "",
+                        expected(),
+                        "As a marking " + text + " is " + meaning + ": write that, or " + text + " with its unit.")
+                : refusal("", expected(), text + " is " + meaning + ": write that.");
     }
 
     RefusedQuantityException codeOutOfPlace(String number, String letter) {
@@ -230,7 +235,9 @@ final class Refusals {
         }
         List<String> few = readings.stream().limit(MOST_SUGGESTIONS).toList();
         String suggestion = few.isEmpty() ? "" : listed(few) + "?";
-        return refusal(QuantityText.meaning(value.decimal(), expected.unit()), expected.inWords(), suggestion);
+        String meaning = QuantityText.meaning(value.decimal(), expected.unit());
+        boolean saysNothing = meaning.replace(" ", "").equals(text.replace(" ", ""));
+        return refusal(saysNothing ? "" : meaning, expected.inWords(), suggestion);
     }
 
     private static String listed(List<String> few) {

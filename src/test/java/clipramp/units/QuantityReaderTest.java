@@ -153,7 +153,7 @@ class QuantityReaderTest {
         assertThatThrownBy(() -> read("10 mohm", dropper))
                 .hasMessage("read \"10 mohm\" (0.010 Ω); expected 100 Ω..1 MΩ. 10 Mohm or 10 kohm?");
         assertThatThrownBy(() -> read("10 MΩ", dropper))
-                .hasMessage("read \"10 MΩ\" (10 MΩ); expected 100 Ω..1 MΩ. 10 mΩ or 10 kΩ?");
+                .hasMessage("read \"10 MΩ\"; expected 100 Ω..1 MΩ. 10 mΩ or 10 kΩ?");
         assertRefused("47", CAPACITOR, "(47 F)", "47 pF, 47 nF or 47 uF?");
         assertRefused("5", dropper, "(5 Ω)", "5 kohm?");
     }
