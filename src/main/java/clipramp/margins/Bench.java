@@ -147,9 +147,10 @@ final class Bench {
         return design.ramp().rampOhms(0.5);
     }
 
-    /** The first pulse of every half cycle that has one. */
-    static List<Pulse> firstPulses(Solution solution) {
+    /** The first pulse of every half cycle that has one and that the stage lets through. */
+    List<Pulse> firstPulses(Solution solution) {
         return solution.halves().stream()
+                .filter(half -> design.stage().isFullWave() || half.positive())
                 .flatMap(half -> firstPulse(half).stream())
                 .toList();
     }

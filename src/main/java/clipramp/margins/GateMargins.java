@@ -63,20 +63,18 @@ final class GateMargins {
         String pulse = design.gate().polarity().word() + " pulse";
         Finding finding;
         if (device.kind() == Kind.SCR) {
-            boolean positive = design.gate().polarity() == Polarity.POSITIVE;
+            boolean wrong = design.gate().polarity() == Polarity.NEGATIVE;
             finding = new Finding(
                     "any condition",
-                    1,
-                    positive ? 1 : 0,
+                    0,
+                    wrong ? 1 : 0,
                     kind.sense(),
                     pulse + " into an SCR, which needs a positive one");
         } else {
-            int used = need.used().size();
-            int specified = used - need.missing().size();
             finding = new Finding(
                     "any condition",
-                    used,
-                    specified,
+                    0,
+                    need.missing().size(),
                     kind.sense(),
                     pulse + ": quadrants " + words(need.used())
                             + (need.missing().isEmpty()
@@ -103,7 +101,7 @@ final class GateMargins {
         for (JudgedCondition at : bench.coldest()) {
             TriggerNeed need = TriggerNeed.of(design, at.condition().celsius());
             for (double ohms : judgedOhms(at)) {
-                List<Pulse> pulses = Bench.firstPulses(bench.held(at.condition(), ohms));
+                List<Pulse> pulses = bench.firstPulses(bench.held(at.condition(), ohms));
                 if (pulses.isEmpty()) {
                     findings.add(noPulse(kind, at, need, ohms));
                 }
@@ -311,7 +309,7 @@ final class GateMargins {
                 findings.add(Finding.missing(kind, at.words(), "no setting fires before the supply's collapse"));
                 continue;
             }
-            for (Pulse pulse : Bench.firstPulses(bench.solution(at.condition(), ohms.getAsDouble()))) {
+            for (Pulse pulse : bench.firstPulses(bench.solution(at.condition(), ohms.getAsDouble()))) {
                 findings.add(latched(kind, at, needed.getAsDouble(), pulse));
             }
         }

@@ -55,9 +55,10 @@ final class RampMargins {
         MarginKind kind = MarginKind.RAMP_BEFORE_COLLAPSE;
         List<Finding> findings = new ArrayList<>();
         for (JudgedCondition at : bench.conditions()) {
-            HalfCycle half = bench.solution(at.condition(), bench.mostOhms()).shown();
+            Solution solution = bench.solution(at.condition(), bench.mostOhms());
+            HalfCycle half = solution.shown();
             double reached = half.pulses().stream()
-                    .mapToDouble(p -> madeRad(at.condition(), p))
+                    .mapToDouble(p -> ActingPulses.madeRad(design, solution, p))
                     .min()
                     .orElse(Math.PI);
             String what = half.pulses().isEmpty()
@@ -65,32 +66,38 @@ final class RampMargins {
                     : "the ramp reaches the peak point at " + Say.angle(reached);
             findings.add(new Finding(
                     at.words(),
-                    Math.toDegrees(half.collapseRad()),
+                    Math.toDegrees(collapseRad(half)),
                     Math.toDegrees(reached),
                     kind.sense(),
                     "R_E = " + Say.ohms(bench.mostOhms()) + ": " + what + "; the supply stays clipped until "
-                            + Say.angle(half.collapseRad())));
+                            + Say.angle(collapseRad(half))));
         }
         return Finding.worst(kind, findings);
     }
 
-    /** Angle of a pulse on the load's line, not folded into the next half cycle, rad. */
-    private double madeRad(Condition condition, Pulse pulse) {
-        return condition.omega() * pulse.startSeconds()
-                + design.clip().winding().map(w -> w.lagRad()).orElse(0.0);
+    /** Angle of the supply's collapse, from the load's zero that goes with the supply's half cycle, rad. */
+    private static double collapseRad(HalfCycle half) {
+        return inOwnHalf(half, half.collapseRad());
+    }
+
+    /** A single diode on a winding turned over feeds the negative half: its angles stand a half period later. */
+    private static double inOwnHalf(HalfCycle half, double rad) {
+        return !half.positive() && rad > Math.PI ? rad - Math.PI : rad;
     }
 
     private Margin clipBeforeFiring() {
         MarginKind kind = MarginKind.CLIP_BEFORE_FIRING;
         List<Finding> findings = new ArrayList<>();
         for (JudgedCondition at : bench.conditions()) {
-            HalfCycle half = bench.solution(at.condition(), bench.leastOhms()).shown();
+            Solution solution = bench.solution(at.condition(), bench.leastOhms());
+            HalfCycle half = solution.shown();
             if (half.pulses().isEmpty()) {
                 findings.add(Finding.missing(kind, at.words(), "there is no pulse at the smallest R_E"));
                 continue;
             }
-            double fires = madeRad(at.condition(), Bench.firstPulse(half).orElseThrow());
-            double clips = half.clipFromRad().orElse(Math.PI);
+            double fires = ActingPulses.madeRad(
+                    design, solution, Bench.firstPulse(half).orElseThrow());
+            double clips = inOwnHalf(half, half.clipFromRad().orElse(Math.PI));
             findings.add(new Finding(
                     at.words(),
                     Math.toDegrees(fires),

@@ -3,12 +3,15 @@ package clipramp.margins;
 import clipramp.circuit.Design;
 import clipramp.circuit.Stage;
 import clipramp.circuit.ThyristorDevice;
+import clipramp.firing.Pulse;
 import clipramp.gate.LatchingNeed;
 import clipramp.power.HoldingGap;
+import clipramp.power.LoadPower;
 import clipramp.power.LoadResult;
 import clipramp.power.Thermal;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import java.util.OptionalDouble;
 
 /** The thyristor against its ratings: voltage, currents, heat, turn-off (model.md sections 8 and 10). */
@@ -60,8 +63,17 @@ final class ThyristorMargins {
         return "the profile states no thyristor.device." + key;
     }
 
+    /**
+     * The load at its highest setting. Where the nominal thyristor is not turned on there, another one of its type may
+     * be: then every half cycle counts as fired by the first pulse.
+     */
     private LoadResult load(JudgedCondition at) {
-        return bench.load(at.condition(), bench.leastOhms());
+        LoadResult load = bench.load(at.condition(), bench.leastOhms());
+        Optional<Pulse> first = Bench.firstPulse(
+                bench.solution(at.condition(), bench.leastOhms()).shown());
+        return load.watts() > 0 || first.isEmpty()
+                ? load
+                : LoadPower.atFiringAngle(design, at.condition(), first.get().startRad());
     }
 
     private Margin junction() {

@@ -27,21 +27,32 @@ public final class ActingPulses {
      */
     record Slot(boolean positive, OptionalDouble firingRad, int index) {}
 
+    /**
+     * The angle at which a pulse was made, from the load's zero that goes with the supply's half cycle: its firing angle
+     * but for a pulse that was folded into a neighbouring half cycle of the load, so that it grows with R_E through the
+     * load's zero.
+     *
+     * @return rad; pi or more for a pulse that acts in the half cycle after its own
+     */
+    public static double madeRad(Design design, Solution solution, Pulse pulse) {
+        return pulse.startRad() + Math.PI * folds(design, solution, pulse);
+    }
+
+    /** How often a pulse was folded back by a half cycle; the rough angle of its making tells. */
+    private static long folds(Design design, Solution solution, Pulse pulse) {
+        double lagRad = design.clip().winding().map(Winding::lagRad).orElse(0.0);
+        double roughRad = solution.condition().omega() * pulse.startSeconds() + lagRad;
+        return Math.round((roughRad - pulse.startRad()) / Math.PI);
+    }
+
     /** Whether the thyristor is fired, in some half cycle, by a pulse made in the half cycle before: full power. */
     public static boolean spillOver(Design design, Solution solution) {
-        double lagRad = design.clip().winding().map(Winding::lagRad).orElse(0.0);
         boolean periods = spansPeriods(solution);
-        for (HalfCycle half : solution.halves()) {
-            for (Pulse pulse : half.pulses()) {
-                // A folded pulse stands early in the half cycle that it acts in, whenever it was made.
-                double madeRad = solution.condition().omega() * pulse.startSeconds() + lagRad;
-                boolean later = periods ? madeRad >= Math.PI : madeRad - pulse.startRad() > Math.PI / 2;
-                if (pulse.latches() && later) {
-                    return true;
-                }
-            }
-        }
-        return false;
+        return solution.halves().stream()
+                .flatMap(half -> half.pulses().stream())
+                .filter(Pulse::latches)
+                .anyMatch(pulse ->
+                        folds(design, solution, pulse) > 0 || periods && madeRad(design, solution, pulse) >= Math.PI);
     }
 
     /** Whether one of the solution's halves spans a whole period, as a single-diode supply's does. */

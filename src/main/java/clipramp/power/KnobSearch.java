@@ -3,7 +3,6 @@ package clipramp.power;
 import clipramp.circuit.Condition;
 import clipramp.circuit.Design;
 import clipramp.circuit.Ramp;
-import clipramp.circuit.Winding;
 import clipramp.firing.Firing;
 import clipramp.firing.Pulse;
 import clipramp.firing.Solution;
@@ -112,11 +111,10 @@ public final class KnobSearch {
      * with R_E through the load's zero; a whole period where the thyristor stays off.
      */
     private static double firstFiringRad(Design design, Solution solution) {
-        double lagRad = design.clip().winding().map(Winding::lagRad).orElse(0.0);
         return solution.shown().pulses().stream()
                 .filter(Pulse::latches)
                 .min(Comparator.comparingDouble(Pulse::startSeconds))
-                .map(pulse -> solution.condition().omega() * pulse.startSeconds() + lagRad)
+                .map(pulse -> ActingPulses.madeRad(design, solution, pulse))
                 .orElse(2 * Math.PI);
     }
 

@@ -200,4 +200,41 @@ class JudgeTest {
         Design design = SampleDesigns.heater().withLoad(new Load.Inductive(40, 0.12, Optional.empty()));
         assertThatThrownBy(() -> check(design)).isInstanceOf(UnsupportedLoadException.class);
     }
+
+    @Test
+    void aHalfWaveStageIsNotAskedToLatchInTheHalfCycleThatItBlocks() {
+        Design design = SampleDesigns.windingHeater(0, false)
+                .withStage(clipramp.circuit.Stage.HALF_WAVE)
+                .withThyristor(SampleDesigns.heater().thyristor())
+                .withGate(SampleDesigns.directGate(1_000))
+                .withWanted(new Wanted(Optional.empty(), Optional.empty()));
+        Check check = check(design);
+        assertThat(margin(check, MarginKind.LATCHING_EARLIEST).verdict()).isEqualTo(Verdict.HOLDS);
+        assertThat(check.notes()).extracting(Note::id).contains("half-wave-dc", "reverse-anode-drive");
+    }
+
+    @Test
+    void aSupplyTurnedOverIsJudgedOnItsOwnHalfCycle() {
+        Design upright = SampleDesigns.halfWaveHeater()
+                .withStage(clipramp.circuit.Stage.TRIAC)
+                .withThyristor(SampleDesigns.triacHeater().thyristor());
+        var winding = Optional.of(new clipramp.circuit.Winding(230, 230, false, 0));
+        var over = Optional.of(new clipramp.circuit.Winding(230, 230, true, 0));
+        Margin first = margin(check(Changed.with(upright, "clip.winding", winding)), MarginKind.RAMP_BEFORE_COLLAPSE);
+        Margin second = margin(check(Changed.with(upright, "clip.winding", over)), MarginKind.RAMP_BEFORE_COLLAPSE);
+        assertThat(second.demand()).isCloseTo(first.demand(), within(1e-6));
+        assertThat(second.offered()).isCloseTo(first.offered(), within(1e-6));
+    }
+
+    @Test
+    void aThyristorThatTheNominalPulseDoesNotLatchIsRatedAsIfAnotherDid() {
+        Design lazy = Changed.with(
+                SampleDesigns.heater(),
+                "thyristor.device.latching",
+                Optional.of(clipramp.circuit.TemperatureCurve.at25(20)));
+        double asleep = margin(check(lazy), MarginKind.THYRISTOR_RMS).offered();
+        double awake =
+                margin(check(SampleDesigns.heater()), MarginKind.THYRISTOR_RMS).offered();
+        assertThat(asleep).isCloseTo(awake, within(1e-3 * awake));
+    }
 }
