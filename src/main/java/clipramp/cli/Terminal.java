@@ -1,5 +1,6 @@
 package clipramp.cli;
 
+import java.io.BufferedInputStream;
 import java.io.FileDescriptor;
 import java.io.FileInputStream;
 import java.io.FileOutputStream;
@@ -37,7 +38,8 @@ public record Terminal(
     /** This process's own streams. A pipe or a file gets UTF-8; a terminal gets what it can show. */
     public static Terminal ofProcess() {
         return new Terminal(
-                new FileInputStream(FileDescriptor.in),
+                // Buffered: a bare file stream asks for its position, which a pipe has not.
+                new BufferedInputStream(new FileInputStream(FileDescriptor.in)),
                 new FileOutputStream(FileDescriptor.out),
                 new FileOutputStream(FileDescriptor.err),
                 System.getenv(),
