@@ -5,6 +5,7 @@ import clipramp.circuit.GateDrive;
 import clipramp.circuit.ThyristorDevice;
 import clipramp.circuit.ThyristorDevice.GateLimits;
 import clipramp.circuit.TriggerDemand;
+import clipramp.firing.Waveforms;
 import clipramp.units.QuantityText;
 import clipramp.units.Unit;
 import java.awt.Color;
@@ -15,6 +16,7 @@ import java.util.Comparator;
 import java.util.List;
 import java.util.OptionalDouble;
 import java.util.function.DoubleFunction;
+import java.util.stream.IntStream;
 import org.jfree.chart.axis.LogAxis;
 import org.jfree.chart.axis.ValueAxis;
 
@@ -33,6 +35,23 @@ public record GateFigure(Design design, double[] gateAmps, double[] gateVolts) i
         if (gateAmps.length != gateVolts.length) {
             throw new IllegalArgumentException("a path needs as many voltages as currents");
         }
+    }
+
+    /**
+     * The path of one pulse.
+     *
+     * @param waves sampled half cycle
+     * @param fromSeconds when the pulse begins, s on the waveforms' clock
+     * @param toSeconds when it ends, s
+     */
+    public static GateFigure ofPulse(Design design, Waveforms waves, double fromSeconds, double toSeconds) {
+        int[] within = IntStream.range(0, waves.seconds().length)
+                .filter(i -> waves.seconds()[i] >= fromSeconds && waves.seconds()[i] <= toSeconds)
+                .toArray();
+        return new GateFigure(
+                design,
+                IntStream.of(within).mapToDouble(i -> waves.gateAmps()[i]).toArray(),
+                IntStream.of(within).mapToDouble(i -> waves.gateVolts()[i]).toArray());
     }
 
     private ThyristorDevice device() {
@@ -258,7 +277,7 @@ public record GateFigure(Design design, double[] gateAmps, double[] gateVolts) i
             if (peak >= 0) {
                 double x = plot.x(gateAmps[peak]) + 2.5 * style.gap();
                 double y = plot.y(gateVolts[peak]);
-                String text = "pulse " + amps(gateAmps[peak]) + ", " + volts(gateVolts[peak]);
+                String text = amps(gateAmps[peak]) + ", " + volts(gateVolts[peak]);
                 double wide = Lettering.width(text, style.smallBold()) + 5 * style.gap();
                 plot.letter(
                         text,

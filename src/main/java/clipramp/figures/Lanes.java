@@ -1,6 +1,7 @@
 package clipramp.figures;
 
 import clipramp.firing.Waveforms;
+import java.util.Optional;
 import java.util.OptionalDouble;
 
 /**
@@ -51,6 +52,32 @@ public record Lanes(Waveforms waves, double[] loadRad, double[] loadVolts, Optio
     /** The peak point at an angle, V. */
     public double peakPointAt(double angleRad) {
         return between(waves.angleRad(), waves.peakPointVolts(), angleRad);
+    }
+
+    /**
+     * @param angleRad where the gate current of the firing pulse is largest, rad
+     * @param amps how large it is, A
+     */
+    public record PulsePeak(double angleRad, double amps) {}
+
+    /** The peak of the gate pulse that begins at the firing angle; empty where nothing fires or no gate current flows. */
+    public Optional<PulsePeak> firingPulse() {
+        if (firingRad.isEmpty()) {
+            return Optional.empty();
+        }
+        double[] amps = waves.gateAmps();
+        int peak = -1;
+        for (int i = 0; i < amps.length; i++) {
+            boolean begun = waves.angleRad()[i] >= firingRad.getAsDouble() - 1e-9;
+            boolean over = peak >= 0 && amps[i] <= 0;
+            if (over) {
+                break;
+            }
+            if (begun && amps[i] > 0 && (peak < 0 || amps[i] > amps[peak])) {
+                peak = i;
+            }
+        }
+        return peak < 0 ? Optional.empty() : Optional.of(new PulsePeak(waves.angleRad()[peak], amps[peak]));
     }
 
     private static double between(double[] x, double[] y, double at) {

@@ -58,13 +58,14 @@ public record LanesFigure(Lanes lanes, double fromRad, double toRad, OptionalDou
     public String sentence() {
         double[] supply = lanes.values(Lane.SUPPLY);
         double clipped = java.util.Arrays.stream(supply).max().orElse(0);
-        double pulse = java.util.Arrays.stream(lanes.values(Lane.PULSE)).max().orElse(0);
         String fires = lanes.firingRad().isPresent()
                 ? "the thyristor is turned on at "
                         + Numerals.fixed(Math.toDegrees(lanes.firingRad().getAsDouble()), 1) + "°"
                 : "no pulse turns the thyristor on";
-        return title() + ": the supply is clipped at " + Numerals.significant(clipped, 3) + " V, " + fires
-                + ", and the gate pulse peaks at " + Numerals.significant(pulse * 1000, 3) + " mA.";
+        String pulse = lanes.firingPulse()
+                .map(peak -> ", and its gate pulse peaks at " + Numerals.significant(1000 * peak.amps(), 3) + " mA")
+                .orElse("");
+        return title() + ": the supply reaches " + Numerals.significant(clipped, 3) + " V, " + fires + pulse + ".";
     }
 
     @Override

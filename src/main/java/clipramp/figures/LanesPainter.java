@@ -63,10 +63,11 @@ final class LanesPainter {
         pen.fill(palette.ground(), new Rectangle2D.Double(0, 0, width, height));
         figure.band().ifPresent(this::paintBand);
         paintAngleAxis();
+        // Under the traces: the pulse that fires lies exactly on this line and must not vanish behind it.
+        lanes.firingRad().ifPresent(this::paintFiring);
         for (Lane lane : Lane.values()) {
             paintLane(lane);
         }
-        lanes.firingRad().ifPresent(this::paintFiring);
         figure.crosshairRad().ifPresent(this::paintCrosshair);
         for (Lane lane : Lane.values()) {
             paintHead(lane);
@@ -129,7 +130,19 @@ final class LanesPainter {
             trace(lanes.waves().angleRad(), lanes.waves().peakPointVolts(), scale, style.dashed(), palette.ramp());
         }
         trace(lanes.angles(lane), scaled(lane), scale, style.trace(), colour(lane));
+        if (lane == Lane.PULSE) {
+            markPulse(scale);
+        }
         g.setClip(before);
+    }
+
+    private void markPulse(Scale scale) {
+        lanes.firingPulse().ifPresent(peak -> {
+            double r = 2.6 * style.zoom();
+            double x = frame.xOf(peak.angleRad());
+            double y = scale.y(peak.amps() * Lane.PULSE.toUnit());
+            pen.fill(palette.pulse(), new Rectangle2D.Double(x - r, y - r, 2 * r, 2 * r));
+        });
     }
 
     private double[] scaled(Lane lane) {

@@ -107,17 +107,18 @@ final class Commissioning {
                 where,
                 what,
                 band.map(b -> Shown.brief(b.nominal(), unit)).orElse("none"),
-                band.map(b -> range(Math.max(0, b.low()), b.high(), unit)).orElse(""),
+                band.map(b -> range(b, unit)).orElse(""),
                 instrument));
     }
 
+    private static String range(Band band, Unit unit) {
+        boolean late = unit == Unit.ANGLE && band.high() >= Math.PI;
+        String text =
+                late ? Shown.brief(band.low(), unit) + " or later" : range(Math.max(0, band.low()), band.high(), unit);
+        return band.sure() && !late ? text : text + ", or none";
+    }
+
     private static String range(double low, double high, Unit unit) {
-        if (Double.isNaN(low) || Double.isNaN(high)) {
-            return "see spread";
-        }
-        if (unit == Unit.ANGLE && high >= Math.PI) {
-            return Shown.brief(low, unit) + " or later, or none";
-        }
         return Shown.brief(low, unit) + " to " + Shown.brief(high, unit);
     }
 }

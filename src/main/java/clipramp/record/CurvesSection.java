@@ -50,8 +50,13 @@ final class CurvesSection {
     private void gate() {
         paper.need(paper.width() / 1.6f + 190);
         paper.section("Gate drive");
-        double[] amps = content.lanes().waves().gateAmps();
-        GateFigure figure = new GateFigure(design, amps, content.lanes().waves().gateVolts());
+        GateFigure figure = check.pulse()
+                .map(summary -> GateFigure.ofPulse(
+                        design,
+                        content.lanes().waves(),
+                        summary.pulse().startSeconds(),
+                        summary.pulse().endSeconds()))
+                .orElseGet(() -> new GateFigure(design, new double[0], new double[0]));
         paper.text(figure.sentence() + " Both scales are logarithmic, so that a power is a straight line.");
         paper.figure(figure, paper.width() / 1.6f);
         check.pulse().ifPresent(this::pulse);

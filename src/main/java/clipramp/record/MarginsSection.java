@@ -21,8 +21,8 @@ final class MarginsSection {
         all.setWidthPercentage(100);
         all.setHeaderRows(1);
         all.setSplitRows(false);
-        all.addCell(whole(grid(faces)
-                .onceHeads("margin", "worst at", "asked", "there is", "ratio", "against what is asked", "verdict")));
+        all.addCell(whole(
+                grid(faces).onceHeads("margin", "worst at", "asked", "there is", "ratio", "tick: asked", "verdict")));
         for (Margin margin : content.check().margins()) {
             all.addCell(whole(row(faces, margin)));
         }

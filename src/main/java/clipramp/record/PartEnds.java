@@ -25,8 +25,12 @@ import java.util.function.Function;
  * act apart, and a wide one.
  */
 final class PartEnds {
-    /** A reading and how far off it may be. */
-    record Band(double nominal, double low, double high) {}
+    /**
+     * A reading and how far off it may be.
+     *
+     * @param sure whether a part at either end still gives a reading at all
+     */
+    record Band(double nominal, double low, double high, boolean sure) {}
 
     private final Condition condition;
     private final List<Design[]> ends = new ArrayList<>();
@@ -157,7 +161,7 @@ final class PartEnds {
 
     /** A knob position solved at nominal parts and at every end. */
     record At(OperatingPoint nominal, List<Optional<OperatingPoint[]>> ends) {
-        /** Band of a reading; empty where the nominal circuit has none. Its ends are NaN where an end has none. */
+        /** Band of a reading; empty where the nominal circuit has none. */
         Optional<Band> band(Function<OperatingPoint, OptionalDouble> reading) {
             OptionalDouble middle = reading.apply(nominal);
             if (middle.isEmpty()) {
@@ -166,16 +170,22 @@ final class PartEnds {
             double value = middle.getAsDouble();
             double low = value;
             double high = value;
+            boolean sure = true;
             for (Optional<OperatingPoint[]> pair : ends) {
-                if (pair.isEmpty()) {
-                    return Optional.of(new Band(value, Double.NaN, Double.NaN));
+                double below = 0;
+                double above = 0;
+                sure &= pair.isPresent();
+                for (OperatingPoint end : pair.orElse(new OperatingPoint[0])) {
+                    OptionalDouble there = reading.apply(end);
+                    sure &= there.isPresent();
+                    double shift = there.orElse(value) - value;
+                    below = Math.min(below, shift);
+                    above = Math.max(above, shift);
                 }
-                double a = reading.apply(pair.get()[0]).orElse(Double.NaN) - value;
-                double b = reading.apply(pair.get()[1]).orElse(Double.NaN) - value;
-                low += Math.min(0, Math.min(a, b));
-                high += Math.max(0, Math.max(a, b));
+                low += below;
+                high += above;
             }
-            return Optional.of(new Band(value, low, high));
+            return Optional.of(new Band(value, low, high, sure));
         }
     }
 }

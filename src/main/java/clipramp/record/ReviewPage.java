@@ -116,7 +116,7 @@ final class ReviewPage {
 
     private void worst() {
         Grid grid = new Grid(faces, new float[] {2.9f, 2.3f, 1.4f, 1.4f, 0.9f, 1.6f, 1.1f}, 2, 3, 4);
-        grid.heads("worst margins", "worst at", "asked", "there is", "ratio", "against what is asked", "verdict");
+        grid.heads("worst margins", "worst at", "asked", "there is", "ratio", "tick: asked", "verdict");
         for (Margin margin :
                 check.margins().subList(0, Math.min(WORST, check.margins().size()))) {
             grid.add(margin.name(), faces.small(), 0);

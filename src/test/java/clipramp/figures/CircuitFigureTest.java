@@ -13,6 +13,8 @@ import clipramp.circuit.Ramp;
 import clipramp.circuit.SampleDesigns;
 import clipramp.circuit.Stage;
 import clipramp.circuit.StageDiodes;
+import clipramp.circuit.Tolerance;
+import clipramp.circuit.Trigger;
 import clipramp.circuit.Winding;
 import java.awt.geom.Rectangle2D;
 import java.util.ArrayList;
@@ -87,6 +89,27 @@ class CircuitFigureTest {
                 GateDrive.Polarity.POSITIVE,
                 Optional.empty());
         return List.of(direct, series, SampleDesigns.transformerGate(stage == Stage.INVERSE_PARALLEL ? 2 : 1));
+    }
+
+    /** As many digits and ratings as a builder may write. */
+    @ParameterizedTest(name = "{0}")
+    @MethodSource("everyDesign")
+    void longerValuesStillKeepApart(String name, Design design) {
+        Part small = SampleDesigns.part(47, 0.05, 0.25);
+        Ramp ramp = design.ramp();
+        Part capacitor = new Part(
+                470e-9, new Tolerance(0.1, 0.1), java.util.OptionalDouble.empty(), java.util.OptionalDouble.of(63));
+        Design longer = design.withRamp(new Ramp(capacitor, SampleDesigns.part(2_700, 0.01, 0.25), ramp.pot()))
+                .withTrigger(
+                        design.trigger() instanceof Trigger.ProgrammableTrigger p
+                                ? new Trigger.ProgrammableTrigger(
+                                        p.device(),
+                                        small,
+                                        SampleDesigns.part(150_000, 0.01, 0.25),
+                                        SampleDesigns.part(270_000, 0.01, 0.25))
+                                : SampleDesigns.unijunctionTrigger(100, 1_500));
+        everyLabelLiesInsideTheSheetAndOverNoOther(name, longer);
+        noWireRunsThroughALabel(name, longer);
     }
 
     private static Ramp fixedRamp() {
