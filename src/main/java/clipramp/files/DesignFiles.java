@@ -33,6 +33,10 @@ public final class DesignFiles {
         Mapping changed = new Overrides(devices, findings).apply(tree.get(), overrides);
         Optional<Design> design = new DesignReader(changed, findings, devices).read();
         findings.throwIfAny();
+        devices.uses().stream()
+                .filter(u -> !u.hides().isEmpty())
+                .forEach(u -> findings.note("The profile " + u.id() + " comes from: " + u.from()
+                        + ". It hides a different one: " + u.hides() + "."));
         return new LoadedDesign(
                 design.orElseThrow(),
                 source.name(),

@@ -33,34 +33,32 @@ final class DesignReader {
         this.devices = devices;
     }
 
+    /** What the mappings of a design hold; a part that could not be read at all is empty. */
+    private record Parts(
+            Optional<Line> line,
+            Optional<Stage> stage,
+            StageDiodes stageDiodes,
+            Optional<Load> load,
+            Optional<ClipSupply> clip,
+            Optional<Ramp> ramp,
+            Optional<Trigger> trigger,
+            Optional<GateDrive> gate,
+            Optional<Thyristor> thyristor) {}
+
     /** Empty where there are problems. */
     Optional<Design> read() {
         root.take("clipramp");
         String title = root.text("title");
         String notes = root.text("notes");
         Document document = RestSections.document(root);
-        Optional<Line> line = line();
-        Optional<Stage> stage = root.word("stage")
-                .flatMap(w -> Arrays.stream(Stage.values())
-                        .filter(s -> s.word().equals(w))
-                        .findFirst());
-        Optional<ClipSupply> clip = root.child("clip")
-                .flatMap(s -> ClipSection.read(s, devices, stage.equals(Optional.of(Stage.HALF_WAVE))));
-        double drop = clip.map(ClipSupply::diodeDropVolts).orElse(0.0);
-        StageDiodes stageDiodes = stageDiodes(stage, drop);
-        Optional<Load> load = root.child("load")
-                .flatMap(s -> LoadSection.read(s, line.map(Line::volts).orElse(USUAL_LINE_VOLTS), drop));
-        Optional<Ramp> ramp = root.child("ramp").flatMap(RampSection::read);
-        Optional<Trigger> trigger = root.child("trigger").flatMap(s -> TriggerSection.read(s, devices));
-        Optional<GateDrive> gate = root.child("gate").flatMap(GateSection::read);
-        Optional<Thyristor> thyristor = root.child("thyristor")
-                .flatMap(s -> ThyristorSection.read(s, devices, stage.equals(Optional.of(Stage.TRIAC))));
+        Parts parts = parts();
         Optional<Surroundings> surroundings = RestSections.surroundings(root);
         Wanted wanted = RestSections.wanted(root);
         double derating = RestSections.derating(root);
         Map<String, String> designators = RestSections.designators(root);
         root.close("");
-        new SoundnessCheck(root, findings).check(stage, clip, gate, load, thyristor);
+        new SoundnessCheck(root, findings)
+                .check(parts.stage(), parts.clip(), parts.gate(), parts.load(), parts.thyristor());
         if (findings.hasProblems()) {
             return Optional.empty();
         }
@@ -70,19 +68,46 @@ final class DesignReader {
                         title,
                         notes,
                         document,
-                        line.orElseThrow(),
-                        stage.orElseThrow(),
-                        stageDiodes,
-                        load.orElseThrow(),
-                        clip.orElseThrow(),
-                        ramp.orElseThrow(),
-                        trigger.orElseThrow(),
-                        gate.orElseThrow(),
-                        thyristor.orElseThrow(),
+                        parts.line().orElseThrow(),
+                        parts.stage().orElseThrow(),
+                        parts.stageDiodes(),
+                        parts.load().orElseThrow(),
+                        parts.clip().orElseThrow(),
+                        parts.ramp().orElseThrow(),
+                        parts.trigger().orElseThrow(),
+                        parts.gate().orElseThrow(),
+                        parts.thyristor().orElseThrow(),
                         surroundings.orElseThrow(),
                         wanted,
                         derating,
                         designators));
+    }
+
+    private Parts parts() {
+        Optional<Line> line = line();
+        Optional<Stage> stage = stage();
+        boolean halfWave = stage.equals(Optional.of(Stage.HALF_WAVE));
+        boolean triac = stage.equals(Optional.of(Stage.TRIAC));
+        Optional<ClipSupply> clip = root.child("clip").flatMap(s -> ClipSection.read(s, devices, halfWave));
+        double drop = clip.map(ClipSupply::diodeDropVolts).orElse(0.0);
+        double lineVolts = line.map(Line::volts).orElse(USUAL_LINE_VOLTS);
+        return new Parts(
+                line,
+                stage,
+                stageDiodes(stage, drop),
+                root.child("load").flatMap(s -> LoadSection.read(s, lineVolts, drop)),
+                clip,
+                root.child("ramp").flatMap(RampSection::read),
+                root.child("trigger").flatMap(s -> TriggerSection.read(s, devices)),
+                root.child("gate").flatMap(GateSection::read),
+                root.child("thyristor").flatMap(s -> ThyristorSection.read(s, devices, triac)));
+    }
+
+    private Optional<Stage> stage() {
+        return root.word("stage")
+                .flatMap(w -> Arrays.stream(Stage.values())
+                        .filter(s -> s.word().equals(w))
+                        .findFirst());
     }
 
     private Optional<Line> line() {

@@ -33,6 +33,7 @@ final class Scope {
     private final Mapping node;
     private final String path;
     private final String prefix;
+    private final MappingProblems problems;
     private final Set<String> taken = new HashSet<>();
 
     /**
@@ -46,6 +47,7 @@ final class Scope {
         this.node = node;
         this.path = path;
         this.prefix = prefix;
+        problems = new MappingProblems(findings, node, path, catalogue.namesUnder(prefix));
     }
 
     Place place() {
@@ -61,7 +63,7 @@ final class Scope {
     }
 
     String pathOf(String name) {
-        return path.isEmpty() ? name : path + "." + name;
+        return problems.pathOf(name);
     }
 
     private String catalogued(String name) {
@@ -116,33 +118,12 @@ final class Scope {
         if (found.get() instanceof Scalar scalar) {
             return key.need() == Need.OPTIONAL && scalar.isNone() ? Optional.empty() : found.map(n -> scalar);
         }
-        String what = found.get() instanceof Mapping ? "a mapping" : "a list";
-        findings.problem(
-                found.get().place(),
-                pathOf(name),
-                what,
-                key.range(),
-                "read " + what + "; expected " + key.range() + ".");
+        problems.wrongShape(name, found.get(), key.range());
         return Optional.empty();
     }
 
     void missing(String name, Key key) {
-        if (isMistyped(name)) {
-            return;
-        }
-        String example = key.kind() == Key.Kind.MAPPING
-                ? "{" + String.join(", ", catalogue.namesUnder(key.path())) + "}"
-                : key.range();
-        findings.problem(
-                node.place(), pathOf(name), "", example, "is missing; expected " + example + ". " + key.meaning());
-    }
-
-    /** Whether an unknown key stands here that is nearest to this one: then that is the problem, and told as such. */
-    private boolean isMistyped(String name) {
-        List<String> known = catalogue.namesUnder(prefix);
-        return node.entries().stream()
-                .map(Node.Entry::key)
-                .anyMatch(k -> !known.contains(k) && Nearest.to(k, known).equals(name));
+        problems.missing(name, key);
     }
 
     private <T> Optional<T> read(String name, Scalar scalar, Supplier<T> reader) {
@@ -244,19 +225,7 @@ final class Scope {
         Key key = catalogue.require(catalogued(name));
         Optional<Scalar> scalar = scalar(name);
         if (scalar.isPresent() && !key.words().contains(scalar.get().text())) {
-            String read = scalar.get().text();
-            String nearest = Nearest.to(read, key.words());
-            String hint = nearest.isEmpty() ? "" : ". Nearest: " + nearest;
-            String expected = String.join(" | ", key.words());
-            findings.add(new Problem(
-                    scalar.get().place().file(),
-                    scalar.get().place().line(),
-                    scalar.get().place().column(),
-                    pathOf(name),
-                    read,
-                    expected,
-                    nearest,
-                    pathOf(name) + ": read \"" + read + "\"; expected " + expected + hint + "."));
+            problems.noSuchWord(name, scalar.get(), key.words());
             return Optional.empty();
         }
         return scalar.map(Scalar::text);
@@ -306,14 +275,9 @@ final class Scope {
         if (found.get() instanceof Scalar scalar && scalar.isNone() && optional) {
             return Optional.empty();
         }
-        wrongShape(name, found.get(), "more keys, {" + String.join(", ", catalogue.namesUnder(catalogued(name))) + "}");
+        problems.wrongShape(
+                name, found.get(), "more keys, {" + String.join(", ", catalogue.namesUnder(catalogued(name))) + "}");
         return Optional.empty();
-    }
-
-    private void wrongShape(String name, Node found, String expected) {
-        String read =
-                found instanceof Scalar s ? "\"" + s.text() + "\"" : found instanceof Mapping ? "a mapping" : "a list";
-        findings.problem(found.place(), pathOf(name), read, expected, "read " + read + "; expected " + expected + ".");
     }
 
     /** The mappings of a list; empty where the key is missing or wrong, which has then been said. */
@@ -350,7 +314,7 @@ final class Scope {
             return sequence.items();
         }
         if (!(found.get() instanceof Scalar scalar && scalar.isNone() && key.need() == Need.OPTIONAL)) {
-            wrongShape(name, found.get(), "a list, [ ]");
+            problems.wrongShape(name, found.get(), "a list, [ ]");
         }
         return List.of();
     }
@@ -391,19 +355,6 @@ final class Scope {
     }
 
     private void close(String why, Set<String> allowed) {
-        List<String> known = catalogue.namesUnder(prefix);
-        for (Node.Entry entry : node.entries()) {
-            if (taken.contains(entry.key()) || allowed.contains(entry.key())) {
-                continue;
-            }
-            if (known.contains(entry.key())) {
-                findings.problem(
-                        entry.place(),
-                        pathOf(entry.key()),
-                        "has no place " + (why.isEmpty() ? "here" : why) + ". Take it out.");
-            } else {
-                findings.unknown(entry.place(), pathOf(entry.key()), entry.key(), "unknown key", known);
-            }
-        }
+        problems.leftOver(taken, allowed, why);
     }
 }

@@ -438,6 +438,9 @@ class BadInputTest {
         assertThat(loaded.profiles()).extracting(LoadedDesign.ProfileUse::id).containsExactly("mine", "zener-20v");
         assertThat(loaded.profiles().get(1).hides()).isEqualTo("program zener-20v");
         assertThat(loaded.profiles().get(1).from()).isEqualTo("user folder");
+        assertThat(loaded.notes())
+                .contains(
+                        "The profile zener-20v comes from: user folder. It hides a different one: program zener-20v.");
         assertThatThrownBy(() -> DesignFiles.load(new Source("w", base()), List.of("clip.zener=a"), library))
                 .hasMessageContaining("in a circle: a -> b -> a");
         assertThatThrownBy(() -> DesignFiles.load(new Source("w", base()), List.of("clip.zener=wrong"), library))
