@@ -7,6 +7,7 @@ import clipramp.firing.Firing;
 import clipramp.firing.HalfCycle;
 import clipramp.firing.Pulse;
 import clipramp.firing.Solution;
+import clipramp.firing.Study;
 import clipramp.firing.TransformerDuty;
 import clipramp.gate.TriggerNeed;
 import clipramp.gate.WeakestPulse;
@@ -30,10 +31,9 @@ final class Bench {
     private final Design design;
     private final List<JudgedCondition> conditions;
     private final Map<Setting, Solution> solutions = new HashMap<>();
+    private final Map<Setting, Study> studies = new HashMap<>();
     private final Map<Setting, Solution> heldSolutions = new HashMap<>();
     private final Map<Setting, LoadResult> loads = new HashMap<>();
-    private final Map<Setting, Dissipation> dissipations = new HashMap<>();
-    private final Map<Setting, TransformerDuty> duties = new HashMap<>();
     private final Map<Double, Design> heldDesigns = new HashMap<>();
     private final double leastOhms;
     private final double mostOhms;
@@ -77,17 +77,6 @@ final class Bench {
                 .toList();
     }
 
-    /** The judged conditions at their highest line: heat grows with the line, so the others cannot be worse. */
-    List<JudgedCondition> highest() {
-        double highest = conditions.stream()
-                .mapToDouble(c -> c.condition().lineVolts())
-                .max()
-                .orElseThrow();
-        return conditions.stream()
-                .filter(c -> c.condition().lineVolts() == highest)
-                .toList();
-    }
-
     /** Smallest R_E of the knob's travel, ohm: the high-power end. */
     double leastOhms() {
         return leastOhms;
@@ -98,9 +87,18 @@ final class Bench {
         return mostOhms;
     }
 
+    /** The ends of the knob are asked for everything, so they are studied at once. */
     Solution solution(Condition condition, double rampOhms) {
+        if (rampOhms == leastOhms || rampOhms == mostOhms) {
+            return study(condition, rampOhms).solution();
+        }
         return solutions.computeIfAbsent(
                 new Setting(condition, rampOhms), s -> Firing.solve(design, s.condition(), s.rampOhms()));
+    }
+
+    private Study study(Condition condition, double rampOhms) {
+        return studies.computeIfAbsent(
+                new Setting(condition, rampOhms), s -> Firing.study(design, s.condition(), s.rampOhms()));
     }
 
     LoadResult load(Condition condition, double rampOhms) {
@@ -110,15 +108,12 @@ final class Bench {
     }
 
     Dissipation dissipation(Condition condition, double rampOhms) {
-        return dissipations.computeIfAbsent(
-                new Setting(condition, rampOhms), s -> Firing.dissipation(design, s.condition(), s.rampOhms()));
+        return study(condition, rampOhms).dissipation();
     }
 
     /** What the pulse transformer bears; only for a design that has one. */
     TransformerDuty transformerDuty(Condition condition, double rampOhms) {
-        return duties.computeIfAbsent(
-                new Setting(condition, rampOhms),
-                s -> Firing.transformerDuty(design, s.condition(), s.rampOhms()).orElseThrow());
+        return study(condition, rampOhms).transformerDuty().orElseThrow();
     }
 
     /** The weakest trigger device driving a gate held at V_GT of the condition's temperature. */

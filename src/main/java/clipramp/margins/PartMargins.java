@@ -26,21 +26,21 @@ final class PartMargins {
         margins.add(power(MarginKind.DROPPER_POWER, dropper, "clip.dropper", Dissipation::dropperWatts));
         margins.add(Ceiling.over(
                 MarginKind.DROPPER_VOLTAGE,
-                bench.highest(),
+                bench.conditions(),
                 dropper.ratedVolts(),
                 "clip.dropper states no voltage rating: write it after the value, such as 10 kohm 12 W 500 V",
                 at -> bench.hardest(at.condition(), Dissipation::dropperPeakVolts),
                 Say::volts));
         margins.add(Ceiling.over(
                 MarginKind.ZENER_POWER,
-                bench.highest(),
+                bench.conditions(),
                 design.clip().zener().ratedWatts(),
                 "the profile states no clip.zener.power",
                 at -> bench.hardest(at.condition(), Dissipation::zenerWatts),
                 Say::watts));
         margins.add(Ceiling.over(
                 MarginKind.CAPACITOR_VOLTAGE,
-                bench.highest(),
+                bench.conditions(),
                 design.ramp().capacitor().ratedVolts(),
                 "ramp.capacitor states no voltage rating: write it after the value, such as 100 nF 63 V",
                 at -> bench.hardest(at.condition(), Dissipation::capacitorVolts),
@@ -72,7 +72,7 @@ final class PartMargins {
         }
         List<Finding> findings = new ArrayList<>();
         double allowed = design.resistorDerating() * rated.getAsDouble();
-        for (JudgedCondition at : bench.highest()) {
+        for (JudgedCondition at : bench.conditions()) {
             double there = offered.applyAsDouble(at);
             findings.add(new Finding(
                     at.words(),

@@ -30,7 +30,7 @@ final class ThyristorMargins {
         List<Margin> margins = new ArrayList<>();
         margins.add(Ceiling.over(
                 MarginKind.BLOCKING_VOLTAGE,
-                bench.highest(),
+                bench.conditions(),
                 device.limits().volts(),
                 unstated("limits.voltage"),
                 at -> design.line().crestVolts(at.condition().lineVolts()),

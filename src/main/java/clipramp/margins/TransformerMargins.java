@@ -22,14 +22,14 @@ final class TransformerMargins {
         List<Margin> margins = new ArrayList<>();
         margins.add(Ceiling.over(
                 MarginKind.TRANSFORMER_VOLT_SECONDS,
-                bench.highest(),
+                bench.conditions(),
                 transformer.voltSeconds(),
                 "the design states no gate.transformer.volt-seconds",
                 at -> hardest(at, TransformerDuty::voltSeconds),
                 Say::voltSeconds));
         margins.add(Ceiling.over(
                 MarginKind.GATE_REVERSE_VOLTAGE,
-                bench.highest(),
+                bench.conditions(),
                 bench.design().thyristor().device().gate().limits().reverseVolts(),
                 "the profile states no thyristor.device.gate.limits.reverse",
                 at -> hardest(at, TransformerDuty::reverseGateVolts),
@@ -51,7 +51,7 @@ final class TransformerMargins {
         }
         double rating = transformer.voltSeconds().getAsDouble();
         List<Finding> findings = new ArrayList<>();
-        for (JudgedCondition at : bench.highest()) {
+        for (JudgedCondition at : bench.conditions()) {
             double peak = hardest(at, TransformerDuty::magnetisingPeakAmps);
             double left = Math.max(0, hardest(at, TransformerDuty::leftAmps));
             double flux = transformer.magnetisingHenries() * peak;

@@ -79,7 +79,7 @@ final class TriggerMargins {
         return margins;
     }
 
-    /** Heat and current grow with the line; both ends of the knob are looked at. */
+    /** Both ends of the knob are looked at. */
     private Margin rated(
             MarginKind kind,
             OptionalDouble limit,
@@ -87,7 +87,7 @@ final class TriggerMargins {
             ToDoubleFunction<Dissipation> figure,
             DoubleFunction<String> say) {
         return Ceiling.over(
-                kind, bench.highest(), limit, unstated(key), at -> bench.hardest(at.condition(), figure), say);
+                kind, bench.conditions(), limit, unstated(key), at -> bench.hardest(at.condition(), figure), say);
     }
 
     private static String unstated(String key) {
@@ -102,7 +102,7 @@ final class TriggerMargins {
         double limit = limits.capacitorFarads().getAsDouble();
         double farads = design.ramp().capacitor().value();
         List<Finding> findings = new ArrayList<>();
-        for (JudgedCondition at : bench.highest()) {
+        for (JudgedCondition at : bench.conditions()) {
             double volts = bench.hardest(at.condition(), Dissipation::capacitorVolts);
             double rated = limits.capacitorVolts().orElse(Double.POSITIVE_INFINITY);
             // Above its voltage the sheet allows no capacitor at all.
@@ -126,7 +126,7 @@ final class TriggerMargins {
         }
         double farads = design.ramp().capacitor().value();
         List<Finding> findings = new ArrayList<>();
-        for (JudgedCondition at : bench.highest()) {
+        for (JudgedCondition at : bench.conditions()) {
             double volts = bench.hardest(at.condition(), Dissipation::capacitorVolts);
             double energy = farads * volts * volts / 2;
             findings.add(new Finding(
@@ -149,7 +149,7 @@ final class TriggerMargins {
             return Ceiling.unjudged(kind, unstated("derating"));
         }
         List<Finding> findings = new ArrayList<>();
-        for (JudgedCondition at : bench.highest()) {
+        for (JudgedCondition at : bench.conditions()) {
             double warmth = Math.max(0, at.condition().celsius() - SHEET_CELSIUS);
             double allowed = watts.getAsDouble() - derating.getAsDouble() * warmth;
             double there = bench.hardest(at.condition(), Dissipation::deviceWatts);
