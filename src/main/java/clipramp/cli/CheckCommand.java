@@ -3,7 +3,9 @@ package clipramp.cli;
 import clipramp.files.LoadedDesign;
 import clipramp.margins.Check;
 import clipramp.margins.Verdict;
+import clipramp.record.PageSize;
 import java.util.concurrent.Callable;
+import org.jspecify.annotations.Nullable;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
@@ -32,6 +34,10 @@ final class CheckCommand implements Callable<Integer> {
     @Option(names = "--strict", order = 11, description = "tight and not judged count as failing")
     boolean strict;
 
+    @Option(names = "--record", paramLabel = "OUT.pdf", order = 12, description = "also write the design record as PDF")
+    @Nullable
+    String record;
+
     CheckCommand(Session session) {
         this.session = session;
     }
@@ -44,6 +50,13 @@ final class CheckCommand implements Callable<Integer> {
             session.out().exactly(CheckJson.of(loaded, check, session.ascii()));
         } else {
             new CheckText(session.out(), loaded, check).print();
+        }
+        if (record != null) {
+            Outputs.record(record, loaded, check, design.library(session), PageSize.A4);
+        }
+        if (record != null && !json) {
+            session.out().line("");
+            session.out().line("Record: " + record);
         }
         return code(check);
     }

@@ -35,7 +35,6 @@ final class CheckText {
         verdict();
         out.line("");
         margins();
-        remedies();
         out.line("");
         out.line("Knob");
         out.lines(KnobText.lines(check.knob(), out.spelling()));
@@ -102,7 +101,14 @@ final class CheckText {
         };
     }
 
+    /** Those that do not hold, what to do about them, then those that hold; in the same columns. */
     private void margins() {
+        List<Margin> open = check.margins().stream()
+                .filter(m -> m.verdict() != Verdict.HOLDS)
+                .toList();
+        List<Margin> holding = check.margins().stream()
+                .filter(m -> m.verdict() == Verdict.HOLDS)
+                .toList();
         TextTable table = new TextTable(out.spelling(), "  ")
                 .column(Align.LEFT, "Margins, worst first")
                 .column(Align.RIGHT, "asked")
@@ -110,37 +116,43 @@ final class CheckText {
                 .column(Align.DECIMAL, "ratio")
                 .column(Align.LEFT, "verdict")
                 .column(Align.LEFT, "worst at");
-        for (Margin margin : check.margins()) {
-            String sign = margin.sense() == Margin.Sense.AT_LEAST ? "≥ " : "≤ ";
-            table.row(
-                    margin.name(),
-                    Double.isFinite(margin.demand()) ? sign + Shown.amount(margin.demand(), margin.unit()) : Shown.NONE,
-                    Shown.amount(margin.offered(), margin.unit()),
-                    ratio(margin),
-                    margin.verdict().word(),
-                    margin.condition().replace("nominal line", "nominal"));
+        open.forEach(margin -> table.row(row(margin)));
+        holding.forEach(margin -> table.row(row(margin)));
+        List<String> lines = table.lines();
+        int holdsFrom = 1 + open.size();
+        out.lines(lines.subList(0, holdsFrom));
+        if (!open.isEmpty()) {
+            remedies(open);
+            out.line("");
+            out.line("Margins that hold, closest first");
         }
-        out.lines(table.lines());
+        out.lines(lines.subList(holdsFrom, lines.size()));
     }
 
-    private static String ratio(Margin margin) {
+    private static List<String> row(Margin margin) {
+        String sign = margin.sense() == Margin.Sense.AT_LEAST ? "≥ " : "≤ ";
         double ratio = margin.ratio().orElse(Double.NaN);
-        return ratio >= 100 ? ">99" : Shown.fixed(ratio, 2);
+        return List.of(
+                margin.name(),
+                Double.isFinite(margin.demand()) ? sign + Shown.amount(margin.demand(), margin.unit()) : Shown.NONE,
+                Shown.amount(margin.offered(), margin.unit()),
+                ratio >= 100 ? ">99" : Shown.fixed(ratio, 2),
+                margin.verdict().word(),
+                margin.condition().replace("nominal line", "nominal"));
     }
 
-    /** What to do about every margin that does not hold. */
-    private void remedies() {
-        List<Margin> open = check.margins().stream()
-                .filter(m -> m.verdict() != Verdict.HOLDS)
-                .toList();
-        if (open.isEmpty()) {
-            return;
-        }
+    /** The numbers behind every margin that does not hold, and what to do about it. */
+    private void remedies(List<Margin> open) {
         out.line("");
         out.line("What to do");
         for (Margin margin : open) {
-            String text = margin.name() + " (" + margin.verdict().word() + "): " + margin.remedy();
-            out.lines(Paragraph.wrap(text, "  ", "    "));
+            out.line("  " + margin.name() + " " + said(margin.verdict(), 1));
+            if (margin.verdict() == Verdict.NOT_JUDGED) {
+                out.lines(Paragraph.wrap(margin.formula().replaceFirst("^not judged: ", ""), "    "));
+            } else {
+                out.lines(Paragraph.wrap(margin.formula(), "    "));
+                out.lines(Paragraph.wrap(margin.remedy(), "    "));
+            }
         }
         out.line("  More on any of them: clipramp explain MARGIN, such as clipramp explain "
                 + open.get(0).id());

@@ -22,6 +22,7 @@ final class Commands {
             new Command("check", "FILE", "solve and judge: margins, knob table, pulse, supply", CheckCommand::new),
             new Command("map", "FILE", "knob position to firing angle, load volts and watts", MapCommand::new),
             new Command("trace", "FILE", "the half cycle's waveforms at one knob position", TraceCommand::new),
+            new Command("record", "FILE --out=OUT.pdf", "the design record as PDF", RecordCommand::new),
             new Command("new", "--out=FILE", "a commented design to start from", NewCommand::new),
             new Command("parts", "[ID]", "the profiles; one of them with its sources", PartsCommand::new),
             new Command("explain", "KEY", "what a design key or a margin means", ExplainCommand::new),

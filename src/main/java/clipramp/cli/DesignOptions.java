@@ -4,6 +4,7 @@ import clipramp.circuit.Condition;
 import clipramp.circuit.Design;
 import clipramp.files.Conditions;
 import clipramp.files.LoadedDesign;
+import clipramp.files.ProfileLibrary;
 import clipramp.margins.Check;
 import clipramp.margins.Judge;
 import java.util.ArrayList;
@@ -50,10 +51,15 @@ final class DesignOptions {
     String profiles;
 
     LoadedDesign load(Session session) {
-        return Inputs.load(session, file, overrides, shippedOnly());
+        return Inputs.load(session, file, overrides, library(session));
     }
 
-    boolean shippedOnly() {
+    /** Where this design's profiles are looked for. */
+    ProfileLibrary library(Session session) {
+        return Inputs.libraryOf(session, file, shippedOnly());
+    }
+
+    private boolean shippedOnly() {
         return profiles != null
                 && Problems.word("--profiles", profiles, List.of("shipped")).equals("shipped");
     }

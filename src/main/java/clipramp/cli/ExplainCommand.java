@@ -55,9 +55,7 @@ final class ExplainCommand implements Callable<Integer> {
             }
             return ExitCode.ANSWERED;
         }
-        Optional<MarginKind> margin = Arrays.stream(MarginKind.values())
-                .filter(kind -> kind.id().equals(words) || kind.title().equals(words))
-                .findFirst();
+        Optional<MarginKind> margin = MarginKind.byId(words);
         List<Key> keys = KeyCatalogue.standard().meant(words);
         if (margin.isEmpty() && keys.isEmpty()) {
             throw unknown();
@@ -84,7 +82,7 @@ final class ExplainCommand implements Callable<Integer> {
     private void print(Optional<MarginKind> margin, List<Key> keys) {
         Output out = session.out();
         List<List<String>> parts = new ArrayList<>();
-        margin.ifPresent(kind -> parts.add(MarginText.explained(kind)));
+        margin.ifPresent(kind -> parts.add(MarginText.explained(kind, out.spelling())));
         keys.forEach(key -> parts.add(explained(key, out.spelling())));
         for (int i = 0; i < parts.size(); i++) {
             if (i > 0) {

@@ -20,13 +20,17 @@ final class Inputs {
     /**
      * @param file as typed; - for standard input
      * @param overrides as typed, KEY=VALUE
-     * @param shippedOnly whether only the program's own profiles are looked at
+     * @param library where profiles are looked for
      */
-    static LoadedDesign load(Session session, String file, List<String> overrides, boolean shippedOnly) {
-        boolean standardInput = file.equals(STANDARD_INPUT);
-        Source source = standardInput ? fromStandardInput(session) : fromFile(path(file));
-        Optional<Path> place = standardInput ? Optional.empty() : Optional.of(path(file));
-        return DesignFiles.load(source, overrides, library(session, place, shippedOnly));
+    static LoadedDesign load(Session session, String file, List<String> overrides, ProfileLibrary library) {
+        Source source = file.equals(STANDARD_INPUT) ? fromStandardInput(session) : fromFile(path(file));
+        return DesignFiles.load(source, overrides, library);
+    }
+
+    /** Where the profiles of a design are looked for: beside it too, unless it comes from standard input. */
+    static ProfileLibrary libraryOf(Session session, String file, boolean shippedOnly) {
+        Optional<Path> place = file.equals(STANDARD_INPUT) ? Optional.empty() : Optional.of(path(file));
+        return library(session, place, shippedOnly);
     }
 
     /** A file name as this system has them. */

@@ -59,7 +59,7 @@ final class NewCommand implements Callable<Integer> {
             session.out().exactly(text);
             return ExitCode.ANSWERED;
         }
-        Outputs.write(out, text.getBytes(StandardCharsets.UTF_8), replace);
+        Outputs.write(out, file -> file.write(text.getBytes(StandardCharsets.UTF_8)), replace);
         if (json) {
             session.out()
                     .exactly(Answer.without("new")

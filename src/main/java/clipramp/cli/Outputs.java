@@ -7,13 +7,20 @@ import clipramp.figures.KnobFigure;
 import clipramp.figures.Lanes;
 import clipramp.figures.LanesFigure;
 import clipramp.figures.Surfaces;
+import clipramp.files.LoadedDesign;
+import clipramp.files.ProfileLibrary;
 import clipramp.files.WholeFile;
 import clipramp.firing.Firing;
+import clipramp.margins.Check;
 import clipramp.power.LoadWave;
 import clipramp.power.OperatingPoint;
+import clipramp.record.DesignRecord;
+import clipramp.record.PageSize;
+import clipramp.record.RecordContent;
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.FileAlreadyExistsException;
+import java.util.Arrays;
 import java.util.List;
 import java.util.Locale;
 
@@ -26,6 +33,16 @@ final class Outputs {
 
     private Outputs() {}
 
+    /** The paper of a word; refused where there is none. */
+    static PageSize paper(String word) {
+        List<String> known = Arrays.stream(PageSize.values()).map(Outputs::word).toList();
+        return PageSize.values()[known.indexOf(Problems.word("--paper", word, known))];
+    }
+
+    private static String word(PageSize size) {
+        return size.word().toLowerCase(Locale.ROOT);
+    }
+
     static void requirePlotName(String name) {
         if (!isSvg(name) && !name.toLowerCase(Locale.ROOT).endsWith(".png")) {
             throw Problems.refused("--plot", "read \"" + name + "\"; expected a file name that ends in .svg or .png.");
@@ -34,6 +51,17 @@ final class Outputs {
 
     private static boolean isSvg(String name) {
         return name.toLowerCase(Locale.ROOT).endsWith(".svg");
+    }
+
+    /**
+     * Writes the design record; an older one is replaced.
+     *
+     * @param library where the design's profiles were found, for their sources
+     */
+    static void record(String name, LoadedDesign loaded, Check check, ProfileLibrary library, PageSize size) {
+        withoutDisplay();
+        RecordContent content = RecordContent.of(loaded, check, library, Program.version());
+        write(name, out -> DesignRecord.write(content, out, size), true);
     }
 
     /** Draws the power against the knob. */
@@ -56,12 +84,10 @@ final class Outputs {
     private static void draw(String name, Figure figure) {
         withoutDisplay();
         double height = PLOT_WIDTH / figure.proportion();
-        write(
-                name,
-                isSvg(name)
-                        ? Surfaces.toSvg(figure, PLOT_WIDTH, height).getBytes(StandardCharsets.UTF_8)
-                        : Surfaces.toPng(figure, PLOT_WIDTH, height, PNG_SCALE),
-                true);
+        byte[] picture = isSvg(name)
+                ? Surfaces.toSvg(figure, PLOT_WIDTH, height).getBytes(StandardCharsets.UTF_8)
+                : Surfaces.toPng(figure, PLOT_WIDTH, height, PNG_SCALE);
+        write(name, out -> out.write(picture), true);
     }
 
     /** Drawing into a file needs no screen, and must not fail where one is named but not there. */
@@ -69,9 +95,10 @@ final class Outputs {
         System.setProperty("java.awt.headless", "true");
     }
 
-    static void write(String name, byte[] content, boolean replace) {
+    /** Writes a file whole or not at all. */
+    static void write(String name, WholeFile.Content content, boolean replace) {
         try {
-            WholeFile.write(Inputs.path(name), out -> out.write(content), replace);
+            WholeFile.write(Inputs.path(name), content, replace);
         } catch (FileAlreadyExistsException there) {
             throw FileFailure.exists(name);
         } catch (IOException failure) {

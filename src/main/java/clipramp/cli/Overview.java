@@ -19,10 +19,10 @@ final class Overview {
                 .row("clipramp new --out=my.yaml", "a commented design to start from")
                 .row("clipramp check my.yaml", "does it fire, what does the load get, what fails")
                 .row(
-                        session.launcher().isPresent() ? "clipramp desk my.yaml" : "clipramp map my.yaml",
                         session.launcher().isPresent()
-                                ? "the same with a knob to turn"
-                                : "what the knob does to the load")
+                                ? "clipramp desk my.yaml"
+                                : "clipramp record my.yaml --out=my.pdf",
+                        session.launcher().isPresent() ? "the same with a knob to turn" : "the design record as PDF")
                 .lines());
         out.line("");
         out.line("All commands: clipramp --help");

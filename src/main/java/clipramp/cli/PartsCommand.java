@@ -1,11 +1,14 @@
 package clipramp.cli;
 
 import clipramp.cli.TextTable.Align;
+import clipramp.files.Profile;
 import clipramp.files.ProfileLibrary;
 import clipramp.files.ProfileLibrary.Found;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Optional;
 import java.util.concurrent.Callable;
+import java.util.stream.Collectors;
 import org.jspecify.annotations.Nullable;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
@@ -78,9 +81,21 @@ final class PartsCommand implements Callable<Integer> {
     }
 
     private void show(Found found) {
-        session.out().strongLine(found.id(), "  " + found.kind() + ", from " + found.from());
-        session.out().line("");
-        found.source().text().stripTrailing().lines().forEach(session.out()::line);
+        Output out = session.out();
+        Profile profile = Profile.read(found);
+        String like = profile.like().isEmpty() ? "" : ", like " + profile.like();
+        out.strongLine(profile.id(), "  " + profile.kind() + ", from " + profile.from() + like);
+        TextTable table =
+                new TextTable(out.spelling(), "  ").column(Align.LEFT, "").column(Align.LEFT, "");
+        profile.figures().forEach(figure -> table.row(figure.key(), figure.text()));
+        out.lines(table.lines());
+        out.line("Sources");
+        profile.figures().stream()
+                .collect(Collectors.groupingBy(
+                        Profile.Figure::source,
+                        LinkedHashMap::new,
+                        Collectors.mapping(Profile.Figure::key, Collectors.joining(", "))))
+                .forEach((source, keys) -> out.lines(Paragraph.wrap(keys + ": " + source, "  ", "    ")));
     }
 
     private String json(List<Found> found) {
@@ -90,8 +105,19 @@ final class PartsCommand implements Callable<Integer> {
                         body -> body.putObjects("parts", found, (part, f) -> {
                             part.put("id", f.id()).put("kind", f.kind()).put("from", f.from());
                             if (id != null) {
-                                part.put("text", f.source().text());
+                                writeFigures(part, Profile.read(f));
                             }
                         }));
+    }
+
+    private static void writeFigures(Json part, Profile profile) {
+        part.put("digest", profile.digest())
+                .put("like", profile.like())
+                .putObjects(
+                        "figures",
+                        profile.figures(),
+                        (json, figure) -> json.put("key", figure.key())
+                                .put("value", figure.text())
+                                .put("source", figure.source()));
     }
 }

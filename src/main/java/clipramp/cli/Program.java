@@ -8,9 +8,14 @@ final class Program {
 
     private Program() {}
 
-    /** Such as "clipramp 0.1.0"; the version stands in the jar's manifest. */
+    /** Such as "clipramp 0.1.0". */
     static String nameAndVersion() {
+        return NAME + " " + version();
+    }
+
+    /** Such as 0.1.0; it stands in the jar's manifest. */
+    static String version() {
         @Nullable String version = Program.class.getPackage().getImplementationVersion();
-        return NAME + " " + (version == null ? "unpackaged" : version);
+        return version == null ? "unpackaged" : version;
     }
 }

@@ -41,12 +41,12 @@ class CliTest {
     void theOverviewNamesEveryCommandThatThereIs() {
         CliRun run = CliRun.of("--help");
 
-        assertThat(run.out()).contains("check", "map", "trace", "new", "parts", "explain");
+        assertThat(run.out()).contains("check", "map", "trace", "record", "new", "parts", "explain");
         assertThat(run.out()).as("no window was handed in").doesNotContain("desk");
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"check", "map", "trace", "new", "parts", "explain"})
+    @ValueSource(strings = {"check", "map", "trace", "record", "new", "parts", "explain"})
     void everyCommandHelpsAndNamesItsVersion(String command) {
         CliRun help = CliRun.of(command, "--help");
         assertThat(help.code()).isZero();
@@ -92,7 +92,7 @@ class CliTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"check", "map", "trace", "new", "parts", "explain"})
+    @ValueSource(strings = {"check", "map", "trace", "record", "new", "parts", "explain"})
     void everyOptionHasALongNameOnly(String command) {
         assertThat(CliRun.of(command, "--help").out().lines().filter(line -> line.matches(" +-[a-zA-Z]\\b.*")))
                 .isEmpty();
@@ -181,6 +181,8 @@ class CliTest {
                 "trace " + DESIGN + " --resistance=0",
                 "trace " + DESIGN + " --resistance=50V",
                 "trace " + DESIGN + " --samples=1",
+                "record " + DESIGN,
+                "record " + DESIGN + " --out=x.pdf --paper=a3",
                 "new",
                 "new --out=x.yaml --from=nothing",
                 "parts nosuchpart",

@@ -1,0 +1,63 @@
+package clipramp.cli;
+
+import clipramp.files.LoadedDesign;
+import clipramp.margins.Check;
+import clipramp.record.PageSize;
+import java.util.concurrent.Callable;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
+import picocli.CommandLine.Option;
+
+/** Writes the design record. */
+@Command(
+        name = "record",
+        sortOptions = false,
+        sortSynopsis = false,
+        description = "Writes the design record as PDF. A failing design gets its record too, marked.")
+final class RecordCommand implements Callable<Integer> {
+    private final Session session;
+
+    @Mixin
+    DesignOptions design = new DesignOptions();
+
+    @Mixin
+    StandardOptions standard = new StandardOptions();
+
+    @Option(
+            names = "--out",
+            paramLabel = "OUT.pdf",
+            required = true,
+            order = 10,
+            description = "the PDF to write; an older one is replaced")
+    String out = "";
+
+    @Option(names = "--paper", paramLabel = "SIZE", order = 11, description = "a4 or letter; a4 unless said")
+    String paper = "a4";
+
+    @Option(names = "--json", order = 12, description = "the answer for machines")
+    boolean json;
+
+    RecordCommand(Session session) {
+        this.session = session;
+    }
+
+    @Override
+    public Integer call() {
+        PageSize size = Outputs.paper(paper);
+        LoadedDesign loaded = design.load(session);
+        Check check = design.check(loaded);
+        Outputs.record(out, loaded, check, design.library(session), size);
+        if (json) {
+            session.out()
+                    .exactly(Answer.about("record", loaded, check.verdict(), check.notes())
+                            .json(session.ascii(), body -> {
+                                Answer.titleAndCondition(body, loaded, check.condition());
+                                body.put("record", out).put("paper", paper);
+                            }));
+        } else {
+            session.out().line("Record: " + out);
+            CheckText.marked(session.out(), check);
+        }
+        return ExitCode.ANSWERED;
+    }
+}
