@@ -116,18 +116,20 @@ public record GateFigure(Design design, double[] gateAmps, double[] gateVolts) i
         List<List<String>> rows = new ArrayList<>();
         int peak = peak();
         rows.add(List.of(
-                "pulse, peak current", peak < 0 ? "–" : amps(gateAmps[peak]), peak < 0 ? "–" : volts(gateVolts[peak])));
+                "pulse, peak current",
+                peak < 0 ? Numerals.NOTHING : amps(gateAmps[peak]),
+                peak < 0 ? Numerals.NOTHING : volts(gateVolts[peak])));
         rows.add(List.of(
                 "I_GT and V_GT, coldest", amps(demand().ampsAt(coldest())), volts(demand().voltsAt(coldest()))));
         rows.add(List.of(
                 "overdrive × I_GT",
                 amps(design.gate().overdrive() * demand().ampsAt(coldest())),
                 volts(demand().voltsAt(coldest()))));
-        device().gate().nonTrigger().ifPresent(v -> rows.add(List.of("V_GD", "–", volts(v.volts()))));
-        limits.amps().ifPresent(a -> rows.add(List.of("I_GM", amps(a), "–")));
-        limits.volts().ifPresent(v -> rows.add(List.of("V_GM", "–", volts(v))));
-        limits.peakWatts().ifPresent(w -> rows.add(List.of("P_GM", watts(w), "–")));
-        limits.meanWatts().ifPresent(w -> rows.add(List.of("P_G(AV)", watts(w), "–")));
+        device().gate().nonTrigger().ifPresent(v -> rows.add(List.of("V_GD", Numerals.NOTHING, volts(v.volts()))));
+        limits.amps().ifPresent(a -> rows.add(List.of("I_GM", amps(a), Numerals.NOTHING)));
+        limits.volts().ifPresent(v -> rows.add(List.of("V_GM", Numerals.NOTHING, volts(v))));
+        limits.peakWatts().ifPresent(w -> rows.add(List.of("P_GM", watts(w), Numerals.NOTHING)));
+        limits.meanWatts().ifPresent(w -> rows.add(List.of("P_G(AV)", watts(w), Numerals.NOTHING)));
         return new NumberTable(List.of("what", "current or power", "voltage"), rows);
     }
 

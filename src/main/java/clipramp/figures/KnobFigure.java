@@ -94,13 +94,13 @@ public record KnobFigure(List<OperatingPoint> points, Wanted wanted, OptionalDou
         OptionalDouble firing = point.solution().shown().firingRad();
         return List.of(
                 point.position().isPresent()
-                        ? Numerals.fixed(100 * point.position().getAsDouble(), 0)
-                        : "–",
+                        ? Numerals.cell(100 * point.position().getAsDouble(), 0)
+                        : Numerals.NOTHING,
                 QuantityText.number(point.rampOhms() / 1000, 4),
-                firing.isPresent() ? Numerals.fixed(Math.toDegrees(firing.getAsDouble()), 1) : "–",
-                Numerals.fixed(point.load().rmsVolts(), 1),
+                firing.isPresent() ? Numerals.cell(Math.toDegrees(firing.getAsDouble()), 1) : Numerals.NOTHING,
+                Numerals.cell(point.load().rmsVolts(), 1),
                 Numerals.significant(point.load().watts(), 4),
-                Numerals.fixed(100 * point.load().fraction(), 1),
+                Numerals.cell(100 * point.load().fraction(), 1),
                 point.solution().state().word());
     }
 

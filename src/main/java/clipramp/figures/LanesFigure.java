@@ -24,6 +24,8 @@ public record LanesFigure(Lanes lanes, double fromRad, double toRad, OptionalDou
     public record Band(double fromRad, double toRad) {}
 
     private static final double TABLE_STEP_DEGREES = 15;
+    /** Far shorter than anything in the circuit: to read either side of a jump. */
+    private static final double INSTANT_RAD = 1e-7;
 
     public LanesFigure {
         if (!(fromRad < toRad)) {
@@ -70,26 +72,41 @@ public record LanesFigure(Lanes lanes, double fromRad, double toRad, OptionalDou
 
     @Override
     public NumberTable numbers() {
-        List<Double> angles = new ArrayList<>(Ticks.between(0, Math.toDegrees(lanes.spanRad()), TABLE_STEP_DEGREES));
-        lanes.firingRad().ifPresent(rad -> angles.add(Math.toDegrees(rad)));
-        List<List<String>> rows = angles.stream()
-                .distinct()
-                .sorted()
-                .map(degrees -> row(Math.toRadians(degrees)))
-                .toList();
+        List<List<String>> rows = new ArrayList<>();
+        double firing = lanes.firingRad().orElse(Double.POSITIVE_INFINITY);
+        boolean fired = false;
+        for (double degrees : Ticks.between(0, Math.toDegrees(lanes.spanRad()), TABLE_STEP_DEGREES)) {
+            double rad = Math.toRadians(degrees);
+            if (!fired && rad >= firing) {
+                rows.add(row(firing - INSTANT_RAD, "before firing"));
+                rows.add(row(firing + INSTANT_RAD, "after firing"));
+                fired = true;
+            }
+            rows.add(row(rad, ""));
+        }
         return new NumberTable(
-                List.of("angle °", "line V", "clipped supply V", "ramp V", "peak point V", "gate mA", "load V"), rows);
+                List.of(
+                        "angle °",
+                        "line V",
+                        "clipped supply V",
+                        "ramp V",
+                        "peak point V",
+                        "gate mA",
+                        "load V",
+                        "instant"),
+                rows);
     }
 
-    private List<String> row(double angleRad) {
+    private List<String> row(double angleRad, String instant) {
         return List.of(
-                Numerals.fixed(Math.toDegrees(angleRad), 1),
-                Numerals.fixed(lanes.valueAt(Lane.LINE, angleRad), 1),
-                Numerals.fixed(lanes.valueAt(Lane.SUPPLY, angleRad), 2),
-                Numerals.fixed(lanes.valueAt(Lane.RAMP, angleRad), 2),
-                Numerals.fixed(lanes.peakPointAt(angleRad), 2),
-                Numerals.fixed(lanes.valueAt(Lane.PULSE, angleRad) * 1000, 1),
-                Numerals.fixed(lanes.valueAt(Lane.LOAD, angleRad), 1));
+                Numerals.cell(Math.toDegrees(angleRad), 1),
+                Numerals.cell(lanes.valueAt(Lane.LINE, angleRad), 1),
+                Numerals.cell(lanes.valueAt(Lane.SUPPLY, angleRad), 2),
+                Numerals.cell(lanes.valueAt(Lane.RAMP, angleRad), 2),
+                Numerals.cell(lanes.peakPointAt(angleRad), 2),
+                Numerals.cell(lanes.valueAt(Lane.PULSE, angleRad) * 1000, 1),
+                Numerals.cell(lanes.valueAt(Lane.LOAD, angleRad), 1),
+                instant);
     }
 
     @Override

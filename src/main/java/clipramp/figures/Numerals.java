@@ -6,6 +6,9 @@ import java.math.RoundingMode;
 
 /** Numbers as they stand in figures: plain decimals with the digits that they deserve. */
 final class Numerals {
+    /** Stands in a table where there is no number. */
+    static final String NOTHING = "none";
+
     private Numerals() {}
 
     /** As short as it goes, never with an exponent: 0.5, 180, 12.25. */
@@ -30,6 +33,11 @@ final class Numerals {
         }
         BigDecimal rounded = BigDecimal.valueOf(value).setScale(decimals, RoundingMode.HALF_UP);
         return (rounded.signum() == 0 ? rounded.abs() : rounded).toPlainString().replace("-", "−");
+    }
+
+    /** The same for a table that another program may read: a plain hyphen, and a word where there is nothing. */
+    static String cell(double value, int decimals) {
+        return Double.isNaN(value) ? NOTHING : fixed(value, decimals).replace("−", "-");
     }
 
     private static String trimmed(BigDecimal value) {

@@ -35,7 +35,7 @@ final class CurvesSection {
         KnobFigure figure = new KnobFigure(check.knob(), design.wanted());
         paper.text(figure.sentence() + " Full power is what the same load would take with the thyristor always on.");
         paper.figure(figure, paper.width() / 2.3f);
-        table(figure.numbers(), true);
+        table(figure.numbers());
     }
 
     private void halfCycle() {
@@ -44,7 +44,7 @@ final class CurvesSection {
         paper.section(figure.title());
         paper.text((design.ramp().pot().isPresent() ? "At mid-knob. " : "") + figure.sentence());
         paper.figure(figure, paper.width() / 1.35f);
-        table(figure.numbers(), false);
+        table(figure.numbers());
     }
 
     private void gate() {
@@ -89,12 +89,12 @@ final class CurvesSection {
         paper.add(grid.table());
     }
 
-    /** A figure's numbers; the last column is text where the figure says so. */
-    private void table(NumberTable numbers, boolean lastIsText) {
+    /** A figure's numbers; the last column is text. */
+    private void table(NumberTable numbers) {
         int columns = numbers.heads().size();
         float[] widths = new float[columns];
         java.util.Arrays.fill(widths, 1);
-        int[] right = IntStream.range(0, lastIsText ? columns - 1 : columns).toArray();
+        int[] right = IntStream.range(0, columns - 1).toArray();
         Grid grid = new Grid(paper.faces(), widths, right);
         grid.heads(numbers.heads().toArray(String[]::new));
         numbers.rows().forEach(row -> grid.row(paper.faces().small(), row));

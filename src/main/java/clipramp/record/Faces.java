@@ -13,6 +13,7 @@ final class Faces implements FontMapper {
     static final float SMALL = 7.5f;
     static final float TEXT = 9;
     static final float HEAD = 13;
+    private static final int REPLACEMENT = 0xFFFD;
 
     private final BaseFont regular;
     private final BaseFont bold;
@@ -28,6 +29,16 @@ final class Faces implements FontMapper {
 
     private static BaseFont embedded(String name, boolean bold, String encoding) throws IOException {
         return BaseFont.createFont(name, encoding, BaseFont.EMBEDDED, false, Lettering.fontFile(bold), null);
+    }
+
+    /** A text with a mark in place of every sign that the face does not have. */
+    String printable(String text) {
+        StringBuilder printable = new StringBuilder();
+        text.codePoints().forEach(sign -> {
+            boolean shown = sign == '\n' || regular.charExists(sign);
+            printable.appendCodePoint(shown ? sign : REPLACEMENT);
+        });
+        return printable.toString();
     }
 
     BaseFont field() {

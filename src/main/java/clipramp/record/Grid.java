@@ -111,7 +111,7 @@ final class Grid {
     }
 
     private PdfPCell cell(String text, Font font, int column) {
-        PdfPCell cell = new PdfPCell(new Phrase(font.getSize() * LEADING, text, font));
+        PdfPCell cell = new PdfPCell(new Phrase(font.getSize() * LEADING, faces.printable(text), font));
         cell.setLeading(font.getSize() * LEADING, 0);
         cell.setBorder(Rectangle.BOTTOM);
         cell.setBorderWidthBottom(0.4f);

@@ -66,8 +66,8 @@ final class PageFrame extends PdfPageEventHelper {
     }
 
     /** A text cut to a width, with a mark that it was. */
-    private static String fitted(String text, Font font, float width) {
-        String shown = text;
+    private String fitted(String text, Font font, float width) {
+        String shown = faces.printable(text);
         while (font.getBaseFont().getWidthPoint(shown, font.getSize()) > width && shown.length() > 2) {
             shown = shown.substring(0, shown.length() - 2).stripTrailing() + "…";
         }

@@ -91,7 +91,7 @@ final class Paper {
     }
 
     void paragraph(String text, Font font, float before, float after) {
-        Paragraph paragraph = new Paragraph(font.getSize() * LEADING, text, font);
+        Paragraph paragraph = new Paragraph(font.getSize() * LEADING, faces.printable(text), font);
         paragraph.setSpacingBefore(before);
         paragraph.setSpacingAfter(after);
         document.add(paragraph);
@@ -102,7 +102,7 @@ final class Paper {
         for (String line : lines) {
             Paragraph paragraph = new Paragraph(font.getSize() * LEADING, "", font);
             paragraph.add(new Chunk("–  ", font));
-            paragraph.add(new Chunk(line, font));
+            paragraph.add(new Chunk(faces.printable(line), font));
             paragraph.setIndentationLeft(12);
             paragraph.setFirstLineIndent(-12);
             paragraph.setSpacingAfter(2);

@@ -36,6 +36,9 @@ final class PartsSection {
                 + design.clip().rectifier().word() + ", gate drive "
                 + design.gate().coupling().word() + ".");
         paper.figure(figure, paper.width() / (float) figure.proportion());
+        if (!design.notes().isBlank()) {
+            paper.small("Notes: " + design.notes().strip());
+        }
         paper.heading("Test points");
         Grid grid = new Grid(paper.faces(), new float[] {1, 9});
         for (TestPoint point : TestPoint.values()) {

@@ -10,6 +10,7 @@ import clipramp.power.OperatingPoint;
 import clipramp.units.Unit;
 import com.lowagie.text.Element;
 import com.lowagie.text.Font;
+import com.lowagie.text.Paragraph;
 import com.lowagie.text.Phrase;
 import com.lowagie.text.Rectangle;
 import com.lowagie.text.pdf.PdfPCell;
@@ -22,7 +23,12 @@ import java.util.stream.Collectors;
 /** Page one: what a reviewer must know before turning it. */
 final class ReviewPage {
     private static final int WORST = 5;
+    private static final float LINE = Faces.SMALL * 1.35f;
+    private static final float LOWEST_FIGURE = 130;
     private static final int MOST_LISTED = 8;
+    private static final int MOST_OVERRIDES = 4;
+    private static final int LONGEST_ITEM = 70;
+    private static final int LONGEST_TITLE = 160;
 
     private final Paper paper;
     private final Faces faces;
@@ -42,8 +48,9 @@ final class ReviewPage {
         document();
         verdicts();
         worst();
-        firing();
-        taken();
+        List<String[]> taken = taken();
+        firing(paper.room() - heightOf(taken));
+        taken.forEach(this::write);
         paper.quiet(
                 "Everything here is computed from the inputs named above, for this design as drawn. It is no statement"
                         + " of compliance with any standard, and no substitute for measurement, local codes and licensed work.");
@@ -52,7 +59,7 @@ final class ReviewPage {
     private void caution() {
         PdfPTable box = new PdfPTable(1);
         box.setWidthPercentage(100);
-        Phrase phrase = new Phrase(Faces.SMALL * 1.35f, "", faces.small());
+        Phrase phrase = new Phrase(LINE, "", faces.small());
         phrase.add(new Phrase("Mains voltage kills.  ", faces.smallBold()));
         phrase.add(new Phrase(
                 "Every part of such a circuit can be at line potential, the knob's terminals too. Local codes decide what"
@@ -72,11 +79,16 @@ final class ReviewPage {
         LoadedDesign loaded = content.loaded();
         Document block = check.design().document();
         Grid grid = new Grid(faces, new float[] {1.1f, 3.2f, 1.1f, 2.6f});
-        pair(grid, "design", or(check.design().title(), loaded.name()), "number", block.number());
-        pair(grid, "file", loaded.name(), "revision", block.revision());
+        pair(grid, "design", or(cut(check.design().title()), loaded.name()), "number", block.number());
+        pair(grid, "file", cut(loaded.name()), "revision", block.revision());
         pair(grid, "input digest", loaded.inputDigest(), "date", block.date());
         pair(grid, "program", "clipramp " + content.programVersion(), "prepared by", block.preparedBy());
-        pair(grid, "overrides", or(String.join(", ", loaded.overrides()), "none"), "reviewed by", block.reviewedBy());
+        pair(
+                grid,
+                "overrides",
+                or(listed(loaded.overrides(), ", ", MOST_OVERRIDES), "none"),
+                "reviewed by",
+                block.reviewedBy());
         paper.add(grid.table());
     }
 
@@ -85,6 +97,10 @@ final class ReviewPage {
         grid.add(or(value, Shown.NOTHING), faces.small(), 1);
         grid.add(otherName, faces.quiet(), 2);
         grid.add(or(otherValue, Shown.NOTHING), faces.small(), 3);
+    }
+
+    private static String cut(String text) {
+        return text.length() > LONGEST_TITLE ? text.substring(0, LONGEST_TITLE - 1) + "…" : text;
     }
 
     private static String or(String text, String otherwise) {
@@ -97,7 +113,7 @@ final class ReviewPage {
             long count = check.margins().stream()
                     .filter(margin -> margin.verdict() == verdict)
                     .count();
-            counts.add(count + " " + Shown.word(verdict));
+            counts.add(Shown.word(verdict) + " " + count);
         }
         boolean fails = check.verdict() == Verdict.FAILS;
         Font font = fails ? faces.marked(Faces.TEXT) : faces.textBold();
@@ -130,8 +146,8 @@ final class ReviewPage {
         paper.add(grid.table());
     }
 
-    /** Firing in words at the left, the knob's curve at the right. */
-    private void firing() {
+    /** Firing in words at the left, the knob's curve at the right, as high as the page has room for. */
+    private void firing(float room) {
         PdfPTable two = new PdfPTable(new float[] {1, 1.35f});
         two.setWidthPercentage(100);
         two.setSpacingBefore(2);
@@ -142,8 +158,9 @@ final class ReviewPage {
         float width = paper.width() * 1.35f / 2.35f - 10;
         PdfPCell right = plain();
         right.setPaddingLeft(10);
+        float height = Math.max(LOWEST_FIGURE, Math.min(width / 1.1f, room));
         right.addElement(
-                paper.picture(new KnobFigure(check.knob(), check.design().wanted()), width, width / 1.5f));
+                paper.picture(new KnobFigure(check.knob(), check.design().wanted()), width, height));
         two.addCell(right);
         paper.add(two);
     }
@@ -190,37 +207,59 @@ final class ReviewPage {
                         + Shown.brief(point.load().fraction(), Unit.FRACTION));
     }
 
-    private void taken() {
+    /** What the reviewer must know that no number shows: name, then what is listed under it. */
+    private List<String[]> taken() {
         LoadedDesign loaded = content.loaded();
-        line(
+        List<String[]> taken = new ArrayList<>();
+        taken.add(line(
                 "Assumed: ",
-                loaded.assumed().stream().map(a -> a.path() + " " + a.value()).toList());
-        line(
+                loaded.assumed().stream().map(a -> a.path() + " " + a.value()).toList()));
+        taken.add(line(
                 "Not judged: ",
                 check.margins().stream()
                         .filter(margin -> margin.verdict() == Verdict.NOT_JUDGED)
                         .map(Margin::name)
-                        .toList());
-        line(
+                        .toList()));
+        taken.add(line(
                 "Local profiles that hide others: ",
                 loaded.profiles().stream()
                         .filter(profile -> !profile.hides().isEmpty())
                         .map(profile -> profile.kind() + " " + profile.id() + " (" + profile.from() + ")")
-                        .toList());
+                        .toList()));
+        return taken;
     }
 
-    private void line(String name, List<String> items) {
-        String listed = items.stream().limit(MOST_LISTED).collect(Collectors.joining("; "));
-        int more = items.size() - MOST_LISTED;
-        String text = items.isEmpty()
-                ? "none"
-                : more > 0 ? listed + "; and " + more + " more, listed with the sources" : listed;
-        Phrase phrase = new Phrase(Faces.SMALL * 1.35f, "", faces.small());
-        phrase.add(new Phrase(name, faces.smallBold()));
-        phrase.add(new Phrase(text, faces.small()));
-        com.lowagie.text.Paragraph paragraph = new com.lowagie.text.Paragraph(phrase);
-        paragraph.setLeading(Faces.SMALL * 1.35f);
+    private static String[] line(String name, List<String> items) {
+        return new String[] {name, or(listed(items, "; ", MOST_LISTED), "none")};
+    }
+
+    /** As many as fit, each cut to what fits; the sources list them all. */
+    private static String listed(List<String> items, String between, int most) {
+        String listed = items.stream()
+                .limit(most)
+                .map(item -> item.length() > LONGEST_ITEM ? item.substring(0, LONGEST_ITEM - 1) + "…" : item)
+                .collect(Collectors.joining(between));
+        int more = items.size() - most;
+        return more > 0 ? listed + between + "and " + more + " more, see the sources" : listed;
+    }
+
+    private void write(String[] line) {
+        Phrase phrase = new Phrase(LINE, "", faces.small());
+        phrase.add(new Phrase(line[0], faces.smallBold()));
+        phrase.add(new Phrase(faces.printable(line[1]), faces.small()));
+        Paragraph paragraph = new Paragraph(phrase);
+        paragraph.setLeading(LINE);
         paragraph.setSpacingAfter(2);
         paper.add(paragraph);
+    }
+
+    /** Height in points that the lines under the figure need, statement included; words break early, so a line more. */
+    private float heightOf(List<String[]> lines) {
+        float height = 5 * LINE;
+        for (String[] line : lines) {
+            float width = faces.regular().getWidthPoint(line[0] + line[1], Faces.SMALL);
+            height += LINE * (1 + (float) Math.ceil(1.05f * width / paper.width())) + 2;
+        }
+        return height;
     }
 }

@@ -20,6 +20,10 @@ final class SourcesSection {
                         + " after IEC 60747-6, circuit symbols after IEC 60617.");
         paper.heading("Assumed, because the design says nothing");
         assumed(paper, loaded);
+        if (!loaded.overrides().isEmpty()) {
+            paper.heading("Overrides");
+            paper.list(loaded.overrides(), paper.faces().small());
+        }
         paper.heading("Notes");
         List<String> notes = new ArrayList<>(loaded.notes());
         content.check().notes().stream().map(Note::text).forEach(notes::add);

@@ -2,8 +2,12 @@ package clipramp.record;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import clipramp.circuit.Trigger;
+import clipramp.files.LoadedDesign;
 import clipramp.margins.Margin;
 import clipramp.margins.Verdict;
+import clipramp.power.OperatingPoint;
+import clipramp.units.Unit;
 import java.io.IOException;
 import java.util.ArrayList;
 import java.util.HashSet;
@@ -207,6 +211,54 @@ class DesignRecordTest {
             assertThat(a4.getPage(0).getMediaBox().getHeight() / 72 * 25.4).isBetween(296.0, 298.0);
             assertThat(letter.getPage(0).getMediaBox().getWidth()).isEqualTo(612);
             assertThat(letter.getPage(0).getMediaBox().getHeight()).isEqualTo(792);
+        }
+    }
+
+    /** However much a design leaves to defaults and however it is named, the cautions stay on page two. */
+    @Test
+    void pageOneStaysOnePageWithEverythingLong() throws IOException {
+        LoadedDesign loaded = content.loaded();
+        List<LoadedDesign.Assumed> assumed = new ArrayList<>();
+        List<String> overrides = new ArrayList<>();
+        for (int i = 0; i < 60; i++) {
+            assumed.add(
+                    new LoadedDesign.Assumed("some.long.path.of.a.key.number" + i, "value with many words ".repeat(9)));
+            overrides.add("trigger.device.standoff=0." + i + "5".repeat(60));
+        }
+        LoadedDesign longer = new LoadedDesign(
+                loaded.design(),
+                "a-long-name-of-a-file-".repeat(12) + "\u4E2D.yaml",
+                assumed,
+                loaded.profiles(),
+                loaded.notes(),
+                overrides,
+                loaded.inputDigest());
+        RecordContent long_ = new RecordContent(
+                longer, content.check(), content.profiles(), content.lanes(), content.commissioning(), "0.1.0");
+        for (PageSize size : PageSize.values()) {
+            byte[] bytes = DesignRecord.bytes(long_, size);
+            assertThat(text(bytes, 1).replaceAll("\\s+", " "))
+                    .contains("no statement of compliance with any standard", "and 52 more");
+            assertThat(text(bytes, 2).replaceAll("\\s+", " "))
+                    .contains("Before you build or measure", "says nothing about the circuit as a whole");
+        }
+    }
+
+    @Test
+    void everySolvedDelayStandsBesideTheTextbooks() throws IOException {
+        String all = text(pdf, 0).replaceAll("\\s+", " ");
+        double eta = ((Trigger.UnijunctionTrigger) content.check().design().trigger())
+                .device()
+                .standoff()
+                .nominal();
+        double farads = content.check().design().ramp().capacitor().value();
+        for (OperatingPoint point : content.check().knob()) {
+            double solved = point.solution().shown().firingPulse().orElseThrow().startSeconds();
+            // Mehta, Principles of Electronics, 21.11: T = R C ln(1/(1 - eta)).
+            double textbook = point.rampOhms() * farads * -Math.log1p(-eta);
+            assertThat(all)
+                    .contains(Shown.quantity(solved, Unit.SECOND))
+                    .contains(Shown.quantity(textbook, Unit.SECOND));
         }
     }
 }
