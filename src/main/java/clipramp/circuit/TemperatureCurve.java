@@ -44,8 +44,7 @@ public record TemperatureCurve(List<Point> points) {
     /** Current in amperes at a junction temperature in °C. */
     public double ampsAt(double celsius) {
         if (points.size() == 1) {
-            Point only = points.get(0);
-            return only.amps() * Math.pow(COLD_GROWTH, (only.celsius() - celsius) / COLD_SPAN_KELVIN);
+            return fromOne(points.get(0).celsius(), points.get(0).amps(), celsius);
         }
         int upper = 1;
         while (upper < points.size() - 1 && points.get(upper).celsius() < celsius) {
@@ -53,8 +52,19 @@ public record TemperatureCurve(List<Point> points) {
         }
         Point a = points.get(upper - 1);
         Point b = points.get(upper);
-        double share = (celsius - a.celsius()) / (b.celsius() - a.celsius());
-        return a.amps() * Math.pow(b.amps() / a.amps(), share);
+        return through(a.celsius(), a.amps(), b.celsius(), b.amps(), celsius);
+    }
+
+    /** A current known at one temperature, at another: it doubles over 65 K towards the cold. */
+    static double fromOne(double knownCelsius, double amps, double celsius) {
+        return amps * Math.pow(COLD_GROWTH, (knownCelsius - celsius) / COLD_SPAN_KELVIN);
+    }
+
+    /** A current known at two temperatures, at another: its logarithm is linear in temperature. */
+    static double through(
+            double firstCelsius, double firstAmps, double secondCelsius, double secondAmps, double celsius) {
+        double share = (celsius - firstCelsius) / (secondCelsius - firstCelsius);
+        return firstAmps * Math.pow(secondAmps / firstAmps, share);
     }
 
     /** Whether a temperature lies outside the sheet's points, so that the answer is extended and should say so. */

@@ -37,7 +37,22 @@ public record TriggerDemand(List<Point> points) {
 
     /** I_GT in amperes at a junction temperature in °C. */
     public double ampsAt(double celsius) {
-        return currents().ampsAt(celsius);
+        if (points.size() == 1) {
+            return TemperatureCurve.fromOne(
+                    points.get(0).celsius(), points.get(0).amps(), celsius);
+        }
+        Point a = points.get(upper(celsius) - 1);
+        Point b = points.get(upper(celsius));
+        return TemperatureCurve.through(a.celsius(), a.amps(), b.celsius(), b.amps(), celsius);
+    }
+
+    /** Index of the point that ends the stretch used at a temperature. */
+    private int upper(double celsius) {
+        int upper = 1;
+        while (upper < points.size() - 1 && points.get(upper).celsius() < celsius) {
+            upper++;
+        }
+        return upper;
     }
 
     /** V_GT in volts at a junction temperature in °C. */
@@ -46,23 +61,14 @@ public record TriggerDemand(List<Point> points) {
             Point only = points.get(0);
             return only.volts() + COLD_GAIN_VOLTS * (only.celsius() - celsius) / COLD_SPAN_KELVIN;
         }
-        int upper = 1;
-        while (upper < points.size() - 1 && points.get(upper).celsius() < celsius) {
-            upper++;
-        }
-        Point a = points.get(upper - 1);
-        Point b = points.get(upper);
+        Point a = points.get(upper(celsius) - 1);
+        Point b = points.get(upper(celsius));
         return a.volts() + (b.volts() - a.volts()) * (celsius - a.celsius()) / (b.celsius() - a.celsius());
     }
 
     /** Whether a temperature lies outside the sheet's points, so that the answer is extended and should say so. */
     public boolean isExtendedAt(double celsius) {
-        return currents().isExtendedAt(celsius);
-    }
-
-    private TemperatureCurve currents() {
-        return new TemperatureCurve(points.stream()
-                .map(p -> new TemperatureCurve.Point(p.celsius(), p.amps()))
-                .toList());
+        return celsius < points.get(0).celsius()
+                || celsius > points.get(points.size() - 1).celsius();
     }
 }

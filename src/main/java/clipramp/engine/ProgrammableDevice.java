@@ -15,28 +15,31 @@ import java.util.function.ToDoubleFunction;
  */
 public final class ProgrammableDevice {
     /** Supply that data sheets give the valley current at, V. */
-    private static final double VALLEY_VOLTS = 10;
+    static final double VALLEY_VOLTS = 10;
 
     private ProgrammableDevice() {}
 
-    static void fill(Network n, ProgrammableTrigger trigger) {
-        ProgrammableUnijunction device = trigger.device();
-        n.programmable = true;
-        n.upperOhms = trigger.upper().value();
-        n.lowerOhms = trigger.lower().value();
-        double gateOhms = n.upperOhms * n.lowerOhms / (n.upperOhms + n.lowerOhms);
-        n.emitterDropVolts = offsetVolts(device, gateOhms, Characteristic::nominal);
-        n.peakCurrentAmps = amps(device.peakCurrentAmps(), gateOhms, Characteristic::nominal);
-        n.valleySiemens = amps(device.valleyCurrentAmps(), gateOhms, Characteristic::nominal) / VALLEY_VOLTS;
-        n.onIntercept = 0;
-        n.onOhms = (device.forwardVolts().nominal() - Network.PROGRAMMABLE_DROP_VOLTS) / device.forwardAmps();
-        if (!(n.onOhms > 0)) {
+    /** R_A parallel R_B, ohm. */
+    public static double gateOhms(ProgrammableTrigger trigger) {
+        double upper = trigger.upper().value();
+        double lower = trigger.lower().value();
+        return upper * lower / (upper + lower);
+    }
+
+    /**
+     * r_on = (V_F - 0.6 V)/I_F, ohm.
+     *
+     * @throws RefusedCircuit if the forward voltage leaves nothing
+     */
+    static double onOhms(double forwardVolts, double forwardAmps, String deviceId) {
+        double ohms = (forwardVolts - Network.PROGRAMMABLE_DROP_VOLTS) / forwardAmps;
+        if (!(ohms > 0)) {
             throw new RefusedCircuit(
                     "trigger.device.forward",
-                    "the forward voltage of " + device.id() + " is "
-                            + device.forwardVolts().nominal() + " V; it must exceed "
+                    "the forward voltage of " + deviceId + " is " + forwardVolts + " V; it must exceed "
                             + Network.PROGRAMMABLE_DROP_VOLTS + " V.");
         }
+        return ohms;
     }
 
     /** Peak-point voltage above the divider's at a gate resistance in ohms, V. */

@@ -1,0 +1,78 @@
+package clipramp.engine;
+
+import clipramp.circuit.Design;
+import clipramp.circuit.GateDrive;
+import clipramp.circuit.PulseTransformer;
+import clipramp.circuit.TemperatureCurve;
+import clipramp.circuit.ThyristorDevice;
+import clipramp.circuit.ThyristorDevice.Kind;
+import clipramp.circuit.TriggerDemand;
+import java.util.Objects;
+import org.jspecify.annotations.Nullable;
+
+/** What a design fixes of gate drive and thyristor, ready to be put into a network. */
+final class GateSide {
+    /** Drop of a conducting SCR's own gate junction, which bleeds latching and holding current away, V. */
+    private static final double BLEED_VOLTS = 0.7;
+
+    private final ThyristorDevice thyristor;
+    private final TriggerDemand[] demands;
+    private final @Nullable TemperatureCurve latching;
+    private final @Nullable PulseTransformer transformer;
+    private final double clampVolts;
+
+    GateSide(Design design) {
+        thyristor = design.thyristor().device();
+        demands = demands(thyristor, design.gate().polarity());
+        latching = thyristor.latching().orElse(null);
+        transformer = design.gate().transformer().orElse(null);
+        clampVolts = design.clip().diodeDropVolts();
+    }
+
+    void fill(Network n, UnitValues unit) {
+        PulseTransformer pulses = transformer;
+        n.transformerCoupled = pulses != null;
+        if (pulses != null) {
+            n.turnsRatio = pulses.ratio();
+            n.secondaries = pulses.secondaries();
+            n.magnetisingHenries = pulses.magnetisingHenries();
+            n.primaryOhms = pulses.primaryOhms();
+            n.secondaryOhms = pulses.secondaryOhms();
+            n.clampVolts = pulses.clampDiode() ? clampVolts : Double.POSITIVE_INFINITY;
+        }
+        n.gateSeriesOhms = unit.gateSeriesOhms;
+        n.gateShuntSiemens = 1 / unit.gateShuntOhms;
+        n.gateKneeVolts = thyristor.gate().kneeVolts();
+        n.gateSlopeOhms = thyristor.gate().slopeOhms();
+        n.triggerAmps = 0;
+        for (TriggerDemand demand : demands) {
+            n.triggerAmps = Math.max(n.triggerAmps, demand.ampsAt(unit.celsius));
+        }
+        n.turnOnSeconds = thyristor.gate().turnOnSeconds().orElse(0);
+        double source = pulses == null ? unit.baseOneOhms : pulses.secondaryOhms();
+        TemperatureCurve curve = latching;
+        n.latchingAmps = curve == null
+                ? 0
+                : curve.ampsAt(unit.celsius)
+                        + bleedAmps(thyristor.kind(), unit.gateSeriesOhms + source, n.gateShuntSiemens);
+    }
+
+    /**
+     * What a conducting SCR's gate junction loses to the gate circuit: 0.7 V over R_GK parallel (R_G + R1, or the
+     * secondary winding), A. A triac's terminals are too well joined inside to notice.
+     */
+    static double bleedAmps(Kind kind, double pathOhms, double shuntSiemens) {
+        return kind == Kind.TRIAC ? 0 : BLEED_VOLTS * (1 / pathOhms + shuntSiemens);
+    }
+
+    /** The trigger data that a pulse's polarity meets: an SCR's own, or those of a triac's two quadrants. */
+    static TriggerDemand[] demands(ThyristorDevice device, GateDrive.Polarity polarity) {
+        TriggerDemand[] met = device.kind() == Kind.SCR
+                ? new TriggerDemand[0]
+                : ThyristorDevice.quadrantsOf(polarity).stream()
+                        .map(quadrant -> device.gate().quadrants().get(quadrant))
+                        .filter(Objects::nonNull)
+                        .toArray(TriggerDemand[]::new);
+        return met.length > 0 ? met : new TriggerDemand[] {device.gate().trigger()};
+    }
+}

@@ -1,0 +1,222 @@
+package clipramp.engine;
+
+import clipramp.circuit.Characteristic;
+import clipramp.circuit.Condition;
+import clipramp.circuit.Design;
+import clipramp.circuit.Part;
+import clipramp.circuit.Pot;
+import clipramp.circuit.ProgrammableUnijunction;
+import clipramp.circuit.Trigger.ProgrammableTrigger;
+import clipramp.circuit.Trigger.UnijunctionTrigger;
+import clipramp.circuit.Unijunction;
+import clipramp.circuit.Zener;
+
+/**
+ * One unit built to a design, as plain numbers: what its parts and devices really are at 25 °C, and what line and
+ * temperature it stands at. A mutable kitchen vessel: whoever draws many units changes the public fields and calls {@link
+ * #fill} again, which allocates nothing.
+ */
+public final class UnitValues {
+    /** Temperature that data-sheet figures hold at, °C. */
+    private static final double SHEET_CELSIUS = 25;
+
+    /** rms of the line's fundamental, V. */
+    public double lineVolts;
+    /** Line frequency, Hz. */
+    public double lineHertz;
+    /** Ambient temperature, °C. */
+    public double celsius;
+    /** R_D, ohm. */
+    public double dropperOhms;
+    /** C_E, F. */
+    public double capacitorFarads;
+    /** Fixed part of R_E, ohm. */
+    public double fixedOhms;
+    /** Pot track, ohm; 0 for none. */
+    public double trackOhms;
+    /** Resistor across the pot's used section, ohm; POSITIVE_INFINITY for none. */
+    public double potShuntOhms;
+    /** R1, ohm. */
+    public double baseOneOhms;
+    /** R2, ohm. */
+    public double baseTwoOhms;
+    /** R_A of a programmable device, ohm. */
+    public double upperOhms;
+    /** R_B of a programmable device, ohm. */
+    public double lowerOhms;
+    /** R_G, ohm. */
+    public double gateSeriesOhms;
+    /** R_GK, ohm; POSITIVE_INFINITY for none. */
+    public double gateShuntOhms;
+    /** V_Z, V. */
+    public double zenerVolts;
+    /** eta. */
+    public double standoff;
+    /** R_BB, ohm. */
+    public double interbaseOhms;
+    /** Relative drift of R_BB, 1/K. */
+    public double interbaseDrift;
+    /** V_D, or a programmable device's offset, V. */
+    public double emitterDropVolts;
+    /** Drift of V_D, V/K. */
+    public double emitterDrift;
+    /** I_P, A. */
+    public double peakCurrentAmps;
+    /** I_V, A. */
+    public double valleyAmps;
+    /** V_V, V. */
+    public double valleyVolts;
+    /** V_EB1(sat), or a programmable device's V_F, V. */
+    public double saturationVolts;
+    /** I_B2(mod), A; NaN where the sheet has none. */
+    public double modulatedAmps = Double.NaN;
+    /** V_OB1, V; NaN where the sheet has none. */
+    public double baseOnePulseVolts = Double.NaN;
+
+    // What the design fixes for every unit.
+    final boolean programmable;
+    final double zenerSlopeOhms;
+    final double zenerTestAmps;
+    final double zenerDrift;
+    final double potEndOhms;
+    final double valleyAtVolts;
+    final double saturationAmps;
+    final double saturationAtVolts;
+    final double modulatedAtVolts;
+    final double pulseSupplyVolts;
+    final double pulseBaseOneOhms;
+    final String deviceId;
+    private final GateSide gate;
+
+    private UnitValues(Design design) {
+        lineVolts = design.line().volts();
+        lineHertz = design.line().hertz();
+        celsius = SHEET_CELSIUS;
+        Zener zener = design.clip().zener();
+        dropperOhms = design.clip().dropper().value();
+        zenerVolts = zener.volts().nominal();
+        zenerSlopeOhms = zener.slopeOhms();
+        zenerTestAmps = zener.testCurrentAmps();
+        zenerDrift = zener.driftPerKelvin();
+        capacitorFarads = design.ramp().capacitor().value();
+        fixedOhms = design.ramp().fixed().value();
+        trackOhms = design.ramp().pot().map(p -> p.track().value()).orElse(0.0);
+        potEndOhms = design.ramp().pot().map(Pot::endOhms).orElse(0.0);
+        potShuntOhms = design.ramp().pot().flatMap(Pot::shunt).map(Part::value).orElse(Double.POSITIVE_INFINITY);
+        baseOneOhms = design.trigger().baseOne().value();
+        gateSeriesOhms = design.gate().series().value();
+        gateShuntOhms = design.gate().shunt().map(Part::value).orElse(Double.POSITIVE_INFINITY);
+        gate = new GateSide(design);
+        deviceId = design.trigger().deviceId();
+        if (design.trigger() instanceof UnijunctionTrigger trigger) {
+            Unijunction device = trigger.device();
+            programmable = false;
+            baseTwoOhms = trigger.baseTwo().value();
+            unijunction(device);
+            valleyAtVolts = device.valley().atVolts();
+            saturationAmps = device.saturation().amps();
+            saturationAtVolts = device.saturation().atVolts();
+            modulatedAtVolts =
+                    device.modulated().map(Unijunction.Modulated::atVolts).orElse(Double.NaN);
+            pulseSupplyVolts = device.baseOnePulse().map(p -> p.supplyVolts()).orElse(Double.NaN);
+            pulseBaseOneOhms = device.baseOnePulse().map(p -> p.baseOneOhms()).orElse(Double.NaN);
+        } else {
+            ProgrammableTrigger trigger = (ProgrammableTrigger) design.trigger();
+            programmable = true;
+            programmable(trigger);
+            valleyAtVolts = ProgrammableDevice.VALLEY_VOLTS;
+            saturationAmps = trigger.device().forwardAmps();
+            saturationAtVolts = Double.NaN;
+            modulatedAtVolts = Double.NaN;
+            pulseSupplyVolts = Double.NaN;
+            pulseBaseOneOhms = Double.NaN;
+        }
+    }
+
+    private void unijunction(Unijunction device) {
+        standoff = device.standoff().nominal();
+        interbaseOhms = device.interbaseOhms().nominal();
+        interbaseDrift = device.interbaseDriftPerKelvin().nominal();
+        emitterDropVolts = device.emitterDropVolts().nominal();
+        emitterDrift = device.emitterDriftVoltsPerKelvin().nominal();
+        peakCurrentAmps = device.peakCurrentAmps().nominal();
+        valleyAmps = device.valley().amps().nominal();
+        valleyVolts = device.valley().volts().nominal();
+        saturationVolts = device.saturation().volts().nominal();
+        modulatedAmps = device.modulated().map(m -> m.amps().nominal()).orElse(Double.NaN);
+        baseOnePulseVolts = device.baseOnePulse()
+                .map(Unijunction.BaseOnePulse::nominalVolts)
+                .orElse(Double.NaN);
+    }
+
+    private void programmable(ProgrammableTrigger trigger) {
+        ProgrammableUnijunction device = trigger.device();
+        upperOhms = trigger.upper().value();
+        lowerOhms = trigger.lower().value();
+        double gateOhms = ProgrammableDevice.gateOhms(trigger);
+        emitterDropVolts = ProgrammableDevice.offsetVolts(device, gateOhms, Characteristic::nominal);
+        peakCurrentAmps = ProgrammableDevice.amps(device.peakCurrentAmps(), gateOhms, Characteristic::nominal);
+        valleyAmps = ProgrammableDevice.amps(device.valleyCurrentAmps(), gateOhms, Characteristic::nominal);
+        saturationVolts = device.forwardVolts().nominal();
+    }
+
+    /** Every part and device at its nominal value, line nominal, 25 °C. */
+    public static UnitValues nominal(Design design) {
+        return new UnitValues(design);
+    }
+
+    /** Puts the unit at a condition. */
+    public UnitValues at(Condition condition) {
+        lineVolts = condition.lineVolts();
+        lineHertz = condition.lineHertz();
+        celsius = condition.celsius();
+        return this;
+    }
+
+    /** R_E of this unit with a share 0..1 of its track in use, ohm. */
+    public double rampOhms(double trackShare) {
+        return fixedOhms + (trackOhms == 0 ? 0 : Pot.ohms(trackShare, potEndOhms, trackOhms, potShuntOhms));
+    }
+
+    /**
+     * Works out the network of this unit.
+     *
+     * @param n network to fill
+     * @param rampOhms R_E, ohm
+     * @throws clipramp.circuit.RefusedCircuit where the device's data contradict themselves
+     */
+    public void fill(Network n, double rampOhms) {
+        double warmth = celsius - SHEET_CELSIUS;
+        n.dropperOhms = dropperOhms;
+        n.zenerSlopeOhms = zenerSlopeOhms;
+        n.zenerKneeVolts = zenerVolts * (1 + zenerDrift * warmth) - zenerSlopeOhms * zenerTestAmps;
+        n.rampOhms = rampOhms;
+        n.capacitorFarads = capacitorFarads;
+        n.baseOneOhms = baseOneOhms;
+        n.peakCurrentAmps = peakCurrentAmps;
+        n.valleySiemens = valleyAmps / valleyAtVolts;
+        n.programmable = programmable;
+        if (programmable) {
+            n.upperOhms = upperOhms;
+            n.lowerOhms = lowerOhms;
+            n.emitterDropVolts = emitterDropVolts;
+            n.onIntercept = 0;
+            n.onOhms = ProgrammableDevice.onOhms(saturationVolts, saturationAmps, deviceId);
+        } else {
+            n.baseTwoOhms = baseTwoOhms;
+            n.standoff = standoff;
+            n.interbaseOhms = interbaseOhms * (1 + interbaseDrift * warmth);
+            n.emitterDropVolts = emitterDropVolts + emitterDrift * warmth;
+            n.modulatedOhms = modulatedOhms(n.interbaseOhms);
+            n.onOhms = EmitterLine.slopeOhms(this);
+            n.onIntercept = EmitterLine.intercept(this, n.onOhms);
+        }
+        gate.fill(n, this);
+        n.derive();
+    }
+
+    /** R_B2on for a base bar of so many ohms, ohm: V/I_B2(mod) where the sheet has it, else (1 - eta) R_BB. */
+    double modulatedOhms(double barOhms) {
+        return Double.isNaN(modulatedAmps) ? (1 - standoff) * barOhms : modulatedAtVolts / modulatedAmps;
+    }
+}
