@@ -4,35 +4,27 @@ import clipramp.circuit.Design;
 import clipramp.circuit.GateDrive.Polarity;
 import clipramp.circuit.Part;
 import clipramp.circuit.ThyristorDevice;
-import clipramp.circuit.ThyristorDevice.GateLimits;
 import clipramp.circuit.ThyristorDevice.Kind;
-import clipramp.circuit.ThyristorDevice.NonTrigger;
 import clipramp.circuit.ThyristorDevice.Quadrant;
 import clipramp.firing.Pulse;
-import clipramp.firing.Solution;
-import clipramp.gate.GatePower;
 import clipramp.gate.LatchingNeed;
-import clipramp.gate.StandingVoltage;
 import clipramp.gate.TriggerNeed;
 import java.util.ArrayList;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.OptionalDouble;
 import java.util.Set;
-import java.util.function.ToDoubleFunction;
 
-/** What the thyristor asks of the pulse, and what its gate bears (model.md section 7). */
+/** What the thyristor asks of the pulse (model.md section 7). */
 final class GateMargins {
     private final Bench bench;
     private final Design design;
     private final ThyristorDevice device;
-    private final GateLimits limits;
 
     GateMargins(Bench bench) {
         this.bench = bench;
         this.design = bench.design();
         this.device = design.thyristor().device();
-        this.limits = device.gate().limits();
     }
 
     List<Margin> all() {
@@ -41,17 +33,6 @@ final class GateMargins {
         margins.add(drive(MarginKind.GATE_PEAK_CURRENT));
         margins.add(drive(MarginKind.GATE_TIME));
         margins.add(drive(MarginKind.GATE_CHARGE));
-        margins.add(standing());
-        margins.add(ceiling(
-                MarginKind.GATE_CURRENT_LIMIT, limits.amps(), Pulse::peakGateAmps, "gate.limits.current", Say::amps));
-        margins.add(ceiling(
-                MarginKind.GATE_VOLTAGE_LIMIT,
-                limits.volts(),
-                Pulse::peakGateVolts,
-                "gate.limits.voltage",
-                Say::volts));
-        margins.add(peakPower());
-        margins.add(meanPower());
         margins.add(latching(MarginKind.LATCHING_EARLIEST));
         margins.add(latching(MarginKind.LATCHING_LATEST));
         return margins;
@@ -169,128 +150,6 @@ final class GateMargins {
                 .map(Part::value)
                 .map(ohms -> " (R_GK takes " + Say.amps(gateVolts / ohms) + " besides)")
                 .orElse("");
-    }
-
-    private Margin standing() {
-        MarginKind kind = MarginKind.GATE_STANDING_VOLTAGE;
-        if (device.gate().nonTrigger().isEmpty()) {
-            return Finding.worst(
-                    kind,
-                    List.of(Finding.missing(
-                            kind, "any condition", "the profile states no thyristor.device.gate.non-trigger")));
-        }
-        NonTrigger none = device.gate().nonTrigger().get();
-        List<Finding> findings = new ArrayList<>();
-        for (JudgedCondition at : bench.hottest()) {
-            StandingVoltage standing = StandingVoltage.of(design, at.condition());
-            String how = standing.volts() == 0
-                    ? "no base bar current reaches the gate"
-                    : Say.volts(standing.supplyVolts()) + " x " + Say.ohms(standing.baseOneOhms())
-                            + "/(R2 + " + Say.ohms(standing.interbaseOhms()) + " + R1p), then R_G and R_GK: "
-                            + Say.volts(standing.volts());
-            findings.add(new Finding(
-                    at.words(),
-                    none.volts(),
-                    standing.volts(),
-                    kind.sense(),
-                    how + "; V_GD " + Say.volts(none.volts()) + " at a junction of " + Say.celsius(none.celsius())));
-        }
-        return Finding.worst(kind, findings);
-    }
-
-    /** Every pulse of the typical circuit at both ends of the knob, all conditions. */
-    private List<Solution> typical(JudgedCondition at) {
-        return List.of(
-                bench.solution(at.condition(), bench.leastOhms()), bench.solution(at.condition(), bench.mostOhms()));
-    }
-
-    private Margin ceiling(
-            MarginKind kind,
-            OptionalDouble limit,
-            ToDoubleFunction<Pulse> peak,
-            String key,
-            java.util.function.DoubleFunction<String> say) {
-        if (limit.isEmpty()) {
-            return Finding.worst(
-                    kind,
-                    List.of(Finding.missing(kind, "any condition", "the profile states no thyristor.device." + key)));
-        }
-        List<Finding> findings = new ArrayList<>();
-        for (JudgedCondition at : bench.conditions()) {
-            double highest = typical(at).stream()
-                    .flatMap(s -> Bench.pulses(s).stream())
-                    .mapToDouble(peak)
-                    .max()
-                    .orElse(0);
-            findings.add(new Finding(
-                    at.words(),
-                    limit.getAsDouble(),
-                    highest,
-                    kind.sense(),
-                    "typical gate gets " + say.apply(highest) + "; limit " + say.apply(limit.getAsDouble())));
-        }
-        return Finding.worst(kind, findings);
-    }
-
-    private Margin peakPower() {
-        MarginKind kind = MarginKind.GATE_POWER_LIMIT;
-        if (limits.peakWatts().isEmpty()) {
-            return Finding.worst(
-                    kind,
-                    List.of(Finding.missing(
-                            kind, "any condition", "the profile states no thyristor.device.gate.limits.peak-power")));
-        }
-        List<Finding> findings = new ArrayList<>();
-        for (JudgedCondition at : bench.conditions()) {
-            for (Solution solution : typical(at)) {
-                for (Pulse pulse : Bench.pulses(solution)) {
-                    findings.add(peakPower(at, pulse));
-                }
-            }
-            findings.add(new Finding(at.words(), limits.peakWatts().getAsDouble(), 0, kind.sense(), "no pulse"));
-        }
-        return Finding.worst(kind, findings);
-    }
-
-    private Finding peakPower(JudgedCondition at, Pulse pulse) {
-        double width = GatePower.equivalentSeconds(pulse);
-        double allowed = GatePower.allowedPeakWatts(limits, width).orElseThrow();
-        double rated = limits.peakWatts().getAsDouble();
-        String duration = limits.peakWattsForSeconds().isPresent()
-                ? " for " + Say.seconds(limits.peakWattsForSeconds().getAsDouble())
-                : " (the sheet states no pulse length)";
-        return new Finding(
-                at.words(),
-                allowed,
-                pulse.peakGateWatts(),
-                MarginKind.GATE_POWER_LIMIT.sense(),
-                Say.joules(pulse.gateJoules()) + " at a peak of " + Say.watts(pulse.peakGateWatts()) + " = "
-                        + Say.seconds(width) + " wide; P_GM " + Say.watts(rated) + duration
-                        + (allowed < rated ? ", so " + Say.watts(allowed) + " for this pulse" : ""));
-    }
-
-    private Margin meanPower() {
-        MarginKind kind = MarginKind.GATE_MEAN_POWER;
-        if (limits.meanWatts().isEmpty()) {
-            return Finding.worst(
-                    kind,
-                    List.of(Finding.missing(
-                            kind, "any condition", "the profile states no thyristor.device.gate.limits.mean-power")));
-        }
-        List<Finding> findings = new ArrayList<>();
-        for (JudgedCondition at : bench.conditions()) {
-            Solution solution = bench.solution(at.condition(), bench.leastOhms());
-            double mean = GatePower.meanWatts(solution);
-            double limit = limits.meanWatts().getAsDouble();
-            findings.add(new Finding(
-                    at.words(),
-                    limit,
-                    mean,
-                    kind.sense(),
-                    solution.shown().pulses().size() + " pulses a half cycle at R_E = " + Say.ohms(bench.leastOhms())
-                            + ": " + Say.watts(mean) + "; P_G(AV) " + Say.watts(limit)));
-        }
-        return Finding.worst(kind, findings);
     }
 
     private Margin latching(MarginKind kind) {

@@ -52,8 +52,10 @@ public final class Judge {
     private static List<Margin> margins(Bench bench, Condition condition) {
         List<Margin> margins = new ArrayList<>(WantedMargins.of(bench));
         margins.addAll(new RampMargins(bench, condition).all());
+        margins.addAll(new BalanceMargins(bench, condition).all());
         margins.add(new AngleDrift(bench, condition).margin());
         margins.addAll(new GateMargins(bench).all());
+        margins.addAll(new GateCeilings(bench).all());
         margins.addAll(new TransformerMargins(bench).all());
         margins.addAll(new ThyristorMargins(bench).all());
         margins.addAll(new TriggerMargins(bench).all());

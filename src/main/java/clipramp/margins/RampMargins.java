@@ -9,21 +9,13 @@ import clipramp.firing.Pulse;
 import clipramp.firing.Solution;
 import clipramp.power.ActingPulses;
 import clipramp.power.LoadPower;
-import clipramp.power.LoadResult;
 import java.util.ArrayList;
-import java.util.DoubleSummaryStatistics;
 import java.util.List;
 
 /** Whether the ramp does its work between the clip's beginning and the supply's collapse. */
 final class RampMargins {
     /** Share of full power that an end pulse may leak where no lowest power is wanted: a rule of ours. */
     private static final double LEAK_SHARE = 0.01;
-
-    /** Share of the full rms current that may flow as dc: a rule of ours. */
-    private static final double DC_SHARE = 0.01;
-
-    /** By how much alternating firing angles may differ: a rule of ours, 0.6 % of full power at 90 degrees. */
-    private static final double HUNTING_DEGREES = 0.5;
 
     private final Bench bench;
     private final Design design;
@@ -44,10 +36,6 @@ final class RampMargins {
         margins.add(endPulse());
         design.clip().winding().filter(w -> w.lagRad() != 0).ifPresent(w -> margins.add(fullPowerPulse()));
         margins.add(silent());
-        margins.add(hunting());
-        if (design.stage().isFullWave()) {
-            margins.add(dcInLoad());
-        }
         return margins;
     }
 
@@ -243,60 +231,6 @@ final class RampMargins {
                                     : solution.shown().pulses().isEmpty()
                                             ? "no pulse"
                                             : "pulses, but none turns the thyristor on and latches it")));
-        }
-        return Finding.worst(kind, findings);
-    }
-
-    private Margin hunting() {
-        MarginKind kind = MarginKind.HUNTING;
-        List<Finding> findings = new ArrayList<>();
-        for (JudgedCondition at : bench.conditions()) {
-            List<Double> settings =
-                    at.condition().equals(usual) ? bench.settings() : List.of(bench.leastOhms(), bench.mostOhms());
-            for (double ohms : settings) {
-                Solution solution = bench.solution(at.condition(), ohms);
-                double apart = solution.hunts() ? spreadRad(solution) : 0;
-                findings.add(new Finding(
-                        at.words(),
-                        HUNTING_DEGREES,
-                        Math.toDegrees(apart),
-                        kind.sense(),
-                        "R_E = " + Say.ohms(ohms)
-                                + (solution.hunts()
-                                        ? ": half cycles alternate, " + Say.angle(apart) + " apart"
-                                        : ": every line period is like the one before")));
-            }
-        }
-        return Finding.worst(kind, findings);
-    }
-
-    /** Largest less smallest firing angle; a half cycle that does not fire counts as fired at its end. */
-    private static double spreadRad(Solution solution) {
-        DoubleSummaryStatistics angles = solution.halves().stream()
-                .mapToDouble(half -> half.firingRad().orElse(Math.PI))
-                .summaryStatistics();
-        return angles.getMax() - angles.getMin();
-    }
-
-    private Margin dcInLoad() {
-        MarginKind kind = MarginKind.DC_IN_LOAD;
-        List<Finding> findings = new ArrayList<>();
-        for (JudgedCondition at : bench.conditions()) {
-            if (!at.condition().equals(usual)) {
-                continue;
-            }
-            double full = Math.sqrt(
-                    LoadPower.fullWatts(design, at.condition()) / design.load().resistanceOhms());
-            for (double ohms : bench.settings()) {
-                LoadResult load = bench.load(at.condition(), ohms);
-                double dc = Math.abs(load.dcAmps());
-                findings.add(new Finding(
-                        at.words(),
-                        DC_SHARE * full,
-                        dc,
-                        kind.sense(),
-                        "R_E = " + Say.ohms(ohms) + ": dc " + Say.amps(dc) + ", full rms current " + Say.amps(full)));
-            }
         }
         return Finding.worst(kind, findings);
     }
