@@ -10,6 +10,9 @@ import java.util.Optional;
  * @param pot the knob, or none for a fixed ramp
  */
 public record Ramp(Part capacitor, Part fixed, Optional<Pot> pot) {
+    /** No wiper's contact is nothing, and no circuit can tell less from this, ohm. */
+    private static final double LEAST_OHMS = 0.01;
+
     public Ramp {
         Require.positive("ramp capacitor", capacitor.value());
         if (pot.isEmpty()) {
@@ -24,6 +27,7 @@ public record Ramp(Part capacitor, Part fixed, Optional<Pot> pot) {
      * @return ohms
      */
     public double rampOhms(double position) {
-        return fixed.value() + pot.map(p -> p.ohms(position)).orElse(0.0);
+        return Math.max(
+                LEAST_OHMS, fixed.value() + pot.map(p -> p.ohms(position)).orElse(0.0));
     }
 }

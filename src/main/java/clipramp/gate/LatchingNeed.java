@@ -3,6 +3,7 @@ package clipramp.gate;
 import clipramp.circuit.Design;
 import clipramp.circuit.TemperatureCurve;
 import clipramp.engine.NetworkOfDesign;
+import java.util.Optional;
 import java.util.OptionalDouble;
 
 /** Latching and holding current as the gate circuit leaves them (model.md section 7). */
@@ -31,7 +32,7 @@ public final class LatchingNeed {
         return NetworkOfDesign.gateBleedAmps(design);
     }
 
-    private static OptionalDouble at(Design design, java.util.Optional<TemperatureCurve> sheet, double celsius) {
+    private static OptionalDouble at(Design design, Optional<TemperatureCurve> sheet, double celsius) {
         return sheet.map(curve -> OptionalDouble.of(curve.ampsAt(celsius) + bleedAmps(design)))
                 .orElse(OptionalDouble.empty());
     }

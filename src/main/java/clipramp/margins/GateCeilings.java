@@ -11,6 +11,7 @@ import clipramp.gate.StandingVoltage;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.OptionalDouble;
+import java.util.function.DoubleFunction;
 import java.util.function.ToDoubleFunction;
 
 /** What the thyristor's gate bears: between pulses, in them, and on the whole (model.md section 7). */
@@ -81,7 +82,7 @@ final class GateCeilings {
             OptionalDouble limit,
             ToDoubleFunction<Pulse> peak,
             String key,
-            java.util.function.DoubleFunction<String> say) {
+            DoubleFunction<String> say) {
         if (limit.isEmpty()) {
             return Finding.worst(
                     kind,

@@ -1,5 +1,6 @@
 package clipramp.margins;
 
+import clipramp.circuit.ClipSupply.Rectifier;
 import clipramp.circuit.ClipSupply.Tap;
 import clipramp.circuit.Condition;
 import clipramp.circuit.Design;
@@ -13,6 +14,7 @@ import clipramp.firing.Solution;
 import clipramp.gate.TriggerNeed;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import java.util.OptionalDouble;
 
 /** What a reader of a check should know beside its margins: the model's assumptions, with their size here. */
@@ -114,10 +116,8 @@ final class Notes {
         }
     }
 
-    private static java.util.Optional<Double> minimum(Unijunction.BaseOnePulse pulse) {
-        return pulse.minVolts().isPresent()
-                ? java.util.Optional.of(pulse.minVolts().getAsDouble())
-                : java.util.Optional.empty();
+    private static Optional<Double> minimum(Unijunction.BaseOnePulse pulse) {
+        return pulse.minVolts().isPresent() ? Optional.of(pulse.minVolts().getAsDouble()) : Optional.empty();
     }
 
     private void gateEnergy() {
@@ -153,7 +153,7 @@ final class Notes {
     private void stage() {
         if (design.stage() == Stage.HALF_WAVE) {
             add("half-wave-dc", "A half-wave stage draws dc from the line by its nature; the load gets at most half.");
-            if (design.clip().rectifier() == clipramp.circuit.ClipSupply.Rectifier.BRIDGE) {
+            if (design.clip().rectifier() == Rectifier.BRIDGE) {
                 add(
                         "reverse-anode-drive",
                         "The gate is also driven while the anode is negative; that raises the thyristor's reverse"

@@ -4,6 +4,7 @@ import clipramp.circuit.Wanted.Goal;
 import clipramp.circuit.Wanted.Measure;
 import clipramp.firing.Solution;
 import clipramp.margins.Margin.Sense;
+import clipramp.power.LoadPower;
 import clipramp.power.LoadResult;
 import java.util.ArrayList;
 import java.util.List;
@@ -11,6 +12,9 @@ import java.util.Optional;
 
 /** What the knob was wanted to reach at its ends, against what it does. */
 final class WantedMargins {
+    private static final String ASLEEP =
+            "The thyristor stays off here in some condition; the gate, latching and valley-current margins say why.";
+
     private WantedMargins() {}
 
     static List<Margin> of(Bench bench) {
@@ -41,8 +45,16 @@ final class WantedMargins {
                 worst.verdict(),
                 worst.formula(),
                 worst.source(),
-                worst.remedy(),
+                asleep(bench, kind, goal) ? ASLEEP : worst.remedy(),
                 worst.parts());
+    }
+
+    /** More power cannot be had by a smaller R_E where nothing fires at all. */
+    private static boolean asleep(Bench bench, MarginKind kind, Goal goal) {
+        double ohms = bench.design().ramp().rampOhms(goal.position());
+        return kind == MarginKind.WANTED_HIGHEST
+                && bench.conditions().stream()
+                        .anyMatch(at -> bench.load(at.condition(), ohms).watts() == 0);
     }
 
     private static List<Finding> compared(Bench bench, MarginKind kind, Goal goal, JudgedCondition at) {
@@ -115,13 +127,13 @@ final class WantedMargins {
     /** The lowest wanted power in watts at a condition, where one is wanted. */
     static Optional<Double> lowestWatts(Bench bench, JudgedCondition at) {
         return bench.design().wanted().lowest().map(goal -> {
-            double full = clipramp.power.LoadPower.fullWatts(bench.design(), at.condition());
+            double full = LoadPower.fullWatts(bench.design(), at.condition());
             return switch (goal.measure()) {
                 case FRACTION -> goal.to() * full;
                 case WATTS -> goal.to();
                 case VOLTS -> goal.to() * goal.to() / bench.design().load().resistanceOhms();
                 case ANGLE ->
-                    clipramp.power.LoadPower.atFiringAngle(bench.design(), at.condition(), goal.from())
+                    LoadPower.atFiringAngle(bench.design(), at.condition(), goal.from())
                             .watts();
             };
         });

@@ -237,4 +237,12 @@ class JudgeTest {
                 margin(check(SampleDesigns.heater()), MarginKind.THYRISTOR_RMS).offered();
         assertThat(asleep).isCloseTo(awake, within(1e-3 * awake));
     }
+
+    @Test
+    void aRampWithoutAnyResistanceIsJudgedAndLatchesOn() {
+        Check check = check(Changed.with(SampleDesigns.heater(), "ramp.fixed.value", 0.0));
+        assertThat(margin(check, MarginKind.LATCHED_ON).verdict()).isEqualTo(Verdict.FAILS);
+        assertThat(margin(check, MarginKind.WANTED_HIGHEST).remedy()).contains("stays off");
+        assertThat(check.margins()).extracting(Margin::verdict).doesNotContain(Verdict.NOT_JUDGED);
+    }
 }
