@@ -33,7 +33,10 @@ public final class Piece {
     private final Affine fluxDrive = new Affine();
 
     /** dV_C/dt = -rate V_C + driveSource e + driveConstant. */
-    private double rate;
+    double rate;
+
+    double driveSource;
+    double driveConstant;
 
     private double startSeconds;
     private double exponential;
@@ -136,11 +139,7 @@ public final class Piece {
 
     /** C_E dV_C/dt = (V_S - V_C)/R_E - I_E, solved by its particular solution and one exponential. */
     private void charge(Network n, SourceWave source, double startVolts) {
-        double perOhm = 1 / (n.rampOhms * n.capacitorFarads);
-        double perFarad = 1 / n.capacitorFarads;
-        rate = (1 - supply.ramp) * perOhm + emitter.ramp * perFarad;
-        double driveSource = supply.source * perOhm - emitter.source * perFarad;
-        double driveConstant = supply.constant * perOhm - emitter.constant * perFarad;
+        drive(n);
         steady = (driveConstant - driveSource * source.dropVolts) / rate;
         double standing = steady;
         for (int i = 0; i < source.count; i++) {
@@ -154,6 +153,15 @@ public final class Piece {
             }
         }
         exponential = startVolts - standing;
+    }
+
+    /** Sets rate, driveSource and driveConstant from the node equations. */
+    void drive(Network n) {
+        double perFarad = 1 / n.capacitorFarads;
+        double perOhm = perFarad / n.rampOhms;
+        rate = (1 - supply.ramp) * perOhm + emitter.ramp * perFarad;
+        driveSource = supply.source * perOhm - emitter.source * perFarad;
+        driveConstant = supply.constant * perOhm - emitter.constant * perFarad;
     }
 
     /** Works out ramp and source voltage with their slopes at a time; the getters below then speak of that time. */

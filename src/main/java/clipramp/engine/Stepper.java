@@ -47,6 +47,26 @@ public final class Stepper {
         settle();
     }
 
+    /** Goes on in the middle of a half cycle, without a pulse transformer, in a state that is known to agree with itself. */
+    void resume(
+            SourceWave source,
+            Mode nowMode,
+            boolean nowRectifies,
+            boolean nowClips,
+            boolean nowGateConducts,
+            double nowSeconds,
+            double nowRampVolts) {
+        wave = source;
+        mode = nowMode;
+        rectifies = nowRectifies;
+        clips = nowClips;
+        gateConducts = nowGateConducts;
+        clamps = false;
+        seconds = nowSeconds;
+        rampVolts = nowRampVolts;
+        fluxAmps = 0;
+    }
+
     /** Puts another source behind the dropper from here on: the thyristor takes the supply away or gives it back. */
     public void switchSource(SourceWave source) {
         wave = source;
@@ -171,29 +191,17 @@ public final class Stepper {
     }
 
     private double rectifierSwitches(double limit) {
-        form.copy(piece.supply);
-        form.source -= 1;
-        if (!rectifies) {
-            form.negate();
-        }
+        EventForms.rectifier(piece, form);
         return search(limit);
     }
 
     private double zenerSwitches(double limit) {
-        form.copy(piece.supply);
-        form.constant -= n.zenerKneeVolts;
-        if (clips) {
-            form.negate();
-        }
+        EventForms.zener(n, piece, form);
         return search(limit);
     }
 
     private double gateSwitches(double limit) {
-        form.copy(piece.gate);
-        form.constant -= n.gateKneeVolts;
-        if (gateConducts) {
-            form.negate();
-        }
+        EventForms.gate(n, piece, form);
         return search(limit);
     }
 
@@ -208,19 +216,13 @@ public final class Stepper {
         return search(limit);
     }
 
-    /** V_C - V_P rises to zero. */
     private double peakReached(double limit) {
-        form.copy(piece.peak);
-        form.ramp -= 1;
-        form.negate();
+        EventForms.peak(piece, form);
         return search(limit);
     }
 
-    /** iota V_S - I_E rises to zero. */
     private double valleyReached(double limit) {
-        form.copy(piece.emitter);
-        form.negate();
-        form.add(n.valleySiemens, piece.supply);
+        EventForms.valley(n, piece, form);
         return search(limit);
     }
 
@@ -232,8 +234,7 @@ public final class Stepper {
 
     /** The emitter gets its peak-point current, and the pulse would be regenerative. */
     private double stallFires(double limit) {
-        form.copy(piece.emitter);
-        form.constant -= n.peakCurrentAmps;
+        EventForms.peakCurrent(n, piece, form);
         double enough = search(limit);
         if (enough >= limit) {
             return enough;
@@ -351,6 +352,14 @@ public final class Stepper {
     /** Whether the zener conducts now. */
     public boolean clips() {
         return clips;
+    }
+
+    boolean rectifies() {
+        return rectifies;
+    }
+
+    boolean gateConducts() {
+        return gateConducts;
     }
 
     public Network network() {

@@ -1,0 +1,315 @@
+package clipramp.firing;
+
+import clipramp.engine.Event;
+import clipramp.engine.Mode;
+import clipramp.engine.Network;
+import clipramp.engine.SourceWave;
+import clipramp.engine.SwiftStepper;
+
+/**
+ * The periodic state of one unit, as {@link PeriodicState} finds it, but only what a statistic over many units needs:
+ * when the thyristor fires and what becomes of the pulse. For a sinusoidal line without lag and direct coupling.
+ * Allocates nothing once made.
+ *
+ * <p>The residual voltage is a fixed point of the half cycle. A half cycle forgets nearly all of the residual that it
+ * began with, so two of them and a secant through them leave an error under 1e-9 V; whatever looks otherwise (hunting, a
+ * pulse across the zero, no clipping) is refused and left to {@link Firing}.
+ */
+public final class SwiftFiring {
+    /** Error of a firing instant that is let stand, s: 5e-12 of a half cycle at 50 Hz. */
+    private static final double LEFT_SECONDS = 5e-14;
+
+    private static final double SAME_VOLTS = 1e-10;
+
+    /** Farther than this the half cycle's map may be on another branch, V. */
+    private static final double NEAR_VOLTS = 0.01;
+
+    /** Relative bend of everything that depends on the residual, 1/V: three times the most that was seen. */
+    private static final double BENT = 30;
+
+    /** Share of the residual's error that a half cycle may keep for the secant to be trusted. */
+    private static final double MOST_KEPT = 0.2;
+
+    private static final int MOST_PASSES = 8;
+    private static final int MOST_EVENTS = 5000;
+
+    /** How far the gate current of the pulse going on has been followed. */
+    private enum Watch {
+        NONE,
+        FRESH,
+        HELD
+    }
+
+    private final Network n;
+    private final SwiftStepper stepper;
+    private double omega;
+    private double crestVolts;
+    private double loadDropVolts;
+    private double loadLoopOhms;
+    private boolean bothHalves;
+
+    private Watch watch = Watch.NONE;
+    private double pulseSeconds;
+    private int begun;
+    private boolean going;
+    private boolean doubt;
+
+    private double firstSeconds;
+    private double firedSeconds;
+    private double firedShift;
+    private int firedPulse;
+    private boolean following;
+    private boolean stalled;
+    private boolean latchedOn;
+    private double clipUntil;
+    private double residualVolts;
+    private Mode residualMode = Mode.OFF;
+    private long halves;
+
+    public SwiftFiring(Network network) {
+        n = network;
+        stepper = new SwiftStepper(network);
+    }
+
+    /** Sets the load's current with the thyristor on: i = (crest |sin| - drop)/loop, in the positive half or in both. */
+    public void load(double lineCrestVolts, double dropVolts, double loopOhms, boolean inBothHalves) {
+        crestVolts = lineCrestVolts;
+        loadDropVolts = dropVolts;
+        loadLoopOhms = loopOhms;
+        bothHalves = inBothHalves;
+    }
+
+    /**
+     * Solves the network as it stands.
+     *
+     * @param wave supply behind the dropper over a half cycle (a period for a single diode), from the line's zero on
+     * @param angularRate omega of the line, rad/s
+     * @return false where it is not sure of itself: ask {@link Firing}
+     */
+    public boolean solve(SourceWave wave, double angularRate) {
+        omega = angularRate;
+        stepper.take(wave);
+        // As the reference does, from a discharged capacitor: where two periodic states exist, it decides between them.
+        Mode mode = Mode.OFF;
+        double volts = 0;
+        Mode modeBefore = Mode.STALLED;
+        double voltsBefore = 0;
+        double endBefore = 0;
+        for (int pass = 0; pass < MOST_PASSES; pass++) {
+            if (!run(mode, volts, pass == 0, 0)) {
+                return false;
+            }
+            double end = stepper.rampVolts();
+            Mode endMode = stepper.mode();
+            double kept = stepper.kept();
+            boolean followed = !Double.isNaN(kept);
+            if (!followed && endMode == mode && modeBefore == mode) {
+                kept = (end - endBefore) / (volts - voltsBefore);
+            }
+            if (pass > 0 && endMode == mode && Math.abs(end - volts) < SAME_VOLTS) {
+                return settled(mode, volts);
+            }
+            double next = end;
+            if (!Double.isNaN(kept)) {
+                if (!(Math.abs(kept) < MOST_KEPT)) {
+                    return false;
+                }
+                double step = (end - volts) / (1 - kept);
+                next = volts + step;
+                double left = followed ? Math.abs(kept) * step * step * BENT : Math.abs(kept * (end - volts));
+                if (pass > 0 && endMode == mode && Math.abs(step) < NEAR_VOLTS && left * sensitivity() < LEFT_SECONDS) {
+                    return fire(mode, next, step) && settled(mode, next);
+                }
+            }
+            modeBefore = mode;
+            voltsBefore = volts;
+            endBefore = end;
+            volts = next;
+            mode = endMode;
+        }
+        return false;
+    }
+
+    /** How the firing instant moves with the residual, s/V; a whole time constant's worth where that is not known. */
+    private double sensitivity() {
+        return !Double.isNaN(firedShift) ? Math.abs(firedShift) : n.rampOhms * n.capacitorFarads;
+    }
+
+    /** Moves the firing instant to the residual found. */
+    private boolean fire(Mode mode, double volts, double byVolts) {
+        if (Double.isNaN(firedSeconds)) {
+            return true;
+        }
+        if (BENT * byVolts * byVolts * sensitivity() < LEFT_SECONDS && !Double.isNaN(firedShift)) {
+            firedSeconds += firedShift * byVolts;
+            return true;
+        }
+        return fireFrom(mode, volts);
+    }
+
+    private boolean settled(Mode mode, double volts) {
+        residualMode = mode;
+        residualVolts = volts;
+        return begun == 0 || clipUntil > Double.NEGATIVE_INFINITY;
+    }
+
+    /** Runs once more to the firing pulse; what the rest of the half cycle showed stays. */
+    private boolean fireFrom(Mode mode, double volts) {
+        int pulse = firedPulse;
+        boolean stalledBefore = stalled;
+        boolean latchedOnBefore = latchedOn;
+        double clipUntilBefore = clipUntil;
+        int begunBefore = begun;
+        if (!run(mode, volts, false, pulse) || begun != pulse) {
+            return false;
+        }
+        firedSeconds = pulseSeconds;
+        stalled = stalledBefore;
+        latchedOn = latchedOnBefore;
+        clipUntil = clipUntilBefore;
+        begun = begunBefore;
+        return true;
+    }
+
+    private boolean run(Mode mode, double volts, boolean rough, int onlyToPulse) {
+        following = !rough && onlyToPulse == 0;
+        halves++;
+        watch = Watch.NONE;
+        begun = 0;
+        going = mode == Mode.ON;
+        doubt = false;
+        firstSeconds = Double.NaN;
+        firedSeconds = Double.NaN;
+        firedShift = Double.NaN;
+        stalled = false;
+        latchedOn = false;
+        clipUntil = Double.NEGATIVE_INFINITY;
+        stepper.start(mode, volts, rough);
+        for (int events = 0; events < MOST_EVENTS; events++) {
+            boolean clippedBefore = stepper.clips();
+            boolean held = stepper.mode() == Mode.STALLED;
+            double from = stepper.seconds();
+            Event event = stepper.advance();
+            if (watch != Watch.NONE) {
+                follow(event);
+            }
+            if (event == Event.FIRES) {
+                fires(held);
+            } else if (event == Event.STALLS) {
+                stalled |= begun == 0;
+            } else if (event == Event.VALLEY) {
+                going = false;
+            } else if (event != Event.END && going && stepper.mode() == Mode.ON) {
+                latchedOn |= stepper.isHeldByResistor();
+            }
+            if (clippedBefore && !stepper.clips()) {
+                clipUntil = stepper.seconds();
+            }
+            if (doubt || event == Event.END || onlyToPulse > 0 && begun == onlyToPulse) {
+                break;
+            }
+        }
+        if (stepper.clips()) {
+            clipUntil = stepper.seconds();
+        }
+        return !doubt && (watch == Watch.NONE);
+    }
+
+    private void fires(boolean afterStall) {
+        double now = stepper.seconds();
+        if (begun == 0) {
+            firstSeconds = now;
+            stalled = afterStall;
+        }
+        begun++;
+        going = true;
+        if (Double.isNaN(firedSeconds)) {
+            watch = following ? Watch.FRESH : Watch.NONE;
+            pulseSeconds = now;
+            firedShift = stepper.firingShift();
+        }
+    }
+
+    /** Follows the gate current through a piece of the pulse until it falls under the trigger current. */
+    private void follow(Event event) {
+        double until = stepper.triggerHeldUntil();
+        if (Double.isNaN(until)) {
+            doubt = true;
+        } else if (until == Double.POSITIVE_INFINITY) {
+            watch = Watch.HELD;
+            if (event == Event.VALLEY) {
+                over(stepper.seconds());
+            }
+        } else if (until == Double.NEGATIVE_INFINITY) {
+            doubt = watch == Watch.HELD;
+            watch = Watch.NONE;
+        } else {
+            over(until);
+        }
+    }
+
+    private void over(double untilSeconds) {
+        watch = Watch.NONE;
+        double held = untilSeconds - pulseSeconds;
+        if (held > 0
+                && held >= n.turnOnSeconds
+                && anodeAmps(pulseSeconds) > 0
+                && anodeAmps(untilSeconds) >= n.latchingAmps) {
+            firedSeconds = pulseSeconds;
+            firedPulse = begun;
+        }
+    }
+
+    private double anodeAmps(double seconds) {
+        double sine = Math.sin(omega * seconds);
+        double driving = crestVolts * (bothHalves ? Math.abs(sine) : sine) - loadDropVolts;
+        return driving > 0 ? driving / loadLoopOhms : 0;
+    }
+
+    // --- what the periodic state is ---------------------------------------------------------------------------------
+
+    /** Firing angle, rad from the line's zero; NaN if the thyristor stays off. */
+    public double firingRad() {
+        return omega * firedSeconds;
+    }
+
+    /** In one word; it never hunts here. */
+    public FiringState state() {
+        if (begun == 0) {
+            return FiringState.SILENT;
+        }
+        if (stalled) {
+            return FiringState.STALLS;
+        }
+        if (latchedOn) {
+            return FiringState.LATCHED_ON;
+        }
+        double shown = !Double.isNaN(firedSeconds) ? firedSeconds : firstSeconds;
+        return shown > clipUntil ? FiringState.END_PULSE : FiringState.FIRES;
+    }
+
+    /** Ramp voltage at the line zero, V. */
+    public double residualVolts() {
+        return residualVolts;
+    }
+
+    /** What the device does at the line zero. */
+    public Mode residualMode() {
+        return residualMode;
+    }
+
+    /** Half cycles run since made. */
+    public long halves() {
+        return halves;
+    }
+
+    /** Pieces run since made. */
+    public long pieces() {
+        return stepper.pieces();
+    }
+
+    /** Those of them that the careful stepper did. */
+    public long carefulPieces() {
+        return stepper.carefulPieces();
+    }
+}
