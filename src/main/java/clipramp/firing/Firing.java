@@ -3,6 +3,7 @@ package clipramp.firing;
 import clipramp.circuit.Condition;
 import clipramp.circuit.Design;
 import clipramp.circuit.Stage;
+import clipramp.engine.Network;
 import java.util.Optional;
 
 /** The firing circuit solved: what every other room asks. */
@@ -18,6 +19,17 @@ public final class Firing {
      */
     public static Solution solve(Design design, Condition condition, double rampOhms) {
         return PeriodicState.solve(FiringCase.of(design, condition, rampOhms), PieceSink.NONE);
+    }
+
+    /**
+     * Periodic state of one unit whose parts were drawn.
+     *
+     * @param design stage, load and supply
+     * @param condition the unit's line and temperature
+     * @param network the unit's network, R_E included
+     */
+    public static Solution solve(Design design, Condition condition, Network network) {
+        return PeriodicState.solve(FiringCase.of(design, condition, network), PieceSink.NONE);
     }
 
     /**

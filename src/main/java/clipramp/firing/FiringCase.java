@@ -22,11 +22,16 @@ record FiringCase(
         double conductingVolts) {
 
     static FiringCase of(Design design, Condition condition, double rampOhms) {
+        return of(design, condition, NetworkOfDesign.of(design, condition, rampOhms));
+    }
+
+    /** The design's stage, load and supply around a network whose numbers were drawn. */
+    static FiringCase of(Design design, Condition condition, Network network) {
         LineWave line = new LineWave(design.line(), condition);
         return new FiringCase(
                 design,
                 condition,
-                NetworkOfDesign.of(design, condition, rampOhms),
+                network,
                 line,
                 SupplyTiming.of(design, line),
                 new LoadCurrent(design, condition),
