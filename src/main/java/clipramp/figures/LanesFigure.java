@@ -75,7 +75,10 @@ public record LanesFigure(Lanes lanes, double fromRad, double toRad, OptionalDou
         List<List<String>> rows = new ArrayList<>();
         double firing = lanes.firingRad().orElse(Double.POSITIVE_INFINITY);
         boolean fired = false;
-        for (double degrees : Ticks.between(0, Math.toDegrees(lanes.spanRad()), TABLE_STEP_DEGREES)) {
+        for (double degrees : Ticks.between(
+                0,
+                Math.toDegrees(lanes.spanRad()),
+                lanes.spanRad() > Math.PI ? 2 * TABLE_STEP_DEGREES : TABLE_STEP_DEGREES)) {
             double rad = Math.toRadians(degrees);
             if (!fired && rad >= firing) {
                 rows.add(row(firing - INSTANT_RAD, "before firing"));

@@ -277,8 +277,15 @@ final class LanesPainter {
             return plot.getMaxY() - (value - low) / (high - low) * plot.getHeight();
         }
 
+        /** As many as there is room for, but never the zero alone. */
         List<Double> marks() {
-            return Ticks.between(low, high, Ticks.step(high - low, most));
+            int steps = most;
+            List<Double> marks = Ticks.between(low, high, Ticks.step(high - low, steps));
+            while (marks.size() < 2) {
+                steps++;
+                marks = Ticks.between(low, high, Ticks.step(high - low, steps));
+            }
+            return marks;
         }
     }
 }

@@ -31,9 +31,7 @@ final class PartsSection {
     void circuit() {
         paper.section("Circuit");
         CircuitFigure figure = new CircuitFigure(design);
-        paper.text("Stage " + design.stage().word() + ", supply tapped from the "
-                + design.clip().tap().word() + " through a "
-                + design.clip().rectifier().word() + ", gate drive "
+        paper.text("Stage " + design.stage().word() + ", " + supplyInWords() + ", gate drive "
                 + design.gate().coupling().word() + ".");
         paper.figure(figure, paper.width() / (float) figure.proportion());
         if (!design.notes().isBlank()) {
@@ -45,6 +43,13 @@ final class PartsSection {
             grid.row(point.name(), point.place());
         }
         paper.add(grid.table());
+    }
+
+    private String supplyInWords() {
+        String through = " through a " + design.clip().rectifier().word();
+        return design.clip().isIsolated()
+                ? "supply from a synchronising winding" + through
+                : "supply tapped from the " + design.clip().tap().word() + through;
     }
 
     void parts() {

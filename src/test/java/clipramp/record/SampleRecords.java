@@ -19,7 +19,8 @@ public final class SampleRecords {
     public static void main(String[] arguments) throws IOException {
         Path folder = Path.of(arguments[0]);
         Files.createDirectories(folder);
-        for (String example : List.of("drying-cabinet", "cabinet-gone-wrong", "upper-heaters", "seed-drawer")) {
+        for (String example : List.of(
+                "drying-cabinet", "cabinet-gone-wrong", "upper-heaters", "seed-drawer", "shed-heater", "tray-lamp")) {
             Files.write(folder.resolve(example + ".pdf"), DesignRecord.bytes(of(example), PageSize.A4));
         }
         Files.write(
