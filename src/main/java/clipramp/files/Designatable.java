@@ -15,6 +15,7 @@ final class Designatable {
             "ramp.capacitor",
             "ramp.fixed",
             "ramp.pot",
+            "ramp.pot.track",
             "ramp.pot.shunt",
             "trigger.device",
             "trigger.base-one",

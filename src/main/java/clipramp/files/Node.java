@@ -40,6 +40,19 @@ sealed interface Node {
             return get(key).map(n -> n instanceof Scalar s ? s.text() : "").orElse("");
         }
 
+        /** Where the value of a dotted key stands, or the nearest mapping around it; the file's first line at last. */
+        Place placeOf(String dotted) {
+            Node here = this;
+            for (String step : dotted.split("\\.", -1)) {
+                Optional<Node> below = here instanceof Mapping mapping ? mapping.get(step) : Optional.empty();
+                if (below.isEmpty()) {
+                    break;
+                }
+                here = below.get();
+            }
+            return here == this ? Place.of(place.file(), 1, 1) : here.place();
+        }
+
         Mapping with(String key, Node value) {
             List<Entry> changed = new ArrayList<>();
             boolean replaced = false;

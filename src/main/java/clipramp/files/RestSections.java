@@ -155,11 +155,26 @@ final class RestSections {
             if (!known.contains(entry.key())) {
                 root.findings().unknown(entry.place(), path, entry.key(), "no part has this key", known);
             } else if (entry.value() instanceof Scalar scalar) {
-                names.put(entry.key(), scalar.text());
+                designator(root.findings(), names, entry.key(), scalar, path);
             } else {
                 root.findings().problem(entry.value().place(), path, "expected one name, such as C3.");
             }
         }
         return names;
+    }
+
+    private static void designator(
+            Findings findings, Map<String, String> names, String key, Scalar scalar, String path) {
+        String part = key.equals("ramp.pot") ? "ramp.pot.track" : key;
+        if (names.containsValue(scalar.text())) {
+            findings.problem(
+                    scalar.place(),
+                    path,
+                    scalar.text(),
+                    "a name of its own",
+                    "read \"" + scalar.text() + "\", which names another part already. Give each part its own.");
+        } else if (names.put(part, scalar.text()) != null) {
+            findings.problem(scalar.place(), path, "the pot is named twice, as ramp.pot and as ramp.pot.track.");
+        }
     }
 }

@@ -7,11 +7,9 @@ import clipramp.files.Key.Need;
 import clipramp.files.Node.Mapping;
 import clipramp.files.Node.Scalar;
 import clipramp.files.Node.Sequence;
-import clipramp.units.Expected;
 import clipramp.units.Quantity;
 import clipramp.units.QuantityReader;
 import clipramp.units.RefusedQuantityException;
-import clipramp.units.Unit;
 import java.util.ArrayList;
 import java.util.HashSet;
 import java.util.List;
@@ -86,15 +84,7 @@ final class Scope {
 
     /** Where the value of a dotted key stands, or the nearest mapping around it that is there. */
     Place placeOfPath(String dotted) {
-        Node here = node;
-        for (String step : dotted.split("\\.")) {
-            Optional<Node> below = here instanceof Mapping mapping ? mapping.get(step) : Optional.empty();
-            if (below.isEmpty()) {
-                break;
-            }
-            here = below.get();
-        }
-        return here == node ? Place.of(node.place().file(), 1, 1) : here.place();
+        return node.placeOf(dotted);
     }
 
     String textOf(String name) {
@@ -203,20 +193,7 @@ final class Scope {
     double ratio(String name) {
         Key key = catalogue.require(catalogued(name));
         return scalar(name)
-                .flatMap(s -> read(name, s, () -> {
-                    String text = s.text();
-                    int colon = text.indexOf(':');
-                    if (colon < 0) {
-                        return QuantityReader.read(text, key.expected()).value();
-                    }
-                    Expected side = Expected.within(Unit.NUMBER, 1e-3, 1e6);
-                    double over =
-                            QuantityReader.read(text.substring(0, colon), side).value();
-                    double under =
-                            QuantityReader.read(text.substring(colon + 1), side).value();
-                    return QuantityReader.read(Double.toString(over / under), key.expected())
-                            .value();
-                }))
+                .flatMap(s -> read(name, s, () -> RatioText.read(s.text(), key.expected())))
                 .orElse(key.standIn());
     }
 

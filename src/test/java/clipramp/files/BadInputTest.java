@@ -45,6 +45,11 @@ class BadInputTest {
     static Stream<Mistake> mistakes() {
         return Stream.of(
                 new Mistake(
+                        "{ramp.capacitor: C3}",
+                        "{ramp.capacitor: C3, clip.dropper: ¦C3}",
+                        "designators.clip.dropper",
+                        "names another part already"),
+                new Mistake(
                         "10 kΩ ±5 % 12 W",
                         "¦10 mohm",
                         "clip.dropper",

@@ -62,13 +62,13 @@ class EditPropertyTest {
             assertThat(changed.valueAt(path)).as(as).contains(value);
             Design design = read(changed, as);
             if (!path.equals("title") && !path.equals("notes") && !value.startsWith("{")) {
-                Design overridden = DesignFiles.load(
-                                new Source("o", text.text()), List.of(path + "=" + value), SHIPPED)
+                Design overridden = DesignFiles.load(new Source("o", text.text()), List.of(path + "=" + value), SHIPPED)
                         .design();
                 assertThat(design).as(as).isEqualTo(overridden);
             }
             assertThat(changed.withValue(path, value).text()).as(as).isEqualTo(changed.text());
-            assertThat(read(new DesignText("w", DesignWriter.write(design), List.of()), as)).isEqualTo(design);
+            assertThat(read(new DesignText("w", DesignWriter.write(design), List.of()), as))
+                    .isEqualTo(design);
             text = changed;
         }
     }
