@@ -1,0 +1,27 @@
+package clipramp.spread;
+
+import clipramp.circuit.Design;
+import clipramp.engine.UnitValues;
+import java.util.List;
+
+/** A lot of units drawn alike: who number so-and-so is depends on nothing but the seed. */
+record Lot(Design design, List<Factor> factors, DrawLaw law, long seed) {
+    /** Fills in unit number so-and-so. */
+    void draw(long number, UnitValues unit) {
+        for (int k = 0; k < factors.size(); k++) {
+            Factor factor = factors.get(k);
+            factor.slot().set(unit, factor.value(Chance.of(seed, number, k), law));
+        }
+    }
+
+    /** The same lot with one factor held between other limits. */
+    Lot with(int index, Factor changed) {
+        List<Factor> others = new java.util.ArrayList<>(factors);
+        others.set(index, changed);
+        return new Lot(design, List.copyOf(others), law, seed);
+    }
+
+    UnitValues blank() {
+        return UnitValues.nominal(design);
+    }
+}

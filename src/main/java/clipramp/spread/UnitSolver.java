@@ -1,0 +1,47 @@
+package clipramp.spread;
+
+import clipramp.circuit.Condition;
+import clipramp.circuit.Design;
+import clipramp.circuit.Stage;
+import clipramp.engine.Network;
+import clipramp.engine.UnitValues;
+import clipramp.firing.Firing;
+import clipramp.firing.Solution;
+import clipramp.power.LoadPower;
+import clipramp.power.LoadResult;
+
+/** Solves one drawn unit at one knob position. Not for two threads at once. */
+final class UnitSolver {
+    private final Design design;
+    private final Network network = new Network();
+
+    UnitSolver(Design design) {
+        this.design = design;
+    }
+
+    /**
+     * @param unit the drawn unit
+     * @param trackShare share of the pot's track in use, 0..1
+     * @param into filled with what it does
+     */
+    void solve(UnitValues unit, double trackShare, UnitOutcome into) {
+        solveAt(unit, unit.rampOhms(trackShare), into);
+    }
+
+    /** The same for a whole R_E in ohms. */
+    void solveAt(UnitValues unit, double rampOhms, UnitOutcome into) {
+        unit.fill(network, rampOhms);
+        Condition condition = new Condition(unit.lineVolts, unit.lineHertz, unit.celsius);
+        Solution solution = Firing.solve(design, condition, network);
+        LoadResult load = LoadPower.of(design, condition, solution);
+        into.firingRad = solution.shown().firingRad().orElse(Double.NaN);
+        into.state = solution.state();
+        into.watts = load.watts();
+        into.fraction = load.fraction();
+    }
+
+    /** Whether the load can get both half cycles. */
+    boolean isFullWave() {
+        return design.stage() != Stage.HALF_WAVE;
+    }
+}
