@@ -14,8 +14,7 @@ import clipramp.engine.UnitValues;
  * @param law how it lies between them
  * @param slot where it goes
  */
-public record Factor(
-        String path, String name, Kind kind, double low, double nominal, double high, Law law, Slot slot) {
+public record Factor(String path, String name, Kind kind, double low, double nominal, double high, Law law, Slot slot) {
     /** Where a factor comes from, and so what could be done about it. */
     public enum Kind {
         /** A bought part with a tolerance: a tighter one can be bought. */

@@ -41,15 +41,21 @@ public final class Factors {
             all.programmable(trigger);
         }
         all.part("gate.series", "gate series resistor", design.gate().series(), (u, v) -> u.gateSeriesOhms = v);
-        design.gate().shunt().ifPresent(p -> all.part(
-                "gate.shunt", "gate-cathode resistor", p, (u, v) -> u.gateShuntOhms = v));
+        design.gate()
+                .shunt()
+                .ifPresent(p -> all.part("gate.shunt", "gate-cathode resistor", p, (u, v) -> u.gateShuntOhms = v));
         return List.copyOf(all.factors);
     }
 
     private void surroundings(Design design) {
         var line = design.line();
-        outside("line.voltage", "line voltage", line.lowVolts(), line.volts(), line.highVolts(), (u, v) ->
-                u.lineVolts = v);
+        outside(
+                "line.voltage",
+                "line voltage",
+                line.lowVolts(),
+                line.volts(),
+                line.highVolts(),
+                (u, v) -> u.lineVolts = v);
         double hertz = line.hertz();
         outside(
                 "line.frequency",
@@ -72,16 +78,26 @@ public final class Factors {
         String key = "trigger.device.";
         sheet(key + "standoff", "standoff ratio", device.standoff(), (u, v) -> u.standoff = v);
         sheet(key + "interbase", "interbase resistance", device.interbaseOhms(), (u, v) -> u.interbaseOhms = v);
-        sheet(key + "interbase-drift", "drift of the interbase resistance", device.interbaseDriftPerKelvin(), (u, v) ->
-                u.interbaseDrift = v);
+        sheet(
+                key + "interbase-drift",
+                "drift of the interbase resistance",
+                device.interbaseDriftPerKelvin(),
+                (u, v) -> u.interbaseDrift = v);
         sheet(key + "emitter-drop", "emitter diode drop", device.emitterDropVolts(), (u, v) -> u.emitterDropVolts = v);
-        sheet(key + "emitter-drift", "drift of the emitter diode", device.emitterDriftVoltsPerKelvin(), (u, v) ->
-                u.emitterDrift = v);
+        sheet(
+                key + "emitter-drift",
+                "drift of the emitter diode",
+                device.emitterDriftVoltsPerKelvin(),
+                (u, v) -> u.emitterDrift = v);
         sheet(key + "peak-current", "peak-point current", device.peakCurrentAmps(), (u, v) -> u.peakCurrentAmps = v);
         sheet(key + "valley.current", "valley current", device.valley().amps(), (u, v) -> u.valleyAmps = v);
         sheet(key + "valley.voltage", "valley voltage", device.valley().volts(), (u, v) -> u.valleyVolts = v);
-        device.modulated().ifPresent(m -> sheet(
-                key + "modulated.current", "modulated interbase current", m.amps(), (u, v) -> u.modulatedAmps = v));
+        device.modulated()
+                .ifPresent(m -> sheet(
+                        key + "modulated.current",
+                        "modulated interbase current",
+                        m.amps(),
+                        (u, v) -> u.modulatedAmps = v));
     }
 
     private void programmable(ProgrammableTrigger trigger) {
@@ -116,8 +132,11 @@ public final class Factors {
                 ProgrammableDevice.amps(device.valleyCurrentAmps(), gateOhms, Characteristic::highest),
                 Law.THREE_POINT,
                 (u, v) -> u.valleyAmps = v);
-        sheet("trigger.device.forward.voltage", "forward voltage", device.forwardVolts(), (u, v) ->
-                u.saturationVolts = v);
+        sheet(
+                "trigger.device.forward.voltage",
+                "forward voltage",
+                device.forwardVolts(),
+                (u, v) -> u.saturationVolts = v);
     }
 
     private void outside(String path, String name, double low, double nominal, double high, Slot slot) {
@@ -134,8 +153,7 @@ public final class Factors {
         add(path, name, Kind.DEVICE, figure.lowest(), figure.nominal(), figure.highest(), law, slot);
     }
 
-    private void add(
-            String path, String name, Kind kind, double low, double nominal, double high, Law law, Slot slot) {
+    private void add(String path, String name, Kind kind, double low, double nominal, double high, Law law, Slot slot) {
         if (low < high) {
             factors.add(new Factor(path, name, kind, low, nominal, high, law, slot));
         }

@@ -1,0 +1,97 @@
+package clipramp.spread;
+
+import clipramp.circuit.Design;
+import clipramp.engine.UnitValues;
+import clipramp.firing.FiringState;
+import java.util.stream.IntStream;
+
+/** Draws the units and keeps what each does at each position. Both cores work; a unit is the same whoever draws it. */
+final class Sampling {
+    /** Units that one core takes at a time. */
+    private static final int CHUNK = 128;
+
+    /** Chunks between two looks at the watch. */
+    private static final int CHUNKS_A_LOOK = 8;
+
+    private final Lot lot;
+    private final double[] shares;
+    final double[][] firingRad;
+    final double[][] watts;
+    final double[][] fraction;
+    final FiringState[][] states;
+    final boolean[] off;
+    private final boolean[] holds;
+    private int done;
+
+    Sampling(Lot lot, double[] trackShares, int samples) {
+        this.lot = lot;
+        shares = trackShares.clone();
+        firingRad = new double[shares.length][samples];
+        watts = new double[shares.length][samples];
+        fraction = new double[shares.length][samples];
+        states = new FiringState[shares.length][samples];
+        off = new boolean[shares.length * samples];
+        holds = new boolean[samples];
+    }
+
+    void run(Watch watch) {
+        int samples = holds.length;
+        int block = CHUNK * CHUNKS_A_LOOK;
+        while (done < samples && !watch.isCancelled()) {
+            int from = done;
+            int to = Math.min(samples, from + block);
+            int chunks = (to - from + CHUNK - 1) / CHUNK;
+            IntStream.range(0, chunks)
+                    .parallel()
+                    .forEach(c -> chunk(from + c * CHUNK, Math.min(to, from + (c + 1) * CHUNK)));
+            done = to;
+            watch.progress(done, samples);
+        }
+    }
+
+    private void chunk(int from, int to) {
+        Design design = lot.design();
+        UnitSolver solver = new UnitSolver(design);
+        UnitValues unit = lot.blank();
+        UnitOutcome outcome = new UnitOutcome();
+        WantedTest wanted = new WantedTest(design);
+        for (int number = from; number < to; number++) {
+            lot.draw(number, unit);
+            for (int p = 0; p < shares.length; p++) {
+                solver.solve(unit, shares[p], outcome);
+                firingRad[p][number] = outcome.latestRad();
+                off[p * holds.length + number] = Double.isNaN(outcome.firingRad);
+                watts[p][number] = outcome.watts;
+                fraction[p][number] = outcome.fraction;
+                states[p][number] = outcome.state;
+            }
+            holds[number] = wanted.holds(solver, unit);
+        }
+    }
+
+    /** Units drawn. */
+    int done() {
+        return done;
+    }
+
+    /** Units that reach what is wanted. */
+    int holding() {
+        return (int) IntStream.range(0, done).filter(i -> holds[i]).count();
+    }
+
+    /** Share of units at a position in a state. */
+    double share(int position, FiringState state) {
+        long count = IntStream.range(0, done)
+                .filter(i -> states[position][i] == state)
+                .count();
+        return (double) count / done;
+    }
+
+    /** Share of units at a position whose thyristor stays off. */
+    double misfires(int position) {
+        long count = IntStream.range(0, done)
+                .filter(i -> off[position * holds.length + i])
+                .count();
+        return (double) count / done;
+    }
+}

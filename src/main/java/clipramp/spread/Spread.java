@@ -1,0 +1,154 @@
+package clipramp.spread;
+
+import clipramp.circuit.Design;
+import clipramp.engine.UnitValues;
+import clipramp.firing.FiringState;
+import clipramp.margins.Check;
+import clipramp.margins.Judge;
+import clipramp.margins.Margin;
+import clipramp.margins.Verdict;
+import clipramp.spread.PositionSpread.Extremes;
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.Comparator;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import java.util.TreeMap;
+import java.util.function.ToDoubleFunction;
+import java.util.stream.IntStream;
+import org.apache.commons.math3.stat.descriptive.rank.Percentile;
+
+/** Tolerances, temperature and line drawn together. */
+public final class Spread {
+    private static final int KNOB_STEPS = 10;
+    private static final double MID_KNOB = 0.5;
+
+    /** Units to each of the lots that shares and remedies are worked out on. */
+    private static final int LOT_UNITS = 1000;
+
+    private Spread() {}
+
+    /**
+     * @param design a sound design that can be solved
+     * @param options how many units, which seed, which law
+     * @param watch is told of progress and may cancel: then the finished part is told
+     */
+    public static SpreadResult run(Design design, SpreadOptions options, Watch watch) {
+        Lot lot = new Lot(design, Factors.of(design), options.law(), options.seed());
+        double[] positions = design.ramp().pot().isPresent()
+                ? IntStream.rangeClosed(0, KNOB_STEPS)
+                        .mapToDouble(i -> (double) i / KNOB_STEPS)
+                        .toArray()
+                : new double[] {0};
+        double[] shares = Arrays.stream(positions)
+                .map(p -> WantedTest.share(design.ramp(), p))
+                .toArray();
+        Sampling sampling = new Sampling(lot, shares, options.samples());
+        sampling.run(watch);
+        boolean more = !watch.isCancelled();
+        List<PositionSpread> spreads = new ArrayList<>();
+        for (int p = 0; p < positions.length && sampling.done() > 0; p++) {
+            OptionalDouble position = positions.length == 1 ? OptionalDouble.empty() : OptionalDouble.of(positions[p]);
+            spreads.add(position(lot, sampling, p, position, shares[p]));
+        }
+        boolean wanted = new WantedTest(design).isAsked();
+        int lotUnits = Math.min(LOT_UNITS, options.samples());
+        double middle = WantedTest.share(design.ramp(), MID_KNOB);
+        Judged judged =
+                more ? judged(lot, Math.min(options.judged(), sampling.done()), watch) : new Judged(0, 0, Map.of());
+        return new SpreadResult(
+                options,
+                sampling.done(),
+                lot.factors(),
+                List.copyOf(spreads),
+                wanted ? Optional.of(Yield.of(sampling.holding(), sampling.done())) : Optional.empty(),
+                judged.of() == 0 ? Optional.empty() : Optional.of(Yield.of(judged.held(), judged.of())),
+                judged.failures(),
+                more ? new VarianceShares(lot, middle, lotUnits).all() : List.of(),
+                more && wanted ? new Remedies(lot, lotUnits).all() : List.of());
+    }
+
+    private static PositionSpread position(
+            Lot lot, Sampling sampling, int p, OptionalDouble position, double trackShare) {
+        UnitSolver solver = new UnitSolver(lot.design());
+        UnitOutcome outcome = new UnitOutcome();
+        return new PositionSpread(
+                position,
+                percentiles(sampling.firingRad[p], sampling.done()),
+                percentiles(sampling.watts[p], sampling.done()),
+                percentiles(sampling.fraction[p], sampling.done()),
+                sampling.share(p, FiringState.STALLS),
+                sampling.share(p, FiringState.LATCHED_ON),
+                sampling.share(p, FiringState.END_PULSE),
+                sampling.misfires(p),
+                sampling.share(p, FiringState.HUNTS),
+                extremes(lot, sampling.firingRad[p], sampling.done(), unit -> {
+                    solver.solve(unit, trackShare, outcome);
+                    return outcome.latestRad();
+                }),
+                extremes(lot, sampling.fraction[p], sampling.done(), unit -> {
+                    solver.solve(unit, trackShare, outcome);
+                    return outcome.fraction;
+                }));
+    }
+
+    private static Extremes extremes(Lot lot, double[] samples, int done, ToDoubleFunction<UnitValues> objective) {
+        int least = 0;
+        int greatest = 0;
+        for (int i = 1; i < done; i++) {
+            least = samples[i] < samples[least] ? i : least;
+            greatest = samples[i] > samples[greatest] ? i : greatest;
+        }
+        return new Extremity(lot, objective).search(least, samples[least], greatest, samples[greatest]);
+    }
+
+    private static List<Double> percentiles(double[] values, int done) {
+        Percentile percentile = new Percentile();
+        percentile.setData(values, 0, done);
+        return SpreadResult.PERCENTAGES.stream().map(percentile::evaluate).toList();
+    }
+
+    /**
+     * @param held units that fail no margin
+     * @param of units judged
+     * @param failures share of them that fails a margin, by its id
+     */
+    private record Judged(int held, int of, Map<String, Double> failures) {}
+
+    /** Puts some of the units before the judge, each at its own line and temperature. */
+    private static Judged judged(Lot lot, int units, Watch watch) {
+        List<List<String>> failed = IntStream.range(0, units)
+                .parallel()
+                .mapToObj(number -> {
+                    if (watch.isCancelled()) {
+                        return List.<String>of();
+                    }
+                    UnitValues unit = lot.blank();
+                    lot.draw(number, unit);
+                    Check check = Judge.check(
+                            DrawnDesign.of(lot.design(), unit),
+                            OptionalDouble.of(unit.lineVolts),
+                            OptionalDouble.of(unit.celsius));
+                    return check.margins().stream()
+                            .filter(margin -> margin.verdict() == Verdict.FAILS)
+                            .map(Margin::id)
+                            .distinct()
+                            .toList();
+                })
+                .toList();
+        if (watch.isCancelled()) {
+            return new Judged(0, 0, Map.of());
+        }
+        Map<String, Integer> counts = new TreeMap<>();
+        failed.forEach(ids -> ids.forEach(id -> counts.merge(id, 1, Integer::sum)));
+        Map<String, Double> shares = new LinkedHashMap<>();
+        counts.entrySet().stream()
+                .sorted(Map.Entry.<String, Integer>comparingByValue(Comparator.reverseOrder()))
+                .forEach(entry -> shares.put(entry.getKey(), (double) entry.getValue() / units));
+        int held = (int) failed.stream().filter(List::isEmpty).count();
+        return new Judged(held, units, shares);
+    }
+}
