@@ -23,6 +23,8 @@ import picocli.CommandLine.UnmatchedArgumentException;
 
 /** The one place where failures become words and exit codes. */
 final class Failures {
+    private static final char UNREADABLE = '\uFFFD';
+
     private final Session session;
     private final List<String> words;
 
@@ -68,12 +70,22 @@ final class Failures {
             session.out().exactly(Problems.json(problems, session.ascii()));
         }
         problems.forEach(problem -> session.err().line(Problems.text(problem)));
+        hintAtLocale();
         return ExitCode.UNUSABLE;
     }
 
     private int file(String message) {
         session.err().line(Program.NAME + ": " + message);
+        hintAtLocale();
         return ExitCode.FILE;
+    }
+
+    /** Java reads what a plain C locale cannot carry as replacement signs; the reason is then not the user's typing. */
+    private void hintAtLocale() {
+        if (words.stream().anyMatch(word -> word.indexOf(UNREADABLE) >= 0)) {
+            session.err()
+                    .line("  This locale cannot carry every sign. Write ohm, u, deg and +- instead, or set LC_ALL=C.UTF-8.");
+        }
     }
 
     private Problem ofOption(ParameterException refused) {

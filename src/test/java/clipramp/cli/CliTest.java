@@ -203,6 +203,13 @@ class CliTest {
     }
 
     @Test
+    void signsThatTheLocaleSwallowedAreExplained() {
+        assertThat(CliRun.of("map", DESIGN, "--with=clip.dropper=10 k\uFFFD\uFFFD").err())
+                .contains("Write ohm, u, deg and +- instead");
+        assertThat(CliRun.of("map", DESIGN, "--with=clip.dropper=10 q").err()).doesNotContain("locale");
+    }
+
+    @Test
     void twoFormsCannotBothGoToStandardOutput() {
         CliRun run = CliRun.of("map", DESIGN, "--json", "--csv");
 
