@@ -64,7 +64,6 @@ final class CheckText {
                 .map(Margin::name)
                 .toList();
         if (!failing.isEmpty()) {
-            out.line("");
             out.lines(Paragraph.wrap("This design fails: " + String.join(", ", failing) + ". See clipramp check.", ""));
         }
     }

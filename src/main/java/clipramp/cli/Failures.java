@@ -84,7 +84,8 @@ final class Failures {
     private void hintAtLocale() {
         if (words.stream().anyMatch(word -> word.indexOf(UNREADABLE) >= 0)) {
             session.err()
-                    .line("  This locale cannot carry every sign. Write ohm, u, deg and +- instead, or set LC_ALL=C.UTF-8.");
+                    .line(
+                            "  This locale cannot carry every sign. Write ohm, u, deg and +- instead, or set LC_ALL=C.UTF-8.");
         }
     }
 

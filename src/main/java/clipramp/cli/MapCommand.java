@@ -105,6 +105,7 @@ final class MapCommand implements Callable<Integer> {
             session.out().exactly(json(loaded, condition, points, check.verdict(), notes));
         } else if (form.csv()) {
             session.out().exactly(KnobCsv.of(points));
+            CheckText.marked(session.err(), check);
             notes.forEach(note -> session.err().line(note.text()));
         } else {
             print(loaded, condition, points, check, notes);

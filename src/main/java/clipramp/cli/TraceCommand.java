@@ -100,6 +100,9 @@ final class TraceCommand implements Callable<Integer> {
             session.out()
                     .exactly(
                             form.csv() ? TraceColumn.csv(waveforms) : json(loaded, check, condition, point, waveforms));
+            if (form.csv()) {
+                CheckText.marked(session.err(), check);
+            }
         } else {
             print(loaded, check, condition, point);
         }

@@ -44,8 +44,12 @@ public final class ProfileLibrary {
      */
     public record Found(String kind, String id, String from, Source source) {}
 
+    /** Names of the program's own profiles; listed only when somebody asks for them, which reading a design does not. */
+    private static final class Shipped {
+        static final List<String> NAMES = shippedNames();
+    }
+
     private final List<Folder> folders;
-    private final List<String> shipped;
     /** The program's own profiles do not change while it runs: each is fetched and parsed once. */
     private final Map<String, Optional<String>> shippedTexts = new ConcurrentHashMap<>();
 
@@ -53,7 +57,6 @@ public final class ProfileLibrary {
 
     private ProfileLibrary(List<Folder> folders) {
         this.folders = List.copyOf(folders);
-        shipped = shippedNames();
     }
 
     /** The program's profiles only. */
@@ -142,7 +145,7 @@ public final class ProfileLibrary {
     /** Ids of a kind in every place, sorted. */
     public List<String> ids(String kind) {
         Stream<String> own =
-                shipped.stream().filter(n -> n.startsWith(kind + "/")).map(n -> n.substring(kind.length() + 1));
+                Shipped.NAMES.stream().filter(n -> n.startsWith(kind + "/")).map(n -> n.substring(kind.length() + 1));
         Stream<String> others = folders.stream().flatMap(f -> idsIn(f.folder().resolve(kind)).stream());
         return Stream.concat(own, others).distinct().sorted().toList();
     }

@@ -204,7 +204,8 @@ class CliTest {
 
     @Test
     void signsThatTheLocaleSwallowedAreExplained() {
-        assertThat(CliRun.of("map", DESIGN, "--with=clip.dropper=10 k\uFFFD\uFFFD").err())
+        assertThat(CliRun.of("map", DESIGN, "--with=clip.dropper=10 k\uFFFD\uFFFD")
+                        .err())
                 .contains("Write ohm, u, deg and +- instead");
         assertThat(CliRun.of("map", DESIGN, "--with=clip.dropper=10 q").err()).doesNotContain("locale");
     }
