@@ -70,8 +70,8 @@ final class RandomCircuits {
     /** Independent figures do not always make a unijunction: its saturated line must rise and end under the peak. */
     private static boolean isADevice(Drawn drawn) {
         ReferenceParameters p = new ReferenceParameters(drawn.design(), drawn.condition(), drawn.rampOhms());
-        double peak = (p.quiescentBaseOneOhms + p.standoff * p.interbaseOhms)
-                / (p.quiescentBaseOneOhms + p.interbaseOhms + p.baseTwoOhms);
+        double baseOne = 1 / (1 / p.baseOneOhms + 1 / (p.seriesOhms + 1 / p.shuntSiemens));
+        double peak = (baseOne + p.standoff * p.interbaseOhms) / (baseOne + p.interbaseOhms + p.baseTwoOhms);
         double valley = p.intercept
                 + p.slopeOhms * p.valleySiemens
                 + p.baseOneOhms * (p.valleySiemens + 1 / (p.baseTwoOhms + p.onBaseTwoOhms));

@@ -32,6 +32,8 @@ record ReferenceHalf(
         ZENER_OFF,
         JUNCTION_ON,
         JUNCTION_OFF,
+        CLAMP_ON,
+        CLAMP_OFF,
         STALL,
         RELEASE,
         FIRE,

@@ -9,12 +9,6 @@ import clipramp.firing.ReferenceHalf.Settling;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
-import java.util.function.DoubleUnaryOperator;
-import org.apache.commons.math3.ode.FirstOrderDifferentialEquations;
-import org.apache.commons.math3.ode.events.EventHandler;
-import org.apache.commons.math3.ode.nonstiff.DormandPrince853Integrator;
-import org.apache.commons.math3.ode.sampling.StepHandler;
-import org.apache.commons.math3.ode.sampling.StepInterpolator;
 
 /**
  * The laws of model.md sections 1 to 6 put before a general-purpose adaptive integrator, half cycle by half cycle, to
@@ -31,10 +25,9 @@ final class ReferenceIntegrator {
         ON
     }
 
-    private static final double RELATIVE = 1e-12;
-    private static final double ROOT_SECONDS = 1e-14;
     private static final int HALF_CYCLES = 60;
     private static final double SETTLED_VOLTS = 1e-9;
+    private static final double SETTLED_AMPS = 1e-11;
 
     private final ReferenceParameters p;
     private final ReferenceNodes nodes;
@@ -46,6 +39,8 @@ final class ReferenceIntegrator {
     private Emitter emitter = Emitter.OFF;
     /** Not quite empty at first, so that no branch stands exactly on its edge. */
     private double volts = 1e-9;
+
+    private double magnetisingAmps;
 
     private double now;
     private boolean stalled;
@@ -70,20 +65,22 @@ final class ReferenceIntegrator {
         return p;
     }
 
-    private record AtZero(double volts, Emitter emitter) {
+    private record AtZero(double volts, double magnetisingAmps, Emitter emitter) {
         boolean repeats(AtZero other) {
-            return emitter == other.emitter && Math.abs(volts - other.volts) <= SETTLED_VOLTS;
+            return emitter == other.emitter
+                    && Math.abs(volts - other.volts) <= SETTLED_VOLTS
+                    && Math.abs(magnetisingAmps - other.magnetisingAmps) <= SETTLED_AMPS;
         }
     }
 
     private Periodic periodic() {
         List<ReferenceHalf> halves = new ArrayList<>();
         List<AtZero> zeros = new ArrayList<>();
-        zeros.add(new AtZero(volts, emitter));
+        zeros.add(new AtZero(volts, magnetisingAmps, emitter));
         boolean alike = !p.bridge || p.isSymmetric() && !p.halfWaveStage;
         for (int k = 0; k < HALF_CYCLES; k++) {
             halves.add(half(!p.bridge ? !p.opposite : k % 2 == 0));
-            AtZero end = new AtZero(volts, emitter);
+            AtZero end = new AtZero(volts, magnetisingAmps, emitter);
             zeros.add(end);
             if (alike && end.repeats(zeros.get(k))) {
                 return new Periodic(Settling.STEADY, List.of(halves.get(k).continuedIn(halves.get(k), p.rampFarads)));
@@ -169,45 +166,52 @@ final class ReferenceIntegrator {
 
     /** Integrates until the next event or the zero, and does what the event asks. */
     private void piece() {
-        double[] y = emitter == Emitter.ON
-                ? new double[] {volts, meter == null ? 0 : meter.joules, meter == null ? 0 : meter.coulombs}
-                : new double[] {volts};
-        double scale = 1 + Math.abs(p.zenerFootVolts);
-        double[] absolute = {1e-13 * scale, 1e-13 * p.rampFarads * scale * scale, 1e-13 * p.rampFarads * scale};
-        double[] relative = {RELATIVE, RELATIVE, RELATIVE};
-        DormandPrince853Integrator integrator = new DormandPrince853Integrator(
-                1e-18, halfSeconds / 60, Arrays.copyOf(absolute, y.length), Arrays.copyOf(relative, y.length));
-        Watch watch = new Watch(integrator);
-        watch.add(t -> nodes.rectifierSlack, () -> toggle(1, Kind.RECTIFIER_ON, Kind.RECTIFIER_OFF));
-        watch.add(t -> nodes.zenerSlack, () -> toggle(2, Kind.ZENER_ON, Kind.ZENER_OFF));
+        ReferencePiece piece = new ReferencePiece(p, nodes, emitter, this::e, this::eRate, halfSeconds);
+        piece.watch(t -> nodes.rectifierSlack, () -> toggle(1, Kind.RECTIFIER_ON, Kind.RECTIFIER_OFF));
+        piece.watch(t -> nodes.zenerSlack, () -> toggle(2, Kind.ZENER_ON, Kind.ZENER_OFF));
+        if (p.hasClamp) {
+            piece.watch(t -> nodes.clampSlack, () -> toggle(8, Kind.CLAMP_ON, Kind.CLAMP_OFF));
+        }
         switch (emitter) {
-            case OFF -> watch.add(t -> nodes.peakVolts - watch.volts, this::reach);
+            case OFF -> piece.watch(t -> nodes.peakVolts - piece.seenVolts(), this::reach);
             case HELD -> {
-                watch.add(t -> nodes.emitterAmps / p.peakCurrentAmps, this::release);
-                watch.add(t -> -fireSlack(t), this::fire);
+                piece.watch(t -> nodes.emitterAmps / p.peakCurrentAmps, this::release);
+                piece.watch(t -> -fireSlack(t, piece.seenMagnetisingAmps()), this::fire);
             }
             case ON -> {
-                watch.add(t -> nodes.junctionSlack, () -> toggle(4, Kind.JUNCTION_ON, Kind.JUNCTION_OFF));
-                watch.add(t -> nodes.valleySlack, this::valley);
+                piece.watch(t -> nodes.junctionSlack, () -> toggle(4, Kind.JUNCTION_ON, Kind.JUNCTION_OFF));
+                piece.watch(t -> nodes.valleySlack, this::valley);
                 if (meter != null && nodes.junction) {
-                    watch.note(t -> nodes.gateAmps - p.triggerAmps, meter);
+                    piece.note(meter);
                 }
             }
         }
-        integrator.addStepHandler(watch.looking());
-        double reached = integrator.integrate(new Laws(y.length), now, y, halfSeconds, y);
-        now = reached;
-        volts = y[0];
+        piece.look(this::look);
+        double joules = meter == null ? 0 : meter.joules;
+        double coulombs = meter == null ? 0 : meter.coulombs;
+        double[] state = Arrays.copyOf(new double[] {volts, magnetisingAmps, joules, coulombs}, piece.getDimension());
+        now = piece.run(now, state);
+        volts = state[0];
+        magnetisingAmps = state[1];
         if (emitter == Emitter.ON && meter != null) {
-            meter.joules = y[1];
-            meter.coulombs = y[2];
+            meter.joules = state[2];
+            meter.coulombs = state[3];
         }
-        nodes.evaluate(emitter, e(now), eRate(now), volts);
+        nodes.evaluate(emitter, e(now), eRate(now), volts, magnetisingAmps);
         if (emitter == Emitter.HELD) {
             volts = nodes.peakVolts;
         }
-        if (watch.action != null) {
-            watch.action.run();
+        piece.ending().run();
+    }
+
+    /** Peaks of the pulse and the supply's crest. */
+    private void look(double t) {
+        if (meter != null) {
+            meter.observe(nodes);
+        }
+        if (nodes.supplyVolts > crestVolts) {
+            crestVolts = nodes.supplyVolts;
+            crestSeconds = t;
         }
     }
 
@@ -215,7 +219,7 @@ final class ReferenceIntegrator {
         boolean conducts = (nodes.branches() & bit) == 0;
         log(conducts ? on : off);
         nodes.set(nodes.branches() ^ bit);
-        nodes.evaluate(emitter, e(now), eRate(now), volts);
+        nodes.evaluate(emitter, e(now), eRate(now), volts, magnetisingAmps);
         if (emitter == Emitter.HELD) {
             hold();
         }
@@ -224,13 +228,16 @@ final class ReferenceIntegrator {
     /** Finds which branches conduct now that the emitter's state has jumped. */
     private void settleBranches() {
         int before = nodes.branches();
-        nodes.search(emitter, e(now), eRate(now), volts);
-        int changed = (before ^ nodes.branches()) & 3;
+        nodes.search(emitter, e(now), eRate(now), volts, magnetisingAmps);
+        int changed = before ^ nodes.branches();
         if ((changed & 1) != 0) {
             log(nodes.rectifier ? Kind.RECTIFIER_ON : Kind.RECTIFIER_OFF);
         }
         if ((changed & 2) != 0) {
             log(nodes.zener ? Kind.ZENER_ON : Kind.ZENER_OFF);
+        }
+        if ((changed & 8) != 0) {
+            log(nodes.clamp ? Kind.CLAMP_ON : Kind.CLAMP_OFF);
         }
     }
 
@@ -241,8 +248,8 @@ final class ReferenceIntegrator {
     /** V_C has reached V_P: fire, or be held. */
     private void reach() {
         emitter = Emitter.HELD;
-        nodes.evaluate(emitter, e(now), eRate(now), volts);
-        held = fireSlack(now) < 0;
+        nodes.evaluate(emitter, e(now), eRate(now), volts, magnetisingAmps);
+        held = fireSlack(now, magnetisingAmps) < 0;
         if (!held) {
             fire();
             return;
@@ -253,7 +260,7 @@ final class ReferenceIntegrator {
 
     /** At the beginning of every piece of a hold: the emitter current jumps where a branch starts or stops. */
     private void hold() {
-        if (fireSlack(now) >= 0) {
+        if (fireSlack(now, magnetisingAmps) >= 0) {
             fire();
         } else if (nodes.emitterAmps < 0) {
             release();
@@ -267,19 +274,19 @@ final class ReferenceIntegrator {
      * point: its emitter is then fed without limit, and fires if the saturated line carries more than the valley current.
      */
     private void overshoot() {
-        nodes.evaluate(Emitter.OFF, e(now), eRate(now), volts);
+        nodes.evaluate(Emitter.OFF, e(now), eRate(now), volts, magnetisingAmps);
         if (nodes.peakVolts >= volts) {
-            nodes.evaluate(emitter, e(now), eRate(now), volts);
+            nodes.evaluate(emitter, e(now), eRate(now), volts, magnetisingAmps);
             return;
         }
-        probe.search(Emitter.ON, e(now), 0, volts);
+        probe.search(Emitter.ON, e(now), 0, volts, magnetisingAmps);
         if (probe.valleySlack > 0) {
             held = false;
             fire();
             return;
         }
         emitter = Emitter.HELD;
-        nodes.search(emitter, e(now), eRate(now), volts);
+        nodes.search(emitter, e(now), eRate(now), volts, magnetisingAmps);
         volts = nodes.peakVolts;
         hold();
     }
@@ -294,12 +301,12 @@ final class ReferenceIntegrator {
      * Not negative when the emitter gets its peak-point current and the saturated line would carry more than the valley
      * current; relative to those currents.
      */
-    private double fireSlack(double t) {
+    private double fireSlack(double t, double magnetising) {
         double peak = nodes.emitterAmps / p.peakCurrentAmps - 1;
         if (peak < 0) {
             return peak;
         }
-        probe.search(Emitter.ON, e(t), 0, nodes.peakVolts);
+        probe.search(Emitter.ON, e(t), 0, nodes.peakVolts, magnetising);
         double regenerates = probe.valleySlack / p.peakCurrentAmps;
         return regenerates <= 0 ? Math.min(regenerates, -1e-300) : Math.min(peak, regenerates);
     }
@@ -315,6 +322,7 @@ final class ReferenceIntegrator {
         // Tried with the supply collapsed; a pulse that does not turn the thyristor on gets its supply back at once.
         double startSeconds = now;
         double startVolts = volts;
+        double startMagnetising = magnetisingAmps;
         int branches = nodes.branches();
         List<Event> eventsBefore = new ArrayList<>(events);
         int count = pulses.size();
@@ -334,6 +342,7 @@ final class ReferenceIntegrator {
         events = eventsBefore;
         now = startSeconds;
         volts = startVolts;
+        magnetisingAmps = startMagnetising;
         thyristorOn = false;
         nodes.set(branches);
         conduct(supply, peak);
@@ -390,127 +399,5 @@ final class ReferenceIntegrator {
         return pulses.stream()
                 .map(pulse -> ReferencePulseMeter.marked(pulse, !open && pulse.startSeconds() > from))
                 .toList();
-    }
-
-    /** The right-hand side with the branches as they stand. */
-    private final class Laws implements FirstOrderDifferentialEquations {
-        private final int dimension;
-
-        Laws(int dimension) {
-            this.dimension = dimension;
-        }
-
-        @Override
-        public int getDimension() {
-            return dimension;
-        }
-
-        @Override
-        public void computeDerivatives(double t, double[] y, double[] rate) {
-            nodes.evaluate(emitter, e(t), emitter == Emitter.HELD ? eRate(t) : 0, y[0]);
-            if (emitter == Emitter.HELD) {
-                rate[0] = nodes.heldRate;
-                return;
-            }
-            rate[0] = (nodes.rampAmps - nodes.emitterAmps) / p.rampFarads;
-            if (dimension == 3) {
-                rate[1] = nodes.gateVolts * nodes.gateAmps;
-                rate[2] = nodes.gateAmps;
-            }
-        }
-    }
-
-    /** The events of one piece. */
-    private final class Watch {
-        private final DormandPrince853Integrator integrator;
-        private double seconds = Double.NaN;
-        private double volts = Double.NaN;
-        private Runnable action;
-
-        Watch(DormandPrince853Integrator integrator) {
-            this.integrator = integrator;
-        }
-
-        private void see(double t, double capacitorVolts) {
-            nodes.evaluate(emitter, e(t), emitter == Emitter.HELD ? eRate(t) : 0, capacitorVolts);
-            seconds = t;
-            volts = capacitorVolts;
-        }
-
-        /** Ends the piece where a slack falls through zero. */
-        void add(DoubleUnaryOperator slack, Runnable then) {
-            register(slack, then, null);
-        }
-
-        /** Only notes the crossings, both ways. */
-        void note(DoubleUnaryOperator slack, ReferencePulseMeter notes) {
-            register(slack, null, notes);
-        }
-
-        private void register(DoubleUnaryOperator slack, Runnable then, ReferencePulseMeter notes) {
-            // The valley's slack may dip under zero for less than the discharge's time constant.
-            double discharge = p.rampFarads * (p.slopeOhms + p.baseOneOhms);
-            double check = emitter == Emitter.ON ? Math.min(halfSeconds / 1000, discharge / 5) : halfSeconds / 200;
-            integrator.addEventHandler(
-                    new EventHandler() {
-                        @Override
-                        public void init(double t0, double[] y0, double t) {}
-
-                        @Override
-                        public double g(double t, double[] y) {
-                            see(t, y[0]);
-                            return slack.applyAsDouble(t);
-                        }
-
-                        @Override
-                        public Action eventOccurred(double t, double[] y, boolean increasing) {
-                            if (notes != null) {
-                                if (increasing) {
-                                    notes.rise(t);
-                                } else {
-                                    notes.fall(t);
-                                }
-                                return Action.CONTINUE;
-                            }
-                            if (increasing) {
-                                return Action.CONTINUE;
-                            }
-                            action = then;
-                            return Action.STOP;
-                        }
-
-                        @Override
-                        public void resetState(double t, double[] y) {}
-                    },
-                    check,
-                    ROOT_SECONDS,
-                    200);
-        }
-
-        /** Peaks of the pulse and the supply's crest, at five places of every step. */
-        StepHandler looking() {
-            return new StepHandler() {
-                @Override
-                public void init(double t0, double[] y0, double t) {}
-
-                @Override
-                public void handleStep(StepInterpolator interpolator, boolean isLast) {
-                    double a = interpolator.getPreviousTime();
-                    double b = interpolator.getCurrentTime();
-                    for (int i = 0; i <= 4; i++) {
-                        double t = a + (b - a) * i / 4;
-                        interpolator.setInterpolatedTime(t);
-                        see(t, interpolator.getInterpolatedState()[0]);
-                        if (meter != null) {
-                            meter.observe(nodes);
-                        }
-                        if (nodes.supplyVolts > crestVolts) {
-                            crestVolts = nodes.supplyVolts;
-                            crestSeconds = t;
-                        }
-                    }
-                }
-            };
-        }
     }
 }

@@ -1,10 +1,21 @@
 package clipramp.firing;
 
+import clipramp.firing.ReferenceIntegrator.Emitter;
+
 /**
  * The circuit's node equations as they stand in model.md sections 2 to 6, solved by elimination with every diode-like
  * branch taken as conducting or not; {@link #search} tries every such combination against the branches' own laws.
+ *
+ * <p>Unknowns: V_S, V_B1 (a programmable device's cathode) and the current into the gate network. A pulse transformer
+ * stands between base one and that network with its magnetising current as given; direct coupling is one of ratio 1
+ * without resistance or magnetising current.
  */
 final class ReferenceNodes {
+    private static final int RECTIFIER = 1;
+    private static final int ZENER = 2;
+    private static final int JUNCTION = 4;
+    private static final int CLAMP = 8;
+
     private final ReferenceParameters p;
     private final double[][] a = new double[3][4];
     private final double[] x = new double[3];
@@ -12,6 +23,7 @@ final class ReferenceNodes {
     boolean rectifier;
     boolean zener;
     boolean junction;
+    boolean clamp;
 
     double supplyVolts;
     double baseOneVolts;
@@ -21,94 +33,42 @@ final class ReferenceNodes {
     double peakVolts;
     double rampAmps;
     double heldRate;
+    double magnetisingRate;
     double rectifierSlack;
     double zenerSlack;
     double junctionSlack;
+    double clampSlack;
     double valleySlack;
 
     ReferenceNodes(ReferenceParameters p) {
         this.p = p;
     }
 
-    /** Emitter blocking: unknowns V_S and I_B2. */
-    void off(double e, double capacitorVolts) {
-        clear();
-        supplyRow(e, capacitorVolts, 1 / p.rampOhms);
-        a[0][1] -= 1;
-        barRow();
-        solve(2);
-        finishOff(e);
-        rampAmps = (supplyVolts - capacitorVolts) / p.rampOhms;
-    }
-
-    /** Capacitor held at the peak point: V_C is kappa V_S + V_D, written out as what the bar's taps say. */
-    void held(double e, double eRate) {
-        heldBar(eRate, 0, 0);
-        heldRate = x[1] * (p.quiescentBaseOneOhms + p.standoff * p.interbaseOhms);
-        heldBar(e, 1, 1);
-        finishOff(e);
-        rampAmps = (supplyVolts - peakVolts) / p.rampOhms;
-        emitterAmps = rampAmps - p.rampFarads * heldRate;
-    }
-
-    /** V_S and I_B2 while held; with both offsets at 0 the linear response to e alone, which gives the rates. */
-    private void heldBar(double e, double zenerOffset, double dropOffset) {
-        clear();
-        if (rectifier) {
-            a[0][0] -= 1 / p.dropperOhms;
-            a[0][3] -= e / p.dropperOhms;
+    void evaluate(Emitter emitter, double e, double eRate, double capacitorVolts, double magnetisingAmps) {
+        switch (emitter) {
+            case OFF -> {
+                blocking(e, 1, magnetisingAmps, capacitorVolts, false);
+                blockingAnswers(e, magnetisingAmps);
+                rampAmps = (supplyVolts - capacitorVolts) / p.rampOhms;
+                emitterAmps = 0;
+            }
+            case HELD -> held(e, eRate, magnetisingAmps);
+            case ON -> on(e, capacitorVolts, magnetisingAmps);
         }
-        if (zener) {
-            a[0][0] -= 1 / p.zenerSlopeOhms;
-            a[0][3] -= zenerOffset * p.zenerFootVolts / p.zenerSlopeOhms;
-        }
-        a[0][0] -= 1 / p.rampOhms;
-        a[0][1] += (p.quiescentBaseOneOhms + p.standoff * p.interbaseOhms) / p.rampOhms - 1;
-        a[0][3] -= dropOffset * p.emitterDropVolts / p.rampOhms;
-        barRow();
-        solve(2);
-    }
-
-    /** Emitter conducting: unknowns V_S, V_B1 and the current through R_G. */
-    void on(double e, double capacitorVolts) {
-        clear();
-        double baseTwo = 1 / (p.baseTwoOhms + p.onBaseTwoOhms);
-        double emitter = 1 / p.slopeOhms;
-        supplyRow(e, capacitorVolts, 1 / p.rampOhms);
-        a[0][0] -= baseTwo;
-        a[0][1] += baseTwo;
-        a[1][0] = baseTwo - p.intercept * emitter;
-        a[1][1] = -emitter - baseTwo - 1 / p.baseOneOhms;
-        a[1][2] = -1;
-        a[1][3] = -(capacitorVolts - p.emitterDropVolts) * emitter;
-        double gate = p.shuntSiemens + (junction ? 1 / p.gateSlopeOhms : 0);
-        a[2][1] = -gate;
-        a[2][2] = 1 + gate * p.seriesOhms;
-        a[2][3] = junction ? -p.kneeVolts / p.gateSlopeOhms : 0;
-        solve(3);
-        supplyVolts = x[0];
-        baseOneVolts = x[1];
-        gateVolts = x[1] - x[2] * p.seriesOhms;
-        gateAmps = junction ? (gateVolts - p.kneeVolts) / p.gateSlopeOhms : 0;
-        emitterAmps = (capacitorVolts - baseOneVolts - p.emitterDropVolts - p.intercept * supplyVolts) / p.slopeOhms;
-        rampAmps = (supplyVolts - capacitorVolts) / p.rampOhms;
-        slacks(e);
-        junctionSlack = junction ? gateVolts - p.kneeVolts : p.kneeVolts - gateVolts;
-        valleySlack = emitterAmps - p.valleySiemens * supplyVolts;
     }
 
     /** Solves with the combination of branches that obeys every branch's law. */
-    void search(ReferenceIntegrator.Emitter emitter, double e, double eRate, double capacitorVolts) {
+    void search(Emitter emitter, double e, double eRate, double capacitorVolts, double magnetisingAmps) {
         double best = Double.NEGATIVE_INFINITY;
         int chosen = -1;
-        int combinations = emitter == ReferenceIntegrator.Emitter.ON ? 8 : 4;
-        for (int c = 0; c < combinations; c++) {
-            set(c);
-            evaluate(emitter, e, eRate, capacitorVolts);
-            double worst = Math.min(rectifierSlack, zenerSlack);
-            if (combinations == 8) {
-                worst = Math.min(worst, junctionSlack);
+        int allowed = RECTIFIER | ZENER | (emitter == Emitter.ON ? JUNCTION : 0) | (p.hasClamp ? CLAMP : 0);
+        for (int c = 0; c < 16; c++) {
+            if ((c & ~allowed) != 0) {
+                continue;
             }
+            set(c);
+            evaluate(emitter, e, eRate, capacitorVolts, magnetisingAmps);
+            double worst = Math.min(Math.min(rectifierSlack, zenerSlack), Math.min(junctionSlack, clampSlack));
             if (worst > best) {
                 best = worst;
                 chosen = c;
@@ -118,59 +78,160 @@ final class ReferenceNodes {
             throw new IllegalStateException("no combination of branches obeys every law: " + best);
         }
         set(chosen);
-        evaluate(emitter, e, eRate, capacitorVolts);
-    }
-
-    void evaluate(ReferenceIntegrator.Emitter emitter, double e, double eRate, double capacitorVolts) {
-        switch (emitter) {
-            case OFF -> off(e, capacitorVolts);
-            case HELD -> held(e, eRate);
-            case ON -> on(e, capacitorVolts);
-        }
+        evaluate(emitter, e, eRate, capacitorVolts, magnetisingAmps);
     }
 
     int branches() {
-        return (rectifier ? 1 : 0) | (zener ? 2 : 0) | (junction ? 4 : 0);
+        return (rectifier ? RECTIFIER : 0) | (zener ? ZENER : 0) | (junction ? JUNCTION : 0) | (clamp ? CLAMP : 0);
     }
 
     void set(int branches) {
-        rectifier = (branches & 1) != 0;
-        zener = (branches & 2) != 0;
-        junction = (branches & 4) != 0;
+        rectifier = (branches & RECTIFIER) != 0;
+        zener = (branches & ZENER) != 0;
+        junction = (branches & JUNCTION) != 0;
+        clamp = (branches & CLAMP) != 0;
     }
 
-    private void supplyRow(double e, double capacitorVolts, double ramp) {
+    /** Capacitor held at the peak point; the rates follow from the same equations with every constant left out. */
+    private void held(double e, double eRate, double magnetisingAmps) {
+        blocking(e, 1, magnetisingAmps, 0, true);
+        blockingAnswers(e, magnetisingAmps);
+        double amps = (supplyVolts - peakVolts) / p.rampOhms;
+        blocking(eRate, 0, magnetisingRate, 0, true);
+        heldRate = peakOf(x[0], x[1]);
+        rampAmps = amps;
+        emitterAmps = amps - p.rampFarads * heldRate;
+    }
+
+    /**
+     * Emitter blocking.
+     *
+     * @param constants 1, or 0 for the response to e and the magnetising current alone
+     * @param heldAtPeak whether the capacitor is at the peak point, whatever that comes to
+     */
+    private void blocking(
+            double e, double constants, double magnetisingAmps, double capacitorVolts, boolean heldAtPeak) {
+        clear();
+        supplyRow(e, constants);
+        double ramp = 1 / p.rampOhms;
+        a[0][0] -= ramp;
+        if (heldAtPeak) {
+            // V_P = share of V_S + share of V_B1 + V_D
+            a[0][0] += ramp * peakOf(1, 0);
+            a[0][1] += ramp * peakOf(0, 1);
+            a[0][3] -= ramp * constants * p.emitterDropVolts;
+        } else {
+            a[0][3] -= ramp * capacitorVolts;
+        }
+        double bar = p.programmable ? 0 : 1 / (p.baseTwoOhms + p.interbaseOhms);
+        a[0][0] -= p.programmable ? 1 / (p.upperOhms + p.lowerOhms) : bar;
+        a[0][1] += bar;
+        a[1][0] = bar;
+        a[1][1] = -bar - 1 / p.baseOneOhms;
+        coupling(magnetisingAmps, false, constants);
+        solve();
+    }
+
+    /** Peak point without V_D, from V_S and V_B1: what the base bar's tap (or the divider's) stands at. */
+    private double peakOf(double supply, double baseOne) {
+        if (p.programmable) {
+            return supply * p.lowerOhms / (p.upperOhms + p.lowerOhms);
+        }
+        double amps = (supply - baseOne) / (p.baseTwoOhms + p.interbaseOhms);
+        double baseTwo = supply - amps * p.baseTwoOhms;
+        return baseOne + p.standoff * (baseTwo - baseOne);
+    }
+
+    private void blockingAnswers(double e, double magnetisingAmps) {
+        answers(e, magnetisingAmps, false);
+        peakVolts = peakOf(supplyVolts, baseOneVolts) + p.emitterDropVolts;
+    }
+
+    /** Emitter conducting. */
+    private void on(double e, double capacitorVolts, double magnetisingAmps) {
+        clear();
+        supplyRow(e, 1);
+        double ramp = 1 / p.rampOhms;
+        a[0][0] -= ramp;
+        a[0][3] -= ramp * capacitorVolts;
+        // A programmable device's gate stands at its anode-less drop above the cathode.
+        double drop = p.programmable ? p.emitterOnVolts : 0;
+        double bar = p.programmable ? 1 / p.upperOhms : 1 / (p.baseTwoOhms + p.onBaseTwoOhms);
+        double lower = p.programmable ? 1 / p.lowerOhms : 0;
+        double emitter = 1 / p.slopeOhms;
+        a[0][0] -= bar;
+        a[0][1] += bar;
+        a[0][3] -= bar * drop;
+        a[1][0] = bar - p.intercept * emitter;
+        a[1][1] = -emitter - bar - lower - 1 / p.baseOneOhms;
+        a[1][3] = -(capacitorVolts - p.emitterOnVolts) * emitter + (bar + lower) * drop;
+        coupling(magnetisingAmps, junction, 1);
+        solve();
+        answers(e, magnetisingAmps, junction);
+        emitterAmps = (capacitorVolts - baseOneVolts - p.emitterOnVolts - p.intercept * supplyVolts) / p.slopeOhms;
+        rampAmps = (supplyVolts - capacitorVolts) / p.rampOhms;
+        junctionSlack = junction ? gateVolts - p.kneeVolts : p.kneeVolts - gateVolts;
+        valleySlack = emitterAmps - p.valleySiemens * supplyVolts;
+        if (p.hasClamp) {
+            double into = emitterAmps + bar * (supplyVolts - baseOneVolts - drop) - lower * (baseOneVolts + drop);
+            clampSlack = clampSlack(magnetisingAmps + x[2] * p.secondaries / p.ratio, into);
+        }
+    }
+
+    private void supplyRow(double e, double constants) {
         if (rectifier) {
             a[0][0] -= 1 / p.dropperOhms;
             a[0][3] -= e / p.dropperOhms;
         }
         if (zener) {
             a[0][0] -= 1 / p.zenerSlopeOhms;
-            a[0][3] -= p.zenerFootVolts / p.zenerSlopeOhms;
+            a[0][3] -= constants * p.zenerFootVolts / p.zenerSlopeOhms;
         }
-        a[0][0] -= ramp;
-        a[0][3] -= capacitorVolts * ramp;
     }
 
-    private void barRow() {
-        a[1][0] = 1;
-        a[1][1] = -(p.baseTwoOhms + p.interbaseOhms + p.quiescentBaseOneOhms);
+    /** What base one gives to the primary, and the gate network's own law. */
+    private void coupling(double magnetisingAmps, boolean conducts, double constants) {
+        a[1][2] = -p.secondaries / p.ratio;
+        a[1][3] += magnetisingAmps;
+        double gate = p.shuntSiemens + (conducts ? 1 / p.gateSlopeOhms : 0);
+        // v_GK = V_B1/n - I_m R_p/n - I_sec (secondaries R_p/n^2 + R_s + R_G)
+        a[2][1] = -gate / p.ratio;
+        a[2][2] = 1 + gate * inSeries();
+        a[2][3] = -gate * magnetisingAmps * p.primaryOhms / p.ratio
+                - (conducts ? constants * p.kneeVolts / p.gateSlopeOhms : 0);
+        if (clamp) {
+            a[1][0] = 0;
+            a[1][1] = 1;
+            a[1][2] = 0;
+            a[1][3] = -constants * p.clampVolts;
+        }
     }
 
-    private void finishOff(double e) {
+    private double inSeries() {
+        return p.secondaries * p.primaryOhms / (p.ratio * p.ratio) + p.secondaryOhms + p.seriesOhms;
+    }
+
+    private void answers(double e, double magnetisingAmps, boolean conducts) {
         supplyVolts = x[0];
-        baseOneVolts = x[1] * p.quiescentBaseOneOhms;
-        double baseTwoVolts = supplyVolts - x[1] * p.baseTwoOhms;
-        peakVolts = baseOneVolts + p.standoff * (baseTwoVolts - baseOneVolts) + p.emitterDropVolts;
-        gateVolts = p.shuntSiemens == 0 ? baseOneVolts : baseOneVolts / (1 + p.seriesOhms * p.shuntSiemens);
-        gateAmps = 0;
-        emitterAmps = 0;
-        slacks(e);
-    }
-
-    private void slacks(double e) {
+        baseOneVolts = x[1];
+        double primaryAmps = magnetisingAmps + x[2] * p.secondaries / p.ratio;
+        gateVolts = (baseOneVolts - magnetisingAmps * p.primaryOhms) / p.ratio - x[2] * inSeries();
+        gateAmps = conducts ? (gateVolts - p.kneeVolts) / p.gateSlopeOhms : 0;
+        magnetisingRate =
+                p.magnetisingHenries == 0 ? 0 : (baseOneVolts - p.primaryOhms * primaryAmps) / p.magnetisingHenries;
         rectifierSlack = rectifier ? e - supplyVolts : supplyVolts - e;
         zenerSlack = zener ? supplyVolts - p.zenerFootVolts : p.zenerFootVolts - supplyVolts;
+        junctionSlack = Double.POSITIVE_INFINITY;
+        clampSlack = Double.POSITIVE_INFINITY;
+        if (p.hasClamp) {
+            double bar = p.programmable ? 0 : (supplyVolts - baseOneVolts) / (p.baseTwoOhms + p.interbaseOhms);
+            clampSlack = clampSlack(primaryAmps, bar);
+        }
+    }
+
+    /** Forward current of the clamp diode times R1, or what base one still lacks to it. */
+    private double clampSlack(double primaryAmps, double intoBaseOneAmps) {
+        return clamp ? p.baseOneOhms * (primaryAmps - intoBaseOneAmps) + baseOneVolts : baseOneVolts + p.clampVolts;
     }
 
     private void clear() {
@@ -183,7 +244,8 @@ final class ReferenceNodes {
     }
 
     /** Elimination with row pivoting; the right-hand side is the fourth column. */
-    private void solve(int n) {
+    private void solve() {
+        int n = 3;
         for (int column = 0; column < n; column++) {
             int pivot = column;
             for (int row = column + 1; row < n; row++) {

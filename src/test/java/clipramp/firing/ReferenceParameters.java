@@ -6,19 +6,16 @@ import clipramp.circuit.Design;
 import clipramp.circuit.GateDrive;
 import clipramp.circuit.Line;
 import clipramp.circuit.Part;
+import clipramp.circuit.PulseTransformer;
 import clipramp.circuit.Stage;
 import clipramp.circuit.ThyristorDevice;
-import clipramp.circuit.Trigger;
-import clipramp.circuit.Unijunction;
 import java.util.List;
-import org.apache.commons.math3.analysis.UnivariateFunction;
+import java.util.Optional;
 import org.apache.commons.math3.analysis.solvers.BrentSolver;
 
 /**
- * The numbers of one circuit as model.md section 4 derives them, worked out apart from the engine: the emitter line from
- * two equations in two unknowns, its calibration on V_OB1 by a root finder on the test circuit's node equation.
- *
- * <p>Only what {@link ReferenceIntegrator} covers: unijunction transistor, direct coupling, resistive load.
+ * The numbers of one circuit at one condition, worked out apart from the engine. Only what {@link ReferenceIntegrator}
+ * covers: the load is a resistor.
  */
 final class ReferenceParameters {
     final double omega;
@@ -35,9 +32,15 @@ final class ReferenceParameters {
     final double zenerSlopeOhms;
     final double rampOhms;
     final double rampFarads;
+    final boolean programmable;
+    final double upperOhms;
+    final double lowerOhms;
     final double standoff;
     final double interbaseOhms;
     final double emitterDropVolts;
+    /** Drop of the saturated emitter line at no current and no supply, V. */
+    final double emitterOnVolts;
+
     final double peakCurrentAmps;
     final double slopeOhms;
     final double intercept;
@@ -45,7 +48,13 @@ final class ReferenceParameters {
     final double onBaseTwoOhms;
     final double baseOneOhms;
     final double baseTwoOhms;
-    final double quiescentBaseOneOhms;
+    final double ratio;
+    final int secondaries;
+    final double primaryOhms;
+    final double secondaryOhms;
+    final double magnetisingHenries;
+    final boolean hasClamp;
+    final double clampVolts;
     final double seriesOhms;
     final double shuntSiemens;
     final double kneeVolts;
@@ -77,50 +86,34 @@ final class ReferenceParameters {
                 - zenerSlopeOhms * clip.zener().testCurrentAmps();
         rampFarads = design.ramp().capacitor().value();
 
-        Trigger.UnijunctionTrigger trigger = (Trigger.UnijunctionTrigger) design.trigger();
-        Unijunction ujt = trigger.device();
-        baseOneOhms = trigger.baseOne().value();
-        baseTwoOhms = trigger.baseTwo().value();
-        standoff = ujt.standoff().nominal();
-        double bar25 = ujt.interbaseOhms().nominal();
-        interbaseOhms = bar25 * (1 + ujt.interbaseDriftPerKelvin().nominal() * warmer);
-        double drop25 = ujt.emitterDropVolts().nominal();
-        emitterDropVolts = drop25 + ujt.emitterDriftVoltsPerKelvin().nominal() * warmer;
-        peakCurrentAmps = ujt.peakCurrentAmps().nominal();
-        double spec = ujt.valley().atVolts();
-        double valleyAmps = ujt.valley().amps().nominal();
-        double valleyVolts = ujt.valley().volts().nominal();
-        valleySiemens = valleyAmps / spec;
-        onBaseTwoOhms =
-                ujt.modulated().map(m -> m.atVolts() / m.amps().nominal()).orElse((1 - standoff) * interbaseOhms);
-        if (ujt.baseOnePulse().isPresent()) {
-            Unijunction.BaseOnePulse test = ujt.baseOnePulse().get();
-            double onBaseTwo25 =
-                    ujt.modulated().map(m -> m.atVolts() / m.amps().nominal()).orElse((1 - standoff) * bar25);
-            UnivariateFunction excess = slope -> {
-                double xi = (valleyVolts - slope * valleyAmps - drop25) / spec;
-                double bar = test.supplyVolts() / (bar25 + test.baseOneOhms());
-                double peak = bar * (test.baseOneOhms() + standoff * bar25) + drop25;
-                double v = test.nominalVolts();
-                double emitter = (peak - v - drop25 - xi * test.supplyVolts()) / slope;
-                return emitter + (test.supplyVolts() - v) / onBaseTwo25 - v / test.baseOneOhms();
-            };
-            slopeOhms = new BrentSolver(1e-15, 1e-13).solve(300, excess, 1e-3, 1e6);
-        } else {
-            // V_D + xi u + r i = v through the valley point and through the saturation point.
-            double u = ujt.saturation().atVolts();
-            double i = ujt.saturation().amps();
-            double v = ujt.saturation().volts().nominal() - drop25;
-            double determinant = spec * i - u * valleyAmps;
-            slopeOhms = (spec * v - u * (valleyVolts - drop25)) / determinant;
-        }
-        intercept = (valleyVolts - slopeOhms * valleyAmps - drop25) / spec;
+        baseOneOhms = design.trigger().baseOne().value();
+        ReferenceDevice device = ReferenceDevice.of(design.trigger(), warmer);
+        programmable = device.programmable();
+        upperOhms = device.upperOhms();
+        lowerOhms = device.lowerOhms();
+        standoff = device.standoff();
+        interbaseOhms = device.interbaseOhms();
+        baseTwoOhms = device.baseTwoOhms();
+        emitterDropVolts = device.dropVolts();
+        emitterOnVolts = device.onVolts();
+        peakCurrentAmps = device.peakAmps();
+        slopeOhms = device.slopeOhms();
+        intercept = device.intercept();
+        valleySiemens = device.valleySiemens();
+        onBaseTwoOhms = device.onBaseTwoOhms();
 
         GateDrive gate = design.gate();
         seriesOhms = gate.series().value();
         shuntSiemens = gate.shunt().map(Part::value).map(r -> 1 / r).orElse(0.0);
-        double quiescentSiemens = shuntSiemens == 0 ? 0 : 1 / (seriesOhms + 1 / shuntSiemens);
-        quiescentBaseOneOhms = 1 / (1 / baseOneOhms + quiescentSiemens);
+        Optional<PulseTransformer> transformer = gate.transformer();
+        ratio = transformer.map(PulseTransformer::ratio).orElse(1.0);
+        secondaries = transformer.map(PulseTransformer::secondaries).orElse(1);
+        primaryOhms = transformer.map(PulseTransformer::primaryOhms).orElse(0.0);
+        secondaryOhms = transformer.map(PulseTransformer::secondaryOhms).orElse(0.0);
+        magnetisingHenries =
+                transformer.map(PulseTransformer::magnetisingHenries).orElse(0.0);
+        hasClamp = transformer.map(PulseTransformer::clampDiode).orElse(false);
+        clampVolts = clip.diodeDropVolts();
 
         ThyristorDevice thyristor = design.thyristor().device();
         kneeVolts = thyristor.gate().kneeVolts();
