@@ -9,6 +9,8 @@ import clipramp.circuit.GateDrive;
 import clipramp.circuit.Line;
 import clipramp.circuit.Load;
 import clipramp.circuit.Part;
+import clipramp.circuit.ProgrammableUnijunction;
+import clipramp.circuit.PulseTransformer;
 import clipramp.circuit.Ramp;
 import clipramp.circuit.Stage;
 import clipramp.circuit.StageDiodes;
@@ -65,6 +67,72 @@ final class RandomCircuits {
                 return drawn;
             }
         }
+    }
+
+    /** The same with a programmable device, a pulse transformer or both. */
+    static Drawn drawCoupled(long seed) {
+        RandomCircuits circuits = new RandomCircuits(seed);
+        while (true) {
+            Drawn drawn = circuits.circuit(seed);
+            if (isADevice(drawn)) {
+                return circuits.random.nextInt(3) == 0
+                        ? circuits.programmable(drawn)
+                        : circuits.throughTransformer(
+                                circuits.random.nextBoolean() ? drawn : circuits.programmable(drawn));
+            }
+        }
+    }
+
+    /** Ranges around the sheets of the class: sources.md's figures of programmable unijunction transistors. */
+    private Drawn programmable(Drawn drawn) {
+        OptionalDouble none = OptionalDouble.empty();
+        double spread = linear(0.5, 2);
+        ProgrammableUnijunction device = new ProgrammableUnijunction(
+                "drawn",
+                List.of(at(10e3, linear(0.2, 0.5)), at(1e6, linear(0.5, 1))),
+                Characteristic.exactly(linear(0.7, 1.2)),
+                50e-3,
+                List.of(at(10e3, 4e-6 * spread), at(1e6, 1.25e-6 * spread)),
+                List.of(at(200, 3e-3 * spread), at(10e3, 150e-6 * spread), at(1e6, 18e-6 * spread)),
+                new ProgrammableUnijunction.Limits(none, none, none, none, none, none, none, none));
+        double share = linear(0.4, 0.8);
+        double gateOhms = logarithmic(11e3, 300e3);
+        Trigger trigger = new Trigger.ProgrammableTrigger(
+                device, drawn.design().trigger().baseOne(), Part.of(gateOhms / share), Part.of(gateOhms / (1 - share)));
+        return new Drawn(drawn.seed(), drawn.design().withTrigger(trigger), drawn.condition(), drawn.rampOhms());
+    }
+
+    private static ProgrammableUnijunction.AtGateResistance at(double gateOhms, double value) {
+        return new ProgrammableUnijunction.AtGateResistance(gateOhms, Characteristic.exactly(value));
+    }
+
+    private Drawn throughTransformer(Drawn drawn) {
+        GateDrive gate = drawn.design().gate();
+        boolean inversePair = drawn.design().stage().isFullWave()
+                && drawn.design().clip().tap() == ClipSupply.Tap.LINE
+                && random.nextInt(3) == 0;
+        PulseTransformer transformer = new PulseTransformer(
+                oneOf(1.0, 1.0, 2.0, linear(0.7, 3)),
+                inversePair ? 2 : 1,
+                logarithmic(0.2e-3, 20e-3),
+                logarithmic(0.1, 5),
+                logarithmic(0.1, 5),
+                random.nextBoolean(),
+                OptionalDouble.empty());
+        Design design = drawn.design()
+                .withGate(new GateDrive(
+                        GateDrive.Coupling.TRANSFORMER,
+                        gate.series(),
+                        gate.shunt(),
+                        gate.overdrive(),
+                        gate.chargeSeconds(),
+                        gate.polarity(),
+                        Optional.of(transformer)));
+        return new Drawn(
+                drawn.seed(),
+                inversePair ? design.withStage(Stage.INVERSE_PARALLEL) : design,
+                drawn.condition(),
+                drawn.rampOhms());
     }
 
     /** Independent figures do not always make a unijunction: its saturated line must rise and end under the peak. */

@@ -285,8 +285,14 @@ final class ReferenceIntegrator {
             fire();
             return;
         }
+        follow();
+    }
+
+    /** The capacitor goes to the peak point and follows it. */
+    private void follow() {
+        log(Kind.STALL);
         emitter = Emitter.HELD;
-        nodes.search(emitter, e(now), eRate(now), volts, magnetisingAmps);
+        settleBranches();
         volts = nodes.peakVolts;
         hold();
     }
@@ -364,7 +370,9 @@ final class ReferenceIntegrator {
         emitter = Emitter.OFF;
         settleBranches();
         if (nodes.peakVolts <= volts) {
-            throw new IllegalStateException("the valley lies above the peak point at " + now);
+            // A programmable device's saturated line ends above its peak point as the supply dies: no pulse, it
+            // follows.
+            follow();
         }
     }
 
