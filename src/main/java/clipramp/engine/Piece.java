@@ -379,7 +379,8 @@ public final class Piece {
         Affine form = new Affine();
         double sign = rising ? 1 : -1;
         double level = n.gateKneeVolts + amps * n.gateSlopeOhms;
-        form.set(sign * gate.ramp, sign * gate.source, sign * (gate.constant - level));
+        form.set(0, 0, -sign * level);
+        form.add(sign, gate);
         return FirstCrossing.after(this, form, from, limit);
     }
 

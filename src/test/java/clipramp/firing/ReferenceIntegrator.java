@@ -27,7 +27,10 @@ final class ReferenceIntegrator {
 
     private static final int HALF_CYCLES = 60;
     private static final double SETTLED_VOLTS = 1e-9;
-    private static final double SETTLED_AMPS = 1e-11;
+    /** An explicit integrator follows a slow, latched discharge with some noise; late repeats may be this far apart. */
+    private static final double NOISE_VOLTS = 1e-6;
+
+    private static final double SETTLED_SIEMENS = 0.01;
 
     private final ReferenceParameters p;
     private final ReferenceNodes nodes;
@@ -36,6 +39,7 @@ final class ReferenceIntegrator {
     private double zeroRad;
     private double halfSeconds;
     private boolean thyristorOn;
+    private boolean trying;
     private Emitter emitter = Emitter.OFF;
     /** Not quite empty at first, so that no branch stands exactly on its edge. */
     private double volts = 1e-9;
@@ -66,10 +70,10 @@ final class ReferenceIntegrator {
     }
 
     private record AtZero(double volts, double magnetisingAmps, Emitter emitter) {
-        boolean repeats(AtZero other) {
+        boolean repeats(AtZero other, double within) {
             return emitter == other.emitter
-                    && Math.abs(volts - other.volts) <= SETTLED_VOLTS
-                    && Math.abs(magnetisingAmps - other.magnetisingAmps) <= SETTLED_AMPS;
+                    && Math.abs(volts - other.volts) <= within
+                    && Math.abs(magnetisingAmps - other.magnetisingAmps) <= within * SETTLED_SIEMENS;
         }
     }
 
@@ -80,12 +84,13 @@ final class ReferenceIntegrator {
         boolean alike = !p.bridge || p.isSymmetric() && !p.halfWaveStage;
         for (int k = 0; k < HALF_CYCLES; k++) {
             halves.add(half(!p.bridge ? !p.opposite : k % 2 == 0));
+            double within = k < HALF_CYCLES / 2 ? SETTLED_VOLTS : NOISE_VOLTS;
             AtZero end = new AtZero(volts, magnetisingAmps, emitter);
             zeros.add(end);
-            if (alike && end.repeats(zeros.get(k))) {
+            if (alike && end.repeats(zeros.get(k), within)) {
                 return new Periodic(Settling.STEADY, List.of(halves.get(k).continuedIn(halves.get(k), p.rampFarads)));
             }
-            if (k >= 2 && end.repeats(zeros.get(k - 1)) && zeros.get(k).repeats(zeros.get(k - 2))) {
+            if (k >= 2 && end.repeats(zeros.get(k - 1), within) && zeros.get(k).repeats(zeros.get(k - 2), within)) {
                 ReferenceHalf one = halves.get(k - 1);
                 ReferenceHalf other = halves.get(k);
                 return new Periodic(
@@ -333,15 +338,14 @@ final class ReferenceIntegrator {
         List<Event> eventsBefore = new ArrayList<>(events);
         int count = pulses.size();
         thyristorOn = true;
+        trying = true;
         conduct(supply, peak);
         while (now < halfSeconds && pulses.size() == count) {
             piece();
         }
+        trying = false;
         closePulse();
-        Pulse pulse = pulses.get(count);
-        if (pulse.turnsOn()) {
-            thyristorOn = pulse.latches();
-            settleBranches();
+        if (pulses.get(count).turnsOn()) {
             return;
         }
         pulses.remove(count);
@@ -367,6 +371,11 @@ final class ReferenceIntegrator {
     private void valley() {
         log(Kind.VALLEY);
         closePulse();
+        if (trying) {
+            // The supply comes back with the end of a pulse that did not latch, at the same instant.
+            thyristorOn = pulses.get(pulses.size() - 1).latches();
+            trying = false;
+        }
         emitter = Emitter.OFF;
         settleBranches();
         if (nodes.peakVolts <= volts) {

@@ -121,9 +121,11 @@ final class ReferenceParameters {
         triggerAmps = thyristor.gate().trigger().ampsAt(condition.celsius());
         turnOnSeconds = thyristor.gate().turnOnSeconds().orElse(0);
         boolean scr = thyristor.kind() == ThyristorDevice.Kind.SCR;
+        // Behind R_G a conducting gate finds base one's resistor, or nothing but the secondary's winding.
+        double behindOhms = transformer.isPresent() ? secondaryOhms : baseOneOhms;
         latchingAmps =
                 thyristor.latching().map(c -> c.ampsAt(condition.celsius())).orElse(0.0)
-                        + (scr ? 0.7 * (shuntSiemens + 1 / (seriesOhms + baseOneOhms)) : 0);
+                        + (scr ? 0.7 * (shuntSiemens + 1 / (seriesOhms + behindOhms)) : 0);
         thyristorVolts = thyristor.onState().thresholdVolts();
         Stage stage = design.stage();
         loadDropVolts =

@@ -142,9 +142,9 @@ final class ReferencePiece implements FirstOrderDifferentialEquations {
         if (emitter != Emitter.ON) {
             return halfSeconds / 200;
         }
-        // The valley's slack may dip under zero for less than the discharge's time constant.
-        double discharge = p.rampFarads * (p.slopeOhms + p.baseOneOhms);
-        return Math.min(halfSeconds / 1000, discharge / 5);
+        // The valley's slack may dip under zero for less than the discharge's time constant, a clamp's for less still.
+        double dip = p.rampFarads * (p.hasClamp ? p.slopeOhms / 2 : (p.slopeOhms + p.baseOneOhms) / 5);
+        return Math.min(halfSeconds / 1000, dip);
     }
 
     /** Looks at the solved nodes at five places of every step. */
