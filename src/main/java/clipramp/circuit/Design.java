@@ -1,6 +1,7 @@
 package clipramp.circuit;
 
 import java.util.Map;
+import java.util.Optional;
 
 /**
  * A whole design: one line-synchronised firing circuit with its thyristor and load.
@@ -17,6 +18,7 @@ import java.util.Map;
  * @param trigger trigger device and base resistors
  * @param gate gate drive
  * @param thyristor thyristor and its sink
+ * @param snubber resistor and capacitor across the thyristor, if there are any
  * @param surroundings ambient temperatures
  * @param wanted what the knob is to reach
  * @param resistorDerating share of its rating that a resistor may use, 0..1
@@ -35,6 +37,7 @@ public record Design(
         Trigger trigger,
         GateDrive gate,
         Thyristor thyristor,
+        Optional<Snubber> snubber,
         Surroundings surroundings,
         Wanted wanted,
         double resistorDerating,
@@ -42,6 +45,44 @@ public record Design(
     public Design {
         Require.fraction("resistor derating", resistorDerating);
         designators = Map.copyOf(designators);
+    }
+
+    /** A design without a snubber. */
+    public Design(
+            String title,
+            String notes,
+            Document document,
+            Line line,
+            Stage stage,
+            StageDiodes stageDiodes,
+            Load load,
+            ClipSupply clip,
+            Ramp ramp,
+            Trigger trigger,
+            GateDrive gate,
+            Thyristor thyristor,
+            Surroundings surroundings,
+            Wanted wanted,
+            double resistorDerating,
+            Map<String, String> designators) {
+        this(
+                title,
+                notes,
+                document,
+                line,
+                stage,
+                stageDiodes,
+                load,
+                clip,
+                ramp,
+                trigger,
+                gate,
+                thyristor,
+                Optional.empty(),
+                surroundings,
+                wanted,
+                resistorDerating,
+                designators);
     }
 
     /** Nominal line at 25 °C. */
@@ -71,6 +112,7 @@ public record Design(
                 trigger,
                 gate,
                 thyristor,
+                snubber,
                 surroundings,
                 wanted,
                 resistorDerating,
@@ -92,6 +134,7 @@ public record Design(
                 trigger,
                 gate,
                 thyristor,
+                snubber,
                 surroundings,
                 wanted,
                 resistorDerating,
@@ -113,6 +156,7 @@ public record Design(
                 trigger,
                 gate,
                 thyristor,
+                snubber,
                 surroundings,
                 wanted,
                 resistorDerating,
@@ -134,6 +178,7 @@ public record Design(
                 trigger,
                 gate,
                 thyristor,
+                snubber,
                 surroundings,
                 wanted,
                 resistorDerating,
@@ -155,6 +200,7 @@ public record Design(
                 trigger,
                 gate,
                 thyristor,
+                snubber,
                 surroundings,
                 wanted,
                 resistorDerating,
@@ -176,6 +222,7 @@ public record Design(
                 trigger,
                 gate,
                 thyristor,
+                snubber,
                 surroundings,
                 wanted,
                 resistorDerating,
@@ -197,6 +244,7 @@ public record Design(
                 newTrigger,
                 gate,
                 thyristor,
+                snubber,
                 surroundings,
                 wanted,
                 resistorDerating,
@@ -218,6 +266,7 @@ public record Design(
                 trigger,
                 newGate,
                 thyristor,
+                snubber,
                 surroundings,
                 wanted,
                 resistorDerating,
@@ -239,6 +288,29 @@ public record Design(
                 trigger,
                 gate,
                 newThyristor,
+                snubber,
+                surroundings,
+                wanted,
+                resistorDerating,
+                designators);
+    }
+
+    /** The same design with another snubber, or none. */
+    public Design withSnubber(Optional<Snubber> newSnubber) {
+        return new Design(
+                title,
+                notes,
+                document,
+                line,
+                stage,
+                stageDiodes,
+                load,
+                clip,
+                ramp,
+                trigger,
+                gate,
+                thyristor,
+                newSnubber,
                 surroundings,
                 wanted,
                 resistorDerating,
@@ -260,6 +332,7 @@ public record Design(
                 trigger,
                 gate,
                 thyristor,
+                snubber,
                 newSurroundings,
                 wanted,
                 resistorDerating,
@@ -281,6 +354,7 @@ public record Design(
                 trigger,
                 gate,
                 thyristor,
+                snubber,
                 surroundings,
                 newWanted,
                 resistorDerating,
@@ -302,6 +376,7 @@ public record Design(
                 trigger,
                 gate,
                 thyristor,
+                snubber,
                 surroundings,
                 wanted,
                 newResistorDerating,

@@ -10,14 +10,26 @@ public sealed interface Load {
     /** The word that stands in a design file. */
     String word();
 
+    /** Hot over cold resistance, 1 or more: what the first half cycle after a long pause makes of the current. */
+    default double coldRatio() {
+        return 1;
+    }
+
     /**
-     * A heater: the same resistance hot and cold.
+     * A heater: one resistance at every power once it is warm.
      *
-     * @param resistanceOhms resistance, ohm
+     * @param resistanceOhms resistance, warm, ohm
+     * @param coldRatio warm over cold resistance, 1 or more
      */
-    record Resistor(double resistanceOhms) implements Load {
+    record Resistor(double resistanceOhms, double coldRatio) implements Load {
         public Resistor {
             Require.positive("load resistance", resistanceOhms);
+            Require.atLeastOne("cold ratio", coldRatio);
+        }
+
+        /** A heater with the same resistance warm and cold, ohm. */
+        public Resistor(double resistanceOhms) {
+            this(resistanceOhms, 1);
         }
 
         @Override
@@ -31,7 +43,7 @@ public sealed interface Load {
      *
      * @param resistanceOhms resistance, ohm
      * @param inductanceHenries inductance, H
-     * @param freewheel diode across the load, if there is one
+     * @param freewheel diode across the load, if there is one (on the dc side of a bridge, or half-wave)
      */
     record Inductive(double resistanceOhms, double inductanceHenries, Optional<StageDiodes> freewheel) implements Load {
         public Inductive {
@@ -58,7 +70,7 @@ public sealed interface Load {
             Require.positive("rated power", ratedWatts);
             Require.positive("rated voltage", ratedVolts);
             Require.positive("power exponent", exponent);
-            Require.positive("cold ratio", coldRatio);
+            Require.atLeastOne("cold ratio", coldRatio);
         }
 
         @Override

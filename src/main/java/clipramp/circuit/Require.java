@@ -10,6 +10,12 @@ final class Require {
         }
     }
 
+    static void atLeastOne(String name, double value) {
+        if (!(value >= 1) || Double.isInfinite(value)) {
+            throw new IllegalArgumentException(name + " must be 1 or more, is " + value);
+        }
+    }
+
     static void notNegative(String name, double value) {
         if (!(value >= 0) || Double.isInfinite(value)) {
             throw new IllegalArgumentException(name + " must not be negative, is " + value);

@@ -148,6 +148,8 @@ public record ThyristorDevice(
      * @param surgeAmps I_TSM, A
      * @param ampsSquaredSeconds I squared t, A²s
      * @param junctionCelsius T_J max, °C
+     * @param voltsPerSecond rate of rise of the off-state voltage that it bears without turning on, V/s
+     * @param ampsPerSecond rate of rise of the on-state current that it bears as it turns on, A/s
      */
     public record Limits(
             OptionalDouble volts,
@@ -155,7 +157,28 @@ public record ThyristorDevice(
             OptionalDouble meanAmps,
             OptionalDouble surgeAmps,
             OptionalDouble ampsSquaredSeconds,
-            OptionalDouble junctionCelsius) {}
+            OptionalDouble junctionCelsius,
+            OptionalDouble voltsPerSecond,
+            OptionalDouble ampsPerSecond) {
+        /** Ratings of a sheet that states no rates of rise. */
+        public Limits(
+                OptionalDouble volts,
+                OptionalDouble rmsAmps,
+                OptionalDouble meanAmps,
+                OptionalDouble surgeAmps,
+                OptionalDouble ampsSquaredSeconds,
+                OptionalDouble junctionCelsius) {
+            this(
+                    volts,
+                    rmsAmps,
+                    meanAmps,
+                    surgeAmps,
+                    ampsSquaredSeconds,
+                    junctionCelsius,
+                    OptionalDouble.empty(),
+                    OptionalDouble.empty());
+        }
+    }
 
     /** Quadrants that a pulse of one polarity uses, first in the positive half cycle. */
     public static List<Quadrant> quadrantsOf(GateDrive.Polarity polarity) {

@@ -8,8 +8,14 @@ import clipramp.circuit.ThyristorDevice.OnState;
 import clipramp.firing.Solution;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
+import java.util.OptionalDouble;
 
-/** What a load gets from the firing angles of a solution (model.md section 8). */
+/**
+ * What a load gets from the pulses of a solution. A resistor's means are closed forms (quadrature on a line with
+ * harmonics); a filament is a resistor at the temperature that its own rms voltage gives it; an inductive load is run
+ * from pulse to extinction until it repeats. Derivations: DEVELOPERS.md, The circuit laws, Power.
+ */
 public final class LoadPower {
     private LoadPower() {}
 
@@ -19,52 +25,115 @@ public final class LoadPower {
      * @param design stage, load and thyristor
      * @param condition line
      * @param solution the firing circuit's periodic state there
-     * @throws UnsupportedLoadException for a load that is not a resistor
      */
     public static LoadResult of(Design design, Condition condition, Solution solution) {
-        return of(design, condition, solution.halves().size(), ActingPulses.slots(solution));
+        return of(design, condition, Firings.of(design, condition, solution));
     }
 
     /** The same with every half cycle fired at one angle, rad: what a firing angle is worth, whatever makes it. */
     public static LoadResult atFiringAngle(Design design, Condition condition, double firingRad) {
-        java.util.OptionalDouble rad = java.util.OptionalDouble.of(firingRad);
-        return of(
-                design,
-                condition,
-                1,
-                List.of(new ActingPulses.Slot(true, rad, 0), new ActingPulses.Slot(false, rad, 0)));
+        return of(design, condition, Firings.heldFrom(design, condition, firingRad));
+    }
+
+    /** The load's current itself, for what needs more of it than means: harmonics, waveforms, commutation. */
+    public static LoadPeriod period(Design design, Condition condition, Solution solution) {
+        return period(design, condition, Firings.of(design, condition, solution));
+    }
+
+    /** The load's current with every half cycle fired at one angle, rad. */
+    public static LoadPeriod periodAtFiringAngle(Design design, Condition condition, double firingRad) {
+        return period(design, condition, Firings.heldFrom(design, condition, firingRad));
     }
 
     /** Power of the same load with the thyristor always on, without drops, W: what fractions are shares of. */
     public static double fullWatts(Design design, Condition condition) {
-        double rms = condition.lineVolts() * design.line().rmsFactor();
-        return rms * rms / design.load().resistanceOhms();
+        return FullPower.watts(design, condition);
     }
 
-    private static LoadResult of(Design design, Condition condition, int halfCount, List<ActingPulses.Slot> slots) {
-        if (!(design.load() instanceof Load.Resistor resistor)) {
-            throw new UnsupportedLoadException(design.load());
+    private static LoadResult of(Design design, Condition condition, Firings firings) {
+        if (design.load() instanceof Load.Inductive) {
+            return SpanTotals.of(
+                    design, condition, period(design, condition, firings), firings.halves(), firings.slots());
         }
+        if (design.load() instanceof Load.Filament filament) {
+            FilamentLaw law = new FilamentLaw(filament);
+            LoadResult lit = resistive(warmed(design, condition, law, firings), condition, firings);
+            return lit.withLight(
+                    lit.watts() / fullWatts(design, condition), law.lightShareAt(lit.rmsVolts()));
+        }
+        return resistive(design, condition, firings);
+    }
+
+    /** The same design with the resistor that a filament is at these firings. */
+    private static Design warmed(Design design, Condition condition, FilamentLaw law, Firings firings) {
+        double ohms = law.settledOhms(trial -> resistive(
+                        design.withLoad(new Load.Resistor(trial)), condition, firings)
+                .rmsVolts());
+        return design.withLoad(new Load.Resistor(ohms));
+    }
+
+    private static LoadPeriod period(Design design, Condition condition, Firings firings) {
+        if (design.load() instanceof Load.Inductive inductive) {
+            return new InductiveRun(
+                            LoadLoop.of(design, condition, inductive),
+                            firings.windows(),
+                            firings.spanRad(),
+                            firings.latchingAmps(),
+                            firings.turnOnRad(),
+                            SpanTotals.highestOrder(design.line()))
+                    .settle();
+        }
+        if (design.load() instanceof Load.Filament filament) {
+            return resistivePeriod(
+                    warmed(design, condition, new FilamentLaw(filament), firings), condition, firings);
+        }
+        return resistivePeriod(design, condition, firings);
+    }
+
+    private static LoadPeriod resistivePeriod(Design design, Condition condition, Firings firings) {
+        ResistorCurrent path = new ResistorCurrent(design, condition);
+        List<CurrentSpan> spans = new ArrayList<>();
+        OptionalDouble fired = OptionalDouble.empty();
+        OptionalDouble ended = OptionalDouble.empty();
+        for (int half = 0; half < firings.slots().size(); half++) {
+            ActingPulses.Slot slot = firings.slots().get(half);
+            if (slot.firingRad().isPresent() && !blocked(design, slot)) {
+                double zero = half * Math.PI;
+                Optional<CurrentSpan> span =
+                        path.spanFiredAt(slot.positive(), slot.firingRad().getAsDouble(), zero);
+                span.ifPresent(spans::add);
+                if (span.isPresent() && fired.isEmpty()) {
+                    fired = OptionalDouble.of(span.get().fromRad() - zero);
+                    ended = OptionalDouble.of(span.get().toRad() - zero);
+                }
+            }
+        }
+        return new LoadPeriod(firings.spanRad(), spans, fired, ended, 0, true, true);
+    }
+
+    private static boolean blocked(Design design, ActingPulses.Slot slot) {
+        return design.stage() == Stage.HALF_WAVE && !slot.positive();
+    }
+
+    private static LoadResult resistive(Design design, Condition condition, Firings firings) {
         ResistorCurrent path = new ResistorCurrent(design, condition);
         List<HalfCycleCurrent> currents = new ArrayList<>();
-        for (ActingPulses.Slot slot : slots) {
-            boolean blocked = design.stage() == Stage.HALF_WAVE && !slot.positive();
+        for (ActingPulses.Slot slot : firings.slots()) {
             currents.add(
-                    slot.firingRad().isEmpty() || blocked
+                    slot.firingRad().isEmpty() || blocked(design, slot)
                             ? HalfCycleCurrent.NONE
                             : path.firedAt(slot.positive(), slot.firingRad().getAsDouble()));
         }
-        return summed(design, condition, resistor, halfCount, slots, currents);
+        return summed(design, condition, firings.halves(), firings.slots(), currents);
     }
 
     private static LoadResult summed(
             Design design,
             Condition condition,
-            Load.Resistor load,
             int halfCount,
             List<ActingPulses.Slot> slots,
             List<HalfCycleCurrent> currents) {
-        double ohms = load.resistanceOhms();
+        double ohms = design.load().resistanceOhms();
         double span = slots.size() * Math.PI;
         Means forward = new Means();
         Means backward = new Means();
@@ -91,6 +160,8 @@ public final class LoadPower {
         for (int half = 0; half < halfCount; half++) {
             halfWatts.add(halfSquare[half] / (halfSlots[half] * Math.PI) * ohms);
         }
+        Optional<HalfCycleCurrent> first =
+                currents.stream().filter(HalfCycleCurrent::flows).findFirst();
         Means one = worseThyristor(design, forward, backward);
         OnState onState = design.thyristor().device().onState();
         double oneMean = one.charge / span;
@@ -112,7 +183,13 @@ public final class LoadPower {
                 oneMean,
                 oneRms,
                 onState.thresholdVolts() * oneMean + onState.slopeOhms() * oneRms * oneRms,
-                halfWatts);
+                halfWatts,
+                first.stream().mapToDouble(HalfCycleCurrent::fromRad).findFirst(),
+                first.stream().mapToDouble(HalfCycleCurrent::toRad).findFirst(),
+                0,
+                slots.size(),
+                true,
+                OptionalDouble.empty());
     }
 
     /** The thyristor that carries more: one carries everything but where two stand in inverse parallel. */

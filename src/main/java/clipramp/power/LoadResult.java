@@ -1,6 +1,7 @@
 package clipramp.power;
 
 import java.util.List;
+import java.util.OptionalDouble;
 
 /**
  * What the load and the thyristor get over whole periods of the line.
@@ -15,12 +16,22 @@ import java.util.List;
  * @param dcAmps dc part of the line's current, A (signed)
  * @param formFactor rms over mean of magnitude; NaN with no current
  * @param crestFactor peak over rms; NaN with no current
- * @param powerFactor watts over line rms volts times rms amperes; NaN with no current
- * @param conductionRad angle per half cycle for which current flows (mean of both halves), rad
+ * @param powerFactor load watts over line rms volts times the line's rms amperes (a freewheeling current does not pass
+ *     the line); NaN with no current
+ * @param conductionRad angle per half cycle for which load current flows (mean of both halves), rad
  * @param thyristorMeanAmps mean current of one thyristor, A
  * @param thyristorRmsAmps rms current of one thyristor, A
  * @param thyristorWatts on-state loss of one thyristor, W
  * @param halfWatts mean power of each half cycle that differs, in the order of the solution's halves, W
+ * @param firedRad angle at which current first begins in the thyristor, from the zero of its half cycle, rad; empty with
+ *     no current. Later than the first pulse's where that came while current still flowed
+ * @param extinctionRad angle at which that current ends, from the same zero, rad; empty with no current, or where it
+ *     never ends
+ * @param missedHalves half cycles, of {@code halfCycles}, whose pulses all came while the current of the half cycle
+ *     before still flowed: the thyristor for that polarity stays off
+ * @param halfCycles half cycles after which everything repeats
+ * @param letsGo whether the thyristor turns off in every half cycle
+ * @param lightShare light of a filament as a share of its light at rated voltage; empty for other loads
  */
 public record LoadResult(
         double watts,
@@ -37,8 +48,81 @@ public record LoadResult(
         double thyristorMeanAmps,
         double thyristorRmsAmps,
         double thyristorWatts,
-        List<Double> halfWatts) {
+        List<Double> halfWatts,
+        OptionalDouble firedRad,
+        OptionalDouble extinctionRad,
+        int missedHalves,
+        int halfCycles,
+        boolean letsGo,
+        OptionalDouble lightShare) {
     public LoadResult {
         halfWatts = List.copyOf(halfWatts);
+    }
+
+    /** A load whose current needs no further telling: nothing missed, no light. */
+    public LoadResult(
+            double watts,
+            double fraction,
+            double rmsVolts,
+            double rmsAmps,
+            double meanAmps,
+            double peakAmps,
+            double dcAmps,
+            double formFactor,
+            double crestFactor,
+            double powerFactor,
+            double conductionRad,
+            double thyristorMeanAmps,
+            double thyristorRmsAmps,
+            double thyristorWatts,
+            List<Double> halfWatts) {
+        this(
+                watts,
+                fraction,
+                rmsVolts,
+                rmsAmps,
+                meanAmps,
+                peakAmps,
+                dcAmps,
+                formFactor,
+                crestFactor,
+                powerFactor,
+                conductionRad,
+                thyristorMeanAmps,
+                thyristorRmsAmps,
+                thyristorWatts,
+                halfWatts,
+                OptionalDouble.empty(),
+                OptionalDouble.empty(),
+                0,
+                2,
+                true,
+                OptionalDouble.empty());
+    }
+
+    /** The same with a filament's light. */
+    LoadResult withLight(double newFraction, double newLightShare) {
+        return new LoadResult(
+                watts,
+                newFraction,
+                rmsVolts,
+                rmsAmps,
+                meanAmps,
+                peakAmps,
+                dcAmps,
+                formFactor,
+                crestFactor,
+                powerFactor,
+                conductionRad,
+                thyristorMeanAmps,
+                thyristorRmsAmps,
+                thyristorWatts,
+                halfWatts,
+                firedRad,
+                extinctionRad,
+                missedHalves,
+                halfCycles,
+                letsGo,
+                OptionalDouble.of(newLightShare));
     }
 }

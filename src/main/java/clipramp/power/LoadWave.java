@@ -2,18 +2,19 @@ package clipramp.power;
 
 import clipramp.circuit.Condition;
 import clipramp.circuit.Design;
-import clipramp.circuit.Load;
 import clipramp.circuit.Stage;
 import clipramp.firing.Solution;
 import java.util.ArrayList;
 import java.util.List;
 
 /**
- * Voltage across the load over one half cycle, or over one period for a half-wave stage: the line less the path's
- * drops, shared between load and path (model.md section 8), while current flows; 0 otherwise.
+ * Voltage across the load over one half cycle, or over one period for a half-wave stage: what the line leaves while
+ * current flows, the diode's drop while it freewheels, 0 otherwise. An inductive load's current of the half cycle before
+ * may still flow as it begins.
  *
  * @param rad angles of the line, rad, from 0, never falling; two samples where the voltage jumps
- * @param volts voltage across the load at those angles, V; on the dc side of a bridge always positive
+ * @param volts voltage across the load at those angles, V; on the dc side of a bridge positive but for a freewheeling
+ *     diode's drop
  */
 public record LoadWave(double[] rad, double[] volts) {
     /** Samples of one conducting half cycle: a hundredth of it is under the width of a screen's pixel. */
@@ -23,41 +24,45 @@ public record LoadWave(double[] rad, double[] volts) {
      * @param design stage, load and thyristor
      * @param condition line
      * @param solution the firing circuit's periodic state there
-     * @throws UnsupportedLoadException for a load that is not a resistor
      */
     public static LoadWave of(Design design, Condition condition, Solution solution) {
-        if (!(design.load() instanceof Load.Resistor)) {
-            throw new UnsupportedLoadException(design.load());
-        }
-        boolean period = design.stage() == Stage.HALF_WAVE || ActingPulses.spansPeriods(solution);
-        List<ActingPulses.Slot> slots = ActingPulses.slots(solution);
-        ResistorCurrent path = new ResistorCurrent(design, condition);
+        boolean whole = design.stage() == Stage.HALF_WAVE || ActingPulses.spansPeriods(solution);
+        double start = whole ? 0 : shownHalf(solution) * Math.PI;
+        double end = start + (whole ? 2 : 1) * Math.PI;
         List<double[]> samples = new ArrayList<>();
         samples.add(new double[] {0, 0});
-        for (int half = 0; half < (period ? 2 : 1); half++) {
-            ActingPulses.Slot slot = period ? slots.get(half) : shown(slots);
-            boolean blocked = design.stage() == Stage.HALF_WAVE && !slot.positive();
-            if (slot.firingRad().isPresent() && !blocked) {
-                double sign = slot.positive() || design.stage() == Stage.BRIDGE_DC ? 1 : -1;
-                conducting(path, slot, half * Math.PI, sign, samples);
+        for (CurrentSpan span : LoadPower.period(design, condition, solution).spans()) {
+            double from = Math.max(start, span.fromRad());
+            double to = Math.min(end, span.toRad());
+            if (from < to) {
+                double sign = design.stage() == Stage.BRIDGE_DC ? 1 : span.direction() < 0 ? -1 : 1;
+                sample(span.between(from, to), start, sign, samples);
             }
-            samples.add(new double[] {(half + 1) * Math.PI, 0});
         }
+        samples.add(new double[] {end - start, 0});
         return new LoadWave(column(samples, 0), column(samples, 1));
     }
 
-    private static ActingPulses.Slot shown(List<ActingPulses.Slot> slots) {
-        return slots.stream().filter(ActingPulses.Slot::positive).findFirst().orElse(slots.get(0));
+    /** The first half cycle in which the line is positive. */
+    private static int shownHalf(Solution solution) {
+        List<ActingPulses.Slot> slots = ActingPulses.slots(solution);
+        for (int half = 0; half < slots.size(); half++) {
+            if (slots.get(half).positive()) {
+                return half;
+            }
+        }
+        return 0;
     }
 
-    private static void conducting(
-            ResistorCurrent path, ActingPulses.Slot slot, double startRad, double sign, List<double[]> samples) {
-        double from = Math.max(0, slot.firingRad().getAsDouble());
-        samples.add(new double[] {startRad + from, 0});
+    private static void sample(CurrentSpan span, double start, double sign, List<double[]> samples) {
+        double length = span.toRad() - span.fromRad();
+        samples.add(new double[] {span.fromRad() - start, 0});
         for (int i = 0; i <= SAMPLES; i++) {
-            double rad = from + (Math.PI - from) * i / SAMPLES;
-            samples.add(new double[] {startRad + rad, sign * path.loadVoltsAt(slot.positive(), rad)});
+            double rad = span.fromRad() + length * i / SAMPLES;
+            samples.add(
+                    new double[] {rad - start, sign * span.loadVolts().applyAsDouble(rad)});
         }
+        samples.add(new double[] {span.toRad() - start, 0});
     }
 
     private static double[] column(List<double[]> samples, int column) {

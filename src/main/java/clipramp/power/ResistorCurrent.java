@@ -5,6 +5,7 @@ import clipramp.circuit.Design;
 import clipramp.circuit.Line;
 import clipramp.engine.LineWave;
 import clipramp.engine.LoadCurrent;
+import java.util.Optional;
 import org.apache.commons.math3.analysis.UnivariateFunction;
 import org.apache.commons.math3.analysis.integration.gauss.GaussIntegrator;
 import org.apache.commons.math3.analysis.integration.gauss.GaussIntegratorFactory;
@@ -65,17 +66,49 @@ final class ResistorCurrent {
         return line.isPureSine() ? closedForm(firingRad) : byQuadrature(positive, firingRad);
     }
 
-    private HalfCycleCurrent closedForm(double firingRad) {
+    /**
+     * The stretch of current in one half cycle fired at an angle.
+     *
+     * @param positive which half cycle of the line
+     * @param firingRad firing angle from the fundamental's zero that begins this half cycle, rad
+     * @param zeroRad that zero on the line's angle, rad
+     */
+    Optional<CurrentSpan> spanFiredAt(boolean positive, double firingRad, double zeroRad) {
+        return limitsRad(positive, firingRad)
+                .map(limits -> new CurrentSpan(
+                        zeroRad + limits.from(),
+                        zeroRad + limits.to(),
+                        positive ? 1 : -1,
+                        0,
+                        rad -> Math.max(0, drivingVolts(positive, rad - zeroRad)) / pathOhms,
+                        rad -> loadVoltsAt(positive, rad - zeroRad)));
+    }
+
+    private record Limits(double from, double to) {}
+
+    private Optional<Limits> limitsRad(boolean positive, double firingRad) {
+        return line.isPureSine() ? closedLimits(firingRad) : searchedLimits(positive, firingRad);
+    }
+
+    private Optional<Limits> closedLimits(double firingRad) {
         double crest = Math.sqrt(2) * lineVolts;
         if (crest <= dropVolts) {
-            return HalfCycleCurrent.NONE;
+            return Optional.empty();
         }
         double edge = Math.asin(dropVolts / crest);
         double from = Math.max(firingRad, edge);
         double to = Math.PI - edge;
-        if (from >= to) {
-            return HalfCycleCurrent.NONE;
-        }
+        return from >= to ? Optional.empty() : Optional.of(new Limits(from, to));
+    }
+
+    private HalfCycleCurrent closedForm(double firingRad) {
+        return closedLimits(firingRad)
+                .map(limits -> closedForm(limits.from(), limits.to()))
+                .orElse(HalfCycleCurrent.NONE);
+    }
+
+    private HalfCycleCurrent closedForm(double from, double to) {
+        double crest = Math.sqrt(2) * lineVolts;
         double charge = crest * (Math.cos(from) - Math.cos(to)) - dropVolts * (to - from);
         double square = crest * crest * ((to - from) / 2 - (Math.sin(2 * to) - Math.sin(2 * from)) / 4)
                 + 2 * crest * dropVolts * (Math.cos(to) - Math.cos(from))
@@ -85,10 +118,17 @@ final class ResistorCurrent {
                 Math.max(0, charge / pathOhms),
                 Math.max(0, square / (pathOhms * pathOhms)),
                 peak / pathOhms,
-                to - from);
+                from,
+                to);
     }
 
     private HalfCycleCurrent byQuadrature(boolean positive, double firingRad) {
+        return searchedLimits(positive, firingRad)
+                .map(limits -> between(rad -> drivingVolts(positive, rad), limits.from(), limits.to()))
+                .orElse(HalfCycleCurrent.NONE);
+    }
+
+    private Optional<Limits> searchedLimits(boolean positive, double firingRad) {
         UnivariateFunction driving = rad -> drivingVolts(positive, rad);
         double step = panelRad();
         double latest = 1.5 * Math.PI;
@@ -99,7 +139,7 @@ final class ResistorCurrent {
                 open += step;
             }
             if (open >= Math.PI) {
-                return HalfCycleCurrent.NONE;
+                return Optional.empty();
             }
             from = new BrentSolver(LIMIT_RAD).solve(TRIALS, driving, open - step, open);
         }
@@ -109,7 +149,7 @@ final class ResistorCurrent {
         }
         double lower = Math.max(from, shut - step);
         double to = driving.value(lower) > 0 ? new BrentSolver(LIMIT_RAD).solve(TRIALS, driving, lower, shut) : lower;
-        return between(driving, from, to);
+        return Optional.of(new Limits(from, to));
     }
 
     private HalfCycleCurrent between(UnivariateFunction driving, double from, double to) {
@@ -136,7 +176,7 @@ final class ResistorCurrent {
         }
         double highest = Math.max(driving.value(from), crestNear(driving, peakRad, width, from, to));
         return new HalfCycleCurrent(
-                charge / pathOhms, square / (pathOhms * pathOhms), Math.max(peak, highest) / pathOhms, to - from);
+                charge / pathOhms, square / (pathOhms * pathOhms), Math.max(peak, highest) / pathOhms, from, to);
     }
 
     private static double crestNear(UnivariateFunction driving, double rad, double width, double from, double to) {

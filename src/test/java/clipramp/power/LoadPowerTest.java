@@ -1,7 +1,6 @@
 package clipramp.power;
 
 import static org.assertj.core.api.Assertions.assertThat;
-import static org.assertj.core.api.Assertions.assertThatThrownBy;
 import static org.assertj.core.api.Assertions.within;
 
 import clipramp.circuit.Condition;
@@ -15,7 +14,6 @@ import clipramp.firing.HalfCycle;
 import clipramp.firing.Solution;
 import clipramp.firing.Solution.Settling;
 import java.util.List;
-import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.Random;
 import org.apache.commons.math3.analysis.UnivariateFunction;
@@ -271,14 +269,5 @@ class LoadPowerTest {
             assertThat(watts).isLessThanOrEqualTo(last);
             last = watts;
         }
-    }
-
-    @Test
-    void refusesALoadThatItCannotSolveByItsKey() {
-        Design design = SampleDesigns.heater().withLoad(new Load.Inductive(40, 0.12, Optional.empty()));
-        assertThatThrownBy(() -> LoadPower.of(design, EUROPE, Fired.at(EUROPE, 1)))
-                .isInstanceOf(UnsupportedLoadException.class)
-                .hasMessageContaining("load.kind")
-                .hasMessageContaining("inductive");
     }
 }

@@ -1,0 +1,15 @@
+package clipramp.circuit;
+
+/**
+ * Resistor and capacitor in series across the thyristor (or the pair, or the triac): limits how fast voltage comes back
+ * when an inductive load's current dies.
+ *
+ * @param resistanceOhms resistor, ohm
+ * @param capacitanceFarads capacitor, F
+ */
+public record Snubber(double resistanceOhms, double capacitanceFarads) {
+    public Snubber {
+        Require.positive("snubber resistance", resistanceOhms);
+        Require.positive("snubber capacitance", capacitanceFarads);
+    }
+}

@@ -1,0 +1,55 @@
+package clipramp.power;
+
+import org.apache.commons.math3.analysis.integration.gauss.GaussIntegrator;
+import org.apache.commons.math3.analysis.integration.gauss.GaussIntegratorFactory;
+
+/**
+ * Integrals over stretches of current: Gauss-Legendre panels of 24 points, over each of which the fastest sinusoid turns
+ * by 16 radians at most (the rule is exact to rounding there), shorter where an exponential still moves.
+ */
+final class SpanQuadrature {
+    private static final GaussIntegrator RULE = new GaussIntegratorFactory().legendre(24);
+    private static final double MOST_TURN_RAD = 16;
+
+    /** Panel edges in time constants of the loop; beyond the last the exponential is gone. */
+    private static final double[] EDGES = {2, 5, 10, 20, 40};
+
+    private SpanQuadrature() {}
+
+    /** Is shown a node of the rule. */
+    interface Visitor {
+        void node(double rad, double weightRad);
+    }
+
+    /**
+     * Visits the nodes of a stretch.
+     *
+     * @param highestOrder order of the line of the fastest sinusoid in the integrand
+     */
+    static void visit(CurrentSpan span, int highestOrder, Visitor visitor) {
+        double longest = MOST_TURN_RAD / highestOrder;
+        double start = span.fromRad();
+        for (double edge : EDGES) {
+            double next = span.fromRad() + edge * span.memoryRad();
+            if (next > start && next < span.toRad()) {
+                panels(start, next, longest, visitor);
+                start = next;
+            }
+        }
+        panels(start, span.toRad(), longest, visitor);
+    }
+
+    private static void panels(double from, double to, double longest, Visitor visitor) {
+        if (!(to > from)) {
+            return;
+        }
+        int count = Math.max(1, (int) Math.ceil((to - from) / longest));
+        double half = (to - from) / count / 2;
+        for (int panel = 0; panel < count; panel++) {
+            double middle = from + (2 * panel + 1) * half;
+            for (int i = 0; i < RULE.getNumberOfPoints(); i++) {
+                visitor.node(middle + half * RULE.getPoint(i), half * RULE.getWeight(i));
+            }
+        }
+    }
+}

@@ -1,0 +1,148 @@
+package clipramp.power;
+
+import clipramp.circuit.Condition;
+import clipramp.circuit.Design;
+import clipramp.circuit.Line;
+import clipramp.circuit.Stage;
+import clipramp.circuit.ThyristorDevice.OnState;
+import java.util.ArrayList;
+import java.util.List;
+
+/** Sums up the stretches of a load's current into what load and thyristor get. */
+final class SpanTotals {
+    private final Design design;
+    private final Condition condition;
+    private final LoadPeriod period;
+    private final int highestOrder;
+    private final double[] halfSquare;
+    private final Duty forward = new Duty();
+    private final Duty backward = new Duty();
+    private double charge;
+    private double square;
+    private double squareVolts;
+    private double peak;
+    private double conduction;
+
+    /** Sums over one direction of the line's current. */
+    private static final class Duty {
+        private double charge;
+        private double square;
+    }
+
+    private SpanTotals(Design design, Condition condition, LoadPeriod period) {
+        this.design = design;
+        this.condition = condition;
+        this.period = period;
+        halfSquare = new double[period.halfCycles()];
+        highestOrder = highestOrder(design.line());
+        for (CurrentSpan span : period.spans()) {
+            add(span);
+        }
+    }
+
+    static int highestOrder(Line line) {
+        return line.harmonics().stream().mapToInt(Line.Harmonic::order).max().orElse(1);
+    }
+
+    /**
+     * @param halves how many of the solution's half cycles differ
+     * @param slots which of them each half cycle of the load belongs to
+     */
+    static LoadResult of(
+            Design design, Condition condition, LoadPeriod period, int halves, List<ActingPulses.Slot> slots) {
+        return new SpanTotals(design, condition, period).result(halves, slots);
+    }
+
+    private void add(CurrentSpan span) {
+        double from = span.fromRad();
+        while (from < span.toRad()) {
+            int half = Math.min(halfSquare.length - 1, (int) Math.floor(from / Math.PI + 1e-12));
+            double to = Math.min(span.toRad(), (half + 1) * Math.PI);
+            if (!(to > from)) {
+                to = span.toRad();
+            }
+            addWithin(span.between(from, to), half);
+            from = to;
+        }
+        conduction += span.toRad() - span.fromRad();
+    }
+
+    private void addWithin(CurrentSpan span, int half) {
+        Duty duty = span.direction() >= 0 ? forward : backward;
+        boolean thyristor = span.throughThyristor();
+        // Products of two currents turn twice as fast as either.
+        SpanQuadrature.visit(span, 2 * highestOrder + 2, (rad, weight) -> {
+            double amps = span.amps().applyAsDouble(rad);
+            double volts = span.loadVolts().applyAsDouble(rad);
+            charge += weight * amps;
+            square += weight * amps * amps;
+            squareVolts += weight * volts * volts;
+            halfSquare[half] += weight * amps * amps;
+            if (thyristor) {
+                duty.charge += weight * amps;
+                duty.square += weight * amps * amps;
+            }
+        });
+        peak = Math.max(peak, SpanPeak.of(span, highestOrder));
+    }
+
+    private LoadResult result(int halves, List<ActingPulses.Slot> slots) {
+        double span = period.spanRad();
+        double ohms = design.load().resistanceOhms();
+        double rms = Math.sqrt(square / span);
+        double mean = charge / span;
+        double watts = square / span * ohms;
+        double lineRms = condition.lineVolts() * design.line().rmsFactor();
+        double lineAmps = Math.sqrt((forward.square + backward.square) / span);
+        boolean both = design.stage().isFullWave();
+        OnState onState = design.thyristor().device().onState();
+        boolean pair = design.stage() == Stage.INVERSE_PARALLEL;
+        Duty one = pair ? (forward.square >= backward.square ? forward : backward) : sum();
+        double oneMean = one.charge / span;
+        double oneSquare = one.square / span;
+        return new LoadResult(
+                watts,
+                watts / FullPower.watts(design, condition),
+                Math.sqrt(squareVolts / span),
+                rms,
+                mean,
+                peak,
+                (forward.charge - backward.charge) / span,
+                rms > 0 ? rms / mean : Double.NaN,
+                rms > 0 ? peak / rms : Double.NaN,
+                lineAmps > 0 ? watts / (lineRms * lineAmps) : Double.NaN,
+                conduction / (period.halfCycles() * (both ? 1 : 0.5)),
+                oneMean,
+                Math.sqrt(oneSquare),
+                onState.thresholdVolts() * oneMean + onState.slopeOhms() * oneSquare,
+                halfWatts(halves, slots, ohms),
+                period.firedRad(),
+                period.extinctionRad(),
+                period.missedHalves(),
+                period.halfCycles(),
+                period.letsGo(),
+                java.util.OptionalDouble.empty());
+    }
+
+    private Duty sum() {
+        Duty sum = new Duty();
+        sum.charge = forward.charge + backward.charge;
+        sum.square = forward.square + backward.square;
+        return sum;
+    }
+
+    private List<Double> halfWatts(int halves, List<ActingPulses.Slot> slots, double ohms) {
+        double[] squares = new double[halves];
+        int[] counts = new int[halves];
+        for (int half = 0; half < halfSquare.length; half++) {
+            int index = slots.get(half % slots.size()).index();
+            squares[index] += halfSquare[half];
+            counts[index]++;
+        }
+        List<Double> watts = new ArrayList<>();
+        for (int index = 0; index < halves; index++) {
+            watts.add(counts[index] == 0 ? 0 : squares[index] / (counts[index] * Math.PI) * ohms);
+        }
+        return watts;
+    }
+}
