@@ -6,6 +6,7 @@ import clipramp.circuit.GateDrive.Coupling;
 import clipramp.circuit.GateDrive.Polarity;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 
 /**
  * Which combinations of stage, firing supply, coupling and load can work at all, and the electrical reason where one
@@ -34,7 +35,11 @@ public final class Soundness {
     public static List<Reason> reasons(Design design) {
         List<Reason> reasons = new ArrayList<>(ofSupply(design.stage(), design.clip()));
         reasons.addAll(ofCoupling(design.stage(), design.clip(), design.gate()));
-        reasons.addAll(ofLoad(design.stage(), design.load()));
+        reasons.addAll(ofLoad(
+                design.stage(),
+                design.load(),
+                design.snubber(),
+                Optional.of(design.thyristor().device())));
         reasons.addAll(ofDevice(design.stage(), design.thyristor().device().kind()));
         return reasons;
     }
@@ -151,8 +156,13 @@ public final class Soundness {
                 : List.of();
     }
 
-    /** Whether the stage can let go of the load's current. */
-    public static List<Reason> ofLoad(Stage stage, Load load) {
+    /**
+     * Whether the stage can let go of the load's current.
+     *
+     * @param device the thyristor, where it could be read
+     */
+    public static List<Reason> ofLoad(
+            Stage stage, Load load, Optional<Snubber> snubber, Optional<ThyristorDevice> device) {
         if (!(load instanceof Load.Inductive inductive)) {
             return List.of();
         }
@@ -167,14 +177,19 @@ public final class Soundness {
                             + " turns off",
                     "Give load.freewheel, such as {drop: 0.9 V}."));
         }
-        if (stage == Stage.BRIDGE_AC) {
+        boolean turnOffKnown = device.map(d -> d.turnOffSeconds().isPresent()).orElse(true);
+        if (stage == Stage.BRIDGE_AC && (snubber.isEmpty() || !turnOffKnown)) {
+            String lacking = snubber.isPresent()
+                    ? "its profile states no turn-off time"
+                    : turnOffKnown ? "there is no snubber" : "there is neither a snubber nor a stated turn-off time";
             return List.of(new Reason(
                     "load.kind",
                     "inductive",
                     with,
-                    "when the current reaches zero the bridge puts forward voltage on the SCR at once, which has had no time"
-                            + " to turn off; a snubber is not part of this model",
-                    "Use stage inverse-parallel or triac, or bridge-dc with load.freewheel."));
+                    "when the current reaches zero the bridge puts forward voltage on the SCR at once; whether it has turned"
+                            + " off by then cannot be judged, for " + lacking,
+                    "Use stage inverse-parallel or triac, or bridge-dc with load.freewheel; or give snubber, such as"
+                            + " {resistance: 100 ohm, capacitance: 100 nF}, and an SCR whose turn-off is known."));
         }
         if (freewheel && stage.isFullWave() && stage != Stage.BRIDGE_DC) {
             return List.of(new Reason(

@@ -1,8 +1,8 @@
 package clipramp.cli;
 
+import clipramp.circuit.RefusedCircuit;
 import clipramp.files.InvalidInputException;
 import clipramp.files.Problem;
-import clipramp.power.UnsupportedLoadException;
 import java.io.IOException;
 import java.io.PrintWriter;
 import java.io.StringWriter;
@@ -46,8 +46,8 @@ final class Failures {
             return unusable(refused.problems());
         } catch (ParameterException refused) {
             return unusable(List.of(ofOption(refused)));
-        } catch (UnsupportedLoadException refused) {
-            return unusable(List.of(Problems.of("", "load.kind", String.valueOf(refused.getMessage()))));
+        } catch (RefusedCircuit refused) {
+            return unusable(List.of(Problems.of("", refused.path(), String.valueOf(refused.getMessage()))));
         } catch (FileFailure failure) {
             return file(String.valueOf(failure.getMessage()));
         } catch (UncheckedIOException | IOException failure) {

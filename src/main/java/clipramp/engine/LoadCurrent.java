@@ -16,6 +16,7 @@ public final class LoadCurrent {
     private final double dropVolts;
     private final double loopOhms;
     private final double henries;
+    private final boolean freewheels;
 
     public LoadCurrent(Design design, Condition condition) {
         this(design, new LineWave(design.line(), condition));
@@ -26,6 +27,8 @@ public final class LoadCurrent {
         Stage stage = design.stage();
         fullWave = stage.isFullWave();
         henries = design.load() instanceof Load.Inductive inductive ? inductive.inductanceHenries() : 0;
+        freewheels = design.load() instanceof Load.Inductive inductive
+                && inductive.freewheel().isPresent();
         var onState = design.thyristor().device().onState();
         dropVolts = onState.thresholdVolts()
                 + stage.bridgeDiodes() * design.stageDiodes().dropVolts();
@@ -64,10 +67,11 @@ public final class LoadCurrent {
      * Line angle at which the current ends that was fired with none flowing.
      *
      * @param firedRad line angle of firing, rad
-     * @param halfEndRad the zero that ends the half cycle: with a resistor the current ends there, rad
+     * @param halfEndRad the zero that ends the half cycle: with a resistor the current ends there, and a freewheeling
+     *     diode takes it over a fraction of a degree before, rad
      */
     public double extinctionRad(double firedRad, double halfEndRad) {
-        if (henries == 0 || drivingVolts(firedRad) <= 0) {
+        if (henries == 0 || freewheels || drivingVolts(firedRad) <= 0) {
             return halfEndRad;
         }
         return Math.min(begun(firedRad).extinctionRad(firedRad + 2 * Math.PI), firedRad + 2 * Math.PI);

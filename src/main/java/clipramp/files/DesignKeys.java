@@ -118,8 +118,8 @@ final class DesignKeys {
                         .means("How a filament's power grows with its voltage: 1.55 for tungsten, 2 for a resistor."),
                 quantity("load.cold-ratio", Unit.NUMBER, 1, 30)
                         .orElse("15")
-                        .by("filaments")
-                        .means("Hot over cold resistance of a filament, which sets its inrush."));
+                        .by("filaments; 1 for resistors")
+                        .means("Hot over cold resistance, which sets the inrush of a load that was off for long."));
     }
 
     private static List<Key> clip() {
@@ -278,6 +278,16 @@ final class DesignKeys {
                         .optional()
                         .by("junction temperature")
                         .means("Thermal resistance from case to ambient, sink included."),
+                other("snubber", Kind.MAPPING)
+                        .optional()
+                        .by("inductive loads")
+                        .means("Resistor and capacitor in series across the thyristor; none where there are none."),
+                quantity("snubber.resistance", Unit.OHM, 0.1, 1e5)
+                        .by("snubbers")
+                        .means("The snubber's resistor."),
+                quantity("snubber.capacitance", Unit.FARAD, 1e-11, 1e-4)
+                        .by("snubbers")
+                        .means("The snubber's capacitor."),
                 other("surroundings", Kind.MAPPING).optional().by("margins").means("Ambient temperatures."),
                 quantity("surroundings.coldest", Unit.CELSIUS, -60, 100)
                         .orElse("0 degC")

@@ -7,6 +7,7 @@ import clipramp.circuit.GateDrive;
 import clipramp.circuit.Line;
 import clipramp.circuit.Load;
 import clipramp.circuit.Ramp;
+import clipramp.circuit.Snubber;
 import clipramp.circuit.Stage;
 import clipramp.circuit.StageDiodes;
 import clipramp.circuit.Surroundings;
@@ -43,7 +44,8 @@ final class DesignReader {
             Optional<Ramp> ramp,
             Optional<Trigger> trigger,
             Optional<GateDrive> gate,
-            Optional<Thyristor> thyristor) {}
+            Optional<Thyristor> thyristor,
+            Optional<Snubber> snubber) {}
 
     /** Empty where there are problems. */
     Optional<Design> read() {
@@ -58,7 +60,7 @@ final class DesignReader {
         Map<String, String> designators = RestSections.designators(root);
         root.close("");
         new SoundnessCheck(root, findings)
-                .check(parts.stage(), parts.clip(), parts.gate(), parts.load(), parts.thyristor());
+                .check(parts.stage(), parts.clip(), parts.gate(), parts.load(), parts.thyristor(), parts.snubber());
         if (findings.hasProblems()) {
             return Optional.empty();
         }
@@ -77,6 +79,7 @@ final class DesignReader {
                         parts.trigger().orElseThrow(),
                         parts.gate().orElseThrow(),
                         parts.thyristor().orElseThrow(),
+                        parts.snubber(),
                         surroundings.orElseThrow(),
                         wanted,
                         derating,
@@ -100,7 +103,8 @@ final class DesignReader {
                 root.child("ramp").flatMap(RampSection::read),
                 root.child("trigger").flatMap(s -> TriggerSection.read(s, devices)),
                 root.child("gate").flatMap(GateSection::read),
-                root.child("thyristor").flatMap(s -> ThyristorSection.read(s, devices, triac)));
+                root.child("thyristor").flatMap(s -> ThyristorSection.read(s, devices, triac)),
+                root.child("snubber").flatMap(RestSections::snubber));
     }
 
     private Optional<Stage> stage() {

@@ -54,6 +54,13 @@ public final class DesignWriter {
         design.thyristor()
                 .caseToAmbientKelvinPerWatt()
                 .ifPresent(k -> line("  case-to-ambient", QuantityText.exact(k, Unit.KELVIN_PER_WATT)));
+        design.snubber()
+                .ifPresent(s -> line(
+                        "snubber",
+                        new FlowText()
+                                .quantity("resistance", s.resistanceOhms(), Unit.OHM)
+                                .quantity("capacitance", s.capacitanceFarads(), Unit.FARAD)
+                                .text()));
         line(
                 "surroundings",
                 new FlowText()
@@ -153,6 +160,9 @@ public final class DesignWriter {
             text.quantity("cold-ratio", filament.coldRatio(), Unit.NUMBER);
         } else {
             text.quantity("resistance", load.resistanceOhms(), Unit.OHM);
+        }
+        if (load instanceof Load.Resistor resistor && resistor.coldRatio() != 1) {
+            text.quantity("cold-ratio", resistor.coldRatio(), Unit.NUMBER);
         }
         if (load instanceof Load.Inductive inductive) {
             text.quantity("inductance", inductive.inductanceHenries(), Unit.HENRY);

@@ -245,7 +245,7 @@ final class DeviceKeys {
         curve(keys, kind + ".holding", "Holding current I_H, at 25 °C or against junction temperature.");
         keys.add(quantity(kind + ".turn-off", Unit.SECOND, 1e-8, 1)
                 .optional()
-                .by("bridge-dc with inductance")
+                .by("bridge stages and inductive loads")
                 .means("Turn-off time t_q."));
         keys.add(other(kind + ".on-state", Kind.MAPPING)
                 .by("every thyristor")
@@ -259,6 +259,20 @@ final class DeviceKeys {
         keys.add(limit(limits, "surge", Unit.AMPERE, 1e-2, 1e6, "Surge current of one half cycle."));
         keys.add(limit(limits, "i2t", Unit.AMPERE_SQUARED_SECOND, 1e-6, 1e9, "I²t for fusing."));
         keys.add(limit(limits, "junction", Unit.CELSIUS, 25, 400, "Highest junction temperature."));
+        keys.add(limit(
+                limits,
+                "dv-dt",
+                Unit.VOLT_PER_SECOND,
+                1e3,
+                1e12,
+                "Rate of rise of the off-state voltage that does not turn it on."));
+        keys.add(limit(
+                limits,
+                "di-dt",
+                Unit.AMPERE_PER_SECOND,
+                1e3,
+                1e12,
+                "Rate of rise of the current that it bears as it turns on."));
         keys.add(quantity(kind + ".junction-to-case", Unit.KELVIN_PER_WATT, 1e-4, 1000)
                 .optional()
                 .by("junction temperature")

@@ -216,6 +216,7 @@ final class DeviceText {
                 .optional("surge", limits.surgeAmps(), Unit.AMPERE)
                 .optional("i2t", limits.ampsSquaredSeconds(), Unit.AMPERE_SQUARED_SECOND);
         limits.junctionCelsius().ifPresent(j -> text.raw("junction", DesignWriter.celsius(j)));
-        return text;
+        return text.optional("dv-dt", limits.voltsPerSecond(), Unit.VOLT_PER_SECOND)
+                .optional("di-dt", limits.ampsPerSecond(), Unit.AMPERE_PER_SECOND);
     }
 }

@@ -58,9 +58,17 @@ final class LoadSection {
         }
         if (scope.has("resistance")) {
             double ohms = scope.quantity("resistance");
-            return scope.make(before, () -> new Load.Resistor(ohms));
+            double cold = coldRatio();
+            return scope.make(before, () -> new Load.Resistor(ohms, cold));
         }
-        return rated().flatMap(r -> scope.make(before, () -> new Load.Resistor(r.volts() * r.volts() / r.watts())));
+        double cold = coldRatio();
+        return rated().flatMap(r ->
+                scope.make(before, () -> new Load.Resistor(r.volts() * r.volts() / r.watts(), cold)));
+    }
+
+    /** A heater's resistance is taken as the same warm and cold unless it says otherwise. */
+    private double coldRatio() {
+        return scope.has("cold-ratio") ? scope.quantity("cold-ratio") : 1;
     }
 
     private Optional<Load> inductive(int before) {

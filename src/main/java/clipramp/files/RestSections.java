@@ -1,6 +1,7 @@
 package clipramp.files;
 
 import clipramp.circuit.Document;
+import clipramp.circuit.Snubber;
 import clipramp.circuit.Surroundings;
 import clipramp.circuit.Wanted;
 import clipramp.circuit.Wanted.Goal;
@@ -19,7 +20,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.TreeMap;
 
-/** Reads {@code document}, {@code surroundings}, {@code wanted}, {@code derating} and {@code designators}. */
+/** Reads {@code document}, {@code snubber}, {@code surroundings}, {@code wanted}, {@code derating} and {@code designators}. */
 final class RestSections {
     private static final List<Expected> GOALS = List.of(
             Expected.within(Unit.FRACTION, 0, 1),
@@ -87,6 +88,14 @@ final class RestSections {
             return Optional.empty();
         }
         return scope.make(before, () -> new Surroundings(coldest, hottest));
+    }
+
+    static Optional<Snubber> snubber(Scope scope) {
+        int before = scope.findings().count();
+        double ohms = scope.quantity("resistance");
+        double farads = scope.quantity("capacitance");
+        scope.close("");
+        return scope.make(before, () -> new Snubber(ohms, farads));
     }
 
     static double derating(Scope root) {

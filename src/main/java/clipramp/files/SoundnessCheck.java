@@ -3,6 +3,7 @@ package clipramp.files;
 import clipramp.circuit.ClipSupply;
 import clipramp.circuit.GateDrive;
 import clipramp.circuit.Load;
+import clipramp.circuit.Snubber;
 import clipramp.circuit.Soundness;
 import clipramp.circuit.Soundness.Reason;
 import clipramp.circuit.Stage;
@@ -25,7 +26,8 @@ final class SoundnessCheck {
             Optional<ClipSupply> clip,
             Optional<GateDrive> gate,
             Optional<Load> load,
-            Optional<Thyristor> thyristor) {
+            Optional<Thyristor> thyristor,
+            Optional<Snubber> snubber) {
         if (stage.isEmpty()) {
             return;
         }
@@ -33,7 +35,7 @@ final class SoundnessCheck {
         if (clip.isPresent() && gate.isPresent()) {
             add(Soundness.ofCoupling(stage.get(), clip.get(), gate.get()));
         }
-        load.ifPresent(l -> add(Soundness.ofLoad(stage.get(), l)));
+        load.ifPresent(l -> add(Soundness.ofLoad(stage.get(), l, snubber, thyristor.map(Thyristor::device))));
         thyristor.ifPresent(t -> add(Soundness.ofDevice(stage.get(), t.device().kind())));
     }
 

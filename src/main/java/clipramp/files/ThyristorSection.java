@@ -188,7 +188,9 @@ final class ThyristorSection {
                 UnijunctionLimits.optional(scope, "mean"),
                 UnijunctionLimits.optional(scope, "surge"),
                 UnijunctionLimits.optional(scope, "i2t"),
-                UnijunctionLimits.optional(scope, "junction"));
+                UnijunctionLimits.optional(scope, "junction"),
+                UnijunctionLimits.optional(scope, "dv-dt"),
+                UnijunctionLimits.optional(scope, "di-dt"));
         scope.ifPresent(s -> s.close(""));
         return read;
     }

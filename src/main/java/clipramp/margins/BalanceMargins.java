@@ -74,8 +74,7 @@ final class BalanceMargins {
             if (!at.condition().equals(usual)) {
                 continue;
             }
-            double full = Math.sqrt(
-                    LoadPower.fullWatts(design, at.condition()) / design.load().resistanceOhms());
+            double full = LoadPower.fullRmsAmps(design, at.condition());
             for (double ohms : bench.settings()) {
                 LoadResult load = bench.load(at.condition(), ohms);
                 double dc = Math.abs(load.dcAmps());

@@ -27,7 +27,6 @@ public final class Judge {
      * @param pinnedLineVolts judge at this line voltage only, V; empty for low, nominal and high
      * @param pinnedCelsius judge at this temperature only, °C; empty for coldest, 25 °C and hottest
      * @throws clipramp.circuit.RefusedCircuit where the circuit is unsound or not computed
-     * @throws clipramp.power.UnsupportedLoadException for a load that cannot be solved
      */
     public static Check check(Design design, OptionalDouble pinnedLineVolts, OptionalDouble pinnedCelsius) {
         Condition condition = new Condition(

@@ -4,6 +4,7 @@ import clipramp.circuit.Wanted.Goal;
 import clipramp.circuit.Wanted.Measure;
 import clipramp.firing.Solution;
 import clipramp.margins.Margin.Sense;
+import clipramp.power.KnobSearch;
 import clipramp.power.LoadPower;
 import clipramp.power.LoadResult;
 import java.util.ArrayList;
@@ -131,11 +132,18 @@ final class WantedMargins {
             return switch (goal.measure()) {
                 case FRACTION -> goal.to() * full;
                 case WATTS -> goal.to();
-                case VOLTS -> goal.to() * goal.to() / bench.design().load().resistanceOhms();
-                case ANGLE ->
-                    LoadPower.atFiringAngle(bench.design(), at.condition(), goal.from())
-                            .watts();
+                case VOLTS ->
+                    KnobSearch.firingRadForVolts(bench.design(), at.condition(), goal.to()).stream()
+                            .map(rad -> wattsAt(bench, at, rad))
+                            .findFirst()
+                            .orElse(full);
+                case ANGLE -> wattsAt(bench, at, goal.from());
             };
         });
+    }
+
+    private static double wattsAt(Bench bench, JudgedCondition at, double firingRad) {
+        return LoadPower.atFiringAngle(bench.design(), at.condition(), firingRad)
+                .watts();
     }
 }

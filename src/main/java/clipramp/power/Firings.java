@@ -35,7 +35,10 @@ record Firings(
         OptionalDouble rad = OptionalDouble.of(firingRad);
         return new Firings(
                 List.of(new ActingPulses.Slot(true, rad, 0), new ActingPulses.Slot(false, rad, 0)),
-                GateWindow.heldFrom(firingRad, new LineWave(design.line(), condition), design.stage().isFullWave()),
+                GateWindow.heldFrom(
+                        firingRad,
+                        new LineWave(design.line(), condition),
+                        design.stage().isFullWave()),
                 1,
                 0,
                 0);

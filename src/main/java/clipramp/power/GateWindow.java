@@ -28,7 +28,8 @@ record GateWindow(double fromRad, double toRad, int half) {
         for (int index = 0; index < halves.size(); index++) {
             for (Pulse pulse : halves.get(index).pulses()) {
                 double start = pulse.startRad() + (periods ? 2 : 1) * index * Math.PI;
-                double length = pulse.aboveTriggerSeconds() * solution.condition().omega();
+                double length =
+                        pulse.aboveTriggerSeconds() * solution.condition().omega();
                 if (length > 0) {
                     windows.add(new GateWindow(start, start + length, half(start, index, periods)));
                     if (!periods && halves.size() == 1) {
@@ -59,8 +60,6 @@ record GateWindow(double fromRad, double toRad, int half) {
         if (!fullWave) {
             return List.of(first);
         }
-        return List.of(
-                first,
-                new GateWindow(Math.max(firingRad + Math.PI, falls), rises + 2 * Math.PI, 1));
+        return List.of(first, new GateWindow(Math.max(firingRad + Math.PI, falls), rises + 2 * Math.PI, 1));
     }
 }

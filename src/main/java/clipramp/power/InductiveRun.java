@@ -21,6 +21,7 @@ import org.apache.commons.math3.analysis.solvers.BrentSolver;
 final class InductiveRun {
     private static final int MOST_SPANS = 60;
     private static final int SHOWN_UNSETTLED = 4;
+    private static final int MOST_STANDING = 10;
 
     /** Share of the crest current by which two equal states may differ. */
     private static final double SAME = 1e-12;
@@ -200,12 +201,19 @@ final class InductiveRun {
         next = 0;
         mode = start.mode;
         amps = start.amps;
+        int standing = 0;
         while (now < spanRad) {
+            double before = now;
             switch (mode) {
                 case OFF -> waitForPulse();
                 case FREEWHEELS -> freewheel();
                 case FORWARD -> conduct(1);
                 case BACKWARD -> conduct(-1);
+            }
+            // A current that rounding lets neither live nor die is helped over the angle where it cannot decide.
+            standing = now > before ? 0 : standing + 1;
+            if (standing > MOST_STANDING) {
+                now = before + AFTER_RAD;
             }
         }
         return new State(mode, amps);

@@ -8,6 +8,7 @@ import clipramp.firing.Pulse;
 import clipramp.firing.Solution;
 import java.util.Comparator;
 import java.util.OptionalDouble;
+import java.util.function.ToDoubleFunction;
 import org.apache.commons.math3.analysis.UnivariateFunction;
 import org.apache.commons.math3.analysis.solvers.BrentSolver;
 
@@ -49,20 +50,24 @@ public final class KnobSearch {
      * @return ohms; empty where no R_E gives it
      */
     public static OptionalDouble rampOhmsForWatts(Design design, Condition condition, double watts) {
-        OptionalDouble angle = firingRadForWatts(design, condition, watts);
-        if (angle.isEmpty()) {
-            return OptionalDouble.empty();
-        }
-        double full = LoadPower.fullWatts(design, condition);
-        return search(guessOhms(design, condition, angle.getAsDouble()), ohms -> {
-            Solution solution = Firing.solve(design, condition, ohms);
-            return (watts - LoadPower.of(design, condition, solution).watts()) / full;
-        });
+        return rampOhmsFor(design, condition, LoadResult::watts, watts, LoadPower.fullWatts(design, condition));
     }
 
     /** The whole R_E, ohm, that gives a load rms voltage in volts; empty where none does. */
     public static OptionalDouble rampOhmsForVolts(Design design, Condition condition, double volts) {
-        return rampOhmsForWatts(design, condition, volts * volts / design.load().resistanceOhms());
+        return rampOhmsFor(design, condition, LoadResult::rmsVolts, volts, condition.lineVolts());
+    }
+
+    private static OptionalDouble rampOhmsFor(
+            Design design, Condition condition, ToDoubleFunction<LoadResult> measure, double wanted, double full) {
+        OptionalDouble angle = firingRadFor(design, condition, measure, wanted);
+        if (angle.isEmpty()) {
+            return OptionalDouble.empty();
+        }
+        return search(guessOhms(design, condition, angle.getAsDouble()), ohms -> {
+            Solution solution = Firing.solve(design, condition, ohms);
+            return (wanted - measure.applyAsDouble(LoadPower.of(design, condition, solution))) / full;
+        });
     }
 
     /**
@@ -72,9 +77,19 @@ public final class KnobSearch {
      * @return rad; empty where no angle gives it
      */
     public static OptionalDouble firingRadForWatts(Design design, Condition condition, double watts) {
+        return firingRadFor(design, condition, LoadResult::watts, watts);
+    }
+
+    /** The firing angle, rad, that gives a load rms voltage in volts; empty where none does. */
+    public static OptionalDouble firingRadForVolts(Design design, Condition condition, double volts) {
+        return firingRadFor(design, condition, LoadResult::rmsVolts, volts);
+    }
+
+    private static OptionalDouble firingRadFor(
+            Design design, Condition condition, ToDoubleFunction<LoadResult> measure, double wanted) {
         UnivariateFunction lacking =
-                rad -> watts - LoadPower.atFiringAngle(design, condition, rad).watts();
-        if (!(watts > 0) || lacking.value(0) > 0) {
+                rad -> wanted - measure.applyAsDouble(LoadPower.atFiringAngle(design, condition, rad));
+        if (!(wanted > 0) || lacking.value(0) > 0) {
             return OptionalDouble.empty();
         }
         return OptionalDouble.of(new BrentSolver(1e-13).solve(TRIALS, lacking, 0, Math.PI));

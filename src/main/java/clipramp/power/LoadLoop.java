@@ -7,6 +7,7 @@ import clipramp.circuit.Stage;
 import clipramp.circuit.StageDiodes;
 import clipramp.engine.InductiveCurrent;
 import clipramp.engine.LineWave;
+import clipramp.engine.LoadCurrent;
 import java.util.Optional;
 
 /**
@@ -33,28 +34,22 @@ record LoadLoop(
         Optional<StageDiodes> freewheel) {
 
     static LoadLoop of(Design design, Condition condition, Load.Inductive load) {
+        LoadCurrent path = new LoadCurrent(design, condition);
         return new LoadLoop(
                 new LineWave(design.line(), condition),
                 design.stage().isFullWave(),
                 design.stage() == Stage.BRIDGE_DC,
                 load.resistanceOhms(),
                 load.inductanceHenries(),
-                PathDrops.volts(design),
-                PathDrops.ohms(design),
+                path.dropVolts(),
+                path.loopOhms() - load.resistanceOhms(),
                 load.freewheel());
     }
 
     /** The same without any drop. */
     LoadLoop withoutDrops() {
         return new LoadLoop(
-                line,
-                fullWave,
-                rectified,
-                loadOhms,
-                henries,
-                0,
-                0,
-                freewheel.map(d -> new StageDiodes(0, 0)));
+                line, fullWave, rectified, loadOhms, henries, 0, 0, freewheel.map(d -> new StageDiodes(0, 0)));
     }
 
     /** What is over for the load's path at an angle, drops taken off, V. */

@@ -50,6 +50,14 @@ public final class LoadPower {
         return FullPower.watts(design, condition);
     }
 
+    /** Rms current of the same load with the thyristor always on, without drops, A. */
+    public static double fullRmsAmps(Design design, Condition condition) {
+        double watts = fullWatts(design, condition);
+        return design.load() instanceof Load.Filament
+                ? watts / (condition.lineVolts() * design.line().rmsFactor())
+                : Math.sqrt(watts / design.load().resistanceOhms());
+    }
+
     private static LoadResult of(Design design, Condition condition, Firings firings) {
         if (design.load() instanceof Load.Inductive) {
             return SpanTotals.of(
@@ -58,16 +66,14 @@ public final class LoadPower {
         if (design.load() instanceof Load.Filament filament) {
             FilamentLaw law = new FilamentLaw(filament);
             LoadResult lit = resistive(warmed(design, condition, law, firings), condition, firings);
-            return lit.withLight(
-                    lit.watts() / fullWatts(design, condition), law.lightShareAt(lit.rmsVolts()));
+            return lit.withLight(lit.watts() / fullWatts(design, condition), law.lightShareAt(lit.rmsVolts()));
         }
         return resistive(design, condition, firings);
     }
 
     /** The same design with the resistor that a filament is at these firings. */
     private static Design warmed(Design design, Condition condition, FilamentLaw law, Firings firings) {
-        double ohms = law.settledOhms(trial -> resistive(
-                        design.withLoad(new Load.Resistor(trial)), condition, firings)
+        double ohms = law.settledOhms(trial -> resistive(design.withLoad(new Load.Resistor(trial)), condition, firings)
                 .rmsVolts());
         return design.withLoad(new Load.Resistor(ohms));
     }
@@ -84,8 +90,7 @@ public final class LoadPower {
                     .settle();
         }
         if (design.load() instanceof Load.Filament filament) {
-            return resistivePeriod(
-                    warmed(design, condition, new FilamentLaw(filament), firings), condition, firings);
+            return resistivePeriod(warmed(design, condition, new FilamentLaw(filament), firings), condition, firings);
         }
         return resistivePeriod(design, condition, firings);
     }

@@ -59,8 +59,7 @@ public record LoadWave(double[] rad, double[] volts) {
         samples.add(new double[] {span.fromRad() - start, 0});
         for (int i = 0; i <= SAMPLES; i++) {
             double rad = span.fromRad() + length * i / SAMPLES;
-            samples.add(
-                    new double[] {rad - start, sign * span.loadVolts().applyAsDouble(rad)});
+            samples.add(new double[] {rad - start, sign * span.loadVolts().applyAsDouble(rad)});
         }
         samples.add(new double[] {span.toRad() - start, 0});
     }

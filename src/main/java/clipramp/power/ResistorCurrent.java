@@ -115,11 +115,7 @@ final class ResistorCurrent {
                 + dropVolts * dropVolts * (to - from);
         double peak = crest * Math.sin(Math.max(from, Math.PI / 2)) - dropVolts;
         return new HalfCycleCurrent(
-                Math.max(0, charge / pathOhms),
-                Math.max(0, square / (pathOhms * pathOhms)),
-                peak / pathOhms,
-                from,
-                to);
+                Math.max(0, charge / pathOhms), Math.max(0, square / (pathOhms * pathOhms)), peak / pathOhms, from, to);
     }
 
     private HalfCycleCurrent byQuadrature(boolean positive, double firingRad) {

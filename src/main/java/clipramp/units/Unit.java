@@ -19,6 +19,7 @@ public enum Unit {
     VOLT_SECOND("Vs", "volt-seconds", "250 µVs", true, "Vs", "V·s"),
     AMPERE_SQUARED_SECOND("A²s", "a current squared times time", "40 A²s", true, "A²s", "A2s", "A^2s"),
     VOLT_PER_SECOND("V/s", "a rate of rise", "5 V/µs", true, "V/s"),
+    AMPERE_PER_SECOND("A/s", "a rate of rise", "50 A/µs", true, "A/s"),
     VOLT_PER_KELVIN("V/K", "a drift", "-2.5 mV/K", true, "V/K", "V/degC", "V/°C"),
     WATT_PER_KELVIN("W/K", "a derating", "3 mW/K", true, "W/K", "W/degC", "W/°C"),
     KELVIN_PER_WATT("K/W", "a thermal resistance", "4 K/W", true, "K/W", "degC/W", "°C/W"),
@@ -92,11 +93,11 @@ public enum Unit {
     record Match(Prefix prefix, String spelling, int exponent) {}
 
     Optional<Match> match(String written) {
-        if (this == VOLT_PER_SECOND) {
+        if (this == VOLT_PER_SECOND || this == AMPERE_PER_SECOND) {
             int slash = written.indexOf('/');
             if (slash > 0
                     && written.endsWith("s")
-                    && written.substring(0, slash).endsWith("V")) {
+                    && written.substring(0, slash).endsWith(symbol.substring(0, 1))) {
                 Optional<Prefix> under = Prefix.of(written.substring(slash + 1, written.length() - 1), this);
                 Optional<Prefix> over = Prefix.of(written.substring(0, slash - 1), this);
                 return under.isPresent() && over.isPresent()

@@ -132,15 +132,13 @@ class SoundnessTest {
     void inductanceNeedsAStageThatLetsGo() {
         Load bare = new Load.Inductive(40, 0.12, Optional.empty());
         Load freewheeling = new Load.Inductive(40, 0.12, Optional.of(new StageDiodes(0.9, 0)));
-        assertThat(Soundness.ofLoad(Stage.BRIDGE_DC, bare))
-                .extracting(Reason::key)
-                .containsExactly("load.kind");
-        assertThat(Soundness.ofLoad(Stage.BRIDGE_DC, freewheeling)).isEmpty();
-        assertThat(Soundness.ofLoad(Stage.BRIDGE_AC, bare)).hasSize(1);
-        assertThat(Soundness.ofLoad(Stage.TRIAC, bare)).isEmpty();
-        assertThat(Soundness.ofLoad(Stage.TRIAC, freewheeling)).hasSize(1);
-        assertThat(Soundness.ofLoad(Stage.HALF_WAVE, freewheeling)).isEmpty();
-        assertThat(Soundness.ofLoad(Stage.BRIDGE_AC, new Load.Resistor(40))).isEmpty();
+        assertThat(ofLoad(Stage.BRIDGE_DC, bare)).extracting(Reason::key).containsExactly("load.kind");
+        assertThat(ofLoad(Stage.BRIDGE_DC, freewheeling)).isEmpty();
+        assertThat(ofLoad(Stage.BRIDGE_AC, bare)).hasSize(1);
+        assertThat(ofLoad(Stage.TRIAC, bare)).isEmpty();
+        assertThat(ofLoad(Stage.TRIAC, freewheeling)).hasSize(1);
+        assertThat(ofLoad(Stage.HALF_WAVE, freewheeling)).isEmpty();
+        assertThat(ofLoad(Stage.BRIDGE_AC, new Load.Resistor(40))).isEmpty();
     }
 
     @Test
@@ -149,5 +147,31 @@ class SoundnessTest {
         assertThat(Soundness.ofDevice(Stage.TRIAC, ThyristorDevice.Kind.SCR)).hasSize(1);
         assertThat(Soundness.ofDevice(Stage.BRIDGE_DC, ThyristorDevice.Kind.TRIAC))
                 .hasSize(1);
+    }
+
+    @Test
+    void anInductiveLoadOnTheAcSideOfABridgeNeedsASnubberAndAKnownTurnOffTime() {
+        Load coil = new Load.Inductive(40, 0.1, Optional.empty());
+        Optional<Snubber> snubber = Optional.of(new Snubber(100, 100e-9));
+        Optional<ThyristorDevice> known =
+                Optional.of(SampleDesigns.heater().thyristor().device());
+        Optional<ThyristorDevice> unknown = Optional.of(
+                Changed.with(SampleDesigns.heater(), "thyristor.device.turnOffSeconds", OptionalDouble.empty())
+                        .thyristor()
+                        .device());
+        assertThat(known.get().turnOffSeconds()).isPresent();
+        assertThat(Soundness.ofLoad(Stage.BRIDGE_AC, coil, snubber, known)).isEmpty();
+        assertThat(Soundness.ofLoad(Stage.BRIDGE_AC, coil, snubber, unknown)
+                        .get(0)
+                        .sentence())
+                .contains("turn-off time");
+        assertThat(Soundness.ofLoad(Stage.BRIDGE_AC, coil, Optional.empty(), known)
+                        .get(0)
+                        .sentence())
+                .contains("there is no snubber");
+    }
+
+    private static List<Soundness.Reason> ofLoad(Stage stage, Load load) {
+        return Soundness.ofLoad(stage, load, Optional.empty(), Optional.empty());
     }
 }

@@ -1,7 +1,6 @@
 package clipramp.margins;
 
 import static org.assertj.core.api.Assertions.assertThat;
-import static org.assertj.core.api.Assertions.assertThatThrownBy;
 import static org.assertj.core.api.Assertions.within;
 
 import clipramp.circuit.Changed;
@@ -13,7 +12,6 @@ import clipramp.circuit.Wanted;
 import clipramp.circuit.Wanted.Goal;
 import clipramp.circuit.Wanted.Measure;
 import clipramp.margins.Margin.Sense;
-import clipramp.power.UnsupportedLoadException;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
@@ -193,12 +191,6 @@ class JudgeTest {
     void aLineWithoutToleranceIsJudgedOnce() {
         Design design = SampleDesigns.heater().withLine(new Line(230, 50, 230, 230, List.of()));
         assertThat(check(design).margins()).extracting(Margin::condition).noneMatch(c -> c.contains("low line"));
-    }
-
-    @Test
-    void aLoadThatCannotBeSolvedIsRefusedByItsKey() {
-        Design design = SampleDesigns.heater().withLoad(new Load.Inductive(40, 0.12, Optional.empty()));
-        assertThatThrownBy(() -> check(design)).isInstanceOf(UnsupportedLoadException.class);
     }
 
     @Test

@@ -35,7 +35,8 @@ class InductiveLoadTest {
 
     @Test
     void rashidExample11Point2HasALoadVoltageOf90VoltsNotThePrinted68() {
-        // Rashid, Power Electronics, example 11.2: 120 V 60 Hz, 2.5 ohm, 6.5 mH, 90 degrees. Printed: extinction 220.35,
+        // Rashid, Power Electronics, example 11.2: 120 V 60 Hz, 2.5 ohm, 6.5 mH, 90 degrees. Printed: extinction
+        // 220.35,
         // 68.09 V; the equations of the example itself give 220.41 and 90.39 V.
         LoadResult load = at(inductive(Stage.INVERSE_PARALLEL, 2.5, 6.5e-3), AMERICA, 90);
         assertThat(extinctionDegrees(load)).isCloseTo(220.41, within(0.005));
@@ -59,7 +60,8 @@ class InductiveLoadTest {
 
     @Test
     void hartHalfWaveFromMemory() {
-        // Hart, Power Electronics, half-wave R-L, from memory: 120 V 60 Hz, 20 ohm, 40 mH, 45 degrees. The printed mean of
+        // Hart, Power Electronics, half-wave R-L, from memory: 120 V 60 Hz, 20 ohm, 40 mH, 45 degrees. The printed mean
+        // of
         // 2.19 A belongs to another load.
         LoadResult load = at(inductive(Stage.HALF_WAVE, 20, 40e-3), AMERICA, 45);
         assertThat(extinctionDegrees(load)).isCloseTo(216.87, within(0.005));
@@ -72,7 +74,8 @@ class InductiveLoadTest {
 
     @Test
     void bimbhraExample9Point5ControlsFromTheLoadsAngleOn() {
-        // Bimbhra, Power Electronics, example 9.5: 230 V, 3 + j4 ohm: control from 53.13 degrees; 46 A, 6348 W; thyristor
+        // Bimbhra, Power Electronics, example 9.5: 230 V, 3 + j4 ohm: control from 53.13 degrees; 46 A, 6348 W;
+        // thyristor
         // 20.707 A mean, 32.527 A rms.
         Design design = inductive(Stage.INVERSE_PARALLEL, 3, 4 / (100 * Math.PI));
         for (double degrees : new double[] {20, 45, 53.13}) {
@@ -153,7 +156,8 @@ class InductiveLoadTest {
 
     @Test
     void aFreewheeledLoadOfALongTimeConstantCarriesTheMeanOfTheRectifiedLine() {
-        // Closed form: the mean of |v| over R is 2 sqrt(2) V/(pi R) at full conduction; with L/R of two seconds the ripple
+        // Closed form: the mean of |v| over R is 2 sqrt(2) V/(pi R) at full conduction; with L/R of two seconds the
+        // ripple
         // is nothing beside it, and the periodic state is found without waiting hundreds of cycles for it.
         Design coil = Fired.textbook(Stage.BRIDGE_DC, 10)
                 .withLoad(new Load.Inductive(100, 200, Optional.of(new StageDiodes(0, 0))));

@@ -43,7 +43,23 @@ class NarrowPulseTest {
     private static Pulse pulse(double rad, double seconds) {
         double start = rad / EUROPE.omega();
         return new Pulse(
-                rad, start, start + seconds, 20, 13, false, false, 0.1, 2, 0.2, 4, seconds, 1e-6, 2e-6, 5e-6, true, 1,
+                rad,
+                start,
+                start + seconds,
+                20,
+                13,
+                false,
+                false,
+                0.1,
+                2,
+                0.2,
+                4,
+                seconds,
+                1e-6,
+                2e-6,
+                5e-6,
+                true,
+                1,
                 true);
     }
 
@@ -97,7 +113,8 @@ class NarrowPulseTest {
 
     @Test
     void aPulseMustLeaveTheTurnOnTimeAfterTheExtinction() {
-        double turnOn = coil(Stage.TRIAC).thyristor().device().gate().turnOnSeconds().getAsDouble();
+        double turnOn =
+                coil(Stage.TRIAC).thyristor().device().gate().turnOnSeconds().getAsDouble();
         double extinction = Math.toDegrees(load(coil(Stage.TRIAC), pulses(20e-6, 40))
                         .extinctionRad()
                         .getAsDouble())
@@ -110,10 +127,9 @@ class NarrowPulseTest {
     }
 
     private static LoadResult twoPulses(double shortDegrees, double longDegrees, double longSeconds) {
-        List<Pulse> pulses = List.of(
-                pulse(Math.toRadians(shortDegrees), 20e-6), pulse(Math.toRadians(longDegrees), longSeconds));
-        HalfCycle half =
-                new HalfCycle(true, 0.01, 0.5, 0.5, OptionalDouble.of(0.1), 3.05, false, false, pulses, 0);
+        List<Pulse> pulses =
+                List.of(pulse(Math.toRadians(shortDegrees), 20e-6), pulse(Math.toRadians(longDegrees), longSeconds));
+        HalfCycle half = new HalfCycle(true, 0.01, 0.5, 0.5, OptionalDouble.of(0.1), 3.05, false, false, pulses, 0);
         return load(coil(Stage.TRIAC), new Solution(EUROPE, 1e4, Settling.STEADY, List.of(half)));
     }
 

@@ -186,12 +186,11 @@ final class ReferenceLoad {
                 dy[2] = y[0];
             }
         };
-        integrator.addEventHandler(falling((t, i) -> t > theta + 1e-9 || i > 1e-9 ? i : 1e-9, stopped), 0.01, 1e-12, 200);
+        integrator.addEventHandler(
+                falling((t, i) -> t > theta + 1e-9 || i > 1e-9 ? i : 1e-9, stopped), 0.01, 1e-12, 200);
         if (diodeVolts >= 0) {
             integrator.addEventHandler(
-                    falling(
-                            (t, i) -> d * line.voltsAt(lineVolts, t) - dropVolts - dropOhms * i + diodeVolts,
-                            handed),
+                    falling((t, i) -> d * line.voltsAt(lineVolts, t) - dropVolts - dropOhms * i + diodeVolts, handed),
                     0.01,
                     1e-12,
                     200);

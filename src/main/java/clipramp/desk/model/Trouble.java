@@ -1,8 +1,8 @@
 package clipramp.desk.model;
 
+import clipramp.circuit.RefusedCircuit;
 import clipramp.files.InvalidInputException;
 import clipramp.files.Problem;
-import clipramp.power.UnsupportedLoadException;
 import java.io.IOException;
 import java.nio.file.AccessDeniedException;
 import java.nio.file.NoSuchFileException;
@@ -37,7 +37,7 @@ public record Trouble(String headline, String text) {
         if (failure instanceof IOException) {
             return new Trouble(what, "The file system says: " + failure.getMessage());
         }
-        if (failure instanceof UnsupportedLoadException
+        if (failure instanceof RefusedCircuit
                 || failure instanceof Reading.NoSuchAngleException
                 || failure instanceof IllegalArgumentException) {
             return new Trouble(what, String.valueOf(failure.getMessage()));
