@@ -58,6 +58,7 @@ public final class SwiftStepper {
 
     // The state now.
     private boolean stalled;
+    private boolean unsettled;
     private int state;
     private double seconds;
     private double rampVolts;
@@ -136,6 +137,7 @@ public final class SwiftStepper {
         sine = 0;
         cosine = 1;
         stalled = startMode == Mode.STALLED;
+        unsettled = false;
         state = startMode == Mode.ON ? SwiftLaws.ON : 0;
         if (stalled) {
             careful.start(wave, startMode, startRampVolts, 0);
@@ -149,7 +151,7 @@ public final class SwiftStepper {
     /** Moves to the next event and through it; see {@link Stepper#advance}. The limit is the half cycle's end. */
     public Event advance() {
         pieces++;
-        passedState = stalled ? NONE : state;
+        passedState = state;
         passedSeconds = seconds;
         if (stalled) {
             return carefully();
@@ -162,7 +164,7 @@ public final class SwiftStepper {
                 - rows[row + SwiftLaws.STEADY]
                 - rows[row + SwiftLaws.SINE] * sine
                 - rows[row + SwiftLaws.COSINE] * cosine;
-        int target = reach();
+        int target = unsettled ? DOUBT : reach();
         if (target == DOUBT) {
             return carefully();
         }
@@ -675,14 +677,16 @@ public final class SwiftStepper {
         cosine = Math.cos(omega * seconds);
         stalled = careful.mode() == Mode.STALLED;
         state = flags() | (careful.mode() == Mode.ON ? SwiftLaws.ON : 0);
+        // A stall may leave switches that do not agree with the ramp; they turn over at once, in pieces of no length.
+        unsettled = wasStalled || seconds == passedSeconds;
         followCarefully(event, wasStalled);
         return event;
     }
 
     private void followCarefully(Event event, boolean wasStalled) {
         if (wasStalled || stalled) {
-            // Held at the peak point the ramp forgets where it came from.
-            kept = 0;
+            // Held at the peak point the ramp knows only when that began and ends.
+            kept = Double.NaN;
             return;
         }
         ahead = seconds - passedSeconds;

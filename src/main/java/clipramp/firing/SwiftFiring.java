@@ -61,6 +61,7 @@ public final class SwiftFiring {
     private boolean following;
     private boolean stalled;
     private boolean latchedOn;
+    private boolean endPulse;
     private double clipUntil;
     private double residualVolts;
     private Mode residualMode = Mode.OFF;
@@ -118,7 +119,7 @@ public final class SwiftFiring {
                 next = volts + step;
                 double left = followed ? Math.abs(kept) * step * step * BENT : Math.abs(kept * (end - volts));
                 if (pass > 0 && endMode == mode && Math.abs(step) < NEAR_VOLTS && left * sensitivity() < LEFT_SECONDS) {
-                    return fire(mode, next, step) && settled(mode, next);
+                    return (Double.isNaN(firedSeconds) || fireFrom(mode, next)) && settled(mode, next);
                 }
             }
             modeBefore = mode;
@@ -135,18 +136,6 @@ public final class SwiftFiring {
         return !Double.isNaN(firedShift) ? Math.abs(firedShift) : n.rampOhms * n.capacitorFarads;
     }
 
-    /** Moves the firing instant to the residual found. */
-    private boolean fire(Mode mode, double volts, double byVolts) {
-        if (Double.isNaN(firedSeconds)) {
-            return true;
-        }
-        if (BENT * byVolts * byVolts * sensitivity() < LEFT_SECONDS && !Double.isNaN(firedShift)) {
-            firedSeconds += firedShift * byVolts;
-            return true;
-        }
-        return fireFrom(mode, volts);
-    }
-
     private boolean settled(Mode mode, double volts) {
         residualMode = mode;
         residualVolts = volts;
@@ -158,6 +147,7 @@ public final class SwiftFiring {
         int pulse = firedPulse;
         boolean stalledBefore = stalled;
         boolean latchedOnBefore = latchedOn;
+        boolean endPulseBefore = endPulse;
         double clipUntilBefore = clipUntil;
         int begunBefore = begun;
         if (!run(mode, volts, false, pulse) || begun != pulse) {
@@ -166,6 +156,7 @@ public final class SwiftFiring {
         firedSeconds = pulseSeconds;
         stalled = stalledBefore;
         latchedOn = latchedOnBefore;
+        endPulse = endPulseBefore;
         clipUntil = clipUntilBefore;
         begun = begunBefore;
         return true;
@@ -212,6 +203,7 @@ public final class SwiftFiring {
         if (stepper.clips()) {
             clipUntil = stepper.seconds();
         }
+        endPulse = (Double.isNaN(firedSeconds) ? firstSeconds : firedSeconds) > clipUntil;
         return !doubt && (watch == Watch.NONE);
     }
 
@@ -284,8 +276,7 @@ public final class SwiftFiring {
         if (latchedOn) {
             return FiringState.LATCHED_ON;
         }
-        double shown = !Double.isNaN(firedSeconds) ? firedSeconds : firstSeconds;
-        return shown > clipUntil ? FiringState.END_PULSE : FiringState.FIRES;
+        return endPulse ? FiringState.END_PULSE : FiringState.FIRES;
     }
 
     /** Ramp voltage at the line zero, V. */

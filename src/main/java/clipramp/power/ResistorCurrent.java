@@ -101,6 +101,31 @@ final class ResistorCurrent {
         return from >= to ? Optional.empty() : Optional.of(new Limits(from, to));
     }
 
+    /**
+     * Integral over angle of (crest sin - drop) squared while the current flows, V² rad; allocates nothing.
+     *
+     * @param crest crest of the line, V
+     * @param drop drops in the load's path, V
+     * @param firingRad firing angle, rad
+     */
+    static double sineSquare(double crest, double drop, double firingRad) {
+        if (crest <= drop) {
+            return 0;
+        }
+        double edge = Math.asin(drop / crest);
+        double from = Math.max(firingRad, edge);
+        double to = Math.PI - edge;
+        return from >= to ? 0 : sineSquare(crest, drop, from, to);
+    }
+
+    private static double sineSquare(double crest, double drop, double from, double to) {
+        return Math.max(
+                0,
+                crest * crest * ((to - from) / 2 - (Math.sin(2 * to) - Math.sin(2 * from)) / 4)
+                        + 2 * crest * drop * (Math.cos(to) - Math.cos(from))
+                        + drop * drop * (to - from));
+    }
+
     private HalfCycleCurrent closedForm(double firingRad) {
         return closedLimits(firingRad)
                 .map(limits -> closedForm(limits.from(), limits.to()))
@@ -110,12 +135,13 @@ final class ResistorCurrent {
     private HalfCycleCurrent closedForm(double from, double to) {
         double crest = Math.sqrt(2) * lineVolts;
         double charge = crest * (Math.cos(from) - Math.cos(to)) - dropVolts * (to - from);
-        double square = crest * crest * ((to - from) / 2 - (Math.sin(2 * to) - Math.sin(2 * from)) / 4)
-                + 2 * crest * dropVolts * (Math.cos(to) - Math.cos(from))
-                + dropVolts * dropVolts * (to - from);
         double peak = crest * Math.sin(Math.max(from, Math.PI / 2)) - dropVolts;
         return new HalfCycleCurrent(
-                Math.max(0, charge / pathOhms), Math.max(0, square / (pathOhms * pathOhms)), peak / pathOhms, from, to);
+                Math.max(0, charge / pathOhms),
+                sineSquare(crest, dropVolts, from, to) / (pathOhms * pathOhms),
+                peak / pathOhms,
+                from,
+                to);
     }
 
     private HalfCycleCurrent byQuadrature(boolean positive, double firingRad) {

@@ -1,0 +1,2 @@
+/** Measurements that are too long for the test run: started by hand, see each class. */
+package clipramp.bench;
