@@ -4,11 +4,16 @@ import clipramp.desk.model.Example;
 import clipramp.desk.model.Recovery;
 import clipramp.desk.model.Settings;
 import clipramp.desk.model.ViewCondition;
+import clipramp.desk.model.Wish;
 import java.nio.file.Path;
 
 /** What the user can ask of the window, from menus, keys and pages alike. */
 interface Actions {
     void startNew();
+
+    void propose(Wish wish, boolean entering);
+
+    void giveUpNew();
 
     void open();
 

@@ -108,6 +108,12 @@ final class BenchPage extends Pane {
         arrange();
     }
 
+    /** Begins at the first station, to enter a circuit part by part. */
+    void enterParts() {
+        choose(true);
+        parts.begin();
+    }
+
     private void showPart(String key) {
         choose(true);
         parts.choose(key);

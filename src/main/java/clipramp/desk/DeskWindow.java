@@ -28,6 +28,7 @@ final class DeskWindow {
     private final DeskModel model;
     private final BorderPane root = new BorderPane();
     private final StartPage start;
+    private final NewPage fresh;
     private final BenchPage bench;
     private final HeaderView header;
     private final Menus menus;
@@ -39,6 +40,8 @@ final class DeskWindow {
         this.theme = theme;
         this.model = model;
         this.start = new StartPage(actions);
+        this.fresh = new NewPage(
+                wish -> actions.propose(wish, false), wish -> actions.propose(wish, true), actions::giveUpNew);
         this.bench = new BenchPage(theme, model);
         this.header = new HeaderView(model, actions, () -> bench.unfold(true));
         this.menus = new Menus(actions, model.draft());
@@ -79,9 +82,8 @@ final class DeskWindow {
     }
 
     private void refresh() {
-        if (model.draft().isOpen() && root.getCenter() == start.node()) {
-            top.getChildren().setAll(menus.node(), header.node());
-            showPage(Page.BENCH);
+        if (model.draft().isOpen() && root.getCenter() != bench) {
+            showPage(page);
         }
         stage.setTitle(model.draft().name() + (model.draft().isDirty() ? " (differs from saved)" : "") + " – clipramp");
         mark();
@@ -89,8 +91,30 @@ final class DeskWindow {
 
     void showPage(Page wanted) {
         page = wanted;
+        top.getChildren().setAll(menus.node(), header.node());
         root.setCenter(bench);
         mark();
+    }
+
+    /** Asks for a new design. */
+    void showNew() {
+        fresh.offer(model.draft().workshop().lineIds());
+        top.getChildren().setAll(menus.node());
+        root.setCenter(fresh.node());
+        fresh.begin();
+    }
+
+    void complainNew(String words) {
+        fresh.complain(words);
+    }
+
+    /** Back to what was there before. */
+    void leaveNew() {
+        if (model.draft().isOpen()) {
+            showPage(page);
+        } else {
+            root.setCenter(start.node());
+        }
     }
 
     private void mark() {

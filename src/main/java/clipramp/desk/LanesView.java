@@ -129,7 +129,7 @@ final class LanesView {
         boolean onPulse = frame().flatMap(f -> f.laneAt(event.getY()))
                 .filter(Lane.PULSE::equals)
                 .isPresent();
-        if (event.isStillSincePress() && (close || onPulse && !isOnFiringLine(event.getX()))) {
+        if (event.isStillSincePress() && (close || (onPulse && !isOnFiringLine(event.getX())))) {
             setClose(!close);
         }
     }

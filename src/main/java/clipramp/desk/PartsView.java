@@ -13,12 +13,14 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 import javafx.scene.Cursor;
+import javafx.scene.control.Button;
 import javafx.scene.control.ScrollPane;
 import javafx.scene.control.ToggleButton;
 import javafx.scene.control.ToggleGroup;
 import javafx.scene.input.MouseEvent;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
+import javafx.scene.layout.Region;
 import javafx.scene.layout.TilePane;
 import javafx.scene.layout.VBox;
 
@@ -72,7 +74,26 @@ final class PartsView {
             stations.put(each, button);
             strip.getChildren().add(button);
         }
+        Button next = new Button("next ›");
+        next.setId("station-next");
+        next.setAccessibleText("Next station of the signal");
+        next.setOnAction(event -> next());
+        Region gap = new Region();
+        HBox.setHgrow(gap, Priority.ALWAYS);
+        strip.getChildren().addAll(gap, next);
         return strip;
+    }
+
+    /** Shows the first station and puts the keyboard there. */
+    void begin() {
+        show(PartGroup.LINE, "");
+        views.stream().findFirst().ifPresent(view -> view.node().requestFocus());
+    }
+
+    private void next() {
+        PartGroup[] all = PartGroup.values();
+        show(all[(station.ordinal() + 1) % all.length], "");
+        views.stream().findFirst().ifPresent(view -> view.node().requestFocus());
     }
 
     /** Brings a part's station up and puts the keyboard into its place. */

@@ -31,7 +31,7 @@ final class SlotView {
     SlotView(PartSlot slot, Draft draft, Consumer<String> focused) {
         this.slot = slot;
         this.draft = draft;
-        this.control = slot.isChoice() ? choice(slot) : field(slot);
+        this.control = slot.isChoice() ? choice(slot) : field();
         control.setId("slot-" + slot.key());
         control.setMaxWidth(Double.MAX_VALUE);
         control.focusedProperty().addListener((property, before, now) -> {
@@ -90,7 +90,7 @@ final class SlotView {
         complain("");
     }
 
-    private TextField field(PartSlot shown) {
+    private TextField field() {
         TextField field = new TextField();
         field.setOnAction(event -> commit(field));
         field.focusedProperty().addListener((property, before, now) -> {
@@ -133,7 +133,8 @@ final class SlotView {
 
     private void commit(TextField field) {
         String typed = field.getText();
-        if (typed.strip().equals(slot.text()) || typed.isBlank() && slot.text().isEmpty()) {
+        boolean untouched = typed.isBlank() && slot.text().isEmpty();
+        if (untouched || typed.strip().equals(slot.text())) {
             complain("");
             return;
         }

@@ -9,6 +9,7 @@ import clipramp.desk.model.Settings;
 import clipramp.desk.model.TableText;
 import clipramp.desk.model.Trouble;
 import clipramp.desk.model.ViewCondition;
+import clipramp.desk.model.Wish;
 import clipramp.desk.model.Workers;
 import clipramp.figures.Figure;
 import clipramp.figures.Palette;
@@ -86,7 +87,22 @@ final class WindowActions implements Actions {
 
     @Override
     public void startNew() {
-        whenSaved(() -> {});
+        whenSaved(window()::showNew);
+    }
+
+    @Override
+    public void propose(Wish wish, boolean entering) {
+        draft().propose(wish, trouble -> trouble.ifPresentOrElse(t -> window().complainNew(t.text()), () -> {
+            window().showPage(Page.BENCH);
+            if (entering) {
+                window().bench().enterParts();
+            }
+        }));
+    }
+
+    @Override
+    public void giveUpNew() {
+        window().leaveNew();
     }
 
     @Override

@@ -20,6 +20,8 @@ import java.util.function.Function;
 public final class Draft {
     private record Edit(String name, Function<Sheet, DesignText> change, Consumer<Optional<Trouble>> done) {}
 
+    private static final String PROPOSED = "new-design.yaml";
+
     private final Workers workers;
     private final Workshop workshop;
     private final Recovery recovery;
@@ -107,6 +109,27 @@ public final class Draft {
                 sheet -> put(sheet, Optional.empty(), title, ""));
     }
 
+    /** Makes a design from five answers and puts it on the desk; {@code done} is told what was wrong, or nothing. */
+    public void propose(Wish wish, Consumer<Optional<Trouble>> done) {
+        NewDesign.Checked checked = NewDesign.check(wish);
+        if (checked.refusal().isPresent()) {
+            done.accept(Optional.of(new Trouble("One answer cannot be read", checked.refusal().get())));
+            return;
+        }
+        start(
+                () -> {
+                    DesignText text = DesignText.of(new Source(PROPOSED, Proposal.of(checked.wish(), workshop)));
+                    Sheet sheet = workshop.read(text, Optional.empty());
+                    recovery.keep(Optional.empty(), text.text());
+                    return sheet;
+                },
+                sheet -> {
+                    put(sheet, Optional.empty(), PROPOSED, "");
+                    done.accept(Optional.empty());
+                },
+                failure -> done.accept(Optional.of(Trouble.of("No design could be made of this", failure))));
+    }
+
     /** Puts work on the desk that a window left behind when its process ended. */
     public void recover(Recovery.Left left) {
         start(
@@ -128,6 +151,10 @@ public final class Draft {
     }
 
     private void start(String what, SheetReading reading, Consumer<Sheet> then) {
+        start(reading, then, failure -> troubles.accept(Trouble.of(what, failure)));
+    }
+
+    private void start(SheetReading reading, Consumer<Sheet> then, Consumer<Exception> failed) {
         writing = true;
         workers.writing().execute(() -> {
             try {
@@ -139,7 +166,7 @@ public final class Draft {
             } catch (IOException | RuntimeException e) {
                 workers.home().execute(() -> {
                     writing = false;
-                    troubles.accept(Trouble.of(what, e));
+                    failed.accept(e);
                 });
             }
         });
@@ -221,7 +248,7 @@ public final class Draft {
 
     private void accept(Edit edit, Sheet before, Sheet after) {
         editing = false;
-        if (after != before) {
+        if (!after.equals(before)) {
             history.ifPresent(h -> h.step(edit.name(), after));
             changed();
         }

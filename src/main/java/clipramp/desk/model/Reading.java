@@ -26,6 +26,8 @@ public record Reading(Request request, OperatingPoint point, Lanes lanes) {
     private static final int SAMPLES = 700;
 
     /**
+     * What is asked of the bench.
+     *
      * @param design the design
      * @param condition line and temperature
      * @param setting where the ramp's resistance is set

@@ -19,6 +19,8 @@ public record Trouble(String headline, String text) {
     private static final int MOST_PROBLEMS = 12;
 
     /**
+     * A failure in words.
+     *
      * @param what what could not be done, such as "The file cannot be opened"
      * @param failure what was thrown
      */

@@ -5,6 +5,7 @@ import clipramp.files.DesignText;
 import clipramp.files.InvalidInputException;
 import clipramp.files.ProfileLibrary;
 import java.nio.file.Path;
+import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
 import java.util.function.Function;
@@ -51,6 +52,18 @@ public final class Workshop {
             case "thyristor.device" -> Stream.of(stage == Stage.TRIAC ? "triac" : "scr");
             default -> Stream.empty();
         };
+    }
+
+    /** Lines that a new design can hang on, the usual ones first. */
+    public List<String> lineIds() {
+        return libraries.apply(Optional.empty()).ids("line").stream()
+                .sorted(Comparator.comparing((String id) -> !id.equals(Wish.USUAL.lineId())))
+                .toList();
+    }
+
+    /** The profiles that a design file sees. */
+    public ProfileLibrary library(Optional<Path> file) {
+        return libraries.apply(file);
     }
 
     /** Whether an id names a programmable unijunction transistor. */
