@@ -1,11 +1,14 @@
 package clipramp.desk;
 
 import clipramp.desk.model.DeskModel;
+import clipramp.desk.model.Example;
 import clipramp.desk.model.Places;
 import clipramp.desk.model.Settings;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.List;
+import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
 import java.util.concurrent.Callable;
@@ -15,6 +18,8 @@ import java.util.function.BooleanSupplier;
 import javafx.application.Platform;
 import javafx.embed.swing.SwingFXUtils;
 import javafx.scene.image.WritableImage;
+import javafx.event.ActionEvent;
+import javafx.scene.Node;
 import javafx.stage.Stage;
 import javax.imageio.ImageIO;
 
@@ -32,7 +37,7 @@ public final class Screens {
         Path folder = Files.createDirectories(Path.of(arguments[0]));
         String only = arguments.length > 1 ? arguments[1] : "";
         Path home = Files.createTempDirectory("desk");
-        new Settings(Settings.Look.PAPER, 100, true, java.util.List.of())
+        new Settings(Settings.Look.PAPER, 100, true, List.of())
                 .save(new Places(home.resolve("config"), home.resolve("state")));
         Platform.setImplicitExit(false);
         Platform.startup(Theme::loadFonts);
@@ -41,7 +46,7 @@ public final class Screens {
         }) {
             for (Settings.Look look : new Settings.Look[] {Settings.Look.PAPER, Settings.Look.INK}) {
                 if ((size.words() + "-" + look)
-                        .toLowerCase(java.util.Locale.ROOT)
+                        .toLowerCase(Locale.ROOT)
                         .contains(only)) {
                     shoot(folder, home, size, look);
                 }
@@ -52,7 +57,7 @@ public final class Screens {
 
     private static void shoot(Path folder, Path home, Size size, Settings.Look look) throws Exception {
         Places places = new Places(home.resolve("config"), home.resolve("state"));
-        new Settings(look, size.zoom(), true, java.util.List.of()).save(places);
+        new Settings(look, size.zoom(), true, List.of()).save(places);
         Desk.Setup setup = new Desk.Setup(places, Map.of(), home, stage -> null);
         Stage stage = at(Stage::new);
         DeskModel model = at(() -> {
@@ -63,26 +68,44 @@ public final class Screens {
             stage.setHeight(size.height());
             return shown;
         });
-        String name = size.words() + "-" + look.name().toLowerCase(java.util.Locale.ROOT);
-        Thread.sleep(1500);
+        String name = size.words() + "-" + look.name().toLowerCase(Locale.ROOT);
+        settle(() -> true);
+        Thread.sleep(600);
         save(stage, folder.resolve("start-" + name + ".png"));
-        at(() -> {
-            model.draft()
-                    .openUnsaved(
-                            "cabinet.yaml",
-                            clipramp.desk.model.Example.all().get(0).text());
-            return null;
-        });
+        fire(stage, "#start-new");
+        settle(() -> true);
+        save(stage, folder.resolve("new-" + name + ".png"));
+        fire(stage, "#new-propose");
         settle(() -> !model.isBusy() && model.judgement().isPresent());
         save(stage, folder.resolve("bench-" + name + ".png"));
         at(() -> {
-            stage.getScene().getRoot().lookup("#tab-parts").fireEvent(new javafx.event.ActionEvent());
+            model.draft().abandon(() -> model.draft().openUnsaved("cabinet.yaml", Example.all().get(5).text()));
             return null;
         });
+        settle(() -> !model.isBusy() && model.draft().name().equals("cabinet.yaml"));
+        settle(() -> !model.isBusy());
+        at(() -> {
+            model.bench().turnTo(0.8);
+            return null;
+        });
+        fire(stage, ".margin-row");
+        settle(() -> !model.isBusy());
+        save(stage, folder.resolve("margins-" + name + ".png"));
+        fire(stage, "#tab-parts");
         settle(() -> !model.isBusy());
         save(stage, folder.resolve("parts-" + name + ".png"));
         at(() -> {
             stage.hide();
+            return null;
+        });
+    }
+
+    private static void fire(Stage stage, String selector) throws Exception {
+        at(() -> {
+            Node node = stage.getScene().getRoot().lookup(selector);
+            if (node != null) {
+                node.fireEvent(new ActionEvent());
+            }
             return null;
         });
     }
