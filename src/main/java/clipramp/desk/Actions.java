@@ -29,6 +29,8 @@ interface Actions {
 
     void saveAs();
 
+    void saveRecord();
+
     void undo();
 
     void redo();

@@ -108,6 +108,11 @@ final class BenchPage extends Pane {
         arrange();
     }
 
+    /** Puts the keyboard on the knob. */
+    void begin() {
+        knob.begin();
+    }
+
     /** Begins at the first station, to enter a circuit part by part. */
     void enterParts() {
         choose(true);

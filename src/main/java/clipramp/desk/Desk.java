@@ -2,6 +2,7 @@ package clipramp.desk;
 
 import clipramp.desk.model.DeskModel;
 import clipramp.desk.model.Places;
+import clipramp.desk.model.RecordMaker;
 import clipramp.desk.model.Recovery;
 import clipramp.desk.model.Settings;
 import clipramp.desk.model.Trouble;
@@ -71,11 +72,12 @@ public final class Desk {
             Workers workers = new Workers(Platform::runLater, worker("turning"), worker("judging"), worker("writing"));
             Recovery recovery = new Recovery(places, ProcessHandle.current(), System.identityHashCode(stage));
             WindowActions[] actions = new WindowActions[1];
-            DeskModel model =
-                    new DeskModel(workers, new Workshop(this::library), recovery, trouble -> actions[0].show(trouble));
-            actions[0] = new WindowActions(model, recovery, places, workers, closed);
+            Workshop workshop = new Workshop(this::library);
+            DeskModel model = new DeskModel(workers, workshop, recovery, trouble -> actions[0].show(trouble));
+            RecordMaker maker = new RecordMaker(workers, workshop, version(), trouble -> actions[0].show(trouble));
+            actions[0] = new WindowActions(model, maker, recovery, places, workers, closed);
             Theme theme = new Theme(Palette.PAPER, 1);
-            DeskWindow window = new DeskWindow(stage, theme, model, actions[0]);
+            DeskWindow window = new DeskWindow(stage, theme, model, maker, actions[0]);
             actions[0].serve(window, asking.of(stage));
             stage.show();
             Thread.currentThread()
@@ -91,6 +93,11 @@ public final class Desk {
                 Platform.runLater(() -> actions[0].takeSystemTheme(dark));
             });
             return model;
+        }
+
+        private static String version() {
+            String packaged = Desk.class.getPackage().getImplementationVersion();
+            return packaged == null ? "unpackaged" : packaged;
         }
 
         private ProfileLibrary library(Optional<Path> file) {

@@ -3,6 +3,7 @@ package clipramp.desk;
 import clipramp.desk.Actions.Page;
 import clipramp.desk.Actions.Shown;
 import clipramp.desk.model.DeskModel;
+import clipramp.desk.model.RecordMaker;
 import clipramp.desk.model.Recovery;
 import clipramp.desk.model.Settings;
 import clipramp.figures.CircuitFigure;
@@ -10,6 +11,7 @@ import clipramp.figures.Figure;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.Optional;
+import javafx.application.Platform;
 import javafx.scene.Scene;
 import javafx.scene.input.TransferMode;
 import javafx.scene.layout.BorderPane;
@@ -30,12 +32,13 @@ final class DeskWindow {
     private final StartPage start;
     private final NewPage fresh;
     private final BenchPage bench;
+    private final RecordPage record;
     private final HeaderView header;
     private final Menus menus;
     private final VBox top = new VBox();
     private Page page = Page.BENCH;
 
-    DeskWindow(Stage stage, Theme theme, DeskModel model, Actions actions) {
+    DeskWindow(Stage stage, Theme theme, DeskModel model, RecordMaker maker, Actions actions) {
         this.stage = stage;
         this.theme = theme;
         this.model = model;
@@ -43,6 +46,7 @@ final class DeskWindow {
         this.fresh = new NewPage(
                 wish -> actions.propose(wish, false), wish -> actions.propose(wish, true), actions::giveUpNew);
         this.bench = new BenchPage(theme, model);
+        this.record = new RecordPage(theme, model.draft(), maker, actions::saveRecord);
         this.header = new HeaderView(model, actions, () -> bench.unfold(true));
         this.menus = new Menus(actions, model.draft());
         top.getChildren().setAll(menus.node());
@@ -82,8 +86,11 @@ final class DeskWindow {
     }
 
     private void refresh() {
-        if (model.draft().isOpen() && root.getCenter() != bench) {
-            showPage(page);
+        boolean shown = root.getCenter() == bench || root.getCenter() == record.node();
+        if (model.draft().isOpen() && !shown) {
+            showPage(Page.BENCH);
+        } else if (page == Page.RECORD) {
+            record.show();
         }
         stage.setTitle(model.draft().name() + (model.draft().isDirty() ? " (differs from saved)" : "") + " – clipramp");
         mark();
@@ -92,7 +99,12 @@ final class DeskWindow {
     void showPage(Page wanted) {
         page = wanted;
         top.getChildren().setAll(menus.node(), header.node());
-        root.setCenter(bench);
+        root.setCenter(page == Page.BENCH ? bench : record.node());
+        if (page == Page.RECORD) {
+            record.show();
+        } else {
+            Platform.runLater(bench::begin);
+        }
         mark();
     }
 
@@ -101,7 +113,7 @@ final class DeskWindow {
         fresh.offer(model.draft().workshop().lineIds());
         top.getChildren().setAll(menus.node());
         root.setCenter(fresh.node());
-        fresh.begin();
+        Platform.runLater(fresh::begin);
     }
 
     void complainNew(String words) {
@@ -128,6 +140,11 @@ final class DeskWindow {
 
     void offer(List<Recovery.Left> works) {
         start.offer(works);
+    }
+
+    /** A word about what was done, beside the title. */
+    void say(String words) {
+        header.say(words);
     }
 
     Stage stage() {

@@ -108,6 +108,11 @@ final class HeaderView {
         counts.setManaged(!folded);
     }
 
+    /** A word about what was done, until the design changes. */
+    void say(String words) {
+        saved.setText(words);
+    }
+
     private void refresh() {
         model.draft().sheet().map(Sheet::design).ifPresent(this::show);
     }

@@ -34,6 +34,11 @@ final class KnobView {
         return box;
     }
 
+    /** Puts the keyboard on the shaft. */
+    void begin() {
+        dial.node().requestFocus();
+    }
+
     Optional<KnobFigure> figure() {
         return figure;
     }

@@ -19,7 +19,7 @@ import javafx.scene.layout.VBox;
 /** A margin's row: a button that opens it, and what it opens to. */
 final class MarginRowView {
     /** Share of the row's width: name, asked, there is, bar, ratio, verdict. */
-    private static final double[] COLUMNS = {31, 15, 14, 17, 8, 15};
+    private static final double[] COLUMNS = {36, 14, 13, 14, 8, 15};
 
     private static final List<String> VERDICTS = List.of("fails", "tight", "holds", "not-judged");
 

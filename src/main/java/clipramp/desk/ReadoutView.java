@@ -21,7 +21,6 @@ final class ReadoutView {
 
     private final Bench bench;
     private final TextField angle = new TextField();
-    private final Label delay = figure();
     private final Label resistance = figure();
     private final Label position = figure();
     private final Label power = figure();
@@ -50,8 +49,7 @@ final class ReadoutView {
         box.getChildren()
                 .addAll(
                         cell("firing angle α", angle),
-                        cell("after the line's zero", delay),
-                        cell("ramp resistance R_E", resistance),
+                                cell("ramp resistance R_E", resistance),
                         cell("knob", position),
                         cell("load", power),
                         cell("of full power", share),
@@ -80,7 +78,6 @@ final class ReadoutView {
     private void refresh() {
         bench.reading().map(Figures::of).ifPresent(f -> {
             angle.setText(f.angle());
-            delay.setText(f.delay());
             resistance.setText(f.resistance());
             position.setText(f.position());
             power.setText(f.power());

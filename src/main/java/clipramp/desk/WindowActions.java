@@ -4,6 +4,7 @@ import clipramp.desk.model.DeskModel;
 import clipramp.desk.model.Draft;
 import clipramp.desk.model.Example;
 import clipramp.desk.model.Places;
+import clipramp.desk.model.RecordMaker;
 import clipramp.desk.model.Recovery;
 import clipramp.desk.model.Settings;
 import clipramp.desk.model.TableText;
@@ -15,6 +16,7 @@ import clipramp.figures.Figure;
 import clipramp.figures.Palette;
 import clipramp.figures.Style;
 import clipramp.figures.Surfaces;
+import clipramp.files.WholeFile;
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
@@ -32,6 +34,7 @@ final class WindowActions implements Actions {
     private static final double PICTURE_SCALE = 2;
 
     private final DeskModel model;
+    private final RecordMaker maker;
     private final Recovery recovery;
     private final Places places;
     private final Workers workers;
@@ -43,13 +46,16 @@ final class WindowActions implements Actions {
 
     /**
      * @param model the design on the desk
+     * @param maker lays the record out
      * @param recovery keeps unsaved work
      * @param places where settings lie
      * @param workers where work is done
      * @param closed told when the window has gone
      */
-    WindowActions(DeskModel model, Recovery recovery, Places places, Workers workers, Runnable closed) {
+    WindowActions(
+            DeskModel model, RecordMaker maker, Recovery recovery, Places places, Workers workers, Runnable closed) {
         this.model = model;
+        this.maker = maker;
         this.recovery = recovery;
         this.places = places;
         this.workers = workers;
@@ -188,6 +194,15 @@ final class WindowActions implements Actions {
             if (settings.recent().isEmpty() || !settings.recent().get(0).equals(file)) {
                 remember(settings.withRecent(file));
             }
+        });
+    }
+
+    @Override
+    public void saveRecord() {
+        maker.pdf().ifPresent(pdf -> {
+            String name = draft().name().replaceFirst("\\.ya?ml$", "") + ".pdf";
+            asks().toWrite(FileAsk.Kind.RECORD, name, draft().file())
+                    .ifPresent(file -> draft().export(file, pdf, () -> window().say("Saved " + file.getFileName())));
         });
     }
 

@@ -20,6 +20,7 @@ import javafx.embed.swing.SwingFXUtils;
 import javafx.scene.image.WritableImage;
 import javafx.event.ActionEvent;
 import javafx.scene.Node;
+import javafx.scene.control.Label;
 import javafx.stage.Stage;
 import javax.imageio.ImageIO;
 
@@ -94,6 +95,10 @@ public final class Screens {
         fire(stage, "#tab-parts");
         settle(() -> !model.isBusy());
         save(stage, folder.resolve("parts-" + name + ".png"));
+        fire(stage, "#page-record");
+        settle(() -> stage.getScene().getRoot().lookup("#record-progress") instanceof Label label
+                && label.getText().contains("pages"));
+        save(stage, folder.resolve("record-" + name + ".png"));
         at(() -> {
             stage.hide();
             return null;

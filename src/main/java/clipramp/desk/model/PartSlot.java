@@ -91,6 +91,13 @@ public record PartSlot(
         return slots;
     }
 
+    /** Places for given keys, typed and not chosen. */
+    public static List<PartSlot> at(List<String> keys, Sheet sheet) {
+        return keys.stream()
+                .map(key -> slot(key, sheet.text().valueAt(key).orElse(""), sheet, List.of()))
+                .toList();
+    }
+
     /** A load is given by its rating or by its resistance: only what the file has is shown. */
     private static boolean isOneOfTwo(String key) {
         return List.of("load.rated", "load.resistance", "load.inductance").contains(key);

@@ -1,0 +1,144 @@
+package clipramp.desk;
+
+import clipramp.desk.model.Draft;
+import clipramp.desk.model.PartSlot;
+import clipramp.desk.model.RecordMaker;
+import clipramp.desk.model.Sheet;
+import clipramp.record.PageSize;
+import clipramp.record.RecordPreview;
+import java.util.ArrayList;
+import java.util.List;
+import javafx.beans.binding.Bindings;
+import javafx.scene.AccessibleRole;
+import javafx.scene.control.Button;
+import javafx.scene.control.ComboBox;
+import javafx.scene.control.Label;
+import javafx.scene.control.ScrollPane;
+import javafx.scene.image.ImageView;
+import javafx.scene.image.PixelFormat;
+import javafx.scene.image.WritableImage;
+import javafx.scene.layout.BorderPane;
+import javafx.scene.layout.StackPane;
+import javafx.scene.layout.VBox;
+
+/** The record's pages as they will be saved, and its title block. */
+final class RecordPage {
+    private static final List<String> TITLE_BLOCK = List.of(
+            "title",
+            "document.number",
+            "document.revision",
+            "document.prepared-by",
+            "document.reviewed-by",
+            "document.date");
+
+    private final Draft draft;
+    private final RecordMaker maker;
+    private final Theme theme;
+    private final VBox pages = new VBox();
+    private final VBox side = new VBox();
+    private final Button save = new Button("Save the record…");
+    private final Label progress = new Label();
+    private final BorderPane box = new BorderPane();
+    private final List<SlotView> slots = new ArrayList<>();
+    private int drawn;
+
+    RecordPage(Theme theme, Draft draft, RecordMaker maker, Runnable saving) {
+        this.theme = theme;
+        this.draft = draft;
+        this.maker = maker;
+        pages.getStyleClass().add("record-pages");
+        pages.setId("record-pages");
+        ScrollPane scroll = new ScrollPane(pages);
+        scroll.setFitToWidth(true);
+        scroll.setHbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);
+        scroll.setAccessibleText("Pages of the record; arrow keys scroll");
+        scroll.getStyleClass().add("record-scroll");
+        save.setId("record-save");
+        save.setDefaultButton(true);
+        save.setOnAction(event -> saving.run());
+        ComboBox<String> paper = new ComboBox<>();
+        for (PageSize size : PageSize.values()) {
+            paper.getItems().add(size.word());
+        }
+        paper.setValue(PageSize.A4.word());
+        paper.setId("record-paper");
+        paper.setAccessibleText("Paper");
+        paper.valueProperty()
+                .addListener(property ->
+                        maker.setSize(PageSize.values()[paper.getItems().indexOf(paper.getValue())]));
+        side.getStyleClass().add("record-side");
+        progress.getStyleClass().add("quiet");
+        progress.setId("record-progress");
+        progress.setWrapText(true);
+        side.getChildren().addAll(save, progress, paper);
+        ScrollPane sideScroll = new ScrollPane(side);
+        sideScroll.setFitToWidth(true);
+        sideScroll.setHbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);
+        sideScroll.setFocusTraversable(false);
+        sideScroll.getStyleClass().add("record-side-scroll");
+        box.setLeft(sideScroll);
+        box.setCenter(scroll);
+        maker.onChange(this::refresh);
+        theme.onChange(() -> maker.setZoom(theme.zoom()));
+    }
+
+    BorderPane node() {
+        return box;
+    }
+
+    /** Brings the pages up to the design as it stands. */
+    void show() {
+        draft.sheet().ifPresent(sheet -> {
+            maker.show(sheet.loaded(), draft.file());
+            titleBlock(sheet);
+        });
+    }
+
+    private void titleBlock(Sheet sheet) {
+        List<PartSlot> wanted = PartSlot.at(TITLE_BLOCK, sheet);
+        if (slots.isEmpty()) {
+            for (PartSlot slot : wanted) {
+                SlotView view = new SlotView(slot, draft, key -> {});
+                slots.add(view);
+                side.getChildren().add(view.box());
+            }
+        }
+        for (int i = 0; i < wanted.size(); i++) {
+            slots.get(i).show(wanted.get(i));
+        }
+    }
+
+    private void refresh() {
+        List<RecordPreview.Page> all = maker.pages();
+        save.setDisable(maker.pdf().isEmpty());
+        if (all.size() < drawn) {
+            pages.getChildren().clear();
+            drawn = 0;
+        }
+        while (drawn < all.size()) {
+            pages.getChildren().add(picture(all.get(drawn)));
+            drawn++;
+        }
+        progress.setText(words(all));
+    }
+
+    private String words(List<RecordPreview.Page> all) {
+        if (maker.isBusy()) {
+            return all.isEmpty() ? "Laying the record out…" : "Page " + all.size() + " of " + all.get(0).count();
+        }
+        return all.size() + " pages. Computed; no statement of compliance.";
+    }
+
+    private StackPane picture(RecordPreview.Page page) {
+        WritableImage image = new WritableImage(page.width(), page.height());
+        image.getPixelWriter()
+                .setPixels(0, 0, page.width(), page.height(), PixelFormat.getIntArgbInstance(), page.argb(), 0, page.width());
+        ImageView view = new ImageView(image);
+        view.setPreserveRatio(true);
+        view.fitWidthProperty().bind(Bindings.min(page.width(), pages.widthProperty().subtract(32)));
+        StackPane sheet = new StackPane(view);
+        sheet.setAccessibleRole(AccessibleRole.IMAGE_VIEW);
+        sheet.setAccessibleText("Page " + page.number() + " of " + page.count() + " of the record");
+        return sheet;
+    }
+}
