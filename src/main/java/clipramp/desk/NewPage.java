@@ -50,8 +50,24 @@ final class NewPage {
         row(form, 0, "1  line", "what the circuit hangs on", line, "new-line");
         row(form, 1, "2  load", "rated power of a heater on that line", load, "new-load");
         row(form, 2, "3  stage", "how thyristors, bridge and load are put together", stage, "new-stage");
-        row(form, 3, "4  wanted", "share of full power at the knob's two ends", lowest, "new-lowest", highest, "new-highest");
-        row(form, 4, "5  surroundings", "coldest and hottest air around the parts", coldest, "new-coldest", hottest, "new-hottest");
+        row(
+                form,
+                3,
+                "4  wanted",
+                "share of full power at the knob's two ends",
+                lowest,
+                "new-lowest",
+                highest,
+                "new-highest");
+        row(
+                form,
+                4,
+                "5  surroundings",
+                "coldest and hottest air around the parts",
+                coldest,
+                "new-coldest",
+                hottest,
+                "new-hottest");
         about.getStyleClass().add("quiet");
         about.setWrapText(true);
         form.add(about, 3, 2);

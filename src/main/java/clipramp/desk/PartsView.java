@@ -87,22 +87,26 @@ final class PartsView {
     /** Shows the first station and puts the keyboard there. */
     void begin() {
         show(PartGroup.LINE, "");
-        views.stream().findFirst().ifPresent(view -> view.node().requestFocus());
+        views.stream().findFirst().ifPresent(this::focus);
     }
 
     private void next() {
         PartGroup[] all = PartGroup.values();
         show(all[(station.ordinal() + 1) % all.length], "");
-        views.stream().findFirst().ifPresent(view -> view.node().requestFocus());
+        views.stream().findFirst().ifPresent(this::focus);
     }
 
     /** Brings a part's station up and puts the keyboard into its place. */
     void choose(String key) {
         show(PartGroup.of(key), key);
-        views.stream()
-                .filter(view -> view.key().equals(key))
-                .findFirst()
-                .ifPresent(view -> view.node().requestFocus());
+        views.stream().filter(view -> view.key().equals(key)).findFirst().ifPresent(this::focus);
+    }
+
+    /** What was never shown before has no place for the keyboard until it is laid out. */
+    private void focus(SlotView view) {
+        box.applyCss();
+        box.layout();
+        view.node().requestFocus();
     }
 
     private void show(PartGroup group, String key) {

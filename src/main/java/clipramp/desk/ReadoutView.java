@@ -7,11 +7,12 @@ import clipramp.units.LenientEntry;
 import clipramp.units.RefusedQuantityException;
 import clipramp.units.Unit;
 import javafx.css.PseudoClass;
-import javafx.geometry.Pos;
 import javafx.scene.Node;
 import javafx.scene.control.Label;
 import javafx.scene.control.TextField;
-import javafx.scene.layout.FlowPane;
+import javafx.scene.layout.HBox;
+import javafx.scene.layout.Priority;
+import javafx.scene.layout.Region;
 import javafx.scene.layout.VBox;
 
 /** The line of figures between lanes and knob; the firing angle is a field. */
@@ -26,7 +27,9 @@ final class ReadoutView {
     private final Label power = figure();
     private final Label share = figure();
     private final Label state = new Label();
-    private final FlowPane box = new FlowPane();
+    private final Label complaint = new Label();
+    private final HBox figures = new HBox();
+    private final VBox box = new VBox(figures);
 
     ReadoutView(Bench bench) {
         this.bench = bench;
@@ -44,16 +47,24 @@ final class ReadoutView {
         power.setId("power");
         state.setId("state");
         state.getStyleClass().add("state");
+        state.setWrapText(true);
+        complaint.setId("angle-complaint");
+        complaint.getStyleClass().add("complaint");
+        complaint.setWrapText(true);
+        complaint.setMinHeight(Region.USE_PREF_SIZE);
         box.getStyleClass().add("readout");
-        box.setAlignment(Pos.BASELINE_LEFT);
-        box.getChildren()
+        figures.getStyleClass().add("readout-cells");
+        VBox last = cell("state", state);
+        last.setMinWidth(0);
+        HBox.setHgrow(last, Priority.ALWAYS);
+        figures.getChildren()
                 .addAll(
                         cell("firing angle α", angle),
-                                cell("ramp resistance R_E", resistance),
+                        cell("ramp resistance R_E", resistance),
                         cell("knob", position),
                         cell("load", power),
                         cell("of full power", share),
-                        cell("state", state));
+                        last);
         bench.onReading(this::refresh);
     }
 
@@ -67,11 +78,12 @@ final class ReadoutView {
         Label head = new Label(caption);
         head.getStyleClass().add("caption");
         VBox cell = new VBox(head, value);
+        cell.setMinWidth(Region.USE_PREF_SIZE);
         cell.getStyleClass().add("readout-cell");
         return cell;
     }
 
-    FlowPane node() {
+    VBox node() {
         return box;
     }
 
@@ -98,8 +110,11 @@ final class ReadoutView {
     private void refused(String why) {
         angle.pseudoClassStateChanged(PseudoClass.getPseudoClass("refused"), !why.isEmpty());
         angle.setAccessibleHelp(why);
-        if (!why.isEmpty()) {
-            state.setText(why);
+        complaint.setText(why);
+        if (why.isEmpty()) {
+            box.getChildren().remove(complaint);
+        } else if (!box.getChildren().contains(complaint)) {
+            box.getChildren().add(complaint);
         }
     }
 }

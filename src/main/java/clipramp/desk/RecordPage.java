@@ -124,7 +124,9 @@ final class RecordPage {
 
     private String words(List<RecordPreview.Page> all) {
         if (maker.isBusy()) {
-            return all.isEmpty() ? "Laying the record out…" : "Page " + all.size() + " of " + all.get(0).count();
+            return all.isEmpty()
+                    ? "Laying the record out…"
+                    : "Page " + all.size() + " of " + all.get(0).count();
         }
         return all.size() + " pages. Computed; no statement of compliance.";
     }
@@ -132,10 +134,19 @@ final class RecordPage {
     private StackPane picture(RecordPreview.Page page) {
         WritableImage image = new WritableImage(page.width(), page.height());
         image.getPixelWriter()
-                .setPixels(0, 0, page.width(), page.height(), PixelFormat.getIntArgbInstance(), page.argb(), 0, page.width());
+                .setPixels(
+                        0,
+                        0,
+                        page.width(),
+                        page.height(),
+                        PixelFormat.getIntArgbInstance(),
+                        page.argb(),
+                        0,
+                        page.width());
         ImageView view = new ImageView(image);
         view.setPreserveRatio(true);
-        view.fitWidthProperty().bind(Bindings.min(page.width(), pages.widthProperty().subtract(32)));
+        view.fitWidthProperty()
+                .bind(Bindings.min(page.width(), pages.widthProperty().subtract(32)));
         StackPane sheet = new StackPane(view);
         sheet.setAccessibleRole(AccessibleRole.IMAGE_VIEW);
         sheet.setAccessibleText("Page " + page.number() + " of " + page.count() + " of the record");

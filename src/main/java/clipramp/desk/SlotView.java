@@ -32,7 +32,7 @@ final class SlotView {
         this.slot = slot;
         this.draft = draft;
         this.control = slot.isChoice() ? choice(slot) : field();
-        control.setId("slot-" + slot.key());
+        control.setId("slot-" + slot.key().replace('.', '-'));
         control.setMaxWidth(Double.MAX_VALUE);
         control.focusedProperty().addListener((property, before, now) -> {
             if (now) {
@@ -42,7 +42,7 @@ final class SlotView {
         name.setLabelFor(control);
         name.getStyleClass().add("quiet");
         complaint.getStyleClass().add("complaint");
-        complaint.setId("complaint-" + slot.key());
+        complaint.setId("complaint-" + slot.key().replace('.', '-'));
         complaint.setWrapText(true);
         complaint.setMinHeight(Region.USE_PREF_SIZE);
         box.getStyleClass().add("slot");

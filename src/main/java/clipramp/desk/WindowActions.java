@@ -16,7 +16,6 @@ import clipramp.figures.Figure;
 import clipramp.figures.Palette;
 import clipramp.figures.Style;
 import clipramp.figures.Surfaces;
-import clipramp.files.WholeFile;
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
@@ -98,12 +97,14 @@ final class WindowActions implements Actions {
 
     @Override
     public void propose(Wish wish, boolean entering) {
-        draft().propose(wish, trouble -> trouble.ifPresentOrElse(t -> window().complainNew(t.text()), () -> {
-            window().showPage(Page.BENCH);
-            if (entering) {
-                window().bench().enterParts();
-            }
-        }));
+        draft().propose(
+                        wish,
+                        trouble -> trouble.ifPresentOrElse(t -> window().complainNew(t.text()), () -> {
+                            window().showPage(Page.BENCH);
+                            if (entering) {
+                                window().bench().enterParts();
+                            }
+                        }));
     }
 
     @Override

@@ -25,7 +25,9 @@ public final class FirstValues {
     private static final double[] VOLTS = {250, 350, 500, 750, 1000};
 
     /** Tracks that pots come in, ohm (common practice). */
-    private static final double[] TRACKS = {1e3, 2e3, 2.5e3, 5e3, 10e3, 20e3, 25e3, 50e3, 100e3, 200e3, 250e3, 500e3, 1e6};
+    private static final double[] TRACKS = {
+        1e3, 2e3, 2.5e3, 5e3, 10e3, 20e3, 25e3, 50e3, 100e3, 200e3, 250e3, 500e3, 1e6
+    };
 
     /** On a low line and with a ±5 % resistor the ramp is slower than at nominal: keep this much under. */
     private static final double FIXED_RESERVE = 0.92;
@@ -50,8 +52,7 @@ public final class FirstValues {
      * @param crestAmps current wanted at the crest, A
      * @return ohm
      */
-    public static double dropperOhms(
-            double lowLineVolts, double zenerVolts, double rectifierVolts, double crestAmps) {
+    public static double dropperOhms(double lowLineVolts, double zenerVolts, double rectifierVolts, double crestAmps) {
         double over = Math.sqrt(2) * lowLineVolts - zenerVolts - rectifierVolts;
         return PreferredSeries.E24.nearest(Math.max(1, over) / crestAmps);
     }
@@ -116,8 +117,10 @@ public final class FirstValues {
     public static OptionalDouble caseToAmbient(Design design, double rampOhms) {
         OptionalDouble inside = design.thyristor().device().junctionToCaseKelvinPerWatt();
         OptionalDouble limit = design.thyristor().device().limits().junctionCelsius();
-        Condition high =
-                new Condition(design.line().highVolts(), design.line().hertz(), design.surroundings().hottestCelsius());
+        Condition high = new Condition(
+                design.line().highVolts(),
+                design.line().hertz(),
+                design.surroundings().hottestCelsius());
         Solution solution = Firing.solve(design, high, rampOhms);
         LoadResult load = LoadPower.of(design, high, solution);
         if (inside.isEmpty() || limit.isEmpty() || !(load.thyristorWatts() > 0)) {

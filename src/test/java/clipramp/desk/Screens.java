@@ -17,10 +17,10 @@ import java.util.concurrent.FutureTask;
 import java.util.function.BooleanSupplier;
 import javafx.application.Platform;
 import javafx.embed.swing.SwingFXUtils;
-import javafx.scene.image.WritableImage;
 import javafx.event.ActionEvent;
 import javafx.scene.Node;
 import javafx.scene.control.Label;
+import javafx.scene.image.WritableImage;
 import javafx.stage.Stage;
 import javax.imageio.ImageIO;
 
@@ -46,9 +46,7 @@ public final class Screens {
             new Size(1366, 768, 100), new Size(1920, 1080, 100), new Size(1366, 768, 200), new Size(1920, 1080, 200)
         }) {
             for (Settings.Look look : new Settings.Look[] {Settings.Look.PAPER, Settings.Look.INK}) {
-                if ((size.words() + "-" + look)
-                        .toLowerCase(Locale.ROOT)
-                        .contains(only)) {
+                if ((size.words() + "-" + look).toLowerCase(Locale.ROOT).contains(only)) {
                     shoot(folder, home, size, look);
                 }
             }
@@ -80,7 +78,9 @@ public final class Screens {
         settle(() -> !model.isBusy() && model.judgement().isPresent());
         save(stage, folder.resolve("bench-" + name + ".png"));
         at(() -> {
-            model.draft().abandon(() -> model.draft().openUnsaved("cabinet.yaml", Example.all().get(5).text()));
+            model.draft()
+                    .abandon(() -> model.draft()
+                            .openUnsaved("cabinet.yaml", Example.all().get(5).text()));
             return null;
         });
         settle(() -> !model.isBusy() && model.draft().name().equals("cabinet.yaml"));

@@ -113,7 +113,8 @@ public final class Draft {
     public void propose(Wish wish, Consumer<Optional<Trouble>> done) {
         NewDesign.Checked checked = NewDesign.check(wish);
         if (checked.refusal().isPresent()) {
-            done.accept(Optional.of(new Trouble("One answer cannot be read", checked.refusal().get())));
+            done.accept(Optional.of(
+                    new Trouble("One answer cannot be read", checked.refusal().get())));
             return;
         }
         start(

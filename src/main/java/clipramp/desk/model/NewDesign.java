@@ -38,7 +38,8 @@ public final class NewDesign {
     /** What a stage is good for, in a sentence. */
     public static String about(Stage stage) {
         return switch (stage) {
-            case HALF_WAVE -> "One SCR, every second half cycle: half of full power at most, and direct current in the line.";
+            case HALF_WAVE ->
+                "One SCR, every second half cycle: half of full power at most, and direct current in the line.";
             case BRIDGE_DC -> "Bridge, then load and one SCR on its dc side: both half cycles alike, few parts.";
             case BRIDGE_AC -> "Load on the ac side, one SCR across the bridge; the firing supply lies across the SCR.";
             case INVERSE_PARALLEL -> "Two SCRs, one each way, on a pulse transformer: for larger loads.";
@@ -57,7 +58,8 @@ public final class NewDesign {
             String highest = read("highest wanted", wish.highest(), SHARE);
             String coldest = read("coldest", wish.coldest(), AIR);
             String hottest = read("hottest", wish.hottest(), AIR);
-            Wish read = new Wish(wish.lineId(), load, wish.stage(), lowest, highest, degrees(coldest), degrees(hottest));
+            Wish read =
+                    new Wish(wish.lineId(), load, wish.stage(), lowest, highest, degrees(coldest), degrees(hottest));
             return new Checked(read, Optional.empty());
         } catch (AnswerRefused e) {
             return new Checked(wish, Optional.of(e.words));

@@ -91,14 +91,11 @@ public final class Proposal {
 
                 surroundings: {coldest: <coldest>, hottest: <hottest>}
                 wanted: {lowest: <lowest> at 0 %, highest: <highest> at 100 %}
-                """
-                .replace("<load>", wish.load())
+                """.replace("<load>", wish.load())
                 .replace("<stage>", wish.stage().word())
                 .replace("<line>", wish.lineId())
                 .replace("<tap>", (wish.stage() == Stage.BRIDGE_AC ? Tap.THYRISTOR : Tap.LINE).word())
-                .replace(
-                        "<rectifier>",
-                        (wish.stage() == Stage.HALF_WAVE ? Rectifier.DIODE : Rectifier.BRIDGE).word())
+                .replace("<rectifier>", (wish.stage() == Stage.HALF_WAVE ? Rectifier.DIODE : Rectifier.BRIDGE).word())
                 .replace("<gate>", gate())
                 .replace("<thyristor>", wish.stage() == Stage.TRIAC ? "2n6349" : "2n6405")
                 .replace("<coldest>", wish.coldest())
@@ -133,7 +130,9 @@ public final class Proposal {
     private void coupling(ThyristorChoice choice) {
         String winding = "winding-" + QuantityText.number(design.line().volts(), 4) + "v-24v";
         ProfileLibrary library = workshop.library(Optional.empty());
-        if (wish.stage() == Stage.TRIAC && choice.small() && library.find("winding", winding).isPresent()) {
+        if (wish.stage() == Stage.TRIAC
+                && choice.small()
+                && library.find("winding", winding).isPresent()) {
             set("clip.winding", winding);
             set("gate.coupling", "direct");
             text = text.without("gate.transformer");
@@ -176,7 +175,8 @@ public final class Proposal {
     }
 
     private void ramp() {
-        Optional<FirstValues.Span> span = FirstValues.span(design, goal(design.wanted().lowest()), goal(design.wanted().highest()));
+        Optional<FirstValues.Span> span = FirstValues.span(
+                design, goal(design.wanted().lowest()), goal(design.wanted().highest()));
         span.ifPresent(s -> {
             set("ramp.fixed", QuantityText.exact(s.fixedOhms(), Unit.OHM) + " ±5 % 0.25 W");
             set("ramp.pot.track", QuantityText.exact(s.trackOhms(), Unit.OHM) + " ±10 % 0.5 W");
@@ -194,10 +194,16 @@ public final class Proposal {
     private void ratings() {
         double full = design.ramp().rampOhms(1);
         double most = Math.max(
-                FirstValues.dropperWatts(design, full), FirstValues.dropperWatts(design, design.ramp().rampOhms(0)));
+                FirstValues.dropperWatts(design, full),
+                FirstValues.dropperWatts(design, design.ramp().rampOhms(0)));
         double watts = FirstValues.ratedWatts(most, design.resistorDerating());
         double ratio = design.clip().winding().map(Winding::ratio).orElse(1.0);
-        set("clip.dropper", part(design.clip().dropper().value(), watts, Math.sqrt(2) * design.line().highVolts() * ratio));
+        set(
+                "clip.dropper",
+                part(
+                        design.clip().dropper().value(),
+                        watts,
+                        Math.sqrt(2) * design.line().highVolts() * ratio));
         FirstValues.caseToAmbient(design, full)
                 .ifPresent(sink -> set("thyristor.case-to-ambient", QuantityText.exact(sink, Unit.KELVIN_PER_WATT)));
     }

@@ -93,8 +93,7 @@ public final class RecordMaker {
     private Made make(Asked asked) {
         try {
             Check check = Judge.check(asked.loaded().design(), OptionalDouble.empty(), OptionalDouble.empty());
-            RecordContent content =
-                    RecordContent.of(asked.loaded(), check, workshop.library(asked.file()), version);
+            RecordContent content = RecordContent.of(asked.loaded(), check, workshop.library(asked.file()), version);
             return new Made(asked, DesignRecord.bytes(content, asked.size()));
         } catch (IOException e) {
             throw new UncheckedIOException(e);
@@ -138,6 +137,9 @@ public final class RecordMaker {
 
     /** Whether more pages are to come. */
     public boolean isBusy() {
-        return maker.isBusy() || pdf().isEmpty() || pages.isEmpty() || pages.size() < pages.get(0).count();
+        return maker.isBusy()
+                || pdf().isEmpty()
+                || pages.isEmpty()
+                || pages.size() < pages.get(0).count();
     }
 }

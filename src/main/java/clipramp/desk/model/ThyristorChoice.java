@@ -52,7 +52,9 @@ record ThyristorChoice(String id, boolean small, boolean sensitive) {
                 .filter(Candidate::positive)
                 .filter(c -> c.volts() >= VOLTS_RESERVE * crestVolts && c.amps() >= AMPS_RESERVE * amps)
                 .min(smallest)
-                .or(() -> all.stream().filter(Candidate::positive).max(Comparator.comparingDouble(Candidate::volts).thenComparingDouble(Candidate::amps)))
+                .or(() -> all.stream()
+                        .filter(Candidate::positive)
+                        .max(Comparator.comparingDouble(Candidate::volts).thenComparingDouble(Candidate::amps)))
                 .orElseThrow(() -> new IllegalStateException("the program has no " + kind + " profiles"));
         return new ThyristorChoice(chosen.id(), chosen.amps() <= SMALL_AMPS, chosen.amps() < SENSITIVE_AMPS);
     }
@@ -69,7 +71,8 @@ record ThyristorChoice(String id, boolean small, boolean sensitive) {
 
     private static double value(Optional<String> text, Unit unit) {
         try {
-            return text.map(t -> QuantityReader.read(t, Expected.any(unit)).value()).orElse(0.0);
+            return text.map(t -> QuantityReader.read(t, Expected.any(unit)).value())
+                    .orElse(0.0);
         } catch (RefusedQuantityException e) {
             return 0;
         }

@@ -1,0 +1,216 @@
+package clipramp.desk;
+
+import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.within;
+
+import clipramp.desk.model.Example;
+import clipramp.desk.model.ViewCondition;
+import clipramp.firing.Firing;
+import java.nio.charset.StandardCharsets;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import javafx.geometry.Bounds;
+import javafx.scene.Node;
+import javafx.scene.control.Label;
+import javafx.scene.control.TextField;
+import javafx.scene.input.KeyCode;
+import javafx.scene.input.MouseButton;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
+
+/** Real windows on the headless platform, used as a person uses them. */
+class WindowTest {
+    @TempDir
+    Path home;
+
+    private static double degrees(Harness window) {
+        return Math.toDegrees(window.model.bench().reading().orElseThrow().firingRad().orElseThrow());
+    }
+
+    @Test
+    void draggingTheFiringLineTo90DegreesSolvesTheResistanceThatFiresThere() {
+        try (Harness window = Harness.start(home).example("drying-cabinet")) {
+            Node lanes = window.find("#lanes", Node.class);
+            Bounds area = lanes.localToScreen(lanes.getBoundsInLocal());
+            FigurePane pane = (FigurePane) lanes;
+            var frame = Harness.at(() -> ((clipramp.figures.LanesFigure) pane.figure())
+                    .frame(pane.area().getWidth(), pane.area().getHeight(), pane.style()));
+            double from = frame.xOf(window.model.bench().reading().orElseThrow().firingRad().orElseThrow());
+            double to = frame.xOf(Math.toRadians(70));
+            double y = area.getMinY() + area.getHeight() / 2;
+            window.robot
+                    .moveTo(area.getMinX() + from, y)
+                    .press(MouseButton.PRIMARY)
+                    .moveTo(area.getMinX() + to, y)
+                    .release(MouseButton.PRIMARY);
+            window.settle();
+            assertThat(degrees(window)).isCloseTo(70, within(0.5));
+
+            window.type("#angle", "90");
+            assertThat(degrees(window)).isCloseTo(90, within(1e-6));
+            double ohms = window.model.bench().reading().orElseThrow().point().rampOhms();
+            var design = window.model.draft().sheet().orElseThrow().design();
+            // The figure that is read is one that fires there when it is put back into the engine.
+            assertThat(Math.toDegrees(Firing.solve(design, design.nominalCondition(), ohms)
+                            .shown()
+                            .firingRad()
+                            .orElseThrow()))
+                    .isCloseTo(90, within(1e-6));
+            assertThat(window.find("#resistance", Label.class).getText()).endsWith("kΩ");
+            assertThat(design.ramp().rampOhms(window.model.bench().position())).isCloseTo(ohms, within(1e-3 * ohms));
+        }
+    }
+
+    @Test
+    void theFiringLineMovesByOneDegreeAndWithShiftByATenth() {
+        try (Harness window = Harness.start(home).example("drying-cabinet").focus("#lanes")) {
+            double before = degrees(window);
+            window.robot.push(KeyCode.RIGHT);
+            window.settle();
+            assertThat(degrees(window)).isCloseTo(before + 1, within(1e-6));
+            window.robot.push(KeyCode.SHIFT, KeyCode.LEFT);
+            window.settle();
+            assertThat(degrees(window)).isCloseTo(before + 0.9, within(1e-6));
+        }
+    }
+
+    @Test
+    void theKnobTurnsByKeyboard() {
+        try (Harness window = Harness.start(home).example("drying-cabinet").focus("#knob")) {
+            double watts = window.model.bench().reading().orElseThrow().point().load().watts();
+            window.robot.push(KeyCode.RIGHT).push(KeyCode.PAGE_UP);
+            window.settle();
+            assertThat(window.model.bench().position()).isCloseTo(0.61, within(1e-9));
+            assertThat(window.model.bench().reading().orElseThrow().point().load().watts())
+                    .isGreaterThan(watts);
+            assertThat(window.find("#position", Label.class).getText()).isEqualTo("61.0 %");
+            window.robot.push(KeyCode.HOME);
+            window.settle();
+            assertThat(window.model.bench().position()).isZero();
+        }
+    }
+
+    @Test
+    void aBadValueIsAnsweredWithWhatWasUnderstoodAndChangesNothing() {
+        try (Harness window = Harness.start(home).example("drying-cabinet")) {
+            window.click("#tab-parts");
+            String before = window.model.draft().sheet().orElseThrow().text().text();
+            window.type("#slot-ramp-capacitor", "104");
+            assertThat(window.find("#complaint-ramp-capacitor", Label.class).getText())
+                    .contains("104 is 100 nF: write that.");
+            assertThat(window.model.draft().sheet().orElseThrow().text().text()).isEqualTo(before);
+            window.type("#slot-ramp-capacitor", "1,000 nF");
+            assertThat(window.find("#complaint-ramp-capacitor", Label.class).getText())
+                    .contains("1.0 or 1000?");
+        }
+    }
+
+    @Test
+    void anEditIsUndoneByNameSavedReopenedAndStepsThroughPreferredValues() throws Exception {
+        Path file = home.resolve("mine.yaml");
+        try (Harness window = Harness.start(home).example("drying-cabinet")) {
+            window.click("#tab-parts");
+            window.type("#slot-ramp-capacitor", "0,1 µF ±10 % 63 V");
+            assertThat(capacitor(window)).isEqualTo(100e-9);
+            assertThat(window.find("#slot-ramp-capacitor", TextField.class).getText()).isEqualTo("0.1 µF ±10 % 63 V");
+            window.robot.push(KeyCode.UP);
+            window.settle();
+            assertThat(capacitor(window)).isEqualTo(120e-9);
+            assertThat(window.model.draft().undoName()).hasValue("capacitor to 120 nF ±10 % 63 V");
+
+            Harness.at(() -> {
+                window.model.draft().undo();
+                return null;
+            });
+            window.settle();
+            assertThat(capacitor(window)).isEqualTo(100e-9);
+            window.ask.answer = file;
+            window.focus("#lanes").robot.push(KeyCode.CONTROL, KeyCode.S);
+            window.await(() -> !window.model.draft().isDirty() && !window.model.isBusy());
+            assertThat(Files.readString(file, StandardCharsets.UTF_8))
+                    .isEqualTo(Example.all().get(0).text().replace("220 nF ±5 % 63 V", "0.1 µF ±10 % 63 V"));
+            assertThat(window.find("#saved", Label.class).getText()).isEqualTo("saved");
+        }
+        try (Harness again = Harness.startWith(home.resolve("again"), file)) {
+            assertThat(capacitor(again)).isEqualTo(100e-9);
+            assertThat(again.model.draft().isDirty()).isFalse();
+        }
+    }
+
+    private static double capacitor(Harness window) {
+        return window.model.draft().sheet().orElseThrow().design().ramp().capacitor().value();
+    }
+
+    @Test
+    void theConditionIsNamedAndMovesTheFiringAngle() {
+        try (Harness window = Harness.start(home).example("drying-cabinet")) {
+            double nominal = degrees(window);
+            Harness.at(() -> {
+                window.model.setCondition(ViewCondition.LOW_LINE);
+                return null;
+            });
+            window.settle();
+            assertThat(degrees(window)).isNotCloseTo(nominal, within(0.05));
+            assertThat(window.find("#condition-note", Label.class).getText())
+                    .isEqualTo("low line: Lanes and knob at 207 V, 25 °C; margins on this line, at their worst"
+                            + " temperature");
+        }
+    }
+
+    @Test
+    void aMarginOpensToItsFormulaAndLeadsToThePartThatMovesIt() {
+        try (Harness window = Harness.start(home).example("cabinet-gone-wrong")) {
+            window.click("#margin-dropper-power");
+            String shown = Texts.of(window.find("#margins", Node.class));
+            assertThat(shown).contains("formula", "source", "what to do", "moved by", "clip.dropper");
+            Node link = Texts.link(window.find("#margins", Node.class), "clip.dropper");
+            window.robot.clickOn(link);
+            window.settle();
+            assertThat(window.find("#slot-clip-dropper", TextField.class).isFocused()).isTrue();
+        }
+    }
+
+    @Test
+    void aClickOnThePulseLooksCloser() {
+        try (Harness window = Harness.start(home).example("drying-cabinet").focus("#lanes")) {
+            window.robot.push(KeyCode.ENTER);
+            FigurePane lanes = (FigurePane) window.find("#lanes", Node.class);
+            var figure = Harness.at(() -> (clipramp.figures.LanesFigure) lanes.figure());
+            assertThat(Math.toDegrees(figure.toRad() - figure.fromRad())).isBetween(0.05, 5.0);
+            window.robot.push(KeyCode.ESCAPE);
+            var whole = Harness.at(() -> (clipramp.figures.LanesFigure) lanes.figure());
+            assertThat(whole.toRad()).isCloseTo(Math.PI, within(1e-9));
+        }
+    }
+
+    @Test
+    void closingWithUnsavedWorkAsksFirst() {
+        try (Harness window = Harness.start(home).example("drying-cabinet")) {
+            window.focus("#lanes").robot.push(KeyCode.CONTROL, KeyCode.W);
+            Node dialog = window.find("#dialog-unsaved", Node.class);
+            assertThat(Texts.of(dialog)).contains("differs from what is saved");
+            window.robot.clickOn((Node) Texts.button(dialog, "Do not save"));
+            window.await(() -> window.closed);
+        }
+    }
+
+    @Test
+    void theFirstStartShowsTheCautions() {
+        try (Harness window = Harness.firstStart(home)) {
+            Node dialog = window.find("#dialog-cautions", Node.class);
+            assertThat(Texts.of(dialog)).contains("The whole firing circuit is live");
+        }
+    }
+
+    @Test
+    void aFileThatCannotBeReadIsExplained() throws Exception {
+        Path file = home.resolve("bad.yaml");
+        Files.writeString(file, "clipramp: 1\nline: {voltage: 230 A}\n", StandardCharsets.UTF_8);
+        try (Harness window = Harness.start(home)) {
+            window.ask.answer = file;
+            window.click("#start-open");
+            Node dialog = window.find("#dialog-trouble", Node.class);
+            assertThat(Texts.of(dialog)).contains("bad.yaml:2:", "line.voltage", "230 A").doesNotContain("Exception");
+        }
+    }
+}
