@@ -5,7 +5,6 @@ import clipramp.desk.model.MarginRow;
 import java.util.List;
 import javafx.scene.control.Button;
 import javafx.scene.control.ToggleButton;
-import javafx.scene.control.ToggleGroup;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Pane;
 import javafx.scene.layout.Priority;
@@ -55,9 +54,6 @@ final class BenchPage extends Pane {
         left.getChildren().addAll(lanes.node(), readout.node(), knob.node());
         tabs.getStyleClass().add("tabs");
         tabs.setMinHeight(Region.USE_PREF_SIZE);
-        ToggleGroup group = new ToggleGroup();
-        marginsTab.setToggleGroup(group);
-        partsTab.setToggleGroup(group);
         marginsTab.setOnAction(event -> choose(false));
         partsTab.setOnAction(event -> choose(true));
         fold.setOnAction(event -> unfold(false));
@@ -138,7 +134,9 @@ final class BenchPage extends Pane {
             if (folded) {
                 tabs.getChildren().add(fold);
             }
-            (partsChosen ? partsTab : marginsTab).setSelected(true);
+            // Not a toggle group: every one of them is reached by Tab.
+            partsTab.setSelected(partsChosen);
+            marginsTab.setSelected(!partsChosen);
             Region body = partsChosen ? parts.node() : margins.node();
             body.setPrefHeight(Region.USE_COMPUTED_SIZE);
             stack(tabs, body);

@@ -13,7 +13,6 @@ import javafx.scene.control.ComboBox;
 import javafx.scene.control.Hyperlink;
 import javafx.scene.control.Label;
 import javafx.scene.control.ToggleButton;
-import javafx.scene.control.ToggleGroup;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.Region;
@@ -48,9 +47,8 @@ final class HeaderView {
         margins.setAccessibleText("Show margins and parts");
         margins.setOnAction(event -> showMargins.run());
         conditions(actions);
-        ToggleGroup pages = new ToggleGroup();
-        page(bench, Page.BENCH, pages, actions);
-        page(record, Page.RECORD, pages, actions);
+        page(bench, Page.BENCH, actions);
+        page(record, Page.RECORD, actions);
         HBox switches = new HBox(bench, record);
         switches.getStyleClass().add("tabs");
         Hyperlink cautions = new Hyperlink("Mains safety");
@@ -87,8 +85,7 @@ final class HeaderView {
         });
     }
 
-    private static void page(ToggleButton button, Page page, ToggleGroup pages, Actions actions) {
-        button.setToggleGroup(pages);
+    private static void page(ToggleButton button, Page page, Actions actions) {
         button.setId("page-" + button.getText().toLowerCase(Locale.ROOT));
         button.setAccessibleText("Page " + button.getText());
         button.setOnAction(event -> actions.showPage(page));

@@ -39,6 +39,8 @@ final class MarginRowView {
 
     MarginRowView(Consumer<String> chosen) {
         this.chosen = chosen;
+        name.setWrapText(true);
+        name.setMinHeight(Region.USE_PREF_SIZE);
         GridPane grid = new GridPane();
         grid.getStyleClass().add("margin-grid");
         for (double share : COLUMNS) {

@@ -16,7 +16,6 @@ import javafx.scene.Cursor;
 import javafx.scene.control.Button;
 import javafx.scene.control.ScrollPane;
 import javafx.scene.control.ToggleButton;
-import javafx.scene.control.ToggleGroup;
 import javafx.scene.input.MouseEvent;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
@@ -64,11 +63,9 @@ final class PartsView {
     private HBox strip() {
         HBox strip = new HBox();
         strip.getStyleClass().add("stations");
-        ToggleGroup group = new ToggleGroup();
         for (PartGroup each : PartGroup.values()) {
             ToggleButton button = new ToggleButton(each.word());
             button.setId("station-" + each.word());
-            button.setToggleGroup(group);
             button.setAccessibleText("Parts of the station " + each.word());
             button.setOnAction(event -> show(each, ""));
             stations.put(each, button);

@@ -2,6 +2,7 @@ package clipramp.desk;
 
 import clipramp.desk.model.Bench;
 import clipramp.desk.model.Figures;
+import clipramp.desk.model.Reading;
 import clipramp.units.Expected;
 import clipramp.units.LenientEntry;
 import clipramp.units.RefusedQuantityException;
@@ -95,8 +96,9 @@ final class ReadoutView {
             power.setText(f.power());
             share.setText(f.share());
             state.setText(f.state());
-            refused("");
         });
+        refused("");
+        bench.reading().flatMap(Reading::remark).ifPresent(this::say);
     }
 
     private void commit() {
@@ -110,6 +112,10 @@ final class ReadoutView {
     private void refused(String why) {
         angle.pseudoClassStateChanged(PseudoClass.getPseudoClass("refused"), !why.isEmpty());
         angle.setAccessibleHelp(why);
+        say(why);
+    }
+
+    private void say(String why) {
         complaint.setText(why);
         if (why.isEmpty()) {
             box.getChildren().remove(complaint);

@@ -26,6 +26,7 @@ public final class KnobSearch {
     /** Share of pi, or of full power, from which a step across the root is a jump. */
     private static final double LEAST_JUMP = 1e-4;
 
+    private static final double MOST_OFF_RAD = Math.toRadians(3);
     private static final int TRIALS = 80;
 
     private KnobSearch() {}
@@ -41,6 +42,30 @@ public final class KnobSearch {
             Solution solution = Firing.solve(design, condition, ohms);
             return (firstFiringRad(design, solution) - firingRad) / Math.PI;
         });
+    }
+
+    /**
+     * The whole R_E that fires at an angle, or the nearer side of the jump where the angle is jumped over: the charge that
+     * one half cycle leaves to the next changes suddenly where it holds one pulse more.
+     *
+     * @param firingRad wanted firing angle, rad, 0..pi
+     * @return ohms; empty where no R_E fires within three degrees of it
+     */
+    public static OptionalDouble nearestRampOhmsForAngle(Design design, Condition condition, double firingRad) {
+        UnivariateFunction over = ohms -> (firstFiringRad(design, Firing.solve(design, condition, ohms)) - firingRad) / Math.PI;
+        OptionalDouble root = root(guessOhms(design, condition, firingRad), over);
+        if (root.isEmpty()) {
+            return root;
+        }
+        double below = Math.exp(root.getAsDouble() - 2 * LOG_ACCURACY);
+        double above = Math.exp(root.getAsDouble() + 2 * LOG_ACCURACY);
+        double offBelow = Math.abs(over.value(below));
+        double offAbove = Math.abs(over.value(above));
+        if (Math.min(offBelow, offAbove) * Math.PI > MOST_OFF_RAD) {
+            return OptionalDouble.empty();
+        }
+        boolean jump = Math.abs(over.value(above) - over.value(below)) > LEAST_JUMP;
+        return OptionalDouble.of(!jump ? Math.exp(root.getAsDouble()) : offBelow <= offAbove ? below : above);
     }
 
     /**
@@ -140,6 +165,12 @@ public final class KnobSearch {
     }
 
     private static OptionalDouble search(double guessOhms, UnivariateFunction over) {
+        OptionalDouble root = root(guessOhms, over);
+        return root.isEmpty() ? root : confirmed(root.getAsDouble(), over);
+    }
+
+    /** The logarithm of the R_E at which a function that grows with it changes its sign, by a root or by a jump. */
+    private static OptionalDouble root(double guessOhms, UnivariateFunction over) {
         double low = Math.log(Math.min(MOST_OHMS, Math.max(LEAST_OHMS, guessOhms)));
         double high = low;
         double atLow = over.value(Math.exp(low));
@@ -159,8 +190,7 @@ public final class KnobSearch {
         if (atLow > 0 || atHigh < 0) {
             return OptionalDouble.empty();
         }
-        double root = new BrentSolver(LOG_ACCURACY).solve(TRIALS, log -> over.value(Math.exp(log)), low, high);
-        return confirmed(root, over);
+        return OptionalDouble.of(new BrentSolver(LOG_ACCURACY).solve(TRIALS, log -> over.value(Math.exp(log)), low, high));
     }
 
     /** A jump through zero (from firing to silent) is no root: the thyristor fires on one side of it only. */

@@ -16,6 +16,12 @@ import java.util.function.BooleanSupplier;
 import javafx.application.Platform;
 import javafx.scene.Node;
 import javafx.scene.Scene;
+import javafx.scene.control.ButtonBase;
+import javafx.scene.control.Menu;
+import javafx.scene.control.MenuBar;
+import javafx.scene.control.MenuItem;
+import javafx.scene.control.TextField;
+import javafx.scene.input.KeyCode;
 import javafx.stage.Stage;
 import org.testfx.api.FxRobot;
 import org.testfx.api.FxToolkit;
@@ -125,15 +131,44 @@ final class Harness implements AutoCloseable {
         robot.clickOn(node(selector));
     }
 
+    /** Presses a button by keyboard, wherever it has been scrolled to. */
+    void press(String selector) {
+        ButtonBase button = find(selector, ButtonBase.class);
+        at(() -> {
+            button.fire();
+            return null;
+        });
+    }
+
+    /** Chooses from the menu bar, by the words of each step. */
+    void menu(String... words) {
+        MenuBar bar = find(".menu-bar", MenuBar.class);
+        at(() -> {
+            List<? extends MenuItem> items = bar.getMenus();
+            for (String word : words) {
+                MenuItem item = items.stream()
+                        .filter(i -> i.getText() != null && word.equals(i.getText().replace("_", "")))
+                        .findFirst()
+                        .orElseThrow(() -> new AssertionError("no menu " + word));
+                if (item instanceof Menu menu) {
+                    items = menu.getItems();
+                } else {
+                    item.fire();
+                }
+            }
+            return null;
+        });
+    }
+
     /** Clicks into a field and types over what stands there. */
     void type(String selector, String text) {
         click(selector);
-        javafx.scene.control.TextField field = find(selector, javafx.scene.control.TextField.class);
+        TextField field = find(selector, TextField.class);
         at(() -> {
             field.selectAll();
             return null;
         });
-        robot.write(text).push(javafx.scene.input.KeyCode.ENTER);
+        robot.write(text).push(KeyCode.ENTER);
         settle();
     }
 

@@ -7,6 +7,7 @@ import clipramp.power.OperatingPoint;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalDouble;
 import java.util.concurrent.Executor;
 import java.util.function.Consumer;
 
@@ -24,6 +25,9 @@ public final class Bench {
     private final List<Runnable> curveListeners = new ArrayList<>();
     private Optional<Knob> knob = Optional.empty();
     private Setting setting = new Setting.AtKnob(0.5);
+    /** Where the firing line was last wanted, so that steps add up over an angle that is jumped. */
+    private OptionalDouble aimedRad = OptionalDouble.empty();
+
     private Optional<Reading> reading = Optional.empty();
     private Optional<Curve> curve = Optional.empty();
 
@@ -51,6 +55,7 @@ public final class Bench {
      */
     public Bench(Executor turning, Executor sweeping, Executor home, Consumer<RuntimeException> troubles) {
         reader = new LatestWins<>(Reading::of, turning, home, this::take, trouble -> {
+            aimedRad = OptionalDouble.empty();
             reading.ifPresent(r -> setting = r.setting());
             readingListeners.forEach(Runnable::run);
             troubles.accept(trouble);
@@ -74,6 +79,7 @@ public final class Bench {
     public void put(Design design, Condition condition) {
         Knob next = new Knob(design, condition);
         knob = Optional.of(next);
+        aimedRad = OptionalDouble.empty();
         if (!(setting instanceof Setting.AtKnob) && design.ramp().pot().isPresent()) {
             setting = new Setting.AtKnob(position());
         }
@@ -98,13 +104,13 @@ public final class Bench {
 
     /** Moves the firing line from where it is. */
     public void fireLaterBy(double rad) {
-        double from = setting instanceof Setting.AtAngle angle
-                ? angle.rad()
-                : reading.map(r -> r.firingRad().orElse(Math.PI / 2)).orElse(Math.PI / 2);
+        double from = aimedRad.orElseGet(
+                () -> reading.map(r -> r.firingRad().orElse(Math.PI / 2)).orElse(Math.PI / 2));
         fireAt(Math.min(Math.PI, Math.max(0, from + rad)));
     }
 
     private void set(Setting other) {
+        aimedRad = other instanceof Setting.AtAngle angle ? OptionalDouble.of(angle.rad()) : OptionalDouble.empty();
         setting = other;
         read();
     }

@@ -12,6 +12,7 @@ import clipramp.power.LoadWave;
 import clipramp.power.OperatingPoint;
 import clipramp.units.QuantityText;
 import clipramp.units.Unit;
+import java.util.Optional;
 import java.util.OptionalDouble;
 
 /**
@@ -24,6 +25,8 @@ import java.util.OptionalDouble;
 public record Reading(Request request, OperatingPoint point, Lanes lanes) {
     /** As many instants as a screen has columns for the lanes; events are added to them. */
     private static final int SAMPLES = 700;
+
+    private static final double THERE_RAD = Math.toRadians(0.005);
 
     /**
      * What is asked of the bench.
@@ -63,7 +66,7 @@ public record Reading(Request request, OperatingPoint point, Lanes lanes) {
         Design design = request.design();
         Condition condition = request.condition();
         if (request.setting() instanceof Setting.AtAngle angle) {
-            double ohms = KnobSearch.rampOhmsForAngle(design, condition, angle.rad())
+            double ohms = KnobSearch.nearestRampOhmsForAngle(design, condition, angle.rad())
                     .orElseThrow(() -> new NoSuchAngleException(angle.rad()));
             return KnobMap.atRampOhms(design, condition, ohms);
         }
@@ -78,6 +81,19 @@ public record Reading(Request request, OperatingPoint point, Lanes lanes) {
         return point.position().isPresent()
                 ? new Setting.AtKnob(point.position().getAsDouble())
                 : new Setting.AtResistance(point.rampOhms());
+    }
+
+    /** Why the firing line is not exactly where it was wanted, if it is not. */
+    public Optional<String> remark() {
+        if (!(request.setting() instanceof Setting.AtAngle asked) || firingRad().isEmpty()) {
+            return Optional.empty();
+        }
+        boolean there = Math.abs(asked.rad() - firingRad().getAsDouble()) < THERE_RAD;
+        return there
+                ? Optional.empty()
+                : Optional.of("No resistance fires at exactly " + Figures.degrees(asked.rad())
+                        + ": the angle jumps there, because one pulse more in the half cycle before leaves another charge."
+                        + " This is the nearest.");
     }
 
     /** Firing angle, rad; empty where the thyristor stays off. */
