@@ -52,7 +52,8 @@ public final class KnobSearch {
      * @return ohms; empty where no R_E fires within three degrees of it
      */
     public static OptionalDouble nearestRampOhmsForAngle(Design design, Condition condition, double firingRad) {
-        UnivariateFunction over = ohms -> (firstFiringRad(design, Firing.solve(design, condition, ohms)) - firingRad) / Math.PI;
+        UnivariateFunction over =
+                ohms -> (firstFiringRad(design, Firing.solve(design, condition, ohms)) - firingRad) / Math.PI;
         OptionalDouble root = root(guessOhms(design, condition, firingRad), over);
         if (root.isEmpty()) {
             return root;
@@ -190,7 +191,8 @@ public final class KnobSearch {
         if (atLow > 0 || atHigh < 0) {
             return OptionalDouble.empty();
         }
-        return OptionalDouble.of(new BrentSolver(LOG_ACCURACY).solve(TRIALS, log -> over.value(Math.exp(log)), low, high));
+        return OptionalDouble.of(
+                new BrentSolver(LOG_ACCURACY).solve(TRIALS, log -> over.value(Math.exp(log)), low, high));
     }
 
     /** A jump through zero (from firing to silent) is no root: the thyristor fires on one side of it only. */

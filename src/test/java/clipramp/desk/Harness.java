@@ -121,7 +121,8 @@ final class Harness implements AutoCloseable {
     }
 
     Harness settle() {
-        await(() -> model.draft().isOpen() && !model.isBusy() && model.judgement().isPresent());
+        await(() ->
+                model.draft().isOpen() && !model.isBusy() && model.judgement().isPresent());
         await(() -> true);
         return this;
     }
@@ -147,7 +148,8 @@ final class Harness implements AutoCloseable {
             List<? extends MenuItem> items = bar.getMenus();
             for (String word : words) {
                 MenuItem item = items.stream()
-                        .filter(i -> i.getText() != null && word.equals(i.getText().replace("_", "")))
+                        .filter(i ->
+                                i.getText() != null && word.equals(i.getText().replace("_", "")))
                         .findFirst()
                         .orElseThrow(() -> new AssertionError("no menu " + word));
                 if (item instanceof Menu menu) {

@@ -23,8 +23,8 @@ import java.util.stream.Collectors;
  */
 public final class Kills {
     private static final String EDITED = "edited ";
-    private static final List<String> HEADLESS = List.of(
-            "glass.platform", "monocle.platform", "prism.order", "java.awt.headless", "headless.geometry");
+    private static final List<String> HEADLESS =
+            List.of("glass.platform", "monocle.platform", "prism.order", "java.awt.headless", "headless.geometry");
 
     private Kills() {}
 
@@ -56,8 +56,8 @@ public final class Kills {
     }
 
     private static boolean survives(Path home, int edits, int delayMillis) throws IOException, InterruptedException {
-        List<String> command = new ArrayList<>(List.of(
-                Path.of(System.getProperty("java.home"), "bin", "java").toString(), "-XX:TieredStopAtLevel=1"));
+        List<String> command = new ArrayList<>(
+                List.of(Path.of(System.getProperty("java.home"), "bin", "java").toString(), "-XX:TieredStopAtLevel=1"));
         for (String name : HEADLESS) {
             command.add("-D" + name + "=" + System.getProperty(name));
         }
@@ -96,7 +96,13 @@ public final class Kills {
                     window.model.draft().set("title", "title", title, trouble -> {});
                     return null;
                 });
-                window.await(() -> window.model.draft().sheet().orElseThrow().design().title().equals(title));
+                window.await(() -> window.model
+                        .draft()
+                        .sheet()
+                        .orElseThrow()
+                        .design()
+                        .title()
+                        .equals(title));
                 System.out.println(EDITED + i);
             }
         }

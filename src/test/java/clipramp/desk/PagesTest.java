@@ -22,7 +22,6 @@ import javafx.scene.control.Label;
 import javafx.scene.control.Labeled;
 import javafx.scene.control.MenuBar;
 import javafx.scene.control.ScrollPane;
-import javafx.scene.control.TextField;
 import javafx.scene.control.ToggleButton;
 import javafx.scene.input.KeyCode;
 import javafx.scene.input.KeyEvent;
@@ -148,14 +147,16 @@ class PagesTest {
     void everyTextReadsOnTheInkThemeToo() throws Exception {
         List<String> faults = new ArrayList<>();
         try (Harness window = Harness.start(home, 1366, 768, 100, Settings.Look.INK)) {
-            everyPage(window, (page, shown) -> Harness.at(() -> {
-                Texts.all(shown.stage.getScene().getRoot()).stream()
-                        .filter(node -> node instanceof Text && isShown(node))
-                        .map(Text.class::cast)
-                        .filter(text -> !text.getText().isBlank())
-                        .forEach(text -> faint(text).ifPresent(fault -> faults.add(page + ": " + fault)));
-                return null;
-            }));
+            everyPage(
+                    window,
+                    (page, shown) -> Harness.at(() -> {
+                        Texts.all(shown.stage.getScene().getRoot()).stream()
+                                .filter(node -> node instanceof Text && isShown(node))
+                                .map(Text.class::cast)
+                                .filter(text -> !text.getText().isBlank())
+                                .forEach(text -> faint(text).ifPresent(fault -> faults.add(page + ": " + fault)));
+                        return null;
+                    }));
         }
         assertThat(faults).isEmpty();
     }
@@ -227,10 +228,16 @@ class PagesTest {
             Color ground = Color.decode(colours.get("ground"));
             Color wash = Color.decode(colours.get("wash"));
             for (String text : List.of("ink", "quiet", "line", "supply", "ramp", "pulse", "load")) {
-                assertThat(contrast(Color.decode(colours.get(text)), ground)).as(palette.name() + " " + text).isGreaterThanOrEqualTo(4.5);
-                assertThat(contrast(Color.decode(colours.get(text)), wash)).as(palette.name() + " " + text + " on wash").isGreaterThanOrEqualTo(4.5);
+                assertThat(contrast(Color.decode(colours.get(text)), ground))
+                        .as(palette.name() + " " + text)
+                        .isGreaterThanOrEqualTo(4.5);
+                assertThat(contrast(Color.decode(colours.get(text)), wash))
+                        .as(palette.name() + " " + text + " on wash")
+                        .isGreaterThanOrEqualTo(4.5);
             }
-            assertThat(contrast(Color.decode(colours.get("axis")), ground)).as(palette.name() + " axis").isGreaterThanOrEqualTo(3);
+            assertThat(contrast(Color.decode(colours.get("axis")), ground))
+                    .as(palette.name() + " axis")
+                    .isGreaterThanOrEqualTo(3);
         }
     }
 
@@ -261,7 +268,8 @@ class PagesTest {
         window.click("#example-drying-cabinet");
         window.settle();
         Harness.at(() -> {
-            assertThat(window.stage.getScene().lookup("#fold-margins").isVisible()).isTrue();
+            assertThat(window.stage.getScene().lookup("#fold-margins").isVisible())
+                    .isTrue();
             assertThat(isShown(window.stage.getScene().lookup("#margins"))).isFalse();
             return null;
         });

@@ -27,7 +27,8 @@ class WindowTest {
     Path home;
 
     private static double degrees(Harness window) {
-        return Math.toDegrees(window.model.bench().reading().orElseThrow().firingRad().orElseThrow());
+        return Math.toDegrees(
+                window.model.bench().reading().orElseThrow().firingRad().orElseThrow());
     }
 
     @Test
@@ -38,7 +39,8 @@ class WindowTest {
             FigurePane pane = (FigurePane) lanes;
             var frame = Harness.at(() -> ((clipramp.figures.LanesFigure) pane.figure())
                     .frame(pane.area().getWidth(), pane.area().getHeight(), pane.style()));
-            double from = frame.xOf(window.model.bench().reading().orElseThrow().firingRad().orElseThrow());
+            double from = frame.xOf(
+                    window.model.bench().reading().orElseThrow().firingRad().orElseThrow());
             double to = frame.xOf(Math.toRadians(90));
             double y = area.getMinY() + area.getHeight() / 2;
             window.robot
@@ -92,11 +94,18 @@ class WindowTest {
     @Test
     void theKnobTurnsByKeyboard() {
         try (Harness window = Harness.start(home).example("drying-cabinet").focus("#knob")) {
-            double watts = window.model.bench().reading().orElseThrow().point().load().watts();
+            double watts =
+                    window.model.bench().reading().orElseThrow().point().load().watts();
             window.robot.push(KeyCode.RIGHT).push(KeyCode.PAGE_UP);
             window.settle();
             assertThat(window.model.bench().position()).isCloseTo(0.61, within(1e-9));
-            assertThat(window.model.bench().reading().orElseThrow().point().load().watts())
+            assertThat(window.model
+                            .bench()
+                            .reading()
+                            .orElseThrow()
+                            .point()
+                            .load()
+                            .watts())
                     .isGreaterThan(watts);
             assertThat(window.find("#position", Label.class).getText()).isEqualTo("61.0 %");
             window.robot.push(KeyCode.HOME);
@@ -127,7 +136,8 @@ class WindowTest {
             window.click("#tab-parts");
             window.type("#slot-ramp-capacitor", "0,1 µF ±10 % 63 V");
             assertThat(capacitor(window)).isEqualTo(100e-9);
-            assertThat(window.find("#slot-ramp-capacitor", TextField.class).getText()).isEqualTo("0.1 µF ±10 % 63 V");
+            assertThat(window.find("#slot-ramp-capacitor", TextField.class).getText())
+                    .isEqualTo("0.1 µF ±10 % 63 V");
             window.robot.push(KeyCode.UP);
             window.settle();
             assertThat(capacitor(window)).isEqualTo(120e-9);
@@ -153,7 +163,14 @@ class WindowTest {
     }
 
     private static double capacitor(Harness window) {
-        return window.model.draft().sheet().orElseThrow().design().ramp().capacitor().value();
+        return window.model
+                .draft()
+                .sheet()
+                .orElseThrow()
+                .design()
+                .ramp()
+                .capacitor()
+                .value();
     }
 
     @Test
@@ -184,7 +201,8 @@ class WindowTest {
                 return null;
             });
             window.settle();
-            assertThat(window.find("#slot-clip-dropper", TextField.class).isFocused()).isTrue();
+            assertThat(window.find("#slot-clip-dropper", TextField.class).isFocused())
+                    .isTrue();
         }
     }
 
@@ -228,7 +246,9 @@ class WindowTest {
             window.ask.answer = file;
             window.click("#start-open");
             Node dialog = window.find("#dialog-trouble", Node.class);
-            assertThat(Texts.of(dialog)).contains("bad.yaml:2:", "line.voltage", "230 A").doesNotContain("Exception");
+            assertThat(Texts.of(dialog))
+                    .contains("bad.yaml:2:", "line.voltage", "230 A")
+                    .doesNotContain("Exception");
         }
     }
 
@@ -274,7 +294,14 @@ class WindowTest {
             window.await(() -> window.stage.getScene().lookup("#slot-line-voltage") != null);
             window.click("#station-next");
             window.type("#slot-clip-dropper", "12k 5% 17 W");
-            assertThat(window.model.draft().sheet().orElseThrow().design().clip().dropper().value())
+            assertThat(window.model
+                            .draft()
+                            .sheet()
+                            .orElseThrow()
+                            .design()
+                            .clip()
+                            .dropper()
+                            .value())
                     .isEqualTo(12e3);
         }
     }

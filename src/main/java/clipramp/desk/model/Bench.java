@@ -104,8 +104,8 @@ public final class Bench {
 
     /** Moves the firing line from where it is. */
     public void fireLaterBy(double rad) {
-        double from = aimedRad.orElseGet(
-                () -> reading.map(r -> r.firingRad().orElse(Math.PI / 2)).orElse(Math.PI / 2));
+        double from = aimedRad.orElseGet(() ->
+                reading.map(r -> r.firingRad().orElse(Math.PI / 2)).orElse(Math.PI / 2));
         fireAt(Math.min(Math.PI, Math.max(0, from + rad)));
     }
 
