@@ -424,9 +424,10 @@ public final class SwiftStepper {
                 double z = -lambda * step;
                 double y = w * step;
                 double yy = y * y;
-                double turnSine = y * (1 - yy * (1. / 6) * (1 - yy * (1. / 20)));
-                double turnCosine = 1 - yy * (1. / 2) * (1 - yy * (1. / 12));
-                nowX *= 1 + z * (1 + z * (1. / 2) * (1 + z * (1. / 3) * (1 + z * (1. / 4) * (1 + z * (1. / 5)))));
+                double zz = z * z;
+                double turnSine = y - y * yy * (1. / 6 - yy * (1. / 120));
+                double turnCosine = 1 - yy * (0.5 - yy * (1. / 24));
+                nowX *= 1 + z + zz * (0.5 + z * (1. / 6)) + zz * zz * (1. / 24 + z * (1. / 120));
                 double turned = nowS * turnCosine + nowC * turnSine;
                 nowC = nowC * turnCosine - nowS * turnSine;
                 nowS = turned;

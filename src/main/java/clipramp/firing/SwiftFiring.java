@@ -16,8 +16,8 @@ import clipramp.engine.SwiftStepper;
  * pulse across the zero, no clipping) is refused and left to {@link Firing}.
  */
 public final class SwiftFiring {
-    /** Error of a firing instant that is let stand, s: 5e-12 of a half cycle at 50 Hz. */
-    private static final double LEFT_SECONDS = 5e-14;
+    /** Error of a firing instant that is let stand, s: 2e-10 of a half cycle at 50 Hz. */
+    private static final double LEFT_SECONDS = 2e-12;
 
     private static final double SAME_VOLTS = 1e-10;
 
@@ -63,6 +63,8 @@ public final class SwiftFiring {
     private boolean latchedOn;
     private boolean endPulse;
     private double clipUntil;
+    /** A number for the order of events of the half cycle just run. */
+    private int course;
     private double residualVolts;
     private Mode residualMode = Mode.OFF;
     private long halves;
@@ -96,6 +98,7 @@ public final class SwiftFiring {
         Mode modeBefore = Mode.STALLED;
         double voltsBefore = 0;
         double endBefore = 0;
+        int courseBefore = 0;
         for (int pass = 0; pass < MOST_PASSES; pass++) {
             if (!run(mode, volts, pass == 0, 0)) {
                 return false;
@@ -116,12 +119,16 @@ public final class SwiftFiring {
                     return false;
                 }
                 double step = (end - volts) / (1 - kept);
-                next = volts + step;
+                // One that ran another course than the one before has no slope in common with it.
+                boolean sameCourse = pass > 0 && course == courseBefore;
+                boolean confirmed = sameCourse && (mode == Mode.ON || pass > 1);
+                next = sameCourse ? volts + step : end;
                 double left = followed ? Math.abs(kept) * step * step * BENT : Math.abs(kept * (end - volts));
-                if (pass > 0 && endMode == mode && Math.abs(step) < NEAR_VOLTS && left * sensitivity() < LEFT_SECONDS) {
+                if (confirmed && endMode == mode && Math.abs(step) < NEAR_VOLTS && left * sensitivity() < LEFT_SECONDS) {
                     return (Double.isNaN(firedSeconds) || fireFrom(mode, next)) && settled(mode, next);
                 }
             }
+            courseBefore = course;
             modeBefore = mode;
             voltsBefore = volts;
             endBefore = end;
@@ -175,12 +182,15 @@ public final class SwiftFiring {
         stalled = false;
         latchedOn = false;
         clipUntil = Double.NEGATIVE_INFINITY;
+        course = 0;
         stepper.start(mode, volts, rough);
         for (int events = 0; events < MOST_EVENTS; events++) {
             boolean clippedBefore = stepper.clips();
             boolean held = stepper.mode() == Mode.STALLED;
             double from = stepper.seconds();
             Event event = stepper.advance();
+            // Counted from the supply's first clipping on: around the zero the order depends on the residual itself.
+            course = course == 0 ? (event == Event.ZENER ? 1 : 0) : 31 * course + event.ordinal();
             if (watch != Watch.NONE) {
                 follow(event);
             }
