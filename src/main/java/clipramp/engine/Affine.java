@@ -10,6 +10,8 @@ final class Affine {
     double source;
     double sourceSlope;
     double constant;
+    /** Size of what has cancelled in the constant, which rounds like that. */
+    double cancelled;
 
     void set(double ofRamp, double ofSource, double offset) {
         ramp = ofRamp;
@@ -17,6 +19,7 @@ final class Affine {
         source = ofSource;
         sourceSlope = 0;
         constant = offset;
+        cancelled = 0;
     }
 
     void copy(Affine other) {
@@ -25,10 +28,17 @@ final class Affine {
         source = other.source;
         sourceSlope = other.sourceSlope;
         constant = other.constant;
+        cancelled = other.cancelled;
     }
 
     void zero() {
         set(0, 0, 0);
+    }
+
+    /** Takes a level off, which may leave next to nothing of the constant. */
+    void below(double level) {
+        constant -= level;
+        cancelled = Math.abs(level);
     }
 
     /** Adds a multiple of another form. */

@@ -16,7 +16,7 @@ final class EventForms {
     /** The zener starts and stops at V_S = V_Z0. */
     static void zener(Network n, Piece piece, Affine form) {
         form.copy(piece.supply);
-        form.constant -= n.zenerKneeVolts;
+        form.below(n.zenerKneeVolts);
         if (piece.clips) {
             form.negate();
         }
@@ -25,7 +25,7 @@ final class EventForms {
     /** The gate junction starts and stops at v_GK = V_G0. */
     static void gate(Network n, Piece piece, Affine form) {
         form.copy(piece.gate);
-        form.constant -= n.gateKneeVolts;
+        form.below(n.gateKneeVolts);
         if (piece.gateConducts) {
             form.negate();
         }
@@ -54,7 +54,7 @@ final class EventForms {
     /** Gate current falls to a level, A: v_GK falls to V_G0 + level r_G. */
     static void gateFallsTo(Network n, Piece piece, double amps, Affine form) {
         form.copy(piece.gate);
-        form.constant -= n.gateKneeVolts + amps * n.gateSlopeOhms;
+        form.below(n.gateKneeVolts + amps * n.gateSlopeOhms);
         form.negate();
     }
 }

@@ -31,8 +31,9 @@ final class FirstCrossing {
         }
         double time = from;
         double value = piece.value(form);
-        if (value >= -ROUNDING * piece.magnitude(form)) {
-            if (value > ROUNDING * piece.magnitude(form) || piece.slope(form) >= 0) {
+        double rounding = ROUNDING * piece.magnitude(form);
+        if (value >= -rounding) {
+            if (value > rounding || rises(piece, form)) {
                 return time;
             }
             value = 0;
@@ -56,6 +57,12 @@ final class FirstCrossing {
             }
         }
         throw new ArithmeticException("no end to the search for a crossing from " + from + " s");
+    }
+
+    /** Whether a form that stands at zero may rise at once; one that stays at zero (nothing charged, no supply) does not. */
+    private static boolean rises(Piece piece, Affine form) {
+        double slope = piece.slope(form);
+        return slope > 0 || slope == 0 && piece.bendBound(form) > 0;
     }
 
     /** First positive root of value + slope h + bend h²/2, value at or under 0; POSITIVE_INFINITY for none. */

@@ -259,7 +259,8 @@ public final class Piece {
                 + Math.abs(form.flux * fluxAmps)
                 + Math.abs(form.source) * (Math.abs(sourceVolts) + 2 * Math.abs(wave.dropVolts))
                 + Math.abs(form.sourceSlope * sourceSlope)
-                + Math.abs(form.constant);
+                + Math.abs(form.constant)
+                + form.cancelled;
     }
 
     /** V_C where last looked at, V. */
@@ -379,8 +380,8 @@ public final class Piece {
         Affine form = new Affine();
         double sign = rising ? 1 : -1;
         double level = n.gateKneeVolts + amps * n.gateSlopeOhms;
-        form.set(0, 0, -sign * level);
         form.add(sign, gate);
+        form.below(sign * level);
         return FirstCrossing.after(this, form, from, limit);
     }
 

@@ -18,6 +18,13 @@ public final class Stepper {
     /** By how much more than the valley current a pulse must begin with, as a share of it. */
     private static final double VALLEY_ROUNDING = 1e-9;
 
+    /**
+     * A branch that has just switched is asked again after this part of the half cycle: what it switched by and what it
+     * is asked by now round differently, and where next to no resistance stands against much (the books' ideal clip)
+     * would switch it to and fro for ever. A thousandth of the accuracy that event times have.
+     */
+    private static final double REST_SHARE = 1e-9;
+
     private final Network n;
     private final Piece piece = new Piece();
     private final Piece trial = new Piece();
@@ -32,6 +39,9 @@ public final class Stepper {
     private double seconds;
     private double rampVolts;
     private double fluxAmps;
+    private double rectifierSwitched;
+    private double zenerSwitched;
+    private double gateSwitched;
 
     public Stepper(Network network) {
         n = network;
@@ -44,6 +54,7 @@ public final class Stepper {
         seconds = 0;
         rampVolts = startRampVolts;
         fluxAmps = startFluxAmps;
+        nothingSwitched();
         settle();
     }
 
@@ -65,6 +76,13 @@ public final class Stepper {
         seconds = nowSeconds;
         rampVolts = nowRampVolts;
         fluxAmps = 0;
+        nothingSwitched();
+    }
+
+    private void nothingSwitched() {
+        rectifierSwitched = Double.NEGATIVE_INFINITY;
+        zenerSwitched = Double.NEGATIVE_INFINITY;
+        gateSwitched = Double.NEGATIVE_INFINITY;
     }
 
     /** Puts another source behind the dropper from here on: the thyristor takes the supply away or gives it back. */
@@ -158,9 +176,18 @@ public final class Stepper {
 
     private Event pass(Event event) {
         switch (event) {
-            case RECTIFIER -> rectifies = !rectifies;
-            case ZENER -> clips = !clips;
-            case GATE -> gateConducts = !gateConducts;
+            case RECTIFIER -> {
+                rectifies = !rectifies;
+                rectifierSwitched = seconds;
+            }
+            case ZENER -> {
+                clips = !clips;
+                zenerSwitched = seconds;
+            }
+            case GATE -> {
+                gateConducts = !gateConducts;
+                gateSwitched = seconds;
+            }
             case CLAMP -> clamps = !clamps;
             case UNSTALLS -> mode = Mode.OFF;
             case VALLEY -> {
@@ -190,19 +217,24 @@ public final class Stepper {
         return FirstCrossing.after(piece, form, seconds, limit);
     }
 
+    private double searchAfterRest(double switched, double limit) {
+        double from = switched == seconds ? seconds + REST_SHARE * wave.seconds() : seconds;
+        return from < limit ? FirstCrossing.after(piece, form, from, limit) : Double.POSITIVE_INFINITY;
+    }
+
     private double rectifierSwitches(double limit) {
         EventForms.rectifier(piece, form);
-        return search(limit);
+        return searchAfterRest(rectifierSwitched, limit);
     }
 
     private double zenerSwitches(double limit) {
         EventForms.zener(n, piece, form);
-        return search(limit);
+        return searchAfterRest(zenerSwitched, limit);
     }
 
     private double gateSwitches(double limit) {
         EventForms.gate(n, piece, form);
-        return search(limit);
+        return searchAfterRest(gateSwitched, limit);
     }
 
     private double clampSwitches(double limit) {

@@ -6,6 +6,9 @@ import clipramp.engine.PieceQuadrature;
 
 /** Measures one pulse while the circuit runs through it. */
 final class PulseMeter {
+    /** Part of a piece that is passed over after each crossing of the trigger current. */
+    private static final double REST_SHARE = 1e-9;
+
     private final Network n;
     private final int half;
     private final double startSeconds;
@@ -78,13 +81,15 @@ final class PulseMeter {
 
     private void above(Piece piece, double from, double to, double offset) {
         double time = from;
+        double onward = from;
         piece.look(from);
         boolean above = piece.gateAmps(n) >= n.triggerAmps;
         while (true) {
             if (above && Double.isNaN(aboveSince)) {
                 aboveSince = time + offset;
             }
-            double next = piece.gateReaches(n, n.triggerAmps, !above, time, to);
+            double next =
+                    onward < to ? piece.gateReaches(n, n.triggerAmps, !above, onward, to) : Double.POSITIVE_INFINITY;
             if (above) {
                 span(Math.min(next, to) + offset);
             }
@@ -96,6 +101,8 @@ final class PulseMeter {
             }
             above = !above;
             time = next;
+            // Past the crossing just found: where rounding leaves the current, it could be found for ever.
+            onward = next + REST_SHARE * (to - from);
         }
     }
 
