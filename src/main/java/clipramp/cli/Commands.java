@@ -23,6 +23,7 @@ final class Commands {
             new Command("map", "FILE", "knob position to firing angle, load volts and watts", MapCommand::new),
             new Command("trace", "FILE", "the half cycle's waveforms at one knob position", TraceCommand::new),
             new Command("record", "FILE --out=OUT.pdf", "the design record as PDF", RecordCommand::new),
+            new Command("size", "FILE", "from what is wanted to preferred values", SizeCommand::new),
             new Command("new", "--out=FILE", "a commented design to start from", NewCommand::new),
             new Command("parts", "[ID]", "the profiles; one of them with its sources", PartsCommand::new),
             new Command("explain", "KEY", "what a design key or a margin means", ExplainCommand::new),

@@ -23,8 +23,12 @@ final class Inputs {
      * @param library where profiles are looked for
      */
     static LoadedDesign load(Session session, String file, List<String> overrides, ProfileLibrary library) {
-        Source source = file.equals(STANDARD_INPUT) ? fromStandardInput(session) : fromFile(path(file));
-        return DesignFiles.load(source, overrides, library);
+        return DesignFiles.load(source(session, file), overrides, library);
+    }
+
+    /** A design's text; - for standard input. */
+    static Source source(Session session, String file) {
+        return file.equals(STANDARD_INPUT) ? fromStandardInput(session) : fromFile(path(file));
     }
 
     /** Where the profiles of a design are looked for: beside it too, unless it comes from standard input. */

@@ -242,7 +242,7 @@ public final class DesignWriter {
         return text.text();
     }
 
-    private static String transformer(PulseTransformer transformer) {
+    static String transformer(PulseTransformer transformer) {
         return new FlowText()
                 .quantity("ratio", transformer.ratio(), Unit.NUMBER)
                 .raw("secondaries", String.valueOf(transformer.secondaries()))

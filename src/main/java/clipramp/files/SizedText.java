@@ -1,0 +1,71 @@
+package clipramp.files;
+
+import clipramp.circuit.Design;
+import clipramp.circuit.GateDrive;
+import clipramp.circuit.Part;
+import clipramp.circuit.PulseTransformer;
+import clipramp.circuit.Trigger.ProgrammableTrigger;
+import clipramp.circuit.Trigger.UnijunctionTrigger;
+import clipramp.sizing.OpenPart;
+import clipramp.units.QuantityText;
+import clipramp.units.Unit;
+import java.util.Optional;
+import java.util.Set;
+
+/** Writes chosen parts into the text of a request, which keeps everything else as its author wrote it. */
+public final class SizedText {
+    private SizedText() {}
+
+    /** The request's text with every open part as the design has it. */
+    public static DesignText of(PartialDesign request, Design design) {
+        return of(request.text(), request.open(), design);
+    }
+
+    /** A text with the given parts as the design has them. */
+    public static DesignText of(DesignText text, Set<OpenPart> parts, Design design) {
+        DesignText changed = text;
+        for (OpenPart part : parts) {
+            Optional<String> value = value(part, design);
+            if (value.isPresent()) {
+                changed = changed.withValue(part.key(), value.get());
+            }
+        }
+        return changed;
+    }
+
+    /** An open part's value as a design file has it; empty where the design has no such part. */
+    public static Optional<String> value(OpenPart part, Design design) {
+        GateDrive gate = design.gate();
+        return switch (part) {
+            case ZENER -> Optional.of(design.clip().zener().id());
+            case DROPPER -> ohms(design.clip().dropper());
+            case CAPACITOR -> Optional.of(FlowText.partText(design.ramp().capacitor(), Unit.FARAD));
+            case FIXED -> ohms(design.ramp().fixed());
+            case TRACK -> design.ramp().pot().flatMap(p -> ohms(p.track()));
+            case TRIGGER_DEVICE -> Optional.of(design.trigger().deviceId());
+            case BASE_ONE -> ohms(design.trigger().baseOne());
+            case BASE_TWO ->
+                design.trigger() instanceof UnijunctionTrigger u ? ohms(u.baseTwo()) : Optional.empty();
+            case UPPER -> design.trigger() instanceof ProgrammableTrigger p ? ohms(p.upper()) : Optional.empty();
+            case LOWER -> design.trigger() instanceof ProgrammableTrigger p ? ohms(p.lower()) : Optional.empty();
+            case SERIES -> ohms(gate.series());
+            case SHUNT -> gate.shunt().flatMap(SizedText::ohms);
+            case TRANSFORMER -> gate.transformer().map(SizedText::transformer);
+            case THYRISTOR -> Optional.of(design.thyristor().device().id());
+            case SINK -> {
+                var sink = design.thyristor().caseToAmbientKelvinPerWatt();
+                yield sink.isPresent()
+                        ? Optional.of(QuantityText.exact(sink.getAsDouble(), Unit.KELVIN_PER_WATT))
+                        : Optional.empty();
+            }
+        };
+    }
+
+    private static Optional<String> ohms(Part part) {
+        return Optional.of(FlowText.partText(part, Unit.OHM));
+    }
+
+    private static String transformer(PulseTransformer transformer) {
+        return DesignWriter.transformer(transformer);
+    }
+}

@@ -1,0 +1,73 @@
+package clipramp.sizing;
+
+import clipramp.circuit.Design;
+import clipramp.margins.Margin;
+import clipramp.margins.Verdict;
+import clipramp.sizing.Search.Judged;
+import clipramp.sizing.SizingAnswer.Conflict;
+import clipramp.sizing.SizingAnswer.Outcome;
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+
+/** From what is wanted to preferred values. */
+public final class Sizing {
+    private Sizing() {}
+
+    /**
+     * Chooses every open part: starts from published relations, then searches preferred values on the exact engine. No
+     * clock and no chance: the same request gives the same design.
+     *
+     * @param request what is wanted, decided and open
+     * @throws clipramp.circuit.RefusedCircuit where the decided parts are unsound
+     * @throws clipramp.power.UnsupportedLoadException for a load that cannot be solved
+     */
+    public static SizingAnswer propose(SizingRequest request) {
+        Search search = new Search(request);
+        Judged best = search.polished(search.climb(Start.of(request)));
+        List<Margin> corners = best.grade().holds() ? CornerUnits.failures(best.design()) : List.of();
+        Outcome outcome = !best.grade().holds()
+                ? Outcome.NOTHING
+                : corners.isEmpty() ? Outcome.WORST_CASE : Outcome.NOMINAL;
+        return new SizingAnswer(
+                best.design(),
+                best.check(),
+                outcome,
+                corners,
+                best.timing().yield(),
+                best.timing().deadTravel(),
+                Grade.watts(best.check().dissipation()),
+                conflicts(best, search.all()),
+                search.all().size());
+    }
+
+    private static List<Conflict> conflicts(Judged best, List<Judged> all) {
+        List<Conflict> conflicts = new ArrayList<>();
+        for (Margin margin : failing(best)) {
+            List<String> with = all.stream()
+                    .filter(j -> failing(j).stream().noneMatch(m -> m.kind() == margin.kind()))
+                    .min(Comparator.comparing(Judged::grade))
+                    .map(j -> failing(j).stream().map(Margin::name).toList())
+                    .orElse(List.of());
+            conflicts.add(new Conflict(margin, with, nearest(margin)));
+        }
+        return conflicts;
+    }
+
+    private static List<Margin> failing(Judged judged) {
+        return judged.check().margins().stream()
+                .filter(m -> m.verdict() == Verdict.FAILS)
+                .toList();
+    }
+
+    private static String nearest(Margin margin) {
+        return "The nearest that can be met: " + Amounts.of(margin.offered(), margin.unit()) + " in place of "
+                + Amounts.of(margin.demand(), margin.unit()) + " (" + margin.condition() + ").";
+    }
+
+    /** The best of a request's designs, for comparison with other ways of finding it. */
+    static Design best(SizingRequest request) {
+        Search search = new Search(request);
+        return search.polished(search.climb(Start.of(request))).design();
+    }
+}
