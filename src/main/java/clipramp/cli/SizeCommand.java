@@ -42,7 +42,8 @@ final class SizeCommand implements Callable<Integer> {
 
     @Parameters(
             paramLabel = "FILE",
-            description = "design file: line, stage, load, wanted, and the parts that are decided; - for standard input")
+            description =
+                    "design file: line, stage, load, wanted, and the parts that are decided; - for standard input")
     String file = "";
 
     @Option(
@@ -50,7 +51,8 @@ final class SizeCommand implements Callable<Integer> {
             paramLabel = "PARTS",
             split = ",",
             order = 5,
-            description = "choose these too although FILE gives them: clip, ramp, trigger, bases, gate, thyristor, or keys")
+            description =
+                    "choose these too although FILE gives them: clip, ramp, trigger, bases, gate, thyristor, or keys")
     List<String> free = List.of();
 
     @Option(
@@ -127,8 +129,7 @@ final class SizeCommand implements Callable<Integer> {
             int equals = setting.indexOf('=');
             if (equals <= 0 || equals == setting.length() - 1) {
                 throw Problems.refused(
-                        "--with",
-                        "read \"" + setting + "\"; expected key=value, such as ramp.capacitor=220 nF.");
+                        "--with", "read \"" + setting + "\"; expected key=value, such as ramp.capacitor=220 nF.");
             }
             text = text.withValue(
                     setting.substring(0, equals).strip(),
@@ -148,8 +149,8 @@ final class SizeCommand implements Callable<Integer> {
         Set<OpenPart> parts = EnumSet.noneOf(OpenPart.class);
         for (String word : words) {
             parts.addAll(OpenPart.named(word.strip())
-                    .orElseThrow(() -> Problems.unknown(
-                            option, word.strip(), "is no part that size chooses", OpenPart.words())));
+                    .orElseThrow(() ->
+                            Problems.unknown(option, word.strip(), "is no part that size chooses", OpenPart.words())));
         }
         return parts;
     }

@@ -33,11 +33,17 @@ final class SizeJson {
                     .put("deadTravel", answer.deadTravel())
                     .put("heatWatts", answer.watts())
                     .put("candidates", answer.candidates())
-                    .putObjects("parts", reasons, (part, r) -> part.put("key", r.part().key())
-                            .put("value", SizedText.value(r.part(), answer.design()).orElse(""))
-                            .put("relation", r.relation())
-                            .put("up", r.up())
-                            .put("down", r.down()))
+                    .putObjects(
+                            "parts",
+                            reasons,
+                            (part, r) -> part.put("key", r.part().key())
+                                    .put(
+                                            "value",
+                                            SizedText.value(r.part(), answer.design())
+                                                    .orElse(""))
+                                    .put("relation", r.relation())
+                                    .put("up", r.up())
+                                    .put("down", r.down()))
                     .putWords(
                             "cornerFailures",
                             answer.cornerFailures().stream().map(Margin::id).toList())

@@ -73,7 +73,8 @@ final class SizeText {
     }
 
     private void parts(List<Reason> reasons) {
-        TextTable table = new TextTable(out.spelling(), "  ").column(Align.LEFT, "Chosen").column(Align.LEFT, "");
+        TextTable table =
+                new TextTable(out.spelling(), "  ").column(Align.LEFT, "Chosen").column(Align.LEFT, "");
         reasons.forEach(r -> table.row(
                 r.part().key(), SizedText.value(r.part(), answer.design()).orElse(Shown.NONE)));
         out.lines(table.lines());

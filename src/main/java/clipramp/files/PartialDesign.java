@@ -146,11 +146,13 @@ public record PartialDesign(DesignText text, LoadedDesign loaded, Set<OpenPart> 
         }
 
         private void trigger() {
-            boolean divider = value("trigger.upper").isPresent() || value("trigger.lower").isPresent();
+            boolean divider =
+                    value("trigger.upper").isPresent() || value("trigger.lower").isPresent();
             fill(OpenPart.TRIGGER_DEVICE, first(divider ? "programmable-unijunction" : "unijunction"));
             boolean programmable = divider
                     || value("trigger.device")
-                            .filter(id -> library.find("programmable-unijunction", id).isPresent())
+                            .filter(id ->
+                                    library.find("programmable-unijunction", id).isPresent())
                             .isPresent();
             fill(OpenPart.BASE_ONE, "33 Ω ±5 % 0.25 W");
             if (programmable) {

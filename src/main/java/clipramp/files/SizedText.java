@@ -44,8 +44,7 @@ public final class SizedText {
             case TRACK -> design.ramp().pot().flatMap(p -> ohms(p.track()));
             case TRIGGER_DEVICE -> Optional.of(design.trigger().deviceId());
             case BASE_ONE -> ohms(design.trigger().baseOne());
-            case BASE_TWO ->
-                design.trigger() instanceof UnijunctionTrigger u ? ohms(u.baseTwo()) : Optional.empty();
+            case BASE_TWO -> design.trigger() instanceof UnijunctionTrigger u ? ohms(u.baseTwo()) : Optional.empty();
             case UPPER -> design.trigger() instanceof ProgrammableTrigger p ? ohms(p.upper()) : Optional.empty();
             case LOWER -> design.trigger() instanceof ProgrammableTrigger p ? ohms(p.lower()) : Optional.empty();
             case SERIES -> ohms(gate.series());

@@ -32,7 +32,10 @@ final class StockReader {
                 ? devices("unijunction", OpenPart.TRIGGER_DEVICE, d -> ((UnijunctionTrigger) d.trigger()).device())
                 : List.of();
         List<ThyristorDevice> thyristors = open.contains(OpenPart.THYRISTOR)
-                ? devices(triac ? "triac" : "scr", OpenPart.THYRISTOR, d -> d.thyristor().device())
+                ? devices(
+                        triac ? "triac" : "scr",
+                        OpenPart.THYRISTOR,
+                        d -> d.thyristor().device())
                 : List.of();
         List<Zener> zeners = open.contains(OpenPart.ZENER)
                 ? devices("zener", OpenPart.ZENER, d -> d.clip().zener())

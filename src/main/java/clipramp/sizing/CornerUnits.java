@@ -43,18 +43,22 @@ final class CornerUnits {
     }
 
     private static Design at(
-            Design design,
-            UnaryOperator<Part> limit,
-            java.util.function.ToDoubleFunction<Characteristic> figure) {
+            Design design, UnaryOperator<Part> limit, java.util.function.ToDoubleFunction<Characteristic> figure) {
         Ramp ramp = design.ramp();
         Design moved = design.withRamp(new Ramp(
                 limit.apply(ramp.capacitor()),
                 limit.apply(ramp.fixed()),
                 ramp.pot()
                         .map(p -> new Pot(
-                                limit.apply(p.track()), p.endOhms(), p.law(), p.sense(), p.shunt().map(limit)))));
+                                limit.apply(p.track()),
+                                p.endOhms(),
+                                p.law(),
+                                p.sense(),
+                                p.shunt().map(limit)))));
         return design.trigger() instanceof UnijunctionTrigger u
-                ? Edit.device(moved, withStandoff(u.device(), figure.applyAsDouble(u.device().standoff())))
+                ? Edit.device(
+                        moved,
+                        withStandoff(u.device(), figure.applyAsDouble(u.device().standoff())))
                 : moved;
     }
 

@@ -44,8 +44,7 @@ final class Edit {
     }
 
     static Design pot(Design design, Pot pot) {
-        return design.withRamp(
-                new Ramp(design.ramp().capacitor(), design.ramp().fixed(), Optional.of(pot)));
+        return design.withRamp(new Ramp(design.ramp().capacitor(), design.ramp().fixed(), Optional.of(pot)));
     }
 
     static Design track(Design design, Part track) {
@@ -101,8 +100,7 @@ final class Edit {
     }
 
     static Design thyristor(Design design, ThyristorDevice device) {
-        return design.withThyristor(
-                new Thyristor(device, design.thyristor().caseToAmbientKelvinPerWatt()));
+        return design.withThyristor(new Thyristor(device, design.thyristor().caseToAmbientKelvinPerWatt()));
     }
 
     static Design sink(Design design, OptionalDouble caseToAmbient) {

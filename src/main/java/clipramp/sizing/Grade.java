@@ -62,8 +62,8 @@ record Grade(long failing, long tight, long missing, long deadTravel, long heat,
 
     /** The best that a design can come to, before it is judged: with no margin failing and none tight. */
     static Grade atBest(Design design, Timing timing) {
-        Dissipation middle =
-                Firing.dissipation(design, design.nominalCondition(), design.ramp().rampOhms(MID_KNOB));
+        Dissipation middle = Firing.dissipation(
+                design, design.nominalCondition(), design.ramp().rampOhms(MID_KNOB));
         return new Grade(
                 Math.round(THOUSAND * (timing.lack() > CLEAR_LACK ? FAILED : 0)),
                 0,

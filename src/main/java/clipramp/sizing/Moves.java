@@ -53,18 +53,21 @@ final class Moves {
         UnaryOperator<Part> moved = p -> p.withValue(series.step(p.value(), step));
         return switch (part) {
             case ZENER -> zener(request, design, step);
-            case DROPPER -> Optional.of(Edit.dropper(design, moved.apply(design.clip().dropper())));
+            case DROPPER ->
+                Optional.of(Edit.dropper(design, moved.apply(design.clip().dropper())));
             case CAPACITOR -> {
                 Part c = design.ramp().capacitor();
-                yield Optional.of(
-                        Edit.capacitor(design, c.withValue(request.capacitorSeries().step(c.value(), step))));
+                yield Optional.of(Edit.capacitor(
+                        design, c.withValue(request.capacitorSeries().step(c.value(), step))));
             }
             case FIXED ->
                 design.ramp().fixed().value() > 0
-                        ? Optional.of(Edit.fixed(design, moved.apply(design.ramp().fixed())))
+                        ? Optional.of(
+                                Edit.fixed(design, moved.apply(design.ramp().fixed())))
                         : Optional.empty();
             case TRACK -> track(design, step);
-            case BASE_ONE -> Optional.of(Edit.baseOne(design, moved.apply(design.trigger().baseOne())));
+            case BASE_ONE ->
+                Optional.of(Edit.baseOne(design, moved.apply(design.trigger().baseOne())));
             case BASE_TWO ->
                 design.trigger() instanceof UnijunctionTrigger u && u.baseTwo().value() > 0
                         ? Optional.of(Edit.baseTwo(design, moved.apply(u.baseTwo())))
@@ -78,8 +81,7 @@ final class Moves {
                         ? Optional.of(Edit.divider(design, p.upper(), moved.apply(p.lower())))
                         : Optional.empty();
             case SERIES -> series(request, design, step);
-            case SHUNT ->
-                design.gate().shunt().map(p -> Edit.shunt(design, Optional.of(moved.apply(p))));
+            case SHUNT -> design.gate().shunt().map(p -> Edit.shunt(design, Optional.of(moved.apply(p))));
             default -> Optional.empty();
         };
     }
@@ -92,8 +94,7 @@ final class Moves {
                     : Optional.empty();
         }
         double value = request.series().step(part.value(), step);
-        return Optional.of(Edit.series(
-                design, value < LEAST_SERIES * (1 - 1e-9) ? Part.of(0) : part.withValue(value)));
+        return Optional.of(Edit.series(design, value < LEAST_SERIES * (1 - 1e-9) ? Part.of(0) : part.withValue(value)));
     }
 
     private static Optional<Design> track(Design design, int step) {
@@ -139,7 +140,8 @@ final class Moves {
     }
 
     private static double over(Design design) {
-        return Math.max(1, Start.crestVolts(design) - design.clip().zener().volts().nominal());
+        return Math.max(
+                1, Start.crestVolts(design) - design.clip().zener().volts().nominal());
     }
 
     private static List<Design> devices(SizingRequest request, Design design) {

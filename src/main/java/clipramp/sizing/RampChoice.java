@@ -33,8 +33,10 @@ final class RampChoice {
         }
         return ranked.stream()
                 .sorted(Comparator.comparingDouble((Ranked r) -> r.timing().lack())
-                        .thenComparingLong(r -> -Math.round(YIELD_STEPS * r.timing().yield()))
-                        .thenComparingLong(r -> Math.round(TRAVEL_STEPS * r.timing().deadTravel()))
+                        .thenComparingLong(
+                                r -> -Math.round(YIELD_STEPS * r.timing().yield()))
+                        .thenComparingLong(
+                                r -> Math.round(TRAVEL_STEPS * r.timing().deadTravel()))
                         .thenComparingInt(Ranked::values)
                         .thenComparingDouble(r -> -r.design().ramp().fixed().value()))
                 .limit(most)

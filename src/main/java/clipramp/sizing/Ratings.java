@@ -57,7 +57,10 @@ final class Ratings {
     }
 
     private double most(ToDoubleFunction<Dissipation> figure) {
-        return studies.stream().mapToDouble(s -> figure.applyAsDouble(s.dissipation())).max().orElse(0);
+        return studies.stream()
+                .mapToDouble(s -> figure.applyAsDouble(s.dissipation()))
+                .max()
+                .orElse(0);
     }
 
     private Part rated(Part part, double watts) {

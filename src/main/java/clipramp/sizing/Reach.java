@@ -68,8 +68,7 @@ record Reach(
             Solution first = Firing.solve(design, at, early.ohms());
             highestTo = Math.min(highestTo, moved(early, first, angle(design, at, highest, false, EARLY_RAD)));
             if (highest.map(Goal::isBand).orElse(false)) {
-                highestFrom =
-                        Math.max(highestFrom, moved(early, first, angle(design, at, highest, true, EARLY_RAD)));
+                highestFrom = Math.max(highestFrom, moved(early, first, angle(design, at, highest, true, EARLY_RAD)));
             }
             OptionalDouble clips = first.shown().clipFromRad();
             if (clips.isPresent()) {
@@ -134,13 +133,12 @@ record Reach(
         Goal g = goal.get();
         double full = LoadPower.fullWatts(design, at);
         double value = least ? g.to() : g.from();
-        double watts =
-                switch (g.measure()) {
-                    case ANGLE -> Double.NaN;
-                    case FRACTION -> value * full;
-                    case WATTS -> value;
-                    case VOLTS -> value * value / design.load().resistanceOhms();
-                };
+        double watts = switch (g.measure()) {
+            case ANGLE -> Double.NaN;
+            case FRACTION -> value * full;
+            case WATTS -> value;
+            case VOLTS -> value * value / design.load().resistanceOhms();
+        };
         if (Double.isNaN(watts)) {
             return least ? g.from() : g.to();
         }
@@ -182,7 +180,10 @@ record Reach(
     /** A ramp that never arrives counts as arriving as much later as its resistance is too large. */
     private static double firing(Design design, Condition at, double ohms) {
         double rad = firstRad(Firing.solve(design, at, ohms));
-        return Double.isNaN(rad) ? Math.max(Math.PI, at.omega() * ohms * design.ramp().capacitor().value()) : rad;
+        return Double.isNaN(rad)
+                ? Math.max(
+                        Math.PI, at.omega() * ohms * design.ramp().capacitor().value())
+                : rad;
     }
 
     private static double guess(Design design, Condition at, double rad) {

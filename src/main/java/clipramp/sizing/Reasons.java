@@ -22,6 +22,7 @@ import java.util.stream.Collectors;
 public final class Reasons {
     private static final int FIGURES = 3;
     private static final int MOST_NAMED = 2;
+    private static final double LEAST_CHANGE = 0.01;
 
     private final SizingRequest request;
     private final SizingAnswer answer;
@@ -41,8 +42,8 @@ public final class Reasons {
         List<Reason> all = new ArrayList<>();
         for (OpenPart part : request.open()) {
             reasons.relation(part)
-                    .ifPresent(relation ->
-                            all.add(new Reason(part, relation, reasons.neighbour(part, 1), reasons.neighbour(part, -1))));
+                    .ifPresent(relation -> all.add(
+                            new Reason(part, relation, reasons.neighbour(part, 1), reasons.neighbour(part, -1))));
         }
         return all;
     }
@@ -122,7 +123,8 @@ public final class Reasons {
     private Optional<String> divider() {
         return design.trigger() instanceof UnijunctionTrigger
                 ? Optional.empty()
-                : Optional.of("standoff ratio lower/(upper + lower) near 0.6, low in resistance for its valley current");
+                : Optional.of(
+                        "standoff ratio lower/(upper + lower) near 0.6, low in resistance for its valley current");
     }
 
     private String series() {
@@ -153,7 +155,8 @@ public final class Reasons {
         Optional<Design> there = part == OpenPart.THYRISTOR || part == OpenPart.TRIGGER_DEVICE
                 ? device(part, step)
                 : Moves.next(request, design, part, step);
-        return there.map(d -> value(part, d) + ": " + effect(part, Ratings.fit(request, d))).orElse("");
+        return there.map(d -> value(part, d) + ": " + effect(part, Ratings.fit(request, d)))
+                .orElse("");
     }
 
     private Optional<Design> device(OpenPart part, int step) {
@@ -182,10 +185,8 @@ public final class Reasons {
             case TRIGGER_DEVICE -> d.trigger().deviceId();
             case BASE_ONE -> ohms(d.trigger().baseOne());
             case BASE_TWO -> d.trigger() instanceof UnijunctionTrigger u ? ohms(u.baseTwo()) : "";
-            case UPPER ->
-                d.trigger() instanceof clipramp.circuit.Trigger.ProgrammableTrigger p ? ohms(p.upper()) : "";
-            case LOWER ->
-                d.trigger() instanceof clipramp.circuit.Trigger.ProgrammableTrigger p ? ohms(p.lower()) : "";
+            case UPPER -> d.trigger() instanceof clipramp.circuit.Trigger.ProgrammableTrigger p ? ohms(p.upper()) : "";
+            case LOWER -> d.trigger() instanceof clipramp.circuit.Trigger.ProgrammableTrigger p ? ohms(p.lower()) : "";
             case SERIES -> ohms(d.gate().series());
             case SHUNT -> d.gate().shunt().map(Reasons::ohms).orElse("none");
             case THYRISTOR -> d.thyristor().device().id();
@@ -207,7 +208,9 @@ public final class Reasons {
             return more.stream().limit(MOST_NAMED).collect(Collectors.joining(" and "))
                     + (more.size() == 1 ? " fails" : " fail");
         }
-        boolean moves = part.group().equals("ramp") || part.group().equals("clip") || part.group().equals("bases")
+        boolean moves = part.group().equals("ramp")
+                || part.group().equals("clip")
+                || part.group().equals("bases")
                 || part == OpenPart.TRIGGER_DEVICE;
         boolean reaching = moves && part != OpenPart.FIXED && part != OpenPart.TRACK;
         Timing timing = Timing.of(there, reaching ? Reach.of(there) : reach);
@@ -215,9 +218,8 @@ public final class Reasons {
         changed(changes, "yield", timing.yield(), answer.yield(), Unit.FRACTION);
         changed(changes, "dead travel", timing.deadTravel(), answer.deadTravel(), Unit.FRACTION);
         changed(changes, "heat", Grade.watts(check.dissipation()), answer.watts(), Unit.WATT);
-        closest(check).ifPresent(m -> changes.add("closest margin " + m.name() + " "
-                + QuantityText.number(m.ratio().orElse(0) / m.holdsFrom(), FIGURES)));
-        return String.join(", ", changes);
+        mostMoved(part, check).ifPresent(changes::add);
+        return changes.isEmpty() ? "nothing to speak of" : String.join(", ", changes);
     }
 
     private static void changed(List<String> changes, String what, double now, double before, Unit unit) {
@@ -228,8 +230,24 @@ public final class Reasons {
         }
     }
 
-    private static Optional<Margin> closest(Check check) {
-        return check.margins().stream().filter(m -> m.ratio().isPresent()).findFirst();
+    /** Of the margins that the part moves, the one that it moves most. */
+    private Optional<String> mostMoved(OpenPart part, Check check) {
+        String most = "";
+        double farthest = LEAST_CHANGE;
+        for (Margin now : check.margins()) {
+            Optional<Margin> before = answer.check().margins().stream()
+                    .filter(m -> m.kind() == now.kind())
+                    .findFirst();
+            double ratio = now.ratio().orElse(0);
+            double was = before.map(m -> m.ratio().orElse(0)).orElse(0.0);
+            boolean own = now.parts().stream().anyMatch(key -> key.startsWith(part.key()));
+            if (own && ratio > 0 && was > 0 && Math.abs(Math.log(ratio / was)) > farthest) {
+                farthest = Math.abs(Math.log(ratio / was));
+                most = now.name() + " at " + QuantityText.number(ratio, FIGURES) + " of its demand in place of "
+                        + QuantityText.number(was, FIGURES);
+            }
+        }
+        return most.isEmpty() ? Optional.empty() : Optional.of(most);
     }
 
     private static Set<String> failing(Check check) {

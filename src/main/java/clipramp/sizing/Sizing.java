@@ -26,9 +26,8 @@ public final class Sizing {
         Search search = new Search(request);
         Judged best = search.polished(search.climb(Start.of(request)));
         List<Margin> corners = best.grade().holds() ? CornerUnits.failures(best.design()) : List.of();
-        Outcome outcome = !best.grade().holds()
-                ? Outcome.NOTHING
-                : corners.isEmpty() ? Outcome.WORST_CASE : Outcome.NOMINAL;
+        Outcome outcome =
+                !best.grade().holds() ? Outcome.NOTHING : corners.isEmpty() ? Outcome.WORST_CASE : Outcome.NOMINAL;
         return new SizingAnswer(
                 best.design(),
                 best.check(),

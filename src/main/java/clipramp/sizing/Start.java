@@ -67,7 +67,8 @@ final class Start {
 
     /** A resistor of the request's series; the finer series are made to a finer tolerance (IEC 60063). */
     static Part resistor(SizingRequest request, double ohms) {
-        double tolerance = request.series().perDecade() > PreferredSeries.E24.perDecade() ? FINE_TOLERANCE : USUAL_TOLERANCE;
+        double tolerance =
+                request.series().perDecade() > PreferredSeries.E24.perDecade() ? FINE_TOLERANCE : USUAL_TOLERANCE;
         return new Part(
                 request.series().nearest(ohms),
                 new Tolerance(tolerance, tolerance),
@@ -113,7 +114,8 @@ final class Start {
                         || d.gate()
                                 .quadrants()
                                 .keySet()
-                                .containsAll(ThyristorDevice.quadrantsOf(design.gate().polarity())))
+                                .containsAll(ThyristorDevice.quadrantsOf(
+                                        design.gate().polarity())))
                 .sorted(Comparator.comparingDouble(
                                 (ThyristorDevice d) -> d.limits().rmsAmps().orElse(0))
                         .thenComparingDouble(d -> d.gate().trigger().ampsAt(cold))
@@ -161,7 +163,8 @@ final class Start {
         }
         if (request.isOpen(OpenPart.BASE_ONE)) {
             boolean byTransformer = design.gate().coupling() == GateDrive.Coupling.TRANSFORMER;
-            double most = byTransformer ? MOST_BASE_ONE : Math.min(MOST_BASE_ONE, standingOhms(design) / STANDING_RESERVE);
+            double most =
+                    byTransformer ? MOST_BASE_ONE : Math.min(MOST_BASE_ONE, standingOhms(design) / STANDING_RESERVE);
             design = Edit.baseOne(
                     design, resistor(request.series().atMost(Math.max(10, sensitive() && !byTransformer ? 22 : most))));
         }

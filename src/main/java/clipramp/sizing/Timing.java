@@ -43,7 +43,10 @@ record Timing(double yield, double deadTravel, double lack) {
                 + over(reach.clip(), least)
                 + SOFT * over(reach.valley() * RESERVE, least);
         Spreading highEnd = Spreading.of(design, ramp.fixed().tolerance());
-        Tolerance tolerance = ramp.pot().map(Pot::track).map(Part::tolerance).orElse(ramp.fixed().tolerance());
+        Tolerance tolerance = ramp.pot()
+                .map(Pot::track)
+                .map(Part::tolerance)
+                .orElse(ramp.fixed().tolerance());
         Spreading lowEnd = Spreading.of(design, tolerance);
         double slowest = Math.min(
                 highEnd.below(Math.log(reach.highestTo() / high)), lowEnd.below(Math.log(reach.collapse() / most)));
