@@ -201,4 +201,19 @@ public record ThyristorDevice(
                 limits,
                 junctionToCaseKelvinPerWatt);
     }
+
+    /** The same device with another on-state line. */
+    public ThyristorDevice withOnState(OnState newOnState) {
+        return new ThyristorDevice(
+                kind,
+                id,
+                gate,
+                latching,
+                holding,
+                turnOffSeconds,
+                commutating,
+                newOnState,
+                limits,
+                junctionToCaseKelvinPerWatt);
+    }
 }

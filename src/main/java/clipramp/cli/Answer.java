@@ -33,10 +33,14 @@ record Answer(String name, Optional<LoadedDesign> loaded, Optional<Verdict> verd
 
     /** An answer about a design: the reader's notes first, then the judge's. */
     static Answer about(String name, LoadedDesign loaded, Verdict verdict, List<Note> notes) {
-        List<Note> all = new ArrayList<>();
-        loaded.notes().forEach(text -> all.add(new Note("input", text)));
+        List<Note> all = new ArrayList<>(readerNotes(loaded));
         all.addAll(notes);
         return new Answer(name, Optional.of(loaded), Optional.of(verdict), all);
+    }
+
+    /** What the reader of the design has to tell. */
+    static List<Note> readerNotes(LoadedDesign loaded) {
+        return loaded.notes().stream().map(text -> new Note("input", text)).toList();
     }
 
     /** The whole answer as text. */

@@ -22,6 +22,8 @@ final class Commands {
             new Command("check", "FILE", "solve and judge: margins, knob table, pulse, supply", CheckCommand::new),
             new Command("map", "FILE", "knob position to firing angle, load volts and watts", MapCommand::new),
             new Command("trace", "FILE", "the half cycle's waveforms at one knob position", TraceCommand::new),
+            new Command(
+                    "faults", "FILE", "single faults: load, test points, what burns; --seen ranks", FaultsCommand::new),
             new Command("record", "FILE --out=OUT.pdf", "the design record as PDF", RecordCommand::new),
             new Command("size", "FILE", "from what is wanted to preferred values", SizeCommand::new),
             new Command("new", "--out=FILE", "a commented design to start from", NewCommand::new),

@@ -38,10 +38,20 @@ public final class Firing {
      * @param samples about how many instants, 2 or more; events are added to them
      */
     public static Waveforms waveforms(Design design, Condition condition, double rampOhms, int samples) {
-        FiringCase firing = FiringCase.of(design, condition, rampOhms);
+        return waveforms(FiringCase.of(design, condition, rampOhms), samples);
+    }
+
+    /** The same of one unit whose parts were drawn, or changed: R_E is the network's. */
+    public static Waveforms waveforms(Design design, Condition condition, Network network, int samples) {
+        return waveforms(FiringCase.of(design, condition, network), samples);
+    }
+
+    private static Waveforms waveforms(FiringCase firing, int samples) {
         PieceLog log = new PieceLog();
         PeriodicState.solve(firing, log);
-        int shown = design.stage() == Stage.HALF_WAVE ? Math.min(2, log.halves().size()) : 1;
+        int shown = firing.design().stage() == Stage.HALF_WAVE
+                ? Math.min(2, log.halves().size())
+                : 1;
         return Sampler.sample(firing, log.halves().subList(0, shown), 0, samples);
     }
 
@@ -57,12 +67,20 @@ public final class Firing {
 
     /** Periodic state and what it costs the parts, from one solution: a sixth more than {@link #solve} alone. */
     public static Study study(Design design, Condition condition, double rampOhms) {
-        FiringCase firing = FiringCase.of(design, condition, rampOhms);
+        return study(FiringCase.of(design, condition, rampOhms));
+    }
+
+    /** The same of one unit whose parts were drawn, or changed: R_E is the network's. */
+    public static Study study(Design design, Condition condition, Network network) {
+        return study(FiringCase.of(design, condition, network));
+    }
+
+    private static Study study(FiringCase firing) {
         PieceLog log = new PieceLog();
         Solution solution = PeriodicState.solve(firing, log);
         return new Study(
                 solution,
                 Bearing.of(firing, log.halves(), 0),
-                design.gate().transformer().map(t -> TransformerDuty.of(firing.network(), log.halves())));
+                firing.design().gate().transformer().map(t -> TransformerDuty.of(firing.network(), log.halves())));
     }
 }

@@ -65,6 +65,21 @@ public record HalfCycle(
         return -1;
     }
 
+    /** The same in a half cycle of the other sign. */
+    HalfCycle inOtherHalf() {
+        return new HalfCycle(
+                !positive,
+                seconds,
+                startVolts,
+                endVolts,
+                clipFromRad,
+                collapseRad,
+                stalled,
+                latchedOn,
+                pulses,
+                firingIndex);
+    }
+
     /** The same half cycle with other pulses. */
     HalfCycle withPulses(List<Pulse> others) {
         return new HalfCycle(

@@ -1,6 +1,7 @@
 package clipramp.firing;
 
 import clipramp.circuit.Condition;
+import java.util.ArrayList;
 import java.util.List;
 
 /**
@@ -28,6 +29,25 @@ public record Solution(Condition condition, double rampOhms, Settling settling, 
         if (halves.isEmpty()) {
             throw new IllegalArgumentException("a solution has at least one half cycle");
         }
+    }
+
+    /** The same, with every pulse gone that came while the line was negative: what a load feels that gets one half only. */
+    public Solution firingOnlyPositive() {
+        List<HalfCycle> kept = new ArrayList<>();
+        boolean periods = halves.get(0).seconds() > 1.5 * condition.halfCycleSeconds();
+        for (HalfCycle half : halves) {
+            boolean negative = !periods && !half.positive();
+            kept.add(half.withPulses(
+                    negative
+                            ? List.of()
+                            : half.pulses().stream()
+                                    .filter(pulse -> !periods || pulse.startRad() < Math.PI)
+                                    .toList()));
+        }
+        if (!periods && kept.size() == 1) {
+            kept.add(halves.get(0).inOtherHalf().withPulses(List.of()));
+        }
+        return new Solution(condition, rampOhms, settling, kept);
     }
 
     public boolean hunts() {

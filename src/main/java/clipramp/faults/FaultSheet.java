@@ -1,0 +1,32 @@
+package clipramp.faults;
+
+import clipramp.circuit.Condition;
+import clipramp.circuit.Design;
+import java.util.List;
+
+/**
+ * Every single fault of a design and what follows from it.
+ *
+ * @param design the design
+ * @param condition line and temperature
+ * @param healthy the circuit without a fault
+ * @param faults in the order of the signal
+ * @param notComputed faults whose circuit the laws refuse, with the reason
+ */
+public record FaultSheet(
+        Design design,
+        Condition condition,
+        FaultEffect healthy,
+        List<FaultEffect> faults,
+        List<NotComputed> notComputed) {
+    /**
+     * @param fault the fault
+     * @param reason why there is no figure
+     */
+    public record NotComputed(Fault fault, String reason) {}
+
+    public FaultSheet {
+        faults = List.copyOf(faults);
+        notComputed = List.copyOf(notComputed);
+    }
+}

@@ -1,0 +1,51 @@
+package clipramp.faults;
+
+import clipramp.circuit.Condition;
+import clipramp.circuit.Design;
+import clipramp.circuit.Designators;
+import clipramp.circuit.RefusedCircuit;
+import clipramp.firing.Firing;
+import clipramp.firing.Pulse;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+
+/**
+ * Single faults of a design: every part open, shorted, drifted or dead in turn, and what follows, computed by the same
+ * engine as the healthy circuit.
+ */
+public final class Faults {
+    private static final double MID_KNOB = 0.5;
+
+    private Faults() {}
+
+    /**
+     * @param design the design
+     * @param condition line and temperature that all figures hold at
+     */
+    public static FaultSheet of(Design design, Condition condition) {
+        FaultSolver solver = new FaultSolver(design, condition);
+        FaultEffect healthy = solver.healthy();
+        List<FaultEffect> effects = new ArrayList<>();
+        List<FaultSheet.NotComputed> refused = new ArrayList<>();
+        for (Fault fault : list(design, condition)) {
+            try {
+                effects.add(solver.effect(fault, healthy));
+            } catch (RefusedCircuit | ArithmeticException unsolved) {
+                refused.add(new FaultSheet.NotComputed(fault, String.valueOf(unsolved.getMessage())));
+            }
+        }
+        return new FaultSheet(design, condition, healthy, effects, refused);
+    }
+
+    /** Every single fault that a design's parts can have, in the order of the signal. */
+    static List<Fault> list(Design design, Condition condition) {
+        double midOhms = design.ramp().rampOhms(MID_KNOB);
+        Map<String, String> names = Designators.of(design);
+        Optional<Pulse> pulse = Firing.solve(design, condition, midOhms).shown().shownPulse();
+        List<Fault> all = new ArrayList<>(FiringFaults.of(design, names, midOhms, pulse));
+        all.addAll(PowerFaults.of(design, names));
+        return all;
+    }
+}

@@ -1,0 +1,148 @@
+package clipramp.faults;
+
+import clipramp.circuit.ClipSupply;
+import clipramp.circuit.ClipSupply.Rectifier;
+import clipramp.circuit.ClipSupply.Tap;
+import clipramp.circuit.Design;
+import clipramp.circuit.Stage;
+import clipramp.circuit.ThyristorDevice.Kind;
+import clipramp.circuit.Winding;
+import clipramp.engine.Network;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.function.Consumer;
+
+/** Faults of thyristor, rectifiers and load. */
+final class PowerFaults {
+    /** A trigger current that no pulse reaches, A. */
+    private static final double NEVER_AMPS = 1e6;
+
+    private final Design design;
+    private final Map<String, String> names;
+    private final List<Fault> faults = new ArrayList<>();
+
+    private PowerFaults(Design design, Map<String, String> names) {
+        this.design = design;
+        this.names = names;
+    }
+
+    /**
+     * @param names designators by key
+     */
+    static List<Fault> of(Design design, Map<String, String> names) {
+        PowerFaults all = new PowerFaults(design, names);
+        all.thyristor();
+        all.stageDiodes();
+        all.rectifier();
+        all.load();
+        return all.faults;
+    }
+
+    private Fault fault(String id, String part, How how, String what, Consumer<Network> change) {
+        return Fault.of(id, part, how, what.replace("@", names.getOrDefault(part, part)), change);
+    }
+
+    private boolean fedAcrossThyristor() {
+        return design.clip().tap() == Tap.THYRISTOR;
+    }
+
+    /** What a supply across the thyristor gets once there is no voltage there any more. */
+    private Consumer<Network> unfed() {
+        return fedAcrossThyristor() ? n -> n.dropperOhms = FiringFaults.OPEN_OHMS : n -> {};
+    }
+
+    private void thyristor() {
+        String key = "thyristor.device";
+        boolean pair = design.stage() == Stage.INVERSE_PARALLEL;
+        Fault shorted = fault(
+                        "thyristor-shorted",
+                        key,
+                        How.SHORTED,
+                        pair ? "one of @ shorted" : "thyristor @ shorted",
+                        unfed())
+                .along(LoadPath.THYRISTOR_SHORTED);
+        faults.add(
+                design.stage() == Stage.HALF_WAVE
+                        ? shorted.saying("The load gets both half cycles: more than this stage ever gives.")
+                        : shorted);
+        boolean bothWays = pair || design.thyristor().device().kind() == Kind.TRIAC;
+        if (bothWays) {
+            faults.add(fault(
+                            "thyristor-half-dead",
+                            key,
+                            How.HALF_DEAD,
+                            pair ? "one of @ dead" : "triac @ dead in one direction",
+                            n -> {})
+                    .along(LoadPath.ONE_HALF));
+        }
+        if (!pair) {
+            faults.add(
+                    fault("thyristor-dead", key, How.DEAD, "thyristor @ dead (open)", n -> n.triggerAmps = NEVER_AMPS));
+        }
+    }
+
+    private void stageDiodes() {
+        if (design.stage().bridgeDiodes() == 0) {
+            return;
+        }
+        Fault open = fault("stage-diode-open", "stage-diodes", How.OPEN, "one diode of @ open", n -> {})
+                .along(LoadPath.ONE_HALF);
+        faults.add(design.isSuppliedByStageBridge() ? open.wired(PowerFaults::suppliedInOneHalf) : open);
+        if (design.stage() == Stage.BRIDGE_DC) {
+            faults.add(lineShort("stage-diode-shorted", "stage-diodes"));
+        }
+    }
+
+    /** A shorted diode of a bridge across the line lets its neighbour short the line in every second half cycle. */
+    private Fault lineShort(String id, String part) {
+        return fault(id, part, How.SHORTED, "one diode of @ shorted", n -> n.dropperOhms = FiringFaults.OPEN_OHMS)
+                .along(LoadPath.LINE_SHORTED);
+    }
+
+    private void rectifier() {
+        ClipSupply clip = design.clip();
+        if (design.isSuppliedByStageBridge()) {
+            return;
+        }
+        String key = "clip.rectifier";
+        if (clip.rectifier() == Rectifier.DIODE) {
+            faults.add(fault(
+                    "rectifier-open", key, How.OPEN, "rectifier @ open", n -> n.dropperOhms = FiringFaults.OPEN_OHMS));
+            return;
+        }
+        faults.add(fault("rectifier-open", key, How.OPEN, "one diode of the supply's bridge @ open", n -> {})
+                .wired(PowerFaults::suppliedInOneHalf));
+        if (!clip.isIsolated() && clip.tap() == Tap.LINE) {
+            faults.add(lineShort("rectifier-shorted", key));
+        }
+    }
+
+    private void load() {
+        Consumer<Network> unfed = unfed();
+        faults.add(fault("load-open", "load", How.OPEN, "load @ open", n -> {
+                    unfed.accept(n);
+                    n.triggerAmps = NEVER_AMPS;
+                })
+                .along(LoadPath.LOAD_OPEN));
+    }
+
+    /**
+     * The supply behind a bridge that has lost a diode: one half cycle, still through two diodes. Where the load takes
+     * the positive half only, it is that half that is lost; otherwise positive is only a name.
+     */
+    private static Design suppliedInOneHalf(Design design) {
+        ClipSupply clip = design.clip();
+        boolean loseFed = design.stage() == Stage.HALF_WAVE;
+        Optional<Winding> winding = clip.winding()
+                .map(w -> new Winding(w.primaryVolts(), w.secondaryVolts(), loseFed != w.opposite(), w.lagRad()));
+        return design.withClip(new ClipSupply(
+                clip.tap(),
+                Rectifier.DIODE,
+                Rectifier.BRIDGE.diodesInPath() * clip.diodeDropVolts(),
+                clip.dropper(),
+                clip.zener(),
+                winding));
+    }
+}

@@ -1,0 +1,16 @@
+package clipramp.faults;
+
+/**
+ * What three instruments show at one test point. All isolated: the firing circuit stands at line potential.
+ *
+ * @param dcVolts mean, which a meter on dc shows, V
+ * @param acVolts true rms with the mean taken off, which a true-rms meter on ac shows, V
+ * @param peakVolts value of largest magnitude, which an oscilloscope shows, V
+ */
+public record Reading(double dcVolts, double acVolts, double peakVolts) {
+    static final Reading ZERO = new Reading(0, 0, 0);
+
+    Reading times(double share) {
+        return new Reading(share * dcVolts, share * acVolts, share * peakVolts);
+    }
+}
