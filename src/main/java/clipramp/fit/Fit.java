@@ -1,0 +1,202 @@
+package clipramp.fit;
+
+import clipramp.circuit.Design;
+import clipramp.fit.BenchProblem.Observed;
+import clipramp.fit.Fitted.Knowledge;
+import clipramp.spread.Watch;
+import clipramp.units.Unit;
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+import java.util.OptionalDouble;
+import org.apache.commons.math3.distribution.ChiSquaredDistribution;
+import org.apache.commons.math3.linear.EigenDecomposition;
+import org.apache.commons.math3.linear.MatrixUtils;
+import org.apache.commons.math3.linear.RealMatrix;
+
+/**
+ * From what was read on a bench to what the unit's parts really are.
+ *
+ * <p>Weighted least squares on the exact engine, every reading in its instrument's accuracy, every value of the unit on a
+ * logarithmic scale with a weak prior from the design: normal, its standard deviation half of what lies between the part's
+ * or the sheet's limits (a part bought within them lies within one deviation). A value that the readings do not move so
+ * stays at the drawing's, with the drawing's uncertainty, and is reported as not told. Settings and line voltages that
+ * were read may be off by their own accuracy. Intervals are 95 %, from the linearised covariance.
+ */
+public final class Fit {
+    /** Pairs at least so strongly correlated are told only together. */
+    private static final double TOGETHER = 0.8;
+
+    /** Scatter that good readings show less often than this widens the intervals. */
+    private static final double UNLIKELY = 0.01;
+
+    /** Information over the prior's that counts as telling a direction: half its deviation is left. */
+    private static final double TELLING = 3;
+
+    private Fit() {}
+
+    /**
+     * @param design a sound design
+     * @param readings what was read of one unit built to it
+     * @param watch is told of progress and may cancel
+     * @throws UnsettledFitException where no values can be found
+     * @throws java.util.concurrent.CancellationException where the watch cancelled
+     * @throws clipramp.power.UnsupportedLoadException for load readings of a load that cannot be computed
+     */
+    public static FitResult run(Design design, Readings readings, Watch watch) {
+        BenchProblem problem = new BenchProblem(design, readings);
+        Strangers search = new Strangers(problem, watch);
+        Estimate estimate = search.settled();
+        int freedom = search.freedom(estimate);
+        double squares = estimate.squares();
+        double chance = freedom < 1
+                ? 1
+                : 1 - new ChiSquaredDistribution(null, freedom).cumulativeProbability(squares);
+        double widened = chance < UNLIKELY ? Math.max(1, Math.sqrt(squares / freedom)) : 1;
+        int used = 0;
+        for (int i = 0; i < problem.readingCount(); i++) {
+            used += estimate.used()[i] ? 1 : 0;
+        }
+        int[] active = problem.active();
+        double[] information = information(estimate, active.length);
+        return new FitResult(
+                readings,
+                values(problem, estimate, widened),
+                untouched(problem),
+                together(problem, estimate),
+                residuals(problem, estimate, freedom),
+                new Quality(
+                        readings.count(),
+                        used,
+                        squares,
+                        freedom,
+                        chance,
+                        widened,
+                        (int) java.util.Arrays.stream(information).filter(i -> i >= TELLING).count(),
+                        active.length,
+                        condition(information)));
+    }
+
+    private static List<Fitted> values(BenchProblem problem, Estimate estimate, double widened) {
+        List<Fitted> values = new ArrayList<>();
+        double[] z = problem.wide(estimate.point());
+        double[] kept = new double[z.length];
+        java.util.Arrays.fill(kept, 1);
+        int[] active = problem.active();
+        for (int c = 0; c < active.length; c++) {
+            kept[active[c]] = Math.sqrt(estimate.covariance().getEntry(c, c));
+        }
+        for (int k = 0; k < z.length; k++) {
+            Unknown unknown = problem.unknowns().get(k);
+            double left = Math.min(1, kept[k] * widened);
+            double reach = Accuracy.SIGMAS * left;
+            double from = unknown.at(z[k] - reach);
+            double to = unknown.at(z[k] + reach);
+            Knowledge knowledge = Knowledge.of(left);
+            values.add(new Fitted(
+                    unknown.path(),
+                    unknown.name(),
+                    unknown.unit(),
+                    unknown.nominal(),
+                    unknown.low(),
+                    unknown.high(),
+                    unknown.assumed(),
+                    unknown.at(z[k]),
+                    from,
+                    to,
+                    left,
+                    knowledge,
+                    Fitted.within(unknown.low(), unknown.high(), from, to, knowledge)));
+        }
+        return values;
+    }
+
+    private static List<String> untouched(BenchProblem problem) {
+        List<Integer> active =
+                java.util.Arrays.stream(problem.active()).boxed().toList();
+        List<String> paths = new ArrayList<>();
+        for (int k = 0; k < problem.unknowns().size(); k++) {
+            if (!active.contains(k)) {
+                paths.add(problem.unknowns().get(k).path());
+            }
+        }
+        return paths;
+    }
+
+    private static List<Together> together(BenchProblem problem, Estimate estimate) {
+        int[] active = problem.active();
+        RealMatrix covariance = estimate.covariance();
+        List<Together> pairs = new ArrayList<>();
+        for (int a = 0; a < active.length; a++) {
+            for (int b = a + 1; b < active.length; b++) {
+                double correlation = covariance.getEntry(a, b)
+                        / Math.sqrt(covariance.getEntry(a, a) * covariance.getEntry(b, b));
+                if (Math.abs(correlation) >= TOGETHER) {
+                    pairs.add(new Together(
+                            problem.unknowns().get(active[a]).path(),
+                            problem.unknowns().get(active[b]).path(),
+                            correlation));
+                }
+            }
+        }
+        pairs.sort(Comparator.comparingDouble((Together pair) -> -Math.abs(pair.correlation())));
+        return pairs;
+    }
+
+    /** What the readings add to the prior, along its principal directions: eigenvalues of inverse covariance less one. */
+    private static double[] information(Estimate estimate, int count) {
+        if (count == 0) {
+            return new double[0];
+        }
+        RealMatrix unit = estimate.covariance().getSubMatrix(0, count - 1, 0, count - 1);
+        RealMatrix even = unit.add(unit.transpose()).scalarMultiply(0.5);
+        double[] left = new EigenDecomposition(even).getRealEigenvalues();
+        return java.util.Arrays.stream(left).map(l -> 1 / l - 1).toArray();
+    }
+
+    private static OptionalDouble condition(double[] information) {
+        double most = java.util.Arrays.stream(information).max().orElse(0);
+        double least = java.util.Arrays.stream(information).min().orElse(0);
+        return least > most * 1e-12 && least > 1e-6 ? OptionalDouble.of(Math.sqrt(most / least)) : OptionalDouble.empty();
+    }
+
+    private static List<Residual> residuals(BenchProblem problem, Estimate estimate, int freedom) {
+        List<Residual> residuals = new ArrayList<>();
+        for (int i = 0; i < problem.observed().size(); i++) {
+            residuals.add(residual(problem, estimate, freedom, i));
+        }
+        return residuals;
+    }
+
+    private static Residual residual(BenchProblem problem, Estimate estimate, int freedom, int i) {
+        BenchLine line = problem.line(i);
+        boolean belongs = estimate.used()[i];
+        double deviations = estimate.studentised(i, freedom);
+        double off = estimate.residual()[i];
+        if (i < problem.readingCount()) {
+            Reading reading = problem.reading(i);
+            double shown = reading.value() - off * problem.deviation(i);
+            Meter meter = reading.meter();
+            return new Residual(
+                    line.line(), reading.column(), meter.words(), meter.unit(), reading.value(), shown, deviations, belongs);
+        }
+        if (problem.observed().get(i).reading() == Observed.SETTING) {
+            Setting setting = line.setting();
+            boolean knob = setting.kind() == Setting.Kind.KNOB;
+            double shown = setting.value() - off * setting.accuracy().deviation(setting.value());
+            return new Residual(
+                    line.line(),
+                    setting.column(),
+                    knob ? "knob position" : "ramp resistance",
+                    knob ? Unit.FRACTION : Unit.OHM,
+                    setting.value(),
+                    shown,
+                    deviations,
+                    belongs);
+        }
+        BenchLine.LineVolts volts = line.lineVolts().orElseThrow();
+        double shown = volts.volts() - off * volts.accuracy().deviation(volts.volts());
+        return new Residual(
+                line.line(), volts.column(), "line voltage", Unit.VOLT, volts.volts(), shown, deviations, belongs);
+    }
+}

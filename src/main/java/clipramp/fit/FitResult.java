@@ -1,0 +1,51 @@
+package clipramp.fit;
+
+import java.util.List;
+
+/**
+ * A unit as built.
+ *
+ * @param readings what it was found from
+ * @param values every value that may differ from unit to unit, in the order of the signal
+ * @param untouched paths of values that no reading depends on
+ * @param together pairs that are told only together, strongest first
+ * @param residuals every reading, then what was set, in the order of the lines
+ * @param quality how well it fits
+ */
+public record FitResult(
+        Readings readings,
+        List<Fitted> values,
+        List<String> untouched,
+        List<Together> together,
+        List<Residual> residuals,
+        Quality quality) {
+    /** Path of the pot's law, which is one number here. */
+    public static final String LAW_PATH = "ramp.pot.law";
+
+    public FitResult {
+        values = List.copyOf(values);
+        untouched = List.copyOf(untouched);
+        together = List.copyOf(together);
+        residuals = List.copyOf(residuals);
+    }
+
+    /** Readings and settings that do not belong, farthest off first. */
+    public List<Residual> strangers() {
+        return residuals.stream()
+                .filter(residual -> !residual.belongs())
+                .sorted((a, b) -> Double.compare(Math.abs(b.deviations()), Math.abs(a.deviations())))
+                .toList();
+    }
+
+    /** Values that the readings tell. */
+    public List<Fitted> told() {
+        return values.stream()
+                .filter(value -> value.knowledge() == Fitted.Knowledge.TOLD)
+                .toList();
+    }
+
+    /** The value of a design key. */
+    public java.util.Optional<Fitted> value(String path) {
+        return values.stream().filter(value -> value.path().equals(path)).findFirst();
+    }
+}
