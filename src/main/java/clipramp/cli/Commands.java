@@ -22,6 +22,7 @@ final class Commands {
             new Command("check", "FILE", "solve and judge: margins, knob table, pulse, supply", CheckCommand::new),
             new Command("map", "FILE", "knob position to firing angle, load volts and watts", MapCommand::new),
             new Command("trace", "FILE", "the half cycle's waveforms at one knob position", TraceCommand::new),
+            new Command("fit", "FILE READINGS.csv", "bench readings to the unit's real parts", FitCommand::new),
             new Command(
                     "faults", "FILE", "single faults: load, test points, what burns; --seen ranks", FaultsCommand::new),
             new Command("record", "FILE --out=OUT.pdf", "the design record as PDF", RecordCommand::new),

@@ -3,8 +3,10 @@ package clipramp.cli;
 import clipramp.circuit.Condition;
 import clipramp.circuit.Design;
 import clipramp.files.Conditions;
+import clipramp.files.DesignFiles;
 import clipramp.files.LoadedDesign;
 import clipramp.files.ProfileLibrary;
+import clipramp.files.Source;
 import clipramp.margins.Check;
 import clipramp.margins.Judge;
 import java.util.ArrayList;
@@ -52,6 +54,11 @@ final class DesignOptions {
 
     LoadedDesign load(Session session) {
         return Inputs.load(session, file, overrides, library(session));
+    }
+
+    /** The same from a text that was read already. */
+    LoadedDesign load(Session session, Source source) {
+        return DesignFiles.load(source, overrides, library(session));
     }
 
     /** Where this design's profiles are looked for. */

@@ -3,6 +3,7 @@ package clipramp.cli;
 import clipramp.circuit.RefusedCircuit;
 import clipramp.files.InvalidInputException;
 import clipramp.files.Problem;
+import clipramp.fit.UnsettledFitException;
 import java.io.IOException;
 import java.io.PrintWriter;
 import java.io.StringWriter;
@@ -48,6 +49,8 @@ final class Failures {
             return unusable(List.of(ofOption(refused)));
         } catch (RefusedCircuit refused) {
             return unusable(List.of(Problems.of("", refused.path(), String.valueOf(refused.getMessage()))));
+        } catch (UnsettledFitException refused) {
+            return unusable(List.of(Problems.of("", "readings", String.valueOf(refused.getMessage()))));
         } catch (FileFailure failure) {
             return file(String.valueOf(failure.getMessage()));
         } catch (UncheckedIOException | IOException failure) {

@@ -26,7 +26,7 @@ final class Inputs {
         return DesignFiles.load(source(session, file), overrides, library);
     }
 
-    /** A design's text; - for standard input. */
+    /** A file's text; that of standard input for -. */
     static Source source(Session session, String file) {
         return file.equals(STANDARD_INPUT) ? fromStandardInput(session) : fromFile(path(file));
     }

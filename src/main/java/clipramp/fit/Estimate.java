@@ -14,12 +14,7 @@ import org.apache.commons.math3.linear.RealVector;
  * @param prior squares that the drawing contributes
  */
 record Estimate(
-        double[] point,
-        RealMatrix covariance,
-        RealMatrix jacobian,
-        double[] residual,
-        boolean[] used,
-        double prior) {
+        double[] point, RealMatrix covariance, RealMatrix jacobian, double[] residual, boolean[] used, double prior) {
     /** A residual that keeps less than this share of its reading's variance cannot be tested. */
     private static final double LEAST_CONTROL = 1e-3;
 

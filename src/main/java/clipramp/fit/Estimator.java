@@ -18,17 +18,17 @@ import org.apache.commons.math3.util.Pair;
  * The prior is what keeps a value that no reading moves at the drawing's.
  */
 final class Estimator {
-    /** A value that many prior deviations off is a wrong drawing, not a bad part. */
-    private static final double FARTHEST = 8;
-
     /** Weight that stands for none where dropping a row would leave a column empty. */
     private static final double NEXT_TO_NONE = 1e-3;
 
     /** Corner of Cauchy's loss: 95 % as good as squares where nothing is wrong (Holland and Welsch 1977, from memory). */
     private static final double CAUCHY = 2.385;
 
-    private static final double COST_TOLERANCE = 1e-7;
-    private static final double POINT_TOLERANCE = 1e-5;
+    private static final double COST_TOLERANCE = 1e-5;
+    private static final double POINT_TOLERANCE = 1e-3;
+    /** The robust pass only sorts. */
+    private static final double ROUGHLY = 1e-3;
+
     private static final int MOST_EVALUATIONS = 150;
     private static final int MOST_ITERATIONS = 40;
 
@@ -48,11 +48,25 @@ final class Estimator {
         return estimate(used, optimum(used, start, false));
     }
 
-    /** Loss that grows with the logarithm of a large residual: a first pass that a gross error moves little. */
-    double[] robust(double[] start) {
+    /**
+     * Loss that grows with the logarithm of a large residual: a pass that a gross error moves little. It has more than one
+     * minimum, so it begins at each of several points and keeps the lowest.
+     */
+    double[] robust(double[]... starts) {
         boolean[] all = new boolean[problem.observed().size()];
         java.util.Arrays.fill(all, true);
-        return optimum(all, start, true);
+        Function loss = new Function(all, true);
+        double[] best = starts[0];
+        double lowest = Double.POSITIVE_INFINITY;
+        for (double[] start : starts) {
+            double[] found = optimum(all, start, true);
+            double here = loss.computeValue(found).getNorm();
+            if (here < lowest) {
+                best = found;
+                lowest = here;
+            }
+        }
+        return best;
     }
 
     private double[] optimum(boolean[] used, double[] start, boolean robust) {
@@ -60,11 +74,10 @@ final class Estimator {
             return start;
         }
         int rows = problem.observed().size() + problem.active().length;
-        ParameterValidator within =
-                point -> point.map(z -> Math.max(-FARTHEST, Math.min(FARTHEST, z)));
+        ParameterValidator within = point -> new ArrayRealVector(problem.within(point.toArray()), false);
         LevenbergMarquardtOptimizer optimizer = new LevenbergMarquardtOptimizer()
-                .withCostRelativeTolerance(COST_TOLERANCE)
-                .withParameterRelativeTolerance(POINT_TOLERANCE);
+                .withCostRelativeTolerance(robust ? ROUGHLY : COST_TOLERANCE)
+                .withParameterRelativeTolerance(robust ? ROUGHLY : POINT_TOLERANCE);
         try {
             Optimum optimum = optimizer.optimize(LeastSquaresFactory.create(
                     new Function(used, robust),
@@ -142,8 +155,8 @@ final class Estimator {
 
         @Override
         public RealMatrix computeJacobian(double[] point) {
-            RealMatrix part = problem.jacobian(point);
-            double[] shown = robust ? problem.value(point) : new double[0];
+            double[] shown = problem.value(point);
+            RealMatrix part = problem.roughJacobian(point, shown);
             int rows = part.getRowDimension();
             RealMatrix all = MatrixUtils.createRealMatrix(rows + problem.active().length, point.length);
             for (int i = 0; i < rows; i++) {

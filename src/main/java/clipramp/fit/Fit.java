@@ -11,7 +11,6 @@ import java.util.List;
 import java.util.OptionalDouble;
 import org.apache.commons.math3.distribution.ChiSquaredDistribution;
 import org.apache.commons.math3.linear.EigenDecomposition;
-import org.apache.commons.math3.linear.MatrixUtils;
 import org.apache.commons.math3.linear.RealMatrix;
 
 /**
@@ -49,9 +48,7 @@ public final class Fit {
         Estimate estimate = search.settled();
         int freedom = search.freedom(estimate);
         double squares = estimate.squares();
-        double chance = freedom < 1
-                ? 1
-                : 1 - new ChiSquaredDistribution(null, freedom).cumulativeProbability(squares);
+        double chance = chance(squares, freedom);
         double widened = chance < UNLIKELY ? Math.max(1, Math.sqrt(squares / freedom)) : 1;
         int used = 0;
         for (int i = 0; i < problem.readingCount(); i++) {
@@ -72,9 +69,16 @@ public final class Fit {
                         freedom,
                         chance,
                         widened,
-                        (int) java.util.Arrays.stream(information).filter(i -> i >= TELLING).count(),
+                        (int) java.util.Arrays.stream(information)
+                                .filter(i -> i >= TELLING)
+                                .count(),
                         active.length,
                         condition(information)));
+    }
+
+    /** How often good readings scatter more than that, 0..1. */
+    static double chance(double squares, int freedom) {
+        return freedom < 1 ? 1 : 1 - new ChiSquaredDistribution(null, freedom).cumulativeProbability(squares);
     }
 
     private static List<Fitted> values(BenchProblem problem, Estimate estimate, double widened) {
@@ -112,8 +116,7 @@ public final class Fit {
     }
 
     private static List<String> untouched(BenchProblem problem) {
-        List<Integer> active =
-                java.util.Arrays.stream(problem.active()).boxed().toList();
+        List<Integer> active = java.util.Arrays.stream(problem.active()).boxed().toList();
         List<String> paths = new ArrayList<>();
         for (int k = 0; k < problem.unknowns().size(); k++) {
             if (!active.contains(k)) {
@@ -129,8 +132,8 @@ public final class Fit {
         List<Together> pairs = new ArrayList<>();
         for (int a = 0; a < active.length; a++) {
             for (int b = a + 1; b < active.length; b++) {
-                double correlation = covariance.getEntry(a, b)
-                        / Math.sqrt(covariance.getEntry(a, a) * covariance.getEntry(b, b));
+                double correlation =
+                        covariance.getEntry(a, b) / Math.sqrt(covariance.getEntry(a, a) * covariance.getEntry(b, b));
                 if (Math.abs(correlation) >= TOGETHER) {
                     pairs.add(new Together(
                             problem.unknowns().get(active[a]).path(),
@@ -157,7 +160,9 @@ public final class Fit {
     private static OptionalDouble condition(double[] information) {
         double most = java.util.Arrays.stream(information).max().orElse(0);
         double least = java.util.Arrays.stream(information).min().orElse(0);
-        return least > most * 1e-12 && least > 1e-6 ? OptionalDouble.of(Math.sqrt(most / least)) : OptionalDouble.empty();
+        return least > most * 1e-12 && least > 1e-6
+                ? OptionalDouble.of(Math.sqrt(most / least))
+                : OptionalDouble.empty();
     }
 
     private static List<Residual> residuals(BenchProblem problem, Estimate estimate, int freedom) {
@@ -178,7 +183,14 @@ public final class Fit {
             double shown = reading.value() - off * problem.deviation(i);
             Meter meter = reading.meter();
             return new Residual(
-                    line.line(), reading.column(), meter.words(), meter.unit(), reading.value(), shown, deviations, belongs);
+                    line.line(),
+                    reading.column(),
+                    meter.words(),
+                    meter.unit(),
+                    reading.value(),
+                    shown,
+                    deviations,
+                    belongs);
         }
         if (problem.observed().get(i).reading() == Observed.SETTING) {
             Setting setting = line.setting();

@@ -22,6 +22,9 @@ public record FitResult(
     /** Path of the pot's law, which is one number here. */
     public static final String LAW_PATH = "ramp.pot.law";
 
+    /** Path of the line voltage where nobody read it: of the day, not of the unit. */
+    public static final String LINE_PATH = "line.voltage";
+
     public FitResult {
         values = List.copyOf(values);
         untouched = List.copyOf(untouched);
@@ -42,6 +45,11 @@ public record FitResult(
         return values.stream()
                 .filter(value -> value.knowledge() == Fitted.Knowledge.TOLD)
                 .toList();
+    }
+
+    /** Whether the readings tell anything of the unit itself, the line voltage on the day not counted. */
+    public boolean isTelling() {
+        return told().stream().anyMatch(value -> !value.path().equals(LINE_PATH));
     }
 
     /** The value of a design key. */

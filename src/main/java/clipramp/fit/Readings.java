@@ -1,6 +1,7 @@
 package clipramp.fit;
 
 import java.util.List;
+import java.util.Optional;
 
 /**
  * What was read of one unit in one session.
@@ -22,8 +23,18 @@ public record Readings(String name, double celsius, List<BenchLine> lines) {
         return lines.stream().mapToInt(line -> line.readings().size()).sum();
     }
 
-    /** The same session at another temperature. */
-    public Readings at(double newCelsius) {
-        return new Readings(name, newCelsius, lines);
+    /** The same with this line voltage, rms in V, on every line that has none of its own. */
+    public Readings onLine(double volts) {
+        BenchLine.LineVolts all = new BenchLine.LineVolts(volts, BenchLine.LineVolts.USUAL, "--line");
+        return new Readings(
+                name,
+                celsius,
+                lines.stream()
+                        .map(line -> new BenchLine(
+                                line.line(),
+                                line.setting(),
+                                Optional.of(line.lineVolts().orElse(all)),
+                                line.readings()))
+                        .toList());
     }
 }

@@ -6,7 +6,7 @@ import java.util.concurrent.CancellationException;
 import org.apache.commons.math3.distribution.NormalDistribution;
 
 /**
- * Finds what does not belong. A robust pass first sets suspects aside; least squares over the rest take back, one by one,
+ * Finds what does not belong. Where plain least squares leave a doubt, a robust pass sets suspects aside; least squares over the rest take back, one by one,
  * those that they predict well, and put out, one by one, whatever stands farthest off (data snooping after Baarda, from
  * memory), each time with a new fit.
  */
@@ -16,6 +16,9 @@ final class Strangers {
 
     /** No more than this share of the readings is set aside: beyond it, the drawing is wrong and not the reading. */
     private static final double MOST_SHARE = 0.25;
+
+    /** Scatter that is seen less often than this may hide several that mask each other. */
+    private static final double DOUBTFUL = 0.05;
 
     /** Of two that stand as far off within this share, the reading is named rather than its setting. */
     private static final double ALIKE = 0.05;
@@ -40,10 +43,18 @@ final class Strangers {
 
     /** The fit over all that belongs. */
     Estimate settled() {
-        tick();
-        double[] start = estimator.robust(new double[problem.dimension()]);
-        boolean[] used = withoutSuspects(start);
-        Estimate estimate = squares(used, start);
+        boolean[] used = new boolean[problem.observed().size()];
+        Arrays.fill(used, true);
+        Estimate estimate = squares(used, new double[problem.dimension()]);
+        if (farthest(estimate, freedom(estimate)) >= 0
+                || Fit.chance(estimate.squares(), freedom(estimate)) < DOUBTFUL) {
+            tick();
+            // From the squares' minimum on, the many draw more strongly than the few; from the drawing on, whoever is
+            // near.
+            double[] start = estimator.robust(estimate.point(), new double[problem.dimension()]);
+            used = withoutSuspects(start);
+            estimate = squares(used, start);
+        }
         while (true) {
             int change = next(estimate);
             if (change < 0) {

@@ -12,10 +12,26 @@ import clipramp.units.Unit;
  * @param nominal the design's value, SI, above zero
  * @param high greatest value that the design allows, SI
  * @param assumed whether the limits are ours because the design states none
+ * @param farthest how far it may be looked for, in prior standard deviations: a wrong part may sit anywhere, a device
+ *     figure that is far outside its sheet has stopped being one
  * @param slot where it goes
  */
 record Unknown(
-        String path, String name, Unit unit, double low, double nominal, double high, boolean assumed, Slot slot) {
+        String path,
+        String name,
+        Unit unit,
+        double low,
+        double nominal,
+        double high,
+        boolean assumed,
+        double farthest,
+        Slot slot) {
+    /** For parts: the wrong one was fitted. */
+    static final double WRONG_PART = 8;
+
+    /** For figures of devices and the pot's law. */
+    static final double ODD_DEVICE = 2.5;
+
     /** Puts a value into a unit. */
     @FunctionalInterface
     interface Slot {

@@ -60,13 +60,14 @@ final class Unknowns {
         var line = design.line();
         if (line.lowVolts() < line.highVolts()) {
             add(
-                    "line.voltage",
+                    FitResult.LINE_PATH,
                     "line voltage on the day",
                     Unit.VOLT,
                     line.lowVolts(),
                     line.volts(),
                     line.highVolts(),
                     false,
+                    Unknown.ODD_DEVICE,
                     (unit, v) -> unit.lineVolts = v);
         }
     }
@@ -80,6 +81,7 @@ final class Unknowns {
                 factor.nominal(),
                 factor.high(),
                 false,
+                factor.kind() == Factor.Kind.PART ? Unknown.WRONG_PART : Unknown.ODD_DEVICE,
                 (unit, v) -> factor.slot().set(unit.values, v));
     }
 
@@ -104,13 +106,22 @@ final class Unknowns {
 
     /** What a fit is asked for first, where the design gives it no limits. */
     private void unstated(Design design) {
-        part("ramp.capacitor", "ramp capacitor", design.ramp().capacitor(), CAPACITOR, (u, v) -> u.values.capacitorFarads =
-                v);
+        part(
+                "ramp.capacitor",
+                "ramp capacitor",
+                design.ramp().capacitor(),
+                CAPACITOR,
+                (u, v) -> u.values.capacitorFarads = v);
         design.ramp()
                 .pot()
-                .ifPresent(p -> part("ramp.pot.track", "pot track", p.track(), TRACK, (u, v) -> u.values.trackOhms = v));
-        sheet("clip.zener.voltage", "zener voltage", design.clip().zener().volts(), ZENER, (u, v) -> u.values.zenerVolts =
-                v);
+                .ifPresent(
+                        p -> part("ramp.pot.track", "pot track", p.track(), TRACK, (u, v) -> u.values.trackOhms = v));
+        sheet(
+                "clip.zener.voltage",
+                "zener voltage",
+                design.clip().zener().volts(),
+                ZENER,
+                (u, v) -> u.values.zenerVolts = v);
         if (design.trigger() instanceof UnijunctionTrigger trigger) {
             Unijunction device = trigger.device();
             String key = "trigger.device.";
@@ -125,16 +136,16 @@ final class Unknowns {
     }
 
     private void part(String path, String name, Part part, double share, Unknown.Slot slot) {
-        own(path, name, part.value(), share, slot);
+        own(path, name, part.value(), share, Unknown.WRONG_PART, slot);
     }
 
     private void sheet(String path, String name, Characteristic figure, double share, Unknown.Slot slot) {
-        own(path, name, figure.nominal(), share, slot);
+        own(path, name, figure.nominal(), share, Unknown.ODD_DEVICE, slot);
     }
 
-    private void own(String path, String name, double nominal, double share, Unknown.Slot slot) {
+    private void own(String path, String name, double nominal, double share, double farthest, Unknown.Slot slot) {
         if (nominal > 0 && unknowns.stream().noneMatch(unknown -> unknown.path().equals(path))) {
-            add(path, name, unitOf(path), nominal * (1 - share), nominal, nominal * (1 + share), true, slot);
+            add(path, name, unitOf(path), nominal * (1 - share), nominal, nominal * (1 + share), true, farthest, slot);
         }
     }
 
@@ -161,6 +172,7 @@ final class Unknowns {
                 half,
                 half * (1 + strays),
                 true,
+                Unknown.ODD_DEVICE,
                 (unit, v) -> unit.halfShare = Math.min(1 - LEAST_SHARE, Math.max(LEAST_SHARE, v)));
     }
 
@@ -177,6 +189,7 @@ final class Unknowns {
                 typical,
                 typical + reach,
                 true,
+                Unknown.ODD_DEVICE,
                 (unit, v) -> unit.values.baseOnePulseVolts = v);
     }
 
@@ -188,7 +201,8 @@ final class Unknowns {
             double nominal,
             double high,
             boolean assumed,
+            double farthest,
             Unknown.Slot slot) {
-        unknowns.add(new Unknown(path, name, unit, low, nominal, high, assumed, slot));
+        unknowns.add(new Unknown(path, name, unit, low, nominal, high, assumed, farthest, slot));
     }
 }

@@ -5,6 +5,8 @@ public final class UnsettledFitException extends RuntimeException {
     private static final long serialVersionUID = 1L;
 
     UnsettledFitException(Throwable cause) {
-        super("no values were found that fit these readings: the search did not settle. Are they of this design?", cause);
+        super(
+                "no values were found that fit these readings: the search did not settle. Are they of this design?",
+                cause);
     }
 }

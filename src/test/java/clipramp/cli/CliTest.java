@@ -64,7 +64,9 @@ class CliTest {
     void everyExampleIsNamedByHelpAndCanBeStartedFrom(@TempDir Path folder) throws IOException {
         String help = CliRun.of("new", "--help").out();
         try (Stream<Path> files = Files.list(Path.of("examples"))) {
-            List<String> ids = files.map(f -> String.valueOf(f.getFileName()).replace(".yaml", ""))
+            List<String> ids = files.map(f -> String.valueOf(f.getFileName()))
+                    .filter(name -> name.endsWith(".yaml"))
+                    .map(name -> name.replace(".yaml", ""))
                     .toList();
             assertThat(Example.all()).extracting(Example::id).containsExactlyInAnyOrderElementsOf(ids);
         }

@@ -27,7 +27,8 @@ public final class FitStudy {
 
     static Design design(String example) {
         Example shipped = Example.named(example).orElseThrow();
-        return DesignFiles.load(new Source(example, shipped.text()), List.of(), ProfileLibrary.shipped()).design();
+        return DesignFiles.load(new Source(example, shipped.text()), List.of(), ProfileLibrary.shipped())
+                .design();
     }
 
     /** A gross error as a slip of the hand makes it: a tenth to a half off, either way. */
@@ -72,7 +73,13 @@ public final class FitStudy {
             }
         });
         covered.forEach((path, counts) -> System.out.println(String.format(
-                Locale.ROOT, "%-40s covered %d of %d, told %d, kept %.3f", path, counts[0], counts[1], counts[2], counts[3] / 1000.0 / counts[1])));
+                Locale.ROOT,
+                "%-40s covered %d of %d, told %d, kept %.3f",
+                path,
+                counts[0],
+                counts[1],
+                counts[2],
+                counts[3] / 1000.0 / counts[1])));
         System.out.println("gross error named in " + named + " of " + benches + ", alone in " + only
                 + "; nothing named on good benches in " + clean + "; " + (System.nanoTime() - begun) / 1000000 + " ms");
     }

@@ -51,12 +51,11 @@ final class SyntheticBench {
             List<Reading> read = new ArrayList<>();
             for (int r = 0; r < shown.length; r++) {
                 Meter meter = line.readings().get(r).meter();
-                read.add(new Reading(
-                        meter, shown[r] * (1 + NOISE * random.nextGaussian()), STATED, meter.words()));
+                read.add(new Reading(meter, shown[r] * (1 + NOISE * random.nextGaussian()), STATED, meter.words()));
             }
             double dial = Math.max(0, Math.min(1, line.setting().value() + KNOB_NOISE * random.nextGaussian()));
-            Setting setting = new Setting(
-                    Setting.Kind.KNOB, dial, Accuracy.amount(KNOB_NOISE * Accuracy.SIGMAS), "knob (%)");
+            Setting setting =
+                    new Setting(Setting.Kind.KNOB, dial, Accuracy.amount(KNOB_NOISE * Accuracy.SIGMAS), "knob (%)");
             double volts = design.line().volts() * (1 + NOISE * random.nextGaussian());
             lines.add(new BenchLine(
                     line.line(), setting, Optional.of(new LineVolts(volts, STATED, "line voltage (V)")), read));
@@ -80,8 +79,7 @@ final class SyntheticBench {
             List<Reading> read = meters.stream()
                     .map(meter -> new Reading(meter, 1, STATED, meter.words()))
                     .toList();
-            lines.add(new BenchLine(
-                    p + 2, setting, Optional.of(new LineVolts(230, STATED, "line voltage (V)")), read));
+            lines.add(new BenchLine(p + 2, setting, Optional.of(new LineVolts(230, STATED, "line voltage (V)")), read));
         }
         return new Readings("plan", 25, lines);
     }

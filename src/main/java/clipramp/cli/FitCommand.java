@@ -1,0 +1,124 @@
+package clipramp.cli;
+
+import clipramp.circuit.Design;
+import clipramp.files.AsBuilt;
+import clipramp.files.DesignText;
+import clipramp.files.LoadedDesign;
+import clipramp.files.ReadingsFile;
+import clipramp.files.Source;
+import clipramp.fit.Fit;
+import clipramp.fit.FitResult;
+import clipramp.fit.Readings;
+import clipramp.spread.Watch;
+import java.nio.charset.StandardCharsets;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import java.util.concurrent.Callable;
+import org.jspecify.annotations.Nullable;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
+import picocli.CommandLine.Option;
+import picocli.CommandLine.Parameters;
+
+/** Bench readings of one unit to what its parts really are. */
+@Command(
+        name = "fit",
+        sortOptions = false,
+        sortSynopsis = false,
+        description = {
+            "Bench readings of one unit to its real parts: what the readings tell and how well, what they cannot tell, and"
+                    + " which of them does not belong.",
+            "Exit code 1 when the readings tell nothing."
+        },
+        footer = {
+            "",
+            "READINGS.csv has one line of heads and one line a setting. Heads: knob (%), ramp resistance (kohm), line voltage"
+                    + " (V), firing angle (deg), delay (ms), load voltage (V true-rms), load voltage (V average-reading), load"
+                    + " power (W), base-one peak (V), supply voltage (V), peak-point voltage (V), note.",
+            "An accuracy may follow a head: firing angle (deg) +-1, load power (W) +-2 %%. It is what 19 readings in 20 keep"
+                    + " within. A line that begins with # is a remark; an empty field was not read."
+        })
+final class FitCommand implements Callable<Integer> {
+    private final Session session;
+
+    @Mixin
+    DesignOptions design = new DesignOptions();
+
+    @Parameters(index = "1", paramLabel = "READINGS.csv", description = "what was read; - for standard input")
+    String readings = "";
+
+    @Mixin
+    StandardOptions standard = new StandardOptions();
+
+    @Option(
+            names = "--out",
+            paramLabel = "FILE",
+            order = 10,
+            description = "write the as-built design here, the design's comments kept")
+    @Nullable
+    String out;
+
+    @Option(names = "--replace", order = 11, description = "write over a file that is there")
+    boolean replace;
+
+    @Option(names = "--json", order = 30, description = "the answer for machines")
+    boolean json;
+
+    FitCommand(Session session) {
+        this.session = session;
+    }
+
+    @Override
+    public Integer call() {
+        refuse();
+        Source text = Inputs.source(session, design.file);
+        LoadedDesign loaded = design.load(session, text);
+        Design circuit = loaded.design();
+        Readings read = ReadingsFile.read(Inputs.source(session, readings), circuit, celsius());
+        OptionalDouble volts = design.lineVolts(circuit);
+        if (volts.isPresent()) {
+            read = read.onLine(volts.getAsDouble());
+        }
+        FitResult result = Fit.run(circuit, read, Watch.NONE);
+        List<String> notes = new ArrayList<>(FitText.notes(circuit, result));
+        Optional<DesignText> built =
+                Optional.ofNullable(out).map(name -> AsBuilt.of(DesignText.of(text), circuit, result));
+        built.ifPresent(b -> notes.addAll(b.notes()));
+        if (out != null && built.isPresent() && !out.equals(Inputs.STANDARD_INPUT)) {
+            byte[] bytes = built.get().text().getBytes(StandardCharsets.UTF_8);
+            Outputs.write(out, file -> file.write(bytes), replace);
+        }
+        if (json) {
+            session.out().exactly(FitJson.of(loaded, result, notes, out, session.ascii()));
+        } else if (built.isPresent() && Inputs.STANDARD_INPUT.equals(out)) {
+            session.out().exactly(built.get().text());
+        } else {
+            new FitText(session.out(), loaded, result, notes).print();
+            if (out != null) {
+                session.out().line("");
+                session.out().line("Written: " + out + ", the design as built.");
+                session.out().line("Next: clipramp check " + out);
+            }
+        }
+        return result.isTelling() ? ExitCode.ANSWERED : ExitCode.FAILS;
+    }
+
+    private double celsius() {
+        return design.celsius().orElse(25);
+    }
+
+    private void refuse() {
+        if (readings.equals(Inputs.STANDARD_INPUT) && design.file.equals(Inputs.STANDARD_INPUT)) {
+            throw Problems.refused("fit", "only one of design and readings can come from standard input.");
+        }
+        if (out != null && !design.overrides.isEmpty()) {
+            throw Problems.refused(
+                    "--out", "--with and --out do not go together: write what --with says into the design first.");
+        }
+        if (json && Inputs.STANDARD_INPUT.equals(out)) {
+            throw Problems.refused("--out", "--json and --out=- cannot both go to standard output. Choose one.");
+        }
+    }
+}

@@ -1,0 +1,151 @@
+package clipramp.files;
+
+import clipramp.circuit.Characteristic;
+import clipramp.circuit.Design;
+import clipramp.circuit.Part;
+import clipramp.circuit.Tolerance;
+import clipramp.circuit.Trigger.ProgrammableTrigger;
+import clipramp.circuit.Trigger.UnijunctionTrigger;
+import clipramp.fit.FitResult;
+import clipramp.fit.Fitted;
+import clipramp.fit.Fitted.Knowledge;
+import clipramp.units.QuantityText;
+import clipramp.units.Unit;
+import java.math.BigDecimal;
+import java.math.MathContext;
+import java.math.RoundingMode;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+
+/**
+ * Writes what a fit found into a design's text, comments kept. A value that the readings tell carries its 95 % interval as
+ * tolerance; one that they only moved keeps the part's own. The whole unit fits the readings, so everything that moved is
+ * written, not only what is told.
+ */
+public final class AsBuilt {
+    private static final MathContext FIGURES = new MathContext(5, RoundingMode.HALF_UP);
+    private static final MathContext UPWARDS = new MathContext(2, RoundingMode.UP);
+
+    /** A move of less than this share of what the limits allow is none. */
+    private static final double LEAST_MOVE = 0.01;
+
+    /** Between these a pot is linear in a design file's words. */
+    private static final double LOWEST_LINEAR = 0.49;
+
+    private static final double HIGHEST_LINEAR = 0.51;
+
+    private final Design design;
+    private DesignText text;
+
+    private AsBuilt(DesignText text, Design design) {
+        this.text = text;
+        this.design = design;
+    }
+
+    /**
+     * @param text the design as its author wrote it
+     * @param design the same, read
+     * @param result what the fit found
+     * @throws InvalidInputException where the text is no YAML of ours
+     */
+    public static DesignText of(DesignText text, Design design, FitResult result) {
+        AsBuilt built = new AsBuilt(text, design);
+        for (Fitted value : result.values()) {
+            boolean moved = Math.abs(value.value() - value.nominal()) > LEAST_MOVE * (value.high() - value.low());
+            if (moved || value.knowledge() == Knowledge.TOLD) {
+                built.write(value);
+            }
+        }
+        int used = result.quality().used();
+        String said =
+                "As built: fitted from " + used + " of " + result.readings().count() + " bench readings.";
+        String notes = design.notes().isBlank() ? said : design.notes().strip() + " " + said;
+        return built.text.withValue("notes", notes);
+    }
+
+    private void write(Fitted value) {
+        String path = value.path();
+        Optional<Part> part = part(path);
+        if (part.isPresent()) {
+            set(path, FlowText.partText(asBuilt(part.get(), value), value.unit()));
+        } else if (path.equals(FitResult.LAW_PATH)) {
+            law(value.value());
+        } else if (path.equals("trigger.device.base-one-pulse")) {
+            set(path + ".typ", QuantityText.exact(rounded(value.value()), Unit.VOLT));
+            set(path + ".min", QuantityText.exact(rounded(Math.min(value.from(), value.value())), Unit.VOLT));
+        } else if (isTable(path)) {
+            ProgrammableTrigger trigger = (ProgrammableTrigger) design.trigger();
+            double upper = trigger.upper().value();
+            double lower = trigger.lower().value();
+            set(
+                    path,
+                    FlowText.list(List.of(new FlowText()
+                            .quantity("gate-resistance", rounded(upper * lower / (upper + lower)), Unit.OHM)
+                            .characteristic("value", figure(value), value.unit())
+                            .text())));
+        } else if (path.startsWith("trigger.device.") || path.equals("clip.zener.voltage")) {
+            set(path, FlowText.characteristicText(figure(value), value.unit()));
+        }
+    }
+
+    private boolean isTable(String path) {
+        return design.trigger() instanceof ProgrammableTrigger
+                && List.of("trigger.device.offset", "trigger.device.peak-current", "trigger.device.valley-current")
+                        .contains(path);
+    }
+
+    private void set(String path, String value) {
+        text = text.withValue(path, value);
+    }
+
+    private Optional<Part> part(String path) {
+        Map<String, Optional<Part>> parts = new java.util.HashMap<>();
+        parts.put("clip.dropper", Optional.of(design.clip().dropper()));
+        parts.put("ramp.capacitor", Optional.of(design.ramp().capacitor()));
+        parts.put("ramp.fixed", Optional.of(design.ramp().fixed()));
+        parts.put("ramp.pot.track", design.ramp().pot().map(pot -> pot.track()));
+        parts.put("ramp.pot.shunt", design.ramp().pot().flatMap(pot -> pot.shunt()));
+        parts.put("trigger.base-one", Optional.of(design.trigger().baseOne()));
+        if (design.trigger() instanceof UnijunctionTrigger trigger) {
+            parts.put("trigger.base-two", Optional.of(trigger.baseTwo()));
+        } else if (design.trigger() instanceof ProgrammableTrigger trigger) {
+            parts.put("trigger.upper", Optional.of(trigger.upper()));
+            parts.put("trigger.lower", Optional.of(trigger.lower()));
+        }
+        parts.put("gate.series", Optional.of(design.gate().series()));
+        parts.put("gate.shunt", design.gate().shunt());
+        return parts.getOrDefault(path, Optional.empty());
+    }
+
+    private static Part asBuilt(Part part, Fitted value) {
+        double reach = Math.max(value.to() / value.value() - 1, 1 - value.from() / value.value());
+        double share = new BigDecimal(reach).round(UPWARDS).doubleValue();
+        Tolerance tolerance =
+                value.knowledge() == Knowledge.TOLD ? new Tolerance(Math.min(1, share), share) : part.tolerance();
+        return new Part(rounded(value.value()), tolerance, part.ratedWatts(), part.ratedVolts());
+    }
+
+    private static Characteristic figure(Fitted value) {
+        boolean told = value.knowledge() == Knowledge.TOLD;
+        double at = rounded(value.value());
+        return Characteristic.of(
+                Math.min(at, rounded(told ? value.from() : value.low())),
+                at,
+                Math.max(at, rounded(told ? value.to() : value.high())));
+    }
+
+    private void law(double half) {
+        if (half > LOWEST_LINEAR && half < HIGHEST_LINEAR) {
+            set("ramp.pot.law", "linear");
+            text = text.without("ramp.pot.half");
+        } else {
+            set("ramp.pot.law", half < 0.5 ? "log" : "reverse-log");
+            set("ramp.pot.half", QuantityText.exact(rounded(Math.min(half, 1 - half)), Unit.FRACTION));
+        }
+    }
+
+    private static double rounded(double value) {
+        return new BigDecimal(value).round(FIGURES).doubleValue();
+    }
+}

@@ -1,0 +1,207 @@
+package clipramp.files;
+
+import clipramp.circuit.Design;
+import clipramp.files.CsvRows.Field;
+import clipramp.files.ReadingsColumn.Kind;
+import clipramp.fit.BenchLine;
+import clipramp.fit.BenchLine.LineVolts;
+import clipramp.fit.Reading;
+import clipramp.fit.Readings;
+import clipramp.fit.Setting;
+import clipramp.units.QuantityText;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.TreeMap;
+
+/** Reads bench readings: comma-separated, one line a setting, units and accuracies in the heads. */
+public final class ReadingsFile {
+    private final Source source;
+    private final Design design;
+    private final Findings findings = new Findings();
+
+    private ReadingsFile(Source source, Design design) {
+        this.source = source;
+        this.design = design;
+    }
+
+    /**
+     * @param source the file's name and text
+     * @param design what was measured: whether it has a knob
+     * @param celsius ambient temperature of the session, °C
+     * @throws InvalidInputException with everything that is wrong, in the order of its lines
+     */
+    public static Readings read(Source source, Design design, double celsius) {
+        return new ReadingsFile(source, design).readings(celsius);
+    }
+
+    /** Heads as they are best written, for help. */
+    public static List<String> heads() {
+        return ReadingsColumn.known();
+    }
+
+    private Readings readings(double celsius) {
+        List<List<Field>> rows = CsvRows.of(source, findings);
+        findings.throwIfAny();
+        if (rows.size() < 2) {
+            findings.problem(
+                    Place.of(source.name(), 1, 1),
+                    "",
+                    "expected a line of heads, such as \"knob (%),firing angle (deg)\", and lines of readings under it.");
+            findings.throwIfAny();
+        }
+        Map<Integer, ReadingsColumn> columns = columns(rows.get(0));
+        findings.throwIfAny();
+        List<BenchLine> lines = new ArrayList<>();
+        for (List<Field> row : rows.subList(1, rows.size())) {
+            line(row, columns, rows.get(0).size()).ifPresent(lines::add);
+        }
+        findings.throwIfAny();
+        return new Readings(source.name(), celsius, lines);
+    }
+
+    private Map<Integer, ReadingsColumn> columns(List<Field> heads) {
+        Map<Integer, ReadingsColumn> columns = new TreeMap<>();
+        Field first = heads.get(0);
+        if (heads.size() == 1 && first.text().contains(";")) {
+            findings.problem(placeOf(first), "", "fields are parted by commas, not semicolons; numbers have a dot.");
+            return columns;
+        }
+        for (int c = 0; c < heads.size(); c++) {
+            Field head = heads.get(c);
+            if (head.text().isEmpty()) {
+                continue;
+            }
+            Optional<ReadingsColumn> column = ReadingsColumn.of(head.text(), placeOf(head), findings);
+            if (column.isPresent()) {
+                columns.put(c, column.get());
+            }
+        }
+        boolean hasKnob = design.ramp().pot().isPresent();
+        boolean reads = columns.values().stream().anyMatch(c -> c.kind().meter.isPresent());
+        if (!findings.hasProblems() && !reads) {
+            findings.problem(
+                    placeOf(first), "", "no column holds a reading. Known: " + String.join(", ", heads()) + ".");
+        }
+        boolean sets = columns.values().stream().anyMatch(c -> c.kind() == Kind.KNOB || c.kind() == Kind.RAMP_OHMS);
+        if (!findings.hasProblems() && hasKnob && !sets) {
+            findings.problem(
+                    placeOf(first),
+                    "",
+                    "the design has a knob: add a column \"knob (%)\" or \"ramp resistance (kohm)\" that says where it stood.");
+        }
+        return columns;
+    }
+
+    private Place placeOf(Field field) {
+        return Place.of(source.name(), field.line(), field.column());
+    }
+
+    private Optional<BenchLine> line(List<Field> row, Map<Integer, ReadingsColumn> columns, int heads) {
+        Field first = row.get(0);
+        if (row.size() > heads) {
+            Field extra = row.get(heads);
+            findings.problem(placeOf(extra), "", "this line has " + row.size() + " fields under " + heads + " heads.");
+            return Optional.empty();
+        }
+        Optional<Setting> knob = Optional.empty();
+        Optional<Setting> resistance = Optional.empty();
+        Optional<LineVolts> volts = Optional.empty();
+        List<Reading> readings = new ArrayList<>();
+        int before = findings.count();
+        for (int c = 0; c < row.size(); c++) {
+            ReadingsColumn column = columns.get(c);
+            Field field = row.get(c);
+            if (column == null || column.kind() == Kind.NOTE || field.text().isEmpty()) {
+                continue;
+            }
+            double value = value(field, column);
+            if (Double.isNaN(value)) {
+                continue;
+            }
+            switch (column.kind()) {
+                case KNOB ->
+                    knob = Optional.of(new Setting(Setting.Kind.KNOB, value, column.accuracy(), column.head()));
+                case RAMP_OHMS ->
+                    resistance =
+                            Optional.of(new Setting(Setting.Kind.RAMP_OHMS, value, column.accuracy(), column.head()));
+                case LINE -> volts = Optional.of(new LineVolts(value, column.accuracy(), column.head()));
+                default ->
+                    readings.add(
+                            new Reading(column.kind().meter.orElseThrow(), value, column.accuracy(), column.head()));
+            }
+        }
+        if (findings.count() > before) {
+            return Optional.empty();
+        }
+        // An ohmmeter's figure at a knob position tells the track; alone it is where the knob stood.
+        if (knob.isPresent() && resistance.isPresent()) {
+            Setting measured = resistance.get();
+            readings.add(new Reading(
+                    Kind.RAMP_OHMS.meter.orElseThrow(), measured.value(), measured.accuracy(), measured.column()));
+            resistance = Optional.empty();
+        }
+        return bench(first, knob, resistance, volts, readings);
+    }
+
+    private Optional<BenchLine> bench(
+            Field first,
+            Optional<Setting> knob,
+            Optional<Setting> resistance,
+            Optional<LineVolts> volts,
+            List<Reading> readings) {
+        boolean hasKnob = design.ramp().pot().isPresent();
+        if (knob.isPresent() && !hasKnob) {
+            findings.problem(
+                    placeOf(first), "", "a knob position stands here, and the design has no knob (ramp.pot: none).");
+            return Optional.empty();
+        }
+        if (readings.isEmpty()) {
+            findings.problem(placeOf(first), "", "nothing was read on this line. Fill it in or take it out.");
+            return Optional.empty();
+        }
+        Optional<Setting> setting = knob.or(() -> resistance);
+        if (setting.isEmpty() && hasKnob) {
+            findings.problem(
+                    placeOf(first),
+                    "",
+                    "where did the knob stand? Give its position or the ramp resistance on this line.");
+            return Optional.empty();
+        }
+        return Optional.of(new BenchLine(first.line(), setting.orElseGet(Setting::fixed), volts, readings));
+    }
+
+    /** NaN where it is refused. */
+    private double value(Field field, ReadingsColumn column) {
+        String text = field.text().replace('\u2212', '-');
+        String expected = "a number, " + window(column);
+        if (!text.matches("[+-]?(\\d+\\.?\\d*|\\.\\d+)([eE][+-]?\\d{1,3})?")) {
+            String hint = text.matches("[+-]?\\d+,\\d+") ? " Write a dot: " + text.replace(',', '.') + "." : "";
+            refuse(field, column, expected, hint);
+            return Double.NaN;
+        }
+        double value = Double.parseDouble(text) * column.scale();
+        if (!(value >= column.kind().low * (1 - 1e-12) && value <= column.kind().high * (1 + 1e-12))) {
+            refuse(field, column, expected, "");
+            return Double.NaN;
+        }
+        return Math.min(value, column.kind().high);
+    }
+
+    private void refuse(Field field, ReadingsColumn column, String expected, String hint) {
+        findings.problem(
+                placeOf(field),
+                column.head(),
+                field.text(),
+                expected,
+                "read \"" + field.text() + "\"; expected " + expected + "." + hint);
+    }
+
+    private static String window(ReadingsColumn column) {
+        Kind kind = column.kind();
+        double low = kind.low / column.scale();
+        double high = kind.high / column.scale();
+        return QuantityText.number(low, 4) + ".." + QuantityText.number(high, 4);
+    }
+}
