@@ -47,6 +47,12 @@ final class CheckText {
     /** Caution, title and what the figures hold for. */
     static void heading(Output out, LoadedDesign loaded, Condition condition) {
         out.line(BASIS + (Commands.has("spread") ? " See clipramp spread." : ""));
+        title(out, loaded);
+        out.line("  at " + condition(condition));
+    }
+
+    /** Caution, the design's name and what was changed in it. */
+    static void title(Output out, LoadedDesign loaded) {
         out.line(Caution.LINE);
         out.line("");
         String title = loaded.design().title();
@@ -54,7 +60,6 @@ final class CheckText {
         for (String override : loaded.overrides()) {
             out.line("  with " + override);
         }
-        out.line("  at " + condition(condition));
     }
 
     /** Says so where a design that is shown has a margin that fails. */

@@ -24,6 +24,8 @@ final class Commands {
             new Command("trace", "FILE", "the half cycle's waveforms at one knob position", TraceCommand::new),
             new Command("fit", "FILE READINGS.csv", "bench readings to the unit's real parts", FitCommand::new),
             new Command(
+                    "spread", "FILE", "tolerances and temperature: yield, worst case, remedies", SpreadCommand::new),
+            new Command(
                     "faults", "FILE", "single faults: load, test points, what burns; --seen ranks", FaultsCommand::new),
             new Command("record", "FILE --out=OUT.pdf", "the design record as PDF", RecordCommand::new),
             new Command("size", "FILE", "from what is wanted to preferred values", SizeCommand::new),

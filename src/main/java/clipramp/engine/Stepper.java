@@ -25,6 +25,15 @@ public final class Stepper {
      */
     private static final double REST_SHARE = 1e-9;
 
+    /** Events without progress after which the circuit is taken to rest on a threshold. */
+    private static final int MOST_IDLE = 12;
+
+    /** Share of the half cycle under which time has not gone on. */
+    private static final double NO_PROGRESS = 1e-13;
+
+    /** First pause of a resting circuit, as a share of the half cycle. */
+    private static final double FIRST_PAUSE = 1e-11;
+
     private final Network n;
     private final Piece piece = new Piece();
     private final Piece trial = new Piece();
@@ -39,6 +48,8 @@ public final class Stepper {
     private double seconds;
     private double rampVolts;
     private double fluxAmps;
+    private int idle;
+    private double pause;
     private double rectifierSwitched;
     private double zenerSwitched;
     private double gateSwitched;
@@ -52,6 +63,8 @@ public final class Stepper {
         wave = source;
         mode = startMode;
         seconds = 0;
+        idle = 0;
+        pause = 0;
         rampVolts = startRampVolts;
         fluxAmps = startFluxAmps;
         nothingSwitched();
@@ -167,11 +180,27 @@ public final class Stepper {
                 event = Event.CLAMP;
             }
         }
+        rest(time, limitSeconds);
         seconds = time;
         piece.look(time);
         rampVolts = piece.rampVolts;
         fluxAmps = piece.fluxAmps;
         return pass(event);
+    }
+
+    /**
+     * A circuit that rests on a threshold (a supply of no inner resistance, a device without an emitter drop) may switch to
+     * and fro on rounding. After a few events without progress the searches begin a little later, and later again while
+     * that lasts: on the threshold either state is right.
+     */
+    private void rest(double time, double limitSeconds) {
+        if (time - seconds > 2 * pause + limitSeconds * NO_PROGRESS) {
+            idle = 0;
+            pause = 0;
+        } else if (++idle > MOST_IDLE) {
+            idle = 0;
+            pause = Math.max(limitSeconds * FIRST_PAUSE, 2 * pause);
+        }
     }
 
     private Event pass(Event event) {
@@ -193,6 +222,11 @@ public final class Stepper {
             case VALLEY -> {
                 mode = Mode.OFF;
                 settle();
+                if (rampVolts > trial.peak.at(rampVolts, fluxAmps, wave.at(seconds)) - ABOVE_VOLTS) {
+                    // A dying supply leaves no room between valley and peak point: the ramp follows the peak point.
+                    mode = Mode.STALLED;
+                    settle();
+                }
             }
             case FIRES -> {
                 mode = Mode.ON;
@@ -214,7 +248,7 @@ public final class Stepper {
     // --- what may end a piece ---------------------------------------------------------------------------------------
 
     private double search(double limit) {
-        return FirstCrossing.after(piece, form, seconds, limit);
+        return FirstCrossing.after(piece, form, Math.min(seconds + pause, limit), limit);
     }
 
     private double searchAfterRest(double switched, double limit) {

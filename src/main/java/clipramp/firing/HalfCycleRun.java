@@ -86,7 +86,7 @@ final class HalfCycleRun {
             }
             handle(event, wave, sink);
             supply.zener(clippedBefore, stepper.clips(), stepper.seconds());
-            if (event == Event.END) {
+            if (event == Event.END && !takenBack(wave, sink)) {
                 break;
             }
         }
@@ -165,15 +165,31 @@ final class HalfCycleRun {
         } else if (pulse.turnsOn(firing)) {
             stepper.switchSource(wave);
         } else {
-            sink.takeBack(triedFrom);
-            begun.remove(begun.size() - 1);
-            Pulse measured = pulse.pulse(firing, 0, false);
-            stepper.switchSource(wave);
-            stepper.returnToFiring(triedFrom, triedRampVolts, triedFluxAmps);
-            going = new PulseMeter(
-                    firing.network(), half, triedFrom, triedRampVolts, measured.supplyVolts(), measured.afterStall());
-            begun.add(going);
+            takeBack(pulse, wave, sink);
         }
+    }
+
+    /** A pulse that goes on over the line zero is judged there: the thyristor is on by then, or never was. */
+    private boolean takenBack(SourceWave wave, PieceSink sink) {
+        PulseMeter pulse = going;
+        if (!trying || pulse == null) {
+            return false;
+        }
+        trying = false;
+        if (pulse.turnsOn(firing)) {
+            return false;
+        }
+        takeBack(pulse, wave, sink);
+        return true;
+    }
+
+    private void takeBack(PulseMeter pulse, SourceWave wave, PieceSink sink) {
+        sink.takeBack(triedFrom);
+        begun.remove(begun.size() - 1);
+        stepper.switchSource(wave);
+        stepper.returnToFiring(triedFrom, triedRampVolts, triedFluxAmps);
+        going = pulse.again();
+        begun.add(going);
     }
 
     /**

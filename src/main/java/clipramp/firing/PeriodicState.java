@@ -51,7 +51,7 @@ final class PeriodicState {
                 settling = Solution.Settling.STEADY;
                 repeats = period;
             } else if (repeatsAfter(states, 2 * period)) {
-                settling = Solution.Settling.HUNTS;
+                settling = feelsEverySecond(firing) ? Solution.Settling.STEADY : Solution.Settling.HUNTS;
                 repeats = 2 * period;
             }
         }
@@ -59,11 +59,13 @@ final class PeriodicState {
         return new Solution(firing.condition(), firing.network().rampOhms, settling, record(firing, run, shown, sink));
     }
 
-    /** A half-wave load feels every second half cycle only, so both are told although the ramp treats them alike. */
     private static int shownHalves(FiringCase firing, int repeats) {
-        boolean halfWaveOnBridge =
-                firing.design().stage() == Stage.HALF_WAVE && !firing.timing().isWholePeriods();
-        return halfWaveOnBridge ? Math.max(2, repeats) : repeats;
+        return feelsEverySecond(firing) ? Math.max(2, repeats) : repeats;
+    }
+
+    /** A half-wave load on a bridge's supply feels every second half cycle only: both are told, and may differ. */
+    private static boolean feelsEverySecond(FiringCase firing) {
+        return firing.design().stage() == Stage.HALF_WAVE && !firing.timing().isWholePeriods();
     }
 
     private static boolean repeatsAfter(List<State> states, int halves) {

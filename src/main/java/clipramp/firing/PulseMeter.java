@@ -6,6 +6,9 @@ import clipramp.engine.PieceQuadrature;
 
 /** Measures one pulse while the circuit runs through it. */
 final class PulseMeter {
+    /** One exponential and the line cross a level a few times a piece; more is a current that rests on it. */
+    private static final int MOST_CROSSINGS = 100;
+
     /** Part of a piece that is passed over after each crossing of the trigger current. */
     private static final double REST_SHARE = 1e-9;
 
@@ -53,6 +56,11 @@ final class PulseMeter {
         endRampVolts = startRampVolts;
     }
 
+    /** A fresh meter for the same pulse. */
+    PulseMeter again() {
+        return new PulseMeter(n, half, startSeconds, startRampVolts, supplyVolts, afterStall);
+    }
+
     /**
      * Takes in a conducting piece.
      *
@@ -84,7 +92,7 @@ final class PulseMeter {
         double onward = from;
         piece.look(from);
         boolean above = piece.gateAmps(n) >= n.triggerAmps;
-        while (true) {
+        for (int crossings = 0; crossings < MOST_CROSSINGS; crossings++) {
             if (above && Double.isNaN(aboveSince)) {
                 aboveSince = time + offset;
             }

@@ -65,6 +65,7 @@ public final class SwiftFiring {
     private double clipUntil;
     /** A number for the order of events of the half cycle just run. */
     private int course;
+
     private double residualVolts;
     private Mode residualMode = Mode.OFF;
     private long halves;
@@ -124,7 +125,10 @@ public final class SwiftFiring {
                 boolean confirmed = sameCourse && (mode == Mode.ON || pass > 1);
                 next = sameCourse ? volts + step : end;
                 double left = followed ? Math.abs(kept) * step * step * BENT : Math.abs(kept * (end - volts));
-                if (confirmed && endMode == mode && Math.abs(step) < NEAR_VOLTS && left * sensitivity() < LEFT_SECONDS) {
+                if (confirmed
+                        && endMode == mode
+                        && Math.abs(step) < NEAR_VOLTS
+                        && left * sensitivity() < LEFT_SECONDS) {
                     return (Double.isNaN(firedSeconds) || fireFrom(mode, next)) && settled(mode, next);
                 }
             }

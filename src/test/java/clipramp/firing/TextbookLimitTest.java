@@ -30,7 +30,13 @@ class TextbookLimitTest {
      * Electronics, 2.29; Bell, Electronic Devices and Circuits, 18.6. A line ten times as high clips ten times as early.
      */
     @ParameterizedTest
-    @CsvSource({"0.51, 10e3, 0.5e-6", "0.54, 5e3, 0.2e-6", "0.54, 10e3, 0.2e-6", "0.7, 10e3, 0.1e-6", "0.65, 47e3, 0.1e-6"})
+    @CsvSource({
+        "0.51, 10e3, 0.5e-6",
+        "0.54, 5e3, 0.2e-6",
+        "0.54, 10e3, 0.2e-6",
+        "0.7, 10e3, 0.1e-6",
+        "0.65, 47e3, 0.1e-6"
+    })
     void firstDelayTendsToTheTextbookPeriod(double standoff, double rampOhms, double rampFarads) {
         double textbook = PublishedRelations.textbookPeriodSeconds(rampOhms, rampFarads, standoff);
         for (double lineVolts : new double[] {1e3, 1e4, 1e5}) {
