@@ -16,7 +16,7 @@ public final class Stepper {
     private static final double ABOVE_VOLTS = 1e-9;
 
     /** By how much more than the valley current a pulse must begin with, as a share of it. */
-    private static final double VALLEY_ROUNDING = 1e-9;
+    private static final double VALLEY_ROUNDING = 1e-6;
 
     /**
      * A branch that has just switched is asked again after this part of the half cycle: what it switched by and what it

@@ -373,8 +373,12 @@ final class ReferenceIntegrator {
         closePulse();
         if (trying) {
             // The supply comes back with the end of a pulse that did not latch, at the same instant.
-            thyristorOn = pulses.get(pulses.size() - 1).latches();
+            Pulse pulse = pulses.get(pulses.size() - 1);
+            thyristorOn = pulse.latches();
             trying = false;
+            if (!pulse.turnsOn()) {
+                return;
+            }
         }
         emitter = Emitter.OFF;
         settleBranches();
