@@ -20,9 +20,9 @@ import java.util.stream.Collectors;
 final class FaultsText {
     private static final int BEST = 8;
     private static final String LIVE =
-            "The firing circuit stands at line potential, isolated only where a winding says so. Whoever has to measure a live"
-                    + " circuit uses isolated instruments and the practice that local rules ask for; a reading near zero"
-                    + " never means that a wire is dead.";
+            "Take every point of the firing circuit as live at line potential, behind a winding too: its common is joined to"
+                    + " the thyristor. Whoever has to measure a live circuit uses isolated instruments and the practice that"
+                    + " local rules ask for; a reading near zero never means that a wire is dead.";
 
     private final Output out;
     private final LoadedDesign loaded;

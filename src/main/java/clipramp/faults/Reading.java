@@ -1,7 +1,7 @@
 package clipramp.faults;
 
 /**
- * What three instruments show at one test point. All isolated: the firing circuit stands at line potential.
+ * What three instruments show at one test point. All of them isolated instruments: the circuit is live.
  *
  * @param dcVolts mean, which a meter on dc shows, V
  * @param acVolts true rms with the mean taken off, which a true-rms meter on ac shows, V

@@ -69,6 +69,7 @@ public final class DesignRecord {
         new DissipationSection(paper, content).write();
         parts.parts();
         CommissioningSection.write(paper, content);
+        FaultsSection.write(paper, content);
         paper.newPage();
         SourcesSection.write(paper, content);
         SignatureSection.write(paper, content);

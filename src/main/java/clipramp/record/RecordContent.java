@@ -1,5 +1,7 @@
 package clipramp.record;
 
+import clipramp.faults.FaultSheet;
+import clipramp.faults.Faults;
 import clipramp.figures.Lanes;
 import clipramp.files.LoadedDesign;
 import clipramp.files.Profile;
@@ -20,6 +22,7 @@ import java.util.List;
  * @param profiles the profiles that were used, with the source of every figure
  * @param lanes the half cycle at mid-knob, or of the fixed ramp
  * @param commissioning what to measure, with what is expected
+ * @param faults every single fault and what follows from it
  * @param programVersion version of this program
  */
 public record RecordContent(
@@ -28,6 +31,7 @@ public record RecordContent(
         List<Profile> profiles,
         Lanes lanes,
         List<Expectation> commissioning,
+        FaultSheet faults,
         String programVersion) {
     private static final int SAMPLES = 2000;
     private static final double MID_KNOB = 0.5;
@@ -38,7 +42,8 @@ public record RecordContent(
     }
 
     /**
-     * Solves what a record prints beyond the check: the half cycle at mid-knob, and how far good units may read apart.
+     * Solves what a record prints beyond the check: the half cycle at mid-knob, how far good units may read
+     * apart, and what single faults do.
      *
      * @param loaded the design as read
      * @param check the same design judged
@@ -59,6 +64,7 @@ public record RecordContent(
                 .flatMap(use -> library.find(use.kind(), use.id()).stream())
                 .map(Profile::read)
                 .toList();
-        return new RecordContent(loaded, check, profiles, lanes, Commissioning.of(check), programVersion);
+        FaultSheet faults = Faults.of(check.design(), check.condition());
+        return new RecordContent(loaded, check, profiles, lanes, Commissioning.of(check), faults, programVersion);
     }
 }

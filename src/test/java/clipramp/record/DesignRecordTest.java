@@ -3,6 +3,7 @@ package clipramp.record;
 import static org.assertj.core.api.Assertions.assertThat;
 
 import clipramp.circuit.Trigger;
+import clipramp.faults.FaultEffect;
 import clipramp.files.LoadedDesign;
 import clipramp.margins.Margin;
 import clipramp.margins.Verdict;
@@ -129,7 +130,7 @@ class DesignRecordTest {
                 lastPage = number;
             }
             assertThat(titles)
-                    .hasSize(13)
+                    .hasSize(14)
                     .anyMatch(title -> title.contains("Review"))
                     .anyMatch(title -> title.contains("Commissioning"))
                     .anyMatch(title -> title.contains("Signatures"));
@@ -234,7 +235,13 @@ class DesignRecordTest {
                 overrides,
                 loaded.inputDigest());
         RecordContent long_ = new RecordContent(
-                longer, content.check(), content.profiles(), content.lanes(), content.commissioning(), "0.1.0");
+                longer,
+                content.check(),
+                content.profiles(),
+                content.lanes(),
+                content.commissioning(),
+                content.faults(),
+                "0.1.0");
         for (PageSize size : PageSize.values()) {
             byte[] bytes = DesignRecord.bytes(long_, size);
             assertThat(text(bytes, 1).replaceAll("\\s+", " "))
@@ -242,6 +249,16 @@ class DesignRecordTest {
             assertThat(text(bytes, 2).replaceAll("\\s+", " "))
                     .contains("Before you build or measure", "says nothing about the circuit as a whole");
         }
+    }
+
+    @Test
+    void theSymptomSheetNamesEveryFaultWithWhatTheLoadGets() throws IOException {
+        String all = text(pdf, 0).replaceAll("\\s+", " ");
+        assertThat(content.faults().faults()).hasSizeGreaterThan(20);
+        for (FaultEffect effect : content.faults().faults()) {
+            assertThat(all).contains(effect.fault().words());
+        }
+        assertThat(all).contains("burns next:", "isolated instruments only");
     }
 
     @Test
