@@ -2,6 +2,7 @@ package clipramp.margins;
 
 import clipramp.circuit.Condition;
 import clipramp.circuit.Design;
+import clipramp.circuit.Load;
 import clipramp.firing.Dissipation;
 import clipramp.firing.Firing;
 import clipramp.firing.HalfCycle;
@@ -11,6 +12,7 @@ import clipramp.firing.Study;
 import clipramp.firing.TransformerDuty;
 import clipramp.gate.TriggerNeed;
 import clipramp.gate.WeakestPulse;
+import clipramp.power.LoadPeriod;
 import clipramp.power.LoadPower;
 import clipramp.power.LoadResult;
 import java.util.ArrayList;
@@ -25,15 +27,18 @@ import java.util.function.ToDoubleFunction;
 /** A design on the bench: everything that the margins ask of it, solved once. Lives for one run of the judge. */
 final class Bench {
     private static final int KNOB_STEPS = 10;
+    private static final double USUAL_CELSIUS = 25;
 
     private record Setting(Condition condition, double rampOhms) {}
 
     private final Design design;
     private final List<JudgedCondition> conditions;
+    private final Condition usual;
     private final Map<Setting, Solution> solutions = new HashMap<>();
     private final Map<Setting, Study> studies = new HashMap<>();
     private final Map<Setting, Solution> heldSolutions = new HashMap<>();
     private final Map<Setting, LoadResult> loads = new HashMap<>();
+    private final Map<Setting, LoadPeriod> periods = new HashMap<>();
     private final Map<Double, Design> heldDesigns = new HashMap<>();
     private final double leastOhms;
     private final double mostOhms;
@@ -41,6 +46,8 @@ final class Bench {
     Bench(Design design, OptionalDouble pinnedVolts, OptionalDouble pinnedCelsius) {
         this.design = design;
         this.conditions = JudgedCondition.of(design, pinnedVolts, pinnedCelsius);
+        this.usual = new Condition(
+                pinnedVolts.orElse(design.line().volts()), design.line().hertz(), pinnedCelsius.orElse(USUAL_CELSIUS));
         double atStart = design.ramp().rampOhms(0);
         double atEnd = design.ramp().rampOhms(1);
         this.leastOhms = Math.min(atStart, atEnd);
@@ -49,6 +56,11 @@ final class Bench {
 
     Design design() {
         return design;
+    }
+
+    /** Nominal line at 25 °C, or what was pinned. */
+    Condition usual() {
+        return usual;
     }
 
     List<JudgedCondition> conditions() {
@@ -105,6 +117,36 @@ final class Bench {
         return loads.computeIfAbsent(
                 new Setting(condition, rampOhms),
                 s -> LoadPower.of(design, s.condition(), solution(s.condition(), s.rampOhms())));
+    }
+
+    /**
+     * The load at its highest setting. Where the nominal thyristor is not turned on there, another one of its type may
+     * be: then every half cycle counts as fired by the first pulse.
+     */
+    LoadResult highestLoad(JudgedCondition at) {
+        LoadResult load = load(at.condition(), leastOhms);
+        Optional<Pulse> first = firstPulse(solution(at.condition(), leastOhms).shown());
+        return load.firedRad().isPresent() || first.isEmpty()
+                ? load
+                : LoadPower.atFiringAngle(design, at.condition(), first.get().startRad());
+    }
+
+    /**
+     * Where an inductive load is looked at: at every setting of the knob in the usual condition, at both ends elsewhere.
+     * Other loads are worst at the knob's high-power end.
+     */
+    List<Double> settingsThatMatter(Condition condition) {
+        if (!(design.load() instanceof Load.Inductive)) {
+            return List.of(leastOhms);
+        }
+        return condition.equals(usual) ? settings() : List.of(leastOhms, mostOhms);
+    }
+
+    /** The load's current itself. */
+    LoadPeriod period(Condition condition, double rampOhms) {
+        return periods.computeIfAbsent(
+                new Setting(condition, rampOhms),
+                s -> LoadPower.period(design, s.condition(), solution(s.condition(), s.rampOhms())));
     }
 
     Dissipation dissipation(Condition condition, double rampOhms) {

@@ -1,12 +1,14 @@
 package clipramp.margins;
 
 import clipramp.circuit.Design;
+import clipramp.circuit.Load;
 import clipramp.circuit.GateDrive.Polarity;
 import clipramp.circuit.Part;
 import clipramp.circuit.ThyristorDevice;
 import clipramp.circuit.ThyristorDevice.Kind;
 import clipramp.circuit.ThyristorDevice.Quadrant;
 import clipramp.firing.Pulse;
+import clipramp.power.PulseLength;
 import clipramp.gate.LatchingNeed;
 import clipramp.gate.TriggerNeed;
 import java.util.ArrayList;
@@ -15,7 +17,7 @@ import java.util.List;
 import java.util.OptionalDouble;
 import java.util.Set;
 
-/** What the thyristor asks of the pulse (model.md section 7). */
+/** What the thyristor asks of the pulse (DEVELOPERS.md, The circuit laws). */
 final class GateMargins {
     private final Bench bench;
     private final Design design;
@@ -186,6 +188,19 @@ final class GateMargins {
                 kind.sense(),
                 "pulse at " + Say.angle(pulse.startRad()) + ": " + Say.amps(pulse.anodeAmps())
                         + " as the gate current falls under I_GT; I_L " + Say.amps(needed - bleed)
-                        + (bleed > 0 ? " + " + Say.amps(bleed) + " that the gate circuit bleeds away" : ""));
+                        + (bleed > 0 ? " + " + Say.amps(bleed) + " that the gate circuit bleeds away" : "")
+                        + pulseNeeded(at, needed, pulse));
+    }
+
+    /** Through an inductance the current takes its time: how long the pulse would have to last for it. */
+    private String pulseNeeded(JudgedCondition at, double needed, Pulse pulse) {
+        if (!(design.load() instanceof Load.Inductive)) {
+            return "";
+        }
+        OptionalDouble seconds = PulseLength.secondsToReach(design, at.condition(), pulse.startRad(), needed);
+        return seconds.isEmpty()
+                ? "; the load never takes that much when fired there"
+                : "; the pulse lasts " + Say.seconds(pulse.aboveTriggerSeconds()) + " and would need "
+                        + Say.seconds(seconds.getAsDouble());
     }
 }

@@ -53,6 +53,7 @@ public final class Judge {
         margins.addAll(new RampMargins(bench, condition).all());
         margins.addAll(new BalanceMargins(bench, condition).all());
         margins.add(new AngleDrift(bench, condition).margin());
+        margins.addAll(new InductiveMargins(bench).all());
         margins.addAll(new GateMargins(bench).all());
         margins.addAll(new GateCeilings(bench).all());
         margins.addAll(new TransformerMargins(bench).all());

@@ -73,6 +73,14 @@ final class Say {
         return QuantityText.format(value, Unit.HERTZ, DIGITS);
     }
 
+    static String rate(double voltsPerSecond) {
+        return QuantityText.format(voltsPerSecond / 1e6, Unit.NUMBER, DIGITS) + " V/µs";
+    }
+
+    static String ampsSquaredSeconds(double value) {
+        return QuantityText.format(value, Unit.AMPERE_SQUARED_SECOND, DIGITS);
+    }
+
     static String number(double value) {
         return QuantityText.number(value, DIGITS);
     }

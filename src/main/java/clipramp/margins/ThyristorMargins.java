@@ -1,6 +1,7 @@
 package clipramp.margins;
 
 import clipramp.circuit.Design;
+import clipramp.circuit.Load;
 import clipramp.circuit.Stage;
 import clipramp.circuit.ThyristorDevice;
 import clipramp.firing.Pulse;
@@ -8,13 +9,14 @@ import clipramp.gate.LatchingNeed;
 import clipramp.power.HoldingGap;
 import clipramp.power.LoadPower;
 import clipramp.power.LoadResult;
+import clipramp.power.ReappliedVoltage;
 import clipramp.power.Thermal;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
 
-/** The thyristor against its ratings: voltage, currents, heat, turn-off (model.md sections 8 and 10). */
+/** The thyristor against its ratings: voltage, currents, heat, turn-off (DEVELOPERS.md, The circuit laws). */
 final class ThyristorMargins {
     private final Bench bench;
     private final Design design;
@@ -33,14 +35,14 @@ final class ThyristorMargins {
                 bench.conditions(),
                 device.limits().volts(),
                 unstated("limits.voltage"),
-                at -> design.line().crestVolts(at.condition().lineVolts()),
+                this::blockedVolts,
                 Say::volts));
         margins.add(Ceiling.over(
                 MarginKind.THYRISTOR_RMS,
                 bench.conditions(),
                 device.limits().rmsAmps(),
                 unstated("limits.rms"),
-                at -> load(at).thyristorRmsAmps(),
+                at -> bench.highestLoad(at).thyristorRmsAmps(),
                 Say::amps));
         // A triac has no mean rating: it carries both half cycles, and its sheet rates the rms current alone.
         if (device.kind() == ThyristorDevice.Kind.SCR) {
@@ -49,31 +51,36 @@ final class ThyristorMargins {
                     bench.conditions(),
                     device.limits().meanAmps(),
                     unstated("limits.mean"),
-                    at -> load(at).thyristorMeanAmps(),
+                    at -> bench.highestLoad(at).thyristorMeanAmps(),
                     Say::amps));
         }
         margins.add(junction());
-        if (design.stage() == Stage.BRIDGE_DC) {
+        if (recovers()) {
             margins.add(turnOff());
         }
+        margins.addAll(new SurgeMargins(bench).all());
         return margins;
+    }
+
+    /** A bridge gives the SCR no reverse voltage to recover under; an inductance leaves it little time to do so. */
+    private boolean recovers() {
+        boolean bridge = design.stage() == Stage.BRIDGE_DC || design.stage() == Stage.BRIDGE_AC;
+        boolean scr = device.kind() == ThyristorDevice.Kind.SCR;
+        return scr && (bridge || design.load() instanceof Load.Inductive);
+    }
+
+    /** The line's crest, or what comes back over the thyristor when an inductive load's current dies. */
+    private double blockedVolts(JudgedCondition at) {
+        return Math.max(
+                design.line().crestVolts(at.condition().lineVolts()),
+                InductiveMargins.reapplied(bench, at).stream()
+                        .mapToDouble(ReappliedVoltage::peakVolts)
+                        .max()
+                        .orElse(0));
     }
 
     private static String unstated(String key) {
         return "the profile states no thyristor.device." + key;
-    }
-
-    /**
-     * The load at its highest setting. Where the nominal thyristor is not turned on there, another one of its type may
-     * be: then every half cycle counts as fired by the first pulse.
-     */
-    private LoadResult load(JudgedCondition at) {
-        LoadResult load = bench.load(at.condition(), bench.leastOhms());
-        Optional<Pulse> first = Bench.firstPulse(
-                bench.solution(at.condition(), bench.leastOhms()).shown());
-        return load.watts() > 0 || first.isEmpty()
-                ? load
-                : LoadPower.atFiringAngle(design, at.condition(), first.get().startRad());
     }
 
     private Margin junction() {
@@ -86,7 +93,10 @@ final class ThyristorMargins {
             return Ceiling.unjudged(kind, unstated("junction-to-case"));
         }
         if (design.thyristor().caseToAmbientKelvinPerWatt().isEmpty()) {
-            return Ceiling.unjudged(kind, "the design states no thyristor.case-to-ambient");
+            HeatCheck heat = HeatCheck.of(bench);
+            return Ceiling.unjudged(
+                    kind,
+                    "the design states no thyristor.case-to-ambient; needed is " + sink(heat.sinkKelvinPerWatt()));
         }
         List<Finding> findings = new ArrayList<>();
         for (JudgedCondition at : bench.conditions()) {
@@ -95,22 +105,34 @@ final class ThyristorMargins {
         return Finding.worst(kind, findings);
     }
 
+    private static String sink(OptionalDouble kelvinPerWatt) {
+        if (kelvinPerWatt.isEmpty()) {
+            return "any sink";
+        }
+        return kelvinPerWatt.getAsDouble() > 0
+                ? Say.thermal(kelvinPerWatt.getAsDouble()) + " or less"
+                : "more than any sink can give: a larger thyristor";
+    }
+
     private Finding junction(JudgedCondition at, double most) {
         double inside = device.junctionToCaseKelvinPerWatt().orElseThrow();
         double outside = design.thyristor().caseToAmbientKelvinPerWatt().orElseThrow();
         double air = at.condition().celsius();
-        double watts = load(at).thyristorWatts();
-        double reached = Thermal.junctionCelsius(design.thyristor(), watts, air).orElseThrow();
-        double sink = Thermal.largestCaseToAmbient(most, air, watts, inside);
+        HeatCheck.Loss loss = HeatCheck.worstLoss(bench, at);
+        double reached = Thermal.junctionCelsius(design.thyristor(), loss.watts(), air).orElseThrow();
         return new Finding(
                 at.words(),
                 most - air,
                 reached - air,
                 MarginKind.JUNCTION_TEMPERATURE.sense(),
-                Say.watts(watts) + " x (" + Say.thermal(inside) + " + " + Say.thermal(outside) + ") = "
-                        + Say.kelvin(reached - air) + " over " + Say.celsius(air) + ": " + Say.celsius(reached)
-                        + "; limit " + Say.celsius(most)
-                        + (watts > 0 && sink > 0 ? ", reached with case-to-ambient " + Say.thermal(sink) : ""));
+                Say.watts(loss.watts()) + " (" + loss.where() + ") x (" + Say.thermal(inside) + " + "
+                        + Say.thermal(outside) + ") = " + Say.kelvin(reached - air) + " over " + Say.celsius(air) + ": "
+                        + Say.celsius(reached) + "; limit " + Say.celsius(most)
+                        + (loss.watts() > 0
+                                ? ", needs case-to-ambient "
+                                        + sink(OptionalDouble.of(
+                                                Thermal.largestCaseToAmbient(most, air, loss.watts(), inside)))
+                                : ""));
     }
 
     private Margin turnOff() {
@@ -127,15 +149,28 @@ final class ThyristorMargins {
             if (holding.isEmpty()) {
                 return Ceiling.unjudged(kind, unstated("holding"));
             }
-            double gap = HoldingGap.seconds(design, at.condition(), holding.getAsDouble());
-            findings.add(new Finding(
-                    at.words(),
-                    needed.getAsDouble(),
-                    gap,
-                    kind.sense(),
-                    "under I_H " + Say.amps(holding.getAsDouble()) + " for " + Say.seconds(gap)
-                            + " around the line's zero; t_q " + Say.seconds(needed.getAsDouble())));
+            for (double ohms : bench.settingsThatMatter(at.condition())) {
+                double gap = HoldingGap.seconds(
+                        design, at.condition(), bench.period(at.condition(), ohms), holding.getAsDouble());
+                findings.add(new Finding(
+                        at.words(), needed.getAsDouble(), gap, kind.sense(), gapText(ohms, gap, needed, holding)));
+            }
         }
         return Finding.worst(kind, findings);
+    }
+
+    private String gapText(double ohms, double gap, OptionalDouble needed, OptionalDouble holding) {
+        String setting = "R_E = " + Say.ohms(ohms) + ": ";
+        String asked = "; t_q " + Say.seconds(needed.orElseThrow());
+        if (design.stage() != Stage.BRIDGE_DC && design.stage() != Stage.BRIDGE_AC) {
+            return setting + "reversed by the line for " + Say.seconds(gap) + " after its current has died" + asked;
+        }
+        return gap == 0
+                ? setting + "the current stays in the SCR through the line's zero: it never turns off" + asked
+                : setting + "under I_H " + Say.amps(holding.orElseThrow()) + " for " + Say.seconds(gap)
+                        + (design.stage() == Stage.BRIDGE_AC && design.load() instanceof Load.Inductive
+                                ? " around the current's zero"
+                                : " around the line's zero")
+                        + asked;
     }
 }

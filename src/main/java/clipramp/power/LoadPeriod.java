@@ -1,5 +1,6 @@
 package clipramp.power;
 
+import java.util.ArrayList;
 import java.util.List;
 import java.util.OptionalDouble;
 
@@ -27,8 +28,25 @@ public record LoadPeriod(
         int missedHalves,
         boolean settled,
         boolean letsGo) {
+    /** Two stretches nearer than this follow each other without a gap, rad. */
+    private static final double NEXT_RAD = 1e-5;
+
     public LoadPeriod {
         spans = List.copyOf(spans);
+    }
+
+    /** Angles at which a current through the thyristor dies and none takes its place, rad. */
+    public List<Double> extinctionsRad() {
+        List<Double> ends = new ArrayList<>();
+        for (int i = 0; i < spans.size(); i++) {
+            CurrentSpan span = spans.get(i);
+            CurrentSpan next = spans.get((i + 1) % spans.size());
+            double nextFrom = next.fromRad() + (i + 1 == spans.size() ? spanRad : 0);
+            if (span.throughThyristor() && nextFrom - span.toRad() > NEXT_RAD) {
+                ends.add(span.toRad());
+            }
+        }
+        return ends;
     }
 
     /** Half cycles of the line in the span. */

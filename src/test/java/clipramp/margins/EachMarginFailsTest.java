@@ -7,9 +7,12 @@ import clipramp.circuit.Characteristic;
 import clipramp.circuit.Design;
 import clipramp.circuit.GateDrive.Polarity;
 import clipramp.circuit.Line;
+import clipramp.circuit.Load;
 import clipramp.circuit.SampleDesigns;
+import clipramp.circuit.Snubber;
 import clipramp.circuit.Surroundings;
 import clipramp.circuit.TemperatureCurve;
+import clipramp.circuit.ThyristorDevice;
 import clipramp.circuit.ThyristorDevice.NonTrigger;
 import clipramp.circuit.Wanted;
 import clipramp.circuit.Wanted.Goal;
@@ -52,6 +55,7 @@ class EachMarginFailsTest {
         settings();
         gates();
         ratings();
+        coils();
     }
 
     private void settings() {
@@ -203,6 +207,43 @@ class EachMarginFailsTest {
         breaks(
                 MarginKind.JUNCTION_TEMPERATURE,
                 Changed.with(heater, "thyristor.caseToAmbientKelvinPerWatt", OptionalDouble.of(20)));
+    }
+
+    /** A triac on a coil of 25 degrees, behind a snubber; the knob begins beyond its angle. */
+    private static Design coil(Design heater) {
+        Design design = heater.withLoad(new Load.Inductive(40, 0.06, Optional.empty()))
+                .withSnubber(Optional.of(new Snubber(100, 220e-9)))
+                .withRamp(SampleDesigns.ramp(220e-9, 5_600, 27_000))
+                .withWanted(new Wanted(Optional.empty(), Optional.empty()));
+        design = latching(design, 10e-3);
+        design = Changed.with(design, THYRISTOR + "volts", OptionalDouble.of(1200));
+        design = Changed.with(design, THYRISTOR + "voltsPerSecond", OptionalDouble.of(50e6));
+        design = Changed.with(design, "trigger.baseOne.value", 100.0);
+        return Changed.with(
+                design, "thyristor.device.commutating", Optional.of(new ThyristorDevice.Commutating(20e6, 80)));
+    }
+
+    private void coils() {
+        Design triac = coil(SampleDesigns.triacHeater());
+        Design two = coil(SampleDesigns.inverseParallelHeater());
+        Design early = triac.withRamp(SampleDesigns.ramp(150e-9, 5_600, 27_000));
+        breaks(MarginKind.CONTROL_RANGE, early);
+        breaks(
+                MarginKind.MISSED_HALF_CYCLES,
+                // A device that stays on makes one pulse only, and no train rescues what that one missed.
+                Changed.with(early, "trigger.device.valley.amps", Characteristic.exactly(1e-4)),
+                MarginKind.LATCHED_ON,
+                MarginKind.DC_IN_LOAD);
+        breaks(MarginKind.COMMUTATING_DVDT, triac.withSnubber(Optional.empty()));
+        breaks(
+                MarginKind.OFF_STATE_DVDT,
+                two.withSnubber(Optional.empty()),
+                // The secondaries' half ohm shorts the conducting gates.
+                MarginKind.SILENT,
+                MarginKind.LATCHING_EARLIEST,
+                MarginKind.LATCHING_LATEST);
+        breaks(MarginKind.SURGE_CURRENT, THYRISTOR + "surgeAmps", 5);
+        breaks(MarginKind.SURGE_ENERGY, THYRISTOR + "ampsSquaredSeconds", 0.1);
     }
 
     private static Check check(Design design) {
