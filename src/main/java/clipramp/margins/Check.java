@@ -21,6 +21,8 @@ import java.util.OptionalDouble;
  * @param margins every margin, worst first
  * @param verdict the worst of them
  * @param notes what else to know: assumptions of the model that matter here, data that were extended
+ * @param lineCurrent the line current beside the tables for it, usual condition; always there from the judge
+ * @param heat the thyristor's heat at its worst; always there from the judge
  */
 public record Check(
         Design design,
@@ -31,7 +33,9 @@ public record Check(
         OptionalDouble clipFromRad,
         List<Margin> margins,
         Verdict verdict,
-        List<Note> notes) {
+        List<Note> notes,
+        Optional<LineCheck> lineCurrent,
+        Optional<HeatCheck> heat) {
     /**
      * @param atKnob knob position of the pulse, 0..1; empty for a fixed ramp
      * @param pulse the pulse
@@ -39,6 +43,31 @@ public record Check(
      * @param quiescentGateVolts gate voltage between pulses at its highest, V
      */
     public record PulseSummary(OptionalDouble atKnob, Pulse pulse, double meanGateWatts, double quiescentGateVolts) {}
+
+    /** A check without line current and heat. */
+    public Check(
+            Design design,
+            Condition condition,
+            List<OperatingPoint> knob,
+            Optional<PulseSummary> pulse,
+            Dissipation dissipation,
+            OptionalDouble clipFromRad,
+            List<Margin> margins,
+            Verdict verdict,
+            List<Note> notes) {
+        this(
+                design,
+                condition,
+                knob,
+                pulse,
+                dissipation,
+                clipFromRad,
+                margins,
+                verdict,
+                notes,
+                Optional.empty(),
+                Optional.empty());
+    }
 
     public Check {
         knob = List.copyOf(knob);

@@ -45,7 +45,9 @@ public final class Judge {
                 middle.shown().clipFromRad(),
                 margins,
                 margins.get(0).verdict(),
-                new Notes(bench, condition).all());
+                new Notes(bench, condition).all(),
+                Optional.of(LineCheck.of(bench, condition)),
+                Optional.of(HeatCheck.of(bench)));
     }
 
     private static List<Margin> margins(Bench bench, Condition condition) {

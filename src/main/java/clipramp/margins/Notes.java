@@ -42,6 +42,7 @@ final class Notes {
         gateEnergy();
         latchedOn();
         stage();
+        notes.addAll(new LoadNotes(bench, usual).all());
         return List.copyOf(notes);
     }
 

@@ -1,0 +1,77 @@
+package clipramp.margins;
+
+import java.util.OptionalDouble;
+
+/** A table of IEC 61000-3-2: the largest rms current of an order that equipment of a class may draw. */
+public enum LineTable {
+    /** Amperes, whatever the equipment's power: class A, 230 V. */
+    CLASS_A("class A", "IEC 61000-3-2, table 1") {
+        @Override
+        public OptionalDouble limitAmps(int order, double fundamentalAmps, double powerFactor) {
+            return OptionalDouble.of(order % 2 == 0 ? even(order) : odd(order));
+        }
+
+        private static double odd(int order) {
+            return switch (order) {
+                case 3 -> 2.30;
+                case 5 -> 1.14;
+                case 7 -> 0.77;
+                case 9 -> 0.40;
+                case 11 -> 0.33;
+                case 13 -> 0.21;
+                default -> 0.15 * 15 / order;
+            };
+        }
+
+        private static double even(int order) {
+            return switch (order) {
+                case 2 -> 1.08;
+                case 4 -> 0.43;
+                case 6 -> 0.30;
+                default -> 0.23 * 8 / order;
+            };
+        }
+    },
+    /** Shares of the fundamental: lighting equipment above 25 W, as up to edition 4. */
+    CLASS_C("class C", "IEC 61000-3-2 to edition 4, table 2") {
+        @Override
+        public OptionalDouble limitAmps(int order, double fundamentalAmps, double powerFactor) {
+            return switch (order) {
+                case 2 -> OptionalDouble.of(0.02 * fundamentalAmps);
+                case 3 -> OptionalDouble.of(0.30 * powerFactor * fundamentalAmps);
+                case 5 -> OptionalDouble.of(0.10 * fundamentalAmps);
+                case 7 -> OptionalDouble.of(0.07 * fundamentalAmps);
+                case 9 -> OptionalDouble.of(0.05 * fundamentalAmps);
+                default -> order % 2 == 0 || order > 39
+                        ? OptionalDouble.empty()
+                        : OptionalDouble.of(0.03 * fundamentalAmps);
+            };
+        }
+    };
+
+    private final String title;
+    private final String source;
+
+    LineTable(String title, String source) {
+        this.title = title;
+        this.source = source;
+    }
+
+    /** Such as "class A". */
+    public String title() {
+        return title;
+    }
+
+    /** Standard and table. */
+    public String source() {
+        return source;
+    }
+
+    /**
+     * @param order 2 to 40
+     * @param fundamentalAmps rms of the fundamental, A
+     * @param powerFactor true power factor, 0..1
+     * @return A rms; empty where the table has no limit for the order
+     */
+    public abstract OptionalDouble limitAmps(int order, double fundamentalAmps, double powerFactor);
+}
