@@ -16,7 +16,9 @@ final class CheckJson {
             json.putObjects("knob", check.knob(), KnobJson::write)
                     .putObject("pulse", check.pulse(), CheckJson::writePulse)
                     .putObject("supply", supply -> writeSupply(supply, check))
-                    .putObjects("margins", check.margins(), CheckJson::writeMargin);
+                    .putObjects("margins", check.margins(), CheckJson::writeMargin)
+                    .putObject("lineCurrent", check.lineCurrent(), LineJson::write)
+                    .putObject("heat", check.heat(), LineJson::writeHeat);
         });
     }
 

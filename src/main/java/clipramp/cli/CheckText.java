@@ -41,6 +41,8 @@ final class CheckText {
         out.line("");
         pulse();
         supply();
+        check.heat().ifPresent(heat -> LineText.printHeat(out, heat));
+        check.lineCurrent().ifPresent(current -> LineText.print(out, current));
         footing(out, loaded, check.notes());
     }
 

@@ -26,7 +26,12 @@ final class KnobCsv {
                         "pulses per half cycle",
                         "state",
                         "latches",
-                        "end pulse (deg)"));
+                        "end pulse (deg)",
+                        "current from (deg)",
+                        "current until (deg)",
+                        "missed half cycles",
+                        "direct current (A)",
+                        "light (% of rated)"));
         points.forEach(point -> csv.words(row(point)));
         return csv.text();
     }
@@ -47,7 +52,12 @@ final class KnobCsv {
                 Csv.number(half.pulses().size()),
                 point.solution().state().word(),
                 pulse.map(Pulse::latches).orElse(false) ? "yes" : "no",
-                figure(half.endPulse(), p -> Math.toDegrees(p.startRad())));
+                figure(half.endPulse(), p -> Math.toDegrees(p.startRad())),
+                Csv.number(Math.toDegrees(point.load().firedRad().orElse(Double.NaN))),
+                Csv.number(Math.toDegrees(point.load().extinctionRad().orElse(Double.NaN))),
+                Csv.number(point.load().missedHalves()),
+                Csv.number(point.load().dcAmps()),
+                Csv.number(100 * point.load().lightShare().orElse(Double.NaN)));
     }
 
     private static String figure(Optional<Pulse> pulse, ToDoubleFunction<Pulse> figure) {

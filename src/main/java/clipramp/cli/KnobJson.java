@@ -31,7 +31,13 @@ final class KnobJson {
                 .put("latches", pulse.isPresent() && pulse.get().latches())
                 .put("endPulseDeg", degrees(shown.endPulse(), Pulse::startRad));
         writeFirstPulse(json, shown);
-        json.put("dcAmps", load.dcAmps());
+        json.put("dcAmps", load.dcAmps())
+                .put("currentFromDeg", Math.toDegrees(load.firedRad().orElse(Double.NaN)))
+                .put("currentUntilDeg", Math.toDegrees(load.extinctionRad().orElse(Double.NaN)))
+                .put("missedHalfCycles", load.missedHalves())
+                .put("ofHalfCycles", load.halfCycles())
+                .put("powerFactor", load.powerFactor())
+                .put("lightShare", load.lightShare());
         writeHalves(json, solution, load);
     }
 

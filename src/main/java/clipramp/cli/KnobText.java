@@ -51,7 +51,7 @@ final class KnobText {
                 watts.of(point.load().watts()),
                 Shown.fixed(100 * point.load().fraction(), 1),
                 Integer.toString(half.pulses().size()),
-                state(point.solution()));
+                state(point));
     }
 
     /** Whole percents where they are whole. */
@@ -64,6 +64,14 @@ final class KnobText {
     }
 
     /** The state in words, and whether the thyristor stays on. */
+    private static String state(OperatingPoint point) {
+        String state = state(point.solution());
+        int missed = point.load().missedHalves();
+        return missed == 0
+                ? state
+                : state + ", misses " + missed + " of " + point.load().halfCycles() + " half cycles";
+    }
+
     static String state(Solution solution) {
         String state = solution.state().word();
         Optional<Pulse> pulse = solution.shown().shownPulse();

@@ -1,16 +1,16 @@
 package clipramp.margins;
 
 import clipramp.circuit.Design;
-import clipramp.circuit.Load;
 import clipramp.circuit.GateDrive.Polarity;
+import clipramp.circuit.Load;
 import clipramp.circuit.Part;
 import clipramp.circuit.ThyristorDevice;
 import clipramp.circuit.ThyristorDevice.Kind;
 import clipramp.circuit.ThyristorDevice.Quadrant;
 import clipramp.firing.Pulse;
-import clipramp.power.PulseLength;
 import clipramp.gate.LatchingNeed;
 import clipramp.gate.TriggerNeed;
+import clipramp.power.PulseLength;
 import java.util.ArrayList;
 import java.util.LinkedHashSet;
 import java.util.List;

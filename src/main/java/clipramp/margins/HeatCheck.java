@@ -46,7 +46,8 @@ public record HeatCheck(
             OptionalDouble reached = Thermal.junctionCelsius(
                     design.thyristor(), loss.watts(), at.condition().celsius());
             if (reached.isPresent()) {
-                junction = OptionalDouble.of(Math.max(reached.getAsDouble(), junction.orElse(Double.NEGATIVE_INFINITY)));
+                junction =
+                        OptionalDouble.of(Math.max(reached.getAsDouble(), junction.orElse(Double.NEGATIVE_INFINITY)));
             }
             OptionalDouble needed = sinkNeeded(design, at.condition(), loss.watts());
             if (needed.isPresent()) {

@@ -82,8 +82,7 @@ final class InductiveMargins {
         for (JudgedCondition at : bench.conditions()) {
             for (double ohms : bench.settingsThatMatter(at.condition())) {
                 LoadResult load = bench.load(at.condition(), ohms);
-                findings.add(
-                        new Finding(at.words(), 0, load.missedHalves(), kind.sense(), missedText(at, ohms, load)));
+                findings.add(new Finding(at.words(), 0, load.missedHalves(), kind.sense(), missedText(at, ohms, load)));
             }
         }
         return Finding.worst(kind, findings);
@@ -103,8 +102,8 @@ final class InductiveMargins {
                 ? " flows until " + Say.angle(load.extinctionRad().getAsDouble() - Math.PI) + " of the next half cycle"
                 : " never dies";
         String spent = pulses.size() == 1
-                ? "the pulse at " + Say.angle(pulses.get(0).startRad()) + ", " + Say.seconds(pulses.get(0).aboveTriggerSeconds())
-                        + " long, is spent by then"
+                ? "the pulse at " + Say.angle(pulses.get(0).startRad()) + ", "
+                        + Say.seconds(pulses.get(0).aboveTriggerSeconds()) + " long, is spent by then"
                 : "all " + pulses.size() + " pulses are spent by then";
         return setting + "the current of one half cycle" + old + "; " + spent + ": " + load.missedHalves() + " of "
                 + load.halfCycles() + " half cycles missed, dc " + Say.amps(Math.abs(load.dcAmps()));
@@ -124,7 +123,8 @@ final class InductiveMargins {
                         limit.getAsDouble(),
                         back.voltsPerSecond(),
                         kind.sense(),
-                        "the current dies with the line at " + Say.volts(back.stepVolts()) + ", which comes back at up to "
+                        "the current dies with the line at " + Say.volts(back.stepVolts())
+                                + ", which comes back at up to "
                                 + Say.rate(back.voltsPerSecond()) + " and reaches " + Say.volts(back.peakVolts())
                                 + (back.snubbed()
                                         ? " behind the snubber"

@@ -120,7 +120,8 @@ public record LineCheck(List<Setting> settings, int worst, List<Order> orders, L
         }
         int worst = 0;
         for (int i = 1; i < settings.size(); i++) {
-            if (mostUsed(settings.get(i).current()) > mostUsed(settings.get(worst).current())) {
+            if (mostUsed(settings.get(i).current())
+                    > mostUsed(settings.get(worst).current())) {
                 worst = i;
             }
         }

@@ -18,6 +18,11 @@ final class LineRules {
     private static final String CLAUSE = "IEC 61000-3-2, general requirements (clause 6.1; its number from memory)";
     private static final String SCOPE = "IEC 61000-3-2, limits (clause 7; its number from memory)";
 
+    /** Nominal voltages, line to neutral, that the tables are made for. */
+    private static final double LEAST_PUBLIC_VOLTS = 220;
+
+    private static final double MOST_PUBLIC_VOLTS = 240;
+
     private final Design design;
     private final double fullWatts;
     private final List<Setting> settings;
@@ -34,6 +39,15 @@ final class LineRules {
 
     List<Rule> all() {
         List<Rule> rules = new ArrayList<>();
+        double volts = design.line().volts();
+        if (volts < LEAST_PUBLIC_VOLTS || volts > MOST_PUBLIC_VOLTS) {
+            rules.add(free(
+                    "line-voltage",
+                    "line voltage",
+                    "The tables are made for public supplies of " + Say.volts(LEAST_PUBLIC_VOLTS) + " to "
+                            + Say.volts(MOST_PUBLIC_VOLTS) + "; this line has " + Say.volts(volts)
+                            + ". What follows is for orientation."));
+        }
         if (LineCheck.isAsymmetrical(design)) {
             rules.add(asymmetrical());
         } else if (LineCheck.isHeating(design)) {
@@ -55,8 +69,9 @@ final class LineRules {
             rules.add(free(
                     "professional",
                     "professional equipment",
-                    "Professional equipment above " + Say.watts(LineCheck.LARGE_WATTS) + " has no limits here; this load"
-                            + " takes " + Say.watts(fullWatts) + ". Anything that is not professional has."));
+                    "Professional equipment above " + Say.watts(LineCheck.LARGE_WATTS)
+                            + " has no limits here; this load" + " takes " + Say.watts(fullWatts)
+                            + ". Anything that is not professional has."));
         }
         return rules;
     }
@@ -68,7 +83,8 @@ final class LineRules {
     private Rule asymmetrical() {
         boolean small = mostWatts <= LineCheck.ASYMMETRICAL_WATTS;
         String rule = "Half-wave rectification of the line and asymmetrical control are let through up to "
-                + Say.watts(LineCheck.ASYMMETRICAL_WATTS) + " and in special cases only; this stage gives its load up to "
+                + Say.watts(LineCheck.ASYMMETRICAL_WATTS)
+                + " and in special cases only; this stage gives its load up to "
                 + Say.watts(mostWatts) + (small ? "." : ". It is out before any table is looked at.");
         return new Rule(
                 "asymmetrical",
@@ -150,8 +166,8 @@ final class LineRules {
             return free(
                     "dimmer",
                     "independent dimmer",
-                    "An independent dimmer for incandescent lamps has no limits up to " + Say.watts(LineCheck.LARGE_WATTS)
-                            + "; these lamps take " + Say.watts(fullWatts) + ".");
+                    "An independent dimmer for incandescent lamps has no limits up to "
+                            + Say.watts(LineCheck.LARGE_WATTS) + "; these lamps take " + Say.watts(fullWatts) + ".");
         }
         Order binding = binding();
         return new Rule(
@@ -198,8 +214,7 @@ final class LineRules {
     }
 
     private static double usedOfClassC(LineCurrent current, int order) {
-        OptionalDouble limit =
-                LineTable.CLASS_C.limitAmps(order, current.fundamentalAmps(), current.powerFactor());
+        OptionalDouble limit = LineTable.CLASS_C.limitAmps(order, current.fundamentalAmps(), current.powerFactor());
         return limit.isPresent() && limit.getAsDouble() > 0 ? current.ampsOf(order) / limit.getAsDouble() : 0;
     }
 }

@@ -42,9 +42,8 @@ public enum LineTable {
                 case 5 -> OptionalDouble.of(0.10 * fundamentalAmps);
                 case 7 -> OptionalDouble.of(0.07 * fundamentalAmps);
                 case 9 -> OptionalDouble.of(0.05 * fundamentalAmps);
-                default -> order % 2 == 0 || order > 39
-                        ? OptionalDouble.empty()
-                        : OptionalDouble.of(0.03 * fundamentalAmps);
+                default ->
+                    order % 2 == 0 || order > 39 ? OptionalDouble.empty() : OptionalDouble.of(0.03 * fundamentalAmps);
             };
         }
     };

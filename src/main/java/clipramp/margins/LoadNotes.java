@@ -51,7 +51,8 @@ final class LoadNotes {
         LoadResult dimmest = bench.load(usual, bench.mostOhms());
         add(
                 "filament",
-                "The lamp's power goes as V^" + Say.number(filament.exponent()) + ", its light about as V^3.4 (handbook):"
+                "The lamp's power goes as V^" + Say.number(filament.exponent())
+                        + ", its light about as V^3.4 (handbook):"
                         + " from " + Say.share(dimmest.lightShare().orElse(0)) + " to "
                         + Say.share(brightest.lightShare().orElse(0))
                         + " of its light at rated voltage over the knob's travel. Latching is judged at its rated, hot"
@@ -101,7 +102,8 @@ final class LoadNotes {
                     "The snubber leaks " + Say.amps(duty.leakageAmps()) + " past a thyristor that is off ("
                             + Say.watts(duty.leakageWatts()) + " in the load), warms its resistor by up to "
                             + Say.watts(duty.resistorWatts()) + ", and discharges with up to "
-                            + Say.amps(duty.dischargeAmps()) + " into the thyristor as it fires (high line, at the crest)."
+                            + Say.amps(duty.dischargeAmps())
+                            + " into the thyristor as it fires (high line, at the crest)."
                             + " Its capacitor stands across the line: take an X class (IEC 60384-14).");
         });
     }
@@ -116,7 +118,8 @@ final class LoadNotes {
                 add(
                         "gate-shunt-share",
                         "At V_GT " + Say.volts(need.volts()) + " of the coldest junction the gate shunt of "
-                                + Say.ohms(part.value()) + " takes " + Say.amps(amps) + ", " + Say.number(amps / need.amps())
+                                + Say.ohms(part.value()) + " takes " + Say.amps(amps) + ", "
+                                + Say.number(amps / need.amps())
                                 + " times I_GT: the drive supplies both, and the margins count it so.");
             }
         });

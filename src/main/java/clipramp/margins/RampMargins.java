@@ -219,9 +219,8 @@ final class RampMargins {
         List<Finding> findings = new ArrayList<>();
         for (JudgedCondition at : bench.conditions()) {
             Solution solution = bench.solution(at.condition(), bench.leastOhms());
-            boolean fires = bench.load(at.condition(), bench.leastOhms())
-                    .firedRad()
-                    .isPresent();
+            boolean fires =
+                    bench.load(at.condition(), bench.leastOhms()).firedRad().isPresent();
             findings.add(new Finding(
                     at.words(),
                     0,

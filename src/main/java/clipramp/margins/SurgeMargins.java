@@ -59,8 +59,7 @@ final class SurgeMargins {
         if (stated.isEmpty() && limits.surgeAmps().isEmpty()) {
             return Ceiling.unjudged(kind, "the profile states neither thyristor.device.limits.i2t nor surge");
         }
-        double limit = stated.orElseGet(
-                () -> Math.pow(limits.surgeAmps().getAsDouble(), 2) / (4 * RATED_HERTZ));
+        double limit = stated.orElseGet(() -> Math.pow(limits.surgeAmps().getAsDouble(), 2) / (4 * RATED_HERTZ));
         List<Finding> findings = new ArrayList<>();
         for (JudgedCondition at : bench.conditions()) {
             Inrush inrush = Objects.requireNonNull(inrushes.get(at));

@@ -4,16 +4,12 @@ import clipramp.circuit.Design;
 import clipramp.circuit.Load;
 import clipramp.circuit.Stage;
 import clipramp.circuit.ThyristorDevice;
-import clipramp.firing.Pulse;
 import clipramp.gate.LatchingNeed;
 import clipramp.power.HoldingGap;
-import clipramp.power.LoadPower;
-import clipramp.power.LoadResult;
 import clipramp.power.ReappliedVoltage;
 import clipramp.power.Thermal;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Optional;
 import java.util.OptionalDouble;
 
 /** The thyristor against its ratings: voltage, currents, heat, turn-off (DEVELOPERS.md, The circuit laws). */
@@ -119,7 +115,8 @@ final class ThyristorMargins {
         double outside = design.thyristor().caseToAmbientKelvinPerWatt().orElseThrow();
         double air = at.condition().celsius();
         HeatCheck.Loss loss = HeatCheck.worstLoss(bench, at);
-        double reached = Thermal.junctionCelsius(design.thyristor(), loss.watts(), air).orElseThrow();
+        double reached =
+                Thermal.junctionCelsius(design.thyristor(), loss.watts(), air).orElseThrow();
         return new Finding(
                 at.words(),
                 most - air,

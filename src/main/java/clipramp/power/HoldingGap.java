@@ -99,10 +99,7 @@ public final class HoldingGap {
             }
             double slope = loop.freewheel().map(d -> d.slopeOhms()).orElse(0.0);
             double volts = loop.freewheel().map(d -> d.dropVolts()).orElse(0.0);
-            double needed = loop.dropVolts()
-                    + loop.dropOhms() * holdingAmps
-                    - volts
-                    - slope * (carried - holdingAmps);
+            double needed = loop.dropVolts() + loop.dropOhms() * holdingAmps - volts - slope * (carried - holdingAmps);
             least = Math.min(
                     least,
                     needed <= 0 ? 0 : aroundRad(rad -> Math.abs(loop.line().voltsAt(rad)) / needed, zero, 1));
@@ -128,8 +125,8 @@ public final class HoldingGap {
             if (span.amps().applyAsDouble(end) > holdingAmps / 2 || span.toRad() - span.fromRad() < STEP_RAD) {
                 continue;
             }
-            double before = reachRad(
-                    rad -> span.amps().applyAsDouble(Math.max(span.fromRad(), end - rad)), holdingAmps);
+            double before =
+                    reachRad(rad -> span.amps().applyAsDouble(Math.max(span.fromRad(), end - rad)), holdingAmps);
             double after = Math.PI / 2;
             if (loop.drivingVolts(end) > 0) {
                 InductiveCurrent next = loop.throughThyristor(end, loop.directionAt(end), 0);

@@ -16,6 +16,7 @@ import clipramp.engine.InductiveCurrent;
  */
 public record Inrush(double peakAmps, double ampsSquaredSeconds, double coldOhms) {
     private static final double STEP_RAD = Math.toRadians(5);
+    private static final double LATER_RAD = 2e-5;
 
     /** The worst first half cycle at a line voltage. */
     public static Inrush worst(Design design, Condition condition) {
@@ -38,7 +39,9 @@ public record Inrush(double peakAmps, double ampsSquaredSeconds, double coldOhms
         int order = SpanTotals.highestOrder(design.line());
         double peak = 0;
         double square = 0;
-        for (double rad = 0; rad <= Math.PI / 2; rad += STEP_RAD) {
+        // The earliest angle at which the line drives it, or a thousandth of a degree later.
+        double earliest = Math.asin(Math.min(1, loop.dropVolts() / (Math.sqrt(2) * condition.lineVolts())));
+        for (double rad = earliest + LATER_RAD; rad <= Math.PI / 2; rad += STEP_RAD) {
             if (loop.drivingVolts(rad) <= 0) {
                 continue;
             }

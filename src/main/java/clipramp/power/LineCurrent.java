@@ -54,9 +54,7 @@ public record LineCurrent(
      */
     public static LineCurrent of(Design design, Condition condition, LoadPeriod period) {
         return new Sums(new LineWave(design.line(), condition), period)
-                .current(
-                        condition.lineVolts() * design.line().rmsFactor(),
-                        SpanTotals.highestOrder(design.line()));
+                .current(condition.lineVolts() * design.line().rmsFactor(), SpanTotals.highestOrder(design.line()));
     }
 
     /** Rms of one order, 1 to 40, A. */

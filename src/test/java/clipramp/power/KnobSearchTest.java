@@ -98,7 +98,9 @@ class KnobSearchTest {
         double drop = 1.0 + 2 * 0.9;
         double ohms = HEATER.load().resistanceOhms() + 0.02;
         double rad = 2 * Math.asin((30e-3 * ohms + drop) / (Math.sqrt(2) * 230));
-        assertThat(HoldingGap.seconds(HEATER, NOMINAL, LoadPower.periodAtFiringAngle(HEATER, NOMINAL, 0), 30e-3)).isCloseTo(rad / NOMINAL.omega(), within(1e-12));
-        assertThat(HoldingGap.seconds(HEATER, NOMINAL, LoadPower.periodAtFiringAngle(HEATER, NOMINAL, 0), 100)).isCloseTo(0.01, within(1e-12));
+        assertThat(HoldingGap.seconds(HEATER, NOMINAL, LoadPower.periodAtFiringAngle(HEATER, NOMINAL, 0), 30e-3))
+                .isCloseTo(rad / NOMINAL.omega(), within(1e-12));
+        assertThat(HoldingGap.seconds(HEATER, NOMINAL, LoadPower.periodAtFiringAngle(HEATER, NOMINAL, 0), 100))
+                .isCloseTo(0.01, within(1e-12));
     }
 }

@@ -35,7 +35,8 @@ class LineCurrentTest {
             LineCurrent current = current(heater, a);
             for (int n = 3; n <= 39; n += 2) {
                 double sine = (Math.sin((n + 1) * a) / (n + 1) - Math.sin((n - 1) * a) / (n - 1)) / Math.PI;
-                double cosine = ((Math.cos((n + 1) * a) - 1) / (n + 1) + (1 - Math.cos((n - 1) * a)) / (n - 1)) / Math.PI;
+                double cosine =
+                        ((Math.cos((n + 1) * a) - 1) / (n + 1) + (1 - Math.cos((n - 1) * a)) / (n - 1)) / Math.PI;
                 assertThat(current.ampsOf(n))
                         .as("order " + n + " at " + degrees)
                         .isCloseTo(full * Math.hypot(sine, cosine), within(1e-12));
@@ -74,8 +75,8 @@ class LineCurrentTest {
 
     @Test
     void everyStageAndLoadAgreesWithAFastFourierTransformOfItsSampledCurrent() {
-        Line distorted = new Line(
-                230, 50, 207, 253, List.of(new Line.Harmonic(5, 0.06, 1), new Line.Harmonic(7, 0.05, 2)));
+        Line distorted =
+                new Line(230, 50, 207, 253, List.of(new Line.Harmonic(5, 0.06, 1), new Line.Harmonic(7, 0.05, 2)));
         // On the sampling grid, so that the sample on the jump can be given its middle value.
         double rad = 2 * Math.PI * (SAMPLES / 5) / SAMPLES;
         // Without drops the diode takes over at the line's zero, which is on the grid too.
@@ -98,8 +99,8 @@ class LineCurrentTest {
     private static void compare(Design design, double rad) {
         LoadPeriod period = LoadPower.periodAtFiringAngle(design, EUROPE, rad);
         LineCurrent current = LineCurrent.of(design, EUROPE, period);
-        Complex[] spectrum = new FastFourierTransformer(DftNormalization.STANDARD)
-                .transform(sampled(period), TransformType.FORWARD);
+        Complex[] spectrum =
+                new FastFourierTransformer(DftNormalization.STANDARD).transform(sampled(period), TransformType.FORWARD);
         double within = 1e-6 * current.fundamentalAmps();
         assertThat(current.dcAmps()).isCloseTo(spectrum[0].getReal() / SAMPLES, within(within));
         for (int order = 1; order <= 40; order++) {
