@@ -21,6 +21,9 @@ public final class SwiftFiring {
 
     private static final double SAME_VOLTS = 1e-10;
 
+    /** How many times more bent it may be near its fixed point than between two half cycles. */
+    private static final double MORE_BENT = 5;
+
     /** Farther than this the half cycle's map may be on another branch, V. */
     private static final double NEAR_VOLTS = 0.01;
 
@@ -100,6 +103,7 @@ public final class SwiftFiring {
         double voltsBefore = 0;
         double endBefore = 0;
         int courseBefore = 0;
+        double keptBefore = Double.NaN;
         for (int pass = 0; pass < MOST_PASSES; pass++) {
             if (!run(mode, volts, pass == 0, 0)) {
                 return false;
@@ -124,14 +128,14 @@ public final class SwiftFiring {
                 boolean sameCourse = pass > 0 && course == courseBefore;
                 boolean confirmed = sameCourse && (mode == Mode.ON || pass > 1);
                 next = sameCourse ? volts + step : end;
-                double left = followed ? Math.abs(kept) * step * step * BENT : Math.abs(kept * (end - volts));
-                if (confirmed
-                        && endMode == mode
-                        && Math.abs(step) < NEAR_VOLTS
-                        && left * sensitivity() < LEFT_SECONDS) {
+                double change = Math.abs((kept - keptBefore) / (volts - voltsBefore));
+                double bend = Math.max(BENT * Math.abs(kept), MORE_BENT * (Double.isNaN(change) ? 0 : change));
+                double left = followed ? bend * step * step : Math.abs(kept * (end - volts));
+                if (confirmed && endMode == mode && Math.abs(step) < NEAR_VOLTS && left * sensitivity() < LEFT_SECONDS) {
                     return (Double.isNaN(firedSeconds) || fireFrom(mode, next)) && settled(mode, next);
                 }
             }
+            keptBefore = kept;
             courseBefore = course;
             modeBefore = mode;
             voltsBefore = volts;
