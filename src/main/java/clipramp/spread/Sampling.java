@@ -21,6 +21,9 @@ final class Sampling {
     final FiringState[][] states;
     final boolean[] off;
     private final boolean[] holds;
+    private final int[] counts = new int[Histogram.BINS];
+    private final int middle;
+    private final double position;
     private int done;
 
     Sampling(Lot lot, double[] trackShares, int samples) {
@@ -32,6 +35,8 @@ final class Sampling {
         states = new FiringState[shares.length][samples];
         off = new boolean[shares.length * samples];
         holds = new boolean[samples];
+        middle = shares.length / 2;
+        position = shares.length == 1 ? 0 : (double) middle / (shares.length - 1);
     }
 
     void run(Watch watch) {
@@ -44,8 +49,16 @@ final class Sampling {
             IntStream.range(0, chunks)
                     .parallel()
                     .forEach(c -> chunk(from + c * CHUNK, Math.min(to, from + (c + 1) * CHUNK)));
+            count(from, to);
             done = to;
             watch.progress(done, samples);
+            watch.drawn(new Histogram(position, done, counts));
+        }
+    }
+
+    private void count(int from, int to) {
+        for (int i = from; i < to; i++) {
+            counts[Histogram.bin(fraction[middle][i])]++;
         }
     }
 

@@ -16,6 +16,9 @@ public interface Watch {
     /** So many units of so many are drawn. */
     void progress(int done, int of);
 
+    /** How the units drawn so far lie at mid-knob; told after {@link #progress}. */
+    default void drawn(Histogram midKnob) {}
+
     /** Whether to stop and tell what there is. */
     boolean isCancelled();
 }

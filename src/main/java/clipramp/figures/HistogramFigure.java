@@ -1,0 +1,85 @@
+package clipramp.figures;
+
+import clipramp.spread.Histogram;
+import java.awt.Graphics2D;
+import java.awt.geom.Rectangle2D;
+import java.util.ArrayList;
+import java.util.List;
+import org.jfree.chart.axis.NumberAxis;
+
+/**
+ * How many units get how much power at one knob position.
+ *
+ * @param histogram the counts, of a run that may still go on
+ */
+public record HistogramFigure(Histogram histogram) implements Figure {
+    private static final double HEADROOM = 1.08;
+
+    @Override
+    public String title() {
+        return "Units by their power at knob " + Numerals.plain(100 * histogram.position()) + " %";
+    }
+
+    @Override
+    public String sentence() {
+        int[] counts = histogram.counts();
+        int fullest = 0;
+        for (int i = 1; i < counts.length; i++) {
+            fullest = counts[i] > counts[fullest] ? i : fullest;
+        }
+        return "Of " + histogram.units() + " units drawn, most (" + counts[fullest] + ") get between "
+                + Numerals.plain(edge(fullest)) + " % and " + Numerals.plain(edge(fullest + 1)) + " % of full power.";
+    }
+
+    private static double edge(int bin) {
+        return 100.0 * bin / Histogram.BINS;
+    }
+
+    @Override
+    public NumberTable numbers() {
+        int[] counts = histogram.counts();
+        List<List<String>> rows = new ArrayList<>();
+        for (int i = 0; i < counts.length; i++) {
+            rows.add(List.of(Numerals.plain(edge(i)), Numerals.plain(edge(i + 1)), Integer.toString(counts[i])));
+        }
+        return new NumberTable(List.of("from % of full power", "to %", "units"), rows);
+    }
+
+    @Override
+    public double proportion() {
+        return 2.2;
+    }
+
+    @Override
+    public void draw(Graphics2D g, double width, double height, Style style) {
+        Palette palette = style.palette();
+        double top = Math.max(1, histogram.most()) * HEADROOM;
+        NumberAxis across = new NumberAxis();
+        across.setRange(0, 100);
+        across.setTickUnit(Plot.ticks(width / style.zoom() > 260 ? 10 : 25, Numerals::plain));
+        NumberAxis up = new NumberAxis();
+        up.setRange(0, top);
+        up.setTickUnit(Plot.ticks(Math.max(1, Ticks.step(top, 4)), Numerals::plain));
+        Plot plot = new Plot(g, style, across, up);
+        double left = 52 * style.zoom();
+        double over = 28 * style.zoom();
+        plot.place(new Rectangle2D.Double(
+                left,
+                over,
+                Math.max(1, width - 16 * style.zoom() - left),
+                Math.max(1, height - 44 * style.zoom() - over)));
+        plot.pen().fill(palette.ground(), new Rectangle2D.Double(0, 0, width, height));
+        plot.draw();
+        int[] counts = histogram.counts();
+        for (int i = 0; i < counts.length; i++) {
+            double from = plot.x(edge(i));
+            double to = plot.x(edge(i + 1));
+            double high = plot.y(counts[i]);
+            plot.pen().fill(
+                            palette.load(),
+                            new Rectangle2D.Double(
+                                    from, high, Math.max(0.5, to - from - style.zoom()), plot.area().getMaxY() - high));
+        }
+        plot.axisNames("units of " + histogram.units(), "share of full power, %", height);
+    }
+}

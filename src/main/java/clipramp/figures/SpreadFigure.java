@@ -1,0 +1,173 @@
+package clipramp.figures;
+
+import clipramp.spread.PositionSpread;
+import clipramp.spread.SpreadResult;
+import java.awt.Color;
+import java.awt.Graphics2D;
+import java.awt.geom.Path2D;
+import java.awt.geom.Rectangle2D;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Locale;
+import org.jfree.chart.axis.NumberAxis;
+
+/**
+ * Power of many units against the knob: half of them, nine tenths and all but two percent as nested bands, the middle
+ * unit as a curve, and the worst case as broken lines outside.
+ *
+ * @param spread what the units do; of a fixed ramp the bands are as wide as the plot
+ */
+public record SpreadFigure(SpreadResult spread) implements Figure {
+    private static final int MIDDLE = SpreadResult.PERCENTAGES.size() / 2;
+    private static final double[] TINTS = {0.14, 0.26, 0.42};
+    private static final double LEAST = -2;
+    private static final double MOST = 102;
+
+    public SpreadFigure {
+        if (spread.positions().isEmpty()) {
+            throw new IllegalArgumentException("a spread of no unit cannot be drawn");
+        }
+    }
+
+    @Override
+    public String title() {
+        return "Power of " + spread.units() + " units against the knob";
+    }
+
+    @Override
+    public String sentence() {
+        PositionSpread middle = spread.positions().get(spread.positions().size() / 2);
+        String where = spread.positions().size() == 1 ? "The load gets" : "At mid-knob the load gets";
+        return where + " between " + percent(middle.fraction().get(0)) + " and "
+                + percent(middle.fraction().get(middle.fraction().size() - 1))
+                + " of full power from all but 2 % of the units, half of them between "
+                + percent(middle.fraction().get(MIDDLE - 1)) + " and "
+                + percent(middle.fraction().get(MIDDLE + 1)) + ".";
+    }
+
+    private static String percent(double fraction) {
+        return Numerals.fixed(100 * fraction, 1) + " %";
+    }
+
+    @Override
+    public NumberTable numbers() {
+        List<String> heads = new ArrayList<>(List.of("knob %"));
+        SpreadResult.PERCENTAGES.forEach(
+                p -> heads.add(String.format(Locale.ROOT, "full power %% at %.0f %% of units", p)));
+        heads.addAll(List.of("least %", "greatest %", "stays off %"));
+        return new NumberTable(
+                heads, spread.positions().stream().map(SpreadFigure::row).toList());
+    }
+
+    private static List<String> row(PositionSpread at) {
+        List<String> cells = new ArrayList<>();
+        cells.add(
+                at.position().isPresent() ? Numerals.cell(100 * at.position().getAsDouble(), 0) : Numerals.NOTHING);
+        at.fraction().forEach(f -> cells.add(Numerals.cell(100 * f, 1)));
+        cells.add(Numerals.cell(100 * at.worstFraction().least(), 1));
+        cells.add(Numerals.cell(100 * at.worstFraction().greatest(), 1));
+        cells.add(Numerals.cell(100 * at.misfires(), 2));
+        return cells;
+    }
+
+    @Override
+    public double proportion() {
+        return 1.9;
+    }
+
+    @Override
+    public void draw(Graphics2D g, double width, double height, Style style) {
+        Palette palette = style.palette();
+        Plot plot = new Plot(g, style, axis(width, style), axis(height * 0.8, style));
+        plot.curve(positions(), fractions(MIDDLE), palette.load(), style.trace(), Plot.noMarker());
+        plot.curve(positions(), worst(false), palette.load(), style.dotted(), Plot.noMarker());
+        plot.curve(positions(), worst(true), palette.load(), style.dotted(), Plot.noMarker());
+        double left = 44 * style.zoom();
+        double top = 28 * style.zoom();
+        plot.place(new Rectangle2D.Double(
+                left,
+                top,
+                Math.max(1, width - 16 * style.zoom() - left),
+                Math.max(1, height - 44 * style.zoom() - top)));
+        plot.pen().fill(palette.ground(), new Rectangle2D.Double(0, 0, width, height));
+        for (int i = 0; i < TINTS.length; i++) {
+            band(plot, fractions(i), fractions(2 * MIDDLE - i), Palette.mixed(palette.ground(), palette.load(), TINTS[i]));
+        }
+        plot.draw();
+        plot.axisNames("share of full power, %", "knob, % of its rotation clockwise", height);
+        legend(plot, style);
+    }
+
+    private static NumberAxis axis(double room, Style style) {
+        NumberAxis axis = new NumberAxis();
+        axis.setRange(LEAST, MOST);
+        axis.setTickUnit(Plot.ticks(room / style.zoom() > 260 ? 10 : 25, Numerals::plain));
+        return axis;
+    }
+
+    private double[] positions() {
+        return spread.positions().size() == 1
+                ? new double[] {0, 100}
+                : spread.positions().stream()
+                        .mapToDouble(p -> 100 * p.position().orElse(0))
+                        .toArray();
+    }
+
+    private double[] fractions(int percentage) {
+        return column(spread.positions().stream()
+                .mapToDouble(p -> 100 * p.fraction().get(percentage))
+                .toArray());
+    }
+
+    private double[] worst(boolean greatest) {
+        return column(spread.positions().stream()
+                .mapToDouble(p ->
+                        100 * (greatest ? p.worstFraction().greatest() : p.worstFraction().least()))
+                .toArray());
+    }
+
+    private static double[] column(double[] values) {
+        return values.length == 1 ? new double[] {values[0], values[0]} : values;
+    }
+
+    private void band(Plot plot, double[] low, double[] high, Color tint) {
+        double[] x = positions();
+        Path2D area = new Path2D.Double();
+        area.moveTo(plot.x(x[0]), plot.y(high[0]));
+        for (int i = 1; i < x.length; i++) {
+            area.lineTo(plot.x(x[i]), plot.y(high[i]));
+        }
+        for (int i = x.length - 1; i >= 0; i--) {
+            area.lineTo(plot.x(x[i]), plot.y(low[i]));
+        }
+        area.closePath();
+        plot.pen().fill(tint, area);
+    }
+
+    /** What the tints and lines mean, under the curve's high end. */
+    private void legend(Plot plot, Style style) {
+        double[] median = fractions(MIDDLE);
+        boolean rises = median[median.length - 1] >= median[0];
+        double line = 1.5 * style.small().getSize2D();
+        double swatch = 16 * style.zoom();
+        double wide = swatch + style.gap() + Lettering.width("98 % of the units", style.small());
+        Rectangle2D area = plot.area();
+        double x = rises ? area.getMaxX() - wide - 2 * style.gap() : area.getMinX() + 2 * style.gap();
+        String[] words = {"98 % of the units", "90 %", "half", "middle unit", "worst case"};
+        double y = area.getMaxY() - (words.length - 0.4) * line;
+        for (int i = 0; i < words.length; i++) {
+            Palette palette = style.palette();
+            double middle = y - 0.35 * style.small().getSize2D();
+            if (i < TINTS.length) {
+                plot.pen().fill(
+                                Palette.mixed(palette.ground(), palette.load(), TINTS[i]),
+                                new Rectangle2D.Double(x, middle - 0.3 * line, swatch, 0.6 * line));
+            } else {
+                plot.pen().line(
+                                palette.load(), i == TINTS.length ? style.trace() : style.dotted(), x, middle, x + swatch, middle);
+            }
+            plot.pen().left(words[i], style.small(), palette.ink(), x + swatch + style.gap(), y);
+            y += line;
+        }
+    }
+}
