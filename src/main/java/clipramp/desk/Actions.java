@@ -83,6 +83,7 @@ interface Actions {
     /** The pages of a window with a design. */
     enum Page {
         BENCH,
+        SPREAD,
         RECORD
     }
 }

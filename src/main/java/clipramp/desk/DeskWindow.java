@@ -12,6 +12,7 @@ import java.nio.file.Path;
 import java.util.List;
 import java.util.Optional;
 import javafx.application.Platform;
+import javafx.scene.Node;
 import javafx.scene.Scene;
 import javafx.scene.input.TransferMode;
 import javafx.scene.layout.BorderPane;
@@ -32,6 +33,7 @@ final class DeskWindow {
     private final StartPage start;
     private final NewPage fresh;
     private final BenchPage bench;
+    private final SpreadPage spread;
     private final RecordPage record;
     private final HeaderView header;
     private final Menus menus;
@@ -46,6 +48,7 @@ final class DeskWindow {
         this.fresh = new NewPage(
                 wish -> actions.propose(wish, false), wish -> actions.propose(wish, true), actions::giveUpNew);
         this.bench = new BenchPage(theme, model);
+        this.spread = new SpreadPage(theme, model.draft(), model.spread(), this::layBands);
         this.record = new RecordPage(theme, model.draft(), maker, actions::saveRecord);
         this.header = new HeaderView(model, actions, () -> bench.unfold(true));
         this.menus = new Menus(actions, model.draft());
@@ -64,6 +67,7 @@ final class DeskWindow {
         });
         takeDrops(scene, actions);
         model.draft().onChange(this::refresh);
+        model.draft().onChange(this::layBands);
         bench.widthProperty().addListener(property -> mark());
         theme.onChange(this::mark);
     }
@@ -86,7 +90,7 @@ final class DeskWindow {
     }
 
     private void refresh() {
-        boolean shown = root.getCenter() == bench || root.getCenter() == record.node();
+        boolean shown = root.getCenter() == node(page);
         if (model.draft().isOpen() && !shown) {
             showPage(Page.BENCH);
         } else if (page == Page.RECORD) {
@@ -99,13 +103,26 @@ final class DeskWindow {
     void showPage(Page wanted) {
         page = wanted;
         top.getChildren().setAll(menus.node(), header.node());
-        root.setCenter(page == Page.BENCH ? bench : record.node());
+        root.setCenter(node(page));
         if (page == Page.RECORD) {
             record.show();
-        } else {
+        } else if (page == Page.BENCH) {
             Platform.runLater(bench::begin);
         }
         mark();
+    }
+
+    private Node node(Page of) {
+        return switch (of) {
+            case BENCH -> bench;
+            case SPREAD -> spread.node();
+            case RECORD -> record.node();
+        };
+    }
+
+    /** The spread of the design as it stands lies over lanes and knob, where it is wanted. */
+    private void layBands() {
+        model.bench().lay(spread.bands());
     }
 
     /** Asks for a new design. */

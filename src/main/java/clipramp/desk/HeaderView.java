@@ -29,6 +29,7 @@ final class HeaderView {
     private final Button margins = new Button("Margins");
     private final ComboBox<String> condition = new ComboBox<>();
     private final ToggleButton bench = new ToggleButton("Bench");
+    private final ToggleButton spread = new ToggleButton("Spread");
     private final ToggleButton record = new ToggleButton("Record");
     private final VBox box;
     private boolean filling;
@@ -48,8 +49,9 @@ final class HeaderView {
         margins.setOnAction(event -> showMargins.run());
         conditions(actions);
         page(bench, Page.BENCH, actions);
+        page(spread, Page.SPREAD, actions);
         page(record, Page.RECORD, actions);
-        HBox switches = new HBox(bench, record);
+        HBox switches = new HBox(bench, spread, record);
         switches.getStyleClass().add("tabs");
         Hyperlink cautions = new Hyperlink("Mains safety");
         cautions.setId("cautions");
@@ -98,6 +100,7 @@ final class HeaderView {
     /** Marks the page that is shown, and whether margins are folded away on it. */
     void showPage(Page page, boolean folded) {
         bench.setSelected(page == Page.BENCH);
+        spread.setSelected(page == Page.SPREAD);
         record.setSelected(page == Page.RECORD);
         margins.setVisible(folded && page == Page.BENCH);
         margins.setManaged(folded && page == Page.BENCH);

@@ -2,6 +2,7 @@ package clipramp.desk;
 
 import clipramp.desk.model.Bench;
 import clipramp.figures.KnobFigure;
+import clipramp.figures.SpreadBands;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import javafx.scene.input.MouseEvent;
@@ -46,7 +47,8 @@ final class KnobView {
     private void refreshCurve() {
         bench.curve()
                 .ifPresent(c -> figure =
-                        Optional.of(new KnobFigure(c.points(), c.design().wanted())));
+                        Optional.of(new KnobFigure(c.points(), c.design().wanted())
+                                .withBand(bench.spread().flatMap(SpreadBands::knob))));
         boolean turns =
                 bench.curve().map(c -> c.design().ramp().pot().isPresent()).orElse(false);
         dial.node().setVisible(turns);

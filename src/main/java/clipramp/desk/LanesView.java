@@ -6,6 +6,7 @@ import clipramp.desk.model.Reading;
 import clipramp.figures.Lane;
 import clipramp.figures.LanesFigure;
 import clipramp.figures.LanesFrame;
+import clipramp.figures.SpreadBands;
 import clipramp.firing.Pulse;
 import java.util.Optional;
 import java.util.OptionalDouble;
@@ -65,7 +66,8 @@ final class LanesView {
 
     private void refresh() {
         bench.reading().ifPresent(reading -> {
-            LanesFigure whole = new LanesFigure(reading.lanes());
+            LanesFigure whole = new LanesFigure(reading.lanes())
+                    .withBand(bench.spread().flatMap(s -> SpreadBands.lanes(s, bench.position())));
             LanesFigure shown = close ? near(whole, reading) : whole;
             pane.show(shown.withCrosshair(crosshair));
             pane.setAccessibleText("Half-cycle lanes, firing angle "

@@ -103,6 +103,7 @@ final class Menus {
                 null,
                 needing(item("_Bench", "Shortcut+1", () -> actions.showPage(Page.BENCH))),
                 needing(item("_Record", "Shortcut+2", () -> actions.showPage(Page.RECORD))),
+                needing(item("_Spread", "Shortcut+3", () -> actions.showPage(Page.SPREAD))),
                 new SeparatorMenuItem(),
                 needing(conditions),
                 needing(item("Look closer at the _pulse, or back", "Shortcut+L", actions::zoomPulse)),

@@ -4,6 +4,7 @@ import clipramp.circuit.Condition;
 import clipramp.circuit.Design;
 import clipramp.power.KnobMap;
 import clipramp.power.OperatingPoint;
+import clipramp.spread.SpreadResult;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -30,6 +31,7 @@ public final class Bench {
 
     private Optional<Reading> reading = Optional.empty();
     private Optional<Curve> curve = Optional.empty();
+    private Optional<SpreadResult> spread = Optional.empty();
 
     /** A design at a condition. */
     private record Knob(Design design, Condition condition) {}
@@ -146,6 +148,20 @@ public final class Bench {
 
     public Optional<Curve> curve() {
         return curve;
+    }
+
+    /** Lays a spread over lanes and curve, or takes it away. */
+    public void lay(Optional<SpreadResult> wanted) {
+        if (!spread.equals(wanted)) {
+            spread = wanted;
+            curveListeners.forEach(Runnable::run);
+            readingListeners.forEach(Runnable::run);
+        }
+    }
+
+    /** The spread that lies over lanes and curve, if one does. */
+    public Optional<SpreadResult> spread() {
+        return spread;
     }
 
     /** Whether an answer is still to come. */

@@ -23,6 +23,7 @@ public final class DeskModel {
 
     private final Draft draft;
     private final Bench bench;
+    private final SpreadRun spread;
     private final LatestWins<Asked, Judgement> judge;
     private final List<Runnable> judgementListeners = new ArrayList<>();
     private final List<Runnable> conditionListeners = new ArrayList<>();
@@ -43,6 +44,7 @@ public final class DeskModel {
                 workers.judging(),
                 workers.home(),
                 failure -> troubles.accept(Trouble.of("The circuit could not be solved so", failure)));
+        this.spread = new SpreadRun(workers, troubles);
         this.judge = new LatestWins<>(
                 DeskModel::judged,
                 workers.judging(),
@@ -67,6 +69,10 @@ public final class DeskModel {
 
     public Draft draft() {
         return draft;
+    }
+
+    public SpreadRun spread() {
+        return spread;
     }
 
     public Bench bench() {

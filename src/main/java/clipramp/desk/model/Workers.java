@@ -9,5 +9,6 @@ import java.util.concurrent.Executor;
  * @param turning solves one knob setting; never busy for long
  * @param judging solves curves and margins
  * @param writing reads and writes files, in the order asked
+ * @param drawing draws many units, for as long as that takes
  */
-public record Workers(Executor home, Executor turning, Executor judging, Executor writing) {}
+public record Workers(Executor home, Executor turning, Executor judging, Executor writing, Executor drawing) {}

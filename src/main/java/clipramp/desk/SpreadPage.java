@@ -1,0 +1,238 @@
+package clipramp.desk;
+
+import clipramp.desk.model.Draft;
+import clipramp.desk.model.Sheet;
+import clipramp.desk.model.SpreadRun;
+import clipramp.desk.model.SpreadWords;
+import clipramp.figures.HistogramFigure;
+import clipramp.figures.SpreadFigure;
+import clipramp.spread.DrawLaw;
+import clipramp.spread.SpreadOptions;
+import clipramp.spread.SpreadResult;
+import java.util.Arrays;
+import java.util.List;
+import java.util.Optional;
+import javafx.scene.control.Button;
+import javafx.scene.control.CheckBox;
+import javafx.scene.control.ComboBox;
+import javafx.scene.control.Label;
+import javafx.scene.control.ProgressBar;
+import javafx.scene.control.ScrollPane;
+import javafx.scene.control.TextField;
+import javafx.scene.layout.BorderPane;
+import javafx.scene.layout.ColumnConstraints;
+import javafx.scene.layout.GridPane;
+import javafx.scene.layout.Priority;
+import javafx.scene.layout.Region;
+import javafx.scene.layout.VBox;
+
+/** What the next thousand units do: asked on the left, drawn in the middle while it runs, told underneath. */
+final class SpreadPage {
+    private static final int MOST_UNITS = 1_000_000;
+
+    private final Draft draft;
+    private final SpreadRun run;
+    private final TextField units =
+            new TextField(Integer.toString(SpreadOptions.DEFAULT.samples()));
+    private final TextField seed = new TextField(Long.toString(SpreadOptions.DEFAULT.seed()));
+    private final ComboBox<String> law = new ComboBox<>();
+    private final Button start = new Button("Draw the units");
+    private final Button cancel = new Button("Cancel");
+    private final CheckBox bands = new CheckBox("Bands over lanes and knob");
+    private final ProgressBar bar = new ProgressBar(0);
+    private final Label progress = new Label();
+    private final Label complaint = new Label();
+    private final FigurePane histogram;
+    private final FigurePane spread;
+    private final VBox words = new VBox();
+    private final BorderPane box = new BorderPane();
+    private Optional<SpreadResult> told = Optional.empty();
+
+    SpreadPage(Theme theme, Draft draft, SpreadRun run, Runnable bandsChanged) {
+        this.draft = draft;
+        this.run = run;
+        histogram = new FigurePane(theme);
+        spread = new FigurePane(theme);
+        histogram.setId("spread-histogram");
+        spread.setId("spread-figure");
+        histogram.setVisible(false);
+        spread.setVisible(false);
+        ask();
+        bands.setSelected(true);
+        bands.setId("spread-bands");
+        bands.setOnAction(event -> bandsChanged.run());
+        words.getStyleClass().add("spread-words");
+        words.setId("spread-words");
+        VBox middle = new VBox(histogram, spread, words);
+        middle.getStyleClass().add("spread-middle");
+        histogram.prefHeightProperty().bind(box.heightProperty().multiply(0.42));
+        spread.prefHeightProperty().bind(box.heightProperty().multiply(0.55));
+        for (FigurePane pane : List.of(histogram, spread)) {
+            pane.setMinHeight(Region.USE_PREF_SIZE);
+        }
+        ScrollPane scroll = new ScrollPane(middle);
+        scroll.setFitToWidth(true);
+        scroll.setHbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);
+        scroll.setAccessibleText("Spread: figures and words; arrow keys scroll");
+        scroll.getStyleClass().add("record-scroll");
+        box.setCenter(scroll);
+        run.onChange(this::refresh);
+        run.onChange(bandsChanged);
+        draft.onChange(this::refresh);
+    }
+
+    private void ask() {
+        law.getItems().addAll(Arrays.stream(DrawLaw.values()).map(DrawLaw::word).toList());
+        law.setValue(SpreadOptions.DEFAULT.law().word());
+        law.setId("spread-law");
+        law.setAccessibleText("How parts lie within their tolerance");
+        units.setId("spread-units");
+        units.setAccessibleText("Units to draw");
+        seed.setId("spread-seed");
+        seed.setAccessibleText("Seed: the same one draws the same units");
+        start.setId("spread-start");
+        start.setDefaultButton(true);
+        start.setOnAction(event -> start());
+        cancel.setId("spread-cancel");
+        cancel.setDisable(true);
+        cancel.setOnAction(event -> run.cancel());
+        bar.setMaxWidth(Double.MAX_VALUE);
+        bar.setAccessibleText("Units drawn");
+        bar.setVisible(false);
+        progress.setId("spread-progress");
+        progress.setWrapText(true);
+        progress.getStyleClass().add("quiet");
+        complaint.setId("spread-complaint");
+        complaint.setWrapText(true);
+        Label about = new Label("Every tolerance, data-sheet limit, line and temperature of the design, drawn together.");
+        about.setWrapText(true);
+        VBox side = new VBox(
+                about,
+                named("units", units),
+                named("parts lie", law),
+                named("seed", seed),
+                complaint,
+                start,
+                cancel,
+                bar,
+                progress,
+                bands);
+        side.getStyleClass().add("record-side");
+        ScrollPane sideScroll = new ScrollPane(side);
+        sideScroll.setFitToWidth(true);
+        sideScroll.setHbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);
+        sideScroll.setFocusTraversable(false);
+        sideScroll.getStyleClass().add("record-side-scroll");
+        box.setLeft(sideScroll);
+    }
+
+    private static VBox named(String name, Region control) {
+        Label label = new Label(name);
+        label.getStyleClass().add("quiet");
+        label.setLabelFor(control);
+        control.setMaxWidth(Double.MAX_VALUE);
+        return new VBox(label, control);
+    }
+
+    BorderPane node() {
+        return box;
+    }
+
+    /** The spread to be laid over lanes and knob: of the design as it stands, and wanted. */
+    Optional<SpreadResult> bands() {
+        return bands.isSelected() ? draft.sheet().map(Sheet::loaded).flatMap(run::of) : Optional.empty();
+    }
+
+    private void start() {
+        Optional<Long> count = whole(units, 1, MOST_UNITS);
+        Optional<Long> number = whole(seed, 0, Long.MAX_VALUE);
+        if (count.isEmpty()) {
+            complaint.setText("Units are a whole number from 1 to " + MOST_UNITS + ", not \"" + units.getText() + "\".");
+        } else if (number.isEmpty()) {
+            complaint.setText("The seed is a whole number, 0 or more, not \"" + seed.getText() + "\".");
+        } else {
+            complaint.setText("");
+            SpreadOptions options = new SpreadOptions(
+                    count.get().intValue(),
+                    number.get(),
+                    DrawLaw.values()[law.getItems().indexOf(law.getValue())],
+                    SpreadOptions.DEFAULT.judged());
+            draft.sheet().ifPresent(sheet -> run.start(sheet.loaded(), options));
+        }
+    }
+
+    private static Optional<Long> whole(TextField field, long least, long most) {
+        String text = field.getText().strip();
+        if (!text.matches("\\d{1,18}")) {
+            return Optional.empty();
+        }
+        return Optional.of(Long.parseLong(text)).filter(n -> n >= least && n <= most);
+    }
+
+    private void refresh() {
+        start.setDisable(run.isRunning());
+        cancel.setDisable(!run.isRunning() || run.isEnding());
+        bar.setVisible(run.isRunning());
+        run.progress().ifPresent(now -> {
+            bar.setProgress((double) now.done() / now.of());
+            progress.setText(run.isEnding() ? "Ending…" : run.isRunning() ? SpreadWords.progress(now) : over());
+        });
+        run.histogram().filter(h -> h.units() > 0).ifPresent(h -> {
+            histogram.setVisible(true);
+            histogram.show(new HistogramFigure(h));
+        });
+        Optional<SpreadResult> result =
+                run.answer().map(SpreadRun.Answer::spread).filter(s -> s.units() > 0);
+        if (!result.equals(told)) {
+            told = result;
+            result.ifPresent(this::tell);
+        }
+    }
+
+    private String over() {
+        boolean stands = draft.sheet().map(Sheet::loaded).flatMap(run::of).isPresent();
+        return run.answer().isEmpty() || stands ? "" : "The design has changed since; draw again.";
+    }
+
+    private void tell(SpreadResult result) {
+        spread.setVisible(true);
+        spread.show(new SpreadFigure(result));
+        words.getChildren().clear();
+        for (String sentence : SpreadWords.sentences(result)) {
+            Label label = new Label(sentence);
+            label.setWrapText(true);
+            words.getChildren().add(label);
+        }
+        table(
+                "What matters at mid-knob",
+                List.of("", "alone", "in all", "power from one limit to the other"),
+                SpreadWords.influences(result));
+        table("What would help", List.of("", "yield", "gain"), SpreadWords.remedies(result));
+    }
+
+    private void table(String title, List<String> heads, List<List<String>> rows) {
+        if (rows.isEmpty()) {
+            return;
+        }
+        Label head = new Label(title);
+        head.getStyleClass().add("title");
+        GridPane grid = new GridPane();
+        grid.getStyleClass().add("spread-table");
+        for (int c = 0; c < heads.size(); c++) {
+            ColumnConstraints column = new ColumnConstraints();
+            column.setHgrow(c == 0 ? Priority.ALWAYS : Priority.NEVER);
+            grid.getColumnConstraints().add(column);
+            Label name = new Label(heads.get(c));
+            name.getStyleClass().add("quiet");
+            grid.add(name, c, 0);
+        }
+        for (int r = 0; r < rows.size(); r++) {
+            for (int c = 0; c < heads.size(); c++) {
+                Label cell = new Label(rows.get(r).get(c));
+                cell.setWrapText(c == 0);
+                grid.add(cell, c, r + 1);
+            }
+        }
+        words.getChildren().addAll(head, grid);
+    }
+}
