@@ -71,6 +71,9 @@ final class Extremity {
                 Factor factor = lot.factors().get(k);
                 double kept = values[k];
                 for (double tried : new double[] {factor.low(), factor.nominal(), factor.high()}) {
+                    if (tried == kept) {
+                        continue;
+                    }
                     values[k] = tried;
                     double there = sign * at(values);
                     if (there > best) {

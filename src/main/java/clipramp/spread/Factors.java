@@ -92,12 +92,26 @@ public final class Factors {
         sheet(key + "peak-current", "peak-point current", device.peakCurrentAmps(), (u, v) -> u.peakCurrentAmps = v);
         sheet(key + "valley.current", "valley current", device.valley().amps(), (u, v) -> u.valleyAmps = v);
         sheet(key + "valley.voltage", "valley voltage", device.valley().volts(), (u, v) -> u.valleyVolts = v);
+        device.baseOnePulse().ifPresent(this::baseOnePulse);
         device.modulated()
                 .ifPresent(m -> sheet(
                         key + "modulated.current",
                         "modulated interbase current",
                         m.amps(),
                         (u, v) -> u.modulatedAmps = v));
+    }
+
+    private void baseOnePulse(Unijunction.BaseOnePulse pulse) {
+        double typical = pulse.nominalVolts();
+        add(
+                "trigger.device.base-one-pulse",
+                "base-one pulse",
+                Kind.DEVICE,
+                pulse.minVolts().orElse(typical),
+                typical,
+                typical,
+                Law.THREE_POINT,
+                (u, v) -> u.baseOnePulseVolts = v);
     }
 
     private void programmable(ProgrammableTrigger trigger) {

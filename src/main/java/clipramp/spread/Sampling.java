@@ -1,8 +1,9 @@
 package clipramp.spread;
 
-import clipramp.circuit.Design;
 import clipramp.engine.UnitValues;
 import clipramp.firing.FiringState;
+import java.util.Queue;
+import java.util.concurrent.ConcurrentLinkedQueue;
 import java.util.stream.IntStream;
 
 /** Draws the units and keeps what each does at each position. Both cores work; a unit is the same whoever draws it. */
@@ -24,6 +25,7 @@ final class Sampling {
     private final int[] counts = new int[Histogram.BINS];
     private final int middle;
     private final double position;
+    private final Queue<Tools> idle = new ConcurrentLinkedQueue<>();
     private int done;
 
     Sampling(Lot lot, double[] trackShares, int samples) {
@@ -62,24 +64,41 @@ final class Sampling {
         }
     }
 
-    private void chunk(int from, int to) {
-        Design design = lot.design();
-        UnitSolver solver = new UnitSolver(design);
-        UnitValues unit = lot.blank();
-        UnitOutcome outcome = new UnitOutcome();
-        WantedTest wanted = new WantedTest(design);
-        for (int number = from; number < to; number++) {
-            lot.draw(number, unit);
-            for (int p = 0; p < shares.length; p++) {
-                solver.solve(unit, shares[p], outcome);
-                firingRad[p][number] = outcome.latestRad();
-                off[p * holds.length + number] = Double.isNaN(outcome.firingRad);
-                watts[p][number] = outcome.watts;
-                fraction[p][number] = outcome.fraction;
-                states[p][number] = outcome.state;
-            }
-            holds[number] = wanted.holds(solver, unit);
+    /** What one thread works with; lent for a chunk and given back, so that drawing a unit allocates nothing. */
+    private static final class Tools {
+        private final UnitSolver solver;
+        private final UnitValues unit;
+        private final WantedTest wanted;
+        private final UnitOutcome outcome = new UnitOutcome();
+
+        Tools(Lot lot) {
+            solver = new UnitSolver(lot.design());
+            unit = lot.blank();
+            wanted = new WantedTest(lot.design());
         }
+    }
+
+    private void chunk(int from, int to) {
+        Tools lent = idle.poll();
+        Tools tools = lent == null ? new Tools(lot) : lent;
+        for (int number = from; number < to; number++) {
+            draw(tools, number);
+        }
+        idle.add(tools);
+    }
+
+    private void draw(Tools tools, int number) {
+        lot.draw(number, tools.unit);
+        UnitOutcome outcome = tools.outcome;
+        for (int p = 0; p < shares.length; p++) {
+            tools.solver.solve(tools.unit, shares[p], outcome);
+            firingRad[p][number] = outcome.latestRad();
+            off[p * holds.length + number] = Double.isNaN(outcome.firingRad);
+            watts[p][number] = outcome.watts;
+            fraction[p][number] = outcome.fraction;
+            states[p][number] = outcome.state;
+        }
+        holds[number] = tools.wanted.holds(tools.solver, tools.unit);
     }
 
     /** Units drawn. */

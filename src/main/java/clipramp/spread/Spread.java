@@ -7,6 +7,7 @@ import clipramp.margins.Check;
 import clipramp.margins.Judge;
 import clipramp.margins.Margin;
 import clipramp.margins.Verdict;
+import clipramp.power.SwiftPoint;
 import clipramp.spread.PositionSpread.Extremes;
 import java.util.ArrayList;
 import java.util.Arrays;
@@ -26,8 +27,10 @@ public final class Spread {
     private static final int KNOB_STEPS = 10;
     private static final double MID_KNOB = 0.5;
 
-    /** Units to each of the lots that shares and remedies are worked out on. */
-    private static final int LOT_UNITS = 1000;
+    /** Units to each of the lots that shares and remedies are worked out on, and fewer where the swift path is not open. */
+    private static final int LOT_UNITS = 4000;
+
+    private static final int SLOW_LOT_UNITS = 500;
 
     private Spread() {}
 
@@ -55,7 +58,7 @@ public final class Spread {
             spreads.add(position(lot, sampling, p, position, shares[p]));
         }
         boolean wanted = new WantedTest(design).isAsked();
-        int lotUnits = Math.min(LOT_UNITS, options.samples());
+        int lotUnits = Math.min(SwiftPoint.suits(design) ? LOT_UNITS : SLOW_LOT_UNITS, options.samples());
         double middle = WantedTest.share(design.ramp(), MID_KNOB);
         Judged judged =
                 more ? judged(lot, Math.min(options.judged(), sampling.done()), watch) : new Judged(0, 0, Map.of());

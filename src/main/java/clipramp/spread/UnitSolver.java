@@ -9,14 +9,21 @@ import clipramp.firing.Firing;
 import clipramp.firing.Solution;
 import clipramp.power.LoadPower;
 import clipramp.power.LoadResult;
+import clipramp.power.SwiftPoint;
+import org.jspecify.annotations.Nullable;
 
-/** Solves one drawn unit at one knob position. Not for two threads at once. */
+/**
+ * Solves one drawn unit at one knob position: by the swift path where the design suits it and it is sure of itself, else by
+ * the reference path. Not for two threads at once.
+ */
 final class UnitSolver {
     private final Design design;
     private final Network network = new Network();
+    private final @Nullable SwiftPoint swift;
 
     UnitSolver(Design design) {
         this.design = design;
+        swift = SwiftPoint.suits(design) ? new SwiftPoint(design) : null;
     }
 
     /**
@@ -30,6 +37,17 @@ final class UnitSolver {
 
     /** The same for a whole R_E in ohms. */
     void solveAt(UnitValues unit, double rampOhms, UnitOutcome into) {
+        if (swift != null && swift.solve(unit, rampOhms)) {
+            into.firingRad = swift.firingRad();
+            into.state = swift.state();
+            into.watts = swift.watts();
+            into.fraction = swift.fraction();
+        } else {
+            solveByReference(unit, rampOhms, into);
+        }
+    }
+
+    private void solveByReference(UnitValues unit, double rampOhms, UnitOutcome into) {
         unit.fill(network, rampOhms);
         Condition condition = new Condition(unit.lineVolts, unit.lineHertz, unit.celsius);
         Solution solution = Firing.solve(design, condition, network);
