@@ -69,7 +69,8 @@ public final class Desk {
     record Setup(Places places, Map<String, String> environment, Path home, Asking asking) {
         /** Shows a window; it is painted before anything is read or computed. */
         DeskModel show(Stage stage, Optional<Path> file, Runnable closed) {
-            Workers workers = new Workers(Platform::runLater, worker("turning"), worker("judging"), worker("writing"), worker("drawing"));
+            Workers workers = new Workers(
+                    Platform::runLater, worker("turning"), worker("judging"), worker("writing"), worker("drawing"));
             Recovery recovery = new Recovery(places, ProcessHandle.current(), System.identityHashCode(stage));
             WindowActions[] actions = new WindowActions[1];
             Workshop workshop = new Workshop(this::library);

@@ -32,8 +32,7 @@ final class SpreadPage {
 
     private final Draft draft;
     private final SpreadRun run;
-    private final TextField units =
-            new TextField(Integer.toString(SpreadOptions.DEFAULT.samples()));
+    private final TextField units = new TextField(Integer.toString(SpreadOptions.DEFAULT.samples()));
     private final TextField seed = new TextField(Long.toString(SpreadOptions.DEFAULT.seed()));
     private final ComboBox<String> law = new ComboBox<>();
     private final Button start = new Button("Draw the units");
@@ -104,7 +103,8 @@ final class SpreadPage {
         progress.getStyleClass().add("quiet");
         complaint.setId("spread-complaint");
         complaint.setWrapText(true);
-        Label about = new Label("Every tolerance, data-sheet limit, line and temperature of the design, drawn together.");
+        Label about =
+                new Label("Every tolerance, data-sheet limit, line and temperature of the design, drawn together.");
         about.setWrapText(true);
         VBox side = new VBox(
                 about,
@@ -147,7 +147,8 @@ final class SpreadPage {
         Optional<Long> count = whole(units, 1, MOST_UNITS);
         Optional<Long> number = whole(seed, 0, Long.MAX_VALUE);
         if (count.isEmpty()) {
-            complaint.setText("Units are a whole number from 1 to " + MOST_UNITS + ", not \"" + units.getText() + "\".");
+            complaint.setText(
+                    "Units are a whole number from 1 to " + MOST_UNITS + ", not \"" + units.getText() + "\".");
         } else if (number.isEmpty()) {
             complaint.setText("The seed is a whole number, 0 or more, not \"" + seed.getText() + "\".");
         } else {

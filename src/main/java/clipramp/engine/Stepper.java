@@ -13,7 +13,7 @@ public final class Stepper {
     private static final int BISECTIONS = 60;
 
     /** A ramp that exceeds the peak point by more than rounding was left above it by a jump, V. */
-    private static final double ABOVE_VOLTS = 1e-9;
+    static final double ABOVE_VOLTS = 1e-9;
 
     /** By how much more than the valley current a pulse must begin with, as a share of it. */
     private static final double VALLEY_ROUNDING = 1e-6;
@@ -89,7 +89,14 @@ public final class Stepper {
         seconds = nowSeconds;
         rampVolts = nowRampVolts;
         fluxAmps = 0;
+        idle = 0;
+        pause = 0;
         nothingSwitched();
+    }
+
+    /** Finds the switches that agree with a state that was just resumed. */
+    void settleResumed() {
+        settle();
     }
 
     private void nothingSwitched() {

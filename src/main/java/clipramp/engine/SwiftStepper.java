@@ -583,7 +583,12 @@ public final class SwiftStepper {
         if ((state & SwiftLaws.ON) != 0) {
             state &= ~(SwiftLaws.ON | SwiftLaws.GATE);
             settle();
-            switched(false);
+            int at = laws.row(state);
+            if (now(at + SwiftLaws.DEVICE, decaying(at)) > -Stepper.ABOVE_VOLTS) {
+                stallAtValley();
+            } else {
+                switched(false);
+            }
             return Event.VALLEY;
         }
         int off = state;
@@ -602,6 +607,26 @@ public final class SwiftStepper {
         state = off;
         stalled = true;
         return Event.STALLS;
+    }
+
+    /** No room between valley and peak point: the ramp follows the peak point, as {@link Stepper} has it. */
+    private void stallAtValley() {
+        handOver(Mode.STALLED);
+        careful.settleResumed();
+        state = flags();
+        stalled = true;
+        kept = Double.NaN;
+    }
+
+    private void handOver(Mode now) {
+        careful.resume(
+                wave,
+                now,
+                (state & SwiftLaws.RECTIFIES) != 0,
+                (state & SwiftLaws.CLIPS) != 0,
+                (state & SwiftLaws.GATE) != 0,
+                seconds,
+                rampVolts);
     }
 
     /** The device has switched: the ramp goes on with another slope from an instant that moves with its voltage. */
@@ -663,14 +688,7 @@ public final class SwiftStepper {
     private Event carefully() {
         carefulPieces++;
         boolean wasStalled = stalled;
-        careful.resume(
-                wave,
-                mode(),
-                (state & SwiftLaws.RECTIFIES) != 0,
-                (state & SwiftLaws.CLIPS) != 0,
-                (state & SwiftLaws.GATE) != 0,
-                seconds,
-                rampVolts);
+        handOver(mode());
         Event event = careful.advance(wave.seconds);
         seconds = careful.seconds();
         rampVolts = careful.rampVolts();

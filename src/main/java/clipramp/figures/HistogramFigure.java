@@ -75,10 +75,14 @@ public record HistogramFigure(Histogram histogram) implements Figure {
             double from = plot.x(edge(i));
             double to = plot.x(edge(i + 1));
             double high = plot.y(counts[i]);
-            plot.pen().fill(
+            plot.pen()
+                    .fill(
                             palette.load(),
                             new Rectangle2D.Double(
-                                    from, high, Math.max(0.5, to - from - style.zoom()), plot.area().getMaxY() - high));
+                                    from,
+                                    high,
+                                    Math.max(0.5, to - from - style.zoom()),
+                                    plot.area().getMaxY() - high));
         }
         plot.axisNames("units of " + histogram.units(), "share of full power, %", height);
     }

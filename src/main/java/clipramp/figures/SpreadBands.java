@@ -43,7 +43,10 @@ public final class SpreadBands {
         int above = Math.min(all.size() - 1, below + 1);
         double share = place - below;
         return Optional.of(new LanesFigure.Band(
-                between(all.get(below).firingRad().get(0), all.get(above).firingRad().get(0), share),
+                between(
+                        all.get(below).firingRad().get(0),
+                        all.get(above).firingRad().get(0),
+                        share),
                 between(
                         all.get(below).firingRad().get(LAST),
                         all.get(above).firingRad().get(LAST),

@@ -61,8 +61,7 @@ public record SpreadFigure(SpreadResult spread) implements Figure {
 
     private static List<String> row(PositionSpread at) {
         List<String> cells = new ArrayList<>();
-        cells.add(
-                at.position().isPresent() ? Numerals.cell(100 * at.position().getAsDouble(), 0) : Numerals.NOTHING);
+        cells.add(at.position().isPresent() ? Numerals.cell(100 * at.position().getAsDouble(), 0) : Numerals.NOTHING);
         at.fraction().forEach(f -> cells.add(Numerals.cell(100 * f, 1)));
         cells.add(Numerals.cell(100 * at.worstFraction().least(), 1));
         cells.add(Numerals.cell(100 * at.worstFraction().greatest(), 1));
@@ -91,7 +90,11 @@ public record SpreadFigure(SpreadResult spread) implements Figure {
                 Math.max(1, height - 44 * style.zoom() - top)));
         plot.pen().fill(palette.ground(), new Rectangle2D.Double(0, 0, width, height));
         for (int i = 0; i < TINTS.length; i++) {
-            band(plot, fractions(i), fractions(2 * MIDDLE - i), Palette.mixed(palette.ground(), palette.load(), TINTS[i]));
+            band(
+                    plot,
+                    fractions(i),
+                    fractions(2 * MIDDLE - i),
+                    Palette.mixed(palette.ground(), palette.load(), TINTS[i]));
         }
         plot.draw();
         plot.axisNames("share of full power, %", "knob, % of its rotation clockwise", height);
@@ -121,8 +124,10 @@ public record SpreadFigure(SpreadResult spread) implements Figure {
 
     private double[] worst(boolean greatest) {
         return column(spread.positions().stream()
-                .mapToDouble(p ->
-                        100 * (greatest ? p.worstFraction().greatest() : p.worstFraction().least()))
+                .mapToDouble(p -> 100
+                        * (greatest
+                                ? p.worstFraction().greatest()
+                                : p.worstFraction().least()))
                 .toArray());
     }
 
@@ -159,12 +164,19 @@ public record SpreadFigure(SpreadResult spread) implements Figure {
             Palette palette = style.palette();
             double middle = y - 0.35 * style.small().getSize2D();
             if (i < TINTS.length) {
-                plot.pen().fill(
+                plot.pen()
+                        .fill(
                                 Palette.mixed(palette.ground(), palette.load(), TINTS[i]),
                                 new Rectangle2D.Double(x, middle - 0.3 * line, swatch, 0.6 * line));
             } else {
-                plot.pen().line(
-                                palette.load(), i == TINTS.length ? style.trace() : style.dotted(), x, middle, x + swatch, middle);
+                plot.pen()
+                        .line(
+                                palette.load(),
+                                i == TINTS.length ? style.trace() : style.dotted(),
+                                x,
+                                middle,
+                                x + swatch,
+                                middle);
             }
             plot.pen().left(words[i], style.small(), palette.ink(), x + swatch + style.gap(), y);
             y += line;

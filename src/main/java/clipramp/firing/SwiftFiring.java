@@ -131,7 +131,10 @@ public final class SwiftFiring {
                 double change = Math.abs((kept - keptBefore) / (volts - voltsBefore));
                 double bend = Math.max(BENT * Math.abs(kept), MORE_BENT * (Double.isNaN(change) ? 0 : change));
                 double left = followed ? bend * step * step : Math.abs(kept * (end - volts));
-                if (confirmed && endMode == mode && Math.abs(step) < NEAR_VOLTS && left * sensitivity() < LEFT_SECONDS) {
+                if (confirmed
+                        && endMode == mode
+                        && Math.abs(step) < NEAR_VOLTS
+                        && left * sensitivity() < LEFT_SECONDS) {
                     return (Double.isNaN(firedSeconds) || fireFrom(mode, next)) && settled(mode, next);
                 }
             }
@@ -192,37 +195,43 @@ public final class SwiftFiring {
         clipUntil = Double.NEGATIVE_INFINITY;
         course = 0;
         stepper.start(mode, volts, rough);
-        for (int events = 0; events < MOST_EVENTS; events++) {
-            boolean clippedBefore = stepper.clips();
-            boolean held = stepper.mode() == Mode.STALLED;
-            double from = stepper.seconds();
-            Event event = stepper.advance();
-            // Counted from the supply's first clipping on: around the zero the order depends on the residual itself.
-            course = course == 0 ? (event == Event.ZENER ? 1 : 0) : 31 * course + event.ordinal();
-            if (watch != Watch.NONE) {
-                follow(event);
-            }
-            if (event == Event.FIRES) {
-                fires(held);
-            } else if (event == Event.STALLS) {
-                stalled |= begun == 0;
-            } else if (event == Event.VALLEY) {
-                going = false;
-            } else if (event != Event.END && going && stepper.mode() == Mode.ON) {
-                latchedOn |= stepper.isHeldByResistor();
-            }
-            if (clippedBefore && !stepper.clips()) {
-                clipUntil = stepper.seconds();
-            }
-            if (doubt || event == Event.END || onlyToPulse > 0 && begun == onlyToPulse) {
-                break;
-            }
-        }
+        Event event;
+        int events = 0;
+        do {
+            event = step();
+            events++;
+            doubt |= events > MOST_EVENTS;
+        } while (!doubt && event != Event.END && (onlyToPulse == 0 || begun < onlyToPulse));
         if (stepper.clips()) {
             clipUntil = stepper.seconds();
         }
         endPulse = (Double.isNaN(firedSeconds) ? firstSeconds : firedSeconds) > clipUntil;
-        return !doubt && (watch == Watch.NONE);
+        return !doubt && watch == Watch.NONE;
+    }
+
+    /** Goes through one piece and notes what it ended in. */
+    private Event step() {
+        boolean clippedBefore = stepper.clips();
+        boolean held = stepper.mode() == Mode.STALLED;
+        Event event = stepper.advance();
+        // Counted from the supply's first clipping on: around the zero the order depends on the residual itself.
+        course = course == 0 ? (event == Event.ZENER ? 1 : 0) : 31 * course + event.ordinal();
+        if (watch != Watch.NONE) {
+            follow(event);
+        }
+        if (event == Event.FIRES) {
+            fires(held);
+        } else if (event == Event.STALLS) {
+            stalled |= begun == 0;
+        } else if (event == Event.VALLEY) {
+            going = false;
+        } else if (event != Event.END && going && stepper.mode() == Mode.ON) {
+            latchedOn |= stepper.isHeldByResistor();
+        }
+        if (clippedBefore && !stepper.clips()) {
+            clipUntil = stepper.seconds();
+        }
+        return event;
     }
 
     private void fires(boolean afterStall) {

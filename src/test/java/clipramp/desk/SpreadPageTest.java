@@ -34,7 +34,8 @@ class SpreadPageTest {
     }
 
     private static boolean isOver(Harness window) {
-        return window.model.spread().answer().isPresent() && !window.model.spread().isRunning();
+        return window.model.spread().answer().isPresent()
+                && !window.model.spread().isRunning();
     }
 
     @Test
@@ -58,8 +59,8 @@ class SpreadPageTest {
             window.settle();
             assertThat(window.model.bench().spread()).isPresent();
             assertThat(Harness.at(() -> ((clipramp.figures.LanesFigure)
-                            ((FigurePane) window.stage.getScene().lookup("#lanes")).figure())
-                    .band()))
+                                    ((FigurePane) window.stage.getScene().lookup("#lanes")).figure())
+                            .band()))
                     .isPresent();
             window.press("#page-spread");
             Harness.at(() -> {
@@ -99,7 +100,8 @@ class SpreadPageTest {
             window.press("#spread-start");
             assertThat(window.find("#spread-complaint", Label.class).getText()).contains("1 to 1000000", "many");
             assertThat(window.model.spread().isRunning()).isFalse();
-            assertThat(window.find("#page-spread", ToggleButton.class).isSelected()).isTrue();
+            assertThat(window.find("#page-spread", ToggleButton.class).isSelected())
+                    .isTrue();
         }
     }
 }
