@@ -1,9 +1,13 @@
 package clipramp.cli;
 
+import clipramp.cli.Substitutes.Substitute;
 import clipramp.cli.TextTable.Align;
+import clipramp.files.DesignFiles;
+import clipramp.files.LoadedDesign;
 import clipramp.files.Profile;
 import clipramp.files.ProfileLibrary;
 import clipramp.files.ProfileLibrary.Found;
+import clipramp.files.Source;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Optional;
@@ -20,7 +24,10 @@ import picocli.CommandLine.Parameters;
         name = "parts",
         sortOptions = false,
         sortSynopsis = false,
-        description = "Lists the profiles; with an ID, shows that one with the source of every figure.")
+        description = {
+            "Lists the profiles; with an ID, shows that one with the source of every figure.",
+            "With --for, puts every trigger device and thyristor of the design's kinds in its place and judges each."
+        })
 final class PartsCommand implements Callable<Integer> {
     private final Session session;
 
@@ -38,6 +45,14 @@ final class PartsCommand implements Callable<Integer> {
     @Option(names = "--json", order = 11, description = "the answer for machines")
     boolean json;
 
+    @Option(
+            names = "--for",
+            paramLabel = "FILE",
+            order = 9,
+            description = "judge what could stand in this design's place for its trigger device and thyristor")
+    @Nullable
+    String design;
+
     @Parameters(paramLabel = "ID", arity = "0..1", description = "a profile's id, such as 2n2646")
     @Nullable
     String id;
@@ -50,6 +65,10 @@ final class PartsCommand implements Callable<Integer> {
     public Integer call() {
         boolean shippedOnly = profiles != null
                 && Problems.word("--profiles", profiles, List.of("shipped")).equals("shipped");
+        if (design != null) {
+            substitutes(design, shippedOnly);
+            return ExitCode.ANSWERED;
+        }
         ProfileLibrary library = Inputs.library(session, Optional.empty(), shippedOnly);
         List<Found> found = id == null ? library.all() : library.named(id);
         if (id != null && found.isEmpty()) {
@@ -67,6 +86,18 @@ final class PartsCommand implements Callable<Integer> {
             found.forEach(this::show);
         }
         return ExitCode.ANSWERED;
+    }
+
+    private void substitutes(String file, boolean shippedOnly) {
+        ProfileLibrary library = Inputs.libraryOf(session, file, shippedOnly);
+        Source source = Inputs.source(session, file);
+        LoadedDesign loaded = DesignFiles.load(source, List.of(), library);
+        List<Substitute> found = Substitutes.of(loaded, source, library);
+        if (json) {
+            session.out().exactly(SubstitutesText.json(loaded, found, session.ascii()));
+        } else {
+            SubstitutesText.print(session.out(), loaded, found);
+        }
     }
 
     private void list(List<Found> found) {

@@ -16,7 +16,8 @@ class FaultsCommandTest {
         assertThat(run.code()).isZero();
         assertThat(run.err()).isEmpty();
         assertThat(run.out().lines().limit(2)).anyMatch(line -> line.contains("Mains voltage kills"));
-        assertThat(run.out()).contains("isolated", "instruments", "zener V1 open", "thyristor V3 shorted", "burns next");
+        assertThat(run.out())
+                .contains("isolated", "instruments", "zener V1 open", "thyristor V3 shorted", "burns next");
         assertThat(run.out()).doesNotContain("NaN", "Infinity", "-0.0 ");
     }
 

@@ -1,0 +1,70 @@
+package clipramp.cli;
+
+import clipramp.cli.Substitutes.Substitute;
+import clipramp.cli.TextTable.Align;
+import clipramp.files.LoadedDesign;
+import clipramp.margins.Margin;
+import java.util.List;
+import java.util.Optional;
+import java.util.OptionalDouble;
+
+/** What could stand in a design's place, for people and for machines. */
+final class SubstitutesText {
+    private SubstitutesText() {}
+
+    static void print(Output out, LoadedDesign loaded, List<Substitute> found) {
+        CheckText.heading(out, loaded, loaded.design().nominalCondition());
+        out.line("");
+        TextTable table = new TextTable(out.spelling(), "  ")
+                .column(Align.LEFT, "in place of")
+                .column(Align.LEFT, "device")
+                .column(Align.LEFT, "verdict")
+                .column(Align.LEFT, "the margin that decides")
+                .column(Align.DECIMAL, "ratio")
+                .column(Align.LEFT, "worst at");
+        for (Substitute s : found) {
+            table.row(
+                    s.key(),
+                    s.id() + (s.original() ? " (its own)" : ""),
+                    s.check().map(c -> c.verdict().word()).orElse("not usable"),
+                    s.deciding().map(Margin::name).orElse(s.refusal()),
+                    s.deciding().map(SubstitutesText::ratio).orElse(""),
+                    s.deciding().map(Margin::condition).orElse(""));
+        }
+        out.lines(table.lines());
+        out.line("");
+        out.lines(Paragraph.wrap(
+                "Each device is put there alone, everything else unchanged. Pinout, package and mounting are not"
+                        + " compared.",
+                ""));
+    }
+
+    private static String ratio(Margin margin) {
+        OptionalDouble ratio = margin.ratio();
+        return ratio.isPresent() ? Shown.fixed(ratio.getAsDouble(), 2) : "–";
+    }
+
+    static String json(LoadedDesign loaded, List<Substitute> found, boolean ascii) {
+        return new Answer("parts", Optional.of(loaded), Optional.empty(), List.of())
+                .json(
+                        ascii,
+                        json -> json.putObjects("substitutes", found, (o, s) -> {
+                            o.put("path", s.key())
+                                    .put("id", s.id())
+                                    .put("original", s.original())
+                                    .put(
+                                            "verdict",
+                                            s.check()
+                                                    .map(c -> c.verdict().word())
+                                                    .orElse(null))
+                                    .put("refusal", s.refusal());
+                            o.put("decidingMargin", s.deciding().map(Margin::id).orElse(null))
+                                    .put(
+                                            "ratio",
+                                            s.deciding().map(Margin::ratio).orElse(OptionalDouble.empty()))
+                                    .put(
+                                            "condition",
+                                            s.deciding().map(Margin::condition).orElse(null));
+                        }));
+    }
+}

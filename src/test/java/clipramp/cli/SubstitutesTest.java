@@ -1,0 +1,45 @@
+package clipramp.cli;
+
+import static org.assertj.core.api.Assertions.assertThat;
+
+import com.fasterxml.jackson.databind.JsonNode;
+import com.fasterxml.jackson.databind.ObjectMapper;
+import java.util.stream.StreamSupport;
+import org.junit.jupiter.api.Test;
+
+/** Other devices put in an example's place: voltage classes of JEDEC types and missing quadrants decide as they must. */
+class SubstitutesTest {
+    @Test
+    void aThyristorOfTooLowAVoltageClassIsDecidedByItsBlockingVoltage() throws Exception {
+        JsonNode answer = answer("examples/drying-cabinet.yaml");
+        // 2N6400: 50 V (manufacturer's data sheet of the type), on a 230 V line.
+        JsonNode low = substitute(answer, "2n6400");
+        assertThat(low.get("verdict").asText()).isEqualTo("fails");
+        assertThat(low.get("decidingMargin").asText()).isEqualTo("blocking-voltage");
+        assertThat(low.get("ratio").asDouble()).isBetween(0.13, 0.15);
+        assertThat(substitute(answer, "2n6404").get("original").asBoolean()).isTrue();
+        assertThat(substitute(answer, "2n6404").get("verdict").asText())
+                .isEqualTo(substitute(answer, "2n6405").get("verdict").asText());
+    }
+
+    @Test
+    void aTriacWithoutTheQuadrantFails() throws Exception {
+        // The 2N6344's sheet specifies I+ and III- only; a positive pulse needs I+ and III+.
+        JsonNode answer = answer("examples/shed-heater.yaml");
+        assertThat(substitute(answer, "2n6344").get("verdict").asText()).isEqualTo("fails");
+        assertThat(substitute(answer, "2n6344").get("decidingMargin").asText()).isEqualTo("gate-polarity");
+    }
+
+    private static JsonNode answer(String file) throws Exception {
+        CliRun run = CliRun.of("parts", "--for=" + file, "--json");
+        assertThat(run.code()).isEqualTo(0);
+        return new ObjectMapper().readTree(run.out());
+    }
+
+    private static JsonNode substitute(JsonNode answer, String id) {
+        return StreamSupport.stream(answer.get("substitutes").spliterator(), false)
+                .filter(s -> s.get("id").asText().equals(id))
+                .findFirst()
+                .orElseThrow();
+    }
+}
