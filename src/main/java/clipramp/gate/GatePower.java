@@ -6,7 +6,7 @@ import clipramp.firing.Pulse;
 import clipramp.firing.Solution;
 import java.util.OptionalDouble;
 
-/** Gate power against its ratings (model.md sections 6 and 7). */
+/** Gate power against its ratings (DEVELOPERS.md, The circuit laws). */
 public final class GatePower {
     private GatePower() {}
 

@@ -6,7 +6,7 @@ import clipramp.engine.NetworkOfDesign;
 import java.util.Optional;
 import java.util.OptionalDouble;
 
-/** Latching and holding current as the gate circuit leaves them (model.md section 7). */
+/** Latching and holding current as the gate circuit leaves them (DEVELOPERS.md, The circuit laws). */
 public final class LatchingNeed {
     private LatchingNeed() {}
 

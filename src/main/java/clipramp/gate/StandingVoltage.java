@@ -10,7 +10,7 @@ import clipramp.circuit.Zener;
 
 /**
  * The gate's voltage between pulses at its highest: smallest R_BB of the type, highest zener of the type, crest of the
- * line (model.md section 6). V_B1q = V_S R1p/(R2 + R_BB + R1p), R1p = R1 parallel (R_G + R_GK), and the gate sees R_GK's
+ * line (DEVELOPERS.md, The circuit laws). V_B1q = V_S R1p/(R2 + R_BB + R1p), R1p = R1 parallel (R_G + R_GK), and the gate sees R_GK's
  * share of it.
  *
  * @param volts gate voltage, V

@@ -11,7 +11,7 @@ import java.util.List;
 import java.util.Objects;
 
 /**
- * What the least willing thyristor of its type asks of a pulse at one junction temperature (model.md section 7). A
+ * What the least willing thyristor of its type asks of a pulse at one junction temperature (DEVELOPERS.md, The circuit laws). A
  * triac's is that of the worse of the two quadrants that the pulse's polarity uses.
  *
  * @param celsius junction temperature, °C

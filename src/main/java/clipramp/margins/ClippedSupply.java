@@ -4,7 +4,7 @@ import clipramp.circuit.Condition;
 import clipramp.circuit.Design;
 import clipramp.engine.Network;
 
-/** The clipped supply at the line's crest, the ramp held at the peak point (model.md sections 2 and 3). */
+/** The clipped supply at the line's crest, the ramp held at the peak point (DEVELOPERS.md, The circuit laws). */
 final class ClippedSupply {
     private ClippedSupply() {}
 

@@ -14,7 +14,7 @@ import java.util.OptionalDouble;
 import java.util.function.DoubleFunction;
 import java.util.function.ToDoubleFunction;
 
-/** What the thyristor's gate bears: between pulses, in them, and on the whole (model.md section 7). */
+/** What the thyristor's gate bears: between pulses, in them, and on the whole (DEVELOPERS.md, The circuit laws). */
 final class GateCeilings {
     private final Bench bench;
     private final Design design;

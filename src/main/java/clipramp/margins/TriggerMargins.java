@@ -11,7 +11,7 @@ import java.util.OptionalDouble;
 import java.util.function.DoubleFunction;
 import java.util.function.ToDoubleFunction;
 
-/** The trigger device against its absolute ratings (model.md section 10). */
+/** The trigger device against its absolute ratings (DEVELOPERS.md, The circuit laws). */
 final class TriggerMargins {
     private static final double SHEET_CELSIUS = 25;
 

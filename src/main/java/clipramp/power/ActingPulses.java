@@ -13,7 +13,7 @@ import java.util.OptionalDouble;
 /**
  * Which pulse fires the thyristor in which half cycle of the load. Without a lagging winding a pulse acts in the half
  * cycle that it was made in; with one, a pulse made after the load's zero acts in the next half cycle, and early in it:
- * full power (model.md section 5).
+ * full power (DEVELOPERS.md, The circuit laws).
  */
 public final class ActingPulses {
     private ActingPulses() {}

@@ -3,7 +3,7 @@ package clipramp.power;
 import clipramp.circuit.Thyristor;
 import java.util.OptionalDouble;
 
-/** Heat from the thyristor's junction to the air: T_j = T_a + P (R_thJC + R_thCA), model.md section 8. */
+/** Heat from the thyristor's junction to the air: T_j = T_a + P (R_thJC + R_thCA), DEVELOPERS.md, The circuit laws. */
 public final class Thermal {
     private Thermal() {}
 
