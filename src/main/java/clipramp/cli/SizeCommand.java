@@ -6,8 +6,10 @@ import clipramp.files.PartialDesign;
 import clipramp.files.ProfileLibrary;
 import clipramp.files.SizedText;
 import clipramp.files.Source;
+import clipramp.sizing.Compensation;
+import clipramp.sizing.KnobShape;
+import clipramp.sizing.KnobShaping;
 import clipramp.sizing.OpenPart;
-import clipramp.sizing.Reason;
 import clipramp.sizing.Reasons;
 import clipramp.sizing.Sizing;
 import clipramp.sizing.SizingAnswer;
@@ -17,6 +19,7 @@ import java.nio.charset.StandardCharsets;
 import java.util.Arrays;
 import java.util.EnumSet;
 import java.util.List;
+import java.util.Optional;
 import java.util.Set;
 import java.util.concurrent.Callable;
 import org.jspecify.annotations.Nullable;
@@ -71,6 +74,20 @@ final class SizeCommand implements Callable<Integer> {
     String series = PreferredSeries.E24.name();
 
     @Option(
+            names = "--shape",
+            paramLabel = "WHAT",
+            order = 8,
+            description = "power or light: choose the pot's law and a resistor across it so that this follows the knob")
+    @Nullable
+    String shape;
+
+    @Option(
+            names = "--compensate",
+            order = 8,
+            description = "choose base two's resistor for the flattest firing angle against temperature; compare rules")
+    boolean compensate;
+
+    @Option(
             names = "--with",
             paramLabel = "KEY=VALUE",
             order = 8,
@@ -106,20 +123,38 @@ final class SizeCommand implements Callable<Integer> {
         ProfileLibrary library = Inputs.libraryOf(session, file, shippedOnly);
         PartialDesign partial = PartialDesign.read(source(), named("--free", free), named("--keep", keep), library);
         SizingRequest request = partial.request(library, series());
-        SizingAnswer answer = Sizing.propose(request);
-        List<Reason> reasons = Reasons.of(request, answer);
+        SizingAnswer answer = compensate ? Sizing.proposeCompensated(request) : Sizing.propose(request);
+        Optional<KnobShape> shaped = shaped(request, answer);
+        if (shaped.isPresent()) {
+            answer = Sizing.judge(request, shaped.get().design());
+        }
+        SizedResult result = new SizedResult(
+                answer,
+                Reasons.of(request, answer),
+                shaped,
+                compensate ? Compensation.of(answer.design()) : Optional.empty());
         DesignText text = SizedText.of(partial, answer.design());
+        text = shaped.isPresent() ? SizedText.withPot(text, answer.design()) : text;
         if (out != null) {
             String content = text.text();
             Outputs.write(out, file -> file.write(content.getBytes(StandardCharsets.UTF_8)), replace);
         }
         LoadedDesign loaded = loaded(text, library);
         if (json) {
-            session.out().exactly(SizeJson.of(loaded, partial, answer, reasons, text, session.ascii()));
+            session.out().exactly(SizeJson.of(loaded, partial, result, text, session.ascii()));
         } else {
-            new SizeText(session.out(), loaded, partial, answer).print(reasons, text, out);
+            new SizeText(session.out(), loaded, partial, result).print(text, out);
         }
         return answer.holds() ? ExitCode.ANSWERED : ExitCode.FAILS;
+    }
+
+    private Optional<KnobShape> shaped(SizingRequest request, SizingAnswer answer) {
+        if (shape == null) {
+            return Optional.empty();
+        }
+        List<String> known = List.of("power", "light");
+        KnobShape.What what = KnobShape.What.values()[known.indexOf(Problems.word("--shape", shape, known))];
+        return Optional.of(KnobShaping.straightest(request, answer.design(), what));
     }
 
     private Source source() {

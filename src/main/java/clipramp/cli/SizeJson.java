@@ -6,23 +6,19 @@ import clipramp.files.PartialDesign;
 import clipramp.files.SizedText;
 import clipramp.margins.Margin;
 import clipramp.margins.Note;
-import clipramp.sizing.Reason;
+import clipramp.sizing.Compensation.Choice;
 import clipramp.sizing.SizingAnswer;
 import clipramp.sizing.SizingAnswer.Conflict;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Locale;
 
 /** What size found, for machines. */
 final class SizeJson {
     private SizeJson() {}
 
-    static String of(
-            LoadedDesign loaded,
-            PartialDesign partial,
-            SizingAnswer answer,
-            List<Reason> reasons,
-            DesignText text,
-            boolean ascii) {
+    static String of(LoadedDesign loaded, PartialDesign partial, SizedResult result, DesignText text, boolean ascii) {
+        SizingAnswer answer = result.answer();
         List<Note> notes = new ArrayList<>();
         partial.notes().forEach(n -> notes.add(new Note("wanted", n)));
         notes.addAll(answer.check().notes());
@@ -35,7 +31,7 @@ final class SizeJson {
                     .put("candidates", answer.candidates())
                     .putObjects(
                             "parts",
-                            reasons,
+                            result.reasons(),
                             (part, r) -> part.put("key", r.part().key())
                                     .put(
                                             "value",
@@ -48,8 +44,25 @@ final class SizeJson {
                             "cornerFailures",
                             answer.cornerFailures().stream().map(Margin::id).toList())
                     .putObjects("conflicts", answer.conflicts(), SizeJson::conflict)
+                    .putObject(
+                            "shape",
+                            result.shape(),
+                            (shape, s) -> shape.put("what", s.what().name().toLowerCase(Locale.ROOT))
+                                    .put("largestDeparture", s.largestDeparture())
+                                    .put("deadLow", s.deadLow())
+                                    .put("deadHigh", s.deadHigh())
+                                    .put("steepestPerDegree", s.steepestPerDegree()))
+                    .putObject(
+                            "compensation",
+                            result.compensation(),
+                            (c, found) -> c.putObject("flattest", flattest -> choice(flattest, found.flattest()))
+                                    .putObjects("rules", found.rules(), SizeJson::choice))
                     .put("design", text.text());
         });
+    }
+
+    private static void choice(Json json, Choice choice) {
+        json.put("rule", choice.rule()).put("ohms", choice.ohms()).put("driftDeg", Math.toDegrees(choice.driftRad()));
     }
 
     private static void conflict(Json json, Conflict conflict) {

@@ -1,16 +1,22 @@
 package clipramp.cli;
 
+import clipramp.circuit.Pot;
 import clipramp.cli.TextTable.Align;
 import clipramp.files.DesignText;
 import clipramp.files.LoadedDesign;
 import clipramp.files.PartialDesign;
 import clipramp.files.SizedText;
 import clipramp.margins.Margin;
+import clipramp.sizing.Compensation;
+import clipramp.sizing.Compensation.Choice;
+import clipramp.sizing.KnobShape;
 import clipramp.sizing.Reason;
 import clipramp.sizing.SizingAnswer;
 import clipramp.sizing.SizingAnswer.Conflict;
 import clipramp.units.Unit;
+import java.util.ArrayList;
 import java.util.List;
+import java.util.Locale;
 import org.jspecify.annotations.Nullable;
 
 /** What size found, for reading. */
@@ -18,22 +24,26 @@ final class SizeText {
     private final Output out;
     private final LoadedDesign loaded;
     private final PartialDesign partial;
+    private final SizedResult result;
     private final SizingAnswer answer;
 
-    SizeText(Output out, LoadedDesign loaded, PartialDesign partial, SizingAnswer answer) {
+    SizeText(Output out, LoadedDesign loaded, PartialDesign partial, SizedResult result) {
         this.out = out;
         this.loaded = loaded;
         this.partial = partial;
-        this.answer = answer;
+        this.result = result;
+        this.answer = result.answer();
     }
 
-    void print(List<Reason> reasons, DesignText text, @Nullable String written) {
+    void print(DesignText text, @Nullable String written) {
         CheckText.heading(out, loaded, answer.check().condition());
         partial.notes().forEach(note -> out.lines(Paragraph.wrap(note, "  ")));
         out.line("");
         outcome();
         out.line("");
-        parts(reasons);
+        parts(result.reasons());
+        result.shape().ifPresent(this::shape);
+        result.compensation().ifPresent(this::compensation);
         conflicts();
         out.line("");
         if (written == null) {
@@ -90,6 +100,50 @@ final class SizeText {
 
     private static String neighbour(String which, String effect) {
         return effect.isEmpty() ? "" : " " + which + ", " + effect + ".";
+    }
+
+    private void shape(KnobShape shape) {
+        Pot pot = answer.design().ramp().pot().orElse(null);
+        out.line("");
+        out.line("Knob, " + shape.what().name().toLowerCase(Locale.ROOT) + " against rotation");
+        if (pot != null) {
+            out.lines(Paragraph.wrap(
+                    "Pot: " + pot.law().word()
+                            + pot.shunt()
+                                    .map(p -> ", " + Shown.amount(p.value(), Unit.OHM) + " across it")
+                                    .orElse("") + ".",
+                    "  "));
+        }
+        out.lines(Paragraph.wrap(
+                "Farthest from a straight line " + Shown.amount(shape.largestDeparture(), Unit.FRACTION)
+                        + " of full; nothing moves over " + Shown.amount(shape.deadLow(), Unit.FRACTION)
+                        + " of the rotation at the low end and " + Shown.amount(shape.deadHigh(), Unit.FRACTION)
+                        + " at the high end; the steepest degree of " + Shown.fixed(KnobShape.ROTATION_DEGREES, 0)
+                        + " makes " + Shown.amount(shape.steepestPerDegree(), Unit.FRACTION) + ".",
+                "  "));
+    }
+
+    private void compensation(Compensation compensation) {
+        out.line("");
+        out.line("Base two against temperature, " + Shown.amount(coldest(), Unit.CELSIUS) + " to "
+                + Shown.amount(hottest(), Unit.CELSIUS) + ", at mid-knob");
+        TextTable table = new TextTable(out.spelling(), "  ")
+                .column(Align.LEFT, "rule")
+                .column(Align.RIGHT, "resistor")
+                .column(Align.DECIMAL, "angle moves, °");
+        List<Choice> choices = new ArrayList<>(List.of(compensation.flattest()));
+        choices.addAll(compensation.rules());
+        choices.forEach(c ->
+                table.row(c.rule(), Shown.amount(c.ohms(), Unit.OHM), Shown.fixed(Math.toDegrees(c.driftRad()), 3)));
+        out.lines(table.lines());
+    }
+
+    private double coldest() {
+        return answer.design().surroundings().coldestCelsius();
+    }
+
+    private double hottest() {
+        return answer.design().surroundings().hottestCelsius();
     }
 
     private void conflicts() {

@@ -194,7 +194,7 @@ public final class DesignWriter {
                         .raw("pot", ramp.pot().map(DesignWriter::pot).orElse("none")));
     }
 
-    private static String pot(Pot pot) {
+    static String pot(Pot pot) {
         FlowText text = new FlowText()
                 .part("track", pot.track(), Unit.OHM)
                 .quantity("end", pot.endOhms(), Unit.OHM)

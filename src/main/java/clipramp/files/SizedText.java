@@ -33,6 +33,14 @@ public final class SizedText {
         return changed;
     }
 
+    /** A text with the design's pot, law and shunt included. */
+    public static DesignText withPot(DesignText text, Design design) {
+        return design.ramp()
+                .pot()
+                .map(pot -> text.withValue("ramp.pot", DesignWriter.pot(pot)))
+                .orElse(text);
+    }
+
     /** An open part's value as a design file has it; empty where the design has no such part. */
     public static Optional<String> value(OpenPart part, Design design) {
         GateDrive gate = design.gate();

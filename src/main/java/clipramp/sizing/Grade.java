@@ -13,7 +13,7 @@ import java.util.Comparator;
  * then as many units as can be reach what is wanted, then the knob has as little dead travel as can be, then the circuit
  * runs cool, then it needs few different values. Figures are compared as coarsely as they matter.
  *
- * @param failing by how much margins fail, in thousandths; 0 where none does
+ * @param failing by how much margins fail, in fiftieths; 0 where none does
  * @param tight by how much margins lie under the ratio that they hold from, in twentieths
  * @param missing units in twenty that miss what is wanted
  * @param deadTravel dead travel in thirtieths of the rotation, some ten degrees each
@@ -36,7 +36,7 @@ record Grade(long failing, long tight, long missing, long deadTravel, long heat,
     private static final double CLEAR_LACK = 0.03;
 
     private static final double MID_KNOB = 0.5;
-    private static final double THOUSAND = 1000;
+    private static final double FIFTY = 50;
     private static final double TWENTY = 20;
     private static final double THIRTY = 30;
     private static final double HEAT_STEP = 0.1;
@@ -52,7 +52,7 @@ record Grade(long failing, long tight, long missing, long deadTravel, long heat,
             }
         }
         return new Grade(
-                Math.round(THOUSAND * failing),
+                Math.round(FIFTY * failing),
                 Math.round(TWENTY * tight),
                 missing(timing),
                 deadTravel(timing),
@@ -65,7 +65,7 @@ record Grade(long failing, long tight, long missing, long deadTravel, long heat,
         Dissipation middle = Firing.dissipation(
                 design, design.nominalCondition(), design.ramp().rampOhms(MID_KNOB));
         return new Grade(
-                Math.round(THOUSAND * (timing.lack() > CLEAR_LACK ? FAILED : 0)),
+                Math.round(FIFTY * (timing.lack() > CLEAR_LACK ? FAILED : 0)),
                 0,
                 missing(timing),
                 deadTravel(timing),

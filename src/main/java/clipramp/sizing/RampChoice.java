@@ -25,12 +25,9 @@ final class RampChoice {
 
     /** Designs with every open ramp resistor chosen, best first, at most so many; the design itself where none is open. */
     static List<Design> best(SizingRequest request, Design design, Reach reach, int most) {
-        List<Ranked> ranked = new ArrayList<>();
-        for (Design fixed : withFixed(request, design, reach)) {
-            for (Design both : withTrack(request, fixed, reach)) {
-                ranked.add(new Ranked(both, Timing.of(both, reach), DistinctValues.of(both)));
-            }
-        }
+        List<Ranked> ranked = all(request, design, reach).stream()
+                .map(d -> new Ranked(d, Timing.of(d, reach), DistinctValues.of(d)))
+                .toList();
         return ranked.stream()
                 .sorted(Comparator.comparingDouble((Ranked r) -> r.timing().lack())
                         .thenComparingLong(
@@ -41,6 +38,13 @@ final class RampChoice {
                         .thenComparingDouble(r -> -r.design().ramp().fixed().value()))
                 .limit(most)
                 .map(Ranked::design)
+                .toList();
+    }
+
+    /** Every pair of sold values near what is wanted. */
+    static List<Design> all(SizingRequest request, Design design, Reach reach) {
+        return withFixed(request, design, reach).stream()
+                .flatMap(fixed -> withTrack(request, fixed, reach).stream())
                 .toList();
     }
 

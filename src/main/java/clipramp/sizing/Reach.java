@@ -43,7 +43,7 @@ record Reach(
     private static final int MOST_STEPS = 8;
     private static final double NEAR_RAD = 2e-4;
 
-    /** Where nothing is wanted of the high end: 160° of conduction. */
+    /** Where nothing is wanted of the high end, or more than the stage can give: 160° of conduction. */
     private static final double EARLY_RAD = Math.toRadians(20);
 
     private static final double LATE_RAD = Math.toRadians(160);
@@ -142,7 +142,7 @@ record Reach(
         if (Double.isNaN(watts)) {
             return least ? g.from() : g.to();
         }
-        return KnobSearch.firingRadForWatts(design, at, watts).orElse(watts > 0 ? 0 : Math.PI);
+        return KnobSearch.firingRadForWatts(design, at, watts).orElse(watts > 0 ? EARLY_RAD : Math.PI);
     }
 
     /** R_E corrected for another condition, the firing instant taken as straight over so small a step. */

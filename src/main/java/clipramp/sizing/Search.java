@@ -22,7 +22,7 @@ import java.util.Set;
 final class Search {
     private static final int MOST_CANDIDATES = 90;
     private static final int RAMPS = 3;
-    private static final int CAPACITOR_STEPS = 2;
+    private static final int CAPACITOR_STEPS = 3;
 
     /** A candidate that was judged. */
     record Judged(Design design, Check check, Reach reach, Timing timing, Grade grade) {}

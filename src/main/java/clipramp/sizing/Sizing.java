@@ -1,6 +1,7 @@
 package clipramp.sizing;
 
 import clipramp.circuit.Design;
+import clipramp.circuit.Part;
 import clipramp.margins.Margin;
 import clipramp.margins.Verdict;
 import clipramp.sizing.Search.Judged;
@@ -9,6 +10,7 @@ import clipramp.sizing.SizingAnswer.Outcome;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
+import java.util.Optional;
 
 /** From what is wanted to preferred values. */
 public final class Sizing {
@@ -24,7 +26,31 @@ public final class Sizing {
      */
     public static SizingAnswer propose(SizingRequest request) {
         Search search = new Search(request);
-        Judged best = search.polished(search.climb(Start.of(request)));
+        return answer(search.polished(search.climb(Start.of(request))), search.all());
+    }
+
+    /** The same for a design as it stands: nothing is chosen. */
+    public static SizingAnswer judge(SizingRequest request, Design design) {
+        Search search = new Search(request);
+        return answer(search.judge(design, Reach.of(design)), search.all());
+    }
+
+    /**
+     * The same with the base-two resistor, where it is open, that makes the firing angle flattest against temperature;
+     * see {@link Compensation}.
+     */
+    public static SizingAnswer proposeCompensated(SizingRequest request) {
+        SizingAnswer first = propose(request);
+        Optional<Compensation> found =
+                request.isOpen(OpenPart.BASE_TWO) ? Compensation.of(first.design()) : Optional.empty();
+        if (found.isEmpty()) {
+            return first;
+        }
+        Part part = Start.resistor(request, found.get().flattest().ohms());
+        return propose(request.decided(Edit.baseTwo(first.design(), part), OpenPart.BASE_TWO));
+    }
+
+    private static SizingAnswer answer(Judged best, List<Judged> all) {
         List<Margin> corners = best.grade().holds() ? CornerUnits.failures(best.design()) : List.of();
         Outcome outcome =
                 !best.grade().holds() ? Outcome.NOTHING : corners.isEmpty() ? Outcome.WORST_CASE : Outcome.NOMINAL;
@@ -36,8 +62,8 @@ public final class Sizing {
                 best.timing().yield(),
                 best.timing().deadTravel(),
                 Grade.watts(best.check().dissipation()),
-                conflicts(best, search.all()),
-                search.all().size());
+                conflicts(best, all),
+                all.size());
     }
 
     private static List<Conflict> conflicts(Judged best, List<Judged> all) {
@@ -62,11 +88,5 @@ public final class Sizing {
     private static String nearest(Margin margin) {
         return "The nearest that can be met: " + Amounts.of(margin.offered(), margin.unit()) + " in place of "
                 + Amounts.of(margin.demand(), margin.unit()) + " (" + margin.condition() + ").";
-    }
-
-    /** The best of a request's designs, for comparison with other ways of finding it. */
-    static Design best(SizingRequest request) {
-        Search search = new Search(request);
-        return search.polished(search.climb(Start.of(request))).design();
     }
 }

@@ -19,6 +19,13 @@ public record SizingRequest(Design design, Set<OpenPart> open, Stock stock, Pref
         open = java.util.Collections.unmodifiableSet(new TreeSet<>(open));
     }
 
+    /** The same with one part decided. */
+    SizingRequest decided(Design with, OpenPart part) {
+        Set<OpenPart> rest = new TreeSet<>(open);
+        rest.remove(part);
+        return new SizingRequest(with, rest, stock, series);
+    }
+
     boolean isOpen(OpenPart part) {
         return open.contains(part);
     }

@@ -34,14 +34,6 @@ record Timing(double yield, double deadTravel, double lack) {
         double high = at(ramp, design.wanted().highest().map(Goal::position).orElse(1.0));
         double low = at(ramp, design.wanted().lowest().map(Goal::position).orElse(0.0));
         double most = Math.max(ramp.rampOhms(0), ramp.rampOhms(1));
-        double least = Math.min(ramp.rampOhms(0), ramp.rampOhms(1));
-        double lack = over(high, reach.highestTo())
-                + over(reach.highestFrom(), high)
-                + over(reach.lowestFrom(), low)
-                + over(low, reach.lowestTo())
-                + over(most, reach.collapse())
-                + over(reach.clip(), least)
-                + SOFT * over(reach.valley() * RESERVE, least);
         Spreading highEnd = Spreading.of(design, ramp.fixed().tolerance());
         Tolerance tolerance = ramp.pot()
                 .map(Pot::track)
@@ -53,7 +45,23 @@ record Timing(double yield, double deadTravel, double lack) {
         double fastest = Math.max(
                 lowEnd.below(Math.log(reach.lowestFrom() / low)),
                 reach.highestFrom() > 0 ? highEnd.below(Math.log(reach.highestFrom() / high)) : 0);
-        return new Timing(Math.max(0, slowest - fastest), dead(design, reach), lack);
+        return new Timing(Math.max(0, slowest - fastest), dead(design, reach), lack(design, reach));
+    }
+
+    /** How far nominal parts miss, as a sum of logarithms of resistance; 0 where they meet everything. */
+    static double lack(Design design, Reach reach) {
+        Ramp ramp = design.ramp();
+        double high = at(ramp, design.wanted().highest().map(Goal::position).orElse(1.0));
+        double low = at(ramp, design.wanted().lowest().map(Goal::position).orElse(0.0));
+        double most = Math.max(ramp.rampOhms(0), ramp.rampOhms(1));
+        double least = Math.min(ramp.rampOhms(0), ramp.rampOhms(1));
+        return over(high, reach.highestTo())
+                + over(reach.highestFrom(), high)
+                + over(reach.lowestFrom(), low)
+                + over(low, reach.lowestTo())
+                + over(most, reach.collapse())
+                + over(reach.clip(), least)
+                + SOFT * over(reach.valley() * RESERVE, least);
     }
 
     private static double at(Ramp ramp, double position) {

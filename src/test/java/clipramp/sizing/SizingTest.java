@@ -1,0 +1,150 @@
+package clipramp.sizing;
+
+import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.assertThatThrownBy;
+
+import clipramp.circuit.Design;
+import clipramp.files.DesignText.Reading;
+import clipramp.files.InvalidInputException;
+import clipramp.files.PartialDesign;
+import clipramp.files.SizedText;
+import clipramp.files.Source;
+import clipramp.margins.Check;
+import clipramp.margins.Judge;
+import clipramp.margins.Verdict;
+import clipramp.sizing.SizingAnswer.Outcome;
+import clipramp.units.PreferredSeries;
+import java.util.EnumSet;
+import java.util.OptionalDouble;
+import java.util.Set;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.ValueSource;
+
+/** From a request to a design that the judge passes. The judge is the one that check asks, on the text read anew. */
+class SizingTest {
+    private static final String CABINET = """
+            clipramp: 1
+            line: line-230v-50hz
+            stage: %s
+            load: {kind: resistor, rated: 700 W at 230 V}
+            surroundings: {coldest: 0 degC, hottest: 50 degC}
+            wanted: {lowest: 5 %% at 0 %%, highest: %s %% at 100 %%}
+            """;
+
+    private static Check checked(PartialDesign partial, SizingAnswer answer) {
+        Reading reading = SizedText.of(partial, answer.design()).read(Requests.LIBRARY);
+        assertThat(reading).isInstanceOf(Reading.Good.class);
+        Design read = ((Reading.Good) reading).loaded().design();
+        return Judge.check(read, OptionalDouble.empty(), OptionalDouble.empty());
+    }
+
+    @ParameterizedTest
+    @ValueSource(strings = {"bridge-dc", "half-wave", "bridge-ac", "inverse-parallel", "triac"})
+    void everyStageIsSizedSoThatItsTextReadAnewHolds(String stage) {
+        PartialDesign partial = Requests.read(CABINET.formatted(stage, stage.equals("half-wave") ? "45" : "92"));
+        SizingAnswer answer = Sizing.propose(partial.request(Requests.LIBRARY, PreferredSeries.E24));
+
+        assertThat(answer.outcome()).isNotEqualTo(Outcome.NOTHING);
+        assertThat(answer.conflicts()).isEmpty();
+        assertThat(checked(partial, answer).verdict()).isNotEqualTo(Verdict.FAILS);
+    }
+
+    @Test
+    void theSameRequestGivesTheSameDesign() {
+        String text = Requests.text(3);
+
+        assertThat(Sizing.propose(Requests.request(text, PreferredSeries.E12)).design())
+                .isEqualTo(Sizing.propose(Requests.request(text, PreferredSeries.E12))
+                        .design());
+    }
+
+    @Test
+    void whatIsDecidedStaysAndWhatIsKeptStays() {
+        String text = CABINET.formatted("bridge-dc", "90") + "clip: {dropper: 12 kΩ ±1 % 17 W 500 V}\n";
+        PartialDesign partial = PartialDesign.read(
+                new Source("kept.yaml", text), Set.of(), EnumSet.of(OpenPart.CAPACITOR), Requests.LIBRARY);
+        Design design = Sizing.propose(partial.request(Requests.LIBRARY, PreferredSeries.E12))
+                .design();
+
+        assertThat(design.clip().dropper().value()).isEqualTo(12e3);
+        assertThat(design.ramp().capacitor())
+                .isEqualTo(partial.loaded().design().ramp().capacitor());
+        assertThat(partial.open())
+                .doesNotContain(OpenPart.DROPPER, OpenPart.CAPACITOR)
+                .contains(OpenPart.FIXED);
+    }
+
+    @Test
+    void chosenResistorsAreOfTheSeriesAskedFor() {
+        Design design = Sizing.propose(Requests.request(CABINET.formatted("bridge-dc", "90"), PreferredSeries.E6))
+                .design();
+
+        assertThat(PreferredSeries.E6.contains(design.ramp().fixed().value())).isTrue();
+        assertThat(PreferredSeries.E6.contains(design.clip().dropper().value())).isTrue();
+        assertThat(PreferredSeries.E6.contains(design.trigger().baseOne().value()))
+                .isTrue();
+        assertThat(PreferredSeries.E6.contains(design.ramp().capacitor().value()))
+                .isTrue();
+    }
+
+    @Test
+    void moreThanAHalfWaveStageCanGiveIsToldAsAConflictWithTheNearestThatCanBeHad() {
+        SizingAnswer answer =
+                Sizing.propose(Requests.request(CABINET.formatted("half-wave", "80"), PreferredSeries.E24));
+
+        assertThat(answer.outcome()).isEqualTo(Outcome.NOTHING);
+        assertThat(answer.conflicts()).anySatisfy(c -> {
+            assertThat(c.margin().id()).isEqualTo("wanted-highest");
+            assertThat(c.nearest()).contains("in place of 0.8");
+        });
+    }
+
+    @Test
+    void aWrongKeyInARequestIsRefusedAtItsOwnLineAndMissingPartsAreNot() {
+        String text = CABINET.formatted("bridge-dc", "90") + "ramp: {capacitr: 100 nF}\n";
+
+        assertThatThrownBy(() -> Requests.read(text))
+                .isInstanceOfSatisfying(
+                        InvalidInputException.class,
+                        e -> assertThat(e.problems()).singleElement().satisfies(p -> {
+                            assertThat(p.line()).isEqualTo(7);
+                            assertThat(p.message()).contains("capacitr");
+                        }));
+    }
+
+    @Test
+    void aKnobThatGivesMostAnticlockwiseIsWiredTheOtherWay() {
+        String text = CABINET.formatted("bridge-dc", "90")
+                .replace("at 0 %,", "at 100 %,")
+                .replace("90 % at 100 %", "90 % at 0 %");
+        Design design =
+                Sizing.propose(Requests.request(text, PreferredSeries.E24)).design();
+
+        assertThat(design.ramp().rampOhms(0)).isLessThan(design.ramp().rampOhms(1));
+    }
+
+    @Test
+    void everyReasonNamesItsRelationAndTheNeighbourOfTheTrackFails() {
+        SizingRequest request = Requests.request(CABINET.formatted("bridge-dc", "92"), PreferredSeries.E24);
+        SizingAnswer answer = Sizing.propose(request);
+
+        assertThat(Reasons.of(request, answer))
+                .hasSize(request.open().size())
+                .allSatisfy(r -> assertThat(r.relation()).isNotBlank());
+        assertThat(Reasons.of(request, answer))
+                .filteredOn(r -> r.part() == OpenPart.TRACK)
+                .singleElement()
+                .satisfies(r -> assertThat(r.down()).contains("lowest wanted setting"));
+    }
+
+    @ParameterizedTest
+    @ValueSource(longs = {1, 2})
+    void theSearchFindsAsGoodARampAsTryingEveryOne(long seed) {
+        SizingRequest request = Requests.ramp(seed);
+
+        assertThat(Exhaustive.searched(request).grade())
+                .as("seed %d", seed)
+                .isEqualTo(Exhaustive.best(request).grade());
+    }
+}
