@@ -58,6 +58,9 @@ final class BenchPage extends Pane {
         partsTab.setOnAction(event -> choose(true));
         fold.setOnAction(event -> unfold(false));
         fold.setAccessibleText("Fold parts and margins away");
+        // Placed here by hand: what changes inside one of them lays out that one only.
+        left.setManaged(false);
+        right.setManaged(false);
         getChildren().addAll(left, right);
         model.onJudgement(() -> model.judgement()
                 .ifPresent(j -> margins.show(MarginRow.all(j.check().margins()))));

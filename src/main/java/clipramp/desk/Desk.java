@@ -75,25 +75,36 @@ public final class Desk {
             WindowActions[] actions = new WindowActions[1];
             Workshop workshop = new Workshop(this::library);
             DeskModel model = new DeskModel(workers, workshop, recovery, trouble -> actions[0].show(trouble));
-            RecordMaker maker = new RecordMaker(workers, workshop, version(), trouble -> actions[0].show(trouble));
+            Late<RecordMaker> maker = new Late<>(
+                    () -> new RecordMaker(workers, workshop, version(), trouble -> actions[0].show(trouble)));
             actions[0] = new WindowActions(model, maker, recovery, places, workers, closed);
             Theme theme = new Theme(Palette.PAPER, 1);
             DeskWindow window = new DeskWindow(stage, theme, model, maker, actions[0]);
             actions[0].serve(window, asking.of(stage));
+            actions[0].take(Settings.load(places));
             stage.show();
             Thread.currentThread()
                     .setUncaughtExceptionHandler(
                             (thread, failure) -> actions[0].show(Trouble.of("Something went wrong", failure)));
-            workers.writing().execute(() -> {
-                Settings settings = Settings.load(places);
-                Platform.runLater(() -> actions[0].take(settings));
-            });
-            file.ifPresentOrElse(model.draft()::open, actions[0]::offerRecovery);
-            workers.judging().execute(() -> {
-                boolean dark = SystemTheme.isDark(System.getProperty("os.name", ""));
-                Platform.runLater(() -> actions[0].takeSystemTheme(dark));
-            });
+            // Twice: behind the frame that is being made now.
+            Platform.runLater(() -> Platform.runLater(() -> {
+                window.finish();
+                actions[0].greet();
+                file.ifPresentOrElse(model.draft()::open, actions[0]::offerRecovery);
+                askSystemTheme(actions[0]);
+            }));
             return model;
+        }
+
+        private static void askSystemTheme(WindowActions actions) {
+            Thread asking = new Thread(
+                    () -> {
+                        boolean dark = SystemTheme.isDark(System.getProperty("os.name", ""));
+                        Platform.runLater(() -> actions.takeSystemTheme(dark));
+                    },
+                    "desk-theme");
+            asking.setDaemon(true);
+            asking.start();
         }
 
         private static String version() {

@@ -31,26 +31,26 @@ final class DeskWindow {
     private final DeskModel model;
     private final BorderPane root = new BorderPane();
     private final StartPage start;
-    private final NewPage fresh;
-    private final BenchPage bench;
-    private final SpreadPage spread;
-    private final RecordPage record;
-    private final HeaderView header;
+    private final Late<NewPage> fresh;
+    private final Late<BenchPage> bench;
+    private final Late<SpreadPage> spread;
+    private final Late<RecordPage> record;
+    private final Late<HeaderView> header;
     private final Menus menus;
     private final VBox top = new VBox();
     private Page page = Page.BENCH;
 
-    DeskWindow(Stage stage, Theme theme, DeskModel model, RecordMaker maker, Actions actions) {
+    DeskWindow(Stage stage, Theme theme, DeskModel model, Late<RecordMaker> maker, Actions actions) {
         this.stage = stage;
         this.theme = theme;
         this.model = model;
         this.start = new StartPage(actions);
-        this.fresh = new NewPage(
-                wish -> actions.propose(wish, false), wish -> actions.propose(wish, true), actions::giveUpNew);
-        this.bench = new BenchPage(theme, model);
-        this.spread = new SpreadPage(theme, model.draft(), model.spread(), this::layBands);
-        this.record = new RecordPage(theme, model.draft(), maker, actions::saveRecord);
-        this.header = new HeaderView(model, actions, () -> bench.unfold(true));
+        this.fresh = new Late<>(() -> new NewPage(
+                wish -> actions.propose(wish, false), wish -> actions.propose(wish, true), actions::giveUpNew));
+        this.bench = new Late<>(this::makeBench);
+        this.spread = new Late<>(() -> new SpreadPage(theme, model.draft(), model.spread(), this::layBands));
+        this.record = new Late<>(() -> new RecordPage(theme, model.draft(), maker.get(), actions::saveRecord));
+        this.header = new Late<>(() -> new HeaderView(model, actions, () -> bench().unfold(true)));
         this.menus = new Menus(actions, model.draft());
         top.getChildren().setAll(menus.node());
         root.setTop(top);
@@ -68,8 +68,19 @@ final class DeskWindow {
         takeDrops(scene, actions);
         model.draft().onChange(this::refresh);
         model.draft().onChange(this::layBands);
-        bench.widthProperty().addListener(property -> mark());
         theme.onChange(this::mark);
+    }
+
+    private BenchPage makeBench() {
+        BenchPage made = new BenchPage(theme, model);
+        made.widthProperty().addListener(property -> mark());
+        return made;
+    }
+
+    /** Makes what the first painted window did without, so that the first design need not wait for it. */
+    void finish() {
+        bench.get();
+        header.get();
     }
 
     private static void takeDrops(Scene scene, Actions actions) {
@@ -90,11 +101,11 @@ final class DeskWindow {
     }
 
     private void refresh() {
-        boolean shown = root.getCenter() == node(page);
+        boolean shown = top.getChildren().size() > 1;
         if (model.draft().isOpen() && !shown) {
             showPage(Page.BENCH);
-        } else if (page == Page.RECORD) {
-            record.show();
+        } else if (page == Page.RECORD && model.draft().isOpen()) {
+            record.get().show();
         }
         stage.setTitle(model.draft().name() + (model.draft().isDirty() ? " (differs from saved)" : "") + " – clipramp");
         mark();
@@ -102,39 +113,41 @@ final class DeskWindow {
 
     void showPage(Page wanted) {
         page = wanted;
-        top.getChildren().setAll(menus.node(), header.node());
+        top.getChildren().setAll(menus.node(), header.get().node());
         root.setCenter(node(page));
         if (page == Page.RECORD) {
-            record.show();
+            record.get().show();
         } else if (page == Page.BENCH) {
-            Platform.runLater(bench::begin);
+            Platform.runLater(bench()::begin);
         }
         mark();
     }
 
     private Node node(Page of) {
         return switch (of) {
-            case BENCH -> bench;
-            case SPREAD -> spread.node();
-            case RECORD -> record.node();
+            case BENCH -> bench();
+            case SPREAD -> spread.get().node();
+            case RECORD -> record.get().node();
         };
     }
 
     /** The spread of the design as it stands lies over lanes and knob, where it is wanted. */
     private void layBands() {
-        model.bench().lay(spread.bands());
+        if (spread.isMade()) {
+            model.bench().lay(spread.get().bands());
+        }
     }
 
     /** Asks for a new design. */
     void showNew() {
-        fresh.offer(model.draft().workshop().lineIds());
+        fresh.get().offer(model.draft().workshop().lineIds());
         top.getChildren().setAll(menus.node());
-        root.setCenter(fresh.node());
-        Platform.runLater(fresh::begin);
+        root.setCenter(fresh.get().node());
+        Platform.runLater(fresh.get()::begin);
     }
 
     void complainNew(String words) {
-        fresh.complain(words);
+        fresh.get().complain(words);
     }
 
     /** Back to what was there before. */
@@ -147,7 +160,9 @@ final class DeskWindow {
     }
 
     private void mark() {
-        header.showPage(page, bench.isFolded());
+        if (header.isMade() && bench.isMade()) {
+            header.get().showPage(page, bench().isFolded());
+        }
     }
 
     void showSettings(Settings settings) {
@@ -161,7 +176,7 @@ final class DeskWindow {
 
     /** A word about what was done, beside the title. */
     void say(String words) {
-        header.say(words);
+        header.get().say(words);
     }
 
     Stage stage() {
@@ -173,13 +188,13 @@ final class DeskWindow {
     }
 
     BenchPage bench() {
-        return bench;
+        return bench.get();
     }
 
     Optional<Figure> figure(Shown what) {
         return switch (what) {
-            case LANES -> bench.lanes().figure().map(f -> (Figure) f);
-            case KNOB -> bench.knob().figure().map(f -> (Figure) f);
+            case LANES -> bench().lanes().figure().map(f -> (Figure) f);
+            case KNOB -> bench().knob().figure().map(f -> (Figure) f);
             case CIRCUIT -> model.draft().sheet().map(s -> new CircuitFigure(s.design()));
         };
     }

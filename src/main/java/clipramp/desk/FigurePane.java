@@ -3,6 +3,7 @@ package clipramp.desk;
 import clipramp.figures.Figure;
 import clipramp.figures.Style;
 import clipramp.figures.Surfaces;
+import javafx.application.Platform;
 import javafx.geometry.Rectangle2D;
 import javafx.scene.AccessibleRole;
 import javafx.scene.canvas.Canvas;
@@ -12,12 +13,13 @@ import org.jfree.fx.FXGraphics2D;
 import org.jspecify.annotations.Nullable;
 
 /**
- * A figure on the screen. However often it is given another one, it draws once a frame, when the scene is laid out.
- * Its sentence is what a screen reader says.
+ * A figure on the screen. However often it is given another one, it draws once a frame, just before the frame is laid
+ * out, and lays nothing out for it. Its sentence is what a screen reader says.
  */
 final class FigurePane extends Region {
     private final Canvas canvas = new Canvas();
     private final Theme theme;
+    private final Runnable drawing = this::drawIfStale;
     private @Nullable Figure figure;
     private boolean stale;
 
@@ -27,6 +29,14 @@ final class FigurePane extends Region {
         getStyleClass().add("figure");
         setAccessibleRole(AccessibleRole.IMAGE_VIEW);
         theme.onChange(this::redraw);
+        sceneProperty().addListener((property, before, now) -> {
+            if (before != null) {
+                before.removePreLayoutPulseListener(drawing);
+            }
+            if (now != null) {
+                now.addPreLayoutPulseListener(drawing);
+            }
+        });
     }
 
     void show(Figure other) {
@@ -52,7 +62,7 @@ final class FigurePane extends Region {
 
     private void redraw() {
         stale = true;
-        requestLayout();
+        Platform.requestNextPulse();
     }
 
     @Override
@@ -83,9 +93,13 @@ final class FigurePane extends Region {
             canvas.setWidth(width);
             canvas.setHeight(height);
             stale = true;
+            drawIfStale();
         }
-        if (stale && figure != null && width > 0 && height > 0) {
-            paint(figure, width, height);
+    }
+
+    private void drawIfStale() {
+        if (stale && figure != null && canvas.getWidth() > 0 && canvas.getHeight() > 0) {
+            paint(figure, canvas.getWidth(), canvas.getHeight());
         }
     }
 

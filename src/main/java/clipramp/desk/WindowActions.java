@@ -33,7 +33,7 @@ final class WindowActions implements Actions {
     private static final double PICTURE_SCALE = 2;
 
     private final DeskModel model;
-    private final RecordMaker maker;
+    private final Late<RecordMaker> maker;
     private final Recovery recovery;
     private final Places places;
     private final Workers workers;
@@ -52,7 +52,7 @@ final class WindowActions implements Actions {
      * @param closed told when the window has gone
      */
     WindowActions(
-            DeskModel model, RecordMaker maker, Recovery recovery, Places places, Workers workers, Runnable closed) {
+            DeskModel model, Late<RecordMaker> maker, Recovery recovery, Places places, Workers workers, Runnable closed) {
         this.model = model;
         this.maker = maker;
         this.recovery = recovery;
@@ -200,7 +200,7 @@ final class WindowActions implements Actions {
 
     @Override
     public void saveRecord() {
-        maker.pdf().ifPresent(pdf -> {
+        maker.get().pdf().ifPresent(pdf -> {
             String name = draft().name().replaceFirst("\\.ya?ml$", "") + ".pdf";
             asks().toWrite(FileAsk.Kind.RECORD, name, draft().file())
                     .ifPresent(file -> draft().export(file, pdf, () -> window().say("Saved " + file.getFileName())));
@@ -332,6 +332,10 @@ final class WindowActions implements Actions {
         settings = remembered;
         window().showSettings(settings);
         dress();
+    }
+
+    /** The safety cautions stand before everything else on the first start. */
+    void greet() {
         if (!settings.cautionsRead()) {
             showCautions();
         }

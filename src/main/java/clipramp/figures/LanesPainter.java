@@ -121,8 +121,10 @@ final class LanesPainter {
         }
         pen.line(palette.axis(), style.hairline(), frame.left(), scale.y(0), frame.right(), scale.y(0));
         Shape before = g.getClip();
-        g.clip(new Rectangle2D.Double(
-                plot.getX(), plot.getY() - style.gap(), plot.getWidth(), plot.getHeight() + 2 * style.gap()));
+        if (isCloser()) {
+            g.clip(new Rectangle2D.Double(
+                    plot.getX(), plot.getY() - style.gap(), plot.getWidth(), plot.getHeight() + 2 * style.gap()));
+        }
         if (lane == Lane.LOAD) {
             fillUnder(lane, scale);
         }
@@ -133,7 +135,14 @@ final class LanesPainter {
         if (lane == Lane.PULSE) {
             markPulse(scale);
         }
-        g.setClip(before);
+        if (isCloser()) {
+            g.setClip(before);
+        }
+    }
+
+    /** Whether samples lie outside what is shown. A clip is dear on a screen: the whole half cycle needs none. */
+    private boolean isCloser() {
+        return figure.fromRad() > 0 || figure.toRad() < lanes.spanRad();
     }
 
     private void markPulse(Scale scale) {

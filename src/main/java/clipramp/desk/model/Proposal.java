@@ -105,12 +105,13 @@ public final class Proposal {
     }
 
     private String gate() {
+        // Without a resistor the secondary shorts a conducting SCR's gate and with it raises what latches (model: section 7).
         boolean twin = wish.stage() == Stage.INVERSE_PARALLEL;
         if (!twin && wish.stage() != Stage.TRIAC) {
             return "{coupling: direct, series: 0 Ω, shunt: 1 kΩ ±5 % 0.25 W}";
         }
-        return "{coupling: transformer, series: 0 Ω, shunt: 1 kΩ ±5 % 0.25 W, transformer: {ratio: 1, secondaries: "
-                + (twin ? 2 : 1)
+        return "{coupling: transformer, series: " + (twin ? "10 Ω ±5 % 0.25 W" : "0 Ω")
+                + ", shunt: 1 kΩ ±5 % 0.25 W, transformer: {ratio: 1, secondaries: " + (twin ? 2 : 1)
                 + ", magnetising: 2 mH, primary-resistance: 0.5 Ω, secondary-resistance: 0.5 Ω, clamp: diode,"
                 + " volt-seconds: 250 µVs}}";
     }

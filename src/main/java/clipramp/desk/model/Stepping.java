@@ -84,8 +84,9 @@ public final class Stepping {
         Expected bare = Expected.any(unit);
         for (int end = text.length(); end > 0; end--) {
             try {
-                if (QuantityReader.read(text.substring(0, end), bare).value() == whole.value()) {
-                    String rest = text.substring(end).strip();
+                String rest = text.substring(end).strip();
+                boolean letter = !rest.isEmpty() && Character.isLetter(rest.charAt(0));
+                if (!letter && QuantityReader.read(text.substring(0, end), bare).value() == whole.value()) {
                     return rest.isEmpty() ? "" : " " + rest;
                 }
             } catch (RefusedQuantityException e) {
