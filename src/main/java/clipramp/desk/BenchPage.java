@@ -130,6 +130,7 @@ final class BenchPage extends Pane {
     private void arrange() {
         boolean folded = isFolded();
         if (bothFit()) {
+            parts.node().setMinHeight(getHeight() * PARTS_SHARE);
             parts.node().setPrefHeight(getHeight() * PARTS_SHARE);
             stack(parts.node(), margins.node());
         } else {
@@ -141,6 +142,7 @@ final class BenchPage extends Pane {
             partsTab.setSelected(partsChosen);
             marginsTab.setSelected(!partsChosen);
             Region body = partsChosen ? parts.node() : margins.node();
+            body.setMinHeight(0);
             body.setPrefHeight(Region.USE_COMPUTED_SIZE);
             stack(tabs, body);
         }

@@ -21,6 +21,9 @@ final class MarginRowView {
     /** Share of the row's width: name, asked, there is, bar, ratio, verdict. */
     private static final double[] COLUMNS = {36, 14, 13, 14, 8, 15};
 
+    private static final double ROW_PADDING = 16;
+    private static final int LONG_NAME = 28;
+
     private static final List<String> VERDICTS = List.of("fails", "tight", "holds", "not-judged");
 
     private final Label name = cell("margin-name");
@@ -39,8 +42,6 @@ final class MarginRowView {
 
     MarginRowView(Consumer<String> chosen) {
         this.chosen = chosen;
-        name.setWrapText(true);
-        name.setMinHeight(Region.USE_PREF_SIZE);
         GridPane grid = new GridPane();
         grid.getStyleClass().add("margin-grid");
         for (double share : COLUMNS) {
@@ -54,11 +55,19 @@ final class MarginRowView {
         }
         grid.setMouseTransparent(true);
         row.setGraphic(grid);
-        grid.prefWidthProperty().bind(row.widthProperty().subtract(16));
+        grid.prefWidthProperty().bind(row.widthProperty().subtract(ROW_PADDING));
         row.setMaxWidth(Double.MAX_VALUE);
         row.getStyleClass().setAll("margin-row");
         row.setOnAction(event -> setOpen(!open));
         details.getStyleClass().add("margin-details");
+    }
+
+    /** A long name takes two lines. */
+    private static String inLines(String words) {
+        int middle = words.lastIndexOf(' ', LONG_NAME);
+        return words.length() <= LONG_NAME || middle < 0
+                ? words
+                : words.substring(0, middle) + "\n" + words.substring(middle + 1);
     }
 
     private static Label cell(String style) {
@@ -76,7 +85,7 @@ final class MarginRowView {
             return;
         }
         shown = margin;
-        name.setText(margin.name());
+        name.setText(inLines(margin.name()));
         asked.setText(margin.asked());
         offered.setText(margin.offered());
         ratio.setText(margin.ratio());
