@@ -4,6 +4,7 @@ import clipramp.desk.model.DeskModel;
 import clipramp.desk.model.MarginRow;
 import java.util.List;
 import javafx.scene.control.Button;
+import javafx.scene.control.ScrollPane;
 import javafx.scene.control.ToggleButton;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Pane;
@@ -21,6 +22,9 @@ final class BenchPage extends Pane {
 
     private static final double BOTH_FROM = 940;
     private static final double LEFT_SHARE = 0.53;
+    private static final double LEAST_LANES = 300;
+    private static final double LEAST_KNOB = 170;
+    private static final double KNOB_SHARE = 0.27;
     private static final double DRAWER = 620;
     private static final double PARTS_SHARE = 0.56;
 
@@ -30,6 +34,7 @@ final class BenchPage extends Pane {
     private final MarginsView margins;
     private final KnobView knob;
     private final VBox left = new VBox();
+    private final ScrollPane leftScroll = new ScrollPane();
     private final VBox right = new VBox();
     private final HBox tabs = new HBox();
     private final ToggleButton partsTab = tab("parts", "Circuit and parts");
@@ -49,9 +54,13 @@ final class BenchPage extends Pane {
         left.getStyleClass().add("bench-left");
         right.getStyleClass().add("bench-right");
         VBox.setVgrow(lanes.node(), Priority.ALWAYS);
-        knob.node().prefHeightProperty().bind(heightProperty().multiply(0.27));
         knob.node().setMinHeight(Region.USE_PREF_SIZE);
         left.getChildren().addAll(lanes.node(), readout.node(), knob.node());
+        leftScroll.setContent(left);
+        leftScroll.setFitToWidth(true);
+        leftScroll.setFitToHeight(true);
+        leftScroll.setHbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);
+        leftScroll.setFocusTraversable(false);
         tabs.getStyleClass().add("tabs");
         tabs.setMinHeight(Region.USE_PREF_SIZE);
         marginsTab.setOnAction(event -> choose(false));
@@ -59,9 +68,9 @@ final class BenchPage extends Pane {
         fold.setOnAction(event -> unfold(false));
         fold.setAccessibleText("Fold parts and margins away");
         // Placed here by hand: what changes inside one of them lays out that one only.
-        left.setManaged(false);
+        leftScroll.setManaged(false);
         right.setManaged(false);
-        getChildren().addAll(left, right);
+        getChildren().addAll(leftScroll, right);
         model.onJudgement(() -> model.judgement()
                 .ifPresent(j -> margins.show(MarginRow.all(j.check().margins()))));
         theme.onChange(this::arrange);
@@ -129,6 +138,9 @@ final class BenchPage extends Pane {
 
     private void arrange() {
         boolean folded = isFolded();
+        // Five lanes and a curve need so much to be read; a small or much enlarged window scrolls.
+        lanes.node().setMinHeight(LEAST_LANES * theme.zoom());
+        knob.node().setPrefHeight(Math.max(LEAST_KNOB * theme.zoom(), getHeight() * KNOB_SHARE));
         if (bothFit()) {
             parts.node().setMinHeight(getHeight() * PARTS_SHARE);
             parts.node().setPrefHeight(getHeight() * PARTS_SHARE);
@@ -163,12 +175,12 @@ final class BenchPage extends Pane {
         double width = getWidth();
         double height = getHeight();
         if (isFolded()) {
-            left.resizeRelocate(0, 0, width, height);
+            leftScroll.resizeRelocate(0, 0, width, height);
             double drawer = Math.min(width, DRAWER * theme.zoom());
             right.resizeRelocate(width - drawer, 0, drawer, height);
         } else {
             double split = Math.round(width * LEFT_SHARE);
-            left.resizeRelocate(0, 0, split, height);
+            leftScroll.resizeRelocate(0, 0, split, height);
             right.resizeRelocate(split, 0, width - split, height);
         }
     }

@@ -31,6 +31,8 @@ final class HeaderView {
     private final ToggleButton bench = new ToggleButton("Bench");
     private final ToggleButton spread = new ToggleButton("Spread");
     private final ToggleButton record = new ToggleButton("Record");
+    private final HBox row = new HBox();
+    private final HBox heading = new HBox();
     private final VBox box;
     private boolean filling;
 
@@ -59,8 +61,9 @@ final class HeaderView {
         cautions.setOnAction(event -> actions.showCautions());
         Region gap = new Region();
         HBox.setHgrow(gap, Priority.ALWAYS);
-        HBox row = new HBox(title, saved, gap, verdict, counts, margins, condition, switches, cautions);
+        row.getChildren().setAll(title, saved, gap, verdict, counts, margins, condition, switches, cautions);
         row.getStyleClass().add("header");
+        heading.getStyleClass().add("header");
         for (Region fixed : List.of(saved, verdict, counts, margins, condition, switches, cautions)) {
             fixed.setMinWidth(Region.USE_PREF_SIZE);
         }
@@ -104,8 +107,23 @@ final class HeaderView {
         record.setSelected(page == Page.RECORD);
         margins.setVisible(folded && page == Page.BENCH);
         margins.setManaged(folded && page == Page.BENCH);
+        stack(folded);
         counts.setVisible(!folded);
         counts.setManaged(!folded);
+    }
+
+    /** Where there is no room for everything in one row, the title has one of its own. */
+    private void stack(boolean narrow) {
+        boolean stacked = heading.getChildren().contains(title);
+        if (narrow && !stacked) {
+            row.getChildren().removeAll(title, saved);
+            heading.getChildren().setAll(title, saved);
+            box.getChildren().add(0, heading);
+        } else if (!narrow && stacked) {
+            box.getChildren().remove(heading);
+            heading.getChildren().clear();
+            row.getChildren().addAll(0, List.of(title, saved));
+        }
     }
 
     /** A word about what was done, until the design changes. */
