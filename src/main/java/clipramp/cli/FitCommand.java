@@ -9,6 +9,8 @@ import clipramp.files.Source;
 import clipramp.fit.Fit;
 import clipramp.fit.FitResult;
 import clipramp.fit.Readings;
+import clipramp.record.PageSize;
+import clipramp.record.RecordContent;
 import clipramp.spread.Watch;
 import java.nio.charset.StandardCharsets;
 import java.util.ArrayList;
@@ -63,6 +65,14 @@ final class FitCommand implements Callable<Integer> {
     @Option(names = "--replace", order = 11, description = "write over a file that is there")
     boolean replace;
 
+    @Option(
+            names = "--record",
+            paramLabel = "OUT.pdf",
+            order = 12,
+            description = "also write the design record with a page about this unit")
+    @Nullable
+    String record;
+
     @Option(names = "--json", order = 30, description = "the answer for machines")
     boolean json;
 
@@ -90,6 +100,11 @@ final class FitCommand implements Callable<Integer> {
             byte[] bytes = built.get().text().getBytes(StandardCharsets.UTF_8);
             Outputs.write(out, file -> file.write(bytes), replace);
         }
+        if (record != null) {
+            RecordContent content = RecordContent.of(
+                    loaded, design.check(loaded), design.library(session), Program.version());
+            Outputs.record(record, content.withFit(result), PageSize.A4);
+        }
         if (json) {
             session.out().exactly(FitJson.of(loaded, result, notes, out, session.ascii()));
         } else if (built.isPresent() && Inputs.STANDARD_INPUT.equals(out)) {
@@ -100,6 +115,10 @@ final class FitCommand implements Callable<Integer> {
                 session.out().line("");
                 session.out().line("Written: " + out + ", the design as built.");
                 session.out().line("Next: clipramp check " + out);
+            }
+            if (record != null) {
+                session.out().line("");
+                session.out().line("Record: " + record);
             }
         }
         return result.isTelling() ? ExitCode.ANSWERED : ExitCode.FAILS;

@@ -59,8 +59,12 @@ final class Outputs {
      * @param library where the design's profiles were found, for their sources
      */
     static void record(String name, LoadedDesign loaded, Check check, ProfileLibrary library, PageSize size) {
+        record(name, RecordContent.of(loaded, check, library, Program.version()), size);
+    }
+
+    /** Writes a record whose content is there already. */
+    static void record(String name, RecordContent content, PageSize size) {
         withoutDisplay();
-        RecordContent content = RecordContent.of(loaded, check, library, Program.version());
         write(name, out -> DesignRecord.write(content, out, size), true);
     }
 

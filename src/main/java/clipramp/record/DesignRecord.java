@@ -70,6 +70,7 @@ public final class DesignRecord {
         parts.parts();
         CommissioningSection.write(paper, content);
         FaultsSection.write(paper, content);
+        content.fit().ifPresent(fit -> AsBuiltSection.write(paper, fit));
         paper.newPage();
         SourcesSection.write(paper, content);
         SignatureSection.write(paper, content);

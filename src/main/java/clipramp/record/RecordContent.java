@@ -8,11 +8,13 @@ import clipramp.files.Profile;
 import clipramp.files.ProfileLibrary;
 import clipramp.firing.Firing;
 import clipramp.firing.Waveforms;
+import clipramp.fit.FitResult;
 import clipramp.margins.Check;
 import clipramp.power.KnobMap;
 import clipramp.power.LoadWave;
 import clipramp.power.OperatingPoint;
 import java.util.List;
+import java.util.Optional;
 
 /**
  * Everything that a record prints, solved and judged beforehand.
@@ -24,6 +26,7 @@ import java.util.List;
  * @param commissioning what to measure, with what is expected
  * @param faults every single fault and what follows from it
  * @param programVersion version of this program
+ * @param fit one unit as built, where it was measured
  */
 public record RecordContent(
         LoadedDesign loaded,
@@ -32,7 +35,8 @@ public record RecordContent(
         Lanes lanes,
         List<Expectation> commissioning,
         FaultSheet faults,
-        String programVersion) {
+        String programVersion,
+        Optional<FitResult> fit) {
     private static final int SAMPLES = 2000;
     private static final double MID_KNOB = 0.5;
 
@@ -65,6 +69,13 @@ public record RecordContent(
                 .map(Profile::read)
                 .toList();
         FaultSheet faults = Faults.of(check.design(), check.condition());
-        return new RecordContent(loaded, check, profiles, lanes, Commissioning.of(check), faults, programVersion);
+        return new RecordContent(
+                loaded, check, profiles, lanes, Commissioning.of(check), faults, programVersion, Optional.empty());
+    }
+
+    /** The same with a page about one unit as built. */
+    public RecordContent withFit(FitResult measured) {
+        return new RecordContent(
+                loaded, check, profiles, lanes, commissioning, faults, programVersion, Optional.of(measured));
     }
 }

@@ -13,6 +13,7 @@ import java.io.IOException;
 import java.util.ArrayList;
 import java.util.HashSet;
 import java.util.List;
+import java.util.Optional;
 import java.util.Set;
 import org.apache.pdfbox.Loader;
 import org.apache.pdfbox.cos.COSName;
@@ -241,7 +242,8 @@ class DesignRecordTest {
                 content.lanes(),
                 content.commissioning(),
                 content.faults(),
-                "0.1.0");
+                "0.1.0",
+                Optional.empty());
         for (PageSize size : PageSize.values()) {
             byte[] bytes = DesignRecord.bytes(long_, size);
             assertThat(text(bytes, 1).replaceAll("\\s+", " "))
