@@ -86,7 +86,8 @@ final class FitCommand implements Callable<Integer> {
         Source text = Inputs.source(session, design.file);
         LoadedDesign loaded = design.load(session, text);
         Design circuit = loaded.design();
-        Readings read = ReadingsFile.read(Inputs.source(session, readings), circuit, celsius());
+        Source bench = Inputs.source(session, readings);
+        Readings read = ReadingsFile.read(bench, circuit, celsius());
         OptionalDouble volts = design.lineVolts(circuit);
         if (volts.isPresent()) {
             read = read.onLine(volts.getAsDouble());
@@ -101,12 +102,12 @@ final class FitCommand implements Callable<Integer> {
             Outputs.write(out, file -> file.write(bytes), replace);
         }
         if (record != null) {
-            RecordContent content = RecordContent.of(
-                    loaded, design.check(loaded), design.library(session), Program.version());
+            RecordContent content =
+                    RecordContent.of(loaded, design.check(loaded), design.library(session), Program.version());
             Outputs.record(record, content.withFit(result), PageSize.A4);
         }
         if (json) {
-            session.out().exactly(FitJson.of(loaded, result, notes, out, session.ascii()));
+            session.out().exactly(FitJson.of(loaded, result, notes, ReadingsFile.digest(bench), out, session.ascii()));
         } else if (built.isPresent() && Inputs.STANDARD_INPUT.equals(out)) {
             session.out().exactly(built.get().text());
         } else {

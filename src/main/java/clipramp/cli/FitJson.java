@@ -17,13 +17,19 @@ final class FitJson {
     private FitJson() {}
 
     static String of(
-            LoadedDesign loaded, FitResult result, List<String> notes, @Nullable String written, boolean ascii) {
+            LoadedDesign loaded,
+            FitResult result,
+            List<String> notes,
+            String digest,
+            @Nullable String written,
+            boolean ascii) {
         List<Note> all = new ArrayList<>();
         loaded.notes().forEach(text -> all.add(new Note("input", text)));
         notes.forEach(text -> all.add(new Note("fit", text)));
         return new Answer("fit", Optional.of(loaded), Optional.empty(), all).json(ascii, json -> {
             Answer.titleAndCondition(json, loaded, FitText.condition(loaded, result));
             json.put("readings", result.readings().name())
+                    .put("readingsDigest", digest)
                     .putObjects("values", result.values(), FitJson::value)
                     .putWords("untouched", result.untouched())
                     .putObjects(

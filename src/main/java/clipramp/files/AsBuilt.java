@@ -3,6 +3,7 @@ package clipramp.files;
 import clipramp.circuit.Characteristic;
 import clipramp.circuit.Design;
 import clipramp.circuit.Part;
+import clipramp.circuit.PotLaw;
 import clipramp.circuit.Tolerance;
 import clipramp.circuit.Trigger.ProgrammableTrigger;
 import clipramp.circuit.Trigger.UnijunctionTrigger;
@@ -17,6 +18,7 @@ import java.math.RoundingMode;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.stream.DoubleStream;
 
 /**
  * Writes what a fit found into a design's text, comments kept. A value that the readings tell carries its 95 % interval as
@@ -30,7 +32,7 @@ public final class AsBuilt {
     /** A move of less than this share of what the limits allow is none. */
     private static final double LEAST_MOVE = 0.01;
 
-    /** Between these a pot is linear in a design file's words. */
+    /** Between these a file's logarithmic laws have no number. */
     private static final double LOWEST_LINEAR = 0.49;
 
     private static final double HIGHEST_LINEAR = 0.51;
@@ -135,10 +137,19 @@ public final class AsBuilt {
                 Math.max(at, rounded(told ? value.to() : value.high())));
     }
 
+    /** A logarithmic law by its share at half rotation; next to linear, which has no such number, its points. */
     private void law(double half) {
         if (half > LOWEST_LINEAR && half < HIGHEST_LINEAR) {
-            set("ramp.pot.law", "linear");
+            set("ramp.pot.law", "table");
             text = text.without("ramp.pot.half");
+            PotLaw law = FitResult.lawOf(half);
+            set(
+                    "ramp.pot.points",
+                    FlowText.list(DoubleStream.of(0, 0.25, 0.5, 0.75, 1)
+                            .mapToObj(turned -> FlowText.list(List.of(
+                                    QuantityText.exact(turned, Unit.FRACTION),
+                                    QuantityText.exact(rounded(law.share(turned)), Unit.FRACTION))))
+                            .toList()));
         } else {
             set("ramp.pot.law", half < 0.5 ? "log" : "reverse-log");
             set("ramp.pot.half", QuantityText.exact(rounded(Math.min(half, 1 - half)), Unit.FRACTION));

@@ -36,6 +36,11 @@ public final class ReadingsFile {
         return new ReadingsFile(source, design).readings(celsius);
     }
 
+    /** SHA-256 of the readings' text, hexadecimal. */
+    public static String digest(Source source) {
+        return Digest.of(source.text());
+    }
+
     /** Heads as they are best written, for help. */
     public static List<String> heads() {
         return ReadingsColumn.known();

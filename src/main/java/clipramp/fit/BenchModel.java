@@ -3,7 +3,6 @@ package clipramp.fit;
 import clipramp.circuit.Condition;
 import clipramp.circuit.Design;
 import clipramp.circuit.Pot;
-import clipramp.circuit.PotLaw;
 import clipramp.circuit.RefusedCircuit;
 import clipramp.engine.Network;
 import clipramp.firing.Firing;
@@ -104,14 +103,6 @@ final class BenchModel {
             return pot.trackShare(within);
         }
         double turned = pot.sense() == Pot.Sense.RISING ? within : 1 - within;
-        return lawOf(unit.halfShare).share(turned);
-    }
-
-    /** The one family that holds all laws but a table: by its track share at half rotation. */
-    static PotLaw lawOf(double halfShare) {
-        if (Math.abs(halfShare - 0.5) < 1e-6) {
-            return new PotLaw.Linear();
-        }
-        return halfShare < 0.5 ? new PotLaw.Logarithmic(halfShare) : new PotLaw.ReverseLogarithmic(1 - halfShare);
+        return FitResult.lawOf(unit.halfShare).share(turned);
     }
 }

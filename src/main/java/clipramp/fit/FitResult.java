@@ -1,5 +1,6 @@
 package clipramp.fit;
 
+import clipramp.circuit.PotLaw;
 import java.util.List;
 
 /**
@@ -24,6 +25,9 @@ public record FitResult(
 
     /** Path of the line voltage where nobody read it: of the day, not of the unit. */
     public static final String LINE_PATH = "line.voltage";
+
+    /** Nearer to one half than this the exponential loses its digits. */
+    private static final double LINEAR = 1e-6;
 
     public FitResult {
         values = List.copyOf(values);
@@ -50,6 +54,18 @@ public record FitResult(
     /** Whether the readings tell anything of the unit itself, the line voltage on the day not counted. */
     public boolean isTelling() {
         return told().stream().anyMatch(value -> !value.path().equals(LINE_PATH));
+    }
+
+    /**
+     * The one family that holds every law but a table, by its track share at half rotation.
+     *
+     * @param halfShare above 0, below 1; 0.5 is linear
+     */
+    public static PotLaw lawOf(double halfShare) {
+        if (Math.abs(halfShare - 0.5) < LINEAR) {
+            return new PotLaw.Linear();
+        }
+        return halfShare < 0.5 ? new PotLaw.Logarithmic(halfShare) : new PotLaw.ReverseLogarithmic(1 - halfShare);
     }
 
     /** The value of a design key. */

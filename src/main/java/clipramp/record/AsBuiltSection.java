@@ -25,22 +25,24 @@ final class AsBuiltSection {
         paper.section("As built");
         Quality quality = fit.quality();
         paper.text("One unit, fitted from " + quality.used() + " of " + quality.readings() + " bench readings ("
-                + fit.readings().name() + ") at " + QuantityText.format(fit.readings().celsius(), Unit.CELSIUS)
+                + fit.readings().name() + ") at "
+                + QuantityText.format(fit.readings().celsius(), Unit.CELSIUS)
                 + ". Intervals hold 19 times in 20. "
                 + (quality.widened() > 1
                         ? "The readings scatter " + decimals(quality.widened(), 1)
                                 + " times as far as their instruments explain; the intervals are widened by that."
                         : "The readings scatter no more than their instruments explain."));
         values(paper, fit);
-        paper.quiet("Before any reading, every value is taken as its design's, one standard deviation to its limit. Told: half"
-                + " or less of that is left. * limits are the program's, because the design states none.");
+        paper.quiet(
+                "Before any reading, every value is taken as its design's, one standard deviation to its limit. Told: half"
+                        + " or less of that is left. * limits are the program's, because the design states none.");
         untold(paper, fit);
         strangers(paper, fit);
         residuals(paper, fit);
     }
 
     private static void values(Paper paper, FitResult fit) {
-        Grid grid = new Grid(paper.faces(), new float[] {2.6f, 1.3f, 1.3f, 2.3f, 1.1f, 2.3f, 1.5f}, 1, 2, 4);
+        Grid grid = new Grid(paper.faces(), new float[] {2.5f, 1.1f, 1.2f, 2.2f, 1.3f, 2.2f, 1.9f}, 1, 2, 4);
         grid.heads("value", "design", "as built", "95 % interval", "difference", "limits", "verdict");
         for (Knowledge knowledge : List.of(Knowledge.TOLD, Knowledge.NARROWED)) {
             for (Fitted value : fit.values()) {
@@ -97,14 +99,15 @@ final class AsBuiltSection {
 
     private static void strangers(Paper paper, FitResult fit) {
         for (Residual stranger : fit.strangers()) {
-            paper.text("Does not belong, and was left out: line " + stranger.line() + ", " + stranger.column() + ", read "
-                    + amount(stranger.read(), stranger.unit()) + "; the others say "
-                    + amount(stranger.shown(), stranger.unit()) + ".");
+            paper.text(
+                    "Does not belong, and was left out: line " + stranger.line() + ", " + stranger.column() + ", read "
+                            + amount(stranger.read(), stranger.unit()) + "; the others say "
+                            + amount(stranger.shown(), stranger.unit()) + ".");
         }
     }
 
     private static void residuals(Paper paper, FitResult fit) {
-        Grid grid = new Grid(paper.faces(), new float[] {0.7f, 3.4f, 1.8f, 1.8f, 2f, 2.7f}, 0, 2, 3, 4);
+        Grid grid = new Grid(paper.faces(), new float[] {0.7f, 3.4f, 1.8f, 1.8f, 2.4f, 2.3f}, 0, 2, 3, 4);
         grid.heads("line", "what", "read", "this unit", "standard deviations", "");
         for (Residual residual : fit.residuals().subList(0, fit.readings().count())) {
             grid.row(

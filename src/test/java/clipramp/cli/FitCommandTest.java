@@ -9,6 +9,9 @@ import java.io.IOException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import org.apache.pdfbox.Loader;
+import org.apache.pdfbox.pdmodel.PDDocument;
+import org.apache.pdfbox.text.PDFTextStripper;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 
@@ -88,6 +91,20 @@ class FitCommandTest {
         assertThat(problem.get("line").asInt()).isEqualTo(1);
         assertThat(problem.get("column").asInt()).isEqualTo(10);
         assertThat(problem.get("message").asText()).contains("average-reading");
+    }
+
+    @Test
+    void theRecordHasAPageAboutTheUnit(@TempDir Path folder) throws IOException {
+        Path pdf = folder.resolve("unit.pdf");
+        CliRun run = CliRun.of("fit", DESIGN, READINGS, "--record=" + pdf);
+
+        assertThat(run.out()).endsWith("Record: " + pdf + "\n");
+        try (PDDocument document = Loader.loadPDF(pdf.toFile())) {
+            String text = new PDFTextStripper().getText(document).replaceAll("\\s+", " ");
+            assertThat(text)
+                    .contains("As built", "fitted from 24 of 24 bench readings", "95 % interval", "within tolerance")
+                    .contains("These readings cannot tell:");
+        }
     }
 
     @Test
