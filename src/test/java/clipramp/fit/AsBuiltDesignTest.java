@@ -30,14 +30,17 @@ class AsBuiltDesignTest {
         DesignText built = AsBuilt.of(drawn, design, result);
 
         assertThat(built.text().lines().filter(line -> line.startsWith("#")))
-                .containsExactlyElementsOf(
-                        drawn.text().lines().filter(line -> line.startsWith("#")).toList());
+                .containsExactlyElementsOf(drawn.text()
+                        .lines()
+                        .filter(line -> line.startsWith("#"))
+                        .toList());
         assertThat(built.read(ProfileLibrary.shipped())).isInstanceOfSatisfying(Good.class, good -> {
             Design unit = good.loaded().design();
             BenchModel model = new BenchModel(unit);
             int i = 0;
             for (BenchLine line : bench.readings.lines()) {
-                // The lines' own line voltages and knob positions as fitted: how far off they were stands in the residuals.
+                // The lines' own line voltages and knob positions as fitted: how far off they were stands in the
+                // residuals.
                 double[] shown = model.shown(new TriedUnit(unit, 25), fitted(line, result), 0, 0);
                 for (double value : shown) {
                     double asFitted = result.residuals().get(i++).shown();
@@ -59,7 +62,8 @@ class AsBuiltDesignTest {
 
     private static double setting(BenchLine line, FitResult result, String what) {
         return result.residuals().stream()
-                .filter(residual -> residual.line() == line.line() && residual.what().equals(what))
+                .filter(residual ->
+                        residual.line() == line.line() && residual.what().equals(what))
                 .findFirst()
                 .orElseThrow()
                 .shown();
