@@ -49,20 +49,27 @@ final class GateSide {
             n.triggerAmps = Math.max(n.triggerAmps, demand.ampsAt(unit.celsius));
         }
         n.turnOnSeconds = thyristor.gate().turnOnSeconds().orElse(0);
-        double source = pulses == null ? unit.baseOneOhms : pulses.secondaryOhms();
         TemperatureCurve curve = latching;
         n.latchingAmps = curve == null
                 ? 0
                 : curve.ampsAt(unit.celsius)
-                        + bleedAmps(thyristor.kind(), unit.gateSeriesOhms + source, n.gateShuntSiemens);
+                        + bleedAmps(
+                                thyristor.kind(),
+                                n.transformerCoupled,
+                                unit.gateSeriesOhms + unit.baseOneOhms,
+                                n.gateShuntSiemens);
     }
 
     /**
-     * What a conducting SCR's gate junction loses to the gate circuit: 0.7 V over R_GK parallel (R_G + R1, or the
-     * secondary winding), A. A triac's terminals are too well joined inside to notice.
+     * What a conducting SCR's gate junction loses to the gate circuit: 0.7 V over R_GK parallel (R_G + R1), A. A pulse
+     * transformer's inductance keeps the second path closed for the microseconds that latching takes; a triac's terminals
+     * are too well joined inside to notice.
      */
-    static double bleedAmps(Kind kind, double pathOhms, double shuntSiemens) {
-        return kind == Kind.TRIAC ? 0 : BLEED_VOLTS * (1 / pathOhms + shuntSiemens);
+    static double bleedAmps(Kind kind, boolean transformerCoupled, double pathOhms, double shuntSiemens) {
+        if (kind == Kind.TRIAC) {
+            return 0;
+        }
+        return BLEED_VOLTS * ((transformerCoupled ? 0 : 1 / pathOhms) + shuntSiemens);
     }
 
     /** The trigger data that a pulse's polarity meets: an SCR's own, or those of a triac's two quadrants. */

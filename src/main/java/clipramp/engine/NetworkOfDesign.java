@@ -3,7 +3,6 @@ package clipramp.engine;
 import clipramp.circuit.Condition;
 import clipramp.circuit.Design;
 import clipramp.circuit.GateDrive;
-import clipramp.circuit.PulseTransformer;
 import clipramp.circuit.RefusedCircuit;
 import clipramp.circuit.ThyristorDevice;
 import clipramp.circuit.TriggerDemand;
@@ -39,11 +38,11 @@ public final class NetworkOfDesign {
     /** What a conducting SCR's gate junction loses to the gate circuit, A: it raises latching and holding current. */
     public static double gateBleedAmps(Design design) {
         GateDrive gate = design.gate();
-        double source = gate.transformer()
-                .map(PulseTransformer::secondaryOhms)
-                .orElse(design.trigger().baseOne().value());
         double shuntSiemens = gate.shunt().map(shunt -> 1 / shunt.value()).orElse(0.0);
         return GateSide.bleedAmps(
-                design.thyristor().device().kind(), gate.series().value() + source, shuntSiemens);
+                design.thyristor().device().kind(),
+                gate.transformer().isPresent(),
+                gate.series().value() + design.trigger().baseOne().value(),
+                shuntSiemens);
     }
 }
