@@ -44,7 +44,7 @@ public final class DesignFiles {
                 devices.uses(),
                 findings.notes(),
                 overrides,
-                inputDigest(source, devices.used(), overrides));
+                inputDigest(source, devices.used(), overrides, findings.alsoRead()));
     }
 
     // A newer format may have keys that would be reported as unknown, which helps nobody.
@@ -53,12 +53,13 @@ public final class DesignFiles {
         return version.matches("[1-9]\\d{0,8}") && Integer.parseInt(version) > Version.CURRENT;
     }
 
-    private static String inputDigest(Source source, List<Found> used, List<String> overrides) {
+    private static String inputDigest(Source source, List<Found> used, List<String> overrides, List<String> alsoRead) {
         List<String> texts = new ArrayList<>();
         texts.add(source.text());
         used.forEach(f -> texts.add(f.kind() + "/" + f.id() + "\n" + f.source().text()));
         texts.add(String.valueOf(overrides.size()));
         texts.addAll(overrides);
+        texts.addAll(alsoRead);
         return Digest.of(texts);
     }
 }

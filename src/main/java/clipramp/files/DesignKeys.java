@@ -54,6 +54,11 @@ final class DesignKeys {
                         .orElse("+10 %")
                         .by("margins")
                         .means("Highest line at which the design must work, as a signed share of nominal or in volts."),
+                other("line.recorded", Kind.TEXT)
+                        .optional()
+                        .by("recorded lines")
+                        .means(
+                                "CSV file beside the design with a recorded period, time in s and volts; gives the harmonics, and the voltage where line.voltage is left out."),
                 other("line.harmonics", Kind.LIST)
                         .optional()
                         .by("distorted lines")

@@ -13,6 +13,7 @@ final class Findings {
     private final List<Problem> problems = new ArrayList<>();
     private final List<Assumed> assumed = new ArrayList<>();
     private final List<String> notes = new ArrayList<>();
+    private final List<String> alsoRead = new ArrayList<>();
 
     void add(Problem problem) {
         if (problems.size() < MOST_PROBLEMS && !problems.contains(problem)) {
@@ -69,6 +70,15 @@ final class Findings {
 
     List<Assumed> assumed() {
         return assumed;
+    }
+
+    /** Text of a file that the design names, which its digest covers. */
+    void alsoRead(String text) {
+        alsoRead.add(text);
+    }
+
+    List<String> alsoRead() {
+        return List.copyOf(alsoRead);
     }
 
     List<String> notes() {

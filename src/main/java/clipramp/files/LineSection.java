@@ -6,9 +6,13 @@ import clipramp.files.Node.Scalar;
 import clipramp.units.Expected;
 import clipramp.units.Quantity;
 import clipramp.units.QuantityReader;
+import clipramp.units.QuantityText;
 import clipramp.units.Refusal;
 import clipramp.units.RefusedQuantityException;
 import clipramp.units.Unit;
+import java.io.IOException;
+import java.nio.file.InvalidPathException;
+import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.HashSet;
 import java.util.List;
@@ -21,13 +25,45 @@ final class LineSection {
 
     static Optional<Line> read(Scope scope) {
         int before = scope.findings().count();
-        double volts = scope.quantity("voltage");
         double hertz = scope.quantity("frequency");
+        Optional<RecordedLine> recorded = recorded(scope, hertz);
+        double volts = recorded.isPresent()
+                ? scope.quantityOr(
+                        "voltage",
+                        recorded.get().rmsVolts(),
+                        QuantityText.format(recorded.get().rmsVolts(), Unit.VOLT, 4) + " as recorded")
+                : scope.quantity("voltage");
         double low = limit(scope, "low", volts);
         double high = limit(scope, "high", volts);
-        List<Harmonic> harmonics = harmonics(scope);
+        List<Harmonic> written = harmonics(scope);
+        List<Harmonic> harmonics = recorded.map(RecordedLine::harmonics).orElse(written);
         scope.closeDevice();
         return scope.make(before, () -> new Line(volts, hertz, low, high, harmonics));
+    }
+
+    private static Optional<RecordedLine> recorded(Scope scope, double hertz) {
+        String name = scope.text("recorded");
+        if (name.isEmpty() || name.equals("none")) {
+            return Optional.empty();
+        }
+        Place place = scope.placeOf("recorded");
+        String path = scope.pathOf("recorded");
+        if (scope.has("harmonics")) {
+            scope.findings().problem(place, path, "recorded and harmonics both stand here; keep one of them.");
+        }
+        try {
+            Source source = Source.of(Path.of(place.file()).resolveSibling(name));
+            RecordedLine recorded = RecordedLine.of(source.text(), hertz);
+            scope.findings().alsoRead(source.text());
+            scope.findings().note(recorded.leftOut());
+            return Optional.of(recorded);
+        } catch (IOException | InvalidPathException e) {
+            scope.findings()
+                    .problem(place, path, "the file " + name + " cannot be read. It is looked for beside the design.");
+        } catch (IllegalArgumentException e) {
+            scope.findings().problem(place, path, name + " " + e.getMessage() + ".");
+        }
+        return Optional.empty();
     }
 
     private static double limit(Scope scope, String name, double nominal) {
