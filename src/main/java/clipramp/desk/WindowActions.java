@@ -52,7 +52,12 @@ final class WindowActions implements Actions {
      * @param closed told when the window has gone
      */
     WindowActions(
-            DeskModel model, Late<RecordMaker> maker, Recovery recovery, Places places, Workers workers, Runnable closed) {
+            DeskModel model,
+            Late<RecordMaker> maker,
+            Recovery recovery,
+            Places places,
+            Workers workers,
+            Runnable closed) {
         this.model = model;
         this.maker = maker;
         this.recovery = recovery;

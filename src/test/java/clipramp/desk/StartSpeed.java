@@ -26,16 +26,15 @@ public final class StartSpeed {
             Places places = new Places(home.resolve("config"), home.resolve("state"));
             new Desk.Setup(places, Map.of(), home, stage -> new Harness.ToldAsk())
                     .show(new Stage(), Optional.empty(), () -> {});
-            Platform.runLater(() -> Platform.runLater(
-                    () -> Toolkit.getToolkit().addRenderJob(new RenderJob(StartSpeed::painted))));
+            Platform.runLater(() ->
+                    Platform.runLater(() -> Toolkit.getToolkit().addRenderJob(new RenderJob(StartSpeed::painted))));
         });
     }
 
     private static void painted() {
         long millis = ManagementFactory.getRuntimeMXBean().getUptime();
         Duration processor = ProcessHandle.current().info().totalCpuDuration().orElse(Duration.ZERO);
-        System.out.printf(
-                Locale.ROOT, "painted after %d ms, %d ms of processor%n", millis, processor.toMillis());
+        System.out.printf(Locale.ROOT, "painted after %d ms, %d ms of processor%n", millis, processor.toMillis());
         System.exit(0);
     }
 }

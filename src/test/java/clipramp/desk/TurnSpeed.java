@@ -80,7 +80,14 @@ public final class TurnSpeed {
             Scene scene = window.stage.getScene();
             Runnable[] after = new Runnable[1];
             after[0] = () -> {
-                boolean there = window.model.bench().reading().orElseThrow().point().position().orElse(-1) == position;
+                boolean there = window.model
+                                .bench()
+                                .reading()
+                                .orElseThrow()
+                                .point()
+                                .position()
+                                .orElse(-1)
+                        == position;
                 if (there) {
                     scene.removePostLayoutPulseListener(after[0]);
                     // Behind this pulse's own rendering in the renderer's queue.

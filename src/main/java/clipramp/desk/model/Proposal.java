@@ -105,7 +105,8 @@ public final class Proposal {
     }
 
     private String gate() {
-        // Without a resistor the secondary shorts a conducting SCR's gate and with it raises what latches (model: section 7).
+        // Without a resistor the secondary shorts a conducting SCR's gate and with it raises what latches (model:
+        // section 7).
         boolean twin = wish.stage() == Stage.INVERSE_PARALLEL;
         if (!twin && wish.stage() != Stage.TRIAC) {
             return "{coupling: direct, series: 0 Ω, shunt: 1 kΩ ±5 % 0.25 W}";

@@ -43,7 +43,9 @@ class CompanionsTest {
             for (Stage to : Stage.values()) {
                 Draft draft = draft("drying-cabinet");
                 assertThat(choose(draft, "stage", from.word())).as(from.word()).isEmpty();
-                assertThat(choose(draft, "stage", to.word())).as(from + " to " + to).isEmpty();
+                assertThat(choose(draft, "stage", to.word()))
+                        .as(from + " to " + to)
+                        .isEmpty();
                 assertThat(draft.sheet().orElseThrow().design().stage()).isEqualTo(to);
                 if (from != to) {
                     draft.undo();

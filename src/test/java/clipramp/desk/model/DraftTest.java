@@ -83,7 +83,8 @@ class DraftTest {
         assertThat(left()).hasSize(1);
         draft.save(folder.resolve("mine.yaml"), () -> {});
         bystander.run();
-        assertThat(Files.readString(folder.resolve("mine.yaml"), StandardCharsets.UTF_8)).isEqualTo(text());
+        assertThat(Files.readString(folder.resolve("mine.yaml"), StandardCharsets.UTF_8))
+                .isEqualTo(text());
         assertThat(draft.isDirty()).isFalse();
         assertThat(left()).isEmpty();
     }

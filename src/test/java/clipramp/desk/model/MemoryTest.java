@@ -30,7 +30,8 @@ class MemoryTest {
         assertThat(Places.of(Map.of("XDG_CONFIG_HOME", "/c", "XDG_STATE_HOME", "/s"), home))
                 .isEqualTo(new Places(Path.of("/c/clipramp"), Path.of("/s/clipramp")));
         // "All paths set in these environment variables must be absolute", else they are ignored.
-        assertThat(Places.of(Map.of("XDG_CONFIG_HOME", "c"), home).config()).isEqualTo(home.resolve(".config/clipramp"));
+        assertThat(Places.of(Map.of("XDG_CONFIG_HOME", "c"), home).config())
+                .isEqualTo(home.resolve(".config/clipramp"));
     }
 
     @Test
@@ -64,7 +65,9 @@ class MemoryTest {
         assertThat(other.leftBehind()).isEmpty();
         Path unsaved = places().state().resolve("unsaved");
         // The same id with another start: the process that wrote it is gone and its id came round again.
-        Files.copy(Files.list(unsaved).findFirst().orElseThrow(), unsaved.resolve(ProcessHandle.current().pid() + "-1-1.yaml"));
+        Files.copy(
+                Files.list(unsaved).findFirst().orElseThrow(),
+                unsaved.resolve(ProcessHandle.current().pid() + "-1-1.yaml"));
         List<Recovery.Left> left = other.leftBehind();
         assertThat(left).hasSize(1);
         assertThat(left.get(0).file()).hasValue(folder.resolve("mine.yaml"));
@@ -77,13 +80,15 @@ class MemoryTest {
     void whatIsNoUnsavedWorkIsLeftAlone() throws IOException {
         Path unsaved = Files.createDirectories(places().state().resolve("unsaved"));
         Files.writeString(unsaved.resolve("notes.yaml"), "shopping", StandardCharsets.UTF_8);
-        assertThat(new Recovery(places(), ProcessHandle.current(), 1).leftBehind()).isEmpty();
+        assertThat(new Recovery(places(), ProcessHandle.current(), 1).leftBehind())
+                .isEmpty();
     }
 
     /** RFC 4180: CR LF, quotes doubled, a cell with a comma quoted. */
     @Test
     void tablesAreCsvAndTabbed() {
-        NumberTable table = new NumberTable(List.of("angle °", "says"), List.of(List.of("−1.5", "a, \"b\""), List.of("–", "c")));
+        NumberTable table =
+                new NumberTable(List.of("angle °", "says"), List.of(List.of("−1.5", "a, \"b\""), List.of("–", "c")));
         assertThat(TableText.csv(table)).isEqualTo("angle °,says\r\n-1.5,\"a, \"\"b\"\"\"\r\n,c\r\n");
         assertThat(TableText.tabbed(table)).isEqualTo("angle °\tsays\n-1.5\ta, \"b\"\n\tc\n");
     }
