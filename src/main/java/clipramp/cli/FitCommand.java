@@ -93,7 +93,7 @@ final class FitCommand implements Callable<Integer> {
             read = read.onLine(volts.getAsDouble());
         }
         FitResult result = Fit.run(circuit, read, Watch.NONE);
-        List<String> notes = new ArrayList<>(FitText.notes(circuit, result));
+        List<String> notes = new ArrayList<>(FitText.notes(result));
         Optional<DesignText> built =
                 Optional.ofNullable(out).map(name -> AsBuilt.of(DesignText.of(text), circuit, result));
         built.ifPresent(b -> notes.addAll(b.notes()));

@@ -1,7 +1,6 @@
 package clipramp.cli;
 
 import clipramp.circuit.Condition;
-import clipramp.circuit.Design;
 import clipramp.cli.TextTable.Align;
 import clipramp.files.LoadedDesign;
 import clipramp.fit.FitResult;
@@ -197,7 +196,7 @@ final class FitText {
     }
 
     /** How the fit was made, and what was assumed. */
-    static List<String> notes(Design design, FitResult result) {
+    static List<String> notes(FitResult result) {
         List<String> notes = new ArrayList<>();
         notes.add(
                 "Accuracies hold for 19 readings in 20; where a head says none, the usual ones: firing angle 1°, delay"
@@ -217,9 +216,6 @@ final class FitText {
         }
         if (result.value(FitResult.LINE_PATH).isPresent()) {
             notes.add("The line voltage was not read on every line; there it is fitted as one value for the day.");
-        }
-        if (design.load().word().equals("filament")) {
-            notes.add("A lamp's resistance follows its temperature: its readings tell the firing angle less well.");
         }
         return notes;
     }

@@ -1,6 +1,7 @@
 package clipramp.files;
 
 import clipramp.circuit.Design;
+import clipramp.circuit.Load;
 import clipramp.files.CsvRows.Field;
 import clipramp.files.ReadingsColumn.Kind;
 import clipramp.fit.BenchLine;
@@ -79,7 +80,13 @@ public final class ReadingsFile {
                 continue;
             }
             Optional<ReadingsColumn> column = ReadingsColumn.of(head.text(), placeOf(head), findings);
-            if (column.isPresent()) {
+            if (column.isPresent() && column.get().kind() == Kind.AVERAGE && design.load() instanceof Load.Inductive) {
+                findings.problem(
+                        placeOf(head),
+                        head.text(),
+                        "what an average-reading meter shows across an inductive load is not computed. Take true rms or"
+                                + " load power, or leave the column out.");
+            } else if (column.isPresent()) {
                 columns.put(c, column.get());
             }
         }

@@ -74,17 +74,18 @@ final class BenchModel {
             case FIRING_ANGLE -> pulse.map(Pulse::startRad).orElse(Math.PI);
             case DELAY -> pulse.map(Pulse::startSeconds).orElse(condition.halfCycleSeconds());
             case LOAD_TRUE_RMS -> load.map(LoadResult::rmsVolts).orElse(0.0);
-            case LOAD_AVERAGE_READING ->
-                load.map(result -> AVERAGE_TO_SINE_RMS
-                                * result.meanAmps()
-                                * design.load().resistanceOhms())
-                        .orElse(0.0);
+            case LOAD_AVERAGE_READING -> load.map(BenchModel::averageReading).orElse(0.0);
             case LOAD_WATTS -> load.map(LoadResult::watts).orElse(0.0);
             case BASE_ONE_PEAK -> pulse.map(Pulse::peakBaseOneVolts).orElse(0.0);
             case SUPPLY -> pulse.map(Pulse::supplyVolts).orElse(0.0);
             case PEAK_POINT -> pulse.map(Pulse::peakPointVolts).orElse(0.0);
             case RAMP_OHMS -> ohms;
         };
+    }
+
+    /** Voltage follows current in a resistor, and in a filament within a half cycle, so both have one form factor. */
+    private static double averageReading(LoadResult load) {
+        return load.rmsVolts() == 0 ? 0 : AVERAGE_TO_SINE_RMS * load.rmsVolts() / load.formFactor();
     }
 
     private double rampOhms(TriedUnit unit, Setting setting, double off) {

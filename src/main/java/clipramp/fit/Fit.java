@@ -1,6 +1,7 @@
 package clipramp.fit;
 
 import clipramp.circuit.Design;
+import clipramp.circuit.Load;
 import clipramp.fit.BenchProblem.Observed;
 import clipramp.fit.Fitted.Knowledge;
 import clipramp.spread.Watch;
@@ -40,9 +41,12 @@ public final class Fit {
      * @param watch is told of progress and may cancel
      * @throws UnsettledFitException where no values can be found
      * @throws java.util.concurrent.CancellationException where the watch cancelled
-     * @throws clipramp.power.UnsupportedLoadException for load readings of a load that cannot be computed
+     * @throws IllegalArgumentException for an average-reading meter across an inductive load, which is not computed
      */
     public static FitResult run(Design design, Readings readings, Watch watch) {
+        if (design.load() instanceof Load.Inductive && readings.has(Meter.LOAD_AVERAGE_READING)) {
+            throw new IllegalArgumentException("an average-reading meter across an inductive load is not computed");
+        }
         BenchProblem problem = new BenchProblem(design, readings);
         Strangers search = new Strangers(problem, watch);
         Estimate estimate = search.settled();

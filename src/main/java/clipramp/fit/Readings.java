@@ -23,6 +23,11 @@ public record Readings(String name, double celsius, List<BenchLine> lines) {
         return lines.stream().mapToInt(line -> line.readings().size()).sum();
     }
 
+    /** Whether an instrument was read at all. */
+    public boolean has(Meter meter) {
+        return lines.stream().flatMap(line -> line.readings().stream()).anyMatch(reading -> reading.meter() == meter);
+    }
+
     /** The same with this line voltage, rms in V, on every line that has none of its own. */
     public Readings onLine(double volts) {
         BenchLine.LineVolts all = new BenchLine.LineVolts(volts, BenchLine.LineVolts.USUAL, "--line");

@@ -50,9 +50,7 @@ final class Unknowns {
         all.unstated(design);
         boolean byKnob = readings.lines().stream().anyMatch(l -> l.setting().kind() == Setting.Kind.KNOB);
         design.ramp().pot().filter(pot -> byKnob).ifPresent(all::law);
-        boolean pulses = readings.lines().stream()
-                .flatMap(line -> line.readings().stream())
-                .anyMatch(reading -> reading.meter() == Meter.BASE_ONE_PEAK);
+        boolean pulses = readings.has(Meter.BASE_ONE_PEAK);
         if (pulses && design.trigger() instanceof UnijunctionTrigger trigger) {
             trigger.device().baseOnePulse().ifPresent(all::pulse);
         }

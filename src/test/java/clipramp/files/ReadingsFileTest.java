@@ -9,6 +9,9 @@ import clipramp.fit.BenchLine;
 import clipramp.fit.Meter;
 import clipramp.fit.Readings;
 import clipramp.fit.Setting;
+import java.io.IOException;
+import java.io.UncheckedIOException;
+import java.nio.file.Path;
 import java.util.List;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -78,6 +81,25 @@ class ReadingsFileTest {
                 .isInstanceOf(InvalidInputException.class)
                 .hasMessageContaining("bench.csv:" + place + " ")
                 .hasMessageContaining(said);
+    }
+
+    @Test
+    void refusesAnAverageReadingMeterAcrossAnInductiveLoad() {
+        Design fan = design(Path.of("examples", "store-fan.yaml"));
+        Source bench = new Source("bench.csv", "knob (%),load voltage (V average-reading)\n50,90\n");
+        assertThatThrownBy(() -> ReadingsFile.read(bench, fan, 25))
+                .isInstanceOf(InvalidInputException.class)
+                .hasMessageContaining("bench.csv:1:10 ")
+                .hasMessageContaining("true rms");
+    }
+
+    private static Design design(Path file) {
+        try {
+            return DesignFiles.load(Source.of(file), List.of(), ProfileLibrary.shipped())
+                    .design();
+        } catch (IOException e) {
+            throw new UncheckedIOException(e);
+        }
     }
 
     @Test
