@@ -1,11 +1,14 @@
 package clipramp.sizing;
 
+import clipramp.circuit.Characteristic;
 import clipramp.circuit.ClipSupply;
 import clipramp.circuit.Condition;
 import clipramp.circuit.Design;
+import clipramp.circuit.Trigger.ProgrammableTrigger;
 import clipramp.circuit.Trigger.UnijunctionTrigger;
 import clipramp.circuit.Unijunction;
 import clipramp.circuit.Wanted.Goal;
+import clipramp.engine.ProgrammableDevice;
 import clipramp.firing.Firing;
 import clipramp.firing.HalfCycle;
 import clipramp.firing.PublishedRelations;
@@ -48,6 +51,11 @@ record Reach(
 
     private static final double LATE_RAD = Math.toRadians(160);
 
+    /** A conducting programmable device at its valley, and the supply of its sheet (model: trigger device), V. */
+    private static final double JUNCTION_VOLTS = 0.6;
+
+    private static final double PROGRAMMABLE_TEST_VOLTS = 10;
+
     /** Firing angle at one R_E, and how it moves. */
     private record Found(double ohms, double radPerOhm) {}
 
@@ -87,9 +95,15 @@ record Reach(
     /** (V - V_V)/I_V at the zener's voltage, the valley current of the least unit proportional to the supply. */
     private static double valleyOhms(Design design) {
         double supply = design.clip().zener().volts().nominal();
-        if (!(design.trigger() instanceof UnijunctionTrigger trigger)) {
-            return 0;
+        if (design.trigger() instanceof ProgrammableTrigger programmable) {
+            double amps = ProgrammableDevice.amps(
+                    programmable.device().valleyCurrentAmps(),
+                    ProgrammableDevice.gateOhms(programmable),
+                    Characteristic::lowest);
+            return PublishedRelations.smallestRampOhms(
+                    supply, JUNCTION_VOLTS, amps * supply / PROGRAMMABLE_TEST_VOLTS);
         }
+        UnijunctionTrigger trigger = (UnijunctionTrigger) design.trigger();
         Unijunction.Valley valley = trigger.device().valley();
         double share = supply / valley.atVolts();
         return PublishedRelations.smallestRampOhms(

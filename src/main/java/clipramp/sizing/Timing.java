@@ -61,6 +61,7 @@ record Timing(double yield, double deadTravel, double lack) {
                 + over(low, reach.lowestTo())
                 + over(most, reach.collapse())
                 + over(reach.clip(), least)
+                + over(reach.valley(), least)
                 + SOFT * over(reach.valley() * RESERVE, least);
     }
 

@@ -5,6 +5,7 @@ import static org.assertj.core.api.Assertions.assertThatThrownBy;
 
 import clipramp.circuit.Design;
 import clipramp.files.DesignText.Reading;
+import clipramp.files.Example;
 import clipramp.files.InvalidInputException;
 import clipramp.files.PartialDesign;
 import clipramp.files.SizedText;
@@ -46,6 +47,20 @@ class SizingTest {
         SizingAnswer answer = Sizing.propose(partial.request(Requests.LIBRARY, PreferredSeries.E24));
 
         assertThat(answer.outcome()).isNotEqualTo(Outcome.NOTHING);
+        assertThat(answer.conflicts()).isEmpty();
+        assertThat(checked(partial, answer).verdict()).isNotEqualTo(Verdict.FAILS);
+    }
+
+    @Test
+    void aProgrammableDeviceKeepsItsRampOverItsSmallValleyCurrent() {
+        String text = Example.named("seed-drawer").orElseThrow().text();
+        PartialDesign partial = PartialDesign.read(
+                new Source("drawer.yaml", text),
+                EnumSet.of(OpenPart.CAPACITOR, OpenPart.FIXED, OpenPart.TRACK),
+                Set.of(),
+                Requests.LIBRARY);
+        SizingAnswer answer = Sizing.propose(partial.request(Requests.LIBRARY, PreferredSeries.E12));
+
         assertThat(answer.conflicts()).isEmpty();
         assertThat(checked(partial, answer).verdict()).isNotEqualTo(Verdict.FAILS);
     }
