@@ -23,11 +23,15 @@ final class RampChoice {
 
     private RampChoice() {}
 
-    /** Designs with every open ramp resistor chosen, best first, at most so many; the design itself where none is open. */
+    /** Designs with every open ramp resistor chosen, best first, at most so many; the design itself where none is open, or nothing that
+     * is sold comes near. */
     static List<Design> best(SizingRequest request, Design design, Reach reach, int most) {
         List<Ranked> ranked = all(request, design, reach).stream()
                 .map(d -> new Ranked(d, Timing.of(d, reach), DistinctValues.of(d)))
                 .toList();
+        if (ranked.isEmpty()) {
+            return List.of(design);
+        }
         return ranked.stream()
                 .sorted(Comparator.comparingDouble((Ranked r) -> r.timing().lack())
                         .thenComparingLong(

@@ -100,8 +100,7 @@ record Reach(
                     programmable.device().valleyCurrentAmps(),
                     ProgrammableDevice.gateOhms(programmable),
                     Characteristic::lowest);
-            return PublishedRelations.smallestRampOhms(
-                    supply, JUNCTION_VOLTS, amps * supply / PROGRAMMABLE_TEST_VOLTS);
+            return PublishedRelations.smallestRampOhms(supply, JUNCTION_VOLTS, amps * supply / PROGRAMMABLE_TEST_VOLTS);
         }
         UnijunctionTrigger trigger = (UnijunctionTrigger) design.trigger();
         Unijunction.Valley valley = trigger.device().valley();
