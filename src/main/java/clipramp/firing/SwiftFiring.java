@@ -12,8 +12,9 @@ import clipramp.engine.SwiftStepper;
  * Allocates nothing once made.
  *
  * <p>The residual voltage is a fixed point of the half cycle. A half cycle forgets nearly all of the residual that it
- * began with, so two of them and a secant through them leave an error under 1e-9 V; whatever looks otherwise (hunting, a
- * pulse across the zero, no clipping) is refused and left to {@link Firing}.
+ * began with, so two of them and a secant through them leave an error under 1e-9 V; where that does not work out, half cycles
+ * follow each other as {@link PeriodicState} has it. What is out of reach (a pulse across the zero, no clipping) is refused
+ * and left to {@link Firing}.
  */
 public final class SwiftFiring {
     /** Error of a firing instant that is let stand, s: 2e-10 of a half cycle at 50 Hz. */
@@ -34,6 +35,12 @@ public final class SwiftFiring {
     private static final double MOST_KEPT = 0.2;
 
     private static final int MOST_PASSES = 8;
+
+    /** As {@link PeriodicState} has them: half cycles to wait for repetition, how many are shown without, and what repeats. */
+    private static final int MOST_HALVES = 60;
+
+    private static final int SHOWN_UNSETTLED = 8;
+    private static final double HUNTING_VOLTS = 1e-9;
     private static final int MOST_EVENTS = 5000;
 
     /** How far the gate current of the pulse going on has been followed. */
@@ -69,6 +76,10 @@ public final class SwiftFiring {
     /** A number for the order of events of the half cycle just run. */
     private int course;
 
+    private final Mode[] modes = new Mode[MOST_HALVES + 1];
+    private final double[] volts = new double[MOST_HALVES + 1];
+    private final double[] fired = new double[SHOWN_UNSETTLED];
+    private int shown = 1;
     private double residualVolts;
     private Mode residualMode = Mode.OFF;
     private long halves;
@@ -96,6 +107,12 @@ public final class SwiftFiring {
     public boolean solve(SourceWave wave, double angularRate) {
         omega = angularRate;
         stepper.take(wave);
+        shown = 1;
+        return settlesQuickly() || !doubt && settlesSlowly();
+    }
+
+    /** By two or three half cycles and the secant through them; false where that does not work out. */
+    private boolean settlesQuickly() {
         // As the reference does, from a discharged capacitor: where two periodic states exist, it decides between them.
         Mode mode = Mode.OFF;
         double volts = 0;
@@ -157,7 +174,63 @@ public final class SwiftFiring {
     private boolean settled(Mode mode, double volts) {
         residualMode = mode;
         residualVolts = volts;
-        return begun == 0 || clipUntil > Double.NEGATIVE_INFINITY;
+        fired[0] = firedSeconds;
+        doubt = begun > 0 && clipUntil == Double.NEGATIVE_INFINITY;
+        return !doubt;
+    }
+
+    /** Half cycle after half cycle, until they repeat, every second one repeats, or there is no patience left. */
+    private boolean settlesSlowly() {
+        modes[0] = Mode.OFF;
+        volts[0] = 0;
+        for (int half = 1; half <= MOST_HALVES; half++) {
+            if (!run(modes[half - 1], volts[half - 1], false, 0)) {
+                return false;
+            }
+            modes[half] = stepper.mode();
+            volts[half] = stepper.rampVolts();
+            if (repeats(half, 1)) {
+                return run(modes[half], volts[half], false, 0) && settled(modes[half], volts[half]);
+            }
+            if (repeats(half, 2) || half == MOST_HALVES) {
+                return bothHalves && hunts(half, repeats(half, 2) ? 2 : fired.length);
+            }
+        }
+        return false;
+    }
+
+    private boolean repeats(int half, int after) {
+        return half >= after
+                && modes[half] == modes[half - after]
+                && Math.abs(volts[half] - volts[half - after]) < HUNTING_VOLTS;
+    }
+
+    /** Records half cycles that differ, the positive one first: those with even numbers. */
+    private boolean hunts(int half, int count) {
+        Mode mode = modes[half];
+        double volt = volts[half];
+        if (half % 2 == 1) {
+            if (!run(mode, volt, false, 0)) {
+                return false;
+            }
+            mode = stepper.mode();
+            volt = stepper.rampVolts();
+        }
+        residualMode = mode;
+        residualVolts = volt;
+        int begunFirst = 0;
+        for (int i = 0; i < count; i++) {
+            if (!run(mode, volt, false, 0) || begun > 0 && clipUntil == Double.NEGATIVE_INFINITY) {
+                return false;
+            }
+            fired[i] = firedSeconds;
+            begunFirst = i == 0 ? begun : begunFirst;
+            mode = stepper.mode();
+            volt = stepper.rampVolts();
+        }
+        shown = count;
+        begun = begunFirst;
+        return true;
     }
 
     /** Runs once more to the firing pulse; what the rest of the half cycle showed stays. */
@@ -287,15 +360,28 @@ public final class SwiftFiring {
 
     // --- what the periodic state is ---------------------------------------------------------------------------------
 
-    /** Firing angle, rad from the line's zero; NaN if the thyristor stays off. */
+    /** Firing angle, rad from the line's zero; NaN if the thyristor stays off. Of the positive half cycle where it hunts. */
     public double firingRad() {
-        return omega * firedSeconds;
+        return omega * fired[0];
     }
 
-    /** In one word; it never hunts here. */
+    /** How many half cycles differ: 1, or more where it hunts. */
+    public int shown() {
+        return shown;
+    }
+
+    /** Firing angle in one of them, the positive one first, rad; NaN if the thyristor stays off. */
+    public double firingRad(int half) {
+        return omega * fired[half];
+    }
+
+    /** In one word. */
     public FiringState state() {
         if (begun == 0) {
             return FiringState.SILENT;
+        }
+        if (shown > 1) {
+            return FiringState.HUNTS;
         }
         if (stalled) {
             return FiringState.STALLS;

@@ -85,9 +85,13 @@ public final class SwiftPoint {
         if (!firing.solve(wave, omega)) {
             return false;
         }
-        double fired = firing.firingRad();
-        double square = Double.isNaN(fired) ? 0 : ResistorCurrent.sineSquare(crest, loadDropVolts, fired);
-        watts = square / (bothHalves ? Math.PI : 2 * Math.PI) / (pathOhms * pathOhms) * loadOhms;
+        double square = 0;
+        for (int half = 0; half < firing.shown(); half++) {
+            double fired = firing.firingRad(half);
+            square += Double.isNaN(fired) ? 0 : ResistorCurrent.sineSquare(crest, loadDropVolts, fired);
+        }
+        double span = firing.shown() * (bothHalves ? Math.PI : 2 * Math.PI);
+        watts = square / span / (pathOhms * pathOhms) * loadOhms;
         fraction = watts * loadOhms / (unit.lineVolts * unit.lineVolts);
         return true;
     }

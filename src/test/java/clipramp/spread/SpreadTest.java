@@ -53,9 +53,9 @@ class SpreadTest {
     void theWorstCaseEnclosesEveryUnit() {
         Design design = SampleDesigns.heater();
         Lot lot = new Lot(design, Factors.of(design), DrawLaw.UNIFORM, 3);
-        Sampling sampling = new Sampling(lot, new double[] {1, 0.5, 0}, 2000);
+        Sampling sampling = new Sampling(lot, new double[] {1, 0.5, 0}, 600);
         sampling.run(Watch.NONE);
-        SpreadResult result = Spread.run(design, new SpreadOptions(2000, 3, DrawLaw.UNIFORM, 0), Watch.NONE);
+        SpreadResult result = Spread.run(design, new SpreadOptions(600, 3, DrawLaw.UNIFORM, 0), Watch.NONE);
         for (int p = 0; p < 3; p++) {
             PositionSpread told = result.positions().get(5 * p);
             double[] fractions = sampling.fraction[p];
