@@ -4,6 +4,7 @@ import clipramp.files.LoadedDesign;
 import clipramp.margins.Check;
 import clipramp.margins.Verdict;
 import clipramp.record.PageSize;
+import java.util.Optional;
 import java.util.concurrent.Callable;
 import org.jspecify.annotations.Nullable;
 import picocli.CommandLine.Command;
@@ -52,7 +53,7 @@ final class CheckCommand implements Callable<Integer> {
             new CheckText(session.out(), loaded, check).print();
         }
         if (record != null) {
-            Outputs.record(record, loaded, check, design.library(session), PageSize.A4);
+            Outputs.record(record, loaded, check, design.library(session), PageSize.A4, Optional.empty());
         }
         if (record != null && !json) {
             session.out().line("");

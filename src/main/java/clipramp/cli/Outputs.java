@@ -6,6 +6,7 @@ import clipramp.figures.Figure;
 import clipramp.figures.KnobFigure;
 import clipramp.figures.Lanes;
 import clipramp.figures.LanesFigure;
+import clipramp.figures.SpreadFigure;
 import clipramp.figures.Surfaces;
 import clipramp.files.LoadedDesign;
 import clipramp.files.ProfileLibrary;
@@ -17,12 +18,14 @@ import clipramp.power.OperatingPoint;
 import clipramp.record.DesignRecord;
 import clipramp.record.PageSize;
 import clipramp.record.RecordContent;
+import clipramp.spread.SpreadResult;
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.FileAlreadyExistsException;
 import java.util.Arrays;
 import java.util.List;
 import java.util.Locale;
+import java.util.Optional;
 
 /** Files that commands write, whole or not at all. */
 final class Outputs {
@@ -57,15 +60,27 @@ final class Outputs {
      * Writes the design record; an older one is replaced.
      *
      * @param library where the design's profiles were found, for their sources
+     * @param spread what many units do, if they were drawn
      */
-    static void record(String name, LoadedDesign loaded, Check check, ProfileLibrary library, PageSize size) {
-        record(name, RecordContent.of(loaded, check, library, Program.version()), size);
+    static void record(
+            String name,
+            LoadedDesign loaded,
+            Check check,
+            ProfileLibrary library,
+            PageSize size,
+            Optional<SpreadResult> spread) {
+        record(name, RecordContent.of(loaded, check, library, Program.version()).withSpread(spread), size);
     }
 
     /** Writes a record whose content is there already. */
     static void record(String name, RecordContent content, PageSize size) {
         withoutDisplay();
         write(name, out -> DesignRecord.write(content, out, size), true);
+    }
+
+    /** Draws the power of many units against the knob. */
+    static void spreadPlot(String name, SpreadResult spread) {
+        draw(name, new SpreadFigure(spread));
     }
 
     /** Draws the power against the knob. */

@@ -3,6 +3,10 @@ package clipramp.cli;
 import clipramp.files.LoadedDesign;
 import clipramp.margins.Check;
 import clipramp.record.PageSize;
+import clipramp.spread.Spread;
+import clipramp.spread.SpreadOptions;
+import clipramp.spread.SpreadResult;
+import java.util.Optional;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
@@ -34,11 +38,25 @@ final class RecordCommand implements Callable<Integer> {
     @Option(names = "--paper", paramLabel = "SIZE", order = 11, description = "a4 or letter; a4 unless said")
     String paper = "a4";
 
-    @Option(names = "--json", order = 12, description = "the answer for machines")
+    @Option(names = "--spread", order = 12, description = "with a page on what 20000 units do within their tolerances")
+    boolean spread;
+
+    @Option(names = "--json", order = 13, description = "the answer for machines")
     boolean json;
 
     RecordCommand(Session session) {
         this.session = session;
+    }
+
+    private Optional<SpreadResult> drawn(LoadedDesign loaded) {
+        if (!spread) {
+            return Optional.empty();
+        }
+        try (SpreadWatch watch = new SpreadWatch(session)) {
+            SpreadResult result = Spread.run(loaded.design(), SpreadOptions.DEFAULT, watch);
+            watch.clear();
+            return Optional.of(result);
+        }
     }
 
     @Override
@@ -46,7 +64,7 @@ final class RecordCommand implements Callable<Integer> {
         PageSize size = Outputs.paper(paper);
         LoadedDesign loaded = design.load(session);
         Check check = design.check(loaded);
-        Outputs.record(out, loaded, check, design.library(session), size);
+        Outputs.record(out, loaded, check, design.library(session), size, drawn(loaded));
         if (json) {
             session.out()
                     .exactly(Answer.about("record", loaded, check.verdict(), check.notes())

@@ -29,7 +29,7 @@ import picocli.CommandLine.Option;
             "Exit code 1 when a drawn unit misses what is wanted or fails a margin."
         })
 final class SpreadCommand implements Callable<Integer> {
-    private static final int MOST_UNITS = 10_000_000;
+    private static final int MOST_UNITS = 2_000_000;
 
     private final Session session;
 
@@ -77,6 +77,14 @@ final class SpreadCommand implements Callable<Integer> {
     @Option(names = "--csv", order = 31, description = "comma-separated values, units in the header")
     boolean csv;
 
+    @Option(
+            names = "--plot",
+            paramLabel = "OUT.svg",
+            order = 32,
+            description = "the bands over the knob as .svg or .png; an older one is replaced")
+    @Nullable
+    String plot;
+
     SpreadCommand(Session session) {
         this.session = session;
     }
@@ -86,12 +94,18 @@ final class SpreadCommand implements Callable<Integer> {
         if (json && csv) {
             throw Problems.refused("--csv", "--json and --csv cannot both go to standard output. Choose one.");
         }
+        if (plot != null) {
+            Outputs.requirePlotName(plot);
+        }
         SpreadOptions options = options();
         LoadedDesign loaded = design.load(session);
         SpreadWatch watch = new SpreadWatch(session);
         try {
             SpreadResult result = Spread.run(loaded.design(), options, watch);
             watch.clear();
+            if (plot != null && result.units() > 0) {
+                Outputs.spreadPlot(plot, result);
+            }
             answer(loaded, result);
             session.out().flush();
             return result.isComplete() ? code(result) : ExitCode.INTERRUPTED;

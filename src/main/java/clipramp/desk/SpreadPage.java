@@ -3,12 +3,12 @@ package clipramp.desk;
 import clipramp.desk.model.Draft;
 import clipramp.desk.model.Sheet;
 import clipramp.desk.model.SpreadRun;
-import clipramp.desk.model.SpreadWords;
 import clipramp.figures.HistogramFigure;
 import clipramp.figures.SpreadFigure;
 import clipramp.spread.DrawLaw;
 import clipramp.spread.SpreadOptions;
 import clipramp.spread.SpreadResult;
+import clipramp.spread.SpreadWords;
 import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
@@ -176,7 +176,7 @@ final class SpreadPage {
         bar.setVisible(run.isRunning());
         run.progress().ifPresent(now -> {
             bar.setProgress((double) now.done() / now.of());
-            progress.setText(run.isEnding() ? "Ending…" : run.isRunning() ? SpreadWords.progress(now) : over());
+            progress.setText(run.isEnding() ? "Ending…" : run.isRunning() ? now.words() : over());
         });
         run.histogram().filter(h -> h.units() > 0).ifPresent(h -> {
             histogram.setVisible(true);

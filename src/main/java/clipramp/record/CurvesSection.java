@@ -5,12 +5,15 @@ import clipramp.figures.GateFigure;
 import clipramp.figures.KnobFigure;
 import clipramp.figures.LanesFigure;
 import clipramp.figures.NumberTable;
+import clipramp.figures.SpreadBands;
 import clipramp.margins.Check;
 import clipramp.units.Unit;
 import java.util.stream.IntStream;
 
 /** Knob and power, the half cycle, and the gate's drive: each a figure with its numbers. */
 final class CurvesSection {
+    private static final double MID_KNOB = 0.5;
+
     private final Paper paper;
     private final RecordContent content;
     private final Check check;
@@ -32,7 +35,8 @@ final class CurvesSection {
     private void knob() {
         paper.need(paper.width() / 2.3f + 260);
         paper.section("Knob and power");
-        KnobFigure figure = new KnobFigure(check.knob(), design.wanted());
+        KnobFigure figure = new KnobFigure(check.knob(), design.wanted())
+                .withBand(content.spread().flatMap(SpreadBands::knob));
         paper.text(figure.sentence() + " Full power is what the same load would take with the thyristor always on.");
         paper.figure(figure, paper.width() / 2.3f);
         table(figure.numbers());
@@ -40,7 +44,8 @@ final class CurvesSection {
 
     private void halfCycle() {
         paper.need(paper.width() / 1.35f + 260);
-        LanesFigure figure = new LanesFigure(content.lanes());
+        LanesFigure figure = new LanesFigure(content.lanes())
+                .withBand(content.spread().flatMap(s -> SpreadBands.lanes(s, MID_KNOB)));
         paper.section(figure.title());
         paper.text((design.ramp().pot().isPresent() ? "At mid-knob. " : "") + figure.sentence());
         paper.figure(figure, paper.width() / 1.35f);

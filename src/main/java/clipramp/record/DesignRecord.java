@@ -64,6 +64,7 @@ public final class DesignRecord {
         parts.circuit();
         new FiringSection(paper, content).write();
         new CurvesSection(paper, content).write();
+        content.spread().filter(s -> s.units() > 0).ifPresent(s -> SpreadSection.write(paper, s));
         paper.newPage();
         MarginsSection.write(paper, content);
         new DissipationSection(paper, content).write();

@@ -13,6 +13,7 @@ import clipramp.margins.Check;
 import clipramp.power.KnobMap;
 import clipramp.power.LoadWave;
 import clipramp.power.OperatingPoint;
+import clipramp.spread.SpreadResult;
 import java.util.List;
 import java.util.Optional;
 
@@ -27,6 +28,7 @@ import java.util.Optional;
  * @param faults every single fault and what follows from it
  * @param programVersion version of this program
  * @param fit one unit as built, where it was measured
+ * @param spread what many units do, if they were drawn
  */
 public record RecordContent(
         LoadedDesign loaded,
@@ -36,13 +38,40 @@ public record RecordContent(
         List<Expectation> commissioning,
         FaultSheet faults,
         String programVersion,
-        Optional<FitResult> fit) {
+        Optional<FitResult> fit,
+        Optional<SpreadResult> spread) {
     private static final int SAMPLES = 2000;
     private static final double MID_KNOB = 0.5;
 
     public RecordContent {
         profiles = List.copyOf(profiles);
         commissioning = List.copyOf(commissioning);
+    }
+
+    /** Without fit or spread. */
+    public RecordContent(
+            LoadedDesign loaded,
+            Check check,
+            List<Profile> profiles,
+            Lanes lanes,
+            List<Expectation> commissioning,
+            FaultSheet faults,
+            String programVersion) {
+        this(
+                loaded,
+                check,
+                profiles,
+                lanes,
+                commissioning,
+                faults,
+                programVersion,
+                Optional.empty(),
+                Optional.empty());
+    }
+
+    /** The same with a page on what many units of this design do. */
+    public RecordContent withSpread(Optional<SpreadResult> drawn) {
+        return new RecordContent(loaded, check, profiles, lanes, commissioning, faults, programVersion, fit, drawn);
     }
 
     /**
@@ -69,13 +98,12 @@ public record RecordContent(
                 .map(Profile::read)
                 .toList();
         FaultSheet faults = Faults.of(check.design(), check.condition());
-        return new RecordContent(
-                loaded, check, profiles, lanes, Commissioning.of(check), faults, programVersion, Optional.empty());
+        return new RecordContent(loaded, check, profiles, lanes, Commissioning.of(check), faults, programVersion);
     }
 
     /** The same with a page about one unit as built. */
     public RecordContent withFit(FitResult measured) {
         return new RecordContent(
-                loaded, check, profiles, lanes, commissioning, faults, programVersion, Optional.of(measured));
+                loaded, check, profiles, lanes, commissioning, faults, programVersion, Optional.of(measured), spread);
     }
 }

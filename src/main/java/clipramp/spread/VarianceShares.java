@@ -39,18 +39,19 @@ final class VarianceShares {
                 / (2 * units);
         List<Influence> influences = new ArrayList<>();
         for (int k = 0; k < lot.factors().size(); k++) {
-            influences.add(influence(k, first, other, variance));
+            influences.add(influence(k, first, other, mean, variance));
         }
         influences.sort(Comparator.comparingDouble(Influence::total).reversed());
         return List.copyOf(influences);
     }
 
-    private Influence influence(int k, double[] first, double[] other, double variance) {
+    private Influence influence(int k, double[] first, double[] other, double mean, double variance) {
         double[] mixed = fractions(k, 0);
         double alone = 0;
         double any = 0;
         for (int i = 0; i < units; i++) {
-            alone += other[i] * (mixed[i] - first[i]);
+            // Less the mean: it adds nothing but noise.
+            alone += (other[i] - mean) * (mixed[i] - first[i]);
             any += square(first[i] - mixed[i]) / 2;
         }
         double scale = variance > 0 ? 1 / (units * variance) : 0;

@@ -20,6 +20,7 @@ import javafx.embed.swing.SwingFXUtils;
 import javafx.event.ActionEvent;
 import javafx.scene.Node;
 import javafx.scene.control.Label;
+import javafx.scene.control.TextField;
 import javafx.scene.image.WritableImage;
 import javafx.stage.Stage;
 import javax.imageio.ImageIO;
@@ -95,6 +96,20 @@ public final class Screens {
         fire(stage, "#tab-parts");
         settle(() -> !model.isBusy());
         save(stage, folder.resolve("parts-" + name + ".png"));
+        fire(stage, "#page-spread");
+        settle(() -> stage.getScene().getRoot().lookup("#spread-start") != null);
+        at(() -> {
+            if (stage.getScene().getRoot().lookup("#spread-units") instanceof TextField units) {
+                units.setText("1000");
+            }
+            return null;
+        });
+        fire(stage, "#spread-start");
+        settle(() -> model.spread().answer().isPresent());
+        save(stage, folder.resolve("spread-" + name + ".png"));
+        fire(stage, "#page-bench");
+        settle(() -> !model.isBusy());
+        save(stage, folder.resolve("bands-" + name + ".png"));
         fire(stage, "#page-record");
         settle(() -> stage.getScene().getRoot().lookup("#record-progress") instanceof Label label
                 && label.getText().contains("pages"));

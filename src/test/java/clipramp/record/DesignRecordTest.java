@@ -8,6 +8,11 @@ import clipramp.files.LoadedDesign;
 import clipramp.margins.Margin;
 import clipramp.margins.Verdict;
 import clipramp.power.OperatingPoint;
+import clipramp.spread.DrawLaw;
+import clipramp.spread.Spread;
+import clipramp.spread.SpreadOptions;
+import clipramp.spread.SpreadResult;
+import clipramp.spread.Watch;
 import clipramp.units.Unit;
 import java.io.IOException;
 import java.util.ArrayList;
@@ -251,6 +256,19 @@ class DesignRecordTest {
             assertThat(text(bytes, 2).replaceAll("\\s+", " "))
                     .contains("Before you build or measure", "says nothing about the circuit as a whole");
         }
+    }
+
+    @Test
+    void aSpreadHasItsPageAndItsBands() throws IOException {
+        SpreadResult spread =
+                Spread.run(content.loaded().design(), new SpreadOptions(60, 1, DrawLaw.NORMAL, 0), Watch.NONE);
+        byte[] with = DesignRecord.bytes(content.withSpread(Optional.of(spread)), PageSize.A4);
+        String all = text(with, 0).replaceAll("\\s+", " ");
+        assertThat(all)
+                .contains("Spread: 60 units", "reach what is wanted", "What matters at mid-knob", "Seed 1, law normal");
+        assertThat(text(pdf, 0)).doesNotContain("Spread: ");
+        assertThat(DesignRecord.bytes(content.withSpread(Optional.of(spread)), PageSize.A4))
+                .isEqualTo(with);
     }
 
     @Test

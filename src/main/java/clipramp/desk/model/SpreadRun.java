@@ -8,6 +8,7 @@ import clipramp.spread.SpreadResult;
 import clipramp.spread.Watch;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Locale;
 import java.util.Optional;
 import java.util.function.Consumer;
 
@@ -22,6 +23,23 @@ public final class SpreadRun {
         /** How long the rest will take, s. */
         public double secondsLeft() {
             return (of - done) / unitsPerSecond;
+        }
+
+        /** The same in words. */
+        public String words() {
+            if (done == 0) {
+                return "Drawing " + of + " units…";
+            }
+            if (done >= of) {
+                return "All " + of + " units are drawn; judging, and weighing what matters…";
+            }
+            return String.format(
+                    Locale.ROOT,
+                    "%d of %d units, %.0f a second, %.0f s left",
+                    done,
+                    of,
+                    unitsPerSecond,
+                    Math.ceil(secondsLeft()));
         }
     }
 

@@ -1,38 +1,16 @@
-package clipramp.desk.model;
+package clipramp.spread;
 
-import clipramp.spread.Influence;
-import clipramp.spread.PositionSpread;
-import clipramp.spread.Remedy;
-import clipramp.spread.SpreadResult;
-import clipramp.spread.Yield;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
 
-/** A spread in sentences and rows, as the window shows them. */
+/** A spread in sentences and rows, as window and record show them. */
 public final class SpreadWords {
     private static final int MOST_ROWS = 8;
     private static final double WORTH_TELLING = 0.0005;
 
     private SpreadWords() {}
-
-    /** How far a run is. */
-    public static String progress(SpreadRun.Progress now) {
-        if (now.done() == 0) {
-            return "Drawing " + now.of() + " units…";
-        }
-        if (now.done() >= now.of()) {
-            return "All " + now.of() + " units are drawn; judging, and weighing what matters…";
-        }
-        return String.format(
-                Locale.ROOT,
-                "%d of %d units, %.0f a second, %.0f s left",
-                now.done(),
-                now.of(),
-                now.unitsPerSecond(),
-                Math.ceil(now.secondsLeft()));
-    }
 
     /** What came of it, a sentence each, the yield first. */
     public static List<String> sentences(SpreadResult spread) {
@@ -48,7 +26,10 @@ public final class SpreadWords {
         if (!spread.sentence().isEmpty()) {
             all.add(spread.sentence());
         }
-        all.add("Parts lie " + spread.options().law().words() + ". Every figure is drawn by itself.");
+        all.add("Parts lie " + spread.options().law().words()
+                + "; data-sheet figures triangular through minimum, typical and"
+                + " maximum, or uniform where no typical value is given; line voltage, frequency and temperature uniform."
+                + " Every figure is drawn by itself.");
         return all;
     }
 
