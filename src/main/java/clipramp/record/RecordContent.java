@@ -57,16 +57,7 @@ public record RecordContent(
             List<Expectation> commissioning,
             FaultSheet faults,
             String programVersion) {
-        this(
-                loaded,
-                check,
-                profiles,
-                lanes,
-                commissioning,
-                faults,
-                programVersion,
-                Optional.empty(),
-                Optional.empty());
+        this(loaded, check, profiles, lanes, commissioning, faults, programVersion, Optional.empty(), Optional.empty());
     }
 
     /** The same with a page on what many units of this design do. */

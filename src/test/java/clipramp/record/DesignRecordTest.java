@@ -247,8 +247,7 @@ class DesignRecordTest {
                 content.lanes(),
                 content.commissioning(),
                 content.faults(),
-                "0.1.0",
-                Optional.empty());
+                "0.1.0");
         for (PageSize size : PageSize.values()) {
             byte[] bytes = DesignRecord.bytes(long_, size);
             assertThat(text(bytes, 1).replaceAll("\\s+", " "))
