@@ -1,10 +1,10 @@
 package clipramp.desk;
 
-import clipramp.desk.model.Example;
 import clipramp.desk.model.Recovery;
 import clipramp.desk.model.Settings;
 import clipramp.desk.model.ViewCondition;
 import clipramp.desk.model.Wish;
+import clipramp.files.Example;
 import java.nio.file.Path;
 
 /** What the user can ask of the window, from menus, keys and pages alike. */

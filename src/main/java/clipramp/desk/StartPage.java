@@ -1,7 +1,7 @@
 package clipramp.desk;
 
-import clipramp.desk.model.Example;
 import clipramp.desk.model.Recovery;
+import clipramp.files.Example;
 import java.nio.file.Path;
 import java.util.List;
 import javafx.scene.control.Button;

@@ -2,7 +2,6 @@ package clipramp.desk;
 
 import clipramp.desk.model.DeskModel;
 import clipramp.desk.model.Draft;
-import clipramp.desk.model.Example;
 import clipramp.desk.model.Places;
 import clipramp.desk.model.RecordMaker;
 import clipramp.desk.model.Recovery;
@@ -16,6 +15,7 @@ import clipramp.figures.Figure;
 import clipramp.figures.Palette;
 import clipramp.figures.Style;
 import clipramp.figures.Surfaces;
+import clipramp.files.Example;
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;

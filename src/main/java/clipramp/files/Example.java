@@ -21,6 +21,12 @@ public record Example(String id, String title, String about) {
             new Example("upper-heaters", "Upper heaters", "two SCRs in inverse parallel on a pulse transformer"),
             new Example("seed-drawer", "Seed drawer", "5 W at 24 V with a programmable unijunction"),
             new Example("tray-lamp", "Sorting tray", "10 W from a 24 V transformer, half-wave on a sensitive SCR"),
+            new Example("store-fan", "Store fan", "an inductive load on a triac, its train of pulses latching it"),
+            new Example(
+                    "store-fan-narrow-pulse",
+                    "Store fan, narrow pulse",
+                    "the same fan before: pulses too short to latch"),
+            new Example("tasting-lamps", "Tasting lamps", "filament lamps, dimmed"),
             new Example("cabinet-gone-wrong", "Cabinet gone wrong", "a bad design: look for the margins that fail"));
 
     /** All of them, the plain one first. */

@@ -158,7 +158,7 @@ public final class PublishedRelations {
 
     /**
      * Base-two resistor for which the peak-point voltage does not move with temperature: dV_P/dT = 0 of V_P = V (R1 +
-     * eta R_BB)/(R2 + R_BB + R1) + V_D (model.md section 4), exactly, by its quadratic's smaller root.
+     * eta R_BB)/(R2 + R_BB + R1) + V_D (DEVELOPERS.md, The circuit laws), exactly, by its quadratic's smaller root.
      *
      * @param standoff eta, 0..1
      * @param supplyVolts V, V

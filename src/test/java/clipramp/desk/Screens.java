@@ -1,9 +1,9 @@
 package clipramp.desk;
 
 import clipramp.desk.model.DeskModel;
-import clipramp.desk.model.Example;
 import clipramp.desk.model.Places;
 import clipramp.desk.model.Settings;
+import clipramp.files.Example;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;

@@ -3,8 +3,8 @@ package clipramp.desk;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
-import clipramp.desk.model.Example;
 import clipramp.desk.model.ViewCondition;
+import clipramp.files.Example;
 import clipramp.firing.Firing;
 import clipramp.units.QuantityText;
 import clipramp.units.Unit;

@@ -19,7 +19,7 @@ import org.junit.jupiter.api.TestReporter;
 
 /**
  * The engine against a general-purpose adaptive integrator of the same laws, on circuits drawn over the whole range
- * (model.md section 11): every event time to 1e-6 of a half cycle, pulse energy to 1e-6 relative.
+ * (DEVELOPERS.md, The circuit laws): every event time to 1e-6 of a half cycle, pulse energy to 1e-6 relative.
  */
 class AgainstIntegratorTest {
     private static final int CIRCUITS = 300;

@@ -83,7 +83,7 @@ final class RandomCircuits {
         }
     }
 
-    /** Ranges around the sheets of the class: sources.md's figures of programmable unijunction transistors. */
+    /** Ranges around the sheets of the class: data-sheet figures of programmable unijunction transistors. */
     private Drawn programmable(Drawn drawn) {
         OptionalDouble none = OptionalDouble.empty();
         double spread = linear(0.5, 2);
@@ -237,7 +237,7 @@ final class RandomCircuits {
                 winding);
     }
 
-    /** Between the sheets of the class: sources.md's table of unijunction data. */
+    /** Between the sheets of the class: data-sheet figures of unijunction transistors. */
     private Unijunction device() {
         OptionalDouble none = OptionalDouble.empty();
         return new Unijunction(

@@ -36,7 +36,7 @@ import java.util.OptionalDouble;
 
 /**
  * The solved circuits of reference-cases.json: brute-force adaptive integration (relative tolerance 1e-11) of the laws
- * in model.md by a program apart from this one, all rows without a stall checked by a second. Good to 1e-6 degrees,
+ * in DEVELOPERS.md by a program apart from this one, all rows without a stall checked by a second. Good to 1e-6 degrees,
  * 1e-6 V, 1e-5 relative in energy and charge; peaks to 1e-3.
  *
  * <p>The designs are decoded here by hand, so that these checks of the engine do not lean on the file reader.

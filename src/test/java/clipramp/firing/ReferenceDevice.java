@@ -10,7 +10,7 @@ import org.apache.commons.math3.analysis.interpolation.LinearInterpolator;
 import org.apache.commons.math3.analysis.solvers.BrentSolver;
 
 /**
- * The trigger device's numbers as model.md section 4 derives them, worked out apart from the engine: the emitter line from
+ * The trigger device's numbers as DEVELOPERS.md derives them, worked out apart from the engine: the emitter line from
  * two equations in two unknowns, its calibration on V_OB1 by a root finder on the test circuit's node equation.
  */
 record ReferenceDevice(

@@ -11,8 +11,8 @@ import java.util.Arrays;
 import java.util.List;
 
 /**
- * The laws of model.md sections 1 to 6 put before a general-purpose adaptive integrator, half cycle by half cycle, to
- * the periodic state: the independent truth for the engine (model.md section 11). It knows no closed forms: node
+ * The laws of DEVELOPERS.md (The circuit laws) put before a general-purpose adaptive integrator, half cycle by half cycle, to
+ * the periodic state: the independent truth for the engine (DEVELOPERS.md, The circuit laws). It knows no closed forms: node
  * equations are solved by elimination at every evaluation, events are sign changes that the integrator finds.
  *
  * <p>Between two events the set of conducting branches stands still, so that the integrator sees a smooth right-hand

@@ -3,7 +3,7 @@ package clipramp.firing;
 import clipramp.firing.ReferenceIntegrator.Emitter;
 
 /**
- * The circuit's node equations as they stand in model.md sections 2 to 6, solved by elimination with every diode-like
+ * The circuit's node equations as they stand in DEVELOPERS.md, The circuit laws,, solved by elimination with every diode-like
  * branch taken as conducting or not; {@link #search} tries every such combination against the branches' own laws.
  *
  * <p>Unknowns: V_S, V_B1 (a programmable device's cathode) and the current into the gate network. A pulse transformer

@@ -25,7 +25,7 @@ class TextbookLimitTest {
 
     /**
      * Dropper's and diodes' drops to nothing against the line, base bar to an open circuit, V_D to 0, an emptied
-     * capacitor, clipping from theta = 0: what is left is the textbook ramp, R_E C_E ln(1/(1 - eta)) (model.md section 5).
+     * capacitor, clipping from theta = 0: what is left is the textbook ramp, R_E C_E ln(1/(1 - eta)) (DEVELOPERS.md, The circuit laws).
      * Numbers: Rashid, Power Electronics 4e, 9.5; Mehta, Principles of Electronics, 21.11; Gupta and Singhal, Power
      * Electronics, 2.29; Bell, Electronic Devices and Circuits, 18.6. A line ten times as high clips ten times as early.
      */

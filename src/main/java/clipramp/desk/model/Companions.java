@@ -9,7 +9,7 @@ import java.util.ArrayList;
 import java.util.List;
 
 /**
- * What must change together: another stage asks for another rectifier or coupling (model.md section 8, the table of
+ * What must change together: another stage asks for another rectifier or coupling (DEVELOPERS.md, The circuit laws; the table of
  * sound combinations), another coupling for a transformer or none. One choice, one step back.
  */
 public final class Companions {

@@ -36,7 +36,7 @@ class CompanionsTest {
         return answer.stream().findFirst();
     }
 
-    /** The reader refuses unsound combinations (model.md section 8), so that every answer here is sound. */
+    /** The reader refuses unsound combinations (DEVELOPERS.md, The circuit laws), so that every answer here is sound. */
     @Test
     void everyStageIsReachedFromEveryOtherInOneStep() {
         for (Stage from : Stage.values()) {
