@@ -4,6 +4,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 
 import clipramp.circuit.Stage;
 import clipramp.circuit.Trigger;
+import clipramp.files.Example;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;

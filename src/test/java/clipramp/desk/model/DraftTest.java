@@ -2,6 +2,7 @@ package clipramp.desk.model;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import clipramp.files.Example;
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
