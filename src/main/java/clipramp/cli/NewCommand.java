@@ -16,8 +16,8 @@ import picocli.CommandLine.Option;
         description = "Writes a commented design to start from.",
         footer = {
             "",
-            "Examples: drying-cabinet, shed-heater, upper-heaters, seed-drawer, tray-lamp, and cabinet-gone-wrong, which"
-                    + " fails on purpose."
+            "Examples: drying-cabinet, shed-heater, upper-heaters, seed-drawer, tray-lamp, store-fan, tasting-lamps; and"
+                    + " two that fail on purpose: store-fan-narrow-pulse and cabinet-gone-wrong."
         })
 final class NewCommand implements Callable<Integer> {
     private final Session session;
@@ -37,7 +37,7 @@ final class NewCommand implements Callable<Integer> {
             names = "--from",
             paramLabel = "EXAMPLE",
             order = 11,
-            description = "drying-cabinet unless said; also shed-heater, tray-lamp, cabinet-gone-wrong")
+            description = "drying-cabinet unless said; all of them stand below")
     String from = Example.all().get(0).id();
 
     @Option(names = "--replace", order = 12, description = "write over a file that is there")
