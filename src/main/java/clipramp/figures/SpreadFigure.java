@@ -4,6 +4,7 @@ import clipramp.spread.PositionSpread;
 import clipramp.spread.SpreadResult;
 import java.awt.Color;
 import java.awt.Graphics2D;
+import java.awt.Stroke;
 import java.awt.geom.Path2D;
 import java.awt.geom.Rectangle2D;
 import java.util.ArrayList;
@@ -20,6 +21,7 @@ import org.jfree.chart.axis.NumberAxis;
 public record SpreadFigure(SpreadResult spread) implements Figure {
     private static final int MIDDLE = SpreadResult.PERCENTAGES.size() / 2;
     private static final double[] TINTS = {0.14, 0.26, 0.42};
+    private static final String[] MEANINGS = {"98 % of the units", "90 %", "half", "middle unit", "worst case"};
     private static final double LEAST = -2;
     private static final double MOST = 102;
 
@@ -136,6 +138,10 @@ public record SpreadFigure(SpreadResult spread) implements Figure {
     }
 
     private void band(Plot plot, double[] low, double[] high, Color tint) {
+        plot.pen().fill(tint, outline(plot, low, high));
+    }
+
+    private Path2D outline(Plot plot, double[] low, double[] high) {
         double[] x = positions();
         Path2D area = new Path2D.Double();
         area.moveTo(plot.x(x[0]), plot.y(high[0]));
@@ -146,22 +152,19 @@ public record SpreadFigure(SpreadResult spread) implements Figure {
             area.lineTo(plot.x(x[i]), plot.y(low[i]));
         }
         area.closePath();
-        plot.pen().fill(tint, area);
+        return area;
     }
 
-    /** What the tints and lines mean, under the curve's high end. */
+    /** What the tints and lines mean, in the first corner that the bands leave free. */
     private void legend(Plot plot, Style style) {
-        double[] median = fractions(MIDDLE);
-        boolean rises = median[median.length - 1] >= median[0];
         double line = 1.5 * style.small().getSize2D();
         double swatch = 16 * style.zoom();
-        double wide = swatch + style.gap() + Lettering.width("98 % of the units", style.small());
-        Rectangle2D area = plot.area();
-        double x = rises ? area.getMaxX() - wide - 2 * style.gap() : area.getMinX() + 2 * style.gap();
-        String[] words = {"98 % of the units", "90 %", "half", "middle unit", "worst case"};
-        double y = area.getMaxY() - (words.length - 0.4) * line;
-        for (int i = 0; i < words.length; i++) {
-            Palette palette = style.palette();
+        double wide = swatch + style.gap() + Lettering.width(MEANINGS[0], style.small());
+        Rectangle2D corner = corner(plot, wide + 4 * style.gap(), (MEANINGS.length + 0.6) * line);
+        double x = corner.getMinX() + 2 * style.gap();
+        double y = corner.getMinY() + line;
+        Palette palette = style.palette();
+        for (int i = 0; i < MEANINGS.length; i++) {
             double middle = y - 0.35 * style.small().getSize2D();
             if (i < TINTS.length) {
                 plot.pen()
@@ -169,17 +172,28 @@ public record SpreadFigure(SpreadResult spread) implements Figure {
                                 Palette.mixed(palette.ground(), palette.load(), TINTS[i]),
                                 new Rectangle2D.Double(x, middle - 0.3 * line, swatch, 0.6 * line));
             } else {
-                plot.pen()
-                        .line(
-                                palette.load(),
-                                i == TINTS.length ? style.trace() : style.dotted(),
-                                x,
-                                middle,
-                                x + swatch,
-                                middle);
+                Stroke stroke = i == TINTS.length ? style.trace() : style.dotted();
+                plot.pen().line(palette.load(), stroke, x, middle, x + swatch, middle);
             }
-            plot.pen().left(words[i], style.small(), palette.ink(), x + swatch + style.gap(), y);
+            plot.pen().left(MEANINGS[i], style.small(), palette.ink(), x + swatch + style.gap(), y);
             y += line;
         }
+    }
+
+    private Rectangle2D corner(Plot plot, double wide, double high) {
+        Rectangle2D area = plot.area();
+        double right = area.getMaxX() - wide;
+        double bottom = area.getMaxY() - high;
+        List<Rectangle2D> corners = List.of(
+                new Rectangle2D.Double(right, bottom, wide, high),
+                new Rectangle2D.Double(area.getMinX(), area.getMinY(), wide, high),
+                new Rectangle2D.Double(area.getMinX(), bottom, wide, high),
+                new Rectangle2D.Double(right, area.getMinY(), wide, high));
+        return corners.stream().filter(c -> isFree(plot, c)).findFirst().orElse(corners.get(0));
+    }
+
+    private boolean isFree(Plot plot, Rectangle2D corner) {
+        Path2D band = outline(plot, fractions(0), fractions(2 * MIDDLE));
+        return !band.intersects(corner);
     }
 }
