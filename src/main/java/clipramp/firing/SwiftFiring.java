@@ -23,7 +23,7 @@ public final class SwiftFiring {
     private static final double SAME_VOLTS = 1e-10;
 
     /** How many times more bent it may be near its fixed point than between two half cycles. */
-    private static final double MORE_BENT = 5;
+    private static final double MORE_BENT = 12;
 
     /** Farther than this the half cycle's map may be on another branch, V. */
     private static final double NEAR_VOLTS = 0.01;
