@@ -20,7 +20,7 @@ public record Example(String id, String title, String about) {
             new Example("shed-heater", "Shed heater", "400 W on a triac, timed by a small transformer's winding"),
             new Example("upper-heaters", "Upper heaters", "two SCRs in inverse parallel on a pulse transformer"),
             new Example("seed-drawer", "Seed drawer", "5 W at 24 V with a programmable unijunction"),
-            new Example("tray-lamp", "Sorting tray", "10 W from a 24 V transformer, half-wave on a sensitive SCR"),
+            new Example("tray-lamp", "Sorting tray", "10 W from a 24 V transformer, half-wave"),
             new Example("store-fan", "Store fan", "an inductive load on a triac, its train of pulses latching it"),
             new Example(
                     "store-fan-narrow-pulse",

@@ -121,8 +121,9 @@ final class ReferenceParameters {
         triggerAmps = thyristor.gate().trigger().ampsAt(condition.celsius());
         turnOnSeconds = thyristor.gate().turnOnSeconds().orElse(0);
         boolean scr = thyristor.kind() == ThyristorDevice.Kind.SCR;
-        // Behind R_G a conducting gate finds base one's resistor, or nothing but the secondary's winding.
-        double behindOhms = transformer.isPresent() ? secondaryOhms : baseOneOhms;
+        // Behind R_G a conducting gate finds base one's resistor, or a winding that is closed for as long as latching
+        // takes.
+        double behindOhms = transformer.isPresent() ? Double.POSITIVE_INFINITY : baseOneOhms;
         latchingAmps =
                 thyristor.latching().map(c -> c.ampsAt(condition.celsius())).orElse(0.0)
                         + (scr ? 0.7 * (shuntSiemens + 1 / (seriesOhms + behindOhms)) : 0);
