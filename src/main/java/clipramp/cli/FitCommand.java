@@ -36,7 +36,7 @@ import picocli.CommandLine.Parameters;
         },
         footer = {
             "",
-            "READINGS.csv has one line of heads and one line a setting. Heads: knob (%), ramp resistance (kohm), line voltage"
+            "READINGS.csv has one line of heads and one line a setting. Heads: knob (%%), ramp resistance (kohm), line voltage"
                     + " (V), firing angle (deg), delay (ms), load voltage (V true-rms), load voltage (V average-reading), load"
                     + " power (W), base-one peak (V), supply voltage (V), peak-point voltage (V), note.",
             "An accuracy may follow a head: firing angle (deg) +-1, load power (W) +-2 %%. It is what 19 readings in 20 keep"
