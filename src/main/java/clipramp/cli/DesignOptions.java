@@ -2,6 +2,8 @@ package clipramp.cli;
 
 import clipramp.circuit.Condition;
 import clipramp.circuit.Design;
+import clipramp.circuit.Line;
+import clipramp.circuit.Surroundings;
 import clipramp.files.Conditions;
 import clipramp.files.DesignFiles;
 import clipramp.files.LoadedDesign;
@@ -88,6 +90,21 @@ final class DesignOptions {
                 lineVolts(design).orElse(nominal.lineVolts()),
                 nominal.lineHertz(),
                 celsius().orElse(nominal.celsius()));
+    }
+
+    /** The design with line voltage and temperature held at what was asked for: what units are drawn from. */
+    Design held(Design design) {
+        Design held = design;
+        if (line != null) {
+            double volts = Conditions.lineVolts(line, design.line());
+            Line own = design.line();
+            held = held.withLine(new Line(volts, own.hertz(), volts, volts, own.harmonics()));
+        }
+        if (temperature != null) {
+            double celsius = Conditions.celsius(temperature);
+            held = held.withSurroundings(new Surroundings(celsius, celsius));
+        }
+        return held;
     }
 
     Check check(LoadedDesign loaded) {

@@ -101,7 +101,7 @@ final class SpreadCommand implements Callable<Integer> {
         LoadedDesign loaded = design.load(session);
         SpreadWatch watch = new SpreadWatch(session);
         try {
-            SpreadResult result = Spread.run(loaded.design(), options, watch);
+            SpreadResult result = Spread.run(design.held(loaded.design()), options, watch);
             watch.clear();
             if (plot != null && result.units() > 0) {
                 Outputs.spreadPlot(plot, result);

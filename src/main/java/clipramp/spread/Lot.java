@@ -21,7 +21,12 @@ record Lot(Design design, List<Factor> factors, DrawLaw law, long seed) {
         return new Lot(design, List.copyOf(others), law, seed);
     }
 
+    /** The nominal unit, as near to 25 °C as the surroundings ever are. */
     UnitValues blank() {
-        return UnitValues.nominal(design);
+        UnitValues unit = UnitValues.nominal(design);
+        unit.celsius = Math.min(
+                design.surroundings().hottestCelsius(),
+                Math.max(design.surroundings().coldestCelsius(), unit.celsius));
+        return unit;
     }
 }
