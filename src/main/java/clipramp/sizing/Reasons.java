@@ -8,6 +8,7 @@ import clipramp.margins.Check;
 import clipramp.margins.Judge;
 import clipramp.margins.Margin;
 import clipramp.margins.Verdict;
+import clipramp.spread.Watch;
 import clipramp.units.QuantityText;
 import clipramp.units.Unit;
 import java.util.ArrayList;
@@ -16,6 +17,7 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.Set;
 import java.util.TreeSet;
+import java.util.concurrent.CancellationException;
 import java.util.stream.Collectors;
 
 /** Says of every chosen part why it is what it is, and what its neighbours would do. */
@@ -38,9 +40,24 @@ public final class Reasons {
 
     /** One reason for each open part that the design has, in the order of the signal. */
     public static List<Reason> of(SizingRequest request, SizingAnswer answer) {
+        return of(request, answer, Watch.NONE);
+    }
+
+    /**
+     * The same, watched.
+     *
+     * @param watch told of parts done, of all open ones; may end it
+     * @throws CancellationException where the watch cancelled
+     */
+    public static List<Reason> of(SizingRequest request, SizingAnswer answer, Watch watch) {
         Reasons reasons = new Reasons(request, answer);
         List<Reason> all = new ArrayList<>();
+        int done = 0;
         for (OpenPart part : request.open()) {
+            if (watch.isCancelled()) {
+                throw new CancellationException("the reasons were cancelled");
+            }
+            watch.progress(done++, request.open().size());
             reasons.relation(part)
                     .ifPresent(relation -> all.add(
                             new Reason(part, relation, reasons.neighbour(part, 1), reasons.neighbour(part, -1))));

@@ -5,6 +5,7 @@ import clipramp.margins.Check;
 import clipramp.margins.Judge;
 import clipramp.margins.Margin;
 import clipramp.margins.Verdict;
+import clipramp.spread.Watch;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;
@@ -13,6 +14,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.Set;
+import java.util.concurrent.CancellationException;
 
 /**
  * One search: candidates are judged once each, and a design moves to a better neighbour for as long as there is one. The
@@ -28,10 +30,16 @@ final class Search {
     record Judged(Design design, Check check, Reach reach, Timing timing, Grade grade) {}
 
     private final SizingRequest request;
+    private final Watch watch;
     private final Map<Design, Judged> judged = new LinkedHashMap<>();
 
-    Search(SizingRequest request) {
+    /**
+     * @param request what is open
+     * @param watch told after every candidate that was judged, of the most that there will be
+     */
+    Search(SizingRequest request, Watch watch) {
         this.request = request;
+        this.watch = watch;
     }
 
     /** Every candidate that was judged, in the order in which they were. */
@@ -64,6 +72,10 @@ final class Search {
 
     /** A design judged as it stands but for its ratings. */
     Judged judge(Design design, Reach reach) {
+        if (watch.isCancelled()) {
+            throw new CancellationException("the search was cancelled");
+        }
+        watch.progress(judged.size(), MOST_CANDIDATES);
         Design rated = Ratings.fit(request, design);
         return judged.computeIfAbsent(rated, d -> {
             Check check = Judge.check(d, OptionalDouble.empty(), OptionalDouble.empty());

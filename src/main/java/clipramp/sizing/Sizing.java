@@ -7,6 +7,7 @@ import clipramp.margins.Verdict;
 import clipramp.sizing.Search.Judged;
 import clipramp.sizing.SizingAnswer.Conflict;
 import clipramp.sizing.SizingAnswer.Outcome;
+import clipramp.spread.Watch;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
@@ -25,13 +26,24 @@ public final class Sizing {
      * @throws clipramp.power.UnsupportedLoadException for a load that cannot be solved
      */
     public static SizingAnswer propose(SizingRequest request) {
-        Search search = new Search(request);
+        return propose(request, Watch.NONE);
+    }
+
+    /**
+     * The same, watched.
+     *
+     * @param request what is wanted, decided and open
+     * @param watch told of candidates judged, of the most that there will be; may end the search
+     * @throws java.util.concurrent.CancellationException where the watch cancelled
+     */
+    public static SizingAnswer propose(SizingRequest request, Watch watch) {
+        Search search = new Search(request, watch);
         return answer(search.polished(search.climb(Start.of(request))), search.all());
     }
 
     /** The same for a design as it stands: nothing is chosen. */
     public static SizingAnswer judge(SizingRequest request, Design design) {
-        Search search = new Search(request);
+        Search search = new Search(request, Watch.NONE);
         return answer(search.judge(design, Reach.of(design)), search.all());
     }
 

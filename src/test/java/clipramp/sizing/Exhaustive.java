@@ -2,6 +2,7 @@ package clipramp.sizing;
 
 import clipramp.circuit.Design;
 import clipramp.sizing.Search.Judged;
+import clipramp.spread.Watch;
 
 /** Every capacitor, fixed resistor and track of a small grid, each put before the judge: no search, nothing clever. */
 final class Exhaustive {
@@ -14,7 +15,7 @@ final class Exhaustive {
     private Exhaustive() {}
 
     static Judged best(SizingRequest request) {
-        Search search = new Search(request);
+        Search search = new Search(request, Watch.NONE);
         Judged best = null;
         Design start = Start.of(request);
         double farads = LEAST_FARADS;
@@ -34,7 +35,7 @@ final class Exhaustive {
 
     /** What the search finds for the same request. */
     static Judged searched(SizingRequest request) {
-        Search search = new Search(request);
+        Search search = new Search(request, Watch.NONE);
         return search.polished(search.climb(Start.of(request)));
     }
 }
