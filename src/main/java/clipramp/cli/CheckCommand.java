@@ -39,12 +39,23 @@ final class CheckCommand implements Callable<Integer> {
     @Nullable
     String record;
 
+    @Option(
+            names = "--plot",
+            paramLabel = "OUT",
+            order = 13,
+            description = "also draw the line current's harmonics into OUT.svg or OUT.png")
+    @Nullable
+    String plot;
+
     CheckCommand(Session session) {
         this.session = session;
     }
 
     @Override
     public Integer call() {
+        if (plot != null) {
+            Outputs.requirePlotName(plot);
+        }
         LoadedDesign loaded = design.load(session);
         Check check = design.check(loaded);
         if (json) {
@@ -55,11 +66,20 @@ final class CheckCommand implements Callable<Integer> {
         if (record != null) {
             Outputs.record(record, loaded, check, design.library(session), PageSize.A4, Optional.empty());
         }
-        if (record != null && !json) {
-            session.out().line("");
-            session.out().line("Record: " + record);
+        Optional.ofNullable(plot)
+                .ifPresent(name -> Outputs.linePlot(name, check.lineCurrent().orElseThrow()));
+        if (!json) {
+            written("Record", record);
+            written("Plot", plot);
         }
         return code(check);
+    }
+
+    private void written(String what, @Nullable String name) {
+        if (name != null) {
+            session.out().line("");
+            session.out().line(what + ": " + name);
+        }
     }
 
     private int code(Check check) {

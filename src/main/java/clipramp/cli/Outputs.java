@@ -3,6 +3,7 @@ package clipramp.cli;
 import clipramp.circuit.Condition;
 import clipramp.circuit.Design;
 import clipramp.figures.Figure;
+import clipramp.figures.HarmonicsFigure;
 import clipramp.figures.KnobFigure;
 import clipramp.figures.Lanes;
 import clipramp.figures.LanesFigure;
@@ -13,6 +14,7 @@ import clipramp.files.ProfileLibrary;
 import clipramp.files.WholeFile;
 import clipramp.firing.Firing;
 import clipramp.margins.Check;
+import clipramp.margins.LineCheck;
 import clipramp.power.LoadWave;
 import clipramp.power.OperatingPoint;
 import clipramp.record.DesignRecord;
@@ -81,6 +83,11 @@ final class Outputs {
     /** Draws the power of many units against the knob. */
     static void spreadPlot(String name, SpreadResult spread) {
         draw(name, new SpreadFigure(spread));
+    }
+
+    /** Draws the line current's orders beside the table for them. */
+    static void linePlot(String name, LineCheck lineCurrent) {
+        draw(name, new HarmonicsFigure(lineCurrent));
     }
 
     /** Draws the power against the knob. */

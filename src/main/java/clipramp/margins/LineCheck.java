@@ -7,6 +7,7 @@ import clipramp.circuit.Stage;
 import clipramp.power.LineCurrent;
 import clipramp.power.LoadPower;
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.List;
 import java.util.OptionalDouble;
 import java.util.OptionalInt;
@@ -19,8 +20,9 @@ import java.util.OptionalInt;
  * @param worst which of them uses most of the class A table; the one with the largest current where none flows
  * @param orders every order at the setting where it is largest
  * @param rules what the standard says of this kind of load and control
+ * @param fullWatts power of the load with the thyristor always on, W
  */
-public record LineCheck(List<Setting> settings, int worst, List<Order> orders, List<Rule> rules) {
+public record LineCheck(List<Setting> settings, int worst, List<Order> orders, List<Rule> rules, double fullWatts) {
     /** Full power in watts up to which a class other than C has no limits. */
     static final double SMALL_WATTS = 75;
 
@@ -108,6 +110,20 @@ public record LineCheck(List<Setting> settings, int worst, List<Order> orders, L
         return settings.get(worst);
     }
 
+    /** The order that uses most of its class A limit at any setting: the one that binds first. */
+    public Order binding() {
+        return binding(orders);
+    }
+
+    static Order binding(List<Order> orders) {
+        return orders.stream().max(Comparator.comparingDouble(Order::used)).orElseThrow();
+    }
+
+    /** Full power of such a load at which the binding order would reach its limit, W; infinite where no current flows. */
+    public double bindsAtWatts() {
+        return fullWatts / binding().used();
+    }
+
     /**
      * @param design stage and load
      * @param condition line
@@ -126,7 +142,7 @@ public record LineCheck(List<Setting> settings, int worst, List<Order> orders, L
             }
         }
         double full = LoadPower.fullWatts(design, condition);
-        return new LineCheck(settings, worst, orders, new LineRules(design, full, settings, orders).all());
+        return new LineCheck(settings, worst, orders, new LineRules(design, full, settings, orders).all(), full);
     }
 
     private static Order largest(int order, List<Setting> settings) {

@@ -8,15 +8,14 @@ import clipramp.margins.LineCheck.Setting;
 import clipramp.margins.LineCheck.Standing;
 import clipramp.power.LineCurrent;
 import java.util.ArrayList;
-import java.util.Comparator;
 import java.util.List;
 import java.util.OptionalDouble;
 import java.util.OptionalInt;
 
 /** The rules of IEC 61000-3-2 that a phase control meets, with this design's numbers in. */
 final class LineRules {
-    private static final String CLAUSE = "IEC 61000-3-2, general requirements (clause 6.1; its number from memory)";
-    private static final String SCOPE = "IEC 61000-3-2, limits (clause 7; its number from memory)";
+    private static final String CLAUSE = LineTable.STANDARD + ", control methods (clause 6.1" + LineTable.RECALLED;
+    private static final String SCOPE = LineTable.STANDARD + ", limits (clause 7" + LineTable.RECALLED;
 
     /** Nominal voltages, line to neutral, that the tables are made for. */
     private static final double LEAST_PUBLIC_VOLTS = 220;
@@ -126,7 +125,7 @@ final class LineRules {
     }
 
     private Order binding() {
-        return orders.stream().max(Comparator.comparingDouble(Order::used)).orElseThrow();
+        return LineCheck.binding(orders);
     }
 
     private String bindingText(Order binding) {
@@ -142,6 +141,7 @@ final class LineRules {
         return position.isPresent() ? " with the knob at " + Say.share(position.getAsDouble()) : "";
     }
 
+    /** Such as 15th. */
     static String ordinal(int order) {
         int unit = order % 10;
         boolean teen = order / 10 % 10 == 1;

@@ -5,7 +5,7 @@ import java.util.OptionalDouble;
 /** A table of IEC 61000-3-2: the largest rms current of an order that equipment of a class may draw. */
 public enum LineTable {
     /** Amperes, whatever the equipment's power: class A, 230 V. */
-    CLASS_A("class A", "IEC 61000-3-2, table 1") {
+    CLASS_A("class A", LineTable.STANDARD + ", class A (clause 7.1, table 1" + LineTable.RECALLED) {
         @Override
         public OptionalDouble limitAmps(int order, double fundamentalAmps, double powerFactor) {
             return OptionalDouble.of(order % 2 == 0 ? even(order) : odd(order));
@@ -33,7 +33,7 @@ public enum LineTable {
         }
     },
     /** Shares of the fundamental: lighting equipment above 25 W, as up to edition 4. */
-    CLASS_C("class C", "IEC 61000-3-2 to edition 4, table 2") {
+    CLASS_C("class C", LineTable.STANDARD + ", class C (clause 7.3, table 2" + LineTable.RECALLED) {
         @Override
         public OptionalDouble limitAmps(int order, double fundamentalAmps, double powerFactor) {
             return switch (order) {
@@ -47,6 +47,12 @@ public enum LineTable {
             };
         }
     };
+
+    /** The standard as far as its limits were read. */
+    static final String STANDARD = "IEC 61000-3-2 to edition 4";
+
+    /** Ends a reference: the figures were read in print, clauses and tables are numbered from memory. */
+    static final String RECALLED = "; numbers of clauses and tables from memory)";
 
     private final String title;
     private final String source;

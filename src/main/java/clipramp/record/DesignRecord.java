@@ -68,6 +68,7 @@ public final class DesignRecord {
         paper.newPage();
         MarginsSection.write(paper, content);
         new DissipationSection(paper, content).write();
+        content.check().lineCurrent().ifPresent(line -> LineCurrentSection.write(paper, line));
         parts.parts();
         CommissioningSection.write(paper, content);
         FaultsSection.write(paper, content);

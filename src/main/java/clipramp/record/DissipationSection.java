@@ -17,8 +17,6 @@ import java.util.OptionalDouble;
 
 /** What the parts bear at mid-knob, and the thyristor at the highest setting, beside their ratings. */
 final class DissipationSection {
-    private static final double NEGLIGIBLE = 0.001;
-
     private final Paper paper;
     private final RecordContent content;
     private final Design design;
@@ -154,10 +152,6 @@ final class DissipationSection {
                 what,
                 Shown.quantity(bears, unit),
                 rating.isPresent() ? Shown.quantity(rating, unit) : "not stated",
-                comparable ? share(bears / rating.getAsDouble()) : Shown.NOTHING);
-    }
-
-    private static String share(double share) {
-        return share < NEGLIGIBLE ? "< " + Shown.brief(NEGLIGIBLE, Unit.FRACTION) : Shown.brief(share, Unit.FRACTION);
+                comparable ? Shown.share(bears / rating.getAsDouble()) : Shown.NOTHING);
     }
 }

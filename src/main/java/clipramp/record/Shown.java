@@ -11,6 +11,7 @@ import java.util.OptionalDouble;
 final class Shown {
     static final String NOTHING = "–";
     private static final int DIGITS = 4;
+    private static final double NEGLIGIBLE = 0.001;
 
     private Shown() {}
 
@@ -35,6 +36,11 @@ final class Shown {
         return Double.isNaN(value)
                 ? NOTHING
                 : QuantityText.format(value, unit, 3).replace("-", "−");
+    }
+
+    /** How much of a limit is used; what is next to nothing is said so. */
+    static String share(double share) {
+        return share < NEGLIGIBLE ? "< " + brief(NEGLIGIBLE, Unit.FRACTION) : brief(share, Unit.FRACTION);
     }
 
     /** A margin's figure in its own unit. */

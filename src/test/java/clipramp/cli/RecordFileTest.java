@@ -37,6 +37,17 @@ class RecordFileTest {
     }
 
     @Test
+    void checkDrawsTheLineCurrent(@TempDir Path folder) throws IOException {
+        Path svg = folder.resolve("line.svg");
+        CliRun run = CliRun.of("check", DESIGN, "--plot=" + svg);
+
+        assertThat(run.code()).isZero();
+        assertThat(run.out()).contains("Plot: " + svg);
+        assertThat(svg).content().contains("Line current by order", "class A limit", "order 15 binds first");
+        assertThat(CliRun.of("check", DESIGN, "--plot=line.gif").code()).isEqualTo(2);
+    }
+
+    @Test
     void aFailingDesignGetsItsRecordToo(@TempDir Path folder) {
         Path pdf = folder.resolve("record.pdf");
         CliRun run = CliRun.of("record", "examples/cabinet-gone-wrong.yaml", "--out=" + pdf);

@@ -1,5 +1,6 @@
 package clipramp.figures;
 
+import clipramp.circuit.Load;
 import clipramp.circuit.SampleDesigns;
 import java.io.IOException;
 import java.nio.file.Files;
@@ -10,6 +11,12 @@ import java.util.OptionalDouble;
 
 /** Writes every figure as a picture into a folder, for a person to look at: {@code Gallery FOLDER}. */
 public final class Gallery {
+    /** Judged once: these come from the engine. */
+    private static final Figure UNDER = new HarmonicsFigure(SampleChecks.lineCurrent(SampleDesigns.halfWaveHeater()));
+
+    private static final Figure OVER =
+            new HarmonicsFigure(SampleChecks.lineCurrent(SampleDesigns.heater().withLoad(new Load.Resistor(25))));
+
     private Gallery() {}
 
     public static void main(String[] arguments) throws IOException {
@@ -68,6 +75,8 @@ public final class Gallery {
                         lanes.waves().gateAmps(),
                         lanes.waves().gateVolts()));
         figures.put("gate-silent", new GateFigure(SampleDesigns.heater(), new double[3], new double[3]));
+        figures.put("harmonics", UNDER);
+        figures.put("harmonics-over", OVER);
         return figures;
     }
 }

@@ -7,6 +7,8 @@ import clipramp.firing.Pulse;
 import clipramp.firing.Solution;
 import clipramp.firing.Waveforms;
 import clipramp.margins.Check;
+import clipramp.margins.Judge;
+import clipramp.margins.LineCheck;
 import clipramp.margins.Margin;
 import clipramp.margins.MarginKind;
 import clipramp.margins.Note;
@@ -49,6 +51,13 @@ public final class SampleChecks {
                                 "self-heating",
                                 "Self-heating of the trigger device is left out (model); it would be about 10 K."),
                         new Note("valley", "The valley voltage is on no data sheet; 2 V is common practice.")));
+    }
+
+    /** The line current of a design as the judge tells it. */
+    public static LineCheck lineCurrent(Design design) {
+        return Judge.check(design, OptionalDouble.empty(), OptionalDouble.empty())
+                .lineCurrent()
+                .orElseThrow();
     }
 
     public static OperatingPoint point(Design design, double position) {

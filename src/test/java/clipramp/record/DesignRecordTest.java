@@ -5,6 +5,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 import clipramp.circuit.Trigger;
 import clipramp.faults.FaultEffect;
 import clipramp.files.LoadedDesign;
+import clipramp.margins.LineCheck;
 import clipramp.margins.Margin;
 import clipramp.margins.Verdict;
 import clipramp.power.OperatingPoint;
@@ -64,6 +65,32 @@ class DesignRecordTest {
     @Test
     void everySignOfTheTradeCanBeSelected() throws IOException {
         assertThat(text(pdf, 0)).contains("Ω", "α", "µ", "η", "°", "≥", "≤", "−", "±", "ω");
+    }
+
+    /** The closed form of a resistor's current is checked in LineCurrentTest; here, that the record shows the judge's. */
+    @Test
+    void theLineCurrentHasItsPageWithEveryOrderAndNoVerdict() throws IOException {
+        LineCheck line = content.check().lineCurrent().orElseThrow();
+        String page = text(pdf, pageOf(pdf, "order of the line's frequency")).replaceAll("\\s+", " ");
+        assertThat(page)
+                .contains("Line current", "displacement factor", "power factor", "distortion", "direct part")
+                .contains("IEC 61000-3-2 to edition 4", "from memory", "A test house and local rules decide")
+                .contains("order " + line.binding().order() + " binds first")
+                .contains(Shown.quantity(line.bindsAtWatts(), Unit.WATT))
+                .doesNotContain("complies")
+                .doesNotContain("compliant");
+        for (LineCheck.Order order : line.orders()) {
+            assertThat(page).contains(" " + order.order() + " ");
+        }
+        assertThat(page).contains(Shown.brief(line.orders().get(13).amps(), Unit.AMPERE));
+    }
+
+    private static int pageOf(byte[] bytes, String words) throws IOException {
+        int page = 1;
+        while (!text(bytes, page).contains(words)) {
+            page++;
+        }
+        return page;
     }
 
     @Test
@@ -136,7 +163,7 @@ class DesignRecordTest {
                 lastPage = number;
             }
             assertThat(titles)
-                    .hasSize(14)
+                    .hasSize(15)
                     .anyMatch(title -> title.contains("Review"))
                     .anyMatch(title -> title.contains("Commissioning"))
                     .anyMatch(title -> title.contains("Signatures"));
