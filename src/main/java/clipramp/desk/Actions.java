@@ -80,10 +80,26 @@ interface Actions {
         }
     }
 
-    /** The pages of a window with a design. */
+    /** The pages of a window with a design, in the order of their tabs; Ctrl and a digit bring one up. */
     enum Page {
-        BENCH,
-        SPREAD,
-        RECORD
+        BENCH("Bench", 1),
+        SPREAD("Spread", 3),
+        RECORD("Record", 2);
+
+        private final String words;
+        private final int digit;
+
+        Page(String words, int digit) {
+            this.words = words;
+            this.digit = digit;
+        }
+
+        String words() {
+            return words;
+        }
+
+        int digit() {
+            return digit;
+        }
     }
 }

@@ -16,7 +16,7 @@ import javafx.scene.layout.VBox;
  * Lanes and knob on the left, which always stay; parts and margins on the right, both where there is room, one of them
  * where there is less, folded away where there is none.
  */
-final class BenchPage extends Pane {
+final class BenchPage extends Pane implements PageView {
     /** Widths and heights are in effective pixels: real ones over the zoom. */
     private static final double FOLD_BELOW = 1000;
 
@@ -84,6 +84,11 @@ final class BenchPage extends Pane {
         button.setId("tab-" + id);
         button.setAccessibleText(text);
         return button;
+    }
+
+    @Override
+    public Pane node() {
+        return this;
     }
 
     LanesView lanes() {

@@ -9,13 +9,16 @@ import clipramp.desk.model.Settings;
 import clipramp.figures.CircuitFigure;
 import clipramp.figures.Figure;
 import java.nio.file.Path;
+import java.util.EnumMap;
 import java.util.List;
+import java.util.Map;
+import java.util.Objects;
 import java.util.Optional;
 import javafx.application.Platform;
-import javafx.scene.Node;
 import javafx.scene.Scene;
 import javafx.scene.input.TransferMode;
 import javafx.scene.layout.BorderPane;
+import javafx.scene.layout.FlowPane;
 import javafx.scene.layout.VBox;
 import javafx.stage.Stage;
 
@@ -34,10 +37,12 @@ final class DeskWindow {
     private final Late<NewPage> fresh;
     private final Late<BenchPage> bench;
     private final Late<SpreadPage> spread;
-    private final Late<RecordPage> record;
+    private final Map<Page, Late<? extends PageView>> pages = new EnumMap<>(Page.class);
     private final Late<HeaderView> header;
+    private final Late<PageTabs> tabs;
     private final Menus menus;
-    private final VBox top = new VBox();
+    private final FlowPane bar = new FlowPane();
+    private final VBox top = new VBox(bar);
     private Page page = Page.BENCH;
 
     DeskWindow(Stage stage, Theme theme, DeskModel model, Late<RecordMaker> maker, Actions actions) {
@@ -49,10 +54,15 @@ final class DeskWindow {
                 wish -> actions.propose(wish, false), wish -> actions.propose(wish, true), actions::giveUpNew));
         this.bench = new Late<>(this::makeBench);
         this.spread = new Late<>(() -> new SpreadPage(theme, model.draft(), model.spread(), this::layBands));
-        this.record = new Late<>(() -> new RecordPage(theme, model.draft(), maker.get(), actions::saveRecord));
+        pages.put(Page.BENCH, bench);
+        pages.put(Page.SPREAD, spread);
+        pages.put(
+                Page.RECORD, new Late<>(() -> new RecordPage(theme, model.draft(), maker.get(), actions::saveRecord)));
         this.header = new Late<>(() -> new HeaderView(model, actions, () -> bench().unfold(true)));
+        this.tabs = new Late<>(() -> new PageTabs(actions));
         this.menus = new Menus(actions, model.draft());
-        top.getChildren().setAll(menus.node());
+        bar.getStyleClass().add("top-bar");
+        bar.getChildren().setAll(menus.node());
         root.setTop(top);
         root.setCenter(start.node());
         Scene scene = new Scene(root, WIDTH, HEIGHT);
@@ -81,6 +91,7 @@ final class DeskWindow {
     void finish() {
         bench.get();
         header.get();
+        tabs.get();
     }
 
     private static void takeDrops(Scene scene, Actions actions) {
@@ -104,8 +115,8 @@ final class DeskWindow {
         boolean shown = top.getChildren().size() > 1;
         if (model.draft().isOpen() && !shown) {
             showPage(Page.BENCH);
-        } else if (page == Page.RECORD && model.draft().isOpen()) {
-            record.get().show();
+        } else if (model.draft().isOpen()) {
+            view(page).follow();
         }
         stage.setTitle(model.draft().name() + (model.draft().isDirty() ? " (differs from saved)" : "") + " – clipramp");
         mark();
@@ -113,22 +124,18 @@ final class DeskWindow {
 
     void showPage(Page wanted) {
         page = wanted;
-        top.getChildren().setAll(menus.node(), header.get().node());
-        root.setCenter(node(page));
-        if (page == Page.RECORD) {
-            record.get().show();
-        } else if (page == Page.BENCH) {
+        bar.getChildren().setAll(menus.node(), tabs.get().node());
+        top.getChildren().setAll(bar, header.get().node());
+        root.setCenter(view(page).node());
+        view(page).follow();
+        if (page == Page.BENCH) {
             Platform.runLater(bench()::begin);
         }
         mark();
     }
 
-    private Node node(Page of) {
-        return switch (of) {
-            case BENCH -> bench();
-            case SPREAD -> spread.get().node();
-            case RECORD -> record.get().node();
-        };
+    private PageView view(Page of) {
+        return Objects.requireNonNull(pages.get(of)).get();
     }
 
     /** The spread of the design as it stands lies over lanes and knob, where it is wanted. */
@@ -141,7 +148,8 @@ final class DeskWindow {
     /** Asks for a new design. */
     void showNew() {
         fresh.get().offer(model.draft().workshop().lineIds());
-        top.getChildren().setAll(menus.node());
+        bar.getChildren().setAll(menus.node());
+        top.getChildren().setAll(bar);
         root.setCenter(fresh.get().node());
         Platform.runLater(fresh.get()::begin);
     }
@@ -162,6 +170,7 @@ final class DeskWindow {
     private void mark() {
         if (header.isMade() && bench.isMade()) {
             header.get().showPage(page, bench().isFolded());
+            tabs.get().show(page);
         }
     }
 

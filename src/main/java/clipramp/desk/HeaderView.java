@@ -7,12 +7,10 @@ import clipramp.desk.model.MarginRow;
 import clipramp.desk.model.Sheet;
 import clipramp.desk.model.ViewCondition;
 import java.util.List;
-import java.util.Locale;
 import javafx.scene.control.Button;
 import javafx.scene.control.ComboBox;
 import javafx.scene.control.Hyperlink;
 import javafx.scene.control.Label;
-import javafx.scene.control.ToggleButton;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.Region;
@@ -28,9 +26,6 @@ final class HeaderView {
     private final Label note = new Label();
     private final Button margins = new Button("Margins");
     private final ComboBox<String> condition = new ComboBox<>();
-    private final ToggleButton bench = new ToggleButton("Bench");
-    private final ToggleButton spread = new ToggleButton("Spread");
-    private final ToggleButton record = new ToggleButton("Record");
     private final HBox row = new HBox();
     private final HBox heading = new HBox();
     private final VBox box;
@@ -50,21 +45,16 @@ final class HeaderView {
         margins.setAccessibleText("Show margins and parts");
         margins.setOnAction(event -> showMargins.run());
         conditions(actions);
-        page(bench, Page.BENCH, actions);
-        page(spread, Page.SPREAD, actions);
-        page(record, Page.RECORD, actions);
-        HBox switches = new HBox(bench, spread, record);
-        switches.getStyleClass().add("tabs");
         Hyperlink cautions = new Hyperlink("Mains safety");
         cautions.setId("cautions");
         cautions.setAccessibleText("Before you build or measure: mains safety");
         cautions.setOnAction(event -> actions.showCautions());
         Region gap = new Region();
         HBox.setHgrow(gap, Priority.ALWAYS);
-        row.getChildren().setAll(title, saved, gap, verdict, counts, margins, condition, switches, cautions);
+        row.getChildren().setAll(title, saved, gap, verdict, counts, margins, condition, cautions);
         row.getStyleClass().add("header");
         heading.getStyleClass().add("header");
-        for (Region fixed : List.of(saved, verdict, counts, margins, condition, switches, cautions)) {
+        for (Region fixed : List.of(saved, verdict, counts, margins, condition, cautions)) {
             fixed.setMinWidth(Region.USE_PREF_SIZE);
         }
         note.getStyleClass().add("condition-note");
@@ -90,21 +80,12 @@ final class HeaderView {
         });
     }
 
-    private static void page(ToggleButton button, Page page, Actions actions) {
-        button.setId("page-" + button.getText().toLowerCase(Locale.ROOT));
-        button.setAccessibleText("Page " + button.getText());
-        button.setOnAction(event -> actions.showPage(page));
-    }
-
     VBox node() {
         return box;
     }
 
     /** Marks the page that is shown, and whether margins are folded away on it. */
     void showPage(Page page, boolean folded) {
-        bench.setSelected(page == Page.BENCH);
-        spread.setSelected(page == Page.SPREAD);
-        record.setSelected(page == Page.RECORD);
         margins.setVisible(folded && page == Page.BENCH);
         margins.setManaged(folded && page == Page.BENCH);
         stack(folded);

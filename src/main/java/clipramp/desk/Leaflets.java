@@ -1,7 +1,12 @@
 package clipramp.desk;
 
+import clipramp.desk.Actions.Page;
 import clipramp.desk.model.Cautions;
+import java.util.Arrays;
+import java.util.Comparator;
 import java.util.List;
+import java.util.Locale;
+import java.util.stream.Collectors;
 import javafx.scene.Node;
 import javafx.scene.control.Label;
 import javafx.scene.layout.GridPane;
@@ -19,12 +24,20 @@ final class Leaflets {
             List.of("A value: Enter, Escape", "take it, or back to what stands in the file"),
             List.of("Ctrl+N, O, S", "new, open, save; with Shift+S save as"),
             List.of("Ctrl+Z, Ctrl+Shift+Z", "undo, redo"),
-            List.of("Ctrl+1, 2", "bench, record"),
+            List.of("Ctrl+1 … " + Page.values().length, pages()),
             List.of("Ctrl+L", "look closer at the pulse, or back"),
             List.of("Ctrl++, −, 0", "zoom"),
             List.of("F1, F2", "these keys, mains safety"));
 
     private Leaflets() {}
+
+    /** The pages in the order of their digits. */
+    private static String pages() {
+        return Arrays.stream(Page.values())
+                .sorted(Comparator.comparingInt(Page::digit))
+                .map(page -> page.words().toLowerCase(Locale.ROOT))
+                .collect(Collectors.joining(", "));
+    }
 
     static Node keys() {
         GridPane grid = new GridPane();

@@ -98,25 +98,27 @@ final class Menus {
         for (Shown shown : Shown.values()) {
             numbers.getItems().add(item(capital(shown.words()), "", () -> actions.showNumbers(shown)));
         }
-        return new Menu(
-                "_View",
-                null,
-                needing(item("_Bench", "Shortcut+1", () -> actions.showPage(Page.BENCH))),
-                needing(item("_Record", "Shortcut+2", () -> actions.showPage(Page.RECORD))),
-                needing(item("_Spread", "Shortcut+3", () -> actions.showPage(Page.SPREAD))),
-                new SeparatorMenuItem(),
-                needing(conditions),
-                needing(item("Look closer at the _pulse, or back", "Shortcut+L", actions::zoomPulse)),
-                needing(numbers),
-                new SeparatorMenuItem(),
-                item("Zoom _in", "Shortcut+PLUS", () -> actions.zoomBy(ZOOM_STEP)),
-                item("Zoom _out", "Shortcut+MINUS", () -> actions.zoomBy(-ZOOM_STEP)),
-                item("Zoom to 100 %", "Shortcut+0", () -> actions.zoomTo(Settings.LEAST_ZOOM)),
-                item("Zoom to 200 %", "", () -> actions.zoomTo(Settings.MOST_ZOOM)),
-                new SeparatorMenuItem(),
-                item("Theme as the system", "", () -> actions.setLook(Settings.Look.SYSTEM)),
-                item("Theme paper", "", () -> actions.setLook(Settings.Look.PAPER)),
-                item("Theme ink", "", () -> actions.setLook(Settings.Look.INK)));
+        Menu menu = new Menu("_View");
+        for (Page page : Page.values()) {
+            menu.getItems()
+                    .add(needing(item("_" + page.words(), "Shortcut+" + page.digit(), () -> actions.showPage(page))));
+        }
+        menu.getItems()
+                .addAll(
+                        new SeparatorMenuItem(),
+                        needing(conditions),
+                        needing(item("Look closer at the _pulse, or back", "Shortcut+L", actions::zoomPulse)),
+                        needing(numbers),
+                        new SeparatorMenuItem(),
+                        item("Zoom _in", "Shortcut+PLUS", () -> actions.zoomBy(ZOOM_STEP)),
+                        item("Zoom _out", "Shortcut+MINUS", () -> actions.zoomBy(-ZOOM_STEP)),
+                        item("Zoom to 100 %", "Shortcut+0", () -> actions.zoomTo(Settings.LEAST_ZOOM)),
+                        item("Zoom to 200 %", "", () -> actions.zoomTo(Settings.MOST_ZOOM)),
+                        new SeparatorMenuItem(),
+                        item("Theme as the system", "", () -> actions.setLook(Settings.Look.SYSTEM)),
+                        item("Theme paper", "", () -> actions.setLook(Settings.Look.PAPER)),
+                        item("Theme ink", "", () -> actions.setLook(Settings.Look.INK)));
+        return menu;
     }
 
     private Menu help() {

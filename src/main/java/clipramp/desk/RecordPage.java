@@ -22,7 +22,7 @@ import javafx.scene.layout.StackPane;
 import javafx.scene.layout.VBox;
 
 /** The record's pages as they will be saved, and its title block. */
-final class RecordPage {
+final class RecordPage implements PageView {
     private static final List<String> TITLE_BLOCK = List.of(
             "title",
             "document.number",
@@ -82,12 +82,14 @@ final class RecordPage {
         theme.onChange(() -> maker.setZoom(theme.zoom()));
     }
 
-    BorderPane node() {
+    @Override
+    public BorderPane node() {
         return box;
     }
 
     /** Brings the pages up to the design as it stands. */
-    void show() {
+    @Override
+    public void follow() {
         draft.sheet().ifPresent(sheet -> {
             maker.show(sheet.loaded(), draft.file());
             titleBlock(sheet);

@@ -27,7 +27,7 @@ import javafx.scene.layout.Region;
 import javafx.scene.layout.VBox;
 
 /** What the next thousand units do: asked on the left, drawn in the middle while it runs, told underneath. */
-final class SpreadPage {
+final class SpreadPage implements PageView {
     private static final int MOST_UNITS = 1_000_000;
 
     private final Draft draft;
@@ -134,7 +134,8 @@ final class SpreadPage {
         return new VBox(label, control);
     }
 
-    BorderPane node() {
+    @Override
+    public BorderPane node() {
         return box;
     }
 

@@ -6,42 +6,30 @@ import clipramp.desk.model.Places;
 import clipramp.desk.model.RecordMaker;
 import clipramp.desk.model.Recovery;
 import clipramp.desk.model.Settings;
-import clipramp.desk.model.TableText;
 import clipramp.desk.model.Trouble;
 import clipramp.desk.model.ViewCondition;
 import clipramp.desk.model.Wish;
 import clipramp.desk.model.Workers;
-import clipramp.figures.Figure;
 import clipramp.figures.Palette;
 import clipramp.figures.Style;
-import clipramp.figures.Surfaces;
 import clipramp.files.Example;
-import java.io.IOException;
-import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
 import java.util.Objects;
-import java.util.function.Consumer;
-import javafx.scene.canvas.Canvas;
-import javafx.scene.input.Clipboard;
-import javafx.scene.input.ClipboardContent;
-import org.jfree.fx.FXGraphics2D;
 import org.jspecify.annotations.Nullable;
 
-/** Does what the window is asked. */
+/** Does what the window is asked: files and figures by helpers of their own, the rest here. */
 final class WindowActions implements Actions {
-    private static final double PICTURE_WIDTH = 900;
-    private static final double PICTURE_SCALE = 2;
-
     private final DeskModel model;
     private final Late<RecordMaker> maker;
     private final Recovery recovery;
     private final Places places;
     private final Workers workers;
     private final Runnable closed;
-    private @Nullable DeskWindow window;
-    private @Nullable FileAsk asks;
+    private @Nullable Served served;
     private Settings settings = Settings.FIRST;
     private boolean systemIsDark;
+
+    private record Served(Service service, FileActions files, FigureActions figures) {}
 
     /**
      * @param model the design on the desk
@@ -67,21 +55,25 @@ final class WindowActions implements Actions {
         model.draft().onChange(this::rememberFile);
     }
 
-    void serve(DeskWindow served, FileAsk fileAsk) {
-        window = served;
-        asks = fileAsk;
+    void serve(DeskWindow window, FileAsk fileAsk) {
+        Service service = new Service(window, fileAsk, workers);
+        served = new Served(service, new FileActions(service, draft(), recovery, maker), new FigureActions(service));
+    }
+
+    private Served served() {
+        return Objects.requireNonNull(served, "no window is served yet");
     }
 
     private DeskWindow window() {
-        return Objects.requireNonNull(window, "no window is served yet");
-    }
-
-    private FileAsk asks() {
-        return Objects.requireNonNull(asks, "no window is served yet");
+        return served().service().window();
     }
 
     private Dialogs dialogs() {
-        return new Dialogs(window().stage(), window().theme());
+        return served().service().dialogs();
+    }
+
+    private FileActions files() {
+        return served().files();
     }
 
     private Draft draft() {
@@ -90,14 +82,14 @@ final class WindowActions implements Actions {
 
     /** Shows a failure. */
     void show(Trouble trouble) {
-        dialogs().trouble(trouble);
+        served().service().show(trouble);
     }
 
     // --- files
 
     @Override
     public void startNew() {
-        whenSaved(window()::showNew);
+        files().whenSaved(window()::showNew);
     }
 
     @Override
@@ -119,77 +111,52 @@ final class WindowActions implements Actions {
 
     @Override
     public void open() {
-        whenSaved(() -> asks().toOpen(FileAsk.Kind.DESIGN).ifPresent(draft()::open));
+        files().open();
     }
 
     @Override
     public void openFile(Path file) {
-        whenSaved(() -> draft().open(file));
+        files().whenSaved(() -> draft().open(file));
     }
 
     @Override
     public void openExample(Example example) {
-        whenSaved(() -> draft().openUnsaved(example.id() + ".yaml", example.text()));
+        files().whenSaved(() -> draft().openUnsaved(example.id() + ".yaml", example.text()));
     }
 
     @Override
     public void recover(Recovery.Left work) {
-        whenSaved(() -> draft().recover(work));
+        files().recover(work);
     }
 
     @Override
     public void forget(Recovery.Left work) {
-        away("The unsaved work could not be forgotten", () -> recovery.forget(work), this::offerRecovery);
+        files().forget(work);
     }
 
     /** Looks for work that was left behind, and offers it. */
     void offerRecovery() {
-        workers.writing().execute(() -> {
-            try {
-                var works = recovery.leftBehind();
-                workers.home().execute(() -> window().offer(works));
-            } catch (IOException e) {
-                workers.home().execute(() -> show(Trouble.of("Unsaved work could not be looked for", e)));
-            }
-        });
+        files().offerRecovery();
     }
 
     @Override
     public void save() {
-        saveThen(() -> {});
-    }
-
-    private void saveThen(Runnable then) {
-        draft().file().ifPresentOrElse(file -> draft().save(file, then), () -> saveAsThen(then));
+        files().save();
     }
 
     @Override
     public void saveAs() {
-        saveAsThen(() -> {});
+        files().saveAs();
     }
 
-    private void saveAsThen(Runnable then) {
-        asks().toWrite(FileAsk.Kind.DESIGN, draft().name(), draft().file()).ifPresent(file -> draft().save(file, then));
-    }
-
-    /** Goes on at once, or after the user has decided about unsaved work. */
-    private void whenSaved(Runnable then) {
-        if (!draft().isDirty()) {
-            then.run();
-            return;
-        }
-        dialogs().unsaved(draft().name(), answer -> {
-            if (answer == Dialogs.SAVE) {
-                saveThen(then);
-            } else if (answer == Dialogs.DISCARD) {
-                draft().abandon(then);
-            }
-        });
+    @Override
+    public void saveRecord() {
+        files().saveRecord();
     }
 
     @Override
     public void close() {
-        whenSaved(() -> {
+        files().whenSaved(() -> {
             window().stage().hide();
             closed.run();
         });
@@ -200,15 +167,6 @@ final class WindowActions implements Actions {
             if (settings.recent().isEmpty() || !settings.recent().get(0).equals(file)) {
                 remember(settings.withRecent(file));
             }
-        });
-    }
-
-    @Override
-    public void saveRecord() {
-        maker.get().pdf().ifPresent(pdf -> {
-            String name = draft().name().replaceFirst("\\.ya?ml$", "") + ".pdf";
-            asks().toWrite(FileAsk.Kind.RECORD, name, draft().file())
-                    .ifPresent(file -> draft().export(file, pdf, () -> window().say("Saved " + file.getFileName())));
         });
     }
 
@@ -226,55 +184,24 @@ final class WindowActions implements Actions {
 
     // --- figures
 
-    private void with(Shown what, Consumer<Figure> action) {
-        window().figure(what).ifPresent(action);
-    }
-
     @Override
     public void showNumbers(Shown what) {
-        with(what, dialogs()::numbers);
+        served().figures().showNumbers(what);
     }
 
     @Override
     public void copyPicture(Shown what) {
-        with(what, figure -> {
-            double height = PICTURE_WIDTH / figure.proportion();
-            Canvas canvas = new Canvas(PICTURE_WIDTH, height);
-            Style style = new Style(Palette.PAPER, 1);
-            Surfaces.draw(figure, new FXGraphics2D(canvas.getGraphicsContext2D()), PICTURE_WIDTH, height, style);
-            ClipboardContent content = new ClipboardContent();
-            content.putImage(canvas.snapshot(null, null));
-            Clipboard.getSystemClipboard().setContent(content);
-        });
+        served().figures().copyPicture(what);
     }
 
     @Override
     public void copyTable(Shown what) {
-        with(what, figure -> {
-            ClipboardContent content = new ClipboardContent();
-            content.putString(TableText.tabbed(figure.numbers()));
-            Clipboard.getSystemClipboard().setContent(content);
-        });
+        served().figures().copyTable(what);
     }
 
     @Override
     public void export(Shown what, FileAsk.Kind kind) {
-        with(
-                what,
-                figure -> asks().toWrite(kind, what.words().replace(' ', '-') + "." + kind.ending(), draft().file())
-                        .ifPresent(file -> away(
-                                "The file cannot be written",
-                                () -> clipramp.files.WholeFile.write(file, out -> out.write(drawn(figure, kind)), true),
-                                () -> {})));
-    }
-
-    private static byte[] drawn(Figure figure, FileAsk.Kind kind) {
-        double height = PICTURE_WIDTH / figure.proportion();
-        return switch (kind) {
-            case SVG -> Surfaces.toSvg(figure, PICTURE_WIDTH, height).getBytes(StandardCharsets.UTF_8);
-            case PNG -> Surfaces.toPng(figure, PICTURE_WIDTH, height, PICTURE_SCALE);
-            default -> TableText.csv(figure.numbers()).getBytes(StandardCharsets.UTF_8);
-        };
+        served().figures().export(what, kind, draft().file());
     }
 
     // --- the window itself
@@ -363,21 +290,6 @@ final class WindowActions implements Actions {
     private void remember(Settings changed) {
         settings = changed;
         window().showSettings(settings);
-        away("The settings could not be kept", () -> changed.save(places), () -> {});
-    }
-
-    private interface Task {
-        void run() throws IOException;
-    }
-
-    private void away(String what, Task task, Runnable then) {
-        workers.writing().execute(() -> {
-            try {
-                task.run();
-                workers.home().execute(then);
-            } catch (IOException | RuntimeException e) {
-                workers.home().execute(() -> show(Trouble.of(what, e)));
-            }
-        });
+        served().service().away("The settings could not be kept", () -> changed.save(places), () -> {});
     }
 }
