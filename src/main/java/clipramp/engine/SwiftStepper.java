@@ -31,6 +31,11 @@ public final class SwiftStepper {
     /** A form nearer to zero than this, V or A, is a matter for the careful stepper. */
     private static final double DOUBTFUL = 1e-11;
 
+    /** Forms nearer to zero than this, V, or this a kilohm, A, might change sides for a neighbouring residual. */
+    private static final double EDGE_VOLTS = 1e-3;
+
+    private static final double EDGE_AMPS = 1e-6;
+
     /** Sinusoids keep their sign over less than half a turn. */
     private static final double HALF_TURN = 3.1;
 
@@ -75,6 +80,9 @@ public final class SwiftStepper {
     private double decay;
     /** Where the valley was last not excluded: it is looked for once before giving up. */
     private double lastDoubt;
+
+    /** Whether another event nearly took the place of one of those passed since the start. */
+    private boolean nearEdge;
 
     private double x;
     private double s;
@@ -138,6 +146,7 @@ public final class SwiftStepper {
         cosine = 1;
         stalled = startMode == Mode.STALLED;
         unsettled = false;
+        nearEdge = false;
         state = startMode == Mode.ON ? SwiftLaws.ON : 0;
         if (stalled) {
             careful.start(wave, startMode, startRampVolts, 0);
@@ -166,6 +175,7 @@ public final class SwiftStepper {
                 - rows[row + SwiftLaws.COSINE] * cosine;
         int target = unsettled ? DOUBT : reach();
         if (target == DOUBT) {
+            nearEdge |= !unsettled;
             return carefully();
         }
         // Back onto the unit circle: remembered turns are products, and would make rounding grow.
@@ -471,8 +481,9 @@ public final class SwiftStepper {
                 after = 0;
             } else if (after > DOUBTFUL) {
                 return form;
-            } else if (after > -DOUBTFUL) {
-                doubt = true;
+            } else if (after > -edge(form)) {
+                nearEdge = true;
+                doubt |= after > -DOUBTFUL;
             }
             if (!proving) {
                 continue;
@@ -495,6 +506,10 @@ public final class SwiftStepper {
             }
         }
         return doubt ? DOUBT : NONE;
+    }
+
+    private double edge(int form) {
+        return form == SwiftLaws.DEVICE && (state & SwiftLaws.ON) != 0 ? EDGE_AMPS : EDGE_VOLTS;
     }
 
     /**
@@ -797,6 +812,11 @@ public final class SwiftStepper {
     /** What the device does now. */
     public Mode mode() {
         return stalled ? Mode.STALLED : (state & SwiftLaws.ON) != 0 ? Mode.ON : Mode.OFF;
+    }
+
+    /** Whether a half cycle from a neighbouring ramp voltage might pass other events than this one did. */
+    public boolean nearEdge() {
+        return nearEdge;
     }
 
     /** Whether the zener conducts now. */

@@ -152,6 +152,9 @@ public final class SwiftFiring {
                         && endMode == mode
                         && Math.abs(step) < NEAR_VOLTS
                         && left * sensitivity() < LEFT_SECONDS) {
+                    if (stepper.nearEdge()) {
+                        return repeatsFrom(mode, next);
+                    }
                     return (Double.isNaN(firedSeconds) || fireFrom(mode, next)) && settled(mode, next);
                 }
             }
@@ -164,6 +167,14 @@ public final class SwiftFiring {
             mode = endMode;
         }
         return false;
+    }
+
+    /** Near an edge the fixed point may belong to a course that the half cycle from there no longer takes: it is run whole. */
+    private boolean repeatsFrom(Mode mode, double volts) {
+        return run(mode, volts, false, 0)
+                && stepper.mode() == mode
+                && Math.abs(stepper.rampVolts() - volts) * sensitivity() < LEFT_SECONDS
+                && settled(mode, volts);
     }
 
     /** How the firing instant moves with the residual, s/V; a whole time constant's worth where that is not known. */
