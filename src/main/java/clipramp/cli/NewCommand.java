@@ -16,8 +16,8 @@ import picocli.CommandLine.Option;
         description = "Writes a commented design to start from.",
         footer = {
             "",
-            "Examples: drying-cabinet, shed-heater, upper-heaters, seed-drawer, tray-lamp, store-fan, tasting-lamps; and"
-                    + " two that fail on purpose: store-fan-narrow-pulse and cabinet-gone-wrong."
+            "Examples: drying-cabinet, shed-heater, upper-heaters, seed-drawer, tray-lamp, tray-lamp-programmable,"
+                    + " store-fan, tasting-lamps; and two that fail on purpose: store-fan-narrow-pulse and cabinet-gone-wrong."
         })
 final class NewCommand implements Callable<Integer> {
     private final Session session;

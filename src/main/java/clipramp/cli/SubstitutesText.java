@@ -25,7 +25,7 @@ final class SubstitutesText {
         for (Substitute s : found) {
             table.row(
                     s.key(),
-                    s.id() + (s.original() ? " (its own)" : ""),
+                    s.id() + (s.original() ? " (its own)" : s.changes().isEmpty() ? "" : " (other kind)"),
                     s.check().map(c -> c.verdict().word()).orElse("not usable"),
                     s.deciding().map(Margin::name).orElse(s.refusal()),
                     s.deciding().map(SubstitutesText::ratio).orElse(""),
@@ -33,10 +33,25 @@ final class SubstitutesText {
         }
         out.lines(table.lines());
         out.line("");
+        changes(out, found);
         out.lines(Paragraph.wrap(
-                "Each device is put there alone, everything else unchanged. Pinout, package and mounting are not"
-                        + " compared.",
+                "Each device is put there alone, everything else unchanged but for what is listed. Pinout, package and"
+                        + " mounting are not compared.",
                 ""));
+    }
+
+    /** What a trigger device of the other kind wants around it, as it can be tried with check. */
+    private static void changes(Output out, List<Substitute> found) {
+        List<Substitute> changed =
+                found.stream().filter(s -> !s.changes().isEmpty()).toList();
+        if (changed.isEmpty()) {
+            return;
+        }
+        out.line("The other kind of trigger device, and what changes with it");
+        for (Substitute s : changed) {
+            out.lines(Paragraph.wrap(s.id() + ": " + String.join("; ", s.changes()), "  ", "    "));
+        }
+        out.line("");
     }
 
     private static String ratio(Margin margin) {
@@ -57,7 +72,8 @@ final class SubstitutesText {
                                             s.check()
                                                     .map(c -> c.verdict().word())
                                                     .orElse(null))
-                                    .put("refusal", s.refusal());
+                                    .put("refusal", s.refusal())
+                                    .putWords("changes", s.changes());
                             o.put("decidingMargin", s.deciding().map(Margin::id).orElse(null))
                                     .put(
                                             "ratio",

@@ -21,6 +21,10 @@ public record Example(String id, String title, String about) {
             new Example("upper-heaters", "Upper heaters", "two SCRs in inverse parallel on a pulse transformer"),
             new Example("seed-drawer", "Seed drawer", "5 W at 24 V with a programmable unijunction"),
             new Example("tray-lamp", "Sorting tray", "10 W from a 24 V transformer, half-wave"),
+            new Example(
+                    "tray-lamp-programmable",
+                    "Sorting tray, carried over",
+                    "the same lamp with a programmable unijunction"),
             new Example("store-fan", "Store fan", "an inductive load on a triac, its train of pulses latching it"),
             new Example(
                     "store-fan-narrow-pulse",

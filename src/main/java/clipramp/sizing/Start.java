@@ -43,6 +43,7 @@ final class Start {
     private static final double STANDING_RESERVE = 1.3;
     private static final double MOST_BASE_ONE = 100;
     private static final double USUAL_BASE_TWO = 470;
+    private static final double LEAST_BASE_TWO = 100;
     private static final double FINE_TOLERANCE = 0.01;
     private static final double USUAL_TOLERANCE = 0.05;
     private static final double TRACK_TOLERANCE = 0.1;
@@ -169,8 +170,7 @@ final class Start {
                     design, resistor(request.series().atMost(Math.max(10, sensitive() && !byTransformer ? 22 : most))));
         }
         if (request.isOpen(OpenPart.BASE_TWO)) {
-            double ohms = driftFreeOhms(design).orElse(USUAL_BASE_TWO);
-            design = Edit.baseTwo(design, resistor(Math.max(100, ohms)));
+            design = Edit.baseTwo(design, resistor(baseTwoOhms(design)));
         }
         if (request.isOpen(OpenPart.UPPER) || request.isOpen(OpenPart.LOWER)) {
             design = Edit.divider(design, resistor(1000), resistor(1500));
@@ -201,6 +201,11 @@ final class Start {
                 ? PublishedRelations.largestBaseOneOhms(
                         volts, supply, u.device().interbaseOhms().lowest(), USUAL_BASE_TWO)
                 : MOST_BASE_ONE;
+    }
+
+    /** Base two's resistor that keeps the peak point still over temperature, as far as that is one to build with, ohm. */
+    static double baseTwoOhms(Design design) {
+        return Math.max(LEAST_BASE_TWO, driftFreeOhms(design).orElse(USUAL_BASE_TWO));
     }
 
     /** Base two's resistor by dV_P/dT = 0 at the typical drifts, ohm. */

@@ -42,6 +42,9 @@ class ReadmeTest {
         if (what.equals("margins")) {
             return ReadmeTables.margins();
         }
+        if (what.equals("examples")) {
+            return ReadmeTables.examples();
+        }
         if (what.startsWith("clipramp ")) {
             return commandOutput(what);
         }

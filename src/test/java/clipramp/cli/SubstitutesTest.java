@@ -4,6 +4,8 @@ import static org.assertj.core.api.Assertions.assertThat;
 
 import com.fasterxml.jackson.databind.JsonNode;
 import com.fasterxml.jackson.databind.ObjectMapper;
+import java.util.ArrayList;
+import java.util.List;
 import java.util.stream.StreamSupport;
 import org.junit.jupiter.api.Test;
 
@@ -28,6 +30,37 @@ class SubstitutesTest {
         JsonNode answer = answer("examples/shed-heater.yaml");
         assertThat(substitute(answer, "2n6344").get("verdict").asText()).isEqualTo("fails");
         assertThat(substitute(answer, "2n6344").get("decidingMargin").asText()).isEqualTo("gate-polarity");
+    }
+
+    @Test
+    void aProgrammableUnijunctionComesWithTheDividerThatItWants() throws Exception {
+        JsonNode answer = answer("examples/tray-lamp.yaml");
+        JsonNode programmable = substitute(answer, "2n6027");
+        assertThat(programmable.get("path").asText()).isEqualTo("trigger.device");
+        assertThat(programmable.get("verdict").asText()).isNotEqualTo("fails");
+        assertThat(programmable.get("changes").toString())
+                .contains("trigger.base-two=none", "trigger.upper=", "trigger.lower=", "ramp.capacitor=");
+        assertThat(substitute(answer, "2n2647").get("changes")).isEmpty();
+    }
+
+    @Test
+    void whatItSaysHasToChangeGivesTheVerdictThatItSays() throws Exception {
+        for (String[] pair : new String[][] {{"tray-lamp", "2n6027"}, {"seed-drawer", "2n2646"}}) {
+            String file = "examples/" + pair[0] + ".yaml";
+            JsonNode said = substitute(answer(file), pair[1]);
+            List<String> command = new ArrayList<>(List.of("check", file, "--json", "--with=trigger.device=" + pair[1]));
+            said.get("changes").forEach(change -> command.add("--with=" + change.asText()));
+            CliRun run = CliRun.of(command.toArray(String[]::new));
+            assertThat(new ObjectMapper().readTree(run.out()).get("verdict")).isEqualTo(said.get("verdict"));
+        }
+    }
+
+    @Test
+    void aHundredthOfTheValleyCurrentIsWhatAnAmpereGateCannotBeServedWith() throws Exception {
+        // 2N6027: I_V 150 uA typ at 10 kohm; 2N2647: 10 mA typ (manufacturers' data sheets of the types).
+        JsonNode programmable = substitute(answer("examples/drying-cabinet.yaml"), "2n6027");
+        assertThat(programmable.get("verdict").asText()).isEqualTo("fails");
+        assertThat(programmable.get("decidingMargin").asText()).isEqualTo("latched-on");
     }
 
     private static JsonNode answer(String file) throws Exception {
