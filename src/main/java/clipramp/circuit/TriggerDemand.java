@@ -5,13 +5,16 @@ import java.util.List;
 
 /**
  * I_GT and V_GT against junction temperature: log I_GT and V_GT linear in temperature, end slopes extended. With a
- * single point, I_GT doubles and V_GT gains 1 V at -40 °C seen from 25 °C (common practice).
+ * single point, I_GT doubles and V_GT gains 1 V at -40 °C seen from 25 °C (common practice). Extended into the heat, V_GT
+ * never falls under the 0.2 V at which sheets say that no device triggers (V_GD at the highest junction temperature,
+ * common practice), nor under a lower V_GT that the sheet itself gives.
  *
  * @param points at least one, in rising temperature
  */
 public record TriggerDemand(List<Point> points) {
     private static final double COLD_GAIN_VOLTS = 1;
     private static final double COLD_SPAN_KELVIN = 65;
+    private static final double NON_TRIGGER_VOLTS = 0.2;
 
     /**
      * @param celsius junction temperature
@@ -57,6 +60,11 @@ public record TriggerDemand(List<Point> points) {
 
     /** V_GT in volts at a junction temperature in °C. */
     public double voltsAt(double celsius) {
+        double floor = points.stream().mapToDouble(Point::volts).reduce(NON_TRIGGER_VOLTS, Math::min);
+        return Math.max(floor, extendedVoltsAt(celsius));
+    }
+
+    private double extendedVoltsAt(double celsius) {
         if (points.size() == 1) {
             Point only = points.get(0);
             return only.volts() + COLD_GAIN_VOLTS * (only.celsius() - celsius) / COLD_SPAN_KELVIN;
