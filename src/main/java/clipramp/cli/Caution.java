@@ -18,9 +18,14 @@ final class Caution {
 
     /** The cautions for reading on a terminal: paragraphs and points newly broken into lines. */
     static List<String> lines() {
+        return lines(text());
+    }
+
+    /** A text with headings, paragraphs and points, newly broken into lines. */
+    static List<String> lines(String markdown) {
         List<String> lines = new ArrayList<>();
         StringBuilder paragraph = new StringBuilder();
-        for (String line : (text() + "\n\n").lines().toList()) {
+        for (String line : (markdown + "\n\n").lines().toList()) {
             boolean starts = line.isBlank() || line.startsWith("#") || line.startsWith("- ");
             if (starts && paragraph.length() > 0) {
                 String point = paragraph.toString().startsWith("- ") ? "  " : "";

@@ -32,7 +32,9 @@ final class Commands {
             new Command("new", "--out=FILE", "a commented design to start from", NewCommand::new),
             new Command("parts", "[ID]", "the profiles; one of them with its sources", PartsCommand::new),
             new Command("explain", "KEY", "what a design key or a margin means", ExplainCommand::new),
-            new Command("desk", "[FILE]", "the window", DeskCommand::new));
+            new Command("desk", "[FILE]", "the window", DeskCommand::new),
+            new Command("completion", "SHELL", "what bash or zsh needs to complete all this", CompletionCommand::new),
+            new Command("manual", "", "the manual page, for man -l -", ManualCommand::new));
 
     private Commands() {}
 

@@ -15,5 +15,9 @@ final class ExitCode {
     /** Interrupted. */
     static final int INTERRUPTED = 130;
 
+    /** All of them, for people. */
+    static final String IN_WORDS = "0 answered; 1 a margin fails; 2 input or options cannot be used; 3 our own fault;"
+            + " 4 a file cannot be read or written; 130 interrupted.";
+
     private ExitCode() {}
 }

@@ -3,6 +3,7 @@ package clipramp.cli;
 import clipramp.cli.TextTable.Align;
 import clipramp.files.Key;
 import clipramp.files.KeyCatalogue;
+import clipramp.files.Licences;
 import clipramp.files.Nearest;
 import clipramp.margins.MarginKind;
 import java.util.ArrayList;
@@ -23,10 +24,11 @@ import picocli.CommandLine.Parameters;
         sortSynopsis = false,
         description = {
             "Tells what a design key (ramp.capacitor, standoff) or a margin (gate-peak-current) means.",
-            "explain safety prints the cautions."
+            "explain safety prints the cautions, explain licences who made what under which licence."
         })
 final class ExplainCommand implements Callable<Integer> {
     private static final String SAFETY = "safety";
+    private static final String LICENCES = "licences";
     private static final int SUGGESTIONS = 3;
 
     private final Session session;
@@ -37,7 +39,7 @@ final class ExplainCommand implements Callable<Integer> {
     @Option(names = "--json", order = 10, description = "the answer for machines")
     boolean json;
 
-    @Parameters(paramLabel = "KEY", description = "a design key, a margin, or safety")
+    @Parameters(paramLabel = "KEY", description = "a design key, a margin, safety or licences")
     String words = "";
 
     ExplainCommand(Session session) {
@@ -55,6 +57,10 @@ final class ExplainCommand implements Callable<Integer> {
             }
             return ExitCode.ANSWERED;
         }
+        if (words.equals(LICENCES) || Licences.ids().contains(words)) {
+            licences();
+            return ExitCode.ANSWERED;
+        }
         Optional<MarginKind> margin = MarginKind.byId(words);
         List<Key> keys = KeyCatalogue.standard().meant(words);
         if (margin.isEmpty() && keys.isEmpty()) {
@@ -68,14 +74,34 @@ final class ExplainCommand implements Callable<Integer> {
         return ExitCode.ANSWERED;
     }
 
-    private RuntimeException unknown() {
-        List<String> known = Stream.concat(
-                        Stream.concat(
-                                KeyCatalogue.standard().all().stream().map(Key::path),
-                                Arrays.stream(MarginKind.values()).map(MarginKind::id)),
-                        Stream.of(SAFETY))
+    /** Who is licensed how, or one full text. */
+    private void licences() {
+        String text = words.equals(LICENCES) ? Licences.overview() : Licences.text(words);
+        if (json) {
+            session.out().exactly(Answer.without("explain").json(session.ascii(), j -> j.put("licences", text)));
+        } else if (words.equals(LICENCES)) {
+            session.out().lines(Caution.lines(text.replace("`", "")));
+            session.out()
+                    .lines(Paragraph.wrap(
+                            "Full texts: clipramp explain " + String.join(", ", Licences.ids()) + ".", ""));
+        } else {
+            session.out().exactly(text);
+        }
+    }
+
+    /** Everything that can be explained by name. */
+    static List<String> known() {
+        return Stream.of(
+                        KeyCatalogue.standard().all().stream().map(Key::path),
+                        Arrays.stream(MarginKind.values()).map(MarginKind::id),
+                        Stream.of(SAFETY, LICENCES),
+                        Licences.ids().stream())
+                .flatMap(names -> names)
                 .toList();
-        List<String> near = Nearest.several(words, known, SUGGESTIONS);
+    }
+
+    private RuntimeException unknown() {
+        List<String> near = Nearest.several(words, known(), SUGGESTIONS);
         return Problems.unknown("explain", words, "is neither a key nor a margin", near);
     }
 

@@ -46,10 +46,7 @@ final class Overview {
                 "FILE may be - for standard input. Answers go to standard output, complaints to standard error. Every"
                         + " command takes --ascii (ohm, u, deg instead of signs).",
                 ""));
-        out.lines(Paragraph.wrap(
-                "Exit codes: 0 answered; 1 a margin fails; 2 input or options cannot be used; 3 our own fault;"
-                        + " 4 a file cannot be read or written; 130 interrupted.",
-                ""));
+        out.lines(Paragraph.wrap("Exit codes: " + ExitCode.IN_WORDS, ""));
         out.line("");
         out.line(Caution.LINE);
     }

@@ -39,6 +39,8 @@ interface Actions {
 
     void showShortcuts();
 
+    void showLicences();
+
     void showAbout();
 
     void showNumbers(Shown what);

@@ -2,13 +2,16 @@ package clipramp.desk;
 
 import clipramp.desk.Actions.Page;
 import clipramp.desk.model.Cautions;
+import clipramp.files.Licences;
 import java.util.Arrays;
 import java.util.Comparator;
 import java.util.List;
 import java.util.Locale;
 import java.util.stream.Collectors;
 import javafx.scene.Node;
+import javafx.scene.control.Button;
 import javafx.scene.control.Label;
+import javafx.scene.layout.FlowPane;
 import javafx.scene.layout.GridPane;
 import javafx.scene.layout.VBox;
 
@@ -51,14 +54,34 @@ final class Leaflets {
     static String about() {
         return "Designs line-synchronised thyristor firing circuits from first principles: every figure can be followed"
                 + " to its formula and source. It computes what a circuit of these parts does; it cannot see your wiring,"
-                + " and it never says that a build is safe or meets a standard. Licence: Apache 2.0.";
+                + " and it never says that a build is safe or meets a standard. Licence: Apache-2.0; more under Help, Licences.";
     }
 
     /** The safety cautions, as the program carries them. */
     static Node cautions(Dialogs dialogs) {
+        return text(dialogs, Cautions.read());
+    }
+
+    /** Who is licensed how, and a button for every full text. */
+    static Node licences(Dialogs dialogs) {
+        VBox box = text(dialogs, Cautions.paragraphs(Licences.overview().replace("`", "")));
+        FlowPane texts = new FlowPane();
+        texts.getStyleClass().add("flow");
+        for (String id : Licences.ids()) {
+            Button button = new Button(id);
+            button.setId("licence-" + id.replace('.', '-'));
+            button.setAccessibleText("Full text of " + id);
+            button.setOnAction(event -> dialogs.text("licence", id, dialogs.scrolling(new Label(Licences.text(id)))));
+            texts.getChildren().add(button);
+        }
+        box.getChildren().add(texts);
+        return box;
+    }
+
+    private static VBox text(Dialogs dialogs, List<Cautions.Paragraph> paragraphs) {
         VBox box = new VBox();
         box.getStyleClass().add("start-column");
-        for (Cautions.Paragraph paragraph : Cautions.read()) {
+        for (Cautions.Paragraph paragraph : paragraphs) {
             Label words = dialogs.words(paragraph.text());
             if (paragraph.heading()) {
                 words.getStyleClass().add("verdict");

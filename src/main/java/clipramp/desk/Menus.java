@@ -127,6 +127,7 @@ final class Menus {
                 null,
                 item("Before you build or _measure", "F2", actions::showCautions),
                 item("_Keys", "F1", actions::showShortcuts),
+                item("_Licences", "", actions::showLicences),
                 item("_About clipramp", "", actions::showAbout));
     }
 

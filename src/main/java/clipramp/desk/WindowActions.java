@@ -221,6 +221,12 @@ final class WindowActions implements Actions {
     }
 
     @Override
+    public void showLicences() {
+        Dialogs dialogs = dialogs();
+        dialogs.text("licences", "Licences", dialogs.scrolling(Leaflets.licences(dialogs)));
+    }
+
+    @Override
     public void showAbout() {
         Dialogs dialogs = dialogs();
         dialogs.text("about", "clipramp", dialogs.words(Leaflets.about()));

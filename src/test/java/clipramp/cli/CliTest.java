@@ -46,7 +46,7 @@ class CliTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"check", "map", "trace", "record", "new", "parts", "explain"})
+    @ValueSource(strings = {"check", "map", "trace", "record", "new", "parts", "explain", "completion", "manual"})
     void everyCommandHelpsAndNamesItsVersion(String command) {
         CliRun help = CliRun.of(command, "--help");
         assertThat(help.code()).isZero();
@@ -94,7 +94,7 @@ class CliTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"check", "map", "trace", "record", "new", "parts", "explain"})
+    @ValueSource(strings = {"check", "map", "trace", "record", "new", "parts", "explain", "completion", "manual"})
     void everyOptionHasALongNameOnly(String command) {
         assertThat(CliRun.of(command, "--help").out().lines().filter(line -> line.matches(" +-[a-zA-Z]\\b.*")))
                 .isEmpty();

@@ -4,6 +4,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 
 import clipramp.files.Key;
 import clipramp.files.KeyCatalogue;
+import clipramp.files.Licences;
 import clipramp.margins.MarginKind;
 import com.fasterxml.jackson.databind.JsonNode;
 import com.fasterxml.jackson.databind.ObjectMapper;
@@ -55,5 +56,15 @@ class ExplainTest {
         String words = CliRun.of("explain", "safety").out().replaceAll("\\s+", " ");
 
         assertThat(words).contains("Mains voltage kills.").contains("It says nothing about the circuit as a whole.");
+    }
+
+    @Test
+    void licencesAreToldAndEachTextIsThere() {
+        CliRun overview = CliRun.of("explain", "licences");
+        assertThat(overview.code()).isZero();
+        assertThat(overview.out()).contains("Apache-2.0", "jfreechart", "LGPL-2.1", "explain");
+        for (String id : Licences.ids()) {
+            assertThat(CliRun.of("explain", id).out()).as(id).isEqualTo(Licences.text(id));
+        }
     }
 }

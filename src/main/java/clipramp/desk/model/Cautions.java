@@ -19,8 +19,13 @@ public final class Cautions {
 
     /** All paragraphs; the text's own first heading is left to the window's. */
     public static List<Paragraph> read() {
+        return paragraphs(text());
+    }
+
+    /** The paragraphs of a text with headings and points; its first heading is left out. */
+    public static List<Paragraph> paragraphs(String markdown) {
         List<Paragraph> paragraphs = new ArrayList<>();
-        for (String line : text().split("\n")) {
+        for (String line : markdown.split("\n")) {
             if (line.startsWith("## ")) {
                 paragraphs.add(new Paragraph(true, line.substring(3)));
             } else if (line.startsWith("- ")) {
