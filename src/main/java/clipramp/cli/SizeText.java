@@ -6,13 +6,13 @@ import clipramp.files.DesignText;
 import clipramp.files.LoadedDesign;
 import clipramp.files.PartialDesign;
 import clipramp.files.SizedText;
-import clipramp.margins.Margin;
 import clipramp.sizing.Compensation;
 import clipramp.sizing.Compensation.Choice;
 import clipramp.sizing.KnobShape;
 import clipramp.sizing.Reason;
 import clipramp.sizing.SizingAnswer;
 import clipramp.sizing.SizingAnswer.Conflict;
+import clipramp.sizing.SizingWords;
 import clipramp.units.Unit;
 import java.util.ArrayList;
 import java.util.List;
@@ -57,29 +57,9 @@ final class SizeText {
     }
 
     private void outcome() {
-        switch (answer.outcome()) {
-            case WORST_CASE ->
-                out.strongLine(
-                        "Holds in the worst case",
-                        ": no margin fails, neither with nominal parts nor for the fastest and the slowest unit.");
-            case NOMINAL -> {
-                out.strongLine("Holds with nominal parts", ": no margin fails at any line and temperature.");
-                out.lines(Paragraph.wrap(
-                        "For the fastest or the slowest unit that the tolerances allow these fail: " + names()
-                                + ". About " + Shown.amount(answer.yield(), Unit.FRACTION)
-                                + " of all units reach everything that is wanted without selection or trimming.",
-                        "  "));
-            }
-            case NOTHING -> out.strongLine("Nothing holds", "; this is the nearest that was found.");
-        }
-        out.line("  " + Shown.amount(answer.watts(), Unit.WATT) + " in the firing circuit, "
-                + Shown.amount(answer.deadTravel(), Unit.FRACTION) + " of the rotation lies past what is wanted, "
-                + answer.candidates() + (answer.candidates() == 1 ? " design" : " designs") + " judged.");
-    }
-
-    private String names() {
-        return String.join(
-                ", ", answer.cornerFailures().stream().map(Margin::name).toList());
+        out.strongLine(SizingWords.headline(answer), SizingWords.clause(answer));
+        SizingWords.extremes(answer).ifPresent(words -> out.lines(Paragraph.wrap(words, "  ")));
+        out.line("  " + SizingWords.figures(answer));
     }
 
     private void parts(List<Reason> reasons) {
@@ -91,15 +71,8 @@ final class SizeText {
         out.line("");
         out.line("Why");
         for (Reason r : reasons) {
-            out.lines(Paragraph.wrap(
-                    r.part().key() + ": " + r.relation() + "." + neighbour("Up", r.up()) + neighbour("Down", r.down()),
-                    "  ",
-                    "    "));
+            out.lines(Paragraph.wrap(r.part().key() + ": " + SizingWords.reason(r), "  ", "    "));
         }
-    }
-
-    private static String neighbour(String which, String effect) {
-        return effect.isEmpty() ? "" : " " + which + ", " + effect + ".";
     }
 
     private void shape(KnobShape shape) {
@@ -114,13 +87,7 @@ final class SizeText {
                                     .orElse("") + ".",
                     "  "));
         }
-        out.lines(Paragraph.wrap(
-                "Farthest from a straight line " + Shown.amount(shape.largestDeparture(), Unit.FRACTION)
-                        + " of full; nothing moves over " + Shown.amount(shape.deadLow(), Unit.FRACTION)
-                        + " of the rotation at the low end and " + Shown.amount(shape.deadHigh(), Unit.FRACTION)
-                        + " at the high end; the steepest degree of " + Shown.fixed(KnobShape.ROTATION_DEGREES, 0)
-                        + " makes " + Shown.amount(shape.steepestPerDegree(), Unit.FRACTION) + ".",
-                "  "));
+        out.lines(Paragraph.wrap(SizingWords.shape(shape), "  "));
     }
 
     private void compensation(Compensation compensation) {
@@ -153,10 +120,7 @@ final class SizeText {
         out.line("");
         out.line("What cannot be met");
         for (Conflict c : answer.conflicts()) {
-            String with = c.with().isEmpty()
-                    ? " No design that was tried meets it."
-                    : " Where it is met, this fails: " + String.join(", ", c.with()) + ".";
-            out.lines(Paragraph.wrap(c.margin().name() + ":" + with + " " + c.nearest(), "  ", "    "));
+            out.lines(Paragraph.wrap(SizingWords.conflict(c), "  ", "    "));
         }
     }
 }

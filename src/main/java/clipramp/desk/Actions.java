@@ -1,6 +1,7 @@
 package clipramp.desk;
 
 import clipramp.desk.model.Recovery;
+import clipramp.desk.model.Resized;
 import clipramp.desk.model.Settings;
 import clipramp.desk.model.ViewCondition;
 import clipramp.desk.model.Wish;
@@ -12,6 +13,11 @@ interface Actions {
     void startNew();
 
     void propose(Wish wish, boolean entering);
+
+    /** Takes a proposed design over and shows a page of it. */
+    void takeProposal(Resized found, Page page);
+
+    void changeAnswers();
 
     void giveUpNew();
 

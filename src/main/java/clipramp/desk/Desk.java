@@ -70,7 +70,12 @@ public final class Desk {
         /** Shows a window; it is painted before anything is read or computed. */
         DeskModel show(Stage stage, Optional<Path> file, Runnable closed) {
             Workers workers = new Workers(
-                    Platform::runLater, worker("turning"), worker("judging"), worker("writing"), worker("drawing"));
+                    Platform::runLater,
+                    worker("turning"),
+                    worker("judging"),
+                    worker("writing"),
+                    worker("drawing"),
+                    worker("searching"));
             Recovery recovery = new Recovery(places, ProcessHandle.current(), System.identityHashCode(stage));
             WindowActions[] actions = new WindowActions[1];
             Workshop workshop = new Workshop(this::library);

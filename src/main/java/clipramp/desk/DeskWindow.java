@@ -5,6 +5,7 @@ import clipramp.desk.Actions.Shown;
 import clipramp.desk.model.DeskModel;
 import clipramp.desk.model.RecordMaker;
 import clipramp.desk.model.Recovery;
+import clipramp.desk.model.Resized;
 import clipramp.desk.model.Settings;
 import clipramp.figures.CircuitFigure;
 import clipramp.figures.Figure;
@@ -35,6 +36,7 @@ final class DeskWindow {
     private final BorderPane root = new BorderPane();
     private final StartPage start;
     private final Late<NewPage> fresh;
+    private final Late<ProposalPage> proposal;
     private final Late<BenchPage> bench;
     private final Late<SpreadPage> spread;
     private final Map<Page, Late<? extends PageView>> pages = new EnumMap<>(Page.class);
@@ -51,7 +53,11 @@ final class DeskWindow {
         this.model = model;
         this.start = new StartPage(actions);
         this.fresh = new Late<>(() -> new NewPage(
-                wish -> actions.propose(wish, false), wish -> actions.propose(wish, true), actions::giveUpNew));
+                model.proposing(),
+                wish -> actions.propose(wish, false),
+                wish -> actions.propose(wish, true),
+                actions::giveUpNew));
+        this.proposal = new Late<>(() -> new ProposalPage(theme, actions));
         this.bench = new Late<>(this::makeBench);
         this.spread = new Late<>(() -> new SpreadPage(theme, model.draft(), model.spread(), this::layBands));
         pages.put(Page.BENCH, bench);
@@ -148,10 +154,27 @@ final class DeskWindow {
     /** Asks for a new design. */
     void showNew() {
         fresh.get().offer(model.draft().workshop().lineIds());
+        showQuestions();
+    }
+
+    /** The questions as they were answered last. */
+    void showQuestions() {
         bar.getChildren().setAll(menus.node());
         top.getChildren().setAll(bar);
         root.setCenter(fresh.get().node());
         Platform.runLater(fresh.get()::begin);
+    }
+
+    /** Whether a new design is being asked for. */
+    boolean isAsking() {
+        return fresh.isMade() && fresh.get().node().equals(root.getCenter());
+    }
+
+    /** Shows what was found for the answers. */
+    void showProposal(Resized found) {
+        proposal.get().show(found);
+        root.setCenter(proposal.get().node());
+        Platform.runLater(proposal.get()::begin);
     }
 
     void complainNew(String words) {

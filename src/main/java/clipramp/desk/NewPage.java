@@ -1,6 +1,7 @@
 package clipramp.desk;
 
 import clipramp.circuit.Stage;
+import clipramp.desk.model.LongRun;
 import clipramp.desk.model.NewDesign;
 import clipramp.desk.model.Wish;
 import java.util.ArrayList;
@@ -34,11 +35,12 @@ final class NewPage {
     private final List<String> lineIds = new ArrayList<>();
 
     /**
+     * @param run searches for the design
      * @param propose takes the answers to make a design of
      * @param enter takes the answers to start entering a circuit that there is
      * @param back gives up
      */
-    NewPage(Consumer<Wish> propose, Consumer<Wish> enter, Runnable back) {
+    NewPage(LongRun<?, ?> run, Consumer<Wish> propose, Consumer<Wish> enter, Runnable back) {
         Label title = new Label("New design");
         title.getStyleClass().add("head");
         GridPane form = new GridPane();
@@ -78,7 +80,13 @@ final class NewPage {
         stage.valueProperty().addListener(property -> usual());
         line.valueProperty().addListener(property -> usual());
         page.getStyleClass().add("page");
-        page.getChildren().addAll(title, form, complaint, buttons(propose, enter, back));
+        HBox buttons = buttons(propose, enter, back);
+        run.onChange(() -> {
+            form.setDisable(run.isRunning());
+            buttons.setDisable(run.isRunning());
+        });
+        RunBar bar = new RunBar(run, "new", "searching for values that hold");
+        page.getChildren().addAll(title, form, complaint, buttons, bar.node());
         scroll.setFitToWidth(true);
         scroll.setFocusTraversable(false);
         scroll.setHbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);

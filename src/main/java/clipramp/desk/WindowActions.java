@@ -2,9 +2,13 @@ package clipramp.desk;
 
 import clipramp.desk.model.DeskModel;
 import clipramp.desk.model.Draft;
+import clipramp.desk.model.LongRun;
+import clipramp.desk.model.NewDesign;
 import clipramp.desk.model.Places;
 import clipramp.desk.model.RecordMaker;
 import clipramp.desk.model.Recovery;
+import clipramp.desk.model.Resized;
+import clipramp.desk.model.Resizing;
 import clipramp.desk.model.Settings;
 import clipramp.desk.model.Trouble;
 import clipramp.desk.model.ViewCondition;
@@ -28,6 +32,7 @@ final class WindowActions implements Actions {
     private @Nullable Served served;
     private Settings settings = Settings.FIRST;
     private boolean systemIsDark;
+    private boolean entering;
 
     private record Served(Service service, FileActions files, FigureActions figures) {}
 
@@ -53,6 +58,7 @@ final class WindowActions implements Actions {
         this.workers = workers;
         this.closed = closed;
         model.draft().onChange(this::rememberFile);
+        model.proposing().onChange(this::followProposal);
     }
 
     void serve(DeskWindow window, FileAsk fileAsk) {
@@ -93,15 +99,45 @@ final class WindowActions implements Actions {
     }
 
     @Override
-    public void propose(Wish wish, boolean entering) {
-        draft().propose(
-                        wish,
-                        trouble -> trouble.ifPresentOrElse(t -> window().complainNew(t.text()), () -> {
-                            window().showPage(Page.BENCH);
-                            if (entering) {
-                                window().bench().enterParts();
-                            }
-                        }));
+    public void propose(Wish wish, boolean wantsToEnter) {
+        NewDesign.Checked checked = NewDesign.check(wish);
+        window().complainNew(checked.refusal().orElse(""));
+        if (checked.refusal().isEmpty()) {
+            entering = wantsToEnter;
+            model.proposing().start(Resizing.Asked.fresh(NewDesign.request(checked.wish())));
+        }
+    }
+
+    private void followProposal() {
+        LongRun<Resizing.Asked, Resized> run = model.proposing();
+        run.trouble().ifPresent(trouble -> window().complainNew(trouble.text()));
+        if (!run.isRunning() && run.answer().isPresent()) {
+            Resized found = run.answer().get();
+            run.clear();
+            if (!window().isAsking()) {
+                return;
+            }
+            if (entering) {
+                takeProposal(found, Page.BENCH);
+            } else {
+                window().showProposal(found);
+            }
+        }
+    }
+
+    @Override
+    public void takeProposal(Resized found, Page page) {
+        draft().take(found, () -> {
+            window().showPage(page);
+            if (entering) {
+                window().bench().enterParts();
+            }
+        });
+    }
+
+    @Override
+    public void changeAnswers() {
+        window().showQuestions();
     }
 
     @Override

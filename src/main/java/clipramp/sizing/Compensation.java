@@ -74,6 +74,13 @@ public record Compensation(Choice flattest, List<Choice> rules) {
         return Optional.of(new Compensation(flattest(design), rules));
     }
 
+    /** How far the firing angle of a design as it stands moves between the coldest and the hottest, rad. */
+    public static double driftRad(Design design) {
+        return design.trigger() instanceof UnijunctionTrigger u
+                ? driftRad(design, u.baseTwo().value())
+                : Double.NaN;
+    }
+
     private static String words(BaseTwoRule rule) {
         return switch (rule) {
             case TEN_THOUSAND -> "10 000/(eta V)";

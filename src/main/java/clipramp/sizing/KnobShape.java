@@ -6,6 +6,7 @@ import clipramp.circuit.Ramp;
 import clipramp.power.KnobMap;
 import clipramp.power.LoadResult;
 import java.util.Arrays;
+import java.util.List;
 
 /**
  * How straight a knob is: power or light against rotation, nominal parts and line.
@@ -16,9 +17,16 @@ import java.util.Arrays;
  * @param deadLow rotation from the low-power end over which it stays within half a per cent of full of that end, 0..1
  * @param deadHigh the same from the high-power end
  * @param steepestPerDegree greatest change for one degree of rotation, as a share of full
+ * @param values shares of full at even steps of rotation from 0 to 1
  */
 public record KnobShape(
-        Design design, What what, double largestDeparture, double deadLow, double deadHigh, double steepestPerDegree) {
+        Design design,
+        What what,
+        double largestDeparture,
+        double deadLow,
+        double deadHigh,
+        double steepestPerDegree,
+        List<Double> values) {
     /** How far a pot turns, degrees (common practice for single-turn pots). */
     public static final double ROTATION_DEGREES = 270;
 
@@ -37,6 +45,10 @@ public record KnobShape(
         double of(LoadResult load, double fullVolts) {
             return this == POWER ? load.fraction() : Math.pow(load.rmsVolts() / fullVolts, LIGHT_EXPONENT);
         }
+    }
+
+    public KnobShape {
+        values = List.copyOf(values);
     }
 
     /** A design's knob, every position solved. */
@@ -83,7 +95,8 @@ public record KnobShape(
                 departure,
                 rises ? fromStart : fromEnd,
                 rises ? fromEnd : fromStart,
-                steepest * STEPS / ROTATION_DEGREES);
+                steepest * STEPS / ROTATION_DEGREES,
+                Arrays.stream(values).boxed().toList());
     }
 
     private static double dead(double[] values) {

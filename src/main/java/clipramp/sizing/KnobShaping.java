@@ -4,11 +4,13 @@ import clipramp.circuit.Design;
 import clipramp.circuit.Part;
 import clipramp.circuit.Pot;
 import clipramp.circuit.PotLaw;
+import clipramp.spread.Watch;
 import clipramp.units.PreferredSeries;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
+import java.util.concurrent.CancellationException;
 
 /**
  * Pot law, fixed resistor, track, end resistor and a resistor across, chosen so that power or light against rotation is
@@ -33,6 +35,7 @@ public final class KnobShaping {
     /** A part more must bring the knob half a per cent of full nearer to a straight line. */
     private static final double DEPARTURE_STEPS = 200;
 
+    private static final int TOLD_EVERY = 100;
     private static final double WIDER = 6;
     private static final double SAME_LACK = 1e-9;
 
@@ -49,14 +52,34 @@ public final class KnobShaping {
      * @return the shape with its design; the design's own where it has no pot
      */
     public static KnobShape straightest(SizingRequest request, Design design, KnobShape.What what) {
+        return straightest(request, design, what, Watch.NONE);
+    }
+
+    /**
+     * The same, watched.
+     *
+     * @param watch told of knobs drawn, of all that there are; may end it
+     * @throws CancellationException where the watch cancelled
+     */
+    public static KnobShape straightest(SizingRequest request, Design design, KnobShape.What what, Watch watch) {
         if (design.ramp().pot().isEmpty()) {
             return KnobShape.of(design, what);
         }
         Reach reach = Reach.of(design);
         PowerCurve curve =
                 new PowerCurve(design, what, reach.highestTo() / WIDER, Math.max(reach.lowestFrom(), 1) * WIDER);
-        Optional<Shaped> best = candidates(request, design, reach).stream()
-                .map(d -> new Shaped(KnobShape.of(d, what, curve), Timing.lack(d, reach), parts(d)))
+        List<Design> candidates = candidates(request, design, reach);
+        List<Shaped> shapes = new ArrayList<>();
+        for (Design d : candidates) {
+            if (watch.isCancelled()) {
+                throw new CancellationException("the shaping was cancelled");
+            }
+            if (shapes.size() % TOLD_EVERY == 0) {
+                watch.progress(shapes.size(), candidates.size());
+            }
+            shapes.add(new Shaped(KnobShape.of(d, what, curve), Timing.lack(d, reach), parts(d)));
+        }
+        Optional<Shaped> best = shapes.stream()
                 .min(Comparator.comparingLong(
                                 (Shaped s) -> Math.round(TENTH_PER_CENT * Math.max(0, s.lack() - SAME_LACK)))
                         .thenComparingLong(

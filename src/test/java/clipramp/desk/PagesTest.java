@@ -47,6 +47,9 @@ class PagesTest {
         window.await(() -> window.stage.getScene().lookup("#new-propose") != null);
         look.at("new", window);
         window.click("#new-propose");
+        window.find("#proposal-take", Node.class);
+        look.at("proposal", window);
+        window.click("#proposal-take");
         window.settle();
         look.at("bench with margins", window);
         Harness.at(() -> {

@@ -76,6 +76,9 @@ public final class Screens {
         settle(() -> true);
         save(stage, folder.resolve("new-" + name + ".png"));
         fire(stage, "#new-propose");
+        settle(() -> stage.getScene().getRoot().lookup("#proposal-take") != null);
+        save(stage, folder.resolve("proposal-" + name + ".png"));
+        fire(stage, "#proposal-take");
         settle(() -> !model.isBusy() && model.judgement().isPresent());
         save(stage, folder.resolve("bench-" + name + ".png"));
         at(() -> {

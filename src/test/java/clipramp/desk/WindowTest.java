@@ -259,14 +259,64 @@ class WindowTest {
             window.ask.answer = file;
             window.click("#start-new"); // 1: New design; 230 V and 1 kW stand there already
             window.click("#new-propose"); // 2: Propose a design
+            window.click("#proposal-record"); // 3: Take it over, and its record
             window.settle();
             assertThat(window.find("#verdict", Label.class).getText()).isEqualTo("● holds");
-            window.click("#page-record"); // 3: Record
             window.await(() -> !window.find("#record-save", Node.class).isDisabled());
             window.click("#record-save"); // 4: Save the record…; 5: the system's dialog is answered
             window.await(() -> Files.exists(file) && !window.model.isBusy());
             assertThat(window.ask.asked).isEqualTo("write RECORD new-design.pdf");
             assertThat(Files.readString(file, StandardCharsets.ISO_8859_1)).startsWith("%PDF-");
+        }
+    }
+
+    @Test
+    void aProposalIsDrawnWithItsReasonsBeforeItIsTaken() {
+        try (Harness window = Harness.start(home)) {
+            window.click("#start-new");
+            window.click("#new-propose");
+            FigurePane drawing = window.find("#proposal-circuit", FigurePane.class);
+            assertThat(drawing.figure()).isInstanceOf(clipramp.figures.CircuitFigure.class);
+            assertThat(Texts.of(window.find("#sized", Node.class)))
+                    .contains("Holds with nominal parts", "before the collapse at most", "next up, ", "next down, ");
+            assertThat(window.model.draft().isOpen()).isFalse();
+            window.click("#proposal-again");
+            window.click("#new-enter");
+            window.settle();
+            assertThat(window.model.draft().name()).isEqualTo("new-design.yaml");
+        }
+    }
+
+    @Test
+    void whatNothingCanReachIsNamedWithTheNearestThatCanBe() {
+        try (Harness window = Harness.start(home)) {
+            window.click("#start-new");
+            TextField highest = window.find("#new-highest", TextField.class);
+            Harness.at(() -> {
+                highest.setText("99,8 %");
+                return null;
+            });
+            window.click("#new-propose");
+            window.find("#sized-conflicts", Node.class);
+            assertThat(Texts.of(window.find("#sized", Node.class)))
+                    .contains("✕ Nothing holds", "highest wanted setting: ", "The nearest that can be met: ");
+        }
+    }
+
+    @Test
+    void aSearchThatIsCancelledLeavesTheQuestions() {
+        try (Harness window = Harness.start(home)) {
+            window.click("#start-new");
+            window.find("#new-propose", Node.class);
+            Harness.at(() -> {
+                ((ButtonBase) window.stage.getScene().lookup("#new-propose")).fire();
+                ((ButtonBase) window.stage.getScene().lookup("#new-cancel")).fire();
+                return null;
+            });
+            window.await(() -> !window.model.proposing().isRunning());
+            assertThat(window.find("#new-propose", Node.class).isDisabled()).isFalse();
+            assertThat(window.model.proposing().answer()).isEmpty();
+            assertThat(window.model.proposing().trouble()).isEmpty();
         }
     }
 

@@ -24,6 +24,8 @@ public final class DeskModel {
     private final Draft draft;
     private final Bench bench;
     private final SpreadRun spread;
+    private final LongRun<Resizing.Asked, Resized> proposing;
+    private final LongRun<Resizing.Asked, Resized> resizing;
     private final LatestWins<Asked, Judgement> judge;
     private final List<Runnable> judgementListeners = new ArrayList<>();
     private final List<Runnable> conditionListeners = new ArrayList<>();
@@ -45,6 +47,10 @@ public final class DeskModel {
                 workers.home(),
                 failure -> troubles.accept(Trouble.of("The circuit could not be solved so", failure)));
         this.spread = new SpreadRun(workers, troubles);
+        Resizing search = new Resizing(workshop);
+        this.proposing =
+                new LongRun<>("No design could be made of this", search::of, workers.searching(), workers.home());
+        this.resizing = new LongRun<>("No values could be chosen", search::of, workers.searching(), workers.home());
         this.judge = new LatestWins<>(
                 DeskModel::judged,
                 workers.judging(),
@@ -75,6 +81,16 @@ public final class DeskModel {
         return spread;
     }
 
+    /** The search for a new design. */
+    public LongRun<Resizing.Asked, Resized> proposing() {
+        return proposing;
+    }
+
+    /** The search for values of the design on the desk. */
+    public LongRun<Resizing.Asked, Resized> resizing() {
+        return resizing;
+    }
+
     public Bench bench() {
         return bench;
     }
@@ -94,7 +110,7 @@ public final class DeskModel {
 
     /** Whether something is being read, solved or judged. */
     public boolean isBusy() {
-        return draft.isBusy() || judge.isBusy() || bench.isBusy();
+        return draft.isBusy() || judge.isBusy() || bench.isBusy() || proposing.isRunning();
     }
 
     public ViewCondition condition() {

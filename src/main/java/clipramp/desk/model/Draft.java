@@ -20,8 +20,6 @@ import java.util.function.Function;
 public final class Draft {
     private record Edit(String name, Function<Sheet, DesignText> change, Consumer<Optional<Trouble>> done) {}
 
-    private static final String PROPOSED = "new-design.yaml";
-
     private final Workers workers;
     private final Workshop workshop;
     private final Recovery recovery;
@@ -109,26 +107,18 @@ public final class Draft {
                 sheet -> put(sheet, Optional.empty(), title, ""));
     }
 
-    /** Makes a design from five answers and puts it on the desk; {@code done} is told what was wrong, or nothing. */
-    public void propose(Wish wish, Consumer<Optional<Trouble>> done) {
-        NewDesign.Checked checked = NewDesign.check(wish);
-        if (checked.refusal().isPresent()) {
-            done.accept(Optional.of(
-                    new Trouble("One answer cannot be read", checked.refusal().get())));
-            return;
-        }
+    /** Puts a design on the desk that a search has found; {@code then} runs once it lies there. */
+    public void take(Resized found, Runnable then) {
         start(
+                "The design cannot be taken over",
                 () -> {
-                    DesignText text = DesignText.of(new Source(PROPOSED, Proposal.of(checked.wish(), workshop)));
-                    Sheet sheet = workshop.read(text, Optional.empty());
-                    recovery.keep(Optional.empty(), text.text());
-                    return sheet;
+                    recovery.keep(Optional.empty(), found.sheet().text().text());
+                    return found.sheet();
                 },
                 sheet -> {
-                    put(sheet, Optional.empty(), PROPOSED, "");
-                    done.accept(Optional.empty());
-                },
-                failure -> done.accept(Optional.of(Trouble.of("No design could be made of this", failure))));
+                    put(sheet, Optional.empty(), sheet.text().name(), "");
+                    then.run();
+                });
     }
 
     /** Puts work on the desk that a window left behind when its process ended. */
@@ -152,10 +142,6 @@ public final class Draft {
     }
 
     private void start(String what, SheetReading reading, Consumer<Sheet> then) {
-        start(reading, then, failure -> troubles.accept(Trouble.of(what, failure)));
-    }
-
-    private void start(SheetReading reading, Consumer<Sheet> then, Consumer<Exception> failed) {
         writing = true;
         workers.writing().execute(() -> {
             try {
@@ -167,7 +153,7 @@ public final class Draft {
             } catch (IOException | RuntimeException e) {
                 workers.home().execute(() -> {
                     writing = false;
-                    failed.accept(e);
+                    troubles.accept(Trouble.of(what, e));
                 });
             }
         });

@@ -50,6 +50,46 @@ public final class NewDesign {
     /** The first answer that cannot be read, in words; the answers as they are to be written otherwise. */
     public record Checked(Wish wish, Optional<String> refusal) {}
 
+    /**
+     * The answers as a design file that leaves the parts open. What stands there of them keeps the order of the signal and
+     * is free to be chosen anew.
+     *
+     * @param wish answers that were read
+     */
+    public static String request(Wish wish) {
+        return """
+                # Sized from five answers; every value is yours to change.
+                clipramp: 1
+                title: <load>, <stage>
+                line: <line>
+                stage: <stage>
+                load: {kind: resistor, rated: <load>}
+
+                clip:
+                  diode-drop: 0.7 V
+
+                ramp:
+                  capacitor: 220 nF ±5 % 63 V
+                  fixed: 3.9 kΩ ±5 % 0.25 W
+                  pot: {track: 25 kΩ ±10 % 0.5 W, law: linear, sense: falling}
+
+                trigger:
+                  base-one: 33 Ω ±5 % 0.25 W
+
+                gate:
+                  polarity: positive
+
+                surroundings: {coldest: <coldest>, hottest: <hottest>}
+                wanted: {lowest: <lowest> at 0 %, highest: <highest> at 100 %}
+                """.replace("<load>", wish.load())
+                .replace("<line>", wish.lineId())
+                .replace("<stage>", wish.stage().word())
+                .replace("<coldest>", wish.coldest())
+                .replace("<hottest>", wish.hottest())
+                .replace("<lowest>", wish.lowest())
+                .replace("<highest>", wish.highest());
+    }
+
     /** Reads all answers. */
     public static Checked check(Wish wish) {
         try {

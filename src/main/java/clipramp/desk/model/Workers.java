@@ -10,5 +10,7 @@ import java.util.concurrent.Executor;
  * @param judging solves curves and margins
  * @param writing reads and writes files, in the order asked
  * @param drawing draws many units, for as long as that takes
+ * @param searching searches for values and fits readings, for seconds
  */
-public record Workers(Executor home, Executor turning, Executor judging, Executor writing, Executor drawing) {}
+public record Workers(
+        Executor home, Executor turning, Executor judging, Executor writing, Executor drawing, Executor searching) {}

@@ -17,7 +17,7 @@ final class Bystander {
 
     Bystander() {
         Executor working = away::add;
-        workers = new Workers(home::add, working, working, working, working);
+        workers = new Workers(home::add, working, working, working, working, working);
     }
 
     static Workshop workshop() {

@@ -3,24 +3,22 @@ package clipramp.desk.model;
 import static org.assertj.core.api.Assertions.assertThat;
 
 import clipramp.circuit.Stage;
-import clipramp.files.DesignText;
-import clipramp.files.Source;
 import clipramp.margins.Check;
 import clipramp.margins.Judge;
 import clipramp.margins.Verdict;
-import java.util.Optional;
+import clipramp.spread.Watch;
 import java.util.OptionalDouble;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.EnumSource;
 
-class ProposalTest {
+class NewDesignTest {
     private final Workshop workshop = Bystander.workshop();
 
     private Check judged(Wish wish) {
-        String text = Proposal.of(NewDesign.check(wish).wish(), workshop);
-        Sheet sheet = workshop.read(DesignText.of(new Source("new.yaml", text)), Optional.empty());
-        return Judge.check(sheet.design(), OptionalDouble.empty(), OptionalDouble.empty());
+        String text = NewDesign.request(NewDesign.check(wish).wish());
+        Resized found = new Resizing(workshop).of(Resizing.Asked.fresh(text), words -> Watch.NONE);
+        return Judge.check(found.sheet().design(), OptionalDouble.empty(), OptionalDouble.empty());
     }
 
     private static Wish wish(String line, String load, Stage stage) {
@@ -29,7 +27,7 @@ class ProposalTest {
                 line, load, stage, Wish.usualLowest(stage, low), Wish.usualHighest(stage, low), "0 degC", "50 degC");
     }
 
-    /** A proposal is a working design: the judge, which knows nothing of it, finds no margin that fails. */
+    /** What is written is a working design: the judge, on the text read anew, finds no margin that fails. */
     @ParameterizedTest
     @EnumSource(Stage.class)
     void aHeaterOfFourHundredWattsWorksOnEveryStage(Stage stage) {

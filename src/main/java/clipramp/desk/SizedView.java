@@ -1,0 +1,186 @@
+package clipramp.desk;
+
+import clipramp.desk.model.MarginRow;
+import clipramp.desk.model.Resized;
+import clipramp.margins.Check;
+import clipramp.margins.Margin;
+import clipramp.sizing.Reason;
+import clipramp.sizing.SizingAnswer.Conflict;
+import clipramp.sizing.SizingWords;
+import java.util.ArrayList;
+import java.util.List;
+import javafx.scene.control.Label;
+import javafx.scene.layout.ColumnConstraints;
+import javafx.scene.layout.GridPane;
+import javafx.scene.layout.Priority;
+import javafx.scene.layout.Region;
+import javafx.scene.layout.VBox;
+
+/** What a search found, in words: what it keeps, what cannot be met, and every value with its reason. */
+final class SizedView {
+    private final VBox box = new VBox();
+
+    SizedView() {
+        box.getStyleClass().add("sized");
+        box.setId("sized");
+    }
+
+    VBox node() {
+        return box;
+    }
+
+    void clear() {
+        box.getChildren().clear();
+    }
+
+    void show(Resized found) {
+        clear();
+        outcome(found);
+        found.before().ifPresent(before -> compare(before, found.sizing().check()));
+        conflicts(found);
+        found.notes().forEach(note -> add(note, "quiet"));
+        values(found);
+    }
+
+    private void outcome(Resized found) {
+        String shape = MarginRow.shape(found.sizing().check().verdict());
+        add(shape + " " + SizingWords.headline(found.sizing()) + SizingWords.clause(found.sizing()), "verdict")
+                .setId("sized-outcome");
+        SizingWords.extremes(found.sizing()).ifPresent(words -> add(words, ""));
+        add(SizingWords.figures(found.sizing()), "");
+    }
+
+    private void compare(Check before, Check after) {
+        List<List<String>> rows = new ArrayList<>();
+        rows.add(List.of("", "as it stands", "found"));
+        rows.add(List.of("verdict", verdict(before), verdict(after)));
+        rows.add(List.of("margins", summary(before), summary(after)));
+        rows.add(List.of("decided by", deciding(before), deciding(after)));
+        box.getChildren().add(table("sized-verdicts", rows));
+    }
+
+    private static String verdict(Check check) {
+        return MarginRow.shape(check.verdict()) + " " + MarginRow.word(check.verdict());
+    }
+
+    private static String summary(Check check) {
+        return MarginRow.summary(MarginRow.all(check.margins()));
+    }
+
+    /** The worst margin, which the verdict hangs on. */
+    private static String deciding(Check check) {
+        if (check.margins().isEmpty()) {
+            return "nothing is judged";
+        }
+        Margin worst = check.margins().get(0);
+        MarginRow row = MarginRow.of(worst);
+        return row.name() + ", ratio " + row.ratio() + (row.condition().isEmpty() ? "" : " (" + row.condition() + ")");
+    }
+
+    private void conflicts(Resized found) {
+        if (found.sizing().conflicts().isEmpty()) {
+            return;
+        }
+        head("What cannot be met").setId("sized-conflicts");
+        for (Conflict conflict : found.sizing().conflicts()) {
+            add(SizingWords.conflict(conflict), "");
+        }
+    }
+
+    private void values(Resized found) {
+        List<Resized.Change> changes = found.changes();
+        if (changes.isEmpty()) {
+            return;
+        }
+        boolean fresh = found.before().isEmpty();
+        head(fresh ? "Every part, and why" : "Values, and why");
+        changes.forEach(change -> box.getChildren().add(value(change, found, fresh)));
+    }
+
+    private static VBox value(Resized.Change change, Resized found, boolean fresh) {
+        String name = (change.slot().designator() + "  " + change.slot().label()).strip();
+        Label title = new Label(name);
+        title.getStyleClass().add("quiet");
+        String after = change.after().isEmpty() ? "none" : change.after();
+        String words = fresh
+                ? after
+                : change.differs()
+                        ? (change.before().isEmpty() ? "none" : change.before()) + "  →  " + after
+                        : after + ", as it stands";
+        Label figures = wrapped(words);
+        figures.setId("sized-value-" + change.slot().key().replace('.', '-'));
+        if (fresh || change.differs()) {
+            figures.getStyleClass().add("verdict");
+        }
+        VBox part = new VBox(title, figures);
+        part.getStyleClass().add("sized-part");
+        found.reason(change.slot().key()).ifPresent(reason -> why(part, reason));
+        return part;
+    }
+
+    private static void why(VBox part, Reason reason) {
+        part.getChildren().add(wrapped(reason.relation() + "."));
+        if (!reason.up().isEmpty()) {
+            part.getChildren().add(quiet("next up, " + reason.up()));
+        }
+        if (!reason.down().isEmpty()) {
+            part.getChildren().add(quiet("next down, " + reason.down()));
+        }
+    }
+
+    private static Label quiet(String words) {
+        Label label = wrapped(words);
+        label.getStyleClass().add("quiet");
+        return label;
+    }
+
+    /** A table whose first row is its heads and whose first column names the rows. */
+    static GridPane table(String id, List<List<String>> rows) {
+        GridPane grid = new GridPane();
+        grid.setId(id);
+        grid.getStyleClass().add("spread-table");
+        int columns = rows.get(0).size();
+        for (int c = 0; c < columns; c++) {
+            ColumnConstraints column = new ColumnConstraints();
+            column.setHgrow(c == 0 ? Priority.NEVER : Priority.SOMETIMES);
+            column.setMinWidth(c == 0 ? Region.USE_PREF_SIZE : 0);
+            grid.getColumnConstraints().add(column);
+        }
+        for (int r = 0; r < rows.size(); r++) {
+            for (int c = 0; c < columns; c++) {
+                Label cell = wrapped(rows.get(r).get(c));
+                if (r == 0 || c == 0) {
+                    cell.getStyleClass().add("quiet");
+                }
+                if (c == 0) {
+                    cell.setMinWidth(Region.USE_PREF_SIZE);
+                }
+                grid.add(cell, c, r);
+            }
+        }
+        return grid;
+    }
+
+    Label head(String words) {
+        Label label = new Label(words);
+        label.getStyleClass().add("sized-head");
+        box.getChildren().add(label);
+        return label;
+    }
+
+    private Label add(String words, String style) {
+        Label label = wrapped(words);
+        if (!style.isEmpty()) {
+            label.getStyleClass().add(style);
+        }
+        box.getChildren().add(label);
+        return label;
+    }
+
+    static Label wrapped(String words) {
+        Label label = new Label(words);
+        label.setWrapText(true);
+        label.setMinHeight(Region.USE_PREF_SIZE);
+        return label;
+    }
+}
