@@ -116,7 +116,7 @@ final class TextEdit {
             String like = scalar.isNone() ? "" : "like: " + scalar.text() + ", ";
             return spliced(last.place().start(), end(last), "{" + like + missing.get(0) + ": " + below + "}");
         }
-        throw refused(last.place(), path, "a list stands here, and a list has no keys.");
+        throw refused(last.place(), path, "read a list above it; expected keys, {" + missing.get(0) + ": ...}.");
     }
 
     private InvalidInputException refused(Place place, String path, String sentence) {
