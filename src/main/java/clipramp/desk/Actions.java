@@ -92,6 +92,7 @@ interface Actions {
     enum Page {
         BENCH("Bench", 1),
         SPREAD("Spread", 3),
+        SIZE("Size", 4),
         RECORD("Record", 2);
 
         private final String words;

@@ -62,6 +62,7 @@ final class DeskWindow {
         this.spread = new Late<>(() -> new SpreadPage(theme, model.draft(), model.spread(), this::layBands));
         pages.put(Page.BENCH, bench);
         pages.put(Page.SPREAD, spread);
+        pages.put(Page.SIZE, new Late<>(() -> new SizePage(theme, model.draft(), model.resizing())));
         pages.put(
                 Page.RECORD, new Late<>(() -> new RecordPage(theme, model.draft(), maker.get(), actions::saveRecord)));
         this.header = new Late<>(() -> new HeaderView(model, actions, () -> bench().unfold(true)));

@@ -4,6 +4,7 @@ import clipramp.desk.model.MarginRow;
 import clipramp.desk.model.Resized;
 import clipramp.margins.Check;
 import clipramp.margins.Margin;
+import clipramp.margins.Verdict;
 import clipramp.sizing.Reason;
 import clipramp.sizing.SizingAnswer.Conflict;
 import clipramp.sizing.SizingWords;
@@ -57,6 +58,18 @@ final class SizedView {
         rows.add(List.of("margins", summary(before), summary(after)));
         rows.add(List.of("decided by", deciding(before), deciding(after)));
         box.getChildren().add(table("sized-verdicts", rows));
+        if (rank(before.verdict()) < rank(after.verdict())) {
+            add("What stands there has the better verdict. Free more parts, or keep it.", "");
+        }
+    }
+
+    private static int rank(Verdict verdict) {
+        return switch (verdict) {
+            case HOLDS -> 0;
+            case NOT_JUDGED -> 1;
+            case TIGHT -> 2;
+            case FAILS -> 3;
+        };
     }
 
     private static String verdict(Check check) {
@@ -142,7 +155,7 @@ final class SizedView {
         int columns = rows.get(0).size();
         for (int c = 0; c < columns; c++) {
             ColumnConstraints column = new ColumnConstraints();
-            column.setHgrow(c == 0 ? Priority.NEVER : Priority.SOMETIMES);
+            column.setHgrow(Priority.NEVER);
             column.setMinWidth(c == 0 ? Region.USE_PREF_SIZE : 0);
             grid.getColumnConstraints().add(column);
         }

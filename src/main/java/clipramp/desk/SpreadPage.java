@@ -126,7 +126,8 @@ final class SpreadPage implements PageView {
         box.setLeft(sideScroll);
     }
 
-    private static VBox named(String name, Region control) {
+    /** A control under its name. */
+    static VBox named(String name, Region control) {
         Label label = new Label(name);
         label.getStyleClass().add("quiet");
         label.setLabelFor(control);

@@ -19,6 +19,7 @@ import javafx.application.Platform;
 import javafx.embed.swing.SwingFXUtils;
 import javafx.event.ActionEvent;
 import javafx.scene.Node;
+import javafx.scene.control.ComboBox;
 import javafx.scene.control.Label;
 import javafx.scene.control.TextField;
 import javafx.scene.image.WritableImage;
@@ -113,6 +114,14 @@ public final class Screens {
         fire(stage, "#page-bench");
         settle(() -> !model.isBusy());
         save(stage, folder.resolve("bands-" + name + ".png"));
+        fire(stage, "#page-size");
+        settle(() -> stage.getScene().getRoot().lookup("#size-start") != null);
+        for (String goal : List.of("values", "knob, power", "heat")) {
+            choose(stage, "#size-goal", goal);
+            fire(stage, "#size-start");
+            settle(() -> !model.resizing().isRunning());
+            save(stage, folder.resolve("size-" + goal.replaceAll("\\W+", "-") + "-" + name + ".png"));
+        }
         fire(stage, "#page-record");
         settle(() -> stage.getScene().getRoot().lookup("#record-progress") instanceof Label label
                 && label.getText().contains("pages"));
@@ -128,6 +137,19 @@ public final class Screens {
             Node node = stage.getScene().getRoot().lookup(selector);
             if (node != null) {
                 node.fireEvent(new ActionEvent());
+            }
+            return null;
+        });
+    }
+
+    private static void choose(Stage stage, String selector, String word) throws Exception {
+        at(() -> {
+            if (stage.getScene().getRoot().lookup(selector) instanceof ComboBox<?> combo) {
+                for (int i = 0; i < combo.getItems().size(); i++) {
+                    if (String.valueOf(combo.getItems().get(i)).contains(word)) {
+                        combo.getSelectionModel().select(i);
+                    }
+                }
             }
             return null;
         });
