@@ -112,9 +112,8 @@ final class Substitutes {
 
     /** A device of the other kind with its own resistors; where that fails, with the ramp chosen anew too. */
     private Substitute otherKind(String id, boolean toUnijunction) {
-        List<String> without = toUnijunction
-                ? List.of("trigger.upper=none", "trigger.lower=none")
-                : List.of("trigger.base-two=none");
+        List<String> without =
+                toUnijunction ? List.of("trigger.upper=none", "trigger.lower=none") : List.of("trigger.base-two=none");
         List<String> rough = new ArrayList<>(without);
         rough.add(0, TRIGGER + "=" + id);
         rough.addAll(
@@ -144,8 +143,10 @@ final class Substitutes {
 
     private static List<String> overrides(List<String> without, TriggerExchange exchange) {
         List<String> overrides = new ArrayList<>(without);
-        exchange.changed().stream().sorted().forEach(part -> SizedText.value(part, exchange.design())
-                .ifPresent(value -> overrides.add(part.key() + "=" + value)));
+        exchange.changed().stream()
+                .sorted()
+                .forEach(part -> SizedText.value(part, exchange.design())
+                        .ifPresent(value -> overrides.add(part.key() + "=" + value)));
         return overrides;
     }
 
@@ -157,7 +158,8 @@ final class Substitutes {
                     long failing = check.margins().stream()
                             .filter(margin -> margin.verdict() == check.verdict())
                             .count();
-                    return failing - Math.min(0.99, check.margins().get(0).ratio().orElse(0) / 100);
+                    return failing
+                            - Math.min(0.99, check.margins().get(0).ratio().orElse(0) / 100);
                 })
                 .orElse(Double.MAX_VALUE);
     }

@@ -78,6 +78,12 @@ public final class Network {
     /** I_L at the condition's temperature with this gate network, A; 0 where unknown. */
     public double latchingAmps;
 
+    /**
+     * A shorted rectifier diode feeds the supply in the other half cycle too, backwards: the zener conducts forwards and
+     * holds it at minus this, V; 0 for a rectifier that blocks. Only for a supply that works over whole periods.
+     */
+    public double reverseVolts;
+
     /** kappa: peak point per volt of supply. */
     double peakShare;
     /** What base bar or divider draws from the supply with the device off, S. */
@@ -158,6 +164,18 @@ public final class Network {
     /** kappa: peak-point voltage per volt of supply. */
     public double peakShare() {
         return peakShare;
+    }
+
+    /**
+     * Ramp voltage after some time of a supply that stands backwards: what lies over the peak point of that supply runs out
+     * through the emitter at once, the rest follows through R_E.
+     *
+     * @param rampVolts at its beginning, V
+     * @param seconds how long it has stood so, s
+     */
+    public double rampUnderReverse(double rampVolts, double seconds) {
+        double from = Math.min(rampVolts, emitterDropVolts - peakShare * reverseVolts);
+        return (from + reverseVolts) * Math.exp(-seconds / (rampOhms * capacitorFarads)) - reverseVolts;
     }
 
     /** What base bar or divider draws from the supply with the device off, S. */

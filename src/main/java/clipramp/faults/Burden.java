@@ -12,6 +12,11 @@ import clipramp.units.Unit;
  * @param rating what the part is rated at; NaN where it does not matter
  */
 public record Burden(String part, String what, Unit unit, double borne, double rating) {
+    /** A current that only the line and its fuse limit. */
+    static Burden unlimited(String part, String what) {
+        return new Burden(part, what, Unit.AMPERE, Double.POSITIVE_INFINITY, Double.NaN);
+    }
+
     /** How many times its rating. */
     public double ratio() {
         return isUnlimited() ? Double.POSITIVE_INFINITY : borne / rating;

@@ -10,6 +10,7 @@ import clipramp.circuit.ThyristorDevice.NonTrigger;
 import clipramp.circuit.ThyristorDevice.OnState;
 import clipramp.engine.Network;
 import clipramp.engine.NetworkOfDesign;
+import clipramp.firing.Dissipation;
 import clipramp.firing.Firing;
 import clipramp.firing.Solution;
 import clipramp.firing.Study;
@@ -17,7 +18,6 @@ import clipramp.firing.Waveforms;
 import clipramp.power.LoadPeriod;
 import clipramp.power.LoadPower;
 import clipramp.power.LoadResult;
-import clipramp.units.Unit;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.EnumMap;
@@ -45,7 +45,7 @@ final class FaultSolver {
     }
 
     /** One knob position with a fault. */
-    private record Setting(LoadAt load, List<Burden> burdens, Map<TestPoint, Reading> readings, List<String> remarks) {}
+    record Setting(LoadAt load, List<Burden> burdens, Map<TestPoint, Reading> readings, List<String> remarks) {}
 
     FaultEffect healthy() {
         List<Setting> settings = settings(Fault.NONE);
@@ -116,13 +116,32 @@ final class FaultSolver {
         Network network = NetworkOfDesign.of(wired, condition, rampOhms);
         fault.change().accept(network);
         if (fault.path() == LoadPath.LINE_SHORTED) {
-            return fuseGone(fault, position, network.rampOhms);
+            return FuseGone.byDiode(fault, position, network.rampOhms);
         }
-        double share = fault.leakShare(network.rampOhms);
         Study study = Firing.study(wired, condition, network);
         Waveforms waves = Firing.waveforms(wired, condition, network, SAMPLES);
         StandingGate standing = new StandingGate(wired, network);
-        Power power = power(fault, wired, study.solution(), standing.firesAtRad(waves));
+        OptionalDouble standingRad = standing.firesAtRad(waves);
+        boolean fires = standingRad.isPresent()
+                || study.solution().halves().stream()
+                        .anyMatch(half -> half.firingRad().isPresent());
+        if (fault.path() == LoadPath.LOAD_SHORTED && fires) {
+            return FuseGone.byThyristor(design, position, network.rampOhms);
+        }
+        Power power = power(fault, wired, study.solution(), standingRad);
+        return solved(fault, position, wired, network, study, waves, power, standing(fault, wired, standing, waves));
+    }
+
+    private Setting solved(
+            Fault fault,
+            OptionalDouble position,
+            Design wired,
+            Network network,
+            Study study,
+            Waveforms waves,
+            Power power,
+            List<String> remarks) {
+        double share = fault.leakShare(network.rampOhms);
         LoadAt load = new LoadAt(
                 position,
                 network.rampOhms,
@@ -131,20 +150,30 @@ final class FaultSolver {
                 power.load().fraction(),
                 power.load().rmsAmps(),
                 power.load().dcAmps());
-        List<Burden> burdens = Ratings.of(
+        Dissipation bears = ReverseHalf.isIn(network)
+                ? ReverseHalf.borne(wired, condition, network, study.dissipation())
+                : study.dissipation();
+        List<Burden> burdens = new ArrayList<>(Ratings.of(
                 wired,
                 condition,
-                study.dissipation(),
+                bears,
                 share,
                 load,
-                power.load().thyristorRmsAmps(),
-                power.load().thyristorMeanAmps());
-        List<String> remarks = standing(fault, wired, standing, waves);
-        return new Setting(load, burdens, readings(wired, waves, power, share), remarks);
+                power.thyristor().thyristorRmsAmps(),
+                power.thyristor().thyristorMeanAmps()));
+        if (fault.path() == LoadPath.WINDING_SHORTED) {
+            burdens.add(Burden.unlimited("clip.winding", "its short-circuit current in every second half cycle"));
+        }
+        return new Setting(load, burdens, readings(network, waves, power, share), remarks);
     }
 
     /** What the load gets and what stands across the thyristor. */
-    private record Power(LoadResult load, OptionalDouble firingRad, Reading acrossThyristor) {}
+    private record Power(LoadResult load, LoadResult thyristor, OptionalDouble firingRad, Reading acrossThyristor) {
+        /** Where the thyristor carries what the load does. */
+        Power(LoadResult load, OptionalDouble firingRad, Reading acrossThyristor) {
+            this(load, load, firingRad, acrossThyristor);
+        }
+    }
 
     private Power power(Fault fault, Design wired, Solution solution, OptionalDouble standingRad) {
         switch (fault.path()) {
@@ -155,9 +184,12 @@ final class FaultSolver {
             case LOAD_OPEN, LINE_SHORTED -> {
                 return new Power(nothing(wired), OptionalDouble.empty(), Reading.ZERO);
             }
+            case OTHER_HALF_FREE -> {
+                return besides(wired, solution);
+            }
             default -> {}
         }
-        boolean oneHalf = fault.path() == LoadPath.ONE_HALF;
+        boolean oneHalf = fault.path() == LoadPath.ONE_HALF || fault.path() == LoadPath.WINDING_SHORTED;
         if (standingRad.isPresent() && !oneHalf) {
             double rad = standingRad.getAsDouble();
             LoadPeriod period = LoadPower.periodAtFiringAngle(wired, condition, rad);
@@ -174,6 +206,16 @@ final class FaultSolver {
                 Meters.acrossThyristor(wired, condition, period, oneHalf));
     }
 
+    /** One polarity of the load's current flows past the thyristor. */
+    private Power besides(Design wired, Solution solution) {
+        LoadPeriod period = LoadPower.periodWithNegativeHalvesFree(wired, condition, solution);
+        return new Power(
+                LoadPower.withNegativeHalvesFree(wired, condition, solution),
+                LoadPower.of(wired, condition, solution.firingOnlyPositive()),
+                solution.shown().firingRad(),
+                Meters.acrossThyristor(wired, condition, period, false));
+    }
+
     private LoadResult nothing(Design wired) {
         return LoadPower.atFiringAngle(wired, condition, Math.PI);
     }
@@ -186,35 +228,17 @@ final class FaultSolver {
         return design.withThyristor(wire).withStage(design.stage() == Stage.HALF_WAVE ? Stage.TRIAC : design.stage());
     }
 
-    private static Map<TestPoint, Reading> readings(Design wired, Waveforms waves, Power power, double leakShare) {
+    private static Map<TestPoint, Reading> readings(Network network, Waveforms waves, Power power, double leakShare) {
+        boolean reverse = ReverseHalf.isIn(network);
+        double[] supply = reverse ? ReverseHalf.supplyVolts(waves, network) : waves.supplyVolts();
+        double[] ramp = reverse ? ReverseHalf.rampVolts(waves, network) : waves.rampVolts();
         Map<TestPoint, Reading> readings = new EnumMap<>(TestPoint.class);
-        readings.put(TestPoint.TP1, Meters.of(waves.seconds(), waves.supplyVolts()));
-        readings.put(
-                TestPoint.TP2, Meters.of(waves.seconds(), waves.rampVolts()).times(leakShare));
+        readings.put(TestPoint.TP1, Meters.of(waves.seconds(), supply));
+        readings.put(TestPoint.TP2, Meters.of(waves.seconds(), ramp).times(leakShare));
         readings.put(TestPoint.TP3, Meters.of(waves.seconds(), waves.baseOneVolts()));
         readings.put(TestPoint.TP4, Meters.of(waves.seconds(), waves.gateVolts()));
         readings.put(TestPoint.TP5, power.acrossThyristor());
         return readings;
-    }
-
-    private Setting fuseGone(Fault fault, OptionalDouble position, double rampOhms) {
-        Map<TestPoint, Reading> readings = new EnumMap<>(TestPoint.class);
-        for (TestPoint point : TestPoint.values()) {
-            if (point != TestPoint.TP0) {
-                readings.put(point, Reading.ZERO);
-            }
-        }
-        return new Setting(
-                new LoadAt(position, rampOhms, OptionalDouble.empty(), 0, 0, 0, 0),
-                List.of(new Burden(
-                        fault.part(),
-                        "the next diode's surge: the line shorted every second half cycle",
-                        Unit.AMPERE,
-                        Double.POSITIVE_INFINITY,
-                        Double.NaN)),
-                readings,
-                List.of("The line is shorted in every second half cycle until its fuse opens; the figures are those"
-                        + " afterwards."));
     }
 
     /** A standing gate voltage over what the sheet still promises not to fire. */

@@ -4,6 +4,7 @@ import clipramp.circuit.ClipSupply;
 import clipramp.circuit.ClipSupply.Rectifier;
 import clipramp.circuit.ClipSupply.Tap;
 import clipramp.circuit.Design;
+import clipramp.circuit.Load;
 import clipramp.circuit.Stage;
 import clipramp.circuit.ThyristorDevice.Kind;
 import clipramp.circuit.Winding;
@@ -89,10 +90,24 @@ final class PowerFaults {
         }
         Fault open = fault("stage-diode-open", "stage-diodes", How.OPEN, "one diode of @ open", n -> {})
                 .along(LoadPath.ONE_HALF);
-        faults.add(design.isSuppliedByStageBridge() ? open.wired(PowerFaults::suppliedInOneHalf) : open);
-        if (design.stage() == Stage.BRIDGE_DC) {
-            faults.add(lineShort("stage-diode-shorted", "stage-diodes"));
-        }
+        faults.add(
+                design.isSuppliedByStageBridge()
+                        ? open.wired(design -> suppliedInOneHalf(design, Rectifier.BRIDGE.diodesInPath()))
+                        : open);
+        faults.add(
+                design.stage() == Stage.BRIDGE_DC
+                        ? lineShort("stage-diode-shorted", "stage-diodes")
+                        : pastTheThyristor("stage-diode-shorted", "stage-diodes", "one diode of @ shorted")
+                                .saying("The load is in series, so nothing is shorted: through the bad diode and its"
+                                        + " neighbour every second half cycle reaches the load whole, past the"
+                                        + " thyristor (computed with the thyristor's drop)."));
+    }
+
+    /** A short beside the thyristor that carries one polarity of the load's current. */
+    private Fault pastTheThyristor(String id, String part, String what) {
+        Fault shorted = fault(id, part, How.SHORTED, what, n -> {}).along(LoadPath.OTHER_HALF_FREE);
+        boolean fed = design.isSuppliedByStageBridge() || fedAcrossThyristor();
+        return fed ? shorted.wired(design -> suppliedInOneHalf(design, Rectifier.BRIDGE.diodesInPath())) : shorted;
     }
 
     /** A shorted diode of a bridge across the line lets its neighbour short the line in every second half cycle. */
@@ -110,12 +125,35 @@ final class PowerFaults {
         if (clip.rectifier() == Rectifier.DIODE) {
             faults.add(fault(
                     "rectifier-open", key, How.OPEN, "rectifier @ open", n -> n.dropperOhms = FiringFaults.OPEN_OHMS));
+            faults.add(fault(
+                            "rectifier-shorted",
+                            key,
+                            How.SHORTED,
+                            "rectifier @ shorted",
+                            n -> n.reverseVolts = ReverseHalf.ZENER_VOLTS)
+                    .saying(
+                            "The dropper carries the other half cycle too, and the zener conducts it forwards: the supply"
+                                    + " then stands at " + Said.volts(-ReverseHalf.ZENER_VOLTS)
+                                    + " (common practice), and the ramp begins from below zero."));
             return;
         }
         faults.add(fault("rectifier-open", key, How.OPEN, "one diode of the supply's bridge @ open", n -> {})
-                .wired(PowerFaults::suppliedInOneHalf));
-        if (!clip.isIsolated() && clip.tap() == Tap.LINE) {
+                .wired(design -> suppliedInOneHalf(design, Rectifier.BRIDGE.diodesInPath())));
+        String shorted = "one diode of the supply's bridge @ shorted";
+        if (clip.isIsolated()) {
+            faults.add(fault("rectifier-shorted", key, How.SHORTED, shorted, n -> {})
+                    .along(LoadPath.WINDING_SHORTED)
+                    .wired(design -> suppliedInOneHalf(design, 1))
+                    .saying(
+                            "The winding is shorted in every second half cycle, and its own resistance alone limits that:"
+                                    + " it burns, or its fuse opens; then it reads as with the winding open."));
+        } else if (clip.tap() == Tap.LINE) {
             faults.add(lineShort("rectifier-shorted", key));
+        } else {
+            faults.add(pastTheThyristor("rectifier-shorted", key, shorted)
+                    .saying(
+                            "Through the bad diode and its neighbour every second half cycle reaches the load whole, past"
+                                    + " the thyristor: that diode carries the load's current and burns next."));
         }
     }
 
@@ -126,13 +164,16 @@ final class PowerFaults {
                     n.triggerAmps = NEVER_AMPS;
                 })
                 .along(LoadPath.LOAD_OPEN));
+        faults.add(fault("load-shorted", "load", How.SHORTED, "load @ shorted", n -> {})
+                .along(LoadPath.LOAD_SHORTED)
+                .wired(design -> design.withLoad(new Load.Resistor(FiringFaults.SHORT_OHMS))));
     }
 
     /**
-     * The supply behind a bridge that has lost a diode: one half cycle, still through two diodes. Where the load takes
-     * the positive half only, it is that half that is lost; otherwise positive is only a name.
+     * The supply behind a bridge that has lost a diode: one half cycle, through two diodes or, past a shorted one, through
+     * one. Where the load takes the positive half only, it is that half that is lost; otherwise positive is only a name.
      */
-    private static Design suppliedInOneHalf(Design design) {
+    private static Design suppliedInOneHalf(Design design, int diodesInPath) {
         ClipSupply clip = design.clip();
         boolean loseFed = design.stage() == Stage.HALF_WAVE;
         Optional<Winding> winding = clip.winding()
@@ -140,7 +181,7 @@ final class PowerFaults {
         return design.withClip(new ClipSupply(
                 clip.tap(),
                 Rectifier.DIODE,
-                Rectifier.BRIDGE.diodesInPath() * clip.diodeDropVolts(),
+                diodesInPath * clip.diodeDropVolts(),
                 clip.dropper(),
                 clip.zener(),
                 winding));

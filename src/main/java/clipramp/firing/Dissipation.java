@@ -38,4 +38,32 @@ public record Dissipation(
         double capacitorVolts,
         double gateWatts,
         double gateSeriesWatts,
-        double gateShuntWatts) {}
+        double gateShuntWatts) {
+    /**
+     * The same with more on the supply's parts.
+     *
+     * @param moreDropperWatts on top of the dropper's, W
+     * @param otherDropperPeakVolts another peak across it, V
+     * @param moreZenerWatts on top of the zener's, W
+     */
+    public Dissipation withMore(double moreDropperWatts, double otherDropperPeakVolts, double moreZenerWatts) {
+        return new Dissipation(
+                dropperWatts + moreDropperWatts,
+                Math.max(dropperPeakVolts, otherDropperPeakVolts),
+                zenerWatts + moreZenerWatts,
+                zenerPeakAmps,
+                baseOneWatts,
+                baseTwoWatts,
+                lowerWatts,
+                rampWatts,
+                deviceWatts,
+                emitterRmsAmps,
+                emitterPeakAmps,
+                emitterReverseVolts,
+                interbaseVolts,
+                capacitorVolts,
+                gateWatts,
+                gateSeriesWatts,
+                gateShuntWatts);
+    }
+}

@@ -94,6 +94,9 @@ final class HalfCycleRun {
         mode = stepper.mode();
         rampVolts = stepper.rampVolts();
         fluxAmps = stepper.fluxAmps();
+        if (firing.network().reverseVolts > 0) {
+            rampVolts = firing.network().rampUnderReverse(rampVolts, end / 2);
+        }
         half++;
     }
 

@@ -5,6 +5,8 @@ import clipramp.circuit.Design;
 import clipramp.engine.LineWave;
 import clipramp.firing.Solution;
 import clipramp.gate.LatchingNeed;
+import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.List;
 import java.util.OptionalDouble;
 
@@ -42,6 +44,24 @@ record Firings(
                 1,
                 0,
                 0);
+    }
+
+    /** The same with every negative half cycle carried from its beginning to its end, whatever the gate does. */
+    Firings withNegativeHalvesFree(LineWave line) {
+        List<ActingPulses.Slot> freed = new ArrayList<>();
+        List<GateWindow> driven = new ArrayList<>();
+        windows.stream().filter(window -> window.half() % 2 == 0).forEach(driven::add);
+        for (int half = 0; half < slots.size(); half++) {
+            ActingPulses.Slot slot = slots.get(half);
+            freed.add(slot.positive() ? slot : new ActingPulses.Slot(false, OptionalDouble.of(0), slot.index()));
+            if (!slot.positive()) {
+                double period = (half - 1) * Math.PI;
+                driven.add(new GateWindow(
+                        line.negativeStartRad() + period, line.positiveStartRad() + 2 * Math.PI + period, half));
+            }
+        }
+        driven.sort(Comparator.comparingDouble(GateWindow::fromRad));
+        return new Firings(freed, driven, halves, latchingAmps, turnOnRad);
     }
 
     /** Angle of whole periods that the slots cover, rad: an odd number of half cycles goes round twice. */

@@ -5,6 +5,7 @@ import clipramp.circuit.Design;
 import clipramp.circuit.Load;
 import clipramp.circuit.Stage;
 import clipramp.circuit.ThyristorDevice.OnState;
+import clipramp.engine.LineWave;
 import clipramp.firing.Solution;
 import java.util.ArrayList;
 import java.util.List;
@@ -33,6 +34,24 @@ public final class LoadPower {
     /** The same with every half cycle fired at one angle, rad: what a firing angle is worth, whatever makes it. */
     public static LoadResult atFiringAngle(Design design, Condition condition, double firingRad) {
         return of(design, condition, Firings.heldFrom(design, condition, firingRad));
+    }
+
+    /**
+     * The same where something beside the thyristor, such as a shorted diode, carries every negative half cycle whole. The
+     * thyristor's own currents are those of both together.
+     */
+    public static LoadResult withNegativeHalvesFree(Design design, Condition condition, Solution solution) {
+        return of(design, condition, negativeHalvesFree(design, condition, solution));
+    }
+
+    /** The load's current there. */
+    public static LoadPeriod periodWithNegativeHalvesFree(Design design, Condition condition, Solution solution) {
+        return period(design, condition, negativeHalvesFree(design, condition, solution));
+    }
+
+    private static Firings negativeHalvesFree(Design design, Condition condition, Solution solution) {
+        return Firings.of(design, condition, solution.firingOnlyPositive())
+                .withNegativeHalvesFree(new LineWave(design.line(), condition));
     }
 
     /** The load's current itself, for what needs more of it than means: harmonics, waveforms, commutation. */

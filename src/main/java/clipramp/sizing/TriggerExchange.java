@@ -11,7 +11,6 @@ import clipramp.units.PreferredSeries;
 import java.util.ArrayList;
 import java.util.EnumSet;
 import java.util.List;
-import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.Set;
 import java.util.TreeSet;
@@ -105,9 +104,7 @@ public record TriggerExchange(Design design, Set<OpenPart> changed) {
         }
         double volts = own.clip().zener().volts().highest();
         double amps = volts / (upper + lower);
-        return new Part[] {
-            resistor(upper, amps * amps * upper, own), resistor(lower, amps * amps * lower, own)
-        };
+        return new Part[] {resistor(upper, amps * amps * upper, own), resistor(lower, amps * amps * lower, own)};
     }
 
     private static Part resistor(double ohms, double watts, Design own) {

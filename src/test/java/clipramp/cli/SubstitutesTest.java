@@ -48,7 +48,8 @@ class SubstitutesTest {
         for (String[] pair : new String[][] {{"tray-lamp", "2n6027"}, {"seed-drawer", "2n2646"}}) {
             String file = "examples/" + pair[0] + ".yaml";
             JsonNode said = substitute(answer(file), pair[1]);
-            List<String> command = new ArrayList<>(List.of("check", file, "--json", "--with=trigger.device=" + pair[1]));
+            List<String> command =
+                    new ArrayList<>(List.of("check", file, "--json", "--with=trigger.device=" + pair[1]));
             said.get("changes").forEach(change -> command.add("--with=" + change.asText()));
             CliRun run = CliRun.of(command.toArray(String[]::new));
             assertThat(new ObjectMapper().readTree(run.out()).get("verdict")).isEqualTo(said.get("verdict"));

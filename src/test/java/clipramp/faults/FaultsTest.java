@@ -10,6 +10,11 @@ import clipramp.circuit.SampleDesigns;
 import clipramp.circuit.Stage;
 import clipramp.circuit.TestPoint;
 import clipramp.circuit.TriggerDemand;
+import clipramp.engine.Network;
+import clipramp.engine.NetworkOfDesign;
+import clipramp.firing.Dissipation;
+import clipramp.firing.Firing;
+import clipramp.firing.Study;
 import clipramp.power.KnobMap;
 import java.util.List;
 import java.util.stream.Stream;
@@ -269,7 +274,7 @@ class FaultsTest {
         assertThat(HEATER.faults().stream()
                         .filter(e -> e.over().stream().anyMatch(Burden::isUnlimited))
                         .map(e -> e.fault().id()))
-                .containsExactly("stage-diode-shorted");
+                .containsExactly("stage-diode-shorted", "load-shorted");
         assertThat(SampleDesigns.heater().stage()).isEqualTo(Stage.BRIDGE_DC);
     }
 
@@ -282,5 +287,77 @@ class FaultsTest {
         assertThat(Math.hypot(reading.acVolts(), reading.dcVolts())).isBetween(228.0, 230.0);
         Reading triac = reading(TRIAC, "thyristor-dead", TestPoint.TP5);
         assertThat(triac.acVolts()).isCloseTo(230, within(0.001));
+    }
+
+    /** Common practice: a thyristor fired into a short takes the fuse with it, or is the faster of the two. */
+    @ParameterizedTest
+    @MethodSource("everyStage")
+    void aShortedLoadTakesTheFuseOrTheThyristorWithTheFirstPulse(FaultSheet sheet) {
+        FaultEffect effect = effect(sheet, "load-shorted");
+        assertThat(effect.gets()).isEqualTo(LoadGets.NOTHING);
+        assertThat(effect.over()).allMatch(Burden::isUnlimited);
+        assertThat(effect.over()).extracting(Burden::part).contains("thyristor.device");
+        assertThat(effect.over().stream().anyMatch(b -> b.part().equals("stage-diodes")))
+                .isEqualTo(sheet.design().stage().bridgeDiodes() > 0);
+        assertThat(effect.remarks()).anyMatch(remark -> remark.contains("only a fuse that lets less through"));
+        assertThat(effect.readings().values()).allMatch(Reading.ZERO::equals);
+    }
+
+    @Test
+    void aShortedLoadDoesNothingToACircuitThatNeverFires() {
+        FaultEffect effect =
+                effect(sheet(Changed.with(SampleDesigns.heater(), "ramp.fixed.value", 20e6)), "load-shorted");
+        assertThat(effect.over()).isEmpty();
+        assertThat(effect.readings().get(TestPoint.TP5).dcVolts()).isGreaterThan(200);
+    }
+
+    /** The neighbour diode and the short carry one polarity whole; the other is P/P_full = 1 - a/pi + sin 2a/(2 pi). */
+    @Test
+    void aShortedDiodeOfABridgeWithTheLoadOutsideLetsOneHalfThroughWhole() {
+        FaultEffect effect = effect(ACROSS_THYRISTOR, "stage-diode-shorted");
+        double rad = effect.middle().firingRad().orElseThrow();
+        double controlled = 1 - rad / Math.PI + Math.sin(2 * rad) / (2 * Math.PI);
+        // Drops of thyristor and bridge: 2.8 V of 207 V mean.
+        assertThat(effect.middle().fraction()).isCloseTo((1 + controlled) / 2, within(0.02));
+        assertThat(effect.middle().dcAmps()).isNegative();
+        assertThat(effect.knob()).allSatisfy(at -> assertThat(at.fraction()).isGreaterThan(0.48));
+        assertThat(effect.knobActs()).isTrue();
+        assertThat(effect.gets()).isEqualTo(LoadGets.MORE);
+        assertThat(effect.over()).noneMatch(Burden::isUnlimited);
+    }
+
+    @Test
+    void aShortedRectifierDoublesTheDroppersHeatAndDelaysTheRamp() {
+        Design design = HALF_WAVE.design();
+        double rampOhms = design.ramp().rampOhms(0.5);
+        Network network = NetworkOfDesign.of(design, HALF_WAVE.condition(), rampOhms);
+        network.reverseVolts = ReverseHalf.ZENER_VOLTS;
+        Study study = Firing.study(design, HALF_WAVE.condition(), network);
+        Dissipation bears = ReverseHalf.borne(design, HALF_WAVE.condition(), network, study.dissipation());
+        // Half a sine wave over R_D with the zener's 0.7 V taken off: closed form of (V_m sin - V_z)^2 and of its mean.
+        double crest = Math.sqrt(2) * 230;
+        double back = (crest * crest * Math.PI / 2 - 4 * crest * 0.7 + 0.49 * Math.PI) / (2 * Math.PI * 10_000);
+        assertThat(bears.dropperWatts() - study.dissipation().dropperWatts()).isCloseTo(back, within(1e-3));
+        double backAmps = (2 * crest - 0.7 * Math.PI) / (2 * Math.PI * 10_000);
+        assertThat(bears.zenerWatts() - study.dissipation().zenerWatts()).isCloseTo(0.7 * backAmps, within(1e-5));
+        assertThat(bears.dropperPeakVolts()).isCloseTo(crest - 0.7, within(0.01));
+        FaultEffect effect = effect(HALF_WAVE, "rectifier-shorted");
+        assertThat(effect.middle().firingRad().orElseThrow())
+                .isGreaterThan(HALF_WAVE.healthy().middle().firingRad().orElseThrow() + 0.01);
+        assertThat(effect.readings().get(TestPoint.TP1).dcVolts())
+                .isCloseTo(HALF_WAVE.healthy().readings().get(TestPoint.TP1).dcVolts() - 0.35, within(0.1));
+        // An RC settling towards -0.7 V over ten milliseconds, from where the emitter leaves it.
+        double from = Math.min(0.45, network.emitterDropVolts - 0.7 * network.peakShare());
+        double start = -0.7 + (from + 0.7) * Math.exp(-0.01 / (rampOhms * 100e-9));
+        assertThat(study.solution().shown().startVolts()).isCloseTo(start, within(0.02));
+    }
+
+    @Test
+    void aShortedDiodeBehindAWindingBurnsTheWindingAndLeavesHalfTheLoad() {
+        FaultEffect effect = effect(SHEETS.get(5), "rectifier-shorted");
+        assertThat(effect.gets()).isEqualTo(LoadGets.HALF);
+        assertThat(effect.over()).anyMatch(b -> b.isUnlimited() && b.part().equals("clip.winding"));
+        assertThat(effect.remarks())
+                .anyMatch(remark -> remark.contains("winding is shorted in every second half cycle"));
     }
 }

@@ -16,14 +16,16 @@ import org.junit.jupiter.api.Test;
 
 class TriggerExchangeTest {
     private static Design programmable() {
-        return SampleDesigns.heater().withTrigger(SampleDesigns.programmableHeater().trigger());
+        return SampleDesigns.heater()
+                .withTrigger(SampleDesigns.programmableHeater().trigger());
     }
 
     @Test
     void theDividerOfAStandoffRatioOfAThirdIsThePrintedOne() {
         // Rashid, Power Electronics, 4th edition, example 9.6: eta 1/3, R_G 20 kohm gives 60 kohm and 30 kohm.
         Part[] divider = TriggerExchange.divider(1 / 3.0, 20e3, SampleDesigns.heater());
-        assertThat(divider[1].value() / (divider[0].value() + divider[1].value())).isCloseTo(1 / 3.0, within(0.006));
+        assertThat(divider[1].value() / (divider[0].value() + divider[1].value()))
+                .isCloseTo(1 / 3.0, within(0.006));
         assertThat(divider[0].value()).isCloseTo(60e3, within(0.35 * 60e3));
         assertThat(divider[1].value()).isCloseTo(30e3, within(0.35 * 30e3));
         assertThat(PreferredSeries.E24.contains(divider[0].value())).isTrue();
@@ -47,7 +49,8 @@ class TriggerExchangeTest {
     @Test
     void oneOfThemStandsNearEveryGateResistanceThatTheSheetTabulates() {
         List<Double> gates = TriggerExchange.dividers(SampleDesigns.heater(), programmable()).stream()
-                .map(exchange -> ProgrammableDevice.gateOhms((ProgrammableTrigger) exchange.design().trigger()))
+                .map(exchange -> ProgrammableDevice.gateOhms(
+                        (ProgrammableTrigger) exchange.design().trigger()))
                 .toList();
         // 2N6027 and 2N6028: peak and valley currents are given at 10 kohm (manufacturer's data sheet).
         assertThat(gates).anySatisfy(ohms -> assertThat(ohms / 10e3).isBetween(0.7, 1.4));
