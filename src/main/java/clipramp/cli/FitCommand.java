@@ -8,6 +8,7 @@ import clipramp.files.ReadingsFile;
 import clipramp.files.Source;
 import clipramp.fit.Fit;
 import clipramp.fit.FitResult;
+import clipramp.fit.FitWords;
 import clipramp.fit.Readings;
 import clipramp.record.PageSize;
 import clipramp.record.RecordContent;
@@ -93,7 +94,7 @@ final class FitCommand implements Callable<Integer> {
             read = read.onLine(volts.getAsDouble());
         }
         FitResult result = Fit.run(circuit, read, Watch.NONE);
-        List<String> notes = new ArrayList<>(FitText.notes(result));
+        List<String> notes = new ArrayList<>(FitWords.notes(result));
         Optional<DesignText> built =
                 Optional.ofNullable(out).map(name -> AsBuilt.of(DesignText.of(text), circuit, result));
         built.ifPresent(b -> notes.addAll(b.notes()));

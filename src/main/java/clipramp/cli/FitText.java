@@ -4,21 +4,14 @@ import clipramp.circuit.Condition;
 import clipramp.cli.TextTable.Align;
 import clipramp.files.LoadedDesign;
 import clipramp.fit.FitResult;
+import clipramp.fit.FitWords;
 import clipramp.fit.Fitted;
 import clipramp.fit.Fitted.Knowledge;
-import clipramp.fit.Fitted.Within;
-import clipramp.fit.Quality;
 import clipramp.fit.Residual;
-import clipramp.fit.Together;
-import clipramp.units.QuantityText;
-import clipramp.units.Unit;
-import java.util.ArrayList;
 import java.util.List;
-import java.util.stream.Collectors;
 
 /** A fit for people: what is told, what is not, what does not belong, and how well it all fits. */
 final class FitText {
-    private static final int FIGURES = 4;
     private static final int MOST_TOGETHER = 5;
 
     private final Output out;
@@ -35,8 +28,8 @@ final class FitText {
 
     void print() {
         out.line("One unit, from " + result.readings().name() + ": "
-                + count(result.readings().count(), "reading") + " on "
-                + count(result.readings().lines().size(), "line") + ".");
+                + FitWords.count(result.readings().count(), "reading") + " on "
+                + FitWords.count(result.readings().lines().size(), "line") + ".");
         out.line(Caution.LINE);
         out.line("");
         String title = loaded.design().title();
@@ -54,10 +47,6 @@ final class FitText {
         notes.forEach(note -> out.lines(Paragraph.wrap(note, "  ", "    ")));
     }
 
-    private static String count(int number, String what) {
-        return number + " " + what + (number == 1 ? "" : "s");
-    }
-
     private void strangers() {
         if (result.strangers().isEmpty()) {
             out.line("Every reading belongs.");
@@ -65,10 +54,7 @@ final class FitText {
             out.strongLine("Do not belong", " (left out of the fit; read them again)");
             for (Residual stranger : result.strangers()) {
                 out.lines(Paragraph.wrap(
-                        "line " + stranger.line() + ", " + stranger.column() + ": read "
-                                + amount(stranger.read(), stranger.unit()) + "; the others say "
-                                + amount(stranger.shown(), stranger.unit()) + ", "
-                                + Shown.fixed(Math.abs(stranger.deviations()), 1) + " standard deviations off.",
+                        "line " + stranger.line() + ", " + stranger.column() + ": " + FitWords.stranger(stranger),
                         "  ",
                         "    "));
             }
@@ -97,39 +83,20 @@ final class FitText {
                 .column(Align.LEFT, "tolerance");
         values.forEach(value -> table.row(
                 value.name(),
-                amount(value.nominal(), value.unit()),
-                amount(value.value(), value.unit()),
-                amount(value.from(), value.unit()) + " .. " + amount(value.to(), value.unit()),
-                signedPercent(value.difference()),
-                verdict(value)));
+                FitWords.amount(value.nominal(), value.unit()),
+                FitWords.amount(value.value(), value.unit()),
+                FitWords.amount(value.from(), value.unit()) + " .. " + FitWords.amount(value.to(), value.unit()),
+                FitWords.signedPercent(value.difference()),
+                FitWords.verdict(value)));
         out.lines(table.lines());
         out.line("");
     }
 
-    private static String verdict(Fitted value) {
-        String word = value.within().word();
-        return value.limitsAssumed() && value.within() != Within.UNKNOWN ? word + " (ours)" : word;
-    }
-
-    static String amount(double value, Unit unit) {
-        return QuantityText.format(value, unit, FIGURES);
-    }
-
-    static String signedPercent(double share) {
-        String text = Shown.fixed(100 * share, 1);
-        return (text.startsWith("-") || text.equals("0.0") ? "" : "+") + text + " %";
-    }
-
     private void untold() {
-        String untold = result.values().stream()
-                .filter(value -> value.knowledge() == Knowledge.NOT_TOLD)
-                .map(Fitted::name)
-                .collect(Collectors.joining(", "));
-        if (!untold.isEmpty()) {
-            out.lines(Paragraph.wrap(
-                    "The readings cannot tell: " + untold + ". These keep the design's values and limits.", "", "  "));
+        FitWords.untold(result).ifPresent(words -> {
+            out.lines(Paragraph.wrap(words, "", "  "));
             out.line("");
-        }
+        });
     }
 
     private void together() {
@@ -137,35 +104,14 @@ final class FitText {
             return;
         }
         out.line("Told only together (correlation)");
-        result.together().stream().limit(MOST_TOGETHER).forEach(pair -> out.line("  " + sentence(result, pair)));
+        result.together().stream()
+                .limit(MOST_TOGETHER)
+                .forEach(pair -> out.line("  " + FitWords.together(result, pair)));
         out.line("");
     }
 
-    static String sentence(FitResult result, Together pair) {
-        String first = result.value(pair.first()).map(Fitted::name).orElse(pair.first());
-        String second = result.value(pair.second()).map(Fitted::name).orElse(pair.second());
-        return first + " and " + second + ", " + Shown.fixed(pair.correlation(), 2) + ": "
-                + (pair.correlation() < 0 ? "more of one with less of the other" : "more of both")
-                + " reads nearly alike";
-    }
-
     private void quality() {
-        Quality quality = result.quality();
-        String condition = quality.condition().isPresent()
-                ? "; the best told is "
-                        + QuantityText.number(quality.condition().getAsDouble(), 2)
-                        + " times better told than the worst"
-                : "; some combination is not told at all";
-        out.lines(Paragraph.wrap(
-                "The readings tell " + count(quality.directions(), "independent combination") + " of "
-                        + count(quality.unknowns(), "value") + condition + ".",
-                "",
-                "  "));
-        String scatter = quality.widened() > 1
-                ? "They scatter " + Shown.fixed(quality.widened(), 1)
-                        + " times as far as the instruments' accuracies explain; the intervals are widened by that."
-                : "They scatter no more than the instruments' accuracies explain.";
-        out.lines(Paragraph.wrap(scatter, "", "  "));
+        FitWords.quality(result).forEach(words -> out.lines(Paragraph.wrap(words, "", "  ")));
         out.line("");
     }
 
@@ -182,9 +128,9 @@ final class FitText {
                 table.row(
                         Integer.toString(residual.line()),
                         residual.what(),
-                        amount(residual.read(), residual.unit()),
-                        amount(residual.shown(), residual.unit()),
-                        Shown.fixed(residual.deviations(), 1) + (residual.belongs() ? "" : " out"));
+                        FitWords.amount(residual.read(), residual.unit()),
+                        FitWords.amount(residual.shown(), residual.unit()),
+                        FitWords.deviations(residual));
             }
         }
         out.lines(table.lines());
@@ -193,31 +139,6 @@ final class FitText {
 
     private boolean isReading(Residual residual) {
         return result.residuals().indexOf(residual) < result.readings().count();
-    }
-
-    /** How the fit was made, and what was assumed. */
-    static List<String> notes(FitResult result) {
-        List<String> notes = new ArrayList<>();
-        notes.add(
-                "Accuracies hold for 19 readings in 20; where a head says none, the usual ones: firing angle 1°, delay"
-                        + " 1 % + 20 µs, load true rms 1 % + 0.2 V, average-reading 1.5 % + 0.2 V, power 2 % + 0.5 W, base one"
-                        + " 3 % + 50 mV, supply and peak point 2 %, ohmmeter 0.5 % + 1 Ω, line 1 %, knob 1 % of its travel.");
-        notes.add(
-                "Before any reading, every value is taken as its design's with one standard deviation to its tolerance or"
-                        + " data-sheet limit (a weak prior): what no reading moves stays there. Told means that half or less of that"
-                        + " uncertainty is left.");
-        String ours = result.values().stream()
-                .filter(Fitted::limitsAssumed)
-                .map(value -> value.name() + " " + amount(value.low(), value.unit()) + " .. "
-                        + amount(value.high(), value.unit()))
-                .collect(Collectors.joining("; "));
-        if (!ours.isEmpty()) {
-            notes.add("Limits of ours, because the design states none: " + ours + ".");
-        }
-        if (result.value(FitResult.LINE_PATH).isPresent()) {
-            notes.add("The line voltage was not read on every line; there it is fitted as one value for the day.");
-        }
-        return notes;
     }
 
     /** The condition that stands in a machine's answer. */

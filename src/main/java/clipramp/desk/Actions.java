@@ -6,13 +6,20 @@ import clipramp.desk.model.Settings;
 import clipramp.desk.model.ViewCondition;
 import clipramp.desk.model.Wish;
 import clipramp.files.Example;
+import clipramp.files.ReadingsTable;
 import java.nio.file.Path;
+import java.util.function.Consumer;
 
 /** What the user can ask of the window, from menus, keys and pages alike. */
 interface Actions {
     void startNew();
 
     void propose(Wish wish, boolean entering);
+
+    /** Asks for a file of readings and takes it apart. */
+    void openReadings(Consumer<ReadingsTable> then);
+
+    void saveReadings(ReadingsTable table);
 
     /** Takes a proposed design over and shows a page of it. */
     void takeProposal(Resized found, Page page);
@@ -93,6 +100,7 @@ interface Actions {
         BENCH("Bench", 1),
         SPREAD("Spread", 3),
         SIZE("Size", 4),
+        FIT("Fit", 5),
         RECORD("Record", 2);
 
         private final String words;

@@ -62,9 +62,12 @@ final class DeskWindow {
         this.spread = new Late<>(() -> new SpreadPage(theme, model.draft(), model.spread(), this::layBands));
         pages.put(Page.BENCH, bench);
         pages.put(Page.SPREAD, spread);
+        pages.put(Page.FIT, new Late<>(() -> new FitPage(model.draft(), model.fitting(), actions)));
         pages.put(Page.SIZE, new Late<>(() -> new SizePage(theme, model.draft(), model.resizing())));
         pages.put(
-                Page.RECORD, new Late<>(() -> new RecordPage(theme, model.draft(), maker.get(), actions::saveRecord)));
+                Page.RECORD,
+                new Late<>(
+                        () -> new RecordPage(theme, model.draft(), maker.get(), model.fitting(), actions::saveRecord)));
         this.header = new Late<>(() -> new HeaderView(model, actions, () -> bench().unfold(true)));
         this.tabs = new Late<>(() -> new PageTabs(actions));
         this.menus = new Menus(actions, model.draft());

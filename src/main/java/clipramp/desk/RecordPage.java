@@ -1,16 +1,21 @@
 package clipramp.desk;
 
 import clipramp.desk.model.Draft;
+import clipramp.desk.model.Fitting;
+import clipramp.desk.model.LongRun;
 import clipramp.desk.model.PartSlot;
 import clipramp.desk.model.RecordMaker;
 import clipramp.desk.model.Sheet;
+import clipramp.fit.FitResult;
 import clipramp.record.PageSize;
 import clipramp.record.RecordPreview;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import javafx.beans.binding.Bindings;
 import javafx.scene.AccessibleRole;
 import javafx.scene.control.Button;
+import javafx.scene.control.CheckBox;
 import javafx.scene.control.ComboBox;
 import javafx.scene.control.Label;
 import javafx.scene.control.ScrollPane;
@@ -33,6 +38,8 @@ final class RecordPage implements PageView {
 
     private final Draft draft;
     private final RecordMaker maker;
+    private final LongRun<Fitting.Asked, Fitting.Answer> fitting;
+    private final CheckBox unit = new CheckBox("With the unit as built");
     private final Theme theme;
     private final VBox pages = new VBox();
     private final VBox side = new VBox();
@@ -42,7 +49,17 @@ final class RecordPage implements PageView {
     private final List<SlotView> slots = new ArrayList<>();
     private int drawn;
 
-    RecordPage(Theme theme, Draft draft, RecordMaker maker, Runnable saving) {
+    /**
+     * @param fitting the fit of one unit, whose page the record may have
+     * @param saving saves the record
+     */
+    RecordPage(
+            Theme theme,
+            Draft draft,
+            RecordMaker maker,
+            LongRun<Fitting.Asked, Fitting.Answer> fitting,
+            Runnable saving) {
+        this.fitting = fitting;
         this.theme = theme;
         this.draft = draft;
         this.maker = maker;
@@ -70,7 +87,10 @@ final class RecordPage implements PageView {
         progress.getStyleClass().add("quiet");
         progress.setId("record-progress");
         progress.setWrapText(true);
-        side.getChildren().addAll(save, progress, paper);
+        unit.setId("record-fit");
+        unit.setAccessibleText("A page about the unit as built, from its bench readings");
+        unit.setOnAction(event -> maker.setFit(measured()));
+        side.getChildren().addAll(save, progress, paper, unit);
         ScrollPane sideScroll = new ScrollPane(side);
         sideScroll.setFitToWidth(true);
         sideScroll.setHbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);
@@ -91,9 +111,24 @@ final class RecordPage implements PageView {
     @Override
     public void follow() {
         draft.sheet().ifPresent(sheet -> {
+            offerUnit(sheet);
+            maker.setFit(measured());
             maker.show(sheet.loaded(), draft.file());
             titleBlock(sheet);
         });
+    }
+
+    /** A unit that was fitted to this very design, or whose design this is, can have its page. */
+    private void offerUnit(Sheet sheet) {
+        boolean there = fitting.answer()
+                .map(answer -> answer.isOf(sheet) || answer.isTaken(sheet))
+                .orElse(false);
+        unit.setVisible(there);
+        unit.setManaged(there);
+    }
+
+    private Optional<FitResult> measured() {
+        return unit.isVisible() && unit.isSelected() ? fitting.answer().map(Fitting.Answer::result) : Optional.empty();
     }
 
     private void titleBlock(Sheet sheet) {

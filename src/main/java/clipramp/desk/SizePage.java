@@ -84,7 +84,10 @@ final class SizePage implements PageView {
         goal.setValue(goal.getItems().get(0));
         goal.setId("size-goal");
         goal.setAccessibleText("What is looked for");
-        goal.valueProperty().addListener(property -> offer());
+        goal.valueProperty().addListener(property -> {
+            offer();
+            refresh();
+        });
         series.getItems()
                 .setAll(Arrays.stream(PreferredSeries.values()).map(Enum::name).toList());
         series.setValue(PreferredSeries.E24.name());
@@ -97,6 +100,7 @@ final class SizePage implements PageView {
         start.setOnAction(event -> start());
         complaint.setId("size-complaint");
         complaint.getStyleClass().add("complaint");
+        complaint.managedProperty().bind(complaint.textProperty().isNotEmpty());
         VBox side = new VBox(
                 SpreadPage.named("look for", goal),
                 wanted,
@@ -233,9 +237,11 @@ final class SizePage implements PageView {
     private void refresh() {
         start.setDisable(run.isRunning());
         complaint.setText(run.trouble().map(t -> t.text()).orElse(""));
-        if (!run.answer().equals(told)) {
-            told = run.answer();
-            told.ifPresent(this::tell);
+        // What was found for another goal is no answer to this one.
+        Optional<Resized> answer = run.answer().filter(a -> a.asked().goal() == chosen());
+        if (!answer.equals(told)) {
+            told = answer;
+            told.ifPresentOrElse(this::tell, this::hush);
         }
         boolean stands = told.flatMap(t -> draft.sheet().map(t::isOf)).orElse(false);
         boolean changes = told.map(t -> t.changed() > 0).orElse(false);
@@ -260,6 +266,11 @@ final class SizePage implements PageView {
                 .map(s -> s.text().text().equals(told.get().sheet().text().text()))
                 .orElse(false);
         return taken ? "Taken over. Undo takes it back." : "The design has changed since; search again.";
+    }
+
+    private void hush() {
+        found.clear();
+        tables.getChildren().clear();
     }
 
     private void tell(Resized answer) {

@@ -17,8 +17,10 @@ import clipramp.desk.model.Workers;
 import clipramp.figures.Palette;
 import clipramp.figures.Style;
 import clipramp.files.Example;
+import clipramp.files.ReadingsTable;
 import java.nio.file.Path;
 import java.util.Objects;
+import java.util.function.Consumer;
 import org.jspecify.annotations.Nullable;
 
 /** Does what the window is asked: files and figures by helpers of their own, the rest here. */
@@ -133,6 +135,16 @@ final class WindowActions implements Actions {
                 window().bench().enterParts();
             }
         });
+    }
+
+    @Override
+    public void openReadings(Consumer<ReadingsTable> then) {
+        new ReadingsActions(served().service()).open(then);
+    }
+
+    @Override
+    public void saveReadings(ReadingsTable table) {
+        new ReadingsActions(served().service()).save(table, draft().file());
     }
 
     @Override

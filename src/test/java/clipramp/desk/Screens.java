@@ -30,6 +30,25 @@ import javax.imageio.ImageIO;
 public final class Screens {
     private Screens() {}
 
+    /** Answers with the example's readings, one of them misread. */
+    private static final class Readings implements FileAsk {
+        @Override
+        public Optional<Path> toOpen(Kind kind) {
+            try {
+                String text = Files.readString(Path.of("examples", "drying-cabinet-readings.csv"));
+                return Optional.of(Files.writeString(
+                        Files.createTempFile("readings", ".csv"), text.replace("75.2,186.97", "57.2,186.97")));
+            } catch (IOException e) {
+                throw new IllegalStateException(e);
+            }
+        }
+
+        @Override
+        public Optional<Path> toWrite(Kind kind, String name, Optional<Path> beside) {
+            return Optional.empty();
+        }
+    }
+
     private record Size(int width, int height, int zoom) {
         String words() {
             return width + "x" + height + "-" + zoom;
@@ -59,7 +78,7 @@ public final class Screens {
     private static void shoot(Path folder, Path home, Size size, Settings.Look look) throws Exception {
         Places places = new Places(home.resolve("config"), home.resolve("state"));
         new Settings(look, size.zoom(), true, List.of()).save(places);
-        Desk.Setup setup = new Desk.Setup(places, Map.of(), home, stage -> null);
+        Desk.Setup setup = new Desk.Setup(places, Map.of(), home, stage -> new Readings());
         Stage stage = at(Stage::new);
         DeskModel model = at(() -> {
             DeskModel shown = setup.show(stage, Optional.empty(), () -> {});
@@ -122,6 +141,21 @@ public final class Screens {
             settle(() -> !model.resizing().isRunning());
             save(stage, folder.resolve("size-" + goal.replaceAll("\\W+", "-") + "-" + name + ".png"));
         }
+        fire(stage, "#page-fit");
+        settle(() -> stage.getScene().getRoot().lookup("#fit-start") != null);
+        save(stage, folder.resolve("fit-empty-" + name + ".png"));
+        at(() -> {
+            model.draft()
+                    .abandon(() -> model.draft()
+                            .openUnsaved("cabinet.yaml", Example.all().get(0).text()));
+            return null;
+        });
+        settle(() -> !model.isBusy());
+        fire(stage, "#fit-open");
+        settle(() -> stage.getScene().getRoot().lookup("#fit-cell-5-4") != null);
+        fire(stage, "#fit-start");
+        settle(() -> model.fitting().answer().isPresent());
+        save(stage, folder.resolve("fit-" + name + ".png"));
         fire(stage, "#page-record");
         settle(() -> stage.getScene().getRoot().lookup("#record-progress") instanceof Label label
                 && label.getText().contains("pages"));

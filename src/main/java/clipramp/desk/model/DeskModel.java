@@ -26,6 +26,7 @@ public final class DeskModel {
     private final SpreadRun spread;
     private final LongRun<Resizing.Asked, Resized> proposing;
     private final LongRun<Resizing.Asked, Resized> resizing;
+    private final LongRun<Fitting.Asked, Fitting.Answer> fitting;
     private final LatestWins<Asked, Judgement> judge;
     private final List<Runnable> judgementListeners = new ArrayList<>();
     private final List<Runnable> conditionListeners = new ArrayList<>();
@@ -51,6 +52,8 @@ public final class DeskModel {
         this.proposing =
                 new LongRun<>("No design could be made of this", search::of, workers.searching(), workers.home());
         this.resizing = new LongRun<>("No values could be chosen", search::of, workers.searching(), workers.home());
+        this.fitting = new LongRun<>(
+                "The readings could not be fitted", new Fitting(workshop)::of, workers.searching(), workers.home());
         this.judge = new LatestWins<>(
                 DeskModel::judged,
                 workers.judging(),
@@ -89,6 +92,11 @@ public final class DeskModel {
     /** The search for values of the design on the desk. */
     public LongRun<Resizing.Asked, Resized> resizing() {
         return resizing;
+    }
+
+    /** The fit of one unit to its readings. */
+    public LongRun<Fitting.Asked, Fitting.Answer> fitting() {
+        return fitting;
     }
 
     public Bench bench() {

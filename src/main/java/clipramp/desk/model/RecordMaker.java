@@ -1,6 +1,7 @@
 package clipramp.desk.model;
 
 import clipramp.files.LoadedDesign;
+import clipramp.fit.FitResult;
 import clipramp.margins.Check;
 import clipramp.margins.Judge;
 import clipramp.record.DesignRecord;
@@ -21,7 +22,8 @@ public final class RecordMaker {
     /** Sharp enough to read on a screen at 100 %. */
     private static final double PIXELS_PER_POINT = 1.25;
 
-    private record Asked(LoadedDesign loaded, Optional<Path> file, PageSize size, double zoom, int turn) {}
+    private record Asked(
+            LoadedDesign loaded, Optional<Path> file, PageSize size, double zoom, Optional<FitResult> fit, int turn) {}
 
     private record Made(Asked asked, byte[] pdf) {}
 
@@ -33,6 +35,7 @@ public final class RecordMaker {
     private final List<Runnable> listeners = new ArrayList<>();
     private PageSize size = PageSize.A4;
     private double zoom = 1;
+    private Optional<FitResult> fit = Optional.empty();
     private Optional<Asked> wanted = Optional.empty();
     private Optional<Made> made = Optional.empty();
     private volatile int turn;
@@ -62,7 +65,10 @@ public final class RecordMaker {
 
     /** Asks for the record of a design. */
     public void show(LoadedDesign loaded, Optional<Path> file) {
-        boolean same = wanted.filter(w -> w.loaded().equals(loaded) && w.size() == size && w.zoom() == zoom)
+        boolean same = wanted.filter(w -> w.loaded().equals(loaded)
+                        && w.size() == size
+                        && w.zoom() == zoom
+                        && w.fit().equals(fit))
                 .isPresent();
         if (!same) {
             ask(loaded, file);
@@ -71,7 +77,7 @@ public final class RecordMaker {
 
     private void ask(LoadedDesign loaded, Optional<Path> file) {
         turn++;
-        Asked asked = new Asked(loaded, file, size, zoom, turn);
+        Asked asked = new Asked(loaded, file, size, zoom, fit, turn);
         wanted = Optional.of(asked);
         maker.ask(asked);
         listeners.forEach(Runnable::run);
@@ -80,6 +86,12 @@ public final class RecordMaker {
     /** Chooses the paper; the record is laid out anew. */
     public void setSize(PageSize other) {
         size = other;
+        wanted.ifPresent(w -> show(w.loaded(), w.file()));
+    }
+
+    /** Adds a page about one unit as built, or leaves it out. */
+    public void setFit(Optional<FitResult> measured) {
+        fit = measured;
         wanted.ifPresent(w -> show(w.loaded(), w.file()));
     }
 
@@ -94,7 +106,8 @@ public final class RecordMaker {
         try {
             Check check = Judge.check(asked.loaded().design(), OptionalDouble.empty(), OptionalDouble.empty());
             RecordContent content = RecordContent.of(asked.loaded(), check, workshop.library(asked.file()), version);
-            return new Made(asked, DesignRecord.bytes(content, asked.size()));
+            RecordContent whole = asked.fit().map(content::withFit).orElse(content);
+            return new Made(asked, DesignRecord.bytes(whole, asked.size()));
         } catch (IOException e) {
             throw new UncheckedIOException(e);
         }

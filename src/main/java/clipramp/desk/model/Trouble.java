@@ -3,6 +3,7 @@ package clipramp.desk.model;
 import clipramp.circuit.RefusedCircuit;
 import clipramp.files.InvalidInputException;
 import clipramp.files.Problem;
+import clipramp.fit.UnsettledFitException;
 import java.io.IOException;
 import java.nio.file.AccessDeniedException;
 import java.nio.file.NoSuchFileException;
@@ -41,6 +42,7 @@ public record Trouble(String headline, String text) {
         }
         if (failure instanceof RefusedCircuit
                 || failure instanceof Reading.NoSuchAngleException
+                || failure instanceof UnsettledFitException
                 || failure instanceof IllegalArgumentException) {
             return new Trouble(what, String.valueOf(failure.getMessage()));
         }

@@ -1,0 +1,240 @@
+package clipramp.desk;
+
+import clipramp.desk.model.BenchSheet;
+import clipramp.desk.model.Draft;
+import clipramp.desk.model.Fitting;
+import clipramp.desk.model.LongRun;
+import clipramp.desk.model.Sheet;
+import clipramp.files.ReadingsTable;
+import clipramp.units.Expected;
+import clipramp.units.LenientEntry;
+import clipramp.units.RefusedQuantityException;
+import clipramp.units.Unit;
+import java.util.List;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import javafx.scene.control.Button;
+import javafx.scene.control.CheckBox;
+import javafx.scene.control.Label;
+import javafx.scene.control.ScrollPane;
+import javafx.scene.control.TextField;
+import javafx.scene.layout.BorderPane;
+import javafx.scene.layout.FlowPane;
+import javafx.scene.layout.Region;
+import javafx.scene.layout.VBox;
+
+/** What was read of one unit, and from it the unit as built; taken over in one step. */
+final class FitPage implements PageView {
+    private static final String NAME = "readings";
+    private static final Expected AIR = Expected.within(Unit.CELSIUS, -60, 150).allowingBare();
+    private static final Expected VOLTS = Expected.within(Unit.VOLT, 1, 2000).allowingBare();
+
+    private final Draft draft;
+    private final LongRun<Fitting.Asked, Fitting.Answer> run;
+    private final Actions actions;
+    private final VBox columns = new VBox();
+    private final TextField air = new TextField("25 degC");
+    private final TextField volts = new TextField();
+    private final Button start = new Button("Fit");
+    private final Label complaint = SizedView.wrapped("");
+    private final BenchTable table;
+    private final Button take = new Button("Take over as built");
+    private final Label state = SizedView.wrapped("");
+    private final FitView view = new FitView();
+    private final BorderPane box = new BorderPane();
+    private Optional<Boolean> knob = Optional.empty();
+    private Optional<Fitting.Answer> told = Optional.empty();
+    private boolean typed;
+
+    FitPage(Draft draft, LongRun<Fitting.Asked, Fitting.Answer> run, Actions actions) {
+        this.draft = draft;
+        this.run = run;
+        this.actions = actions;
+        this.table = new BenchTable(complaint::setText, this::typed);
+        ask();
+        show();
+        run.onChange(this::refresh);
+    }
+
+    private void ask() {
+        columns.getStyleClass().add("size-parts");
+        air.setId("fit-air");
+        air.setAccessibleText("Ambient temperature while it was read");
+        volts.setId("fit-line");
+        volts.setPromptText("not read: fitted");
+        volts.setAccessibleText("Line voltage on lines where none was read; empty where it is not known");
+        start.setId("fit-start");
+        start.setDefaultButton(true);
+        start.setOnAction(event -> start());
+        complaint.setId("fit-complaint");
+        complaint.getStyleClass().add("complaint");
+        complaint.managedProperty().bind(complaint.textProperty().isNotEmpty());
+        VBox side = new VBox(
+                start,
+                new RunBar(run, "fit", "fitting the unit to its readings").node(),
+                complaint,
+                columns,
+                SpreadPage.named("ambient", air),
+                SpreadPage.named("line, where not read", volts));
+        side.getStyleClass().add("record-side");
+        box.setLeft(scrolled(side, "record-side-scroll"));
+    }
+
+    private static ScrollPane scrolled(Region content, String style) {
+        ScrollPane scroll = new ScrollPane(content);
+        scroll.setFitToWidth(true);
+        scroll.setHbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);
+        scroll.setFocusTraversable(false);
+        scroll.getStyleClass().add(style);
+        return scroll;
+    }
+
+    private void show() {
+        Button open = new Button("Open readings…");
+        open.setId("fit-open");
+        open.setAccessibleText("Open a file of readings, comma-separated");
+        open.setOnAction(event -> actions.openReadings(this::load));
+        Button paste = new Button("Paste");
+        paste.setId("fit-paste");
+        paste.setAccessibleText("Paste a table from the clipboard, from the first line on");
+        paste.setOnAction(event -> pasteAll());
+        Button save = new Button("Save readings…");
+        save.setId("fit-save");
+        save.setAccessibleText("Save the readings as a file, comma-separated");
+        save.setOnAction(event -> actions.saveReadings(table.sheet().table()));
+        take.setId("fit-take");
+        take.setOnAction(event -> take());
+        state.setId("fit-state");
+        FlowPane buttons = new FlowPane(open, paste, save, take);
+        buttons.getStyleClass().add("flow-buttons");
+        VBox middle = new VBox(buttons, state, table.node(), view.node());
+        middle.getStyleClass().add("spread-middle");
+        ScrollPane scroll = scrolled(middle, "record-scroll");
+        scroll.setFocusTraversable(true);
+        scroll.setAccessibleText("Readings and what they tell; arrow keys scroll");
+        box.setCenter(scroll);
+    }
+
+    @Override
+    public Region node() {
+        return box;
+    }
+
+    @Override
+    public void follow() {
+        draft.sheet().ifPresent(sheet -> {
+            boolean turns = sheet.design().ramp().pot().isPresent();
+            if (!knob.equals(Optional.of(turns)) && !typed) {
+                table.show(new BenchSheet(turns));
+                offer();
+            }
+            knob = Optional.of(turns);
+        });
+        refresh();
+    }
+
+    private void offer() {
+        Label head = new Label("what was read");
+        head.getStyleClass().add("quiet");
+        columns.getChildren().setAll(head);
+        List<BenchSheet.Column> all = table.sheet().columns();
+        for (BenchSheet.Column column : all) {
+            CheckBox check = new CheckBox(column.head());
+            check.setId("fit-column-" + all.indexOf(column));
+            check.setAccessibleText("Column " + column.head());
+            check.setSelected(column.isShown());
+            check.setOnAction(event -> {
+                column.setShown(check.isSelected());
+                table.draw();
+                typed();
+            });
+            columns.getChildren().add(check);
+        }
+    }
+
+    private void load(ReadingsTable read) {
+        table.sheet().load(read);
+        table.draw();
+        offer();
+        complaint.setText("");
+        typed();
+    }
+
+    private void pasteAll() {
+        List<BenchSheet.Column> shown = table.sheet().shown();
+        if (shown.isEmpty()) {
+            complaint.setText("Tick a column first.");
+        } else {
+            table.paste(0, shown.get(0));
+            offer();
+        }
+    }
+
+    /** Readings have changed: what was marked may not hold. */
+    private void typed() {
+        typed = true;
+        table.mark(List.of());
+        refresh();
+    }
+
+    private void start() {
+        complaint.setText("");
+        try {
+            double celsius = LenientEntry.read(air.getText(), AIR).quantity().value();
+            OptionalDouble line = volts.getText().isBlank()
+                    ? OptionalDouble.empty()
+                    : OptionalDouble.of(
+                            LenientEntry.read(volts.getText(), VOLTS).quantity().value());
+            draft.sheet()
+                    .ifPresent(sheet -> run.start(new Fitting.Asked(
+                            sheet, draft.file(), NAME, table.sheet().table(), celsius, line)));
+        } catch (RefusedQuantityException e) {
+            complaint.setText(e.refusal().message());
+        }
+    }
+
+    private void take() {
+        told.ifPresent(answer -> draft.edit(
+                "the unit as built",
+                sheet -> answer.built().text(),
+                trouble -> complaint.setText(trouble.map(t -> t.text()).orElse(""))));
+    }
+
+    private void refresh() {
+        start.setDisable(run.isRunning());
+        run.trouble().ifPresent(trouble -> complaint.setText(trouble.text()));
+        if (!run.answer().equals(told)) {
+            told = run.answer();
+            told.ifPresent(answer -> {
+                view.show(answer);
+                table.mark(answer.result().strangers());
+            });
+        }
+        take.setDisable(told.isEmpty() || !stands() || !told.get().result().isTelling());
+        String words = words();
+        state.setText(words);
+        state.setManaged(!words.isEmpty());
+    }
+
+    private boolean stands() {
+        Optional<Sheet> now = draft.sheet();
+        return told.isPresent()
+                && now.isPresent()
+                && told.get().isOf(now.get())
+                && told.get().asked().table().equals(table.sheet().table());
+    }
+
+    private String words() {
+        if (told.isEmpty()) {
+            return "Type what was read of one unit, one line a setting; paste it from a spreadsheet, or open a file. An empty"
+                    + " field was not read. Under each head its accuracy, which 19 readings in 20 keep within.";
+        }
+        if (stands()) {
+            return "";
+        }
+        boolean taken = draft.sheet().map(told.get()::isTaken).orElse(false);
+        return taken
+                ? "Taken over: the design is this unit. Undo takes it back."
+                : "Readings or design have changed since; fit again.";
+    }
+}

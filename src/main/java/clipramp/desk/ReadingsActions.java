@@ -1,0 +1,41 @@
+package clipramp.desk;
+
+import clipramp.files.ReadingsTable;
+import clipramp.files.Source;
+import clipramp.files.WholeFile;
+import java.nio.charset.StandardCharsets;
+import java.nio.file.Path;
+import java.util.Optional;
+import java.util.concurrent.atomic.AtomicReference;
+import java.util.function.Consumer;
+
+/** Opens and saves files of bench readings. */
+final class ReadingsActions {
+    private static final String NAME = "readings.csv";
+
+    private final Service service;
+
+    ReadingsActions(Service service) {
+        this.service = service;
+    }
+
+    void open(Consumer<ReadingsTable> then) {
+        service.asks().toOpen(FileAsk.Kind.CSV).ifPresent(file -> {
+            AtomicReference<Optional<ReadingsTable>> read = new AtomicReference<>(Optional.empty());
+            service.away(
+                    "The readings cannot be opened",
+                    () -> read.set(Optional.of(ReadingsTable.of(Source.of(file)))),
+                    () -> read.get().ifPresent(then));
+        });
+    }
+
+    void save(ReadingsTable table, Optional<Path> beside) {
+        service.asks()
+                .toWrite(FileAsk.Kind.CSV, NAME, beside)
+                .ifPresent(file -> service.away(
+                        "The readings cannot be saved",
+                        () -> WholeFile.write(
+                                file, out -> out.write(table.csv().getBytes(StandardCharsets.UTF_8)), true),
+                        () -> service.window().say("Saved " + file.getFileName())));
+    }
+}
