@@ -5,8 +5,9 @@ import clipramp.files.Source;
 import clipramp.files.WholeFile;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.List;
 import java.util.Optional;
-import java.util.concurrent.atomic.AtomicReference;
 import java.util.function.Consumer;
 
 /** Opens and saves files of bench readings. */
@@ -21,11 +22,11 @@ final class ReadingsActions {
 
     void open(Consumer<ReadingsTable> then) {
         service.asks().toOpen(FileAsk.Kind.CSV).ifPresent(file -> {
-            AtomicReference<Optional<ReadingsTable>> read = new AtomicReference<>(Optional.empty());
+            List<ReadingsTable> read = new ArrayList<>(1);
             service.away(
                     "The readings cannot be opened",
-                    () -> read.set(Optional.of(ReadingsTable.of(Source.of(file)))),
-                    () -> read.get().ifPresent(then));
+                    () -> read.add(ReadingsTable.of(Source.of(file))),
+                    () -> read.forEach(then));
         });
     }
 
