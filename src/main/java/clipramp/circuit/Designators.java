@@ -30,6 +30,8 @@ public final class Designators {
             names.put("ramp.pot.track", "RP");
             pot.shunt().ifPresent(shunt -> names.put("ramp.pot.shunt", "RS"));
         });
+        design.ramp().trimmers().high().ifPresent(trimmer -> names.put("ramp.trim-high", "RV1"));
+        design.ramp().trimmers().low().ifPresent(trimmer -> names.put("ramp.trim-low", "RV2"));
         names.put("ramp.capacitor", "CE");
         names.put("trigger.device", "Q1");
         if (design.trigger() instanceof Trigger.UnijunctionTrigger) {

@@ -3,13 +3,14 @@ package clipramp.circuit;
 import java.util.Optional;
 
 /**
- * The ramp: C_E charged through R_E, which is the fixed resistor and what the pot gives.
+ * The ramp: C_E charged through R_E, which is the fixed resistor, what the pot gives, and presets that are set on every unit.
  *
  * @param capacitor C_E, F
  * @param fixed fixed part of R_E, ohm
  * @param pot the knob, or none for a fixed ramp
+ * @param trimmers presets in series with the fixed resistor and across the pot, if there are any
  */
-public record Ramp(Part capacitor, Part fixed, Optional<Pot> pot) {
+public record Ramp(Part capacitor, Part fixed, Optional<Pot> pot, Trimmers trimmers) {
     /** No wiper's contact is nothing, and no circuit can tell less from this, ohm. */
     private static final double LEAST_OHMS = 0.01;
 
@@ -17,7 +18,29 @@ public record Ramp(Part capacitor, Part fixed, Optional<Pot> pot) {
         Require.positive("ramp capacitor", capacitor.value());
         if (pot.isEmpty()) {
             Require.positive("fixed ramp resistor", fixed.value());
+            if (trimmers.low().isPresent()) {
+                throw new IllegalArgumentException(
+                        "a trimmer for the lowest setting lies across a pot, and there is none");
+            }
         }
+    }
+
+    /** A ramp without trimmers. */
+    public Ramp(Part capacitor, Part fixed, Optional<Pot> pot) {
+        this(capacitor, fixed, pot, Trimmers.NONE);
+    }
+
+    /** The fixed resistor and its trimmer at mid-track, ohm. */
+    public double seriesOhms() {
+        return fixed.value() + Trimmers.nominalOhms(trimmers.high());
+    }
+
+    /** What lies across the pot's used section, its trimmer at mid-track, ohm; POSITIVE_INFINITY for nothing. */
+    public double acrossOhms() {
+        Optional<Part> shunt = pot.flatMap(Pot::shunt);
+        return shunt.isEmpty() && trimmers.low().isEmpty()
+                ? Double.POSITIVE_INFINITY
+                : shunt.map(Part::value).orElse(0.0) + Trimmers.nominalOhms(trimmers.low());
     }
 
     /**
@@ -27,7 +50,9 @@ public record Ramp(Part capacitor, Part fixed, Optional<Pot> pot) {
      * @return ohms
      */
     public double rampOhms(double position) {
-        return Math.max(
-                LEAST_OHMS, fixed.value() + pot.map(p -> p.ohms(position)).orElse(0.0));
+        double used = pot.map(p ->
+                        Pot.ohms(p.trackShare(position), p.endOhms(), p.track().value(), acrossOhms()))
+                .orElse(0.0);
+        return Math.max(LEAST_OHMS, seriesOhms() + used);
     }
 }

@@ -121,7 +121,13 @@ final class SizeCommand implements Callable<Integer> {
         boolean shippedOnly = profiles != null
                 && Problems.word("--profiles", profiles, List.of("shipped")).equals("shipped");
         ProfileLibrary library = Inputs.libraryOf(session, file, shippedOnly);
-        PartialDesign partial = PartialDesign.read(source(), named("--free", free), named("--keep", keep), library);
+        Set<OpenPart> kept = EnumSet.noneOf(OpenPart.class);
+        kept.addAll(named("--keep", keep));
+        if (shape != null) {
+            // A straight knob wants the resistor across the pot for itself.
+            kept.addAll(EnumSet.of(OpenPart.ACROSS, OpenPart.TRIM_HIGH, OpenPart.TRIM_LOW));
+        }
+        PartialDesign partial = PartialDesign.read(source(), named("--free", free), kept, library);
         SizingRequest request = partial.request(library, series());
         SizingAnswer answer = compensate ? Sizing.proposeCompensated(request) : Sizing.propose(request);
         Optional<KnobShape> shaped = shaped(request, answer);

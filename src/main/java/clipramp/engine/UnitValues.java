@@ -8,6 +8,7 @@ import clipramp.circuit.Pot;
 import clipramp.circuit.ProgrammableUnijunction;
 import clipramp.circuit.Trigger.ProgrammableTrigger;
 import clipramp.circuit.Trigger.UnijunctionTrigger;
+import clipramp.circuit.Trimmers;
 import clipramp.circuit.Unijunction;
 import clipramp.circuit.Zener;
 
@@ -36,6 +37,10 @@ public final class UnitValues {
     public double trackOhms;
     /** Resistor across the pot's used section, ohm; POSITIVE_INFINITY for none. */
     public double potShuntOhms;
+    /** What the trimmer in series with the fixed resistor is set to, ohm; 0 for none. */
+    public double highTrimOhms;
+    /** What the trimmer across the pot is set to, in series with the resistor there, ohm; 0 for none. */
+    public double lowTrimOhms;
     /** R1, ohm. */
     public double baseOneOhms;
     /** R2, ohm. */
@@ -102,7 +107,9 @@ public final class UnitValues {
         fixedOhms = design.ramp().fixed().value();
         trackOhms = design.ramp().pot().map(p -> p.track().value()).orElse(0.0);
         potEndOhms = design.ramp().pot().map(Pot::endOhms).orElse(0.0);
-        potShuntOhms = design.ramp().pot().flatMap(Pot::shunt).map(Part::value).orElse(Double.POSITIVE_INFINITY);
+        highTrimOhms = Trimmers.nominalOhms(design.ramp().trimmers().high());
+        lowTrimOhms = Trimmers.nominalOhms(design.ramp().trimmers().low());
+        potShuntOhms = design.ramp().acrossOhms() - lowTrimOhms;
         baseOneOhms = design.trigger().baseOne().value();
         gateSeriesOhms = design.gate().series().value();
         gateShuntOhms = design.gate().shunt().map(Part::value).orElse(Double.POSITIVE_INFINITY);
@@ -175,7 +182,13 @@ public final class UnitValues {
 
     /** R_E of this unit with a share 0..1 of its track in use, ohm. */
     public double rampOhms(double trackShare) {
-        return fixedOhms + (trackOhms == 0 ? 0 : Pot.ohms(trackShare, potEndOhms, trackOhms, potShuntOhms));
+        double across = potShuntOhms + lowTrimOhms;
+        return fixedOhms + highTrimOhms + (trackOhms == 0 ? 0 : Pot.ohms(trackShare, potEndOhms, trackOhms, across));
+    }
+
+    /** The pot's used section by itself, nothing across it, ohm. */
+    public double usedTrackOhms(double trackShare) {
+        return potEndOhms + trackOhms * trackShare;
     }
 
     /**

@@ -2,7 +2,6 @@ package clipramp.faults;
 
 import clipramp.circuit.Design;
 import clipramp.circuit.GateDrive;
-import clipramp.circuit.Part;
 import clipramp.circuit.Pot;
 import clipramp.circuit.Stage;
 import clipramp.circuit.Trigger;
@@ -113,11 +112,16 @@ final class FiringFaults {
                     "fixed ramp resistor @ shorted",
                     n -> n.rampOhms = Math.max(SHORT_OHMS, n.rampOhms - fixed));
         }
-        design.ramp().pot().ifPresent(pot -> pot(pot, fixed));
+        design.ramp().trimmers().high().ifPresent(t -> trimmer("trim-high-open", "ramp.trim-high", OPEN_OHMS));
+        design.ramp().pot().ifPresent(pot -> pot(pot, design.ramp().seriesOhms()));
+    }
+
+    private void trimmer(String id, String key, double rampOhms) {
+        add(id, key, How.OPEN, "trimmer @ open", n -> n.rampOhms = rampOhms);
     }
 
     private void pot(Pot pot, double fixed) {
-        double shunt = pot.shunt().map(Part::value).orElse(Double.POSITIVE_INFINITY);
+        double shunt = design.ramp().acrossOhms();
         add(
                 "wiper-open",
                 "ramp.pot.track",

@@ -10,7 +10,13 @@ import clipramp.circuit.Design;
 import clipramp.circuit.GateDrive;
 import clipramp.circuit.Part;
 import clipramp.circuit.Pot;
+import clipramp.circuit.Ramp;
 import clipramp.circuit.Trigger;
+import clipramp.figures.Sheet.Hang;
+import clipramp.units.QuantityText;
+import clipramp.units.Unit;
+import java.util.List;
+import java.util.Optional;
 
 /** The lower band of the schematic, from the dropper to the gate. */
 final class FiringPart {
@@ -86,21 +92,25 @@ final class FiringPart {
         sheet.joint(Net.SUPPLY, RAMP_X, SUPPLY);
         if (design.ramp().pot().isPresent()) {
             Pot pot = design.ramp().pot().get();
-            symbols.resistor("ramp.fixed", Net.RAMP, RAMP_X, SUPPLY, RAMP_X, 23.2);
+            fixed(23.2);
             symbols.adjustable("ramp.pot.track", Net.RAMP, RAMP_X, 23.2, RAMP_X, EMITTER_Y);
             sheet.beside(
                     "ramp.pot.track", RIGHT_OF, RAMP_X + 1.6, 25.85, text.ofResistor("ramp.pot.track", pot.track()));
-            pot.shunt().ifPresent(this::potShunt);
+            if (Double.isFinite(design.ramp().acrossOhms())) {
+                potShunt(pot.shunt());
+            }
         } else {
-            symbols.resistor("ramp.fixed", Net.RAMP, RAMP_X, SUPPLY, RAMP_X, EMITTER_Y);
+            fixed(EMITTER_Y);
         }
         double middle = design.ramp().pot().isPresent() ? 21.1 : 23.75;
-        sheet.beside(
-                "ramp.fixed",
+        double aside = design.ramp().trimmers().high().isPresent() ? 1.5 : 1;
+        named(
                 RIGHT_OF,
-                RAMP_X + 1,
+                RAMP_X + aside,
                 middle,
-                text.ofResistor("ramp.fixed", design.ramp().fixed()));
+                "ramp.fixed",
+                Optional.of(design.ramp().fixed()),
+                "ramp.trim-high");
         sheet.joint(Net.RAMP, RAMP_X, EMITTER_Y);
         symbols.capacitor("ramp.capacitor", Net.RAMP, RAMP_X, EMITTER_Y, RAMP_X, COMMON);
         sheet.joint(Net.COMMON, RAMP_X, COMMON);
@@ -116,14 +126,47 @@ final class FiringPart {
         sheet.note(Net.RAMP, CENTRED, 37, EMITTER_Y + 1.7, "TP2");
     }
 
-    private void potShunt(Part shunt) {
+    private void fixed(double toY) {
+        if (design.ramp().trimmers().high().isPresent()) {
+            symbols.preset("ramp.fixed", Net.RAMP, RAMP_X, SUPPLY, RAMP_X, toY);
+        } else {
+            symbols.resistor("ramp.fixed", Net.RAMP, RAMP_X, SUPPLY, RAMP_X, toY);
+        }
+    }
+
+    /** A trimmer and the resistor in series with it share one symbol and are told one under the other. */
+    private void named(Hang hang, double x, double y, String key, Optional<Part> part, String trimmerKey) {
+        Ramp ramp = design.ramp();
+        Optional<Part> trimmer = trimmerKey.equals("ramp.trim-high")
+                ? ramp.trimmers().high()
+                : ramp.trimmers().low();
+        double apart = trimmer.isPresent() && part.isPresent() ? 1.05 : 0;
+        if (trimmer.isEmpty()) {
+            part.ifPresent(p -> sheet.beside(key, hang, x, y, text.ofResistor(key, p)));
+        } else {
+            // Name and value apart: beside the zener there is room for no more.
+            part.ifPresent(p -> sheet.beside(key, hang, x, y - apart, twoLines(key, p)));
+            sheet.beside(trimmerKey, hang, x, y + apart, twoLines(trimmerKey, trimmer.get()));
+        }
+    }
+
+    private List<String> twoLines(String key, Part part) {
+        return List.of(text.name(key), QuantityText.format(part.value(), Unit.OHM));
+    }
+
+    private void potShunt(Optional<Part> shunt) {
+        Optional<Part> trimmer = design.ramp().trimmers().low();
         double x = RAMP_X - 2.6;
         sheet.wire(Net.RAMP, RAMP_X, 23.4, x, 23.4);
-        symbols.resistor("ramp.pot.shunt", Net.RAMP, x, 23.4, x, 28.1);
+        if (trimmer.isPresent()) {
+            symbols.preset("ramp.pot.shunt", Net.RAMP, x, 23.4, x, 28.1);
+        } else {
+            symbols.resistor("ramp.pot.shunt", Net.RAMP, x, 23.4, x, 28.1);
+        }
         sheet.wire(Net.RAMP, x, 28.1, RAMP_X, 28.1);
         sheet.joint(Net.RAMP, RAMP_X, 23.4);
         sheet.joint(Net.RAMP, RAMP_X, 28.1);
-        sheet.beside("ramp.pot.shunt", LEFT_OF, x - 0.9, 25.75, text.ofResistor("ramp.pot.shunt", shunt));
+        named(LEFT_OF, x - (trimmer.isPresent() ? 1.5 : 0.9), 25.75, "ramp.pot.shunt", shunt, "ramp.trim-low");
     }
 
     private void unijunction(Trigger.UnijunctionTrigger trigger) {

@@ -60,6 +60,15 @@ final class Symbols {
         });
     }
 
+    /** A resistor with a barred line across it: set once (IEC 60617, pre-set adjustability). */
+    void preset(String key, Net net, double x1, double y1, double x2, double y2) {
+        place(key, net, x1, y1, x2, y2, BODY / 2, mark -> {
+            mark.add(body(), false);
+            mark.add(Sheet.polyline(1.4, 0.85, -1.4, -0.85), false);
+            mark.add(Sheet.polyline(-1.634, -0.465, -1.166, -1.235), false);
+        });
+    }
+
     /** A filled arrowhead whose tip is at x, y, seen from a point behind it. */
     private static Shape arrowhead(double x, double y, double fromX, double fromY) {
         double length = Math.hypot(x - fromX, y - fromY);

@@ -108,6 +108,8 @@ public final class AsBuilt {
         parts.put("ramp.fixed", Optional.of(design.ramp().fixed()));
         parts.put("ramp.pot.track", design.ramp().pot().map(pot -> pot.track()));
         parts.put("ramp.pot.shunt", design.ramp().pot().flatMap(pot -> pot.shunt()));
+        parts.put("ramp.trim-high", design.ramp().trimmers().high());
+        parts.put("ramp.trim-low", design.ramp().trimmers().low());
         parts.put("trigger.base-one", Optional.of(design.trigger().baseOne()));
         if (design.trigger() instanceof UnijunctionTrigger trigger) {
             parts.put("trigger.base-two", Optional.of(trigger.baseTwo()));

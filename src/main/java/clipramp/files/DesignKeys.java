@@ -191,7 +191,17 @@ final class DesignKeys {
                 part("ramp.pot.shunt", Unit.OHM, 10, 1e9)
                         .optional()
                         .by("pots with a resistor across")
-                        .means("Resistor across the used section of the pot; none where there is none."));
+                        .means("Resistor across the used section of the pot; none where there is none."),
+                part("ramp.trim-high", Unit.OHM, 10, 1e8)
+                        .optional()
+                        .by("ramps that are set on every unit")
+                        .means(
+                                "Trimmer in series with the fixed resistor, set on every unit at the highest wanted setting; the nominal unit has it at mid-track."),
+                part("ramp.trim-low", Unit.OHM, 10, 1e9)
+                        .optional()
+                        .by("ramps that are set on every unit")
+                        .means(
+                                "Trimmer across the pot, in series with ramp.pot.shunt, set on every unit at the lowest wanted setting; the nominal unit has it at mid-track."));
     }
 
     private static List<Key> trigger() {

@@ -191,7 +191,9 @@ public final class DesignWriter {
                 new FlowText()
                         .part("capacitor", ramp.capacitor(), Unit.FARAD)
                         .part("fixed", ramp.fixed(), Unit.OHM)
-                        .raw("pot", ramp.pot().map(DesignWriter::pot).orElse("none")));
+                        .raw("pot", ramp.pot().map(DesignWriter::pot).orElse("none"))
+                        .part("trim-high", ramp.trimmers().high(), Unit.OHM)
+                        .part("trim-low", ramp.trimmers().low(), Unit.OHM));
     }
 
     static String pot(Pot pot) {

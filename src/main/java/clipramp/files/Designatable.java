@@ -17,6 +17,8 @@ final class Designatable {
             "ramp.pot",
             "ramp.pot.track",
             "ramp.pot.shunt",
+            "ramp.trim-high",
+            "ramp.trim-low",
             "trigger.device",
             "trigger.base-one",
             "trigger.base-two",

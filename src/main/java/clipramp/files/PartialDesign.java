@@ -86,7 +86,10 @@ public record PartialDesign(DesignText text, LoadedDesign loaded, Set<OpenPart> 
         }
 
         private static boolean isOptional(OpenPart part) {
-            return part == OpenPart.SERIES || part == OpenPart.SHUNT || part == OpenPart.SINK;
+            return switch (part) {
+                case SERIES, SHUNT, SINK, ACROSS, TRIM_HIGH, TRIM_LOW -> true;
+                default -> false;
+            };
         }
 
         private Optional<String> value(String key) {
@@ -116,6 +119,13 @@ public record PartialDesign(DesignText text, LoadedDesign loaded, Set<OpenPart> 
             }
         }
 
+        /** A part that most designs do without; "none" keeps it out. */
+        private void mayBeAdded(OpenPart part) {
+            if (value(part.key()).isEmpty()) {
+                open.add(part);
+            }
+        }
+
         private boolean isStage(Stage stage) {
             return value("stage").equals(Optional.of(stage.word()));
         }
@@ -138,6 +148,9 @@ public record PartialDesign(DesignText text, LoadedDesign loaded, Set<OpenPart> 
             if (!value("ramp.pot").equals(Optional.of("none"))) {
                 boolean whole = value("ramp.pot").isEmpty();
                 fill(OpenPart.TRACK, "25 kΩ ±10 % 0.5 W");
+                mayBeAdded(OpenPart.ACROSS);
+                mayBeAdded(OpenPart.TRIM_HIGH);
+                mayBeAdded(OpenPart.TRIM_LOW);
                 if (whole) {
                     fill("ramp.pot.law", "linear");
                     fill("ramp.pot.sense", "falling");
@@ -169,7 +182,7 @@ public record PartialDesign(DesignText text, LoadedDesign loaded, Set<OpenPart> 
 
         private void gate() {
             boolean twin = isStage(Stage.INVERSE_PARALLEL);
-            boolean transformer = twin || isStage(Stage.TRIAC) && !isIsolated();
+            boolean transformer = twin || (isStage(Stage.TRIAC) && !isIsolated());
             fill("gate.coupling", transformer ? "transformer" : "direct");
             if (value("gate.coupling").equals(Optional.of("transformer"))) {
                 fill(

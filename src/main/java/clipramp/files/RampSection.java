@@ -5,6 +5,7 @@ import clipramp.circuit.Pot;
 import clipramp.circuit.PotLaw;
 import clipramp.circuit.PotLaw.Table.Point;
 import clipramp.circuit.Ramp;
+import clipramp.circuit.Trimmers;
 import clipramp.files.Node.Scalar;
 import clipramp.files.Node.Sequence;
 import clipramp.units.Expected;
@@ -37,6 +38,7 @@ final class RampSection {
         }
         Optional<Scope> potScope = scope.child("pot");
         Optional<Pot> pot = potScope.flatMap(this::pot);
+        Trimmers trimmers = new Trimmers(scope.optionalPart("trim-high"), scope.optionalPart("trim-low"));
         scope.close("");
         if (potScope.isPresent() && pot.isEmpty()) {
             return Optional.empty();
@@ -50,7 +52,14 @@ final class RampSection {
                     "read 0 Ω without a pot: the ramp would have no resistance at all. Give ramp.fixed a value.");
             return Optional.empty();
         }
-        return scope.make(before, () -> new Ramp(capacitor, fixed, pot));
+        if (pot.isEmpty() && trimmers.low().isPresent() && findings.count() == before) {
+            findings.problem(
+                    scope.placeOf("trim-low"),
+                    "ramp.trim-low",
+                    "a trimmer across a pot, and ramp.pot is none. Give a pot, or leave trim-low out.");
+            return Optional.empty();
+        }
+        return scope.make(before, () -> new Ramp(capacitor, fixed, pot, trimmers));
     }
 
     private Optional<Pot> pot(Scope scope) {

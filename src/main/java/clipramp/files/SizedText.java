@@ -50,6 +50,9 @@ public final class SizedText {
             case CAPACITOR -> Optional.of(FlowText.partText(design.ramp().capacitor(), Unit.FARAD));
             case FIXED -> ohms(design.ramp().fixed());
             case TRACK -> design.ramp().pot().flatMap(p -> ohms(p.track()));
+            case ACROSS -> design.ramp().pot().flatMap(p -> p.shunt()).flatMap(SizedText::ohms);
+            case TRIM_HIGH -> design.ramp().trimmers().high().flatMap(SizedText::ohms);
+            case TRIM_LOW -> design.ramp().trimmers().low().flatMap(SizedText::ohms);
             case TRIGGER_DEVICE -> Optional.of(design.trigger().deviceId());
             case BASE_ONE -> ohms(design.trigger().baseOne());
             case BASE_TWO -> design.trigger() instanceof UnijunctionTrigger u ? ohms(u.baseTwo()) : Optional.empty();

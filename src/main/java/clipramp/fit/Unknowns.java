@@ -6,6 +6,7 @@ import clipramp.circuit.Part;
 import clipramp.circuit.Pot;
 import clipramp.circuit.PotLaw;
 import clipramp.circuit.Trigger.UnijunctionTrigger;
+import clipramp.circuit.Trimmers;
 import clipramp.circuit.Unijunction;
 import clipramp.spread.Factor;
 import clipramp.spread.Factors;
@@ -29,6 +30,7 @@ final class Unknowns {
     private static final double ZENER = 0.05;
     private static final double STANDOFF = 0.15;
     private static final double DROP = 0.2;
+    private static final double LEAST_SETTING = 0.02;
 
     private final List<Unknown> unknowns = new ArrayList<>();
 
@@ -47,6 +49,7 @@ final class Unknowns {
                 all.factor(factor);
             }
         }
+        all.trimmers(design.ramp().trimmers());
         all.unstated(design);
         boolean byKnob = readings.lines().stream().anyMatch(l -> l.setting().kind() == Setting.Kind.KNOB);
         design.ramp().pot().filter(pot -> byKnob).ifPresent(all::law);
@@ -103,6 +106,26 @@ final class Unknowns {
             return Unit.PER_KELVIN;
         }
         return path.endsWith("voltage") || path.endsWith("drop") || path.endsWith("offset") ? Unit.VOLT : Unit.OHM;
+    }
+
+    /** Nobody reads how a trimmer is set; the nominal unit has it at mid-track, so that a track of twice the setting says it. */
+    private void trimmers(Trimmers trimmers) {
+        trimmers.high().ifPresent(t -> trimmer("ramp.trim-high", t, "first", (u, v) -> u.values.highTrimOhms = v / 2));
+        trimmers.low().ifPresent(t -> trimmer("ramp.trim-low", t, "second", (u, v) -> u.values.lowTrimOhms = v / 2));
+    }
+
+    private void trimmer(String path, Part track, String which, Unknown.Slot slot) {
+        double value = track.value();
+        add(
+                path,
+                "twice the setting of the " + which + " trimmer",
+                Unit.OHM,
+                LEAST_SETTING * value,
+                value,
+                2 * track.highest(),
+                false,
+                Unknown.WRONG_PART,
+                slot);
     }
 
     /** What a fit is asked for first, where the design gives it no limits. */

@@ -43,8 +43,8 @@ final class PartEnds {
         Ramp ramp = design.ramp();
         part(clip.dropper(), part -> design.withClip(withDropper(clip, part)));
         characteristic(clip.zener().volts(), volts -> design.withClip(withZener(clip, volts)));
-        part(ramp.capacitor(), part -> design.withRamp(new Ramp(part, ramp.fixed(), ramp.pot())));
-        part(ramp.fixed(), part -> design.withRamp(new Ramp(ramp.capacitor(), part, ramp.pot())));
+        part(ramp.capacitor(), part -> design.withRamp(new Ramp(part, ramp.fixed(), ramp.pot(), ramp.trimmers())));
+        part(ramp.fixed(), part -> design.withRamp(new Ramp(ramp.capacitor(), part, ramp.pot(), ramp.trimmers())));
         ramp.pot().ifPresent(pot -> part(pot.track(), part -> design.withRamp(withTrack(ramp, pot, part))));
         if (design.trigger() instanceof Trigger.UnijunctionTrigger trigger) {
             unijunction(design, trigger);
@@ -116,7 +116,8 @@ final class PartEnds {
         return new Ramp(
                 ramp.capacitor(),
                 ramp.fixed(),
-                Optional.of(new Pot(track, pot.endOhms(), pot.law(), pot.sense(), pot.shunt())));
+                Optional.of(new Pot(track, pot.endOhms(), pot.law(), pot.sense(), pot.shunt())),
+                ramp.trimmers());
     }
 
     private static Unijunction with(Unijunction device, Characteristic standoff, Characteristic interbase) {

@@ -163,6 +163,20 @@ final class PartsSection {
             part(grid, "ramp.pot.track", pot(pot), pot.track(), Unit.OHM);
             pot.shunt().ifPresent(shunt -> part(grid, "ramp.pot.shunt", "resistor across the pot", shunt, Unit.OHM));
         });
+        design.ramp()
+                .trimmers()
+                .high()
+                .ifPresent(trimmer -> part(
+                        grid,
+                        "ramp.trim-high",
+                        "trimmer in series with it, set at the highest setting",
+                        trimmer,
+                        Unit.OHM));
+        design.ramp()
+                .trimmers()
+                .low()
+                .ifPresent(trimmer -> part(
+                        grid, "ramp.trim-low", "trimmer across the pot, set at the lowest setting", trimmer, Unit.OHM));
     }
 
     private static String pot(Pot pot) {

@@ -12,6 +12,7 @@ import clipramp.circuit.ThyristorDevice;
 import clipramp.circuit.Trigger;
 import clipramp.circuit.Trigger.ProgrammableTrigger;
 import clipramp.circuit.Trigger.UnijunctionTrigger;
+import clipramp.circuit.Trimmers;
 import clipramp.circuit.Unijunction;
 import clipramp.circuit.Zener;
 import java.util.Optional;
@@ -34,22 +35,47 @@ final class Edit {
     }
 
     static Design capacitor(Design design, Part capacitor) {
-        return design.withRamp(
-                new Ramp(capacitor, design.ramp().fixed(), design.ramp().pot()));
+        return design.withRamp(new Ramp(
+                capacitor,
+                design.ramp().fixed(),
+                design.ramp().pot(),
+                design.ramp().trimmers()));
     }
 
     static Design fixed(Design design, Part fixed) {
-        return design.withRamp(
-                new Ramp(design.ramp().capacitor(), fixed, design.ramp().pot()));
+        return design.withRamp(new Ramp(
+                design.ramp().capacitor(),
+                fixed,
+                design.ramp().pot(),
+                design.ramp().trimmers()));
     }
 
     static Design pot(Design design, Pot pot) {
-        return design.withRamp(new Ramp(design.ramp().capacitor(), design.ramp().fixed(), Optional.of(pot)));
+        Ramp r = design.ramp();
+        return design.withRamp(new Ramp(r.capacitor(), r.fixed(), Optional.of(pot), r.trimmers()));
     }
 
     static Design track(Design design, Part track) {
         Pot pot = design.ramp().pot().orElseThrow();
         return pot(design, new Pot(track, pot.endOhms(), pot.law(), pot.sense(), pot.shunt()));
+    }
+
+    static Design trimHigh(Design design, Optional<Part> high) {
+        Ramp r = design.ramp();
+        return design.withRamp(new Ramp(
+                r.capacitor(),
+                r.fixed(),
+                r.pot(),
+                new Trimmers(high, r.trimmers().low())));
+    }
+
+    static Design trimLow(Design design, Optional<Part> across, Optional<Part> low) {
+        Ramp r = design.ramp();
+        return design.withRamp(new Ramp(
+                r.capacitor(),
+                r.fixed(),
+                r.pot().map(p -> new Pot(p.track(), p.endOhms(), p.law(), p.sense(), across)),
+                new Trimmers(r.trimmers().high(), low)));
     }
 
     static Design device(Design design, Unijunction device) {

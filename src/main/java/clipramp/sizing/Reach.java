@@ -158,6 +158,15 @@ record Reach(
         return KnobSearch.firingRadForWatts(design, at, watts).orElse(watts > 0 ? EARLY_RAD : Math.PI);
     }
 
+    /**
+     * What R_E another unit needs to fire where the nominal one does with one of its own, as a share of that; at the
+     * nominal condition.
+     */
+    static double share(Design design, Design unit, double ohms) {
+        Condition at = design.nominalCondition();
+        return ohmsFor(unit, at, firing(design, at, ohms), ohms).ohms() / ohms;
+    }
+
     /** R_E corrected for another condition, the firing instant taken as straight over so small a step. */
     private static double moved(Found found, Solution there, double targetRad) {
         double rad = firstRad(there);

@@ -71,7 +71,10 @@ public final class Reasons {
             case DROPPER -> Optional.of(dropper());
             case CAPACITOR -> Optional.of(capacitor());
             case FIXED -> Optional.of(fixed());
-            case TRACK -> design.ramp().pot().map(p -> track(p.track()));
+            case TRACK -> design.ramp().pot().map(p -> track());
+            case ACROSS -> across();
+            case TRIM_HIGH -> design.ramp().trimmers().high().map(t -> trimHigh());
+            case TRIM_LOW -> design.ramp().trimmers().low().map(t -> trimLow());
             case TRIGGER_DEVICE -> Optional.of(device());
             case BASE_ONE -> Optional.of(baseOne());
             case BASE_TWO -> baseTwo();
@@ -107,10 +110,34 @@ public final class Reasons {
                 + ", at least " + text(Math.max(reach.valley(), reach.clip()), Unit.OHM);
     }
 
-    private String track(Part track) {
+    private String track() {
         return "R_E for the lowest setting: at least " + text(reach.lowestFrom(), Unit.OHM)
                 + ", before the collapse at most " + text(reach.collapse(), Unit.OHM) + "; with this track "
                 + text(Math.max(design.ramp().rampOhms(0), design.ramp().rampOhms(1)), Unit.OHM);
+    }
+
+    private Optional<String> across() {
+        return design.ramp()
+                .pot()
+                .flatMap(p -> p.shunt())
+                .map(s -> "with its trimmer at the low end the slowest unit still fires before the collapse");
+    }
+
+    private String trimHigh() {
+        return "set on every unit at the highest setting: R_E there from " + ofUnit(CornerUnits.slowest(design), 1)
+                + " for the slowest unit to " + ofUnit(CornerUnits.fastest(design), 1) + " for the fastest";
+    }
+
+    private String trimLow() {
+        return "set on every unit at the lowest setting: R_E there from " + ofUnit(CornerUnits.slowest(design), 0)
+                + " for the slowest unit to " + ofUnit(CornerUnits.fastest(design), 0) + " for the fastest";
+    }
+
+    private static String ofUnit(Design unit, int end) {
+        double position = end == 1
+                ? unit.wanted().highest().map(g -> g.position()).orElse(1.0)
+                : unit.wanted().lowest().map(g -> g.position()).orElse(0.0);
+        return text(unit.ramp().rampOhms(position), Unit.OHM);
     }
 
     private String device() {
@@ -199,6 +226,10 @@ public final class Reasons {
             case CAPACITOR -> text(d.ramp().capacitor().value(), Unit.FARAD);
             case FIXED -> ohms(d.ramp().fixed());
             case TRACK -> d.ramp().pot().map(p -> ohms(p.track())).orElse("");
+            case ACROSS ->
+                d.ramp().pot().flatMap(p -> p.shunt()).map(Reasons::ohms).orElse("none");
+            case TRIM_HIGH -> d.ramp().trimmers().high().map(Reasons::ohms).orElse("none");
+            case TRIM_LOW -> d.ramp().trimmers().low().map(Reasons::ohms).orElse("none");
             case TRIGGER_DEVICE -> d.trigger().deviceId();
             case BASE_ONE -> ohms(d.trigger().baseOne());
             case BASE_TWO -> d.trigger() instanceof UnijunctionTrigger u ? ohms(u.baseTwo()) : "";

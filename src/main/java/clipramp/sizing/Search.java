@@ -127,7 +127,8 @@ final class Search {
         return best;
     }
 
-    private List<Design> capacitors(Design design) {
+    /** The design, and with its capacitor some values up and down where that is open, nearest first. */
+    List<Design> capacitors(Design design) {
         List<Design> all = new ArrayList<>(List.of(design));
         if (request.isOpen(OpenPart.CAPACITOR)) {
             Design up = design;

@@ -38,13 +38,46 @@ public final class Sizing {
      */
     public static SizingAnswer propose(SizingRequest request, Watch watch) {
         Search search = new Search(request, watch);
-        return answer(search.polished(search.climb(Start.of(request))), search.all());
+        Judged plain = search.polished(search.climb(Start.of(request)));
+        return answer(trimmed(request, search, plain), search.all());
+    }
+
+    /** Where units stray too far, the first with trimmers that holds for every one; else what there was. */
+    private static Kept trimmed(SizingRequest request, Search search, Judged plain) {
+        Kept best = Kept.of(plain);
+        if (!plain.grade().holds() || best.corners().isEmpty()) {
+            return best;
+        }
+        for (Design from : search.capacitors(plain.design())) {
+            Reach reach = Reach.of(from);
+            for (Design design : Trimming.of(request, from, reach)) {
+                Judged there = search.judge(design, reach);
+                Kept kept = there.grade().holds() ? Kept.of(there) : best;
+                if (kept.corners().size() < best.corners().size()) {
+                    best = kept;
+                }
+                if (best.corners().isEmpty()) {
+                    return best;
+                }
+            }
+        }
+        return best;
+    }
+
+    /**
+     * @param judged a design
+     * @param corners margins that fail for its fastest or slowest unit; empty too where nominal parts fail already
+     */
+    private record Kept(Judged judged, List<Margin> corners) {
+        static Kept of(Judged judged) {
+            return new Kept(judged, judged.grade().holds() ? CornerUnits.failures(judged.design()) : List.of());
+        }
     }
 
     /** The same for a design as it stands: nothing is chosen. */
     public static SizingAnswer judge(SizingRequest request, Design design) {
         Search search = new Search(request, Watch.NONE);
-        return answer(search.judge(design, Reach.of(design)), search.all());
+        return answer(Kept.of(search.judge(design, Reach.of(design))), search.all());
     }
 
     /**
@@ -62,8 +95,9 @@ public final class Sizing {
         return propose(request.decided(Edit.baseTwo(first.design(), part), OpenPart.BASE_TWO));
     }
 
-    private static SizingAnswer answer(Judged best, List<Judged> all) {
-        List<Margin> corners = best.grade().holds() ? CornerUnits.failures(best.design()) : List.of();
+    private static SizingAnswer answer(Kept kept, List<Judged> all) {
+        Judged best = kept.judged();
+        List<Margin> corners = kept.corners();
         Outcome outcome =
                 !best.grade().holds() ? Outcome.NOTHING : corners.isEmpty() ? Outcome.WORST_CASE : Outcome.NOMINAL;
         return new SizingAnswer(
@@ -71,7 +105,7 @@ public final class Sizing {
                 best.check(),
                 outcome,
                 corners,
-                best.timing().yield(),
+                corners.isEmpty() && best.grade().holds() ? 1 : best.timing().yield(),
                 best.timing().deadTravel(),
                 Grade.watts(best.check().dissipation()),
                 conflicts(best, all),

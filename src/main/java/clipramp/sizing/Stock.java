@@ -17,6 +17,9 @@ public record Stock(List<Unijunction> unijunctions, List<ThyristorDevice> thyris
     /** Tracks that pots are sold with, in one decade (common practice; catalogues hold one of each pair). */
     private static final double[] TRACKS = {1, 2.2, 2.5, 4.7, 5};
 
+    /** Tracks that presets are sold with, in one decade (common practice). */
+    private static final double[] TRIMMERS = {1, 2, 2.5, 5};
+
     /** Ratings that resistors are sold with, W (common practice). */
     private static final double[] WATTS = {0.25, 0.5, 1, 2, 3, 5, 7, 10, 12, 17, 25, 50, 100};
 
@@ -36,9 +39,18 @@ public record Stock(List<Unijunction> unijunctions, List<ThyristorDevice> thyris
 
     /** Every track between two resistances in ohms, rising. */
     static List<Double> tracks(double leastOhms, double mostOhms) {
+        return sold(TRACKS, leastOhms, mostOhms);
+    }
+
+    /** Every preset's track between two resistances in ohms, rising. */
+    static List<Double> trimmers(double leastOhms, double mostOhms) {
+        return sold(TRIMMERS, leastOhms, mostOhms);
+    }
+
+    private static List<Double> sold(double[] decadeOf, double leastOhms, double mostOhms) {
         List<Double> tracks = new java.util.ArrayList<>();
         for (int decade = 1; decade <= 6; decade++) {
-            for (double track : TRACKS) {
+            for (double track : decadeOf) {
                 double ohms = new java.math.BigDecimal(String.valueOf(track))
                         .scaleByPowerOfTen(decade)
                         .doubleValue();

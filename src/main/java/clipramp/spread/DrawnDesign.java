@@ -18,6 +18,9 @@ import java.util.OptionalDouble;
 
 /** A drawn unit as a design of its own, for the judge. A programmable device keeps its sheet's figures. */
 final class DrawnDesign {
+    /** What a trimmer at its end leaves, ohm. */
+    private static final double LEAST_OHMS = 0.01;
+
     private DrawnDesign() {}
 
     static Design of(Design design, UnitValues unit) {
@@ -62,17 +65,25 @@ final class DrawnDesign {
                 clip.winding());
     }
 
-    private static Ramp ramp(Ramp ramp, UnitValues unit) {
+    static Ramp ramp(Ramp ramp, UnitValues unit) {
         return new Ramp(
                 exact(ramp.capacitor(), unit.capacitorFarads),
-                exact(ramp.fixed(), unit.fixedOhms),
+                exact(ramp.fixed(), unit.fixedOhms + unit.highTrimOhms),
                 ramp.pot()
                         .map(pot -> new Pot(
                                 exact(pot.track(), unit.trackOhms),
                                 pot.endOhms(),
                                 pot.law(),
                                 pot.sense(),
-                                pot.shunt().map(p -> exact(p, unit.potShuntOhms)))));
+                                across(pot, unit))));
+    }
+
+    /** A set trimmer is as good as a resistor of that value. */
+    private static Optional<Part> across(Pot pot, UnitValues unit) {
+        double ohms = unit.potShuntOhms + unit.lowTrimOhms;
+        return Double.isInfinite(ohms)
+                ? Optional.empty()
+                : Optional.of(exact(pot.shunt().orElse(Part.of(ohms)), Math.max(LEAST_OHMS, ohms)));
     }
 
     private static Trigger trigger(Trigger trigger, UnitValues unit) {

@@ -62,17 +62,21 @@ final class Remedies {
     private void trimmer(Yield before, List<Remedy> remedies) {
         Design design = lot.design();
         double fixed = design.ramp().fixed().value();
-        design.wanted().highest().map(Goal::position).filter(p -> fixed > 0).ifPresent(position -> {
-            double share = WantedTest.share(design.ramp(), position);
-            UnitOutcome nominal = new UnitOutcome();
-            new UnitSolver(design).solve(lot.blank(), share, nominal);
-            Yield after = yieldOf(lot, (solver, unit) -> trim(solver, unit, share, nominal.latestRad(), fixed));
-            remedies.add(new Remedy(
-                    "ramp.fixed",
-                    "a trimmer in place of the fixed ramp resistor, set on each unit at the highest setting",
-                    after,
-                    after.share() - before.share()));
-        });
+        design.wanted()
+                .highest()
+                .map(Goal::position)
+                .filter(p -> fixed > 0 && design.ramp().trimmers().isNone())
+                .ifPresent(position -> {
+                    double share = WantedTest.share(design.ramp(), position);
+                    UnitOutcome nominal = new UnitOutcome();
+                    new UnitSolver(design).solve(lot.blank(), share, nominal);
+                    Yield after = yieldOf(lot, (solver, unit) -> trim(solver, unit, share, nominal.latestRad(), fixed));
+                    remedies.add(new Remedy(
+                            "ramp.fixed",
+                            "a trimmer in place of the fixed ramp resistor, set on each unit at the highest setting",
+                            after,
+                            after.share() - before.share()));
+                });
     }
 
     /** The firing instant is nearly proportional to R_E: a few proportional steps end within a hundredth of a degree. */
@@ -96,6 +100,7 @@ final class Remedies {
                     int holding = 0;
                     for (int i = c * CHUNK; i < Math.min(units, (c + 1) * CHUNK); i++) {
                         of.draw(i, unit);
+                        solver.prepare(unit);
                         adjust.accept(solver, unit);
                         holding += wanted.holds(solver, unit) ? 1 : 0;
                     }

@@ -89,6 +89,7 @@ final class Sampling {
 
     private void draw(Tools tools, int number) {
         lot.draw(number, tools.unit);
+        tools.solver.prepare(tools.unit);
         UnitOutcome outcome = tools.outcome;
         for (int p = 0; p < shares.length; p++) {
             tools.solver.solve(tools.unit, shares[p], outcome);

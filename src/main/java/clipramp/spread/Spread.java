@@ -58,7 +58,9 @@ public final class Spread {
             spreads.add(position(lot, sampling, p, position, shares[p]));
         }
         boolean wanted = new WantedTest(design).isAsked();
-        int lotUnits = Math.min(SwiftPoint.suits(design) ? LOT_UNITS : SLOW_LOT_UNITS, options.samples());
+        // Setting a unit's trimmers costs a dozen solutions.
+        boolean fast = SwiftPoint.suits(design) && design.ramp().trimmers().isNone();
+        int lotUnits = Math.min(fast ? LOT_UNITS : SLOW_LOT_UNITS, options.samples());
         double middle = WantedTest.share(design.ramp(), MID_KNOB);
         Judged judged =
                 more ? judged(lot, Math.min(options.judged(), sampling.done()), watch) : new Judged(0, 0, Map.of());
@@ -89,10 +91,12 @@ public final class Spread {
                 sampling.misfires(p),
                 sampling.share(p, FiringState.HUNTS),
                 extremes(lot, sampling.firingRad[p], sampling.done(), unit -> {
+                    solver.prepare(unit);
                     solver.solve(unit, trackShare, outcome);
                     return outcome.latestRad();
                 }),
                 extremes(lot, sampling.fraction[p], sampling.done(), unit -> {
+                    solver.prepare(unit);
                     solver.solve(unit, trackShare, outcome);
                     return outcome.fraction;
                 }));
@@ -131,6 +135,7 @@ public final class Spread {
                     }
                     UnitValues unit = lot.blank();
                     lot.draw(number, unit);
+                    new UnitSolver(lot.design()).prepare(unit);
                     Check check = Judge.check(
                             DrawnDesign.of(lot.design(), unit),
                             OptionalDouble.of(unit.lineVolts),

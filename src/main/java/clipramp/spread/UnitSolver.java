@@ -20,10 +20,19 @@ final class UnitSolver {
     private final Design design;
     private final Network network = new Network();
     private final @Nullable SwiftPoint swift;
+    private final @Nullable TrimmerSetting setting;
 
     UnitSolver(Design design) {
         this.design = design;
         swift = SwiftPoint.suits(design) ? new SwiftPoint(design) : null;
+        setting = design.ramp().trimmers().isNone() ? null : new TrimmerSetting(design, this);
+    }
+
+    /** Sets the trimmers of a drawn unit, at nominal line and temperature, as its maker would; without any nothing moves. */
+    void prepare(UnitValues unit) {
+        if (setting != null) {
+            setting.set(unit);
+        }
     }
 
     /**

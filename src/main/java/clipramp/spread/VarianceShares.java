@@ -73,7 +73,9 @@ final class VarianceShares {
         UnitValues unit = lot.blank();
         factor.slot().set(unit, value);
         UnitOutcome outcome = new UnitOutcome();
-        new UnitSolver(lot.design()).solve(unit, share, outcome);
+        UnitSolver solver = new UnitSolver(lot.design());
+        solver.prepare(unit);
+        solver.solve(unit, share, outcome);
         return outcome;
     }
 
@@ -91,6 +93,7 @@ final class VarianceShares {
                     long seed = lot.seed() + (k == exchanged ? OTHER_LOT : lotOffset);
                     factor.slot().set(unit, factor.value(Chance.of(seed, i, k), lot.law()));
                 }
+                solver.prepare(unit);
                 solver.solve(unit, share, outcome);
                 fractions[i] = outcome.fraction;
             }

@@ -15,6 +15,7 @@ import clipramp.circuit.Stage;
 import clipramp.circuit.StageDiodes;
 import clipramp.circuit.Tolerance;
 import clipramp.circuit.Trigger;
+import clipramp.circuit.Trimmers;
 import clipramp.circuit.Winding;
 import java.awt.geom.Rectangle2D;
 import java.util.ArrayList;
@@ -46,7 +47,9 @@ class CircuitFigureTest {
                 for (GateDrive gate : gates(stage)) {
                     Load load = loads.get(turn % loads.size());
                     Design trigger = turn % 2 == 0 ? SampleDesigns.heater() : SampleDesigns.programmableHeater();
-                    Ramp ramp = turn % 5 == 4 ? fixedRamp() : turn % 5 == 3 ? shuntedRamp() : trigger.ramp();
+                    Ramp ramp = turn % 5 == 4
+                            ? fixedRamp()
+                            : turn % 5 == 3 ? shuntedRamp() : turn % 5 == 2 ? trimmedRamp() : trigger.ramp();
                     String name = stage.word() + " " + supply.tap().word() + " "
                             + supply.rectifier().word() + " " + (supply.isIsolated() ? "winding " : "")
                             + gate.coupling().word() + " " + trigger.trigger().deviceId() + " " + load.word() + " "
@@ -99,7 +102,8 @@ class CircuitFigureTest {
         Ramp ramp = design.ramp();
         Part capacitor = new Part(
                 470e-9, new Tolerance(0.1, 0.1), java.util.OptionalDouble.empty(), java.util.OptionalDouble.of(63));
-        Design longer = design.withRamp(new Ramp(capacitor, SampleDesigns.part(2_700, 0.01, 0.25), ramp.pot()))
+        Design longer = design.withRamp(
+                        new Ramp(capacitor, SampleDesigns.part(2_700, 0.01, 0.25), ramp.pot(), ramp.trimmers()))
                 .withTrigger(
                         design.trigger() instanceof Trigger.ProgrammableTrigger p
                                 ? new Trigger.ProgrammableTrigger(
@@ -114,6 +118,17 @@ class CircuitFigureTest {
 
     private static Ramp fixedRamp() {
         return new Ramp(SampleDesigns.part(100e-9, 0.1, 0.1), SampleDesigns.part(33_000, 0.05, 0.25), Optional.empty());
+    }
+
+    private static Ramp trimmedRamp() {
+        Ramp ramp = shuntedRamp();
+        return new Ramp(
+                ramp.capacitor(),
+                ramp.fixed(),
+                ramp.pot(),
+                new Trimmers(
+                        Optional.of(SampleDesigns.part(5_000, 0.2, 0.5)),
+                        Optional.of(SampleDesigns.part(470_000, 0.2, 0.5))));
     }
 
     private static Ramp shuntedRamp() {

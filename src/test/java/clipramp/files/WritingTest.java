@@ -106,6 +106,8 @@ class WritingTest {
                 "gate.charge-time | 30 us",
                 "derating.resistors | 60 %",
                 "ramp.pot.shunt | 1 MΩ",
+                "ramp.trim-high | 5 kΩ ±20 %",
+                "ramp.trim-low | 470 kΩ",
                 "clip.winding | {primary: 230 V, secondary: 24 V}",
                 "trigger.device.standoff | 0.7",
                 "trigger.device.valley.current | 9 mA",

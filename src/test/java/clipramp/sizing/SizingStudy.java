@@ -60,6 +60,27 @@ final class SizingStudy {
                                     .verdict()
                             != Verdict.FAILS;
             rechecked += holds == answer.holds() ? 1 : 0;
+            if (answer.outcome() == Outcome.NOMINAL) {
+                OUT.println("  " + seed + " nominal only, "
+                        + Requests.text(seed).lines().skip(2).limit(2).collect(Collectors.joining(" ")) + " "
+                        + answer.design()
+                                .ramp()
+                                .trimmers()
+                                .high()
+                                .map(t -> t.value())
+                                .orElse(0.0) + " "
+                        + answer.design()
+                                .ramp()
+                                .trimmers()
+                                .low()
+                                .map(t -> t.value())
+                                .orElse(0.0) + ": "
+                        + answer.cornerFailures().stream()
+                                .map(m -> m.id() + " "
+                                        + String.format(
+                                                Locale.ROOT, "%.2f", m.ratio().orElse(Double.NaN)))
+                                .collect(Collectors.joining(", ")));
+            }
             if (seed <= spreads) {
                 double there = Spread.run(answer.design(), new SpreadOptions(200, 1, DrawLaw.NORMAL, 0), Watch.NONE)
                         .wanted()

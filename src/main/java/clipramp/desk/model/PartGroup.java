@@ -33,6 +33,10 @@ public enum PartGroup {
                 }
                 keys.addAll(List.of("ramp.pot.sense", "ramp.pot.shunt"));
             });
+            keys.add("ramp.trim-high");
+            if (design.ramp().pot().isPresent()) {
+                keys.add("ramp.trim-low");
+            }
             return keys;
         }
     },

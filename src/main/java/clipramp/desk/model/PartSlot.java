@@ -45,6 +45,8 @@ public record PartSlot(
             Map.entry("ramp.pot.half", "share at half turn"),
             Map.entry("ramp.pot.sense", "R clockwise"),
             Map.entry("ramp.pot.shunt", "across the pot"),
+            Map.entry("ramp.trim-high", "trimmer, high end"),
+            Map.entry("ramp.trim-low", "trimmer, low end"),
             Map.entry("trigger.upper", "upper resistor"),
             Map.entry("trigger.lower", "lower resistor"),
             Map.entry("gate.series", "series resistor"),
