@@ -263,7 +263,9 @@ public final class Reasons {
         boolean reaching = moves && part != OpenPart.FIXED && part != OpenPart.TRACK;
         Timing timing = Timing.of(there, reaching ? Reach.of(there) : reach);
         List<String> changes = new ArrayList<>();
-        changed(changes, "yield", timing.yield(), answer.yield(), Unit.FRACTION);
+        if (!Trimming.isIn(design)) {
+            changed(changes, "yield", timing.yield(), answer.yield(), Unit.FRACTION);
+        }
         changed(changes, "dead travel", timing.deadTravel(), answer.deadTravel(), Unit.FRACTION);
         changed(changes, "heat", Grade.watts(check.dissipation()), answer.watts(), Unit.WATT);
         mostMoved(part, check).ifPresent(changes::add);

@@ -58,12 +58,23 @@ final class Start {
 
     static Design of(SizingRequest request) {
         Start start = new Start(request);
+        start.bare();
         start.thyristor();
         start.supply();
         start.trigger();
         start.gate();
         start.ramp();
         return start.design;
+    }
+
+    /** Trimmers and what lies across the pot come last, if they are needed at all. */
+    private void bare() {
+        if (request.isOpen(OpenPart.TRIM_HIGH)) {
+            design = Edit.trimHigh(design, Optional.empty());
+        }
+        if (request.isOpen(OpenPart.TRIM_LOW) && request.isOpen(OpenPart.ACROSS)) {
+            design = Edit.trimLow(design, Optional.empty(), Optional.empty());
+        }
     }
 
     /** A resistor of the request's series; the finer series are made to a finer tolerance (IEC 60063). */
