@@ -6,11 +6,14 @@ import clipramp.circuit.Design;
 import clipramp.circuit.Part;
 import clipramp.circuit.Pot;
 import clipramp.circuit.ProgrammableUnijunction;
+import clipramp.circuit.RefusedCircuit;
 import clipramp.circuit.Trigger.ProgrammableTrigger;
 import clipramp.circuit.Trigger.UnijunctionTrigger;
 import clipramp.circuit.Trimmers;
 import clipramp.circuit.Unijunction;
 import clipramp.circuit.Zener;
+import clipramp.units.QuantityText;
+import clipramp.units.Unit;
 
 /**
  * One unit built to a design, as plain numbers: what its parts and devices really are at 25 °C, and what line and
@@ -196,13 +199,14 @@ public final class UnitValues {
      *
      * @param n network to fill
      * @param rampOhms R_E, ohm
-     * @throws clipramp.circuit.RefusedCircuit where the device's data contradict themselves
+     * @throws RefusedCircuit where the device's data contradict themselves
      */
     public void fill(Network n, double rampOhms) {
         double warmth = celsius - SHEET_CELSIUS;
         n.dropperOhms = dropperOhms;
         n.zenerSlopeOhms = zenerSlopeOhms;
-        n.zenerKneeVolts = zenerVolts * (1 + zenerDrift * warmth) - zenerSlopeOhms * zenerTestAmps;
+        n.zenerKneeVolts =
+                warmed("clip.zener", "zener voltage", zenerVolts, zenerDrift) - zenerSlopeOhms * zenerTestAmps;
         n.rampOhms = rampOhms;
         n.capacitorFarads = capacitorFarads;
         n.baseOneOhms = baseOneOhms;
@@ -218,7 +222,7 @@ public final class UnitValues {
         } else {
             n.baseTwoOhms = baseTwoOhms;
             n.standoff = standoff;
-            n.interbaseOhms = interbaseOhms * (1 + interbaseDrift * warmth);
+            n.interbaseOhms = warmed("trigger.device", "interbase resistance", interbaseOhms, interbaseDrift);
             n.emitterDropVolts = emitterDropVolts + emitterDrift * warmth;
             n.modulatedOhms = modulatedOhms(n.interbaseOhms);
             n.onOhms = EmitterLine.slopeOhms(this);
@@ -226,6 +230,19 @@ public final class UnitValues {
         }
         gate.fill(n, this);
         n.derive();
+    }
+
+    /** A sheet's value at this unit's temperature; a drift that leaves nothing of it is no drift of a real part. */
+    private double warmed(String path, String name, double at25, double driftPerKelvin) {
+        double share = 1 + driftPerKelvin * (celsius - SHEET_CELSIUS);
+        if (!(share > 0)) {
+            throw new RefusedCircuit(
+                    path,
+                    "with a drift of " + QuantityText.format(driftPerKelvin, Unit.PER_KELVIN)
+                            + " nothing is left of the " + name + " at " + celsius
+                            + " °C. Check the drift against the data sheet, or stay nearer to 25 °C.");
+        }
+        return at25 * share;
     }
 
     /** R_B2on for a base bar of so many ohms, ohm: V/I_B2(mod) where the sheet has it, else (1 - eta) R_BB. */

@@ -1,5 +1,6 @@
 package clipramp.firing;
 
+import clipramp.circuit.RefusedCircuit;
 import clipramp.engine.Event;
 import clipramp.engine.Mode;
 import clipramp.engine.Piece;
@@ -71,7 +72,11 @@ final class HalfCycleRun {
         supply.zener(false, stepper.clips(), 0);
         for (int events = 0; ; events++) {
             if (events > MOST_EVENTS) {
-                throw new ArithmeticException("a half cycle with more than " + MOST_EVENTS + " events");
+                throw new RefusedCircuit(
+                        "trigger.device",
+                        "the circuit switches more than " + MOST_EVENTS
+                                + " times within one half cycle, too often to be"
+                                + " followed. Check the device's valley point, or make ramp.capacitor larger.");
             }
             double from = stepper.seconds();
             boolean clippedBefore = stepper.clips();
