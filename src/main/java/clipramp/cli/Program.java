@@ -1,6 +1,6 @@
 package clipramp.cli;
 
-import org.jspecify.annotations.Nullable;
+import clipramp.files.Release;
 
 /** Who answers. */
 final class Program {
@@ -13,9 +13,8 @@ final class Program {
         return NAME + " " + version();
     }
 
-    /** Such as 0.1.0; it stands in the jar's manifest. */
+    /** Such as 0.1.0. */
     static String version() {
-        @Nullable String version = Program.class.getPackage().getImplementationVersion();
-        return version == null ? "unpackaged" : version;
+        return Release.version();
     }
 }

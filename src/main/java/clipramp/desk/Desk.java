@@ -10,6 +10,7 @@ import clipramp.desk.model.Workers;
 import clipramp.desk.model.Workshop;
 import clipramp.figures.Palette;
 import clipramp.files.ProfileLibrary;
+import clipramp.files.Release;
 import java.nio.file.Path;
 import java.util.Locale;
 import java.util.Map;
@@ -81,7 +82,7 @@ public final class Desk {
             Workshop workshop = new Workshop(this::library);
             DeskModel model = new DeskModel(workers, workshop, recovery, trouble -> actions[0].show(trouble));
             Late<RecordMaker> maker = new Late<>(
-                    () -> new RecordMaker(workers, workshop, version(), trouble -> actions[0].show(trouble)));
+                    () -> new RecordMaker(workers, workshop, Release.version(), trouble -> actions[0].show(trouble)));
             actions[0] = new WindowActions(model, maker, recovery, places, workers, closed);
             Theme theme = new Theme(Palette.PAPER, 1);
             DeskWindow window = new DeskWindow(stage, theme, model, maker, actions[0]);
@@ -110,11 +111,6 @@ public final class Desk {
                     "desk-theme");
             asking.setDaemon(true);
             asking.start();
-        }
-
-        private static String version() {
-            String packaged = Desk.class.getPackage().getImplementationVersion();
-            return packaged == null ? "unpackaged" : packaged;
         }
 
         private ProfileLibrary library(Optional<Path> file) {

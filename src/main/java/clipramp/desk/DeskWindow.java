@@ -17,6 +17,7 @@ import java.util.Objects;
 import java.util.Optional;
 import javafx.application.Platform;
 import javafx.scene.Scene;
+import javafx.scene.image.Image;
 import javafx.scene.input.TransferMode;
 import javafx.scene.layout.BorderPane;
 import javafx.scene.layout.FlowPane;
@@ -29,6 +30,7 @@ final class DeskWindow {
     private static final double HEIGHT = 768;
     private static final double LEAST_WIDTH = 640;
     private static final double LEAST_HEIGHT = 480;
+    private static final List<String> ICONS = List.of("icon-16.png", "icon-32.png", "icon-64.png");
 
     private final Stage stage;
     private final Theme theme;
@@ -81,6 +83,7 @@ final class DeskWindow {
         stage.setMinWidth(LEAST_WIDTH);
         stage.setMinHeight(LEAST_HEIGHT);
         stage.setTitle("clipramp");
+        ICONS.forEach(name -> stage.getIcons().add(new Image(DeskWindow.class.getResourceAsStream(name))));
         stage.setOnCloseRequest(event -> {
             event.consume();
             actions.close();

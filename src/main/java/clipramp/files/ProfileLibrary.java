@@ -8,6 +8,8 @@ import java.net.URI;
 import java.net.URISyntaxException;
 import java.net.URL;
 import java.nio.charset.StandardCharsets;
+import java.nio.file.FileSystem;
+import java.nio.file.FileSystems;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.security.CodeSource;
@@ -192,9 +194,15 @@ public final class ProfileLibrary {
         }
     }
 
-    // Class path resources cannot be listed, so the place that this class came from is walked: a folder or a jar.
+    // Class path resources cannot be listed, so the place that this class came from is walked: a folder, a jar, or the
+    // Java runtime itself, into which an application image has linked the program.
     private static List<String> shippedNames() {
         try {
+            Module module = ProfileLibrary.class.getModule();
+            if (module.isNamed()) {
+                FileSystem runtime = FileSystems.getFileSystem(URI.create("jrt:/"));
+                return namesInFolder(runtime.getPath("modules", module.getName(), ROOT));
+            }
             URL folder = ProfileLibrary.class.getClassLoader().getResource(ROOT);
             if (folder != null && folder.getProtocol().equals("file")) {
                 return namesInFolder(Path.of(folder.toURI()));
