@@ -19,11 +19,6 @@ import java.util.stream.Collectors;
 /** Faults for people: a symptom sheet, what burns next, and the ranking of what was seen. */
 final class FaultsText {
     private static final int BEST = 8;
-    private static final String LIVE =
-            "Take every point of the firing circuit as live at line potential, behind a winding too: its common is joined to"
-                    + " the thyristor. Whoever has to measure a live circuit uses isolated instruments and the practice that"
-                    + " local rules ask for; a reading near zero never means that a wire is dead.";
-
     private final Output out;
     private final LoadedDesign loaded;
     private final FaultSheet sheet;
@@ -38,7 +33,7 @@ final class FaultsText {
 
     void print(List<Diagnosis.Candidate> ranked, boolean meters) {
         CheckText.heading(out, loaded, sheet.condition());
-        out.lines(Paragraph.wrap(LIVE, ""));
+        out.lines(Paragraph.wrap(FaultSheet.LIVE, ""));
         out.line("");
         if (ranked.isEmpty()) {
             symptoms(meters);

@@ -9,6 +9,7 @@ import clipramp.desk.model.Resized;
 import clipramp.desk.model.Settings;
 import clipramp.figures.CircuitFigure;
 import clipramp.figures.Figure;
+import clipramp.figures.HarmonicsFigure;
 import java.nio.file.Path;
 import java.util.EnumMap;
 import java.util.List;
@@ -63,6 +64,8 @@ final class DeskWindow {
         this.bench = new Late<>(this::makeBench);
         this.spread = new Late<>(() -> new SpreadPage(theme, model.draft(), model.spread(), this::layBands));
         pages.put(Page.BENCH, bench);
+        pages.put(Page.LINE, new Late<>(() -> new LinePage(theme, model)));
+        pages.put(Page.FAULTS, new Late<>(() -> new FaultsPage(theme, model)));
         pages.put(Page.SPREAD, spread);
         pages.put(Page.FIT, new Late<>(() -> new FitPage(model.draft(), model.fitting(), actions)));
         pages.put(Page.SIZE, new Late<>(() -> new SizePage(theme, model.draft(), model.resizing())));
@@ -234,6 +237,10 @@ final class DeskWindow {
         return switch (what) {
             case LANES -> bench().lanes().figure().map(f -> (Figure) f);
             case KNOB -> bench().knob().figure().map(f -> (Figure) f);
+            case LINE ->
+                model.judgement()
+                        .flatMap(j -> j.check().lineCurrent())
+                        .map(check -> new HarmonicsFigure(check, model.line().setting()));
             case CIRCUIT -> model.draft().sheet().map(s -> new CircuitFigure(s.design()));
         };
     }

@@ -2,10 +2,8 @@ package clipramp.desk;
 
 import clipramp.desk.model.Trouble;
 import clipramp.figures.Figure;
-import clipramp.figures.NumberTable;
 import java.util.List;
 import java.util.function.Consumer;
-import javafx.beans.property.ReadOnlyStringWrapper;
 import javafx.scene.Node;
 import javafx.scene.control.ButtonBar.ButtonData;
 import javafx.scene.control.ButtonType;
@@ -13,7 +11,6 @@ import javafx.scene.control.Dialog;
 import javafx.scene.control.DialogPane;
 import javafx.scene.control.Label;
 import javafx.scene.control.ScrollPane;
-import javafx.scene.control.TableColumn;
 import javafx.scene.control.TableView;
 import javafx.scene.layout.Region;
 import javafx.scene.layout.VBox;
@@ -55,28 +52,11 @@ final class Dialogs {
 
     /** A figure's numbers. */
     void numbers(Figure figure) {
-        TableView<List<String>> view = table(figure.numbers());
+        TableView<List<String>> view = Tables.of(figure.numbers());
         view.setAccessibleText(figure.sentence());
         VBox box = new VBox(words(figure.sentence()), view);
         box.getStyleClass().add("start-column");
         show("numbers", figure.title(), box, List.of(CLOSE), answer -> {});
-    }
-
-    private static TableView<List<String>> table(NumberTable table) {
-        TableView<List<String>> view = new TableView<>();
-        view.getItems().setAll(table.rows());
-        for (int i = 0; i < table.heads().size(); i++) {
-            int column = i;
-            TableColumn<List<String>, String> head =
-                    new TableColumn<>(table.heads().get(i));
-            head.setCellValueFactory(
-                    row -> new ReadOnlyStringWrapper(row.getValue().get(column)));
-            head.setSortable(false);
-            head.setReorderable(false);
-            view.getColumns().add(head);
-        }
-        view.setColumnResizePolicy(TableView.CONSTRAINED_RESIZE_POLICY_ALL_COLUMNS);
-        return view;
     }
 
     Label words(String text) {

@@ -16,7 +16,7 @@ final class PageTabs {
     PageTabs(Actions actions) {
         for (Page page : Page.values()) {
             ToggleButton tab = new ToggleButton(page.words());
-            tab.setId("page-" + page.words().toLowerCase(Locale.ROOT));
+            tab.setId("page-" + page.name().toLowerCase(Locale.ROOT));
             tab.setAccessibleText("Page " + page.words());
             tab.setMinWidth(Region.USE_PREF_SIZE);
             tab.setOnAction(event -> actions.showPage(page));

@@ -3,12 +3,16 @@ package clipramp.desk;
 import clipramp.desk.model.Draft;
 import clipramp.desk.model.Sheet;
 import clipramp.desk.model.SpreadRun;
+import clipramp.desk.model.Trouble;
 import clipramp.figures.HistogramFigure;
 import clipramp.figures.SpreadFigure;
+import clipramp.files.Remedied;
 import clipramp.spread.DrawLaw;
+import clipramp.spread.Remedy;
 import clipramp.spread.SpreadOptions;
 import clipramp.spread.SpreadResult;
 import clipramp.spread.SpreadWords;
+import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
@@ -45,6 +49,8 @@ final class SpreadPage implements PageView {
     private final FigurePane spread;
     private final VBox words = new VBox();
     private final BorderPane box = new BorderPane();
+    private final VBox middle;
+    private final List<Button> taking = new ArrayList<>();
     private Optional<SpreadResult> told = Optional.empty();
 
     SpreadPage(Theme theme, Draft draft, SpreadRun run, Runnable bandsChanged) {
@@ -62,7 +68,7 @@ final class SpreadPage implements PageView {
         bands.setOnAction(event -> bandsChanged.run());
         words.getStyleClass().add("spread-words");
         words.setId("spread-words");
-        VBox middle = new VBox(histogram, spread, words);
+        middle = new VBox(histogram, spread, words);
         middle.getStyleClass().add("spread-middle");
         histogram.prefHeightProperty().bind(box.heightProperty().multiply(0.42));
         spread.prefHeightProperty().bind(box.heightProperty().multiply(0.55));
@@ -106,24 +112,18 @@ final class SpreadPage implements PageView {
         Label about =
                 new Label("Every tolerance, data-sheet limit, line and temperature of the design, drawn together.");
         about.setWrapText(true);
-        VBox side = new VBox(
-                about,
-                named("units", units),
-                named("parts lie", law),
-                named("seed", seed),
-                complaint,
-                start,
-                cancel,
-                bar,
-                progress,
-                bands);
-        side.getStyleClass().add("record-side");
-        ScrollPane sideScroll = new ScrollPane(side);
-        sideScroll.setFitToWidth(true);
-        sideScroll.setHbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);
-        sideScroll.setFocusTraversable(false);
-        sideScroll.getStyleClass().add("record-side-scroll");
-        box.setLeft(sideScroll);
+        box.setLeft(new SidePanel(
+                        about,
+                        named("units", units),
+                        named("parts lie", law),
+                        named("seed", seed),
+                        complaint,
+                        start,
+                        cancel,
+                        bar,
+                        progress,
+                        bands)
+                .node());
     }
 
     /** A control under its name. */
@@ -190,17 +190,25 @@ final class SpreadPage implements PageView {
             told = result;
             result.ifPresent(this::tell);
         }
+        boolean stale = !run.isRunning() && isStale();
+        Css.state(middle, "stale", stale);
+        taking.forEach(button -> button.setDisable(stale));
+    }
+
+    private boolean isStale() {
+        return run.answer().isPresent()
+                && draft.sheet().map(Sheet::loaded).flatMap(run::of).isEmpty();
     }
 
     private String over() {
-        boolean stands = draft.sheet().map(Sheet::loaded).flatMap(run::of).isPresent();
-        return run.answer().isEmpty() || stands ? "" : "The design has changed since; draw again.";
+        return isStale() ? "The design has changed since; draw again." : "";
     }
 
     private void tell(SpreadResult result) {
         spread.setVisible(true);
         spread.show(new SpreadFigure(result));
         words.getChildren().clear();
+        taking.clear();
         for (String sentence : SpreadWords.sentences(result)) {
             Label label = new Label(sentence);
             label.setWrapText(true);
@@ -210,16 +218,43 @@ final class SpreadPage implements PageView {
                 "What matters at mid-knob",
                 List.of("", "alone", "in all", "power from one limit to the other"),
                 SpreadWords.influences(result));
-        table("What would help", List.of("", "yield", "gain"), SpreadWords.remedies(result));
+        GridPane help = table("What would help", List.of("", "yield", "gain"), SpreadWords.remedies(result));
+        offer(help, SpreadWords.helping(result));
     }
 
-    private void table(String title, List<String> heads, List<List<String>> rows) {
+    /** Behind each remedy a button that writes it into the design; a trimmer has no key there. */
+    private void offer(GridPane grid, List<Remedy> remedies) {
+        for (int i = 0; i < remedies.size(); i++) {
+            Remedy remedy = remedies.get(i);
+            if (remedy.limits().isPresent()) {
+                Button take = new Button("Take over");
+                take.setId("take-" + remedy.path().replace('.', '-'));
+                take.setAccessibleText("Take over: " + remedy.change());
+                take.setMinWidth(Region.USE_PREF_SIZE);
+                take.setOnAction(event -> take(remedy));
+                taking.add(take);
+                grid.add(take, 3, i + 1);
+            } else {
+                grid.add(Words.quiet("no key of the design"), 3, i + 1);
+            }
+        }
+    }
+
+    /** One step that can be taken back. */
+    private void take(Remedy remedy) {
+        draft.edit(
+                remedy.change(),
+                sheet -> Remedied.of(sheet.text(), sheet.design(), remedy).orElse(sheet.text()),
+                trouble -> complaint.setText(trouble.map(Trouble::text).orElse("")));
+    }
+
+    private GridPane table(String title, List<String> heads, List<List<String>> rows) {
+        GridPane grid = new GridPane();
         if (rows.isEmpty()) {
-            return;
+            return grid;
         }
         Label head = new Label(title);
-        head.getStyleClass().add("title");
-        GridPane grid = new GridPane();
+        head.getStyleClass().add("verdict");
         grid.getStyleClass().add("spread-table");
         for (int c = 0; c < heads.size(); c++) {
             ColumnConstraints column = new ColumnConstraints();
@@ -237,5 +272,6 @@ final class SpreadPage implements PageView {
             }
         }
         words.getChildren().addAll(head, grid);
+        return grid;
     }
 }

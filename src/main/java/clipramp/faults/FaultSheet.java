@@ -19,6 +19,12 @@ public record FaultSheet(
         FaultEffect healthy,
         List<FaultEffect> faults,
         List<NotComputed> notComputed) {
+    /** What stands over every sheet. */
+    public static final String LIVE =
+            "Take every point of the firing circuit as live at line potential, behind a winding too: its common is joined to"
+                    + " the thyristor. Whoever has to measure a live circuit uses isolated instruments and the practice that"
+                    + " local rules ask for; a reading near zero never means that a wire is dead.";
+
     /**
      * @param fault the fault
      * @param reason why there is no figure

@@ -10,6 +10,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.concurrent.CancellationException;
 
 /**
  * Single faults of a design: every part open, shorted, drifted or dead in turn, and what follows, computed by the same
@@ -20,16 +21,53 @@ public final class Faults {
 
     private Faults() {}
 
+    /** Follows the work and may end it. */
+    public interface Watch {
+        /** Looks on in silence. */
+        Watch NONE = new Watch() {
+            @Override
+            public void solved(int done, int of) {}
+
+            @Override
+            public boolean isCancelled() {
+                return false;
+            }
+        };
+
+        /** So many faults of so many are worked out. */
+        void solved(int done, int of);
+
+        boolean isCancelled();
+    }
+
     /**
      * @param design the design
      * @param condition line and temperature that all figures hold at
      */
     public static FaultSheet of(Design design, Condition condition) {
+        return of(design, condition, Watch.NONE);
+    }
+
+    /**
+     * The same, told of as it goes on.
+     *
+     * @param design the design
+     * @param condition line and temperature that all figures hold at
+     * @param watch looked at after each fault
+     * @throws CancellationException where the watch says so
+     */
+    public static FaultSheet of(Design design, Condition condition, Watch watch) {
         FaultSolver solver = new FaultSolver(design, condition);
         FaultEffect healthy = solver.healthy();
         List<FaultEffect> effects = new ArrayList<>();
         List<FaultSheet.NotComputed> refused = new ArrayList<>();
-        for (Fault fault : list(design, condition)) {
+        List<Fault> all = list(design, condition);
+        for (int i = 0; i < all.size(); i++) {
+            watch.solved(i, all.size());
+            if (watch.isCancelled()) {
+                throw new CancellationException("cancelled after " + i + " faults");
+            }
+            Fault fault = all.get(i);
             try {
                 effects.add(solver.effect(fault, healthy));
             } catch (RefusedCircuit | ArithmeticException unsolved) {

@@ -10,23 +10,34 @@ import java.awt.Graphics2D;
 import java.awt.geom.Rectangle2D;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import java.util.OptionalDouble;
 import org.jfree.chart.axis.NumberAxis;
 
 /**
- * Every order of the line current, 1 to 40, beside the class A limits of IEC 61000-3-2: filled bars at the setting that
- * uses most of the table, outlines up to the largest of any setting, a stroke a limit. The scale is logarithmic, because
- * what binds is often a hundredth of the fundamental.
+ * Every order of the line current, 1 to 40, beside the class A limits of IEC 61000-3-2: filled bars at one setting,
+ * outlines up to the largest of any setting, a stroke a limit. The scale is logarithmic, because what binds is often a
+ * hundredth of the fundamental.
  *
  * @param check the line current beside its table
+ * @param standing the setting whose bars are filled; the one that uses most of the table where none is
  */
-public record HarmonicsFigure(LineCheck check) implements Figure {
+public record HarmonicsFigure(LineCheck check, Optional<Setting> standing) implements Figure {
     private static final int DIGITS = 3;
     /** Where bars begin: more than a decade under the smallest limit. */
     private static final double LEAST_AMPS = 0.001;
 
     private static final double HEADROOM = 1.6;
     private static final double BAR = 0.72;
+
+    /** With the bars of the setting that uses most of the table. */
+    public HarmonicsFigure(LineCheck check) {
+        this(check, Optional.empty());
+    }
+
+    private Setting filled() {
+        return standing.orElseGet(check::worstSetting);
+    }
 
     @Override
     public String title() {
@@ -60,7 +71,7 @@ public record HarmonicsFigure(LineCheck check) implements Figure {
 
     @Override
     public NumberTable numbers() {
-        LineCurrent current = check.worstSetting().current();
+        LineCurrent current = filled().current();
         List<List<String>> rows = new ArrayList<>();
         rows.add(List.of(
                 "1",
@@ -77,8 +88,7 @@ public record HarmonicsFigure(LineCheck check) implements Figure {
                     Numerals.cell(100 * order.used(), 1)));
         }
         return new NumberTable(
-                List.of("order", "mA" + at(check.worstSetting().position()), "largest mA", "class A mA", "used %"),
-                rows);
+                List.of("order", "mA" + at(filled().position()), "largest mA", "class A mA", "used %"), rows);
     }
 
     private double largestFundamental() {
@@ -123,7 +133,7 @@ public record HarmonicsFigure(LineCheck check) implements Figure {
     }
 
     private void bars(Plot plot, Style style) {
-        LineCurrent current = check.worstSetting().current();
+        LineCurrent current = filled().current();
         bar(plot, style, 1, current.fundamentalAmps(), largestFundamental(), Double.POSITIVE_INFINITY);
         for (Order order : check.orders()) {
             bar(plot, style, order.order(), current.ampsOf(order.order()), order.amps(), order.limitAmps());
@@ -160,7 +170,7 @@ public record HarmonicsFigure(LineCheck check) implements Figure {
     private void legend(Plot plot, Style style) {
         Order binding = check.binding();
         List<String> texts = new ArrayList<>(List.of(
-                "at the worst setting" + at(check.worstSetting().position()),
+                (standing.isPresent() ? "as it stands" : "at the worst setting") + at(filled().position()),
                 "largest of any setting",
                 "class A limit (guidance)"));
         if (binding.used() > 1) {

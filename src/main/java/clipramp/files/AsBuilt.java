@@ -5,8 +5,6 @@ import clipramp.circuit.Design;
 import clipramp.circuit.Part;
 import clipramp.circuit.PotLaw;
 import clipramp.circuit.Tolerance;
-import clipramp.circuit.Trigger.ProgrammableTrigger;
-import clipramp.circuit.Trigger.UnijunctionTrigger;
 import clipramp.fit.FitResult;
 import clipramp.fit.Fitted;
 import clipramp.fit.Fitted.Knowledge;
@@ -16,7 +14,6 @@ import java.math.BigDecimal;
 import java.math.MathContext;
 import java.math.RoundingMode;
 import java.util.List;
-import java.util.Map;
 import java.util.Optional;
 import java.util.stream.DoubleStream;
 
@@ -26,7 +23,6 @@ import java.util.stream.DoubleStream;
  * written, not only what is told.
  */
 public final class AsBuilt {
-    private static final MathContext FIGURES = new MathContext(5, RoundingMode.HALF_UP);
     private static final MathContext UPWARDS = new MathContext(2, RoundingMode.UP);
 
     /** A move of less than this share of what the limits allow is none. */
@@ -68,58 +64,25 @@ public final class AsBuilt {
 
     private void write(Fitted value) {
         String path = value.path();
-        Optional<Part> part = part(path);
+        Optional<Part> part = DesignFigures.part(design, path);
         if (part.isPresent()) {
             set(path, FlowText.partText(asBuilt(part.get(), value), value.unit()));
         } else if (path.equals(FitResult.LAW_PATH)) {
             law(value.value());
         } else if (path.equals("trigger.device.base-one-pulse")) {
-            set(path + ".typ", QuantityText.exact(rounded(value.value()), Unit.VOLT));
-            set(path + ".min", QuantityText.exact(rounded(Math.min(value.from(), value.value())), Unit.VOLT));
-        } else if (isTable(path)) {
-            ProgrammableTrigger trigger = (ProgrammableTrigger) design.trigger();
-            double upper = trigger.upper().value();
-            double lower = trigger.lower().value();
+            set(path + ".typ", QuantityText.exact(DesignFigures.rounded(value.value()), Unit.VOLT));
             set(
-                    path,
-                    FlowText.list(List.of(new FlowText()
-                            .quantity("gate-resistance", rounded(upper * lower / (upper + lower)), Unit.OHM)
-                            .characteristic("value", figure(value), value.unit())
-                            .text())));
+                    path + ".min",
+                    QuantityText.exact(DesignFigures.rounded(Math.min(value.from(), value.value())), Unit.VOLT));
+        } else if (DesignFigures.isTable(design, path)) {
+            set(path, DesignFigures.table(design, figure(value), value.unit()));
         } else if (path.startsWith("trigger.device.") || path.equals("clip.zener.voltage")) {
             set(path, FlowText.characteristicText(figure(value), value.unit()));
         }
     }
 
-    private boolean isTable(String path) {
-        return design.trigger() instanceof ProgrammableTrigger
-                && List.of("trigger.device.offset", "trigger.device.peak-current", "trigger.device.valley-current")
-                        .contains(path);
-    }
-
     private void set(String path, String value) {
         text = text.withValue(path, value);
-    }
-
-    private Optional<Part> part(String path) {
-        Map<String, Optional<Part>> parts = new java.util.HashMap<>();
-        parts.put("clip.dropper", Optional.of(design.clip().dropper()));
-        parts.put("ramp.capacitor", Optional.of(design.ramp().capacitor()));
-        parts.put("ramp.fixed", Optional.of(design.ramp().fixed()));
-        parts.put("ramp.pot.track", design.ramp().pot().map(pot -> pot.track()));
-        parts.put("ramp.pot.shunt", design.ramp().pot().flatMap(pot -> pot.shunt()));
-        parts.put("ramp.trim-high", design.ramp().trimmers().high());
-        parts.put("ramp.trim-low", design.ramp().trimmers().low());
-        parts.put("trigger.base-one", Optional.of(design.trigger().baseOne()));
-        if (design.trigger() instanceof UnijunctionTrigger trigger) {
-            parts.put("trigger.base-two", Optional.of(trigger.baseTwo()));
-        } else if (design.trigger() instanceof ProgrammableTrigger trigger) {
-            parts.put("trigger.upper", Optional.of(trigger.upper()));
-            parts.put("trigger.lower", Optional.of(trigger.lower()));
-        }
-        parts.put("gate.series", Optional.of(design.gate().series()));
-        parts.put("gate.shunt", design.gate().shunt());
-        return parts.getOrDefault(path, Optional.empty());
     }
 
     private static Part asBuilt(Part part, Fitted value) {
@@ -127,16 +90,16 @@ public final class AsBuilt {
         double share = new BigDecimal(reach).round(UPWARDS).doubleValue();
         Tolerance tolerance =
                 value.knowledge() == Knowledge.TOLD ? new Tolerance(Math.min(1, share), share) : part.tolerance();
-        return new Part(rounded(value.value()), tolerance, part.ratedWatts(), part.ratedVolts());
+        return new Part(DesignFigures.rounded(value.value()), tolerance, part.ratedWatts(), part.ratedVolts());
     }
 
     private static Characteristic figure(Fitted value) {
         boolean told = value.knowledge() == Knowledge.TOLD;
-        double at = rounded(value.value());
+        double at = DesignFigures.rounded(value.value());
         return Characteristic.of(
-                Math.min(at, rounded(told ? value.from() : value.low())),
+                Math.min(at, DesignFigures.rounded(told ? value.from() : value.low())),
                 at,
-                Math.max(at, rounded(told ? value.to() : value.high())));
+                Math.max(at, DesignFigures.rounded(told ? value.to() : value.high())));
     }
 
     /** A logarithmic law by its share at half rotation; next to linear, which has no such number, its points. */
@@ -150,15 +113,11 @@ public final class AsBuilt {
                     FlowText.list(DoubleStream.of(0, 0.25, 0.5, 0.75, 1)
                             .mapToObj(turned -> FlowText.list(List.of(
                                     QuantityText.exact(turned, Unit.FRACTION),
-                                    QuantityText.exact(rounded(law.share(turned)), Unit.FRACTION))))
+                                    QuantityText.exact(DesignFigures.rounded(law.share(turned)), Unit.FRACTION))))
                             .toList()));
         } else {
             set("ramp.pot.law", half < 0.5 ? "log" : "reverse-log");
-            set("ramp.pot.half", QuantityText.exact(rounded(Math.min(half, 1 - half)), Unit.FRACTION));
+            set("ramp.pot.half", QuantityText.exact(DesignFigures.rounded(Math.min(half, 1 - half)), Unit.FRACTION));
         }
-    }
-
-    private static double rounded(double value) {
-        return new BigDecimal(value).round(FIGURES).doubleValue();
     }
 }

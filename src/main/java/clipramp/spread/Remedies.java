@@ -6,6 +6,7 @@ import clipramp.engine.UnitValues;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
+import java.util.Optional;
 import java.util.function.BiConsumer;
 import java.util.stream.IntStream;
 
@@ -36,14 +37,14 @@ final class Remedies {
                 case PART ->
                     remedies.add(remedy(
                             before,
-                            lot.with(k, factor.between(factor.nominal() - below / 2, factor.nominal() + above / 2)),
-                            factor.path(),
+                            k,
+                            factor.between(factor.nominal() - below / 2, factor.nominal() + above / 2),
                             factor.name() + " of half the tolerance"));
                 case DEVICE ->
                     remedies.add(remedy(
                             before,
-                            lot.with(k, factor.between(factor.nominal() - below / 3, factor.nominal() + above / 3)),
-                            factor.path(),
+                            k,
+                            factor.between(factor.nominal() - below / 3, factor.nominal() + above / 3),
                             "devices selected to the middle third of the " + factor.name()));
                 case SURROUNDINGS -> {}
             }
@@ -53,9 +54,10 @@ final class Remedies {
         return List.copyOf(remedies);
     }
 
-    private Remedy remedy(Yield before, Lot changed, String path, String words) {
-        Yield after = yieldOf(changed, (solver, unit) -> {});
-        return new Remedy(path, words, after, after.share() - before.share());
+    private Remedy remedy(Yield before, int index, Factor tighter, String words) {
+        Yield after = yieldOf(lot.with(index, tighter), (solver, unit) -> {});
+        Remedy.Limits limits = new Remedy.Limits(tighter.low(), tighter.nominal(), tighter.high());
+        return new Remedy(tighter.path(), words, after, after.share() - before.share(), Optional.of(limits));
     }
 
     /** In place of the fixed resistor: every unit is set, at its own line and temperature, to the nominal firing angle. */
@@ -75,7 +77,8 @@ final class Remedies {
                             "ramp.fixed",
                             "a trimmer in place of the fixed ramp resistor, set on each unit at the highest setting",
                             after,
-                            after.share() - before.share()));
+                            after.share() - before.share(),
+                            Optional.empty()));
                 });
     }
 

@@ -1,5 +1,7 @@
 package clipramp.spread;
 
+import java.util.Optional;
+
 /**
  * What one change would do for the yield against what is wanted.
  *
@@ -7,5 +9,14 @@ package clipramp.spread;
  * @param change the change in words
  * @param yield yield with it
  * @param gain share of all units that it wins, may be negative
+ * @param limits what the figure at the path would lie between; empty where the change is no figure of the design, such as
+ *     a trimmer
  */
-public record Remedy(String path, String change, Yield yield, double gain) {}
+public record Remedy(String path, String change, Yield yield, double gain, Optional<Limits> limits) {
+    /**
+     * @param low least value, SI
+     * @param nominal value of the nominal unit, SI
+     * @param high greatest value, SI
+     */
+    public record Limits(double low, double nominal, double high) {}
+}

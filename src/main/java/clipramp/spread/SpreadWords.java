@@ -93,10 +93,14 @@ public final class SpreadWords {
 
     /** What would help, most first: change, yield with it, gain. */
     public static List<List<String>> remedies(SpreadResult spread) {
+        return helping(spread).stream().map(SpreadWords::remedy).toList();
+    }
+
+    /** The remedies of those rows. */
+    public static List<Remedy> helping(SpreadResult spread) {
         return spread.remedies().stream()
                 .filter(r -> r.gain() >= WORTH_TELLING)
                 .limit(MOST_ROWS)
-                .map(SpreadWords::remedy)
                 .toList();
     }
 

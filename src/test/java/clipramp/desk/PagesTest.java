@@ -71,6 +71,12 @@ class PagesTest {
             look.at("parts of " + station, window);
         }
         Harness.at(() -> {
+            ((ToggleButton) window.stage.getScene().lookup("#page-line")).fire();
+            return null;
+        });
+        window.await(() -> !window.model.isBusy());
+        look.at("line current", window);
+        Harness.at(() -> {
             ((ToggleButton) window.stage.getScene().lookup("#page-record")).fire();
             return null;
         });

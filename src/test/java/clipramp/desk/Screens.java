@@ -102,9 +102,7 @@ public final class Screens {
         settle(() -> !model.isBusy() && model.judgement().isPresent());
         save(stage, folder.resolve("bench-" + name + ".png"));
         at(() -> {
-            model.draft()
-                    .abandon(() -> model.draft()
-                            .openUnsaved("cabinet.yaml", Example.all().get(5).text()));
+            model.draft().abandon(() -> model.draft().openUnsaved("cabinet.yaml", text("drying-cabinet")));
             return null;
         });
         settle(() -> !model.isBusy() && model.draft().name().equals("cabinet.yaml"));
@@ -119,6 +117,23 @@ public final class Screens {
         fire(stage, "#tab-parts");
         settle(() -> !model.isBusy());
         save(stage, folder.resolve("parts-" + name + ".png"));
+        fire(stage, "#page-line");
+        settle(() -> !model.isBusy());
+        save(stage, folder.resolve("line-" + name + ".png"));
+        fire(stage, "#page-faults");
+        settle(() -> model.faults().answer().isPresent() && !model.isBusy());
+        save(stage, folder.resolve("faults-" + name + ".png"));
+        at(() -> {
+            if (stage.getScene().getRoot().lookup("#seen-load") instanceof ComboBox<?> load) {
+                load.getSelectionModel().select(1);
+            }
+            if (stage.getScene().getRoot().lookup("#seen-TP1") instanceof TextField field) {
+                field.setText("0");
+            }
+            return null;
+        });
+        settle(() -> true);
+        save(stage, folder.resolve("seen-" + name + ".png"));
         fire(stage, "#page-spread");
         settle(() -> stage.getScene().getRoot().lookup("#spread-start") != null);
         at(() -> {
@@ -164,6 +179,14 @@ public final class Screens {
             stage.hide();
             return null;
         });
+    }
+
+    private static String text(String id) {
+        return Example.all().stream()
+                .filter(example -> example.id().equals(id))
+                .findFirst()
+                .orElseThrow()
+                .text();
     }
 
     private static void fire(Stage stage, String selector) throws Exception {

@@ -104,4 +104,34 @@ class SpreadPageTest {
                     .isTrue();
         }
     }
+
+    @Test
+    void aRemedyIsTakenOverInOneStepAndTheOldSpreadIsStale() {
+        try (Harness window = onThePage(home)) {
+            draw(window, 300);
+            window.await(() -> isOver(window));
+            String before = window.model.draft().sheet().orElseThrow().text().text();
+            Button take = Harness.at(() -> Texts.all(window.stage.getScene().lookup("#spread-words")).stream()
+                    .filter(n -> n instanceof Button
+                            && n.getId() != null
+                            && n.getId().startsWith("take-"))
+                    .map(Button.class::cast)
+                    .findFirst()
+                    .orElseThrow());
+            String change = take.getAccessibleText().substring("Take over: ".length());
+            Harness.at(() -> {
+                take.fire();
+                return null;
+            });
+            window.settle();
+            assertThat(window.model.draft().sheet().orElseThrow().text().text()).isNotEqualTo(before);
+            assertThat(window.model.draft().undoName()).contains(change);
+            assertThat(take.isDisabled()).isTrue();
+            assertThat(window.find("#spread-progress", Label.class).getText()).contains("has changed since");
+            window.menu("Edit", "Undo " + change);
+            window.settle();
+            assertThat(window.model.draft().sheet().orElseThrow().text().text()).isEqualTo(before);
+            assertThat(take.isDisabled()).isFalse();
+        }
+    }
 }

@@ -27,6 +27,8 @@ public final class DeskModel {
     private final LongRun<Resizing.Asked, Resized> proposing;
     private final LongRun<Resizing.Asked, Resized> resizing;
     private final LongRun<Fitting.Asked, Fitting.Answer> fitting;
+    private final LineNow line;
+    private final LongRun<FaultRun.Asked, FaultRun.Answer> faults;
     private final LatestWins<Asked, Judgement> judge;
     private final List<Runnable> judgementListeners = new ArrayList<>();
     private final List<Runnable> conditionListeners = new ArrayList<>();
@@ -54,6 +56,8 @@ public final class DeskModel {
         this.resizing = new LongRun<>("No values could be chosen", search::of, workers.searching(), workers.home());
         this.fitting = new LongRun<>(
                 "The readings could not be fitted", new Fitting(workshop)::of, workers.searching(), workers.home());
+        this.faults = FaultRun.on(workers);
+        this.line = new LineNow(bench, workers, troubles);
         this.judge = new LatestWins<>(
                 DeskModel::judged,
                 workers.judging(),
@@ -99,6 +103,15 @@ public final class DeskModel {
         return fitting;
     }
 
+    /** Works single faults out. */
+    public LongRun<FaultRun.Asked, FaultRun.Answer> faults() {
+        return faults;
+    }
+
+    public LineNow line() {
+        return line;
+    }
+
     public Bench bench() {
         return bench;
     }
@@ -118,7 +131,7 @@ public final class DeskModel {
 
     /** Whether something is being read, solved or judged. */
     public boolean isBusy() {
-        return draft.isBusy() || judge.isBusy() || bench.isBusy() || proposing.isRunning();
+        return draft.isBusy() || judge.isBusy() || bench.isBusy() || proposing.isRunning() || line.isBusy();
     }
 
     public ViewCondition condition() {

@@ -1,0 +1,50 @@
+package clipramp.desk.model;
+
+import clipramp.circuit.Condition;
+import clipramp.faults.FaultSheet;
+import clipramp.faults.Faults;
+import clipramp.files.LoadedDesign;
+import clipramp.spread.Watch;
+import java.util.Optional;
+
+/** Works every single fault of a design out, away from the window. */
+public final class FaultRun {
+    /**
+     * @param loaded the design as read
+     * @param condition line and temperature that the figures hold at
+     */
+    public record Asked(LoadedDesign loaded, Condition condition) {}
+
+    /**
+     * @param asked what of
+     * @param sheet every fault
+     */
+    public record Answer(Asked asked, FaultSheet sheet) {}
+
+    private FaultRun() {}
+
+    static LongRun<Asked, Answer> on(Workers workers) {
+        return new LongRun<>("The faults could not be worked out", FaultRun::solve, workers.drawing(), workers.home());
+    }
+
+    private static Answer solve(Asked asked, LongRun.Telling telling) {
+        Watch watch = telling.of((done, of) -> done + " of " + of + " faults");
+        FaultSheet sheet = Faults.of(asked.loaded().design(), asked.condition(), new Faults.Watch() {
+            @Override
+            public void solved(int done, int of) {
+                watch.progress(done, of);
+            }
+
+            @Override
+            public boolean isCancelled() {
+                return watch.isCancelled();
+            }
+        });
+        return new Answer(asked, sheet);
+    }
+
+    /** What is to be asked of a design as it stands. */
+    public static Optional<Asked> of(Draft draft, ViewCondition condition) {
+        return draft.sheet().map(sheet -> new Asked(sheet.loaded(), condition.solvedAt(sheet.design())));
+    }
+}

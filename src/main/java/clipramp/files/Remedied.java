@@ -1,0 +1,69 @@
+package clipramp.files;
+
+import clipramp.circuit.Characteristic;
+import clipramp.circuit.Design;
+import clipramp.circuit.Part;
+import clipramp.circuit.Tolerance;
+import clipramp.spread.Factor;
+import clipramp.spread.Factors;
+import clipramp.spread.Remedy;
+import clipramp.spread.Remedy.Limits;
+import clipramp.units.QuantityText;
+import clipramp.units.Unit;
+import java.util.Optional;
+import java.util.OptionalDouble;
+
+/** Writes what a spread found to help into a design's text, comments kept: a tighter part, or a selected device. */
+public final class Remedied {
+    private static final String PULSE = "trigger.device.base-one-pulse";
+
+    private Remedied() {}
+
+    /**
+     * @param text the design as its author wrote it
+     * @param design the same, read
+     * @param remedy what is taken over
+     * @return the text with it; empty where the remedy is no figure of a design, such as a trimmer
+     * @throws InvalidInputException where the text is no YAML of ours
+     */
+    public static Optional<DesignText> of(DesignText text, Design design, Remedy remedy) {
+        return remedy.limits().map(limits -> write(text, design, remedy.path(), limits));
+    }
+
+    private static DesignText write(DesignText text, Design design, String path, Limits limits) {
+        Unit unit = KeyCatalogue.standard().meant(path).get(0).unit();
+        Optional<Part> part = DesignFigures.part(design, path);
+        if (part.isPresent()) {
+            return text.withValue(path, FlowText.partText(tighter(part.get(), limits), unit));
+        }
+        if (path.equals(PULSE)) {
+            double least = DesignFigures.rounded(limits.low());
+            return text.withValue(path + ".min", QuantityText.exact(least, Unit.VOLT));
+        }
+        Characteristic figure = figure(limits, isTypical(design, path));
+        String value = DesignFigures.isTable(design, path)
+                ? DesignFigures.table(design, figure, unit)
+                : FlowText.characteristicText(figure, unit);
+        return text.withValue(path, value);
+    }
+
+    private static Part tighter(Part part, Limits limits) {
+        Tolerance tolerance = new Tolerance(
+                DesignFigures.rounded(1 - limits.low() / limits.nominal()),
+                DesignFigures.rounded(limits.high() / limits.nominal() - 1));
+        return new Part(part.value(), tolerance, part.ratedWatts(), part.ratedVolts());
+    }
+
+    /** A figure without a typical value stays without one: it is drawn in another way. */
+    private static boolean isTypical(Design design, String path) {
+        return Factors.of(design).stream()
+                .anyMatch(factor -> factor.path().equals(path) && factor.law() == Factor.Law.THREE_POINT);
+    }
+
+    private static Characteristic figure(Limits limits, boolean typical) {
+        return new Characteristic(
+                OptionalDouble.of(DesignFigures.rounded(limits.low())),
+                typical ? OptionalDouble.of(DesignFigures.rounded(limits.nominal())) : OptionalDouble.empty(),
+                OptionalDouble.of(DesignFigures.rounded(limits.high())));
+    }
+}
