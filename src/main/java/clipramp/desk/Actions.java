@@ -99,8 +99,8 @@ interface Actions {
     /** The pages of a window with a design, in the order of their tabs; Ctrl and a digit bring one up. */
     enum Page {
         BENCH("Bench", 1),
-        LINE("Line current", 4),
-        FAULTS("Faults", 5),
+        LINE("Line current", 6),
+        FAULTS("Faults", 7),
         SPREAD("Spread", 3),
         SIZE("Size", 4),
         FIT("Fit", 5),
