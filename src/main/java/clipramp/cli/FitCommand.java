@@ -12,7 +12,6 @@ import clipramp.fit.FitWords;
 import clipramp.fit.Readings;
 import clipramp.record.PageSize;
 import clipramp.record.RecordContent;
-import clipramp.spread.Watch;
 import java.nio.charset.StandardCharsets;
 import java.util.ArrayList;
 import java.util.List;
@@ -93,7 +92,7 @@ final class FitCommand implements Callable<Integer> {
         if (volts.isPresent()) {
             read = read.onLine(volts.getAsDouble());
         }
-        FitResult result = Fit.run(circuit, read, Watch.NONE);
+        FitResult result = fitted(circuit, read);
         List<String> notes = new ArrayList<>(FitWords.notes(result));
         Optional<DesignText> built =
                 Optional.ofNullable(out).map(name -> AsBuilt.of(DesignText.of(text), circuit, result));
@@ -124,6 +123,12 @@ final class FitCommand implements Callable<Integer> {
             }
         }
         return result.isTelling() ? ExitCode.ANSWERED : ExitCode.FAILS;
+    }
+
+    private FitResult fitted(Design circuit, Readings read) {
+        try (FitWatch watch = new FitWatch(session)) {
+            return Fit.run(circuit, read, watch);
+        }
     }
 
     private double celsius() {

@@ -14,6 +14,9 @@ import java.util.stream.Collectors;
 public final class FitWords {
     private static final int FIGURES = 4;
 
+    /** Scatter beyond this is no matter of instruments. */
+    private static final double HARDLY_OF_IT = 5;
+
     private FitWords() {}
 
     /** A value with as many figures as a fit deserves. */
@@ -81,6 +84,9 @@ public final class FitWords {
         String scatter = quality.widened() > 1
                 ? "They scatter " + fixed(quality.widened(), 1)
                         + " times as far as the instruments' accuracies explain; the intervals are widened by that."
+                        + (quality.widened() > HARDLY_OF_IT
+                                ? " So far off, they are hardly of this design, or most heads name a wrong unit."
+                                : "")
                 : "They scatter no more than the instruments' accuracies explain.";
         return List.of(
                 "The readings tell " + count(quality.directions(), "independent combination") + " of "

@@ -14,6 +14,8 @@ import java.util.Optional;
 import java.util.Random;
 import java.util.concurrent.CancellationException;
 import org.junit.jupiter.api.Test;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.ValueSource;
 
 /**
  * What a fit must do whatever the unit. The readings are the engine's own with noise from a seeded generator: checks of
@@ -38,6 +40,30 @@ class FitTest {
         // 95 % of 68 are 64.6; under 61 has a chance of less than one in a hundred (binomial distribution).
         assertThat(told).isEqualTo(68);
         assertThat(covered).isGreaterThanOrEqualTo(61);
+    }
+
+    /** Power and voltage across an inductor, and across a lamp that is the hotter the more it gets. */
+    @ParameterizedTest
+    @ValueSource(strings = {"store-fan", "tasting-lamps"})
+    void aUnitIsFoundBehindEveryKindOfLoad(String example) {
+        Design design = FitStudy.design(example);
+        SyntheticBench bench = SyntheticBench.of(
+                design, 700, 5, List.of(Meter.DELAY, Meter.LOAD_TRUE_RMS, Meter.LOAD_WATTS, Meter.PEAK_POINT));
+
+        FitResult result = Fit.run(design, bench.readings, Watch.NONE);
+
+        assertThat(result.strangers()).isEmpty();
+        assertThat(result.quality().widened()).isEqualTo(1);
+        Fitted standoff = result.value("trigger.device.standoff").orElseThrow();
+        assertThat(standoff.knowledge()).isEqualTo(Knowledge.TOLD);
+        assertThat(bench.truth(standoff.path())).isBetween(standoff.from(), standoff.to());
+        for (Fitted value : result.told()) {
+            double truth = bench.truth(value.path());
+            // A half-width is 1.96 standard deviations; 2.3 of them hold all but seven normal errors in a million.
+            assertThat(Math.abs(value.value() - truth))
+                    .as(value.path())
+                    .isLessThan(2.3 * (value.to() - value.from()) / 2);
+        }
     }
 
     @Test
