@@ -53,6 +53,8 @@ public final class Stepper {
     private double rectifierSwitched;
     private double zenerSwitched;
     private double gateSwitched;
+    private Event nextEvent = Event.END;
+    private double nextSeconds;
 
     public Stepper(Network network) {
         n = network;
@@ -127,6 +129,34 @@ public final class Stepper {
      * @return what happened; {@link #seconds()} says when
      */
     public Event advance(double limitSeconds) {
+        beginPiece();
+        nextSeconds = limitSeconds;
+        nextEvent = Event.END;
+        switch (mode) {
+            case OFF -> offer(Event.STALLS, peakReached(nextSeconds));
+            case ON -> {
+                offer(Event.VALLEY, valleyReached(nextSeconds));
+                offer(Event.GATE, gateSwitches(nextSeconds));
+            }
+            case STALLED -> {
+                offer(Event.FIRES, stallFires(nextSeconds));
+                offer(Event.UNSTALLS, stallLeaves(nextSeconds));
+            }
+        }
+        offer(Event.ZENER, zenerSwitches(nextSeconds));
+        offer(Event.RECTIFIER, rectifierSwitches(nextSeconds));
+        if (n.clampVolts < Double.POSITIVE_INFINITY) {
+            offer(Event.CLAMP, clampSwitches(nextSeconds));
+        }
+        rest(nextSeconds, limitSeconds);
+        seconds = nextSeconds;
+        piece.look(seconds);
+        rampVolts = piece.rampVolts;
+        fluxAmps = piece.fluxAmps;
+        return pass(nextEvent);
+    }
+
+    private void beginPiece() {
         piece.mode = mode;
         piece.rectifies = rectifies;
         piece.clips = clips;
@@ -134,65 +164,14 @@ public final class Stepper {
         piece.clamps = clamps;
         NodeLaws.shape(n, piece);
         piece.begin(n, wave, seconds, rampVolts, fluxAmps);
-        double time = limitSeconds;
-        Event event = Event.END;
-        double at;
-        switch (mode) {
-            case OFF -> {
-                at = peakReached(time);
-                if (at < time) {
-                    time = at;
-                    event = Event.STALLS;
-                }
-            }
-            case ON -> {
-                at = valleyReached(time);
-                if (at < time) {
-                    time = at;
-                    event = Event.VALLEY;
-                }
-                at = gateSwitches(time);
-                if (at < time) {
-                    time = at;
-                    event = Event.GATE;
-                }
-            }
-            case STALLED -> {
-                at = stallFires(time);
-                if (at < time) {
-                    time = at;
-                    event = Event.FIRES;
-                }
-                at = stallLeaves(time);
-                if (at < time) {
-                    time = at;
-                    event = Event.UNSTALLS;
-                }
-            }
+    }
+
+    /** The soonest of what may end the piece ends it. */
+    private void offer(Event event, double at) {
+        if (at < nextSeconds) {
+            nextSeconds = at;
+            nextEvent = event;
         }
-        at = zenerSwitches(time);
-        if (at < time) {
-            time = at;
-            event = Event.ZENER;
-        }
-        at = rectifierSwitches(time);
-        if (at < time) {
-            time = at;
-            event = Event.RECTIFIER;
-        }
-        if (n.clampVolts < Double.POSITIVE_INFINITY) {
-            at = clampSwitches(time);
-            if (at < time) {
-                time = at;
-                event = Event.CLAMP;
-            }
-        }
-        rest(time, limitSeconds);
-        seconds = time;
-        piece.look(time);
-        rampVolts = piece.rampVolts;
-        fluxAmps = piece.fluxAmps;
-        return pass(event);
     }
 
     /**
