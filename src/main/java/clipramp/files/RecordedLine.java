@@ -29,6 +29,11 @@ record RecordedLine(double rmsVolts, List<Harmonic> harmonics, String leftOut) {
     private static final int LEAST_SAMPLES = 40;
     private static final double LEAST_SHARE = 1e-3;
 
+    /** Times beyond this, from the recorder's start on, leave too few digits within one period. */
+    private static final double MOST_SECONDS = 1000;
+
+    private static final double MOST_VOLTS = 100_000;
+
     /**
      * @param text lines of time and volts, with or without a heading; comma, semicolon or tab between
      * @param hertz the line's frequency, Hz
@@ -59,7 +64,9 @@ record RecordedLine(double rmsVolts, List<Harmonic> harmonics, String leftOut) {
         for (int i = 0; i < lines.size(); i++) {
             String[] fields = lines.get(i).split("[,;\t]", -1);
             try {
-                double[] sample = {Double.parseDouble(fields[0].strip()), Double.parseDouble(fields[1].strip())};
+                double[] sample = {
+                    number(fields[0], MOST_SECONDS, "seconds", i + 1), number(fields[1], MOST_VOLTS, "volts", i + 1)
+                };
                 if (!samples.isEmpty() && !(sample[0] > samples.get(samples.size() - 1)[0])) {
                     throw new IllegalArgumentException("row " + (i + 1) + ": time does not grow");
                 }
@@ -75,6 +82,15 @@ record RecordedLine(double rmsVolts, List<Harmonic> harmonics, String leftOut) {
             throw new IllegalArgumentException("holds no sample; expected rows of time in s and volts");
         }
         return samples;
+    }
+
+    private static double number(String field, double most, String of, int row) {
+        double value = Double.parseDouble(field.strip());
+        if (!(Math.abs(value) <= most)) {
+            throw new IllegalArgumentException("row " + row + ": read " + field.strip() + " " + of + "; expected "
+                    + QuantityText.number(-most, 6) + ".." + QuantityText.number(most, 6));
+        }
+        return value;
     }
 
     /** The cycle with its beginning repeated at its end and a little of its end before its beginning. */

@@ -65,6 +65,17 @@ class RecordedLineTest {
         assertThatThrownBy(() -> RecordedLine.of("", 50)).hasMessageContaining("no sample");
     }
 
+    /** Found by the fuzzer: a period is nothing beside such a time. */
+    @Test
+    void refusesTimesAndVoltsBeyondWhatIsRecorded() {
+        assertThatThrownBy(() -> RecordedLine.of("0,1\n6e79,2\n", 50))
+                .isInstanceOf(IllegalArgumentException.class)
+                .hasMessage("row 2: read 6e79 seconds; expected -1000..1000");
+        assertThatThrownBy(() -> RecordedLine.of("0,1\n0.001,NaN\n", 50))
+                .isInstanceOf(IllegalArgumentException.class)
+                .hasMessage("row 2: read NaN volts; expected -100000..100000");
+    }
+
     @Test
     void aDesignReadsTheRecordingBesideIt(@TempDir Path folder) throws IOException {
         String design = Files.readString(Path.of("examples/drying-cabinet.yaml"))
