@@ -118,38 +118,50 @@ final class Devices {
     private Optional<Device> profile(Scalar scalar, DevicePlace place, String path, List<String> chain) {
         String id = scalar.text();
         if (chain.contains(id) || chain.size() >= DEEPEST_LIKE) {
-            List<String> shown = new ArrayList<>(chain);
-            shown.add(id);
-            String why = chain.contains(id)
-                    ? "profiles are like each other in a circle"
-                    : "profiles are like one another more than " + DEEPEST_LIKE + " deep";
-            findings.problem(scalar.place(), path, id, "", why + ": " + String.join(" -> ", shown) + ".");
+            refuseChain(scalar, path, chain);
             return Optional.empty();
         }
         for (String kind : place.kinds()) {
             Optional<Found> found = library.find(kind, id);
             if (found.isPresent()) {
                 used.put(kind + "/" + id, found.get());
-                List<String> longer = new ArrayList<>(chain);
-                longer.add(id);
-                return text(found.get(), place, path, longer);
+                return text(found.get(), place, path, longer(chain, id));
             }
         }
+        List<Found> others = library.named(id);
+        if (others.isEmpty()) {
+            refuseUnknown(scalar, place, path);
+        } else {
+            refuseOtherKind(scalar, place, path, others.get(0).kind());
+        }
+        return Optional.empty();
+    }
+
+    private static List<String> longer(List<String> chain, String id) {
+        List<String> longer = new ArrayList<>(chain);
+        longer.add(id);
+        return longer;
+    }
+
+    private void refuseChain(Scalar scalar, String path, List<String> chain) {
+        String id = scalar.text();
+        String why = chain.contains(id)
+                ? "profiles are like each other in a circle"
+                : "profiles are like one another more than " + DEEPEST_LIKE + " deep";
+        findings.problem(scalar.place(), path, id, "", why + ": " + String.join(" -> ", longer(chain, id)) + ".");
+    }
+
+    private void refuseOtherKind(Scalar scalar, DevicePlace place, String path, String other) {
+        String expected = String.join(" or ", place.kinds());
+        String sentence =
+                "read \"" + scalar.text() + "\", which is a profile of kind " + other + "; expected " + expected + ".";
+        findings.problem(scalar.place(), path, scalar.text(), expected, sentence);
+    }
+
+    private void refuseUnknown(Scalar scalar, DevicePlace place, String path) {
         List<String> known =
                 place.kinds().stream().flatMap(k -> library.ids(k).stream()).toList();
-        List<Found> others = library.named(id);
-        if (!others.isEmpty()) {
-            String other = others.get(0).kind();
-            findings.problem(
-                    scalar.place(),
-                    path,
-                    id,
-                    String.join(" or ", place.kinds()),
-                    "read \"" + id + "\", which is a profile of kind " + other + "; expected "
-                            + String.join(" or ", place.kinds()) + ".");
-            return Optional.empty();
-        }
-        List<String> near = Nearest.several(id, known, 3);
+        List<String> near = Nearest.several(scalar.text(), known, 3);
         String hint =
                 near.isEmpty() ? "No profile of this kind is there." : "Nearest: " + String.join(", ", near) + ".";
         findings.add(new Problem(
@@ -157,12 +169,11 @@ final class Devices {
                 scalar.place().line(),
                 scalar.place().column(),
                 path,
-                id,
+                scalar.text(),
                 "a profile's id, or its keys in braces",
                 near.isEmpty() ? "" : near.get(0),
-                path + ": read \"" + id + "\"; no " + String.join(" or ", place.kinds()) + " profile has this id. "
-                        + hint));
-        return Optional.empty();
+                path + ": read \"" + scalar.text() + "\"; no " + String.join(" or ", place.kinds())
+                        + " profile has this id. " + hint));
     }
 
     private Optional<Device> text(Found found, DevicePlace place, String path, List<String> chain) {

@@ -11,6 +11,7 @@ import clipramp.fit.Readings;
 import clipramp.fit.Setting;
 import clipramp.units.QuantityText;
 import java.util.ArrayList;
+import java.util.Collection;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -75,35 +76,43 @@ public final class ReadingsFile {
             return columns;
         }
         for (int c = 0; c < heads.size(); c++) {
-            Field head = heads.get(c);
-            if (head.text().isEmpty()) {
-                continue;
-            }
-            Optional<ReadingsColumn> column = ReadingsColumn.of(head.text(), placeOf(head), findings);
-            if (column.isPresent() && column.get().kind() == Kind.AVERAGE && design.load() instanceof Load.Inductive) {
-                findings.problem(
-                        placeOf(head),
-                        head.text(),
-                        "what an average-reading meter shows across an inductive load is not computed. Take true rms or"
-                                + " load power, or leave the column out.");
-            } else if (column.isPresent()) {
+            Optional<ReadingsColumn> column = column(heads.get(c));
+            if (column.isPresent()) {
                 columns.put(c, column.get());
             }
         }
-        boolean hasKnob = design.ramp().pot().isPresent();
-        boolean reads = columns.values().stream().anyMatch(c -> c.kind().meter.isPresent());
-        if (!findings.hasProblems() && !reads) {
-            findings.problem(
-                    placeOf(first), "", "no column holds a reading. Known: " + String.join(", ", heads()) + ".");
+        if (!findings.hasProblems()) {
+            requireReadingsAndSettings(placeOf(first), columns.values());
         }
-        boolean sets = columns.values().stream().anyMatch(c -> c.kind() == Kind.KNOB || c.kind() == Kind.RAMP_OHMS);
-        if (!findings.hasProblems() && hasKnob && !sets) {
+        return columns;
+    }
+
+    private Optional<ReadingsColumn> column(Field head) {
+        if (head.text().isEmpty()) {
+            return Optional.empty();
+        }
+        Optional<ReadingsColumn> column = ReadingsColumn.of(head.text(), placeOf(head), findings);
+        if (column.isPresent() && column.get().kind() == Kind.AVERAGE && design.load() instanceof Load.Inductive) {
             findings.problem(
-                    placeOf(first),
+                    placeOf(head),
+                    head.text(),
+                    "what an average-reading meter shows across an inductive load is not computed. Take true rms or"
+                            + " load power, or leave the column out.");
+            return Optional.empty();
+        }
+        return column;
+    }
+
+    private void requireReadingsAndSettings(Place place, Collection<ReadingsColumn> columns) {
+        if (columns.stream().noneMatch(c -> c.kind().meter.isPresent())) {
+            findings.problem(place, "", "no column holds a reading. Known: " + String.join(", ", heads()) + ".");
+        } else if (design.ramp().pot().isPresent()
+                && columns.stream().noneMatch(c -> c.kind() == Kind.KNOB || c.kind() == Kind.RAMP_OHMS)) {
+            findings.problem(
+                    place,
                     "",
                     "the design has a knob: add a column \"knob (%)\" or \"ramp resistance (kohm)\" that says where it stood.");
         }
-        return columns;
     }
 
     private Place placeOf(Field field) {
@@ -111,17 +120,13 @@ public final class ReadingsFile {
     }
 
     private Optional<BenchLine> line(List<Field> row, Map<Integer, ReadingsColumn> columns, int heads) {
-        Field first = row.get(0);
         if (row.size() > heads) {
             Field extra = row.get(heads);
             findings.problem(placeOf(extra), "", "this line has " + row.size() + " fields under " + heads + " heads.");
             return Optional.empty();
         }
-        Optional<Setting> knob = Optional.empty();
-        Optional<Setting> resistance = Optional.empty();
-        Optional<LineVolts> volts = Optional.empty();
-        List<Reading> readings = new ArrayList<>();
         int before = findings.count();
+        Row read = new Row();
         for (int c = 0; c < row.size(); c++) {
             ReadingsColumn column = columns.get(c);
             Field field = row.get(c);
@@ -129,59 +134,61 @@ public final class ReadingsFile {
                 continue;
             }
             double value = value(field, column);
-            if (Double.isNaN(value)) {
-                continue;
+            if (!Double.isNaN(value)) {
+                read.take(column, value);
             }
+        }
+        return findings.count() > before ? Optional.empty() : read.bench(row.get(0));
+    }
+
+    /** What a line of the file has given so far. */
+    private final class Row {
+        private Optional<Setting> knob = Optional.empty();
+        private Optional<Setting> resistance = Optional.empty();
+        private Optional<LineVolts> volts = Optional.empty();
+        private final List<Reading> readings = new ArrayList<>();
+
+        void take(ReadingsColumn column, double value) {
             switch (column.kind()) {
-                case KNOB ->
-                    knob = Optional.of(new Setting(Setting.Kind.KNOB, value, column.accuracy(), column.head()));
-                case RAMP_OHMS ->
-                    resistance =
-                            Optional.of(new Setting(Setting.Kind.RAMP_OHMS, value, column.accuracy(), column.head()));
+                case KNOB -> knob = Optional.of(setting(Setting.Kind.KNOB, column, value));
+                case RAMP_OHMS -> resistance = Optional.of(setting(Setting.Kind.RAMP_OHMS, column, value));
                 case LINE -> volts = Optional.of(new LineVolts(value, column.accuracy(), column.head()));
                 default ->
                     readings.add(
                             new Reading(column.kind().meter.orElseThrow(), value, column.accuracy(), column.head()));
             }
         }
-        if (findings.count() > before) {
-            return Optional.empty();
-        }
-        // An ohmmeter's figure at a knob position tells the track; alone it is where the knob stood.
-        if (knob.isPresent() && resistance.isPresent()) {
-            Setting measured = resistance.get();
-            readings.add(new Reading(
-                    Kind.RAMP_OHMS.meter.orElseThrow(), measured.value(), measured.accuracy(), measured.column()));
-            resistance = Optional.empty();
-        }
-        return bench(first, knob, resistance, volts, readings);
-    }
 
-    private Optional<BenchLine> bench(
-            Field first,
-            Optional<Setting> knob,
-            Optional<Setting> resistance,
-            Optional<LineVolts> volts,
-            List<Reading> readings) {
-        boolean hasKnob = design.ramp().pot().isPresent();
-        if (knob.isPresent() && !hasKnob) {
-            findings.problem(
-                    placeOf(first), "", "a knob position stands here, and the design has no knob (ramp.pot: none).");
+        private static Setting setting(Setting.Kind kind, ReadingsColumn column, double value) {
+            return new Setting(kind, value, column.accuracy(), column.head());
+        }
+
+        Optional<BenchLine> bench(Field first) {
+            // An ohmmeter's figure at a knob position tells the track; alone it is where the knob stood.
+            if (knob.isPresent() && resistance.isPresent()) {
+                Setting measured = resistance.get();
+                readings.add(new Reading(
+                        Kind.RAMP_OHMS.meter.orElseThrow(), measured.value(), measured.accuracy(), measured.column()));
+            }
+            boolean hasKnob = design.ramp().pot().isPresent();
+            Optional<Setting> setting = knob.or(() -> resistance);
+            if (knob.isPresent() && !hasKnob) {
+                return refused(first, "a knob position stands here, and the design has no knob (ramp.pot: none).");
+            }
+            if (readings.isEmpty()) {
+                return refused(first, "nothing was read on this line. Fill it in or take it out.");
+            }
+            if (setting.isEmpty() && hasKnob) {
+                return refused(
+                        first, "where did the knob stand? Give its position or the ramp resistance on this line.");
+            }
+            return Optional.of(new BenchLine(first.line(), setting.orElseGet(Setting::fixed), volts, readings));
+        }
+
+        private Optional<BenchLine> refused(Field first, String sentence) {
+            findings.problem(placeOf(first), "", sentence);
             return Optional.empty();
         }
-        if (readings.isEmpty()) {
-            findings.problem(placeOf(first), "", "nothing was read on this line. Fill it in or take it out.");
-            return Optional.empty();
-        }
-        Optional<Setting> setting = knob.or(() -> resistance);
-        if (setting.isEmpty() && hasKnob) {
-            findings.problem(
-                    placeOf(first),
-                    "",
-                    "where did the knob stand? Give its position or the ramp resistance on this line.");
-            return Optional.empty();
-        }
-        return Optional.of(new BenchLine(first.line(), setting.orElseGet(Setting::fixed), volts, readings));
     }
 
     /** NaN where it is refused. */
