@@ -22,6 +22,7 @@ import javafx.scene.control.Label;
 import javafx.scene.control.Labeled;
 import javafx.scene.control.MenuBar;
 import javafx.scene.control.ScrollPane;
+import javafx.scene.control.TextField;
 import javafx.scene.control.ToggleButton;
 import javafx.scene.input.KeyCode;
 import javafx.scene.input.KeyEvent;
@@ -76,6 +77,24 @@ class PagesTest {
         });
         window.await(() -> !window.model.isBusy());
         look.at("line current", window);
+        window.press("#page-size");
+        look.at("size, nothing found", window);
+        window.press("#size-start");
+        window.await(() -> !window.model.resizing().isRunning());
+        look.at("size", window);
+        window.press("#page-fit");
+        look.at("fit, nothing read", window);
+        Harness.at(() -> {
+            // Angles that no unit of this design has, so that there is something to say.
+            for (int row = 0; row < 4; row++) {
+                ((TextField) window.stage.getScene().lookup("#fit-cell-" + row + "-0")).setText(20 + 20 * row + "");
+                ((TextField) window.stage.getScene().lookup("#fit-cell-" + row + "-2")).setText(130 - 20 * row + "");
+            }
+            return null;
+        });
+        window.press("#fit-start");
+        window.await(() -> !window.model.fitting().isRunning());
+        look.at("fit", window);
         Harness.at(() -> {
             ((ToggleButton) window.stage.getScene().lookup("#page-record")).fire();
             return null;
