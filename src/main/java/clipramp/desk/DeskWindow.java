@@ -72,7 +72,7 @@ final class DeskWindow {
         pages.put(
                 Page.RECORD,
                 new Late<>(
-                        () -> new RecordPage(theme, model.draft(), maker.get(), model.fitting(), actions::saveRecord)));
+                        () -> new RecordPage(theme, model.draft(), maker.get(), model.spread(), model.fitting(), actions::saveRecord)));
         this.header = new Late<>(() -> new HeaderView(model, actions, () -> bench().unfold(true)));
         this.tabs = new Late<>(() -> new PageTabs(actions));
         this.menus = new Menus(actions, model.draft());

@@ -7,8 +7,10 @@ import clipramp.desk.model.PartSlot;
 import clipramp.desk.model.RecordMaker;
 import clipramp.desk.model.Sheet;
 import clipramp.fit.FitResult;
+import clipramp.desk.model.SpreadRun;
 import clipramp.record.PageSize;
 import clipramp.record.RecordPreview;
+import clipramp.spread.SpreadResult;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -37,6 +39,9 @@ final class RecordPage implements PageView {
             "document.date");
 
     private final Draft draft;
+    private final SpreadRun run;
+    private final CheckBox spread = new CheckBox("With the spread");
+    private final Label spreadHint = Words.quiet("");
     private final RecordMaker maker;
     private final LongRun<Fitting.Asked, Fitting.Answer> fitting;
     private final CheckBox unit = new CheckBox("With the unit as built");
@@ -50,6 +55,7 @@ final class RecordPage implements PageView {
     private int drawn;
 
     /**
+     * @param run the spread, whose page the record may have
      * @param fitting the fit of one unit, whose page the record may have
      * @param saving saves the record
      */
@@ -57,11 +63,13 @@ final class RecordPage implements PageView {
             Theme theme,
             Draft draft,
             RecordMaker maker,
+            SpreadRun run,
             LongRun<Fitting.Asked, Fitting.Answer> fitting,
             Runnable saving) {
         this.fitting = fitting;
         this.theme = theme;
         this.draft = draft;
+        this.run = run;
         this.maker = maker;
         pages.getStyleClass().add("record-pages");
         pages.setId("record-pages");
@@ -90,7 +98,12 @@ final class RecordPage implements PageView {
         unit.setId("record-fit");
         unit.setAccessibleText("A page about the unit as built, from its bench readings");
         unit.setOnAction(event -> maker.setFit(measured()));
-        side.getChildren().addAll(save, progress, paper, unit);
+        spread.setId("record-spread");
+        spread.setAccessibleText("With a page on what many units do, as it was last drawn");
+        spread.setOnAction(event -> follow());
+        spreadHint.setId("record-spread-hint");
+        spreadHint.managedProperty().bind(spreadHint.textProperty().isNotEmpty());
+        side.getChildren().addAll(save, progress, paper, unit, spread, spreadHint);
         ScrollPane sideScroll = new ScrollPane(side);
         sideScroll.setFitToWidth(true);
         sideScroll.setHbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);
@@ -113,6 +126,11 @@ final class RecordPage implements PageView {
         draft.sheet().ifPresent(sheet -> {
             offerUnit(sheet);
             maker.setFit(measured());
+            Optional<SpreadResult> drawn = run.of(sheet.loaded());
+            spread.setDisable(drawn.isEmpty());
+            spreadHint.setText(
+                    drawn.isPresent() ? "" : "Its page tells of the units of this very design: draw them on Spread first.");
+            maker.setSpread(drawn.filter(units -> spread.isSelected()));
             maker.show(sheet.loaded(), draft.file());
             titleBlock(sheet);
         });

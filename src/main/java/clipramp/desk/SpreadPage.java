@@ -222,21 +222,17 @@ final class SpreadPage implements PageView {
         offer(help, SpreadWords.helping(result));
     }
 
-    /** Behind each remedy a button that writes it into the design; a trimmer has no key there. */
+    /** Behind each remedy a button that writes it into the design. */
     private void offer(GridPane grid, List<Remedy> remedies) {
         for (int i = 0; i < remedies.size(); i++) {
             Remedy remedy = remedies.get(i);
-            if (remedy.limits().isPresent()) {
-                Button take = new Button("Take over");
-                take.setId("take-" + remedy.path().replace('.', '-'));
-                take.setAccessibleText("Take over: " + remedy.change());
-                take.setMinWidth(Region.USE_PREF_SIZE);
-                take.setOnAction(event -> take(remedy));
-                taking.add(take);
-                grid.add(take, 3, i + 1);
-            } else {
-                grid.add(Words.quiet("no key of the design"), 3, i + 1);
-            }
+            Button take = new Button("Take over");
+            take.setId("take-" + remedy.path().replace('.', '-'));
+            take.setAccessibleText("Take over: " + remedy.change());
+            take.setMinWidth(Region.USE_PREF_SIZE);
+            take.setOnAction(event -> take(remedy));
+            taking.add(take);
+            grid.add(take, 3, i + 1);
         }
     }
 

@@ -62,6 +62,7 @@ class SpreadPageTest {
                                     ((FigurePane) window.stage.getScene().lookup("#lanes")).figure())
                             .band()))
                     .isPresent();
+            recordTellsOfIt(window);
             window.press("#page-spread");
             Harness.at(() -> {
                 ((CheckBox) window.stage.getScene().lookup("#spread-bands")).fire();
@@ -69,6 +70,24 @@ class SpreadPageTest {
             });
             assertThat(window.model.bench().spread()).isEmpty();
         }
+    }
+
+    /** The record has the spread's page where it is wanted, and one page less where not. */
+    private static void recordTellsOfIt(Harness window) {
+        window.press("#page-record");
+        window.await(() -> pages(window) > 0);
+        int without = pages(window);
+        Harness.at(() -> {
+            ((CheckBox) window.stage.getScene().lookup("#record-spread")).fire();
+            return null;
+        });
+        window.await(() -> pages(window) > without);
+    }
+
+    /** Pages of the record once they are all drawn. */
+    private static int pages(Harness window) {
+        String text = Harness.at(() -> ((Label) window.stage.getScene().lookup("#record-progress")).getText());
+        return text.contains(" pages.") ? Integer.parseInt(text.substring(0, text.indexOf(' '))) : 0;
     }
 
     @Test

@@ -5,6 +5,8 @@ import static org.assertj.core.api.Assertions.within;
 import static org.assertj.core.api.Assertions.withinPercentage;
 
 import clipramp.circuit.Design;
+import clipramp.circuit.Ramp;
+import clipramp.circuit.Trimmers;
 import clipramp.spread.Factor;
 import clipramp.spread.Factors;
 import clipramp.spread.Remedy;
@@ -88,9 +90,18 @@ class RemediedTest {
                     .as(remedy.change())
                     .isCloseTo(remedy.yield().share(), within(2.5 / OPTIONS.samples()));
         }
-        assertThat(spread.remedies().stream().filter(r -> r.limits().isEmpty()))
-                .allSatisfy(trimmer ->
-                        assertThat(Remedied.of(text, loaded.design(), trimmer)).isEqualTo(Optional.empty()));
+        Remedy trimmer = spread.remedies().stream()
+                .filter(r -> r.limits().isEmpty())
+                .findFirst()
+                .orElseThrow();
+        Ramp before = loaded.design().ramp();
+        Ramp trimmed = read(Remedied.of(text, loaded.design(), trimmer).orElseThrow(), library)
+                .design()
+                .ramp();
+        assertThat(trimmed.trimmers().high()).isPresent();
+        // At the middle of the track the unit is the one before, within a step of the series of parts that are sold.
+        assertThat(trimmed.fixed().value() + Trimmers.nominalOhms(trimmed.trimmers().high()))
+                .isCloseTo(before.fixed().value(), withinPercentage(5));
     }
 
     private static LoadedDesign read(DesignText text, ProfileLibrary library) {

@@ -3,9 +3,11 @@ package clipramp.desk.model;
 import clipramp.circuit.ClipSupply;
 import clipramp.circuit.Design;
 import clipramp.circuit.GateDrive;
+import clipramp.circuit.Load;
 import clipramp.circuit.Stage;
 import clipramp.circuit.Trigger;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 
 /**
@@ -41,8 +43,10 @@ public final class Companions {
      */
     public static List<Change> of(String key, String word, Design design, boolean programmable) {
         List<Change> changes = new ArrayList<>();
-        changes.add(new Change(key, word));
-        if (key.equals("stage")) {
+        changes.add(new Change(key, Extra.at(key).map(f -> f.written(word)).orElse(word)));
+        if (key.equals("load.kind")) {
+            LoadCompanions.kind(word, design, changes);
+        } else if (key.equals("stage")) {
             stage(word, design, changes);
         } else if (key.equals("gate.coupling")) {
             boolean transformer = word.equals(GateDrive.Coupling.TRANSFORMER.word());
@@ -83,6 +87,11 @@ public final class Companions {
             changes.add(new Change("gate.transformer", transformer(twin ? 2 : 1)));
         } else if (design.gate().transformer().isPresent()) {
             changes.add(new Change("gate.transformer", transformer(1)));
+        }
+        if (design.load() instanceof Load.Inductive) {
+            Arrays.stream(Stage.values())
+                    .filter(stage -> stage.word().equals(word))
+                    .forEach(stage -> LoadCompanions.inductive(stage, design, changes));
         }
         boolean wasTriac = design.stage() == Stage.TRIAC;
         if (word.equals(Stage.TRIAC.word()) != wasTriac) {

@@ -2,7 +2,9 @@ package clipramp.desk.model;
 
 import clipramp.circuit.Design;
 import clipramp.circuit.GateDrive;
+import clipramp.circuit.Load;
 import clipramp.circuit.PotLaw;
+import clipramp.circuit.Stage;
 import clipramp.circuit.Trigger;
 import java.util.ArrayList;
 import java.util.List;
@@ -12,7 +14,8 @@ public enum PartGroup {
     LINE("line") {
         @Override
         List<String> keys(Design design) {
-            return List.of("line", "line.voltage", "line.frequency", "line.low", "line.high");
+            return List.of(
+                    "line", "line.voltage", "line.frequency", "line.low", "line.high", "line.recorded");
         }
     },
     CLIP("clip") {
@@ -71,8 +74,21 @@ public enum PartGroup {
         List<String> keys(Design design) {
             List<String> keys = new ArrayList<>(List.of("stage", "thyristor.device", "thyristor.case-to-ambient"));
             keys.addAll(List.of("load.kind", "load.rated", "load.resistance", "load.inductance"));
+            if (design.load() instanceof Load.Inductive inductive) {
+                if (design.stage() == Stage.BRIDGE_DC || design.stage() == Stage.HALF_WAVE) {
+                    keys.add("load.freewheel");
+                }
+                inductive.freewheel().ifPresent(diode -> keys.add("load.freewheel.drop"));
+            } else {
+                keys.add("load.cold-ratio");
+            }
+            if (design.load() instanceof Load.Filament) {
+                keys.add("load.exponent");
+            }
+            keys.add("snubber");
+            design.snubber().ifPresent(rc -> keys.addAll(List.of("snubber.resistance", "snubber.capacitance")));
             if (design.stage().bridgeDiodes() > 0) {
-                keys.add("stage-diodes.drop");
+                keys.addAll(List.of("stage-diodes.drop", "stage-diodes.slope"));
             }
             return keys;
         }
@@ -112,7 +128,7 @@ public enum PartGroup {
             case "ramp" -> RAMP;
             case "trigger" -> TRIGGER;
             case "gate" -> GATE;
-            case "load", "stage", "stage-diodes", "thyristor" -> LOAD;
+            case "load", "stage", "stage-diodes", "thyristor", "snubber" -> LOAD;
             default -> ASKED;
         };
     }

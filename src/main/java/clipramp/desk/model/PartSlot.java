@@ -58,6 +58,14 @@ public record PartSlot(
             Map.entry("thyristor.device", "thyristor"),
             Map.entry("thyristor.case-to-ambient", "case to ambient"),
             Map.entry("load.rated", "rated"),
+            Map.entry("load.freewheel", "freewheeling diode"),
+            Map.entry("load.freewheel.drop", "its drop"),
+            Map.entry("load.cold-ratio", "hot over cold R"),
+            Map.entry("load.exponent", "power exponent"),
+            Map.entry("snubber.resistance", "snubber resistor"),
+            Map.entry("snubber.capacitance", "snubber capacitor"),
+            Map.entry("stage-diodes.slope", "bridge diode slope"),
+            Map.entry("line.recorded", "recorded cycle, file"),
             Map.entry("stage-diodes.drop", "bridge diode drop"),
             Map.entry("wanted.lowest", "lowest wanted"),
             Map.entry("wanted.highest", "highest wanted"),
@@ -107,6 +115,10 @@ public record PartSlot(
 
     private static PartSlot slot(String path, String text, Sheet sheet, List<String> profiles) {
         Optional<Key> key = KeyCatalogue.standard().find(path);
+        Optional<Extra> extra = Extra.at(path);
+        if (extra.isPresent()) {
+            return fitted(path, extra.get(), text, key);
+        }
         List<String> choices = new ArrayList<>(key.map(Key::words).orElse(List.of()));
         if (choices.isEmpty() && !text.startsWith("{")) {
             choices.addAll(profiles);
@@ -126,6 +138,17 @@ public record PartSlot(
                 text,
                 text.isEmpty() ? standIn(path, sheet.loaded()) : "",
                 choices);
+    }
+
+    private static PartSlot fitted(String path, Extra extra, String text, Optional<Key> key) {
+        return new PartSlot(
+                path,
+                LABELS.getOrDefault(path, path),
+                "",
+                key.map(Key::meaning).orElse(""),
+                extra.choiceOf(text),
+                "",
+                extra.choices());
     }
 
     private static String standIn(String path, LoadedDesign loaded) {

@@ -8,6 +8,7 @@ import clipramp.record.DesignRecord;
 import clipramp.record.PageSize;
 import clipramp.record.RecordContent;
 import clipramp.record.RecordPreview;
+import clipramp.spread.SpreadResult;
 import java.io.IOException;
 import java.io.UncheckedIOException;
 import java.nio.file.Path;
@@ -23,7 +24,13 @@ public final class RecordMaker {
     private static final double PIXELS_PER_POINT = 1.25;
 
     private record Asked(
-            LoadedDesign loaded, Optional<Path> file, PageSize size, double zoom, Optional<FitResult> fit, int turn) {}
+            LoadedDesign loaded,
+            Optional<Path> file,
+            PageSize size,
+            Optional<SpreadResult> spread,
+            Optional<FitResult> fit,
+            double zoom,
+            int turn) {}
 
     private record Made(Asked asked, byte[] pdf) {}
 
@@ -34,6 +41,7 @@ public final class RecordMaker {
     private final List<RecordPreview.Page> pages = new ArrayList<>();
     private final List<Runnable> listeners = new ArrayList<>();
     private PageSize size = PageSize.A4;
+    private Optional<SpreadResult> spread = Optional.empty();
     private double zoom = 1;
     private Optional<FitResult> fit = Optional.empty();
     private Optional<Asked> wanted = Optional.empty();
@@ -67,8 +75,9 @@ public final class RecordMaker {
     public void show(LoadedDesign loaded, Optional<Path> file) {
         boolean same = wanted.filter(w -> w.loaded().equals(loaded)
                         && w.size() == size
-                        && w.zoom() == zoom
-                        && w.fit().equals(fit))
+                        && w.spread().equals(spread)
+                        && w.fit().equals(fit)
+                        && w.zoom() == zoom)
                 .isPresent();
         if (!same) {
             ask(loaded, file);
@@ -77,7 +86,7 @@ public final class RecordMaker {
 
     private void ask(LoadedDesign loaded, Optional<Path> file) {
         turn++;
-        Asked asked = new Asked(loaded, file, size, zoom, fit, turn);
+        Asked asked = new Asked(loaded, file, size, spread, fit, zoom, turn);
         wanted = Optional.of(asked);
         maker.ask(asked);
         listeners.forEach(Runnable::run);
@@ -95,6 +104,11 @@ public final class RecordMaker {
         wanted.ifPresent(w -> show(w.loaded(), w.file()));
     }
 
+    /** Lays a page on what many units do into the record, or leaves it out; takes effect with the next {@link #show}. */
+    public void setSpread(Optional<SpreadResult> drawn) {
+        spread = drawn;
+    }
+
     /** Pages are drawn for this zoom of the window. */
     public void setZoom(double other) {
         zoom = other;
@@ -105,7 +119,8 @@ public final class RecordMaker {
     private Made make(Asked asked) {
         try {
             Check check = Judge.check(asked.loaded().design(), OptionalDouble.empty(), OptionalDouble.empty());
-            RecordContent content = RecordContent.of(asked.loaded(), check, workshop.library(asked.file()), version);
+            RecordContent content = RecordContent.of(asked.loaded(), check, workshop.library(asked.file()), version)
+                    .withSpread(asked.spread());
             RecordContent whole = asked.fit().map(content::withFit).orElse(content);
             return new Made(asked, DesignRecord.bytes(whole, asked.size()));
         } catch (IOException e) {

@@ -3,6 +3,8 @@ package clipramp.desk.model;
 import clipramp.circuit.Stage;
 import clipramp.files.DesignText;
 import clipramp.files.InvalidInputException;
+import clipramp.files.LoadedDesign;
+import clipramp.files.Problem;
 import clipramp.files.ProfileLibrary;
 import java.nio.file.Path;
 import java.util.Comparator;
@@ -30,11 +32,37 @@ public final class Workshop {
      * @throws InvalidInputException with everything that is wrong with it
      */
     public Sheet read(DesignText text, Optional<Path> file) {
-        DesignText.Reading reading = text.read(libraries.apply(file));
+        // Under its whole path, for a recorded line is looked for beside it; people read the name.
+        String place = file.map(Path::toString).orElse(text.name());
+        DesignText.Reading reading = text.named(place).read(libraries.apply(file));
         if (reading instanceof DesignText.Reading.Good good) {
-            return new Sheet(text, good.loaded());
+            return new Sheet(text, named(good.loaded(), text.name()));
         }
-        throw new InvalidInputException(((DesignText.Reading.Bad) reading).problems());
+        throw new InvalidInputException(((DesignText.Reading.Bad) reading)
+                .problems().stream().map(p -> named(p, place, text.name())).toList());
+    }
+
+    private static LoadedDesign named(LoadedDesign loaded, String name) {
+        return new LoadedDesign(
+                loaded.design(),
+                name,
+                loaded.assumed(),
+                loaded.profiles(),
+                loaded.notes(),
+                loaded.overrides(),
+                loaded.inputDigest());
+    }
+
+    private static Problem named(Problem problem, String place, String name) {
+        return new Problem(
+                problem.file().equals(place) ? name : problem.file(),
+                problem.line(),
+                problem.column(),
+                problem.path(),
+                problem.read(),
+                problem.expected(),
+                problem.nearest(),
+                problem.message());
     }
 
     /** Ids of the profiles that may stand at a key of a design; empty where none may. */

@@ -29,6 +29,12 @@ final class Bystander {
         return new DeskModel(workers, workshop(), recovery, troubles::add);
     }
 
+    /** A draft by itself: edits are read, nothing is solved. */
+    Draft draft(Path state) {
+        Recovery recovery = new Recovery(new Places(state, state), ProcessHandle.current(), 1);
+        return new Draft(workers, workshop(), recovery, troubles::add);
+    }
+
     /** Runs everything that waits, and what that asks for. */
     void run() {
         while (!away.isEmpty() || !home.isEmpty()) {
