@@ -106,20 +106,32 @@ public final class LineWave {
         return phases[index];
     }
 
+    /** No slope of the wave exceeds this, V/rad. */
+    private double steepest() {
+        double sum = 0;
+        for (int i = 0; i < orders.length; i++) {
+            sum += orders[i] * Math.abs(amplitudes[i]);
+        }
+        return sum;
+    }
+
     private double[] zeros() {
         int highest = 1;
         for (int order : orders) {
             highest = Math.max(highest, order);
         }
-        int samples = SAMPLES_PER_ORDER * highest;
+        double finest = 2 * Math.PI / (SAMPLES_PER_ORDER * highest);
+        double steepest = steepest();
         double rising = Double.NaN;
         double falling = Double.NaN;
         int crossings = 0;
         // Half a radian before the fundamental's zero: both wanted zeros then come in order.
         double from = -0.5;
+        double last = from + 2 * Math.PI;
         double before = voltsAt(from);
-        for (int i = 1; i <= samples; i++) {
-            double to = -0.5 + 2 * Math.PI * i / samples;
+        while (from < last) {
+            // No zero lies nearer than the steepest slope could reach it.
+            double to = Math.min(last, from + Math.max(finest, Math.abs(before) / steepest));
             double after = voltsAt(to);
             if ((before < 0) != (after < 0)) {
                 crossings++;

@@ -22,7 +22,8 @@ public final class LoadCurrent {
         this(design, new LineWave(design.line(), condition));
     }
 
-    LoadCurrent(Design design, LineWave line) {
+    /** The same of a line that is at hand. */
+    public LoadCurrent(Design design, LineWave line) {
         this.line = line;
         Stage stage = design.stage();
         fullWave = stage.isFullWave();

@@ -34,7 +34,7 @@ record FiringCase(
                 network,
                 line,
                 SupplyTiming.of(design, line),
-                new LoadCurrent(design, condition),
+                new LoadCurrent(design, line),
                 design.clip().tap() == ClipSupply.Tap.THYRISTOR,
                 conductingVolts(design));
     }

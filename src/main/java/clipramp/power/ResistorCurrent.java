@@ -2,13 +2,10 @@ package clipramp.power;
 
 import clipramp.circuit.Condition;
 import clipramp.circuit.Design;
-import clipramp.circuit.Line;
 import clipramp.engine.LineWave;
 import clipramp.engine.LoadCurrent;
 import java.util.Optional;
 import org.apache.commons.math3.analysis.UnivariateFunction;
-import org.apache.commons.math3.analysis.integration.gauss.GaussIntegrator;
-import org.apache.commons.math3.analysis.integration.gauss.GaussIntegratorFactory;
 import org.apache.commons.math3.analysis.solvers.BrentSolver;
 import org.apache.commons.math3.optim.MaxEval;
 import org.apache.commons.math3.optim.nonlinear.scalar.GoalType;
@@ -24,7 +21,6 @@ import org.apache.commons.math3.optim.univariate.UnivariateObjectiveFunction;
  * against its highest order, between limits found to 1e-13 rad.
  */
 final class ResistorCurrent {
-    private static final int POINTS = 24;
     private static final double LIMIT_RAD = 1e-13;
     private static final int TRIALS = 200;
 
@@ -175,30 +171,41 @@ final class ResistorCurrent {
     }
 
     private HalfCycleCurrent between(UnivariateFunction driving, double from, double to) {
-        int panels = Math.max(1, (int) Math.ceil((to - from) / panelRad()));
-        double width = (to - from) / panels;
-        GaussIntegratorFactory rules = new GaussIntegratorFactory();
-        double charge = 0;
-        double square = 0;
-        double peak = 0;
-        double peakRad = from;
-        for (int panel = 0; panel < panels; panel++) {
-            double left = from + panel * width;
-            GaussIntegrator rule = rules.legendre(POINTS, left, left + width);
-            for (int point = 0; point < rule.getNumberOfPoints(); point++) {
-                double rad = rule.getPoint(point);
-                double volts = driving.value(rad);
-                charge += rule.getWeight(point) * volts;
-                square += rule.getWeight(point) * volts * volts;
-                if (volts > peak) {
-                    peak = volts;
-                    peakRad = rad;
-                }
+        Sums sums = new Sums(driving, from);
+        SpanQuadrature.visit(from, to, 2 * SpanTotals.highestOrder(design.line()), sums);
+        double highest =
+                Math.max(driving.value(from), crestNear(driving, sums.peakRad, 2 * panelRad(), from, to));
+        return new HalfCycleCurrent(
+                sums.charge / pathOhms,
+                sums.square / (pathOhms * pathOhms),
+                Math.max(sums.peak, highest) / pathOhms,
+                from,
+                to);
+    }
+
+    /** Integrals of the driving voltage and of its square, and the largest of it at any node. */
+    private static final class Sums implements SpanQuadrature.Visitor {
+        private final UnivariateFunction driving;
+        private double charge;
+        private double square;
+        private double peak;
+        private double peakRad;
+
+        Sums(UnivariateFunction driving, double fromRad) {
+            this.driving = driving;
+            this.peakRad = fromRad;
+        }
+
+        @Override
+        public void node(double rad, double weightRad) {
+            double volts = driving.value(rad);
+            charge += weightRad * volts;
+            square += weightRad * volts * volts;
+            if (volts > peak) {
+                peak = volts;
+                peakRad = rad;
             }
         }
-        double highest = Math.max(driving.value(from), crestNear(driving, peakRad, width, from, to));
-        return new HalfCycleCurrent(
-                charge / pathOhms, square / (pathOhms * pathOhms), Math.max(peak, highest) / pathOhms, from, to);
     }
 
     private static double crestNear(UnivariateFunction driving, double rad, double width, double from, double to) {
@@ -215,12 +222,8 @@ final class ResistorCurrent {
                 : driving.value(rad);
     }
 
-    /** A panel over which the highest order turns by half a radian at most: Gauss with 24 points is exact there. */
+    /** A step within which the driving voltage has one zero or one crest at most: half a radian of the highest order. */
     private double panelRad() {
-        int highest = design.line().harmonics().stream()
-                .mapToInt(Line.Harmonic::order)
-                .max()
-                .orElse(1);
-        return 0.5 / highest;
+        return 0.5 / SpanTotals.highestOrder(design.line());
     }
 }

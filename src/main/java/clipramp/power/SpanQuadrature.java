@@ -39,6 +39,15 @@ final class SpanQuadrature {
         panels(start, span.toRad(), longest, visitor);
     }
 
+    /**
+     * Visits the nodes between two angles.
+     *
+     * @param highestOrder order of the line of the fastest sinusoid in the integrand
+     */
+    static void visit(double fromRad, double toRad, int highestOrder, Visitor visitor) {
+        panels(fromRad, toRad, MOST_TURN_RAD / highestOrder, visitor);
+    }
+
     private static void panels(double from, double to, double longest, Visitor visitor) {
         if (!(to > from)) {
             return;
