@@ -26,8 +26,8 @@ import picocli.CommandLine.Parameters;
         sortSynopsis = false,
         description = {
             "Lists the profiles; with an ID, shows that one with the source of every figure.",
-            "With --for, puts every trigger device and thyristor in the design's place and judges each; a trigger device of",
-            "the other kind with the divider, or the base-two resistor, that it wants."
+            "With --for, puts every trigger device and thyristor in the design's place and judges each; a trigger device"
+                    + " of the other kind comes with the divider, or the base-two resistor, that it wants."
         })
 final class PartsCommand implements Callable<Integer> {
     private final Session session;

@@ -173,8 +173,7 @@ final class ResistorCurrent {
     private HalfCycleCurrent between(UnivariateFunction driving, double from, double to) {
         Sums sums = new Sums(driving, from);
         SpanQuadrature.visit(from, to, 2 * SpanTotals.highestOrder(design.line()), sums);
-        double highest =
-                Math.max(driving.value(from), crestNear(driving, sums.peakRad, 2 * panelRad(), from, to));
+        double highest = Math.max(driving.value(from), crestNear(driving, sums.peakRad, 2 * panelRad(), from, to));
         return new HalfCycleCurrent(
                 sums.charge / pathOhms,
                 sums.square / (pathOhms * pathOhms),

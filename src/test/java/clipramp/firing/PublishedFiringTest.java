@@ -3,6 +3,7 @@ package clipramp.firing;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
+import clipramp.engine.Network;
 import clipramp.firing.PublishedRelations.BaseTwoRule;
 import java.util.OptionalDouble;
 import org.junit.jupiter.api.Test;
@@ -43,6 +44,44 @@ class PublishedFiringTest {
     void rampResistorOfRashid96() {
         assertThat(PERIOD_60_HZ / PublishedRelations.textbookPeriodSeconds(1, 0.5e-6, 10.0 / 30))
                 .isCloseTo(82_200, within(50.0));
+    }
+
+    /** The same example: I_G 1 mA, so R_G 20 k and a divider of 60 k over 30 k; a pulse of 50 us into 100 ohm. */
+    @Test
+    void dividerAndBaseOneOfRashid96() {
+        double standoff = 10.0 / 30;
+        double gateOhms = (1 - standoff) * 30 / 1e-3;
+        assertThat(gateOhms).isCloseTo(20e3, within(1e-6));
+        assertDivides(standoff, gateOhms, 60e3, 30e3, 1e-6);
+        assertThat(PublishedRelations.baseOneOhmsForPulse(50e-6, 0.5e-6)).isCloseTo(100, within(1e-9));
+    }
+
+    /**
+     * Singh and Khanchandani, Power Electronics, 3.5 (programmable device): 12 V, 80 mA for 8 us into 39 ohm with a drop of
+     * 1 V: V_P 4.12, standoff ratio 0.343, 0.205 uF; with its R_G of 8.24 k the divider is 24 k over 12.5 k.
+     */
+    @Test
+    void pulseAndDividerOfSinghAndKhanchandani35() {
+        double farads = 0.205e-6;
+        assertThat(PublishedRelations.baseOneOhmsForPulse(8e-6, farads)).isCloseTo(39, within(0.05));
+        double standoff = 0.343;
+        double peak = PublishedRelations.peakPointVolts(standoff, 12, 0);
+        assertThat(peak).isCloseTo(4.12, within(0.005));
+        assertThat((peak - 1) / 39).isCloseTo(80e-3, within(0.2e-3));
+        assertDivides(standoff, 8.24e3, 24.0e3, 12.54e3, 30);
+    }
+
+    /** What engine and device make of a divider, against the book's R_G and standoff ratio. */
+    private static void assertDivides(double standoff, double gateOhms, double upper, double lower, double withinOhms) {
+        assertThat(gateOhms / standoff).isCloseTo(upper, within(withinOhms));
+        assertThat(gateOhms / (1 - standoff)).isCloseTo(lower, within(withinOhms));
+        Network network = new Network();
+        network.programmable = true;
+        network.upperOhms = upper;
+        network.lowerOhms = lower;
+        network.derive();
+        assertThat(network.peakShare()).isCloseTo(standoff, within(5e-4));
+        assertThat(1 / (1 / upper + 1 / lower)).isCloseTo(gateOhms, within(withinOhms));
     }
 
     /** Gupta and Singhal, Power Electronics, 2.29: 2 kHz, 10 V, eta 0.6, V_D 0.5, 5 mA; the textbook form. */
