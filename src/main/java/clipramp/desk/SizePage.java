@@ -33,6 +33,7 @@ import javafx.scene.layout.VBox;
 final class SizePage implements PageView {
     private static final Set<OpenPart> RAMP = EnumSet.of(OpenPart.FIXED, OpenPart.TRACK);
     private static final Set<OpenPart> AT_FIRST = EnumSet.of(OpenPart.CAPACITOR, OpenPart.FIXED, OpenPart.TRACK);
+    private static final Set<OpenPart> ADDED = EnumSet.of(OpenPart.ACROSS, OpenPart.TRIM_HIGH, OpenPart.TRIM_LOW);
     private static final List<String> WANTED = List.of("wanted.lowest", "wanted.highest");
     private static final double FIGURE_HEIGHT = 300;
 
@@ -171,7 +172,7 @@ final class SizePage implements PageView {
         draft.sheet().ifPresent(sheet -> {
             List<OpenPart> shown = Arrays.stream(OpenPart.values())
                     .filter(part -> chosen() == Goal.PARTS || (isShaping() && RAMP.contains(part)))
-                    .filter(part -> SizedText.value(part, sheet.design()).isPresent())
+                    .filter(part -> SizedText.value(part, sheet.design()).isPresent() || mayBeAdded(part, sheet))
                     .toList();
             parts.getChildren().clear();
             if (!shown.isEmpty()) {
@@ -186,6 +187,13 @@ final class SizePage implements PageView {
                 parts.getChildren().add(quiet("law, end and shunt of the pot are always chosen"));
             }
         });
+    }
+
+    /** A resistor across the pot and trimmers, which most designs do without. */
+    private boolean mayBeAdded(OpenPart part, Sheet sheet) {
+        return !isShaping()
+                && ADDED.contains(part)
+                && sheet.design().ramp().pot().isPresent();
     }
 
     private boolean isShaping() {

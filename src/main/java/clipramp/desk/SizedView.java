@@ -106,7 +106,7 @@ final class SizedView {
             return;
         }
         boolean fresh = found.before().isEmpty();
-        head(fresh ? "Every part, and why" : "Values, and why");
+        head(fresh ? "Every part, and why" : found.reasons().isEmpty() ? "Values" : "Values, and why");
         changes.forEach(change -> box.getChildren().add(value(change, found, fresh)));
     }
 

@@ -278,7 +278,7 @@ class WindowTest {
             FigurePane drawing = window.find("#proposal-circuit", FigurePane.class);
             assertThat(drawing.figure()).isInstanceOf(clipramp.figures.CircuitFigure.class);
             assertThat(Texts.of(window.find("#sized", Node.class)))
-                    .contains("Holds with nominal parts", "before the collapse at most", "next up, ", "next down, ");
+                    .contains("● Holds ", "before the collapse at most", "next up, ", "next down, ");
             assertThat(window.model.draft().isOpen()).isFalse();
             window.click("#proposal-again");
             window.click("#new-enter");

@@ -128,13 +128,32 @@ public final class Resizing {
                 request, answer, telling.of((done, of) -> "Trying the neighbours of part " + (done + 1) + " of " + of));
         return new Resized(
                 asked,
-                read(SizedText.of(partial, answer.design()), asked),
+                read(written(asked, partial, answer.design()), asked),
                 judged(asked),
                 answer,
                 reasons,
                 partial.notes(),
                 Optional.empty(),
                 Optional.empty());
+    }
+
+    /** The design's text; a part that comes out as it was keeps its author's spelling. */
+    private static DesignText written(Asked asked, PartialDesign partial, Design design) {
+        Set<OpenPart> moved = EnumSet.noneOf(OpenPart.class);
+        for (OpenPart part : partial.open()) {
+            Optional<String> before = asked.before().flatMap(sheet -> SizedText.value(part, sheet.design()));
+            if (!before.equals(SizedText.value(part, design))) {
+                moved.add(part);
+            }
+        }
+        DesignText text = SizedText.of(partial.text(), moved, design);
+        for (OpenPart part : moved) {
+            if (SizedText.value(part, design).isEmpty()
+                    && text.valueAt(part.key()).isPresent()) {
+                text = text.without(part.key());
+            }
+        }
+        return text;
     }
 
     private Sheet read(DesignText text, Asked asked) {
@@ -155,7 +174,7 @@ public final class Resizing {
         KnobShape after = KnobShaping.straightest(
                 request, now, what, telling.of((done, of) -> done + " of " + of + " knobs drawn"));
         SizingAnswer answer = Sizing.judge(request, after.design());
-        DesignText text = SizedText.withPot(SizedText.of(partial, answer.design()), answer.design());
+        DesignText text = SizedText.withPot(written(asked, partial, answer.design()), answer.design());
         return new Resized(
                 asked,
                 read(text, asked),
