@@ -67,7 +67,7 @@ final class DeskWindow {
         pages.put(Page.LINE, new Late<>(() -> new LinePage(theme, model)));
         pages.put(Page.FAULTS, new Late<>(() -> new FaultsPage(theme, model)));
         pages.put(Page.SPREAD, spread);
-        pages.put(Page.FIT, new Late<>(() -> new FitPage(model.draft(), model.fitting(), actions)));
+        pages.put(Page.FIT, new Late<>(() -> new FitPage(theme, model.draft(), model.fitting(), actions)));
         pages.put(Page.SIZE, new Late<>(() -> new SizePage(theme, model.draft(), model.resizing())));
         pages.put(
                 Page.RECORD,

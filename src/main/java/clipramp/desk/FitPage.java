@@ -29,10 +29,14 @@ final class FitPage implements PageView {
     private static final Expected AIR = Expected.within(Unit.CELSIUS, -60, 150).allowingBare();
     private static final Expected VOLTS = Expected.within(Unit.VOLT, 1, 2000).allowingBare();
 
+    /** Under this width in effective pixels. */
+    private static final double STACK_BELOW = 1000;
+
+    private final Theme theme;
     private final Draft draft;
     private final LongRun<Fitting.Asked, Fitting.Answer> run;
     private final Actions actions;
-    private final VBox columns = new VBox();
+    private final FlowPane columns = new FlowPane();
     private final TextField air = new TextField("25 degC");
     private final TextField volts = new TextField();
     private final Button start = new Button("Fit");
@@ -41,12 +45,18 @@ final class FitPage implements PageView {
     private final Button take = new Button("Take over as built");
     private final Label state = SizedView.wrapped("");
     private final FitView view = new FitView();
+    private final VBox side = new VBox();
+    private final VBox middle = new VBox();
+    private final VBox stacked = new VBox(new Region());
+    private final ScrollPane sideScroll = scrolled("record-side-scroll");
+    private final ScrollPane scroll = scrolled("record-scroll");
     private final BorderPane box = new BorderPane();
     private Optional<Boolean> knob = Optional.empty();
     private Optional<Fitting.Answer> told = Optional.empty();
     private boolean typed;
 
-    FitPage(Draft draft, LongRun<Fitting.Asked, Fitting.Answer> run, Actions actions) {
+    FitPage(Theme theme, Draft draft, LongRun<Fitting.Asked, Fitting.Answer> run, Actions actions) {
+        this.theme = theme;
         this.draft = draft;
         this.run = run;
         this.actions = actions;
@@ -54,10 +64,11 @@ final class FitPage implements PageView {
         ask();
         show();
         run.onChange(this::refresh);
+        theme.onChange(this::arrange);
     }
 
     private void ask() {
-        columns.getStyleClass().add("size-parts");
+        columns.getStyleClass().add("bench-columns");
         air.setId("fit-air");
         air.setAccessibleText("Ambient temperature while it was read");
         volts.setId("fit-line");
@@ -69,24 +80,23 @@ final class FitPage implements PageView {
         complaint.setId("fit-complaint");
         complaint.getStyleClass().add("complaint");
         complaint.managedProperty().bind(complaint.textProperty().isNotEmpty());
-        VBox side = new VBox(
+        side.getChildren().setAll(
                 start,
                 new RunBar(run, "fit", "fitting the unit to its readings").node(),
                 complaint,
-                columns,
+                SpreadPage.named("what was read", columns),
                 SpreadPage.named("ambient", air),
                 SpreadPage.named("line, where not read", volts));
         side.getStyleClass().add("record-side");
-        box.setLeft(scrolled(side, "record-side-scroll"));
     }
 
-    private static ScrollPane scrolled(Region content, String style) {
-        ScrollPane scroll = new ScrollPane(content);
-        scroll.setFitToWidth(true);
-        scroll.setHbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);
-        scroll.setFocusTraversable(false);
-        scroll.getStyleClass().add(style);
-        return scroll;
+    private static ScrollPane scrolled(String style) {
+        ScrollPane made = new ScrollPane();
+        made.setFitToWidth(true);
+        made.setHbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);
+        made.setFocusTraversable(false);
+        made.getStyleClass().add(style);
+        return made;
     }
 
     private void show() {
@@ -107,12 +117,30 @@ final class FitPage implements PageView {
         state.setId("fit-state");
         FlowPane buttons = new FlowPane(open, paste, save, take);
         buttons.getStyleClass().add("flow-buttons");
-        VBox middle = new VBox(buttons, state, table.node(), view.node());
+        middle.getChildren().setAll(buttons, state, table.node(), view.node());
         middle.getStyleClass().add("spread-middle");
-        ScrollPane scroll = scrolled(middle, "record-scroll");
         scroll.setFocusTraversable(true);
         scroll.setAccessibleText("Readings and what they tell; arrow keys scroll");
         box.setCenter(scroll);
+        box.widthProperty().addListener(property -> arrange());
+        arrange();
+    }
+
+    /** The table needs its room: where there is little, what is asked stands over it and not beside it. */
+    private void arrange() {
+        boolean narrow = box.getWidth() / theme.zoom() < STACK_BELOW;
+        if (narrow == stacked.getChildren().isEmpty()) {
+            stacked.getChildren().clear();
+            sideScroll.setContent(null);
+            scroll.setContent(null);
+            if (narrow) {
+                stacked.getChildren().setAll(side, middle);
+            } else {
+                sideScroll.setContent(side);
+            }
+            scroll.setContent(narrow ? stacked : middle);
+            box.setLeft(narrow ? null : sideScroll);
+        }
     }
 
     @Override
@@ -134,9 +162,7 @@ final class FitPage implements PageView {
     }
 
     private void offer() {
-        Label head = new Label("what was read");
-        head.getStyleClass().add("quiet");
-        columns.getChildren().setAll(head);
+        columns.getChildren().clear();
         List<BenchSheet.Column> all = table.sheet().columns();
         for (BenchSheet.Column column : all) {
             CheckBox check = new CheckBox(column.head());

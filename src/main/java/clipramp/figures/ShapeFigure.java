@@ -74,6 +74,8 @@ public record ShapeFigure(KnobShape before, KnobShape after) implements Figure {
     public void draw(Graphics2D g, double width, double height, Style style) {
         Palette palette = style.palette();
         Plot plot = new Plot(g, style, axis(width, style), axis(height * 0.8, style));
+        // One path a curve: drawn piece by piece, a dash would begin anew on every piece.
+        plot.renderer().setDrawSeriesLineAsPath(true);
         double first = 100 * after.values().get(0);
         double last = 100 * after.values().get(after.values().size() - 1);
         plot.curve(
