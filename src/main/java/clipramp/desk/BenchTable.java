@@ -88,7 +88,7 @@ final class BenchTable {
     }
 
     private VBox head(Column column, int c) {
-        Label name = SizedView.wrapped(column.head());
+        Label name = Words.wrapped(column.head());
         name.setId("fit-head-" + c);
         TextField accuracy = new TextField(column.accuracy());
         accuracy.setId("fit-accuracy-" + c);
@@ -115,7 +115,7 @@ final class BenchTable {
             fields.put(key(r, columns.get(c)), field);
             grid.add(field, c + 1, 2 * r + 1);
         }
-        Label remark = SizedView.wrapped("");
+        Label remark = Words.wrapped("");
         remark.setId("fit-remark-" + r);
         remark.getStyleClass().add("complaint");
         remark.setManaged(false);

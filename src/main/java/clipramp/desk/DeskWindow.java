@@ -71,8 +71,8 @@ final class DeskWindow {
         pages.put(Page.SIZE, new Late<>(() -> new SizePage(theme, model.draft(), model.resizing())));
         pages.put(
                 Page.RECORD,
-                new Late<>(
-                        () -> new RecordPage(theme, model.draft(), maker.get(), model.spread(), model.fitting(), actions::saveRecord)));
+                new Late<>(() -> new RecordPage(
+                        theme, model.draft(), maker.get(), model.spread(), model.fitting(), actions::saveRecord)));
         this.header = new Late<>(() -> new HeaderView(model, actions, () -> bench().unfold(true)));
         this.tabs = new Late<>(() -> new PageTabs(actions));
         this.menus = new Menus(actions, model.draft());

@@ -40,19 +40,19 @@ final class FitPage implements PageView {
     private final TextField air = new TextField("25 degC");
     private final TextField volts = new TextField();
     private final Button start = new Button("Fit");
-    private final Label complaint = SizedView.wrapped("");
+    private final Label complaint = Words.wrapped("");
     private final BenchTable table;
     private final Button take = new Button("Take over as built");
-    private final Label state = SizedView.wrapped("");
+    private final Label state = Words.wrapped("");
     private final FitView view = new FitView();
-    private final VBox side = new VBox();
+    private final SidePanel side = new SidePanel();
     private final VBox middle = new VBox();
-    private final VBox stacked = new VBox(new Region());
-    private final ScrollPane sideScroll = scrolled("record-side-scroll");
-    private final ScrollPane scroll = scrolled("record-scroll");
+    private final VBox stacked = new VBox();
+    private final ScrollPane scroll = new ScrollPane();
     private final BorderPane box = new BorderPane();
     private Optional<Boolean> knob = Optional.empty();
     private Optional<Fitting.Answer> told = Optional.empty();
+    private Optional<Boolean> arranged = Optional.empty();
     private boolean typed;
 
     FitPage(Theme theme, Draft draft, LongRun<Fitting.Asked, Fitting.Answer> run, Actions actions) {
@@ -80,23 +80,15 @@ final class FitPage implements PageView {
         complaint.setId("fit-complaint");
         complaint.getStyleClass().add("complaint");
         complaint.managedProperty().bind(complaint.textProperty().isNotEmpty());
-        side.getChildren().setAll(
-                start,
-                new RunBar(run, "fit", "fitting the unit to its readings").node(),
-                complaint,
-                SpreadPage.named("what was read", columns),
-                SpreadPage.named("ambient", air),
-                SpreadPage.named("line, where not read", volts));
-        side.getStyleClass().add("record-side");
-    }
-
-    private static ScrollPane scrolled(String style) {
-        ScrollPane made = new ScrollPane();
-        made.setFitToWidth(true);
-        made.setHbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);
-        made.setFocusTraversable(false);
-        made.getStyleClass().add(style);
-        return made;
+        side.column()
+                .getChildren()
+                .setAll(
+                        start,
+                        new RunBar(run, "fit", "fitting the unit to its readings").node(),
+                        complaint,
+                        SpreadPage.named("what was read", columns),
+                        SpreadPage.named("ambient", air),
+                        SpreadPage.named("line, where not read", volts));
     }
 
     private void show() {
@@ -119,7 +111,10 @@ final class FitPage implements PageView {
         buttons.getStyleClass().add("flow-buttons");
         middle.getChildren().setAll(buttons, state, table.node(), view.node());
         middle.getStyleClass().add("spread-middle");
-        scroll.setFocusTraversable(true);
+        scroll.setFitToWidth(true);
+        scroll.setHbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);
+        scroll.getStyleClass().add("record-scroll");
+        scroll.setId("fit-scroll");
         scroll.setAccessibleText("Readings and what they tell; arrow keys scroll");
         box.setCenter(scroll);
         box.widthProperty().addListener(property -> arrange());
@@ -128,18 +123,16 @@ final class FitPage implements PageView {
 
     /** The table needs its room: where there is little, what is asked stands over it and not beside it. */
     private void arrange() {
-        boolean narrow = box.getWidth() / theme.zoom() < STACK_BELOW;
-        if (narrow == stacked.getChildren().isEmpty()) {
+        boolean narrow = box.getWidth() > 0 && box.getWidth() / theme.zoom() < STACK_BELOW;
+        if (!arranged.equals(Optional.of(narrow))) {
+            arranged = Optional.of(narrow);
             stacked.getChildren().clear();
-            sideScroll.setContent(null);
-            scroll.setContent(null);
+            side.node().setContent(narrow ? null : side.column());
             if (narrow) {
-                stacked.getChildren().setAll(side, middle);
-            } else {
-                sideScroll.setContent(side);
+                stacked.getChildren().setAll(side.column(), middle);
             }
             scroll.setContent(narrow ? stacked : middle);
-            box.setLeft(narrow ? null : sideScroll);
+            box.setLeft(narrow ? null : side.node());
         }
     }
 

@@ -54,7 +54,7 @@ final class FitView {
     private void table(String words, String id, List<List<String>> rows) {
         if (rows.size() > 1) {
             head(words);
-            box.getChildren().add(SizedView.table(id, rows));
+            box.getChildren().add(TextGrid.ofFigures(id, rows));
         }
     }
 
@@ -63,7 +63,7 @@ final class FitView {
     }
 
     private void add(String words, String style) {
-        Label label = SizedView.wrapped(words);
+        Label label = Words.wrapped(words);
         if (!style.isEmpty()) {
             label.getStyleClass().add(style);
         }

@@ -47,9 +47,9 @@ final class SizePage implements PageView {
     private final VBox wanted = new VBox();
     private final List<SlotView> slots = new ArrayList<>();
     private final Button start = new Button("Search");
-    private final Label complaint = SizedView.wrapped("");
+    private final Label complaint = Words.wrapped("");
     private final Button take = new Button("Take over");
-    private final Label state = SizedView.wrapped("");
+    private final Label state = Words.wrapped("");
     private final FigurePane curve;
     private final VBox tables = new VBox();
     private final SizedView found = new SizedView();
@@ -102,21 +102,15 @@ final class SizePage implements PageView {
         complaint.setId("size-complaint");
         complaint.getStyleClass().add("complaint");
         complaint.managedProperty().bind(complaint.textProperty().isNotEmpty());
-        VBox side = new VBox(
-                SpreadPage.named("look for", goal),
-                wanted,
-                SpreadPage.named("series", series),
-                parts,
-                start,
-                new RunBar(run, "size", "searching for values").node(),
-                complaint);
-        side.getStyleClass().add("record-side");
-        ScrollPane scroll = new ScrollPane(side);
-        scroll.setFitToWidth(true);
-        scroll.setHbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);
-        scroll.setFocusTraversable(false);
-        scroll.getStyleClass().add("record-side-scroll");
-        box.setLeft(scroll);
+        box.setLeft(new SidePanel(
+                        SpreadPage.named("look for", goal),
+                        wanted,
+                        SpreadPage.named("series", series),
+                        parts,
+                        start,
+                        new RunBar(run, "size", "searching for values").node(),
+                        complaint)
+                .node());
     }
 
     private void show() {
@@ -176,15 +170,15 @@ final class SizePage implements PageView {
                     .toList();
             parts.getChildren().clear();
             if (!shown.isEmpty()) {
-                parts.getChildren().add(quiet("free to be chosen; all else is kept"));
+                parts.getChildren().add(Words.quiet("free to be chosen; all else is kept"));
             } else {
-                parts.getChildren().add(quiet("base two's resistor is chosen; all else is kept"));
+                parts.getChildren().add(Words.quiet("base two's resistor is chosen; all else is kept"));
             }
             for (OpenPart part : shown) {
                 parts.getChildren().add(box(part, sheet));
             }
             if (isShaping()) {
-                parts.getChildren().add(quiet("law, end and shunt of the pot are always chosen"));
+                parts.getChildren().add(Words.quiet("law, end and shunt of the pot are always chosen"));
             }
         });
     }
@@ -215,12 +209,6 @@ final class SizePage implements PageView {
         check.setText(name + shown);
         check.setAccessibleText("Free to be chosen: " + name + shown);
         return check;
-    }
-
-    private static Label quiet(String words) {
-        Label label = SizedView.wrapped(words);
-        label.getStyleClass().add("quiet");
-        return label;
     }
 
     private void start() {
@@ -286,12 +274,12 @@ final class SizePage implements PageView {
         tables.getChildren().clear();
         answer.knobs().ifPresent(knobs -> {
             curve.show(new ShapeFigure(knobs.before(), knobs.after()));
-            tables.getChildren().add(SizedView.table("size-shape", SizedRows.of(knobs)));
+            tables.getChildren().add(TextGrid.ofFigures("size-shape", SizedRows.of(knobs)));
         });
         answer.steadied().ifPresent(steadied -> {
             Label head = new Label("Base two against temperature, at mid-knob");
             head.getStyleClass().add("sized-head");
-            tables.getChildren().addAll(head, SizedView.table("size-steady", SizedRows.of(steadied)));
+            tables.getChildren().addAll(head, TextGrid.ofFigures("size-steady", SizedRows.of(steadied)));
         });
     }
 }

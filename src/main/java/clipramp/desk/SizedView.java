@@ -11,10 +11,6 @@ import clipramp.sizing.SizingWords;
 import java.util.ArrayList;
 import java.util.List;
 import javafx.scene.control.Label;
-import javafx.scene.layout.ColumnConstraints;
-import javafx.scene.layout.GridPane;
-import javafx.scene.layout.Priority;
-import javafx.scene.layout.Region;
 import javafx.scene.layout.VBox;
 
 /** What a search found, in words: what it keeps, what cannot be met, and every value with its reason. */
@@ -57,7 +53,7 @@ final class SizedView {
         rows.add(List.of("verdict", verdict(before), verdict(after)));
         rows.add(List.of("margins", summary(before), summary(after)));
         rows.add(List.of("decided by", deciding(before), deciding(after)));
-        box.getChildren().add(table("sized-verdicts", rows));
+        box.getChildren().add(TextGrid.ofWords("sized-verdicts", rows));
         if (rank(before.verdict()) < rank(after.verdict())) {
             add("What stands there has the better verdict. Free more parts, or keep it.", "");
         }
@@ -120,7 +116,7 @@ final class SizedView {
                 : change.differs()
                         ? (change.before().isEmpty() ? "none" : change.before()) + "  →  " + after
                         : after + ", as it stands";
-        Label figures = wrapped(words);
+        Label figures = Words.wrapped(words);
         figures.setId("sized-value-" + change.slot().key().replace('.', '-'));
         if (fresh || change.differs()) {
             figures.getStyleClass().add("verdict");
@@ -132,46 +128,13 @@ final class SizedView {
     }
 
     private static void why(VBox part, Reason reason) {
-        part.getChildren().add(wrapped(reason.relation() + "."));
+        part.getChildren().add(Words.wrapped(reason.relation() + "."));
         if (!reason.up().isEmpty()) {
-            part.getChildren().add(quiet("next up, " + reason.up()));
+            part.getChildren().add(Words.quiet("next up, " + reason.up()));
         }
         if (!reason.down().isEmpty()) {
-            part.getChildren().add(quiet("next down, " + reason.down()));
+            part.getChildren().add(Words.quiet("next down, " + reason.down()));
         }
-    }
-
-    private static Label quiet(String words) {
-        Label label = wrapped(words);
-        label.getStyleClass().add("quiet");
-        return label;
-    }
-
-    /** A table whose first row is its heads and whose first column names the rows. */
-    static GridPane table(String id, List<List<String>> rows) {
-        GridPane grid = new GridPane();
-        grid.setId(id);
-        grid.getStyleClass().add("spread-table");
-        int columns = rows.get(0).size();
-        for (int c = 0; c < columns; c++) {
-            ColumnConstraints column = new ColumnConstraints();
-            column.setHgrow(Priority.NEVER);
-            column.setMinWidth(c == 0 ? Region.USE_PREF_SIZE : 0);
-            grid.getColumnConstraints().add(column);
-        }
-        for (int r = 0; r < rows.size(); r++) {
-            for (int c = 0; c < columns; c++) {
-                Label cell = wrapped(rows.get(r).get(c));
-                if (r == 0 || c == 0) {
-                    cell.getStyleClass().add("quiet");
-                }
-                if (c == 0) {
-                    cell.setMinWidth(Region.USE_PREF_SIZE);
-                }
-                grid.add(cell, c, r);
-            }
-        }
-        return grid;
     }
 
     Label head(String words) {
@@ -182,18 +145,11 @@ final class SizedView {
     }
 
     private Label add(String words, String style) {
-        Label label = wrapped(words);
+        Label label = Words.wrapped(words);
         if (!style.isEmpty()) {
             label.getStyleClass().add(style);
         }
         box.getChildren().add(label);
-        return label;
-    }
-
-    static Label wrapped(String words) {
-        Label label = new Label(words);
-        label.setWrapText(true);
-        label.setMinHeight(Region.USE_PREF_SIZE);
         return label;
     }
 }

@@ -21,6 +21,7 @@ import javafx.event.ActionEvent;
 import javafx.scene.Node;
 import javafx.scene.control.ComboBox;
 import javafx.scene.control.Label;
+import javafx.scene.control.ScrollPane;
 import javafx.scene.control.TextField;
 import javafx.scene.image.WritableImage;
 import javafx.stage.Stage;
@@ -171,6 +172,11 @@ public final class Screens {
         fire(stage, "#fit-start");
         settle(() -> model.fitting().answer().isPresent());
         save(stage, folder.resolve("fit-" + name + ".png"));
+        at(() -> {
+            ((ScrollPane) stage.getScene().getRoot().lookup("#fit-scroll")).setVvalue(0.4);
+            return null;
+        });
+        save(stage, folder.resolve("fit-told-" + name + ".png"));
         fire(stage, "#page-record");
         settle(() -> stage.getScene().getRoot().lookup("#record-progress") instanceof Label label
                 && label.getText().contains("pages"));
