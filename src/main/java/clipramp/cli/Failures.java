@@ -55,6 +55,10 @@ final class Failures {
             return file(String.valueOf(failure.getMessage()));
         } catch (UncheckedIOException | IOException failure) {
             return file("a file cannot be read or written: " + failure.getMessage() + ".");
+        } catch (ExceptionInInitializerError failure) {
+            return failure.getCause() instanceof UncheckedIOException noRoom
+                    ? file(noRoom.getMessage() + ".")
+                    : ourFault(failure);
         } catch (InterruptedException | CancellationException stopped) {
             return ExitCode.INTERRUPTED;
         } catch (Exception | StackOverflowError | OutOfMemoryError | AssertionError | LinkageError fault) {

@@ -13,13 +13,13 @@ import java.util.Locale;
 
 /**
  * One of the two streams that a command writes to. A reader that went away (head, a closed pager) is no failure: what
- * follows is dropped quietly. Anything else, such as a full disk, is reported.
+ * follows is dropped quietly. Anything else, such as a full disk, is reported, once.
  */
 final class Output {
     private final Writer writer;
     private final Spelling spelling;
     private final boolean styled;
-    private boolean readerGone;
+    private boolean takesNoMore;
 
     /**
      * @param stream where the bytes go
@@ -53,7 +53,7 @@ final class Output {
 
     /** Text for machines, byte for byte. */
     void exactly(String text) {
-        if (readerGone) {
+        if (takesNoMore) {
             return;
         }
         try {
@@ -64,7 +64,7 @@ final class Output {
     }
 
     void flush() {
-        if (readerGone) {
+        if (takesNoMore) {
             return;
         }
         try {
@@ -95,10 +95,10 @@ final class Output {
     }
 
     private void settle(IOException failure) {
+        takesNoMore = true;
         String reason = String.valueOf(failure.getMessage()).toLowerCase(Locale.ROOT);
         if (!reason.contains("pipe") && !reason.contains("stream closed")) {
             throw FileFailure.answering(failure);
         }
-        readerGone = true;
     }
 }

@@ -29,7 +29,10 @@ public final class Lettering {
             } catch (FontFormatException e) {
                 throw new IllegalStateException("the program's own font file is damaged", e);
             } catch (IOException e) {
-                throw new UncheckedIOException(e);
+                throw new UncheckedIOException(
+                        "the fonts cannot be unpacked into the folder for temporary files, "
+                                + System.getProperty("java.io.tmpdir") + ": " + e.getMessage(),
+                        e);
             }
         }
     }
