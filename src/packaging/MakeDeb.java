@@ -7,12 +7,14 @@ import java.nio.file.Path;
 import java.nio.file.StandardCopyOption;
 import java.nio.file.attribute.PosixFilePermissions;
 import java.util.ArrayList;
+import java.util.Collection;
 import java.util.Comparator;
 import java.util.List;
 import java.util.Locale;
 import java.util.Set;
 import java.util.TreeSet;
 import java.util.regex.Pattern;
+import java.util.stream.Collectors;
 import java.util.stream.Stream;
 import java.util.zip.GZIPOutputStream;
 
@@ -24,7 +26,7 @@ public final class MakeDeb {
     private static final String NAME = "clipramp";
     private static final Pattern LIBRARY = Pattern.compile("=> (/\\S+)");
     /** Native code that only the window loads. */
-    private static final Pattern WINDOW_ONLY = Pattern.compile("lib(glass|prism|javafx|decora|awt_xawt|splashscreen|jsound).*");
+    private static final Pattern WINDOW_ONLY = Pattern.compile("lib(glass|prism|javafx|decora|awt_xawt|jawt|splashscreen|jsound).*");
 
     private final String version;
     private final Path folder;
@@ -75,14 +77,14 @@ public final class MakeDeb {
     }
 
     private String control(long kilobytes) throws IOException, InterruptedException {
-        Set<String> always = new TreeSet<>();
-        Set<String> forTheWindow = new TreeSet<>();
+        List<Path> natives = new ArrayList<>();
         try (Stream<Path> files = Files.walk(root.resolve("usr/lib").resolve(NAME))) {
-            for (Path file : files.filter(f -> f.toString().endsWith(".so")).toList()) {
-                boolean window = WINDOW_ONLY.matcher(file.getFileName().toString()).matches();
-                (window ? forTheWindow : always).addAll(packagesBehind(file));
-            }
+            files.filter(f -> f.toString().endsWith(".so")).forEach(natives::add);
         }
+        var byUse = natives.stream()
+                .collect(Collectors.partitioningBy(f -> WINDOW_ONLY.matcher(f.getFileName().toString()).matches()));
+        Set<String> always = packagesBehind(byUse.get(false));
+        Set<String> forTheWindow = packagesBehind(byUse.get(true));
         forTheWindow.removeAll(always);
         return "Package: clipramp\nVersion: " + version + "\nArchitecture: " + architecture()
                 + "\nMaintainer: clipramp <clipramp@localhost>\nSection: electronics\nPriority: optional\nInstalled-Size: " + kilobytes
@@ -94,22 +96,25 @@ public final class MakeDeb {
                 + " (clipramp-desk). Brings its own Java runtime.\n";
     }
 
-    /** The packages whose libraries this one is linked to, as this system knows them. */
-    private static Set<String> packagesBehind(Path library) throws IOException, InterruptedException {
-        Set<String> packages = new TreeSet<>();
-        for (String line : said("ldd", library.toString())) {
+    /** The packages whose libraries these are linked to, as this system knows them. */
+    private static Set<String> packagesBehind(List<Path> natives) throws IOException, InterruptedException {
+        Set<String> linked = new TreeSet<>();
+        for (String line : said("ldd", natives)) {
             var match = LIBRARY.matcher(line);
             if (match.find() && !match.group(1).contains("/" + NAME + "/")) {
-                said("dpkg-query", "--search", Path.of(match.group(1)).toRealPath().toString()).stream()
-                        .filter(answer -> answer.contains(": /"))
-                        .map(answer -> answer.substring(0, answer.indexOf(':')))
-                        .forEach(packages::add);
+                linked.add(match.group(1));
+                linked.add(Path.of(match.group(1)).toRealPath().toString());
             }
         }
-        return packages;
+        return said("dpkg-query --search", linked).stream()
+                .filter(answer -> answer.contains(": /"))
+                .map(answer -> answer.substring(0, answer.indexOf(':')))
+                .collect(Collectors.toCollection(TreeSet::new));
     }
 
-    private static List<String> said(String... command) throws IOException, InterruptedException {
+    private static List<String> said(String tool, Collection<?> about) throws IOException, InterruptedException {
+        List<String> command = new ArrayList<>(List.of(tool.split(" ")));
+        about.forEach(each -> command.add(each.toString()));
         Process process = new ProcessBuilder(command).redirectError(ProcessBuilder.Redirect.DISCARD).start();
         String out = new String(process.getInputStream().readAllBytes(), StandardCharsets.UTF_8);
         process.waitFor();

@@ -1,21 +1,17 @@
 package clipramp.desk;
 
+import clipramp.OwnClassPath;
 import clipramp.desk.model.Places;
 import clipramp.desk.model.Recovery;
 import java.io.BufferedReader;
-import java.io.File;
 import java.io.IOException;
 import java.io.InputStreamReader;
-import java.net.URL;
-import java.net.URLClassLoader;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
-import java.util.Arrays;
 import java.util.List;
 import java.util.Random;
-import java.util.stream.Collectors;
 
 /**
  * Kills a window in the middle of its edits, again and again, and looks whether the work can be taken back:
@@ -46,22 +42,13 @@ public final class Kills {
         return kept;
     }
 
-    /** The class path of whoever runs this: Maven, a console, a class loader of its own. */
-    private static String classPath() {
-        String told = System.getProperty("surefire.test.class.path", System.getProperty("java.class.path"));
-        if (Kills.class.getClassLoader() instanceof URLClassLoader loader) {
-            return Arrays.stream(loader.getURLs()).map(URL::getPath).collect(Collectors.joining(File.pathSeparator));
-        }
-        return told;
-    }
-
     private static boolean survives(Path home, int edits, int delayMillis) throws IOException, InterruptedException {
         List<String> command = new ArrayList<>(
                 List.of(Path.of(System.getProperty("java.home"), "bin", "java").toString(), "-XX:TieredStopAtLevel=1"));
         for (String name : HEADLESS) {
             command.add("-D" + name + "=" + System.getProperty(name));
         }
-        command.addAll(List.of("-cp", classPath(), Editor.class.getName(), home.toString()));
+        command.addAll(List.of("-cp", OwnClassPath.text(), Editor.class.getName(), home.toString()));
         Process process = new ProcessBuilder(command).redirectErrorStream(true).start();
         long last = 0;
         try (BufferedReader out =
