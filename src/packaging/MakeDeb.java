@@ -67,7 +67,7 @@ public final class MakeDeb {
         Path control = Files.createDirectories(root.resolve("DEBIAN")).resolve("control");
         Files.writeString(control, control(kilobytes), StandardCharsets.UTF_8);
         Path deb = folder.resolve(NAME + "_" + version + "_" + architecture() + ".deb");
-        int code = new ProcessBuilder("dpkg-deb", "--root-owner-group", "--build", root.toString(), deb.toString())
+        int code = new ProcessBuilder("dpkg-deb", "--root-owner-group", "-Zxz", "-z2", "--build", root.toString(), deb.toString())
                 .redirectErrorStream(true).redirectOutput(folder.resolveSibling("image-work").resolve("deb.log").toFile())
                 .start().waitFor();
         if (code != 0) {

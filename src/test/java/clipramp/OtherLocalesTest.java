@@ -31,16 +31,11 @@ class OtherLocalesTest {
 
     private Path record(String name, String... options) throws IOException, InterruptedException {
         Path pdf = folder.resolve(name);
-        List<String> command = new ArrayList<>(List.of(
-                Path.of(System.getProperty("java.home"), "bin", "java").toString(), "-XX:TieredStopAtLevel=1"));
+        List<String> command = new ArrayList<>(
+                List.of(Path.of(System.getProperty("java.home"), "bin", "java").toString(), "-XX:TieredStopAtLevel=1"));
         command.addAll(List.of(options));
         command.addAll(List.of(
-                "-cp",
-                OwnClassPath.text(),
-                "clipramp.Main",
-                "record",
-                "examples/tray-lamp.yaml",
-                "--out=" + pdf));
+                "-cp", OwnClassPath.text(), "clipramp.Main", "record", "examples/tray-lamp.yaml", "--out=" + pdf));
         Process process = new ProcessBuilder(command)
                 .redirectErrorStream(true)
                 .redirectOutput(folder.resolve("said").toFile())
