@@ -14,6 +14,9 @@ import javafx.scene.control.TextField;
 import javafx.scene.input.Clipboard;
 import javafx.scene.input.ClipboardContent;
 import javafx.scene.input.KeyCode;
+import org.apache.pdfbox.Loader;
+import org.apache.pdfbox.pdmodel.PDDocument;
+import org.apache.pdfbox.text.PDFTextStripper;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 
@@ -66,6 +69,13 @@ class FitPageTest {
             window.find("#record-fit", CheckBox.class);
             window.press("#record-fit");
             window.await(() -> !window.find("#record-save", Button.class).isDisabled());
+            Path pdf = home.resolve("unit.pdf");
+            window.ask.answer = pdf;
+            window.press("#record-save");
+            window.await(() -> Files.exists(pdf) && !window.model.isBusy());
+            try (PDDocument record = Loader.loadPDF(pdf.toFile())) {
+                assertThat(new PDFTextStripper().getText(record)).contains("of 24 bench readings", "95 % interval");
+            }
             window.press("#page-fit");
             Harness.at(() -> {
                 window.model.draft().undo();
