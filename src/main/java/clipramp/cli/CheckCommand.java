@@ -5,10 +5,8 @@ import clipramp.margins.Check;
 import clipramp.margins.Verdict;
 import clipramp.record.PageSize;
 import java.util.Optional;
-import java.util.concurrent.Callable;
 import org.jspecify.annotations.Nullable;
 import picocli.CommandLine.Command;
-import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
 
 /** Solves a design and judges it. */
@@ -20,15 +18,7 @@ import picocli.CommandLine.Option;
             "Solves a design and judges it: margins worst first, knob table, pulse and supply.",
             "Exit code 1 when a margin fails; with --strict also when one is tight or not judged."
         })
-final class CheckCommand implements Callable<Integer> {
-    private final Session session;
-
-    @Mixin
-    DesignOptions design = new DesignOptions();
-
-    @Mixin
-    StandardOptions standard = new StandardOptions();
-
+final class CheckCommand extends Analysis {
     @Option(names = "--json", order = 10, description = "the answer for machines")
     boolean json;
 
@@ -48,7 +38,7 @@ final class CheckCommand implements Callable<Integer> {
     String plot;
 
     CheckCommand(Session session) {
-        this.session = session;
+        super(session);
     }
 
     @Override
@@ -85,6 +75,6 @@ final class CheckCommand implements Callable<Integer> {
     private int code(Check check) {
         boolean open = check.verdict() != Verdict.HOLDS
                 || check.margins().stream().anyMatch(m -> m.verdict() != Verdict.HOLDS);
-        return check.verdict() == Verdict.FAILS || strict && open ? ExitCode.FAILS : ExitCode.ANSWERED;
+        return check.verdict() == Verdict.FAILS || (strict && open) ? ExitCode.FAILS : ExitCode.ANSWERED;
     }
 }

@@ -174,11 +174,7 @@ final class CheckText {
         Pulse pulse = summary.pulse();
         out.line(
                 summary.atKnob().isPresent() ? "Pulse at knob " + KnobText.position(summary.atKnob()) + " %" : "Pulse");
-        out.lines(new TextTable(out.spelling(), "  ")
-                .column(Align.LEFT, "")
-                .column(Align.LEFT, "")
-                .column(Align.LEFT, "")
-                .column(Align.LEFT, "")
+        out.lines(TextTable.ofFacts(out.spelling())
                 .row(
                         "gate current, peak",
                         Shown.amount(pulse.peakGateAmps(), Unit.AMPERE),
@@ -211,11 +207,7 @@ final class CheckText {
     private void supply() {
         Dissipation bears = check.dissipation();
         out.line("Supply and trigger device" + (check.design().ramp().pot().isPresent() ? " at mid-knob" : ""));
-        out.lines(new TextTable(out.spelling(), "  ")
-                .column(Align.LEFT, "")
-                .column(Align.LEFT, "")
-                .column(Align.LEFT, "")
-                .column(Align.LEFT, "")
+        out.lines(TextTable.ofFacts(out.spelling())
                 .row(
                         "clipped from",
                         Shown.degrees(check.clipFromRad()) + "°",

@@ -15,6 +15,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.OptionalDouble;
 import org.jspecify.annotations.Nullable;
+import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.Parameters;
 
@@ -46,13 +47,8 @@ final class DesignOptions {
             description = "replace a value of the design; may be repeated, the last of a key wins")
     List<String> overrides = new ArrayList<>();
 
-    @Option(
-            names = "--profiles",
-            paramLabel = "shipped",
-            order = 4,
-            description = "shipped: look only at the program's own profiles")
-    @Nullable
-    String profiles;
+    @Mixin
+    ProfileOptions profiles = new ProfileOptions();
 
     LoadedDesign load(Session session) {
         return Inputs.load(session, file, overrides, library(session));
@@ -65,12 +61,7 @@ final class DesignOptions {
 
     /** Where this design's profiles are looked for. */
     ProfileLibrary library(Session session) {
-        return Inputs.libraryOf(session, file, shippedOnly());
-    }
-
-    private boolean shippedOnly() {
-        return profiles != null
-                && Problems.word("--profiles", profiles, List.of("shipped")).equals("shipped");
+        return Inputs.libraryOf(session, file, profiles.shippedOnly());
     }
 
     /** The line voltage asked for, V. */

@@ -10,9 +10,7 @@ import clipramp.faults.RefusedObservationException;
 import clipramp.files.LoadedDesign;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
-import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
 
 /** Single faults, forwards and backwards. */
@@ -25,15 +23,7 @@ import picocli.CommandLine.Option;
                     + " knob in the middle, what is over its rating and burns next.",
             "With --seen the faults that fit what was seen, best first."
         })
-final class FaultsCommand implements Callable<Integer> {
-    private final Session session;
-
-    @Mixin
-    DesignOptions design = new DesignOptions();
-
-    @Mixin
-    StandardOptions standard = new StandardOptions();
-
+final class FaultsCommand extends Analysis {
     @Option(
             names = "--seen",
             paramLabel = "WHAT",
@@ -52,7 +42,7 @@ final class FaultsCommand implements Callable<Integer> {
     boolean json;
 
     FaultsCommand(Session session) {
-        this.session = session;
+        super(session);
     }
 
     @Override

@@ -20,11 +20,7 @@ final class LineText {
         LineCurrent current = worst.current();
         String where = worst.position().isPresent() ? " at knob " + KnobText.position(worst.position()) + " %" : "";
         out.line("Line current" + where + ", where it is most distorted for the table");
-        out.lines(new TextTable(out.spelling(), "  ")
-                .column(Align.LEFT, "")
-                .column(Align.LEFT, "")
-                .column(Align.LEFT, "")
-                .column(Align.LEFT, "")
+        out.lines(TextTable.ofFacts(out.spelling())
                 .row(
                         "rms",
                         Shown.amount(current.rmsAmps(), Unit.AMPERE),

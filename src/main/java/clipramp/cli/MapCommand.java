@@ -12,7 +12,6 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Objects;
 import java.util.Optional;
-import java.util.concurrent.Callable;
 import java.util.stream.Stream;
 import org.jspecify.annotations.Nullable;
 import picocli.CommandLine.Command;
@@ -28,17 +27,9 @@ import picocli.CommandLine.Option;
             "Knob position to ramp resistance, delay, firing angle, conduction angle, load volts, watts and share of"
                     + " full power; or backwards, which resistance and position give an angle, a power or a voltage."
         })
-final class MapCommand implements Callable<Integer> {
+final class MapCommand extends Analysis {
     private static final int USUAL_POSITIONS = 11;
     private static final int MOST_POSITIONS = 1001;
-
-    private final Session session;
-
-    @Mixin
-    DesignOptions design = new DesignOptions();
-
-    @Mixin
-    StandardOptions standard = new StandardOptions();
 
     @Option(
             names = "--positions",
@@ -76,7 +67,7 @@ final class MapCommand implements Callable<Integer> {
     FormOptions form = new FormOptions();
 
     MapCommand(Session session) {
-        this.session = session;
+        super(session);
     }
 
     @Override

@@ -35,13 +35,8 @@ final class PartsCommand implements Callable<Integer> {
     @Mixin
     StandardOptions standard = new StandardOptions();
 
-    @Option(
-            names = "--profiles",
-            paramLabel = "shipped",
-            order = 10,
-            description = "shipped: only the program's own profiles")
-    @Nullable
-    String profiles;
+    @Mixin
+    ProfileOptions profiles = new ProfileOptions();
 
     @Option(names = "--json", order = 11, description = "the answer for machines")
     boolean json;
@@ -49,7 +44,7 @@ final class PartsCommand implements Callable<Integer> {
     @Option(
             names = "--for",
             paramLabel = "FILE",
-            order = 9,
+            order = 8,
             description = "judge what could stand in this design's place for its trigger device and thyristor")
     @Nullable
     String design;
@@ -64,8 +59,7 @@ final class PartsCommand implements Callable<Integer> {
 
     @Override
     public Integer call() {
-        boolean shippedOnly = profiles != null
-                && Problems.word("--profiles", profiles, List.of("shipped")).equals("shipped");
+        boolean shippedOnly = profiles.shippedOnly();
         if (design != null) {
             substitutes(design, shippedOnly);
             return ExitCode.ANSWERED;

@@ -7,9 +7,7 @@ import clipramp.spread.Spread;
 import clipramp.spread.SpreadOptions;
 import clipramp.spread.SpreadResult;
 import java.util.Optional;
-import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
-import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
 
 /** Writes the design record. */
@@ -18,15 +16,7 @@ import picocli.CommandLine.Option;
         sortOptions = false,
         sortSynopsis = false,
         description = "Writes the design record as PDF. A failing design gets its record too, marked.")
-final class RecordCommand implements Callable<Integer> {
-    private final Session session;
-
-    @Mixin
-    DesignOptions design = new DesignOptions();
-
-    @Mixin
-    StandardOptions standard = new StandardOptions();
-
+final class RecordCommand extends Analysis {
     @Option(
             names = "--out",
             paramLabel = "OUT.pdf",
@@ -45,7 +35,7 @@ final class RecordCommand implements Callable<Integer> {
     boolean json;
 
     RecordCommand(Session session) {
-        this.session = session;
+        super(session);
     }
 
     private Optional<SpreadResult> drawn(LoadedDesign loaded) {

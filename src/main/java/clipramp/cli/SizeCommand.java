@@ -94,13 +94,8 @@ final class SizeCommand implements Callable<Integer> {
             description = "set a value of the design before sizing; may be repeated")
     List<String> settings = List.of();
 
-    @Option(
-            names = "--profiles",
-            paramLabel = "shipped",
-            order = 9,
-            description = "shipped: look only at the program's own profiles")
-    @Nullable
-    String profiles;
+    @Mixin
+    ProfileOptions profiles = new ProfileOptions();
 
     @Option(names = "--out", paramLabel = "OUT", order = 10, description = "the design file to write")
     @Nullable
@@ -118,8 +113,7 @@ final class SizeCommand implements Callable<Integer> {
 
     @Override
     public Integer call() {
-        boolean shippedOnly = profiles != null
-                && Problems.word("--profiles", profiles, List.of("shipped")).equals("shipped");
+        boolean shippedOnly = profiles.shippedOnly();
         ProfileLibrary library = Inputs.libraryOf(session, file, shippedOnly);
         Set<OpenPart> kept = EnumSet.noneOf(OpenPart.class);
         kept.addAll(named("--keep", keep));

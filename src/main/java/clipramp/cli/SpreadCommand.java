@@ -12,7 +12,6 @@ import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
-import java.util.concurrent.Callable;
 import org.jspecify.annotations.Nullable;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
@@ -28,16 +27,8 @@ import picocli.CommandLine.Option;
                     + " power by knob position, yield, worst case, what matters most and what would help.",
             "Exit code 1 when a drawn unit misses what is wanted or fails a margin."
         })
-final class SpreadCommand implements Callable<Integer> {
+final class SpreadCommand extends Analysis {
     private static final int MOST_UNITS = 2_000_000;
-
-    private final Session session;
-
-    @Mixin
-    DesignOptions design = new DesignOptions();
-
-    @Mixin
-    StandardOptions standard = new StandardOptions();
 
     @Option(
             names = "--samples",
@@ -71,40 +62,24 @@ final class SpreadCommand implements Callable<Integer> {
     @Nullable
     String judged;
 
-    @Option(names = "--json", order = 30, description = "the answer for machines")
-    boolean json;
-
-    @Option(names = "--csv", order = 31, description = "comma-separated values, units in the header")
-    boolean csv;
-
-    @Option(
-            names = "--plot",
-            paramLabel = "OUT.svg",
-            order = 32,
-            description = "the bands over the knob as .svg or .png; an older one is replaced")
-    @Nullable
-    String plot;
+    @Mixin
+    FormOptions form = new FormOptions();
 
     SpreadCommand(Session session) {
-        this.session = session;
+        super(session);
     }
 
     @Override
     public Integer call() {
-        if (json && csv) {
-            throw Problems.refused("--csv", "--json and --csv cannot both go to standard output. Choose one.");
-        }
-        if (plot != null) {
-            Outputs.requirePlotName(plot);
-        }
+        form.require();
         SpreadOptions options = options();
         LoadedDesign loaded = design.load(session);
         SpreadWatch watch = new SpreadWatch(session);
         try {
             SpreadResult result = Spread.run(design.held(loaded.design()), options, watch);
             watch.clear();
-            if (plot != null && result.units() > 0) {
-                Outputs.spreadPlot(plot, result);
+            if (result.units() > 0) {
+                form.plot().ifPresent(name -> Outputs.spreadPlot(name, result));
             }
             answer(loaded, result);
             session.out().flush();
@@ -126,9 +101,9 @@ final class SpreadCommand implements Callable<Integer> {
 
     private void answer(LoadedDesign loaded, SpreadResult result) {
         List<Note> notes = notes(result);
-        if (json) {
+        if (form.json()) {
             session.out().exactly(SpreadJson.of(loaded, result, verdict(result), notes, session.ascii()));
-        } else if (csv) {
+        } else if (form.csv()) {
             session.out().exactly(SpreadCsv.of(result));
             notes.forEach(note -> session.err().line(note.text()));
         } else {

@@ -14,7 +14,6 @@ import clipramp.power.KnobMap;
 import clipramp.power.OperatingPoint;
 import java.util.List;
 import java.util.Objects;
-import java.util.concurrent.Callable;
 import java.util.stream.Stream;
 import org.jspecify.annotations.Nullable;
 import picocli.CommandLine.Command;
@@ -31,18 +30,10 @@ import picocli.CommandLine.Option;
                     + " peak point, base one, gate and currents; every event is a sample.",
             "Without --csv, --json or --plot it lists the pulses."
         })
-final class TraceCommand implements Callable<Integer> {
+final class TraceCommand extends Analysis {
     private static final int USUAL_SAMPLES = 720;
     private static final int MOST_SAMPLES = 100_000;
     private static final double MID_KNOB = 0.5;
-
-    private final Session session;
-
-    @Mixin
-    DesignOptions design = new DesignOptions();
-
-    @Mixin
-    StandardOptions standard = new StandardOptions();
 
     @Option(
             names = "--knob",
@@ -80,7 +71,7 @@ final class TraceCommand implements Callable<Integer> {
     FormOptions form = new FormOptions();
 
     TraceCommand(Session session) {
-        this.session = session;
+        super(session);
     }
 
     @Override

@@ -153,14 +153,9 @@ final class FaultSolver {
         Dissipation bears = ReverseHalf.isIn(network)
                 ? ReverseHalf.borne(wired, condition, network, study.dissipation())
                 : study.dissipation();
-        List<Burden> burdens = new ArrayList<>(Ratings.of(
-                wired,
-                condition,
-                bears,
-                share,
-                load,
-                power.thyristor().thyristorRmsAmps(),
-                power.thyristor().thyristorMeanAmps()));
+        List<Burden> burdens =
+                new ArrayList<>(Ratings.ofFiringCircuit(wired, condition, bears, share, position, network.rampOhms));
+        burdens.addAll(Ratings.ofThyristor(wired, power.thyristor()));
         if (fault.path() == LoadPath.WINDING_SHORTED) {
             burdens.add(Burden.unlimited("clip.winding", "its short-circuit current in every second half cycle"));
         }

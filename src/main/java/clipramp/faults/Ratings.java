@@ -9,16 +9,17 @@ import clipramp.circuit.ThyristorDevice;
 import clipramp.circuit.Trigger;
 import clipramp.circuit.Unijunction;
 import clipramp.firing.Dissipation;
+import clipramp.power.LoadResult;
 import clipramp.units.Unit;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.OptionalDouble;
 
 /**
- * What parts bear against their whole rating: no derating, for the question is what burns, not what lasts. A part whose
- * rating is not stated is not listed.
+ * What parts bear against their whole rating: no derating of resistors, for the question is what burns, not what lasts. A
+ * rating that is not stated is NaN.
  */
-final class Ratings {
+public final class Ratings {
     private static final double SHEET_CELSIUS = 25;
 
     /** Below this share of the track next to none of it is in use. */
@@ -34,31 +35,42 @@ final class Ratings {
     }
 
     /**
-     * @param bears what the firing circuit's parts bear
-     * @param leakShare share of the computed ramp voltage that is really there
-     * @param load the load's current and the thyristor's
+     * Firing circuit and gate.
+     *
+     * @param bears what its parts bear
+     * @param leakShare share of the computed ramp voltage that is really there; 1 in a sound circuit
+     * @param position of the knob, 0..1; empty for a fixed ramp
+     * @param rampOhms R_E there, ohm
      */
-    static List<Burden> of(
+    public static List<Burden> ofFiringCircuit(
             Design design,
             Condition condition,
             Dissipation bears,
             double leakShare,
-            LoadAt at,
-            double thyristorRmsAmps,
-            double thyristorMeanAmps) {
+            OptionalDouble position,
+            double rampOhms) {
         Ratings all = new Ratings(design, condition);
-        all.supplyAndRamp(bears, leakShare, at);
+        all.supplyAndRamp(bears, leakShare, position, rampOhms);
         all.trigger(bears);
         all.gate(bears);
-        ThyristorDevice.Limits limits = design.thyristor().device().limits();
-        all.add("thyristor.device", "rms current", Unit.AMPERE, thyristorRmsAmps, limits.rmsAmps());
-        all.add("thyristor.device", "mean current", Unit.AMPERE, thyristorMeanAmps, limits.meanAmps());
         return all.burdens;
     }
 
+    /** The thyristor's currents. */
+    public static List<Burden> ofThyristor(Design design, LoadResult load) {
+        ThyristorDevice.Limits limits = design.thyristor().device().limits();
+        return List.of(
+                burden("thyristor.device", "mean current", Unit.AMPERE, load.thyristorMeanAmps(), limits.meanAmps()),
+                burden("thyristor.device", "rms current", Unit.AMPERE, load.thyristorRmsAmps(), limits.rmsAmps()));
+    }
+
+    private static Burden burden(String part, String what, Unit unit, double borne, OptionalDouble rating) {
+        return new Burden(part, what, unit, borne, rating.orElse(Double.NaN));
+    }
+
     private void add(String part, String what, Unit unit, double borne, OptionalDouble rating) {
-        if (rating.isPresent() && !Double.isNaN(borne)) {
-            burdens.add(new Burden(part, what, unit, borne, rating.getAsDouble()));
+        if (!Double.isNaN(borne)) {
+            burdens.add(burden(part, what, unit, borne, rating));
         }
     }
 
@@ -66,7 +78,7 @@ final class Ratings {
         add(key, "power", Unit.WATT, watts, part.ratedWatts());
     }
 
-    private void supplyAndRamp(Dissipation bears, double leakShare, LoadAt at) {
+    private void supplyAndRamp(Dissipation bears, double leakShare, OptionalDouble position, double rampOhms) {
         Part dropper = design.clip().dropper();
         power("clip.dropper", dropper, bears.dropperWatts());
         add("clip.dropper", "peak voltage", Unit.VOLT, bears.dropperPeakVolts(), dropper.ratedVolts());
@@ -82,15 +94,15 @@ final class Ratings {
                 Unit.VOLT,
                 leakShare * bears.capacitorVolts(),
                 design.ramp().capacitor().ratedVolts());
-        double squareAmps = bears.rampWatts() / at.rampOhms();
+        double squareAmps = bears.rampWatts() / rampOhms;
         Part fixed = design.ramp().fixed();
         power("ramp.fixed", fixed, Math.min(bears.rampWatts(), squareAmps * fixed.value()));
-        design.ramp().pot().ifPresent(pot -> pot(pot, at, bears.rampWatts(), squareAmps));
+        design.ramp().pot().ifPresent(pot -> pot(pot, position, bears.rampWatts(), squareAmps));
     }
 
     /** A track's rating holds for the whole of it: a part of it bears the current that the whole would. */
-    private void pot(Pot pot, LoadAt at, double rampWatts, double squareAmps) {
-        double share = pot.trackShare(at.position().orElse(0));
+    private void pot(Pot pot, OptionalDouble position, double rampWatts, double squareAmps) {
+        double share = pot.trackShare(position.orElse(0));
         if (share > LEAST_TRACK) {
             power(
                     "ramp.pot.track",

@@ -112,14 +112,7 @@ public record HarmonicsFigure(LineCheck check, Optional<Setting> standing) imple
         up.setRange(Math.log10(LEAST_AMPS), Math.log10(HEADROOM * most()));
         up.setTickUnit(Plot.ticks(1, decade -> amps(Math.pow(10, decade))));
         Plot plot = new Plot(g, style, across, up);
-        double left = 52 * style.zoom();
-        double over = 28 * style.zoom();
-        plot.place(new Rectangle2D.Double(
-                left,
-                over,
-                Math.max(1, width - 16 * style.zoom() - left),
-                Math.max(1, height - 44 * style.zoom() - over)));
-        plot.pen().fill(style.palette().ground(), new Rectangle2D.Double(0, 0, width, height));
+        plot.placeWithin(width, height, 52);
         plot.draw();
         bars(plot, style);
         plot.axisNames("A rms", "order of the line's frequency", height);

@@ -61,14 +61,7 @@ public record HistogramFigure(Histogram histogram) implements Figure {
         up.setRange(0, top);
         up.setTickUnit(Plot.ticks(Math.max(1, Ticks.step(top, 4)), Numerals::plain));
         Plot plot = new Plot(g, style, across, up);
-        double left = 52 * style.zoom();
-        double over = 28 * style.zoom();
-        plot.place(new Rectangle2D.Double(
-                left,
-                over,
-                Math.max(1, width - 16 * style.zoom() - left),
-                Math.max(1, height - 44 * style.zoom() - over)));
-        plot.pen().fill(palette.ground(), new Rectangle2D.Double(0, 0, width, height));
+        plot.placeWithin(width, height, 52);
         plot.draw();
         int[] counts = histogram.counts();
         for (int i = 0; i < counts.length; i++) {

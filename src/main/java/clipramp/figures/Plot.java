@@ -27,6 +27,12 @@ import org.jfree.data.xy.XYSeriesCollection;
 
 /** A plain plot in the figures' own look: hairlines, one family, labels beside the lines instead of a legend. */
 final class Plot {
+    /** Room over, under and at the right of the curves, in units of a screen at 100 %. */
+    private static final double OVER = 28;
+
+    private static final double UNDER = 44;
+    private static final double RIGHT = 16;
+
     private final Style style;
     private final Pen pen;
     private final Graphics2D g;
@@ -95,6 +101,21 @@ final class Plot {
 
     static Shape noMarker() {
         return new Rectangle2D.Double();
+    }
+
+    /**
+     * Says that the curves are to lie in the middle of a figure, and lays its ground.
+     *
+     * @param left room for the marks of the left axis, in units of a screen at 100 %
+     */
+    void placeWithin(double width, double height, double left) {
+        double zoom = style.zoom();
+        place(new Rectangle2D.Double(
+                left * zoom,
+                OVER * zoom,
+                Math.max(1, width - (RIGHT + left) * zoom),
+                Math.max(1, height - (UNDER + OVER) * zoom)));
+        pen.fill(style.palette().ground(), new Rectangle2D.Double(0, 0, width, height));
     }
 
     /** Says where the curves are to lie, so that something can be laid under them. */

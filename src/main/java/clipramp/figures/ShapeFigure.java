@@ -4,7 +4,6 @@ import clipramp.sizing.KnobShape;
 import java.awt.Color;
 import java.awt.Graphics2D;
 import java.awt.Stroke;
-import java.awt.geom.Rectangle2D;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.stream.IntStream;
@@ -82,14 +81,7 @@ public record ShapeFigure(KnobShape before, KnobShape after) implements Figure {
                 new double[] {0, 100}, new double[] {first, last}, palette.axis(), style.hairline(), Plot.noMarker());
         plot.curve(positions(), shares(before), palette.quiet(), style.dashed(), Plot.noMarker());
         plot.curve(positions(), shares(after), palette.load(), style.trace(), Plot.noMarker());
-        double left = 44 * style.zoom();
-        double top = 28 * style.zoom();
-        plot.place(new Rectangle2D.Double(
-                left,
-                top,
-                Math.max(1, width - 16 * style.zoom() - left),
-                Math.max(1, height - 44 * style.zoom() - top)));
-        plot.pen().fill(palette.ground(), new Rectangle2D.Double(0, 0, width, height));
+        plot.placeWithin(width, height, 44);
         plot.draw();
         plot.axisNames("share of full " + measure() + ", %", "knob, % of its rotation clockwise", height);
         legend(plot, style, last >= first);

@@ -83,14 +83,7 @@ public record SpreadFigure(SpreadResult spread) implements Figure {
         plot.curve(positions(), fractions(MIDDLE), palette.load(), style.trace(), Plot.noMarker());
         plot.curve(positions(), worst(false), palette.load(), style.dotted(), Plot.noMarker());
         plot.curve(positions(), worst(true), palette.load(), style.dotted(), Plot.noMarker());
-        double left = 44 * style.zoom();
-        double top = 28 * style.zoom();
-        plot.place(new Rectangle2D.Double(
-                left,
-                top,
-                Math.max(1, width - 16 * style.zoom() - left),
-                Math.max(1, height - 44 * style.zoom() - top)));
-        plot.pen().fill(palette.ground(), new Rectangle2D.Double(0, 0, width, height));
+        plot.placeWithin(width, height, 44);
         for (int i = 0; i < TINTS.length; i++) {
             band(
                     plot,

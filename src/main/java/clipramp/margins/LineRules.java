@@ -149,16 +149,20 @@ final class LineRules {
     }
 
     private Rule classA() {
+        return classA("class-a", "class A", "");
+    }
+
+    private Rule classA(String id, String name, String before) {
         Order binding = binding();
         return new Rule(
-                "class-a",
-                "class A",
+                id,
+                name,
                 LineTable.CLASS_A.source(),
                 binding.used() > 1 ? Standing.OVER : Standing.UNDER,
                 OptionalInt.of(binding.order()),
                 binding.used(),
                 fullWatts / binding.used(),
-                bindingText(binding));
+                before + bindingText(binding));
     }
 
     private Rule dimmer() {
@@ -169,16 +173,7 @@ final class LineRules {
                     "An independent dimmer for incandescent lamps has no limits up to "
                             + Say.watts(LineCheck.LARGE_WATTS) + "; these lamps take " + Say.watts(fullWatts) + ".");
         }
-        Order binding = binding();
-        return new Rule(
-                "dimmer",
-                "independent dimmer",
-                LineTable.CLASS_A.source(),
-                binding.used() > 1 ? Standing.OVER : Standing.UNDER,
-                OptionalInt.of(binding.order()),
-                binding.used(),
-                fullWatts / binding.used(),
-                "An independent phase-control dimmer is class A. " + bindingText(binding));
+        return classA("dimmer", "independent dimmer", "An independent phase-control dimmer is class A. ");
     }
 
     /** A dimmer inside a lamp is lighting equipment, whose table is in shares of the fundamental. */

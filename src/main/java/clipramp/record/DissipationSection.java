@@ -2,11 +2,9 @@ package clipramp.record;
 
 import clipramp.circuit.Design;
 import clipramp.circuit.Designators;
-import clipramp.circuit.Part;
 import clipramp.circuit.ThyristorDevice;
-import clipramp.circuit.Trigger;
-import clipramp.circuit.Unijunction;
-import clipramp.firing.Dissipation;
+import clipramp.faults.Burden;
+import clipramp.faults.Ratings;
 import clipramp.power.LoadResult;
 import clipramp.power.OperatingPoint;
 import clipramp.power.Thermal;
@@ -17,6 +15,8 @@ import java.util.OptionalDouble;
 
 /** What the parts bear at mid-knob, and the thyristor at the highest setting, beside their ratings. */
 final class DissipationSection {
+    private static final double MID_KNOB = 0.5;
+
     private final Paper paper;
     private final RecordContent content;
     private final Design design;
@@ -37,103 +37,26 @@ final class DissipationSection {
                 + " condition, resistors at no more than " + Shown.quantity(design.resistorDerating(), Unit.FRACTION)
                 + " of theirs.");
         grid.heads("name", "bears", "computed", "rating", "share");
-        firingCircuit(content.check().dissipation());
+        OptionalDouble middle = design.ramp().pot().isPresent() ? OptionalDouble.of(MID_KNOB) : OptionalDouble.empty();
+        Ratings.ofFiringCircuit(
+                        design,
+                        content.check().condition(),
+                        content.check().dissipation(),
+                        1,
+                        middle,
+                        design.ramp().rampOhms(MID_KNOB))
+                .forEach(burden -> row(burden, ""));
         content.check().knob().stream()
                 .max(Comparator.comparingDouble(point -> point.load().thyristorWatts()))
                 .ifPresent(this::thyristor);
         paper.add(grid.table());
     }
 
-    private void firingCircuit(Dissipation bears) {
-        Part dropper = design.clip().dropper();
-        row("clip.dropper", "mean power", bears.dropperWatts(), dropper.ratedWatts(), Unit.WATT);
-        row("clip.dropper", "peak voltage", bears.dropperPeakVolts(), dropper.ratedVolts(), Unit.VOLT);
-        row(
-                "clip.zener",
-                "mean power",
-                bears.zenerWatts(),
-                design.clip().zener().ratedWatts(),
-                Unit.WATT);
-        row(
-                "ramp.capacitor",
-                "peak voltage",
-                bears.capacitorVolts(),
-                design.ramp().capacitor().ratedVolts(),
-                Unit.VOLT);
-        row(
-                "ramp.fixed",
-                "mean power of the whole R_E",
-                bears.rampWatts(),
-                design.ramp().fixed().ratedWatts(),
-                Unit.WATT);
-        trigger(bears);
-        row(
-                "trigger.base-one",
-                "mean power",
-                bears.baseOneWatts(),
-                design.trigger().baseOne().ratedWatts(),
-                Unit.WATT);
-        row(
-                "gate.series",
-                "mean power",
-                bears.gateSeriesWatts(),
-                design.gate().series().ratedWatts(),
-                Unit.WATT);
-        design.gate()
-                .shunt()
-                .ifPresent(shunt ->
-                        row("gate.shunt", "mean power", bears.gateShuntWatts(), shunt.ratedWatts(), Unit.WATT));
-    }
-
-    private void trigger(Dissipation bears) {
-        if (design.trigger() instanceof Trigger.UnijunctionTrigger trigger) {
-            Unijunction.Limits limits = trigger.device().limits();
-            row("trigger.device", "mean power, rating at 25 °C", bears.deviceWatts(), limits.watts(), Unit.WATT);
-            row("trigger.device", "emitter current, rms", bears.emitterRmsAmps(), limits.emitterRmsAmps(), Unit.AMPERE);
-            row(
-                    "trigger.device",
-                    "emitter current, peak",
-                    bears.emitterPeakAmps(),
-                    limits.emitterPeakAmps(),
-                    Unit.AMPERE);
-            row(
-                    "trigger.device",
-                    "emitter reverse voltage",
-                    bears.emitterReverseVolts(),
-                    limits.emitterReverseVolts(),
-                    Unit.VOLT);
-            row("trigger.device", "interbase voltage", bears.interbaseVolts(), limits.interbaseVolts(), Unit.VOLT);
-            row(
-                    "trigger.base-two",
-                    "mean power",
-                    bears.baseTwoWatts(),
-                    trigger.baseTwo().ratedWatts(),
-                    Unit.WATT);
-        } else if (design.trigger() instanceof Trigger.ProgrammableTrigger trigger) {
-            var limits = trigger.device().limits();
-            row("trigger.device", "mean power, rating at 25 °C", bears.deviceWatts(), limits.watts(), Unit.WATT);
-            row("trigger.device", "anode current, peak", bears.emitterPeakAmps(), limits.peakAmps(), Unit.AMPERE);
-            row(
-                    "trigger.upper",
-                    "mean power",
-                    bears.baseTwoWatts(),
-                    trigger.upper().ratedWatts(),
-                    Unit.WATT);
-            row(
-                    "trigger.lower",
-                    "mean power",
-                    bears.lowerWatts(),
-                    trigger.lower().ratedWatts(),
-                    Unit.WATT);
-        }
-    }
-
     private void thyristor(OperatingPoint point) {
         LoadResult load = point.load();
         ThyristorDevice.Limits limits = design.thyristor().device().limits();
         String at = point.position().isPresent() ? " at knob " + Shown.quantity(point.position(), Unit.FRACTION) : "";
-        row("thyristor.device", "mean current" + at, load.thyristorMeanAmps(), limits.meanAmps(), Unit.AMPERE);
-        row("thyristor.device", "rms current" + at, load.thyristorRmsAmps(), limits.rmsAmps(), Unit.AMPERE);
+        Ratings.ofThyristor(design, load).forEach(burden -> row(burden, at));
         row("thyristor.device", "on-state loss" + at, load.thyristorWatts(), OptionalDouble.empty(), Unit.WATT);
         double hottest = design.surroundings().hottestCelsius();
         OptionalDouble junction = Thermal.junctionCelsius(design.thyristor(), load.thyristorWatts(), hottest);
@@ -143,6 +66,12 @@ final class DissipationSection {
                 junction.orElse(Double.NaN),
                 limits.junctionCelsius(),
                 Unit.CELSIUS);
+    }
+
+    private void row(Burden burden, String at) {
+        OptionalDouble rating =
+                Double.isNaN(burden.rating()) ? OptionalDouble.empty() : OptionalDouble.of(burden.rating());
+        row(burden.part(), burden.what() + at, burden.borne(), rating, burden.unit());
     }
 
     private void row(String key, String what, double bears, OptionalDouble rating, Unit unit) {
