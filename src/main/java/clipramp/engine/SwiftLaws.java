@@ -14,7 +14,7 @@ final class SwiftLaws {
     static final int CLIPS = 2;
     static final int RECTIFIES = 4;
     static final int ON = 8;
-    private static final int STATES = 16;
+    static final int STATES = 16;
 
     /** Columns of a row. */
     static final int RATE = 0;

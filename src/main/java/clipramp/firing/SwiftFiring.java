@@ -14,7 +14,8 @@ import clipramp.engine.SwiftStepper;
  * <p>The residual voltage is a fixed point of the half cycle. A half cycle forgets nearly all of the residual that it
  * began with, so two of them and a secant through them leave an error under 1e-9 V; where that does not work out, half cycles
  * follow each other as {@link PeriodicState} has it. What is out of reach (a pulse across the zero, no clipping) is refused
- * and left to {@link Firing}.
+ * and left to {@link Firing}. Longer than most files: one half cycle fills some twenty plain numbers that everything here
+ * reads, since a record of them would be allocated for every unit.
  */
 public final class SwiftFiring {
     /** Error of a firing instant that is let stand, s: 2e-10 of a half cycle at 50 Hz. */
@@ -33,6 +34,9 @@ public final class SwiftFiring {
 
     /** Share of the residual's error that a half cycle may keep for the secant to be trusted. */
     private static final double MOST_KEPT = 0.2;
+
+    /** With the emitter off at the zero, the firing instant bends over so many volts by as much as it moves, at least. */
+    private static final double STRAIGHT_VOLTS = 10;
 
     private static final int MOST_PASSES = 8;
 
@@ -108,7 +112,7 @@ public final class SwiftFiring {
         omega = angularRate;
         stepper.take(wave);
         shown = 1;
-        return settlesQuickly() || !doubt && settlesSlowly();
+        return settlesQuickly() || (!doubt && settlesSlowly());
     }
 
     /** By two or three half cycles and the secant through them; false where that does not work out. */
@@ -155,7 +159,12 @@ public final class SwiftFiring {
                     if (stepper.nearEdge()) {
                         return repeatsFrom(mode, next);
                     }
-                    return (Double.isNaN(firedSeconds) || fireFrom(mode, next)) && settled(mode, next);
+                    boolean straight =
+                            mode == Mode.OFF && Math.abs(firedShift) * step * step < LEFT_SECONDS * STRAIGHT_VOLTS;
+                    if (straight) {
+                        firedSeconds += firedShift * step;
+                    }
+                    return (straight || Double.isNaN(firedSeconds) || fireFrom(mode, next)) && settled(mode, next);
                 }
             }
             keptBefore = kept;
@@ -231,7 +240,7 @@ public final class SwiftFiring {
         residualVolts = volt;
         int begunFirst = 0;
         for (int i = 0; i < count; i++) {
-            if (!run(mode, volt, false, 0) || begun > 0 && clipUntil == Double.NEGATIVE_INFINITY) {
+            if (!run(mode, volt, false, 0) || (begun > 0 && clipUntil == Double.NEGATIVE_INFINITY)) {
                 return false;
             }
             fired[i] = firedSeconds;
@@ -278,7 +287,7 @@ public final class SwiftFiring {
         latchedOn = false;
         clipUntil = Double.NEGATIVE_INFINITY;
         course = 0;
-        stepper.start(mode, volts, rough);
+        stepper.start(mode, volts, rough, rough || onlyToPulse > 0);
         Event event;
         int events = 0;
         do {
@@ -299,7 +308,9 @@ public final class SwiftFiring {
         boolean held = stepper.mode() == Mode.STALLED;
         Event event = stepper.advance();
         // Counted from the supply's first clipping on: around the zero the order depends on the residual itself.
-        course = course == 0 ? (event == Event.ZENER ? 1 : 0) : 31 * course + event.ordinal();
+        course = course == 0
+                ? (event == Event.ZENER ? 1 : 0)
+                : 31 * course + event.name().hashCode();
         if (watch != Watch.NONE) {
             follow(event);
         }
