@@ -28,7 +28,7 @@ final class StartPage {
         HBox columns = new HBox(begin(), examples(), recent);
         columns.getStyleClass().add("start-columns");
         page.getStyleClass().add("page");
-        page.getChildren().addAll(title, line, left, columns, caution());
+        page.getChildren().addAll(title, line, left, columns);
         left.getStyleClass().add("start-column");
         left.setManaged(false);
         scroll.setFitToWidth(true);
@@ -54,7 +54,8 @@ final class StartPage {
         box.getChildren()
                 .addAll(
                         entry("start-new", "New design", "five questions, then a working circuit", actions::startNew),
-                        entry("start-open", "Open a file", "a design file, .yaml; or drop one here", actions::open));
+                        entry("start-open", "Open a file", "a design file, .yaml; or drop one here", actions::open),
+                        caution());
         return box;
     }
 

@@ -3,6 +3,9 @@ package clipramp.files;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
+import clipramp.margins.Judge;
+import clipramp.margins.Margin;
+import clipramp.margins.Verdict;
 import clipramp.units.Expected;
 import clipramp.units.QuantityReader;
 import clipramp.units.Unit;
@@ -15,6 +18,7 @@ import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
+import java.util.OptionalDouble;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -255,5 +259,41 @@ class ShippedProfilesTest {
         List<String> all = new ArrayList<>(List.of(path));
         node.properties().forEach(e -> all.addAll(paths(e.getValue(), path + "." + e.getKey())));
         return all;
+    }
+
+    /** 2N5060 family 30 V/us, 2N6394, 2N6400 and 2N6504 families 50 V/us, typical: data sheets of the types, from memory. */
+    @Test
+    void everyScrStatesItsStaticRateOfRiseAndThatItIsRecalled() throws IOException {
+        List<Path> scrs = profiles().stream()
+                .filter(file -> file.toString().contains("scr"))
+                .toList();
+        assertThat(scrs).hasSizeGreaterThan(15);
+        for (Path file : scrs) {
+            JsonNode profile = YAML.readTree(file.toFile());
+            boolean sensitive = profile.get("id").asText().startsWith("2n506");
+            assertThat(profile.get("limits").get("dv-dt").asText()).isEqualTo(sensitive ? "30 V/µs" : "50 V/µs");
+            assertThat(profile.get("sources").get("limits.dv-dt").asText()).contains("from memory");
+        }
+    }
+
+    @Test
+    void aPairOfScrsOnAnInductiveLoadIsJudgedByItAndASnubberHelps() {
+        String load = "load={kind: inductive, resistance: 40 ohm, inductance: 60 mH}";
+        String snubber = "snubber={resistance: 100 ohm, capacitance: 100 nF}";
+        Margin bare = offState(List.of(load));
+        Margin snubbed = offState(List.of(load, snubber));
+        assertThat(bare.demand()).isEqualTo(50e6);
+        assertThat(bare.verdict()).isEqualTo(Verdict.FAILS);
+        assertThat(snubbed.verdict()).isEqualTo(Verdict.HOLDS);
+        assertThat(snubbed.offered()).isLessThan(bare.offered() / 10);
+    }
+
+    private static Margin offState(List<String> overrides) {
+        String text = Example.named("upper-heaters").orElseThrow().text();
+        LoadedDesign loaded = DesignFiles.load(new Source("upper-heaters.yaml", text), overrides, SHIPPED);
+        return Judge.check(loaded.design(), OptionalDouble.empty(), OptionalDouble.empty()).margins().stream()
+                .filter(margin -> margin.id().equals("off-state-dv-dt"))
+                .findFirst()
+                .orElseThrow();
     }
 }
