@@ -97,6 +97,8 @@ public final class Screens {
         settle(() -> true);
         save(stage, folder.resolve("new-" + name + ".png"));
         fire(stage, "#new-propose");
+        settle(() -> model.proposing().progress().isPresent());
+        save(stage, folder.resolve("new-searching-" + name + ".png"));
         settle(() -> stage.getScene().getRoot().lookup("#proposal-take") != null);
         save(stage, folder.resolve("proposal-" + name + ".png"));
         fire(stage, "#proposal-take");
