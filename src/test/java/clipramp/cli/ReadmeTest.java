@@ -19,12 +19,22 @@ class ReadmeTest {
     private static final Pattern BLOCK =
             Pattern.compile("(?m)^<!-- begin: (?<what>.+?) -->\\n(?<old>(?s:.*?))^<!-- end -->$");
 
+    /** "first 9 lines", "last 9 lines", "lines 3 to 9". */
+    private static final Pattern SHOWN =
+            Pattern.compile("(?:first|(?<end>last)|lines (?<from>\\d+) to) (?<to>\\d+)(?: lines)?");
+
     @Test
     void everyMarkedBlockIsAsTheProgramWritesIt() throws IOException {
         String readme = Files.readString(README, StandardCharsets.UTF_8);
-        String regenerated = BLOCK.matcher(readme)
-                .replaceAll(block -> Matcher.quoteReplacement(
-                        "<!-- begin: " + block.group(1) + " -->\n" + written(block.group(1)) + "<!-- end -->"));
+        Matcher block = BLOCK.matcher(readme);
+        StringBuilder written = new StringBuilder();
+        while (block.find()) {
+            String what = block.group("what");
+            block.appendReplacement(
+                    written,
+                    Matcher.quoteReplacement("<!-- begin: " + what + " -->\n" + written(what) + "<!-- end -->"));
+        }
+        String regenerated = block.appendTail(written).toString();
         Files.createDirectories(REGENERATED.getParent());
         Files.writeString(REGENERATED, regenerated, StandardCharsets.UTF_8);
 
@@ -35,7 +45,7 @@ class ReadmeTest {
                 .isEqualTo(regenerated);
     }
 
-    private static String written(String what) {
+    private static String written(String what) throws IOException {
         if (what.equals("keys")) {
             return KeyTable.markdown();
         }
@@ -45,21 +55,40 @@ class ReadmeTest {
         if (what.equals("examples")) {
             return ReadmeTables.examples();
         }
+        if (what.startsWith("file ")) {
+            return "```yaml\n" + Files.readString(Path.of(what.substring("file ".length())), StandardCharsets.UTF_8) + "```\n";
+        }
         if (what.startsWith("clipramp ")) {
             return commandOutput(what);
         }
         throw new IllegalArgumentException("no such block: " + what);
     }
 
-    /** The command and its answer, as a fenced block; "| first N lines" after the command shortens it. */
-    private static String commandOutput(String what) {
-        Matcher shortened = Pattern.compile("(.+) \\| first (\\d+) lines").matcher(what);
-        boolean cut = shortened.matches();
-        String command = cut ? shortened.group(1) : what;
-        CliRun run = CliRun.of(command.substring("clipramp ".length()).split(" "));
+    /** The command and its answer, as a fenced block; which lines of it stands behind a bar. */
+    private static String commandOutput(String what) throws IOException {
+        String[] parts = what.split(" \\| ");
+        String[] arguments = parts[0].substring("clipramp ".length()).split(" ");
+        for (String argument : arguments) {
+            if (argument.startsWith("--out=")) {
+                Files.deleteIfExists(Path.of(argument.substring("--out=".length())));
+            }
+        }
+        CliRun run = CliRun.of(arguments);
         List<String> lines = (run.out() + run.err()).lines().toList();
-        int shown = cut ? Math.min(lines.size(), Integer.parseInt(shortened.group(2))) : lines.size();
-        return "```\n$ " + command + "\n" + String.join("\n", lines.subList(0, shown))
-                + (shown < lines.size() ? "\n..." : "") + "\n```\n";
+        int first = 0;
+        int last = lines.size();
+        if (parts.length > 1) {
+            Matcher shown = SHOWN.matcher(parts[1]);
+            assertThat(shown.matches()).as(what).isTrue();
+            first = shown.group("from") == null ? 0 : Integer.parseInt(shown.group("from")) - 1;
+            last = Math.min(last, Integer.parseInt(shown.group("to")));
+            if (shown.group("end") != null) {
+                first = Math.max(0, lines.size() - last);
+                last = lines.size();
+            }
+        }
+        return "```\n$ " + parts[0] + "\n" + (first > 0 ? "...\n" : "")
+                + String.join("\n", lines.subList(first, last))
+                + (last < lines.size() ? "\n..." : "") + "\n```\n";
     }
 }
