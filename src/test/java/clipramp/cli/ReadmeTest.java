@@ -7,7 +7,9 @@ import java.io.IOException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
 import org.junit.jupiter.api.Test;
@@ -22,6 +24,9 @@ class ReadmeTest {
     /** "first 9 lines", "last 9 lines", "lines 3 to 9". */
     private static final Pattern SHOWN =
             Pattern.compile("(?:first|(?<end>last)|lines (?<from>\\d+) to) (?<to>\\d+)(?: lines)?");
+
+    /** Answers so far, by command: one that is shown in two parts is asked once. */
+    private final Map<String, List<String>> answers = new HashMap<>();
 
     @Test
     void everyMarkedBlockIsAsTheProgramWritesIt() throws IOException {
@@ -45,7 +50,7 @@ class ReadmeTest {
                 .isEqualTo(regenerated);
     }
 
-    private static String written(String what) throws IOException {
+    private String written(String what) throws IOException {
         if (what.equals("keys")) {
             return KeyTable.markdown();
         }
@@ -56,7 +61,8 @@ class ReadmeTest {
             return ReadmeTables.examples();
         }
         if (what.startsWith("file ")) {
-            return "```yaml\n" + Files.readString(Path.of(what.substring("file ".length())), StandardCharsets.UTF_8) + "```\n";
+            return "```yaml\n" + Files.readString(Path.of(what.substring("file ".length())), StandardCharsets.UTF_8)
+                    + "```\n";
         }
         if (what.startsWith("clipramp ")) {
             return commandOutput(what);
@@ -64,17 +70,24 @@ class ReadmeTest {
         throw new IllegalArgumentException("no such block: " + what);
     }
 
-    /** The command and its answer, as a fenced block; which lines of it stands behind a bar. */
-    private static String commandOutput(String what) throws IOException {
-        String[] parts = what.split(" \\| ");
-        String[] arguments = parts[0].substring("clipramp ".length()).split(" ");
+    private static List<String> answer(String... arguments) throws IOException {
         for (String argument : arguments) {
             if (argument.startsWith("--out=")) {
                 Files.deleteIfExists(Path.of(argument.substring("--out=".length())));
             }
         }
         CliRun run = CliRun.of(arguments);
-        List<String> lines = (run.out() + run.err()).lines().toList();
+        return (run.out() + run.err()).lines().toList();
+    }
+
+    /** The command and its answer, as a fenced block; which lines of it stands behind a bar. */
+    private String commandOutput(String what) throws IOException {
+        String[] parts = what.split(" \\| ");
+        if (!answers.containsKey(parts[0])) {
+            answers.put(
+                    parts[0], answer(parts[0].substring("clipramp ".length()).split(" ")));
+        }
+        List<String> lines = answers.get(parts[0]);
         int first = 0;
         int last = lines.size();
         if (parts.length > 1) {
