@@ -9,6 +9,7 @@ import clipramp.margins.Note;
 import clipramp.sizing.Compensation.Choice;
 import clipramp.sizing.SizingAnswer;
 import clipramp.sizing.SizingAnswer.Conflict;
+import clipramp.sizing.UnitSetting;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
@@ -40,6 +41,14 @@ final class SizeJson {
                                     .put("relation", r.relation())
                                     .put("up", r.up())
                                     .put("down", r.down()))
+                    .putObjects(
+                            "unitSettings",
+                            UnitSetting.of(answer.design()),
+                            (setting, at) -> setting.put("key", at.part().key())
+                                    .put("knob", at.position())
+                                    .put("firingDeg", Math.toDegrees(at.firingRad()))
+                                    .put("loadVolts", at.loadVolts())
+                                    .put("powerFraction", at.fraction()))
                     .putWords(
                             "cornerFailures",
                             answer.cornerFailures().stream().map(Margin::id).toList())

@@ -13,6 +13,7 @@ import clipramp.sizing.Reason;
 import clipramp.sizing.SizingAnswer;
 import clipramp.sizing.SizingAnswer.Conflict;
 import clipramp.sizing.SizingWords;
+import clipramp.sizing.UnitSetting;
 import clipramp.units.Unit;
 import java.util.ArrayList;
 import java.util.List;
@@ -42,6 +43,7 @@ final class SizeText {
         outcome();
         out.line("");
         parts(result.reasons());
+        settings();
         result.shape().ifPresent(this::shape);
         result.compensation().ifPresent(this::compensation);
         conflicts();
@@ -73,6 +75,16 @@ final class SizeText {
         for (Reason r : reasons) {
             out.lines(Paragraph.wrap(r.part().key() + ": " + SizingWords.reason(r), "  ", "    "));
         }
+    }
+
+    private void settings() {
+        List<UnitSetting> settings = UnitSetting.of(answer.design());
+        if (settings.isEmpty()) {
+            return;
+        }
+        out.line("");
+        out.line("Every unit is set once, at nominal line voltage and near 25 °C, with a meter that reads true rms");
+        settings.forEach(s -> out.lines(Paragraph.wrap(SizingWords.setting(s), "  ", "    ")));
     }
 
     private void shape(KnobShape shape) {

@@ -25,6 +25,9 @@ import java.util.Set;
  * @param notes what was taken for granted
  */
 public record PartialDesign(DesignText text, LoadedDesign loaded, Set<OpenPart> open, List<String> notes) {
+    /** Under this a supply across the thyristor drives no gate (found by sizing 24 V requests). */
+    private static final double LOW_LINE_VOLTS = 60;
+
     private static final String RESISTOR = "1 kΩ ±5 % 0.25 W";
 
     public PartialDesign {
@@ -66,6 +69,7 @@ public record PartialDesign(DesignText text, LoadedDesign loaded, Set<OpenPart> 
         }
 
         PartialDesign read(Set<OpenPart> free, Set<OpenPart> keep) {
+            lowLine();
             clip();
             ramp();
             trigger();
@@ -74,6 +78,7 @@ public record PartialDesign(DesignText text, LoadedDesign loaded, Set<OpenPart> 
             wanted();
             requireRest();
             LoadedDesign loaded = loaded();
+            oneSided(loaded.design().wanted());
             boolean risesClockwise = isHighestFirst(loaded.design());
             if (risesClockwise && filled.contains("ramp.pot.sense")) {
                 text = text.withValue("ramp.pot.sense", "rising");
@@ -132,6 +137,35 @@ public record PartialDesign(DesignText text, LoadedDesign loaded, Set<OpenPart> 
 
         private boolean isIsolated() {
             return value("clip.winding").filter(w -> !w.equals("none")).isPresent();
+        }
+
+        /** Across the thyristor the supply is gone with the pulse's first instant, and a low one leaves the gate too little. */
+        private void lowLine() {
+            boolean stated =
+                    value("clip.tap").isPresent() || value("gate.coupling").isPresent();
+            if (!isStage(Stage.BRIDGE_AC) || isIsolated() || stated) {
+                return;
+            }
+            new Filling(asWritten.withValue("clip.tap", "line").withValue("gate.coupling", "transformer"), library)
+                    .lineVolts()
+                    .filter(volts -> volts < LOW_LINE_VOLTS)
+                    .ifPresent(volts -> {
+                        fill("gate.coupling", "transformer");
+                        notes.add("gate.coupling is not stated; taken as transformer, with the supply across the line:"
+                                + " across the thyristor a line this low leaves the gate too little.");
+                    });
+        }
+
+        /** Nominal line voltage; empty where the text has other problems, which are told later. */
+        private Optional<Double> lineVolts() {
+            clip();
+            ramp();
+            trigger();
+            gate();
+            thyristor();
+            return text.read(library) instanceof Reading.Good good
+                    ? Optional.of(good.loaded().design().line().volts())
+                    : Optional.empty();
         }
 
         private void clip() {
@@ -204,6 +238,17 @@ public record PartialDesign(DesignText text, LoadedDesign loaded, Set<OpenPart> 
             boolean half = isStage(Stage.HALF_WAVE);
             want("wanted.lowest", "5 % at 0 %");
             want("wanted.highest", half ? "45 % at 100 %" : "95 % at 100 %");
+        }
+
+        /** Said, for a wish without a band leaves open how far past it is still good. */
+        private void oneSided(Wanted wanted) {
+            boolean low = wanted.lowest().filter(g -> !g.isBand()).isPresent();
+            boolean high = wanted.highest().filter(g -> !g.isBand()).isPresent();
+            if (low || high) {
+                String which = low && high ? "lowest and highest state" : low ? "lowest states" : "highest states";
+                notes.add("wanted." + which + " no band: anything at or past it counts as reached"
+                        + " (a band such as 2 %..5 % bounds both sides).");
+            }
         }
 
         private void want(String key, String usual) {

@@ -122,7 +122,10 @@ final class Ratings {
             return;
         }
         double bare = device.limits().rmsAmps().orElse(BARE_LARGE) < SMALL_AMPS ? BARE_SMALL : BARE_LARGE;
-        double watts = studies.stream().mapToDouble(this::thyristorWatts).max().orElse(0);
+        double watts = Math.max(
+                LoadPower.atFiringAngle(design, studies.get(0).solution().condition(), 0)
+                        .thyristorWatts(),
+                studies.stream().mapToDouble(this::thyristorWatts).max().orElse(0));
         double most = watts > 0
                 ? Thermal.largestCaseToAmbient(
                         limit.getAsDouble(),

@@ -110,7 +110,7 @@ record Reach(
     }
 
     /** Nominal first, then the corners of line and temperature. */
-    private static List<Condition> conditions(Design design) {
+    static List<Condition> conditions(Design design) {
         List<Condition> all = new ArrayList<>(List.of(design.nominalCondition()));
         double hertz = design.line().hertz();
         for (double volts : List.of(design.line().lowVolts(), design.line().highVolts())) {
@@ -174,7 +174,7 @@ record Reach(
         return Double.isNaN(ohms) ? found.ohms() : Math.max(1, ohms);
     }
 
-    private static double firstRad(Solution solution) {
+    static double firstRad(Solution solution) {
         return solution.shown().pulses().stream()
                 .min(Comparator.comparingDouble(Pulse::startSeconds))
                 .map(Pulse::startRad)

@@ -7,6 +7,7 @@ import clipramp.margins.Margin;
 import clipramp.margins.Verdict;
 import clipramp.spread.Watch;
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;
 import java.util.List;
@@ -28,6 +29,13 @@ final class Search {
 
     /** A candidate that was judged. */
     record Judged(Design design, Check check, Reach reach, Timing timing, Grade grade) {}
+
+    /** Designs of one grade: first the largest fixed resistor, as {@link RampChoice} has them, then the smallest capacitor. */
+    static final Comparator<Judged> ORDER = Comparator.comparing(Judged::grade)
+            .thenComparingDouble(j -> -j.design().ramp().fixed().value())
+            .thenComparingDouble(j -> j.design().ramp().capacitor().value())
+            .thenComparingDouble(
+                    j -> j.design().ramp().rampOhms(0) + j.design().ramp().rampOhms(1));
 
     private final SizingRequest request;
     private final Watch watch;
@@ -84,14 +92,30 @@ final class Search {
         });
     }
 
+    /** The best that the usual start leads to. */
+    Judged first() {
+        return polished(climb(Start.of(request)));
+    }
+
+    /** Where that leads to nothing: one with a gate of another class may do better. */
+    Judged betterThan(Judged first) {
+        Judged best = first;
+        for (Design other : Start.others(request)) {
+            Judged there = polished(climb(other));
+            best = ORDER.compare(there, best) < 0 ? there : best;
+        }
+        return best;
+    }
+
     /** The best design that can be reached from a start. */
     Judged climb(Design start) {
         Judged best = settled(start);
         boolean better = true;
-        while (better && judged.size() < MOST_CANDIDATES) {
+        int most = judged.size() + MOST_CANDIDATES;
+        while (better && judged.size() < most) {
             better = false;
             for (OpenPart part : order(best)) {
-                Optional<Judged> found = improve(best, part);
+                Optional<Judged> found = improve(best, part, most);
                 if (found.isPresent()) {
                     best = found.get();
                     better = true;
@@ -102,9 +126,9 @@ final class Search {
         return best;
     }
 
-    private Optional<Judged> improve(Judged from, OpenPart part) {
+    private Optional<Judged> improve(Judged from, OpenPart part, int most) {
         for (Design neighbour : Moves.of(request, from.design(), part)) {
-            if (judged.size() >= MOST_CANDIDATES) {
+            if (judged.size() >= most) {
                 return Optional.empty();
             }
             Optional<Judged> there = settledIfBetter(neighbour, from);
@@ -121,7 +145,10 @@ final class Search {
         for (Design design : capacitors(from.design())) {
             Reach reach = Reach.of(design);
             for (Design ramp : RampChoice.best(request, design, reach, RAMPS)) {
-                best = judgeIfBetter(ramp, reach, best).orElse(best);
+                if (Grade.atBest(ramp, Timing.of(ramp, reach)).compareTo(best.grade()) <= 0) {
+                    Judged there = judge(ramp, reach);
+                    best = ORDER.compare(there, best) < 0 ? there : best;
+                }
             }
         }
         return best;

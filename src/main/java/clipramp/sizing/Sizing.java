@@ -2,12 +2,17 @@ package clipramp.sizing;
 
 import clipramp.circuit.Design;
 import clipramp.circuit.Part;
+import clipramp.circuit.Wanted;
+import clipramp.circuit.Wanted.Goal;
 import clipramp.margins.Margin;
+import clipramp.margins.MarginKind;
 import clipramp.margins.Verdict;
 import clipramp.sizing.Search.Judged;
 import clipramp.sizing.SizingAnswer.Conflict;
 import clipramp.sizing.SizingAnswer.Outcome;
 import clipramp.spread.Watch;
+import clipramp.units.QuantityText;
+import clipramp.units.Unit;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
@@ -15,6 +20,11 @@ import java.util.Optional;
 
 /** From what is wanted to preferred values. */
 public final class Sizing {
+    private static final int FIGURES = 3;
+
+    /** How often the nearest setting is taken back where nothing holds with it. */
+    private static final int MOST_TRIALS = 3;
+
     private Sizing() {}
 
     /**
@@ -38,8 +48,53 @@ public final class Sizing {
      */
     public static SizingAnswer propose(SizingRequest request, Watch watch) {
         Search search = new Search(request, watch);
-        Judged plain = search.polished(search.climb(Start.of(request)));
-        return answer(trimmed(request, search, plain), search.all());
+        Judged first = search.first();
+        Optional<Nearest> nearest = failing(first).stream().anyMatch(m -> m.kind() == MarginKind.WANTED_HIGHEST)
+                ? Nearest.of(first.design(), first.reach())
+                : Optional.empty();
+        if (nearest.isPresent()) {
+            return nearer(request, nearest.get(), watch);
+        }
+        Judged best = first.grade().holds() ? first : search.betterThan(first);
+        return answer(trimmed(request, search, best), search.all(), Optional.empty());
+    }
+
+    /** The design for the nearest setting that can be had, judged by what was wanted. */
+    private static SizingAnswer nearer(SizingRequest request, Nearest nearest, Watch watch) {
+        Wanted wanted = request.design().wanted();
+        Nearest asked = nearest;
+        Search search = new Search(easier(request, asked), watch);
+        Judged best = search.first();
+        int candidates = search.all().size();
+        for (int trial = 1; trial < MOST_TRIALS && !best.grade().holds(); trial++) {
+            asked = asked.less();
+            search = new Search(easier(request, asked), watch);
+            best = search.first();
+            candidates += search.all().size();
+        }
+        Kept kept = trimmed(easier(request, asked), search, best);
+        Search again = new Search(request, Watch.NONE);
+        Judged judged = again.judge(
+                kept.judged().design().withWanted(wanted), kept.judged().reach());
+        return answer(new Kept(judged, List.of()), again.all(), Optional.of(said(wanted, asked, kept)), candidates);
+    }
+
+    private static SizingRequest easier(SizingRequest request, Nearest nearest) {
+        return new SizingRequest(
+                request.design().withWanted(nearest.wanted()), request.open(), request.stock(), request.series());
+    }
+
+    private static String said(Wanted wanted, Nearest nearest, Kept kept) {
+        double from = wanted.highest().orElseThrow().from();
+        Goal goal = nearest.wanted().highest().orElseThrow();
+        String holds = !kept.judged().grade().holds()
+                ? "; the design shown comes nearest to that"
+                : kept.corners().isEmpty()
+                        ? "; the design shown holds with that, in the worst case too"
+                        : "; the design shown holds with that, with nominal parts";
+        return "The nearest that can be met: " + Nearest.text(goal.measure(), goal.from()) + " in place of "
+                + Nearest.text(goal.measure(), from) + " at "
+                + QuantityText.format(goal.position(), Unit.FRACTION, FIGURES) + holds + ". " + nearest.why();
     }
 
     /** Where units stray too far, the first with trimmers that holds for every one; else what there was. */
@@ -77,7 +132,7 @@ public final class Sizing {
     /** The same for a design as it stands: nothing is chosen. */
     public static SizingAnswer judge(SizingRequest request, Design design) {
         Search search = new Search(request, Watch.NONE);
-        return answer(Kept.of(search.judge(design, Reach.of(design))), search.all());
+        return answer(Kept.of(search.judge(design, Reach.of(design))), search.all(), Optional.empty());
     }
 
     /**
@@ -95,7 +150,11 @@ public final class Sizing {
         return propose(request.decided(Edit.baseTwo(first.design(), part), OpenPart.BASE_TWO));
     }
 
-    private static SizingAnswer answer(Kept kept, List<Judged> all) {
+    private static SizingAnswer answer(Kept kept, List<Judged> all, Optional<String> nearest) {
+        return answer(kept, all, nearest, all.size());
+    }
+
+    private static SizingAnswer answer(Kept kept, List<Judged> all, Optional<String> nearest, int candidates) {
         Judged best = kept.judged();
         List<Margin> corners = kept.corners();
         Outcome outcome =
@@ -105,14 +164,14 @@ public final class Sizing {
                 best.check(),
                 outcome,
                 corners,
-                corners.isEmpty() && best.grade().holds() ? 1 : best.timing().yield(),
+                outcome == Outcome.WORST_CASE ? 1 : best.timing().yield(),
                 best.timing().deadTravel(),
                 Grade.watts(best.check().dissipation()),
-                conflicts(best, all),
-                all.size());
+                conflicts(best, all, nearest),
+                candidates);
     }
 
-    private static List<Conflict> conflicts(Judged best, List<Judged> all) {
+    private static List<Conflict> conflicts(Judged best, List<Judged> all, Optional<String> nearest) {
         List<Conflict> conflicts = new ArrayList<>();
         for (Margin margin : failing(best)) {
             List<String> with = all.stream()
@@ -120,7 +179,9 @@ public final class Sizing {
                     .min(Comparator.comparing(Judged::grade))
                     .map(j -> failing(j).stream().map(Margin::name).toList())
                     .orElse(List.of());
-            conflicts.add(new Conflict(margin, with, nearest(margin)));
+            boolean highest = margin.kind() == MarginKind.WANTED_HIGHEST;
+            String said = highest ? nearest.orElseGet(() -> nearest(margin)) : nearest(margin);
+            conflicts.add(new Conflict(margin, with, said));
         }
         return conflicts;
     }

@@ -26,7 +26,8 @@ public final class SizingWords {
     public static String clause(SizingAnswer answer) {
         return switch (answer.outcome()) {
             case WORST_CASE ->
-                ": no margin fails, neither with nominal parts nor for the fastest and the slowest unit.";
+                ": no margin fails, neither with nominal parts nor for the fastest and the slowest unit"
+                        + (Trimming.isIn(answer.design()) ? ", once its trimmers are set." : ".");
             case NOMINAL -> ": no margin fails at any line and temperature.";
             case NOTHING -> "; this is the nearest that was found.";
         };
@@ -41,6 +42,14 @@ public final class SizingWords {
         return Optional.of("For the fastest or the slowest unit that the tolerances allow these fail: " + names
                 + ". About " + text(answer.yield(), Unit.FRACTION)
                 + " of all units reach everything that is wanted without selection or trimming.");
+    }
+
+    /** How one trimmer is set, a sentence. */
+    public static String setting(UnitSetting setting) {
+        return "With the knob at " + text(setting.position(), Unit.FRACTION) + " turn "
+                + setting.part().key() + " until the load has " + text(setting.loadVolts(), Unit.VOLT)
+                + " rms (it then fires at " + QuantityText.number(Math.toDegrees(setting.firingRad()), FIGURES)
+                + "° and gets " + text(setting.fraction(), Unit.FRACTION) + " of full power).";
     }
 
     /** Heat, dead travel and how much was tried. */

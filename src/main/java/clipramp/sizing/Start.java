@@ -57,9 +57,26 @@ final class Start {
     }
 
     static Design of(SizingRequest request) {
+        return of(request, Optional.empty());
+    }
+
+    /** Starts with the first thyristor whose gate is of the other class: sensitive in place of ordinary, or the reverse. */
+    static List<Design> others(SizingRequest request) {
+        if (!request.isOpen(OpenPart.THYRISTOR)) {
+            return List.of();
+        }
+        List<ThyristorDevice> all = thyristors(request, request.design());
+        return all.stream()
+                .filter(d -> isSensitive(d) != isSensitive(all.get(0)))
+                .findFirst()
+                .map(d -> List.of(of(request, Optional.of(d))))
+                .orElse(List.of());
+    }
+
+    private static Design of(SizingRequest request, Optional<ThyristorDevice> device) {
         Start start = new Start(request);
         start.bare();
-        start.thyristor();
+        start.thyristor(device);
         start.supply();
         start.trigger();
         start.gate();
@@ -92,9 +109,10 @@ final class Start {
         return resistor(request, ohms);
     }
 
-    private void thyristor() {
+    private void thyristor(Optional<ThyristorDevice> device) {
         if (request.isOpen(OpenPart.THYRISTOR)) {
-            thyristors(request, design).stream().findFirst().ifPresent(d -> design = Edit.thyristor(design, d));
+            device.or(() -> thyristors(request, design).stream().findFirst())
+                    .ifPresent(d -> design = Edit.thyristor(design, d));
         }
         if (request.isOpen(OpenPart.TRANSFORMER)) {
             design = Edit.transformer(
@@ -137,7 +155,11 @@ final class Start {
     }
 
     private boolean sensitive() {
-        return design.thyristor().device().gate().trigger().ampsAt(25) < SENSITIVE_AMPS;
+        return isSensitive(design.thyristor().device());
+    }
+
+    private static boolean isSensitive(ThyristorDevice device) {
+        return device.gate().trigger().ampsAt(25) < SENSITIVE_AMPS;
     }
 
     /** Crest of the low line as the supply sees it, V. */

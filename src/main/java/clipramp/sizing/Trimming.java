@@ -30,7 +30,10 @@ final class Trimming {
     private static final double HIGH_WINDOW = 0.9;
 
     /** Share of the way from the least R_E of the lowest setting to the collapse that the nominal one takes. */
-    private static final double LOW_SHARE = 0.3;
+    private static final double LOW_SHARE = 0.08;
+
+    /** The same for units that drift more than the nominal one. */
+    private static final double CAREFUL_SHARE = 0.3;
 
     private static final double LEAST_FIXED = 47;
 
@@ -77,7 +80,8 @@ final class Trimming {
             if (request.isOpen(OpenPart.TRACK)
                     && request.isOpen(OpenPart.TRIM_LOW)
                     && request.isOpen(OpenPart.ACROSS)) {
-                trimming.low(high).ifPresent(all::add);
+                trimming.low(high, LOW_SHARE).ifPresent(all::add);
+                trimming.low(high, CAREFUL_SHARE).ifPresent(all::add);
             }
         });
         return all;
@@ -135,10 +139,10 @@ final class Trimming {
     }
 
     /** Track, resistor and preset across it for the lowest setting. */
-    private Optional<Design> low(Design high) {
+    private Optional<Design> low(Design high, double share) {
         double series = high.ramp().seriesOhms();
         double most = Math.min(reach.collapse(), reach.lowestTo());
-        double target = reach.lowestFrom() * Math.pow(most / reach.lowestFrom(), LOW_SHARE);
+        double target = reach.lowestFrom() * Math.pow(most / reach.lowestFrom(), share);
         Pot pot = high.ramp().pot().orElseThrow();
         Design best = null;
         double farthest = Double.POSITIVE_INFINITY;

@@ -25,7 +25,7 @@ final class Exhaustive {
             for (Design ramp : RampChoice.all(request, design, reach)) {
                 if (Timing.lack(ramp, reach) < HOPELESS) {
                     Judged there = search.judge(ramp, reach);
-                    best = best == null || there.grade().compareTo(best.grade()) < 0 ? there : best;
+                    best = best == null || Search.ORDER.compare(there, best) < 0 ? there : best;
                 }
             }
             farads = request.capacitorSeries().nextUp(farads);

@@ -99,7 +99,8 @@ final class SizingStudy {
                                                 "%.2f",
                                                 c.margin().ratio().orElse(Double.NaN)))
                                 .collect(Collectors.joining(", "))
-                        + " of " + answer.candidates());
+                        + " of " + answer.candidates() + "; "
+                        + answer.conflicts().get(0).nearest());
             }
         }
         times.sort(null);

@@ -16,6 +16,7 @@ import clipramp.margins.Verdict;
 import clipramp.sizing.SizingAnswer.Outcome;
 import clipramp.units.PreferredSeries;
 import java.util.EnumSet;
+import java.util.List;
 import java.util.OptionalDouble;
 import java.util.Set;
 import org.junit.jupiter.api.Test;
@@ -111,8 +112,70 @@ class SizingTest {
         assertThat(answer.outcome()).isEqualTo(Outcome.NOTHING);
         assertThat(answer.conflicts()).anySatisfy(c -> {
             assertThat(c.margin().id()).isEqualTo("wanted-highest");
-            assertThat(c.nearest()).contains("in place of 0.8");
+            assertThat(c.nearest()).contains("in place of 80 %", "every second half cycle only");
         });
+    }
+
+    /** Bridge and thyristor leave a line of 24 V with four fifths of its power: no firing circuit gives more. */
+    @Test
+    void whatTheDropsTakeIsSaidTogetherWithTheNearestThatHolds() {
+        SizingAnswer answer = Sizing.propose(Requests.request(Requests.text(1), PreferredSeries.E24));
+
+        assertThat(answer.conflicts()).singleElement().satisfies(c -> {
+            assertThat(c.margin().id()).isEqualTo("wanted-highest");
+            assertThat(c.nearest())
+                    .startsWith("The nearest that can be met: ")
+                    .contains("the design shown holds with that")
+                    .contains("the drops of thyristor and bridge take the rest");
+        });
+    }
+
+    /** Seed 23 was silent: across the thyristor the supply is gone with the pulse, and 12 V leave the gate nothing. */
+    @Test
+    void aBridgeOnALowLineIsCoupledByTransformerUnlessItIsSaidOtherwise() {
+        PartialDesign partial = Requests.read(Requests.text(23).replace("80 % at 100 %", "70 % at 100 %"));
+
+        assertThat(partial.text().valueAt("gate.coupling")).contains("transformer");
+        assertThat(partial.notes()).anySatisfy(n -> assertThat(n).contains("a line this low"));
+        assertThat(Sizing.propose(partial.request(Requests.LIBRARY, PreferredSeries.E24))
+                        .outcome())
+                .isEqualTo(Outcome.WORST_CASE);
+    }
+
+    /** The standoff ratio alone moves the delay by a fifth either way: presets take that up. */
+    @Test
+    void trimmersAreProposedWhereUnitsStrayAndTheExtremeOnesThenHold() {
+        SizingRequest request = Requests.request(CABINET.formatted("bridge-dc", "92"), PreferredSeries.E24);
+        SizingAnswer answer = Sizing.propose(request);
+
+        assertThat(answer.outcome()).isEqualTo(Outcome.WORST_CASE);
+        assertThat(UnitSetting.of(answer.design()))
+                .extracting(UnitSetting::part)
+                .containsExactly(OpenPart.TRIM_HIGH, OpenPart.TRIM_LOW);
+        for (Design unit : List.of(CornerUnits.fastest(answer.design()), CornerUnits.slowest(answer.design()))) {
+            assertThat(Judge.check(unit, OptionalDouble.empty(), OptionalDouble.empty())
+                            .verdict())
+                    .isNotEqualTo(Verdict.FAILS);
+        }
+    }
+
+    @Test
+    void noTrimmerIsProposedWhereTheRequestSaysNone() {
+        String text = CABINET.formatted("bridge-dc", "92") + "ramp: {trim-high: none, trim-low: none}\n";
+        SizingAnswer answer = Sizing.propose(Requests.request(text, PreferredSeries.E24));
+
+        assertThat(answer.design().ramp().trimmers().isNone()).isTrue();
+        assertThat(answer.outcome()).isEqualTo(Outcome.NOMINAL);
+    }
+
+    /** The 24th of the drawn requests once ended in a crash: no request may. */
+    @ParameterizedTest
+    @ValueSource(longs = {24, 28, 35, 50})
+    void everyRequestEndsInADesignOrInARefusalThatNamesTheDemand(long seed) {
+        SizingAnswer answer = Sizing.propose(Requests.request(Requests.text(seed), PreferredSeries.E24));
+
+        assertThat(answer.holds() || !answer.conflicts().isEmpty()).isTrue();
+        assertThat(answer.conflicts()).allSatisfy(c -> assertThat(c.nearest()).isNotBlank());
     }
 
     @Test
