@@ -27,12 +27,12 @@ class CompletionTest {
         "clipramp map --for, --for-angle= --for-power= --for-volts=",
         "clipramp explain gate-peak-c, gate-peak-current",
         "clipramp parts 2n264, 2n2646 2n2647",
-        "clipramp new --from=tray, tray-lamp",
+        "clipramp new --from=tasting, tasting-lamps",
         "clipramp check x.yaml --with=ramp.c, ramp.capacitor=",
         "clipramp record --paper=, a4 letter",
         "clipramp completion z, zsh",
         "clipramp check examples/seed, examples/seed-drawer.yaml",
-        "clipramp record --out=examples/tray, examples/tray-lamp.yaml"
+        "clipramp record --out=examples/tasting, examples/tasting-lamps.yaml"
     })
     void bashOffersWhatFits(String typed, String offered) throws IOException, InterruptedException {
         assumeTrue(Files.isExecutable(BASH), "no bash here");
