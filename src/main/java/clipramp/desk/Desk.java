@@ -68,6 +68,9 @@ public final class Desk {
      * @param asking how it asks for files
      */
     record Setup(Places places, Map<String, String> environment, Path home, Asking asking) {
+        /** Lanes and power curve are drawn at the same time. */
+        private static final int PAINTERS = 2;
+
         /** Shows a window; it is painted before anything is read or computed. */
         DeskModel show(Stage stage, Optional<Path> file, Runnable closed) {
             Workers workers = new Workers(
@@ -84,7 +87,7 @@ public final class Desk {
             Late<RecordMaker> maker = new Late<>(
                     () -> new RecordMaker(workers, workshop, Release.version(), trouble -> actions[0].show(trouble)));
             actions[0] = new WindowActions(model, maker, recovery, places, workers, closed);
-            Theme theme = new Theme(Palette.PAPER, 1);
+            Theme theme = new Theme(Palette.PAPER, 1, workers("painting", PAINTERS));
             DeskWindow window = new DeskWindow(stage, theme, model, maker, actions[0]);
             actions[0].serve(window, asking.of(stage));
             actions[0].take(Settings.load(places));
@@ -120,7 +123,11 @@ public final class Desk {
         }
 
         private static Executor worker(String name) {
-            return Executors.newSingleThreadExecutor(task -> {
+            return workers(name, 1);
+        }
+
+        private static Executor workers(String name, int threads) {
+            return Executors.newFixedThreadPool(threads, task -> {
                 Thread thread = new Thread(task, "desk-" + name);
                 thread.setDaemon(true);
                 return thread;

@@ -26,7 +26,7 @@ import javafx.scene.layout.VBox;
 /** Single faults and what follows from each; and backwards, which of them fit what was seen. */
 final class FaultsPage implements PageView {
     /** Of the table's width: fault, fits, load gets, load, knob, and the test points. */
-    private static final double[] SHARES = {25, 7, 12, 7, 6, 8, 8, 9, 9, 8, 8};
+    private static final double[] SHARES = {30, 6, 11, 6.5, 5.5, 7.3, 7.3, 8.3, 8.3, 7.6, 7.6};
 
     private static final double SCROLL_BAR = 16;
     private static final double TABLE_SHARE = 0.44;

@@ -1,40 +1,65 @@
 package clipramp.desk;
 
+import clipramp.desk.model.LatestWins;
 import clipramp.figures.Figure;
+import clipramp.figures.PixelSurface;
 import clipramp.figures.Style;
-import clipramp.figures.Surfaces;
+import java.nio.IntBuffer;
 import javafx.application.Platform;
 import javafx.geometry.Rectangle2D;
 import javafx.scene.AccessibleRole;
-import javafx.scene.canvas.Canvas;
-import javafx.scene.canvas.GraphicsContext;
+import javafx.scene.image.ImageView;
+import javafx.scene.image.PixelBuffer;
+import javafx.scene.image.PixelFormat;
+import javafx.scene.image.WritableImage;
 import javafx.scene.layout.Region;
-import org.jfree.fx.FXGraphics2D;
 import org.jspecify.annotations.Nullable;
 
 /**
- * A figure on the screen. However often it is given another one, it draws once a frame, just before the frame is laid
- * out, and lays nothing out for it. Its sentence is what a screen reader says.
+ * A figure on the screen, drawn away from the window's thread: what is on the screen stays until the next is ready, and
+ * figures that are overtaken are never drawn. Its sentence is what a screen reader says.
  */
 final class FigurePane extends Region {
-    private final Canvas canvas = new Canvas();
+    private record Drawing(Figure figure, double width, double height, double scale, Style style) {
+        /** Whether the other would look the same because it is of the very same figure. */
+        boolean isOnlyAgain(@Nullable Drawing other) {
+            return other != null
+                    && figure == other.figure
+                    && width == other.width
+                    && height == other.height
+                    && scale == other.scale
+                    && style.equals(other.style);
+        }
+    }
+
+    private record Drawn(Drawing drawing, PixelSurface surface) {}
+
+    private final ImageView view = new ImageView();
     private final Theme theme;
-    private final Runnable drawing = this::drawIfStale;
+    private final LatestWins<Drawing, Drawn> painter;
+    /** One is copied to the screen while the other is drawn into. */
+    private PixelSurface spare = new PixelSurface(1, 1);
+
+    private PixelSurface used = new PixelSurface(1, 1);
+    private @Nullable PixelBuffer<IntBuffer> pixels;
     private @Nullable Figure figure;
+    private @Nullable Figure painted;
+    private @Nullable Drawing asked;
     private boolean stale;
 
     FigurePane(Theme theme) {
         this.theme = theme;
-        getChildren().add(canvas);
+        this.painter = new LatestWins<>(this::draw, theme.painting(), Platform::runLater, this::take, failure -> {
+            throw failure;
+        });
+        view.setSmooth(false);
+        getChildren().add(view);
         getStyleClass().add("figure");
         setAccessibleRole(AccessibleRole.IMAGE_VIEW);
         theme.onChange(this::redraw);
         sceneProperty().addListener((property, before, now) -> {
-            if (before != null) {
-                before.removePreLayoutPulseListener(drawing);
-            }
-            if (now != null) {
-                now.addPreLayoutPulseListener(drawing);
+            if (stale) {
+                redraw();
             }
         });
     }
@@ -51,18 +76,66 @@ final class FigurePane extends Region {
         return figure;
     }
 
+    /** Whether what is on the screen is what was last given. */
+    boolean isPainted() {
+        return figure == painted;
+    }
+
     Style style() {
         return theme.style();
     }
 
-    /** Where figure and pointer meet: the canvas fills the pane. */
+    /** Where figure and pointer meet: the figure fills the pane. */
     Rectangle2D area() {
-        return new Rectangle2D(0, 0, canvas.getWidth(), canvas.getHeight());
+        return new Rectangle2D(0, 0, Math.floor(getWidth()), Math.floor(getHeight()));
     }
 
+    /** Nothing is drawn for a pane that is in no window. */
     private void redraw() {
-        stale = true;
-        Platform.requestNextPulse();
+        Rectangle2D area = area();
+        stale = getScene() == null || area.getWidth() < 1 || area.getHeight() < 1;
+        if (figure != null && !stale) {
+            double scale = getScene().getWindow() == null
+                    ? 1
+                    : getScene().getWindow().getRenderScaleX();
+            Drawing drawing = new Drawing(figure, area.getWidth(), area.getHeight(), scale, theme.style());
+            if (!drawing.isOnlyAgain(asked)) {
+                asked = drawing;
+                painter.ask(drawing);
+            }
+        }
+    }
+
+    private Drawn draw(Drawing drawing) {
+        int columns = (int) Math.ceil(drawing.width() * drawing.scale());
+        int rows = (int) Math.ceil(drawing.height() * drawing.scale());
+        PixelSurface surface = spare;
+        if (surface.columns() != columns || surface.rows() != rows) {
+            surface = new PixelSurface(columns, rows);
+        }
+        spare = used;
+        used = surface;
+        surface.draw(drawing.figure(), drawing.scale(), drawing.style());
+        return new Drawn(drawing, surface);
+    }
+
+    private void take(Drawn drawn) {
+        PixelSurface surface = drawn.surface();
+        PixelBuffer<IntBuffer> screen = pixels;
+        if (screen == null || screen.getWidth() != surface.columns() || screen.getHeight() != surface.rows()) {
+            screen = new PixelBuffer<>(
+                    surface.columns(),
+                    surface.rows(),
+                    IntBuffer.allocate(surface.columns() * surface.rows()),
+                    PixelFormat.getIntArgbPreInstance());
+            pixels = screen;
+            view.setImage(new WritableImage(screen));
+        }
+        view.setFitWidth(drawn.drawing().width());
+        view.setFitHeight(drawn.drawing().height());
+        screen.getBuffer().put(0, surface.argb());
+        screen.updateBuffer(all -> null);
+        painted = drawn.drawing().figure();
     }
 
     @Override
@@ -87,28 +160,9 @@ final class FigurePane extends Region {
 
     @Override
     protected void layoutChildren() {
-        double width = Math.floor(getWidth());
-        double height = Math.floor(getHeight());
-        if (canvas.getWidth() != width || canvas.getHeight() != height) {
-            canvas.setWidth(width);
-            canvas.setHeight(height);
-            stale = true;
-            drawIfStale();
+        Rectangle2D area = area();
+        if (stale || view.getFitWidth() != area.getWidth() || view.getFitHeight() != area.getHeight()) {
+            redraw();
         }
-    }
-
-    private void drawIfStale() {
-        if (stale && figure != null && canvas.getWidth() > 0 && canvas.getHeight() > 0) {
-            paint(figure, canvas.getWidth(), canvas.getHeight());
-        }
-    }
-
-    private void paint(Figure shown, double width, double height) {
-        stale = false;
-        GraphicsContext context = canvas.getGraphicsContext2D();
-        context.save();
-        context.clearRect(0, 0, width, height);
-        Surfaces.draw(shown, new FXGraphics2D(context), width, height, theme.style());
-        context.restore();
     }
 }

@@ -10,6 +10,7 @@ import java.util.ArrayList;
 import java.util.Base64;
 import java.util.List;
 import java.util.Objects;
+import java.util.concurrent.Executor;
 import javafx.collections.ObservableList;
 import javafx.scene.text.Font;
 
@@ -19,9 +20,12 @@ final class Theme {
 
     private final List<Runnable> listeners = new ArrayList<>();
     private final List<ObservableList<String>> sheets = new ArrayList<>();
+    private final Executor painting;
     private Style style;
 
-    Theme(Palette palette, double zoom) {
+    /** @param painting where figures are drawn */
+    Theme(Palette palette, double zoom, Executor painting) {
+        this.painting = painting;
         this.style = new Style(palette, zoom);
     }
 
@@ -30,6 +34,11 @@ final class Theme {
         for (boolean bold : new boolean[] {false, true}) {
             Font.loadFont(new ByteArrayInputStream(Lettering.fontFile(bold)), TEXT_PIXELS);
         }
+    }
+
+    /** Where figures are drawn. */
+    Executor painting() {
+        return painting;
     }
 
     Style style() {

@@ -87,7 +87,9 @@ public final class TurnSpeed {
                                 .point()
                                 .position()
                                 .orElse(-1)
-                        == position;
+                                == position
+                        && ((FigurePane) scene.lookup("#lanes")).isPainted()
+                        && ((FigurePane) scene.lookup("#knob-curve")).isPainted();
                 if (there) {
                     scene.removePostLayoutPulseListener(after[0]);
                     // Behind this pulse's own rendering in the renderer's queue.
