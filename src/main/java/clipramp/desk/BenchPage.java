@@ -103,6 +103,11 @@ final class BenchPage extends Pane implements PageView {
         return parts;
     }
 
+    /** What it is put together from. */
+    List<Region> pieces() {
+        return List.of(leftScroll, tabs, parts.node(), right);
+    }
+
     /** Whether there is no room for parts and margins beside the lanes. */
     boolean isFolded() {
         return getWidth() / theme.zoom() < FOLD_BELOW;

@@ -11,6 +11,7 @@ import clipramp.figures.CircuitFigure;
 import clipramp.figures.Figure;
 import clipramp.figures.HarmonicsFigure;
 import java.nio.file.Path;
+import java.util.ArrayList;
 import java.util.EnumMap;
 import java.util.List;
 import java.util.Map;
@@ -22,6 +23,7 @@ import javafx.scene.image.Image;
 import javafx.scene.input.TransferMode;
 import javafx.scene.layout.BorderPane;
 import javafx.scene.layout.FlowPane;
+import javafx.scene.layout.Region;
 import javafx.scene.layout.VBox;
 import javafx.stage.Stage;
 
@@ -105,9 +107,11 @@ final class DeskWindow {
 
     /** Makes what the first painted window did without, so that the first design need not wait for it. */
     void finish() {
-        bench.get();
-        header.get();
-        tabs.get();
+        List<Region> pieces = new ArrayList<>(List.of(header.get().node(), tabs.get().node()));
+        pieces.addAll(bench().pieces());
+        if (bench().getParent() == null) {
+            FirstDressing.of(theme, List.of(bench(), header.get().node(), tabs.get().node()), pieces);
+        }
     }
 
     private static void takeDrops(Scene scene, Actions actions) {

@@ -218,7 +218,7 @@ final class FaultsPage implements PageView {
         for (int i = 0; i < SHARES.length; i++) {
             TableColumn<List<String>, ?> column = table.getColumns().get(i);
             column.setPrefWidth(Math.floor(room * SHARES[i] / all));
-            if ((i == 0 || i == FaultWords.FITS + 1) && !column.getStyleClass().contains("words-column")) {
+            if (i <= FaultWords.FITS + 1 && !column.getStyleClass().contains("words-column")) {
                 column.getStyleClass().add("words-column");
             }
         }

@@ -61,7 +61,7 @@ final class LinePage implements PageView {
         DialView dial = new DialView(model.bench());
         HBox knob = new HBox(dial.node());
         knob.getStyleClass().add("line-knob");
-        Label guidance = Words.wrapped(
+        Label guidance = Words.quiet(
                 "Guidance for a designer: nominal line and parts, the firing supply's own current left out."
                         + " A test house and local rules decide.");
         guidance.setId("line-guidance");

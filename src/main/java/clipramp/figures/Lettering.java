@@ -37,6 +37,12 @@ public final class Lettering {
         }
     }
 
+    /** Reads the faces and measures a word, so that the first figure need not wait for that. */
+    public static void prepare() {
+        width("0", bold(1));
+        width("0", regular(1));
+    }
+
     /** The TrueType file of a face, for a surface that embeds or loads it itself. */
     public static byte[] fontFile(boolean bold) {
         String name = FOLDER + (bold ? "DejaVuSans-Bold.ttf" : "DejaVuSans.ttf");
