@@ -107,10 +107,12 @@ final class DeskWindow {
 
     /** Makes what the first painted window did without, so that the first design need not wait for it. */
     void finish() {
-        List<Region> pieces = new ArrayList<>(List.of(header.get().node(), tabs.get().node()));
+        List<Region> pieces =
+                new ArrayList<>(List.of(header.get().node(), tabs.get().node()));
         pieces.addAll(bench().pieces());
         if (bench().getParent() == null) {
-            FirstDressing.of(theme, List.of(bench(), header.get().node(), tabs.get().node()), pieces);
+            FirstDressing.of(
+                    theme, List.of(bench(), header.get().node(), tabs.get().node()), pieces);
         }
     }
 

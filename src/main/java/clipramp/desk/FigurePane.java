@@ -95,9 +95,8 @@ final class FigurePane extends Region {
         Rectangle2D area = area();
         stale = getScene() == null || area.getWidth() < 1 || area.getHeight() < 1;
         if (figure != null && !stale) {
-            double scale = getScene().getWindow() == null
-                    ? 1
-                    : getScene().getWindow().getRenderScaleX();
+            double scale =
+                    getScene().getWindow() == null ? 1 : getScene().getWindow().getRenderScaleX();
             Drawing drawing = new Drawing(figure, area.getWidth(), area.getHeight(), scale, theme.style());
             if (!drawing.isOnlyAgain(asked)) {
                 asked = drawing;

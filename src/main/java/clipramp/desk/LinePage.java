@@ -61,8 +61,8 @@ final class LinePage implements PageView {
         DialView dial = new DialView(model.bench());
         HBox knob = new HBox(dial.node());
         knob.getStyleClass().add("line-knob");
-        Label guidance = Words.quiet(
-                "Guidance for a designer: nominal line and parts, the firing supply's own current left out."
+        Label guidance =
+                Words.quiet("Guidance for a designer: nominal line and parts, the firing supply's own current left out."
                         + " A test house and local rules decide.");
         guidance.setId("line-guidance");
         box.setLeft(new SidePanel(knob, totals, guidance).node());
@@ -147,6 +147,7 @@ final class LinePage implements PageView {
 
     private static Label right(Label label) {
         GridPane.setHalignment(label, HPos.RIGHT);
+        label.setMinWidth(Region.USE_PREF_SIZE);
         GridPane.setHgrow(label, Priority.ALWAYS);
         return label;
     }

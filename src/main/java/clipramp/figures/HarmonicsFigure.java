@@ -29,6 +29,9 @@ public record HarmonicsFigure(LineCheck check, Optional<Setting> standing) imple
 
     private static final double HEADROOM = 1.6;
     private static final double BAR = 0.72;
+    /** Share of the width that the last line of the legend may take. */
+    private static final double MOST_LEGEND = 0.6;
+
 
     /** With the bars of the setting that uses most of the table. */
     public HarmonicsFigure(LineCheck check) {
@@ -186,13 +189,11 @@ public record HarmonicsFigure(LineCheck check, Optional<Setting> standing) imple
                 ? "no current flows"
                 : "order " + binding.order() + " binds first: " + Numerals.significant(100 * binding.used(), DIGITS)
                         + " % of its limit";
-        plot.pen()
-                .right(
-                        first,
-                        style.smallBold(),
-                        style.palette().ink(),
-                        plot.area().getMaxX() - 2 * style.gap(),
-                        y);
+        // On a narrow figure it would lie over the bars; the sentence says it too.
+        if (Lettering.width(first, style.smallBold()) < MOST_LEGEND * plot.area().getWidth()) {
+            double right = plot.area().getMaxX() - 2 * style.gap();
+            plot.pen().right(first, style.smallBold(), style.palette().ink(), right, y);
+        }
     }
 
     private static void swatch(Pen pen, Style style, int which, Rectangle2D place) {

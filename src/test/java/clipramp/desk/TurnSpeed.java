@@ -81,12 +81,12 @@ public final class TurnSpeed {
             Runnable[] after = new Runnable[1];
             after[0] = () -> {
                 boolean there = window.model
-                                .bench()
-                                .reading()
-                                .orElseThrow()
-                                .point()
-                                .position()
-                                .orElse(-1)
+                                        .bench()
+                                        .reading()
+                                        .orElseThrow()
+                                        .point()
+                                        .position()
+                                        .orElse(-1)
                                 == position
                         && ((FigurePane) scene.lookup("#lanes")).isPainted()
                         && ((FigurePane) scene.lookup("#knob-curve")).isPainted();
