@@ -2,6 +2,7 @@ package clipramp.circuit;
 
 import java.util.Map;
 import java.util.Optional;
+import java.util.function.Consumer;
 
 /**
  * A whole design: one line-synchronised firing circuit with its thyristor and load.
@@ -99,287 +100,134 @@ public record Design(
 
     /** The same design on another line. */
     public Design withLine(Line newLine) {
-        return new Design(
-                title,
-                notes,
-                document,
-                newLine,
-                stage,
-                stageDiodes,
-                load,
-                clip,
-                ramp,
-                trigger,
-                gate,
-                thyristor,
-                snubber,
-                surroundings,
-                wanted,
-                resistorDerating,
-                designators);
+        return revised(design -> design.line = newLine);
     }
 
     /** The same design with another stage. */
     public Design withStage(Stage newStage) {
-        return new Design(
-                title,
-                notes,
-                document,
-                line,
-                newStage,
-                stageDiodes,
-                load,
-                clip,
-                ramp,
-                trigger,
-                gate,
-                thyristor,
-                snubber,
-                surroundings,
-                wanted,
-                resistorDerating,
-                designators);
+        return revised(design -> design.stage = newStage);
     }
 
     /** The same design with other bridge diodes. */
     public Design withStageDiodes(StageDiodes newStageDiodes) {
-        return new Design(
-                title,
-                notes,
-                document,
-                line,
-                stage,
-                newStageDiodes,
-                load,
-                clip,
-                ramp,
-                trigger,
-                gate,
-                thyristor,
-                snubber,
-                surroundings,
-                wanted,
-                resistorDerating,
-                designators);
+        return revised(design -> design.stageDiodes = newStageDiodes);
     }
 
     /** The same design with another load. */
     public Design withLoad(Load newLoad) {
-        return new Design(
-                title,
-                notes,
-                document,
-                line,
-                stage,
-                stageDiodes,
-                newLoad,
-                clip,
-                ramp,
-                trigger,
-                gate,
-                thyristor,
-                snubber,
-                surroundings,
-                wanted,
-                resistorDerating,
-                designators);
+        return revised(design -> design.load = newLoad);
     }
 
     /** The same design with another clipped supply. */
     public Design withClip(ClipSupply newClip) {
-        return new Design(
-                title,
-                notes,
-                document,
-                line,
-                stage,
-                stageDiodes,
-                load,
-                newClip,
-                ramp,
-                trigger,
-                gate,
-                thyristor,
-                snubber,
-                surroundings,
-                wanted,
-                resistorDerating,
-                designators);
+        return revised(design -> design.clip = newClip);
     }
 
     /** The same design with another ramp. */
     public Design withRamp(Ramp newRamp) {
-        return new Design(
-                title,
-                notes,
-                document,
-                line,
-                stage,
-                stageDiodes,
-                load,
-                clip,
-                newRamp,
-                trigger,
-                gate,
-                thyristor,
-                snubber,
-                surroundings,
-                wanted,
-                resistorDerating,
-                designators);
+        return revised(design -> design.ramp = newRamp);
     }
 
     /** The same design with another trigger. */
     public Design withTrigger(Trigger newTrigger) {
-        return new Design(
-                title,
-                notes,
-                document,
-                line,
-                stage,
-                stageDiodes,
-                load,
-                clip,
-                ramp,
-                newTrigger,
-                gate,
-                thyristor,
-                snubber,
-                surroundings,
-                wanted,
-                resistorDerating,
-                designators);
+        return revised(design -> design.trigger = newTrigger);
     }
 
     /** The same design with another gate drive. */
     public Design withGate(GateDrive newGate) {
-        return new Design(
-                title,
-                notes,
-                document,
-                line,
-                stage,
-                stageDiodes,
-                load,
-                clip,
-                ramp,
-                trigger,
-                newGate,
-                thyristor,
-                snubber,
-                surroundings,
-                wanted,
-                resistorDerating,
-                designators);
+        return revised(design -> design.gate = newGate);
     }
 
     /** The same design with another thyristor. */
     public Design withThyristor(Thyristor newThyristor) {
-        return new Design(
-                title,
-                notes,
-                document,
-                line,
-                stage,
-                stageDiodes,
-                load,
-                clip,
-                ramp,
-                trigger,
-                gate,
-                newThyristor,
-                snubber,
-                surroundings,
-                wanted,
-                resistorDerating,
-                designators);
+        return revised(design -> design.thyristor = newThyristor);
     }
 
     /** The same design with another snubber, or none. */
     public Design withSnubber(Optional<Snubber> newSnubber) {
-        return new Design(
-                title,
-                notes,
-                document,
-                line,
-                stage,
-                stageDiodes,
-                load,
-                clip,
-                ramp,
-                trigger,
-                gate,
-                thyristor,
-                newSnubber,
-                surroundings,
-                wanted,
-                resistorDerating,
-                designators);
+        return revised(design -> design.snubber = newSnubber);
     }
 
     /** The same design in other surroundings. */
     public Design withSurroundings(Surroundings newSurroundings) {
-        return new Design(
-                title,
-                notes,
-                document,
-                line,
-                stage,
-                stageDiodes,
-                load,
-                clip,
-                ramp,
-                trigger,
-                gate,
-                thyristor,
-                snubber,
-                newSurroundings,
-                wanted,
-                resistorDerating,
-                designators);
+        return revised(design -> design.surroundings = newSurroundings);
     }
 
     /** The same design with other wishes. */
     public Design withWanted(Wanted newWanted) {
-        return new Design(
-                title,
-                notes,
-                document,
-                line,
-                stage,
-                stageDiodes,
-                load,
-                clip,
-                ramp,
-                trigger,
-                gate,
-                thyristor,
-                snubber,
-                surroundings,
-                newWanted,
-                resistorDerating,
-                designators);
+        return revised(design -> design.wanted = newWanted);
     }
 
     /** The same design with another derating of its resistors. */
     public Design withResistorDerating(double newResistorDerating) {
-        return new Design(
-                title,
-                notes,
-                document,
-                line,
-                stage,
-                stageDiodes,
-                load,
-                clip,
-                ramp,
-                trigger,
-                gate,
-                thyristor,
-                snubber,
-                surroundings,
-                wanted,
-                newResistorDerating,
-                designators);
+        return revised(design -> design.resistorDerating = newResistorDerating);
+    }
+
+    private Design revised(Consumer<Revision> change) {
+        Revision revision = new Revision(this);
+        change.accept(revision);
+        return revision.design();
+    }
+
+    /** A design's values while one of them is being changed, so that no wither has to name all the others. */
+    private static final class Revision {
+        private String title;
+        private String notes;
+        private Document document;
+        private Line line;
+        private Stage stage;
+        private StageDiodes stageDiodes;
+        private Load load;
+        private ClipSupply clip;
+        private Ramp ramp;
+        private Trigger trigger;
+        private GateDrive gate;
+        private Thyristor thyristor;
+        private Optional<Snubber> snubber;
+        private Surroundings surroundings;
+        private Wanted wanted;
+        private double resistorDerating;
+        private Map<String, String> designators;
+
+        Revision(Design design) {
+            title = design.title;
+            notes = design.notes;
+            document = design.document;
+            line = design.line;
+            stage = design.stage;
+            stageDiodes = design.stageDiodes;
+            load = design.load;
+            clip = design.clip;
+            ramp = design.ramp;
+            trigger = design.trigger;
+            gate = design.gate;
+            thyristor = design.thyristor;
+            snubber = design.snubber;
+            surroundings = design.surroundings;
+            wanted = design.wanted;
+            resistorDerating = design.resistorDerating;
+            designators = design.designators;
+        }
+
+        Design design() {
+            return new Design(
+                    title,
+                    notes,
+                    document,
+                    line,
+                    stage,
+                    stageDiodes,
+                    load,
+                    clip,
+                    ramp,
+                    trigger,
+                    gate,
+                    thyristor,
+                    snubber,
+                    surroundings,
+                    wanted,
+                    resistorDerating,
+                    designators);
+        }
     }
 }

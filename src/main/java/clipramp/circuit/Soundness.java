@@ -68,15 +68,19 @@ public final class Soundness {
         }
         boolean fromLine = clip.tap() == Tap.LINE && !clip.isIsolated();
         if (stage == Stage.HALF_WAVE && fromLine && clip.rectifier() == Rectifier.BRIDGE) {
-            reasons.add(new Reason(
-                    "clip.rectifier",
-                    clip.rectifier().word(),
-                    with,
-                    "the common of a line bridge jumps between the two line wires, while the SCR's cathode stays on one,"
-                            + " and every second pulse would come under reverse anode voltage",
-                    "Use diode, or clip.winding."));
+            reasons.add(jumpingCommon(with));
         }
         return reasons;
+    }
+
+    private static Reason jumpingCommon(String with) {
+        return new Reason(
+                "clip.rectifier",
+                Rectifier.BRIDGE.word(),
+                with,
+                "the common of a line bridge jumps between the two line wires, while the SCR's cathode stays on one,"
+                        + " and every second pulse would come under reverse anode voltage",
+                "Use diode, or clip.winding.");
     }
 
     /** Whether the pulse reaches the gate, and nothing else reaches it. */
@@ -179,17 +183,7 @@ public final class Soundness {
         }
         boolean turnOffKnown = device.map(d -> d.turnOffSeconds().isPresent()).orElse(true);
         if (stage == Stage.BRIDGE_AC && (snubber.isEmpty() || !turnOffKnown)) {
-            String lacking = snubber.isPresent()
-                    ? "its profile states no turn-off time"
-                    : turnOffKnown ? "there is no snubber" : "there is neither a snubber nor a stated turn-off time";
-            return List.of(new Reason(
-                    "load.kind",
-                    "inductive",
-                    with,
-                    "when the current reaches zero the bridge puts forward voltage on the SCR at once; whether it has turned"
-                            + " off by then cannot be judged, for " + lacking,
-                    "Use stage inverse-parallel or triac, or bridge-dc with load.freewheel; or give snubber, such as"
-                            + " {resistance: 100 ohm, capacitance: 100 nF}, and an SCR whose turn-off is known."));
+            return List.of(turnOffUnjudged(with, snubber.isPresent(), turnOffKnown));
         }
         if (freewheel && stage.isFullWave() && stage != Stage.BRIDGE_DC) {
             return List.of(new Reason(
@@ -200,6 +194,20 @@ public final class Soundness {
                     "Use load.freewheel: none."));
         }
         return List.of();
+    }
+
+    private static Reason turnOffUnjudged(String with, boolean snubbed, boolean turnOffKnown) {
+        String lacking = snubbed
+                ? "its profile states no turn-off time"
+                : turnOffKnown ? "there is no snubber" : "there is neither a snubber nor a stated turn-off time";
+        return new Reason(
+                "load.kind",
+                "inductive",
+                with,
+                "when the current reaches zero the bridge puts forward voltage on the SCR at once; whether it has turned"
+                        + " off by then cannot be judged, for " + lacking,
+                "Use stage inverse-parallel or triac, or bridge-dc with load.freewheel; or give snubber, such as"
+                        + " {resistance: 100 ohm, capacitance: 100 nF}, and an SCR whose turn-off is known.");
     }
 
     /** Whether the device is the one that the stage is built of. */

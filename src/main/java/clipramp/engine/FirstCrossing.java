@@ -24,11 +24,7 @@ final class FirstCrossing {
      * @return time in s, or POSITIVE_INFINITY for none before the limit
      */
     static double after(Piece piece, Affine form, double from, double limit) {
-        if (from == piece.startSeconds()) {
-            piece.lookAtStart();
-        } else {
-            piece.look(from);
-        }
+        lookAt(piece, from);
         double time = from;
         double value = piece.value(form);
         double rounding = ROUNDING * piece.magnitude(form);
@@ -59,10 +55,18 @@ final class FirstCrossing {
         throw new ArithmeticException("no end to the search for a crossing from " + from + " s");
     }
 
+    private static void lookAt(Piece piece, double seconds) {
+        if (seconds == piece.startSeconds()) {
+            piece.lookAtStart();
+        } else {
+            piece.look(seconds);
+        }
+    }
+
     /** Whether a form that stands at zero may rise at once; one that stays at zero (nothing charged, no supply) does not. */
     private static boolean rises(Piece piece, Affine form) {
         double slope = piece.slope(form);
-        return slope > 0 || slope == 0 && piece.bendBound(form) > 0;
+        return slope > 0 || (slope == 0 && piece.bendBound(form) > 0);
     }
 
     /** First positive root of value + slope h + bend h²/2, value at or under 0; POSITIVE_INFINITY for none. */

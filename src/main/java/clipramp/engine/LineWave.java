@@ -116,11 +116,7 @@ public final class LineWave {
     }
 
     private double[] zeros() {
-        int highest = 1;
-        for (int order : orders) {
-            highest = Math.max(highest, order);
-        }
-        double finest = 2 * Math.PI / (SAMPLES_PER_ORDER * highest);
+        double finest = 2 * Math.PI / (SAMPLES_PER_ORDER * highestOrder());
         double steepest = steepest();
         double rising = Double.NaN;
         double falling = Double.NaN;
@@ -152,5 +148,13 @@ public final class LineWave {
                             + " Make the harmonics smaller.");
         }
         return new double[] {rising, falling};
+    }
+
+    private int highestOrder() {
+        int highest = 1;
+        for (int order : orders) {
+            highest = Math.max(highest, order);
+        }
+        return highest;
     }
 }

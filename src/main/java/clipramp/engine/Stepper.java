@@ -118,8 +118,7 @@ public final class Stepper {
         seconds = firingSeconds;
         rampVolts = firingRampVolts;
         fluxAmps = firingFluxAmps;
-        mode = Mode.ON;
-        settle();
+        turnOn();
     }
 
     /**
@@ -205,23 +204,11 @@ public final class Stepper {
             }
             case CLAMP -> clamps = !clamps;
             case UNSTALLS -> mode = Mode.OFF;
-            case VALLEY -> {
-                mode = Mode.OFF;
-                settle();
-                if (rampVolts > trial.peak.at(rampVolts, fluxAmps, wave.at(seconds)) - ABOVE_VOLTS) {
-                    // A dying supply leaves no room between valley and peak point: the ramp follows the peak point.
-                    mode = Mode.STALLED;
-                    settle();
-                }
-            }
-            case FIRES -> {
-                mode = Mode.ON;
-                settle();
-            }
+            case VALLEY -> passValley();
+            case FIRES -> turnOn();
             case STALLS -> {
                 if (canFire()) {
-                    mode = Mode.ON;
-                    settle();
+                    turnOn();
                     return Event.FIRES;
                 }
                 mode = Mode.STALLED;
@@ -229,6 +216,21 @@ public final class Stepper {
             case END -> {}
         }
         return event;
+    }
+
+    private void turnOn() {
+        mode = Mode.ON;
+        settle();
+    }
+
+    private void passValley() {
+        mode = Mode.OFF;
+        settle();
+        if (rampVolts > trial.peak.at(rampVolts, fluxAmps, wave.at(seconds)) - ABOVE_VOLTS) {
+            // A dying supply leaves no room between valley and peak point: the ramp follows the peak point.
+            mode = Mode.STALLED;
+            settle();
+        }
     }
 
     // --- what may end a piece ---------------------------------------------------------------------------------------
@@ -288,13 +290,7 @@ public final class Stepper {
     private double stallFires(double limit) {
         EventForms.peakCurrent(n, piece, form);
         double enough = search(limit);
-        if (enough >= limit) {
-            return enough;
-        }
-        if (regenerates(enough)) {
-            return enough;
-        }
-        return waitForRegeneration(enough, limit);
+        return enough >= limit || regenerates(enough) ? enough : waitForRegeneration(enough, limit);
     }
 
     private double waitForRegeneration(double from, double limit) {

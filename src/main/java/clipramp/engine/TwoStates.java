@@ -52,8 +52,19 @@ final class TwoStates {
         a12 = -rampSlope.flux;
         a21 = -fluxSlope.ramp;
         a22 = -fluxSlope.flux;
-        mean = (a11 + a22) / 2;
         double determinant = a11 * a22 - a12 * a21;
+        decays(determinant);
+        double rampConstant = rampSlope.constant - rampSlope.source * source.dropVolts;
+        double fluxConstant = fluxSlope.constant - fluxSlope.source * source.dropVolts;
+        rampSteady = (a22 * rampConstant - a12 * fluxConstant) / determinant;
+        fluxSteady = (a11 * fluxConstant - a21 * rampConstant) / determinant;
+        swings(rampSlope.source, fluxSlope.source, determinant);
+        fadeFrom(rampVolts, fluxAmps);
+    }
+
+    /** Half the trace, d, and both eigenvalues. */
+    private void decays(double determinant) {
+        mean = (a11 + a22) / 2;
         // m² - det, written so that nothing cancels where the off-diagonal is small.
         spreadSquared = (a11 - a22) * (a11 - a22) / 4 + a12 * a21;
         spread = Math.sqrt(Math.abs(spreadSquared));
@@ -64,15 +75,14 @@ final class TwoStates {
             fast = mean;
             slow = mean;
         }
-        double rampConstant = rampSlope.constant - rampSlope.source * source.dropVolts;
-        double fluxConstant = fluxSlope.constant - fluxSlope.source * source.dropVolts;
-        rampSteady = (a22 * rampConstant - a12 * fluxConstant) / determinant;
-        fluxSteady = (a11 * fluxConstant - a21 * rampConstant) / determinant;
-        swings(rampSlope.source, fluxSlope.source, determinant);
+    }
+
+    /** What both states begin with beyond the particular solution: the part that fades. */
+    private void fadeFrom(double rampVolts, double fluxAmps) {
         double rampParticular = rampSteady;
         double fluxParticular = fluxSteady;
-        for (int i = 0; i < source.count; i++) {
-            double angle = source.rates[i] * seconds + source.phases[i];
+        for (int i = 0; i < wave.count; i++) {
+            double angle = wave.rates[i] * startSeconds + wave.phases[i];
             double sin = Math.sin(angle);
             double cos = Math.cos(angle);
             rampParticular += rampSines[i] * sin + rampCosines[i] * cos;
@@ -111,7 +121,29 @@ final class TwoStates {
 
     /** Works out both states and their slopes and puts them into the piece. */
     void look(Piece piece, double seconds) {
-        double time = seconds - startSeconds;
+        fade(seconds - startSeconds);
+        double ramp = rampNow + rampSteady;
+        double flux = fluxNow + fluxSteady;
+        double rampSlope = -a11 * rampNow - a12 * fluxNow;
+        double fluxSlope = -a21 * rampNow - a22 * fluxNow;
+        for (int i = 0; i < wave.count; i++) {
+            double w = wave.rates[i];
+            double angle = w * seconds + wave.phases[i];
+            double sin = Math.sin(angle);
+            double cos = Math.cos(angle);
+            ramp += rampSines[i] * sin + rampCosines[i] * cos;
+            flux += fluxSines[i] * sin + fluxCosines[i] * cos;
+            rampSlope += w * (rampSines[i] * cos - rampCosines[i] * sin);
+            fluxSlope += w * (fluxSines[i] * cos - fluxCosines[i] * sin);
+        }
+        piece.rampVolts = ramp;
+        piece.rampSlope = rampSlope;
+        piece.fluxAmps = flux;
+        piece.fluxSlope = fluxSlope;
+    }
+
+    /** The homogeneous part so long after the start. */
+    private void fade(double time) {
         double even;
         double odd;
         if (spread * time < SERIES) {
@@ -131,24 +163,6 @@ final class TwoStates {
         }
         rampNow = even * ramp0 - odd * rampTurned;
         fluxNow = even * flux0 - odd * fluxTurned;
-        double ramp = rampNow + rampSteady;
-        double flux = fluxNow + fluxSteady;
-        double rampSlope = -a11 * rampNow - a12 * fluxNow;
-        double fluxSlope = -a21 * rampNow - a22 * fluxNow;
-        for (int i = 0; i < wave.count; i++) {
-            double w = wave.rates[i];
-            double angle = w * seconds + wave.phases[i];
-            double sin = Math.sin(angle);
-            double cos = Math.cos(angle);
-            ramp += rampSines[i] * sin + rampCosines[i] * cos;
-            flux += fluxSines[i] * sin + fluxCosines[i] * cos;
-            rampSlope += w * (rampSines[i] * cos - rampCosines[i] * sin);
-            fluxSlope += w * (fluxSines[i] * cos - fluxCosines[i] * sin);
-        }
-        piece.rampVolts = ramp;
-        piece.rampSlope = rampSlope;
-        piece.fluxAmps = flux;
-        piece.fluxSlope = fluxSlope;
     }
 
     /** Bound of a form's second derivative from where last looked at to any later time. */

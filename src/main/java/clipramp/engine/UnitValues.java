@@ -100,22 +100,12 @@ public final class UnitValues {
         lineVolts = design.line().volts();
         lineHertz = design.line().hertz();
         celsius = SHEET_CELSIUS;
+        parts(design);
         Zener zener = design.clip().zener();
-        dropperOhms = design.clip().dropper().value();
-        zenerVolts = zener.volts().nominal();
         zenerSlopeOhms = zener.slopeOhms();
         zenerTestAmps = zener.testCurrentAmps();
         zenerDrift = zener.driftPerKelvin();
-        capacitorFarads = design.ramp().capacitor().value();
-        fixedOhms = design.ramp().fixed().value();
-        trackOhms = design.ramp().pot().map(p -> p.track().value()).orElse(0.0);
         potEndOhms = design.ramp().pot().map(Pot::endOhms).orElse(0.0);
-        highTrimOhms = Trimmers.nominalOhms(design.ramp().trimmers().high());
-        lowTrimOhms = Trimmers.nominalOhms(design.ramp().trimmers().low());
-        potShuntOhms = design.ramp().acrossOhms() - lowTrimOhms;
-        baseOneOhms = design.trigger().baseOne().value();
-        gateSeriesOhms = design.gate().series().value();
-        gateShuntOhms = design.gate().shunt().map(Part::value).orElse(Double.POSITIVE_INFINITY);
         gate = new GateSide(design);
         deviceId = design.trigger().deviceId();
         if (design.trigger() instanceof UnijunctionTrigger trigger) {
@@ -141,6 +131,20 @@ public final class UnitValues {
             pulseSupplyVolts = Double.NaN;
             pulseBaseOneOhms = Double.NaN;
         }
+    }
+
+    private void parts(Design design) {
+        dropperOhms = design.clip().dropper().value();
+        zenerVolts = design.clip().zener().volts().nominal();
+        capacitorFarads = design.ramp().capacitor().value();
+        fixedOhms = design.ramp().fixed().value();
+        trackOhms = design.ramp().pot().map(p -> p.track().value()).orElse(0.0);
+        highTrimOhms = Trimmers.nominalOhms(design.ramp().trimmers().high());
+        lowTrimOhms = Trimmers.nominalOhms(design.ramp().trimmers().low());
+        potShuntOhms = design.ramp().acrossOhms() - lowTrimOhms;
+        baseOneOhms = design.trigger().baseOne().value();
+        gateSeriesOhms = design.gate().series().value();
+        gateShuntOhms = design.gate().shunt().map(Part::value).orElse(Double.POSITIVE_INFINITY);
     }
 
     private void unijunction(Unijunction device) {

@@ -187,6 +187,10 @@ final class FiringFaults {
                 How.DEAD,
                 (programmable ? "programmable unijunction @ dead (anode open)" : "unijunction @ dead (emitter open)"),
                 n -> n.emitterDropVolts = NEVER_VOLTS);
+        triggerResistors(programmable);
+    }
+
+    private void triggerResistors(boolean programmable) {
         if (programmable) {
             add("upper-open", "trigger.upper", How.OPEN, "upper divider resistor @ open", n -> n.upperOhms = OPEN_OHMS);
             add("lower-open", "trigger.lower", How.OPEN, "lower divider resistor @ open", n -> n.lowerOhms = OPEN_OHMS);
@@ -223,14 +227,7 @@ final class FiringFaults {
                         "primary of @ open",
                         n -> n.gateSeriesOhms = OPEN_OHMS));
         boolean pair = design.stage() == Stage.INVERSE_PARALLEL;
-        if (pair) {
-            add("gate-open", "gate.series", How.OPEN, "one gate lead (@) open", n -> {});
-            int last = faults.size() - 1;
-            faults.set(last, faults.get(last).along(LoadPath.ONE_HALF));
-            say("TP4 is the other thyristor's gate.");
-        } else {
-            add("gate-open", "gate.series", How.OPEN, "gate lead (@) open", n -> n.gateSeriesOhms = OPEN_OHMS);
-        }
+        gateLeadOpen(pair);
         gate.shunt()
                 .ifPresent(shunt -> add(
                         "gate-shunt-open",
@@ -245,6 +242,17 @@ final class FiringFaults {
                     How.SHORTED,
                     "gate of @ shorted to its cathode",
                     n -> n.gateShuntSiemens = 1 / SHORT_OHMS);
+        }
+    }
+
+    private void gateLeadOpen(boolean pair) {
+        if (pair) {
+            add("gate-open", "gate.series", How.OPEN, "one gate lead (@) open", n -> {});
+            int last = faults.size() - 1;
+            faults.set(last, faults.get(last).along(LoadPath.ONE_HALF));
+            say("TP4 is the other thyristor's gate.");
+        } else {
+            add("gate-open", "gate.series", How.OPEN, "gate lead (@) open", n -> n.gateSeriesOhms = OPEN_OHMS);
         }
     }
 }

@@ -121,22 +121,28 @@ final class PowerFaults {
         if (design.isSuppliedByStageBridge()) {
             return;
         }
-        String key = "clip.rectifier";
         if (clip.rectifier() == Rectifier.DIODE) {
-            faults.add(fault(
-                    "rectifier-open", key, How.OPEN, "rectifier @ open", n -> n.dropperOhms = FiringFaults.OPEN_OHMS));
-            faults.add(fault(
-                            "rectifier-shorted",
-                            key,
-                            How.SHORTED,
-                            "rectifier @ shorted",
-                            n -> n.reverseVolts = ReverseHalf.ZENER_VOLTS)
-                    .saying(
-                            "The dropper carries the other half cycle too, and the zener conducts it forwards: the supply"
-                                    + " then stands at " + Said.volts(-ReverseHalf.ZENER_VOLTS)
-                                    + " (common practice), and the ramp begins from below zero."));
-            return;
+            singleRectifier("clip.rectifier");
+        } else {
+            supplyBridge("clip.rectifier", clip);
         }
+    }
+
+    private void singleRectifier(String key) {
+        faults.add(fault(
+                "rectifier-open", key, How.OPEN, "rectifier @ open", n -> n.dropperOhms = FiringFaults.OPEN_OHMS));
+        faults.add(fault(
+                        "rectifier-shorted",
+                        key,
+                        How.SHORTED,
+                        "rectifier @ shorted",
+                        n -> n.reverseVolts = ReverseHalf.ZENER_VOLTS)
+                .saying("The dropper carries the other half cycle too, and the zener conducts it forwards: the supply"
+                        + " then stands at " + Said.volts(-ReverseHalf.ZENER_VOLTS)
+                        + " (common practice), and the ramp begins from below zero."));
+    }
+
+    private void supplyBridge(String key, ClipSupply clip) {
         faults.add(fault("rectifier-open", key, How.OPEN, "one diode of the supply's bridge @ open", n -> {})
                 .wired(design -> suppliedInOneHalf(design, Rectifier.BRIDGE.diodesInPath())));
         String shorted = "one diode of the supply's bridge @ shorted";

@@ -71,13 +71,7 @@ final class HalfCycleRun {
         stepper.start(conducting ? firing.conductingWave(end) : wave, mode, rampVolts, fluxAmps);
         supply.zener(false, stepper.clips(), 0);
         for (int events = 0; ; events++) {
-            if (events > MOST_EVENTS) {
-                throw new RefusedCircuit(
-                        "trigger.device",
-                        "the circuit switches more than " + MOST_EVENTS
-                                + " times within one half cycle, too often to be"
-                                + " followed. Check the device's valley point, or make ramp.capacitor larger.");
-            }
+            refuseBeyondCounting(events);
             double from = stepper.seconds();
             boolean clippedBefore = stepper.clips();
             boolean returning = from < returns;
@@ -96,6 +90,21 @@ final class HalfCycleRun {
             }
         }
         supply.end(stepper.clips(), end);
+        keepFor(end);
+    }
+
+    private static void refuseBeyondCounting(int events) {
+        if (events > MOST_EVENTS) {
+            throw new RefusedCircuit(
+                    "trigger.device",
+                    "the circuit switches more than " + MOST_EVENTS
+                            + " times within one half cycle, too often to be"
+                            + " followed. Check the device's valley point, or make ramp.capacitor larger.");
+        }
+    }
+
+    /** What this half cycle, which ends so late, hands on to the next one. */
+    private void keepFor(double end) {
         mode = stepper.mode();
         rampVolts = stepper.rampVolts();
         fluxAmps = stepper.fluxAmps();

@@ -1,5 +1,6 @@
 package clipramp.firing;
 
+import clipramp.engine.LineWave;
 import java.util.ArrayList;
 import java.util.List;
 
@@ -15,18 +16,18 @@ final class LoadHalves {
         if (lag == 0 || firing.timing().isWholePeriods()) {
             return halves;
         }
+        return sortedByLoad(firing.line(), halves);
+    }
+
+    private static List<HalfCycle> sortedByLoad(LineWave line, List<HalfCycle> halves) {
         int count = halves.size();
         List<List<Pulse>> early = lists(count);
         List<List<Pulse>> own = lists(count);
         List<List<Pulse>> late = lists(count);
         for (int i = 0; i < count; i++) {
             HalfCycle half = halves.get(i);
-            double start = (half.positive()
-                    ? firing.line().positiveStartRad()
-                    : firing.line().negativeStartRad() - Math.PI);
-            double end = half.positive()
-                    ? firing.line().negativeStartRad()
-                    : firing.line().positiveStartRad() + Math.PI;
+            double start = half.positive() ? line.positiveStartRad() : line.negativeStartRad() - Math.PI;
+            double end = half.positive() ? line.negativeStartRad() : line.positiveStartRad() + Math.PI;
             for (Pulse pulse : half.pulses()) {
                 if (pulse.startRad() >= end) {
                     early.get((i + 1) % count).add(moved(pulse, -Math.PI));

@@ -7,6 +7,7 @@ import clipramp.fit.Fitted.Knowledge;
 import clipramp.spread.Watch;
 import clipramp.units.Unit;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.Comparator;
 import java.util.List;
 import java.util.OptionalDouble;
@@ -54,12 +55,8 @@ public final class Fit {
         double squares = estimate.squares();
         double chance = chance(squares, freedom);
         double widened = chance < UNLIKELY ? Math.max(1, Math.sqrt(squares / freedom)) : 1;
-        int used = 0;
-        for (int i = 0; i < problem.readingCount(); i++) {
-            used += estimate.used()[i] ? 1 : 0;
-        }
-        int[] active = problem.active();
-        double[] information = information(estimate, active.length);
+        int active = problem.active().length;
+        double[] information = information(estimate, active);
         return new FitResult(
                 readings,
                 values(problem, estimate, widened),
@@ -68,16 +65,24 @@ public final class Fit {
                 residuals(problem, estimate, freedom),
                 new Quality(
                         readings.count(),
-                        used,
+                        used(problem, estimate),
                         squares,
                         freedom,
                         chance,
                         widened,
-                        (int) java.util.Arrays.stream(information)
+                        (int) Arrays.stream(information)
                                 .filter(i -> i >= TELLING)
                                 .count(),
-                        active.length,
+                        active,
                         condition(information)));
+    }
+
+    private static int used(BenchProblem problem, Estimate estimate) {
+        int used = 0;
+        for (int i = 0; i < problem.readingCount(); i++) {
+            used += estimate.used()[i] ? 1 : 0;
+        }
+        return used;
     }
 
     /** How often good readings scatter more than that, 0..1. */
@@ -89,38 +94,44 @@ public final class Fit {
         List<Fitted> values = new ArrayList<>();
         double[] z = problem.wide(estimate.point());
         double[] kept = new double[z.length];
-        java.util.Arrays.fill(kept, 1);
+        Arrays.fill(kept, 1);
         int[] active = problem.active();
         for (int c = 0; c < active.length; c++) {
             kept[active[c]] = Math.sqrt(estimate.covariance().getEntry(c, c));
         }
         for (int k = 0; k < z.length; k++) {
-            Unknown unknown = problem.unknowns().get(k);
-            double left = Math.min(1, kept[k] * widened);
-            double reach = Accuracy.SIGMAS * left;
-            double from = unknown.at(z[k] - reach);
-            double to = unknown.at(z[k] + reach);
-            Knowledge knowledge = Knowledge.of(left);
-            values.add(new Fitted(
-                    unknown.path(),
-                    unknown.name(),
-                    unknown.unit(),
-                    unknown.nominal(),
-                    unknown.low(),
-                    unknown.high(),
-                    unknown.assumed(),
-                    unknown.at(z[k]),
-                    from,
-                    to,
-                    left,
-                    knowledge,
-                    Fitted.within(unknown.low(), unknown.high(), from, to, knowledge)));
+            values.add(fitted(problem.unknowns().get(k), z[k], Math.min(1, kept[k] * widened)));
         }
         return values;
     }
 
+    /**
+     * @param z where the unknown was found, prior standard deviations
+     * @param left how much of its prior deviation is left, 0..1
+     */
+    private static Fitted fitted(Unknown unknown, double z, double left) {
+        double reach = Accuracy.SIGMAS * left;
+        double from = unknown.at(z - reach);
+        double to = unknown.at(z + reach);
+        Knowledge knowledge = Knowledge.of(left);
+        return new Fitted(
+                unknown.path(),
+                unknown.name(),
+                unknown.unit(),
+                unknown.nominal(),
+                unknown.low(),
+                unknown.high(),
+                unknown.assumed(),
+                unknown.at(z),
+                from,
+                to,
+                left,
+                knowledge,
+                Fitted.within(unknown.low(), unknown.high(), from, to, knowledge));
+    }
+
     private static List<String> untouched(BenchProblem problem) {
-        List<Integer> active = java.util.Arrays.stream(problem.active()).boxed().toList();
+        List<Integer> active = Arrays.stream(problem.active()).boxed().toList();
         List<String> paths = new ArrayList<>();
         for (int k = 0; k < problem.unknowns().size(); k++) {
             if (!active.contains(k)) {
@@ -158,12 +169,12 @@ public final class Fit {
         RealMatrix unit = estimate.covariance().getSubMatrix(0, count - 1, 0, count - 1);
         RealMatrix even = unit.add(unit.transpose()).scalarMultiply(0.5);
         double[] left = new EigenDecomposition(even).getRealEigenvalues();
-        return java.util.Arrays.stream(left).map(l -> 1 / l - 1).toArray();
+        return Arrays.stream(left).map(l -> 1 / l - 1).toArray();
     }
 
     private static OptionalDouble condition(double[] information) {
-        double most = java.util.Arrays.stream(information).max().orElse(0);
-        double least = java.util.Arrays.stream(information).min().orElse(0);
+        double most = Arrays.stream(information).max().orElse(0);
+        double least = Arrays.stream(information).min().orElse(0);
         return least > most * 1e-12 && least > 1e-6
                 ? OptionalDouble.of(Math.sqrt(most / least))
                 : OptionalDouble.empty();
@@ -178,41 +189,47 @@ public final class Fit {
     }
 
     private static Residual residual(BenchProblem problem, Estimate estimate, int freedom, int i) {
+        Oddity oddity = new Oddity(estimate.residual()[i], estimate.studentised(i, freedom), estimate.used()[i]);
         BenchLine line = problem.line(i);
-        boolean belongs = estimate.used()[i];
-        double deviations = estimate.studentised(i, freedom);
-        double off = estimate.residual()[i];
         if (i < problem.readingCount()) {
-            Reading reading = problem.reading(i);
-            double shown = reading.value() - off * problem.deviation(i);
-            Meter meter = reading.meter();
-            return new Residual(
-                    line.line(),
-                    reading.column(),
-                    meter.words(),
-                    meter.unit(),
-                    reading.value(),
-                    shown,
-                    deviations,
-                    belongs);
+            return oddity.of(line, problem.reading(i), problem.deviation(i));
         }
-        if (problem.observed().get(i).reading() == Observed.SETTING) {
-            Setting setting = line.setting();
+        return problem.observed().get(i).reading() == Observed.SETTING
+                ? oddity.of(line, line.setting())
+                : oddity.of(line, line.lineVolts().orElseThrow());
+    }
+
+    /**
+     * How odd one of the things observed is beside the fitted unit.
+     *
+     * @param off how far it lies from what the unit would show, in its own deviations
+     * @param studentised the same, by what a fit without it leaves room for
+     * @param belongs whether it was used
+     */
+    private record Oddity(double off, double studentised, boolean belongs) {
+        Residual of(BenchLine line, Reading reading, double deviation) {
+            Meter meter = reading.meter();
+            return told(line, reading.column(), meter.words(), meter.unit(), reading.value(), deviation);
+        }
+
+        Residual of(BenchLine line, Setting setting) {
             boolean knob = setting.kind() == Setting.Kind.KNOB;
-            double shown = setting.value() - off * setting.accuracy().deviation(setting.value());
-            return new Residual(
-                    line.line(),
+            return told(
+                    line,
                     setting.column(),
                     knob ? "knob position" : "ramp resistance",
                     knob ? Unit.FRACTION : Unit.OHM,
                     setting.value(),
-                    shown,
-                    deviations,
-                    belongs);
+                    setting.accuracy().deviation(setting.value()));
         }
-        BenchLine.LineVolts volts = line.lineVolts().orElseThrow();
-        double shown = volts.volts() - off * volts.accuracy().deviation(volts.volts());
-        return new Residual(
-                line.line(), volts.column(), "line voltage", Unit.VOLT, volts.volts(), shown, deviations, belongs);
+
+        Residual of(BenchLine line, BenchLine.LineVolts volts) {
+            double deviation = volts.accuracy().deviation(volts.volts());
+            return told(line, volts.column(), "line voltage", Unit.VOLT, volts.volts(), deviation);
+        }
+
+        private Residual told(BenchLine line, String column, String what, Unit unit, double value, double deviation) {
+            return new Residual(line.line(), column, what, unit, value, value - off * deviation, studentised, belongs);
+        }
     }
 }

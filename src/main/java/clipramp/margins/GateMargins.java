@@ -113,35 +113,27 @@ final class GateMargins {
         String at25 =
                 "at " + Say.celsius(need.celsius()) + (need.extended() ? " (extended beyond the sheet's points)" : "");
         String held = "gate held at V_GT " + Say.volts(need.volts()) + " " + at25 + shuntText(need.volts());
+        if (kind == MarginKind.GATE_TIME && Double.isNaN(demand)) {
+            return Finding.missing(kind, "any condition", "the profile states no thyristor.device.gate.turn-on");
+        }
         return switch (kind) {
-            case GATE_PEAK_CURRENT ->
-                new Finding(
-                        at.words(),
-                        demand,
-                        pulse.peakGateAmps(),
-                        kind.sense(),
-                        Say.number(design.gate().overdrive()) + " x " + Say.amps(need.amps()) + " = " + Say.amps(demand)
-                                + " wanted; " + held + " gets " + Say.amps(pulse.peakGateAmps()));
-            case GATE_TIME ->
-                Double.isNaN(demand)
-                        ? Finding.missing(kind, "any condition", "the profile states no thyristor.device.gate.turn-on")
-                        : new Finding(
-                                at.words(),
-                                demand,
-                                pulse.aboveTriggerSeconds(),
-                                kind.sense(),
-                                held + ": i_G >= I_GT " + Say.amps(need.amps()) + " for "
-                                        + Say.seconds(pulse.aboveTriggerSeconds()) + ", t_gt " + Say.seconds(demand));
-            default ->
-                new Finding(
-                        at.words(),
-                        demand,
-                        pulse.gateCoulombs(),
-                        kind.sense(),
-                        Say.amps(need.amps()) + " x "
-                                + Say.seconds(design.gate().chargeSeconds()) + " = "
-                                + Say.coulombs(demand) + " wanted; " + held + " gets "
-                                + Say.coulombs(pulse.gateCoulombs()));
+            case GATE_PEAK_CURRENT -> {
+                String formula = Say.number(design.gate().overdrive()) + " x " + Say.amps(need.amps()) + " = "
+                        + Say.amps(demand) + " wanted; " + held + " gets " + Say.amps(pulse.peakGateAmps());
+                yield new Finding(at.words(), demand, pulse.peakGateAmps(), kind.sense(), formula);
+            }
+            case GATE_TIME -> {
+                double offered = pulse.aboveTriggerSeconds();
+                String formula = held + ": i_G >= I_GT " + Say.amps(need.amps()) + " for " + Say.seconds(offered)
+                        + ", t_gt " + Say.seconds(demand);
+                yield new Finding(at.words(), demand, offered, kind.sense(), formula);
+            }
+            default -> {
+                String formula = Say.amps(need.amps()) + " x "
+                        + Say.seconds(design.gate().chargeSeconds()) + " = " + Say.coulombs(demand) + " wanted; " + held
+                        + " gets " + Say.coulombs(pulse.gateCoulombs());
+                yield new Finding(at.words(), demand, pulse.gateCoulombs(), kind.sense(), formula);
+            }
         };
     }
 

@@ -9,6 +9,7 @@ import clipramp.margins.LineCheck.Standing;
 import clipramp.power.LineCurrent;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.OptionalInt;
 
@@ -58,21 +59,27 @@ final class LineRules {
         } else {
             rules.add(classA());
         }
+        bySize().ifPresent(rules::add);
+        return rules;
+    }
+
+    private Optional<Rule> bySize() {
         if (fullWatts <= LineCheck.SMALL_WATTS) {
-            rules.add(free(
+            return Optional.of(free(
                     "small",
                     "small equipment",
                     "Up to " + Say.watts(LineCheck.SMALL_WATTS) + " no class but C has limits; this load takes "
                             + Say.watts(fullWatts) + "."));
-        } else if (fullWatts > LineCheck.LARGE_WATTS) {
-            rules.add(free(
+        }
+        if (fullWatts > LineCheck.LARGE_WATTS) {
+            return Optional.of(free(
                     "professional",
                     "professional equipment",
                     "Professional equipment above " + Say.watts(LineCheck.LARGE_WATTS)
-                            + " has no limits here; this load" + " takes " + Say.watts(fullWatts)
+                            + " has no limits here; this load takes " + Say.watts(fullWatts)
                             + ". Anything that is not professional has."));
         }
-        return rules;
+        return Optional.empty();
     }
 
     private static Rule free(String id, String name, String text) {

@@ -25,6 +25,16 @@ final class ThyristorMargins {
     }
 
     List<Margin> all() {
+        List<Margin> margins = new ArrayList<>(sheetRatings());
+        margins.add(junction());
+        if (recovers()) {
+            margins.add(turnOff());
+        }
+        margins.addAll(new SurgeMargins(bench).all());
+        return margins;
+    }
+
+    private List<Margin> sheetRatings() {
         List<Margin> margins = new ArrayList<>();
         margins.add(Ceiling.over(
                 MarginKind.BLOCKING_VOLTAGE,
@@ -50,11 +60,6 @@ final class ThyristorMargins {
                     at -> bench.highestLoad(at).thyristorMeanAmps(),
                     Say::amps));
         }
-        margins.add(junction());
-        if (recovers()) {
-            margins.add(turnOff());
-        }
-        margins.addAll(new SurgeMargins(bench).all());
         return margins;
     }
 

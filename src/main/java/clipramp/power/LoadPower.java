@@ -4,7 +4,6 @@ import clipramp.circuit.Condition;
 import clipramp.circuit.Design;
 import clipramp.circuit.Load;
 import clipramp.circuit.Stage;
-import clipramp.circuit.ThyristorDevice.OnState;
 import clipramp.engine.LineWave;
 import clipramp.firing.Solution;
 import java.util.ArrayList;
@@ -141,103 +140,13 @@ public final class LoadPower {
 
     private static LoadResult resistive(Design design, Condition condition, Firings firings) {
         ResistorCurrent path = new ResistorCurrent(design, condition);
-        List<HalfCycleCurrent> currents = new ArrayList<>();
+        ResistorTotals totals = new ResistorTotals(firings.halves());
         for (ActingPulses.Slot slot : firings.slots()) {
-            currents.add(
-                    slot.firingRad().isEmpty() || blocked(design, slot)
-                            ? HalfCycleCurrent.NONE
-                            : path.firedAt(slot.positive(), slot.firingRad().getAsDouble()));
+            boolean conducts = slot.firingRad().isPresent() && !blocked(design, slot);
+            totals.add(
+                    slot,
+                    conducts ? path.firedAt(slot.positive(), slot.firingRad().getAsDouble()) : HalfCycleCurrent.NONE);
         }
-        return summed(design, condition, firings.halves(), firings.slots(), currents);
-    }
-
-    private static LoadResult summed(
-            Design design,
-            Condition condition,
-            int halfCount,
-            List<ActingPulses.Slot> slots,
-            List<HalfCycleCurrent> currents) {
-        double ohms = design.load().resistanceOhms();
-        double span = slots.size() * Math.PI;
-        Means forward = new Means();
-        Means backward = new Means();
-        double[] halfSquare = new double[halfCount];
-        int[] halfSlots = new int[halfCount];
-        double conduction = 0;
-        int conducting = 0;
-        for (int i = 0; i < slots.size(); i++) {
-            ActingPulses.Slot slot = slots.get(i);
-            HalfCycleCurrent current = currents.get(i);
-            (slot.positive() ? forward : backward).add(current);
-            halfSquare[slot.index()] += current.squareAmpRad();
-            halfSlots[slot.index()]++;
-            if (design.stage().isFullWave() || slot.positive()) {
-                conduction += current.conductionRad();
-                conducting++;
-            }
-        }
-        double meanSquare = (forward.square + backward.square) / span;
-        double rms = Math.sqrt(meanSquare);
-        double mean = (forward.charge + backward.charge) / span;
-        double peak = Math.max(forward.peak, backward.peak);
-        List<Double> halfWatts = new ArrayList<>();
-        for (int half = 0; half < halfCount; half++) {
-            halfWatts.add(halfSquare[half] / (halfSlots[half] * Math.PI) * ohms);
-        }
-        Optional<HalfCycleCurrent> first =
-                currents.stream().filter(HalfCycleCurrent::flows).findFirst();
-        Means one = worseThyristor(design, forward, backward);
-        OnState onState = design.thyristor().device().onState();
-        double oneMean = one.charge / span;
-        double oneRms = Math.sqrt(one.square / span);
-        double watts = meanSquare * ohms;
-        double lineRms = condition.lineVolts() * design.line().rmsFactor();
-        return new LoadResult(
-                watts,
-                watts / fullWatts(design, condition),
-                rms * ohms,
-                rms,
-                mean,
-                peak,
-                (forward.charge - backward.charge) / span,
-                rms > 0 ? rms / mean : Double.NaN,
-                rms > 0 ? peak / rms : Double.NaN,
-                rms > 0 ? watts / (lineRms * rms) : Double.NaN,
-                conducting == 0 ? 0 : conduction / conducting,
-                oneMean,
-                oneRms,
-                onState.thresholdVolts() * oneMean + onState.slopeOhms() * oneRms * oneRms,
-                halfWatts,
-                first.stream().mapToDouble(HalfCycleCurrent::fromRad).findFirst(),
-                first.stream().mapToDouble(HalfCycleCurrent::toRad).findFirst(),
-                0,
-                slots.size(),
-                true,
-                OptionalDouble.empty());
-    }
-
-    /** The thyristor that carries more: one carries everything but where two stand in inverse parallel. */
-    private static Means worseThyristor(Design design, Means forward, Means backward) {
-        if (design.stage() == Stage.INVERSE_PARALLEL) {
-            return forward.square >= backward.square ? forward : backward;
-        }
-        Means both = new Means();
-        both.charge = forward.charge + backward.charge;
-        both.square = forward.square + backward.square;
-        both.peak = Math.max(forward.peak, backward.peak);
-        return both;
-    }
-
-    /** Sums over the half cycles of one polarity. */
-    private static final class Means {
-        private double charge;
-        private double square;
-        private double peak;
-
-        void add(HalfCycleCurrent current) {
-            charge += current.chargeAmpRad();
-            square += current.squareAmpRad();
-            peak = Math.max(peak, current.peakAmps());
-        }
+        return totals.result(design, condition);
     }
 }

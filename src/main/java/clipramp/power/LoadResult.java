@@ -59,47 +59,6 @@ public record LoadResult(
         halfWatts = List.copyOf(halfWatts);
     }
 
-    /** A load whose current needs no further telling: nothing missed, no light. */
-    public LoadResult(
-            double watts,
-            double fraction,
-            double rmsVolts,
-            double rmsAmps,
-            double meanAmps,
-            double peakAmps,
-            double dcAmps,
-            double formFactor,
-            double crestFactor,
-            double powerFactor,
-            double conductionRad,
-            double thyristorMeanAmps,
-            double thyristorRmsAmps,
-            double thyristorWatts,
-            List<Double> halfWatts) {
-        this(
-                watts,
-                fraction,
-                rmsVolts,
-                rmsAmps,
-                meanAmps,
-                peakAmps,
-                dcAmps,
-                formFactor,
-                crestFactor,
-                powerFactor,
-                conductionRad,
-                thyristorMeanAmps,
-                thyristorRmsAmps,
-                thyristorWatts,
-                halfWatts,
-                OptionalDouble.empty(),
-                OptionalDouble.empty(),
-                0,
-                2,
-                true,
-                OptionalDouble.empty());
-    }
-
     /** The same with a filament's light. */
     LoadResult withLight(double newFraction, double newLightShare) {
         return new LoadResult(

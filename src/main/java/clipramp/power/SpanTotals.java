@@ -3,9 +3,6 @@ package clipramp.power;
 import clipramp.circuit.Condition;
 import clipramp.circuit.Design;
 import clipramp.circuit.Line;
-import clipramp.circuit.Stage;
-import clipramp.circuit.ThyristorDevice.OnState;
-import java.util.ArrayList;
 import java.util.List;
 
 /** Sums up the stretches of a load's current into what load and thyristor get. */
@@ -27,6 +24,10 @@ final class SpanTotals {
     private static final class Duty {
         private double charge;
         private double square;
+
+        CurrentSums.Polarity sums() {
+            return new CurrentSums.Polarity(charge, square);
+        }
     }
 
     private SpanTotals(Design design, Condition condition, LoadPeriod period) {
@@ -87,51 +88,18 @@ final class SpanTotals {
     }
 
     private LoadResult result(int halves, List<ActingPulses.Slot> slots) {
-        double span = period.spanRad();
-        double ohms = design.load().resistanceOhms();
-        double rms = Math.sqrt(square / span);
-        double mean = charge / span;
-        double watts = square / span * ohms;
-        double lineRms = condition.lineVolts() * design.line().rmsFactor();
-        double lineAmps = Math.sqrt((forward.square + backward.square) / span);
-        boolean both = design.stage().isFullWave();
-        OnState onState = design.thyristor().device().onState();
-        boolean pair = design.stage() == Stage.INVERSE_PARALLEL;
-        Duty one = pair ? (forward.square >= backward.square ? forward : backward) : sum();
-        double oneMean = one.charge / span;
-        double oneSquare = one.square / span;
-        return new LoadResult(
-                watts,
-                watts / FullPower.watts(design, condition),
-                Math.sqrt(squareVolts / span),
-                rms,
-                mean,
-                peak,
-                (forward.charge - backward.charge) / span,
-                rms > 0 ? rms / mean : Double.NaN,
-                rms > 0 ? peak / rms : Double.NaN,
-                lineAmps > 0 ? watts / (lineRms * lineAmps) : Double.NaN,
-                conduction / (period.halfCycles() * (both ? 1 : 0.5)),
-                oneMean,
-                Math.sqrt(oneSquare),
-                onState.thresholdVolts() * oneMean + onState.slopeOhms() * oneSquare,
-                halfWatts(halves, slots, ohms),
-                period.firedRad(),
-                period.extinctionRad(),
-                period.missedHalves(),
-                period.halfCycles(),
-                period.letsGo(),
-                java.util.OptionalDouble.empty());
+        CurrentSums sums = new CurrentSums(charge, square, peak, forward.sums(), backward.sums());
+        double halfCyclesThatMayConduct = period.halfCycles() * (design.stage().isFullWave() ? 1 : 0.5);
+        return sums.result(
+                design,
+                condition,
+                period,
+                Math.sqrt(squareVolts / period.spanRad()),
+                conduction / halfCyclesThatMayConduct,
+                halfWatts(halves, slots));
     }
 
-    private Duty sum() {
-        Duty sum = new Duty();
-        sum.charge = forward.charge + backward.charge;
-        sum.square = forward.square + backward.square;
-        return sum;
-    }
-
-    private List<Double> halfWatts(int halves, List<ActingPulses.Slot> slots, double ohms) {
+    private List<Double> halfWatts(int halves, List<ActingPulses.Slot> slots) {
         double[] squares = new double[halves];
         int[] counts = new int[halves];
         for (int half = 0; half < halfSquare.length; half++) {
@@ -139,10 +107,6 @@ final class SpanTotals {
             squares[index] += halfSquare[half];
             counts[index]++;
         }
-        List<Double> watts = new ArrayList<>();
-        for (int index = 0; index < halves; index++) {
-            watts.add(counts[index] == 0 ? 0 : squares[index] / (counts[index] * Math.PI) * ohms);
-        }
-        return watts;
+        return CurrentSums.halfWatts(squares, counts, design.load().resistanceOhms());
     }
 }

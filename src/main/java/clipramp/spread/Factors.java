@@ -14,6 +14,7 @@ import clipramp.spread.Factor.Law;
 import clipramp.spread.Factor.Slot;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.function.ToDoubleFunction;
 
 /** Every toleranced value of a design, every figure of its devices that has limits, line and temperature. */
 public final class Factors {
@@ -119,38 +120,40 @@ public final class Factors {
         double gateOhms = ProgrammableDevice.gateOhms(trigger);
         part("trigger.upper", "upper divider resistor", trigger.upper(), (u, v) -> u.upperOhms = v);
         part("trigger.lower", "lower divider resistor", trigger.lower(), (u, v) -> u.lowerOhms = v);
-        add(
+        device(
                 "trigger.device.offset",
                 "offset voltage",
-                Kind.DEVICE,
-                ProgrammableDevice.offsetVolts(device, gateOhms, Characteristic::lowest),
-                ProgrammableDevice.offsetVolts(device, gateOhms, Characteristic::nominal),
-                ProgrammableDevice.offsetVolts(device, gateOhms, Characteristic::highest),
-                Law.THREE_POINT,
+                pick -> ProgrammableDevice.offsetVolts(device, gateOhms, pick),
                 (u, v) -> u.emitterDropVolts = v);
-        add(
+        device(
                 "trigger.device.peak-current",
                 "peak-point current",
-                Kind.DEVICE,
-                ProgrammableDevice.amps(device.peakCurrentAmps(), gateOhms, Characteristic::lowest),
-                ProgrammableDevice.amps(device.peakCurrentAmps(), gateOhms, Characteristic::nominal),
-                ProgrammableDevice.amps(device.peakCurrentAmps(), gateOhms, Characteristic::highest),
-                Law.THREE_POINT,
+                pick -> ProgrammableDevice.amps(device.peakCurrentAmps(), gateOhms, pick),
                 (u, v) -> u.peakCurrentAmps = v);
-        add(
+        device(
                 "trigger.device.valley-current",
                 "valley current",
-                Kind.DEVICE,
-                ProgrammableDevice.amps(device.valleyCurrentAmps(), gateOhms, Characteristic::lowest),
-                ProgrammableDevice.amps(device.valleyCurrentAmps(), gateOhms, Characteristic::nominal),
-                ProgrammableDevice.amps(device.valleyCurrentAmps(), gateOhms, Characteristic::highest),
-                Law.THREE_POINT,
+                pick -> ProgrammableDevice.amps(device.valleyCurrentAmps(), gateOhms, pick),
                 (u, v) -> u.valleyAmps = v);
         sheet(
                 "trigger.device.forward.voltage",
                 "forward voltage",
                 device.forwardVolts(),
                 (u, v) -> u.saturationVolts = v);
+    }
+
+    /** A figure of the device that follows its divider: its least, nominal and greatest by what is picked of the sheet's. */
+    private void device(
+            String path, String name, ToDoubleFunction<ToDoubleFunction<Characteristic>> figure, Slot slot) {
+        add(
+                path,
+                name,
+                Kind.DEVICE,
+                figure.applyAsDouble(Characteristic::lowest),
+                figure.applyAsDouble(Characteristic::nominal),
+                figure.applyAsDouble(Characteristic::highest),
+                Law.THREE_POINT,
+                slot);
     }
 
     private void outside(String path, String name, double low, double nominal, double high, Slot slot) {

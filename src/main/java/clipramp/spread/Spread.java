@@ -41,11 +41,7 @@ public final class Spread {
      */
     public static SpreadResult run(Design design, SpreadOptions options, Watch watch) {
         Lot lot = new Lot(design, Factors.of(design), options.law(), options.seed());
-        double[] positions = design.ramp().pot().isPresent()
-                ? IntStream.rangeClosed(0, KNOB_STEPS)
-                        .mapToDouble(i -> (double) i / KNOB_STEPS)
-                        .toArray()
-                : new double[] {0};
+        double[] positions = positions(design);
         double[] shares = Arrays.stream(positions)
                 .map(p -> WantedTest.share(design.ramp(), p))
                 .toArray();
@@ -74,6 +70,14 @@ public final class Spread {
                 judged.failures(),
                 more ? new VarianceShares(lot, middle, lotUnits).all() : List.of(),
                 more && wanted ? new Remedies(lot, lotUnits).all() : List.of());
+    }
+
+    private static double[] positions(Design design) {
+        return design.ramp().pot().isPresent()
+                ? IntStream.rangeClosed(0, KNOB_STEPS)
+                        .mapToDouble(i -> (double) i / KNOB_STEPS)
+                        .toArray()
+                : new double[] {0};
     }
 
     private static PositionSpread position(
@@ -129,23 +133,7 @@ public final class Spread {
     private static Judged judged(Lot lot, int units, Watch watch) {
         List<List<String>> failed = IntStream.range(0, units)
                 .parallel()
-                .mapToObj(number -> {
-                    if (watch.isCancelled()) {
-                        return List.<String>of();
-                    }
-                    UnitValues unit = lot.blank();
-                    lot.draw(number, unit);
-                    new UnitSolver(lot.design()).prepare(unit);
-                    Check check = Judge.check(
-                            DrawnDesign.of(lot.design(), unit),
-                            OptionalDouble.of(unit.lineVolts),
-                            OptionalDouble.of(unit.celsius));
-                    return check.margins().stream()
-                            .filter(margin -> margin.verdict() == Verdict.FAILS)
-                            .map(Margin::id)
-                            .distinct()
-                            .toList();
-                })
+                .mapToObj(number -> watch.isCancelled() ? List.<String>of() : failing(lot, number))
                 .toList();
         if (watch.isCancelled()) {
             return new Judged(0, 0, Map.of());
@@ -158,5 +146,19 @@ public final class Spread {
                 .forEach(entry -> shares.put(entry.getKey(), (double) entry.getValue() / units));
         int held = (int) failed.stream().filter(List::isEmpty).count();
         return new Judged(held, units, shares);
+    }
+
+    /** Margins that one unit of a lot fails, by their ids. */
+    private static List<String> failing(Lot lot, int number) {
+        UnitValues unit = lot.blank();
+        lot.draw(number, unit);
+        new UnitSolver(lot.design()).prepare(unit);
+        Check check = Judge.check(
+                DrawnDesign.of(lot.design(), unit), OptionalDouble.of(unit.lineVolts), OptionalDouble.of(unit.celsius));
+        return check.margins().stream()
+                .filter(margin -> margin.verdict() == Verdict.FAILS)
+                .map(Margin::id)
+                .distinct()
+                .toList();
     }
 }

@@ -95,7 +95,13 @@ public final class SampleChecks {
                 volts / ohms * 0.4,
                 volts / ohms * 0.7,
                 4.2,
-                List.of(volts * volts / ohms));
+                List.of(volts * volts / ohms),
+                OptionalDouble.empty(),
+                OptionalDouble.empty(),
+                0,
+                2,
+                true,
+                OptionalDouble.empty());
         return new OperatingPoint(OptionalDouble.of(position), solution, load);
     }
 
