@@ -23,15 +23,14 @@ public final class Draft {
     private final Workers workers;
     private final Workshop workshop;
     private final Recovery recovery;
-    private final Consumer<Trouble> troubles;
     private final Deque<Edit> edits = new ArrayDeque<>();
     private final List<Runnable> listeners = new ArrayList<>();
     private Optional<History<Sheet>> history = Optional.empty();
     private Optional<Path> file = Optional.empty();
     private String name = "";
     private String saved = "";
+    private final Errands errands;
     private boolean editing;
-    private boolean writing;
 
     /**
      * @param workers where work is done
@@ -43,7 +42,7 @@ public final class Draft {
         this.workers = workers;
         this.workshop = workshop;
         this.recovery = recovery;
-        this.troubles = troubles;
+        this.errands = new Errands(workers, troubles);
     }
 
     public Workshop workshop() {
@@ -80,13 +79,13 @@ public final class Draft {
 
     /** Whether something is being read or written. */
     public boolean isBusy() {
-        return editing || writing || !edits.isEmpty();
+        return editing || errands.isRunning() || !edits.isEmpty();
     }
 
     /** Reads a file and puts it on the desk. */
     public void open(Path path) {
         Path absolute = path.toAbsolutePath().normalize();
-        start(
+        errands.fetch(
                 "The design cannot be opened",
                 () -> {
                     DesignText text = DesignText.of(Source.of(absolute));
@@ -97,7 +96,7 @@ public final class Draft {
 
     /** Puts a design on the desk that was never saved: an example, a proposal. */
     public void openUnsaved(String title, String text) {
-        start(
+        errands.fetch(
                 "The design cannot be opened",
                 () -> {
                     Sheet sheet = workshop.read(DesignText.of(new Source(title, text)), Optional.empty());
@@ -109,7 +108,7 @@ public final class Draft {
 
     /** Puts a design on the desk that a search has found; {@code then} runs once it lies there. */
     public void take(Resized found, Runnable then) {
-        start(
+        errands.fetch(
                 "The design cannot be taken over",
                 () -> {
                     recovery.keep(Optional.empty(), found.sheet().text().text());
@@ -123,7 +122,7 @@ public final class Draft {
 
     /** Puts work on the desk that a window left behind when its process ended. */
     public void recover(Recovery.Left left) {
-        start(
+        errands.fetch(
                 "The work that was left cannot be read",
                 () -> {
                     String title = left.file()
@@ -135,28 +134,6 @@ public final class Draft {
                     return sheet;
                 },
                 sheet -> put(sheet, left.file(), "recovered", ""));
-    }
-
-    private interface SheetReading {
-        Sheet read() throws IOException;
-    }
-
-    private void start(String what, SheetReading reading, Consumer<Sheet> then) {
-        writing = true;
-        workers.writing().execute(() -> {
-            try {
-                Sheet sheet = reading.read();
-                workers.home().execute(() -> {
-                    writing = false;
-                    then.accept(sheet);
-                });
-            } catch (IOException | RuntimeException e) {
-                workers.home().execute(() -> {
-                    writing = false;
-                    troubles.accept(Trouble.of(what, e));
-                });
-            }
-        });
     }
 
     private void put(Sheet sheet, Optional<Path> belongs, String title, String savedText) {
@@ -270,37 +247,15 @@ public final class Draft {
             move.accept(h);
             String text = h.now().text().text();
             Optional<Path> belongs = file;
-            write("The unsaved work could not be kept", () -> recovery.keep(belongs, text), () -> {});
+            errands.run("The unsaved work could not be kept", () -> recovery.keep(belongs, text), () -> {});
             changed();
-        });
-    }
-
-    private interface Writing {
-        void write() throws IOException;
-    }
-
-    private void write(String what, Writing task, Runnable then) {
-        writing = true;
-        workers.writing().execute(() -> {
-            try {
-                task.write();
-                workers.home().execute(() -> {
-                    writing = false;
-                    then.run();
-                });
-            } catch (IOException | RuntimeException e) {
-                workers.home().execute(() -> {
-                    writing = false;
-                    troubles.accept(Trouble.of(what, e));
-                });
-            }
         });
     }
 
     /** Saves the design, whole or not at all. */
     public void save(Path target, Runnable then) {
         Path absolute = target.toAbsolutePath().normalize();
-        sheet().ifPresent(sheet -> write(
+        sheet().ifPresent(sheet -> errands.run(
                 "The design cannot be saved",
                 () -> {
                     WholeFile.write(absolute, sheet.text().text(), true);
@@ -316,11 +271,11 @@ public final class Draft {
 
     /** Writes any other file, such as a picture or the record, whole or not at all. */
     public void export(Path target, byte[] content, Runnable then) {
-        write("The file cannot be written", () -> WholeFile.write(target, out -> out.write(content), true), then);
+        errands.run("The file cannot be written", () -> WholeFile.write(target, out -> out.write(content), true), then);
     }
 
     /** Gives the unsaved work up. */
     public void abandon(Runnable then) {
-        write("The unsaved work could not be forgotten", recovery::forget, then);
+        errands.run("The unsaved work could not be forgotten", recovery::forget, then);
     }
 }
