@@ -140,18 +140,20 @@ final class FiringPart {
         Optional<Part> trimmer = trimmerKey.equals("ramp.trim-high")
                 ? ramp.trimmers().high()
                 : ramp.trimmers().low();
-        double apart = trimmer.isPresent() && part.isPresent() ? 1.05 : 0;
         if (trimmer.isEmpty()) {
             part.ifPresent(p -> sheet.beside(key, hang, x, y, text.ofResistor(key, p)));
         } else {
-            // Name and value apart: beside the zener there is room for no more.
-            part.ifPresent(p -> sheet.beside(key, hang, x, y - apart, twoLines(key, p)));
-            sheet.beside(trimmerKey, hang, x, y + apart, twoLines(trimmerKey, trimmer.get()));
+            boolean broken = hang == LEFT_OF;
+            double apart = part.isEmpty() ? 0 : broken ? 1.35 : 0.8;
+            part.ifPresent(p -> sheet.beside(key, hang, x, y - apart, brief(key, p, broken)));
+            sheet.beside(trimmerKey, hang, x, y + apart, brief(trimmerKey, trimmer.get(), broken));
         }
     }
 
-    private List<String> twoLines(String key, Part part) {
-        return List.of(text.name(key), QuantityText.format(part.value(), Unit.OHM));
+    /** Name and value; broken in two where the zener beside leaves no room for both in one line. */
+    private List<String> brief(String key, Part part, boolean broken) {
+        String value = QuantityText.format(part.value(), Unit.OHM);
+        return broken ? List.of(text.name(key), value) : List.of(text.name(key) + "  " + value);
     }
 
     private void potShunt(Optional<Part> shunt) {
