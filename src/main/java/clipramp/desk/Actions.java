@@ -21,6 +21,9 @@ interface Actions {
 
     void saveReadings(ReadingsTable table);
 
+    /** Takes a file that was dropped on the window: readings onto the Fit page, anything else as a design. */
+    void takeFile(Path file);
+
     /** Takes a proposed design over and shows a page of it. */
     void takeProposal(Resized found, Page page);
 
@@ -98,28 +101,31 @@ interface Actions {
 
     /** The pages of a window with a design, in the order of their tabs; Ctrl and a digit bring one up. */
     enum Page {
-        BENCH("Bench", 1),
-        LINE("Line current", 6),
-        FAULTS("Faults", 7),
-        SPREAD("Spread", 3),
-        SIZE("Size", 4),
-        FIT("Fit", 5),
-        RECORD("Record", 2);
+        BENCH("_Bench"),
+        LINE("_Line current"),
+        FAULTS("_Faults"),
+        SPREAD("_Spread"),
+        SIZE("Si_ze"),
+        FIT("Fi_t"),
+        RECORD("_Record");
 
-        private final String words;
-        private final int digit;
+        private final String menuWords;
 
-        Page(String words, int digit) {
-            this.words = words;
-            this.digit = digit;
+        Page(String menuWords) {
+            this.menuWords = menuWords;
         }
 
         String words() {
-            return words;
+            return menuWords.replace("_", "");
+        }
+
+        /** The words with a line under the letter that chooses the page in the menu. */
+        String menuWords() {
+            return menuWords;
         }
 
         int digit() {
-            return digit;
+            return ordinal() + 1;
         }
     }
 }

@@ -10,6 +10,7 @@ import clipramp.desk.model.Settings;
 import clipramp.figures.CircuitFigure;
 import clipramp.figures.Figure;
 import clipramp.figures.HarmonicsFigure;
+import clipramp.files.ReadingsTable;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.EnumMap;
@@ -44,6 +45,7 @@ final class DeskWindow {
     private final Late<ProposalPage> proposal;
     private final Late<BenchPage> bench;
     private final Late<SpreadPage> spread;
+    private final Late<FitPage> fit;
     private final Map<Page, Late<? extends PageView>> pages = new EnumMap<>(Page.class);
     private final Late<HeaderView> header;
     private final Late<PageTabs> tabs;
@@ -69,7 +71,8 @@ final class DeskWindow {
         pages.put(Page.LINE, new Late<>(() -> new LinePage(theme, model)));
         pages.put(Page.FAULTS, new Late<>(() -> new FaultsPage(theme, model)));
         pages.put(Page.SPREAD, spread);
-        pages.put(Page.FIT, new Late<>(() -> new FitPage(theme, model.draft(), model.fitting(), actions)));
+        this.fit = new Late<>(() -> new FitPage(theme, model.draft(), model.fitting(), actions));
+        pages.put(Page.FIT, fit);
         pages.put(Page.SIZE, new Late<>(() -> new SizePage(theme, model.draft(), model.resizing())));
         pages.put(
                 Page.RECORD,
@@ -126,7 +129,7 @@ final class DeskWindow {
         scene.setOnDragDropped(event -> {
             boolean files = event.getDragboard().hasFiles();
             if (files) {
-                actions.openFile(event.getDragboard().getFiles().get(0).toPath());
+                actions.takeFile(event.getDragboard().getFiles().get(0).toPath());
             }
             event.setDropCompleted(files);
             event.consume();
@@ -154,6 +157,12 @@ final class DeskWindow {
             Platform.runLater(bench()::begin);
         }
         mark();
+    }
+
+    /** Brings readings up where a unit is fitted to them. */
+    void showReadings(ReadingsTable readings) {
+        showPage(Page.FIT);
+        fit.get().load(readings);
     }
 
     private PageView view(Page of) {

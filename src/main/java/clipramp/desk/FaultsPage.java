@@ -13,40 +13,43 @@ import clipramp.units.RefusedQuantityException;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.IntPredicate;
+import java.util.stream.IntStream;
 import javafx.scene.control.Button;
 import javafx.scene.control.Label;
-import javafx.scene.control.ProgressBar;
-import javafx.scene.control.ScrollPane;
 import javafx.scene.control.TableColumn;
+import javafx.scene.control.TableRow;
 import javafx.scene.control.TableView;
+import javafx.scene.control.Tooltip;
 import javafx.scene.layout.BorderPane;
 import javafx.scene.layout.Region;
 import javafx.scene.layout.VBox;
+import org.jspecify.annotations.Nullable;
 
 /** Single faults and what follows from each; and backwards, which of them fit what was seen. */
 final class FaultsPage implements PageView {
-    /** Of the table's width: fault, fits, load gets, load, knob, and the test points. */
-    private static final double[] SHARES = {30, 6, 11, 6.5, 5.5, 7.3, 7.3, 8.3, 8.3, 7.6, 7.6};
+    /** In effective pixels behind the fault's name: fits, load gets, load, knob, and the test points. */
+    private static final double[] WIDTHS = {62, 144, 56, 56, 58, 58, 74, 74, 58, 58};
 
-    private static final double SCROLL_BAR = 16;
-    private static final double TABLE_SHARE = 0.44;
-    private static final double LEAST_TABLE = 220;
-    private static final double POINTS_FROM_WIDTH = 970;
+    private static final double LEAST_NAME = 230;
+    private static final double SCROLL_BAR = 18;
+    private static final double TABLE_SHARE = 0.48;
+    private static final double ROW = 25;
+    private static final double HEADS = 44;
+    private static final double LEAST_ROWS = 7;
 
     private final Theme theme;
     private final DeskModel model;
     private final LongRun<FaultRun.Asked, FaultRun.Answer> run;
     private final Button start = new Button("Work the faults out");
-    private final Button cancel = new Button("Cancel");
-    private final ProgressBar bar = new ProgressBar(0);
-    private final Label progress = Words.quiet("");
+    private final Label state = Words.quiet("");
     private final Label complaint = Words.wrapped("");
     private final SeenForm seen = new SeenForm(this::rank);
     private final Label heading = Words.quiet("");
     private final TableView<List<String>> table = new TableView<>();
     private final FaultDetail detail = new FaultDetail();
     private final VBox middle = new VBox();
-    private final BorderPane box = new BorderPane();
+    private final TwoColumns box;
     private List<Diagnosis.Candidate> shown = List.of();
     private boolean ranked;
     private Optional<FaultSheet> told = Optional.empty();
@@ -55,51 +58,51 @@ final class FaultsPage implements PageView {
         this.theme = theme;
         this.model = model;
         this.run = model.faults();
-        ask();
         table.setId("faults-table");
+        table.getStyleClass().add("two-line-heads");
+        table.setRowFactory(view -> new NamedRow());
         table.widthProperty().addListener(property -> columns());
         table.setAccessibleText("Faults, one a row; choosing one shows it below");
         table.getSelectionModel().selectedIndexProperty().addListener(property -> choose());
-        middle.getStyleClass().add("spread-middle");
         middle.setId("faults-middle");
         Label live = Words.wrapped(FaultSheet.LIVE);
         live.setId("faults-live");
         live.getStyleClass().add("notice");
-        middle.getChildren().addAll(live, heading, table, detail.node());
-        ScrollPane scroll = new ScrollPane(middle);
-        scroll.setFitToWidth(true);
-        scroll.setHbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);
-        scroll.setAccessibleText("Faults: table and detail; arrow keys scroll");
-        scroll.getStyleClass().add("record-scroll");
-        box.setCenter(scroll);
-        box.widthProperty().addListener(property -> arrange());
-        box.heightProperty().addListener(property -> arrange());
+        middle.getChildren().addAll(heading, table, detail.node());
+        box = new TwoColumns(theme, asked(), middle, "Faults: table and detail; arrow keys scroll");
+        box.begin(live);
+        box.node().heightProperty().addListener(property -> arrange());
         theme.onChange(this::arrange);
         run.onChange(this::refresh);
         model.onCondition(this::refresh);
         arrange();
     }
 
-    private void ask() {
+    /** A name that is cut off can be read whole where the pointer rests, as it stands in the detail below. */
+    private static final class NamedRow extends TableRow<List<String>> {
+        @Override
+        protected void updateItem(@Nullable List<String> item, boolean empty) {
+            super.updateItem(item, empty);
+            setTooltip(item == null || empty ? null : new Tooltip(item.get(0)));
+        }
+    }
+
+    private SidePanel asked() {
         start.setId("faults-start");
         start.setDefaultButton(true);
         start.setOnAction(event -> start());
-        cancel.setId("faults-cancel");
-        cancel.setOnAction(event -> run.cancel());
-        bar.setMaxWidth(Double.MAX_VALUE);
-        bar.setAccessibleText("Faults worked out");
-        bar.managedProperty().bind(bar.visibleProperty());
-        progress.managedProperty().bind(progress.textProperty().isNotEmpty());
-        progress.setId("faults-progress");
+        state.managedProperty().bind(state.textProperty().isNotEmpty());
+        state.setId("faults-state");
         complaint.setId("faults-complaint");
         complaint.getStyleClass().add("complaint");
         complaint.managedProperty().bind(complaint.textProperty().isNotEmpty());
-        box.setLeft(new SidePanel(start, cancel, bar, progress, seen.node(), complaint).node());
+        return new SidePanel(
+                start, new RunBar(run, "faults", "working the faults out").node(), state, seen.node(), complaint);
     }
 
     @Override
     public BorderPane node() {
-        return box;
+        return box.node();
     }
 
     /** The first time they are worked out unasked: it is a matter of a second. */
@@ -123,10 +126,7 @@ final class FaultsPage implements PageView {
 
     private void refresh() {
         start.setDisable(run.isRunning());
-        cancel.setDisable(!run.isRunning() || run.isEnding());
-        bar.setVisible(run.isRunning());
-        run.progress().ifPresent(now -> bar.setProgress(now.share().orElse(ProgressBar.INDETERMINATE_PROGRESS)));
-        progress.setText(words());
+        state.setText(words());
         Css.state(middle, "stale", isStale());
         run.answer().map(FaultRun.Answer::sheet).ifPresent(sheet -> {
             if (!told.equals(Optional.of(sheet))) {
@@ -141,9 +141,7 @@ final class FaultsPage implements PageView {
 
     private String words() {
         if (run.isRunning()) {
-            return run.isEnding()
-                    ? "Ending…"
-                    : run.progress().map(LongRun.Progress::words).orElse("Working them out…");
+            return "";
         }
         if (run.trouble().isPresent()) {
             return run.trouble().get().text();
@@ -202,31 +200,41 @@ final class FaultsPage implements PageView {
         told.ifPresent(sheet -> chosen().ifPresent(candidate -> detail.show(new FaultWords(sheet), candidate)));
     }
 
-    /** Where there is no room the test points stand in the detail only. */
+    /** Where there is no room the test points stand in the detail only; the fault's name takes what is left. */
     private void columns() {
-        if (table.getColumns().size() < SHARES.length) {
+        if (table.getColumns().size() <= WIDTHS.length) {
             return;
         }
-        boolean wide = box.getWidth() / theme.zoom() >= POINTS_FROM_WIDTH;
-        double all = 0;
-        for (int i = 0; i < SHARES.length; i++) {
-            boolean visible = i == FaultWords.FITS ? ranked : wide || i < FaultWords.POINTS_FROM;
-            table.getColumns().get(i).setVisible(visible);
-            all += visible ? SHARES[i] : 0;
-        }
         double room = table.getWidth() - SCROLL_BAR * theme.zoom();
-        for (int i = 0; i < SHARES.length; i++) {
+        boolean wide = room / theme.zoom() >= LEAST_NAME + width(i -> true);
+        IntPredicate shows = i -> i == FaultWords.FITS ? ranked : wide || i < FaultWords.POINTS_FROM;
+        for (int i = 0; i < table.getColumns().size(); i++) {
             TableColumn<List<String>, ?> column = table.getColumns().get(i);
-            column.setPrefWidth(Math.floor(room * SHARES[i] / all));
-            if (i <= FaultWords.FITS + 1 && !column.getStyleClass().contains("words-column")) {
+            column.setVisible(shows.test(i));
+            column.setPrefWidth(Math.floor(i == 0 ? room - width(shows) * theme.zoom() : WIDTHS[i - 1] * theme.zoom()));
+            boolean words = i == 0 || i == FaultWords.FITS + 1 || i == FaultWords.POINTS_FROM - 1;
+            if (words && !column.getStyleClass().contains("words-column")) {
                 column.getStyleClass().add("words-column");
             }
+            column.setText(Tables.unitBelow(FaultWords.HEADS.get(i)));
         }
     }
 
+    private static double width(IntPredicate shown) {
+        return IntStream.rangeClosed(1, WIDTHS.length)
+                .filter(shown)
+                .mapToDouble(i -> WIDTHS[i - 1])
+                .sum();
+    }
+
     private void arrange() {
+        double room = box.node().getHeight() * TABLE_SHARE;
+        double row = ROW * theme.zoom();
+        table.setFixedCellSize(row);
+        // Whole rows under the heads, so that none is cut through.
+        double rows = Math.max(LEAST_ROWS, Math.floor(room / row) - 2);
         table.setMinHeight(Region.USE_PREF_SIZE);
-        table.setPrefHeight(Math.max(LEAST_TABLE * theme.zoom(), box.getHeight() * TABLE_SHARE));
+        table.setPrefHeight(HEADS * theme.zoom() + rows * row + 2);
         columns();
     }
 }

@@ -5,6 +5,8 @@ import clipramp.desk.model.RecordMaker;
 import clipramp.desk.model.Recovery;
 import clipramp.desk.model.Trouble;
 import java.io.IOException;
+import java.nio.file.Path;
+import java.util.function.Consumer;
 
 /** Opens, saves and closes designs; unsaved work is asked about first. */
 final class FileActions {
@@ -20,8 +22,19 @@ final class FileActions {
         this.maker = maker;
     }
 
-    void open() {
-        whenSaved(() -> service.asks().toOpen(FileAsk.Kind.DESIGN).ifPresent(draft::open));
+    /**
+     * Asks for a file and opens it.
+     *
+     * @param readings takes a file of readings, which is no design
+     */
+    void open(Consumer<Path> readings) {
+        whenSaved(() -> service.asks().toOpen(FileAsk.Kind.DESIGN).ifPresent(file -> {
+            if (ReadingsActions.isReadings(file)) {
+                readings.accept(file);
+            } else {
+                draft.open(file);
+            }
+        }));
     }
 
     void recover(Recovery.Left work) {

@@ -16,9 +16,7 @@ import java.util.OptionalDouble;
 import javafx.scene.control.Button;
 import javafx.scene.control.CheckBox;
 import javafx.scene.control.Label;
-import javafx.scene.control.ScrollPane;
 import javafx.scene.control.TextField;
-import javafx.scene.layout.BorderPane;
 import javafx.scene.layout.FlowPane;
 import javafx.scene.layout.Region;
 import javafx.scene.layout.VBox;
@@ -29,15 +27,11 @@ final class FitPage implements PageView {
     private static final Expected AIR = Expected.within(Unit.CELSIUS, -60, 150).allowingBare();
     private static final Expected VOLTS = Expected.within(Unit.VOLT, 1, 2000).allowingBare();
 
-    /** Under this width in effective pixels. */
-    private static final double STACK_BELOW = 1000;
-
-    private final Theme theme;
     private final Draft draft;
     private final LongRun<Fitting.Asked, Fitting.Answer> run;
     private final Actions actions;
     private final FlowPane columns = new FlowPane();
-    private final TextField air = new TextField("25 degC");
+    private final TextField air = new TextField("25 °C");
     private final TextField volts = new TextField();
     private final Button start = new Button("Fit");
     private final Label complaint = Words.wrapped("");
@@ -47,24 +41,21 @@ final class FitPage implements PageView {
     private final FitView view = new FitView();
     private final SidePanel side = new SidePanel();
     private final VBox middle = new VBox();
-    private final VBox stacked = new VBox();
-    private final ScrollPane scroll = new ScrollPane();
-    private final BorderPane box = new BorderPane();
+    private final TwoColumns box;
     private Optional<Boolean> knob = Optional.empty();
     private Optional<Fitting.Answer> told = Optional.empty();
-    private Optional<Boolean> arranged = Optional.empty();
     private boolean typed;
 
     FitPage(Theme theme, Draft draft, LongRun<Fitting.Asked, Fitting.Answer> run, Actions actions) {
-        this.theme = theme;
         this.draft = draft;
         this.run = run;
         this.actions = actions;
         this.table = new BenchTable(complaint::setText, this::typed);
         ask();
         show();
+        box = new TwoColumns(theme, side, middle, "Readings and what they tell; arrow keys scroll");
+        box.scroll().setId("fit-scroll");
         run.onChange(this::refresh);
-        theme.onChange(this::arrange);
     }
 
     private void ask() {
@@ -110,35 +101,11 @@ final class FitPage implements PageView {
         FlowPane buttons = new FlowPane(open, paste, save, take);
         buttons.getStyleClass().add("flow-buttons");
         middle.getChildren().setAll(buttons, state, table.node(), view.node());
-        middle.getStyleClass().add("spread-middle");
-        scroll.setFitToWidth(true);
-        scroll.setHbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);
-        scroll.getStyleClass().add("record-scroll");
-        scroll.setId("fit-scroll");
-        scroll.setAccessibleText("Readings and what they tell; arrow keys scroll");
-        box.setCenter(scroll);
-        box.widthProperty().addListener(property -> arrange());
-        arrange();
-    }
-
-    /** The table needs its room: where there is little, what is asked stands over it and not beside it. */
-    private void arrange() {
-        boolean narrow = box.getWidth() > 0 && box.getWidth() / theme.zoom() < STACK_BELOW;
-        if (!arranged.equals(Optional.of(narrow))) {
-            arranged = Optional.of(narrow);
-            stacked.getChildren().clear();
-            side.node().setContent(narrow ? null : side.column());
-            if (narrow) {
-                stacked.getChildren().setAll(side.column(), middle);
-            }
-            scroll.setContent(narrow ? stacked : middle);
-            box.setLeft(narrow ? null : side.node());
-        }
     }
 
     @Override
     public Region node() {
-        return box;
+        return box.node();
     }
 
     @Override
@@ -171,7 +138,8 @@ final class FitPage implements PageView {
         }
     }
 
-    private void load(ReadingsTable read) {
+    /** Takes readings in place of what stands in the table. */
+    void load(ReadingsTable read) {
         table.sheet().load(read);
         table.draw();
         offer();

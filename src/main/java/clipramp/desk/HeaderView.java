@@ -11,6 +11,7 @@ import javafx.scene.control.Button;
 import javafx.scene.control.ComboBox;
 import javafx.scene.control.Hyperlink;
 import javafx.scene.control.Label;
+import javafx.scene.control.Tooltip;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.Region;
@@ -27,7 +28,8 @@ final class HeaderView {
     private final Button margins = new Button("Margins");
     private final ComboBox<String> condition = new ComboBox<>();
     private final HBox row = new HBox();
-    private final HBox heading = new HBox();
+    private final HBox under = new HBox();
+    private final Tooltip whole = new Tooltip();
     private final VBox box;
     private boolean filling;
 
@@ -53,14 +55,18 @@ final class HeaderView {
         HBox.setHgrow(gap, Priority.ALWAYS);
         row.getChildren().setAll(title, saved, gap, verdict, counts, margins, condition, cautions);
         row.getStyleClass().add("header");
-        heading.getStyleClass().add("header");
         for (Region fixed : List.of(saved, verdict, counts, margins, condition, cautions)) {
             fixed.setMinWidth(Region.USE_PREF_SIZE);
         }
-        note.getStyleClass().add("condition-note");
+        note.getStyleClass().add("quiet");
         note.setId("condition-note");
+        note.setWrapText(true);
+        note.setMinHeight(Region.USE_PREF_SIZE);
         note.setMaxWidth(Double.MAX_VALUE);
-        box = new VBox(row, note);
+        HBox.setHgrow(note, Priority.ALWAYS);
+        under.getStyleClass().add("condition-note");
+        under.getChildren().setAll(note);
+        box = new VBox(row, under);
         model.draft().onChange(this::refresh);
         model.onCondition(this::refresh);
         model.onJudgement(this::refreshVerdict);
@@ -93,18 +99,32 @@ final class HeaderView {
         counts.setManaged(!folded);
     }
 
-    /** Where there is no room for everything in one row, the title has one of its own. */
+    /** Where there is no room for everything in one row, the next tells whether it is saved, and the title is smaller. */
     private void stack(boolean narrow) {
-        boolean stacked = heading.getChildren().contains(title);
+        boolean stacked = under.getChildren().contains(saved);
+        Css.state(title, "narrow", narrow);
         if (narrow && !stacked) {
-            row.getChildren().removeAll(title, saved);
-            heading.getChildren().setAll(title, saved);
-            box.getChildren().add(0, heading);
+            row.getChildren().remove(saved);
+            under.getChildren().add(saved);
         } else if (!narrow && stacked) {
-            box.getChildren().remove(heading);
-            heading.getChildren().clear();
-            row.getChildren().addAll(0, List.of(title, saved));
+            under.getChildren().remove(saved);
+            row.getChildren().add(1, saved);
         }
+        refreshNote();
+    }
+
+    /** Under the title's row: what the condition means, and where there is little room whether it is saved. */
+    private void refreshNote() {
+        boolean narrow = under.getChildren().contains(saved);
+        String word = narrow ? "" : model.condition().word() + ": ";
+        model.draft()
+                .sheet()
+                .map(Sheet::design)
+                .ifPresent(design -> note.setText(word + model.condition().explained(design)));
+        boolean nominal = model.condition() == ViewCondition.NOMINAL;
+        note.setVisible(!nominal);
+        under.setVisible(!nominal || narrow);
+        under.setManaged(under.isVisible());
     }
 
     /** A word about what was done, until the design changes. */
@@ -118,14 +138,13 @@ final class HeaderView {
 
     private void show(Design design) {
         title.setText(design.title().isEmpty() ? "Untitled design" : design.title());
+        whole.setText(title.getText());
+        Tooltip.install(title, whole);
         saved.setText(model.draft().isDirty() ? "differs from saved" : "saved");
         filling = true;
         condition.setValue(model.condition().word());
         filling = false;
-        note.setText(model.condition().word() + ": " + model.condition().explained(design));
-        boolean nominal = model.condition() == ViewCondition.NOMINAL;
-        note.setVisible(!nominal);
-        note.setManaged(!nominal);
+        refreshNote();
     }
 
     private void refreshVerdict() {

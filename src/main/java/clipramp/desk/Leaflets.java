@@ -4,7 +4,6 @@ import clipramp.desk.Actions.Page;
 import clipramp.desk.model.Cautions;
 import clipramp.files.Licences;
 import java.util.Arrays;
-import java.util.Comparator;
 import java.util.List;
 import java.util.Locale;
 import java.util.stream.Collectors;
@@ -25,19 +24,24 @@ final class Leaflets {
             List.of("Knob: Home, End", "to the stops"),
             List.of("A value: Up, Down", "next preferred value"),
             List.of("A value: Enter, Escape", "take it, or back to what stands in the file"),
-            List.of("Ctrl+N, O, S", "new, open, save; with Shift+S save as"),
+            List.of("Faults: Up, Down", "the fault that is told in detail"),
+            List.of("Readings: Up, Down, Enter", "the cell above or below; Ctrl+V pastes a whole table"),
+            List.of("Any page: Tab, Shift+Tab", "to the next control, or back; Space presses it"),
+            List.of("Any page: Enter", "its heavy button: work out, draw, search, fit, save"),
+            List.of("Alt, or F10", "the menus"),
+            List.of("Ctrl+N, O, S, W", "new, open, save, close; with Shift+S save as"),
             List.of("Ctrl+Z, Ctrl+Shift+Z", "undo, redo"),
             List.of("Ctrl+1 … " + Page.values().length, pages()),
+            List.of("Ctrl+P", "the record, to be saved"),
             List.of("Ctrl+L", "look closer at the pulse, or back"),
             List.of("Ctrl++, −, 0", "zoom"),
             List.of("F1, F2", "these keys, mains safety"));
 
     private Leaflets() {}
 
-    /** The pages in the order of their digits. */
+    /** The pages in the order of their tabs and digits. */
     private static String pages() {
         return Arrays.stream(Page.values())
-                .sorted(Comparator.comparingInt(Page::digit))
                 .map(page -> page.words().toLowerCase(Locale.ROOT))
                 .collect(Collectors.joining(", "));
     }

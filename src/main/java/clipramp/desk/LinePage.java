@@ -52,6 +52,7 @@ final class LinePage implements PageView {
         orders = new TableView<>();
         orders.setColumnResizePolicy(TableView.CONSTRAINED_RESIZE_POLICY_ALL_COLUMNS);
         orders.setId("line-orders");
+        orders.getStyleClass().add("two-line-heads");
         binding.setId("line-binding");
         binding.getStyleClass().add("verdict");
         rules.setId("line-rules");
@@ -119,6 +120,7 @@ final class LinePage implements PageView {
             HarmonicsFigure shown = new HarmonicsFigure(check, now.setting());
             figure.show(shown);
             Tables.fill(orders, new NumberTable(HEADS, shown.numbers().rows()));
+            orders.getColumns().forEach(column -> column.setText(Tables.unitBelow(column.getText())));
             orders.setAccessibleText(shown.sentence());
             fillTotals(now.setting().orElseGet(check::worstSetting), check.worstSetting());
             if (!told.equals(Optional.of(check))) {

@@ -101,7 +101,7 @@ final class Menus {
         Menu menu = new Menu("_View");
         for (Page page : Page.values()) {
             menu.getItems()
-                    .add(needing(item("_" + page.words(), "Shortcut+" + page.digit(), () -> actions.showPage(page))));
+                    .add(needing(item(page.menuWords(), "Shortcut+" + page.digit(), () -> actions.showPage(page))));
         }
         menu.getItems()
                 .addAll(

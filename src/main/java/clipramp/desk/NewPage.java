@@ -14,8 +14,10 @@ import javafx.scene.control.Control;
 import javafx.scene.control.Label;
 import javafx.scene.control.ScrollPane;
 import javafx.scene.control.TextField;
+import javafx.scene.layout.ColumnConstraints;
+import javafx.scene.layout.FlowPane;
 import javafx.scene.layout.GridPane;
-import javafx.scene.layout.HBox;
+import javafx.scene.layout.Priority;
 import javafx.scene.layout.Region;
 import javafx.scene.layout.VBox;
 
@@ -45,6 +47,14 @@ final class NewPage {
         title.getStyleClass().add("head");
         GridPane form = new GridPane();
         form.getStyleClass().add("form");
+        for (int column = 0; column < 3; column++) {
+            ColumnConstraints fields = new ColumnConstraints();
+            fields.setMinWidth(column == 0 ? 0 : Region.USE_PREF_SIZE);
+            form.getColumnConstraints().add(fields);
+        }
+        ColumnConstraints rest = new ColumnConstraints();
+        rest.setHgrow(Priority.ALWAYS);
+        form.getColumnConstraints().add(rest);
         for (Stage each : Stage.values()) {
             stage.getItems().add(each.word());
         }
@@ -54,7 +64,7 @@ final class NewPage {
         row(form, 2, "3  stage", "how thyristors, bridge and load are put together", stage, "new-stage");
         row(
                 form,
-                3,
+                4,
                 "4  wanted",
                 "share of full power at the knob's two ends",
                 lowest,
@@ -63,7 +73,7 @@ final class NewPage {
                 "new-highest");
         row(
                 form,
-                4,
+                5,
                 "5  surroundings",
                 "coldest and hottest air around the parts",
                 coldest,
@@ -72,7 +82,8 @@ final class NewPage {
                 "new-hottest");
         about.getStyleClass().add("quiet");
         about.setWrapText(true);
-        form.add(about, 3, 2);
+        about.setMinHeight(Region.USE_PREF_SIZE);
+        form.add(about, 1, 3, 3, 1);
         complaint.getStyleClass().add("complaint");
         complaint.setId("new-complaint");
         complaint.setWrapText(true);
@@ -80,7 +91,7 @@ final class NewPage {
         stage.valueProperty().addListener(property -> usual());
         line.valueProperty().addListener(property -> usual());
         page.getStyleClass().add("page");
-        HBox buttons = buttons(propose, enter, back);
+        FlowPane buttons = buttons(propose, enter, back);
         run.onChange(() -> {
             form.setDisable(run.isRunning());
             buttons.setDisable(run.isRunning());
@@ -93,7 +104,7 @@ final class NewPage {
         usual();
     }
 
-    private HBox buttons(Consumer<Wish> propose, Consumer<Wish> enter, Runnable back) {
+    private FlowPane buttons(Consumer<Wish> propose, Consumer<Wish> enter, Runnable back) {
         Button first = new Button("Propose a design");
         first.setId("new-propose");
         first.setDefaultButton(true);
@@ -104,8 +115,8 @@ final class NewPage {
         Button third = new Button("Back");
         third.setCancelButton(true);
         third.setOnAction(event -> back.run());
-        HBox box = new HBox(first, second, third);
-        box.getStyleClass().add("buttons");
+        FlowPane box = new FlowPane(first, second, third);
+        box.getStyleClass().add("flow-buttons");
         return box;
     }
 
@@ -128,9 +139,7 @@ final class NewPage {
 
     private static Node label(String head, String words) {
         Label title = new Label(head);
-        Label quiet = new Label(words);
-        quiet.getStyleClass().add("quiet");
-        return new VBox(title, quiet);
+        return new VBox(title, Words.quiet(words));
     }
 
     ScrollPane node() {

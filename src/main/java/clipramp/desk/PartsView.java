@@ -25,11 +25,15 @@ import javafx.scene.layout.VBox;
 
 /** The drawn circuit and, along it in the order of the signal, its parts: choosing one in either marks it in both. */
 final class PartsView {
+    /** Lower than this, in effective pixels, nothing on the drawing can be read. */
+    private static final double LEAST_DRAWING = 240;
+
     private final Draft draft;
     private final FigurePane drawing;
     private final TilePane slots = new TilePane();
     private final Map<PartGroup, ToggleButton> stations = new EnumMap<>(PartGroup.class);
     private final VBox box = new VBox();
+    private final ScrollPane whole = new ScrollPane(box);
     private final List<SlotView> views = new ArrayList<>();
     private PartGroup station = PartGroup.RAMP;
     private String chosen = "";
@@ -53,11 +57,17 @@ final class PartsView {
         VBox.setVgrow(drawing, Priority.ALWAYS);
         box.getStyleClass().add("parts");
         box.getChildren().addAll(drawing, strip(), scroll);
+        whole.setFitToWidth(true);
+        whole.setFitToHeight(true);
+        whole.setHbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);
+        whole.setFocusTraversable(false);
+        theme.onChange(() -> drawing.setMinHeight(LEAST_DRAWING * theme.zoom()));
+        drawing.setMinHeight(LEAST_DRAWING * theme.zoom());
         draft.onChange(this::refresh);
     }
 
-    VBox node() {
-        return box;
+    ScrollPane node() {
+        return whole;
     }
 
     private HBox strip() {
@@ -101,9 +111,11 @@ final class PartsView {
 
     /** What was never shown before has no place for the keyboard until it is laid out. */
     private void focus(SlotView view) {
-        box.applyCss();
-        box.layout();
+        whole.applyCss();
+        whole.layout();
         view.node().requestFocus();
+        // The drawing may leave no room for the parts under it.
+        whole.setVvalue(whole.getVmax());
     }
 
     private void show(PartGroup group, String key) {

@@ -7,6 +7,7 @@ import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Locale;
 import java.util.Optional;
 import java.util.function.Consumer;
 
@@ -21,13 +22,20 @@ final class ReadingsActions {
     }
 
     void open(Consumer<ReadingsTable> then) {
-        service.asks().toOpen(FileAsk.Kind.CSV).ifPresent(file -> {
-            List<ReadingsTable> read = new ArrayList<>(1);
-            service.away(
-                    "The readings cannot be opened",
-                    () -> read.add(ReadingsTable.of(Source.of(file))),
-                    () -> read.forEach(then));
-        });
+        service.asks().toOpen(FileAsk.Kind.CSV).ifPresent(file -> open(file, then));
+    }
+
+    void open(Path file, Consumer<ReadingsTable> then) {
+        List<ReadingsTable> read = new ArrayList<>(1);
+        service.away(
+                "The readings cannot be opened",
+                () -> read.add(ReadingsTable.of(Source.of(file))),
+                () -> read.forEach(then));
+    }
+
+    /** Readings are told from designs by their ending. */
+    static boolean isReadings(Path file) {
+        return String.valueOf(file.getFileName()).toLowerCase(Locale.ROOT).endsWith("." + FileAsk.Kind.CSV.ending());
     }
 
     void save(ReadingsTable table, Optional<Path> beside) {

@@ -6,8 +6,8 @@ import clipramp.desk.model.LongRun;
 import clipramp.desk.model.PartSlot;
 import clipramp.desk.model.RecordMaker;
 import clipramp.desk.model.Sheet;
-import clipramp.fit.FitResult;
 import clipramp.desk.model.SpreadRun;
+import clipramp.fit.FitResult;
 import clipramp.record.PageSize;
 import clipramp.record.RecordPreview;
 import clipramp.spread.SpreadResult;
@@ -45,7 +45,6 @@ final class RecordPage implements PageView {
     private final RecordMaker maker;
     private final LongRun<Fitting.Asked, Fitting.Answer> fitting;
     private final CheckBox unit = new CheckBox("With the unit as built");
-    private final Theme theme;
     private final VBox pages = new VBox();
     private final VBox side = new VBox();
     private final Button save = new Button("Save the record…");
@@ -67,7 +66,6 @@ final class RecordPage implements PageView {
             LongRun<Fitting.Asked, Fitting.Answer> fitting,
             Runnable saving) {
         this.fitting = fitting;
-        this.theme = theme;
         this.draft = draft;
         this.run = run;
         this.maker = maker;
@@ -129,7 +127,9 @@ final class RecordPage implements PageView {
             Optional<SpreadResult> drawn = run.of(sheet.loaded());
             spread.setDisable(drawn.isEmpty());
             spreadHint.setText(
-                    drawn.isPresent() ? "" : "Its page tells of the units of this very design: draw them on Spread first.");
+                    drawn.isPresent()
+                            ? ""
+                            : "Its page tells of the units of this very design: draw them on Spread first.");
             maker.setSpread(drawn.filter(units -> spread.isSelected()));
             maker.show(sheet.loaded(), draft.file());
             titleBlock(sheet);
@@ -201,7 +201,14 @@ final class RecordPage implements PageView {
         ImageView view = new ImageView(image);
         view.setPreserveRatio(true);
         view.fitWidthProperty()
-                .bind(Bindings.min(page.width(), pages.widthProperty().subtract(32)));
+                .bind(Bindings.createDoubleBinding(
+                        () -> Math.min(
+                                page.width(),
+                                pages.getWidth()
+                                        - pages.getInsets().getLeft()
+                                        - pages.getInsets().getRight()),
+                        pages.widthProperty(),
+                        pages.insetsProperty()));
         StackPane sheet = new StackPane(view);
         sheet.setAccessibleRole(AccessibleRole.IMAGE_VIEW);
         sheet.setAccessibleText("Page " + page.number() + " of " + page.count() + " of the record");

@@ -12,9 +12,10 @@ import javafx.scene.control.Button;
 import javafx.scene.control.ComboBox;
 import javafx.scene.control.Label;
 import javafx.scene.control.TextField;
-import javafx.scene.layout.GridPane;
+import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.Region;
+import javafx.scene.layout.TilePane;
 import javafx.scene.layout.VBox;
 import org.jspecify.annotations.Nullable;
 
@@ -68,7 +69,7 @@ final class SeenForm {
     SeenForm(Runnable changed) {
         Label head = new Label("What was seen");
         head.getStyleClass().add("verdict");
-        GridPane grid = new GridPane();
+        TilePane grid = new TilePane();
         grid.getStyleClass().add("seen-grid");
         row(grid, "load gets", load);
         row(grid, "knob", knob);
@@ -116,15 +117,18 @@ final class SeenForm {
         return combo;
     }
 
-    private static void row(GridPane grid, String name, Region control) {
+    /** One under the other, or in two columns where the form is as wide as the page. */
+    private static void row(TilePane grid, String name, Region control) {
         Label label = new Label(name);
         label.getStyleClass().add("quiet");
         label.setMinWidth(Region.USE_PREF_SIZE);
         label.setLabelFor(control);
         control.setMaxWidth(Double.MAX_VALUE);
         control.setMinWidth(0);
-        GridPane.setHgrow(control, Priority.ALWAYS);
-        grid.addRow(grid.getRowCount(), label, control);
+        HBox.setHgrow(control, Priority.ALWAYS);
+        HBox row = new HBox(label, control);
+        row.getStyleClass().add("seen");
+        grid.getChildren().add(row);
     }
 
     VBox node() {

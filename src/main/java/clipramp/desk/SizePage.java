@@ -95,7 +95,7 @@ final class SizePage implements PageView {
         series.setId("size-series");
         series.setAccessibleText("Preferred values of resistors");
         parts.getStyleClass().add("size-parts");
-        wanted.getStyleClass().add("size-parts");
+        wanted.getStyleClass().add("size-wanted");
         start.setId("size-start");
         start.setDefaultButton(true);
         start.setOnAction(event -> start());
@@ -277,7 +277,7 @@ final class SizePage implements PageView {
             tables.getChildren().add(TextGrid.ofFigures("size-shape", SizedRows.of(knobs)));
         });
         answer.steadied().ifPresent(steadied -> {
-            Label head = new Label("Base two against temperature, at mid-knob");
+            Label head = Words.wrapped("Base two against temperature, at mid-knob");
             head.getStyleClass().add("sized-head");
             tables.getChildren().addAll(head, TextGrid.ofFigures("size-steady", SizedRows.of(steadied)));
         });

@@ -33,6 +33,10 @@ import javafx.scene.layout.VBox;
 /** What the next thousand units do: asked on the left, drawn in the middle while it runs, told underneath. */
 final class SpreadPage implements PageView {
     private static final int MOST_UNITS = 1_000_000;
+    private static final double HISTOGRAM_SHARE = 0.42;
+    private static final double CURVES_SHARE = 0.55;
+    private static final double LEAST_HISTOGRAM = 200;
+    private static final double LEAST_CURVES = 320;
 
     private final Draft draft;
     private final SpreadRun run;
@@ -70,11 +74,12 @@ final class SpreadPage implements PageView {
         words.setId("spread-words");
         middle = new VBox(histogram, spread, words);
         middle.getStyleClass().add("spread-middle");
-        histogram.prefHeightProperty().bind(box.heightProperty().multiply(0.42));
-        spread.prefHeightProperty().bind(box.heightProperty().multiply(0.55));
         for (FigurePane pane : List.of(histogram, spread)) {
             pane.setMinHeight(Region.USE_PREF_SIZE);
         }
+        box.heightProperty().addListener(property -> fit(theme.zoom()));
+        theme.onChange(() -> fit(theme.zoom()));
+        fit(theme.zoom());
         ScrollPane scroll = new ScrollPane(middle);
         scroll.setFitToWidth(true);
         scroll.setHbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);
@@ -84,6 +89,12 @@ final class SpreadPage implements PageView {
         run.onChange(this::refresh);
         run.onChange(bandsChanged);
         draft.onChange(this::refresh);
+    }
+
+    /** Both figures in one look where there is room; never so low that their legends lie over the curves. */
+    private void fit(double zoom) {
+        histogram.setPrefHeight(Math.max(LEAST_HISTOGRAM * zoom, box.getHeight() * HISTOGRAM_SHARE));
+        spread.setPrefHeight(Math.max(LEAST_CURVES * zoom, box.getHeight() * CURVES_SHARE));
     }
 
     private void ask() {
@@ -99,7 +110,12 @@ final class SpreadPage implements PageView {
         start.setDefaultButton(true);
         start.setOnAction(event -> start());
         cancel.setId("spread-cancel");
-        cancel.setDisable(true);
+        cancel.setVisible(false);
+        cancel.managedProperty().bind(cancel.visibleProperty());
+        bar.managedProperty().bind(bar.visibleProperty());
+        progress.managedProperty().bind(progress.textProperty().isNotEmpty());
+        complaint.managedProperty().bind(complaint.textProperty().isNotEmpty());
+        complaint.getStyleClass().add("complaint");
         cancel.setOnAction(event -> run.cancel());
         bar.setMaxWidth(Double.MAX_VALUE);
         bar.setAccessibleText("Units drawn");
@@ -132,7 +148,9 @@ final class SpreadPage implements PageView {
         label.getStyleClass().add("quiet");
         label.setLabelFor(control);
         control.setMaxWidth(Double.MAX_VALUE);
-        return new VBox(label, control);
+        VBox named = new VBox(label, control);
+        named.getStyleClass().add("named");
+        return named;
     }
 
     @Override
@@ -174,7 +192,8 @@ final class SpreadPage implements PageView {
 
     private void refresh() {
         start.setDisable(run.isRunning());
-        cancel.setDisable(!run.isRunning() || run.isEnding());
+        cancel.setVisible(run.isRunning());
+        cancel.setDisable(run.isEnding());
         bar.setVisible(run.isRunning());
         run.progress().ifPresent(now -> {
             bar.setProgress((double) now.done() / now.of());
@@ -256,14 +275,15 @@ final class SpreadPage implements PageView {
             ColumnConstraints column = new ColumnConstraints();
             column.setHgrow(c == 0 ? Priority.ALWAYS : Priority.NEVER);
             grid.getColumnConstraints().add(column);
-            Label name = new Label(heads.get(c));
-            name.getStyleClass().add("quiet");
-            grid.add(name, c, 0);
+            grid.add(Words.quiet(heads.get(c)), c, 0);
         }
         for (int r = 0; r < rows.size(); r++) {
             for (int c = 0; c < heads.size(); c++) {
-                Label cell = new Label(rows.get(r).get(c));
+                Label cell = Words.wrapped(rows.get(r).get(c));
                 cell.setWrapText(c == 0);
+                if (c > 0) {
+                    cell.setMinWidth(Region.USE_PREF_SIZE);
+                }
                 grid.add(cell, c, r + 1);
             }
         }

@@ -7,6 +7,7 @@ import java.util.List;
 import javafx.scene.control.Button;
 import javafx.scene.control.Label;
 import javafx.scene.control.ScrollPane;
+import javafx.scene.layout.FlowPane;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.VBox;
 
@@ -25,7 +26,7 @@ final class StartPage {
         Label line = new Label("Designs firing circuits that keep time with the line: clipped supply, ramp,"
                 + " trigger, gate, thyristor, load.");
         line.setWrapText(true);
-        HBox columns = new HBox(begin(), examples(), recent);
+        FlowPane columns = new FlowPane(begin(), examples(), recent);
         columns.getStyleClass().add("start-columns");
         page.getStyleClass().add("page");
         page.getChildren().addAll(title, line, left, columns);
@@ -87,6 +88,7 @@ final class StartPage {
     void showRecent(List<Path> files) {
         recent.getChildren().remove(1, recent.getChildren().size());
         recent.setVisible(!files.isEmpty());
+        recent.setManaged(!files.isEmpty());
         for (Path file : files) {
             String folder = file.getParent() == null ? "" : file.getParent().toString();
             recent.getChildren()

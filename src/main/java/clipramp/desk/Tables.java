@@ -40,6 +40,11 @@ final class Tables {
         }
     }
 
+    /** A head with its unit in a line of its own, where figures of a few digits stand in narrow columns. */
+    static String unitBelow(String head) {
+        return head.replaceFirst(" (mA|%|W|dc V|ac V|peak V)$", "\n$1");
+    }
+
     private static TableColumn<List<String>, String> column(int index) {
         TableColumn<List<String>, String> column = new TableColumn<>();
         column.setCellValueFactory(

@@ -148,6 +148,30 @@ final class WindowActions implements Actions {
     }
 
     @Override
+    public void takeFile(Path file) {
+        if (ReadingsActions.isReadings(file)) {
+            takeReadings(file);
+        } else {
+            openFile(file);
+        }
+    }
+
+    private void takeReadings(Path file) {
+        if (draft().isOpen()) {
+            new ReadingsActions(served().service()).open(file, window()::showReadings);
+        } else {
+            dialogs()
+                    .text(
+                            "readings",
+                            "Readings need a design",
+                            dialogs()
+                                    .words(file.getFileName()
+                                            + " holds readings of one unit. Open the design that the unit was"
+                                            + " built from, or enter it under New design, and drop the file again."));
+        }
+    }
+
+    @Override
     public void changeAnswers() {
         window().showQuestions();
     }
@@ -159,7 +183,7 @@ final class WindowActions implements Actions {
 
     @Override
     public void open() {
-        files().open();
+        files().open(this::takeReadings);
     }
 
     @Override

@@ -90,7 +90,7 @@ class FaultsPageTest {
             set(window, "#seen-TP1", "0");
             assertThat(row(window, 0).get(1)).isEqualTo("2 of 2");
             assertThat(row(window, 0).get(0)).containsAnyOf("dropper R1 open", "zener V1 shorted", "D1–D4 shorted");
-            assertThat(detail(window)).anyMatch(text -> text.startsWith("For it: load:none, TP1=0"));
+            assertThat(detail(window)).anyMatch(text -> text.startsWith("For it: load none, TP1 = 0"));
             choose(window, "#seen-load", "full power");
             set(window, "#seen-TP1", "18,9");
             choose(window, "#seen-knob", "does nothing");
@@ -115,7 +115,7 @@ class FaultsPageTest {
             javafx.scene.Node middle = window.find("#faults-middle", javafx.scene.Node.class);
             assertThat(Harness.at(() -> middle.getPseudoClassStates().contains(stale)))
                     .isTrue();
-            assertThat(window.find("#faults-progress", Label.class).getText()).contains("has changed since");
+            assertThat(window.find("#faults-state", Label.class).getText()).contains("has changed since");
             window.press("#faults-start");
             window.await(() -> !window.model.faults().isRunning());
             assertThat(Harness.at(() -> middle.getPseudoClassStates().contains(stale)))

@@ -52,6 +52,28 @@ class FitPageTest {
         return window.model.draft().sheet().orElseThrow().text().text();
     }
 
+    /** The same way that a dropped file takes. */
+    @Test
+    void readingsThatAreOpenedAsADesignGoToTheFitPage() throws Exception {
+        Path file = Files.writeString(home.resolve("Mine.CSV"), example(), StandardCharsets.UTF_8);
+        try (Harness window = Harness.start(home)) {
+            window.ask.answer = file;
+            window.menu("File", "Open…");
+            Node dialog = window.find("#dialog-readings", Node.class);
+            assertThat(Texts.of(dialog)).contains("Mine.CSV holds readings", "Open the design");
+            Harness.at(() -> {
+                dialog.getScene().getWindow().hide();
+                return null;
+            });
+            String before = text(window.example("drying-cabinet"));
+            window.menu("File", "Open…");
+            Node question = window.find("#dialog-unsaved", Node.class);
+            window.robot.clickOn((Node) Texts.button(question, "Do not save"));
+            assertThat(window.find("#fit-cell-5-4", TextField.class).getText()).isEqualTo("4.55");
+            assertThat(text(window)).isEqualTo(before);
+        }
+    }
+
     @Test
     void readingsFromAFileBecomeTheUnitAsBuiltInOneStep() throws Exception {
         try (Harness window = onThePage(home)) {

@@ -15,6 +15,7 @@ import java.util.concurrent.TimeUnit;
 import java.util.function.BooleanSupplier;
 import javafx.application.Platform;
 import javafx.scene.Node;
+import javafx.scene.Parent;
 import javafx.scene.Scene;
 import javafx.scene.control.ButtonBase;
 import javafx.scene.control.Menu;
@@ -28,7 +29,7 @@ import org.testfx.api.FxToolkit;
 
 /** A real window on the headless platform, with its own folders and a file dialog that answers what it was told. */
 final class Harness implements AutoCloseable {
-    private static final int PATIENCE_SECONDS = 20;
+    private static final int PATIENCE_SECONDS = 60;
 
     /** Answers every question for a file with the next of these. */
     static final class ToldAsk implements FileAsk {
@@ -125,6 +126,17 @@ final class Harness implements AutoCloseable {
                 model.draft().isOpen() && !model.isBusy() && model.judgement().isPresent());
         await(() -> true);
         return this;
+    }
+
+    /** Waits until everything that is shown is laid out and drawn. */
+    void awaitStill() {
+        await(() -> {
+            Parent root = stage.getScene().getRoot();
+            return !root.isNeedsLayout()
+                    && Texts.all(root).stream()
+                            .allMatch(node ->
+                                    !(node instanceof FigurePane pane) || !Texts.isShown(pane) || pane.isPainted());
+        });
     }
 
     void click(String selector) {

@@ -29,6 +29,11 @@ import javax.imageio.ImageIO;
 
 /** Writes every page of the window as a picture into a folder, for a person to look at: {@code Screens FOLDER [ONLY]}. */
 public final class Screens {
+    private static final int STEP = 25;
+
+    /** In milliseconds: a search on a busy machine takes its time, and a picture of half an answer helps nobody. */
+    private static final int PATIENCE = 120_000;
+
     private Screens() {}
 
     /** Answers with the example's readings, one of them misread. */
@@ -97,7 +102,8 @@ public final class Screens {
         settle(() -> true);
         save(stage, folder.resolve("new-" + name + ".png"));
         fire(stage, "#new-propose");
-        settle(() -> model.proposing().progress().isPresent());
+        settle(() ->
+                model.proposing().progress().isPresent() || !model.proposing().isRunning());
         save(stage, folder.resolve("new-searching-" + name + ".png"));
         settle(() -> stage.getScene().getRoot().lookup("#proposal-take") != null);
         save(stage, folder.resolve("proposal-" + name + ".png"));
@@ -201,6 +207,7 @@ public final class Screens {
         at(() -> {
             Node node = stage.getScene().getRoot().lookup(selector);
             if (node != null) {
+                node.requestFocus();
                 node.fireEvent(new ActionEvent());
             }
             return null;
@@ -221,8 +228,8 @@ public final class Screens {
     }
 
     private static void settle(BooleanSupplier done) throws Exception {
-        for (int i = 0; i < 400 && !at(done::getAsBoolean); i++) {
-            Thread.sleep(25);
+        for (int i = 0; i < PATIENCE / STEP && !at(done::getAsBoolean); i++) {
+            Thread.sleep(STEP);
         }
         Thread.sleep(200);
     }
@@ -238,6 +245,8 @@ public final class Screens {
     }
 
     private static void save(Stage stage, Path file) throws Exception {
+        settle(() -> Texts.all(stage.getScene().getRoot()).stream()
+                .allMatch(node -> !(node instanceof FigurePane pane) || !Texts.isShown(pane) || pane.isPainted()));
         WritableImage image = at(() -> stage.getScene().snapshot(null));
         try {
             ImageIO.write(SwingFXUtils.fromFXImage(image, null), "png", file.toFile());

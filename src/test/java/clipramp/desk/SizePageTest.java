@@ -132,7 +132,7 @@ class SizePageTest {
                     window.model.resizing().answer().orElseThrow().steadied().orElseThrow();
             assertThat(steadied.chosenDriftRad()).isLessThan(steadied.nowDriftRad());
             assertThat(Texts.of(window.find("#size-steady", Node.class)))
-                    .contains("as it stands", "found: preferred value", "10 000/(eta V)", "dV_P/dT = 0, exactly");
+                    .contains("as it stands", "found: preferred value", "10 000/(η V)", "dV_P/dT = 0, exactly");
         }
     }
 }

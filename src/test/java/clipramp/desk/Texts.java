@@ -24,6 +24,15 @@ final class Texts {
         }
     }
 
+    static boolean isShown(Node node) {
+        for (Node each = node; each != null; each = each.getParent()) {
+            if (!each.isVisible()) {
+                return false;
+            }
+        }
+        return node.getLayoutBounds().getWidth() > 0;
+    }
+
     static String of(Node root) {
         StringBuilder text = new StringBuilder();
         for (Node node : Harness.at(() -> all(root))) {

@@ -73,7 +73,7 @@ public final class FaultWords {
         return List.of(
                 effect.fault().words(),
                 seen == 0 ? NOTHING : candidate.fits().size() + " of " + seen,
-                effect == sheet.healthy() ? NOTHING : effect.gets().word(),
+                effect.equals(sheet.healthy()) ? NOTHING : effect.gets().word(),
                 watts(effect.middle().watts()),
                 sheet.design().ramp().pot().isEmpty() ? NOTHING : effect.knobActs() ? "acts" : "dead",
                 volts(effect, TestPoint.TP1, Meter.DC, 1),
@@ -144,16 +144,21 @@ public final class FaultWords {
         List<String> reasons = new ArrayList<>();
         if (!candidate.fits().isEmpty()) {
             reasons.add("For it: "
-                    + candidate.fits().stream().map(Observation::text).collect(Collectors.joining(", ")) + ".");
+                    + candidate.fits().stream().map(FaultWords::seen).collect(Collectors.joining(", ")) + ".");
         }
         if (!candidate.contradicts().isEmpty()) {
             reasons.add("Against it: "
                     + candidate.contradicts().stream()
-                            .map(one -> one.seen().text() + " (it would be " + one.instead() + ")")
+                            .map(one -> seen(one.seen()) + " (it would be " + one.instead() + ")")
                             .collect(Collectors.joining("; "))
                     + ".");
         }
         return reasons;
+    }
+
+    /** An observation as it is said rather than typed: "load none", "TP1 = 0 V". */
+    private static String seen(Observation one) {
+        return one.text().replace(":", " ").replaceFirst(" ?= ?", " = ");
     }
 
     /** Where and how the figures hold. */

@@ -44,7 +44,7 @@ public final class SizedRows {
     }
 
     private static List<String> row(Choice choice) {
-        return row(choice.rule(), choice.ohms(), choice.driftRad());
+        return row(choice.rule().replaceAll("\\beta\\b", "η").replace(" - ", " − "), choice.ohms(), choice.driftRad());
     }
 
     private static List<String> row(String what, double ohms, double driftRad) {
