@@ -187,6 +187,35 @@ public final class UnitValues {
         return this;
     }
 
+    /** All that is drawn of the unit itself, its line, its temperature and its trimmers left out: the same unit by content. */
+    public double[] parts() {
+        return new double[] {
+            dropperOhms,
+            capacitorFarads,
+            fixedOhms,
+            trackOhms,
+            potShuntOhms,
+            baseOneOhms,
+            baseTwoOhms,
+            upperOhms,
+            lowerOhms,
+            gateSeriesOhms,
+            gateShuntOhms,
+            zenerVolts,
+            standoff,
+            interbaseOhms,
+            interbaseDrift,
+            emitterDropVolts,
+            emitterDrift,
+            peakCurrentAmps,
+            valleyAmps,
+            valleyVolts,
+            saturationVolts,
+            modulatedAmps,
+            baseOnePulseVolts
+        };
+    }
+
     /** R_E of this unit with a share 0..1 of its track in use, ohm. */
     public double rampOhms(double trackShare) {
         double across = potShuntOhms + lowTrimOhms;

@@ -40,6 +40,8 @@ final class HalfCycleRun {
     private double triedFluxAmps;
     private boolean trying;
     private boolean measures;
+    /** Whether nobody asks for more of the pulses than whether they turn the thyristor on. */
+    private boolean brief;
 
     HalfCycleRun(FiringCase firing) {
         this.firing = firing;
@@ -51,7 +53,9 @@ final class HalfCycleRun {
      * thyristor, which takes the supply away if it turns on.
      */
     void skip() {
+        brief = true;
         next(PieceSink.NONE, firing.tapsThyristor());
+        brief = false;
     }
 
     /** Runs through the next half cycle, measures its pulses and shows its pieces. */
@@ -153,7 +157,8 @@ final class HalfCycleRun {
         double supplyVolts = before.supplyVolts();
         boolean afterStall = before.mode() == Mode.STALLED;
         stalled = begun.isEmpty() ? afterStall : stalled;
-        going = new PulseMeter(firing.network(), half, stepper.seconds(), stepper.rampVolts(), supplyVolts, afterStall);
+        going = new PulseMeter(
+                firing.network(), half, stepper.seconds(), stepper.rampVolts(), supplyVolts, afterStall, brief);
         begun.add(going);
         if (firing.tapsThyristor() && !conducting && firing.isForward(half, stepper.seconds())) {
             triedFrom = stepper.seconds();

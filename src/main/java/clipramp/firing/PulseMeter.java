@@ -18,6 +18,7 @@ final class PulseMeter {
     private final double startRampVolts;
     private final double supplyVolts;
     private final boolean afterStall;
+    private final boolean brief;
 
     private double endSeconds;
     private double endRampVolts;
@@ -38,6 +39,7 @@ final class PulseMeter {
      * @param startRampVolts ramp voltage at firing, V
      * @param supplyVolts supply just before firing, V
      * @param afterStall whether the ramp was held before
+     * @param brief whether only what the pulse does to the thyristor is asked for, and not its peaks and its energy
      */
     PulseMeter(
             Network network,
@@ -45,20 +47,22 @@ final class PulseMeter {
             double startSeconds,
             double startRampVolts,
             double supplyVolts,
-            boolean afterStall) {
+            boolean afterStall,
+            boolean brief) {
         n = network;
         this.half = half;
         this.startSeconds = startSeconds;
         this.startRampVolts = startRampVolts;
         this.supplyVolts = supplyVolts;
         this.afterStall = afterStall;
+        this.brief = brief;
         endSeconds = startSeconds;
         endRampVolts = startRampVolts;
     }
 
     /** A fresh meter for the same pulse. */
     PulseMeter again() {
-        return new PulseMeter(n, half, startSeconds, startRampVolts, supplyVolts, afterStall);
+        return new PulseMeter(n, half, startSeconds, startRampVolts, supplyVolts, afterStall, brief);
     }
 
     /**
@@ -67,17 +71,23 @@ final class PulseMeter {
      * @param offsetSeconds what to add to the piece's times to count from the pulse's own half cycle, s
      */
     void passed(Piece piece, double from, double to, double offsetSeconds) {
+        endSeconds = to + offsetSeconds;
+        if (!brief) {
+            costs(piece, from, to);
+        }
+        above(piece, from, to, offsetSeconds);
+    }
+
+    private void costs(Piece piece, double from, double to) {
         peaksAt(piece, from);
         peaksAt(piece, piece.gateCrestSeconds(from, to));
         peaksAt(piece, to);
-        endSeconds = to + offsetSeconds;
         endRampVolts = piece.rampVolts();
         PieceQuadrature.visit(piece, from, to, (p, weight) -> {
             double amps = p.gateAmps(n);
             coulombs += weight * amps;
             joules += weight * amps * p.gateVolts();
         });
-        above(piece, from, to, offsetSeconds);
     }
 
     private void peaksAt(Piece piece, double time) {

@@ -1,6 +1,5 @@
 package clipramp.spread;
 
-import clipramp.engine.UnitValues;
 import clipramp.spread.PositionSpread.Extremes;
 import java.util.List;
 import java.util.function.ToDoubleFunction;
@@ -16,13 +15,15 @@ final class Extremity {
     private static final int MOST_SWEEPS = 4;
 
     private final Lot lot;
-    private final UnitValues unit;
-    private final ToDoubleFunction<UnitValues> objective;
+    private final ToDoubleFunction<double[]> objective;
 
-    Extremity(Lot lot, ToDoubleFunction<UnitValues> objective) {
+    /**
+     * @param lot whose factors are moved
+     * @param objective of a value for each of them
+     */
+    Extremity(Lot lot, ToDoubleFunction<double[]> objective) {
         this.lot = lot;
         this.objective = objective;
-        unit = lot.blank();
     }
 
     /**
@@ -97,10 +98,7 @@ final class Extremity {
     }
 
     private double at(double[] values) {
-        for (int k = 0; k < values.length; k++) {
-            lot.factors().get(k).slot().set(unit, values[k]);
-        }
-        return objective.applyAsDouble(unit);
+        return objective.applyAsDouble(values);
     }
 
     private static double square(double x) {

@@ -71,7 +71,7 @@ final class Remedies {
                 .ifPresent(position -> {
                     double share = WantedTest.share(design.ramp(), position);
                     UnitOutcome nominal = new UnitOutcome();
-                    new UnitSolver(design).solve(lot.blank(), share, nominal);
+                    lot.solver().solve(lot.blank(), share, nominal);
                     Yield after = yieldOf(lot, (solver, unit) -> trim(solver, unit, share, nominal.latestRad(), fixed));
                     remedies.add(new Remedy(
                             "ramp.fixed",
@@ -97,7 +97,7 @@ final class Remedies {
         int held = IntStream.range(0, (units + CHUNK - 1) / CHUNK)
                 .parallel()
                 .map(c -> {
-                    UnitSolver solver = new UnitSolver(of.design());
+                    UnitSolver solver = of.solver();
                     WantedTest wanted = new WantedTest(of.design());
                     UnitValues unit = of.blank();
                     int holding = 0;

@@ -72,7 +72,7 @@ final class Sampling {
         private final UnitOutcome outcome = new UnitOutcome();
 
         Tools(Lot lot) {
-            solver = new UnitSolver(lot.design());
+            solver = lot.solver();
             unit = lot.blank();
             wanted = new WantedTest(lot.design());
         }

@@ -9,7 +9,6 @@ import clipramp.margins.Margin;
 import clipramp.margins.Verdict;
 import clipramp.power.SwiftPoint;
 import clipramp.spread.PositionSpread.Extremes;
-import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.Comparator;
 import java.util.LinkedHashMap;
@@ -48,11 +47,15 @@ public final class Spread {
         Sampling sampling = new Sampling(lot, shares, options.samples());
         sampling.run(watch);
         boolean more = !watch.isCancelled();
-        List<PositionSpread> spreads = new ArrayList<>();
-        for (int p = 0; p < positions.length && sampling.done() > 0; p++) {
-            OptionalDouble position = positions.length == 1 ? OptionalDouble.empty() : OptionalDouble.of(positions[p]);
-            spreads.add(position(lot, sampling, p, position, shares[p]));
-        }
+        List<PositionSpread> spreads = IntStream.range(0, sampling.done() > 0 ? positions.length : 0)
+                .parallel()
+                .mapToObj(p -> position(
+                        lot,
+                        sampling,
+                        p,
+                        positions.length == 1 ? OptionalDouble.empty() : OptionalDouble.of(positions[p]),
+                        shares[p]))
+                .toList();
         boolean wanted = new WantedTest(design).isAsked();
         // Setting a unit's trimmers costs a dozen solutions.
         boolean fast = SwiftPoint.suits(design) && design.ramp().trimmers().isNone();
@@ -64,7 +67,7 @@ public final class Spread {
                 options,
                 sampling.done(),
                 lot.factors(),
-                List.copyOf(spreads),
+                spreads,
                 wanted ? Optional.of(Yield.of(sampling.holding(), sampling.done())) : Optional.empty(),
                 judged.of() == 0 ? Optional.empty() : Optional.of(Yield.of(judged.held(), judged.of())),
                 judged.failures(),
@@ -82,8 +85,7 @@ public final class Spread {
 
     private static PositionSpread position(
             Lot lot, Sampling sampling, int p, OptionalDouble position, double trackShare) {
-        UnitSolver solver = new UnitSolver(lot.design());
-        UnitOutcome outcome = new UnitOutcome();
+        CornerOutcomes corners = new CornerOutcomes(lot, trackShare);
         return new PositionSpread(
                 position,
                 percentiles(sampling.firingRad[p], sampling.done()),
@@ -94,19 +96,11 @@ public final class Spread {
                 sampling.share(p, FiringState.END_PULSE),
                 sampling.misfires(p),
                 sampling.share(p, FiringState.HUNTS),
-                extremes(lot, sampling.firingRad[p], sampling.done(), unit -> {
-                    solver.prepare(unit);
-                    solver.solve(unit, trackShare, outcome);
-                    return outcome.latestRad();
-                }),
-                extremes(lot, sampling.fraction[p], sampling.done(), unit -> {
-                    solver.prepare(unit);
-                    solver.solve(unit, trackShare, outcome);
-                    return outcome.fraction;
-                }));
+                extremes(lot, sampling.firingRad[p], sampling.done(), corners::latestRad),
+                extremes(lot, sampling.fraction[p], sampling.done(), corners::fraction));
     }
 
-    private static Extremes extremes(Lot lot, double[] samples, int done, ToDoubleFunction<UnitValues> objective) {
+    private static Extremes extremes(Lot lot, double[] samples, int done, ToDoubleFunction<double[]> objective) {
         int least = 0;
         int greatest = 0;
         for (int i = 1; i < done; i++) {
@@ -152,7 +146,7 @@ public final class Spread {
     private static List<String> failing(Lot lot, int number) {
         UnitValues unit = lot.blank();
         lot.draw(number, unit);
-        new UnitSolver(lot.design()).prepare(unit);
+        lot.solver().prepare(unit);
         Check check = Judge.check(
                 DrawnDesign.of(lot.design(), unit), OptionalDouble.of(unit.lineVolts), OptionalDouble.of(unit.celsius));
         return check.margins().stream()

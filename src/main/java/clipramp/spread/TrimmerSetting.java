@@ -1,11 +1,8 @@
 package clipramp.spread;
 
-import clipramp.circuit.Design;
-import clipramp.circuit.Part;
-import clipramp.circuit.Ramp;
-import clipramp.circuit.Wanted.Goal;
 import clipramp.engine.UnitValues;
-import java.util.Optional;
+import clipramp.spread.TrimmerGoals.Mark;
+import clipramp.spread.TrimmerGoals.Setting;
 
 /**
  * How a unit's trimmers are set: at nominal line and temperature, first with the knob at the highest wanted setting, then
@@ -13,91 +10,101 @@ import java.util.Optional;
  * far as the least one does.
  */
 final class TrimmerSetting {
-    /** The firing instant is nearly in proportion to R_E: as many proportional steps end within a thousandth of it. */
-    private static final int STEPS = 6;
+    /** From firing angles nearer than this, as a share, one last step along the unit's own slope leaves a tenth at most. */
+    private static final double NEAR = 5e-5;
 
-    private static final double NEAR = 1e-4;
+    /** And from this near along the nominal unit's. */
+    private static final double THERE = 5e-6;
 
+    /** Two solutions do for most units; where a jump is met there is no setting to be found. */
+    private static final int MOST_RUNS = 8;
+
+    private static final double LEAST_FOLLOW = 0.3;
+    private static final double MOST_FOLLOW = 3;
+
+    private final TrimmerGoals goals;
     private final UnitSolver solver;
-    private final UnitValues nominal;
-    private final double highReach;
-    private final double lowReach;
-    private final double highShare;
-    private final double lowShare;
-    private final double highRad;
-    private final double lowRad;
-    private final UnitOutcome there = new UnitOutcome();
 
-    TrimmerSetting(Design design, UnitSolver solver) {
+    TrimmerSetting(TrimmerGoals goals, UnitSolver solver) {
+        this.goals = goals;
         this.solver = solver;
-        Ramp ramp = design.ramp();
-        nominal = UnitValues.nominal(design);
-        nominal.celsius = Math.min(
-                design.surroundings().hottestCelsius(),
-                Math.max(design.surroundings().coldestCelsius(), nominal.celsius));
-        highReach = reach(ramp.trimmers().high());
-        lowReach = reach(ramp.trimmers().low());
-        double least = ramp.rampOhms(0) <= ramp.rampOhms(1) ? 0 : 1;
-        highShare = WantedTest.share(
-                ramp, design.wanted().highest().map(Goal::position).orElse(least));
-        lowShare = WantedTest.share(
-                ramp, design.wanted().lowest().map(Goal::position).orElse(1 - least));
-        highRad = rad(nominal, highShare);
-        lowRad = rad(nominal, lowShare);
     }
 
-    private static double reach(Optional<Part> trimmer) {
-        return trimmer.map(Part::lowest).orElse(0.0);
-    }
-
-    private double rad(UnitValues unit, double share) {
-        solver.solve(unit, share, there);
-        return there.latestRad();
+    /** Whether the logarithm of a firing angle may move like that with the logarithm of R_E, but for a jump. */
+    static boolean isLikely(double follow) {
+        return follow > LEAST_FOLLOW && follow < MOST_FOLLOW;
     }
 
     void set(UnitValues unit) {
+        Figures parts = new Figures(unit.parts());
+        Setting setting = goals.known(parts).orElseGet(() -> {
+            Setting found = found(unit);
+            goals.keep(parts, found);
+            return found;
+        });
+        unit.highTrimOhms = setting.highOhms();
+        unit.lowTrimOhms = setting.lowOhms();
+    }
+
+    private Setting found(UnitValues unit) {
         double volts = unit.lineVolts;
         double hertz = unit.lineHertz;
         double celsius = unit.celsius;
-        unit.lineVolts = nominal.lineVolts;
-        unit.lineHertz = nominal.lineHertz;
-        unit.celsius = nominal.celsius;
-        unit.highTrimOhms = nominal.highTrimOhms;
-        unit.lowTrimOhms = nominal.lowTrimOhms;
-        high(unit);
-        low(unit);
+        goals.bench(unit);
+        double ratio = goals.delayPerOhm() / solver.delayPerOhm(unit);
+        if (goals.highReach() > 0) {
+            ratio = high(unit, ratio);
+        }
+        if (goals.lowReach() > 0) {
+            low(unit, ratio);
+        }
         unit.lineVolts = volts;
         unit.lineHertz = hertz;
         unit.celsius = celsius;
+        return new Setting(unit.highTrimOhms, unit.lowTrimOhms);
     }
 
-    private void high(UnitValues unit) {
-        if (highReach > 0) {
-            double ohms = ohmsFor(unit, highRad, unit.rampOhms(highShare));
-            double rest = unit.rampOhms(highShare) - unit.highTrimOhms;
-            unit.highTrimOhms = Math.max(0, Math.min(highReach, ohms - rest));
-        }
+    /** Sets the one and says what the unit needs of the nominal unit's R_E, which holds nearly as well for the other. */
+    private double high(UnitValues unit, double ratio) {
+        Mark mark = goals.highest();
+        double ohms = ohmsFor(unit, mark, mark.rampOhms() * ratio);
+        double rest = unit.rampOhms(mark.trackShare()) - unit.highTrimOhms;
+        unit.highTrimOhms = Math.max(0, Math.min(goals.highReach(), ohms - rest));
+        return ohms / mark.rampOhms();
     }
 
-    private void low(UnitValues unit) {
-        if (lowReach > 0) {
-            double ohms = ohmsFor(unit, lowRad, unit.rampOhms(lowShare)) - unit.fixedOhms - unit.highTrimOhms;
-            double bare = unit.usedTrackOhms(lowShare);
-            // Parallel resistances: 1/ohms = 1/bare + 1/across.
-            double across = ohms <= 0 ? 0 : ohms < bare ? ohms * bare / (bare - ohms) : Double.POSITIVE_INFINITY;
-            unit.lowTrimOhms = Math.max(0, Math.min(lowReach, across - unit.potShuntOhms));
-        }
+    private void low(UnitValues unit, double ratio) {
+        Mark mark = goals.lowest();
+        double ohms = ohmsFor(unit, mark, mark.rampOhms() * ratio) - unit.fixedOhms - unit.highTrimOhms;
+        double bare = unit.usedTrackOhms(mark.trackShare());
+        // Parallel resistances: 1/ohms = 1/bare + 1/across.
+        double across = ohms <= 0 ? 0 : ohms < bare ? ohms * bare / (bare - ohms) : Double.POSITIVE_INFINITY;
+        unit.lowTrimOhms = Math.max(0, Math.min(goals.lowReach(), across - unit.potShuntOhms));
     }
 
-    private double ohmsFor(UnitValues unit, double targetRad, double start) {
-        double ohms = start;
-        for (int step = 0; step < STEPS; step++) {
-            solver.solveAt(unit, ohms, there);
-            double scale = targetRad / there.latestRad();
-            ohms *= scale;
-            if (Math.abs(scale - 1) < NEAR) {
-                break;
+    /** A secant over logarithms, its first slope the nominal unit's; the later R_E, the later it fires. */
+    private double ohmsFor(UnitValues unit, Mark mark, double guess) {
+        double ohms = guess;
+        double follow = mark.follow();
+        double early = 0;
+        double late = Double.POSITIVE_INFINITY;
+        double ohmsBefore = Double.NaN;
+        double radBefore = Double.NaN;
+        for (int run = 0; run < MOST_RUNS; run++) {
+            double rad = solver.latestRad(unit, ohms);
+            double lacking = Math.log(mark.firingRad() / rad);
+            double seen = Math.log(rad / radBefore) / Math.log(ohms / ohmsBefore);
+            boolean known = isLikely(seen);
+            follow = known ? seen : follow;
+            ohmsBefore = ohms;
+            radBefore = rad;
+            double next = ohms * Math.exp(lacking / follow);
+            if (Math.abs(lacking) < (known ? NEAR : THERE)) {
+                return next;
             }
+            early = lacking > 0 ? ohms : early;
+            late = lacking > 0 ? late : ohms;
+            ohms = next > early && next < late ? next : Math.sqrt(early * late);
         }
         return ohms;
     }

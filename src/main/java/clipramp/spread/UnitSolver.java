@@ -10,6 +10,7 @@ import clipramp.firing.Solution;
 import clipramp.power.LoadPower;
 import clipramp.power.LoadResult;
 import clipramp.power.SwiftPoint;
+import java.util.Optional;
 import org.jspecify.annotations.Nullable;
 
 /**
@@ -17,15 +18,26 @@ import org.jspecify.annotations.Nullable;
  * the reference path. Not for two threads at once.
  */
 final class UnitSolver {
+    /** A peak point beyond this share of the supply makes no ramp to reckon with. */
+    private static final double HIGHEST_PEAK = 0.98;
+
     private final Design design;
     private final Network network = new Network();
     private final @Nullable SwiftPoint swift;
     private final @Nullable TrimmerSetting setting;
 
     UnitSolver(Design design) {
+        this(design, TrimmerGoals.of(design));
+    }
+
+    /**
+     * @param design whose units are solved
+     * @param goals of that design, shared by all who solve its units
+     */
+    UnitSolver(Design design, Optional<TrimmerGoals> goals) {
         this.design = design;
         swift = SwiftPoint.suits(design) ? new SwiftPoint(design) : null;
-        setting = design.ramp().trimmers().isNone() ? null : new TrimmerSetting(design, this);
+        setting = goals.isEmpty() ? null : new TrimmerSetting(goals.get(), this);
     }
 
     /** Sets the trimmers of a drawn unit, at nominal line and temperature, as its maker would; without any nothing moves. */
@@ -44,8 +56,22 @@ final class UnitSolver {
         solveAt(unit, unit.rampOhms(trackShare), into);
     }
 
-    /** The same for a whole R_E in ohms. */
-    void solveAt(UnitValues unit, double rampOhms, UnitOutcome into) {
+    /** Firing angle at a whole R_E in ohms, rad; a thyristor that stays off counts as fired at the half cycle's end. */
+    double latestRad(UnitValues unit, double rampOhms) {
+        double rad = swift != null && swift.solve(unit, rampOhms)
+                ? swift.firingRad()
+                : referred(unit, rampOhms).shown().firingRad().orElse(Double.NaN);
+        return Double.isNaN(rad) ? Math.PI : rad;
+    }
+
+    /** What the first relations make of a unit's delay, C_E ln(1/(1 - V_P/V_S)), s for each ohm of R_E. */
+    double delayPerOhm(UnitValues unit) {
+        unit.fill(network, unit.rampOhms(1));
+        double peak = network.peakShare() + network.emitterDropVolts / network.zenerKneeVolts;
+        return -network.capacitorFarads * Math.log1p(-Math.min(HIGHEST_PEAK, peak));
+    }
+
+    private void solveAt(UnitValues unit, double rampOhms, UnitOutcome into) {
         if (swift != null && swift.solve(unit, rampOhms)) {
             into.firingRad = swift.firingRad();
             into.state = swift.state();
@@ -57,14 +83,17 @@ final class UnitSolver {
     }
 
     private void solveByReference(UnitValues unit, double rampOhms, UnitOutcome into) {
-        unit.fill(network, rampOhms);
-        Condition condition = new Condition(unit.lineVolts, unit.lineHertz, unit.celsius);
-        Solution solution = Firing.solve(design, condition, network);
-        LoadResult load = LoadPower.of(design, condition, solution);
+        Solution solution = referred(unit, rampOhms);
+        LoadResult load = LoadPower.of(design, solution.condition(), solution);
         into.firingRad = solution.shown().firingRad().orElse(Double.NaN);
         into.state = solution.state();
         into.watts = load.watts();
         into.fraction = load.fraction();
+    }
+
+    private Solution referred(UnitValues unit, double rampOhms) {
+        unit.fill(network, rampOhms);
+        return Firing.solve(design, new Condition(unit.lineVolts, unit.lineHertz, unit.celsius), network);
     }
 
     /** Whether the load can get both half cycles. */

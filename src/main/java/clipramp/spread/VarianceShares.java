@@ -73,7 +73,7 @@ final class VarianceShares {
         UnitValues unit = lot.blank();
         factor.slot().set(unit, value);
         UnitOutcome outcome = new UnitOutcome();
-        UnitSolver solver = new UnitSolver(lot.design());
+        UnitSolver solver = lot.solver();
         solver.prepare(unit);
         solver.solve(unit, share, outcome);
         return outcome;
@@ -84,7 +84,7 @@ final class VarianceShares {
         double[] fractions = new double[units];
         int chunk = 64;
         IntStream.range(0, (units + chunk - 1) / chunk).parallel().forEach(c -> {
-            UnitSolver solver = new UnitSolver(lot.design());
+            UnitSolver solver = lot.solver();
             UnitValues unit = lot.blank();
             UnitOutcome outcome = new UnitOutcome();
             for (int i = c * chunk; i < Math.min(units, (c + 1) * chunk); i++) {
