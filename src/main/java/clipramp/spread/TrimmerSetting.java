@@ -16,8 +16,8 @@ final class TrimmerSetting {
     /** And from this near along the nominal unit's. */
     private static final double THERE = 5e-6;
 
-    /** Two solutions do for most units; where a jump is met there is no setting to be found. */
-    private static final int MOST_RUNS = 8;
+    /** Two or three do for most units; where the angle is jumped over, the nearest of these is taken. */
+    private static final int MOST_RUNS = 16;
 
     private static final double LEAST_FOLLOW = 0.3;
     private static final double MOST_FOLLOW = 3;
@@ -90,6 +90,8 @@ final class TrimmerSetting {
         double late = Double.POSITIVE_INFINITY;
         double ohmsBefore = Double.NaN;
         double radBefore = Double.NaN;
+        double best = guess;
+        double off = Double.POSITIVE_INFINITY;
         for (int run = 0; run < MOST_RUNS; run++) {
             double rad = solver.latestRad(unit, ohms);
             double lacking = Math.log(mark.firingRad() / rad);
@@ -102,10 +104,14 @@ final class TrimmerSetting {
             if (Math.abs(lacking) < (known ? NEAR : THERE)) {
                 return next;
             }
+            if (Math.abs(lacking) < off) {
+                off = Math.abs(lacking);
+                best = ohms;
+            }
             early = lacking > 0 ? ohms : early;
             late = lacking > 0 ? late : ohms;
             ohms = next > early && next < late ? next : Math.sqrt(early * late);
         }
-        return ohms;
+        return best;
     }
 }
