@@ -118,8 +118,8 @@ final class SizeCommand implements Callable<Integer> {
         Set<OpenPart> kept = EnumSet.noneOf(OpenPart.class);
         kept.addAll(named("--keep", keep));
         if (shape != null) {
-            // A straight knob wants the resistor across the pot for itself.
-            kept.addAll(EnumSet.of(OpenPart.ACROSS, OpenPart.TRIM_HIGH, OpenPart.TRIM_LOW));
+            // A straight knob wants the law and the resistor across the pot for itself.
+            kept.addAll(EnumSet.of(OpenPart.LAW, OpenPart.ACROSS, OpenPart.TRIM_HIGH, OpenPart.TRIM_LOW));
         }
         PartialDesign partial = PartialDesign.read(source(), named("--free", free), kept, library);
         SizingRequest request = partial.request(library, series());
@@ -166,7 +166,7 @@ final class SizeCommand implements Callable<Integer> {
                 throw Problems.refused(
                         "--with", "read \"" + setting + "\"; expected key=value, such as ramp.capacitor=220 nF.");
             }
-            text = text.withValue(
+            text = text.withOption(
                     setting.substring(0, equals).strip(),
                     setting.substring(equals + 1).strip());
         }

@@ -70,6 +70,11 @@ public record DesignText(String name, String text, List<String> notes) {
         return changed(edit(), edit -> edit.remove(path));
     }
 
+    /** What {@code --with} sets: a value, or with none where that is no value of the key nothing at all. */
+    public DesignText withOption(String path, String value) {
+        return value.equals("none") && !Overrides.keepsNone(path) ? without(path) : withValue(path, value);
+    }
+
     /** The text under another file's name. */
     public DesignText named(String newName) {
         return new DesignText(newName, text, notes);

@@ -105,7 +105,7 @@ final class Overrides {
             return setItem(node, steps, depth, value, last);
         }
         Mapping mapping = asMapping(node, steps, depth);
-        if (last && isRemoval(value) && !keepsNone(steps)) {
+        if (last && isRemoval(value) && !keepsNone(keyOf(steps))) {
             return mapping.without(step);
         }
         Node below = mapping.get(step).orElse(Mapping.empty(Place.override()));
@@ -123,13 +123,15 @@ final class Overrides {
     }
 
     /** Where "none" is itself a word of the key, or the key may be none, it stays and is not assumed. */
-    private static boolean keepsNone(List<String> steps) {
-        String path =
-                String.join(".", steps.stream().filter(s -> !s.startsWith("[")).toList());
+    static boolean keepsNone(String path) {
         return KeyCatalogue.standard()
                 .find(path)
                 .filter(k -> k.words().contains("none") || k.need() == Key.Need.OPTIONAL)
                 .isPresent();
+    }
+
+    private static String keyOf(List<String> steps) {
+        return String.join(".", steps.stream().filter(s -> !s.startsWith("[")).toList());
     }
 
     private Node setItem(Node node, List<String> steps, int depth, Node value, boolean last) {

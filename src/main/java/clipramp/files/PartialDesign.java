@@ -118,10 +118,12 @@ public record PartialDesign(DesignText text, LoadedDesign loaded, Set<OpenPart> 
             return path.contains(".") ? path.substring(0, path.lastIndexOf('.')) : "";
         }
 
-        private void fill(OpenPart part, String value) {
-            if (fill(part.key(), value)) {
+        private boolean fill(OpenPart part, String value) {
+            boolean missing = fill(part.key(), value);
+            if (missing) {
                 open.add(part);
             }
+            return missing;
         }
 
         /** A part that most designs do without; "none" keeps it out. */
@@ -181,12 +183,13 @@ public record PartialDesign(DesignText text, LoadedDesign loaded, Set<OpenPart> 
             fill(OpenPart.FIXED, RESISTOR);
             if (!value("ramp.pot").equals(Optional.of("none"))) {
                 boolean whole = value("ramp.pot").isEmpty();
-                fill(OpenPart.TRACK, "25 kΩ ±10 % 0.5 W");
+                if (fill(OpenPart.TRACK, "25 kΩ ±10 % 0.5 W")) {
+                    fill(OpenPart.LAW, "linear");
+                }
                 mayBeAdded(OpenPart.ACROSS);
                 mayBeAdded(OpenPart.TRIM_HIGH);
                 mayBeAdded(OpenPart.TRIM_LOW);
                 if (whole) {
-                    fill("ramp.pot.law", "linear");
                     fill("ramp.pot.sense", "falling");
                 }
             }

@@ -3,6 +3,8 @@ package clipramp.files;
 import clipramp.circuit.Design;
 import clipramp.circuit.GateDrive;
 import clipramp.circuit.Part;
+import clipramp.circuit.Pot;
+import clipramp.circuit.PotLaw;
 import clipramp.circuit.PulseTransformer;
 import clipramp.circuit.Trigger.ProgrammableTrigger;
 import clipramp.circuit.Trigger.UnijunctionTrigger;
@@ -10,6 +12,7 @@ import clipramp.sizing.OpenPart;
 import clipramp.units.QuantityText;
 import clipramp.units.Unit;
 import java.util.Optional;
+import java.util.OptionalDouble;
 import java.util.Set;
 
 /** Writes chosen parts into the text of a request, which keeps everything else as its author wrote it. */
@@ -26,11 +29,31 @@ public final class SizedText {
         DesignText changed = text;
         for (OpenPart part : parts) {
             Optional<String> value = value(part, design);
-            if (value.isPresent()) {
+            if (part == OpenPart.LAW) {
+                changed = law(changed, design);
+            } else if (value.isPresent()) {
                 changed = changed.withValue(part.key(), value.get());
             }
         }
         return changed;
+    }
+
+    /** A law is a word, and a logarithmic one the share at half rotation beside it. */
+    private static DesignText law(DesignText text, Design design) {
+        Optional<PotLaw> law = design.ramp().pot().map(Pot::law);
+        if (law.isEmpty() || law.get() instanceof PotLaw.Table) {
+            return text;
+        }
+        DesignText changed =
+                text.withValue(OpenPart.LAW.key(), law.get().word()).without("ramp.pot.points");
+        OptionalDouble half = law.get() instanceof PotLaw.Logarithmic log
+                ? OptionalDouble.of(log.half())
+                : law.get() instanceof PotLaw.ReverseLogarithmic log
+                        ? OptionalDouble.of(log.half())
+                        : OptionalDouble.empty();
+        return half.isPresent()
+                ? changed.withValue("ramp.pot.half", QuantityText.exact(half.getAsDouble(), Unit.FRACTION))
+                : changed.without("ramp.pot.half");
     }
 
     /** A text with the design's pot, law and shunt included. */
@@ -50,6 +73,7 @@ public final class SizedText {
             case CAPACITOR -> Optional.of(FlowText.partText(design.ramp().capacitor(), Unit.FARAD));
             case FIXED -> ohms(design.ramp().fixed());
             case TRACK -> design.ramp().pot().flatMap(p -> ohms(p.track()));
+            case LAW -> design.ramp().pot().map(p -> p.law().word());
             case ACROSS -> design.ramp().pot().flatMap(p -> p.shunt()).flatMap(SizedText::ohms);
             case TRIM_HIGH -> design.ramp().trimmers().high().flatMap(SizedText::ohms);
             case TRIM_LOW -> design.ramp().trimmers().low().flatMap(SizedText::ohms);

@@ -12,8 +12,11 @@ import org.jspecify.annotations.Nullable;
 
 /** Runs the firing circuit through half cycles, one after the other, and keeps what the last one showed. */
 final class HalfCycleRun {
-    /** Events in one half cycle beyond which something is wrong with the laws, not with the circuit. */
-    private static final int MOST_EVENTS = 200_000;
+    /**
+     * Events in one half cycle beyond which the ramp is no ramp any more: some two thousand pulses, tens of times what a
+     * ramp that still fires anything brings. Followed further, one check would take minutes.
+     */
+    private static final int MOST_EVENTS = 5_000;
 
     private final FiringCase firing;
     private final Stepper stepper;
@@ -97,13 +100,13 @@ final class HalfCycleRun {
         keepFor(end);
     }
 
-    private static void refuseBeyondCounting(int events) {
+    private void refuseBeyondCounting(int events) {
         if (events > MOST_EVENTS) {
             throw new RefusedCircuit(
-                    "trigger.device",
-                    "the circuit switches more than " + MOST_EVENTS
-                            + " times within one half cycle, too often to be"
-                            + " followed. Check the device's valley point, or make ramp.capacitor larger.");
+                    "ramp.capacitor",
+                    "the circuit switches more than " + MOST_EVENTS + " times within one half cycle (" + begun.size()
+                            + " pulses so far), more than is followed. Make ramp.capacitor larger; if it is not small,"
+                            + " check the valley point of trigger.device.");
         }
     }
 

@@ -62,7 +62,7 @@ public final class Fit {
                 values(problem, estimate, widened),
                 untouched(problem),
                 together(problem, estimate),
-                residuals(problem, estimate, freedom),
+                residuals(problem, estimate),
                 new Quality(
                         readings.count(),
                         used(problem, estimate),
@@ -180,16 +180,16 @@ public final class Fit {
                 : OptionalDouble.empty();
     }
 
-    private static List<Residual> residuals(BenchProblem problem, Estimate estimate, int freedom) {
+    private static List<Residual> residuals(BenchProblem problem, Estimate estimate) {
         List<Residual> residuals = new ArrayList<>();
         for (int i = 0; i < problem.observed().size(); i++) {
-            residuals.add(residual(problem, estimate, freedom, i));
+            residuals.add(residual(problem, estimate, i));
         }
         return residuals;
     }
 
-    private static Residual residual(BenchProblem problem, Estimate estimate, int freedom, int i) {
-        Oddity oddity = new Oddity(estimate.residual()[i], estimate.studentised(i, freedom), estimate.used()[i]);
+    private static Residual residual(BenchProblem problem, Estimate estimate, int i) {
+        Oddity oddity = new Oddity(estimate.residual()[i], estimate.standardised(i), estimate.used()[i]);
         BenchLine line = problem.line(i);
         if (i < problem.readingCount()) {
             return oddity.of(line, problem.reading(i), problem.deviation(i));
@@ -203,10 +203,10 @@ public final class Fit {
      * How odd one of the things observed is beside the fitted unit.
      *
      * @param off how far it lies from what the unit would show, in its own deviations
-     * @param studentised the same, by what a fit without it leaves room for
+     * @param standardised the same, by the deviation that instruments and fit leave it, however far the others scatter
      * @param belongs whether it was used
      */
-    private record Oddity(double off, double studentised, boolean belongs) {
+    private record Oddity(double off, double standardised, boolean belongs) {
         Residual of(BenchLine line, Reading reading, double deviation) {
             Meter meter = reading.meter();
             return told(line, reading.column(), meter.words(), meter.unit(), reading.value(), deviation);
@@ -229,7 +229,7 @@ public final class Fit {
         }
 
         private Residual told(BenchLine line, String column, String what, Unit unit, double value, double deviation) {
-            return new Residual(line.line(), column, what, unit, value, value - off * deviation, studentised, belongs);
+            return new Residual(line.line(), column, what, unit, value, value - off * deviation, standardised, belongs);
         }
     }
 }

@@ -11,7 +11,8 @@ import clipramp.units.Unit;
  * @param unit its unit
  * @param read as read, SI (radians for angles)
  * @param shown what the fitted unit shows, SI; for a setting or a line voltage what it must have been
- * @param deviations how far apart they are, in standard deviations of their difference
+ * @param deviations how far apart they are, in standard deviations that instruments and fit leave their difference,
+ *     not widened by how far the readings scatter
  * @param belongs whether it took part in the fit
  */
 public record Residual(

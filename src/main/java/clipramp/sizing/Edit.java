@@ -5,6 +5,7 @@ import clipramp.circuit.Design;
 import clipramp.circuit.GateDrive;
 import clipramp.circuit.Part;
 import clipramp.circuit.Pot;
+import clipramp.circuit.PotLaw;
 import clipramp.circuit.PulseTransformer;
 import clipramp.circuit.Ramp;
 import clipramp.circuit.Thyristor;
@@ -58,6 +59,11 @@ final class Edit {
     static Design track(Design design, Part track) {
         Pot pot = design.ramp().pot().orElseThrow();
         return pot(design, new Pot(track, pot.endOhms(), pot.law(), pot.sense(), pot.shunt()));
+    }
+
+    static Design law(Design design, PotLaw law) {
+        Pot pot = design.ramp().pot().orElseThrow();
+        return pot(design, new Pot(pot.track(), pot.endOhms(), law, pot.sense(), pot.shunt()));
     }
 
     static Design trimHigh(Design design, Optional<Part> high) {

@@ -18,7 +18,7 @@ import java.util.concurrent.CancellationException;
  */
 public final class KnobShaping {
     /** Tapers that pots are sold with: linear, and logarithmic ones either way (common practice). */
-    private static final List<PotLaw> LAWS = List.of(
+    static final List<PotLaw> LAWS = List.of(
             new PotLaw.Linear(),
             new PotLaw.Logarithmic(0.1),
             new PotLaw.Logarithmic(0.15),
@@ -99,7 +99,7 @@ public final class KnobShaping {
         for (Design sized : RampChoice.all(request, design, reach)) {
             Pot pot = sized.ramp().pot().orElseThrow();
             for (PotLaw law : LAWS) {
-                all.add(Edit.pot(sized, new Pot(pot.track(), pot.endOhms(), law, pot.sense(), pot.shunt())));
+                all.add(Edit.law(sized, law));
                 for (double end : List.of(
                         pot.endOhms(),
                         PreferredSeries.E12.nearest(END_SHARE * pot.track().value()))) {

@@ -13,6 +13,7 @@ public enum OpenPart {
     CAPACITOR("ramp.capacitor", "ramp"),
     FIXED("ramp.fixed", "ramp"),
     TRACK("ramp.pot.track", "ramp"),
+    LAW("ramp.pot.law", "ramp"),
     ACROSS("ramp.pot.shunt", "ramp"),
     TRIM_HIGH("ramp.trim-high", "ramp"),
     TRIM_LOW("ramp.trim-low", "ramp"),

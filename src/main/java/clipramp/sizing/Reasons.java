@@ -2,6 +2,7 @@ package clipramp.sizing;
 
 import clipramp.circuit.Design;
 import clipramp.circuit.Part;
+import clipramp.circuit.PotLaw;
 import clipramp.circuit.ThyristorDevice;
 import clipramp.circuit.Trigger.UnijunctionTrigger;
 import clipramp.margins.Check;
@@ -72,6 +73,7 @@ public final class Reasons {
             case CAPACITOR -> Optional.of(capacitor());
             case FIXED -> Optional.of(fixed());
             case TRACK -> design.ramp().pot().map(p -> track());
+            case LAW -> design.ramp().pot().map(p -> law());
             case ACROSS -> across();
             case TRIM_HIGH -> design.ramp().trimmers().high().map(t -> trimHigh());
             case TRIM_LOW -> design.ramp().trimmers().low().map(t -> trimLow());
@@ -121,6 +123,17 @@ public final class Reasons {
                 .pot()
                 .flatMap(p -> p.shunt())
                 .map(s -> "with its trimmer at the low end the slowest unit still fires before the collapse");
+    }
+
+    private String law() {
+        KnobShape shape = KnobShape.of(design, KnobShape.What.POWER);
+        String here = "the load's power lies at most " + text(shape.largestDeparture(), Unit.FRACTION)
+                + " of full off a straight line over the rotation";
+        if (design.ramp().pot().orElseThrow().law() instanceof PotLaw.Linear) {
+            return here;
+        }
+        KnobShape linear = KnobShape.of(Edit.law(design, new PotLaw.Linear()), KnobShape.What.POWER);
+        return here + "; with a linear one it would be " + text(linear.largestDeparture(), Unit.FRACTION);
     }
 
     private String trimHigh() {
@@ -226,6 +239,7 @@ public final class Reasons {
             case CAPACITOR -> text(d.ramp().capacitor().value(), Unit.FARAD);
             case FIXED -> ohms(d.ramp().fixed());
             case TRACK -> d.ramp().pot().map(p -> ohms(p.track())).orElse("");
+            case LAW -> d.ramp().pot().map(p -> p.law().word()).orElse("");
             case ACROSS ->
                 d.ramp().pot().flatMap(p -> p.shunt()).map(Reasons::ohms).orElse("none");
             case TRIM_HIGH -> d.ramp().trimmers().high().map(Reasons::ohms).orElse("none");

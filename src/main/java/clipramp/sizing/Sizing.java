@@ -2,6 +2,7 @@ package clipramp.sizing;
 
 import clipramp.circuit.Design;
 import clipramp.circuit.Part;
+import clipramp.circuit.RefusedCircuit;
 import clipramp.circuit.Wanted;
 import clipramp.circuit.Wanted.Goal;
 import clipramp.margins.Margin;
@@ -25,6 +26,10 @@ public final class Sizing {
     /** How often the nearest setting is taken back where nothing holds with it. */
     private static final int MOST_TRIALS = 3;
 
+    /** Worse outcomes come later; of equal ones those whose verdict is worse. */
+    private static final Comparator<SizingAnswer> BY_VERDICT = Comparator.comparing(SizingAnswer::outcome)
+            .thenComparingInt(answer -> rank(answer.check().verdict()));
+
     private Sizing() {}
 
     /**
@@ -33,7 +38,6 @@ public final class Sizing {
      *
      * @param request what is wanted, decided and open
      * @throws clipramp.circuit.RefusedCircuit where the decided parts are unsound
-     * @throws clipramp.power.UnsupportedLoadException for a load that cannot be solved
      */
     public static SizingAnswer propose(SizingRequest request) {
         return propose(request, Watch.NONE);
@@ -47,6 +51,32 @@ public final class Sizing {
      * @throws java.util.concurrent.CancellationException where the watch cancelled
      */
     public static SizingAnswer propose(SizingRequest request, Watch watch) {
+        SizingAnswer found = searched(request, watch);
+        boolean best = found.outcome() == Outcome.WORST_CASE && found.check().verdict() == Verdict.HOLDS;
+        return best
+                ? found
+                : standing(request).filter(s -> BY_VERDICT.compare(s, found) < 0).orElse(found);
+    }
+
+    /** What stands at the open parts, as it stands: the search starts elsewhere, and may end with less. */
+    private static Optional<SizingAnswer> standing(SizingRequest request) {
+        try {
+            return Optional.of(judge(request, request.design()));
+        } catch (RefusedCircuit unsound) {
+            return Optional.empty();
+        }
+    }
+
+    private static int rank(Verdict verdict) {
+        return switch (verdict) {
+            case HOLDS -> 0;
+            case NOT_JUDGED -> 1;
+            case TIGHT -> 2;
+            case FAILS -> 3;
+        };
+    }
+
+    private static SizingAnswer searched(SizingRequest request, Watch watch) {
         Search search = new Search(request, watch);
         Judged first = search.first();
         Optional<Nearest> nearest = failing(first).stream().anyMatch(m -> m.kind() == MarginKind.WANTED_HIGHEST)
@@ -193,7 +223,12 @@ public final class Sizing {
     }
 
     private static String nearest(Margin margin) {
-        return "The nearest that can be met: " + Amounts.of(margin.offered(), margin.unit()) + " in place of "
-                + Amounts.of(margin.demand(), margin.unit()) + " (" + margin.condition() + ").";
+        return switch (margin.kind()) {
+            case FULL_POWER_PULSE, SILENT, GATE_POLARITY, MISSED_HALF_CYCLES ->
+                "It is met or it is not, with nothing between; here it is not (" + margin.condition() + ").";
+            default ->
+                "The nearest that can be met: " + Amounts.of(margin.offered(), margin.unit()) + " in place of "
+                        + Amounts.of(margin.demand(), margin.unit()) + " (" + margin.condition() + ").";
+        };
     }
 }

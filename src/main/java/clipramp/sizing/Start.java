@@ -3,6 +3,7 @@ package clipramp.sizing;
 import clipramp.circuit.Design;
 import clipramp.circuit.GateDrive;
 import clipramp.circuit.Part;
+import clipramp.circuit.PotLaw;
 import clipramp.circuit.PulseTransformer;
 import clipramp.circuit.Stage;
 import clipramp.circuit.ThyristorDevice;
@@ -86,6 +87,9 @@ final class Start {
 
     /** Trimmers and what lies across the pot come last, if they are needed at all. */
     private void bare() {
+        if (request.isOpen(OpenPart.LAW) && design.ramp().pot().isPresent()) {
+            design = Edit.law(design, new PotLaw.Linear());
+        }
         if (request.isOpen(OpenPart.TRIM_HIGH)) {
             design = Edit.trimHigh(design, Optional.empty());
         }

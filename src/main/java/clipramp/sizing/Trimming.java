@@ -60,7 +60,7 @@ final class Trimming {
     }
 
     /**
-     * The design with trimmers, the simpler first: one, then two. Empty where they may not be chosen or no preset that is
+     * The design with trimmers, the simpler first: one, then two; of as many, the one with the straighter knob. Empty where they may not be chosen or no preset that is
      * sold reaches far enough.
      */
     static List<Design> of(SizingRequest request, Design design, Reach reach) {
@@ -74,14 +74,15 @@ final class Trimming {
         Trimming trimming = new Trimming(request, design, reach);
         List<Design> all = new ArrayList<>();
         trimming.high().ifPresent(high -> {
+            KnobOrder order = new KnobOrder(request, high, reach);
             if (request.isOpen(OpenPart.TRACK)) {
-                trimming.alone(high).ifPresent(all::add);
+                all.addAll(order.best(trimming.alone(high)));
             }
             if (request.isOpen(OpenPart.TRACK)
                     && request.isOpen(OpenPart.TRIM_LOW)
                     && request.isOpen(OpenPart.ACROSS)) {
-                trimming.low(high, LOW_SHARE).ifPresent(all::add);
-                trimming.low(high, CAREFUL_SHARE).ifPresent(all::add);
+                all.addAll(order.best(trimming.low(high, LOW_SHARE)));
+                all.addAll(order.best(trimming.low(high, CAREFUL_SHARE)));
             }
         });
         return all;
@@ -120,13 +121,14 @@ final class Trimming {
     }
 
     /** A plain track that every unit can live with once its high end is set. */
-    private Optional<Design> alone(Design high) {
+    private List<Design> alone(Design high) {
         Part track = high.ramp().pot().orElseThrow().track();
         return Stock.tracks(reach.lowestFrom() / 4, reach.collapse()).stream()
                 .map(track::withValue)
                 .filter(t -> isHeldByTrackAlone(high.ramp(), t))
                 .min(Comparator.comparingDouble(Part::value))
-                .map(t -> Edit.track(high, t));
+                .map(t -> List.of(Edit.track(high, t)))
+                .orElse(List.of());
     }
 
     private boolean isHeldByTrackAlone(Ramp high, Part track) {
@@ -138,16 +140,17 @@ final class Trimming {
                 && nominal + track.value() <= Math.min(reach.collapse(), reach.lowestTo());
     }
 
-    /** Track, resistor and preset across it for the lowest setting. */
-    private Optional<Design> low(Design high, double share) {
+    /** Tracks that serve for the lowest setting, each with the resistor and preset across it that suit it best. */
+    private List<Design> low(Design high, double share) {
         double series = high.ramp().seriesOhms();
         double most = Math.min(reach.collapse(), reach.lowestTo());
         double target = reach.lowestFrom() * Math.pow(most / reach.lowestFrom(), share);
         Pot pot = high.ramp().pot().orElseThrow();
-        Design best = null;
-        double farthest = Double.POSITIVE_INFINITY;
+        List<Design> all = new ArrayList<>();
         for (double track : Stock.tracks(target - series, 8 * target)) {
             Part trackPart = pot.track().withValue(track);
+            Design best = null;
+            double farthest = Double.POSITIVE_INFINITY;
             for (double trimmer : Stock.trimmers(track / 20, 20 * track)) {
                 // The track in parallel with R comes to the target less the fixed part.
                 double across = 1 / (1 / (target - series) - 1 / track);
@@ -167,10 +170,10 @@ final class Trimming {
                 }
             }
             if (best != null) {
-                return Optional.of(best);
+                all.add(best);
             }
         }
-        return Optional.empty();
+        return all;
     }
 
     private List<Double> around(double ohms) {

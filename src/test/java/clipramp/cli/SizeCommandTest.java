@@ -43,6 +43,23 @@ class SizeCommandTest {
         assertThat(run.out().replace(" ", "")).contains("\"outcome\":\"nothing\"", "wanted-highest", "\"nearest\"");
     }
 
+    /** As with every other command, none takes a key out where it is no value of its own. */
+    @Test
+    void noneTakesAKeyOut() {
+        String coupled = REQUEST + "gate: {coupling: direct, transformer: {ratio: 1}}\n";
+
+        assertThat(CliRun.withInput(coupled, "size", "-").err()).contains("gate.transformer", "has no place");
+        assertThat(CliRun.withInput(coupled, "size", "-", "--with=gate.transformer=none")
+                        .err())
+                .doesNotContain("has no place");
+        assertThat(CliRun.withInput(REQUEST, "size", "-", "--with=ramp.capacitor=none", "--with=gate.transformer=none")
+                        .code())
+                .isZero();
+        assertThat(CliRun.withInput(REQUEST, "size", "-", "--with=ramp.pot.shunt=none")
+                        .out())
+                .contains("shunt: none");
+    }
+
     @Test
     void refusesWhatIsNoPartAndNoSeries() {
         assertThat(CliRun.withInput(REQUEST, "size", "-", "--free=rampp").err()).contains("rampp", "Nearest: ramp");

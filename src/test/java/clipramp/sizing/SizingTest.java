@@ -4,6 +4,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.assertThatThrownBy;
 
 import clipramp.circuit.Design;
+import clipramp.circuit.PotLaw;
 import clipramp.files.DesignText.Reading;
 import clipramp.files.Example;
 import clipramp.files.InvalidInputException;
@@ -157,6 +158,46 @@ class SizingTest {
                             .verdict())
                     .isNotEqualTo(Verdict.FAILS);
         }
+    }
+
+    /** The trimmers' tracks want a shunt far under the pot's, which bends a linear track: a taper bends it back. */
+    @Test
+    void ofTrimmedDesignsThatHoldTheOneWithTheStraightKnobIsProposedUnlessTheLawIsDecided() {
+        String text = CABINET.formatted("bridge-ac", "92");
+        SizingAnswer free = Sizing.propose(Requests.request(text, PreferredSeries.E24));
+        PartialDesign partial = PartialDesign.read(
+                new Source("linear.yaml", text), Set.of(), EnumSet.of(OpenPart.LAW), Requests.LIBRARY);
+        SizingAnswer linear = Sizing.propose(partial.request(Requests.LIBRARY, PreferredSeries.E24));
+
+        assertThat(free.outcome()).isEqualTo(Outcome.WORST_CASE);
+        assertThat(linear.design().ramp().pot().orElseThrow().law()).isInstanceOf(PotLaw.Linear.class);
+        assertThat(KnobShape.of(free.design(), KnobShape.What.POWER).largestDeparture())
+                .isLessThan(0.16)
+                .isLessThan(0.6
+                        * KnobShape.of(linear.design(), KnobShape.What.POWER).largestDeparture());
+    }
+
+    @Test
+    void aFreedDesignThatStandsBetterThanWhatIsFoundIsKept() {
+        SizingRequest request = Requests.request(CABINET.formatted("bridge-dc", "92"), PreferredSeries.E24);
+        Design holds = Sizing.propose(request).design();
+        // Without trimmers to choose, the search alone comes to nominal parts only.
+        SizingRequest freed = new SizingRequest(
+                holds, EnumSet.of(OpenPart.CAPACITOR, OpenPart.TRACK), request.stock(), request.series());
+
+        assertThat(Sizing.propose(freed).outcome()).isEqualTo(Outcome.WORST_CASE);
+    }
+
+    @Test
+    void aDemandWithNothingBetweenIsToldInWords() {
+        String text = CABINET.formatted("bridge-dc", "92") + "gate: {polarity: negative}\n";
+        SizingAnswer answer = Sizing.propose(Requests.request(text, PreferredSeries.E24));
+
+        assertThat(answer.conflicts())
+                .filteredOn(c -> c.margin().id().equals("gate-polarity"))
+                .singleElement()
+                .satisfies(c ->
+                        assertThat(c.nearest()).doesNotContain("in place of").contains("nothing between"));
     }
 
     @Test
