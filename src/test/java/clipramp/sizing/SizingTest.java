@@ -189,18 +189,6 @@ class SizingTest {
     }
 
     @Test
-    void aDemandWithNothingBetweenIsToldInWords() {
-        String text = CABINET.formatted("bridge-dc", "92") + "gate: {polarity: negative}\n";
-        SizingAnswer answer = Sizing.propose(Requests.request(text, PreferredSeries.E24));
-
-        assertThat(answer.conflicts())
-                .filteredOn(c -> c.margin().id().equals("gate-polarity"))
-                .singleElement()
-                .satisfies(c ->
-                        assertThat(c.nearest()).doesNotContain("in place of").contains("nothing between"));
-    }
-
-    @Test
     void noTrimmerIsProposedWhereTheRequestSaysNone() {
         String text = CABINET.formatted("bridge-dc", "92") + "ramp: {trim-high: none, trim-low: none}\n";
         SizingAnswer answer = Sizing.propose(Requests.request(text, PreferredSeries.E24));
