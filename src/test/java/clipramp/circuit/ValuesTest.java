@@ -210,6 +210,7 @@ class ValuesTest {
                 making(() -> Changed.with(SampleDesigns.heater(), "clip.diodeDropVolts", 0.0)),
                 making(() -> Changed.with(SampleDesigns.heater(), "ramp.fixed.value", 0.0)),
                 making(() -> table(0, 0.3, 0.5, 0.3, 1, 0.3)),
+                making(() -> table(0, 0, 1, 1)),
                 making(() -> pot("endOhms", 0.0)));
     }
 

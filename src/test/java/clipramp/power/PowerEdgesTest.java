@@ -46,7 +46,8 @@ class PowerEdgesTest {
         double ohms = 20;
         double reactance = EUROPE.omega() * 0.1;
         Design design = with(Stage.TRIAC, coil(ohms, 0.1))
-                .withLine(new Line(230, 50, 207, 253, List.of(new Line.Harmonic(3, 0.2, 1), new Line.Harmonic(5, 0.1, 0))));
+                .withLine(new Line(
+                        230, 50, 207, 253, List.of(new Line.Harmonic(3, 0.2, 1), new Line.Harmonic(5, 0.1, 0))));
         double watts = 0;
         for (double[] order : new double[][] {{1, 1}, {3, 0.2}, {5, 0.1}}) {
             watts += Math.pow(230 * order[1], 2) * ohms / (ohms * ohms + Math.pow(order[0] * reactance, 2));
@@ -59,8 +60,8 @@ class PowerEdgesTest {
         // |sin|: mean 2/pi, orders 2k of amplitude (4/pi)/(4k² - 1); from any handbook on rectifiers.
         double ohms = 20;
         double henries = 0.05;
-        Design design = with(
-                Stage.BRIDGE_DC, new Load.Inductive(ohms, henries, Optional.of(new StageDiodes(0.9, 0.01))));
+        Design design =
+                with(Stage.BRIDGE_DC, new Load.Inductive(ohms, henries, Optional.of(new StageDiodes(0.9, 0.01))));
         double crest = Math.sqrt(2) * 230;
         double watts = Math.pow(crest * 2 / Math.PI, 2) / ohms;
         for (int k = 1; k < 400; k++) {
@@ -135,8 +136,7 @@ class PowerEdgesTest {
         double q = -half - root;
         double crestSeconds = Math.log(q / p) / (p - q);
         double crest = 300 / (henries * (p - q)) * (Math.exp(p * crestSeconds) - Math.exp(q * crestSeconds));
-        ReappliedVoltage slow =
-                ReappliedVoltage.of(coil(ohms, henries), Optional.of(new Snubber(1e-6, farads)), 300);
+        ReappliedVoltage slow = ReappliedVoltage.of(coil(ohms, henries), Optional.of(new Snubber(1e-6, farads)), 300);
         assertThat(slow.voltsPerSecond()).isCloseTo(crest / farads, within(1e-3 * crest / farads));
         assertThat(slow.peakVolts()).isCloseTo(300, within(1e-6));
     }
@@ -167,7 +167,8 @@ class PowerEdgesTest {
 
     @Test
     void aPathsSlopeAndHarmonicsShareTheSameSums() {
-        // A whole half cycle of odd orders: squares add by Parseval, means by the sum of 2 a_k/(k pi); divided by the loop.
+        // A whole half cycle of odd orders: squares add by Parseval, means by the sum of 2 a_k/(k pi); divided by the
+        // loop.
         Design design = Changed.with(Fired.textbook(Stage.TRIAC, 10), "thyristor.device.onState", new OnState(0, 2.5))
                 .withLine(new Line(230, 50, 207, 253, List.of(new Line.Harmonic(3, 0.1, 0))));
         HalfCycleCurrent half = new ResistorCurrent(design, EUROPE).firedAt(true, 0);
