@@ -48,6 +48,14 @@ final class Outputs {
         return size.word().toLowerCase(Locale.ROOT);
     }
 
+    /** A record replaces an older one; a slip of the name must not replace a design or its readings. */
+    private static void requireRecordName(String name) {
+        if (name.toLowerCase(Locale.ROOT).matches(".*\\.(ya?ml|csv|json|svg|png)")) {
+            throw Problems.refused(
+                    name, "the record is a PDF; expected a file name that ends in .pdf. Nothing was written.");
+        }
+    }
+
     static void requirePlotName(String name) {
         if (!isSvg(name) && !name.toLowerCase(Locale.ROOT).endsWith(".png")) {
             throw Problems.refused("--plot", "read \"" + name + "\"; expected a file name that ends in .svg or .png.");
@@ -76,6 +84,7 @@ final class Outputs {
 
     /** Writes a record whose content is there already. */
     static void record(String name, RecordContent content, PageSize size) {
+        requireRecordName(name);
         withoutDisplay();
         write(name, out -> DesignRecord.write(content, out, size), true);
     }

@@ -48,6 +48,16 @@ class RecordFileTest {
     }
 
     @Test
+    void aRecordIsNeverWrittenOverADesign(@TempDir Path folder) throws IOException {
+        Path design = Files.copy(Path.of(DESIGN), folder.resolve("mine.yaml"));
+        CliRun run = CliRun.of("record", design.toString(), "--out=" + design);
+
+        assertThat(run.code()).isEqualTo(2);
+        assertThat(run.err()).contains("mine.yaml", ".pdf", "Nothing was written");
+        assertThat(design).hasSameTextualContentAs(Path.of(DESIGN));
+    }
+
+    @Test
     void aFailingDesignGetsItsRecordToo(@TempDir Path folder) {
         Path pdf = folder.resolve("record.pdf");
         CliRun run = CliRun.of("record", "examples/cabinet-gone-wrong.yaml", "--out=" + pdf);
