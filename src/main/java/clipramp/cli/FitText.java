@@ -49,7 +49,7 @@ final class FitText {
 
     private void strangers() {
         if (result.strangers().isEmpty()) {
-            out.line("Every reading belongs.");
+            out.line(FitWords.noStrangers(result));
         } else {
             out.strongLine("Do not belong", " (left out of the fit; read them again)");
             for (Residual stranger : result.strangers()) {

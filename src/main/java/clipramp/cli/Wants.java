@@ -68,7 +68,14 @@ final class Wants {
 
     /** A power in watts, or a share of full-wave full power. */
     static Answered rampOhmsForPower(String option, String text, Design design, Condition condition) {
-        double watts = Conditions.watts(option, text, LoadPower.fullWatts(design, condition));
+        double fullWatts = LoadPower.fullWatts(design, condition);
+        double watts = Conditions.watts(option, text, fullWatts);
+        if (watts > fullWatts) {
+            throw refused(
+                    option,
+                    text,
+                    "this load's full power is " + QuantityText.format(fullWatts, Unit.WATT) + " at most");
+        }
         return found(
                 option,
                 text,

@@ -30,7 +30,7 @@ final class FitView {
         int strangers = result.strangers().size();
         add(
                 strangers == 0
-                        ? "● Every reading belongs."
+                        ? "● " + FitWords.noStrangers(result)
                         : "✕ " + FitWords.count(strangers, "reading")
                                 + " left out of the fit and marked in the table. Read "
                                 + (strangers == 1 ? "it again." : "them again."),

@@ -26,6 +26,9 @@ public final class ObservationReader {
 
     private static final double MOST_VOLTS = 1e4;
 
+    /** What stands behind a decimal comma, in a list that commas part. */
+    private static final String REST_OF_DECIMAL = "\\d+\\s*[a-zA-Z]*";
+
     private static final Map<String, Set<LoadGets>> LOAD_WORDS = Map.of(
             "none", Set.of(LoadGets.NOTHING),
             "half", Set.of(LoadGets.HALF),
@@ -52,6 +55,10 @@ public final class ObservationReader {
         for (String one : text.split(",", -1)) {
             if (one.isBlank()) {
                 throw refused(text, "an observation is missing beside a comma");
+            }
+            if (one.matches(REST_OF_DECIMAL) && !all.isEmpty()) {
+                String half = all.get(all.size() - 1).text();
+                throw refused(half + "," + one, "decimals take a dot: " + half + "." + one + "?");
             }
             all.add(one(one.strip()));
         }

@@ -9,6 +9,8 @@ import java.util.List;
 
 /** Reads the conditions that are given beside a design: {@code --line=207V}, {@code --temperature=0degC} and their like. */
 public final class Conditions {
+    private static final double MOST_WATTS = 1e9;
+
     private Conditions() {}
 
     /** Line voltage in V: volts, or a signed share of the design's nominal line. */
@@ -41,7 +43,7 @@ public final class Conditions {
     }
 
     /**
-     * A load power in W: watts, or a share of full power.
+     * A load power in W: watts, which may be more than the load takes, or a share of full power.
      *
      * @param option the option's name, which a refusal carries
      * @param fullWatts full power, W
@@ -49,7 +51,7 @@ public final class Conditions {
     public static double watts(String option, String text, double fullWatts) {
         return read(option, () -> {
             var q = QuantityReader.readOneOf(
-                    text, List.of(Expected.within(Unit.WATT, 0, fullWatts), Expected.within(Unit.FRACTION, 0, 1)));
+                    text, List.of(Expected.within(Unit.WATT, 0, MOST_WATTS), Expected.within(Unit.FRACTION, 0, 1)));
             return q.unit() == Unit.WATT ? q.value() : q.value() * fullWatts;
         });
     }

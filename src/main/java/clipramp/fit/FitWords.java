@@ -73,6 +73,13 @@ public final class FitWords {
                 + " reads nearly alike";
     }
 
+    /** What is said where no reading was left out. A bad fit as a whole is no praise of its readings. */
+    public static String noStrangers(FitResult result) {
+        return result.quality().widened() > HARDLY_OF_IT
+                ? "No single reading stands out, but together they do not fit this design."
+                : "Every reading belongs.";
+    }
+
     /** How much the readings tell, and how well they fit. */
     public static List<String> quality(FitResult result) {
         Quality quality = result.quality();

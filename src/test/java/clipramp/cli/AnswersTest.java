@@ -246,6 +246,13 @@ class AnswersTest {
     }
 
     @Test
+    void morePowerThanTheLoadTakesIsAnsweredWithWhatItTakes() {
+        CliRun run = CliRun.of("map", HOLDS, "--for-power=5kW");
+        assertThat(run.code()).isEqualTo(2);
+        assertThat(run.err()).contains("5kW", "full power is 700 W").doesNotContain("mW");
+    }
+
+    @Test
     void mapGoesBackwardsFromAngleAndPower() {
         assertThat(json("map", HOLDS, "--for-angle=60").at("/knob/0/firingDeg").doubleValue())
                 .isCloseTo(60, within(1e-6));

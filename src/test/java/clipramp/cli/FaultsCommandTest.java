@@ -58,6 +58,13 @@ class FaultsCommandTest {
     }
 
     @Test
+    void aDecimalCommaIsRecognisedAmongCommasThatPart() {
+        CliRun run = CliRun.of("faults", CABINET, "--seen=load:none,TP1=19,5V");
+        assertThat(run.code()).isEqualTo(2);
+        assertThat(run.err()).contains("TP1=19,5V", "decimals take a dot: TP1=19.5V?");
+    }
+
+    @Test
     void aFixedRampHasNoKnobToTurn() {
         CliRun run = CliRun.of("faults", CABINET, "--with=ramp.pot=none");
         assertThat(run.code()).isZero();

@@ -94,6 +94,15 @@ class FitCommandTest {
     }
 
     @Test
+    void readingsThatFitNothingAreNotPraised(@TempDir Path folder) throws IOException {
+        Path readings = folder.resolve("far-off.csv");
+        Files.writeString(readings, "knob (%),firing angle (deg)\n5,43\n40,97\n80,50\n");
+        CliRun run = CliRun.of("fit", DESIGN, readings.toString());
+
+        assertThat(run.out()).contains("together they do not fit this design").doesNotContain("Every reading belongs");
+    }
+
+    @Test
     void theRecordHasAPageAboutTheUnit(@TempDir Path folder) throws IOException {
         Path pdf = folder.resolve("unit.pdf");
         CliRun run = CliRun.of("fit", DESIGN, READINGS, "--record=" + pdf);
