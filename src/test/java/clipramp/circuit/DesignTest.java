@@ -148,6 +148,10 @@ class DesignTest {
         Arrays.stream(Pot.Sense.values()).map(Pot.Sense::word).forEach(words::add);
         Arrays.stream(GateDrive.Coupling.values()).map(GateDrive.Coupling::word).forEach(words::add);
         Arrays.stream(GateDrive.Polarity.values()).map(GateDrive.Polarity::word).forEach(words::add);
+        words.add(new Load.Filament(1, 1, 1.55, 1).word());
+        words.add(new Load.Inductive(1, 1, Optional.empty()).word());
+        words.add(new PotLaw.ReverseLogarithmic(0.1).word());
+        assertThat(words).contains("filament", "inductive", "reverse-log");
         assertThat(words).doesNotHaveDuplicates().allMatch(word -> word.matches("[a-z]+(-[a-z]+)*"));
         assertThat(Set.of(new Load.Resistor(1).word(), new PotLaw.Linear().word(), new PotLaw.Logarithmic(0.1).word()))
                 .containsExactlyInAnyOrder("resistor", "linear", "log");

@@ -144,9 +144,15 @@ class SoundnessTest {
     @Test
     void theDeviceIsTheStagesOwn() {
         assertThat(Soundness.ofDevice(Stage.TRIAC, ThyristorDevice.Kind.TRIAC)).isEmpty();
-        assertThat(Soundness.ofDevice(Stage.TRIAC, ThyristorDevice.Kind.SCR)).hasSize(1);
+        assertThat(Soundness.ofDevice(Stage.TRIAC, ThyristorDevice.Kind.SCR))
+                .extracting(Reason::sentence)
+                .containsExactly("thyristor.device scr with stage triac: an SCR conducts one way, and this stage is one"
+                        + " device that conducts both. Use a triac, or stage inverse-parallel.");
         assertThat(Soundness.ofDevice(Stage.BRIDGE_DC, ThyristorDevice.Kind.TRIAC))
-                .hasSize(1);
+                .extracting(Reason::sentence)
+                .containsExactly(
+                        "thyristor.device triac with stage bridge-dc: this stage is built of SCRs. Use an SCR, or"
+                                + " stage triac.");
     }
 
     @Test
