@@ -174,32 +174,17 @@ final class CheckText {
         Pulse pulse = summary.pulse();
         out.line(
                 summary.atKnob().isPresent() ? "Pulse at knob " + KnobText.position(summary.atKnob()) + " %" : "Pulse");
-        out.lines(TextTable.ofFacts(out.spelling())
-                .row(
-                        "gate current, peak",
-                        Shown.amount(pulse.peakGateAmps(), Unit.AMPERE),
-                        "gate charge",
-                        Shown.amount(pulse.gateCoulombs(), Unit.COULOMB))
-                .row(
-                        "gate voltage, peak",
-                        Shown.amount(pulse.peakGateVolts(), Unit.VOLT),
-                        "gate energy",
-                        Shown.amount(pulse.gateJoules(), Unit.JOULE))
-                .row(
-                        "gate power, peak",
-                        Shown.amount(pulse.peakGateWatts(), Unit.WATT),
-                        "gate power, mean",
-                        Shown.amount(summary.meanGateWatts(), Unit.WATT))
-                .row(
-                        "base one, peak",
-                        Shown.amount(pulse.peakBaseOneVolts(), Unit.VOLT),
-                        "from the capacitor",
-                        Shown.amount(pulse.capacitorJoules(), Unit.JOULE))
-                .row(
-                        "above trigger current",
-                        Shown.amount(pulse.aboveTriggerSeconds(), Unit.SECOND),
-                        "gate between pulses",
-                        Shown.amount(summary.quiescentGateVolts(), Unit.VOLT))
+        out.lines(new Facts(out.spelling())
+                .amount("gate current, peak", pulse.peakGateAmps(), Unit.AMPERE)
+                .amount("gate charge", pulse.gateCoulombs(), Unit.COULOMB)
+                .amount("gate voltage, peak", pulse.peakGateVolts(), Unit.VOLT)
+                .amount("gate energy", pulse.gateJoules(), Unit.JOULE)
+                .amount("gate power, peak", pulse.peakGateWatts(), Unit.WATT)
+                .amount("gate power, mean", summary.meanGateWatts(), Unit.WATT)
+                .amount("base one, peak", pulse.peakBaseOneVolts(), Unit.VOLT)
+                .amount("from the capacitor", pulse.capacitorJoules(), Unit.JOULE)
+                .amount("above trigger current", pulse.aboveTriggerSeconds(), Unit.SECOND)
+                .amount("gate between pulses", summary.quiescentGateVolts(), Unit.VOLT)
                 .lines());
         out.line("");
     }
@@ -207,22 +192,13 @@ final class CheckText {
     private void supply() {
         Dissipation bears = check.dissipation();
         out.line("Supply and trigger device" + (check.design().ramp().pot().isPresent() ? " at mid-knob" : ""));
-        out.lines(TextTable.ofFacts(out.spelling())
-                .row(
-                        "clipped from",
-                        Shown.degrees(check.clipFromRad()) + "°",
-                        "dropper",
-                        Shown.amount(bears.dropperWatts(), Unit.WATT))
-                .row(
-                        "zener",
-                        Shown.amount(bears.zenerWatts(), Unit.WATT),
-                        "zener current, peak",
-                        Shown.amount(bears.zenerPeakAmps(), Unit.AMPERE))
-                .row(
-                        "trigger device",
-                        Shown.amount(bears.deviceWatts(), Unit.WATT),
-                        "emitter current, peak",
-                        Shown.amount(bears.emitterPeakAmps(), Unit.AMPERE))
+        out.lines(new Facts(out.spelling())
+                .fact("clipped from", Shown.degrees(check.clipFromRad()) + "°")
+                .amount("dropper", bears.dropperWatts(), Unit.WATT)
+                .amount("zener", bears.zenerWatts(), Unit.WATT)
+                .amount("zener current, peak", bears.zenerPeakAmps(), Unit.AMPERE)
+                .amount("trigger device", bears.deviceWatts(), Unit.WATT)
+                .amount("emitter current, peak", bears.emitterPeakAmps(), Unit.AMPERE)
                 .lines());
         out.line("");
     }

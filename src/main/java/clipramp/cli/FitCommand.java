@@ -87,16 +87,30 @@ final class FitCommand implements Callable<Integer> {
         LoadedDesign loaded = design.load(session, text);
         Design circuit = loaded.design();
         Source bench = Inputs.source(session, readings);
-        Readings read = ReadingsFile.read(bench, circuit, celsius());
-        OptionalDouble volts = design.lineVolts(circuit);
-        if (volts.isPresent()) {
-            read = read.onLine(volts.getAsDouble());
-        }
-        FitResult result = fitted(circuit, read);
+        FitResult result = fitted(circuit, read(bench, circuit));
         List<String> notes = new ArrayList<>(FitWords.notes(result));
         Optional<DesignText> built =
                 Optional.ofNullable(out).map(name -> AsBuilt.of(DesignText.of(text), circuit, result));
         built.ifPresent(b -> notes.addAll(b.notes()));
+        writeFiles(loaded, result, built);
+        if (json) {
+            session.out().exactly(FitJson.of(loaded, result, notes, ReadingsFile.digest(bench), out, session.ascii()));
+        } else if (built.isPresent() && Inputs.STANDARD_INPUT.equals(out)) {
+            session.out().exactly(built.get().text());
+        } else {
+            new FitText(session.out(), loaded, result, notes).print();
+            sayWhatWasWritten();
+        }
+        return result.isTelling() ? ExitCode.ANSWERED : ExitCode.FAILS;
+    }
+
+    private Readings read(Source bench, Design circuit) {
+        Readings read = ReadingsFile.read(bench, circuit, celsius());
+        OptionalDouble volts = design.lineVolts(circuit);
+        return volts.isPresent() ? read.onLine(volts.getAsDouble()) : read;
+    }
+
+    private void writeFiles(LoadedDesign loaded, FitResult result, Optional<DesignText> built) {
         if (out != null && built.isPresent() && !out.equals(Inputs.STANDARD_INPUT)) {
             byte[] bytes = built.get().text().getBytes(StandardCharsets.UTF_8);
             Outputs.write(out, file -> file.write(bytes), replace);
@@ -106,23 +120,18 @@ final class FitCommand implements Callable<Integer> {
                     RecordContent.of(loaded, design.check(loaded), design.library(session), Program.version());
             Outputs.record(record, content.withFit(result), PageSize.A4);
         }
-        if (json) {
-            session.out().exactly(FitJson.of(loaded, result, notes, ReadingsFile.digest(bench), out, session.ascii()));
-        } else if (built.isPresent() && Inputs.STANDARD_INPUT.equals(out)) {
-            session.out().exactly(built.get().text());
-        } else {
-            new FitText(session.out(), loaded, result, notes).print();
-            if (out != null) {
-                session.out().line("");
-                session.out().line("Written: " + out + ", the design as built.");
-                session.out().line("Next: clipramp check " + out);
-            }
-            if (record != null) {
-                session.out().line("");
-                session.out().line("Record: " + record);
-            }
+    }
+
+    private void sayWhatWasWritten() {
+        if (out != null) {
+            session.out().line("");
+            session.out().line("Written: " + out + ", the design as built.");
+            session.out().line("Next: clipramp check " + out);
         }
-        return result.isTelling() ? ExitCode.ANSWERED : ExitCode.FAILS;
+        if (record != null) {
+            session.out().line("");
+            session.out().line("Record: " + record);
+        }
     }
 
     private FitResult fitted(Design circuit, Readings read) {

@@ -20,22 +20,13 @@ final class LineText {
         LineCurrent current = worst.current();
         String where = worst.position().isPresent() ? " at knob " + KnobText.position(worst.position()) + " %" : "";
         out.line("Line current" + where + ", where it is most distorted for the table");
-        out.lines(TextTable.ofFacts(out.spelling())
-                .row(
-                        "rms",
-                        Shown.amount(current.rmsAmps(), Unit.AMPERE),
-                        "fundamental",
-                        Shown.amount(current.fundamentalAmps(), Unit.AMPERE))
-                .row(
-                        "distortion",
-                        Shown.amount(current.distortion(), Unit.FRACTION),
-                        "direct part",
-                        Shown.amount(Math.abs(current.dcAmps()) < 1e-9 ? 0 : current.dcAmps(), Unit.AMPERE))
-                .row(
-                        "power factor",
-                        Shown.fixed(current.powerFactor(), 3),
-                        "of displacement",
-                        Shown.fixed(current.displacementFactor(), 3))
+        out.lines(new Facts(out.spelling())
+                .amount("rms", current.rmsAmps(), Unit.AMPERE)
+                .amount("fundamental", current.fundamentalAmps(), Unit.AMPERE)
+                .amount("distortion", current.distortion(), Unit.FRACTION)
+                .amount("direct part", Math.abs(current.dcAmps()) < 1e-9 ? 0 : current.dcAmps(), Unit.AMPERE)
+                .fact("power factor", Shown.fixed(current.powerFactor(), 3))
+                .fact("of displacement", Shown.fixed(current.displacementFactor(), 3))
                 .lines());
         orders(out, check);
         for (LineCheck.Rule rule : check.rules()) {

@@ -115,13 +115,7 @@ final class SizeCommand implements Callable<Integer> {
     public Integer call() {
         boolean shippedOnly = profiles.shippedOnly();
         ProfileLibrary library = Inputs.libraryOf(session, file, shippedOnly);
-        Set<OpenPart> kept = EnumSet.noneOf(OpenPart.class);
-        kept.addAll(named("--keep", keep));
-        if (shape != null) {
-            // A straight knob wants the law and the resistor across the pot for itself.
-            kept.addAll(EnumSet.of(OpenPart.LAW, OpenPart.ACROSS, OpenPart.TRIM_HIGH, OpenPart.TRIM_LOW));
-        }
-        PartialDesign partial = PartialDesign.read(source(), named("--free", free), kept, library);
+        PartialDesign partial = PartialDesign.read(source(), named("--free", free), kept(), library);
         SizingRequest request = partial.request(library, series());
         SizingAnswer answer = compensate ? Sizing.proposeCompensated(request) : Sizing.propose(request);
         Optional<KnobShape> shaped = shaped(request, answer);
@@ -146,6 +140,16 @@ final class SizeCommand implements Callable<Integer> {
             new SizeText(session.out(), loaded, partial, result).print(text, out);
         }
         return answer.holds() ? ExitCode.ANSWERED : ExitCode.FAILS;
+    }
+
+    private Set<OpenPart> kept() {
+        Set<OpenPart> kept = EnumSet.noneOf(OpenPart.class);
+        kept.addAll(named("--keep", keep));
+        if (shape != null) {
+            // A straight knob wants the law and the resistor across the pot for itself.
+            kept.addAll(EnumSet.of(OpenPart.LAW, OpenPart.ACROSS, OpenPart.TRIM_HIGH, OpenPart.TRIM_LOW));
+        }
+        return kept;
     }
 
     private Optional<KnobShape> shaped(SizingRequest request, SizingAnswer answer) {

@@ -1,12 +1,16 @@
 package clipramp.cli;
 
+import clipramp.circuit.Design;
 import clipramp.files.DesignText;
 import clipramp.files.LoadedDesign;
 import clipramp.files.PartialDesign;
 import clipramp.files.SizedText;
 import clipramp.margins.Margin;
 import clipramp.margins.Note;
+import clipramp.sizing.Compensation;
 import clipramp.sizing.Compensation.Choice;
+import clipramp.sizing.KnobShape;
+import clipramp.sizing.Reason;
 import clipramp.sizing.SizingAnswer;
 import clipramp.sizing.SizingAnswer.Conflict;
 import clipramp.sizing.UnitSetting;
@@ -30,44 +34,45 @@ final class SizeJson {
                     .put("deadTravel", answer.deadTravel())
                     .put("heatWatts", answer.watts())
                     .put("candidates", answer.candidates())
-                    .putObjects(
-                            "parts",
-                            result.reasons(),
-                            (part, r) -> part.put("key", r.part().key())
-                                    .put(
-                                            "value",
-                                            SizedText.value(r.part(), answer.design())
-                                                    .orElse(""))
-                                    .put("relation", r.relation())
-                                    .put("up", r.up())
-                                    .put("down", r.down()))
-                    .putObjects(
-                            "unitSettings",
-                            UnitSetting.of(answer.design()),
-                            (setting, at) -> setting.put("key", at.part().key())
-                                    .put("knob", at.position())
-                                    .put("firingDeg", Math.toDegrees(at.firingRad()))
-                                    .put("loadVolts", at.loadVolts())
-                                    .put("powerFraction", at.fraction()))
+                    .putObjects("parts", result.reasons(), (part, reason) -> part(part, reason, answer.design()))
+                    .putObjects("unitSettings", UnitSetting.of(answer.design()), SizeJson::unitSetting)
                     .putWords(
                             "cornerFailures",
                             answer.cornerFailures().stream().map(Margin::id).toList())
                     .putObjects("conflicts", answer.conflicts(), SizeJson::conflict)
-                    .putObject(
-                            "shape",
-                            result.shape(),
-                            (shape, s) -> shape.put("what", s.what().name().toLowerCase(Locale.ROOT))
-                                    .put("largestDeparture", s.largestDeparture())
-                                    .put("deadLow", s.deadLow())
-                                    .put("deadHigh", s.deadHigh())
-                                    .put("steepestPerDegree", s.steepestPerDegree()))
-                    .putObject(
-                            "compensation",
-                            result.compensation(),
-                            (c, found) -> c.putObject("flattest", flattest -> choice(flattest, found.flattest()))
-                                    .putObjects("rules", found.rules(), SizeJson::choice))
+                    .putObject("shape", result.shape(), SizeJson::shape)
+                    .putObject("compensation", result.compensation(), SizeJson::compensation)
                     .put("design", text.text());
         });
+    }
+
+    private static void part(Json json, Reason reason, Design design) {
+        json.put("key", reason.part().key())
+                .put("value", SizedText.value(reason.part(), design).orElse(""))
+                .put("relation", reason.relation())
+                .put("up", reason.up())
+                .put("down", reason.down());
+    }
+
+    private static void unitSetting(Json json, UnitSetting at) {
+        json.put("key", at.part().key())
+                .put("knob", at.position())
+                .put("firingDeg", Math.toDegrees(at.firingRad()))
+                .put("loadVolts", at.loadVolts())
+                .put("powerFraction", at.fraction());
+    }
+
+    private static void shape(Json json, KnobShape shape) {
+        json.put("what", shape.what().name().toLowerCase(Locale.ROOT))
+                .put("largestDeparture", shape.largestDeparture())
+                .put("deadLow", shape.deadLow())
+                .put("deadHigh", shape.deadHigh())
+                .put("steepestPerDegree", shape.steepestPerDegree());
+    }
+
+    private static void compensation(Json json, Compensation found) {
+        json.putObject("flattest", flattest -> choice(flattest, found.flattest()))
+                .putObjects("rules", found.rules(), SizeJson::choice);
     }
 
     private static void choice(Json json, Choice choice) {

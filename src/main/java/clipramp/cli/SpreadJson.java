@@ -3,8 +3,11 @@ package clipramp.cli;
 import clipramp.files.LoadedDesign;
 import clipramp.margins.Note;
 import clipramp.margins.Verdict;
+import clipramp.spread.Factor;
+import clipramp.spread.Influence;
 import clipramp.spread.PositionSpread;
 import clipramp.spread.PositionSpread.Extremes;
+import clipramp.spread.Remedy;
 import clipramp.spread.SpreadResult;
 import clipramp.spread.Yield;
 import java.util.List;
@@ -30,33 +33,36 @@ final class SpreadJson {
                     result.failures().entrySet(),
                     (o, entry) -> o.put("id", entry.getKey()).put("share", entry.getValue()));
             json.putObjects("knob", result.positions(), SpreadJson::position);
-            json.putObjects(
-                    "factors",
-                    result.factors(),
-                    (o, factor) -> o.put("path", factor.path())
-                            .put("name", factor.name())
-                            .put("low", factor.low())
-                            .put("nominal", factor.nominal())
-                            .put("high", factor.high()));
-            json.putObjects(
-                    "influences",
-                    result.influences(),
-                    (o, i) -> o.put("path", i.path())
-                            .put("name", i.name())
-                            .put("firstOrder", i.firstOrder())
-                            .put("total", i.total())
-                            .put("fractionLow", i.fractionLow())
-                            .put("fractionHigh", i.fractionHigh())
-                            .put("firingLowDeg", Math.toDegrees(i.firingLowRad()))
-                            .put("firingHighDeg", Math.toDegrees(i.firingHighRad())));
-            json.putObjects(
-                    "remedies",
-                    result.remedies(),
-                    (o, r) -> o.put("path", r.path())
-                            .put("change", r.change())
-                            .put("yield", r.yield().share())
-                            .put("gain", r.gain()));
+            json.putObjects("factors", result.factors(), SpreadJson::factor);
+            json.putObjects("influences", result.influences(), SpreadJson::influence);
+            json.putObjects("remedies", result.remedies(), SpreadJson::remedy);
         });
+    }
+
+    private static void factor(Json json, Factor factor) {
+        json.put("path", factor.path())
+                .put("name", factor.name())
+                .put("low", factor.low())
+                .put("nominal", factor.nominal())
+                .put("high", factor.high());
+    }
+
+    private static void influence(Json json, Influence influence) {
+        json.put("path", influence.path())
+                .put("name", influence.name())
+                .put("firstOrder", influence.firstOrder())
+                .put("total", influence.total())
+                .put("fractionLow", influence.fractionLow())
+                .put("fractionHigh", influence.fractionHigh())
+                .put("firingLowDeg", Math.toDegrees(influence.firingLowRad()))
+                .put("firingHighDeg", Math.toDegrees(influence.firingHighRad()));
+    }
+
+    private static void remedy(Json json, Remedy remedy) {
+        json.put("path", remedy.path())
+                .put("change", remedy.change())
+                .put("yield", remedy.yield().share())
+                .put("gain", remedy.gain());
     }
 
     private static void yieldOf(Json json, String key, Optional<Yield> yield) {

@@ -29,15 +29,6 @@ final class TextTable {
         this.indent = indent;
     }
 
-    /** Two figures a line, each behind what it is; no heads. */
-    static TextTable ofFacts(Spelling spelling) {
-        return new TextTable(spelling, "  ")
-                .column(Align.LEFT, "")
-                .column(Align.LEFT, "")
-                .column(Align.LEFT, "")
-                .column(Align.LEFT, "");
-    }
-
     /** Adds a column; every column has the same number of head lines, empty ones included. */
     TextTable column(Align align, String... head) {
         List<String> spelled = new ArrayList<>();

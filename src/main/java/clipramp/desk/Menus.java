@@ -84,7 +84,7 @@ final class Menus {
         return menu;
     }
 
-    private Menu view() {
+    private Menu conditions() {
         Menu conditions = new Menu("Con_dition");
         ToggleGroup group = new ToggleGroup();
         for (ViewCondition condition : ViewCondition.values()) {
@@ -94,6 +94,10 @@ final class Menus {
             item.setOnAction(event -> actions.setCondition(condition));
             conditions.getItems().add(item);
         }
+        return conditions;
+    }
+
+    private Menu view() {
         Menu numbers = new Menu("N_umbers as a table");
         for (Shown shown : Shown.values()) {
             numbers.getItems().add(item(capital(shown.words()), "", () -> actions.showNumbers(shown)));
@@ -106,7 +110,7 @@ final class Menus {
         menu.getItems()
                 .addAll(
                         new SeparatorMenuItem(),
-                        needing(conditions),
+                        needing(conditions()),
                         needing(item("Look closer at the _pulse, or back", "Shortcut+L", actions::zoomPulse)),
                         needing(numbers),
                         new SeparatorMenuItem(),

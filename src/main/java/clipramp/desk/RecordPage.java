@@ -79,16 +79,13 @@ final class RecordPage implements PageView {
         save.setId("record-save");
         save.setDefaultButton(true);
         save.setOnAction(event -> saving.run());
-        ComboBox<String> paper = new ComboBox<>();
-        for (PageSize size : PageSize.values()) {
-            paper.getItems().add(size.word());
-        }
-        paper.setValue(PageSize.A4.word());
-        paper.setId("record-paper");
-        paper.setAccessibleText("Paper");
-        paper.valueProperty()
-                .addListener(property ->
-                        maker.setSize(PageSize.values()[paper.getItems().indexOf(paper.getValue())]));
+        box.setLeft(side());
+        box.setCenter(scroll);
+        maker.onChange(this::refresh);
+        theme.onChange(() -> maker.setZoom(theme.zoom()));
+    }
+
+    private ScrollPane side() {
         side.getStyleClass().add("record-side");
         progress.getStyleClass().add("quiet");
         progress.setId("record-progress");
@@ -101,16 +98,27 @@ final class RecordPage implements PageView {
         spread.setOnAction(event -> follow());
         spreadHint.setId("record-spread-hint");
         spreadHint.managedProperty().bind(spreadHint.textProperty().isNotEmpty());
-        side.getChildren().addAll(save, progress, paper, unit, spread, spreadHint);
+        side.getChildren().addAll(save, progress, paper(), unit, spread, spreadHint);
         ScrollPane sideScroll = new ScrollPane(side);
         sideScroll.setFitToWidth(true);
         sideScroll.setHbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);
         sideScroll.setFocusTraversable(false);
         sideScroll.getStyleClass().add("record-side-scroll");
-        box.setLeft(sideScroll);
-        box.setCenter(scroll);
-        maker.onChange(this::refresh);
-        theme.onChange(() -> maker.setZoom(theme.zoom()));
+        return sideScroll;
+    }
+
+    private ComboBox<String> paper() {
+        ComboBox<String> paper = new ComboBox<>();
+        for (PageSize size : PageSize.values()) {
+            paper.getItems().add(size.word());
+        }
+        paper.setValue(PageSize.A4.word());
+        paper.setId("record-paper");
+        paper.setAccessibleText("Paper");
+        paper.valueProperty()
+                .addListener(property ->
+                        maker.setSize(PageSize.values()[paper.getItems().indexOf(paper.getValue())]));
+        return paper;
     }
 
     @Override

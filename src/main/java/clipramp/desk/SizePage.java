@@ -76,19 +76,7 @@ final class SizePage implements PageView {
     }
 
     private void ask() {
-        goal.getItems()
-                .setAll(
-                        "values that hold",
-                        "a straight knob, power",
-                        "a straight knob, light",
-                        "an angle that heat leaves alone");
-        goal.setValue(goal.getItems().get(0));
-        goal.setId("size-goal");
-        goal.setAccessibleText("What is looked for");
-        goal.valueProperty().addListener(property -> {
-            offer();
-            refresh();
-        });
+        askForGoal();
         series.getItems()
                 .setAll(Arrays.stream(PreferredSeries.values()).map(Enum::name).toList());
         series.setValue(PreferredSeries.E24.name());
@@ -111,6 +99,22 @@ final class SizePage implements PageView {
                         new RunBar(run, "size", "searching for values").node(),
                         complaint)
                 .node());
+    }
+
+    private void askForGoal() {
+        goal.getItems()
+                .setAll(
+                        "values that hold",
+                        "a straight knob, power",
+                        "a straight knob, light",
+                        "an angle that heat leaves alone");
+        goal.setValue(goal.getItems().get(0));
+        goal.setId("size-goal");
+        goal.setAccessibleText("What is looked for");
+        goal.valueProperty().addListener(property -> {
+            offer();
+            refresh();
+        });
     }
 
     private void show() {

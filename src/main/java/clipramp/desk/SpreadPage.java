@@ -117,14 +117,7 @@ final class SpreadPage implements PageView {
         complaint.managedProperty().bind(complaint.textProperty().isNotEmpty());
         complaint.getStyleClass().add("complaint");
         cancel.setOnAction(event -> run.cancel());
-        bar.setMaxWidth(Double.MAX_VALUE);
-        bar.setAccessibleText("Units drawn");
-        bar.setVisible(false);
-        progress.setId("spread-progress");
-        progress.setWrapText(true);
-        progress.getStyleClass().add("quiet");
-        complaint.setId("spread-complaint");
-        complaint.setWrapText(true);
+        dressProgress();
         Label about =
                 new Label("Every tolerance, data-sheet limit, line and temperature of the design, drawn together.");
         about.setWrapText(true);
@@ -140,6 +133,18 @@ final class SpreadPage implements PageView {
                         progress,
                         bands)
                 .node());
+    }
+
+    /** What tells how far the drawing is. */
+    private void dressProgress() {
+        bar.setMaxWidth(Double.MAX_VALUE);
+        bar.setAccessibleText("Units drawn");
+        bar.setVisible(false);
+        progress.setId("spread-progress");
+        progress.setWrapText(true);
+        progress.getStyleClass().add("quiet");
+        complaint.setId("spread-complaint");
+        complaint.setWrapText(true);
     }
 
     /** A control under its name. */

@@ -141,13 +141,17 @@ public final class LineWave {
             from = to;
             before = after;
         }
+        refuseUnlessTwo(crossings);
+        return new double[] {rising, falling};
+    }
+
+    private static void refuseUnlessTwo(int crossings) {
         if (crossings != 2) {
             throw new RefusedCircuit(
                     "line.harmonics",
                     "the line voltage has " + crossings + " zeros a period; a synchronised circuit is computed for two."
                             + " Make the harmonics smaller.");
         }
-        return new double[] {rising, falling};
     }
 
     private int highestOrder() {

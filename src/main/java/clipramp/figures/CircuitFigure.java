@@ -4,6 +4,8 @@ import clipramp.circuit.Design;
 import clipramp.circuit.TestPoint;
 import java.awt.Color;
 import java.awt.Graphics2D;
+import java.awt.Shape;
+import java.awt.Stroke;
 import java.awt.geom.AffineTransform;
 import java.awt.geom.Rectangle2D;
 import java.awt.geom.RoundRectangle2D;
@@ -117,29 +119,9 @@ public final class CircuitFigure implements Figure {
         Pen pen = new Pen(g, style);
         pen.fill(palette.ground(), new Rectangle2D.Double(0, 0, width, height));
         AffineTransform at = placement(width, height);
-        double scale = at.getScaleX() / style.zoom();
-        for (String key : chosen) {
-            Rectangle2D box = sheet.boxes().get(key);
-            if (box != null) {
-                Rectangle2D area = at.createTransformedShape(margined(box)).getBounds2D();
-                double round = at.getScaleX();
-                RoundRectangle2D patch = new RoundRectangle2D.Double(
-                        area.getX(), area.getY(), area.getWidth(), area.getHeight(), round, round);
-                pen.fill(palette.wash(), patch);
-                pen.stroke(palette.ink(), style.solid(0.1 * scale), patch);
-            }
-        }
+        washChosen(pen, style, at);
         for (Sheet.Ink ink : sheet.inks()) {
-            Color colour = ink.net().colour(palette);
-            if (ink.filled()) {
-                pen.fill(colour, at.createTransformedShape(ink.shape()));
-            } else {
-                double weight = ink.net() == Net.SYMBOL ? SYMBOL : WIRE;
-                if (!ink.key().isEmpty() && ink.net() == Net.LINE || isRing(ink)) {
-                    pen.fill(palette.ground(), at.createTransformedShape(ink.shape()));
-                }
-                pen.stroke(colour, style.solid(weight * scale), at.createTransformedShape(ink.shape()));
-            }
+            draw(ink, pen, style, at);
         }
         for (Sheet.Label label : sheet.labels()) {
             double size = Sheet.TEXT * at.getScaleX();
@@ -152,6 +134,39 @@ public final class CircuitFigure implements Figure {
                     x,
                     y);
         }
+    }
+
+    private void washChosen(Pen pen, Style style, AffineTransform at) {
+        for (String key : chosen) {
+            Rectangle2D box = sheet.boxes().get(key);
+            if (box != null) {
+                Rectangle2D area = at.createTransformedShape(margined(box)).getBounds2D();
+                double round = at.getScaleX();
+                RoundRectangle2D patch = new RoundRectangle2D.Double(
+                        area.getX(), area.getY(), area.getWidth(), area.getHeight(), round, round);
+                pen.fill(style.palette().wash(), patch);
+                pen.stroke(style.palette().ink(), weight(style, 0.1, at), patch);
+            }
+        }
+    }
+
+    private void draw(Sheet.Ink ink, Pen pen, Style style, AffineTransform at) {
+        Palette palette = style.palette();
+        Color colour = ink.net().colour(palette);
+        Shape shape = at.createTransformedShape(ink.shape());
+        if (ink.filled()) {
+            pen.fill(colour, shape);
+            return;
+        }
+        if ((!ink.key().isEmpty() && ink.net() == Net.LINE) || isRing(ink)) {
+            pen.fill(palette.ground(), shape);
+        }
+        pen.stroke(colour, weight(style, ink.net() == Net.SYMBOL ? SYMBOL : WIRE, at), shape);
+    }
+
+    /** A stroke as wide as so many of the sheet's units. */
+    private static Stroke weight(Style style, double units, AffineTransform at) {
+        return style.solid(units * (at.getScaleX() / style.zoom()));
     }
 
     private static boolean isRing(Sheet.Ink ink) {

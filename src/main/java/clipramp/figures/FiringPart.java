@@ -111,6 +111,10 @@ final class FiringPart {
                 "ramp.fixed",
                 Optional.of(design.ramp().fixed()),
                 "ramp.trim-high");
+        capacitor();
+    }
+
+    private void capacitor() {
         sheet.joint(Net.RAMP, RAMP_X, EMITTER_Y);
         symbols.capacitor("ramp.capacitor", Net.RAMP, RAMP_X, EMITTER_Y, RAMP_X, COMMON);
         sheet.joint(Net.COMMON, RAMP_X, COMMON);

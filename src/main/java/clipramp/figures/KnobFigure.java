@@ -1,7 +1,6 @@
 package clipramp.figures;
 
 import clipramp.circuit.Wanted;
-import clipramp.circuit.Wanted.Goal;
 import clipramp.power.OperatingPoint;
 import clipramp.units.QuantityText;
 import clipramp.units.Unit;
@@ -13,7 +12,6 @@ import java.awt.geom.Rectangle2D;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
-import java.util.function.ToDoubleFunction;
 import org.jfree.chart.axis.NumberAxis;
 
 /**
@@ -80,7 +78,7 @@ public record KnobFigure(List<OperatingPoint> points, Wanted wanted, OptionalDou
     }
 
     private static String percent(OperatingPoint point) {
-        return Numerals.fixed(100 * point.load().fraction(), 1) + " %";
+        return Numerals.fixed(percentOfFull(point), 1) + " %";
     }
 
     @Override
@@ -100,7 +98,7 @@ public record KnobFigure(List<OperatingPoint> points, Wanted wanted, OptionalDou
                 firing.isPresent() ? Numerals.cell(Math.toDegrees(firing.getAsDouble()), 1) : Numerals.NOTHING,
                 Numerals.cell(point.load().rmsVolts(), 1),
                 Numerals.significant(point.load().watts(), 4),
-                Numerals.cell(100 * point.load().fraction(), 1),
+                Numerals.cell(percentOfFull(point), 1),
                 point.solution().state().word());
     }
 
@@ -132,20 +130,7 @@ public record KnobFigure(List<OperatingPoint> points, Wanted wanted, OptionalDou
     public void draw(Graphics2D g, double width, double height, Style style) {
         Palette palette = style.palette();
         Plot plot = new Plot(g, style, axis(width, style), axis(height * 0.8, style));
-        double[] x = new double[points.size()];
-        double[] y = new double[points.size()];
-        for (int i = 0; i < x.length; i++) {
-            x[i] = 100 * points.get(i).position().orElse(0.5);
-            y[i] = 100 * points.get(i).load().fraction();
-        }
-        double r = 2.4 * style.zoom();
-        boolean marked = points.size() <= MOST_MARKED;
-        plot.curve(
-                x,
-                y,
-                palette.load(),
-                style.trace(),
-                marked ? new Ellipse2D.Double(-r, -r, 2 * r, 2 * r) : Plot.noMarker());
+        curve(plot, style);
         Rectangle2D area = plotArea(width, height, style);
         plot.place(area);
         Pen pen = plot.pen();
@@ -158,16 +143,33 @@ public record KnobFigure(List<OperatingPoint> points, Wanted wanted, OptionalDou
                 palette.ink(),
                 style.heavy(),
                 new Line2D.Double(plot.x(100 * at), area.getMinY(), plot.x(100 * at), area.getMaxY())));
-        wanted.lowest().ifPresent(goal -> goal(plot, style, goal, true));
-        wanted.highest().ifPresent(goal -> goal(plot, style, goal, false));
+        wanted.lowest().ifPresent(goal -> GoalMark.lowest(goal, points).draw(plot, style));
+        wanted.highest().ifPresent(goal -> GoalMark.highest(goal, points).draw(plot, style));
         if (points.size() == 1) {
             plot.letter(
                     "fixed ramp: " + watts(points.get(0)),
                     style.smallBold(),
                     palette.load(),
                     plot.x(52),
-                    plot.y(y[0]) - 8);
+                    plot.y(percentOfFull(points.get(0))) - 8);
         }
+    }
+
+    private void curve(Plot plot, Style style) {
+        double r = 2.4 * style.zoom();
+        boolean marked = points.size() <= MOST_MARKED;
+        plot.curve(
+                points.stream()
+                        .mapToDouble(point -> 100 * point.position().orElse(0.5))
+                        .toArray(),
+                points.stream().mapToDouble(KnobFigure::percentOfFull).toArray(),
+                style.palette().load(),
+                style.trace(),
+                marked ? new Ellipse2D.Double(-r, -r, 2 * r, 2 * r) : Plot.noMarker());
+    }
+
+    private static double percentOfFull(OperatingPoint point) {
+        return 100 * point.load().fraction();
     }
 
     private static NumberAxis axis(double room, Style style) {
@@ -233,90 +235,5 @@ public record KnobFigure(List<OperatingPoint> points, Wanted wanted, OptionalDou
         }
         area.closePath();
         plot.pen().fill(Palette.mixed(style.palette().ground(), style.palette().load(), 0.18), area);
-    }
-
-    /** A bar that the curve must stay under or over, with an arrow to the side that is good. */
-    private void goal(Plot plot, Style style, Goal goal, boolean lowest) {
-        OptionalDouble fraction = fraction(goal, lowest ? goal.to() : goal.from());
-        String text = "wanted: at " + (lowest ? "most " : "least ") + text(goal, lowest ? goal.to() : goal.from())
-                + " at knob " + QuantityText.format(goal.position(), Unit.FRACTION, 3);
-        double x = plot.x(100 * goal.position());
-        double reach = 14 * style.zoom();
-        Rectangle2D area = plot.area();
-        double from = Math.max(area.getMinX(), x - reach);
-        double to = Math.min(area.getMaxX(), x + reach);
-        double y = plot.y(100 * fraction.orElse(lowest ? 0 : 1));
-        Palette palette = style.palette();
-        if (fraction.isPresent()) {
-            double way = (lowest ? 1 : -1) * 9 * style.zoom();
-            double middle = (from + to) / 2;
-            double head = 3.2 * style.zoom();
-            plot.pen().stroke(palette.ink(), style.solid(2), new Line2D.Double(from, y, to, y));
-            plot.pen().stroke(palette.ink(), style.solid(1), new Line2D.Double(middle, y, middle, y + way * 0.7));
-            Path2D arrow = new Path2D.Double();
-            arrow.moveTo(middle, y + way);
-            arrow.lineTo(middle - head, y + way * 0.45);
-            arrow.lineTo(middle + head, y + way * 0.45);
-            arrow.closePath();
-            plot.pen().fill(palette.ink(), arrow);
-        }
-        double wide = Lettering.width(text, style.small());
-        double line = 1.5 * style.small().getSize2D();
-        double nearLeft = area.getMinX() + 2 * style.gap();
-        double nearRight = area.getMaxX() - 2 * style.gap() - wide;
-        double above = area.getMinY() + line;
-        double below = area.getMaxY() - line / 2;
-        plot.letter(
-                text,
-                style.small(),
-                palette.ink(),
-                nearLeft,
-                above,
-                nearLeft,
-                above + line,
-                nearRight,
-                below - line,
-                nearRight,
-                below,
-                nearRight,
-                above,
-                nearRight,
-                above + line,
-                nearLeft,
-                below - line,
-                nearLeft,
-                below);
-    }
-
-    private static String text(Goal goal, double value) {
-        return switch (goal.measure()) {
-            case FRACTION -> QuantityText.format(value, Unit.FRACTION, 3);
-            case WATTS -> QuantityText.format(value, Unit.WATT, 3);
-            case VOLTS -> QuantityText.format(value, Unit.VOLT, 3);
-            case ANGLE -> QuantityText.format(value, Unit.ANGLE, 3);
-        };
-    }
-
-    /** Where a goal lies on the power scale; read off the curve where it is in another measure, empty if out of its reach. */
-    private OptionalDouble fraction(Goal goal, double value) {
-        return switch (goal.measure()) {
-            case FRACTION -> OptionalDouble.of(Math.min(1, value));
-            case WATTS -> readOff(point -> point.load().watts(), value);
-            case VOLTS -> readOff(point -> point.load().rmsVolts(), value);
-            case ANGLE -> readOff(point -> point.solution().shown().firingRad().orElse(Math.PI), value);
-        };
-    }
-
-    private OptionalDouble readOff(ToDoubleFunction<OperatingPoint> measure, double value) {
-        for (int i = 1; i < points.size(); i++) {
-            double a = measure.applyAsDouble(points.get(i - 1));
-            double b = measure.applyAsDouble(points.get(i));
-            if (a != b && (value - a) * (value - b) <= 0) {
-                double share = (value - a) / (b - a);
-                double from = points.get(i - 1).load().fraction();
-                return OptionalDouble.of(from + share * (points.get(i).load().fraction() - from));
-            }
-        }
-        return OptionalDouble.empty();
     }
 }

@@ -119,7 +119,7 @@ public record LanesFigure(Lanes lanes, double fromRad, double toRad, OptionalDou
 
     /** Where the lanes lie when drawn at a size. */
     public LanesFrame frame(double width, double height, Style style) {
-        return LanesPainter.frame(this, width, height, style);
+        return LanesFrame.of(this, width, height, style);
     }
 
     @Override

@@ -25,6 +25,32 @@ public record LanesFrame(
         double[] laneBottoms,
         double fromRad,
         double toRad) {
+    private static final int LANES = Lane.values().length;
+
+    /** Room for the numbers of the upright axes, in units of a screen at 100 %. */
+    private static final double TICK_ROOM = 46;
+
+    /** Where a figure puts its lanes when drawn at a size: each as high as its weight asks, under a line for its head. */
+    static LanesFrame of(LanesFigure figure, double width, double height, Style style) {
+        double unit = style.gap();
+        double top = 6 * unit;
+        double bottom = Math.max(top + LANES, height - 9 * unit);
+        double head = 5 * unit;
+        double plots = Math.max(LANES, bottom - top - LANES * head);
+        double weights = Arrays.stream(Lane.values()).mapToDouble(Lane::weight).sum();
+        double[] tops = new double[LANES];
+        double[] bottoms = new double[LANES];
+        double y = top;
+        for (Lane lane : Lane.values()) {
+            tops[lane.ordinal()] = y + head;
+            y += head + plots * lane.weight() / weights;
+            bottoms[lane.ordinal()] = y;
+        }
+        double left = TICK_ROOM * style.zoom();
+        double right = Math.max(left + 1, width - 4 * unit);
+        return new LanesFrame(left, right, tops[0], y, tops, bottoms, figure.fromRad(), figure.toRad());
+    }
+
     /** x of an angle in rad. */
     public double xOf(double angleRad) {
         return left + (angleRad - fromRad) / (toRad - fromRad) * (right - left);

@@ -14,9 +14,6 @@ import java.util.OptionalDouble;
 
 /** Draws {@link LanesFigure}. */
 final class LanesPainter {
-    private static final int LANES = Lane.values().length;
-    private static final double TICK_ROOM = 46;
-
     private final LanesFigure figure;
     private final Lanes lanes;
     private final Graphics2D g;
@@ -35,28 +32,8 @@ final class LanesPainter {
         this.height = height;
         this.style = style;
         this.palette = style.palette();
-        this.frame = frame(figure, width, height, style);
+        this.frame = LanesFrame.of(figure, width, height, style);
         this.pen = new Pen(g, style);
-    }
-
-    static LanesFrame frame(LanesFigure figure, double width, double height, Style style) {
-        double unit = style.gap();
-        double top = 6 * unit;
-        double bottom = Math.max(top + LANES, height - 9 * unit);
-        double head = 5 * unit;
-        double plots = Math.max(LANES, bottom - top - LANES * head);
-        double weights = Arrays.stream(Lane.values()).mapToDouble(Lane::weight).sum();
-        double[] tops = new double[LANES];
-        double[] bottoms = new double[LANES];
-        double y = top;
-        for (Lane lane : Lane.values()) {
-            tops[lane.ordinal()] = y + head;
-            y += head + plots * lane.weight() / weights;
-            bottoms[lane.ordinal()] = y;
-        }
-        double left = TICK_ROOM * style.zoom();
-        double right = Math.max(left + 1, width - 4 * unit);
-        return new LanesFrame(left, right, tops[0], y, tops, bottoms, figure.fromRad(), figure.toRad());
     }
 
     void paint() {
@@ -105,20 +82,23 @@ final class LanesPainter {
         pen.right("angle of the line", style.small(), palette.quiet(), frame.right(), baseline + 3.5 * style.gap());
     }
 
-    private void paintLane(Lane lane) {
-        Rectangle2D plot = frame.plot(lane);
-        Scale scale = scale(lane, plot);
+    private void paintMarks(Scale scale) {
         for (double mark : scale.marks()) {
             double y = scale.y(mark);
             pen.line(palette.hairline(), style.hairline(), frame.left(), y, frame.right(), y);
-            String text = Numerals.plain(mark);
             pen.right(
-                    text,
+                    Numerals.plain(mark),
                     style.small(),
                     palette.quiet(),
                     frame.left() - 1.5 * style.gap(),
                     y + 0.36 * style.small().getSize2D());
         }
+    }
+
+    private void paintLane(Lane lane) {
+        Rectangle2D plot = frame.plot(lane);
+        Scale scale = scale(lane, plot);
+        paintMarks(scale);
         pen.line(palette.axis(), style.hairline(), frame.left(), scale.y(0), frame.right(), scale.y(0));
         Shape before = g.getClip();
         if (isCloser()) {

@@ -4,12 +4,10 @@ import static clipramp.figures.Sheet.Hang.CENTRED;
 import static clipramp.figures.Sheet.Hang.LEFT_OF;
 import static clipramp.figures.Sheet.Hang.RIGHT_OF;
 
-import clipramp.circuit.ClipSupply;
 import clipramp.circuit.Design;
 import clipramp.circuit.GateDrive;
 import clipramp.circuit.Load;
 import clipramp.circuit.Stage;
-import clipramp.circuit.Winding;
 
 /**
  * Lays a design out on a sheet: line, load and thyristor in a band above; below it, in the order of the signal, clipped
@@ -19,16 +17,13 @@ final class Schematic {
     static final double WIDTH = 68;
     static final double HEIGHT = 39;
 
-    private static final double TOP = 4;
-    private static final double BOTTOM = 14;
-    /** The row between both bands, where a tap turns. */
-    private static final double TURN = 16.5;
+    static final double TOP = 4;
+    static final double BOTTOM = 14;
     /** The clipped supply's rail, and the firing common. */
     static final double SUPPLY = 19;
 
     static final double COMMON = 36;
-    private static final double LIVE_TAP = 5;
-    private static final double NEUTRAL_TAP = 2.5;
+    static final double LIVE_TAP = 5;
     static final double THYRISTOR_X = 64;
 
     private final Design design;
@@ -49,7 +44,13 @@ final class Schematic {
     static Sheet of(Design design) {
         Schematic schematic = new Schematic(design);
         schematic.power();
-        schematic.feed();
+        new FeedPart(
+                        design,
+                        schematic.text,
+                        schematic.sheet,
+                        schematic.symbols,
+                        new FeedPart.Taps(schematic.railTapX, schematic.anodeTapX, schematic.bottomFromX))
+                .draw();
         new FiringPart(design, schematic.text, schematic.sheet, schematic.symbols).draw();
         return schematic.sheet;
     }
@@ -99,14 +100,7 @@ final class Schematic {
         terminals(8, 10.5);
         sheet.wire(Net.LINE, 1.3, 8, 8, 8);
         sheet.wire(Net.LINE, 1.3, 10.5, 12, 10.5);
-        bridge("stage-diodes", Net.LINE, 8, 12, TOP, BOTTOM, 8, 10.5);
-        sheet.label(
-                "stage-diodes",
-                Net.SYMBOL,
-                RIGHT_OF,
-                13.2,
-                7.2,
-                text.ofDiodes("stage-diodes", design.stageDiodes().dropVolts()));
+        stageBridge(Net.LINE, 8, 12);
         railTapX = 19.5;
         sheet.wire(Net.LINE, 12, TOP, 21, TOP);
         load(21, 28, TOP);
@@ -122,14 +116,7 @@ final class Schematic {
         load(7.5, 14.5, 8);
         sheet.wire(Net.LOAD, 14.5, 8, 17, 8);
         sheet.wire(Net.LINE, 1.3, 10.5, 21, 10.5);
-        bridge("stage-diodes", Net.LOAD, 17, 21, TOP, BOTTOM, 8, 10.5);
-        sheet.label(
-                "stage-diodes",
-                Net.SYMBOL,
-                RIGHT_OF,
-                22.2,
-                7.2,
-                text.ofDiodes("stage-diodes", design.stageDiodes().dropVolts()));
+        stageBridge(Net.LOAD, 17, 21);
         anodeTapX = 27.5;
         railTapX = LIVE_TAP;
         bottomFromX = 21;
@@ -137,20 +124,16 @@ final class Schematic {
         sheet.wire(Net.COMMON, 21, BOTTOM, THYRISTOR_X, BOTTOM);
     }
 
-    /** Four diodes on two legs; the ac wires arrive at the given heights, the second crossing the first leg. */
-    private void bridge(
-            String key, Net net, double left, double right, double top, double bottom, double acOne, double acTwo) {
-        for (double x : new double[] {left, right}) {
-            symbols.diode(key, net, x, acOne, x, top);
-            symbols.diode(key, net, x, bottom, x, acTwo);
-            sheet.wire(net, x, acOne, x, acTwo);
-        }
-        sheet.wire(net, left, top, right, top);
-        sheet.wire(net, left, bottom, right, bottom);
-        sheet.joint(net, left, acOne);
-        sheet.joint(net, right, acTwo);
-        sheet.joint(net, right, top);
-        sheet.joint(net, right, bottom);
+    private void stageBridge(Net net, double left, double right) {
+        String key = "stage-diodes";
+        symbols.bridge(key, net, left, right, TOP, BOTTOM, 8, 10.5);
+        sheet.label(
+                key,
+                Net.SYMBOL,
+                RIGHT_OF,
+                right + 1.2,
+                7.2,
+                text.ofDiodes(key, design.stageDiodes().dropVolts()));
     }
 
     private void load(double x1, double x2, double y) {
@@ -206,117 +189,5 @@ final class Schematic {
     private void flag(double x, double y, String name) {
         sheet.wire(Net.PULSE, x, y, x - 0.8, y);
         sheet.note(Net.PULSE, LEFT_OF, x - 1.1, y + 0.35, name);
-    }
-
-    /** From the tap to the dropper's left end at {@code FiringPart.DROPPER_X}. */
-    private void feed() {
-        ClipSupply clip = design.clip();
-        if (clip.winding().isPresent()) {
-            winding(clip.winding().get());
-        } else if (design.isSuppliedByStageBridge() || clip.rectifier() == ClipSupply.Rectifier.DIODE) {
-            singleFeed();
-        } else {
-            tapDown(clip.tap() == ClipSupply.Tap.LINE ? LIVE_TAP : anodeTapX, LIVE_TAP, 27);
-            neutralDown(30);
-            sheet.wire(Net.LINE, LIVE_TAP, 27, 8, 27);
-            sheet.wire(Net.LINE, NEUTRAL_TAP, 30, 12, 30);
-            ownBridge(8, 12, 27, 30);
-        }
-    }
-
-    private void ownBridge(double left, double right, double acOne, double acTwo) {
-        String key = "clip.rectifier";
-        bridge(key, Net.LINE, left, right, SUPPLY, COMMON, acOne, acTwo);
-        sheet.label(
-                key,
-                Net.SYMBOL,
-                RIGHT_OF,
-                right + 1,
-                27.6,
-                text.ofDiodes(key, design.clip().diodeDropVolts()));
-        sheet.wire(Net.LINE, right, SUPPLY, FiringPart.DROPPER_X, SUPPLY);
-        sheet.wire(Net.COMMON, right, COMMON, FiringPart.DROPPER_X, COMMON);
-    }
-
-    /** One wire from the stage, with the supply's own diode in it where it has one. */
-    private void singleFeed() {
-        boolean fromLine = design.clip().tap() == ClipSupply.Tap.LINE;
-        double from = fromLine ? railTapX : anodeTapX;
-        boolean diode = design.clip().rectifier() == ClipSupply.Rectifier.DIODE;
-        double down = diode ? 8 : 14;
-        tapDown(from, down, SUPPLY);
-        if (diode) {
-            symbols.diode("clip.rectifier", Net.LINE, down, SUPPLY, FiringPart.DROPPER_X, SUPPLY);
-            sheet.label(
-                    "clip.rectifier",
-                    Net.SYMBOL,
-                    CENTRED,
-                    (down + FiringPart.DROPPER_X) / 2,
-                    SUPPLY + 2,
-                    text.ofDiodes("clip.rectifier", design.clip().diodeDropVolts()));
-        } else {
-            sheet.wire(Net.LINE, down, SUPPLY, FiringPart.DROPPER_X, SUPPLY);
-        }
-        if (design.gate().coupling() == GateDrive.Coupling.TRANSFORMER) {
-            double start = Math.max(NEUTRAL_TAP, bottomFromX);
-            double back = Math.min(start, diode ? 6 : 12);
-            double turn = TURN - 1.2;
-            sheet.joint(Net.COMMON, start, BOTTOM);
-            sheet.wire(Net.COMMON, start, BOTTOM, start, turn, back, turn, back, COMMON, FiringPart.DROPPER_X, COMMON);
-        }
-    }
-
-    /** Down from the upper band at {@code from}, over to {@code to}, and down to a height. */
-    private void tapDown(double from, double to, double y) {
-        boolean bridged = design.stage().bridgeDiodes() > 0;
-        boolean beforeBridge = bridged && from == LIVE_TAP;
-        double start = beforeBridge ? 8 : TOP;
-        sheet.joint(from == anodeTapX ? Net.LOAD : Net.LINE, from, start);
-        if (from == to) {
-            sheet.wire(Net.LINE, from, start, from, y);
-        } else {
-            sheet.wire(Net.LINE, from, start, from, TURN, to, TURN, to, y);
-        }
-    }
-
-    private void neutralDown(double y) {
-        double start = design.stage().bridgeDiodes() > 0 ? 10.5 : BOTTOM;
-        sheet.joint(Net.LINE, NEUTRAL_TAP, start);
-        sheet.wire(Net.LINE, NEUTRAL_TAP, start, NEUTRAL_TAP, y);
-    }
-
-    private void winding(Winding winding) {
-        String key = "clip.winding";
-        tapDown(LIVE_TAP, LIVE_TAP, 25);
-        neutralDown(30);
-        sheet.wire(Net.LINE, NEUTRAL_TAP, 30, LIVE_TAP, 30);
-        symbols.coil(key, Net.LINE, LIVE_TAP, 25, LIVE_TAP, 30, true);
-        symbols.core(key, 6.1, 25.6, 29.4);
-        symbols.coil(key, Net.LINE, 7.2, 25, 7.2, 30, false);
-        symbols.phase(key, 4.2, 26);
-        symbols.phase(key, 8, winding.opposite() ? 29 : 26);
-        sheet.label(
-                key,
-                Net.SYMBOL,
-                CENTRED,
-                6.1,
-                32,
-                text.ofWinding(winding).stream().filter(line -> !line.isEmpty()).toList());
-        if (design.clip().rectifier() == ClipSupply.Rectifier.BRIDGE) {
-            sheet.wire(Net.LINE, 7.2, 25, 10.5, 25);
-            sheet.wire(Net.LINE, 7.2, 30, 14, 30);
-            ownBridge(10.5, 14, 25, 30);
-        } else {
-            sheet.wire(Net.LINE, 7.2, 25, 7.2, SUPPLY, 9.5, SUPPLY);
-            symbols.diode("clip.rectifier", Net.LINE, 9.5, SUPPLY, FiringPart.DROPPER_X, SUPPLY);
-            sheet.label(
-                    "clip.rectifier",
-                    Net.SYMBOL,
-                    CENTRED,
-                    12,
-                    SUPPLY + 2,
-                    text.ofDiodes("clip.rectifier", design.clip().diodeDropVolts()));
-            sheet.wire(Net.COMMON, 7.2, 30, 10, 30, 10, COMMON, FiringPart.DROPPER_X, COMMON);
-        }
     }
 }

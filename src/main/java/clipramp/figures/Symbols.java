@@ -202,4 +202,19 @@ final class Symbols {
     void phase(String key, double x, double y) {
         sheet.symbol(key, new Ellipse2D.Double(x - 0.16, y - 0.16, 0.32, 0.32), true);
     }
+
+    /** Four diodes on two legs; the ac wires arrive at the given heights, the second crossing the first leg. */
+    void bridge(String key, Net net, double left, double right, double top, double bottom, double acOne, double acTwo) {
+        for (double x : new double[] {left, right}) {
+            diode(key, net, x, acOne, x, top);
+            diode(key, net, x, bottom, x, acTwo);
+            sheet.wire(net, x, acOne, x, acTwo);
+        }
+        sheet.wire(net, left, top, right, top);
+        sheet.wire(net, left, bottom, right, bottom);
+        sheet.joint(net, left, acOne);
+        sheet.joint(net, right, acTwo);
+        sheet.joint(net, right, top);
+        sheet.joint(net, right, bottom);
+    }
 }

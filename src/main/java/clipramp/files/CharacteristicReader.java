@@ -37,11 +37,7 @@ final class CharacteristicReader {
 
     Characteristic read() {
         int before = findings.count();
-        for (Entry entry : node.entries()) {
-            if (!NAMES.contains(entry.key())) {
-                findings.unknown(entry.place(), path + "." + entry.key(), entry.key(), "unknown key", NAMES);
-            }
-        }
+        refuseUnknown();
         OptionalDouble min = figure("min");
         OptionalDouble typ = figure("typ");
         OptionalDouble max = figure("max");
@@ -64,15 +60,27 @@ final class CharacteristicReader {
         }
         Characteristic figure = new Characteristic(min, typ, max);
         if (typ.isEmpty()) {
-            String how = min.isPresent() && max.isPresent()
-                    ? "the middle of min and max"
-                    : min.isPresent()
-                            ? "the minimum, the only figure there is"
-                            : "the maximum, the only figure there is";
-            findings.note(path + " has no typical value; nominal is " + how + ", "
-                    + QuantityText.format(figure.nominal(), key.unit()) + ".");
+            noteNominal(figure);
         }
         return figure;
+    }
+
+    private void noteNominal(Characteristic figure) {
+        String how = figure.min().isPresent() && figure.max().isPresent()
+                ? "the middle of min and max"
+                : figure.min().isPresent()
+                        ? "the minimum, the only figure there is"
+                        : "the maximum, the only figure there is";
+        findings.note(path + " has no typical value; nominal is " + how + ", "
+                + QuantityText.format(figure.nominal(), key.unit()) + ".");
+    }
+
+    private void refuseUnknown() {
+        for (Entry entry : node.entries()) {
+            if (!NAMES.contains(entry.key())) {
+                findings.unknown(entry.place(), path + "." + entry.key(), entry.key(), "unknown key", NAMES);
+            }
+        }
     }
 
     private String words(OptionalDouble value) {

@@ -10,7 +10,9 @@ import clipramp.circuit.Pot;
 import clipramp.circuit.PotLaw;
 import clipramp.circuit.PulseTransformer;
 import clipramp.circuit.Ramp;
+import clipramp.circuit.Snubber;
 import clipramp.circuit.StageDiodes;
+import clipramp.circuit.Thyristor;
 import clipramp.circuit.Trigger;
 import clipramp.circuit.Wanted.Goal;
 import clipramp.units.QuantityText;
@@ -49,18 +51,8 @@ public final class DesignWriter {
         ramp(design.ramp());
         trigger(design.trigger());
         line("gate", gate(design.gate()));
-        out.append("thyristor:\n");
-        block("  ", "device", DeviceText.thyristor(design.thyristor().device()));
-        design.thyristor()
-                .caseToAmbientKelvinPerWatt()
-                .ifPresent(k -> line("  case-to-ambient", QuantityText.exact(k, Unit.KELVIN_PER_WATT)));
-        design.snubber()
-                .ifPresent(s -> line(
-                        "snubber",
-                        new FlowText()
-                                .quantity("resistance", s.resistanceOhms(), Unit.OHM)
-                                .quantity("capacitance", s.capacitanceFarads(), Unit.FARAD)
-                                .text()));
+        thyristor(design.thyristor());
+        design.snubber().ifPresent(this::snubber);
         line(
                 "surroundings",
                 new FlowText()
@@ -75,6 +67,23 @@ public final class DesignWriter {
                         .text());
         designators();
         return out.toString();
+    }
+
+    private void thyristor(Thyristor thyristor) {
+        out.append("thyristor:\n");
+        block("  ", "device", DeviceText.thyristor(thyristor.device()));
+        thyristor
+                .caseToAmbientKelvinPerWatt()
+                .ifPresent(k -> line("  case-to-ambient", QuantityText.exact(k, Unit.KELVIN_PER_WATT)));
+    }
+
+    private void snubber(Snubber snubber) {
+        line(
+                "snubber",
+                new FlowText()
+                        .quantity("resistance", snubber.resistanceOhms(), Unit.OHM)
+                        .quantity("capacitance", snubber.capacitanceFarads(), Unit.FARAD)
+                        .text());
     }
 
     static String celsius(double value) {

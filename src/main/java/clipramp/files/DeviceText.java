@@ -52,34 +52,40 @@ final class DeviceText {
                 .characteristic("emitter-drop", u.emitterDropVolts(), Unit.VOLT)
                 .characteristic("emitter-drift", u.emitterDriftVoltsPerKelvin(), Unit.VOLT_PER_KELVIN)
                 .characteristic("peak-current", u.peakCurrentAmps(), Unit.AMPERE)
-                .mapping(
-                        "valley",
-                        new FlowText()
-                                .characteristic("current", u.valley().amps(), Unit.AMPERE)
-                                .characteristic("voltage", u.valley().volts(), Unit.VOLT)
-                                .quantity("at", u.valley().atVolts(), Unit.VOLT))
-                .mapping(
-                        "saturation",
-                        new FlowText()
-                                .characteristic("voltage", u.saturation().volts(), Unit.VOLT)
-                                .quantity("current", u.saturation().amps(), Unit.AMPERE)
-                                .quantity("at", u.saturation().atVolts(), Unit.VOLT));
-        u.modulated()
-                .ifPresent(m -> text.mapping(
-                        "modulated",
-                        new FlowText()
-                                .characteristic("current", m.amps(), Unit.AMPERE)
-                                .quantity("at", m.atVolts(), Unit.VOLT)));
-        u.baseOnePulse()
-                .ifPresent(p -> text.mapping(
-                        "base-one-pulse",
-                        new FlowText()
-                                .optional("min", p.minVolts(), Unit.VOLT)
-                                .optional("typ", p.typVolts(), Unit.VOLT)
-                                .quantity("supply", p.supplyVolts(), Unit.VOLT)
-                                .quantity("capacitor", p.capacitorFarads(), Unit.FARAD)
-                                .quantity("base-one", p.baseOneOhms(), Unit.OHM)));
+                .mapping("valley", valley(u.valley()))
+                .mapping("saturation", saturation(u.saturation()));
+        u.modulated().ifPresent(modulated -> text.mapping("modulated", modulated(modulated)));
+        u.baseOnePulse().ifPresent(pulse -> text.mapping("base-one-pulse", baseOnePulse(pulse)));
         return text.mapping("limits", limits(u.limits()));
+    }
+
+    private static FlowText valley(Unijunction.Valley valley) {
+        return new FlowText()
+                .characteristic("current", valley.amps(), Unit.AMPERE)
+                .characteristic("voltage", valley.volts(), Unit.VOLT)
+                .quantity("at", valley.atVolts(), Unit.VOLT);
+    }
+
+    private static FlowText saturation(Unijunction.Saturation saturation) {
+        return new FlowText()
+                .characteristic("voltage", saturation.volts(), Unit.VOLT)
+                .quantity("current", saturation.amps(), Unit.AMPERE)
+                .quantity("at", saturation.atVolts(), Unit.VOLT);
+    }
+
+    private static FlowText modulated(Unijunction.Modulated modulated) {
+        return new FlowText()
+                .characteristic("current", modulated.amps(), Unit.AMPERE)
+                .quantity("at", modulated.atVolts(), Unit.VOLT);
+    }
+
+    private static FlowText baseOnePulse(Unijunction.BaseOnePulse pulse) {
+        return new FlowText()
+                .optional("min", pulse.minVolts(), Unit.VOLT)
+                .optional("typ", pulse.typVolts(), Unit.VOLT)
+                .quantity("supply", pulse.supplyVolts(), Unit.VOLT)
+                .quantity("capacitor", pulse.capacitorFarads(), Unit.FARAD)
+                .quantity("base-one", pulse.baseOneOhms(), Unit.OHM);
     }
 
     private static FlowText limits(Unijunction.Limits limits) {

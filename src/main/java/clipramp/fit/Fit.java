@@ -2,7 +2,6 @@ package clipramp.fit;
 
 import clipramp.circuit.Design;
 import clipramp.circuit.Load;
-import clipramp.fit.BenchProblem.Observed;
 import clipramp.fit.Fitted.Knowledge;
 import clipramp.spread.Watch;
 import clipramp.units.Unit;

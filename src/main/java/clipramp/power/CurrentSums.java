@@ -52,8 +52,6 @@ record CurrentSums(double chargeAmpRad, double squareAmpRad, double peakAmps, Po
         double watts = squareAmpRad / span * design.load().resistanceOhms();
         double rms = Math.sqrt(squareAmpRad / span);
         double mean = chargeAmpRad / span;
-        double lineVolts = condition.lineVolts() * design.line().rmsFactor();
-        double lineAmps = Math.sqrt((forward.squareAmpRad + backward.squareAmpRad) / span);
         Polarity busier = ofBusierThyristor(design.stage());
         double thyristorMean = busier.chargeAmpRad / span;
         double thyristorRms = Math.sqrt(busier.squareAmpRad / span);
@@ -68,7 +66,7 @@ record CurrentSums(double chargeAmpRad, double squareAmpRad, double peakAmps, Po
                 (forward.chargeAmpRad - backward.chargeAmpRad) / span,
                 rms > 0 ? rms / mean : Double.NaN,
                 rms > 0 ? peakAmps / rms : Double.NaN,
-                lineAmps > 0 ? watts / (lineVolts * lineAmps) : Double.NaN,
+                powerFactor(watts, condition.lineVolts() * design.line().rmsFactor(), span),
                 conductionRad,
                 thyristorMean,
                 thyristorRms,
@@ -80,6 +78,11 @@ record CurrentSums(double chargeAmpRad, double squareAmpRad, double peakAmps, Po
                 period.halfCycles(),
                 period.letsGo(),
                 OptionalDouble.empty());
+    }
+
+    private double powerFactor(double watts, double lineVolts, double spanRad) {
+        double lineAmps = Math.sqrt((forward.squareAmpRad + backward.squareAmpRad) / spanRad);
+        return lineAmps > 0 ? watts / (lineVolts * lineAmps) : Double.NaN;
     }
 
     /** One thyristor carries everything, but for two in inverse parallel. */

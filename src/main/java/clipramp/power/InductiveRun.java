@@ -248,11 +248,7 @@ final class InductiveRun {
                 break;
             }
             double last = Math.min(window.toRad() - turnOnRad, end);
-            DoubleUnaryOperator offersMore = rad -> {
-                double there = current.ampsAt(rad);
-                return loop.thyristorLoadVolts(rad, loop.directionAt(rad), there) - loop.diodeLoadVolts(there);
-            };
-            double at = begun(offersMore, from, last);
+            double at = begun(rad -> thyristorOffersMore(rad, current), from, last);
             if (at < end) {
                 spans.add(loop.diodeSpan(now, at, current));
                 amps = current.ampsAt(at);
@@ -265,6 +261,16 @@ final class InductiveRun {
             }
         }
         spans.add(loop.diodeSpan(now, end, current));
+        keepFreewheeling(current, dies, end);
+    }
+
+    private double thyristorOffersMore(double rad, InductiveCurrent current) {
+        double there = current.ampsAt(rad);
+        return loop.thyristorLoadVolts(rad, loop.directionAt(rad), there) - loop.diodeLoadVolts(there);
+    }
+
+    /** What is left at {@code end} of a current that no pulse took over. */
+    private void keepFreewheeling(InductiveCurrent current, double dies, double end) {
         // Beyond the span's end it still dies where it says, unless a pulse comes first.
         if (dies <= spanRad || dies - spanRad < windows.get(0).fromRad()) {
             noteExtinction(dies);
@@ -394,8 +400,7 @@ final class InductiveRun {
                 if (function.applyAsDouble(below) > 0) {
                     return below;
                 }
-                double root = new BrentSolver(ROOT_RAD).solve(TRIALS, function::applyAsDouble, below, above);
-                return root;
+                return new BrentSolver(ROOT_RAD).solve(TRIALS, function::applyAsDouble, below, above);
             }
             below = above;
         }

@@ -78,15 +78,20 @@ final class FiringSection {
     private void steps(OperatingPoint point, Pulse pulse) {
         HalfCycle half = point.solution().shown();
         double ohms = point.rampOhms();
-        double supply = pulse.supplyVolts();
         double peak = pulse.peakPointVolts();
-        if (!(peak < supply) || !(half.startVolts() < peak)) {
+        if (!(peak < pulse.supplyVolts()) || !(half.startVolts() < peak)) {
             paper.text(
                     "At mid-knob the pulse comes as the supply collapses; the textbook's formula says nothing of that.");
             return;
         }
         paper.need(130);
         paper.heading("Why they differ, at R_E = " + Shown.quantity(ohms, Unit.OHM));
+        paper.add(whyTheyDiffer(half, pulse, ohms).table());
+    }
+
+    private Grid whyTheyDiffer(HalfCycle half, Pulse pulse, double ohms) {
+        double supply = pulse.supplyVolts();
+        double peak = pulse.peakPointVolts();
         double textbook = PublishedRelations.textbookPeriodSeconds(ohms, farads, eta);
         double peakKnown = PublishedRelations.freeRunningPeriodSeconds(ohms, farads, supply, 0, peak);
         double startKnown = PublishedRelations.freeRunningPeriodSeconds(ohms, farads, supply, half.startVolts(), peak);
@@ -106,16 +111,16 @@ final class FiringSection {
                         + Shown.quantity(half.startVolts(), Unit.VOLT),
                 startKnown,
                 startKnown - peakKnown);
-        step(
-                grid,
-                "the supply as it rises with the line and is clipped"
-                        + (half.clipFromRad().isPresent()
-                                ? " from " + Shown.degrees(half.clipFromRad().getAsDouble()) + " on"
-                                : " nowhere")
-                        + ": the solved delay",
-                pulse.startSeconds(),
-                pulse.startSeconds() - startKnown);
-        paper.add(grid.table());
+        step(grid, asTheSupplyIs(half), pulse.startSeconds(), pulse.startSeconds() - startKnown);
+        return grid;
+    }
+
+    private static String asTheSupplyIs(HalfCycle half) {
+        return "the supply as it rises with the line and is clipped"
+                + (half.clipFromRad().isPresent()
+                        ? " from " + Shown.degrees(half.clipFromRad().getAsDouble()) + " on"
+                        : " nowhere")
+                + ": the solved delay";
     }
 
     private void step(Grid grid, String what, double seconds, double difference) {

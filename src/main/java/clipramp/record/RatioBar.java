@@ -45,16 +45,17 @@ final class RatioBar implements PdfPCellEvent {
         } else {
             page.fill();
         }
-        page.setLineWidth(1.1f);
-        page.moveTo(asked, middle - 4.5f);
-        page.lineTo(asked, middle + 4.5f);
-        page.stroke();
+        upright(page, asked, middle, 4.5f, 1.1f);
         if (margin.holdsFrom() > 1) {
-            page.setLineWidth(0.5f);
-            page.moveTo(holds, middle - 3);
-            page.lineTo(holds, middle + 3);
-            page.stroke();
+            upright(page, holds, middle, 3, 0.5f);
         }
         page.restoreState();
+    }
+
+    private static void upright(PdfContentByte page, float x, float middle, float reach, float weight) {
+        page.setLineWidth(weight);
+        page.moveTo(x, middle - reach);
+        page.lineTo(x, middle + reach);
+        page.stroke();
     }
 }
