@@ -46,6 +46,9 @@ final class CheckCommand extends Analysis {
         if (plot != null) {
             Outputs.requirePlotName(plot);
         }
+        if (record != null) {
+            Outputs.requireRecordName(record);
+        }
         LoadedDesign loaded = design.load(session);
         Check check = design.check(loaded);
         if (json) {

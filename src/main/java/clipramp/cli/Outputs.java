@@ -49,7 +49,7 @@ final class Outputs {
     }
 
     /** A record replaces an older one; a slip of the name must not replace a design or its readings. */
-    private static void requireRecordName(String name) {
+    static void requireRecordName(String name) {
         if (name.toLowerCase(Locale.ROOT).matches(".*\\.(ya?ml|csv|json|svg|png)")) {
             throw Problems.refused(
                     name, "the record is a PDF; expected a file name that ends in .pdf. Nothing was written.");

@@ -51,6 +51,7 @@ final class RecordCommand extends Analysis {
 
     @Override
     public Integer call() {
+        Outputs.requireRecordName(out);
         PageSize size = Outputs.paper(paper);
         LoadedDesign loaded = design.load(session);
         Check check = design.check(loaded);

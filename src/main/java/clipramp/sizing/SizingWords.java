@@ -26,8 +26,8 @@ public final class SizingWords {
     public static String clause(SizingAnswer answer) {
         return switch (answer.outcome()) {
             case WORST_CASE ->
-                ": no margin fails, neither with nominal parts nor for the fastest and the slowest unit"
-                        + (Trimming.isIn(answer.design()) ? ", once its trimmers are set." : ".");
+                ": the fastest and the slowest unit fail no margin"
+                        + (Trimming.isIn(answer.design()) ? ", once trimmed." : ".");
             case NOMINAL -> ": no margin fails at any line and temperature.";
             case NOTHING -> "; this is the nearest that was found.";
         };
