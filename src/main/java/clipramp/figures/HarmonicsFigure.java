@@ -32,7 +32,6 @@ public record HarmonicsFigure(LineCheck check, Optional<Setting> standing) imple
     /** Share of the width that the last line of the legend may take. */
     private static final double MOST_LEGEND = 0.6;
 
-
     /** With the bars of the setting that uses most of the table. */
     public HarmonicsFigure(LineCheck check) {
         this(check, Optional.empty());
@@ -190,7 +189,8 @@ public record HarmonicsFigure(LineCheck check, Optional<Setting> standing) imple
                 : "order " + binding.order() + " binds first: " + Numerals.significant(100 * binding.used(), DIGITS)
                         + " % of its limit";
         // On a narrow figure it would lie over the bars; the sentence says it too.
-        if (Lettering.width(first, style.smallBold()) < MOST_LEGEND * plot.area().getWidth()) {
+        if (Lettering.width(first, style.smallBold())
+                < MOST_LEGEND * plot.area().getWidth()) {
             double right = plot.area().getMaxX() - 2 * style.gap();
             plot.pen().right(first, style.smallBold(), style.palette().ink(), right, y);
         }

@@ -55,7 +55,9 @@ public final class Sizing {
         boolean best = found.outcome() == Outcome.WORST_CASE && found.check().verdict() == Verdict.HOLDS;
         return best
                 ? found
-                : standing(request).filter(s -> BY_VERDICT.compare(s, found) < 0).orElse(found);
+                : standing(request)
+                        .filter(s -> BY_VERDICT.compare(s, found) < 0)
+                        .orElse(found);
     }
 
     /** What stands at the open parts, as it stands: the search starts elsewhere, and may end with less. */

@@ -28,8 +28,8 @@ enum FuzzTarget {
                     .withValue("ramp.pot.shunt", "1 MΩ")
                     .withValue("title", "x")
                     .without("gate.shunt"));
-            orProblems(() ->
-                    DesignFiles.load(new Source("wax.yaml", BadInputTest.base()), List.of(text(bytes)), SHIPPED));
+            orProblems(
+                    () -> DesignFiles.load(new Source("wax.yaml", BadInputTest.base()), List.of(text(bytes)), SHIPPED));
         }
     },
     READINGS("readsAnyReadings") {

@@ -100,7 +100,8 @@ class RemediedTest {
                 .ramp();
         assertThat(trimmed.trimmers().high()).isPresent();
         // At the middle of the track the unit is the one before, within a step of the series of parts that are sold.
-        assertThat(trimmed.fixed().value() + Trimmers.nominalOhms(trimmed.trimmers().high()))
+        assertThat(trimmed.fixed().value()
+                        + Trimmers.nominalOhms(trimmed.trimmers().high()))
                 .isCloseTo(before.fixed().value(), withinPercentage(5));
     }
 

@@ -30,7 +30,8 @@ final class LoadCompanions {
                 changes.add(new Change("load.exponent", ""));
                 changes.add(new Change("load.cold-ratio", ""));
                 changes.add(new Change("load.resistance", QuantityText.format(ohms, Unit.OHM)));
-                double henries = REACTANCE_SHARE * ohms / (2 * Math.PI * design.line().hertz());
+                double henries =
+                        REACTANCE_SHARE * ohms / (2 * Math.PI * design.line().hertz());
                 changes.add(new Change("load.inductance", QuantityText.format(henries, Unit.HENRY, DIGITS)));
                 inductive(design.stage(), design, changes);
             }

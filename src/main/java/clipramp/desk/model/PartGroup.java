@@ -14,8 +14,7 @@ public enum PartGroup {
     LINE("line") {
         @Override
         List<String> keys(Design design) {
-            return List.of(
-                    "line", "line.voltage", "line.frequency", "line.low", "line.high", "line.recorded");
+            return List.of("line", "line.voltage", "line.frequency", "line.low", "line.high", "line.recorded");
         }
     },
     CLIP("clip") {

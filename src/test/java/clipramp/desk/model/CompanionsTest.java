@@ -181,8 +181,13 @@ class CompanionsTest {
                     .flatMap(group -> group.keys(sheet.design()).stream())
                     .toList();
             assertThat(keys).doesNotHaveDuplicates();
-            for (String key : List.of("load.inductance", "load.cold-ratio", "load.exponent", "snubber.resistance",
-                    "gate.transformer.ratio", "trigger.upper")) {
+            for (String key : List.of(
+                    "load.inductance",
+                    "load.cold-ratio",
+                    "load.exponent",
+                    "snubber.resistance",
+                    "gate.transformer.ratio",
+                    "trigger.upper")) {
                 if (sheet.text().valueAt(key).isPresent()) {
                     assertThat(keys).as(example.id()).contains(key);
                 }
