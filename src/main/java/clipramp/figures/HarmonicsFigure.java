@@ -163,12 +163,11 @@ public record HarmonicsFigure(LineCheck check, Optional<Setting> standing) imple
 
     /** In the corner over the high orders, which limits and currents leave free. */
     private void legend(Plot plot, Style style) {
-        Order binding = check.binding();
         List<String> texts = new ArrayList<>(List.of(
                 (standing.isPresent() ? "as it stands" : "at the worst setting") + at(filled().position()),
                 "largest of any setting",
                 "class A limit (guidance)"));
-        if (binding.used() > 1) {
+        if (check.binding().used() > 1) {
             texts.add("over the limit");
         }
         double line = 1.5 * style.small().getSize2D();
@@ -184,6 +183,11 @@ public record HarmonicsFigure(LineCheck check, Optional<Setting> standing) imple
             plot.pen().left(texts.get(i), style.small(), style.palette().ink(), x + swatch + style.gap(), y);
             y += line;
         }
+        binding(plot, style, y);
+    }
+
+    private void binding(Plot plot, Style style, double y) {
+        Order binding = check.binding();
         String first = binding.used() == 0
                 ? "no current flows"
                 : "order " + binding.order() + " binds first: " + Numerals.significant(100 * binding.used(), DIGITS)

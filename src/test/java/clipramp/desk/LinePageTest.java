@@ -39,7 +39,9 @@ class LinePageTest {
     void ordersStandBesideTheTableAndFollowKnobAndEdits() {
         try (Harness window = Harness.start(home).example("drying-cabinet")) {
             window.press("#page-line");
-            window.await(() -> !window.model.isBusy() && figure(window) != null);
+            window.await(() ->
+                    window.stage.getScene().lookup("#line-figure") instanceof FigurePane pane && pane.figure() != null);
+            window.await(() -> !window.model.isBusy());
             @SuppressWarnings("unchecked")
             TableView<List<String>> orders = window.find("#line-orders", TableView.class);
             assertThat(Harness.at(() -> orders.getItems().size())).isEqualTo(40);

@@ -38,13 +38,7 @@ final class LoadCompanions {
             case "filament" -> {
                 leaveInductive(changes);
                 if (load instanceof Load.Resistor || load instanceof Load.Inductive) {
-                    double volts = design.line().volts();
-                    changes.add(new Change("load.resistance", ""));
-                    changes.add(new Change("load.cold-ratio", ""));
-                    changes.add(new Change(
-                            "load.rated",
-                            QuantityText.format(volts * volts / ohms, Unit.WATT, DIGITS) + " at "
-                                    + QuantityText.format(volts, Unit.VOLT)));
+                    rateAtLineVoltage(design, changes);
                 }
             }
             default -> {
@@ -53,6 +47,14 @@ final class LoadCompanions {
                 changes.add(new Change("load.cold-ratio", ""));
             }
         }
+    }
+
+    private static void rateAtLineVoltage(Design design, List<Change> changes) {
+        double volts = design.line().volts();
+        String watts = QuantityText.format(volts * volts / design.load().resistanceOhms(), Unit.WATT, DIGITS);
+        changes.add(new Change("load.resistance", ""));
+        changes.add(new Change("load.cold-ratio", ""));
+        changes.add(new Change("load.rated", watts + " at " + QuantityText.format(volts, Unit.VOLT)));
     }
 
     private static void leaveInductive(List<Change> changes) {
