@@ -142,6 +142,7 @@ class FitPageTest {
             assertThat(window.find("#fit-cell-1-0", TextField.class).isFocused())
                     .isTrue();
             assertThat(window.find("#fit-cell-0-0", TextField.class).getText()).isEqualTo("5.1");
+            window.find("#fit-cell-5-0", TextField.class);
             Harness.at(() -> {
                 ((TextField) window.stage.getScene().lookup("#fit-cell-5-0")).setText("95");
                 return null;
@@ -169,6 +170,7 @@ class FitPageTest {
     @Test
     void whatCannotBeReadIsNamedWithItsLine() {
         try (Harness window = onThePage(home)) {
+            window.find("#fit-cell-1-2", TextField.class);
             Harness.at(() -> {
                 ((TextField) window.stage.getScene().lookup("#fit-cell-1-0")).setText("5O");
                 ((TextField) window.stage.getScene().lookup("#fit-cell-1-2")).setText("90");

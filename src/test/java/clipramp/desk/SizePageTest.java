@@ -33,6 +33,7 @@ class SizePageTest {
     }
 
     private static void untick(Harness window, String... parts) {
+        window.find("#size-free-" + parts[0], CheckBox.class);
         Harness.at(() -> {
             for (String part : parts) {
                 ((CheckBox) window.stage.getScene().lookup("#size-free-" + part)).setSelected(false);
