@@ -4,7 +4,6 @@ import clipramp.desk.model.MarginRow;
 import clipramp.desk.model.Resized;
 import clipramp.margins.Check;
 import clipramp.margins.Margin;
-import clipramp.margins.Verdict;
 import clipramp.sizing.Reason;
 import clipramp.sizing.SizingAnswer.Conflict;
 import clipramp.sizing.SizingWords;
@@ -54,18 +53,9 @@ final class SizedView {
         rows.add(List.of("margins", summary(before), summary(after)));
         rows.add(List.of("decided by", deciding(before), deciding(after)));
         box.getChildren().add(TextGrid.ofWords("sized-verdicts", rows));
-        if (rank(before.verdict()) < rank(after.verdict())) {
+        if (before.verdict().compareTo(after.verdict()) < 0) {
             add("What stands there has the better verdict. Free more parts, or keep it.", "");
         }
-    }
-
-    private static int rank(Verdict verdict) {
-        return switch (verdict) {
-            case HOLDS -> 0;
-            case NOT_JUDGED -> 1;
-            case TIGHT -> 2;
-            case FAILS -> 3;
-        };
     }
 
     private static String verdict(Check check) {

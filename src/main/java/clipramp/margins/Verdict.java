@@ -1,6 +1,6 @@
 package clipramp.margins;
 
-/** What is said of a margin, and of a whole design: the worst of its margins. */
+/** What is said of a margin, and of a whole design: the worst of its margins. Better ones come first. */
 public enum Verdict {
     HOLDS("holds"),
     NOT_JUDGED("not-judged"),

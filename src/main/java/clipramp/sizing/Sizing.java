@@ -28,7 +28,7 @@ public final class Sizing {
 
     /** Worse outcomes come later; of equal ones those whose verdict is worse. */
     private static final Comparator<SizingAnswer> BY_VERDICT = Comparator.comparing(SizingAnswer::outcome)
-            .thenComparingInt(answer -> rank(answer.check().verdict()));
+            .thenComparing(answer -> answer.check().verdict());
 
     private Sizing() {}
 
@@ -67,15 +67,6 @@ public final class Sizing {
         } catch (RefusedCircuit unsound) {
             return Optional.empty();
         }
-    }
-
-    private static int rank(Verdict verdict) {
-        return switch (verdict) {
-            case HOLDS -> 0;
-            case NOT_JUDGED -> 1;
-            case TIGHT -> 2;
-            case FAILS -> 3;
-        };
     }
 
     private static SizingAnswer searched(SizingRequest request, Watch watch) {
