@@ -12,7 +12,6 @@ import java.awt.geom.Rectangle2D;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
-import org.jfree.chart.axis.NumberAxis;
 
 /**
  * Power against the knob's rotation, with what is wanted at both ends and the travel that does nothing.
@@ -32,10 +31,6 @@ public record KnobFigure(List<OperatingPoint> points, Wanted wanted, OptionalDou
     public record Band(double[] positions, double[] lowFractions, double[] highFractions) {}
 
     private static final double SWATCH = 10;
-    /** Both axes reach a little beyond 0..100 %, so that nothing is cut off at the ends. */
-    private static final double LEAST = -2;
-
-    private static final double MOST = 102;
     private static final int MOST_MARKED = 21;
 
     public KnobFigure {
@@ -111,8 +106,8 @@ public record KnobFigure(List<OperatingPoint> points, Wanted wanted, OptionalDou
     public OptionalDouble positionAt(double x, double width, double height, Style style) {
         Rectangle2D area = plotArea(width, height, style);
         double share = (x - area.getMinX()) / area.getWidth();
-        double percent = LEAST + share * (MOST - LEAST);
-        return percent < LEAST || percent > MOST
+        double percent = PercentAxis.LEAST + share * (PercentAxis.MOST - PercentAxis.LEAST);
+        return percent < PercentAxis.LEAST || percent > PercentAxis.MOST
                 ? OptionalDouble.empty()
                 : OptionalDouble.of(Math.min(1, Math.max(0, percent / 100)));
     }
@@ -129,7 +124,7 @@ public record KnobFigure(List<OperatingPoint> points, Wanted wanted, OptionalDou
     @Override
     public void draw(Graphics2D g, double width, double height, Style style) {
         Palette palette = style.palette();
-        Plot plot = new Plot(g, style, axis(width, style), axis(height * 0.8, style));
+        Plot plot = new Plot(g, style, PercentAxis.of(width, style), PercentAxis.of(height * 0.8, style));
         curve(plot, style);
         Rectangle2D area = plotArea(width, height, style);
         plot.place(area);
@@ -170,14 +165,6 @@ public record KnobFigure(List<OperatingPoint> points, Wanted wanted, OptionalDou
 
     private static double percentOfFull(OperatingPoint point) {
         return 100 * point.load().fraction();
-    }
-
-    private static NumberAxis axis(double room, Style style) {
-        NumberAxis axis = new NumberAxis();
-        axis.setRange(LEAST, MOST);
-        double step = room / style.zoom() > 260 ? 10 : room / style.zoom() > 120 ? 25 : 50;
-        axis.setTickUnit(Plot.ticks(step, Numerals::plain));
-        return axis;
     }
 
     private void deadTravel(Plot plot, Style style) {

@@ -7,7 +7,6 @@ import java.awt.Stroke;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.stream.IntStream;
-import org.jfree.chart.axis.NumberAxis;
 
 /**
  * Two knobs, one over the other: power or light against the rotation before and after, and the straight line between the
@@ -17,8 +16,6 @@ import org.jfree.chart.axis.NumberAxis;
  * @param after the knob as it is proposed, of the same measure
  */
 public record ShapeFigure(KnobShape before, KnobShape after) implements Figure {
-    private static final double LEAST = -2;
-    private static final double MOST = 102;
 
     /** One row of numbers for so many solved positions. */
     private static final int ROW_EVERY = 9;
@@ -72,7 +69,7 @@ public record ShapeFigure(KnobShape before, KnobShape after) implements Figure {
     @Override
     public void draw(Graphics2D g, double width, double height, Style style) {
         Palette palette = style.palette();
-        Plot plot = new Plot(g, style, axis(width, style), axis(height * 0.8, style));
+        Plot plot = new Plot(g, style, PercentAxis.of(width, style), PercentAxis.of(height * 0.8, style));
         // One path a curve: drawn piece by piece, a dash would begin anew on every piece.
         plot.renderer().setDrawSeriesLineAsPath(true);
         double first = 100 * after.values().get(0);
@@ -85,14 +82,6 @@ public record ShapeFigure(KnobShape before, KnobShape after) implements Figure {
         plot.draw();
         plot.axisNames("share of full " + measure() + ", %", "knob, % of its rotation clockwise", height);
         legend(plot, style, last >= first);
-    }
-
-    private static NumberAxis axis(double room, Style style) {
-        NumberAxis axis = new NumberAxis();
-        axis.setRange(LEAST, MOST);
-        double step = room / style.zoom() > 260 ? 10 : room / style.zoom() > 120 ? 25 : 50;
-        axis.setTickUnit(Plot.ticks(step, Numerals::plain));
-        return axis;
     }
 
     private double[] positions() {

@@ -10,7 +10,6 @@ import java.awt.geom.Rectangle2D;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
-import org.jfree.chart.axis.NumberAxis;
 
 /**
  * Power of many units against the knob: half of them, nine tenths and all but two percent as nested bands, the middle
@@ -22,8 +21,6 @@ public record SpreadFigure(SpreadResult spread) implements Figure {
     private static final int MIDDLE = SpreadResult.PERCENTAGES.size() / 2;
     private static final double[] TINTS = {0.14, 0.26, 0.42};
     private static final String[] MEANINGS = {"98 % of the units", "90 %", "half", "middle unit", "worst case"};
-    private static final double LEAST = -2;
-    private static final double MOST = 102;
 
     public SpreadFigure {
         if (spread.positions().isEmpty()) {
@@ -79,7 +76,7 @@ public record SpreadFigure(SpreadResult spread) implements Figure {
     @Override
     public void draw(Graphics2D g, double width, double height, Style style) {
         Palette palette = style.palette();
-        Plot plot = new Plot(g, style, axis(width, style), axis(height * 0.8, style));
+        Plot plot = new Plot(g, style, PercentAxis.of(width, style), PercentAxis.of(height * 0.8, style));
         plot.curve(positions(), fractions(MIDDLE), palette.load(), style.trace(), Plot.noMarker());
         plot.curve(positions(), worst(false), palette.load(), style.dotted(), Plot.noMarker());
         plot.curve(positions(), worst(true), palette.load(), style.dotted(), Plot.noMarker());
@@ -94,13 +91,6 @@ public record SpreadFigure(SpreadResult spread) implements Figure {
         plot.draw();
         plot.axisNames("share of full power, %", "knob, % of its rotation clockwise", height);
         legend(plot, style);
-    }
-
-    private static NumberAxis axis(double room, Style style) {
-        NumberAxis axis = new NumberAxis();
-        axis.setRange(LEAST, MOST);
-        axis.setTickUnit(Plot.ticks(room / style.zoom() > 260 ? 10 : 25, Numerals::plain));
-        return axis;
     }
 
     private double[] positions() {
