@@ -9,6 +9,8 @@ import java.util.List;
 import java.util.Map;
 import java.util.Objects;
 import java.util.OptionalDouble;
+import java.util.function.Function;
+import java.util.function.ToDoubleFunction;
 
 /** The first half cycle into a cold load against what the thyristor bears once in a while. */
 final class SurgeMargins {
@@ -39,18 +41,12 @@ final class SurgeMargins {
             return Ceiling.unjudged(kind, "the profile states no thyristor.device.limits.surge");
         }
         double limit = limits.surgeAmps().getAsDouble();
-        List<Finding> findings = new ArrayList<>();
-        for (JudgedCondition at : bench.conditions()) {
-            Inrush inrush = Objects.requireNonNull(inrushes.get(at));
-            findings.add(new Finding(
-                    at.words(),
-                    limit,
-                    inrush.peakAmps(),
-                    kind.sense(),
-                    "switched on at the worst angle into " + Say.ohms(inrush.coldOhms()) + ": "
-                            + Say.amps(inrush.peakAmps()) + "; I_TSM " + Say.amps(limit)));
-        }
-        return Finding.worst(kind, findings);
+        return worst(
+                kind,
+                limit,
+                Inrush::peakAmps,
+                inrush -> "switched on at the worst angle into " + Say.ohms(inrush.coldOhms()) + ": "
+                        + Say.amps(inrush.peakAmps()) + "; I_TSM " + Say.amps(limit));
     }
 
     private Margin energy() {
@@ -60,18 +56,24 @@ final class SurgeMargins {
             return Ceiling.unjudged(kind, "the profile states neither thyristor.device.limits.i2t nor surge");
         }
         double limit = stated.orElseGet(() -> Math.pow(limits.surgeAmps().getAsDouble(), 2) / (4 * RATED_HERTZ));
+        return worst(
+                kind,
+                limit,
+                Inrush::ampsSquaredSeconds,
+                inrush -> "one half cycle into " + Say.ohms(inrush.coldOhms()) + ": "
+                        + Say.ampsSquaredSeconds(inrush.ampsSquaredSeconds()) + "; limit "
+                        + Say.ampsSquaredSeconds(limit)
+                        + (stated.isPresent() ? "" : ", that of a 60 Hz half cycle of I_TSM"));
+    }
+
+    /** The inrush of every condition against one limit. */
+    private Margin worst(
+            MarginKind kind, double limit, ToDoubleFunction<Inrush> there, Function<Inrush, String> reason) {
         List<Finding> findings = new ArrayList<>();
         for (JudgedCondition at : bench.conditions()) {
             Inrush inrush = Objects.requireNonNull(inrushes.get(at));
-            findings.add(new Finding(
-                    at.words(),
-                    limit,
-                    inrush.ampsSquaredSeconds(),
-                    kind.sense(),
-                    "one half cycle into " + Say.ohms(inrush.coldOhms()) + ": "
-                            + Say.ampsSquaredSeconds(inrush.ampsSquaredSeconds()) + "; limit "
-                            + Say.ampsSquaredSeconds(limit)
-                            + (stated.isPresent() ? "" : ", that of a 60 Hz half cycle of I_TSM")));
+            findings.add(
+                    new Finding(at.words(), limit, there.applyAsDouble(inrush), kind.sense(), reason.apply(inrush)));
         }
         return Finding.worst(kind, findings);
     }
