@@ -1,5 +1,8 @@
 package clipramp.sizing;
 
+import clipramp.gate.GatePower;
+import java.util.Arrays;
+
 /** The textbook's sizing of a gate drive: closed forms, each as good as its straight gate characteristic. */
 public final class GateRelations {
     private GateRelations() {}
@@ -19,18 +22,14 @@ public final class GateRelations {
      * @throws IllegalArgumentException where the load line stays under the curve
      */
     public static GatePoint[] onPowerCurve(double sourceVolts, double ohms, double watts) {
-        double discriminant = sourceVolts * sourceVolts - 4 * ohms * watts;
-        if (discriminant < 0) {
+        double[] amps = GatePower.currentsAtPower(sourceVolts, ohms, watts);
+        if (amps.length == 0) {
             throw new IllegalArgumentException("a source of " + sourceVolts + " V behind " + ohms
                     + " ohm never gives more than " + sourceVolts * sourceVolts / (4 * ohms) + " W, not " + watts);
         }
-        double root = Math.sqrt(discriminant);
-        // i = (E -+ root)/(2R), the smaller one without cancellation.
-        double large = (sourceVolts + root) / (2 * ohms);
-        double small = watts / (ohms * large);
-        return new GatePoint[] {
-            new GatePoint(small, sourceVolts - ohms * small), new GatePoint(large, sourceVolts - ohms * large)
-        };
+        return Arrays.stream(amps)
+                .mapToObj(i -> new GatePoint(i, sourceVolts - ohms * i))
+                .toArray(GatePoint[]::new);
     }
 
     /**
@@ -41,7 +40,7 @@ public final class GateRelations {
      * @param watts W
      */
     public static GatePoint atPower(double kneeVolts, double slopeOhms, double watts) {
-        double amps = 2 * watts / (kneeVolts + Math.sqrt(kneeVolts * kneeVolts + 4 * slopeOhms * watts));
+        double amps = GatePower.ampsAtPower(kneeVolts, slopeOhms, watts);
         return new GatePoint(amps, kneeVolts + slopeOhms * amps);
     }
 
