@@ -201,7 +201,7 @@ final class SpreadPage implements PageView {
         cancel.setDisable(run.isEnding());
         bar.setVisible(run.isRunning());
         run.progress().ifPresent(now -> {
-            bar.setProgress((double) now.done() / now.of());
+            bar.setProgress(now.share().orElse(ProgressBar.INDETERMINATE_PROGRESS));
             progress.setText(run.isEnding() ? "Ending…" : run.isRunning() ? now.words() : over());
         });
         run.histogram().filter(h -> h.units() > 0).ifPresent(h -> {

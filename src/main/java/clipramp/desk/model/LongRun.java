@@ -7,6 +7,7 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.concurrent.CancellationException;
 import java.util.concurrent.Executor;
+import java.util.function.Consumer;
 
 /**
  * Long work away from home that tells how far it is and can be cancelled; one at a time. What was cancelled leaves the
@@ -80,6 +81,7 @@ public final class LongRun<Q, A> {
     private final Work<Q, A> work;
     private final Executor away;
     private final Executor home;
+    private final Consumer<Trouble> troubles;
     private final List<Runnable> listeners = new ArrayList<>();
     private Optional<Following> running = Optional.empty();
     private Optional<Progress> progress = Optional.empty();
@@ -93,10 +95,20 @@ public final class LongRun<Q, A> {
      * @param home the thread that asks and is answered
      */
     public LongRun(String what, Work<Q, A> work, Executor away, Executor home) {
+        this(what, work, away, home, told -> {});
+    }
+
+    /**
+     * The same, where failures are told elsewhere too.
+     *
+     * @param troubles takes, at home, what went wrong
+     */
+    LongRun(String what, Work<Q, A> work, Executor away, Executor home, Consumer<Trouble> troubles) {
         this.what = what;
         this.work = work;
         this.away = away;
         this.home = home;
+        this.troubles = troubles;
     }
 
     /** Told at home whenever there is more to see. */
@@ -104,7 +116,8 @@ public final class LongRun<Q, A> {
         listeners.add(listener);
     }
 
-    private void changed() {
+    /** For what a run shows besides its progress. */
+    void changed() {
         List.copyOf(listeners).forEach(Runnable::run);
     }
 
@@ -125,9 +138,14 @@ public final class LongRun<Q, A> {
             } catch (CancellationException e) {
                 home.execute(() -> finish(() -> {}));
             } catch (RuntimeException e) {
-                home.execute(() -> finish(() -> trouble = Optional.of(Trouble.of(what, e))));
+                home.execute(() -> finish(() -> failed(Trouble.of(what, e))));
             }
         });
+    }
+
+    private void failed(Trouble why) {
+        trouble = Optional.of(why);
+        troubles.accept(why);
     }
 
     private void finish(Runnable report) {
