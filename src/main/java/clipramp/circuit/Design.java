@@ -48,44 +48,6 @@ public record Design(
         designators = Map.copyOf(designators);
     }
 
-    /** A design without a snubber. */
-    public Design(
-            String title,
-            String notes,
-            Document document,
-            Line line,
-            Stage stage,
-            StageDiodes stageDiodes,
-            Load load,
-            ClipSupply clip,
-            Ramp ramp,
-            Trigger trigger,
-            GateDrive gate,
-            Thyristor thyristor,
-            Surroundings surroundings,
-            Wanted wanted,
-            double resistorDerating,
-            Map<String, String> designators) {
-        this(
-                title,
-                notes,
-                document,
-                line,
-                stage,
-                stageDiodes,
-                load,
-                clip,
-                ramp,
-                trigger,
-                gate,
-                thyristor,
-                Optional.empty(),
-                surroundings,
-                wanted,
-                resistorDerating,
-                designators);
-    }
-
     /** Nominal line at 25 °C. */
     public Condition nominalCondition() {
         return new Condition(line.volts(), line.hertz(), 25);

@@ -191,11 +191,6 @@ final class TwoStates {
         return fast;
     }
 
-    /** Slowest decay, 1/s. */
-    double slowestRate() {
-        return slow;
-    }
-
     TwoStates copy() {
         TwoStates other = new TwoStates();
         other.wave = wave;

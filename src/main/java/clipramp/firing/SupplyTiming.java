@@ -92,9 +92,4 @@ final class SupplyTiming {
     boolean isWholePeriods() {
         return wholePeriods;
     }
-
-    /** Half cycles to a line period. */
-    int perLinePeriod() {
-        return wholePeriods ? 1 : 2;
-    }
 }

@@ -44,31 +44,6 @@ public record Check(
      */
     public record PulseSummary(OptionalDouble atKnob, Pulse pulse, double meanGateWatts, double quiescentGateVolts) {}
 
-    /** A check without line current and heat. */
-    public Check(
-            Design design,
-            Condition condition,
-            List<OperatingPoint> knob,
-            Optional<PulseSummary> pulse,
-            Dissipation dissipation,
-            OptionalDouble clipFromRad,
-            List<Margin> margins,
-            Verdict verdict,
-            List<Note> notes) {
-        this(
-                design,
-                condition,
-                knob,
-                pulse,
-                dissipation,
-                clipFromRad,
-                margins,
-                verdict,
-                notes,
-                Optional.empty(),
-                Optional.empty());
-    }
-
     public Check {
         knob = List.copyOf(knob);
         margins = List.copyOf(margins);

@@ -48,18 +48,6 @@ public record RecordContent(
         commissioning = List.copyOf(commissioning);
     }
 
-    /** Without fit or spread. */
-    public RecordContent(
-            LoadedDesign loaded,
-            Check check,
-            List<Profile> profiles,
-            Lanes lanes,
-            List<Expectation> commissioning,
-            FaultSheet faults,
-            String programVersion) {
-        this(loaded, check, profiles, lanes, commissioning, faults, programVersion, Optional.empty(), Optional.empty());
-    }
-
     /** The same with a page on what many units of this design do. */
     public RecordContent withSpread(Optional<SpreadResult> drawn) {
         return new RecordContent(loaded, check, profiles, lanes, commissioning, faults, programVersion, fit, drawn);
@@ -89,7 +77,16 @@ public record RecordContent(
                 .map(Profile::read)
                 .toList();
         FaultSheet faults = Faults.of(check.design(), check.condition());
-        return new RecordContent(loaded, check, profiles, lanes, Commissioning.of(check), faults, programVersion);
+        return new RecordContent(
+                loaded,
+                check,
+                profiles,
+                lanes,
+                Commissioning.of(check),
+                faults,
+                programVersion,
+                Optional.empty(),
+                Optional.empty());
     }
 
     /** The same with a page about one unit as built. */

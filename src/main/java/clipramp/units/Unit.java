@@ -2,7 +2,6 @@ package clipramp.units;
 
 import java.util.List;
 import java.util.Optional;
-import java.util.OptionalInt;
 
 /** Every unit that a design file, an option or an answer uses, with its spellings. */
 public enum Unit {
@@ -76,22 +75,18 @@ public enum Unit {
     }
 
     /**
-     * Power of ten that a written unit stands for: 3 for "kΩ" in ohms, -2 for "%".
-     *
-     * @param written prefix and unit, prefix alone, or unit alone, with µ and Ω already in one spelling
-     * @return empty where this unit is not written so
-     */
-    OptionalInt exponentOf(String written) {
-        return match(written).map(m -> OptionalInt.of(m.exponent())).orElse(OptionalInt.empty());
-    }
-
-    /**
      * @param prefix prefix as meant
      * @param spelling unit as written, empty where only a prefix was
      * @param exponent power of ten of both together
      */
     record Match(Prefix prefix, String spelling, int exponent) {}
 
+    /**
+     * What a written unit stands for: prefix k and exponent 3 for "kΩ" in ohms, exponent -2 for "%".
+     *
+     * @param written prefix and unit, prefix alone, or unit alone, with µ and Ω already in one spelling
+     * @return empty where this unit is not written so
+     */
     Optional<Match> match(String written) {
         if (this == VOLT_PER_SECOND || this == AMPERE_PER_SECOND) {
             int slash = written.indexOf('/');

@@ -41,6 +41,7 @@ public final class SampleDesigns {
                 unijunctionTrigger(39, 470),
                 directGate(1_000),
                 new Thyristor(scr16Amps(), OptionalDouble.of(4)),
+                Optional.empty(),
                 new Surroundings(0, 50),
                 new Wanted(
                         Optional.of(new Goal(Measure.FRACTION, 0.12, 0.12, 0)),

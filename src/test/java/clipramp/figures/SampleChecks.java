@@ -50,7 +50,9 @@ public final class SampleChecks {
                         new Note(
                                 "self-heating",
                                 "Self-heating of the trigger device is left out (model); it would be about 10 K."),
-                        new Note("valley", "The valley voltage is on no data sheet; 2 V is common practice.")));
+                        new Note("valley", "The valley voltage is on no data sheet; 2 V is common practice.")),
+                Optional.empty(),
+                Optional.empty());
     }
 
     /** The line current of a design as the judge tells it. */

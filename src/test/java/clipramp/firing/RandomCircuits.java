@@ -199,6 +199,7 @@ final class RandomCircuits {
                         Part.of(random.nextInt(8) == 0 ? 0 : logarithmic(1, 1500))),
                 gate(),
                 thyristor(stage),
+                Optional.empty(),
                 new Surroundings(-20, 70),
                 new Wanted(Optional.empty(), Optional.empty()),
                 0.5,

@@ -119,6 +119,7 @@ final class ReferenceCases {
                         GateDrive.Polarity.POSITIVE,
                         Optional.empty()),
                 new Thyristor(thyristor(n.at("/thyristor/device")), OptionalDouble.of(1)),
+                Optional.empty(),
                 new Surroundings(0, 50),
                 new Wanted(Optional.empty(), Optional.empty()),
                 0.5,

@@ -274,7 +274,9 @@ class DesignRecordTest {
                 content.lanes(),
                 content.commissioning(),
                 content.faults(),
-                "0.1.0");
+                "0.1.0",
+                Optional.empty(),
+                Optional.empty());
         for (PageSize size : PageSize.values()) {
             byte[] bytes = DesignRecord.bytes(long_, size);
             assertThat(text(bytes, 1).replaceAll("\\s+", " "))
