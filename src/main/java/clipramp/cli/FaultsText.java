@@ -9,7 +9,7 @@ import clipramp.faults.FaultEffect;
 import clipramp.faults.FaultSheet;
 import clipramp.faults.Observation;
 import clipramp.faults.Observation.Meter;
-import clipramp.faults.Reading;
+import clipramp.faults.Probe;
 import clipramp.files.LoadedDesign;
 import java.util.ArrayList;
 import java.util.List;
@@ -71,26 +71,18 @@ final class FaultsText {
                 .column(Align.LEFT, "fault", "")
                 .column(Align.LEFT, "load gets", "")
                 .column(Align.RIGHT, "load", "W")
-                .column(Align.LEFT, "knob", "")
-                .column(Align.DECIMAL, "TP1", "dc V")
-                .column(Align.DECIMAL, "TP2", "dc V")
-                .column(Align.DECIMAL, "TP3", "peak V")
-                .column(Align.DECIMAL, "TP4", "peak V")
-                .column(Align.DECIMAL, "TP5", "dc V")
-                .column(Align.DECIMAL, "TP5", "ac V");
+                .column(Align.LEFT, "knob", "");
+        Probe.TELLING.forEach(
+                p -> table.column(Align.DECIMAL, p.point().name(), p.meter().word() + " V"));
         for (FaultEffect effect : effects) {
             boolean healthy = effect == sheet.healthy();
-            table.row(
+            List<String> row = new ArrayList<>(List.of(
                     effect.fault().words(),
                     healthy ? "" : effect.gets().word(),
                     Shown.fixed(effect.middle().watts(), effect.middle().watts() < 100 ? 1 : 0),
-                    sheet.design().ramp().pot().isEmpty() ? Shown.NONE : effect.knobActs() ? "acts" : "dead",
-                    volts(effect, TestPoint.TP1, Meter.DC, 1),
-                    volts(effect, TestPoint.TP2, Meter.DC, 1),
-                    volts(effect, TestPoint.TP3, Meter.PEAK, 2),
-                    volts(effect, TestPoint.TP4, Meter.PEAK, 2),
-                    volts(effect, TestPoint.TP5, Meter.DC, 0),
-                    volts(effect, TestPoint.TP5, Meter.AC, 0));
+                    sheet.design().ramp().pot().isEmpty() ? Shown.NONE : effect.knobActs() ? "acts" : "dead"));
+            Probe.TELLING.forEach(p -> row.add(Shown.fixed(p.volts(effect), p.decimals())));
+            table.row(row);
         }
         return table;
     }
@@ -120,7 +112,7 @@ final class FaultsText {
     }
 
     private static String volts(FaultEffect effect, TestPoint point, Meter meter, int decimals) {
-        return Shown.fixed(meter.of(effect.readings().getOrDefault(point, new Reading(0, 0, 0))), decimals);
+        return Shown.fixed(effect.volts(point, meter), decimals);
     }
 
     private void burning() {

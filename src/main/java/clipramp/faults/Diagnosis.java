@@ -101,7 +101,7 @@ public final class Diagnosis {
     }
 
     private static double expected(FaultEffect effect, Observation.Volts seen) {
-        return seen.meter().of(effect.readings().getOrDefault(seen.point(), Reading.ZERO));
+        return effect.volts(seen.point(), seen.meter());
     }
 
     private static String instead(FaultEffect effect, Observation seen) {

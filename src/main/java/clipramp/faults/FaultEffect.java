@@ -1,6 +1,7 @@
 package clipramp.faults;
 
 import clipramp.circuit.TestPoint;
+import clipramp.faults.Observation.Meter;
 import java.util.List;
 import java.util.Map;
 
@@ -28,6 +29,11 @@ public record FaultEffect(
         readings = Map.copyOf(readings);
         over = List.copyOf(over);
         remarks = List.copyOf(remarks);
+    }
+
+    /** What a meter shows at a test point, V; 0 where there is nothing. */
+    public double volts(TestPoint point, Meter meter) {
+        return meter.of(readings.getOrDefault(point, Reading.ZERO));
     }
 
     /** The load at mid-knob. */

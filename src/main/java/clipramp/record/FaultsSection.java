@@ -1,13 +1,13 @@
 package clipramp.record;
 
 import clipramp.circuit.Designators;
-import clipramp.circuit.TestPoint;
 import clipramp.faults.Burden;
 import clipramp.faults.FaultEffect;
 import clipramp.faults.FaultSheet;
-import clipramp.faults.Observation.Meter;
-import clipramp.faults.Reading;
+import clipramp.faults.Probe;
 import clipramp.units.Unit;
+import java.util.ArrayList;
+import java.util.List;
 import java.util.Map;
 import java.util.stream.Collectors;
 
@@ -50,17 +50,9 @@ final class FaultsSection {
                         + ", before anything else burns. dc is a mean-reading meter, ac true rms with the dc taken off, peak"
                         + " an oscilloscope. Take every point as live at line potential, behind a winding too: isolated"
                         + " instruments only, by whoever local rules let work on it. A reading near zero never means that a wire is dead.");
-        grid.heads(
-                "fault",
-                "load gets",
-                "load",
-                "knob",
-                "TP1 dc, V",
-                "TP2 dc, V",
-                "TP3 peak, V",
-                "TP4 peak, V",
-                "TP5 dc, V",
-                "TP5 ac, V");
+        List<String> heads = new ArrayList<>(List.of("fault", "load gets", "load", "knob"));
+        Probe.TELLING.forEach(p -> heads.add(p.point() + " " + p.meter().word() + ", V"));
+        grid.heads(heads.toArray(String[]::new));
         row(sheet.healthy());
         sheet.faults().forEach(this::row);
         paper.add(grid.table());
@@ -70,17 +62,13 @@ final class FaultsSection {
 
     private void row(FaultEffect effect) {
         boolean healthy = effect == sheet.healthy();
-        grid.row(
+        List<String> row = new ArrayList<>(List.of(
                 effect.fault().words(),
                 healthy ? Shown.NOTHING : effect.gets().word(),
                 Shown.brief(effect.middle().watts() < 1e-3 ? 0 : effect.middle().watts(), Unit.WATT),
-                sheet.design().ramp().pot().isEmpty() ? Shown.NOTHING : effect.knobActs() ? "acts" : "dead",
-                volts(effect, TestPoint.TP1, Meter.DC),
-                volts(effect, TestPoint.TP2, Meter.DC),
-                volts(effect, TestPoint.TP3, Meter.PEAK),
-                volts(effect, TestPoint.TP4, Meter.PEAK),
-                volts(effect, TestPoint.TP5, Meter.DC),
-                volts(effect, TestPoint.TP5, Meter.AC));
+                sheet.design().ramp().pot().isEmpty() ? Shown.NOTHING : effect.knobActs() ? "acts" : "dead"));
+        Probe.TELLING.forEach(p -> row.add(volts(p.volts(effect))));
+        grid.row(row.toArray(String[]::new));
         if (!effect.over().isEmpty()) {
             grid.across(
                     "burns next: " + effect.over().stream().map(this::said).collect(Collectors.joining("; ")),
@@ -90,8 +78,7 @@ final class FaultsSection {
     }
 
     /** What an instrument cannot tell from nothing is nothing. */
-    private static String volts(FaultEffect effect, TestPoint point, Meter meter) {
-        double volts = meter.of(effect.readings().getOrDefault(point, new Reading(0, 0, 0)));
+    private static String volts(double volts) {
         return Shown.number(Math.round(volts / SHOWN_VOLTS) * SHOWN_VOLTS, 3);
     }
 

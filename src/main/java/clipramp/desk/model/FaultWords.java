@@ -9,7 +9,7 @@ import clipramp.faults.FaultSheet;
 import clipramp.faults.LoadAt;
 import clipramp.faults.Observation;
 import clipramp.faults.Observation.Meter;
-import clipramp.faults.Reading;
+import clipramp.faults.Probe;
 import clipramp.figures.NumberTable;
 import clipramp.units.QuantityText;
 import clipramp.units.Unit;
@@ -18,22 +18,15 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Map;
 import java.util.stream.Collectors;
+import java.util.stream.Stream;
 
 /** A sheet of faults as the window shows it: a row a fault, and everything about one of them. */
 public final class FaultWords {
     /** Heads of the table; the second stands only where something was seen. */
-    public static final List<String> HEADS = List.of(
-            "fault",
-            "fits",
-            "load gets",
-            "load W",
-            "knob",
-            "TP1 dc V",
-            "TP2 dc V",
-            "TP3 peak V",
-            "TP4 peak V",
-            "TP5 dc V",
-            "TP5 ac V");
+    public static final List<String> HEADS = Stream.concat(
+                    Stream.of("fault", "fits", "load gets", "load W", "knob"),
+                    Probe.TELLING.stream().map(p -> p.point() + " " + p.meter().word() + " V"))
+            .toList();
 
     /** Where the fits stand, and from where the test points do. */
     public static final int FITS = 1;
@@ -70,18 +63,14 @@ public final class FaultWords {
     private List<String> row(Diagnosis.Candidate candidate) {
         FaultEffect effect = candidate.effect();
         int seen = candidate.fits().size() + candidate.contradicts().size();
-        return List.of(
+        List<String> row = new ArrayList<>(List.of(
                 effect.fault().words(),
                 seen == 0 ? NOTHING : candidate.fits().size() + " of " + seen,
                 effect.equals(sheet.healthy()) ? NOTHING : effect.gets().word(),
                 watts(effect.middle().watts()),
-                sheet.design().ramp().pot().isEmpty() ? NOTHING : effect.knobActs() ? "acts" : "dead",
-                volts(effect, TestPoint.TP1, Meter.DC, 1),
-                volts(effect, TestPoint.TP2, Meter.DC, 1),
-                volts(effect, TestPoint.TP3, Meter.PEAK, 2),
-                volts(effect, TestPoint.TP4, Meter.PEAK, 2),
-                volts(effect, TestPoint.TP5, Meter.DC, 0),
-                volts(effect, TestPoint.TP5, Meter.AC, 0));
+                sheet.design().ramp().pot().isEmpty() ? NOTHING : effect.knobActs() ? "acts" : "dead"));
+        Probe.TELLING.forEach(p -> row.add(fixed(p.volts(effect), p.decimals())));
+        return row;
     }
 
     private static String watts(double watts) {
@@ -89,7 +78,7 @@ public final class FaultWords {
     }
 
     private static String volts(FaultEffect effect, TestPoint point, Meter meter, int decimals) {
-        return fixed(meter.of(effect.readings().getOrDefault(point, new Reading(0, 0, 0))), decimals);
+        return fixed(effect.volts(point, meter), decimals);
     }
 
     private static String fixed(double value, int decimals) {
