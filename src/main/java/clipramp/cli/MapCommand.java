@@ -35,7 +35,7 @@ final class MapCommand extends Analysis {
             names = "--positions",
             paramLabel = "N",
             order = 10,
-            description = "how many knob positions, 2..1001; 11 unless said")
+            description = "how many knob positions, 2.." + MOST_POSITIONS + "; " + USUAL_POSITIONS + " unless said")
     @Nullable
     String positions;
 

@@ -28,7 +28,10 @@ final class RecordCommand extends Analysis {
     @Option(names = "--paper", paramLabel = "SIZE", order = 11, description = "a4 or letter; a4 unless said")
     String paper = "a4";
 
-    @Option(names = "--spread", order = 12, description = "with a page on what 20000 units do within their tolerances")
+    @Option(
+            names = "--spread",
+            order = 12,
+            description = "with a page on what " + SpreadOptions.USUAL_SAMPLES + " units do within their tolerances")
     boolean spread;
 
     @Option(names = "--json", order = 13, description = "the answer for machines")

@@ -84,7 +84,8 @@ final class SizeCommand implements Callable<Integer> {
     @Option(
             names = "--compensate",
             order = 8,
-            description = "choose base two's resistor for the flattest firing angle against temperature; compare rules")
+            description = "choose base two's resistor for the flattest firing angle against temperature, beside what"
+                    + " the published rules would leave")
     boolean compensate;
 
     @Option(

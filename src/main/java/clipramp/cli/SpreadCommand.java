@@ -34,7 +34,7 @@ final class SpreadCommand extends Analysis {
             names = "--samples",
             paramLabel = "N",
             order = 10,
-            description = "how many units to draw; 20000 unless said")
+            description = "how many units to draw; " + SpreadOptions.USUAL_SAMPLES + " unless said")
     @Nullable
     String samples;
 
@@ -58,7 +58,8 @@ final class SpreadCommand extends Analysis {
             names = "--judged",
             paramLabel = "N",
             order = 13,
-            description = "how many of the units are judged by every margin; 200 unless said")
+            description =
+                    "how many of the units are judged by every margin; " + SpreadOptions.USUAL_JUDGED + " unless said")
     @Nullable
     String judged;
 

@@ -63,7 +63,7 @@ final class TraceCommand extends Analysis {
             names = "--samples",
             paramLabel = "N",
             order = 13,
-            description = "about how many instants, 2..100000; 720 unless said")
+            description = "about how many instants, 2.." + MOST_SAMPLES + "; " + USUAL_SAMPLES + " unless said")
     @Nullable
     String samples;
 

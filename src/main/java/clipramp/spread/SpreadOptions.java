@@ -7,7 +7,13 @@ package clipramp.spread;
  * @param judged how many of the units are put before the judge with all margins
  */
 public record SpreadOptions(int samples, long seed, DrawLaw law, int judged) {
-    public static final SpreadOptions DEFAULT = new SpreadOptions(20_000, 1, DrawLaw.NORMAL, 200);
+    /** Units to draw, unless said. */
+    public static final int USUAL_SAMPLES = 20_000;
+
+    /** Units put before the judge, unless said. */
+    public static final int USUAL_JUDGED = 200;
+
+    public static final SpreadOptions DEFAULT = new SpreadOptions(USUAL_SAMPLES, 1, DrawLaw.NORMAL, USUAL_JUDGED);
 
     public SpreadOptions {
         if (samples < 1 || judged < 0) {
