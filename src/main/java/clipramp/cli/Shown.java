@@ -4,7 +4,6 @@ import clipramp.units.QuantityText;
 import clipramp.units.Unit;
 import java.util.EnumSet;
 import java.util.List;
-import java.util.Locale;
 import java.util.OptionalDouble;
 import java.util.Set;
 
@@ -21,11 +20,7 @@ final class Shown {
 
     /** A fixed number of decimals, so that a column lines up. */
     static String fixed(double value, int decimals) {
-        if (!Double.isFinite(value)) {
-            return NONE;
-        }
-        String text = String.format(Locale.ROOT, "%." + decimals + "f", value);
-        return text.matches("-0(\\.0*)?") ? text.substring(1) : text;
+        return Double.isFinite(value) ? QuantityText.fixed(value, decimals) : NONE;
     }
 
     static String fixed(OptionalDouble value, int decimals) {

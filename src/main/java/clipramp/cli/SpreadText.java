@@ -8,9 +8,9 @@ import clipramp.spread.Influence;
 import clipramp.spread.PositionSpread;
 import clipramp.spread.Remedy;
 import clipramp.spread.SpreadResult;
+import clipramp.spread.SpreadWords;
 import clipramp.spread.Yield;
 import java.util.List;
-import java.util.Locale;
 
 /** A spread for people: yield first, then the bands, the worst case, what matters and what would help. */
 final class SpreadText {
@@ -43,7 +43,7 @@ final class SpreadText {
                         + result.options().seed());
         result.wanted().ifPresent(y -> out.line("  reach what is wanted   " + words(y)));
         result.margins().ifPresent(y -> out.line("  fail no margin         " + words(y)));
-        result.failures().forEach((id, share) -> out.line("    " + percent(share) + " fail " + title(id)));
+        result.failures().forEach((id, share) -> out.line("    " + SpreadWords.percent(share) + " fail " + title(id)));
         bands();
         worstCase();
         influences();
@@ -59,12 +59,8 @@ final class SpreadText {
     }
 
     private static String words(Yield yield) {
-        return percent(yield.share()) + "  (" + yield.held() + " of " + yield.of() + "; 95 % interval "
-                + percent(yield.low()) + " to " + percent(yield.high()) + ")";
-    }
-
-    private static String percent(double share) {
-        return String.format(Locale.ROOT, "%.1f %%", 100 * share);
+        return SpreadWords.percent(yield.share()) + "  (" + yield.held() + " of " + yield.of() + "; 95 % interval "
+                + SpreadWords.percent(yield.low()) + " to " + SpreadWords.percent(yield.high()) + ")";
     }
 
     private void bands() {
@@ -155,8 +151,8 @@ final class SpreadText {
         }
         out.line("");
         out.strongLine("What would help", "  (yield against what is wanted, one change at a time)");
-        helping.forEach(
-                r -> out.line("  " + percent(r.yield().share()) + "  (+" + percent(r.gain()) + ")  " + r.change()));
+        helping.forEach(r -> out.line("  " + SpreadWords.percent(r.yield().share()) + "  (+"
+                + SpreadWords.percent(r.gain()) + ")  " + r.change()));
     }
 
     private static String degrees(double rad) {

@@ -6,7 +6,6 @@ import clipramp.units.QuantityText;
 import clipramp.units.Unit;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Locale;
 import java.util.Optional;
 import java.util.stream.Collectors;
 
@@ -26,13 +25,8 @@ public final class FitWords {
 
     /** A share in percent with its sign. */
     public static String signedPercent(double share) {
-        String text = fixed(100 * share, 1);
+        String text = QuantityText.fixed(100 * share, 1);
         return (text.startsWith("-") || text.equals("0.0") ? "" : "+") + text + " %";
-    }
-
-    private static String fixed(double value, int decimals) {
-        String text = String.format(Locale.ROOT, "%." + decimals + "f", value);
-        return text.matches("-0(\\.0*)?") ? text.substring(1) : text;
     }
 
     /** How a value lies to its limits, and whether the limits are ours. */
@@ -43,13 +37,14 @@ public final class FitWords {
 
     /** How far a reading is off the unit that was found, in standard deviations, and whether it was left out. */
     public static String deviations(Residual residual) {
-        return fixed(residual.deviations(), 1) + (residual.belongs() ? "" : " out");
+        return QuantityText.fixed(residual.deviations(), 1) + (residual.belongs() ? "" : " out");
     }
 
     /** A reading that does not belong, without its place. */
     public static String stranger(Residual stranger) {
         return "read " + amount(stranger.read(), stranger.unit()) + "; the others say "
-                + amount(stranger.shown(), stranger.unit()) + ", " + fixed(Math.abs(stranger.deviations()), 1)
+                + amount(stranger.shown(), stranger.unit()) + ", "
+                + QuantityText.fixed(Math.abs(stranger.deviations()), 1)
                 + " standard deviations off.";
     }
 
@@ -68,7 +63,7 @@ public final class FitWords {
     public static String together(FitResult result, Together pair) {
         String first = result.value(pair.first()).map(Fitted::name).orElse(pair.first());
         String second = result.value(pair.second()).map(Fitted::name).orElse(pair.second());
-        return first + " and " + second + ", " + fixed(pair.correlation(), 2) + ": "
+        return first + " and " + second + ", " + QuantityText.fixed(pair.correlation(), 2) + ": "
                 + (pair.correlation() < 0 ? "more of one with less of the other" : "more of both")
                 + " reads nearly alike";
     }
@@ -89,7 +84,7 @@ public final class FitWords {
                         + " times better told than the worst"
                 : "; some combination is not told at all";
         String scatter = quality.widened() > 1
-                ? "They scatter " + fixed(quality.widened(), 1)
+                ? "They scatter " + QuantityText.fixed(quality.widened(), 1)
                         + " times as far as the instruments' accuracies explain; the intervals are widened by that."
                         + (quality.widened() > HARDLY_OF_IT
                                 ? " So far off, they are hardly of this design, or most heads name a wrong unit."

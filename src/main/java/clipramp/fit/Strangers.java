@@ -6,9 +6,9 @@ import java.util.concurrent.CancellationException;
 import org.apache.commons.math3.distribution.NormalDistribution;
 
 /**
- * Finds what does not belong. Where plain least squares leave a doubt, a robust pass sets suspects aside; least squares over the rest take back, one by one,
- * those that they predict well, and put out, one by one, whatever stands farthest off (data snooping after Baarda, from
- * memory), each time with a new fit.
+ * Finds what does not belong. Where plain least squares leave a doubt, a robust pass sets suspects aside; least squares
+ * over the rest take back, one by one, those that they predict well, and put out, one by one, whatever stands farthest off
+ * (data snooping after Baarda, from memory), each time with a new fit.
  */
 final class Strangers {
     /** Chance that good readings, all together, lose one of them. */

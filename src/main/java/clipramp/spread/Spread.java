@@ -57,7 +57,7 @@ public final class Spread {
                         shares[p]))
                 .toList();
         boolean wanted = new WantedTest(design).isAsked();
-        // Setting a unit's trimmers costs a dozen solutions.
+        // Setting two trimmers costs four to six solutions.
         boolean fast = SwiftPoint.suits(design) && design.ramp().trimmers().isNone();
         int lotUnits = Math.min(fast ? LOT_UNITS : SLOW_LOT_UNITS, options.samples());
         double middle = WantedTest.share(design.ramp(), MID_KNOB);

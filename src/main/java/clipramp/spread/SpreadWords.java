@@ -108,7 +108,8 @@ public final class SpreadWords {
         return List.of(remedy.change(), percent(remedy.yield().share()), "+" + percent(remedy.gain()));
     }
 
-    private static String percent(double share) {
+    /** A share with one decimal. */
+    public static String percent(double share) {
         return String.format(Locale.ROOT, "%.1f %%", 100 * share);
     }
 }

@@ -3,6 +3,7 @@ package clipramp.units;
 import java.math.BigDecimal;
 import java.math.MathContext;
 import java.math.RoundingMode;
+import java.util.Locale;
 
 /** Quantities as text: engineering prefixes, the digits that they deserve, a dot, no grouping. */
 public final class QuantityText {
@@ -49,6 +50,12 @@ public final class QuantityText {
     /** The bare number with at most the given significant digits, for columns that carry their unit in the head. */
     public static String number(double value, int digits) {
         return format(value, Unit.NUMBER, digits);
+    }
+
+    /** A fixed number of decimals, so that a column lines up; what rounds to nothing has no sign. */
+    public static String fixed(double value, int decimals) {
+        String text = String.format(Locale.ROOT, "%." + decimals + "f", value);
+        return text.matches("-0(\\.0*)?") ? text.substring(1) : text;
     }
 
     private static String withUnit(BigDecimal value, Unit unit) {

@@ -15,7 +15,6 @@ import clipramp.units.QuantityText;
 import clipramp.units.Unit;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Locale;
 import java.util.Map;
 import java.util.stream.Collectors;
 import java.util.stream.Stream;
@@ -69,21 +68,16 @@ public final class FaultWords {
                 effect.equals(sheet.healthy()) ? NOTHING : effect.gets().word(),
                 watts(effect.middle().watts()),
                 sheet.design().ramp().pot().isEmpty() ? NOTHING : effect.knobActs() ? "acts" : "dead"));
-        Probe.TELLING.forEach(p -> row.add(fixed(p.volts(effect), p.decimals())));
+        Probe.TELLING.forEach(p -> row.add(QuantityText.fixed(p.volts(effect), p.decimals())));
         return row;
     }
 
     private static String watts(double watts) {
-        return fixed(watts < LEAST_WATTS ? 0 : watts, watts < WHOLE_FROM ? 1 : 0);
+        return QuantityText.fixed(watts < LEAST_WATTS ? 0 : watts, watts < WHOLE_FROM ? 1 : 0);
     }
 
     private static String volts(FaultEffect effect, TestPoint point, Meter meter, int decimals) {
-        return fixed(effect.volts(point, meter), decimals);
-    }
-
-    private static String fixed(double value, int decimals) {
-        String text = String.format(Locale.ROOT, "%." + decimals + "f", value);
-        return text.matches("-0(\\.0*)?") ? text.substring(1) : text;
+        return QuantityText.fixed(effect.volts(point, meter), decimals);
     }
 
     /** The load at each knob position: position, watts, share of full power, direct current. */
