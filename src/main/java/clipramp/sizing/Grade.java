@@ -77,7 +77,8 @@ record Grade(long failing, long tight, long missing, long deadTravel, long heat,
         return Math.round(TWENTY * (1 - timing.yield()));
     }
 
-    private static long deadTravel(Timing timing) {
+    /** Dead travel as coarsely as it matters. */
+    static long deadTravel(Timing timing) {
         return Math.round(THIRTY * timing.deadTravel());
     }
 

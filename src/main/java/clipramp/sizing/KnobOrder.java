@@ -12,9 +12,6 @@ import org.jspecify.annotations.Nullable;
  * line over the rotation, then a linear law. Tapers are tried where the law is open. Figures count as coarsely as they matter.
  */
 final class KnobOrder {
-    /** As {@link Grade} counts it. */
-    private static final double TRAVEL_STEPS = 30;
-
     /** Another law must bring two per cent of full power. */
     private static final double DEPARTURE_STEPS = 50;
 
@@ -73,7 +70,7 @@ final class KnobOrder {
         KnobShape shape = KnobShape.of(ramp, KnobShape.What.POWER, curve);
         return new Ranked(
                 ramp,
-                Math.round(TRAVEL_STEPS * Timing.of(ramp, reach).deadTravel()),
+                Grade.deadTravel(Timing.of(ramp, reach)),
                 Math.round(DEPARTURE_STEPS * shape.largestDeparture()),
                 ramp.ramp().pot().orElseThrow().law() instanceof PotLaw.Linear ? 0 : 1,
                 shape.steepestPerDegree());

@@ -277,7 +277,7 @@ public final class Reasons {
         boolean reaching = moves && part != OpenPart.FIXED && part != OpenPart.TRACK;
         Timing timing = Timing.of(there, reaching ? Reach.of(there) : reach);
         List<String> changes = new ArrayList<>();
-        if (!Trimming.isIn(design)) {
+        if (design.ramp().trimmers().isNone()) {
             changed(changes, "yield", timing.yield(), answer.yield(), Unit.FRACTION);
         }
         changed(changes, "dead travel", timing.deadTravel(), answer.deadTravel(), Unit.FRACTION);

@@ -27,7 +27,7 @@ public final class SizingWords {
         return switch (answer.outcome()) {
             case WORST_CASE ->
                 ": the fastest and the slowest unit fail no margin"
-                        + (Trimming.isIn(answer.design()) ? ", once trimmed." : ".");
+                        + (answer.design().ramp().trimmers().isNone() ? "." : ", once trimmed.");
             case NOMINAL -> ": no margin fails at any line and temperature.";
             case NOTHING -> "; this is the nearest that was found.";
         };

@@ -5,7 +5,6 @@ import clipramp.circuit.Part;
 import clipramp.circuit.Pot;
 import clipramp.circuit.Ramp;
 import clipramp.circuit.Tolerance;
-import clipramp.circuit.Trimmers;
 import clipramp.circuit.Wanted.Goal;
 import java.util.ArrayList;
 import java.util.Comparator;
@@ -60,8 +59,8 @@ final class Trimming {
     }
 
     /**
-     * The design with trimmers, the simpler first: one, then two; of as many, the one with the straighter knob. Empty where they may not be chosen or no preset that is
-     * sold reaches far enough.
+     * The design with trimmers, the simpler first: one, then two; of as many, the one with the straighter knob. Empty where
+     * they may not be chosen or no preset that is sold reaches far enough.
      */
     static List<Design> of(SizingRequest request, Design design, Reach reach) {
         boolean may = request.isOpen(OpenPart.FIXED)
@@ -197,10 +196,5 @@ final class Trimming {
 
     private static Part preset(double ohms) {
         return new Part(ohms, TRACK_TOLERANCE, OptionalDouble.of(TRACK_WATTS), OptionalDouble.empty());
-    }
-
-    /** Whether a design has any preset. */
-    static boolean isIn(Design design) {
-        return !design.ramp().trimmers().equals(Trimmers.NONE);
     }
 }
