@@ -5,11 +5,12 @@ import java.util.OptionalDouble;
 /**
  * A data-sheet figure: any of minimum, typical and maximum; at least one of them.
  *
- * @param min least value of any device, if the sheet says
+ * @param min least value of any device, if the sheet says; in the unit of the figure, which its holder's name gives
  * @param typ typical value, if the sheet says
  * @param max greatest value of any device, if the sheet says
  */
 public record Characteristic(OptionalDouble min, OptionalDouble typ, OptionalDouble max) {
+    /** @throws IllegalArgumentException where no figure is given, or they are not in the order min, typ, max */
     public Characteristic {
         if (min.isEmpty() && typ.isEmpty() && max.isEmpty()) {
             throw new IllegalArgumentException("a characteristic needs at least one of min, typ, max");
@@ -27,6 +28,11 @@ public record Characteristic(OptionalDouble min, OptionalDouble typ, OptionalDou
         return new Characteristic(OptionalDouble.empty(), OptionalDouble.of(value), OptionalDouble.empty());
     }
 
+    /**
+     * All three figures.
+     *
+     * @throws IllegalArgumentException where they do not rise
+     */
     public static Characteristic of(double min, double typ, double max) {
         return new Characteristic(OptionalDouble.of(min), OptionalDouble.of(typ), OptionalDouble.of(max));
     }

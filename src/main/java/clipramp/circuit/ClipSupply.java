@@ -7,16 +7,18 @@ import java.util.Optional;
  *
  * @param tap what the rectifier is across
  * @param rectifier bridge or single diode
- * @param diodeDropVolts drop of one rectifier diode, V
- * @param dropper the dropping resistor R_D, ohm
+ * @param diodeDropVolts forward drop V_F of one rectifier diode, V, 0 or more
+ * @param dropper the dropping resistor R_D, ohm, above 0
  * @param zener the clipping zener
- * @param winding isolated synchronising winding, if the supply has one
+ * @param winding isolated synchronising winding, if the supply has one; never across the thyristor
  */
 public record ClipSupply(
         Tap tap, Rectifier rectifier, double diodeDropVolts, Part dropper, Zener zener, Optional<Winding> winding) {
     /** What the rectifier is across. */
     public enum Tap {
+        /** The line itself, or the winding that stands for it. */
         LINE("line"),
+        /** The thyristor: the supply is gone from the pulse that turns it on until the line's next zero. */
         THYRISTOR("thyristor");
 
         private final String word;
@@ -25,6 +27,7 @@ public record ClipSupply(
             this.word = word;
         }
 
+        /** The word that stands in a design file. */
         public String word() {
             return word;
         }
@@ -32,7 +35,9 @@ public record ClipSupply(
 
     /** How the firing supply is rectified. */
     public enum Rectifier {
+        /** Four diodes: every half cycle feeds the supply. */
         BRIDGE("bridge", 2),
+        /** One diode: every second half cycle does. */
         DIODE("diode", 1);
 
         private final String word;
@@ -43,16 +48,18 @@ public record ClipSupply(
             this.diodesInPath = diodesInPath;
         }
 
+        /** The word that stands in a design file. */
         public String word() {
             return word;
         }
 
-        /** Diodes that the supply's current passes. */
+        /** How many diodes in series the supply's current passes. */
         public int diodesInPath() {
             return diodesInPath;
         }
     }
 
+    /** @throws IllegalArgumentException outside the stated ranges, or with a winding across the thyristor */
     public ClipSupply {
         Require.notNegative("rectifier diode drop", diodeDropVolts);
         Require.positive("dropping resistor", dropper.value());

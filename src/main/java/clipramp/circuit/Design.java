@@ -43,6 +43,7 @@ public record Design(
         Wanted wanted,
         double resistorDerating,
         Map<String, String> designators) {
+    /** @throws IllegalArgumentException where the derating lies outside 0..1 */
     public Design {
         Require.fraction("resistor derating", resistorDerating);
         designators = Map.copyOf(designators);

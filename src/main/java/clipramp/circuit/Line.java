@@ -5,19 +5,22 @@ import java.util.List;
 /**
  * The alternating line. v(t) = sqrt(2) V [sin wt + sum of share_k sin(k wt + phase_k)].
  *
- * @param volts rms of the fundamental, V
- * @param hertz frequency, Hz
- * @param lowVolts lowest rms that the design must work at, V
- * @param highVolts highest rms that the design must work at, V
- * @param harmonics shares of the fundamental, may be empty
+ * @param volts rms of the fundamental, V, above 0
+ * @param hertz frequency, Hz, above 0
+ * @param lowVolts lowest rms of the fundamental that the design must work at, V, at most {@code volts}
+ * @param highVolts highest rms of the fundamental that the design must work at, V, at least {@code volts}
+ * @param harmonics in any order, may be empty
  */
 public record Line(double volts, double hertz, double lowVolts, double highVolts, List<Harmonic> harmonics) {
     /**
-     * @param order 2 or more
-     * @param share amplitude as a fraction of the fundamental, 0..1
-     * @param phaseRad phase at the fundamental's positive-going zero, in the harmonic's own angle
+     * One harmonic of the line's voltage.
+     *
+     * @param order 2..100
+     * @param share amplitude as a fraction of the fundamental's, 0..1
+     * @param phaseRad phase at the fundamental's positive-going zero, in the harmonic's own angle, rad
      */
     public record Harmonic(int order, double share, double phaseRad) {
+        /** @throws IllegalArgumentException outside the stated ranges */
         public Harmonic {
             if (order < 2 || order > 100) {
                 throw new IllegalArgumentException("harmonic order must lie in 2..100, is " + order);
@@ -35,6 +38,9 @@ public record Line(double volts, double hertz, double lowVolts, double highVolts
     /** Shrinks two steps to a part in 1e7: a crest is flat, and its height right to 1e-12. */
     private static final int THIRDS = 40;
 
+    /**
+     * @throws IllegalArgumentException where a voltage or the frequency is not above zero, or the voltages are out of order
+     */
     public Line {
         Require.positive("line voltage", volts);
         Require.positive("line frequency", hertz);

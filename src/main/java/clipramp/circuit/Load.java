@@ -4,7 +4,7 @@ import java.util.Optional;
 
 /** What the power goes to. */
 public sealed interface Load {
-    /** Resistance in ohms at rated conditions (for an inductive load: its resistive part). */
+    /** Resistance at rated conditions, ohm; of an inductive load, its resistive part. */
     double resistanceOhms();
 
     /** The word that stands in a design file. */
@@ -18,10 +18,11 @@ public sealed interface Load {
     /**
      * A heater: one resistance at every power once it is warm.
      *
-     * @param resistanceOhms resistance, warm, ohm
+     * @param resistanceOhms resistance, warm, ohm, above 0
      * @param coldRatio warm over cold resistance, 1 or more
      */
     record Resistor(double resistanceOhms, double coldRatio) implements Load {
+        /** @throws IllegalArgumentException outside the stated ranges */
         public Resistor {
             Require.positive("load resistance", resistanceOhms);
             Require.atLeastOne("cold ratio", coldRatio);
@@ -41,11 +42,12 @@ public sealed interface Load {
     /**
      * A resistance in series with an inductance: a fan, a solenoid, a transformer's primary.
      *
-     * @param resistanceOhms resistance, ohm
-     * @param inductanceHenries inductance, H
+     * @param resistanceOhms resistance, ohm, above 0
+     * @param inductanceHenries inductance, H, above 0
      * @param freewheel diode across the load, if there is one (on the dc side of a bridge, or half-wave)
      */
     record Inductive(double resistanceOhms, double inductanceHenries, Optional<StageDiodes> freewheel) implements Load {
+        /** @throws IllegalArgumentException outside the stated ranges */
         public Inductive {
             Require.positive("load resistance", resistanceOhms);
             Require.positive("load inductance", inductanceHenries);
@@ -58,14 +60,15 @@ public sealed interface Load {
     }
 
     /**
-     * A lamp: P = ratedWatts (V / ratedVolts)^exponent.
+     * A lamp: P = ratedWatts (V / ratedVolts)^exponent at its own rms voltage V (DEVELOPERS.md, loads with memory).
      *
-     * @param ratedWatts power at rated voltage, W
-     * @param ratedVolts rated rms voltage, V
-     * @param exponent how power grows with rms voltage; 1.55 for tungsten, 2 for a resistor
+     * @param ratedWatts power at rated voltage, W, above 0
+     * @param ratedVolts rated rms voltage, V, above 0
+     * @param exponent above 0; 1.55 for tungsten, 2 for a resistor
      * @param coldRatio hot over cold resistance, 1 or more
      */
     record Filament(double ratedWatts, double ratedVolts, double exponent, double coldRatio) implements Load {
+        /** @throws IllegalArgumentException outside the stated ranges */
         public Filament {
             Require.positive("rated power", ratedWatts);
             Require.positive("rated voltage", ratedVolts);

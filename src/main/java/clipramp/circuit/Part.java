@@ -11,11 +11,12 @@ import java.util.OptionalDouble;
  * @param ratedVolts rated voltage in volts, if stated
  */
 public record Part(double value, Tolerance tolerance, OptionalDouble ratedWatts, OptionalDouble ratedVolts) {
+    /** @throws IllegalArgumentException where the value is negative or no finite number */
     public Part {
         Require.notNegative("part value", value);
     }
 
-    /** An exact, unrated part. */
+    /** An exact, unrated part; its value in ohms or farads. */
     public static Part of(double value) {
         return new Part(value, Tolerance.NONE, OptionalDouble.empty(), OptionalDouble.empty());
     }

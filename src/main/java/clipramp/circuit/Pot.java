@@ -5,8 +5,8 @@ import java.util.Optional;
 /**
  * The potentiometer, wired as a variable resistor.
  *
- * @param track track resistance, ohm
- * @param endOhms what is left at the low end, ohm
+ * @param track track resistance, ohm, above 0
+ * @param endOhms what is left at the low end, ohm, 0 or more
  * @param law track share against rotation
  * @param sense whether the resistance grows or falls clockwise
  * @param shunt resistor across the used section, if there is one
@@ -14,7 +14,9 @@ import java.util.Optional;
 public record Pot(Part track, double endOhms, PotLaw law, Sense sense, Optional<Part> shunt) {
     /** Which way the resistance goes when the knob is turned clockwise. */
     public enum Sense {
+        /** Clockwise is more ohms, so later firing. */
         RISING("rising"),
+        /** Clockwise is fewer ohms, so more power. */
         FALLING("falling");
 
         private final String word;
@@ -23,11 +25,13 @@ public record Pot(Part track, double endOhms, PotLaw law, Sense sense, Optional<
             this.word = word;
         }
 
+        /** The word that stands in a design file. */
         public String word() {
             return word;
         }
     }
 
+    /** @throws IllegalArgumentException outside the stated ranges */
     public Pot {
         Require.positive("pot track", track.value());
         Require.notNegative("pot end resistance", endOhms);
@@ -38,19 +42,11 @@ public record Pot(Part track, double endOhms, PotLaw law, Sense sense, Optional<
      *
      * @param position 0 fully anticlockwise .. 1 fully clockwise
      * @return 0..1
+     * @throws IllegalArgumentException where the position lies outside 0..1
      */
     public double trackShare(double position) {
         Require.fraction("knob position", position);
         return law.share(sense == Sense.RISING ? position : 1 - position);
-    }
-
-    /** Resistance in ohms at a knob position 0..1, nominal parts. */
-    public double ohms(double position) {
-        return ohms(
-                trackShare(position),
-                endOhms,
-                track.value(),
-                shunt.map(Part::value).orElse(Double.POSITIVE_INFINITY));
     }
 
     /**
@@ -60,7 +56,7 @@ public record Pot(Part track, double endOhms, PotLaw law, Sense sense, Optional<
      * @param endOhms end resistance, ohm
      * @param trackOhms track, ohm
      * @param shuntOhms shunt, ohm; POSITIVE_INFINITY for none
-     * @return ohms
+     * @return ohm
      */
     public static double ohms(double share, double endOhms, double trackOhms, double shuntOhms) {
         double used = endOhms + trackOhms * share;

@@ -4,7 +4,12 @@ import java.util.List;
 
 /** Share of a pot's track against the share of its rotation, both 0..1, rising. */
 public sealed interface PotLaw {
-    /** Track share 0..1 for a rotation 0..1. */
+    /**
+     * Track share at a rotation; it never falls.
+     *
+     * @param rotation share of the full rotation, 0..1, from the end without resistance
+     * @return 0..1
+     */
     double share(double rotation);
 
     /** The word that stands in a design file. */
@@ -24,11 +29,12 @@ public sealed interface PotLaw {
     }
 
     /**
-     * (b^x - 1)/(b - 1) with b = (1/m - 1)^2: the exponential that passes through m at half rotation.
+     * (b^x - 1)/(b - 1) with b = (1/m - 1)^2, x the rotation: the exponential that passes through m at half rotation.
      *
      * @param half m, track share at half rotation, above 0, below 0.5
      */
     record Logarithmic(double half) implements PotLaw {
+        /** @throws IllegalArgumentException where the share at half rotation lies outside 0..0.5 */
         public Logarithmic {
             requireHalf(half);
         }
@@ -51,6 +57,7 @@ public sealed interface PotLaw {
      * @param half track share that the plain logarithmic law has at half rotation, above 0, below 0.5
      */
     record ReverseLogarithmic(double half) implements PotLaw {
+        /** @throws IllegalArgumentException where the share at half rotation lies outside 0..0.5 */
         public ReverseLogarithmic {
             requireHalf(half);
         }
@@ -73,16 +80,22 @@ public sealed interface PotLaw {
      */
     record Table(List<Point> points) implements PotLaw {
         /**
-         * @param rotation 0..1
-         * @param share 0..1
+         * One measured point.
+         *
+         * @param rotation share of the full rotation, 0..1
+         * @param share share of the track, 0..1
          */
         public record Point(double rotation, double share) {
+            /** @throws IllegalArgumentException outside the stated ranges */
             public Point {
                 Require.fraction("rotation", rotation);
                 Require.fraction("track share", share);
             }
         }
 
+        /**
+         * @throws IllegalArgumentException where the points do not run from rotation 0 to 1, or a coordinate falls
+         */
         public Table {
             points = List.copyOf(points);
             if (points.size() < 2

@@ -5,11 +5,11 @@ import java.util.OptionalDouble;
 /**
  * Pulse transformer between base one and the gate or gates.
  *
- * @param ratio primary over secondary turns
+ * @param ratio n, primary over secondary turns, above 0
  * @param secondaries one or two
- * @param magnetisingHenries L_m at the primary, H
- * @param primaryOhms primary winding resistance, ohm
- * @param secondaryOhms resistance of one secondary, ohm
+ * @param magnetisingHenries L_m at the primary, H, above 0
+ * @param primaryOhms primary winding resistance, ohm, 0 or more
+ * @param secondaryOhms resistance of one secondary, ohm, 0 or more
  * @param clampDiode whether a diode clamps the primary
  * @param voltSeconds rated volt-seconds at the primary, Vs, if stated
  */
@@ -21,6 +21,7 @@ public record PulseTransformer(
         double secondaryOhms,
         boolean clampDiode,
         OptionalDouble voltSeconds) {
+    /** @throws IllegalArgumentException outside the stated ranges */
     public PulseTransformer {
         Require.positive("transformer ratio", ratio);
         Require.positive("magnetising inductance", magnetisingHenries);

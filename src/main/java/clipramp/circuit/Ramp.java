@@ -5,8 +5,8 @@ import java.util.Optional;
 /**
  * The ramp: C_E charged through R_E, which is the fixed resistor, what the pot gives, and presets that are set on every unit.
  *
- * @param capacitor C_E, F
- * @param fixed fixed part of R_E, ohm
+ * @param capacitor C_E, F, above 0
+ * @param fixed fixed part of R_E, ohm; 0 with a pot only
  * @param pot the knob, or none for a fixed ramp
  * @param trimmers presets in series with the fixed resistor and across the pot, if there are any
  */
@@ -14,6 +14,7 @@ public record Ramp(Part capacitor, Part fixed, Optional<Pot> pot, Trimmers trimm
     /** No wiper's contact is nothing, and no circuit can tell less from this, ohm. */
     private static final double LEAST_OHMS = 0.01;
 
+    /** @throws IllegalArgumentException outside the stated ranges, or with a low trimmer and no pot */
     public Ramp {
         Require.positive("ramp capacitor", capacitor.value());
         if (pot.isEmpty()) {
@@ -25,7 +26,11 @@ public record Ramp(Part capacitor, Part fixed, Optional<Pot> pot, Trimmers trimm
         }
     }
 
-    /** A ramp without trimmers. */
+    /**
+     * A ramp without trimmers.
+     *
+     * @throws IllegalArgumentException as the full constructor
+     */
     public Ramp(Part capacitor, Part fixed, Optional<Pot> pot) {
         this(capacitor, fixed, pot, Trimmers.NONE);
     }
@@ -44,10 +49,12 @@ public record Ramp(Part capacitor, Part fixed, Optional<Pot> pot, Trimmers trimm
     }
 
     /**
-     * R_E at a knob position, nominal parts (model: knob).
+     * R_E at a knob position, nominal parts: the fixed resistor, what the pot's used section and its shunt leave, and the
+     * trimmers at mid-track; never under 10 mohm.
      *
      * @param position 0 fully anticlockwise .. 1 fully clockwise; ignored for a fixed ramp
-     * @return ohms
+     * @return ohm
+     * @throws IllegalArgumentException where there is a pot and the position lies outside 0..1
      */
     public double rampOhms(double position) {
         double used = pot.map(p ->

@@ -10,7 +10,7 @@ import java.util.Optional;
 
 /**
  * Which combinations of stage, firing supply, coupling and load can work at all, and the electrical reason where one
- * cannot (model: power stage and load).
+ * cannot.
  */
 public final class Soundness {
     private Soundness() {}
@@ -31,20 +31,7 @@ public final class Soundness {
         }
     }
 
-    /** Every reason against a whole design; empty for a sound one. */
-    public static List<Reason> reasons(Design design) {
-        List<Reason> reasons = new ArrayList<>(ofSupply(design.stage(), design.clip()));
-        reasons.addAll(ofCoupling(design.stage(), design.clip(), design.gate()));
-        reasons.addAll(ofLoad(
-                design.stage(),
-                design.load(),
-                design.snubber(),
-                Optional.of(design.thyristor().device())));
-        reasons.addAll(ofDevice(design.stage(), design.thyristor().device().kind()));
-        return reasons;
-    }
-
-    /** Whether the firing supply is there when the stage needs it. */
+    /** Why the firing supply is not there when the stage needs it; empty where it is. */
     public static List<Reason> ofSupply(Stage stage, ClipSupply clip) {
         List<Reason> reasons = new ArrayList<>();
         String with = "with stage " + stage.word();
@@ -83,7 +70,7 @@ public final class Soundness {
                 "Use diode, or clip.winding.");
     }
 
-    /** Whether the pulse reaches the gate, and nothing else reaches it. */
+    /** Why the pulse does not reach the gate, or something else does; empty for a sound coupling. */
     public static List<Reason> ofCoupling(Stage stage, ClipSupply clip, GateDrive gate) {
         List<Reason> reasons = new ArrayList<>();
         String with = "with stage " + stage.word();
@@ -161,9 +148,12 @@ public final class Soundness {
     }
 
     /**
-     * Whether the stage can let go of the load's current.
+     * Why the stage cannot let go of the load's current; empty where it can.
      *
-     * @param device the thyristor, where it could be read
+     * @param stage the stage
+     * @param load the load
+     * @param snubber across the thyristor, if there is one
+     * @param device the thyristor, where it could be read; its turn-off time counts as known where it could not
      */
     public static List<Reason> ofLoad(
             Stage stage, Load load, Optional<Snubber> snubber, Optional<ThyristorDevice> device) {
@@ -210,7 +200,7 @@ public final class Soundness {
                         + " {resistance: 100 ohm, capacitance: 100 nF}, and an SCR whose turn-off is known.");
     }
 
-    /** Whether the device is the one that the stage is built of. */
+    /** Why the device is not one that the stage is built of; empty where it is. */
     public static List<Reason> ofDevice(Stage stage, ThyristorDevice.Kind kind) {
         boolean triac = kind == ThyristorDevice.Kind.TRIAC;
         if (triac == (stage == Stage.TRIAC)) {

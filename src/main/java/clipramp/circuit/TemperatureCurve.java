@@ -9,7 +9,7 @@ import java.util.List;
  * <p>Between points the logarithm of the current is linear in temperature; outside them the end slope goes on. A single
  * point doubles at -40 °C seen from 25 °C (common practice, as most SCR sheets show).
  *
- * @param points at least one point, in rising temperature
+ * @param points at least one, in any order; kept in rising temperature
  */
 public record TemperatureCurve(List<Point> points) {
     /** Growth from 25 °C down to -40 °C where a sheet gives one point only: common practice. */
@@ -18,16 +18,20 @@ public record TemperatureCurve(List<Point> points) {
     private static final double COLD_SPAN_KELVIN = 65;
 
     /**
-     * @param celsius junction temperature
-     * @param amps current there, above zero
+     * The current at one temperature.
+     *
+     * @param celsius junction temperature, °C
+     * @param amps A, above 0
      */
     public record Point(double celsius, double amps) {
+        /** @throws IllegalArgumentException outside the stated ranges */
         public Point {
             Require.finite("temperature", celsius);
             Require.positive("current", amps);
         }
     }
 
+    /** @throws IllegalArgumentException without a point */
     public TemperatureCurve {
         if (points.isEmpty()) {
             throw new IllegalArgumentException("a current against temperature needs at least one point");
@@ -37,11 +41,12 @@ public record TemperatureCurve(List<Point> points) {
                 .toList();
     }
 
+    /** A curve of one point: a current above zero, A, at 25 °C. */
     public static TemperatureCurve at25(double amps) {
         return new TemperatureCurve(List.of(new Point(25, amps)));
     }
 
-    /** Current in amperes at a junction temperature in °C. */
+    /** Current, A, at a junction temperature in °C. */
     public double ampsAt(double celsius) {
         if (points.size() == 1) {
             return fromOne(points.get(0).celsius(), points.get(0).amps(), celsius);

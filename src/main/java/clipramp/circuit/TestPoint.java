@@ -1,6 +1,9 @@
 package clipramp.circuit;
 
-/** Where a probe is put: the same names in the drawing, in the record and in fault tables. */
+/**
+ * Where a probe is put: the same names in the drawing, in the record and in fault tables. The words of each say which node
+ * it is and against what it is read.
+ */
 public enum TestPoint {
     TP0("firing common, the reference of TP1 to TP3"),
     TP1("clipped supply"),
@@ -15,7 +18,7 @@ public enum TestPoint {
         this.place = place;
     }
 
-    /** Which node it is, in words. */
+    /** Which node it is and against what it is read, in words. */
     public String place() {
         return place;
     }

@@ -33,7 +33,9 @@ public record ThyristorDevice(
 
     /** Which way it conducts. */
     public enum Kind {
+        /** One way. */
         SCR("scr"),
+        /** Both ways. */
         TRIAC("triac");
 
         private final String word;
@@ -42,6 +44,7 @@ public record ThyristorDevice(
             this.word = word;
         }
 
+        /** The word that stands in a design file. */
         public String word() {
             return word;
         }
@@ -49,9 +52,13 @@ public record ThyristorDevice(
 
     /** Triac quadrants: polarity of main terminal two, then of the gate. */
     public enum Quadrant {
+        /** Both positive. */
         I_PLUS("I+"),
+        /** Main terminal two positive, gate negative. */
         I_MINUS("I-"),
+        /** Both negative. */
         III_MINUS("III-"),
+        /** Main terminal two negative, gate positive. */
         III_PLUS("III+");
 
         private final String word;
@@ -60,6 +67,7 @@ public record ThyristorDevice(
             this.word = word;
         }
 
+        /** The word that stands in a design file. */
         public String word() {
             return word;
         }
@@ -68,8 +76,8 @@ public record ThyristorDevice(
     /**
      * Gate data. The typical gate junction is i_G = max(0, (v_GK - knee)/slope).
      *
-     * @param kneeVolts V_G0, V
-     * @param slopeOhms r_G, ohm
+     * @param kneeVolts V_G0, V, 0 or more
+     * @param slopeOhms r_G, ohm, above 0
      * @param trigger I_GT and V_GT against junction temperature, largest of any device
      * @param quadrants the same by quadrant, triacs only; a missing quadrant is not specified
      * @param nonTrigger V_GD, if known
@@ -84,29 +92,41 @@ public record ThyristorDevice(
             Optional<NonTrigger> nonTrigger,
             OptionalDouble turnOnSeconds,
             GateLimits limits) {
+        /** @throws IllegalArgumentException outside the stated ranges */
         public Gate {
             Require.notNegative("gate knee voltage", kneeVolts);
             Require.positive("gate slope resistance", slopeOhms);
             quadrants = Map.copyOf(quadrants);
         }
 
-        /** The same gate with another junction i_G = max(0, (v_GK - knee)/slope). */
+        /**
+         * The same gate with another junction i_G = max(0, (v_GK - knee)/slope).
+         *
+         * @param newKneeVolts V, 0 or more
+         * @param newSlopeOhms ohm, above 0
+         * @throws IllegalArgumentException outside those ranges
+         */
         public Gate withJunction(double newKneeVolts, double newSlopeOhms) {
             return new Gate(newKneeVolts, newSlopeOhms, trigger, quadrants, nonTrigger, turnOnSeconds, limits);
         }
     }
 
     /**
-     * @param volts V_GD, V
-     * @param celsius junction temperature that it holds at
+     * A gate voltage at which no device of the type triggers.
+     *
+     * @param volts V_GD, V, above 0
+     * @param celsius junction temperature that it holds at, °C
      */
     public record NonTrigger(double volts, double celsius) {
+        /** @throws IllegalArgumentException where the voltage is not above zero */
         public NonTrigger {
             Require.positive("non-trigger voltage", volts);
         }
     }
 
     /**
+     * Gate ratings, each where the sheet states it.
+     *
      * @param amps I_GM, A
      * @param volts V_GM forward, V
      * @param reverseVolts V_RGM, V
@@ -123,18 +143,21 @@ public record ThyristorDevice(
             OptionalDouble meanWatts) {}
 
     /**
+     * How fast voltage may come back as the current dies.
+     *
      * @param voltsPerSecond (dv/dt)c, V/s
-     * @param celsius junction temperature that it holds at
+     * @param celsius junction temperature that it holds at, °C
      */
     public record Commutating(double voltsPerSecond, double celsius) {}
 
     /**
      * v_T = threshold + slope i_T.
      *
-     * @param thresholdVolts V_T0, V
-     * @param slopeOhms r_T, ohm
+     * @param thresholdVolts V_T0, V, 0 or more
+     * @param slopeOhms r_T, ohm, 0 or more
      */
     public record OnState(double thresholdVolts, double slopeOhms) {
+        /** @throws IllegalArgumentException outside the stated ranges */
         public OnState {
             Require.notNegative("on-state threshold", thresholdVolts);
             Require.notNegative("on-state slope", slopeOhms);
@@ -142,6 +165,8 @@ public record ThyristorDevice(
     }
 
     /**
+     * Absolute ratings, each where the sheet states it.
+     *
      * @param volts V_DRM, V_RRM, V
      * @param rmsAmps I_T(RMS), A
      * @param meanAmps I_T(AV), A
@@ -159,26 +184,7 @@ public record ThyristorDevice(
             OptionalDouble ampsSquaredSeconds,
             OptionalDouble junctionCelsius,
             OptionalDouble voltsPerSecond,
-            OptionalDouble ampsPerSecond) {
-        /** Ratings of a sheet that states no rates of rise. */
-        public Limits(
-                OptionalDouble volts,
-                OptionalDouble rmsAmps,
-                OptionalDouble meanAmps,
-                OptionalDouble surgeAmps,
-                OptionalDouble ampsSquaredSeconds,
-                OptionalDouble junctionCelsius) {
-            this(
-                    volts,
-                    rmsAmps,
-                    meanAmps,
-                    surgeAmps,
-                    ampsSquaredSeconds,
-                    junctionCelsius,
-                    OptionalDouble.empty(),
-                    OptionalDouble.empty());
-        }
-    }
+            OptionalDouble ampsPerSecond) {}
 
     /** Quadrants that a pulse of one polarity uses, first in the positive half cycle. */
     public static List<Quadrant> quadrantsOf(GateDrive.Polarity polarity) {

@@ -9,7 +9,7 @@ import java.util.List;
  * never falls under the 0.2 V at which sheets say that no device triggers (V_GD at the highest junction temperature,
  * common practice), nor under a lower V_GT that the sheet itself gives.
  *
- * @param points at least one, in rising temperature
+ * @param points at least one, in any order; kept in rising temperature
  */
 public record TriggerDemand(List<Point> points) {
     private static final double COLD_GAIN_VOLTS = 1;
@@ -17,11 +17,14 @@ public record TriggerDemand(List<Point> points) {
     private static final double NON_TRIGGER_VOLTS = 0.2;
 
     /**
-     * @param celsius junction temperature
-     * @param amps I_GT, A
-     * @param volts V_GT, V
+     * What triggers at one temperature.
+     *
+     * @param celsius junction temperature, °C
+     * @param amps I_GT, A, above 0
+     * @param volts V_GT, V, above 0
      */
     public record Point(double celsius, double amps, double volts) {
+        /** @throws IllegalArgumentException outside the stated ranges */
         public Point {
             Require.finite("temperature", celsius);
             Require.positive("trigger current", amps);
@@ -29,6 +32,7 @@ public record TriggerDemand(List<Point> points) {
         }
     }
 
+    /** @throws IllegalArgumentException without a point */
     public TriggerDemand {
         if (points.isEmpty()) {
             throw new IllegalArgumentException("trigger data need at least one point");
@@ -38,7 +42,7 @@ public record TriggerDemand(List<Point> points) {
                 .toList();
     }
 
-    /** I_GT in amperes at a junction temperature in °C. */
+    /** I_GT, A, at a junction temperature in °C. */
     public double ampsAt(double celsius) {
         if (points.size() == 1) {
             return TemperatureCurve.fromOne(
@@ -58,7 +62,7 @@ public record TriggerDemand(List<Point> points) {
         return upper;
     }
 
-    /** V_GT in volts at a junction temperature in °C. */
+    /** V_GT, V, gate to cathode or main terminal one, at a junction temperature in °C. */
     public double voltsAt(double celsius) {
         double floor = points.stream().mapToDouble(Point::volts).reduce(NON_TRIGGER_VOLTS, Math::min);
         return Math.max(floor, extendedVoltsAt(celsius));

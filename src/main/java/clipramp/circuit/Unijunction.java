@@ -8,11 +8,11 @@ import java.util.OptionalDouble;
  *
  * @param id profile or in-place name
  * @param standoff intrinsic standoff ratio eta, 0..1
- * @param interbaseOhms R_BB, ohm
+ * @param interbaseOhms R_BB, ohm, above 0
  * @param interbaseDriftPerKelvin relative drift of R_BB, 1/K
- * @param emitterDropVolts V_D, V
+ * @param emitterDropVolts V_D, V, 0 or more
  * @param emitterDriftVoltsPerKelvin drift of V_D, V/K, negative
- * @param peakCurrentAmps I_P, A
+ * @param peakCurrentAmps I_P, A, 0 or more
  * @param valley the valley point
  * @param saturation a point of the saturated emitter line
  * @param modulated interbase current with the emitter conducting, if the sheet has it
@@ -34,11 +34,14 @@ public record Unijunction(
         Limits limits) {
 
     /**
-     * @param amps I_V, A
-     * @param volts V_V, emitter to base one, V
-     * @param atVolts interbase voltage V_spec of both, V
+     * The valley point.
+     *
+     * @param amps I_V, A, above 0
+     * @param volts V_V, emitter to base one, V, above 0
+     * @param atVolts interbase voltage V_spec of both, V, above 0
      */
     public record Valley(Characteristic amps, Characteristic volts, double atVolts) {
+        /** @throws IllegalArgumentException outside the stated ranges */
         public Valley {
             Require.positive("valley current", amps.nominal());
             Require.positive("valley voltage", volts.nominal());
@@ -47,11 +50,14 @@ public record Unijunction(
     }
 
     /**
-     * @param volts V_EB1(sat), V
-     * @param amps emitter current of that point, A
-     * @param atVolts interbase voltage of that point, V
+     * A point of the saturated emitter line.
+     *
+     * @param volts V_EB1(sat), V, above 0
+     * @param amps emitter current of that point, A, above 0
+     * @param atVolts interbase voltage of that point, V, above 0
      */
     public record Saturation(Characteristic volts, double amps, double atVolts) {
+        /** @throws IllegalArgumentException outside the stated ranges */
         public Saturation {
             Require.positive("saturation voltage", volts.nominal());
             Require.positive("saturation current", amps);
@@ -60,10 +66,13 @@ public record Unijunction(
     }
 
     /**
-     * @param amps I_B2(mod), A
-     * @param atVolts interbase voltage of that point, V
+     * The interbase current with the emitter conducting.
+     *
+     * @param amps I_B2(mod), A, above 0
+     * @param atVolts interbase voltage of that point, V, above 0
      */
     public record Modulated(Characteristic amps, double atVolts) {
+        /** @throws IllegalArgumentException outside the stated ranges */
         public Modulated {
             Require.positive("modulated interbase current", amps.nominal());
             Require.positive("interbase voltage of the modulated current", atVolts);
@@ -71,13 +80,13 @@ public record Unijunction(
     }
 
     /**
-     * V_OB1 and the circuit that it is measured in.
+     * V_OB1 and the circuit that it is measured in (DEVELOPERS.md, the conducting device).
      *
      * @param minVolts least base-one pulse of any device, V
-     * @param typVolts typical base-one pulse, V
-     * @param supplyVolts supply of the test circuit, V
-     * @param capacitorFarads capacitor of the test circuit, F
-     * @param baseOneOhms base-one resistor of the test circuit, ohm
+     * @param typVolts typical base-one pulse, V; at least one of the two
+     * @param supplyVolts supply V_t of the test circuit, V, above 0
+     * @param capacitorFarads capacitor of the test circuit, F, above 0
+     * @param baseOneOhms base-one resistor R_t of the test circuit, ohm, above 0
      */
     public record BaseOnePulse(
             OptionalDouble minVolts,
@@ -85,6 +94,7 @@ public record Unijunction(
             double supplyVolts,
             double capacitorFarads,
             double baseOneOhms) {
+        /** @throws IllegalArgumentException outside the stated ranges, or where neither pulse is given */
         public BaseOnePulse {
             if (minVolts.isEmpty() && typVolts.isEmpty()) {
                 throw new IllegalArgumentException("a base-one pulse needs min or typ");
@@ -94,17 +104,19 @@ public record Unijunction(
             Require.positive("test base-one resistor", baseOneOhms);
         }
 
-        /** Typical where stated, else the minimum. */
+        /** Typical where stated, else the minimum, V. */
         public double nominalVolts() {
             return typVolts.orElseGet(minVolts::getAsDouble);
         }
     }
 
     /**
-     * @param interbaseVolts V
-     * @param emitterPeakAmps A
-     * @param emitterRmsAmps A
-     * @param emitterReverseVolts V
+     * Absolute ratings, each where the sheet states it.
+     *
+     * @param interbaseVolts base two above base one, V
+     * @param emitterPeakAmps peak emitter current, A
+     * @param emitterRmsAmps rms emitter current, A
+     * @param emitterReverseVolts base two above emitter, V
      * @param capacitorFarads largest capacitor that the peak current rating holds for, F
      * @param capacitorVolts voltage that goes with it, V
      * @param watts dissipation at 25 °C, W
@@ -120,6 +132,7 @@ public record Unijunction(
             OptionalDouble watts,
             OptionalDouble deratingWattsPerKelvin) {}
 
+    /** @throws IllegalArgumentException outside the stated ranges */
     public Unijunction {
         Require.fraction("standoff ratio", standoff.nominal());
         Require.positive("interbase resistance", interbaseOhms.nominal());

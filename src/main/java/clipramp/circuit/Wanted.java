@@ -22,12 +22,15 @@ public record Wanted(Optional<Goal> lowest, Optional<Goal> highest) {
     }
 
     /**
+     * What is wanted at one end of the knob.
+     *
      * @param measure what from and to are in
      * @param from low end of the band; equal to {@code to} where no band was given
-     * @param to high end of the band
-     * @param position knob position 0..1
+     * @param to high end of the band, not under {@code from}
+     * @param position knob position at which it is wanted, 0 anticlockwise .. 1 clockwise
      */
     public record Goal(Measure measure, double from, double to, double position) {
+        /** @throws IllegalArgumentException where the band runs downwards or the position lies outside 0..1 */
         public Goal {
             if (!(from <= to)) {
                 throw new IllegalArgumentException("a wanted band runs from low to high, not " + from + ".." + to);
@@ -35,6 +38,7 @@ public record Wanted(Optional<Goal> lowest, Optional<Goal> highest) {
             Require.fraction("knob position", position);
         }
 
+        /** Whether more than one value will do. */
         public boolean isBand() {
             return from < to;
         }

@@ -3,12 +3,13 @@ package clipramp.circuit;
 /**
  * Isolated synchronising winding, rms and open circuit.
  *
- * @param primaryVolts rms of the primary, V
- * @param secondaryVolts rms of the secondary with that on the primary, V
+ * @param primaryVolts rms of the primary, V, above 0
+ * @param secondaryVolts rms of the secondary with that on the primary, V, above 0
  * @param opposite whether the secondary is turned over
- * @param lagRad angle by which the secondary lags the line, rad
+ * @param lagRad angle by which the secondary lags the line, rad, within a quarter period either way
  */
 public record Winding(double primaryVolts, double secondaryVolts, boolean opposite, double lagRad) {
+    /** @throws IllegalArgumentException outside the stated ranges */
     public Winding {
         Require.positive("winding primary voltage", primaryVolts);
         Require.positive("winding secondary voltage", secondaryVolts);

@@ -6,13 +6,22 @@ import java.util.List;
  * A band {@code 2 %..5 %}, or one value as a band without width.
  *
  * @param low low end
- * @param high high end, in the same unit
+ * @param high high end, in the same unit and not under it
  */
 public record Band(Quantity low, Quantity high) {
 
+    /** @throws IllegalArgumentException where the units differ or the ends are out of order */
+    public Band {
+        if (low.unit() != high.unit() || low.value() > high.value()) {
+            throw new IllegalArgumentException("a band runs from low to high in one unit, not " + low + ".." + high);
+        }
+    }
+
     /**
+     * The band that a text means.
+     *
      * @param text one value, or two joined by two dots, each with its unit
-     * @param choices the units that the place takes
+     * @param choices what the place takes, at least one
      * @throws RefusedQuantityException where an end is refused, the units differ or the ends are out of order
      */
     public static Band read(String text, List<Expected> choices) {

@@ -4,8 +4,8 @@ package clipramp.units;
  * What a place takes: a unit, a plausible window, and whether tolerances and ratings may follow.
  *
  * @param unit the unit
- * @param low least plausible value, in the SI unit; NEGATIVE_INFINITY for none
- * @param high greatest plausible value, in the SI unit; POSITIVE_INFINITY for none
+ * @param low least plausible value, as {@link Quantity#value} counts; NEGATIVE_INFINITY for none
+ * @param high greatest plausible value, counted alike; POSITIVE_INFINITY for none
  * @param tolerance whether a tolerance may follow
  * @param ratings whether ratings in W and V may follow
  * @param bare whether angles and temperatures may come without unit, as degrees and °C (options only)
@@ -17,16 +17,17 @@ public record Expected(Unit unit, double low, double high, boolean tolerance, bo
         return new Expected(unit, Double.NEGATIVE_INFINITY, Double.POSITIVE_INFINITY, false, false, false);
     }
 
-    /** A value within a plausible window, SI units. */
+    /** A value within a plausible window, ends included, counted as {@link Quantity#value} is. */
     public static Expected within(Unit unit, double low, double high) {
         return new Expected(unit, low, high, false, false, false);
     }
 
-    /** A resistor or capacitor: tolerance and ratings may follow. */
+    /** A resistor or capacitor within a plausible window in ohms or farads: tolerance and ratings may follow. */
     public static Expected part(Unit unit, double low, double high) {
         return new Expected(unit, low, high, true, true, false);
     }
 
+    /** The same, where a tolerance may follow. */
     public Expected withTolerance() {
         return new Expected(unit, low, high, true, ratings, bare);
     }
@@ -36,7 +37,7 @@ public record Expected(Unit unit, double low, double high, boolean tolerance, bo
         return new Expected(unit, low, high, tolerance, ratings, true);
     }
 
-    /** In words: "100 Ω..1 MΩ", or "a resistance, such as 10 kΩ" where there is no window. */
+    /** The window in words: "100 Ω..1 MΩ", or "a resistance, such as 10 kΩ" where there is no window. */
     public String inWords() {
         boolean from = low > Double.NEGATIVE_INFINITY;
         boolean to = high < Double.POSITIVE_INFINITY;

@@ -14,18 +14,19 @@ public record LenientEntry(Quantity quantity, String text) {
     private static final Pattern COMMA = Pattern.compile("(\\d+),(\\d+)");
 
     /**
+     * The value that was typed.
+     *
      * @param typed as typed
      * @param expected what the place takes
-     * @throws RefusedQuantityException as the strict reader, and for a comma that may group thousands
+     * @throws RefusedQuantityException as {@link QuantityReader#read}, and for a comma that may group thousands
      */
     public static LenientEntry read(String typed, Expected expected) {
         Matcher comma = COMMA.matcher(typed);
         String text = typed.strip();
         if (comma.find() && !mayGroup(comma)) {
             String before = typed.substring(0, comma.start());
-            boolean dotted = before.contains(".") || comma.group(2).isEmpty();
             String after = typed.substring(comma.end());
-            if (!dotted && !after.startsWith(".") && !after.startsWith(",")) {
+            if (!before.contains(".") && !after.startsWith(".") && !after.startsWith(",")) {
                 text = (before + comma.group(1) + "." + comma.group(2) + after).strip();
             }
         }

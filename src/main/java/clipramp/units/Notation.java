@@ -46,7 +46,7 @@ public enum Notation {
             Map.entry("λ", "lambda"),
             Map.entry("∞", "infinity"));
 
-    /** A whole text in this notation; the result of {@link #ASCII} holds nothing above U+007E but what it cannot name. */
+    /** A whole text in this notation; {@link #ASCII} leaves nothing above U+007E but what it has no spelling for. */
     public String apply(String text) {
         if (this == UNICODE) {
             return text;

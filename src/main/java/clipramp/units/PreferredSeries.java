@@ -6,7 +6,8 @@ import java.util.Map;
 
 /**
  * Preferred numbers of IEC 60063. E24 and its parts follow 10^(i/24) to two figures with eight exceptions, E192 and
- * its parts follow 10^(i/192) to three figures with one.
+ * its parts follow 10^(i/192) to three figures with one. The number in a series' name counts its values to a decade. A
+ * value within 1e-9 of a preferred one is taken as that one.
  */
 public enum PreferredSeries {
     E3(3),
@@ -39,8 +40,9 @@ public enum PreferredSeries {
     }
 
     /**
-     * The value at a place counted from 1: place 0 is 1, place perDecade is 10, negative places lie below 1.
+     * The value at a place of the series.
      *
+     * @param place counted from the value 1 at 0; perDecade is 10, negative places lie below 1
      * @return a clean decimal, such as exactly 4700
      */
     public double at(int place) {
@@ -62,12 +64,17 @@ public enum PreferredSeries {
                 .intValueExact();
     }
 
-    /** Least preferred value that is not under {@code value}; value above zero. */
+    /**
+     * Least preferred value that is not under another.
+     *
+     * @param value above zero, finite
+     * @throws IllegalArgumentException where it is not, here and in every method that takes a value
+     */
     public double atLeast(double value) {
         return at(placeAtLeast(value));
     }
 
-    /** Greatest preferred value that is not over {@code value}; value above zero. */
+    /** Greatest preferred value that is not over {@code value}. */
     public double atMost(double value) {
         int place = placeAtLeast(value);
         return isAt(place, value) ? at(place) : at(place - 1);
@@ -84,7 +91,7 @@ public enum PreferredSeries {
         return at(placeAtLeast(value) - 1);
     }
 
-    /** The preferred value that is nearest in ratio. */
+    /** The preferred value that is nearest in ratio; of two as near, the lower. */
     public double nearest(double value) {
         double above = atLeast(value);
         double below = atMost(value);
@@ -100,6 +107,7 @@ public enum PreferredSeries {
         return steps == 0 ? nearest(value) : moved;
     }
 
+    /** Whether a value is preferred; none at or below zero is. */
     public boolean contains(double value) {
         return value > 0 && isAt(placeAtLeast(value), value);
     }

@@ -16,6 +16,7 @@ public final class QuantityReader {
     private static final Pattern CODE = Pattern.compile(
             "(?:(\\d+)(R)(\\d*)|()(R)(\\d+)|(\\d+)([kKMGpnuµm])(\\d+)|()([kKMGpnuµm])(\\d+))([A-Za-z]?)(?=$|[ ±+Ω-])");
 
+    /** What stands on a small capacitor, such as 104K: two figures, a power of ten in picofarads, a tolerance letter. */
     private static final Pattern MARKING = Pattern.compile("(\\d\\d)(\\d)([FGJKM]?)");
 
     private final String raw;
@@ -31,7 +32,7 @@ public final class QuantityReader {
     }
 
     /**
-     * Reads a whole text.
+     * The value of a whole text.
      *
      * @param text as written
      * @param expected what the place takes
@@ -42,8 +43,11 @@ public final class QuantityReader {
     }
 
     /**
-     * Reads a text that may be in one of several units, such as a share in % or a power in W. A number without a unit
-     * is taken as the first.
+     * The value of a whole text that may be in one of several units, such as a share in % or a power in W.
+     *
+     * @param text as written; a number without a unit is taken in the first choice's
+     * @param choices what the place takes, at least one
+     * @throws RefusedQuantityException with what was read, what was expected and a suggestion
      */
     public static Quantity readOneOf(String text, List<Expected> choices) {
         return new QuantityReader(text, choices).whole();
@@ -84,7 +88,7 @@ public final class QuantityReader {
             throw refusals.marking(marking.get());
         }
         String number = scanner.number().orElseThrow(refusals::noNumber);
-        BigDecimal decimal = Scanner.decimal(number);
+        BigDecimal decimal = new BigDecimal(number);
         if (Double.isInfinite(decimal.doubleValue())) {
             throw refusals.because(choices.get(0).inWords(), "That number is too large to be kept.");
         }
@@ -135,26 +139,29 @@ public final class QuantityReader {
         if (!word.isEmpty() && !unit.spellings().contains(word)) {
             throw refusals.wrongUnit(code.number(), word);
         }
-        BigDecimal value = Scanner.decimal(code.number()).scaleByPowerOfTen(prefix.exponent());
+        BigDecimal value = new BigDecimal(code.number()).scaleByPowerOfTen(prefix.exponent());
         return Optional.of(new Value(
                 code.number(), value, choices.get(0), new Unit.Match(prefix, word, prefix.exponent()), tolerance));
     }
 
     /**
+     * A code taken apart.
+     *
      * @param number the number with a dot in the letter's place
      * @param letter the letter
      * @param toleranceLetter the tolerance letter, or empty
      */
     private record Code(String number, String letter, String toleranceLetter) {
-        static Code of(Matcher m) {
+        static Code of(Matcher match) {
             for (int group = 1; group < 12; group += 3) {
-                if (m.group(group + 1) != null) {
-                    String whole = m.group(group).isEmpty() ? "0" : m.group(group);
-                    String part = m.group(group + 2);
-                    return new Code(part.isEmpty() ? whole : whole + "." + part, m.group(group + 1), m.group(13));
+                if (match.group(group + 1) != null) {
+                    String whole = match.group(group).isEmpty() ? "0" : match.group(group);
+                    String part = match.group(group + 2);
+                    return new Code(
+                            part.isEmpty() ? whole : whole + "." + part, match.group(group + 1), match.group(13));
                 }
             }
-            throw new IllegalStateException("a code without a letter: " + m.group());
+            throw new IllegalStateException("a code without a letter: " + match.group());
         }
     }
 }

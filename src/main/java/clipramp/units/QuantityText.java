@@ -18,9 +18,12 @@ public final class QuantityText {
     }
 
     /**
+     * A value with its unit behind the prefix that leaves one to three digits before the dot; "unknown" for NaN, "∞" for
+     * an infinite one.
+     *
      * @param value in the SI unit (radians, °C, 0..1)
      * @param unit its unit
-     * @param digits significant digits at most; trailing zeros are left out
+     * @param digits significant digits at most, 1 or more; trailing zeros are left out
      */
     public static String format(double value, Unit unit, int digits) {
         if (Double.isNaN(value)) {
@@ -33,7 +36,7 @@ public final class QuantityText {
         return withUnit(new BigDecimal(shown).round(new MathContext(digits, RoundingMode.HALF_UP)), unit);
     }
 
-    /** The shortest text that reads back as exactly this value, for files. */
+    /** The shortest text that reads back as exactly this value, for files; finite values only. */
     public static String exact(double value, Unit unit) {
         if (unit != Unit.ANGLE) {
             return withUnit(new BigDecimal(Double.toString(value)), unit);
@@ -47,12 +50,12 @@ public final class QuantityText {
         return Double.toString(value) + " rad";
     }
 
-    /** The bare number with at most the given significant digits, for columns that carry their unit in the head. */
+    /** A value as {@link #format(double, Unit, int)} has it, without a unit, for columns that carry theirs in the head. */
     public static String number(double value, int digits) {
         return format(value, Unit.NUMBER, digits);
     }
 
-    /** A fixed number of decimals, so that a column lines up; what rounds to nothing has no sign. */
+    /** A value with a fixed number of decimals, 0 or more, so that a column lines up; what rounds to nothing has no sign. */
     public static String fixed(double value, int decimals) {
         String text = String.format(Locale.ROOT, "%." + decimals + "f", value);
         return text.matches("-0(\\.0*)?") ? text.substring(1) : text;

@@ -39,6 +39,10 @@ final class Refusals {
         return choices.get(0).unit();
     }
 
+    private RefusedQuantityException refusal(String suggestion) {
+        return refusal("", expected(), suggestion);
+    }
+
     private RefusedQuantityException refusal(String meaning, String expected, String suggestion) {
         return new RefusedQuantityException(new Refusal(raw, meaning, expected, suggestion));
     }
@@ -50,19 +54,19 @@ final class Refusals {
     /** Texts that look like numbers of another grammar. */
     void refuseWhatIsNoNumber() {
         if (text.isEmpty()) {
-            throw refusal("", expected(), "An empty value: write none, or a value.");
+            throw refusal("An empty value: write none, or a value.");
         }
         if (NOT_A_NUMBER.matcher(text).matches()) {
-            throw refusal("", expected(), "Only finite numbers are taken.");
+            throw refusal("Only finite numbers are taken.");
         }
         if (OTHER_BASE.matcher(text).matches()) {
-            throw refusal("", expected(), "Numbers are written in decimal digits.");
+            throw refusal("Numbers are written in decimal digits.");
         }
         if (text.contains("_")) {
-            throw refusal("", expected(), "Leave the underscore out: " + raw.replace("_", "") + "?");
+            throw refusal("Leave the underscore out: " + raw.replace("_", "") + "?");
         }
         if (text.contains("..")) {
-            throw refusal("", expected(), "A band has no place here: write one value.");
+            throw refusal("A band has no place here: write one value.");
         }
         Matcher comma = COMMA.matcher(text);
         if (comma.matches()) {
@@ -70,7 +74,7 @@ final class Refusals {
         }
         Matcher meg = MEG.matcher(text);
         if (meg.matches()) {
-            throw refusal("", expected(), "Mega is M: " + meg.group(1) + " M" + ascii(unit()) + "?");
+            throw refusal("Mega is M: " + meg.group(1) + " M" + ascii(unit()) + "?");
         }
         Matcher fahrenheit = FAHRENHEIT.matcher(text);
         if (unit() == Unit.CELSIUS && fahrenheit.matches()) {
@@ -80,9 +84,9 @@ final class Refusals {
 
     private RefusedQuantityException comma(String whole, String part, String rest) {
         if (part.length() == 3 && !whole.matches("[+-]?0")) {
-            return refusal("", expected(), askBack(whole, part));
+            return refusal(askBack(whole, part));
         }
-        return refusal("", expected(), "Decimals take a dot: " + whole + "." + part + rest + "?");
+        return refusal("Decimals take a dot: " + whole + "." + part + rest + "?");
     }
 
     /** "1.0 or 1000?" for 1,000: it may be either. */
@@ -93,11 +97,11 @@ final class Refusals {
 
     private RefusedQuantityException fahrenheit(String number) {
         double celsius = (Double.parseDouble(number.matches("[+-]?\\d+(\\.\\d+)?") ? number : "0") - 32) / 1.8;
-        return refusal("", expected(), "Temperatures are in °C: " + QuantityText.number(celsius, 3) + " degC?");
+        return refusal("Temperatures are in °C: " + QuantityText.number(celsius, 3) + " degC?");
     }
 
     RefusedQuantityException noNumber() {
-        return refusal("", expected(), "It has to begin with a number.");
+        return refusal("It has to begin with a number.");
     }
 
     RefusedQuantityException missingUnit(String number, Unit unit) {
@@ -105,63 +109,54 @@ final class Refusals {
         return refusal("", expected() + " with its unit", hint);
     }
 
-    RefusedQuantityException marking(Matcher m) {
-        int power = m.group(2).charAt(0) - '0';
+    RefusedQuantityException marking(Matcher marking) {
+        int power = marking.group(2).charAt(0) - '0';
         int exponent = power == 9 ? -1 : power == 8 ? -2 : power;
         double farads =
-                new BigDecimal(m.group(1)).scaleByPowerOfTen(exponent - 12).doubleValue();
-        String tolerance = ToleranceLetter.fraction(m.group(3)).stream()
+                new BigDecimal(marking.group(1)).scaleByPowerOfTen(exponent - 12).doubleValue();
+        String tolerance = ToleranceLetter.fraction(marking.group(3)).stream()
                 .mapToObj(t -> " ±" + QuantityText.format(t, Unit.FRACTION))
                 .collect(Collectors.joining());
         String meaning = QuantityText.format(farads, Unit.FARAD) + tolerance;
         return power == 0
-                ? refusal(
-                        "",
-                        expected(),
-                        "As a marking " + text + " is " + meaning + ": write that, or " + text + " with its unit.")
-                : refusal("", expected(), text + " is " + meaning + ": write that.");
+                ? refusal("As a marking " + text + " is " + meaning + ": write that, or " + text + " with its unit.")
+                : refusal(text + " is " + meaning + ": write that.");
     }
 
     RefusedQuantityException codeOutOfPlace(String number, String letter) {
         String prefix = letter.equals("R") ? "" : letter;
-        return refusal(
-                "",
-                expected(),
-                "Letters as decimal points are for resistors, capacitors and inductors: " + number + " " + prefix
+        return refusal("Letters as decimal points are for resistors, capacitors and inductors: " + number + " " + prefix
                         + ascii(unit()) + "?");
     }
 
     RefusedQuantityException unknownToleranceLetter(String letter) {
-        return refusal(
-                "",
-                expected(),
-                "No tolerance letter \"" + letter + "\" is known: F 1 %, G 2 %, J 5 %, K 10 %, M 20 %.");
+        return refusal("No tolerance letter \"" + letter + "\" is known: F 1 %, G 2 %, J 5 %, K 10 %, M 20 %.");
     }
 
     RefusedQuantityException faradOrOnePercent(String number, Prefix prefix) {
         String value = number + " " + prefix.ascii() + "F";
-        return refusal("", expected(), "The last F may be farad or 1 %: " + value + ", or " + value + " ±1 %?");
+        return refusal("The last F may be farad or 1 %: " + value + ", or " + value + " ±1 %?");
     }
 
     RefusedQuantityException trailing(String rest, QuantityReader.Value value) {
         if (value.match() == null && rest.matches("\\d{3}( \\d{3})*( ?\\D.*)?")) {
-            return refusal("", expected(), "Digits are not grouped: " + text.replaceAll("(?<=\\d) (?=\\d)", "") + "?");
+            return refusal("Digits are not grouped: " + text.replaceAll("(?<=\\d) (?=\\d)", "") + "?");
         }
         String more = value.expected().ratings()
                 ? "After the value come a tolerance and ratings in W and V"
                 : value.expected().tolerance() ? "After the value comes a tolerance" : "Nothing comes after the value";
-        return refusal("", expected(), more + "; \"" + rest.strip() + "\" is none.");
+        return refusal(more + "; \"" + rest.strip() + "\" is none.");
     }
 
     RefusedQuantityException wrongUnit(String number, String word) {
         if (unit() == Unit.CELSIUS && word.equals("K")) {
-            return refusal("", expected(), "K is for differences: " + number + " degC?");
+            return refusal("K is for differences: " + number + " degC?");
         }
         if (unit() == Unit.KELVIN && Unit.CELSIUS.match(word).isPresent()) {
-            return refusal("", expected(), "Differences are in K: " + number + " K?");
+            return refusal("Differences are in K: " + number + " K?");
         }
         if (word.equals("K")) {
-            return refusal("", expected(), "K is kelvin here, kilo is k: " + number + " k" + ascii(unit()) + "?");
+            return refusal("K is kelvin here, kilo is k: " + number + " k" + ascii(unit()) + "?");
         }
         String alike = choices.stream()
                 .flatMap(c -> alike(c.unit(), word).stream())
@@ -170,14 +165,13 @@ final class Refusals {
                 .map(w -> number + " " + w)
                 .collect(Collectors.joining(" or "));
         if (!alike.isEmpty()) {
-            return refusal("", expected(), alike + "?");
+            return refusal(alike + "?");
         }
         Optional<Unit> other = otherUnit(word);
         String reason = other.isPresent()
                 ? "\"" + word + "\" is " + other.get().noun() + "; "
                 : "\"" + word + "\" is no unit known here; ";
-        return refusal(
-                "", expected(), reason + "such as " + choices.get(0).unit().example() + ".");
+        return refusal(reason + "such as " + choices.get(0).unit().example() + ".");
     }
 
     private static Optional<Unit> otherUnit(String word) {

@@ -6,11 +6,13 @@ public final class RefusedQuantityException extends RuntimeException {
 
     private final transient Refusal refusal;
 
+    /** With the refusal's own message. */
     public RefusedQuantityException(Refusal refusal) {
         super(refusal.message());
         this.refusal = refusal;
     }
 
+    /** What was read, what was expected, and what to write instead. */
     public Refusal refusal() {
         return refusal;
     }

@@ -1,6 +1,5 @@
 package clipramp.units;
 
-import java.math.BigDecimal;
 import java.util.Optional;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
@@ -102,9 +101,5 @@ final class Scanner {
 
     private static boolean isNumberSign(char sign) {
         return sign >= '0' && sign <= '9' || sign == '.' || sign == ',';
-    }
-
-    static BigDecimal decimal(String number) {
-        return new BigDecimal(number);
     }
 }

@@ -32,13 +32,13 @@ final class Trailer {
             item();
             scanner.skipSpaces();
         }
-        return new Quantity(value.si(), value.expected().unit(), value.match() != null, minus, plus, watts, volts);
+        return new Quantity(value.si(), value.expected().unit(), minus, plus, watts, volts);
     }
 
     private void item() {
         if (scanner.takes("±")) {
             scanner.skipSpaces();
-            double share = share(unsigned(), true);
+            double share = share(unsigned());
             below(share);
             above(share);
             return;
@@ -47,7 +47,7 @@ final class Trailer {
         if (sign == '+' || sign == '-') {
             scanner.takes(String.valueOf(sign));
             scanner.skipSpaces();
-            double share = share(unsigned(), true);
+            double share = share(unsigned());
             if (sign == '-') {
                 below(share);
             } else {
@@ -83,7 +83,7 @@ final class Trailer {
 
     private OptionalDouble once(OptionalDouble before, String number, Unit.Match match, String unit) {
         double rating =
-                Scanner.decimal(number).scaleByPowerOfTen(match.exponent()).doubleValue();
+                new BigDecimal(number).scaleByPowerOfTen(match.exponent()).doubleValue();
         if (before.isPresent()) {
             throw refusals.because("one rating in " + unit, "The rating in " + unit + " stands twice: keep one.");
         }
@@ -102,7 +102,7 @@ final class Trailer {
     }
 
     /** A tolerance as a fraction of the value; absolute ones need their unit. */
-    private double share(String number, boolean signed) {
+    private double share(String number) {
         requireTolerance();
         String word = scanner.unitWord();
         if (word.equals("%")) {
@@ -114,8 +114,8 @@ final class Trailer {
         Unit unit = value.expected().unit();
         Unit.Match match = unit.match(word)
                 .orElseThrow(() ->
-                        refusals.because("a tolerance in % or " + unit.symbol(), signed ? "±" + number + " %?" : ""));
-        BigDecimal absolute = Scanner.decimal(number).scaleByPowerOfTen(match.exponent());
+                        refusals.because("a tolerance in % or " + unit.symbol(), "±" + number + " %?"));
+        BigDecimal absolute = new BigDecimal(number).scaleByPowerOfTen(match.exponent());
         if (value.decimal().signum() == 0) {
             throw refusals.because("no tolerance on zero", "Leave the tolerance out.");
         }
@@ -123,7 +123,7 @@ final class Trailer {
     }
 
     private double percent(String number) {
-        return Scanner.decimal(number).scaleByPowerOfTen(-2).doubleValue();
+        return new BigDecimal(number).scaleByPowerOfTen(-2).doubleValue();
     }
 
     private void requireTolerance() {

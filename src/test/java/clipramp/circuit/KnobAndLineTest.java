@@ -46,10 +46,17 @@ class KnobAndLineTest {
     void aShuntLiesAcrossTheUsedSectionOnly() {
         // Resistors in parallel: 30 k of a 40 k track (and 10 k of its end) across 40 k are 20 k.
         Pot pot = new Pot(Part.of(40_000), 10_000, new PotLaw.Linear(), Pot.Sense.RISING, Optional.of(Part.of(40_000)));
-        assertThat(pot.ohms(0.75)).isCloseTo(20_000, within(1e-9));
-        assertThat(Changed.with(pot, "sense", Pot.Sense.FALLING).ohms(0.25)).isCloseTo(20_000, within(1e-9));
-        assertThat(Changed.with(pot, "shunt", Optional.empty()).ohms(0.75)).isCloseTo(40_000, within(1e-9));
-        assertThatThrownBy(() -> pot.ohms(1.01)).hasMessageContaining("knob position");
+        Pot falling = Changed.with(pot, "sense", Pot.Sense.FALLING);
+        Pot without = Changed.with(pot, "shunt", Optional.empty());
+        assertThat(knobOnly(pot).rampOhms(0.75)).isCloseTo(20_000, within(1e-9));
+        assertThat(knobOnly(falling).rampOhms(0.25)).isCloseTo(20_000, within(1e-9));
+        assertThat(knobOnly(without).rampOhms(0.75)).isCloseTo(40_000, within(1e-9));
+        assertThatThrownBy(() -> pot.trackShare(1.01)).hasMessageContaining("knob position");
+    }
+
+    /** A ramp whose resistor is the pot alone. */
+    private static Ramp knobOnly(Pot pot) {
+        return new Ramp(Part.of(100e-9), Part.of(0), Optional.of(pot));
     }
 
     @Test

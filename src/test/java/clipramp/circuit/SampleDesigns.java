@@ -242,7 +242,9 @@ public final class SampleDesigns {
                         OptionalDouble.of(10),
                         OptionalDouble.of(160),
                         OptionalDouble.of(145),
-                        OptionalDouble.of(125)),
+                        OptionalDouble.of(125),
+                        OptionalDouble.empty(),
+                        OptionalDouble.empty()),
                 OptionalDouble.of(1.5));
     }
 
@@ -274,7 +276,9 @@ public final class SampleDesigns {
                         OptionalDouble.of(8),
                         OptionalDouble.of(100),
                         OptionalDouble.of(40),
-                        OptionalDouble.of(125)),
+                        OptionalDouble.of(125),
+                        OptionalDouble.empty(),
+                        OptionalDouble.empty()),
                 OptionalDouble.of(2.2));
     }
 

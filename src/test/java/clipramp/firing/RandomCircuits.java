@@ -299,7 +299,7 @@ final class RandomCircuits {
                         none,
                         Optional.empty(),
                         new ThyristorDevice.OnState(linear(0, 1), linear(0, 0.1)),
-                        new ThyristorDevice.Limits(none, none, none, none, none, none),
+                        new ThyristorDevice.Limits(none, none, none, none, none, none, none, none),
                         none),
                 OptionalDouble.of(1));
     }

@@ -181,7 +181,7 @@ final class ReferenceCases {
                 none,
                 Optional.empty(),
                 new ThyristorDevice.OnState(0, 0),
-                new ThyristorDevice.Limits(none, none, none, none, none, none),
+                new ThyristorDevice.Limits(none, none, none, none, none, none, none, none),
                 none);
     }
 

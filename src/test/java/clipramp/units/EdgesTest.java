@@ -41,13 +41,6 @@ class EdgesTest {
     }
 
     @Test
-    void tellsWhetherAUnitStoodBesideTheNumber() {
-        assertThat(QuantityReader.read("4700", RESISTOR).unitWritten()).isFalse();
-        assertThat(QuantityReader.read("4.7 k", RESISTOR).unitWritten()).isTrue();
-        assertThat(QuantityReader.read("470 ohm", RESISTOR).unitWritten()).isTrue();
-    }
-
-    @Test
     void saysAWindowThatIsOpenOnEitherSide() {
         double none = Double.POSITIVE_INFINITY;
         assertThat(Expected.any(Unit.OHM).inWords()).isEqualTo("a resistance, such as 10 kΩ");
