@@ -5,7 +5,8 @@ package clipramp.engine;
  * the direction of conduction and D the fixed drops of the path (a freewheeling diode: s = 0 and its own drop).
  *
  * <p>R i obeys the same first-order law as a capacitor charged through a resistor with R C = L/R, so a {@link Piece}
- * solves it and {@link FirstCrossing} finds its end. Mutable; angles are of the line, rad.
+ * solves it and {@link FirstCrossing} finds its end, both to rounding (DEVELOPERS.md, loads with memory). Mutable; angles
+ * are of the line, from the positive-going zero of its fundamental.
  */
 public final class InductiveCurrent {
     private final LineWave line;
@@ -16,9 +17,11 @@ public final class InductiveCurrent {
     private double fromRad;
 
     /**
+     * A loop at rest.
+     *
      * @param line the line
-     * @param loopOhms everything resistive in the loop, ohm
-     * @param henries inductance, H
+     * @param loopOhms everything resistive in the loop, ohm, above 0
+     * @param henries inductance, H, above 0
      */
     public InductiveCurrent(LineWave line, double loopOhms, double henries) {
         this.line = line;
@@ -48,7 +51,12 @@ public final class InductiveCurrent {
         piece.begin(lag, driving, 0, startAmps * loopOhms, 0);
     }
 
-    /** Current at an angle at or after the start, before extinction, A. */
+    /**
+     * Current at an angle.
+     *
+     * @param rad line angle at or after the start and not beyond the extinction, rad
+     * @return A, 0 or more, in the direction of conduction
+     */
     public double ampsAt(double rad) {
         piece.look((rad - fromRad) / line.omega());
         return piece.rampVolts / loopOhms;
@@ -57,7 +65,7 @@ public final class InductiveCurrent {
     /**
      * Angle at which the current has fallen to zero.
      *
-     * @param limitRad end of the search, rad
+     * @param limitRad line angle at which the search ends, rad
      * @return rad; POSITIVE_INFINITY if it flows on beyond the limit; the start itself if nothing drives it
      */
     public double extinctionRad(double limitRad) {
@@ -65,7 +73,7 @@ public final class InductiveCurrent {
         return fromRad + seconds * line.omega();
     }
 
-    /** Angle from which it conducts, rad. */
+    /** Line angle from which it conducts, rad. */
     public double startRad() {
         return fromRad;
     }

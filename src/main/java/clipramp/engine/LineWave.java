@@ -7,7 +7,7 @@ import org.apache.commons.math3.analysis.solvers.BrentSolver;
 
 /**
  * The line voltage of one condition: v = sum over k of amplitude_k sin(k theta + phase_k), theta counted from the
- * positive-going zero of the fundamental.
+ * positive-going zero of the fundamental (DEVELOPERS.md, line and source). Orders count from 1, the fundamental.
  */
 public final class LineWave {
     /** Samples a period and order: finer than any two zeros that a band-limited wave can hide from a designer. */
@@ -23,8 +23,10 @@ public final class LineWave {
     private final double negativeStartRad;
 
     /**
+     * A line at a condition; its own zeros are found to 1e-15 rad.
+     *
      * @param line harmonics
-     * @param condition rms volts and hertz
+     * @param condition rms volts of the fundamental and hertz
      * @throws RefusedCircuit if the wave has more than two zeros a period
      */
     public LineWave(Line line, Condition condition) {
@@ -52,7 +54,7 @@ public final class LineWave {
         }
     }
 
-    /** Line voltage at an angle, V. */
+    /** Line voltage, V, at an angle in rad from the fundamental's positive-going zero. */
     public double voltsAt(double angleRad) {
         double sum = 0;
         for (int i = 0; i < orders.length; i++) {
@@ -71,10 +73,12 @@ public final class LineWave {
         return negativeStartRad;
     }
 
+    /** Angular frequency of the fundamental, rad/s. */
     public double omega() {
         return omega;
     }
 
+    /** Whether there are no harmonics, so that the wave's zeros are the fundamental's. */
     public boolean isPureSine() {
         return orders.length == 1;
     }

@@ -8,7 +8,8 @@ import clipramp.circuit.Stage;
 /**
  * Current that a load takes once the thyristor is on. A resistor: i = max(0, (|v| - V_T0 - n V_F)/(R + r_T + n r_F)), n
  * bridge diodes in the path (0 or 2). With an inductance it grows from nothing as {@link InductiveCurrent} says. Half-wave
- * stages conduct in the positive half only.
+ * stages conduct in the positive half only. Angles are of the line, from the positive-going zero of its fundamental;
+ * currents and voltages count as positive in the direction of conduction (DEVELOPERS.md, power, loads with memory).
  */
 public final class LoadCurrent {
     private final LineWave line;
@@ -18,6 +19,11 @@ public final class LoadCurrent {
     private final double henries;
     private final boolean freewheels;
 
+    /**
+     * The load's path of a design, nominal parts.
+     *
+     * @throws RefusedCircuit as {@link LineWave}
+     */
     public LoadCurrent(Design design, Condition condition) {
         this(design, new LineWave(design.line(), condition));
     }
@@ -38,13 +44,13 @@ public final class LoadCurrent {
                 + stage.bridgeDiodes() * design.stageDiodes().slopeOhms();
     }
 
-    /** What drives current through the load at a line angle, rad, drops taken off, V; negative for nothing. */
+    /** What drives current through the load at a line angle in rad, drops taken off, V; negative for nothing. */
     public double drivingVolts(double angleRad) {
         double volts = line.voltsAt(angleRad);
         return (fullWave ? Math.abs(volts) : volts) - dropVolts;
     }
 
-    /** Current of a resistive load at a line angle, rad, the thyristor taken as on, A. */
+    /** Current of a resistive load at a line angle in rad, the thyristor taken as on, A. */
     public double ampsAt(double angleRad) {
         return Math.max(0, drivingVolts(angleRad)) / loopOhms;
     }
@@ -68,8 +74,9 @@ public final class LoadCurrent {
      * Line angle at which the current ends that was fired with none flowing.
      *
      * @param firedRad line angle of firing, rad
-     * @param halfEndRad the zero that ends the half cycle: with a resistor the current ends there, and a freewheeling
-     *     diode takes it over a fraction of a degree before, rad
+     * @param halfEndRad the zero that ends the half cycle, rad: with a resistor the current ends there, and a freewheeling
+     *     diode takes it over a fraction of a degree before
+     * @return rad; a whole period after firing at most
      */
     public double extinctionRad(double firedRad, double halfEndRad) {
         if (henries == 0 || freewheels || drivingVolts(firedRad) <= 0) {
@@ -89,7 +96,7 @@ public final class LoadCurrent {
         return dropVolts;
     }
 
-    /** Load and slopes in series, ohm. */
+    /** Everything resistive in the load's path: R + r_T + n r_F, ohm. */
     public double loopOhms() {
         return loopOhms;
     }

@@ -4,7 +4,7 @@ package clipramp.engine;
  * The firing circuit as numbers at one condition. A mutable kitchen vessel: whoever draws a million units fills the
  * same instance again and calls {@link #derive()}; everybody else gets one from {@link NetworkOfDesign}.
  *
- * <p>SI units throughout. The device is described generally enough for both trigger devices: off, it loads the supply
+ * <p>SI units throughout; laws and letters as in DEVELOPERS.md, the circuit laws. The device is described generally enough for both trigger devices: off, it loads the supply
  * with {@code standingSiemens} and fires at kappa V_S + V_D; on, its emitter carries (V_C - V_B1 - onDrop - xi
  * V_S)/r_on, and base two carries g2 (V_S - V_B1 - gateDrop), of which lowerSiemens (V_B1 + gateDrop) is lost to a
  * programmable device's lower resistor.
@@ -36,13 +36,13 @@ public final class Network {
     /** I_P, A. */
     public double peakCurrentAmps;
     /** r_on, ohm. */
-    public double onOhms;
+    double onOhms;
     /** xi: intercept of the saturated emitter line per volt of supply. */
-    public double onIntercept;
+    double onIntercept;
     /** iota: valley current per volt of supply, A/V. */
     public double valleySiemens;
     /** R_B2on, ohm. */
-    public double modulatedOhms;
+    double modulatedOhms;
     /** Whether the trigger device is a programmable unijunction transistor, with a divider in place of R2 and bar. */
     public boolean programmable;
     /** R_A, upper divider resistor of a programmable device, ohm. */
@@ -50,19 +50,19 @@ public final class Network {
     /** R_B, lower divider resistor of a programmable device, ohm. */
     public double lowerOhms;
     /** Whether a pulse transformer stands between base one and the gate. */
-    public boolean transformerCoupled;
+    boolean transformerCoupled;
     /** L_m at the primary, H. */
-    public double magnetisingHenries;
+    double magnetisingHenries;
     /** Primary over secondary turns. */
     public double turnsRatio;
     /** Secondaries that carry a gate each. */
-    public int secondaries;
+    int secondaries;
     /** Primary winding resistance, ohm. */
-    public double primaryOhms;
+    double primaryOhms;
     /** Resistance of one secondary, ohm. */
-    public double secondaryOhms;
+    double secondaryOhms;
     /** Drop of the diode across the primary, V; POSITIVE_INFINITY for none. */
-    public double clampVolts = Double.POSITIVE_INFINITY;
+    double clampVolts = Double.POSITIVE_INFINITY;
     /** R_G, ohm. */
     public double gateSeriesOhms;
     /** 1/R_GK, S; 0 for none. */
@@ -111,7 +111,7 @@ public final class Network {
     /** Open-circuit voltage of one gate network with the junction on, V. */
     double gateOnVolts;
 
-    /** Works out what follows from the fields above. */
+    /** Works out all that the laws need beside these fields; to be called after the last of them was changed. */
     public void derive() {
         deriveGate();
         if (programmable) {
@@ -167,11 +167,13 @@ public final class Network {
     }
 
     /**
-     * Ramp voltage after some time of a supply that stands backwards: what lies over the peak point of that supply runs out
-     * through the emitter at once, the rest follows through R_E.
+     * Ramp voltage after some time of a supply that stands backwards, at minus {@link #reverseVolts}: what lies over the
+     * peak point of that supply runs out through the emitter at once, the rest follows through R_E (DEVELOPERS.md, single
+     * faults).
      *
-     * @param rampVolts at its beginning, V
-     * @param seconds how long it has stood so, s
+     * @param rampVolts at its beginning, V above the firing common
+     * @param seconds how long it has stood so, s, 0 or more
+     * @return V above the firing common
      */
     public double rampUnderReverse(double rampVolts, double seconds) {
         double from = Math.min(rampVolts, emitterDropVolts - peakShare * reverseVolts);

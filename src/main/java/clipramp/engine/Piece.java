@@ -4,7 +4,8 @@ package clipramp.engine;
  * The circuit between two events: node voltages as linear forms of ramp and source voltage (and of a pulse transformer's
  * magnetising current), and the ramp voltage as one exponential and the source's sinusoids, exactly.
  *
- * <p>Times are seconds since the line zero that begins the half cycle. Mutable, reused for every piece; {@link #copy()}
+ * <p>Times are seconds since the line zero that begins the half cycle; voltages are against the firing common where no
+ * other frame is given; all is exact to rounding (DEVELOPERS.md, ramp). Mutable, reused for every piece; {@link #copy()}
  * keeps one.
  */
 public final class Piece {
@@ -16,9 +17,13 @@ public final class Piece {
     boolean gateConducts;
     boolean clamps;
 
+    /** V_S, V. */
     final Affine supply = new Affine();
+    /** V_B1, V. */
     final Affine baseOne = new Affine();
+    /** I_E, A. */
     final Affine emitter = new Affine();
+    /** v_GK, V. */
     final Affine gate = new Affine();
     /** V_P, V. */
     final Affine peak = new Affine();
@@ -61,6 +66,8 @@ public final class Piece {
     private double startSource;
     private double startSourceSlope;
     private double startSourceBend;
+
+    Piece() {}
 
     /**
      * Fills in the piece that begins at a time with a ramp voltage and a magnetising current; node equations must be set
@@ -164,7 +171,11 @@ public final class Piece {
         driveConstant = supply.constant * perOhm - emitter.constant * perFarad;
     }
 
-    /** Works out ramp and source voltage with their slopes at a time; the getters below then speak of that time. */
+    /**
+     * Works out ramp and source voltage with their slopes at a time; what the piece is asked next then speaks of that time.
+     *
+     * @param seconds at or after the piece's start and not beyond its end, s
+     */
     public void look(double seconds) {
         if (coupled) {
             lookAtBoth(seconds);
@@ -278,7 +289,7 @@ public final class Piece {
         return value(primary);
     }
 
-    /** Source voltage behind the dropper where last looked at, V. */
+    /** Source voltage e, before the dropper, where last looked at, V; negative where the rectifier blocks it. */
     public double sourceVolts() {
         return sourceVolts;
     }
@@ -294,7 +305,11 @@ public final class Piece {
     }
 
     /**
-     * Time of V_S's greatest value between two times, s: an end, or where it stops rising in between.
+     * Time of V_S's greatest value between two times: an end, or where it stops rising in between.
+     *
+     * @param from in the piece, s
+     * @param to in the piece, at or after {@code from}, s
+     * @return s
      */
     public double supplyCrestSeconds(double from, double to) {
         return crestSeconds(supply, from, to);
@@ -305,12 +320,18 @@ public final class Piece {
         return value(baseOne);
     }
 
-    /** v_GK where last looked at, V. */
+    /** v_GK, gate to cathode or main terminal one, where last looked at, V. */
     public double gateVolts() {
         return value(gate);
     }
 
-    /** Time of v_GK's greatest value between two times, s: an end, or where it stops rising in between. */
+    /**
+     * Time of v_GK's greatest value between two times: an end, or where it stops rising in between.
+     *
+     * @param from in the piece, s
+     * @param to in the piece, at or after {@code from}, s
+     * @return s
+     */
     public double gateCrestSeconds(double from, double to) {
         return crestSeconds(gate, from, to);
     }
@@ -338,17 +359,30 @@ public final class Piece {
         return low;
     }
 
+    /** i_D through the dropping resistor where last looked at, A; the network is the one that the piece was shaped for. */
+    public double dropperAmps(Network n) {
+        return rectifies ? (sourceVolts - value(supply)) / n.dropperOhms : 0;
+    }
+
+    /** i_Z where last looked at, A; the network is the one that the piece was shaped for. */
+    public double zenerAmps(Network n) {
+        return clips ? (value(supply) - n.zenerKneeVolts) / n.zenerSlopeOhms : 0;
+    }
+
     /** Emitter current where last looked at, A. */
     public double emitterAmps() {
         return value(emitter);
     }
 
-    /** Current into the gate junction where last looked at, A. */
+    /** Current into the gate junction where last looked at, A; the network is the one that the piece was shaped for. */
     public double gateAmps(Network n) {
         return gateConducts ? (value(gate) - n.gateKneeVolts) / n.gateSlopeOhms : 0;
     }
 
-    /** Current from the supply towards base two (a programmable device: through its upper resistor), A. */
+    /**
+     * Current from the supply towards base two (a programmable device: through its upper resistor) where last looked at, A;
+     * the network is the one that the piece was shaped for.
+     */
     public double baseTwoAmps(Network n) {
         if (mode == Mode.ON) {
             return n.baseTwoOnSiemens * (value(supply) - value(baseOne) - n.gateDropVolts);
@@ -356,7 +390,10 @@ public final class Piece {
         return n.barSiemens * (value(supply) - value(baseOne)) + n.dividerSiemens * value(supply);
     }
 
-    /** Voltage at base two (a programmable device: at its gate node) where last looked at, V. */
+    /**
+     * Voltage at base two (a programmable device: at its gate node) where last looked at, V; the network is the one that the
+     * piece was shaped for.
+     */
     public double baseTwoVolts(Network n) {
         if (n.programmable) {
             return mode == Mode.ON ? value(baseOne) + n.gateDropVolts : value(peak) - n.emitterDropVolts;
@@ -367,6 +404,7 @@ public final class Piece {
     /**
      * First time at which the gate current crosses a level.
      *
+     * @param n the network that the piece was shaped for
      * @param amps the level, A, above zero
      * @param rising whether it must rise to the level or fall to it
      * @param from start of the search, s
@@ -386,29 +424,32 @@ public final class Piece {
     }
 
     /** Decay rate of the piece's (faster) exponential, 1/s. */
-    public double ratePerSecond() {
+    double ratePerSecond() {
         return rate;
     }
 
     /** Time at which the piece begins, s. */
-    public double startSeconds() {
+    double startSeconds() {
         return startSeconds;
     }
 
+    /** What the trigger device does throughout. */
     public Mode mode() {
         return mode;
     }
 
+    /** Whether the rectifier feeds the supply throughout. */
     public boolean isRectifying() {
         return rectifies;
     }
 
+    /** Whether the zener conducts throughout. */
     public boolean isClipping() {
         return clips;
     }
 
     /** Fastest angular frequency of the source, rad/s; 0 for a constant one. */
-    public double fastestRate() {
+    double fastestRate() {
         double fastest = 0;
         for (int i = 0; i < wave.count; i++) {
             fastest = Math.max(fastest, wave.rates[i]);

@@ -18,12 +18,25 @@ public final class PieceQuadrature {
 
     private PieceQuadrature() {}
 
-    /** Is shown a piece looked at a node, with the node's weight in seconds. */
+    /** What sums up an integral. */
     public interface Visitor {
+        /**
+         * One node of the rule.
+         *
+         * @param piece the piece, looked at the node
+         * @param weightSeconds the node's weight, s: the integral is the sum of weight times value
+         */
         void node(Piece piece, double weightSeconds);
     }
 
-    /** Visits the nodes of a piece between two times in s. */
+    /**
+     * Visits the nodes of a piece between two times, in rising time.
+     *
+     * @param piece the piece; it is left looked at the last node
+     * @param from in the piece, s since the line zero
+     * @param to in the piece, s since the line zero; at or before {@code from} nothing is visited
+     * @param visitor shown every node
+     */
     public static void visit(Piece piece, double from, double to, Visitor visitor) {
         double rate = piece.ratePerSecond();
         double longest = piece.fastestRate() == 0 ? to - from : LONGEST_RAD / piece.fastestRate();

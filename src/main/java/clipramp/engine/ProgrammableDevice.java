@@ -11,7 +11,7 @@ import java.util.function.ToDoubleFunction;
 /**
  * A programmable unijunction transistor with its divider as numbers. Offset, peak-point and valley current follow the
  * gate resistance R_G = R_A parallel R_B: the offset linearly in log R_G, the currents as powers of it, through the data
- * sheet's points and along the end slopes beyond them.
+ * sheet's points and along the end slopes beyond them (DEVELOPERS.md, peak point, the conducting device).
  */
 public final class ProgrammableDevice {
     /** Supply that data sheets give the valley current at, V. */
@@ -42,13 +42,27 @@ public final class ProgrammableDevice {
         return ohms;
     }
 
-    /** Peak-point voltage above the divider's at a gate resistance in ohms, V. */
+    /**
+     * Peak-point voltage above the divider's.
+     *
+     * @param device the device
+     * @param gateOhms R_G, ohm, above 0
+     * @param pick which figure of the sheet's is asked for, such as {@link Characteristic#nominal}
+     * @return V
+     */
     public static double offsetVolts(
             ProgrammableUnijunction device, double gateOhms, ToDoubleFunction<Characteristic> pick) {
         return along(device.offsetVolts(), gateOhms, pick);
     }
 
-    /** A tabulated current at a gate resistance in ohms, A. */
+    /**
+     * A tabulated current.
+     *
+     * @param table peak-point or valley current against gate resistance
+     * @param gateOhms R_G, ohm, above 0
+     * @param pick which figure of the sheet's is asked for, above 0
+     * @return A
+     */
     public static double amps(List<AtGateResistance> table, double gateOhms, ToDoubleFunction<Characteristic> pick) {
         return Math.exp(along(table, gateOhms, c -> Math.log(pick.applyAsDouble(c))));
     }

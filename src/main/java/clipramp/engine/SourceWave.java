@@ -12,7 +12,7 @@ public final class SourceWave {
     double dropVolts;
     double seconds;
 
-    /** Length of the half cycle, s. */
+    /** Length of the half cycle, s, from its line zero. */
     public double seconds() {
         return seconds;
     }
@@ -20,7 +20,7 @@ public final class SourceWave {
     /**
      * Sets the half cycle that begins at one of the line's zeros.
      *
-     * @param line the line, before the winding
+     * @param line the line, before the winding, V
      * @param startRad the line angle of the zero, rad
      * @param scale winding ratio, its sign turned for a bridge in the negative half or a turned-over winding
      * @param drop rectifier drops, V
@@ -42,7 +42,14 @@ public final class SourceWave {
         seconds = lengthSeconds;
     }
 
-    /** Sets a pure sine that rises from zero, the commonest half cycle. */
+    /**
+     * Sets a pure sine that rises from zero, the commonest half cycle.
+     *
+     * @param omega angular frequency, rad/s
+     * @param amplitude crest behind the winding, V
+     * @param drop rectifier drops, V
+     * @param lengthSeconds length of the half cycle, s
+     */
     public void setSine(double omega, double amplitude, double drop, double lengthSeconds) {
         count = 1;
         rates[0] = omega;
@@ -52,7 +59,12 @@ public final class SourceWave {
         seconds = lengthSeconds;
     }
 
-    /** Sets a constant voltage: the drop across a conducting thyristor. */
+    /**
+     * Sets a constant voltage: the drop across a conducting thyristor.
+     *
+     * @param volts what stands behind the rectifier's drops, V
+     * @param lengthSeconds length of the half cycle, s
+     */
     public void setConstant(double volts, double lengthSeconds) {
         count = 0;
         dropVolts = -volts;

@@ -1,7 +1,8 @@
 package clipramp.engine;
 
 /**
- * Leads the firing circuit from event to event through a half cycle, exactly. Allocates nothing once made.
+ * Leads the firing circuit from event to event through a half cycle, exactly (DEVELOPERS.md, to fire or to stall, events,
+ * exactly). Allocates nothing once made. Times are seconds since the line zero that begins the half cycle.
  *
  * <p>Use: {@link #start} at a line zero, then {@link #advance} again and again; between two calls {@link #piece()} is
  * the piece just passed, from its own start to {@link #seconds()}.
@@ -56,11 +57,19 @@ public final class Stepper {
     private Event nextEvent = Event.END;
     private double nextSeconds;
 
+    /** A stepper for a network, derived before the first start; it may be filled anew between two half cycles. */
     public Stepper(Network network) {
         n = network;
     }
 
-    /** Begins a half cycle with the state (mode, ramp voltage, magnetising current) that the last one ended in. */
+    /**
+     * Begins a half cycle with the state that the last one ended in.
+     *
+     * @param source what stands behind the dropper; it must stay as it is until the half cycle's end
+     * @param startMode what the device does
+     * @param startRampVolts V_C, V above the firing common
+     * @param startFluxAmps magnetising current, A; 0 without a pulse transformer
+     */
     public void start(SourceWave source, Mode startMode, double startRampVolts, double startFluxAmps) {
         wave = source;
         mode = startMode;
@@ -113,7 +122,13 @@ public final class Stepper {
         settle();
     }
 
-    /** Goes back to an instant just after firing. */
+    /**
+     * Goes back to an instant just after firing.
+     *
+     * @param firingSeconds when, s
+     * @param firingRampVolts V_C then, V
+     * @param firingFluxAmps magnetising current then, A
+     */
     public void returnToFiring(double firingSeconds, double firingRampVolts, double firingFluxAmps) {
         seconds = firingSeconds;
         rampVolts = firingRampVolts;
@@ -125,7 +140,7 @@ public final class Stepper {
      * Moves to the next event and through it.
      *
      * @param limitSeconds where to stop if nothing happens before, s
-     * @return what happened; {@link #seconds()} says when
+     * @return what happened; {@link #seconds()} says when, to rounding and never later than it does
      */
     public Event advance(double limitSeconds) {
         beginPiece();
@@ -408,9 +423,5 @@ public final class Stepper {
 
     boolean gateConducts() {
         return gateConducts;
-    }
-
-    public Network network() {
-        return n;
     }
 }

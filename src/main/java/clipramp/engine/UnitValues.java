@@ -179,7 +179,7 @@ public final class UnitValues {
         return new UnitValues(design);
     }
 
-    /** Puts the unit at a condition. */
+    /** Puts the unit at a condition; gives the unit back. */
     public UnitValues at(Condition condition) {
         lineVolts = condition.lineVolts();
         lineHertz = condition.lineHertz();
@@ -222,16 +222,16 @@ public final class UnitValues {
         return fixedOhms + highTrimOhms + (trackOhms == 0 ? 0 : Pot.ohms(trackShare, potEndOhms, trackOhms, across));
     }
 
-    /** The pot's used section by itself, nothing across it, ohm. */
+    /** The pot's used section by itself with a share 0..1 of the track in use, nothing across it, ohm. */
     public double usedTrackOhms(double trackShare) {
         return potEndOhms + trackOhms * trackShare;
     }
 
     /**
-     * Works out the network of this unit.
+     * Works out the network of this unit at its line and temperature.
      *
-     * @param n network to fill
-     * @param rampOhms R_E, ohm
+     * @param n network to fill and derive
+     * @param rampOhms R_E, ohm, above 0
      * @throws RefusedCircuit where the device's data contradict themselves
      */
     public void fill(Network n, double rampOhms) {

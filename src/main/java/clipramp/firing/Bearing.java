@@ -30,7 +30,8 @@ final class Bearing {
         n = network;
     }
 
-    static Dissipation of(FiringCase firing, List<List<PieceLog.Entry>> halves, int firstHalf) {
+    /** What the parts bear over half cycles of the periodic state, the first of which has the running number 0. */
+    static Dissipation of(FiringCase firing, List<List<PieceLog.Entry>> halves) {
         Bearing sums = new Bearing(firing.network());
         double seconds = 0;
         for (int h = 0; h < halves.size(); h++) {
@@ -40,7 +41,7 @@ final class Bearing {
                 sums.peaksAt(piece, entry.fromSeconds());
                 sums.peaksAt(piece, entry.toSeconds());
             }
-            seconds += firing.timing().wave(firstHalf + h).seconds();
+            seconds += firing.timing().wave(h).seconds();
         }
         return sums.over(seconds);
     }
@@ -48,8 +49,8 @@ final class Bearing {
     private void add(Piece p, double weight) {
         double supply = p.supplyVolts();
         double base = p.baseOneVolts();
-        double dropperAmps = dropperAmps(p, supply);
-        double zenerAmps = zenerAmps(p, supply);
+        double dropperAmps = p.dropperAmps(n);
+        double zenerAmps = p.zenerAmps(n);
         double baseTwoAmps = p.baseTwoAmps(n);
         double emitterAmps = p.emitterAmps();
         double gateVolts = p.gateVolts();
@@ -70,29 +71,21 @@ final class Bearing {
         gate += weight * gateAmps * gateVolts;
         gateSeries += weight * networkAmps * networkAmps * n.gateSeriesOhms;
         gateShunt += weight * gateVolts * gateVolts * n.gateShuntSiemens;
-        peaks(p, supply, base, baseTwoVolts);
+        peaks(p, base, baseTwoVolts);
     }
 
     private void peaksAt(Piece piece, double time) {
         piece.look(time);
-        peaks(piece, piece.supplyVolts(), piece.baseOneVolts(), piece.baseTwoVolts(n));
+        peaks(piece, piece.baseOneVolts(), piece.baseTwoVolts(n));
     }
 
-    private void peaks(Piece p, double supply, double base, double baseTwoVolts) {
-        dropperPeakVolts = Math.max(dropperPeakVolts, dropperAmps(p, supply) * n.dropperOhms);
-        zenerPeakAmps = Math.max(zenerPeakAmps, zenerAmps(p, supply));
+    private void peaks(Piece p, double base, double baseTwoVolts) {
+        dropperPeakVolts = Math.max(dropperPeakVolts, p.dropperAmps(n) * n.dropperOhms);
+        zenerPeakAmps = Math.max(zenerPeakAmps, p.zenerAmps(n));
         emitterPeakAmps = Math.max(emitterPeakAmps, p.emitterAmps());
         emitterReverseVolts = Math.max(emitterReverseVolts, baseTwoVolts - p.rampVolts());
         interbaseVolts = Math.max(interbaseVolts, baseTwoVolts - base);
         capacitorVolts = Math.max(capacitorVolts, p.rampVolts());
-    }
-
-    private double dropperAmps(Piece p, double supply) {
-        return p.isRectifying() ? (p.sourceVolts() - supply) / n.dropperOhms : 0;
-    }
-
-    private double zenerAmps(Piece p, double supply) {
-        return p.isClipping() ? (supply - n.zenerKneeVolts) / n.zenerSlopeOhms : 0;
     }
 
     private Dissipation over(double seconds) {

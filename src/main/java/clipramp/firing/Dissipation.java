@@ -14,9 +14,9 @@ package clipramp.firing;
  * @param deviceWatts trigger device, base bar and emitter together, W
  * @param emitterRmsAmps rms emitter current, A
  * @param emitterPeakAmps largest emitter current, A
- * @param emitterReverseVolts largest reverse voltage between emitter and base two (V_S less V_C), V
- * @param interbaseVolts largest interbase voltage, V
- * @param capacitorVolts largest capacitor voltage, V
+ * @param emitterReverseVolts largest voltage of base two (a programmable device: of its gate node) above the emitter, V
+ * @param interbaseVolts largest voltage of base two (or that gate node) above base one, V
+ * @param capacitorVolts largest capacitor voltage, V to common
  * @param gateWatts mean power into the gate junction, W
  * @param gateSeriesWatts R_G, W
  * @param gateShuntWatts R_GK, W
@@ -40,7 +40,7 @@ public record Dissipation(
         double gateSeriesWatts,
         double gateShuntWatts) {
     /**
-     * The same with more on the supply's parts.
+     * The same with more on the supply's parts, as a shorted rectifier puts there.
      *
      * @param moreDropperWatts on top of the dropper's, W
      * @param otherDropperPeakVolts another peak across it, V

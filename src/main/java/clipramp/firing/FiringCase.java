@@ -10,7 +10,18 @@ import clipramp.engine.Network;
 import clipramp.engine.NetworkOfDesign;
 import clipramp.engine.SourceWave;
 
-/** A design at one condition and ramp resistance, made ready to be solved. */
+/**
+ * A design at one condition and ramp resistance, made ready to be solved.
+ *
+ * @param design stage, load and supply
+ * @param condition line and temperature
+ * @param network the firing circuit, R_E included
+ * @param line the line at the condition
+ * @param timing the half cycles that the supply sees
+ * @param load what the load takes with the thyristor on
+ * @param tapsThyristor whether the supply is across the thyristor
+ * @param conductingVolts what such a supply is fed with while the thyristor conducts, V
+ */
 record FiringCase(
         Design design,
         Condition condition,
@@ -48,6 +59,7 @@ record FiringCase(
         return Math.max(0, design.thyristor().device().onState().thresholdVolts() - ownDrops);
     }
 
+    /** What feeds a supply across the conducting thyristor through a half cycle of so many seconds. */
     SourceWave conductingWave(double seconds) {
         SourceWave wave = new SourceWave();
         wave.setConstant(conductingVolts, seconds);

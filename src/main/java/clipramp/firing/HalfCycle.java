@@ -9,10 +9,11 @@ import java.util.OptionalDouble;
  *
  * @param positive whether it is the half cycle in which the line's fundamental is positive
  * @param seconds its length, s
- * @param startVolts residual voltage: ramp capacitor at the line zero that begins it, V
- * @param endVolts ramp capacitor at the line zero that ends it, V
- * @param clipFromRad angle from which the zener conducts, rad; empty if it never does
- * @param collapseRad angle at which the supply collapses: the zener's last stop, or the supply's crest if it never
+ * @param startVolts residual voltage: ramp capacitor at the line zero that begins it, V to common
+ * @param endVolts ramp capacitor at the line zero that ends it, V to common
+ * @param clipFromRad angle, counted as {@link Pulse#startRad} is, from which the zener conducts, rad; empty if it never
+ *     does
+ * @param collapseRad angle, counted alike, at which the supply collapses: the zener's last stop, or the supply's crest if it never
  *     conducts, rad
  * @param stalled whether the first pulse came out of a stall (the ramp held at the peak point for want of peak-point
  *     current), or none came of one
@@ -31,6 +32,7 @@ public record HalfCycle(
         boolean latchedOn,
         List<Pulse> pulses,
         int firingIndex) {
+    /** Keeps a copy of the pulses. */
     public HalfCycle {
         pulses = List.copyOf(pulses);
     }
@@ -50,7 +52,7 @@ public record HalfCycle(
         return shownPulse().filter(Pulse::endPulse);
     }
 
-    /** Firing angle, rad; empty when the thyristor stays off. */
+    /** Firing angle, counted as {@link Pulse#startRad} is, rad; empty when the thyristor stays off. */
     public OptionalDouble firingRad() {
         return firingPulse().stream().mapToDouble(Pulse::startRad).findFirst();
     }

@@ -36,9 +36,9 @@ final class HalfCycleRun {
 
     private boolean conducting;
     /** Time in the next half cycle until which this one's load current flows on, s. */
-    private double conductsUntil;
+    private double conductsUntilSeconds;
 
-    private double triedFrom;
+    private double triedFromSeconds;
     private double triedRampVolts;
     private double triedFluxAmps;
     private boolean trying;
@@ -72,8 +72,8 @@ final class HalfCycleRun {
         double end = wave.seconds();
         begin();
         // Across the thyristor the supply returns when the load current dies, which an inductance puts off.
-        double returns = conductsUntil;
-        conductsUntil = 0;
+        double returns = conductsUntilSeconds;
+        conductsUntilSeconds = 0;
         conducting = returns > 0;
         stepper.start(conducting ? firing.conductingWave(end) : wave, mode, rampVolts, fluxAmps);
         supply.zener(false, stepper.clips(), 0);
@@ -164,7 +164,7 @@ final class HalfCycleRun {
                 firing.network(), half, stepper.seconds(), stepper.rampVolts(), supplyVolts, afterStall, brief);
         begun.add(going);
         if (firing.tapsThyristor() && !conducting && firing.isForward(half, stepper.seconds())) {
-            triedFrom = stepper.seconds();
+            triedFromSeconds = stepper.seconds();
             triedRampVolts = stepper.rampVolts();
             triedFluxAmps = stepper.fluxAmps();
             trying = true;
@@ -185,8 +185,8 @@ final class HalfCycleRun {
         trying = false;
         if (pulse.latches(firing)) {
             conducting = true;
-            double end = firing.extinctionSeconds(half, triedFrom);
-            conductsUntil = Math.max(0, end - wave.seconds());
+            double end = firing.extinctionSeconds(half, triedFromSeconds);
+            conductsUntilSeconds = Math.max(0, end - wave.seconds());
         } else if (pulse.turnsOn(firing)) {
             stepper.switchSource(wave);
         } else {
@@ -209,10 +209,10 @@ final class HalfCycleRun {
     }
 
     private void takeBack(PulseMeter pulse, SourceWave wave, PieceSink sink) {
-        sink.takeBack(triedFrom);
+        sink.takeBack(triedFromSeconds);
         begun.remove(begun.size() - 1);
         stepper.switchSource(wave);
-        stepper.returnToFiring(triedFrom, triedRampVolts, triedFluxAmps);
+        stepper.returnToFiring(triedFromSeconds, triedRampVolts, triedFluxAmps);
         going = pulse.again();
         begun.add(going);
     }
@@ -252,8 +252,8 @@ final class HalfCycleRun {
         return fluxAmps;
     }
 
-    double conductsUntil() {
-        return conductsUntil;
+    double conductsUntilSeconds() {
+        return conductsUntilSeconds;
     }
 
     boolean pulseIsGoing() {
@@ -263,6 +263,13 @@ final class HalfCycleRun {
     /** What the half cycle just run showed; a pulse still going on is filled in by running on. */
     HalfCycleDraft draft() {
         return new HalfCycleDraft(
-                lastHalf(), startVolts, rampVolts, supply.clipFrom(), supply.collapse(), stalled, latchedOn, begun);
+                lastHalf(),
+                startVolts,
+                rampVolts,
+                supply.clipFromSeconds(),
+                supply.collapseSeconds(),
+                stalled,
+                latchedOn,
+                begun);
     }
 }

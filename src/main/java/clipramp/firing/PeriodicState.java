@@ -5,7 +5,10 @@ import clipramp.engine.Mode;
 import java.util.ArrayList;
 import java.util.List;
 
-/** Runs half cycles until they repeat, then once more through those that differ. */
+/**
+ * Runs half cycles until they repeat, then once more through those that differ (DEVELOPERS.md, Half cycle and periodic
+ * state).
+ */
 final class PeriodicState {
     /** Two ramp voltages nearer than this are the same, V. */
     private static final double SAME_VOLTS = 1e-9;
@@ -23,16 +26,16 @@ final class PeriodicState {
 
     private PeriodicState() {}
 
-    private record State(Mode mode, double rampVolts, double fluxAmps, double conductsUntil) {
+    private record State(Mode mode, double rampVolts, double fluxAmps, double conductsUntilSeconds) {
         static State of(HalfCycleRun run) {
-            return new State(run.mode(), run.rampVolts(), run.fluxAmps(), run.conductsUntil());
+            return new State(run.mode(), run.rampVolts(), run.fluxAmps(), run.conductsUntilSeconds());
         }
 
         boolean isSameAs(State other) {
             return mode == other.mode
                     && Math.abs(rampVolts - other.rampVolts) < SAME_VOLTS
                     && Math.abs(fluxAmps - other.fluxAmps) < SAME_AMPS
-                    && Math.abs(conductsUntil - other.conductsUntil) < SAME_SECONDS;
+                    && Math.abs(conductsUntilSeconds - other.conductsUntilSeconds) < SAME_SECONDS;
         }
     }
 

@@ -7,6 +7,8 @@ import java.util.List;
 /** Keeps every piece of the solution's half cycles, in order. */
 final class PieceLog implements PieceSink {
     /**
+     * One piece of a half cycle.
+     *
      * @param piece the piece
      * @param fromSeconds when the circuit entered it, s since the half cycle's line zero
      * @param toSeconds when it left it, s

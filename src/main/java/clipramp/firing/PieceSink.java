@@ -4,6 +4,7 @@ import clipramp.engine.Piece;
 
 /** Is shown every piece of a half cycle in turn. */
 interface PieceSink {
+    /** Nobody looks. */
     PieceSink NONE = new PieceSink() {
         @Override
         public void passed(Piece piece, double fromSeconds, double toSeconds) {}

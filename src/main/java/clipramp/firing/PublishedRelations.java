@@ -99,17 +99,6 @@ public final class PublishedRelations {
     }
 
     /**
-     * Base-one resistor for a pulse of a given length, t/C (Rashid 9.5).
-     *
-     * @param pulseSeconds wanted pulse length, s
-     * @param rampFarads C_E, F
-     * @return ohm
-     */
-    public static double baseOneOhmsForPulse(double pulseSeconds, double rampFarads) {
-        return pulseSeconds / rampFarads;
-    }
-
-    /**
      * Largest base-one resistor whose quiescent voltage stays under the gate's non-trigger voltage: R1/(R1 + R_BB + R2)
      * times V equal to V_GD. Books print the form that neglects V_GD beside V (Gupta and Singhal 2.31); this is exact
      * for a base bar without a gate network across R1.
@@ -158,7 +147,7 @@ public final class PublishedRelations {
 
     /**
      * Base-two resistor for which the peak-point voltage does not move with temperature: dV_P/dT = 0 of V_P = V (R1 +
-     * eta R_BB)/(R2 + R_BB + R1) + V_D (DEVELOPERS.md, The circuit laws), exactly, by its quadratic's smaller root.
+     * eta R_BB)/(R2 + R_BB + R1) + V_D (DEVELOPERS.md, Peak point), exactly, by its quadratic's smaller root.
      *
      * @param standoff eta, 0..1
      * @param supplyVolts V, V

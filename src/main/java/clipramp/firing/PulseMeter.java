@@ -33,6 +33,8 @@ final class PulseMeter {
     private double longestAboveEnd = Double.NaN;
 
     /**
+     * A meter at the instant of firing.
+     *
      * @param network the circuit
      * @param half running number of the half cycle that the pulse begins in
      * @param startSeconds instant of firing, s since that half cycle's line zero
@@ -68,6 +70,9 @@ final class PulseMeter {
     /**
      * Takes in a conducting piece.
      *
+     * @param piece the piece
+     * @param from when the circuit entered it, s since its half cycle's line zero
+     * @param to when the circuit left it, s since the same
      * @param offsetSeconds what to add to the piece's times to count from the pulse's own half cycle, s
      */
     void passed(Piece piece, double from, double to, double offsetSeconds) {
@@ -141,10 +146,6 @@ final class PulseMeter {
         return startSeconds;
     }
 
-    double endSeconds() {
-        return endSeconds;
-    }
-
     /** Whether the gate current lasts for the thyristor's turn-on time, with its anode forward as it begins. */
     boolean turnsOn(FiringCase firing) {
         return longestAbove > 0 && longestAbove >= n.turnOnSeconds && firing.isForward(half, longestAboveStart);
@@ -162,6 +163,9 @@ final class PulseMeter {
     }
 
     /**
+     * The pulse as measured.
+     *
+     * @param firing what was solved
      * @param startRad firing angle in the load's half cycle, rad
      * @param endPulse whether it began after the zener's last conduction
      */

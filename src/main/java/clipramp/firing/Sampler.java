@@ -23,21 +23,24 @@ final class Sampler {
     }
 
     /**
-     * @param halves logged pieces by half cycle
-     * @param firstHalf running number of the first of them
+     * The waveforms of half cycles of the periodic state.
+     *
+     * @param firing what was solved
+     * @param halves logged pieces by half cycle, the first of which has the running number 0
+     * @param samples about how many instants
      */
-    static Waveforms sample(FiringCase firing, List<List<PieceLog.Entry>> halves, int firstHalf, int samples) {
+    static Waveforms sample(FiringCase firing, List<List<PieceLog.Entry>> halves, int samples) {
         double length = 0;
         for (int h = 0; h < halves.size(); h++) {
-            length += firing.timing().wave(firstHalf + h).seconds();
+            length += firing.timing().wave(h).seconds();
         }
         Sampler sampler = new Sampler(firing, length / Math.max(1, samples - 1));
         double before = 0;
         for (int h = 0; h < halves.size(); h++) {
             for (PieceLog.Entry entry : halves.get(h)) {
-                sampler.piece(entry, firstHalf + h, before);
+                sampler.piece(entry, h, before);
             }
-            before += firing.timing().wave(firstHalf + h).seconds();
+            before += firing.timing().wave(h).seconds();
         }
         return sampler.waveforms();
     }
@@ -58,21 +61,20 @@ final class Sampler {
     private void row(Piece piece, int half, double time, double before) {
         Network n = firing.network();
         piece.look(time);
-        double supply = piece.supplyVolts();
         double angle = firing.lineRad(half, time);
         rows.add(new double[] {
             angle,
             before + time,
             firing.line().voltsAt(angle),
-            supply,
+            piece.supplyVolts(),
             piece.rampVolts(),
             piece.peakPointVolts(),
             piece.baseOneVolts(),
             piece.gateVolts(),
             piece.gateAmps(n),
             piece.emitterAmps(),
-            piece.isRectifying() ? (piece.sourceVolts() - supply) / n.dropperOhms : 0,
-            piece.isClipping() ? (supply - n.zenerKneeVolts) / n.zenerSlopeOhms : 0
+            piece.dropperAmps(n),
+            piece.zenerAmps(n)
         });
     }
 

@@ -10,7 +10,7 @@ import java.util.List;
  * @param condition line and temperature
  * @param rampOhms R_E, ohm
  * @param settling whether and how it repeats
- * @param halves every half cycle that differs: one where all are alike; two (positive half first, or the two that
+ * @param halves every half cycle that differs, at least one: one where all are alike; two (positive half first, or the two that
  *     alternate) otherwise; more only when it hunts without settling
  */
 public record Solution(Condition condition, double rampOhms, Settling settling, List<HalfCycle> halves) {
@@ -24,6 +24,7 @@ public record Solution(Condition condition, double rampOhms, Settling settling, 
         NEVER
     }
 
+    /** @throws IllegalArgumentException without a half cycle */
     public Solution {
         halves = List.copyOf(halves);
         if (halves.isEmpty()) {
@@ -50,6 +51,7 @@ public record Solution(Condition condition, double rampOhms, Settling settling, 
         return new Solution(condition, rampOhms, settling, kept);
     }
 
+    /** Whether half cycles differ that line and load treat alike, be it by turns or without end. */
     public boolean hunts() {
         return settling != Settling.STEADY;
     }
@@ -59,6 +61,7 @@ public record Solution(Condition condition, double rampOhms, Settling settling, 
         return halves.stream().filter(HalfCycle::positive).findFirst().orElse(halves.get(0));
     }
 
+    /** What the ramp resistance comes to in one word, the positive half cycle speaking for all. */
     public FiringState state() {
         HalfCycle half = shown();
         if (half.pulses().isEmpty()) {

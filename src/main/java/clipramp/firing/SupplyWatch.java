@@ -4,14 +4,14 @@ import clipramp.engine.Piece;
 
 /** Notes when the zener conducts through a half cycle, and where the supply's crest is while it has not yet. */
 final class SupplyWatch {
-    private double clipFrom = Double.POSITIVE_INFINITY;
-    private double clipUntil = Double.NEGATIVE_INFINITY;
+    private double clipFromSeconds = Double.POSITIVE_INFINITY;
+    private double clipUntilSeconds = Double.NEGATIVE_INFINITY;
     private double crestVolts = Double.NEGATIVE_INFINITY;
     private double crestSeconds;
 
     /** Takes in a piece that the circuit went through. */
     void passed(Piece piece, double from, double to) {
-        if (clipFrom == Double.POSITIVE_INFINITY) {
+        if (clipFromSeconds == Double.POSITIVE_INFINITY) {
             double crest = piece.supplyCrestSeconds(from, to);
             piece.look(crest);
             if (piece.supplyVolts() > crestVolts) {
@@ -29,26 +29,26 @@ final class SupplyWatch {
      */
     void zener(boolean before, boolean now, double seconds) {
         if (now) {
-            clipFrom = Math.min(clipFrom, seconds);
+            clipFromSeconds = Math.min(clipFromSeconds, seconds);
         } else if (before) {
-            clipUntil = seconds;
+            clipUntilSeconds = seconds;
         }
     }
 
     /** The half cycle is over. */
     void end(boolean clips, double seconds) {
         if (clips) {
-            clipUntil = seconds;
+            clipUntilSeconds = seconds;
         }
     }
 
     /** Time from which the zener conducts, s; POSITIVE_INFINITY for never. */
-    double clipFrom() {
-        return clipFrom;
+    double clipFromSeconds() {
+        return clipFromSeconds;
     }
 
     /** When the supply begins to collapse: the zener's last stop, or the supply's crest if it never conducts, s. */
-    double collapse() {
-        return clipFrom < Double.POSITIVE_INFINITY ? clipUntil : crestSeconds;
+    double collapseSeconds() {
+        return clipFromSeconds < Double.POSITIVE_INFINITY ? clipUntilSeconds : crestSeconds;
     }
 }

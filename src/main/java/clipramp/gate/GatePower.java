@@ -6,7 +6,7 @@ import clipramp.firing.Pulse;
 import clipramp.firing.Solution;
 import java.util.OptionalDouble;
 
-/** Gate power against its ratings (DEVELOPERS.md, The circuit laws). */
+/** Gate power against its ratings (DEVELOPERS.md, Margins). */
 public final class GatePower {
     private GatePower() {}
 
@@ -19,11 +19,6 @@ public final class GatePower {
             seconds += half.seconds();
         }
         return joules / seconds;
-    }
-
-    /** Mean gate power of pulses of one energy, W. */
-    public static double meanWatts(double gateJoules, double pulsesPerSecond) {
-        return gateJoules * pulsesPerSecond;
     }
 
     /** Width of the rectangle that has a pulse's gate energy and peak power, s; 0 without power. */
@@ -56,9 +51,9 @@ public final class GatePower {
      * Where a straight load line gives a gate a power: i with (E - R i) i = P. A gate between the two currents may be
      * given more than P.
      *
-     * @param openVolts open-circuit voltage of the drive, V
-     * @param ohms its resistance, ohm
-     * @param watts gate power, W
+     * @param openVolts E, open-circuit voltage of the drive, V, above 0
+     * @param ohms R, its resistance, ohm, above 0
+     * @param watts P, gate power, W, 0 or more
      * @return smaller and larger current, A; empty where the drive never gives as much
      */
     public static double[] currentsAtPower(double openVolts, double ohms, double watts) {
@@ -71,20 +66,15 @@ public final class GatePower {
     }
 
     /**
-     * Current at which a gate v = knee + slope i takes a power: what a series resistor must hold it to.
+     * Current at which a gate v = knee + slope i takes a power: what a series resistor must hold it to; the root of
+     * slope i² + knee i = P.
      *
-     * @param kneeVolts V
-     * @param slopeOhms ohm
-     * @param watts W
+     * @param kneeVolts V, 0 or more
+     * @param slopeOhms ohm, 0 or more
+     * @param watts gate power, W, above 0
      * @return A
      */
     public static double ampsAtPower(double kneeVolts, double slopeOhms, double watts) {
         return 2 * watts / (kneeVolts + Math.sqrt(kneeVolts * kneeVolts + 4 * slopeOhms * watts));
-    }
-
-    /** The drive resistance that lets a gate take no more than a power, ohm; negative where none is needed. */
-    public static double seriesOhmsForPower(double openVolts, double kneeVolts, double slopeOhms, double watts) {
-        double amps = ampsAtPower(kneeVolts, slopeOhms, watts);
-        return (openVolts - kneeVolts - slopeOhms * amps) / amps;
     }
 }

@@ -10,12 +10,12 @@ import clipramp.circuit.Zener;
 
 /**
  * The gate's voltage between pulses at its highest: smallest R_BB of the type, highest zener of the type, crest of the
- * line (DEVELOPERS.md, The circuit laws). V_B1q = V_S R1p/(R2 + R_BB + R1p), R1p = R1 parallel (R_G + R_GK), and the gate sees R_GK's
- * share of it.
+ * line. V_B1q = V_S R1p/(R2 + R_BB + R1p), R1p = R1 parallel (R_G + R_GK), and the gate sees R_GK's share of it
+ * (DEVELOPERS.md, The clipped supply, Peak point).
  *
- * @param volts gate voltage, V
- * @param supplyVolts V_S that it was computed with, V
- * @param interbaseOhms R_BB that it was computed with, ohm; NaN where no base bar stands in the way
+ * @param volts gate to cathode, V; 0 where no base bar stands in the way
+ * @param supplyVolts V_S that it was computed with, V to common; NaN likewise
+ * @param interbaseOhms R_BB that it was computed with, ohm; NaN likewise
  * @param baseOneOhms R1p, ohm; NaN likewise
  */
 public record StandingVoltage(double volts, double supplyVolts, double interbaseOhms, double baseOneOhms) {

@@ -11,18 +11,19 @@ import java.util.List;
 import java.util.Objects;
 
 /**
- * What the least willing thyristor of its type asks of a pulse at one junction temperature (DEVELOPERS.md, The circuit laws). A
+ * What the least willing thyristor of its type asks of a pulse at one junction temperature (DEVELOPERS.md, Margins). A
  * triac's is that of the worse of the two quadrants that the pulse's polarity uses.
  *
  * @param celsius junction temperature, °C
  * @param amps I_GT, A
- * @param volts V_GT, V
+ * @param volts V_GT, gate to cathode or main terminal one, V
  * @param extended whether the temperature lies outside the sheet's points
  * @param used quadrants that the pulse uses; empty for an SCR
  * @param missing those of them that the sheet does not specify
  */
 public record TriggerNeed(
         double celsius, double amps, double volts, boolean extended, List<Quadrant> used, List<Quadrant> missing) {
+    /** Keeps copies of the lists. */
     public TriggerNeed {
         used = List.copyOf(used);
         missing = List.copyOf(missing);

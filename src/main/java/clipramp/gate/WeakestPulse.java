@@ -13,7 +13,8 @@ import java.util.OptionalDouble;
 
 /**
  * The design that a drive margin is computed on: the weakest trigger device of its type, driving a gate that stays at
- * V_GT whatever it is given. Its pulse is solved by the same engine as any other, so nothing is approximated.
+ * V_GT whatever it is given (DEVELOPERS.md, Margins). Its pulse is solved by the same engine as any other, so nothing is
+ * approximated.
  */
 public final class WeakestPulse {
     /** Slope of the gate held at V_GT: a tenth of a volt at ten amperes, nothing beside any gate drive. */
@@ -25,7 +26,7 @@ public final class WeakestPulse {
      * The same design with the weakest trigger device and a gate held at a voltage.
      *
      * @param design the design
-     * @param gateVolts voltage that the gate is held at once it conducts, V
+     * @param gateVolts voltage that the gate is held at once it conducts, to cathode or main terminal one, V
      */
     public static Design intoGateHeldAt(Design design, double gateVolts) {
         Design weakest = withWeakestDevice(design);
@@ -39,7 +40,7 @@ public final class WeakestPulse {
      * The same design with the weakest trigger device of its type: calibrated on the smallest V_OB1 of the sheet, or of
      * the largest forward voltage (programmable). Where the sheet gives neither, the design as it is.
      */
-    public static Design withWeakestDevice(Design design) {
+    static Design withWeakestDevice(Design design) {
         if (design.trigger() instanceof Trigger.UnijunctionTrigger trigger) {
             return trigger.device()
                     .baseOnePulse()

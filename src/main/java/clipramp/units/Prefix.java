@@ -34,6 +34,15 @@ enum Prefix {
         return exponent;
     }
 
+    /** The prefix that leaves one to three digits before the dot of a value whose first digit counts 10^power. */
+    static Prefix engineering(int power) {
+        Prefix greatest = PICO;
+        for (Prefix prefix : values()) {
+            greatest = prefix.exponent <= power ? prefix : greatest;
+        }
+        return greatest;
+    }
+
     /** The prefix of a symbol in either spelling; K counts as kilo only where the unit is the ohm. */
     static Optional<Prefix> of(String text, Unit unit) {
         if (text.equals("K")) {

@@ -13,12 +13,7 @@ import java.util.OptionalDouble;
  * @param ratedVolts rated voltage, V, where written
  */
 public record Quantity(
-        double value,
-        Unit unit,
-        double minus,
-        double plus,
-        OptionalDouble ratedWatts,
-        OptionalDouble ratedVolts) {
+        double value, Unit unit, double minus, double plus, OptionalDouble ratedWatts, OptionalDouble ratedVolts) {
 
     /** Whether it may lie off either way. */
     public boolean hasTolerance() {

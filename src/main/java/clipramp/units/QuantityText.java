@@ -75,10 +75,8 @@ public final class QuantityText {
             return "0 " + unit.symbol();
         }
         int leading = value.precision() - value.scale() - 1;
-        int exponent =
-                Math.max(Prefix.PICO.exponent(), Math.min(Prefix.GIGA.exponent(), Math.floorDiv(leading, 3) * 3));
-        Prefix prefix = Prefix.values()[(exponent - Prefix.PICO.exponent()) / 3];
-        return plain(value.scaleByPowerOfTen(-exponent)) + " " + prefix.symbol() + unit.symbol();
+        Prefix prefix = Prefix.engineering(leading);
+        return plain(value.scaleByPowerOfTen(-prefix.exponent())) + " " + prefix.symbol() + unit.symbol();
     }
 
     /** Plain digits while they stay readable, an exponent beyond. */

@@ -112,8 +112,9 @@ final class Refusals {
     RefusedQuantityException marking(Matcher marking) {
         int power = marking.group(2).charAt(0) - '0';
         int exponent = power == 9 ? -1 : power == 8 ? -2 : power;
-        double farads =
-                new BigDecimal(marking.group(1)).scaleByPowerOfTen(exponent - 12).doubleValue();
+        double farads = new BigDecimal(marking.group(1))
+                .scaleByPowerOfTen(exponent - 12)
+                .doubleValue();
         String tolerance = ToleranceLetter.fraction(marking.group(3)).stream()
                 .mapToObj(t -> " ±" + QuantityText.format(t, Unit.FRACTION))
                 .collect(Collectors.joining());
@@ -126,7 +127,7 @@ final class Refusals {
     RefusedQuantityException codeOutOfPlace(String number, String letter) {
         String prefix = letter.equals("R") ? "" : letter;
         return refusal("Letters as decimal points are for resistors, capacitors and inductors: " + number + " " + prefix
-                        + ascii(unit()) + "?");
+                + ascii(unit()) + "?");
     }
 
     RefusedQuantityException unknownToleranceLetter(String letter) {

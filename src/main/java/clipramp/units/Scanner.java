@@ -100,6 +100,6 @@ final class Scanner {
     }
 
     private static boolean isNumberSign(char sign) {
-        return sign >= '0' && sign <= '9' || sign == '.' || sign == ',';
+        return (sign >= '0' && sign <= '9') || sign == '.' || sign == ',';
     }
 }

@@ -71,7 +71,7 @@ final class Trailer {
         }
         var asWatts = Unit.WATT.match(word).filter(m -> !m.spelling().isEmpty());
         var asVolts = Unit.VOLT.match(word).filter(m -> !m.spelling().isEmpty());
-        if (!value.expected().ratings() || asWatts.isEmpty() && asVolts.isEmpty()) {
+        if (!value.expected().ratings() || (asWatts.isEmpty() && asVolts.isEmpty())) {
             throw refusals.trailing(number + rest, value);
         }
         if (asWatts.isPresent()) {
@@ -113,8 +113,7 @@ final class Trailer {
         }
         Unit unit = value.expected().unit();
         Unit.Match match = unit.match(word)
-                .orElseThrow(() ->
-                        refusals.because("a tolerance in % or " + unit.symbol(), "±" + number + " %?"));
+                .orElseThrow(() -> refusals.because("a tolerance in % or " + unit.symbol(), "±" + number + " %?"));
         BigDecimal absolute = new BigDecimal(number).scaleByPowerOfTen(match.exponent());
         if (value.decimal().signum() == 0) {
             throw refusals.because("no tolerance on zero", "Leave the tolerance out.");
