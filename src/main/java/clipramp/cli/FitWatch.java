@@ -1,6 +1,6 @@
 package clipramp.cli;
 
-import clipramp.spread.Watch;
+import clipramp.runs.Watch;
 import java.util.Locale;
 
 /**

@@ -43,7 +43,7 @@ final class SpreadText {
                         + result.options().seed());
         result.wanted().ifPresent(y -> out.line("  reach what is wanted   " + words(y)));
         result.margins().ifPresent(y -> out.line("  fail no margin         " + words(y)));
-        result.failures().forEach((id, share) -> out.line("    " + SpreadWords.percent(share) + " fail " + title(id)));
+        result.failures().forEach((id, share) -> out.line("    " + SpreadWords.ofUnits(share) + " fail " + title(id)));
         bands();
         worstCase();
         influences();
@@ -59,8 +59,8 @@ final class SpreadText {
     }
 
     private static String words(Yield yield) {
-        return SpreadWords.percent(yield.share()) + "  (" + yield.held() + " of " + yield.of() + "; 95 % interval "
-                + SpreadWords.percent(yield.low()) + " to " + SpreadWords.percent(yield.high()) + ")";
+        return SpreadWords.ofUnits(yield.share()) + "  (" + yield.held() + " of " + yield.of() + "; 95 % interval "
+                + SpreadWords.ofUnits(yield.low()) + " to " + SpreadWords.ofUnits(yield.high()) + ")";
     }
 
     private void bands() {
@@ -85,10 +85,10 @@ final class SpreadText {
                     share(p.fraction().get(LOW)),
                     share(p.fraction().get(MIDDLE)),
                     share(p.fraction().get(HIGH)),
-                    share(p.stalls()),
-                    share(p.latchedOn()),
-                    share(p.endPulse()),
-                    share(p.misfires()));
+                    SpreadWords.unitsInPercent(p.stalls()),
+                    SpreadWords.unitsInPercent(p.latchedOn()),
+                    SpreadWords.unitsInPercent(p.endPulse()),
+                    SpreadWords.unitsInPercent(p.misfires()));
         }
         out.line("");
         out.strongLine("By knob position", "  (so many of a hundred units lie under each figure)");
@@ -151,7 +151,7 @@ final class SpreadText {
         }
         out.line("");
         out.strongLine("What would help", "  (yield against what is wanted, one change at a time)");
-        helping.forEach(r -> out.line("  " + SpreadWords.percent(r.yield().share()) + "  (+"
+        helping.forEach(r -> out.line("  " + SpreadWords.ofUnits(r.yield().share()) + "  (+"
                 + SpreadWords.percent(r.gain()) + ")  " + r.change()));
     }
 

@@ -1,7 +1,7 @@
 package clipramp.cli;
 
-import clipramp.spread.Watch;
-import java.util.Locale;
+import clipramp.runs.Watch;
+import clipramp.spread.SpreadWords;
 import java.util.concurrent.CountDownLatch;
 import java.util.concurrent.TimeUnit;
 import java.util.concurrent.atomic.AtomicBoolean;
@@ -45,9 +45,7 @@ final class SpreadWatch implements Watch, AutoCloseable {
             return;
         }
         lastLine = now;
-        double rate = done / ((now - began) * 1e-9);
-        String line = String.format(
-                Locale.ROOT, "%d of %d units, %.0f a second, %.0f s left", done, of, rate, (of - done) / rate);
+        String line = SpreadWords.progress(done, of, (now - began) * 1e-9);
         session.err().exactly(CLEARED + line);
         session.err().flush();
     }

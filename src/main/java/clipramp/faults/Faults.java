@@ -6,6 +6,7 @@ import clipramp.circuit.Designators;
 import clipramp.circuit.RefusedCircuit;
 import clipramp.firing.Firing;
 import clipramp.firing.Pulse;
+import clipramp.runs.Watch;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
@@ -21,40 +22,25 @@ public final class Faults {
 
     private Faults() {}
 
-    /** Follows the work and may end it. */
-    public interface Watch {
-        /** Looks on in silence. */
-        Watch NONE = new Watch() {
-            @Override
-            public void solved(int done, int of) {}
-
-            @Override
-            public boolean isCancelled() {
-                return false;
-            }
-        };
-
-        /** So many faults of so many are worked out. */
-        void solved(int done, int of);
-
-        boolean isCancelled();
-    }
-
     /**
-     * @param design the design
+     * Every single fault of a design, worked out.
+     *
+     * @param design a sound design
      * @param condition line and temperature that all figures hold at
+     * @throws RefusedCircuit where the healthy circuit cannot be solved
      */
     public static FaultSheet of(Design design, Condition condition) {
         return of(design, condition, Watch.NONE);
     }
 
     /**
-     * The same, told of as it goes on.
+     * The same, watched.
      *
-     * @param design the design
+     * @param design a sound design
      * @param condition line and temperature that all figures hold at
-     * @param watch looked at after each fault
-     * @throws CancellationException where the watch says so
+     * @param watch told of faults worked out, of all that there are; may end it
+     * @throws RefusedCircuit where the healthy circuit cannot be solved
+     * @throws CancellationException where the watch cancelled
      */
     public static FaultSheet of(Design design, Condition condition, Watch watch) {
         FaultSolver solver = new FaultSolver(design, condition);
@@ -63,10 +49,7 @@ public final class Faults {
         List<FaultSheet.NotComputed> refused = new ArrayList<>();
         List<Fault> all = list(design, condition);
         for (int i = 0; i < all.size(); i++) {
-            watch.solved(i, all.size());
-            if (watch.isCancelled()) {
-                throw new CancellationException("cancelled after " + i + " faults");
-            }
+            watch.step("working out the faults", i, all.size());
             Fault fault = all.get(i);
             try {
                 effects.add(solver.effect(fault, healthy));

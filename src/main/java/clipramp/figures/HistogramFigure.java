@@ -22,12 +22,12 @@ public record HistogramFigure(Histogram histogram) implements Figure {
 
     @Override
     public String sentence() {
-        int[] counts = histogram.counts();
+        List<Integer> counts = histogram.counts();
         int fullest = 0;
-        for (int i = 1; i < counts.length; i++) {
-            fullest = counts[i] > counts[fullest] ? i : fullest;
+        for (int i = 1; i < counts.size(); i++) {
+            fullest = counts.get(i) > counts.get(fullest) ? i : fullest;
         }
-        return "Of " + histogram.units() + " units drawn, most (" + counts[fullest] + ") get between "
+        return "Of " + histogram.units() + " units drawn, most (" + counts.get(fullest) + ") get between "
                 + Numerals.plain(edge(fullest)) + " % and " + Numerals.plain(edge(fullest + 1)) + " % of full power.";
     }
 
@@ -37,10 +37,10 @@ public record HistogramFigure(Histogram histogram) implements Figure {
 
     @Override
     public NumberTable numbers() {
-        int[] counts = histogram.counts();
+        List<Integer> counts = histogram.counts();
         List<List<String>> rows = new ArrayList<>();
-        for (int i = 0; i < counts.length; i++) {
-            rows.add(List.of(Numerals.plain(edge(i)), Numerals.plain(edge(i + 1)), Integer.toString(counts[i])));
+        for (int i = 0; i < counts.size(); i++) {
+            rows.add(List.of(Numerals.plain(edge(i)), Numerals.plain(edge(i + 1)), Integer.toString(counts.get(i))));
         }
         return new NumberTable(List.of("from % of full power", "to %", "units"), rows);
     }
@@ -63,11 +63,11 @@ public record HistogramFigure(Histogram histogram) implements Figure {
         Plot plot = new Plot(g, style, across, up);
         plot.placeWithin(width, height, 52);
         plot.draw();
-        int[] counts = histogram.counts();
-        for (int i = 0; i < counts.length; i++) {
+        List<Integer> counts = histogram.counts();
+        for (int i = 0; i < counts.size(); i++) {
             double from = plot.x(edge(i));
             double to = plot.x(edge(i + 1));
-            double high = plot.y(counts[i]);
+            double high = plot.y(counts.get(i));
             plot.pen()
                     .fill(
                             palette.load(),

@@ -10,6 +10,11 @@ public record Accuracy(double relative, double absolute) {
     /** Standard deviations to either side that hold 95 % of a normal distribution. */
     static final double SIGMAS = 1.959963984540054;
 
+    /**
+     * Refuses an accuracy that no instrument has.
+     *
+     * @throws IllegalArgumentException for a negative or infinite one, and for one of nothing at all
+     */
     public Accuracy {
         if (!(relative >= 0 && absolute >= 0 && relative + absolute > 0)
                 || Double.isInfinite(relative)
@@ -18,17 +23,17 @@ public record Accuracy(double relative, double absolute) {
         }
     }
 
-    /** A share of the reading. */
+    /** A share of the reading, above 0. */
     public static Accuracy share(double relative) {
         return new Accuracy(relative, 0);
     }
 
-    /** An amount in the reading's SI unit. */
+    /** An amount in the reading's SI unit, above 0. */
     public static Accuracy amount(double absolute) {
         return new Accuracy(0, absolute);
     }
 
-    /** Standard deviation at a value. */
+    /** Standard deviation at a value, both in its SI unit. */
     double deviation(double value) {
         return (relative * Math.abs(value) + absolute) / SIGMAS;
     }

@@ -7,7 +7,7 @@ import java.util.Optional;
  * Everything that was read at one setting.
  *
  * @param line where it stands in its file, from 1
- * @param setting knob or resistance
+ * @param setting what the knob or the bench resistor stood at
  * @param lineVolts line voltage at that moment, rms, V, where it was read
  * @param readings at least one
  */
@@ -15,7 +15,7 @@ public record BenchLine(int line, Setting setting, Optional<LineVolts> lineVolts
     /**
      * The line voltage as read.
      *
-     * @param volts rms, V
+     * @param volts rms, V, above 0
      * @param accuracy how far it may be off
      * @param column what stood over it
      */
@@ -24,6 +24,11 @@ public record BenchLine(int line, Setting setting, Optional<LineVolts> lineVolts
         public static final Accuracy USUAL = Accuracy.share(0.01);
     }
 
+    /**
+     * Refuses a line that tells nothing.
+     *
+     * @throws IllegalArgumentException without a reading
+     */
     public BenchLine {
         readings = List.copyOf(readings);
         if (readings.isEmpty()) {

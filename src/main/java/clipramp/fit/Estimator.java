@@ -1,5 +1,8 @@
 package clipramp.fit;
 
+import java.util.Arrays;
+import org.apache.commons.math3.exception.TooManyEvaluationsException;
+import org.apache.commons.math3.exception.TooManyIterationsException;
 import org.apache.commons.math3.fitting.leastsquares.LeastSquaresFactory;
 import org.apache.commons.math3.fitting.leastsquares.LeastSquaresOptimizer.Optimum;
 import org.apache.commons.math3.fitting.leastsquares.LevenbergMarquardtOptimizer;
@@ -54,7 +57,7 @@ final class Estimator {
      */
     double[] robust(double[]... starts) {
         boolean[] all = new boolean[problem.observed().size()];
-        java.util.Arrays.fill(all, true);
+        Arrays.fill(all, true);
         Function loss = new Function(all, true);
         double[] best = starts[0];
         double lowest = Double.POSITIVE_INFINITY;
@@ -90,8 +93,7 @@ final class Estimator {
                     true,
                     within));
             return within.validate(optimum.getPoint()).toArray();
-        } catch (org.apache.commons.math3.exception.TooManyIterationsException
-                | org.apache.commons.math3.exception.TooManyEvaluationsException stuck) {
+        } catch (TooManyIterationsException | TooManyEvaluationsException stuck) {
             throw new UnsettledFitException(stuck);
         }
     }

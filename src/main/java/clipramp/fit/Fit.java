@@ -3,7 +3,7 @@ package clipramp.fit;
 import clipramp.circuit.Design;
 import clipramp.circuit.Load;
 import clipramp.fit.Fitted.Knowledge;
-import clipramp.spread.Watch;
+import clipramp.runs.Watch;
 import clipramp.units.Unit;
 import java.util.ArrayList;
 import java.util.Arrays;
@@ -36,11 +36,13 @@ public final class Fit {
     private Fit() {}
 
     /**
+     * The unit that explains the readings best (DEVELOPERS.md, From readings to parts).
+     *
      * @param design a sound design
      * @param readings what was read of one unit built to it
-     * @param watch is told of progress and may cancel
+     * @param watch told of fits made and one more, for nobody knows how many there will be; may cancel
      * @throws UnsettledFitException where no values can be found
-     * @throws java.util.concurrent.CancellationException where the watch cancelled
+     * @throws CancellationException where the watch cancelled
      * @throws IllegalArgumentException for an average-reading meter across an inductive load, which is not computed
      */
     public static FitResult run(Design design, Readings readings, Watch watch) {

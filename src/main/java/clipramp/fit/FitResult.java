@@ -2,6 +2,7 @@ package clipramp.fit;
 
 import clipramp.circuit.PotLaw;
 import java.util.List;
+import java.util.Optional;
 
 /**
  * A unit as built.
@@ -29,6 +30,7 @@ public record FitResult(
     /** Nearer to one half than this the exponential loses its digits. */
     private static final double LINEAR = 1e-6;
 
+    /** Keeps the lists as they are. */
     public FitResult {
         values = List.copyOf(values);
         untouched = List.copyOf(untouched);
@@ -44,7 +46,7 @@ public record FitResult(
                 .toList();
     }
 
-    /** Values that the readings tell. */
+    /** Values of which the readings leave half the uncertainty or less. */
     public List<Fitted> told() {
         return values.stream()
                 .filter(value -> value.knowledge() == Fitted.Knowledge.TOLD)
@@ -57,7 +59,8 @@ public record FitResult(
     }
 
     /**
-     * The one family that holds every law but a table, by its track share at half rotation.
+     * The one family that holds every law but a table, by its track share at half rotation. Nearer to linear than a millionth
+     * it is linear.
      *
      * @param halfShare above 0, below 1; 0.5 is linear
      */
@@ -68,8 +71,8 @@ public record FitResult(
         return halfShare < 0.5 ? new PotLaw.Logarithmic(halfShare) : new PotLaw.ReverseLogarithmic(1 - halfShare);
     }
 
-    /** The value of a design key. */
-    public java.util.Optional<Fitted> value(String path) {
+    /** The value at a design key, such as ramp.capacitor; empty where it does not differ from unit to unit. */
+    public Optional<Fitted> value(String path) {
         return values.stream().filter(value -> value.path().equals(path)).findFirst();
     }
 }

@@ -18,29 +18,29 @@ public final class FitWords {
 
     private FitWords() {}
 
-    /** A value with as many figures as a fit deserves. */
+    /** A value in SI with four figures and its unit: as many as a fit deserves. */
     public static String amount(double value, Unit unit) {
         return QuantityText.format(value, unit, FIGURES);
     }
 
-    /** A share in percent with its sign. */
+    /** A share in percent, with its sign and one decimal. */
     public static String signedPercent(double share) {
         String text = QuantityText.fixed(100 * share, 1);
         return (text.startsWith("-") || text.equals("0.0") ? "" : "+") + text + " %";
     }
 
-    /** How a value lies to its limits, and whether the limits are ours. */
+    /** How a value lies to its limits, in a few words that also say where the limits are ours. */
     public static String verdict(Fitted value) {
         String word = value.within().word();
         return value.limitsAssumed() && value.within() != Within.UNKNOWN ? word + " (ours)" : word;
     }
 
-    /** How far a reading is off the unit that was found, in standard deviations, and whether it was left out. */
+    /** How far a reading is off the unit that was found: standard deviations with one decimal, and "out" where it was left out. */
     public static String deviations(Residual residual) {
         return QuantityText.fixed(residual.deviations(), 1) + (residual.belongs() ? "" : " out");
     }
 
-    /** A reading that does not belong, without its place. */
+    /** What is said of a reading that does not belong, after its place. */
     public static String stranger(Residual stranger) {
         return "read " + amount(stranger.read(), stranger.unit()) + "; the others say "
                 + amount(stranger.shown(), stranger.unit()) + ", "
@@ -96,7 +96,7 @@ public final class FitWords {
                 scatter);
     }
 
-    /** A number of things. */
+    /** A number of things, with their plural. */
     public static String count(int number, String what) {
         return number + " " + what + (number == 1 ? "" : "s");
     }

@@ -51,10 +51,12 @@ public record Fitted(
             this.word = word;
         }
 
+        /** The words that stand for it in an answer. */
         public String word() {
             return word;
         }
 
+        /** By the share of its standard deviation that is left, 0..1. */
         static Knowledge of(double kept) {
             if (kept <= HALF) {
                 return TOLD;
@@ -65,9 +67,13 @@ public record Fitted(
 
     /** How the interval lies to the limits. */
     public enum Within {
+        /** All of it is allowed. */
         INSIDE("within tolerance"),
+        /** Some of it is allowed. */
         PERHAPS("at its limit"),
+        /** None of it is allowed. */
         OUTSIDE("outside tolerance"),
+        /** The readings do not tell the value. */
         UNKNOWN("cannot be told");
 
         private final String word;
@@ -76,6 +82,7 @@ public record Fitted(
             this.word = word;
         }
 
+        /** The words that stand for it in an answer. */
         public String word() {
             return word;
         }

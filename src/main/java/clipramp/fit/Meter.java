@@ -12,6 +12,7 @@ public enum Meter {
     LOAD_TRUE_RMS("load voltage, true rms", Unit.VOLT, new Accuracy(0.01, 0.2)),
     /** Across the load, an instrument that shows 1.1107 times the mean of the rectified wave. */
     LOAD_AVERAGE_READING("load voltage, average-reading", Unit.VOLT, new Accuracy(0.015, 0.2)),
+    /** Real power that the load takes, by a wattmeter. */
     LOAD_WATTS("load power", Unit.WATT, new Accuracy(0.02, 0.5)),
     /** Highest voltage at base one (cathode of a programmable device) to common. */
     BASE_ONE_PEAK("base-one peak", Unit.VOLT, new Accuracy(0.03, 0.05)),
@@ -32,17 +33,17 @@ public enum Meter {
         this.usual = usual;
     }
 
-    /** What it is called. */
+    /** What is read, in words. */
     public String words() {
         return words;
     }
 
-    /** SI unit; radians for angles. */
+    /** SI unit of the reading; radians for angles. */
     public Unit unit() {
         return unit;
     }
 
-    /** Accuracy where none is said. */
+    /** The accuracy that is taken where none is said. */
     public Accuracy usual() {
         return usual;
     }

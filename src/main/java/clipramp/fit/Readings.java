@@ -11,6 +11,11 @@ import java.util.Optional;
  * @param lines at least one
  */
 public record Readings(String name, double celsius, List<BenchLine> lines) {
+    /**
+     * Refuses a session without a line.
+     *
+     * @throws IllegalArgumentException without a line
+     */
     public Readings {
         lines = List.copyOf(lines);
         if (lines.isEmpty()) {
@@ -23,12 +28,12 @@ public record Readings(String name, double celsius, List<BenchLine> lines) {
         return lines.stream().mapToInt(line -> line.readings().size()).sum();
     }
 
-    /** Whether an instrument was read at all. */
+    /** Whether an instrument was read on any line. */
     public boolean has(Meter meter) {
         return lines.stream().flatMap(line -> line.readings().stream()).anyMatch(reading -> reading.meter() == meter);
     }
 
-    /** The same with this line voltage, rms in V, on every line that has none of its own. */
+    /** The same with this line voltage, rms in V, above 0, on every line that has none of its own; its accuracy is the usual one. */
     public Readings onLine(double volts) {
         BenchLine.LineVolts all = new BenchLine.LineVolts(volts, BenchLine.LineVolts.USUAL, "--line");
         return new Readings(

@@ -14,11 +14,19 @@ public record Setting(Kind kind, double value, Accuracy accuracy, String column)
 
     /** What was set. */
     public enum Kind {
+        /** The knob, by its position. */
         KNOB,
+        /** A bench resistor in place of the whole R_E. */
         RAMP_OHMS,
+        /** Nothing: the ramp is fixed. */
         FIXED
     }
 
+    /**
+     * Refuses what cannot be set.
+     *
+     * @throws IllegalArgumentException for a knob position outside 0..1 or an R_E that is not above zero and finite
+     */
     public Setting {
         if (kind == Kind.KNOB && !(value >= 0 && value <= 1)) {
             throw new IllegalArgumentException("a knob position lies in 0..1, is " + value);

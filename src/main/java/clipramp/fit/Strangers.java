@@ -1,8 +1,7 @@
 package clipramp.fit;
 
-import clipramp.spread.Watch;
+import clipramp.runs.Watch;
 import java.util.Arrays;
-import java.util.concurrent.CancellationException;
 import org.apache.commons.math3.distribution.NormalDistribution;
 
 /**
@@ -72,10 +71,7 @@ final class Strangers {
     }
 
     private void tick() {
-        if (watch.isCancelled()) {
-            throw new CancellationException("the fit was cancelled");
-        }
-        watch.progress(steps, ++steps + 1);
+        watch.step("the fit", steps, ++steps + 1);
     }
 
     /** The farthest readings of the robust pass, no more than may be set aside. */

@@ -35,6 +35,7 @@ record Unknown(
     /** Puts a value into a unit. */
     @FunctionalInterface
     interface Slot {
+        /** Puts a value, SI, where it belongs. */
         void set(TriedUnit unit, double value);
     }
 

@@ -21,6 +21,7 @@ final class Unknowns {
 
     private static final double LOGARITHMIC_STRAYS = 0.3;
     private static final String PULSE_PATH = "trigger.device.base-one-pulse";
+    /** Beyond this a track share at half rotation is no pot's. */
     private static final double LEAST_SHARE = 0.01;
 
     /** Limits of parts and figures that state none, as shares: common practice. */
@@ -30,6 +31,7 @@ final class Unknowns {
     private static final double ZENER = 0.05;
     private static final double STANDOFF = 0.15;
     private static final double DROP = 0.2;
+    /** The least that a trimmer can be set to, as a share of its mid-track. */
     private static final double LEAST_SETTING = 0.02;
 
     private final List<Unknown> unknowns = new ArrayList<>();

@@ -1,6 +1,6 @@
 package clipramp.fit;
 
-/** The search for the values that fit best did not come to rest. */
+/** The search for the values that fit best did not come to rest: as a rule the readings are of another design. */
 public final class UnsettledFitException extends RuntimeException {
     private static final long serialVersionUID = 1L;
 

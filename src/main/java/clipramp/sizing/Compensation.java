@@ -28,7 +28,9 @@ import org.apache.commons.math3.optim.univariate.UnivariateObjectiveFunction;
  * @param rules the published rules, in their order
  */
 public record Compensation(Choice flattest, List<Choice> rules) {
+    /** Solved from the coldest to the hottest, both included. */
     private static final int TEMPERATURES = 5;
+
     private static final double LEAST_OHMS = 10;
     private static final double MOST_OHMS = 10_000;
     private static final int SCANNED = 25;
@@ -39,17 +41,24 @@ public record Compensation(Choice flattest, List<Choice> rules) {
     private static final double LOG_ACCURACY = 1e-4;
 
     /**
+     * One base-two resistor and what it leaves.
+     *
      * @param rule where it comes from
      * @param ohms base-two resistor, ohm
-     * @param driftRad difference between the latest and the earliest firing angle over the temperatures, rad
+     * @param driftRad difference between the latest and the earliest firing angle over the temperatures, rad, 0 or more
      */
     public record Choice(String rule, double ohms, double driftRad) {}
 
+    /** Keeps the rules as they are. */
     public Compensation {
         rules = List.copyOf(rules);
     }
 
-    /** The comparison for a design; empty for a programmable device, which has no base two. */
+    /**
+     * The comparison for a sound design; empty for a programmable device, which has no base two.
+     *
+     * <p>The flattest resistor is looked for between 10 ohm and 10 kohm, to a ten-thousandth of itself.
+     */
     public static Optional<Compensation> of(Design design) {
         if (!(design.trigger() instanceof UnijunctionTrigger trigger)) {
             return Optional.empty();
@@ -74,7 +83,7 @@ public record Compensation(Choice flattest, List<Choice> rules) {
         return Optional.of(new Compensation(flattest(design), rules));
     }
 
-    /** How far the firing angle of a design as it stands moves between the coldest and the hottest, rad. */
+    /** How far the firing angle of a design as it stands moves between the coldest and the hottest, rad; NaN without a base two. */
     public static double driftRad(Design design) {
         return design.trigger() instanceof UnijunctionTrigger u
                 ? driftRad(design, u.baseTwo().value())

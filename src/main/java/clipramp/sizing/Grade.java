@@ -87,17 +87,17 @@ record Grade(long failing, long tight, long missing, long deadTravel, long heat,
     }
 
     /** What the firing circuit turns into heat at mid-knob, W. */
-    static double watts(Dissipation d) {
-        return d.dropperWatts()
-                + d.zenerWatts()
-                + d.baseOneWatts()
-                + d.baseTwoWatts()
-                + d.lowerWatts()
-                + d.rampWatts()
-                + d.deviceWatts()
-                + d.gateWatts()
-                + d.gateSeriesWatts()
-                + d.gateShuntWatts();
+    static double watts(Dissipation heat) {
+        return heat.dropperWatts()
+                + heat.zenerWatts()
+                + heat.baseOneWatts()
+                + heat.baseTwoWatts()
+                + heat.lowerWatts()
+                + heat.rampWatts()
+                + heat.deviceWatts()
+                + heat.gateWatts()
+                + heat.gateSeriesWatts()
+                + heat.gateShuntWatts();
     }
 
     boolean holds() {

@@ -29,15 +29,16 @@ public record KnobShape(
         List<Double> values) {
     /** How far a pot turns, degrees (common practice for single-turn pots). */
     public static final double ROTATION_DEGREES = 270;
-
+    /** One for every two degrees. */
     private static final int STEPS = 135;
+    /** Share of full that nobody sees or feels: half a per cent. */
     private static final double UNNOTICED = 0.005;
 
     /** What a knob sets. */
     public enum What {
         /** Share of full power. */
         POWER,
-        /** Share of full light of a filament lamp: the voltage's share to the power 3.4 (handbook). */
+        /** Share of full light of a filament lamp: the voltage's share to the power 3.4 (lamp handbooks; from memory). */
         LIGHT;
 
         private static final double LIGHT_EXPONENT = 3.4;
@@ -47,11 +48,12 @@ public record KnobShape(
         }
     }
 
+    /** Keeps the values as they are. */
     public KnobShape {
         values = List.copyOf(values);
     }
 
-    /** A design's knob, every position solved. */
+    /** The knob of a sound design, its power solved at every two degrees of rotation. */
     public static KnobShape of(Design design, What what) {
         Condition condition = design.nominalCondition();
         double full = condition.lineVolts() * design.line().rmsFactor();

@@ -4,7 +4,7 @@ import clipramp.circuit.Design;
 import clipramp.circuit.Part;
 import clipramp.circuit.Pot;
 import clipramp.circuit.PotLaw;
-import clipramp.spread.Watch;
+import clipramp.runs.Watch;
 import clipramp.units.PreferredSeries;
 import java.util.ArrayList;
 import java.util.Comparator;
@@ -39,6 +39,11 @@ public final class KnobShaping {
     private static final double WIDER = 6;
     private static final double SAME_LACK = 1e-9;
 
+    /**
+     * @param shape a candidate and how straight its knob is
+     * @param lack how far it misses what is wanted, as {@link Timing} counts it
+     * @param parts how many parts it takes more than the plainest
+     */
     private record Shaped(KnobShape shape, double lack, int parts) {}
 
     private KnobShaping() {}
@@ -58,7 +63,11 @@ public final class KnobShaping {
     /**
      * The same, watched.
      *
-     * @param watch told of knobs drawn, of all that there are; may end it
+     * @param request what is open: law and shunt are always chosen, the fixed resistor and the track where they are open
+     * @param design the design as sized
+     * @param what power or light
+     * @param watch told of knobs worked out, of all that there are; may end it
+     * @return the shape with its design; the design's own where it has no pot
      * @throws CancellationException where the watch cancelled
      */
     public static KnobShape straightest(SizingRequest request, Design design, KnobShape.What what, Watch watch) {
@@ -70,14 +79,12 @@ public final class KnobShaping {
                 new PowerCurve(design, what, reach.highestTo() / WIDER, Math.max(reach.lowestFrom(), 1) * WIDER);
         List<Design> candidates = candidates(request, design, reach);
         List<Shaped> shapes = new ArrayList<>();
-        for (Design d : candidates) {
-            if (watch.isCancelled()) {
-                throw new CancellationException("the shaping was cancelled");
-            }
+        for (Design candidate : candidates) {
             if (shapes.size() % TOLD_EVERY == 0) {
-                watch.progress(shapes.size(), candidates.size());
+                watch.step("the shaping", shapes.size(), candidates.size());
             }
-            shapes.add(new Shaped(KnobShape.of(d, what, curve), Timing.lack(d, reach), parts(d)));
+            shapes.add(
+                    new Shaped(KnobShape.of(candidate, what, curve), Timing.lack(candidate, reach), parts(candidate)));
         }
         Optional<Shaped> best = shapes.stream()
                 .min(Comparator.comparingLong(

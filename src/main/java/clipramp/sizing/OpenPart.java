@@ -8,24 +8,43 @@ import java.util.stream.Collectors;
 
 /** What sizing can decide, in the order of the signal. */
 public enum OpenPart {
+    /** The zener that clips the supply. */
     ZENER("clip.zener", "clip"),
+    /** The dropping resistor. */
     DROPPER("clip.dropper", "clip"),
+    /** The ramp's capacitor C_E. */
     CAPACITOR("ramp.capacitor", "ramp"),
+    /** The fixed resistor of R_E. */
     FIXED("ramp.fixed", "ramp"),
+    /** The pot's track. */
     TRACK("ramp.pot.track", "ramp"),
+    /** The pot's law. */
     LAW("ramp.pot.law", "ramp"),
+    /** The resistor across the pot. */
     ACROSS("ramp.pot.shunt", "ramp"),
+    /** The trimmer in series with the fixed resistor. */
     TRIM_HIGH("ramp.trim-high", "ramp"),
+    /** The trimmer in series with the resistor across the pot. */
     TRIM_LOW("ramp.trim-low", "ramp"),
+    /** The unijunction, or the programmable device in its place. */
     TRIGGER_DEVICE("trigger.device", "trigger"),
+    /** The resistor from base one, or from the cathode, to common. */
     BASE_ONE("trigger.base-one", "bases"),
+    /** The resistor from the supply to base two. */
     BASE_TWO("trigger.base-two", "bases"),
+    /** The divider's resistor from the supply to a programmable device's gate. */
     UPPER("trigger.upper", "bases"),
+    /** The divider's resistor from that gate to common. */
     LOWER("trigger.lower", "bases"),
+    /** The resistor in series with the thyristor's gate. */
     SERIES("gate.series", "gate"),
+    /** The resistor from gate to cathode. */
     SHUNT("gate.shunt", "gate"),
+    /** The pulse transformer. */
     TRANSFORMER("gate.transformer", "gate"),
+    /** The thyristor's type. */
     THYRISTOR("thyristor.device", "thyristor"),
+    /** The thyristor's heat sink, by its case-to-ambient resistance. */
     SINK("thyristor.case-to-ambient", "thyristor");
 
     private final String key;

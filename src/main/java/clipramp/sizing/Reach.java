@@ -51,7 +51,7 @@ record Reach(
 
     private static final double LATE_RAD = Math.toRadians(160);
 
-    /** A conducting programmable device at its valley, and the supply of its sheet (model: trigger device), V. */
+    /** A conducting programmable device at its valley, and its sheet's supply (DEVELOPERS.md, The conducting device), V. */
     private static final double JUNCTION_VOLTS = 0.6;
 
     private static final double PROGRAMMABLE_TEST_VOLTS = 10;
@@ -59,6 +59,7 @@ record Reach(
     /** Firing angle at one R_E, and how it moves. */
     private record Found(double ohms, double radPerOhm) {}
 
+    /** The reach of a design whose ramp resistors are open. */
     static Reach of(Design design) {
         List<Condition> conditions = conditions(design);
         Condition nominal = conditions.get(0);
@@ -140,20 +141,20 @@ record Reach(
      * @param least whether the goal's larger power counts, so that the angle is the least that is still allowed
      */
     private static double angle(Design design, Condition at, Optional<Goal> goal, boolean least, double otherwise) {
-        if (goal.isEmpty()) {
-            return otherwise;
-        }
-        Goal g = goal.get();
-        double full = LoadPower.fullWatts(design, at);
-        double value = least ? g.to() : g.from();
-        double watts = switch (g.measure()) {
+        return goal.map(wanted -> angle(design, at, wanted, least)).orElse(otherwise);
+    }
+
+    private static double angle(Design design, Condition at, Goal goal, boolean least) {
+        double value = least ? goal.to() : goal.from();
+        double watts = switch (goal.measure()) {
+            // An angle runs against the power.
             case ANGLE -> Double.NaN;
-            case FRACTION -> value * full;
+            case FRACTION -> value * LoadPower.fullWatts(design, at);
             case WATTS -> value;
             case VOLTS -> value * value / design.load().resistanceOhms();
         };
         if (Double.isNaN(watts)) {
-            return least ? g.from() : g.to();
+            return least ? goal.from() : goal.to();
         }
         return KnobSearch.firingRadForWatts(design, at, watts).orElse(watts > 0 ? EARLY_RAD : Math.PI);
     }
@@ -174,6 +175,7 @@ record Reach(
         return Double.isNaN(ohms) ? found.ohms() : Math.max(1, ohms);
     }
 
+    /** Where a solution's first pulse begins, rad; NaN without one. */
     static double firstRad(Solution solution) {
         return solution.shown().pulses().stream()
                 .min(Comparator.comparingDouble(Pulse::startSeconds))

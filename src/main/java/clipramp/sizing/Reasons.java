@@ -4,12 +4,14 @@ import clipramp.circuit.Design;
 import clipramp.circuit.Part;
 import clipramp.circuit.PotLaw;
 import clipramp.circuit.ThyristorDevice;
+import clipramp.circuit.Trigger.ProgrammableTrigger;
 import clipramp.circuit.Trigger.UnijunctionTrigger;
 import clipramp.margins.Check;
 import clipramp.margins.Judge;
 import clipramp.margins.Margin;
+import clipramp.margins.MarginKind;
 import clipramp.margins.Verdict;
-import clipramp.spread.Watch;
+import clipramp.runs.Watch;
 import clipramp.units.QuantityText;
 import clipramp.units.Unit;
 import java.util.ArrayList;
@@ -39,7 +41,12 @@ public final class Reasons {
         this.reach = Reach.of(design);
     }
 
-    /** One reason for each open part that the design has, in the order of the signal. */
+    /**
+     * One reason for each open part that the design has, in the order of the signal. Each neighbour is judged by the engine.
+     *
+     * @param request what the answer was found for
+     * @param answer the design as sized
+     */
     public static List<Reason> of(SizingRequest request, SizingAnswer answer) {
         return of(request, answer, Watch.NONE);
     }
@@ -47,6 +54,8 @@ public final class Reasons {
     /**
      * The same, watched.
      *
+     * @param request what the answer was found for
+     * @param answer the design as sized
      * @param watch told of parts done, of all open ones; may end it
      * @throws CancellationException where the watch cancelled
      */
@@ -55,10 +64,7 @@ public final class Reasons {
         List<Reason> all = new ArrayList<>();
         int done = 0;
         for (OpenPart part : request.open()) {
-            if (watch.isCancelled()) {
-                throw new CancellationException("the reasons were cancelled");
-            }
-            watch.progress(done++, request.open().size());
+            watch.step("finding the reasons", done++, request.open().size());
             reasons.relation(part)
                     .ifPresent(relation -> all.add(
                             new Reason(part, relation, reasons.neighbour(part, 1), reasons.neighbour(part, -1))));
@@ -137,20 +143,17 @@ public final class Reasons {
     }
 
     private String trimHigh() {
-        return "set on every unit at the highest setting: R_E there from " + ofUnit(CornerUnits.slowest(design), 1)
-                + " for the slowest unit to " + ofUnit(CornerUnits.fastest(design), 1) + " for the fastest";
+        return trim("highest", Timing.highPosition(design));
     }
 
     private String trimLow() {
-        return "set on every unit at the lowest setting: R_E there from " + ofUnit(CornerUnits.slowest(design), 0)
-                + " for the slowest unit to " + ofUnit(CornerUnits.fastest(design), 0) + " for the fastest";
+        return trim("lowest", Timing.lowPosition(design));
     }
 
-    private static String ofUnit(Design unit, int end) {
-        double position = end == 1
-                ? unit.wanted().highest().map(g -> g.position()).orElse(1.0)
-                : unit.wanted().lowest().map(g -> g.position()).orElse(0.0);
-        return text(unit.ramp().rampOhms(position), Unit.OHM);
+    private String trim(String setting, double position) {
+        return "set on every unit at the " + setting + " setting: R_E there from "
+                + text(CornerUnits.slowest(design).ramp().rampOhms(position), Unit.OHM) + " for the slowest unit to "
+                + text(CornerUnits.fastest(design).ramp().rampOhms(position), Unit.OHM) + " for the fastest";
     }
 
     private String device() {
@@ -203,7 +206,7 @@ public final class Reasons {
 
     private Optional<String> sink() {
         return answer.check().margins().stream()
-                .filter(m -> m.id().equals("junction-temperature"))
+                .filter(m -> m.kind() == MarginKind.JUNCTION_TEMPERATURE)
                 .findFirst()
                 .map(Margin::formula);
     }
@@ -247,8 +250,8 @@ public final class Reasons {
             case TRIGGER_DEVICE -> d.trigger().deviceId();
             case BASE_ONE -> ohms(d.trigger().baseOne());
             case BASE_TWO -> d.trigger() instanceof UnijunctionTrigger u ? ohms(u.baseTwo()) : "";
-            case UPPER -> d.trigger() instanceof clipramp.circuit.Trigger.ProgrammableTrigger p ? ohms(p.upper()) : "";
-            case LOWER -> d.trigger() instanceof clipramp.circuit.Trigger.ProgrammableTrigger p ? ohms(p.lower()) : "";
+            case UPPER -> d.trigger() instanceof ProgrammableTrigger p ? ohms(p.upper()) : "";
+            case LOWER -> d.trigger() instanceof ProgrammableTrigger p ? ohms(p.lower()) : "";
             case SERIES -> ohms(d.gate().series());
             case SHUNT -> d.gate().shunt().map(Reasons::ohms).orElse("none");
             case THYRISTOR -> d.thyristor().device().id();

@@ -5,7 +5,7 @@ import clipramp.margins.Check;
 import clipramp.margins.Judge;
 import clipramp.margins.Margin;
 import clipramp.margins.Verdict;
-import clipramp.spread.Watch;
+import clipramp.runs.Watch;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.LinkedHashMap;
@@ -15,7 +15,6 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.Set;
-import java.util.concurrent.CancellationException;
 
 /**
  * One search: candidates are judged once each, and a design moves to a better neighbour for as long as there is one. The
@@ -80,10 +79,7 @@ final class Search {
 
     /** A design judged as it stands but for its ratings. */
     Judged judge(Design design, Reach reach) {
-        if (watch.isCancelled()) {
-            throw new CancellationException("the search was cancelled");
-        }
-        watch.progress(judged.size(), MOST_CANDIDATES);
+        watch.step("the search", judged.size(), MOST_CANDIDATES);
         Design rated = Ratings.fit(request, design);
         return judged.computeIfAbsent(rated, d -> {
             Check check = Judge.check(d, OptionalDouble.empty(), OptionalDouble.empty());

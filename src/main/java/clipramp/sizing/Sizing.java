@@ -8,10 +8,10 @@ import clipramp.circuit.Wanted.Goal;
 import clipramp.margins.Margin;
 import clipramp.margins.MarginKind;
 import clipramp.margins.Verdict;
+import clipramp.runs.Watch;
 import clipramp.sizing.Search.Judged;
 import clipramp.sizing.SizingAnswer.Conflict;
 import clipramp.sizing.SizingAnswer.Outcome;
-import clipramp.spread.Watch;
 import clipramp.units.QuantityText;
 import clipramp.units.Unit;
 import java.util.ArrayList;
@@ -19,7 +19,7 @@ import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
 
-/** From what is wanted to preferred values. */
+/** From what is wanted to preferred values (DEVELOPERS.md, Sizing). */
 public final class Sizing {
     private static final int FIGURES = 3;
 
@@ -37,7 +37,7 @@ public final class Sizing {
      * clock and no chance: the same request gives the same design.
      *
      * @param request what is wanted, decided and open
-     * @throws clipramp.circuit.RefusedCircuit where the decided parts are unsound
+     * @throws RefusedCircuit where the decided parts are unsound
      */
     public static SizingAnswer propose(SizingRequest request) {
         return propose(request, Watch.NONE);
@@ -48,7 +48,8 @@ public final class Sizing {
      *
      * @param request what is wanted, decided and open
      * @param watch told of candidates judged, of the most that there will be; may end the search
-     * @throws java.util.concurrent.CancellationException where the watch cancelled
+     * @throws RefusedCircuit where the decided parts are unsound
+     * @throws CancellationException where the watch cancelled
      */
     public static SizingAnswer propose(SizingRequest request, Watch watch) {
         SizingAnswer found = searched(request, watch);
@@ -152,15 +153,24 @@ public final class Sizing {
         }
     }
 
-    /** The same for a design as it stands: nothing is chosen. */
+    /**
+     * A design as it stands, put in the words of an answer; only the ratings of open parts are chosen.
+     *
+     * @param request what is open, and what it is chosen from
+     * @param design the design to judge
+     * @throws RefusedCircuit where it is unsound
+     */
     public static SizingAnswer judge(SizingRequest request, Design design) {
         Search search = new Search(request, Watch.NONE);
         return answer(Kept.of(search.judge(design, Reach.of(design))), search.all(), Optional.empty());
     }
 
     /**
-     * The same with the base-two resistor, where it is open, that makes the firing angle flattest against temperature;
-     * see {@link Compensation}.
+     * Chooses every open part, the base-two resistor so that the firing angle is flattest against temperature (see
+     * {@link Compensation}). Where that resistor is not open, as {@link #propose(SizingRequest)}.
+     *
+     * @param request what is wanted, decided and open
+     * @throws RefusedCircuit where the decided parts are unsound
      */
     public static SizingAnswer proposeCompensated(SizingRequest request) {
         SizingAnswer first = propose(request);

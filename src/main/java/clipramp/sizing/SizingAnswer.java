@@ -11,7 +11,8 @@ import java.util.List;
  * @param design the best design found
  * @param check it, judged with nominal parts
  * @param outcome what it keeps
- * @param cornerFailures margins that fail for the fastest or the slowest unit, worst first; empty where every one holds
+ * @param cornerFailures margins that fail for the fastest or the slowest unit, the fastest's first; empty where none does,
+ *  and where nominal parts fail already
  * @param yield estimated share of units that reach what is wanted, 0..1
  * @param deadTravel share of the rotation past the wanted settings, 0..1
  * @param watts heat of the firing circuit at mid-knob, W
@@ -43,6 +44,7 @@ public record SizingAnswer(
             this.word = word;
         }
 
+        /** The word that stands for it in an answer for machines. */
         public String word() {
             return word;
         }
@@ -52,15 +54,17 @@ public record SizingAnswer(
      * A demand that is not met.
      *
      * @param margin it, as it stands in the design
-     * @param with margins that fail where this one is met; empty where nothing that was tried meets it
+     * @param with names of the margins that fail where this one is met; empty where nothing that was tried meets it
      * @param nearest the nearest demand that can be met, a sentence
      */
     public record Conflict(Margin margin, List<String> with, String nearest) {
+        /** Keeps the margins as they are. */
         public Conflict {
             with = List.copyOf(with);
         }
     }
 
+    /** Keeps the lists as they are. */
     public SizingAnswer {
         cornerFailures = List.copyOf(cornerFailures);
         conflicts = List.copyOf(conflicts);

@@ -2,6 +2,7 @@ package clipramp.sizing;
 
 import clipramp.circuit.Design;
 import clipramp.units.PreferredSeries;
+import java.util.Collections;
 import java.util.Set;
 import java.util.TreeSet;
 
@@ -15,8 +16,9 @@ import java.util.TreeSet;
  * @param series preferred values of resistors and capacitors; capacitors take E12 at most
  */
 public record SizingRequest(Design design, Set<OpenPart> open, Stock stock, PreferredSeries series) {
+    /** Puts the open parts in the order of the signal. */
     public SizingRequest {
-        open = java.util.Collections.unmodifiableSet(new TreeSet<>(open));
+        open = Collections.unmodifiableSet(new TreeSet<>(open));
     }
 
     /** The same with one part decided. */

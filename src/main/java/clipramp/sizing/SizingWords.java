@@ -2,6 +2,7 @@ package clipramp.sizing;
 
 import clipramp.margins.Margin;
 import clipramp.sizing.SizingAnswer.Conflict;
+import clipramp.spread.SpreadWords;
 import clipramp.units.QuantityText;
 import clipramp.units.Unit;
 import java.util.Optional;
@@ -22,7 +23,7 @@ public final class SizingWords {
         };
     }
 
-    /** The rest of that sentence, its sign first. */
+    /** What follows that headline, its punctuation first, to the end of the sentence. */
     public static String clause(SizingAnswer answer) {
         return switch (answer.outcome()) {
             case WORST_CASE ->
@@ -33,14 +34,14 @@ public final class SizingWords {
         };
     }
 
-    /** What the extreme units of a design that holds with nominal parts miss. */
+    /** What the extreme units of a design that holds with nominal parts miss; empty for any other design. */
     public static Optional<String> extremes(SizingAnswer answer) {
         if (answer.outcome() != SizingAnswer.Outcome.NOMINAL) {
             return Optional.empty();
         }
         String names = answer.cornerFailures().stream().map(Margin::name).collect(Collectors.joining(", "));
         return Optional.of("For the fastest or the slowest unit that the tolerances allow these fail: " + names
-                + ". About " + text(answer.yield(), Unit.FRACTION)
+                + ". About " + SpreadWords.ofUnits(answer.yield())
                 + " of all units reach everything that is wanted without selection or trimming.");
     }
 

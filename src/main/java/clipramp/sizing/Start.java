@@ -1,5 +1,6 @@
 package clipramp.sizing;
 
+import clipramp.circuit.Condition;
 import clipramp.circuit.Design;
 import clipramp.circuit.GateDrive;
 import clipramp.circuit.Part;
@@ -136,8 +137,7 @@ final class Start {
     static List<ThyristorDevice> thyristors(SizingRequest request, Design design) {
         boolean triac = design.stage() == Stage.TRIAC;
         double crest = design.line().crestVolts(design.line().highVolts());
-        var high = new clipramp.circuit.Condition(
-                design.line().highVolts(), design.line().hertz(), 25);
+        Condition high = new Condition(design.line().highVolts(), design.line().hertz(), 25);
         double amps = LoadPower.atFiringAngle(design, high, 0).thyristorRmsAmps();
         double cold = design.surroundings().coldestCelsius();
         return request.stock().thyristors().stream()

@@ -3,7 +3,10 @@ package clipramp.sizing;
 import clipramp.circuit.ThyristorDevice;
 import clipramp.circuit.Unijunction;
 import clipramp.circuit.Zener;
+import java.math.BigDecimal;
+import java.util.ArrayList;
 import java.util.Arrays;
+import java.util.Comparator;
 import java.util.List;
 
 /**
@@ -11,7 +14,7 @@ import java.util.List;
  *
  * @param unijunctions trigger devices
  * @param thyristors SCRs and triacs
- * @param zeners clipping zeners, in rising voltage
+ * @param zeners clipping zeners, in any order; kept in that of their voltage
  */
 public record Stock(List<Unijunction> unijunctions, List<ThyristorDevice> thyristors, List<Zener> zeners) {
     /** Tracks that pots are sold with, in one decade (common practice; catalogues hold one of each pair). */
@@ -29,11 +32,12 @@ public record Stock(List<Unijunction> unijunctions, List<ThyristorDevice> thyris
     /** Ratings that film capacitors are sold with, V (common practice). */
     private static final double[] CAPACITOR_VOLTS = {63, 100, 250, 400};
 
+    /** Sorts the zeners. */
     public Stock {
         unijunctions = List.copyOf(unijunctions);
         thyristors = List.copyOf(thyristors);
         zeners = zeners.stream()
-                .sorted(java.util.Comparator.comparingDouble(z -> z.volts().nominal()))
+                .sorted(Comparator.comparingDouble(z -> z.volts().nominal()))
                 .toList();
     }
 
@@ -47,12 +51,12 @@ public record Stock(List<Unijunction> unijunctions, List<ThyristorDevice> thyris
         return sold(TRIMMERS, leastOhms, mostOhms);
     }
 
-    private static List<Double> sold(double[] decadeOf, double leastOhms, double mostOhms) {
-        List<Double> tracks = new java.util.ArrayList<>();
-        for (int decade = 1; decade <= 6; decade++) {
-            for (double track : decadeOf) {
-                double ohms = new java.math.BigDecimal(String.valueOf(track))
-                        .scaleByPowerOfTen(decade)
+    private static List<Double> sold(double[] decade, double leastOhms, double mostOhms) {
+        List<Double> tracks = new ArrayList<>();
+        for (int power = 1; power <= 6; power++) {
+            for (double track : decade) {
+                double ohms = new BigDecimal(String.valueOf(track))
+                        .scaleByPowerOfTen(power)
                         .doubleValue();
                 if (ohms >= leastOhms && ohms <= mostOhms) {
                     tracks.add(ohms);
@@ -67,10 +71,12 @@ public record Stock(List<Unijunction> unijunctions, List<ThyristorDevice> thyris
         return next(WATTS, watts / share);
     }
 
+    /** Least limiting voltage sold that bears a voltage, V. */
     static double resistorVolts(double volts) {
         return next(RESISTOR_VOLTS, volts);
     }
 
+    /** Least voltage rating of a film capacitor sold that bears a voltage, V. */
     static double capacitorVolts(double volts) {
         return next(CAPACITOR_VOLTS, volts);
     }

@@ -31,8 +31,8 @@ record Timing(double yield, double deadTravel, double lack) {
 
     static Timing of(Design design, Reach reach) {
         Ramp ramp = design.ramp();
-        double high = at(ramp, design.wanted().highest().map(Goal::position).orElse(1.0));
-        double low = at(ramp, design.wanted().lowest().map(Goal::position).orElse(0.0));
+        double high = ramp.rampOhms(highPosition(design));
+        double low = ramp.rampOhms(lowPosition(design));
         double most = Math.max(ramp.rampOhms(0), ramp.rampOhms(1));
         Spreading highEnd = Spreading.of(design, ramp.fixed().tolerance());
         Tolerance tolerance = ramp.pot()
@@ -51,8 +51,8 @@ record Timing(double yield, double deadTravel, double lack) {
     /** How far nominal parts miss, as a sum of logarithms of resistance; 0 where they meet everything. */
     static double lack(Design design, Reach reach) {
         Ramp ramp = design.ramp();
-        double high = at(ramp, design.wanted().highest().map(Goal::position).orElse(1.0));
-        double low = at(ramp, design.wanted().lowest().map(Goal::position).orElse(0.0));
+        double high = ramp.rampOhms(highPosition(design));
+        double low = ramp.rampOhms(lowPosition(design));
         double most = Math.max(ramp.rampOhms(0), ramp.rampOhms(1));
         double least = Math.min(ramp.rampOhms(0), ramp.rampOhms(1));
         return over(high, reach.highestTo())
@@ -65,10 +65,6 @@ record Timing(double yield, double deadTravel, double lack) {
                 + SOFT * over(reach.valley() * RESERVE, least);
     }
 
-    private static double at(Ramp ramp, double position) {
-        return ramp.rampOhms(position);
-    }
-
     private static double over(double value, double limit) {
         return value > limit ? Math.log(value / limit) : 0;
     }
@@ -77,9 +73,18 @@ record Timing(double yield, double deadTravel, double lack) {
         if (design.ramp().pot().isEmpty()) {
             return 0;
         }
-        double high = design.wanted().highest().map(Goal::position).orElse(1.0);
-        double low = design.wanted().lowest().map(Goal::position).orElse(0.0);
-        return past(design.ramp(), reach.highestTo(), high) + past(design.ramp(), reach.lowestFrom(), low);
+        return past(design.ramp(), reach.highestTo(), highPosition(design))
+                + past(design.ramp(), reach.lowestFrom(), lowPosition(design));
+    }
+
+    /** Where the knob stands for the highest wanted setting, 0..1; fully clockwise where none is wanted. */
+    static double highPosition(Design design) {
+        return design.wanted().highest().map(Goal::position).orElse(1.0);
+    }
+
+    /** Where the knob stands for the lowest wanted setting, 0..1; fully anticlockwise where none is wanted. */
+    static double lowPosition(Design design) {
+        return design.wanted().lowest().map(Goal::position).orElse(0.0);
     }
 
     private static double past(Ramp ramp, double ohms, double end) {

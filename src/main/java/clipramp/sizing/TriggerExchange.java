@@ -36,6 +36,7 @@ public record TriggerExchange(Design design, Set<OpenPart> changed) {
 
     private static final double DIVIDER_TOLERANCE = 0.01;
 
+    /** Keeps the parts as they are. */
     public TriggerExchange {
         changed = Set.copyOf(changed);
     }
@@ -46,6 +47,7 @@ public record TriggerExchange(Design design, Set<OpenPart> changed) {
      *
      * @param own the design with its unijunction
      * @param other the same design with the programmable device and any divider
+     * @return one exchange for each gate resistance, rising; dividers of E24, 1 %
      */
     public static List<TriggerExchange> dividers(Design own, Design other) {
         double share = NetworkOfDesign.of(
@@ -120,6 +122,7 @@ public record TriggerExchange(Design design, Set<OpenPart> changed) {
      * temperature.
      *
      * @param other the design with the unijunction and any resistor at base two
+     * @return the exchange, its resistor of E12
      */
     public static TriggerExchange baseTwo(Design other) {
         UnijunctionTrigger trigger = (UnijunctionTrigger) other.trigger();
@@ -134,6 +137,7 @@ public record TriggerExchange(Design design, Set<OpenPart> changed) {
      * The ramp, and the divider of a programmable device, chosen anew for what the design wants.
      *
      * @param other the design with the device of the other kind and anything around it
+     * @throws RefusedCircuit where its other parts are unsound
      */
     public static TriggerExchange resized(Design other) {
         Set<OpenPart> open = EnumSet.of(OpenPart.CAPACITOR, OpenPart.FIXED);

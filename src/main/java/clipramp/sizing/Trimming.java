@@ -5,7 +5,6 @@ import clipramp.circuit.Part;
 import clipramp.circuit.Pot;
 import clipramp.circuit.Ramp;
 import clipramp.circuit.Tolerance;
-import clipramp.circuit.Wanted.Goal;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
@@ -50,8 +49,8 @@ final class Trimming {
         this.reach = reach;
         Design fast = CornerUnits.fastestDevice(design);
         Design slow = CornerUnits.slowestDevice(design);
-        double high = at(design.wanted().highest().map(Goal::position).orElse(1.0));
-        double low = at(design.wanted().lowest().map(Goal::position).orElse(0.0));
+        double high = design.ramp().rampOhms(Timing.highPosition(design));
+        double low = design.ramp().rampOhms(Timing.lowPosition(design));
         highFast = Reach.share(design, fast, high);
         highSlow = Reach.share(design, slow, high);
         lowFast = Reach.share(design, fast, low);
@@ -85,10 +84,6 @@ final class Trimming {
             }
         });
         return all;
-    }
-
-    private double at(double position) {
-        return design.ramp().rampOhms(position);
     }
 
     /** The least preset, and the fixed resistor that goes with it best, for the highest setting. */

@@ -14,10 +14,10 @@ import java.util.List;
  * @param position where the knob stands, 0..1
  * @param firingRad firing angle to set, rad
  * @param loadVolts rms voltage that the load then has, V
- * @param fraction the same as a share of full power
+ * @param fraction its power as a share of full power, 0..1
  */
 public record UnitSetting(OpenPart part, double position, double firingRad, double loadVolts, double fraction) {
-    /** The settings of a design's trimmers, in the order in which they are made. */
+    /** The settings of a sound design's trimmers, in the order in which they are made; empty without trimmers. */
     public static List<UnitSetting> of(Design design) {
         List<UnitSetting> all = new ArrayList<>();
         double least = design.ramp().rampOhms(0) <= design.ramp().rampOhms(1) ? 0 : 1;

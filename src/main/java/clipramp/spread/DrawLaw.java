@@ -1,8 +1,9 @@
 package clipramp.spread;
 
+import java.util.Locale;
 import org.apache.commons.math3.distribution.NormalDistribution;
 
-/** How a value lies between its limits. */
+/** How a part's value lies between the limits of its tolerance. No standard says; all three are common practice. */
 public enum DrawLaw {
     /** Normal, three standard deviations from the middle to either limit, cut there. */
     NORMAL("normal, cut at the limits, which lie three standard deviations out"),
@@ -24,14 +25,14 @@ public enum DrawLaw {
         this.words = words;
     }
 
-    /** The law in words. */
+    /** The law in words that follow "parts lie". */
     public String words() {
         return words;
     }
 
-    /** The name on the command line. */
+    /** The one word that asks for it. */
     public String word() {
-        return name().toLowerCase(java.util.Locale.ROOT);
+        return name().toLowerCase(Locale.ROOT);
     }
 
     /**
@@ -50,6 +51,9 @@ public enum DrawLaw {
 
     /**
      * A value with a corner between two limits, by the triangular law: what a data sheet's min, typ and max are read as.
+     *
+     * @param corner where the law is highest, low..high
+     * @param chance uniform, 0..1
      */
     static double threePoint(double low, double corner, double high, double chance) {
         double width = high - low;

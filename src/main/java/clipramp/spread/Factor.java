@@ -25,9 +25,9 @@ public record Factor(String path, String name, Kind kind, double low, double nom
         SURROUNDINGS
     }
 
-    /** How its values lie. */
+    /** How a factor's values lie between its limits. */
     public enum Law {
-        /** As chosen for parts. */
+        /** By the {@link DrawLaw} that was chosen for parts. */
         CHOSEN,
         /** Uniform between the limits. */
         UNIFORM,
@@ -38,6 +38,12 @@ public record Factor(String path, String name, Kind kind, double low, double nom
     /** Puts a value into a unit. */
     @FunctionalInterface
     public interface Slot {
+        /**
+         * Puts a value where it belongs.
+         *
+         * @param unit the unit, changed
+         * @param value SI
+         */
         void set(UnitValues unit, double value);
     }
 

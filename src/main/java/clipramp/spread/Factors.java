@@ -16,7 +16,10 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.function.ToDoubleFunction;
 
-/** Every toleranced value of a design, every figure of its devices that has limits, line and temperature. */
+/**
+ * What differs from unit to unit: every toleranced value of a design, every figure of its devices that has limits, line and
+ * temperature. What has no room between its limits is left out.
+ */
 public final class Factors {
     /** How far a public line's frequency strays, as a share: EN 50160, 1 % for all but half a percent of a year. */
     private static final double FREQUENCY_SHARE = 0.01;
@@ -25,7 +28,7 @@ public final class Factors {
 
     private Factors() {}
 
-    /** The factors of a design, in the order of the signal. */
+    /** The factors of a sound design: line and temperature, then the parts in the order of the signal. */
     public static List<Factor> of(Design design) {
         Factors all = new Factors();
         all.surroundings(design);

@@ -1,7 +1,7 @@
 package clipramp.spread;
 
 /**
- * How much one factor matters at mid-knob.
+ * How much one factor matters at mid-knob. The shares are estimates from a finite lot of units, so that small ones are noisy.
  *
  * @param path design key
  * @param name what people call it
@@ -9,8 +9,8 @@ package clipramp.spread;
  * @param firingHighRad the same at its upper limit, rad
  * @param fractionLow share of full power with it at its lower limit
  * @param fractionHigh the same at its upper limit
- * @param firstOrder share of the variance of power that it causes alone, 0..1
- * @param total share of the variance of power that it has a part in, 0..1
+ * @param firstOrder share of the variance of power that it causes alone, 0..1 (Saltelli and others 2010)
+ * @param total share of the variance of power that it has a part in, 0..1 (Jansen 1999)
  */
 public record Influence(
         String path,
@@ -20,9 +20,4 @@ public record Influence(
         double fractionLow,
         double fractionHigh,
         double firstOrder,
-        double total) {
-    /** Swing of the share of full power from one limit to the other. */
-    public double swing() {
-        return Math.abs(fractionHigh - fractionLow);
-    }
-}
+        double total) {}

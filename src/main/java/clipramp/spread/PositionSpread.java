@@ -12,10 +12,10 @@ import java.util.OptionalDouble;
  * @param watts load power at the same percentages, W
  * @param fraction the same as a share of full power at the unit's own line voltage
  * @param stalls share of units whose ramp stalls, 0..1
- * @param latchedOn share whose device stays on
- * @param endPulse share fired by the supply's collapse only
- * @param misfires share whose thyristor stays off
- * @param hunts share that hunts
+ * @param latchedOn share whose trigger device stays on, 0..1
+ * @param endPulse share fired by the supply's collapse only, 0..1
+ * @param misfires share whose thyristor stays off, 0..1
+ * @param hunts share that hunts, 0..1
  * @param worstFiring earliest and latest firing of any unit, rad, with root-sum-square limits for comparison
  * @param worstFraction least and greatest share of full power of any unit, likewise
  */
@@ -32,6 +32,8 @@ public record PositionSpread(
         Extremes worstFiring,
         Extremes worstFraction) {
     /**
+     * A worst case by a search on the engine beside the root-sum-square figure that is commonly quoted.
+     *
      * @param nominal value of the nominal unit
      * @param least least value that the search found, never above any sample's
      * @param greatest greatest value that the search found, never under any sample's

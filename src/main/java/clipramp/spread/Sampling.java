@@ -2,8 +2,11 @@ package clipramp.spread;
 
 import clipramp.engine.UnitValues;
 import clipramp.firing.FiringState;
+import clipramp.runs.Watch;
+import java.util.Arrays;
 import java.util.Queue;
 import java.util.concurrent.ConcurrentLinkedQueue;
+import java.util.function.Consumer;
 import java.util.stream.IntStream;
 
 /** Draws the units and keeps what each does at each position. Both cores work; a unit is the same whoever draws it. */
@@ -41,7 +44,13 @@ final class Sampling {
         position = shares.length == 1 ? 0 : (double) middle / (shares.length - 1);
     }
 
-    void run(Watch watch) {
+    /**
+     * Draws units until all are drawn or the watch cancels.
+     *
+     * @param watch told of units drawn, after every thousand or so
+     * @param drawn told with it how they lie at mid-knob
+     */
+    void run(Watch watch, Consumer<Histogram> drawn) {
         int samples = holds.length;
         int block = CHUNK * CHUNKS_A_LOOK;
         while (done < samples && !watch.isCancelled()) {
@@ -54,7 +63,7 @@ final class Sampling {
             count(from, to);
             done = to;
             watch.progress(done, samples);
-            watch.drawn(new Histogram(position, done, counts));
+            drawn.accept(new Histogram(position, done, Arrays.stream(counts).boxed().toList()));
         }
     }
 

@@ -8,6 +8,7 @@ import clipramp.margins.Judge;
 import clipramp.margins.Margin;
 import clipramp.margins.Verdict;
 import clipramp.power.SwiftPoint;
+import clipramp.runs.Watch;
 import clipramp.spread.PositionSpread.Extremes;
 import java.util.Arrays;
 import java.util.Comparator;
@@ -17,11 +18,15 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.TreeMap;
+import java.util.function.Consumer;
 import java.util.function.ToDoubleFunction;
 import java.util.stream.IntStream;
 import org.apache.commons.math3.stat.descriptive.rank.Percentile;
 
-/** Tolerances, temperature and line drawn together. */
+/**
+ * Tolerances, temperature and line drawn together: many units of a design, each solved by the engine at every knob
+ * position (DEVELOPERS.md, Many units at once).
+ */
 public final class Spread {
     private static final int KNOB_STEPS = 10;
     private static final double MID_KNOB = 0.5;
@@ -34,18 +39,32 @@ public final class Spread {
     private Spread() {}
 
     /**
+     * What many units of a design do. The same design and options give the same answer, however many cores draw it.
+     *
      * @param design a sound design that can be solved
      * @param options how many units, which seed, which law
-     * @param watch is told of progress and may cancel: then the finished part is told
+     * @param watch told of units drawn; may cancel: then the finished part is told
      */
     public static SpreadResult run(Design design, SpreadOptions options, Watch watch) {
+        return run(design, options, watch, midKnob -> {});
+    }
+
+    /**
+     * The same, with something to look at while it goes on.
+     *
+     * @param design a sound design that can be solved
+     * @param options how many units, which seed, which law
+     * @param watch told of units drawn; may cancel: then the finished part is told
+     * @param drawn told after the watch how the units drawn so far lie at mid-knob
+     */
+    public static SpreadResult run(Design design, SpreadOptions options, Watch watch, Consumer<Histogram> drawn) {
         Lot lot = new Lot(design, Factors.of(design), options.law(), options.seed());
         double[] positions = positions(design);
         double[] shares = Arrays.stream(positions)
                 .map(p -> WantedTest.share(design.ramp(), p))
                 .toArray();
         Sampling sampling = new Sampling(lot, shares, options.samples());
-        sampling.run(watch);
+        sampling.run(watch, drawn);
         boolean more = !watch.isCancelled();
         List<PositionSpread> spreads = IntStream.range(0, sampling.done() > 0 ? positions.length : 0)
                 .parallel()

@@ -1,11 +1,12 @@
 package clipramp.spread;
 
 import java.util.List;
+import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
 
 /**
- * The next thousand units.
+ * What many units of a design do.
  *
  * @param options what was asked
  * @param units how many units were drawn; fewer than asked if it was interrupted
@@ -27,7 +28,7 @@ public record SpreadResult(
         Map<String, Double> failures,
         List<Influence> influences,
         List<Remedy> remedies) {
-    /** The percentages that a spread is told at. */
+    /** The percentages of units at which firing angle and power are told. */
     public static final List<Double> PERCENTAGES = List.of(1.0, 5.0, 25.0, 50.0, 75.0, 95.0, 99.0);
 
     /** Whether every unit asked for was drawn. */
@@ -40,7 +41,7 @@ public record SpreadResult(
         return influences.stream()
                 .findFirst()
                 .map(most -> String.format(
-                        java.util.Locale.ROOT,
+                        Locale.ROOT,
                         "%.0f %% of the spread in power at mid-knob is the %s.",
                         100 * most.total(),
                         most.name()))

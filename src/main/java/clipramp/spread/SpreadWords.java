@@ -1,14 +1,17 @@
 package clipramp.spread;
 
+import clipramp.units.QuantityText;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
 
-/** A spread in sentences and rows, as window and record show them. */
+/** A spread in sentences and rows, as command line, window and record show them. */
 public final class SpreadWords {
     private static final int MOST_ROWS = 8;
     private static final double WORTH_TELLING = 0.0005;
+    /** Tells one unit in ten million from none. */
+    private static final int MOST_DECIMALS = 5;
 
     private SpreadWords() {}
 
@@ -37,14 +40,14 @@ public final class SpreadWords {
         return String.format(
                 Locale.ROOT,
                 "%s of the units %s; with 95 %% confidence %s to %s.",
-                percent(yield.share()),
+                ofUnits(yield.share()),
                 what,
-                percent(yield.low()),
-                percent(yield.high()));
+                ofUnits(yield.low()),
+                ofUnits(yield.high()));
     }
 
     private static String failure(Map.Entry<String, Double> worst) {
-        return "Failed most often: " + worst.getKey().replace('-', ' ') + ", by " + percent(worst.getValue())
+        return "Failed most often: " + worst.getKey().replace('-', ' ') + ", by " + ofUnits(worst.getValue())
                 + " of the judged units.";
     }
 
@@ -71,11 +74,16 @@ public final class SpreadWords {
 
     private static void state(List<String> parts, double share, String words) {
         if (share >= WORTH_TELLING) {
-            parts.add(percent(share) + " " + words);
+            parts.add(ofUnits(share) + " " + words);
         }
     }
 
-    /** What matters at mid-knob, most first: name, share of the variance alone and in all, swing. */
+    /**
+     * What matters at mid-knob, most first.
+     *
+     * @return rows of name, share of the variance alone, share with all that it has a part in, and power from its lower to its
+     *     upper limit; eight at most
+     */
     public static List<List<String>> influences(SpreadResult spread) {
         return spread.influences().stream()
                 .limit(MOST_ROWS)
@@ -91,12 +99,16 @@ public final class SpreadWords {
                 percent(influence.fractionLow()) + " to " + percent(influence.fractionHigh()));
     }
 
-    /** What would help, most first: change, yield with it, gain. */
+    /**
+     * What would help, most first.
+     *
+     * @return rows of change, yield with it and gain; as many and in the same order as {@link #helping}
+     */
     public static List<List<String>> remedies(SpreadResult spread) {
         return helping(spread).stream().map(SpreadWords::remedy).toList();
     }
 
-    /** The remedies of those rows. */
+    /** Remedies that win one unit in two thousand or more, most first, eight at most. */
     public static List<Remedy> helping(SpreadResult spread) {
         return spread.remedies().stream()
                 .filter(r -> r.gain() >= WORTH_TELLING)
@@ -105,11 +117,58 @@ public final class SpreadWords {
     }
 
     private static List<String> remedy(Remedy remedy) {
-        return List.of(remedy.change(), percent(remedy.yield().share()), "+" + percent(remedy.gain()));
+        return List.of(remedy.change(), ofUnits(remedy.yield().share()), "+" + percent(remedy.gain()));
     }
 
-    /** A share with one decimal. */
+    /**
+     * How far a run is.
+     *
+     * @param done units that are drawn, fewer than all
+     * @param of units in all
+     * @param seconds time since the run began, s, above 0
+     */
+    public static String progress(int done, int of, double seconds) {
+        double rate = done / seconds;
+        return String.format(
+                Locale.ROOT,
+                "%d of %d units, %.0f a second, %.0f s left",
+                done,
+                of,
+                rate,
+                Math.ceil((of - done) / rate));
+    }
+
+    /**
+     * A share of units in percent: with one decimal, or as many as it takes that a few never read as none, nor all but a few
+     * as all.
+     *
+     * @param share 0..1
+     */
+    public static String ofUnits(double share) {
+        return unitsInPercent(share) + " %";
+    }
+
+    /**
+     * The same for a column that carries its unit in the head.
+     *
+     * @param share 0..1
+     */
+    public static String unitsInPercent(double share) {
+        int decimals = 1;
+        while (decimals < MOST_DECIMALS && readsAsNoneOrAll(share, decimals)) {
+            decimals++;
+        }
+        return QuantityText.fixed(100 * share, decimals);
+    }
+
+    private static boolean readsAsNoneOrAll(double share, int decimals) {
+        String text = QuantityText.fixed(100 * share, decimals);
+        return (share > 0 && text.equals(QuantityText.fixed(0, decimals)))
+                || (share < 1 && text.equals(QuantityText.fixed(100, decimals)));
+    }
+
+    /** Percent with one decimal. */
     public static String percent(double share) {
-        return String.format(Locale.ROOT, "%.1f %%", 100 * share);
+        return QuantityText.fixed(100 * share, 1) + " %";
     }
 }

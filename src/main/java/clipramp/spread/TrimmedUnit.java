@@ -12,6 +12,7 @@ public final class TrimmedUnit {
      *
      * @param nominal the design whose nominal firing angles the unit is set to
      * @param unit the same design with exact part and device values of its own
+     * @return the unit, each trimmer a resistor of what it was set to
      */
     public static Design of(Design nominal, Design unit) {
         if (nominal.ramp().trimmers().isNone()) {

@@ -35,6 +35,7 @@ final class TrimmerSetting {
         return follow > LEAST_FOLLOW && follow < MOST_FOLLOW;
     }
 
+    /** Sets the trimmers of a unit, whose line and temperature stay as they are. */
     void set(UnitValues unit) {
         Figures parts = new Figures(unit.parts());
         Setting setting = goals.known(parts).orElseGet(() -> {

@@ -10,7 +10,7 @@ final class UnitOutcome {
     FiringState state = FiringState.SILENT;
     /** Load power, W. */
     double watts;
-    /** The same as a share of full power at the same line voltage. */
+    /** The same as a share of full power at the same line voltage, 0..1. */
     double fraction;
 
     /** Firing angle with a thyristor that stays off taken as fired at the half cycle's end, rad. */

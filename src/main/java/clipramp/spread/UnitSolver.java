@@ -2,7 +2,6 @@ package clipramp.spread;
 
 import clipramp.circuit.Condition;
 import clipramp.circuit.Design;
-import clipramp.circuit.Stage;
 import clipramp.engine.Network;
 import clipramp.engine.UnitValues;
 import clipramp.firing.Firing;
@@ -94,10 +93,5 @@ final class UnitSolver {
     private Solution referred(UnitValues unit, double rampOhms) {
         unit.fill(network, rampOhms);
         return Firing.solve(design, new Condition(unit.lineVolts, unit.lineHertz, unit.celsius), network);
-    }
-
-    /** Whether the load can get both half cycles. */
-    boolean isFullWave() {
-        return design.stage() != Stage.HALF_WAVE;
     }
 }

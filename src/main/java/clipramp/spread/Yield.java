@@ -7,7 +7,7 @@ import org.apache.commons.math3.distribution.BetaDistribution;
  *
  * @param held units that hold
  * @param of units asked
- * @param low lower end of the two-sided 95 % interval of Clopper and Pearson, 0..1
+ * @param low lower end of the two-sided 95 % interval of Clopper and Pearson (1934), 0..1
  * @param high its upper end, 0..1
  */
 public record Yield(int held, int of, double low, double high) {
@@ -19,7 +19,7 @@ public record Yield(int held, int of, double low, double high) {
         return new Yield(held, of, low, high);
     }
 
-    /** The share that held, 0..1. */
+    /** The share that held, 0..1; NaN where none was asked. */
     public double share() {
         return of == 0 ? Double.NaN : (double) held / of;
     }

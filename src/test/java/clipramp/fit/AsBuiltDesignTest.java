@@ -10,7 +10,7 @@ import clipramp.files.DesignText.Reading.Good;
 import clipramp.files.Example;
 import clipramp.files.ProfileLibrary;
 import clipramp.files.Source;
-import clipramp.spread.Watch;
+import clipramp.runs.Watch;
 import java.util.List;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.ValueSource;

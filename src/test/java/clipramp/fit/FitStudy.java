@@ -5,7 +5,7 @@ import clipramp.files.DesignFiles;
 import clipramp.files.Example;
 import clipramp.files.ProfileLibrary;
 import clipramp.files.Source;
-import clipramp.spread.Watch;
+import clipramp.runs.Watch;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;

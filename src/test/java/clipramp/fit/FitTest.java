@@ -7,7 +7,7 @@ import static org.assertj.core.api.Assertions.within;
 import clipramp.circuit.Design;
 import clipramp.fit.Fitted.Knowledge;
 import clipramp.fit.Fitted.Within;
-import clipramp.spread.Watch;
+import clipramp.runs.Watch;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;

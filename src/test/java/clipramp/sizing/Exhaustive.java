@@ -1,8 +1,8 @@
 package clipramp.sizing;
 
 import clipramp.circuit.Design;
+import clipramp.runs.Watch;
 import clipramp.sizing.Search.Judged;
-import clipramp.spread.Watch;
 
 /** Every capacitor, fixed resistor and track of a small grid, each put before the judge: no search, nothing clever. */
 final class Exhaustive {

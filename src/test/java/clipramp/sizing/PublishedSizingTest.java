@@ -1,7 +1,12 @@
 package clipramp.sizing;
 
+import static clipramp.firing.PublishedRelations.baseTwoOhms;
+import static clipramp.firing.PublishedRelations.largestBaseOneOhms;
+import static clipramp.firing.PublishedRelations.largestRampOhms;
+import static clipramp.firing.PublishedRelations.peakPointVolts;
+import static clipramp.firing.PublishedRelations.smallestRampOhms;
+import static clipramp.firing.PublishedRelations.textbookPeriodSeconds;
 import static org.assertj.core.api.Assertions.assertThat;
-import static org.assertj.core.api.Assertions.assertThatThrownBy;
 import static org.assertj.core.api.Assertions.within;
 
 import clipramp.circuit.Condition;
@@ -9,6 +14,7 @@ import clipramp.circuit.Design;
 import clipramp.files.DesignFiles;
 import clipramp.files.Example;
 import clipramp.files.Source;
+import clipramp.firing.PublishedRelations.BaseTwoRule;
 import clipramp.power.KnobSearch;
 import clipramp.power.LoadPower;
 import clipramp.power.LoadResult;
@@ -21,38 +27,39 @@ class PublishedSizingTest {
     /** Rashid, Power Electronics 4e, example 9.5. */
     @Test
     void rashidsOscillatorIsSizedAsPrinted() {
-        RelaxationOscillator oscillator = new RelaxationOscillator(30, 0.51, 0.5, 3.5, 10e-3, 10e-6);
+        double peak = peakPointVolts(0.51, 30, 0.5);
+        double ohms = rampOhms(1.0 / 60, 0.5e-6, 0.51);
 
-        assertThat(oscillator.peakPointVolts()).isCloseTo(15.8, within(0.05));
-        assertThat(oscillator.largestRampOhms()).isCloseTo(1.42e6, within(0.005e6));
-        assertThat(oscillator.smallestRampOhms()).isCloseTo(2.65e3, within(5.0));
-        assertThat(oscillator.rampOhms(1.0 / 60, 0.5e-6)).isCloseTo(46.7e3, within(50.0));
-        assertThat(oscillator.baseTwoOhms()).isCloseTo(654, within(0.5));
+        assertThat(peak).isCloseTo(15.8, within(0.05));
+        assertThat(largestRampOhms(30, peak, 10e-6)).isCloseTo(1.42e6, within(0.005e6));
+        assertThat(smallestRampOhms(30, 3.5, 10e-3)).isCloseTo(2.65e3, within(5.0));
+        assertThat(ohms).isCloseTo(46.7e3, within(50.0));
+        assertThat(baseTwoOhms(BaseTwoRule.TEN_THOUSAND, 0.51, 30, 0, 0)).isCloseTo(654, within(0.5));
         // Rounded to what is sold: the printed 46.7 kΩ lies within one step of 47 kΩ.
-        assertThat(PreferredSeries.E24.nearest(oscillator.rampOhms(1.0 / 60, 0.5e-6)))
-                .isEqualTo(47e3);
+        assertThat(PreferredSeries.E24.nearest(ohms)).isEqualTo(47e3);
     }
 
     /** Gupta and Singhal, Power Electronics, 2.29. */
     @Test
     void guptaAndSinghalsTwoKilohertzAreSizedAsPrinted() {
-        RelaxationOscillator oscillator = new RelaxationOscillator(10, 0.6, 0.5, 0, 5e-3, 5e-6);
-
-        // (V - V_P)/I with the 5 mA of the example as the largest current through R.
-        assertThat((10 - oscillator.peakPointVolts()) / 5e-3).isCloseTo(700, within(0.5));
-        assertThat(oscillator.rampOhms(0.5e-3, 0.5e-6)).isCloseTo(1091, within(0.5));
-        assertThat(oscillator.rampOhms(0.5e-3, 1e-6)).isCloseTo(545.7, within(0.05));
+        // The 5 mA of the example are the largest current through R.
+        assertThat(largestRampOhms(10, peakPointVolts(0.6, 10, 0.5), 5e-3)).isCloseTo(700, within(0.5));
+        assertThat(rampOhms(0.5e-3, 0.5e-6, 0.6)).isCloseTo(1091, within(0.5));
+        assertThat(rampOhms(0.5e-3, 1e-6, 0.6)).isCloseTo(545.7, within(0.05));
     }
 
     /** Gupta and Singhal 2.31; its printed R_B1 < 103.55 Ω does not follow from its own R_B2 (see the exact 105.42). */
     @Test
     void guptaAndSinghalsLimitsAreSizedAsPrintedButForTheirBaseOne() {
-        RelaxationOscillator oscillator = new RelaxationOscillator(12, 0.63, 0.5, 2, 4e-3, 5e-6);
+        assertThat(smallestRampOhms(12, 2, 4e-3)).isCloseTo(2.5e3, within(1.0));
+        assertThat(largestRampOhms(12, peakPointVolts(0.63, 12, 0.5), 5e-6)).isCloseTo(788e3, within(500.0));
+        assertThat(baseTwoOhms(BaseTwoRule.TEN_THOUSAND, 0.63, 12, 0, 0)).isCloseTo(1.32e3, within(5.0));
+        assertThat(largestBaseOneOhms(0.18, 12, 5.6e3, 1.32e3)).isCloseTo(105.42, within(0.05));
+    }
 
-        assertThat(oscillator.smallestRampOhms()).isCloseTo(2.5e3, within(1.0));
-        assertThat(oscillator.largestRampOhms()).isCloseTo(788e3, within(500.0));
-        assertThat(oscillator.baseTwoOhms()).isCloseTo(1.32e3, within(5.0));
-        assertThat(oscillator.largestBaseOneOhms(0.18, 5.6e3, 1.32e3)).isCloseTo(105.42, within(0.05));
+    /** The period's closed form, turned round. */
+    private static double rampOhms(double periodSeconds, double rampFarads, double standoff) {
+        return periodSeconds / textbookPeriodSeconds(1, rampFarads, standoff);
     }
 
     /** Gupta and Singhal 3.15: a 1000 W heater at 800 W; printed 61°, exactly 60.54°. */
@@ -80,37 +87,6 @@ class PublishedSizingTest {
         assertThat(load.rmsAmps()).isCloseTo(5.77, within(0.005));
         assertThat(load.thyristorRmsAmps()).isCloseTo(4.08, within(0.005));
         assertThat(load.thyristorMeanAmps()).isCloseTo(1.86, within(0.01));
-    }
-
-    /** Bimbhra, Power Electronics, 4.4: 15 V, load line 120 V/A, 0.4 W. */
-    @Test
-    void aGateLoadLineMeetsItsPowerCurveWhereBimbhraPrintsIt() {
-        GateRelations.GatePoint[] points = GateRelations.onPowerCurve(15, 120, 0.4);
-
-        assertThat(points[0].amps()).isCloseTo(38.56e-3, within(5e-6));
-        assertThat(points[0].volts()).isCloseTo(10.37, within(0.005));
-        assertThat(points[1].amps()).isCloseTo(86.44e-3, within(5e-6));
-        assertThat(points[1].volts()).isCloseTo(4.628, within(0.001));
-        assertThatThrownBy(() -> GateRelations.onPowerCurve(15, 120, 0.5)).hasMessageContaining("never gives more");
-    }
-
-    /** Bimbhra 4.5: v_g = 1 + 10 i_g, 5 W peak, 0.3 W mean, 15 V, 20 µs. */
-    @Test
-    void aGatePulseIsSizedAsBimbhraPrintsIt() {
-        GateRelations.GatePoint point = GateRelations.atPower(1, 10, 5);
-
-        assertThat(GateRelations.seriesOhms(15, point)).isCloseTo(11.248, within(0.0005));
-        assertThat(GateRelations.mostPulsesPerSecond(0.3, 5, 20e-6)).isCloseTo(3000, within(1e-6));
-        assertThat(GateRelations.mostPulsesPerSecond(0.3, 5, 20e-6) * 20e-6).isCloseTo(0.06, within(1e-9));
-    }
-
-    /** Bimbhra 4.6: E 200 V, I_L 0.1 A; L 0.2 H; with 20 Ω; L 2 H with 20 Ω. */
-    @Test
-    void aPulseLastsUntilAnInductiveLoadLatches() {
-        assertThat(GateRelations.pulseSeconds(200, 0, 0.2, 0.1)).isCloseTo(100e-6, within(0.05e-6));
-        assertThat(GateRelations.pulseSeconds(200, 20, 0.2, 0.1)).isCloseTo(100.5e-6, within(0.05e-6));
-        assertThat(GateRelations.pulseSeconds(200, 20, 2, 0.1)).isCloseTo(1005e-6, within(0.5e-6));
-        assertThat(GateRelations.pulseSeconds(200, 3000, 2, 0.1)).isInfinite();
     }
 
     /** A circuit without drops, as the books compute. */

@@ -19,6 +19,7 @@ import clipramp.circuit.Zener;
 import clipramp.engine.UnitValues;
 import clipramp.power.KnobMap;
 import clipramp.power.OperatingPoint;
+import clipramp.runs.Watch;
 import com.sun.management.ThreadMXBean;
 import java.lang.management.ManagementFactory;
 import java.util.Arrays;
@@ -36,20 +37,7 @@ class SpreadTest {
     private final Histogram[] last = new Histogram[1];
 
     /** The heater's spread, which several tests look at. */
-    private final SpreadResult heater = Spread.run(SampleDesigns.heater(), SOME, new Watch() {
-        @Override
-        public void progress(int done, int of) {}
-
-        @Override
-        public void drawn(Histogram midKnob) {
-            last[0] = midKnob;
-        }
-
-        @Override
-        public boolean isCancelled() {
-            return false;
-        }
-    });
+    private final SpreadResult heater = Spread.run(SampleDesigns.heater(), SOME, Watch.NONE, drawn -> last[0] = drawn);
 
     @Test
     void theSameSeedGivesTheSameAnswerWhateverTheNumberOfThreads() throws Exception {
@@ -85,7 +73,7 @@ class SpreadTest {
         Design design = SampleDesigns.heater();
         Lot lot = new Lot(design, Factors.of(design), DrawLaw.UNIFORM, 3);
         Sampling sampling = new Sampling(lot, new double[] {1, 0.5, 0}, 300);
-        sampling.run(Watch.NONE);
+        sampling.run(Watch.NONE, drawn -> {});
         SpreadResult result = Spread.run(design, new SpreadOptions(300, 3, DrawLaw.UNIFORM, 0), Watch.NONE);
         for (int p = 0; p < 3; p++) {
             PositionSpread told = result.positions().get(5 * p);
@@ -168,7 +156,7 @@ class SpreadTest {
 
     @Test
     void theHistogramCountsEveryUnitOnce() {
-        assertThat(Arrays.stream(last[0].counts()).sum()).isEqualTo(300);
+        assertThat(last[0].counts().stream().mapToInt(Integer::intValue).sum()).isEqualTo(300);
         assertThat(last[0].position()).isEqualTo(0.5);
     }
 

@@ -16,6 +16,7 @@ import clipramp.files.Example;
 import clipramp.files.ProfileLibrary;
 import clipramp.files.Source;
 import clipramp.firing.Firing;
+import clipramp.runs.Watch;
 import java.util.List;
 import java.util.Optional;
 import org.assertj.core.data.Offset;

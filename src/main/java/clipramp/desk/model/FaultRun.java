@@ -4,7 +4,6 @@ import clipramp.circuit.Condition;
 import clipramp.faults.FaultSheet;
 import clipramp.faults.Faults;
 import clipramp.files.LoadedDesign;
-import clipramp.spread.Watch;
 import java.util.Optional;
 
 /** Works every single fault of a design out, away from the window. */
@@ -28,18 +27,8 @@ public final class FaultRun {
     }
 
     private static Answer solve(Asked asked, LongRun.Telling telling) {
-        Watch watch = telling.of((done, of) -> done + " of " + of + " faults");
-        FaultSheet sheet = Faults.of(asked.loaded().design(), asked.condition(), new Faults.Watch() {
-            @Override
-            public void solved(int done, int of) {
-                watch.progress(done, of);
-            }
-
-            @Override
-            public boolean isCancelled() {
-                return watch.isCancelled();
-            }
-        });
+        FaultSheet sheet = Faults.of(
+                asked.loaded().design(), asked.condition(), telling.of((done, of) -> done + " of " + of + " faults"));
         return new Answer(asked, sheet);
     }
 

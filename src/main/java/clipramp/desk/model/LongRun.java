@@ -1,6 +1,6 @@
 package clipramp.desk.model;
 
-import clipramp.spread.Watch;
+import clipramp.runs.Watch;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;

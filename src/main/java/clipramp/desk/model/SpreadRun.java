@@ -1,12 +1,12 @@
 package clipramp.desk.model;
 
 import clipramp.files.LoadedDesign;
+import clipramp.runs.Watch;
 import clipramp.spread.Histogram;
 import clipramp.spread.Spread;
 import clipramp.spread.SpreadOptions;
 import clipramp.spread.SpreadResult;
-import clipramp.spread.Watch;
-import java.util.Locale;
+import clipramp.spread.SpreadWords;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.concurrent.Executor;
@@ -39,41 +39,22 @@ public final class SpreadRun {
 
     private Answer draw(Asked asked, LongRun.Telling telling) {
         long began = System.nanoTime();
-        Watch steps = telling.of((done, of) -> words(done, of, (System.nanoTime() - began) * 1e-9));
-        SpreadResult spread = Spread.run(asked.loaded().design(), asked.options(), new Watch() {
-            @Override
-            public void progress(int done, int of) {
-                steps.progress(done, of);
-            }
-
-            @Override
-            public void drawn(Histogram midKnob) {
-                home.execute(() -> {
+        Watch watch = telling.of((done, of) -> words(done, of, (System.nanoTime() - began) * 1e-9));
+        SpreadResult spread = Spread.run(
+                asked.loaded().design(),
+                asked.options(),
+                watch,
+                midKnob -> home.execute(() -> {
                     histogram = Optional.of(midKnob);
                     run.changed();
-                });
-            }
-
-            @Override
-            public boolean isCancelled() {
-                return steps.isCancelled();
-            }
-        });
+                }));
         return new Answer(asked.loaded(), spread);
     }
 
     private static String words(int done, int of, double seconds) {
-        if (done >= of) {
-            return "All " + of + " units are drawn; judging, and weighing what matters…";
-        }
-        double rate = done / Math.max(1e-9, seconds);
-        return String.format(
-                Locale.ROOT,
-                "%d of %d units, %.0f a second, %.0f s left",
-                done,
-                of,
-                rate,
-                Math.ceil((of - done) / rate));
+        return done < of
+                ? SpreadWords.progress(done, of, seconds)
+                : "All " + of + " units are drawn; judging, and weighing what matters…";
     }
 
     /** Told at home whenever there is more to see. */

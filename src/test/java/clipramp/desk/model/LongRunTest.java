@@ -2,7 +2,7 @@ package clipramp.desk.model;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
-import clipramp.spread.Watch;
+import clipramp.runs.Watch;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.concurrent.CancellationException;

@@ -6,7 +6,7 @@ import clipramp.circuit.Stage;
 import clipramp.margins.Check;
 import clipramp.margins.Judge;
 import clipramp.margins.Verdict;
-import clipramp.spread.Watch;
+import clipramp.runs.Watch;
 import java.util.OptionalDouble;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
