@@ -60,7 +60,7 @@ public sealed interface Load {
     }
 
     /**
-     * A lamp: P = ratedWatts (V / ratedVolts)^exponent at its own rms voltage V (DEVELOPERS.md, loads with memory).
+     * A lamp: P = ratedWatts (V / ratedVolts)^exponent at its own rms voltage V (DEVELOPERS.md, Loads with memory).
      *
      * @param ratedWatts power at rated voltage, W, above 0
      * @param ratedVolts rated rms voltage, V, above 0

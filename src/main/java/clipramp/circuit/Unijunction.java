@@ -80,7 +80,7 @@ public record Unijunction(
     }
 
     /**
-     * V_OB1 and the circuit that it is measured in (DEVELOPERS.md, the conducting device).
+     * V_OB1 and the circuit that it is measured in (DEVELOPERS.md, The conducting device).
      *
      * @param minVolts least base-one pulse of any device, V
      * @param typVolts typical base-one pulse, V; at least one of the two

@@ -5,7 +5,7 @@ package clipramp.engine;
  * the direction of conduction and D the fixed drops of the path (a freewheeling diode: s = 0 and its own drop).
  *
  * <p>R i obeys the same first-order law as a capacitor charged through a resistor with R C = L/R, so a {@link Piece}
- * solves it and {@link FirstCrossing} finds its end, both to rounding (DEVELOPERS.md, loads with memory). Mutable; angles
+ * solves it and {@link FirstCrossing} finds its end, both to rounding (DEVELOPERS.md, Loads with memory). Mutable; angles
  * are of the line, from the positive-going zero of its fundamental.
  */
 public final class InductiveCurrent {

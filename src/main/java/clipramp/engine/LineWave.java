@@ -7,7 +7,7 @@ import org.apache.commons.math3.analysis.solvers.BrentSolver;
 
 /**
  * The line voltage of one condition: v = sum over k of amplitude_k sin(k theta + phase_k), theta counted from the
- * positive-going zero of the fundamental (DEVELOPERS.md, line and source). Orders count from 1, the fundamental.
+ * positive-going zero of the fundamental (DEVELOPERS.md, Line and source). Orders count from 1, the fundamental.
  */
 public final class LineWave {
     /** Samples a period and order: finer than any two zeros that a band-limited wave can hide from a designer. */

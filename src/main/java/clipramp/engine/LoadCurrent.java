@@ -9,7 +9,7 @@ import clipramp.circuit.Stage;
  * Current that a load takes once the thyristor is on. A resistor: i = max(0, (|v| - V_T0 - n V_F)/(R + r_T + n r_F)), n
  * bridge diodes in the path (0 or 2). With an inductance it grows from nothing as {@link InductiveCurrent} says. Half-wave
  * stages conduct in the positive half only. Angles are of the line, from the positive-going zero of its fundamental;
- * currents and voltages count as positive in the direction of conduction (DEVELOPERS.md, power, loads with memory).
+ * currents and voltages count as positive in the direction of conduction (DEVELOPERS.md, Power; Loads with memory).
  */
 public final class LoadCurrent {
     private final LineWave line;

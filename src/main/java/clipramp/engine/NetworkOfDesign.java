@@ -43,7 +43,7 @@ public final class NetworkOfDesign {
 
     /**
      * What a conducting SCR's gate junction loses to the gate circuit, A: it raises latching and holding current by as much
-     * (DEVELOPERS.md, thyristor). 0 for a triac.
+     * (DEVELOPERS.md, Thyristor). 0 for a triac.
      */
     public static double gateBleedAmps(Design design) {
         GateDrive gate = design.gate();

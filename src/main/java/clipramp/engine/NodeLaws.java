@@ -2,7 +2,7 @@ package clipramp.engine;
 
 /**
  * Kirchhoff's current law at the clipped supply and at base one, for one state of rectifier, zener and gate junction;
- * direct coupling here, a pulse transformer in {@link TransformerLaws} (DEVELOPERS.md, the clipped supply and on).
+ * direct coupling here, a pulse transformer in {@link TransformerLaws} (DEVELOPERS.md, The clipped supply and on).
  */
 final class NodeLaws {
     /** More rounds than three switches have states: a network that has not settled by then never will. */

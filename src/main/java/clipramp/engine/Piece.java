@@ -5,7 +5,7 @@ package clipramp.engine;
  * magnetising current), and the ramp voltage as one exponential and the source's sinusoids, exactly.
  *
  * <p>Times are seconds since the line zero that begins the half cycle; voltages are against the firing common where no
- * other frame is given; all is exact to rounding (DEVELOPERS.md, ramp). Mutable, reused for every piece; {@link #copy()}
+ * other frame is given; all is exact to rounding (DEVELOPERS.md, Ramp). Mutable, reused for every piece; {@link #copy()}
  * keeps one.
  */
 public final class Piece {

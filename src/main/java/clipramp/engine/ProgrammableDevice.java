@@ -11,7 +11,7 @@ import java.util.function.ToDoubleFunction;
 /**
  * A programmable unijunction transistor with its divider as numbers. Offset, peak-point and valley current follow the
  * gate resistance R_G = R_A parallel R_B: the offset linearly in log R_G, the currents as powers of it, through the data
- * sheet's points and along the end slopes beyond them (DEVELOPERS.md, peak point, the conducting device).
+ * sheet's points and along the end slopes beyond them (DEVELOPERS.md, Peak point; The conducting device).
  */
 public final class ProgrammableDevice {
     /** Supply that data sheets give the valley current at, V. */

@@ -1,7 +1,7 @@
 package clipramp.engine;
 
 /**
- * Leads the firing circuit from event to event through a half cycle, exactly (DEVELOPERS.md, to fire or to stall, events,
+ * Leads the firing circuit from event to event through a half cycle, exactly (DEVELOPERS.md, To fire or to stall; Events,
  * exactly). Allocates nothing once made. Times are seconds since the line zero that begins the half cycle.
  *
  * <p>Use: {@link #start} at a line zero, then {@link #advance} again and again; between two calls {@link #piece()} is

@@ -18,6 +18,7 @@ package clipramp.firing;
  * @param dropperAmps current through the dropping resistor, A
  * @param zenerAmps zener current, A
  */
+@SuppressWarnings("ArrayRecordComponent") // shown, never compared
 public record Waveforms(
         double[] angleRad,
         double[] seconds,

@@ -13,7 +13,7 @@ import java.util.OptionalDouble;
 /**
  * Which pulse fires the thyristor in which half cycle of the load. Without a lagging winding a pulse acts in the half
  * cycle that it was made in; with one, a pulse made after the load's zero acts in the next half cycle, and early in it:
- * full power (DEVELOPERS.md, The circuit laws).
+ * full power.
  */
 public final class ActingPulses {
     private ActingPulses() {}
@@ -22,7 +22,7 @@ public final class ActingPulses {
      * One half cycle of the load.
      *
      * @param positive whether the line's fundamental is positive in it
-     * @param firingRad firing angle; empty when the thyristor stays off
+     * @param firingRad firing angle from the zero that begins it, rad; empty when the thyristor stays off
      * @param index which of the solution's halves it belongs to
      */
     record Slot(boolean positive, OptionalDouble firingRad, int index) {}
@@ -32,6 +32,9 @@ public final class ActingPulses {
      * but for a pulse that was folded into a neighbouring half cycle of the load, so that it grows with R_E through the
      * load's zero.
      *
+     * @param design whose winding may lag
+     * @param solution the firing circuit's periodic state
+     * @param pulse one of its pulses
      * @return rad; pi or more for a pulse that acts in the half cycle after its own
      */
     public static double madeRad(Design design, Solution solution, Pulse pulse) {
@@ -52,7 +55,7 @@ public final class ActingPulses {
                 .flatMap(half -> half.pulses().stream())
                 .filter(Pulse::latches)
                 .anyMatch(pulse ->
-                        folds(design, solution, pulse) > 0 || periods && madeRad(design, solution, pulse) >= Math.PI);
+                        folds(design, solution, pulse) > 0 || (periods && madeRad(design, solution, pulse) >= Math.PI));
     }
 
     /** Whether one of the solution's halves spans a whole period, as a single-diode supply's does. */

@@ -5,8 +5,8 @@ import java.util.function.DoubleUnaryOperator;
 /**
  * A stretch of the load's current without a break.
  *
- * @param fromRad line angle at which it begins, rad
- * @param toRad line angle at which it ends, rad
+ * @param fromRad line angle at which it begins, from the positive-going zero that begins the first period, rad
+ * @param toRad line angle at which it ends, on the same count, rad
  * @param direction sign of the line's current, +1 or -1; 0 on a freewheeling path, which the line does not feel
  * @param memoryRad time constant of the loop as an angle, rad; 0 where the current follows the line at once
  * @param amps magnitude of the load's current at a line angle of the stretch, A
@@ -20,7 +20,7 @@ public record CurrentSpan(
         DoubleUnaryOperator amps,
         DoubleUnaryOperator loadVolts) {
 
-    /** Whether the current passes a thyristor and the line. */
+    /** Whether the current passes a thyristor and the line, not a freewheeling diode. */
     public boolean throughThyristor() {
         return direction != 0;
     }

@@ -20,6 +20,8 @@ import java.util.OptionalDouble;
  */
 record CurrentSums(double chargeAmpRad, double squareAmpRad, double peakAmps, Polarity forward, Polarity backward) {
     /**
+     * Sums over one direction of the line's current.
+     *
      * @param chargeAmpRad integral of the line current's magnitude in one direction, A rad
      * @param squareAmpRad integral of its square, A² rad
      */
@@ -36,6 +38,10 @@ record CurrentSums(double chargeAmpRad, double squareAmpRad, double peakAmps, Po
     }
 
     /**
+     * What follows from the sums.
+     *
+     * @param design stage, load and thyristor
+     * @param condition line voltage
      * @param period when the current begins and ends; how long it takes to repeat
      * @param rmsVolts rms voltage across the load, V
      * @param conductionRad mean conduction angle of a half cycle, rad

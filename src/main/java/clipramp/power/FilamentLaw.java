@@ -4,9 +4,9 @@ import clipramp.circuit.Load;
 
 /**
  * A lamp in its steady state: P = P_rated (V/V_rated)^k, so its resistance at an rms voltage is V²/P, never under the cold
- * one. Over one line period its temperature, and so its resistance, stands still.
+ * one. Over one line period its temperature, and so its resistance, stands still (DEVELOPERS.md, Loads with memory).
  */
-public final class FilamentLaw {
+final class FilamentLaw {
     /** Light grows as V to this power: handbook, 3.4..3.5. */
     private static final double LIGHT_EXPONENT = 3.4;
 
@@ -15,38 +15,38 @@ public final class FilamentLaw {
 
     private final Load.Filament filament;
 
-    public FilamentLaw(Load.Filament filament) {
+    FilamentLaw(Load.Filament filament) {
         this.filament = filament;
     }
 
-    /** Rms voltage in V to rms voltage over this lamp's resistance there, ohm. */
-    public double ohmsAt(double rmsVolts) {
+    /** Resistance at an rms voltage in V, ohm. */
+    double ohmsAt(double rmsVolts) {
         double warm = filament.resistanceOhms() * Math.pow(rmsVolts / filament.ratedVolts(), 2 - filament.exponent());
         return Math.max(coldOhms(), warm);
     }
 
     /** Resistance of the cold filament, ohm. */
-    public double coldOhms() {
+    double coldOhms() {
         return filament.resistanceOhms() / filament.coldRatio();
     }
 
     /** Power at an rms voltage in V, W. */
-    public double wattsAt(double rmsVolts) {
+    double wattsAt(double rmsVolts) {
         return rmsVolts == 0 ? 0 : rmsVolts * rmsVolts / ohmsAt(rmsVolts);
     }
 
     /** Light at an rms voltage in V as a share of the light at rated voltage. */
-    public double lightShareAt(double rmsVolts) {
+    double lightShareAt(double rmsVolts) {
         return Math.pow(rmsVolts / filament.ratedVolts(), LIGHT_EXPONENT);
     }
 
-    /** Rms voltage at which a power in W is taken, V. */
-    public double voltsFor(double watts) {
+    /** Rms voltage, V, at which a power in W is taken. */
+    double voltsFor(double watts) {
         double warm = filament.ratedVolts() * Math.pow(watts / filament.ratedWatts(), 1 / filament.exponent());
         return Math.min(warm, Math.sqrt(watts * ohmsAt(warm)));
     }
 
-    /** Given what rms voltage a resistance gets, V from ohm, the resistance that the filament settles at, ohm. */
+    /** What rms voltage, V, a resistance in ohms gets where the filament is. */
     interface RmsVolts {
         double over(double ohms);
     }

@@ -22,6 +22,7 @@ import java.util.OptionalDouble;
 record Firings(
         List<ActingPulses.Slot> slots, List<GateWindow> windows, int halves, double latchingAmps, double turnOnRad) {
 
+    /** When the pulses of a solution drive the gate. */
     static Firings of(Design design, Condition condition, Solution solution) {
         double turnOn = design.thyristor().device().gate().turnOnSeconds().orElse(0);
         return new Firings(

@@ -13,6 +13,7 @@ import clipramp.circuit.Stage;
 final class FullPower {
     private FullPower() {}
 
+    /** That power, W. */
     static double watts(Design design, Condition condition) {
         double rms = condition.lineVolts() * design.line().rmsFactor();
         Load load = design.load();
@@ -50,12 +51,7 @@ final class FullPower {
         LoadPeriod period = new InductiveRun(loop, always.windows(), always.spanRad(), 0, 0, order).settle();
         double square = 0;
         for (CurrentSpan span : period.spans()) {
-            double[] sum = {0};
-            SpanQuadrature.visit(span, 2 * order + 2, (rad, weight) -> {
-                double amps = span.amps().applyAsDouble(rad);
-                sum[0] += weight * amps * amps;
-            });
-            square += sum[0];
+            square += SpanQuadrature.squareAmpRad(span, order);
         }
         return square / period.spanRad() * load.resistanceOhms();
     }

@@ -16,6 +16,7 @@ import java.util.List;
  * @param half running number of the load's half cycle that it acts in
  */
 record GateWindow(double fromRad, double toRad, int half) {
+    /** The same so many radians and half cycles later. */
     GateWindow shifted(double rad, int halves) {
         return new GateWindow(fromRad + rad, toRad + rad, half + halves);
     }

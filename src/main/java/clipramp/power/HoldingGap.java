@@ -13,12 +13,15 @@ import org.apache.commons.math3.analysis.solvers.BrentSolver;
 
 /**
  * How long a thyristor is let recover: the time for which its current stays under the holding current, or for which it is
- * reverse biased, before forward voltage comes back.
+ * reverse biased, before forward voltage comes back (DEVELOPERS.md, Commutation, snubber, inrush).
  */
 public final class HoldingGap {
     private static final double ACCURACY_RAD = 1e-12;
     private static final int TRIALS = 200;
     private static final double STEP_RAD = 0.002;
+
+    /** At the line's zero nothing drives a current yet; so much later something does, rad. */
+    private static final double AFTER_ZERO_RAD = 1e-3;
 
     private HoldingGap() {}
 
@@ -92,8 +95,9 @@ public final class HoldingGap {
         for (double zero : new double[] {line.positiveStartRad(), line.negativeStartRad()}) {
             double carried = freewheelingAmps(period, zero);
             if (carried <= holdingAmps) {
-                InductiveCurrent grown = loop.throughThyristor(zero + 1e-3, loop.directionAt(zero + 1e-3), carried);
-                double until = PulseLength.reachesRad(grown, zero + 1e-3, zero + Math.PI / 2, holdingAmps);
+                double from = zero + AFTER_ZERO_RAD;
+                InductiveCurrent grown = loop.throughThyristor(from, loop.directionAt(from), carried);
+                double until = PulseLength.reachesRad(grown, from, zero + Math.PI / 2, holdingAmps);
                 least = Math.min(least, Math.min(until, zero + Math.PI / 2) - zero);
                 continue;
             }

@@ -78,6 +78,8 @@ final class InductiveRun {
     private int next;
 
     /**
+     * A run from rest.
+     *
      * @param loop the loops that the current can flow in
      * @param windows gate windows of one span in order; one that crosses the span's end acts in the next one too
      * @param spanRad the span, a multiple of 2 pi, rad

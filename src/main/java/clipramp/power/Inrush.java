@@ -8,7 +8,7 @@ import clipramp.engine.InductiveCurrent;
 /**
  * The first half cycle of a load that was off for long, switched on at the worst instant. A cold resistance is kept for
  * the whole half cycle, which is on the safe side: a filament warms within a few milliseconds. An inductive load's core is
- * taken as not saturating.
+ * taken as not saturating (DEVELOPERS.md, Commutation, snubber, inrush).
  *
  * @param peakAmps largest current, A
  * @param ampsSquaredSeconds integral of the squared current over that half cycle's conduction, A²s
@@ -18,7 +18,13 @@ public record Inrush(double peakAmps, double ampsSquaredSeconds, double coldOhms
     private static final double STEP_RAD = Math.toRadians(5);
     private static final double LATER_RAD = 2e-5;
 
-    /** The worst first half cycle at a line voltage. */
+    /**
+     * The worst first half cycle: of a resistance from the zero on, of an inductance from the worst angle that a search in
+     * steps of five degrees finds.
+     *
+     * @param design stage and load
+     * @param condition line voltage
+     */
     public static Inrush worst(Design design, Condition condition) {
         double cold = design.load().resistanceOhms() / design.load().coldRatio();
         if (design.load() instanceof Load.Inductive inductive) {
@@ -50,12 +56,7 @@ public record Inrush(double peakAmps, double ampsSquaredSeconds, double coldOhms
             double end = Math.min(current.extinctionRad(rad + 2 * Math.PI), rad + 2 * Math.PI);
             CurrentSpan span = loop.thyristorSpan(rad, end, direction, current);
             peak = Math.max(peak, SpanPeak.of(span, order));
-            double[] sum = {0};
-            SpanQuadrature.visit(span, 2 * order + 2, (at, weight) -> {
-                double amps = span.amps().applyAsDouble(at);
-                sum[0] += weight * amps * amps;
-            });
-            square = Math.max(square, sum[0]);
+            square = Math.max(square, SpanQuadrature.squareAmpRad(span, order));
         }
         return new Inrush(peak, square / condition.omega(), load.resistanceOhms());
     }

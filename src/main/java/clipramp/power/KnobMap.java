@@ -13,9 +13,14 @@ public final class KnobMap {
     private KnobMap() {}
 
     /**
-     * Operating points at evenly spaced knob positions 0..1; one, without a position, for a fixed ramp.
+     * Operating points at evenly spaced knob positions from 0 (fully anticlockwise) to 1; one, without a position, for a
+     * fixed ramp.
      *
+     * @param design the design
+     * @param condition line and temperature
      * @param positions how many, 2 or more
+     * @throws IllegalArgumentException for fewer
+     * @throws RefusedCircuit as {@link Firing}
      */
     public static List<OperatingPoint> of(Design design, Condition condition, int positions) {
         if (positions < 2) {
@@ -34,7 +39,11 @@ public final class KnobMap {
     /**
      * One operating point.
      *
+     * @param design the design
+     * @param condition line and temperature
      * @param position knob position, 0 fully anticlockwise .. 1 fully clockwise; ignored for a fixed ramp
+     * @throws IllegalArgumentException for a position outside 0..1 of a ramp with a pot
+     * @throws RefusedCircuit as {@link Firing}
      */
     public static OperatingPoint at(Design design, Condition condition, double position) {
         return design.ramp().pot().isEmpty()
@@ -46,7 +55,14 @@ public final class KnobMap {
                         design.ramp().rampOhms(position));
     }
 
-    /** The operating point of a whole R_E in ohms, with the knob position that gives it, if one does. */
+    /**
+     * The operating point of a whole R_E, with the knob position that gives it, if one does.
+     *
+     * @param design the design
+     * @param condition line and temperature
+     * @param rampOhms R_E, ohm, above 0
+     * @throws RefusedCircuit as {@link Firing}
+     */
     public static OperatingPoint atRampOhms(Design design, Condition condition, double rampOhms) {
         return point(design, condition, KnobSearch.position(design.ramp(), rampOhms), rampOhms);
     }

@@ -14,13 +14,14 @@ import org.apache.commons.math3.analysis.solvers.BrentSolver;
 
 /**
  * The knob backwards: which R_E, and which position, gives a firing angle, a power or a voltage. Roots of the exact
- * engine over the logarithm of R_E; more R_E fires later and gives less.
+ * engine over the logarithm of R_E between 1 ohm and 1 Gohm; more R_E fires later and gives less. R_E comes out to 1e-10 of
+ * it, which moves the angle by less than 1e-8 of a degree. Where the target is jumped over (firing on one side, silent on
+ * the other) there is no root, and the answer is none (DEVELOPERS.md, Power).
  */
 public final class KnobSearch {
     private static final double LEAST_OHMS = 1;
     private static final double MOST_OHMS = 1e9;
     private static final double STEP = Math.log(1.6);
-    /** 1e-10 of R_E moves the angle by less than 1e-8 of a degree. */
     private static final double LOG_ACCURACY = 1e-10;
 
     /** Share of pi, or of full power, from which a step across the root is a jump. */
@@ -34,26 +35,31 @@ public final class KnobSearch {
     /**
      * The whole R_E that fires at an angle.
      *
+     * @param design the design
+     * @param condition line and temperature
      * @param firingRad wanted firing angle, rad, 0..pi
-     * @return ohms; empty where no R_E fires there
+     * @return ohm; empty where no R_E fires there
      */
     public static OptionalDouble rampOhmsForAngle(Design design, Condition condition, double firingRad) {
-        return search(guessOhms(design, condition, firingRad), ohms -> {
-            Solution solution = Firing.solve(design, condition, ohms);
-            return (firstFiringRad(design, solution) - firingRad) / Math.PI;
-        });
+        return search(guessOhms(design, condition, firingRad), lateness(design, condition, firingRad));
+    }
+
+    /** By how much of pi an R_E in ohms fires later than wanted. */
+    private static UnivariateFunction lateness(Design design, Condition condition, double firingRad) {
+        return ohms -> (firstFiringRad(design, Firing.solve(design, condition, ohms)) - firingRad) / Math.PI;
     }
 
     /**
      * The whole R_E that fires at an angle, or the nearer side of the jump where the angle is jumped over: the charge that
      * one half cycle leaves to the next changes suddenly where it holds one pulse more.
      *
+     * @param design the design
+     * @param condition line and temperature
      * @param firingRad wanted firing angle, rad, 0..pi
-     * @return ohms; empty where no R_E fires within three degrees of it
+     * @return ohm; empty where no R_E fires within three degrees of it
      */
     public static OptionalDouble nearestRampOhmsForAngle(Design design, Condition condition, double firingRad) {
-        UnivariateFunction over =
-                ohms -> (firstFiringRad(design, Firing.solve(design, condition, ohms)) - firingRad) / Math.PI;
+        UnivariateFunction over = lateness(design, condition, firingRad);
         OptionalDouble root = root(guessOhms(design, condition, firingRad), over);
         if (root.isEmpty()) {
             return root;
@@ -72,8 +78,10 @@ public final class KnobSearch {
     /**
      * The whole R_E that gives a load power.
      *
+     * @param design the design
+     * @param condition line and temperature
      * @param watts wanted load power, W
-     * @return ohms; empty where no R_E gives it
+     * @return ohm; empty where no R_E gives it
      */
     public static OptionalDouble rampOhmsForWatts(Design design, Condition condition, double watts) {
         return rampOhmsFor(design, condition, LoadResult::watts, watts, LoadPower.fullWatts(design, condition));
@@ -97,8 +105,10 @@ public final class KnobSearch {
     }
 
     /**
-     * The firing angle that gives a load power when both half cycles fire at it.
+     * The firing angle that gives a load power when both half cycles fire at it, to 1e-13 rad.
      *
+     * @param design the design
+     * @param condition line and temperature
      * @param watts wanted load power, W
      * @return rad; empty where no angle gives it
      */
@@ -106,7 +116,7 @@ public final class KnobSearch {
         return firingRadFor(design, condition, LoadResult::watts, watts);
     }
 
-    /** The firing angle, rad, that gives a load rms voltage in volts; empty where none does. */
+    /** The firing angle, rad, that gives a load rms voltage in volts when both half cycles fire at it; empty for none. */
     public static OptionalDouble firingRadForVolts(Design design, Condition condition, double volts) {
         return firingRadFor(design, condition, LoadResult::rmsVolts, volts);
     }

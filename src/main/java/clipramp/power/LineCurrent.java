@@ -8,7 +8,7 @@ import java.util.List;
 
 /**
  * What the load's current is for the line: its Fourier series to the 40th order, exactly as integrals over the stretches
- * of current. The firing supply's own few milliamperes are left out.
+ * of current, exact to rounding (DEVELOPERS.md, Line current). The firing supply's own few milliamperes are left out.
  *
  * @param fundamentalAmps rms of the fundamental, A
  * @param harmonics orders 2 to 40
@@ -41,6 +41,7 @@ public record LineCurrent(
      */
     public record Harmonic(int order, double amps, double phaseRad) {}
 
+    /** Keeps a copy of the harmonics. */
     public LineCurrent {
         harmonics = List.copyOf(harmonics);
     }
@@ -57,12 +58,12 @@ public record LineCurrent(
                 .current(condition.lineVolts() * design.line().rmsFactor(), SpanTotals.highestOrder(design.line()));
     }
 
-    /** Rms of one order, 1 to 40, A. */
+    /** Rms of one order, 1 to {@link #HIGHEST_ORDER}, A. */
     public double ampsOf(int order) {
         return order == 1 ? fundamentalAmps : harmonics.get(order - 2).amps();
     }
 
-    /** One order as a share of the fundamental; NaN with no current. */
+    /** One order, 1 to {@link #HIGHEST_ORDER}, as a share of the fundamental; NaN with no current. */
     public double shareOf(int order) {
         return fundamentalAmps > 0 ? ampsOf(order) / fundamentalAmps : Double.NaN;
     }

@@ -9,7 +9,7 @@ import java.util.OptionalDouble;
  * and harmonics are all integrals over these stretches.
  *
  * @param spanRad angle that the stretches cover, a multiple of 2 pi, rad
- * @param spans stretches of current in order, from 0 to {@code spanRad}
+ * @param spans stretches of current in order, from 0, the fundamental's positive-going zero, to {@code spanRad}
  * @param firedRad angle, counted from the zero of its own half cycle, at which current first begins in the thyristor;
  *     empty where none does
  * @param extinctionRad angle, counted from the same zero, at which the load's current ends; empty where there is none,
@@ -31,11 +31,12 @@ public record LoadPeriod(
     /** Two stretches nearer than this follow each other without a gap, rad. */
     private static final double NEXT_RAD = 1e-5;
 
+    /** Keeps a copy of the stretches. */
     public LoadPeriod {
         spans = List.copyOf(spans);
     }
 
-    /** Angles at which a current through the thyristor dies and none takes its place, rad. */
+    /** Line angles, 0 to {@code spanRad}, at which a current through the thyristor dies and none takes its place, rad. */
     public List<Double> extinctionsRad() {
         List<Double> ends = new ArrayList<>();
         for (int i = 0; i < spans.size(); i++) {
@@ -49,7 +50,7 @@ public record LoadPeriod(
         return ends;
     }
 
-    /** Half cycles of the line in the span. */
+    /** How many half cycles of the line the span holds. */
     public int halfCycles() {
         return (int) Math.round(spanRad / Math.PI);
     }

@@ -14,7 +14,8 @@ import java.util.OptionalDouble;
 /**
  * What a load gets from the pulses of a solution. A resistor's means are closed forms (quadrature on a line with
  * harmonics); a filament is a resistor at the temperature that its own rms voltage gives it; an inductive load is run
- * from pulse to extinction until it repeats. Derivations: DEVELOPERS.md, The circuit laws, Power.
+ * from pulse to extinction until it repeats within 1e-12 of the crest current. Derivations: DEVELOPERS.md, Power, and
+ * Loads with memory. Every method throws {@link RefusedCircuit} where the line has more than two zeros a period.
  */
 public final class LoadPower {
     private LoadPower() {}
@@ -23,27 +24,37 @@ public final class LoadPower {
      * Power, currents and on-state loss over whole periods of the line.
      *
      * @param design stage, load and thyristor
-     * @param condition line
+     * @param condition line voltage; temperature for the latching current of an inductive load
      * @param solution the firing circuit's periodic state there
      */
     public static LoadResult of(Design design, Condition condition, Solution solution) {
         return of(design, condition, Firings.of(design, condition, solution));
     }
 
-    /** The same with every half cycle fired at one angle, rad: what a firing angle is worth, whatever makes it. */
+    /**
+     * The same with every half cycle fired at one angle: what a firing angle is worth, whatever makes it.
+     *
+     * @param design stage, load and thyristor
+     * @param condition line voltage
+     * @param firingRad from the fundamental's zero that begins the half cycle, rad, 0..pi
+     */
     public static LoadResult atFiringAngle(Design design, Condition condition, double firingRad) {
         return of(design, condition, Firings.heldFrom(design, condition, firingRad));
     }
 
     /**
-     * The same where something beside the thyristor, such as a shorted diode, carries every negative half cycle whole. The
-     * thyristor's own currents are those of both together.
+     * Power and currents where something beside the thyristor, such as a shorted diode, carries every negative half cycle
+     * whole. The thyristor's own currents are those of both together.
+     *
+     * @param design stage, load and thyristor
+     * @param condition line voltage
+     * @param solution the firing circuit's periodic state there; of its pulses only those of positive half cycles act
      */
     public static LoadResult withNegativeHalvesFree(Design design, Condition condition, Solution solution) {
         return of(design, condition, negativeHalvesFree(design, condition, solution));
     }
 
-    /** The load's current there. */
+    /** The load's current itself, where something beside the thyristor carries every negative half cycle whole. */
     public static LoadPeriod periodWithNegativeHalvesFree(Design design, Condition condition, Solution solution) {
         return period(design, condition, negativeHalvesFree(design, condition, solution));
     }
@@ -58,7 +69,7 @@ public final class LoadPower {
         return period(design, condition, Firings.of(design, condition, solution));
     }
 
-    /** The load's current with every half cycle fired at one angle, rad. */
+    /** The load's current with every half cycle fired at one angle in rad from the zero that begins it, 0..pi. */
     public static LoadPeriod periodAtFiringAngle(Design design, Condition condition, double firingRad) {
         return period(design, condition, Firings.heldFrom(design, condition, firingRad));
     }

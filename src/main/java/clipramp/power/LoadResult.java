@@ -55,6 +55,7 @@ public record LoadResult(
         int halfCycles,
         boolean letsGo,
         OptionalDouble lightShare) {
+    /** Keeps a copy of the list. */
     public LoadResult {
         halfWatts = List.copyOf(halfWatts);
     }

@@ -10,19 +10,22 @@ import java.util.List;
 /**
  * Voltage across the load over one half cycle, or over one period for a half-wave stage: what the line leaves while
  * current flows, the diode's drop while it freewheels, 0 otherwise. An inductive load's current of the half cycle before
- * may still flow as it begins.
+ * may still flow as it begins. The arrays are not copied, and nobody writes into them.
  *
  * @param rad angles of the line, rad, from 0, never falling; two samples where the voltage jumps
  * @param volts voltage across the load at those angles, V; on the dc side of a bridge positive but for a freewheeling
  *     diode's drop
  */
+@SuppressWarnings("ArrayRecordComponent") // shown, never compared
 public record LoadWave(double[] rad, double[] volts) {
     /** Samples of one conducting half cycle: a hundredth of it is under the width of a screen's pixel. */
     private static final int SAMPLES = 180;
 
     /**
+     * The wave of a solution.
+     *
      * @param design stage, load and thyristor
-     * @param condition line
+     * @param condition line voltage
      * @param solution the firing circuit's periodic state there
      */
     public static LoadWave of(Design design, Condition condition, Solution solution) {

@@ -11,6 +11,7 @@ import java.util.OptionalDouble;
  * @param load what the load gets
  */
 public record OperatingPoint(OptionalDouble position, Solution solution, LoadResult load) {
+    /** The whole R_E there, ohm. */
     public double rampOhms() {
         return solution.rampOhms();
     }

@@ -18,8 +18,10 @@ public final class PulseLength {
     /**
      * Time from firing, with no current flowing before, until the load's current reaches a value.
      *
-     * @param firingRad line angle of firing, rad
-     * @param amps the current to reach, A
+     * @param design stage and load, nominal
+     * @param condition line voltage
+     * @param firingRad line angle of firing, from the fundamental's positive-going zero, rad
+     * @param amps the current to reach, A, above 0
      * @return s; 0 for a resistor that has it at once; empty where it never gets there in this half cycle
      */
     public static OptionalDouble secondsToReach(Design design, Condition condition, double firingRad, double amps) {
@@ -53,7 +55,10 @@ public final class PulseLength {
         return Double.POSITIVE_INFINITY;
     }
 
-    /** phi = atan(wL/R): the load's angle, under which a thyristor has nothing to control, rad; 0 for a resistor. */
+    /**
+     * phi = atan(w L/R), R everything resistive in the load's loop: the load's angle, under which a thyristor has nothing to
+     * control, rad; 0 for a resistor.
+     */
     public static double loadAngleRad(Design design, Condition condition) {
         if (!(design.load() instanceof Load.Inductive load)) {
             return 0;

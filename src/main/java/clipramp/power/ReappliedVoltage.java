@@ -11,7 +11,8 @@ import java.util.function.DoubleUnaryOperator;
  *
  * <p>L i'' + (R + R_s) i' + i/C = 0 with i(0) = 0, i'(0) = V/L; the thyristor sees V - R i - L i', and its rate of rise is
  * R_s i' + i/C. The line is held for the microseconds that this takes. Without a snubber the stray capacitance of device
- * and wiring alone limits it: 100 pF, common practice.
+ * and wiring alone limits it: 100 pF, common practice (DEVELOPERS.md, Commutation, snubber, inrush). Largest values are
+ * looked for at instants so near to each other that they come out right to a thousandth.
  *
  * @param stepVolts line voltage at extinction, V
  * @param voltsPerSecond largest rate of rise, V/s
@@ -19,12 +20,14 @@ import java.util.function.DoubleUnaryOperator;
  * @param snubbed whether there is a snubber
  */
 public record ReappliedVoltage(double stepVolts, double voltsPerSecond, double peakVolts, boolean snubbed) {
-    /** Of device and wiring together: common practice. */
+    /** Stray capacitance of device and wiring together, F: common practice. */
     public static final double STRAY_FARADS = 100e-12;
 
     private static final int SAMPLES = 600;
 
     /**
+     * The voltage that comes back after one extinction.
+     *
      * @param load the load
      * @param snubber resistor and capacitor, if there are any
      * @param stepVolts line voltage at the extinction, V, 0 or more

@@ -15,7 +15,7 @@ import org.apache.commons.math3.optim.univariate.UnivariateObjectiveFunction;
 
 /**
  * Current of a resistor behind a thyristor and a bridge: i = max(0, (|v| - D)/R) from the firing angle until it first
- * reaches zero, with D = V_T0 + n_b V_F and R = load + r_T + n_b slope (DEVELOPERS.md, The circuit laws).
+ * reaches zero, with D = V_T0 + n_b V_F and R = load + r_T + n_b slope (DEVELOPERS.md, Power).
  *
  * <p>A sinusoidal line is integrated in closed form; a line with harmonics by Gauss-Legendre quadrature on panels short
  * against its highest order, between limits found to 1e-13 rad.

@@ -14,13 +14,17 @@ import clipramp.circuit.Stage;
  *     the capacitor once
  * @param leakageWatts what the load gets from it, W
  * @param resistorWatts loss of the resistor, fired at the crest, W
- * @param dischargeAmps capacitor's current into the thyristor fired at the crest, A
+ * @param dischargeAmps V/R_s, the capacitor's current into the thyristor fired at the crest, A
  */
 public record SnubberDuty(double leakageAmps, double leakageWatts, double resistorWatts, double dischargeAmps) {
 
     /**
      * The worst over every firing angle. Each firing at the crest turns C V²/2 into heat; with an inductive load the
-     * step back at extinction costs as much again at most.
+     * step back at extinction costs as much again at most (DEVELOPERS.md, Commutation, snubber, inrush).
+     *
+     * @param design stage and load
+     * @param snubber across its thyristor
+     * @param condition line voltage and frequency
      */
     public static SnubberDuty worst(Design design, Snubber snubber, Condition condition) {
         double farads = snubber.capacitanceFarads();

@@ -12,6 +12,7 @@ final class SpanPeak {
 
     private SpanPeak() {}
 
+    /** That current, A; samples lie a fifth of a radian of the line's highest order apart. */
     static double of(CurrentSpan span, int highestOrder) {
         double length = span.toRad() - span.fromRad();
         int samples = Math.max(8, (int) Math.ceil(length * highestOrder / 0.2));

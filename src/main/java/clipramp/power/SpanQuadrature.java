@@ -16,14 +16,16 @@ final class SpanQuadrature {
 
     private SpanQuadrature() {}
 
-    /** Is shown a node of the rule. */
+    /** What sums up an integral. */
     interface Visitor {
+        /** One node of the rule: its line angle, rad, and its weight, rad, that the value there is multiplied by. */
         void node(double rad, double weightRad);
     }
 
     /**
      * Visits the nodes of a stretch.
      *
+     * @param span the stretch
      * @param highestOrder order of the line of the fastest sinusoid in the integrand
      */
     static void visit(CurrentSpan span, int highestOrder, Visitor visitor) {
@@ -42,10 +44,31 @@ final class SpanQuadrature {
     /**
      * Visits the nodes between two angles.
      *
+     * @param fromRad line angle, rad
+     * @param toRad line angle, rad; at or before {@code fromRad} nothing is visited
      * @param highestOrder order of the line of the fastest sinusoid in the integrand
      */
     static void visit(double fromRad, double toRad, int highestOrder, Visitor visitor) {
         panels(fromRad, toRad, MOST_TURN_RAD / highestOrder, visitor);
+    }
+
+    /**
+     * Integral over angle of the squared current of a stretch, A² rad.
+     *
+     * @param lineOrder highest order of the line
+     */
+    static double squareAmpRad(CurrentSpan span, int lineOrder) {
+        double[] sum = {0};
+        visit(span, productOrder(lineOrder), (rad, weight) -> {
+            double amps = span.amps().applyAsDouble(rad);
+            sum[0] += weight * amps * amps;
+        });
+        return sum[0];
+    }
+
+    /** Order that integrands of two currents or voltages are integrated for: products turn twice as fast as either. */
+    static int productOrder(int lineOrder) {
+        return 2 * lineOrder + 2;
     }
 
     private static void panels(double from, double to, double longest, Visitor visitor) {

@@ -41,11 +41,14 @@ final class SpanTotals {
         }
     }
 
+    /** Highest order of the line's harmonics; 1 without any. */
     static int highestOrder(Line line) {
         return line.harmonics().stream().mapToInt(Line.Harmonic::order).max().orElse(1);
     }
 
     /**
+     * What load and thyristor get.
+     *
      * @param halves how many of the solution's half cycles differ
      * @param slots which of them each half cycle of the load belongs to
      */
@@ -71,8 +74,7 @@ final class SpanTotals {
     private void addWithin(CurrentSpan span, int half) {
         Duty duty = span.direction() >= 0 ? forward : backward;
         boolean thyristor = span.throughThyristor();
-        // Products of two currents turn twice as fast as either.
-        SpanQuadrature.visit(span, 2 * highestOrder + 2, (rad, weight) -> {
+        SpanQuadrature.visit(span, SpanQuadrature.productOrder(highestOrder), (rad, weight) -> {
             double amps = span.amps().applyAsDouble(rad);
             double volts = span.loadVolts().applyAsDouble(rad);
             charge += weight * amps;

@@ -3,7 +3,7 @@ package clipramp.power;
 import clipramp.circuit.Thyristor;
 import java.util.OptionalDouble;
 
-/** Heat from the thyristor's junction to the air: T_j = T_a + P (R_thJC + R_thCA), DEVELOPERS.md, The circuit laws. */
+/** Heat from the thyristor's junction to the air: T_J = T_A + P (R_thJC + R_thCA). */
 public final class Thermal {
     private Thermal() {}
 
@@ -24,7 +24,7 @@ public final class Thermal {
     }
 
     /**
-     * The largest thermal resistance from case to air that keeps a junction at its limit.
+     * The largest thermal resistance from case to air that keeps a junction at its limit: (T_J - T_A)/P - R_thJC.
      *
      * @param junctionCelsius highest junction temperature, °C
      * @param ambientCelsius air, °C
