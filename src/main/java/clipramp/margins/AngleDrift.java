@@ -1,14 +1,13 @@
 package clipramp.margins;
 
 import clipramp.circuit.Condition;
-import clipramp.firing.HalfCycle;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.OptionalDouble;
 
 /** How far line voltage and frequency alone move the firing angle at mid-knob. */
 final class AngleDrift {
-    /** A rule of ours: at 90 degrees it is 3 % of full power. */
+    /** A rule of ours, degrees: at 90 it is 3 % of full power. */
     private static final double ALLOWED_DEGREES = 3;
 
     /** EN 50160: the interconnected network keeps its frequency within 1 % nearly always. */
@@ -55,7 +54,6 @@ final class AngleDrift {
     }
 
     private OptionalDouble firingRad(Condition condition, double ohms) {
-        HalfCycle half = bench.solution(condition, ohms).shown();
-        return half.firingRad();
+        return bench.solution(condition, ohms).shown().firingRad();
     }
 }

@@ -23,11 +23,11 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.function.ToDoubleFunction;
+import java.util.stream.DoubleStream;
 
 /** A design on the bench: everything that the margins ask of it, solved once. Lives for one run of the judge. */
 final class Bench {
     private static final int KNOB_STEPS = 10;
-    private static final double USUAL_CELSIUS = 25;
 
     private record Setting(Condition condition, double rampOhms) {}
 
@@ -47,7 +47,9 @@ final class Bench {
         this.design = design;
         this.conditions = JudgedCondition.of(design, pinnedVolts, pinnedCelsius);
         this.usual = new Condition(
-                pinnedVolts.orElse(design.line().volts()), design.line().hertz(), pinnedCelsius.orElse(USUAL_CELSIUS));
+                pinnedVolts.orElse(design.line().volts()),
+                design.line().hertz(),
+                pinnedCelsius.orElse(JudgedCondition.USUAL_CELSIUS));
         double atStart = design.ramp().rampOhms(0);
         double atEnd = design.ramp().rampOhms(1);
         this.leastOhms = Math.min(atStart, atEnd);
@@ -69,23 +71,21 @@ final class Bench {
 
     /** The judged conditions at their lowest temperature. */
     List<JudgedCondition> coldest() {
-        double coldest = conditions.stream()
-                .mapToDouble(c -> c.condition().celsius())
-                .min()
-                .orElseThrow();
-        return conditions.stream()
-                .filter(c -> c.condition().celsius() == coldest)
-                .toList();
+        return at(temperatures().min().orElseThrow());
     }
 
     /** The judged conditions at their highest temperature. */
     List<JudgedCondition> hottest() {
-        double hottest = conditions.stream()
-                .mapToDouble(c -> c.condition().celsius())
-                .max()
-                .orElseThrow();
+        return at(temperatures().max().orElseThrow());
+    }
+
+    private DoubleStream temperatures() {
+        return conditions.stream().mapToDouble(at -> at.condition().celsius());
+    }
+
+    private List<JudgedCondition> at(double celsius) {
         return conditions.stream()
-                .filter(c -> c.condition().celsius() == hottest)
+                .filter(at -> at.condition().celsius() == celsius)
                 .toList();
     }
 
@@ -99,7 +99,7 @@ final class Bench {
         return mostOhms;
     }
 
-    /** The ends of the knob are asked for everything, so they are studied at once. */
+    /** The periodic state, solved once. The ends of the knob are asked for everything, so they are studied at once. */
     Solution solution(Condition condition, double rampOhms) {
         if (rampOhms == leastOhms || rampOhms == mostOhms) {
             return study(condition, rampOhms).solution();
@@ -206,7 +206,7 @@ final class Bench {
     }
 
     /**
-     * The largest R_E, of eleven knob settings, whose first pulse comes before the supply's collapse: the latest firing
+     * The largest R_E in ohms, of eleven knob settings, whose first pulse comes before the supply's collapse: the latest firing
      * that is meant as one.
      */
     OptionalDouble latestOhms(Condition condition) {
@@ -222,7 +222,14 @@ final class Bench {
         return first.isPresent() && !first.get().endPulse();
     }
 
-    /** R_E at eleven evenly spaced knob positions; one for a fixed ramp. */
+    /** Knob position of one of the {@link #settings}, 0..1; empty for a fixed ramp. */
+    OptionalDouble positionOf(int setting) {
+        return design.ramp().pot().isEmpty()
+                ? OptionalDouble.empty()
+                : OptionalDouble.of((double) setting / KNOB_STEPS);
+    }
+
+    /** R_E at eleven evenly spaced knob positions, ohm; one for a fixed ramp. */
     List<Double> settings() {
         if (design.ramp().pot().isEmpty()) {
             return List.of(leastOhms);

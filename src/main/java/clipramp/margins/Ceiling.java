@@ -40,6 +40,7 @@ final class Ceiling {
         return Finding.worst(kind, findings);
     }
 
+    /** A margin that cannot be judged anywhere, for want of a datum that is named in words. */
     static Margin unjudged(MarginKind kind, String missing) {
         return Finding.worst(kind, List.of(Finding.missing(kind, "any condition", missing)));
     }

@@ -4,7 +4,7 @@ import clipramp.circuit.Condition;
 import clipramp.circuit.Design;
 import clipramp.engine.Network;
 
-/** The clipped supply at the line's crest, the ramp held at the peak point (DEVELOPERS.md, The circuit laws). */
+/** The clipped supply at the line's crest, the ramp held at the peak point (DEVELOPERS.md, The clipped supply). */
 final class ClippedSupply {
     private ClippedSupply() {}
 

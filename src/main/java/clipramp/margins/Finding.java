@@ -16,10 +16,12 @@ import java.util.OptionalDouble;
  */
 record Finding(String condition, double demand, double offered, Sense sense, String formula) {
 
+    /** A finding that is none: a datum, named in words, is missing. */
     static Finding missing(MarginKind kind, String condition, String datum) {
         return new Finding(condition, Double.NaN, Double.NaN, kind.sense(), "not judged: " + datum);
     }
 
+    /** Offered over demand, or demand over offered for a ceiling; empty for a zero divisor or a missing datum. */
     OptionalDouble ratio() {
         double over = sense == Sense.AT_LEAST ? offered : demand;
         double under = sense == Sense.AT_LEAST ? demand : offered;
@@ -28,6 +30,7 @@ record Finding(String condition, double demand, double offered, Sense sense, Str
                 : OptionalDouble.of(over / under);
     }
 
+    /** The word for this finding alone. */
     Verdict verdict(MarginKind kind) {
         if (Double.isNaN(demand) || Double.isNaN(offered)) {
             return Verdict.NOT_JUDGED;
@@ -50,9 +53,9 @@ record Finding(String condition, double demand, double offered, Sense sense, Str
     /** The margin of the worst of several findings of one kind. */
     static Margin worst(MarginKind kind, List<Finding> findings) {
         Comparator<Finding> gravity =
-                Comparator.comparing((Finding f) -> f.verdict(kind)).reversed();
+                Comparator.comparing((Finding finding) -> finding.verdict(kind)).reversed();
         Finding worst = findings.stream()
-                .min(gravity.thenComparingDouble(f -> f.rank(kind)))
+                .min(gravity.thenComparingDouble(finding -> finding.rank(kind)))
                 .orElseThrow();
         return new Margin(
                 kind,

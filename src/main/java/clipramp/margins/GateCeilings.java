@@ -14,7 +14,7 @@ import java.util.OptionalDouble;
 import java.util.function.DoubleFunction;
 import java.util.function.ToDoubleFunction;
 
-/** What the thyristor's gate bears: between pulses, in them, and on the whole (DEVELOPERS.md, The circuit laws). */
+/** What the thyristor's gate bears: between pulses, in them, and on the whole (DEVELOPERS.md, Margins). */
 final class GateCeilings {
     private final Bench bench;
     private final Design design;
@@ -47,10 +47,7 @@ final class GateCeilings {
     private Margin standing() {
         MarginKind kind = MarginKind.GATE_STANDING_VOLTAGE;
         if (device.gate().nonTrigger().isEmpty()) {
-            return Finding.worst(
-                    kind,
-                    List.of(Finding.missing(
-                            kind, "any condition", "the profile states no thyristor.device.gate.non-trigger")));
+            return Ceiling.unjudged(kind, "the profile states no thyristor.device.gate.non-trigger");
         }
         NonTrigger none = device.gate().nonTrigger().get();
         List<Finding> findings = new ArrayList<>();
@@ -84,14 +81,12 @@ final class GateCeilings {
             String key,
             DoubleFunction<String> say) {
         if (limit.isEmpty()) {
-            return Finding.worst(
-                    kind,
-                    List.of(Finding.missing(kind, "any condition", "the profile states no thyristor.device." + key)));
+            return Ceiling.unjudged(kind, "the profile states no thyristor.device." + key);
         }
         List<Finding> findings = new ArrayList<>();
         for (JudgedCondition at : bench.conditions()) {
             double highest = typical(at).stream()
-                    .flatMap(s -> Bench.pulses(s).stream())
+                    .flatMap(solution -> Bench.pulses(solution).stream())
                     .mapToDouble(peak)
                     .max()
                     .orElse(0);
@@ -108,10 +103,7 @@ final class GateCeilings {
     private Margin peakPower() {
         MarginKind kind = MarginKind.GATE_POWER_LIMIT;
         if (limits.peakWatts().isEmpty()) {
-            return Finding.worst(
-                    kind,
-                    List.of(Finding.missing(
-                            kind, "any condition", "the profile states no thyristor.device.gate.limits.peak-power")));
+            return Ceiling.unjudged(kind, "the profile states no thyristor.device.gate.limits.peak-power");
         }
         List<Finding> findings = new ArrayList<>();
         for (JudgedCondition at : bench.conditions()) {
@@ -145,10 +137,7 @@ final class GateCeilings {
     private Margin meanPower() {
         MarginKind kind = MarginKind.GATE_MEAN_POWER;
         if (limits.meanWatts().isEmpty()) {
-            return Finding.worst(
-                    kind,
-                    List.of(Finding.missing(
-                            kind, "any condition", "the profile states no thyristor.device.gate.limits.mean-power")));
+            return Ceiling.unjudged(kind, "the profile states no thyristor.device.gate.limits.mean-power");
         }
         List<Finding> findings = new ArrayList<>();
         for (JudgedCondition at : bench.conditions()) {

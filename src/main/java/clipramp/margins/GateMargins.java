@@ -17,7 +17,7 @@ import java.util.List;
 import java.util.OptionalDouble;
 import java.util.Set;
 
-/** What the thyristor asks of the pulse (DEVELOPERS.md, The circuit laws). */
+/** What the thyristor asks of the pulse (DEVELOPERS.md, Margins). */
 final class GateMargins {
     private final Bench bench;
     private final Design design;
@@ -110,9 +110,9 @@ final class GateMargins {
 
     private Finding driven(MarginKind kind, JudgedCondition at, TriggerNeed need, Pulse pulse) {
         double demand = demanded(kind, need);
-        String at25 =
+        String junction =
                 "at " + Say.celsius(need.celsius()) + (need.extended() ? " (extended beyond the sheet's points)" : "");
-        String held = "gate held at V_GT " + Say.volts(need.volts()) + " " + at25 + shuntText(need.volts());
+        String held = "gate held at V_GT " + Say.volts(need.volts()) + " " + junction + shuntText(need.volts());
         if (kind == MarginKind.GATE_TIME && Double.isNaN(demand)) {
             return Finding.missing(kind, "any condition", "the profile states no thyristor.device.gate.turn-on");
         }
@@ -166,9 +166,7 @@ final class GateMargins {
                 findings.add(latched(kind, at, needed.getAsDouble(), pulse));
             }
         }
-        return findings.isEmpty()
-                ? Finding.worst(kind, List.of(Finding.missing(kind, "any condition", "there is no pulse")))
-                : Finding.worst(kind, findings);
+        return findings.isEmpty() ? Ceiling.unjudged(kind, "there is no pulse") : Finding.worst(kind, findings);
     }
 
     private Finding latched(MarginKind kind, JudgedCondition at, double needed, Pulse pulse) {

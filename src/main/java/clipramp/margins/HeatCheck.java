@@ -26,9 +26,15 @@ public record HeatCheck(
         OptionalDouble junctionCelsius,
         OptionalDouble sinkKelvinPerWatt) {
 
-    /** @param watts loss, W */
+    /**
+     * An on-state loss and the setting that it comes at.
+     *
+     * @param watts loss of one thyristor, W
+     * @param where the setting in words
+     */
     record Loss(double watts, String where) {}
 
+    /** The heat over all judged conditions. */
     static HeatCheck of(Bench bench) {
         Design design = bench.design();
         Loss worst = new Loss(-1, "");

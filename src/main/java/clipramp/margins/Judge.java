@@ -14,26 +14,23 @@ import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
 
-/** Solves a design and judges it. */
+/** Solves a design and judges it (DEVELOPERS.md, Margins). */
 public final class Judge {
-    private static final int KNOB_STEPS = 10;
-    private static final double USUAL_CELSIUS = 25;
     private static final double MID_KNOB = 0.5;
 
     private Judge() {}
 
     /**
+     * Every margin at the worst of the judged conditions, with knob table, pulse, heat and line current of the usual one.
+     *
      * @param design the design
-     * @param pinnedLineVolts judge at this line voltage only, V; empty for low, nominal and high
+     * @param pinnedLineVolts judge at this rms of the fundamental only, V, above 0; empty for low, nominal and high
      * @param pinnedCelsius judge at this temperature only, °C; empty for coldest, 25 °C and hottest
-     * @throws clipramp.circuit.RefusedCircuit where the circuit is unsound or not computed
+     * @throws clipramp.circuit.RefusedCircuit as {@link clipramp.firing.Firing}
      */
     public static Check check(Design design, OptionalDouble pinnedLineVolts, OptionalDouble pinnedCelsius) {
-        Condition condition = new Condition(
-                pinnedLineVolts.orElse(design.line().volts()),
-                design.line().hertz(),
-                pinnedCelsius.orElse(USUAL_CELSIUS));
         Bench bench = new Bench(design, pinnedLineVolts, pinnedCelsius);
+        Condition condition = bench.usual();
         List<Margin> margins = margins(bench, condition);
         Solution middle = bench.solution(condition, bench.midOhms());
         return new Check(
@@ -77,9 +74,8 @@ public final class Judge {
         List<Double> settings = bench.settings();
         for (int step = 0; step < settings.size(); step++) {
             double ohms = settings.get(step);
-            OptionalDouble position =
-                    settings.size() == 1 ? OptionalDouble.empty() : OptionalDouble.of((double) step / KNOB_STEPS);
-            rows.add(new OperatingPoint(position, bench.solution(condition, ohms), bench.load(condition, ohms)));
+            rows.add(new OperatingPoint(
+                    bench.positionOf(step), bench.solution(condition, ohms), bench.load(condition, ohms)));
         }
         return rows;
     }

@@ -18,7 +18,8 @@ import java.util.TreeSet;
  * @param words such as "low line, 0 °C"
  */
 record JudgedCondition(Condition condition, String words) {
-    private static final double USUAL_CELSIUS = 25;
+    /** Temperature at which data sheets and benches are read, °C. */
+    static final double USUAL_CELSIUS = 25;
 
     /** Line low, nominal, high by coldest, 25 °C, hottest; a pinned axis has one value. */
     static List<JudgedCondition> of(Design design, OptionalDouble pinnedVolts, OptionalDouble pinnedCelsius) {

@@ -17,13 +17,13 @@ import java.util.OptionalInt;
  * what was computed against which table, and leaves the rest to a test house and to local rules.
  *
  * @param settings the line current at every setting of the knob, usual condition
- * @param worst which of them uses most of the class A table; the one with the largest current where none flows
+ * @param worst index of the one that uses most of the class A table; the one with the largest current where none flows
  * @param orders every order at the setting where it is largest
  * @param rules what the standard says of this kind of load and control
- * @param fullWatts power of the load with the thyristor always on, W
+ * @param fullWatts power of the load with the thyristor always on, without drops, W
  */
 public record LineCheck(List<Setting> settings, int worst, List<Order> orders, List<Rule> rules, double fullWatts) {
-    /** Full power in watts up to which a class other than C has no limits. */
+    /** Full power up to which a class other than C has no limits, W. */
     static final double SMALL_WATTS = 75;
 
     /** Full power up to which symmetrical control of a heating element has no limits, W. */
@@ -32,13 +32,15 @@ public record LineCheck(List<Setting> settings, int worst, List<Order> orders, L
     /** Power up to which asymmetrical control is let through, W. */
     static final double ASYMMETRICAL_WATTS = 100;
 
-    /** Full power up to which an independent dimmer for incandescent lamps, or from which professional equipment, is free. */
+    /** Full power up to which an independent dimmer for incandescent lamps, or from which professional equipment, is free, W. */
     static final double LARGE_WATTS = 1000;
 
     /**
+     * One setting of the knob and what the line sees there.
+     *
      * @param position knob, 0..1; empty for a fixed ramp
      * @param rampOhms R_E, ohm
-     * @param firedRad where the current begins, rad; empty where none flows
+     * @param firedRad where the current begins, from the zero of its half cycle, rad; empty where none flows
      * @param watts load power, W
      * @param current the line current
      */
@@ -46,13 +48,15 @@ public record LineCheck(List<Setting> settings, int worst, List<Order> orders, L
             OptionalDouble position, double rampOhms, OptionalDouble firedRad, double watts, LineCurrent current) {}
 
     /**
+     * One order of the current at the setting where it is largest.
+     *
      * @param order 2 to 40
      * @param amps largest rms of any setting, A
      * @param position knob where that is, 0..1; empty for a fixed ramp
      * @param limitAmps class A, A
      */
     public record Order(int order, double amps, OptionalDouble position, double limitAmps) {
-        /** Share of the limit that is used. */
+        /** Share of the limit that is used, 0 or more. */
         public double used() {
             return amps / limitAmps;
         }
@@ -60,9 +64,13 @@ public record LineCheck(List<Setting> settings, int worst, List<Order> orders, L
 
     /** How what was computed stands to a rule. */
     public enum Standing {
+        /** The rule names none for such a case. */
         NO_LIMITS("no limits"),
+        /** Every order stays under its limit. */
         UNDER("under the limits"),
+        /** An order exceeds its limit. */
         OVER("over the limits"),
+        /** The rule does not allow this kind of control here. */
         RULED_OUT("ruled out");
 
         private final String word;
@@ -71,6 +79,7 @@ public record LineCheck(List<Setting> settings, int worst, List<Order> orders, L
             this.word = word;
         }
 
+        /** The words that answers give. */
         public String word() {
             return word;
         }
@@ -99,6 +108,7 @@ public record LineCheck(List<Setting> settings, int worst, List<Order> orders, L
             double bindsAtWatts,
             String text) {}
 
+    /** Keeps copies of the lists. */
     public LineCheck {
         settings = List.copyOf(settings);
         orders = List.copyOf(orders);
@@ -125,11 +135,13 @@ public record LineCheck(List<Setting> settings, int worst, List<Order> orders, L
     }
 
     /**
+     * The line current of several settings beside the tables.
+     *
      * @param design stage and load
-     * @param condition line
-     * @param settings the line current at the knob's settings
+     * @param condition line voltage
+     * @param settings at least one
      */
-    public static LineCheck of(Design design, Condition condition, List<Setting> settings) {
+    static LineCheck of(Design design, Condition condition, List<Setting> settings) {
         List<Order> orders = new ArrayList<>();
         for (int order = 2; order <= LineCurrent.HIGHEST_ORDER; order++) {
             orders.add(largest(order, settings));
@@ -157,7 +169,7 @@ public record LineCheck(List<Setting> settings, int worst, List<Order> orders, L
     }
 
     /** Share of the class A table that the worst order of a current uses. */
-    public static double mostUsed(LineCurrent current) {
+    static double mostUsed(LineCurrent current) {
         double most = 0;
         for (int order = 2; order <= LineCurrent.HIGHEST_ORDER; order++) {
             double limit = LineTable.CLASS_A.limitAmps(order, 0, 0).orElseThrow();
@@ -166,16 +178,15 @@ public record LineCheck(List<Setting> settings, int worst, List<Order> orders, L
         return most;
     }
 
+    /** The line current at every setting of the knob. */
     static LineCheck of(Bench bench, Condition condition) {
         Design design = bench.design();
         List<Double> ohms = bench.settings();
         List<Setting> settings = new ArrayList<>();
         for (int i = 0; i < ohms.size(); i++) {
-            OptionalDouble position =
-                    ohms.size() == 1 ? OptionalDouble.empty() : OptionalDouble.of((double) i / (ohms.size() - 1));
             double rampOhms = ohms.get(i);
             settings.add(new Setting(
-                    position,
+                    bench.positionOf(i),
                     rampOhms,
                     bench.load(condition, rampOhms).firedRad(),
                     bench.load(condition, rampOhms).watts(),

@@ -3,11 +3,11 @@ package clipramp.margins;
 import java.util.OptionalDouble;
 
 /** A table of IEC 61000-3-2: the largest rms current of an order that equipment of a class may draw. */
-public enum LineTable {
+enum LineTable {
     /** Amperes, whatever the equipment's power: class A, 230 V. */
-    CLASS_A("class A", LineTable.STANDARD + ", class A (clause 7.1, table 1" + LineTable.RECALLED) {
+    CLASS_A(LineTable.STANDARD + ", class A (clause 7.1, table 1" + LineTable.RECALLED) {
         @Override
-        public OptionalDouble limitAmps(int order, double fundamentalAmps, double powerFactor) {
+        OptionalDouble limitAmps(int order, double fundamentalAmps, double powerFactor) {
             return OptionalDouble.of(order % 2 == 0 ? even(order) : odd(order));
         }
 
@@ -33,9 +33,9 @@ public enum LineTable {
         }
     },
     /** Shares of the fundamental: lighting equipment above 25 W, as up to edition 4. */
-    CLASS_C("class C", LineTable.STANDARD + ", class C (clause 7.3, table 2" + LineTable.RECALLED) {
+    CLASS_C(LineTable.STANDARD + ", class C (clause 7.3, table 2" + LineTable.RECALLED) {
         @Override
-        public OptionalDouble limitAmps(int order, double fundamentalAmps, double powerFactor) {
+        OptionalDouble limitAmps(int order, double fundamentalAmps, double powerFactor) {
             return switch (order) {
                 case 2 -> OptionalDouble.of(0.02 * fundamentalAmps);
                 case 3 -> OptionalDouble.of(0.30 * powerFactor * fundamentalAmps);
@@ -54,29 +54,24 @@ public enum LineTable {
     /** Ends a reference: the figures were read in print, clauses and tables are numbered from memory. */
     static final String RECALLED = "; numbers of clauses and tables from memory)";
 
-    private final String title;
     private final String source;
 
-    LineTable(String title, String source) {
-        this.title = title;
+    LineTable(String source) {
         this.source = source;
     }
 
-    /** Such as "class A". */
-    public String title() {
-        return title;
-    }
-
-    /** Standard and table. */
-    public String source() {
+    /** Standard and table, and how they are known. */
+    String source() {
         return source;
     }
 
     /**
+     * The limit of one order.
+     *
      * @param order 2 to 40
-     * @param fundamentalAmps rms of the fundamental, A
-     * @param powerFactor true power factor, 0..1
+     * @param fundamentalAmps rms of the fundamental, A; class A does not ask
+     * @param powerFactor true power factor, 0..1; class A does not ask
      * @return A rms; empty where the table has no limit for the order
      */
-    public abstract OptionalDouble limitAmps(int order, double fundamentalAmps, double powerFactor);
+    abstract OptionalDouble limitAmps(int order, double fundamentalAmps, double powerFactor);
 }

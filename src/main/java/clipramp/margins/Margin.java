@@ -9,7 +9,7 @@ import java.util.OptionalDouble;
  * @param kind which margin, with its meaning, source and remedy
  * @param demand what is asked (or the ceiling), in {@code unit}; NaN where a datum is missing
  * @param offered what there is, in {@code unit}; NaN where a datum is missing
- * @param unit SI unit symbol, empty for ratios
+ * @param unit SI unit symbol; deg for angles, empty for shares and counts
  * @param sense which side is good
  * @param ratio offered over demand for at-least, demand over offered for at-most; empty for a zero divisor or a
  *     missing datum
@@ -37,7 +37,9 @@ public record Margin(
         List<String> parts) {
     /** Which side of the demand is good. */
     public enum Sense {
+        /** What there is must reach what is asked. */
         AT_LEAST("at-least"),
+        /** What there is must stay at or under the ceiling. */
         AT_MOST("at-most");
 
         private final String word;
@@ -46,19 +48,23 @@ public record Margin(
             this.word = word;
         }
 
+        /** The word that answers give. */
         public String word() {
             return word;
         }
     }
 
+    /** Keeps a copy of the parts. */
     public Margin {
         parts = List.copyOf(parts);
     }
 
+    /** The kind's id, such as gate-peak-current. */
     public String id() {
         return kind.id();
     }
 
+    /** The name that people read. */
     public String name() {
         return kind.title();
     }

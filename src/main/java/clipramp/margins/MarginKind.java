@@ -766,7 +766,7 @@ public enum MarginKind {
         this.parts = List.of(parts);
     }
 
-    /** The margin with an id such as gate-peak-current, if there is one. */
+    /** The kind with an id such as gate-peak-current, if there is one. */
     public static Optional<MarginKind> byId(String id) {
         for (MarginKind kind : values()) {
             if (kind.id.equals(id)) {

@@ -14,12 +14,14 @@ import clipramp.firing.Solution;
 import clipramp.gate.TriggerNeed;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Optional;
 import java.util.OptionalDouble;
 
 /** What a reader of a check should know beside its margins: the model's assumptions, with their size here. */
 final class Notes {
+    /** Share of the dropping resistor from which a load in series with it is told. */
     private static final double NOTICEABLE_LOAD_SHARE = 0.01;
+
+    /** Emitter leakage whose effect is told; any other moves the ramp in proportion, A. */
     private static final double LEAKAGE_AMPS = 0.1e-6;
 
     private final Bench bench;
@@ -104,7 +106,10 @@ final class Notes {
                             + " doubles and V_GT gains 1 V from 25 °C to -40 °C, common practice).");
         }
         if (design.trigger() instanceof Trigger.UnijunctionTrigger trigger
-                && trigger.device().baseOnePulse().flatMap(Notes::minimum).isEmpty()) {
+                && trigger.device()
+                        .baseOnePulse()
+                        .filter(pulse -> pulse.minVolts().isPresent())
+                        .isEmpty()) {
             add(
                     "typical-drive",
                     "The profile states no smallest base-one pulse: the drive margins are those of a typical trigger"
@@ -115,10 +120,6 @@ final class Notes {
                     "leakage-inductance",
                     "The pulse transformer's leakage inductance is left out: the computed gate peak is optimistic.");
         }
-    }
-
-    private static Optional<Double> minimum(Unijunction.BaseOnePulse pulse) {
-        return pulse.minVolts().isPresent() ? Optional.of(pulse.minVolts().getAsDouble()) : Optional.empty();
     }
 
     private void gateEnergy() {

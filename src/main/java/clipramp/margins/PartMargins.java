@@ -10,7 +10,7 @@ import java.util.List;
 import java.util.OptionalDouble;
 import java.util.function.ToDoubleFunction;
 
-/** Resistors, capacitor and zener against their ratings (DEVELOPERS.md, The circuit laws). */
+/** Resistors, capacitor and zener against their ratings (DEVELOPERS.md, Margins). */
 final class PartMargins {
     private final Bench bench;
     private final Design design;

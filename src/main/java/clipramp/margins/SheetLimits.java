@@ -18,34 +18,41 @@ final class SheetLimits {
 
     private SheetLimits() {}
 
-    /** The device that asks for the largest peak-point current. */
+    /** With the device that asks for the largest peak-point current. */
     static Design highestPeakCurrent(Design design) {
         if (design.trigger() instanceof UnijunctionTrigger trigger) {
-            Unijunction d = trigger.device();
+            Unijunction device = trigger.device();
             return design.withTrigger(with(
                     trigger,
-                    unijunction(d, Characteristic.exactly(d.peakCurrentAmps().highest()), d.valley())));
+                    unijunction(
+                            device,
+                            Characteristic.exactly(device.peakCurrentAmps().highest()),
+                            device.valley())));
         }
         ProgrammableTrigger trigger = (ProgrammableTrigger) design.trigger();
-        ProgrammableUnijunction d = trigger.device();
+        ProgrammableUnijunction device = trigger.device();
         return design.withTrigger(with(
-                trigger, programmable(d, at(d.peakCurrentAmps(), Characteristic::highest), d.valleyCurrentAmps())));
+                trigger,
+                programmable(
+                        device, at(device.peakCurrentAmps(), Characteristic::highest), device.valleyCurrentAmps())));
     }
 
-    /** The device that stays on with the smallest current. */
+    /** With the device that stays on with the smallest current. */
     static Design lowestValleyCurrent(Design design) {
         if (design.trigger() instanceof UnijunctionTrigger trigger) {
-            Unijunction d = trigger.device();
+            Unijunction device = trigger.device();
             Unijunction.Valley valley = new Unijunction.Valley(
-                    Characteristic.exactly(d.valley().amps().lowest()),
-                    d.valley().volts(),
-                    d.valley().atVolts());
-            return design.withTrigger(with(trigger, unijunction(d, d.peakCurrentAmps(), valley)));
+                    Characteristic.exactly(device.valley().amps().lowest()),
+                    device.valley().volts(),
+                    device.valley().atVolts());
+            return design.withTrigger(with(trigger, unijunction(device, device.peakCurrentAmps(), valley)));
         }
         ProgrammableTrigger trigger = (ProgrammableTrigger) design.trigger();
-        ProgrammableUnijunction d = trigger.device();
-        return design.withTrigger(
-                with(trigger, programmable(d, d.peakCurrentAmps(), at(d.valleyCurrentAmps(), Characteristic::lowest))));
+        ProgrammableUnijunction device = trigger.device();
+        return design.withTrigger(with(
+                trigger,
+                programmable(
+                        device, device.peakCurrentAmps(), at(device.valleyCurrentAmps(), Characteristic::lowest))));
     }
 
     /** Emitter voltage at the valley with a supply in V: V_D + (V_V - V_D) V_S/V_spec; base one's own is left out. */
@@ -69,26 +76,32 @@ final class SheetLimits {
         return new ProgrammableTrigger(device, trigger.baseOne(), trigger.upper(), trigger.lower());
     }
 
-    private static Unijunction unijunction(Unijunction d, Characteristic peakCurrent, Unijunction.Valley valley) {
+    private static Unijunction unijunction(Unijunction device, Characteristic peakCurrent, Unijunction.Valley valley) {
         return new Unijunction(
-                d.id(),
-                d.standoff(),
-                d.interbaseOhms(),
-                d.interbaseDriftPerKelvin(),
-                d.emitterDropVolts(),
-                d.emitterDriftVoltsPerKelvin(),
+                device.id(),
+                device.standoff(),
+                device.interbaseOhms(),
+                device.interbaseDriftPerKelvin(),
+                device.emitterDropVolts(),
+                device.emitterDriftVoltsPerKelvin(),
                 peakCurrent,
                 valley,
-                d.saturation(),
-                d.modulated(),
-                d.baseOnePulse(),
-                d.limits());
+                device.saturation(),
+                device.modulated(),
+                device.baseOnePulse(),
+                device.limits());
     }
 
     private static ProgrammableUnijunction programmable(
-            ProgrammableUnijunction d, List<AtGateResistance> peak, List<AtGateResistance> valley) {
+            ProgrammableUnijunction device, List<AtGateResistance> peak, List<AtGateResistance> valley) {
         return new ProgrammableUnijunction(
-                d.id(), d.offsetVolts(), d.forwardVolts(), d.forwardAmps(), peak, valley, d.limits());
+                device.id(),
+                device.offsetVolts(),
+                device.forwardVolts(),
+                device.forwardAmps(),
+                peak,
+                valley,
+                device.limits());
     }
 
     private static List<AtGateResistance> at(List<AtGateResistance> table, ToDoubleFunction<Characteristic> limit) {

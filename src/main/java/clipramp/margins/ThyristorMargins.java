@@ -12,7 +12,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.OptionalDouble;
 
-/** The thyristor against its ratings: voltage, currents, heat, turn-off (DEVELOPERS.md, The circuit laws). */
+/** The thyristor against its ratings: voltage, currents, heat, turn-off (DEVELOPERS.md, Margins). */
 final class ThyristorMargins {
     private final Bench bench;
     private final Design design;

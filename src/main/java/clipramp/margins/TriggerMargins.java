@@ -11,7 +11,7 @@ import java.util.OptionalDouble;
 import java.util.function.DoubleFunction;
 import java.util.function.ToDoubleFunction;
 
-/** The trigger device against its absolute ratings (DEVELOPERS.md, The circuit laws). */
+/** The trigger device against its absolute ratings (DEVELOPERS.md, Margins). */
 final class TriggerMargins {
     private static final double SHEET_CELSIUS = 25;
 

@@ -125,7 +125,7 @@ final class WantedMargins {
         };
     }
 
-    /** The lowest wanted power in watts at a condition, where one is wanted. */
+    /** The lowest wanted power at a condition, W, where one is wanted. */
     static Optional<Double> lowestWatts(Bench bench, JudgedCondition at) {
         return bench.design().wanted().lowest().map(goal -> {
             double full = LoadPower.fullWatts(bench.design(), at.condition());
