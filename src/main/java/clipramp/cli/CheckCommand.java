@@ -44,10 +44,10 @@ final class CheckCommand extends Analysis {
     @Override
     public Integer call() {
         if (plot != null) {
-            Outputs.requirePlotName(plot);
+            Outputs.requirePlot(plot);
         }
         if (record != null) {
-            Outputs.requireRecordName(record);
+            Outputs.requireRecord(record);
         }
         LoadedDesign loaded = design.load(session);
         Check check = design.check(loaded);
@@ -62,17 +62,10 @@ final class CheckCommand extends Analysis {
         Optional.ofNullable(plot)
                 .ifPresent(name -> Outputs.linePlot(name, check.lineCurrent().orElseThrow()));
         if (!json) {
-            written("Record", record);
-            written("Plot", plot);
+            session.out().written("Record", Optional.ofNullable(record));
+            session.out().written("Plot", Optional.ofNullable(plot));
         }
         return code(check);
-    }
-
-    private void written(String what, @Nullable String name) {
-        if (name != null) {
-            session.out().line("");
-            session.out().line(what + ": " + name);
-        }
     }
 
     private int code(Check check) {

@@ -13,10 +13,13 @@ public final class Cli {
     private Cli() {}
 
     /**
+     * Runs one command.
+     *
      * @param arguments as typed
      * @param terminal where words come from and go to
      * @param launcher opens the window, where there is one
-     * @return the exit code
+     * @return the exit code: 0 answered, 1 a margin fails, 2 input or options cannot be used, 3 our own fault, 4 a file cannot
+     *  be read or written, 130 interrupted
      */
     public static int run(String[] arguments, Terminal terminal, Optional<Launcher> launcher) {
         List<String> words = List.of(arguments);

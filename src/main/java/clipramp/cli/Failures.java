@@ -25,6 +25,7 @@ import picocli.CommandLine.UnmatchedArgumentException;
 /** The one place where failures become words and exit codes. */
 final class Failures {
     private static final char UNREADABLE = '\uFFFD';
+    private static final List<String> FIRING_CIRCUIT = List.of("clip", "ramp", "trigger", "gate", "thyristor");
 
     private final Session session;
     private final List<String> words;
@@ -77,6 +78,7 @@ final class Failures {
             session.out().exactly(Problems.json(problems, session.ascii()));
         }
         problems.forEach(problem -> session.err().line(Problems.text(problem)));
+        hintAtSizing(problems);
         hintAtLocale();
         return ExitCode.UNUSABLE;
     }
@@ -85,6 +87,17 @@ final class Failures {
         session.err().line(Program.NAME + ": " + message);
         hintAtLocale();
         return ExitCode.FILE;
+    }
+
+    /** A file that lacks the whole firing circuit is a request, not a design with eight mistakes. */
+    private void hintAtSizing(List<Problem> problems) {
+        List<String> paths = problems.stream().map(Problem::path).toList();
+        if (paths.containsAll(FIRING_CIRCUIT)) {
+            session.err()
+                    .line("  Nobody need type the firing circuit: clipramp size "
+                            + problems.get(0).file()
+                            + " makes a design from line, stage, load and wanted.");
+        }
     }
 
     /** Java reads what a plain C locale cannot carry as replacement signs; the reason is then not the user's typing. */
@@ -116,13 +129,26 @@ final class Failures {
             ArgSpec what = missing.getMissing().get(0);
             String said = what instanceof OptionSpec option ? option.longestName() : what.paramLabel();
             String lacks = words.contains(said) ? " needs a value: " + said + "=" + what.paramLabel() : " is missing";
-            return Problems.of(name, said, said + lacks + ". See " + name + " --help.");
+            return Problems.of(name, said, said + lacks + "." + proposed(what, command) + " See " + name + " --help.");
         }
         if (refused instanceof OverwrittenOptionException twice
                 && twice.getOverwritten() instanceof OptionSpec option) {
             return Problems.of(name, option.longestName(), option.longestName() + " is given twice. Give it once.");
         }
         return Problems.of(name, "", refused.getMessage() + ". See " + name + " --help.");
+    }
+
+    /** A word that no argument takes may be what the missing option was to be given. */
+    private String proposed(ArgSpec missing, CommandLine command) {
+        int taken = command.getCommandSpec().positionalParameters().size();
+        return words.stream()
+                .skip(1)
+                .filter(word -> !word.startsWith("-"))
+                .skip(taken)
+                .findFirst()
+                .filter(word -> missing instanceof OptionSpec)
+                .map(word -> " Is it " + ((OptionSpec) missing).longestName() + "=" + word + "?")
+                .orElse("");
     }
 
     /** Tells what to send us; the trace goes to a file, never to a user's screen. */

@@ -58,14 +58,14 @@ final class FileFailure extends RuntimeException {
     }
 
     private static String reason(IOException cause, Path file) {
+        if (Files.isDirectory(file)) {
+            return "it is a folder";
+        }
         Path folder = file.toAbsolutePath().getParent();
         if (cause instanceof NoSuchFileException) {
             return folder != null && !Files.isDirectory(folder)
                     ? "there is no folder " + folder
                     : "there is no such file";
-        }
-        if (Files.isDirectory(file)) {
-            return "it is a folder";
         }
         if (cause instanceof AccessDeniedException) {
             return "access is denied";

@@ -12,7 +12,6 @@ import clipramp.fit.FitWords;
 import clipramp.fit.Readings;
 import clipramp.record.PageSize;
 import clipramp.record.RecordContent;
-import java.nio.charset.StandardCharsets;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -95,7 +94,7 @@ final class FitCommand implements Callable<Integer> {
         writeFiles(loaded, result, built);
         if (json) {
             session.out().exactly(FitJson.of(loaded, result, notes, ReadingsFile.digest(bench), out, session.ascii()));
-        } else if (built.isPresent() && Inputs.STANDARD_INPUT.equals(out)) {
+        } else if (built.isPresent() && Outputs.STANDARD_OUTPUT.equals(out)) {
             session.out().exactly(built.get().text());
         } else {
             new FitText(session.out(), loaded, result, notes).print();
@@ -111,9 +110,8 @@ final class FitCommand implements Callable<Integer> {
     }
 
     private void writeFiles(LoadedDesign loaded, FitResult result, Optional<DesignText> built) {
-        if (out != null && built.isPresent() && !out.equals(Inputs.STANDARD_INPUT)) {
-            byte[] bytes = built.get().text().getBytes(StandardCharsets.UTF_8);
-            Outputs.write(out, file -> file.write(bytes), replace);
+        if (out != null && built.isPresent() && !out.equals(Outputs.STANDARD_OUTPUT)) {
+            Outputs.write(out, built.get().text(), replace);
         }
         if (record != null) {
             RecordContent content =
@@ -128,10 +126,7 @@ final class FitCommand implements Callable<Integer> {
             session.out().line("Written: " + out + ", the design as built.");
             session.out().line("Next: clipramp check " + out);
         }
-        if (record != null) {
-            session.out().line("");
-            session.out().line("Record: " + record);
-        }
+        session.out().written("Record", Optional.ofNullable(record));
     }
 
     private FitResult fitted(Design circuit, Readings read) {
@@ -144,6 +139,7 @@ final class FitCommand implements Callable<Integer> {
         return design.celsius().orElse(25);
     }
 
+    /** Refuses what contradicts itself, and files that could not be written, before the long work. */
     private void refuse() {
         if (readings.equals(Inputs.STANDARD_INPUT) && design.file.equals(Inputs.STANDARD_INPUT)) {
             throw Problems.refused("fit", "only one of design and readings can come from standard input.");
@@ -152,8 +148,14 @@ final class FitCommand implements Callable<Integer> {
             throw Problems.refused(
                     "--out", "--with and --out do not go together: write what --with says into the design first.");
         }
-        if (json && Inputs.STANDARD_INPUT.equals(out)) {
+        if (json && Outputs.STANDARD_OUTPUT.equals(out)) {
             throw Problems.refused("--out", "--json and --out=- cannot both go to standard output. Choose one.");
+        }
+        if (out != null && !out.equals(Outputs.STANDARD_OUTPUT)) {
+            Outputs.requirePlace(out, replace);
+        }
+        if (record != null) {
+            Outputs.requireRecord(record);
         }
     }
 }

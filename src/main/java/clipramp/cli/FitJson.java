@@ -23,8 +23,7 @@ final class FitJson {
             String digest,
             @Nullable String written,
             boolean ascii) {
-        List<Note> all = new ArrayList<>();
-        loaded.notes().forEach(text -> all.add(new Note("input", text)));
+        List<Note> all = new ArrayList<>(Answer.readerNotes(loaded));
         notes.forEach(text -> all.add(new Note("fit", text)));
         return new Answer("fit", Optional.of(loaded), Optional.empty(), all).json(ascii, json -> {
             Answer.titleAndCondition(json, loaded, FitText.condition(loaded, result));

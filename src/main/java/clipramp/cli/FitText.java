@@ -30,11 +30,7 @@ final class FitText {
         out.line("One unit, from " + result.readings().name() + ": "
                 + FitWords.count(result.readings().count(), "reading") + " on "
                 + FitWords.count(result.readings().lines().size(), "line") + ".");
-        out.line(Caution.LINE);
-        out.line("");
-        String title = loaded.design().title();
-        out.strongLine(title.isEmpty() ? "Untitled design" : title, "  (" + loaded.name() + ")");
-        loaded.overrides().forEach(override -> out.line("  with " + override));
+        CheckText.title(out, loaded);
         out.line("  at " + Shown.fixed(result.readings().celsius(), 0) + " °C");
         out.line("");
         strangers();

@@ -33,6 +33,6 @@ final class FormOptions {
         if (json && csv) {
             throw Problems.refused("--csv", "--json and --csv cannot both go to standard output. Choose one.");
         }
-        plot().ifPresent(Outputs::requirePlotName);
+        plot().ifPresent(Outputs::requirePlot);
     }
 }

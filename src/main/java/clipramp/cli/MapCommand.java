@@ -135,9 +135,6 @@ final class MapCommand extends Analysis {
             out.line("");
             out.lines(Paragraph.wrap(note.text(), ""));
         });
-        form.plot().ifPresent(name -> {
-            out.line("");
-            out.line("Plot: " + name);
-        });
+        out.written("Plot", form.plot());
     }
 }

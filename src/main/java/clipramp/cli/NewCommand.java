@@ -1,7 +1,6 @@
 package clipramp.cli;
 
 import clipramp.files.Example;
-import java.nio.charset.StandardCharsets;
 import java.util.List;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
@@ -55,11 +54,11 @@ final class NewCommand implements Callable<Integer> {
         List<String> known = Example.all().stream().map(Example::id).toList();
         Example example = Example.named(Problems.word("--from", from, known)).orElseThrow();
         String text = example.text();
-        if (out.equals("-")) {
+        if (out.equals(Outputs.STANDARD_OUTPUT)) {
             session.out().exactly(text);
             return ExitCode.ANSWERED;
         }
-        Outputs.write(out, file -> file.write(text.getBytes(StandardCharsets.UTF_8)), replace);
+        Outputs.write(out, text, replace);
         if (json) {
             session.out()
                     .exactly(Answer.without("new")

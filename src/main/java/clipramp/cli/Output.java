@@ -10,6 +10,7 @@ import java.nio.charset.Charset;
 import java.nio.charset.StandardCharsets;
 import java.util.List;
 import java.util.Locale;
+import java.util.Optional;
 
 /**
  * One of the two streams that a command writes to. A reader that went away (head, a closed pager) is no failure: what
@@ -43,6 +44,14 @@ final class Output {
 
     void lines(List<String> lines) {
         lines.forEach(this::line);
+    }
+
+    /** Names a file that was written, below the answer. */
+    void written(String what, Optional<String> file) {
+        file.ifPresent(name -> {
+            line("");
+            line(what + ": " + name);
+        });
     }
 
     /** A line whose first part stands out where the terminal can do that. */

@@ -24,6 +24,9 @@ import clipramp.spread.SpreadResult;
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.FileAlreadyExistsException;
+import java.nio.file.Files;
+import java.nio.file.NoSuchFileException;
+import java.nio.file.Path;
 import java.util.Arrays;
 import java.util.List;
 import java.util.Locale;
@@ -31,6 +34,9 @@ import java.util.Optional;
 
 /** Files that commands write, whole or not at all. */
 final class Outputs {
+    /** What stands for standard output in place of a file's name. */
+    static final String STANDARD_OUTPUT = "-";
+
     private static final double PLOT_WIDTH = 960;
     private static final double PNG_SCALE = 2;
 
@@ -48,17 +54,35 @@ final class Outputs {
         return size.word().toLowerCase(Locale.ROOT);
     }
 
-    /** A record replaces an older one; a slip of the name must not replace a design or its readings. */
-    static void requireRecordName(String name) {
+    /**
+     * Refuses, before the work is done, a record that could not be written. One replaces an older one; a slip of the name must
+     * not replace a design or its readings.
+     */
+    static void requireRecord(String name) {
         if (name.toLowerCase(Locale.ROOT).matches(".*\\.(ya?ml|csv|json|svg|png)")) {
             throw Problems.refused(
                     name, "the record is a PDF; expected a file name that ends in .pdf. Nothing was written.");
         }
+        requirePlace(name, true);
     }
 
-    static void requirePlotName(String name) {
+    /** Refuses, before the work is done, a plot that could not be drawn. */
+    static void requirePlot(String name) {
         if (!isSvg(name) && !name.toLowerCase(Locale.ROOT).endsWith(".png")) {
             throw Problems.refused("--plot", "read \"" + name + "\"; expected a file name that ends in .svg or .png.");
+        }
+        requirePlace(name, true);
+    }
+
+    /** Refuses, before the work is done, a file that could not be written: its folder is not there, or it is and must stay. */
+    static void requirePlace(String name, boolean replace) {
+        Path file = Inputs.path(name);
+        Path folder = file.toAbsolutePath().getParent();
+        if (Files.isDirectory(file) || (folder != null && !Files.isDirectory(folder))) {
+            throw FileFailure.writing(name, new NoSuchFileException(name));
+        }
+        if (!replace && Files.isRegularFile(file)) {
+            throw FileFailure.exists(name);
         }
     }
 
@@ -84,7 +108,7 @@ final class Outputs {
 
     /** Writes a record whose content is there already. */
     static void record(String name, RecordContent content, PageSize size) {
-        requireRecordName(name);
+        requireRecord(name);
         withoutDisplay();
         write(name, out -> DesignRecord.write(content, out, size), true);
     }
@@ -128,6 +152,11 @@ final class Outputs {
     /** Drawing into a file needs no screen, and must not fail where one is named but not there. */
     private static void withoutDisplay() {
         System.setProperty("java.awt.headless", "true");
+    }
+
+    /** Writes a design's text, whole or not at all. */
+    static void write(String name, String text, boolean replace) {
+        write(name, out -> out.write(text.getBytes(StandardCharsets.UTF_8)), replace);
     }
 
     /** Writes a file whole or not at all. */

@@ -54,7 +54,7 @@ final class RecordCommand extends Analysis {
 
     @Override
     public Integer call() {
-        Outputs.requireRecordName(out);
+        Outputs.requireRecord(out);
         PageSize size = Outputs.paper(paper);
         LoadedDesign loaded = design.load(session);
         Check check = design.check(loaded);

@@ -23,10 +23,6 @@ final class Shown {
         return Double.isFinite(value) ? QuantityText.fixed(value, decimals) : NONE;
     }
 
-    static String fixed(OptionalDouble value, int decimals) {
-        return fixed(value.orElse(Double.NaN), decimals);
-    }
-
     /** Radians as degrees with one decimal, without the sign. */
     static String degrees(OptionalDouble rad) {
         return fixed(Math.toDegrees(rad.orElse(Double.NaN)), 1);

@@ -15,7 +15,6 @@ import clipramp.sizing.Sizing;
 import clipramp.sizing.SizingAnswer;
 import clipramp.sizing.SizingRequest;
 import clipramp.units.PreferredSeries;
-import java.nio.charset.StandardCharsets;
 import java.util.Arrays;
 import java.util.EnumSet;
 import java.util.List;
@@ -114,6 +113,9 @@ final class SizeCommand implements Callable<Integer> {
 
     @Override
     public Integer call() {
+        if (out != null) {
+            Outputs.requirePlace(out, replace);
+        }
         boolean shippedOnly = profiles.shippedOnly();
         ProfileLibrary library = Inputs.libraryOf(session, file, shippedOnly);
         PartialDesign partial = PartialDesign.read(source(), named("--free", free), kept(), library);
@@ -131,8 +133,7 @@ final class SizeCommand implements Callable<Integer> {
         DesignText text = SizedText.of(partial, answer.design());
         text = shaped.isPresent() ? SizedText.withPot(text, answer.design()) : text;
         if (out != null) {
-            String content = text.text();
-            Outputs.write(out, file -> file.write(content.getBytes(StandardCharsets.UTF_8)), replace);
+            Outputs.write(out, text.text(), replace);
         }
         LoadedDesign loaded = loaded(text, library);
         if (json) {

@@ -7,6 +7,7 @@ import clipramp.spread.DrawLaw;
 import clipramp.spread.Spread;
 import clipramp.spread.SpreadOptions;
 import clipramp.spread.SpreadResult;
+import clipramp.spread.SpreadWords;
 import clipramp.spread.Yield;
 import java.util.ArrayList;
 import java.util.Arrays;
@@ -120,12 +121,7 @@ final class SpreadCommand extends Analysis {
                     "Interrupted: " + result.units() + " of " + result.options().samples()
                             + " units were drawn; the answer is of those."));
         }
-        notes.add(new Note(
-                "laws",
-                "Parts lie " + result.options().law().words()
-                        + "; data-sheet figures triangular through minimum, typical and maximum, or uniform where no"
-                        + " typical value is given; line voltage, frequency (1 % either way, EN 50160) and temperature"
-                        + " uniform. Every factor is drawn by itself."));
+        notes.add(new Note("laws", SpreadWords.laws(result.options().law())));
         return notes;
     }
 

@@ -11,7 +11,6 @@ import clipramp.spread.Remedy;
 import clipramp.spread.SpreadResult;
 import clipramp.spread.Yield;
 import java.util.List;
-import java.util.Locale;
 import java.util.Optional;
 import java.util.function.DoubleUnaryOperator;
 
@@ -25,7 +24,7 @@ final class SpreadJson {
                     .put("samples", result.options().samples())
                     .put("units", result.units())
                     .put("seed", (double) result.options().seed())
-                    .put("law", result.options().law().name().toLowerCase(Locale.ROOT));
+                    .put("law", result.options().law().word());
             yieldOf(json, "wantedYield", result.wanted());
             yieldOf(json, "marginYield", result.margins());
             json.putObjects(

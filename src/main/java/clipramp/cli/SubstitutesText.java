@@ -55,8 +55,7 @@ final class SubstitutesText {
     }
 
     private static String ratio(Margin margin) {
-        OptionalDouble ratio = margin.ratio();
-        return ratio.isPresent() ? Shown.fixed(ratio.getAsDouble(), 2) : "–";
+        return Shown.fixed(margin.ratio().orElse(Double.NaN), 2);
     }
 
     static String json(LoadedDesign loaded, List<Substitute> found, boolean ascii) {

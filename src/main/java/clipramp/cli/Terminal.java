@@ -31,6 +31,7 @@ public record Terminal(
         Charset charset) {
     private static final String SIGNS = "Ωµ°±αη≥≤×·–…−";
 
+    /** Keeps the environment as it is. */
     public Terminal {
         environment = Map.copyOf(environment);
     }

@@ -1,6 +1,7 @@
 package clipramp.desk;
 
 import clipramp.desk.model.MarginRow;
+import clipramp.margins.Verdict;
 import java.util.List;
 import java.util.Locale;
 import java.util.function.Consumer;
@@ -38,7 +39,7 @@ final class MarginRowView {
     private final Consumer<String> chosen;
     private boolean open;
     private MarginRow shown =
-            new MarginRow("", "", "", "", "", 0, 0, clipramp.margins.Verdict.NOT_JUDGED, "", "", "", "", "", List.of());
+            new MarginRow("", "", "", "", "", 0, 0, Verdict.NOT_JUDGED, "", "", "", "", "", List.of());
 
     MarginRowView(Consumer<String> chosen) {
         this.chosen = chosen;

@@ -8,6 +8,7 @@ import clipramp.desk.model.Trouble;
 import java.util.List;
 import java.util.Optional;
 import java.util.function.Consumer;
+import javafx.css.PseudoClass;
 import javafx.scene.control.ComboBox;
 import javafx.scene.control.Control;
 import javafx.scene.control.Label;
@@ -163,7 +164,7 @@ final class SlotView {
         } else if (!words.isEmpty() && !there) {
             box.getChildren().add(complaint);
         }
-        control.pseudoClassStateChanged(javafx.css.PseudoClass.getPseudoClass("refused"), !words.isEmpty());
+        control.pseudoClassStateChanged(PseudoClass.getPseudoClass("refused"), !words.isEmpty());
         control.setAccessibleHelp(words);
     }
 }

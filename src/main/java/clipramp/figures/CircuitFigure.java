@@ -7,6 +7,7 @@ import java.awt.Graphics2D;
 import java.awt.Shape;
 import java.awt.Stroke;
 import java.awt.geom.AffineTransform;
+import java.awt.geom.Ellipse2D;
 import java.awt.geom.Rectangle2D;
 import java.awt.geom.RoundRectangle2D;
 import java.util.ArrayList;
@@ -170,6 +171,6 @@ public final class CircuitFigure implements Figure {
     }
 
     private static boolean isRing(Sheet.Ink ink) {
-        return ink.shape() instanceof java.awt.geom.Ellipse2D && ink.net() != Net.SYMBOL;
+        return ink.shape() instanceof Ellipse2D && ink.net() != Net.SYMBOL;
     }
 }

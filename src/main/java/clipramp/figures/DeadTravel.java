@@ -10,14 +10,14 @@ import java.util.List;
  * @param low share of the rotation from the anticlockwise end, 0..1
  * @param high share of the rotation from the clockwise end, 0..1
  */
-public record DeadTravel(double low, double high) {
+record DeadTravel(double low, double high) {
     /** Share of full power under which a change counts as none. */
     private static final double UNNOTICED = 0.005;
     /** A stretch shorter than this is an end stop, not a fault. */
     private static final double SHORTEST = 0.02;
 
     /** From solved positions in rising order; none for a fixed ramp. */
-    public static DeadTravel of(List<OperatingPoint> points) {
+    static DeadTravel of(List<OperatingPoint> points) {
         if (points.size() < 2) {
             return new DeadTravel(0, 0);
         }

@@ -113,7 +113,7 @@ public record KnobFigure(List<OperatingPoint> points, Wanted wanted, OptionalDou
     }
 
     /** Where the plot lies when drawn at a size: rotation across, power up, each −2..102 %. */
-    public Rectangle2D plotArea(double width, double height, Style style) {
+    Rectangle2D plotArea(double width, double height, Style style) {
         double left = 44 * style.zoom();
         double right = Math.max(left + 1, width - 16 * style.zoom());
         double top = 28 * style.zoom();

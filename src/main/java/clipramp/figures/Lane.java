@@ -19,12 +19,12 @@ public enum Lane {
     }
 
     /** Its name as lettered. */
-    public String title() {
+    String title() {
         return title;
     }
 
     /** The unit that its scale is lettered in. */
-    public String unit() {
+    String unit() {
         return unit;
     }
 

@@ -24,7 +24,7 @@ public record Lanes(Waveforms waves, double[] loadRad, double[] loadVolts, Optio
     }
 
     /** Angle that the lanes span from 0: half a period or a whole one, rad. */
-    public double spanRad() {
+    double spanRad() {
         double last = waves.angleRad()[waves.angleRad().length - 1];
         return last > 1.5 * Math.PI ? 2 * Math.PI : Math.PI;
     }
@@ -45,12 +45,12 @@ public record Lanes(Waveforms waves, double[] loadRad, double[] loadVolts, Optio
     }
 
     /** A lane's value at an angle, SI, straight between samples; NaN outside them. */
-    public double valueAt(Lane lane, double angleRad) {
+    double valueAt(Lane lane, double angleRad) {
         return between(angles(lane), values(lane), angleRad);
     }
 
     /** The peak point at an angle, V. */
-    public double peakPointAt(double angleRad) {
+    double peakPointAt(double angleRad) {
         return between(waves.angleRad(), waves.peakPointVolts(), angleRad);
     }
 
@@ -61,7 +61,7 @@ public record Lanes(Waveforms waves, double[] loadRad, double[] loadVolts, Optio
     public record PulsePeak(double angleRad, double amps) {}
 
     /** The peak of the gate pulse that begins at the firing angle; empty where nothing fires or no gate current flows. */
-    public Optional<PulsePeak> firingPulse() {
+    Optional<PulsePeak> firingPulse() {
         if (firingRad.isEmpty()) {
             return Optional.empty();
         }

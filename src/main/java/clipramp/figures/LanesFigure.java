@@ -2,6 +2,7 @@ package clipramp.figures;
 
 import java.awt.Graphics2D;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
@@ -59,7 +60,7 @@ public record LanesFigure(Lanes lanes, double fromRad, double toRad, OptionalDou
     @Override
     public String sentence() {
         double[] supply = lanes.values(Lane.SUPPLY);
-        double clipped = java.util.Arrays.stream(supply).max().orElse(0);
+        double clipped = Arrays.stream(supply).max().orElse(0);
         String fires = lanes.firingRad().isPresent()
                 ? "the thyristor is turned on at "
                         + Numerals.fixed(Math.toDegrees(lanes.firingRad().getAsDouble()), 1) + "°"

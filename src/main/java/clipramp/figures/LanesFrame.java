@@ -70,7 +70,7 @@ public record LanesFrame(
     }
 
     /** Rectangle of a lane's plot. */
-    public Rectangle2D plot(Lane lane) {
+    Rectangle2D plot(Lane lane) {
         double laneTop = laneTops[lane.ordinal()];
         return new Rectangle2D.Double(left, laneTop, right - left, laneBottoms[lane.ordinal()] - laneTop);
     }

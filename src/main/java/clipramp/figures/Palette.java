@@ -115,7 +115,7 @@ public record Palette(
     }
 
     /** Contrast ratio of two colours, 1..21 (WCAG 2.1, definition of contrast ratio). */
-    public static double contrast(Color a, Color b) {
+    static double contrast(Color a, Color b) {
         double bright = Math.max(luminance(a), luminance(b));
         double dark = Math.min(luminance(a), luminance(b));
         return (bright + 0.05) / (dark + 0.05);

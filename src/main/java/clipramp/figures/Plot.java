@@ -9,11 +9,13 @@ import java.awt.Stroke;
 import java.awt.geom.Line2D;
 import java.awt.geom.Rectangle2D;
 import java.text.DecimalFormat;
+import java.text.DecimalFormatSymbols;
 import java.text.FieldPosition;
 import java.text.NumberFormat;
 import java.text.ParsePosition;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Locale;
 import java.util.function.DoubleFunction;
 import org.jfree.chart.axis.AxisSpace;
 import org.jfree.chart.axis.NumberTickUnit;
@@ -213,7 +215,7 @@ final class Plot {
         private final transient DoubleFunction<String> text;
 
         Lettered(DoubleFunction<String> text) {
-            super("0", java.text.DecimalFormatSymbols.getInstance(java.util.Locale.ROOT));
+            super("0", DecimalFormatSymbols.getInstance(Locale.ROOT));
             this.text = text;
         }
 

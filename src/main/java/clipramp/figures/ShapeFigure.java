@@ -6,6 +6,7 @@ import java.awt.Graphics2D;
 import java.awt.Stroke;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Locale;
 import java.util.stream.IntStream;
 
 /**
@@ -34,7 +35,7 @@ public record ShapeFigure(KnobShape before, KnobShape after) implements Figure {
     @Override
     public String title() {
         String what = measure();
-        return what.substring(0, 1).toUpperCase(java.util.Locale.ROOT) + what.substring(1)
+        return what.substring(0, 1).toUpperCase(Locale.ROOT) + what.substring(1)
                 + " against the knob, before and after";
     }
 

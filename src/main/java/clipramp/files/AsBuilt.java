@@ -42,9 +42,12 @@ public final class AsBuilt {
     }
 
     /**
+     * A design's text as the unit was built.
+     *
      * @param text the design as its author wrote it
      * @param design the same, read
      * @param result what the fit found
+     * @return the text with every value that moved, and a sentence about it among the notes
      * @throws InvalidInputException where the text is no YAML of ours
      */
     public static DesignText of(DesignText text, Design design, FitResult result) {

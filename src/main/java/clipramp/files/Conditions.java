@@ -6,14 +6,24 @@ import clipramp.units.QuantityReader;
 import clipramp.units.RefusedQuantityException;
 import clipramp.units.Unit;
 import java.util.List;
+import java.util.function.DoubleSupplier;
 
-/** Reads the conditions that are given beside a design: {@code --line=207V}, {@code --temperature=0degC} and their like. */
+/**
+ * Reads the conditions that are given beside a design: {@code --line=207V}, {@code --temperature=0degC} and their like. What
+ * is refused carries the option's name in place of a file's, and no line.
+ */
 public final class Conditions {
     private static final double MOST_WATTS = 1e9;
 
     private Conditions() {}
 
-    /** Line voltage in V: volts, or a signed share of the design's nominal line. */
+    /**
+     * Line voltage in V, rms.
+     *
+     * @param text 1 V to 2000 V, or a signed share of nominal within half of it
+     * @param line the design's, whose nominal voltage a share is of
+     * @throws InvalidInputException where it is refused
+     */
     public static double lineVolts(String text, Line line) {
         return read("--line", () -> {
             var q = QuantityReader.readOneOf(
@@ -22,31 +32,43 @@ public final class Conditions {
         });
     }
 
-    /** Ambient temperature in °C; 25 means 25 °C. */
+    /**
+     * Ambient temperature in °C.
+     *
+     * @param text -60 to 150 degC; a bare 25 means 25 °C
+     * @throws InvalidInputException where it is refused
+     */
     public static double celsius(String text) {
         return of("--temperature", text, Expected.within(Unit.CELSIUS, -60, 150).allowingBare());
     }
 
-    /** Knob position 0..1, written as 50 % or 0.5. */
+    /**
+     * Knob position, 0..1.
+     *
+     * @param text written as 50 % or 0.5
+     * @throws InvalidInputException where it is refused
+     */
     public static double knob(String text) {
         return of("--knob", text, Expected.within(Unit.FRACTION, 0, 1));
     }
 
-    /** A whole R_E in ohms. */
+    /**
+     * A whole R_E in ohms.
+     *
+     * @param text 1 ohm to 1 Gohm
+     * @throws InvalidInputException where it is refused
+     */
     public static double rampOhms(String text) {
         return of("--resistance", text, Expected.within(Unit.OHM, 1, 1e9));
-    }
-
-    /** A firing angle in radians; 90 means 90 degrees. */
-    public static double firingRad(String text) {
-        return of("--angle", text, Expected.within(Unit.ANGLE, 0, Math.PI).allowingBare());
     }
 
     /**
      * A load power in W: watts, which may be more than the load takes, or a share of full power.
      *
      * @param option the option's name, which a refusal carries
+     * @param text 0 to 1 GW, or 0 to 100 %
      * @param fullWatts full power, W
+     * @throws InvalidInputException where it is refused
      */
     public static double watts(String option, String text, double fullWatts) {
         return read(option, () -> {
@@ -60,13 +82,15 @@ public final class Conditions {
      * An option's quantity in SI units.
      *
      * @param option the option's name, which a refusal carries
+     * @param text as written
+     * @param expected unit and window
      * @throws InvalidInputException where it is refused
      */
     public static double of(String option, String text, Expected expected) {
         return read(option, () -> QuantityReader.read(text, expected).value());
     }
 
-    private static double read(String option, java.util.function.DoubleSupplier reader) {
+    private static double read(String option, DoubleSupplier reader) {
         try {
             return reader.getAsDouble();
         } catch (RefusedQuantityException e) {

@@ -47,7 +47,7 @@ public final class DesignFiles {
                 inputDigest(source, devices.used(), overrides, findings.alsoRead()));
     }
 
-    // A newer format may have keys that would be reported as unknown, which helps nobody.
+    /** A newer format may have keys that would be reported as unknown, which helps nobody. */
     private static boolean isNewer(Mapping tree) {
         String version = tree.textOf("clipramp");
         return version.matches("[1-9]\\d{0,8}") && Integer.parseInt(version) > Version.CURRENT;

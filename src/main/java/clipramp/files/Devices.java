@@ -13,6 +13,8 @@ import java.util.Optional;
 /** Finds out what a device is: a profile's id, keys in place, or a profile with some keys changed. */
 final class Devices {
     private static final int DEEPEST_LIKE = 4;
+    /** The id of a device whose keys stand in the design and that has no name of its own. */
+    private static final String IN_PLACE = "in place";
 
     private final ProfileLibrary library;
     private final Findings findings;
@@ -24,6 +26,8 @@ final class Devices {
     }
 
     /**
+     * A device as made out.
+     *
      * @param mapping its keys, profiles merged in
      * @param kind its kind; empty where it says none
      * @param id its id, or "in place"
@@ -82,7 +86,7 @@ final class Devices {
             return Optional.empty();
         }
         String id = mapping.textOf("id");
-        return Optional.of(new Device(mapping, kind, id.isEmpty() ? "in place" : id));
+        return Optional.of(new Device(mapping, kind, id.isEmpty() ? IN_PLACE : id));
     }
 
     private Optional<Device> changed(Mapping mapping, DevicePlace place, String path, List<String> chain) {

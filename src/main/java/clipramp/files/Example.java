@@ -38,7 +38,7 @@ public record Example(String id, String title, String about) {
         return ALL;
     }
 
-    /** The one of an id, if there is one. */
+    /** The one of an id; empty where there is none. */
     public static Optional<Example> named(String id) {
         return ALL.stream().filter(example -> example.id().equals(id)).findFirst();
     }

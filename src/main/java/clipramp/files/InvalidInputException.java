@@ -8,6 +8,7 @@ public final class InvalidInputException extends RuntimeException {
 
     private final transient List<Problem> problems;
 
+    /** An input with these problems, at least one. */
     public InvalidInputException(List<Problem> problems) {
         super(Problem.texts(problems));
         this.problems = List.copyOf(problems);

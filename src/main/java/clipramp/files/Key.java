@@ -2,7 +2,6 @@ package clipramp.files;
 
 import clipramp.units.Expected;
 import clipramp.units.Unit;
-import java.util.ArrayList;
 import java.util.List;
 
 /**
@@ -32,19 +31,33 @@ public record Key(
         String meaning) {
     /** What stands at a key. */
     public enum Kind {
+        /** More keys under it. */
         MAPPING("more keys"),
+        /** A list. */
         LIST("a list"),
+        /** Free text. */
         TEXT("text"),
+        /** One of the key's own words. */
         WORD("a word"),
+        /** A whole number. */
         WHOLE("a whole number"),
+        /** A number with its unit. */
         QUANTITY("a quantity"),
+        /** The same with tolerance and ratings. */
         PART("a value with tolerance and ratings"),
+        /** A data-sheet figure. */
         CHARACTERISTIC("a quantity, or {min:, typ:, max:}"),
+        /** A current against temperature. */
         CURVE("a current, or a list of {at:, current:}"),
+        /** A ratio of turns. */
         RATIO("a ratio, 2 or 2:1"),
+        /** How far the line strays. */
         LINE_LIMIT("signed percent, or volts"),
+        /** What the knob is to reach. */
         GOAL("%, W, V or deg, or a band, at a knob position"),
+        /** A load's rating. */
         POWER_AT_VOLTAGE("a power, or a power at a voltage"),
+        /** A device. */
         PROFILE("a profile's id, or its keys");
 
         private final String inWords;
@@ -53,6 +66,7 @@ public record Key(
             this.inWords = inWords;
         }
 
+        /** What stands there, in words for people. */
         public String inWords() {
             return inWords;
         }
@@ -68,6 +82,7 @@ public record Key(
         OPTIONAL
     }
 
+    /** Keeps the words as they are. */
     public Key {
         words = List.copyOf(words);
     }
@@ -113,7 +128,7 @@ public record Key(
     }
 
     /** The last part of the path. */
-    public String name() {
+    String name() {
         return path.substring(path.lastIndexOf('.') + 1);
     }
 
@@ -136,7 +151,7 @@ public record Key(
         };
     }
 
-    /** Unit symbol, empty for keys without one. */
+    /** Symbols of the units that it takes; empty for keys without one. */
     public String unitSymbol() {
         return switch (kind) {
             case QUANTITY, PART, CHARACTERISTIC, CURVE -> unit.symbol();
@@ -147,29 +162,13 @@ public record Key(
         };
     }
 
-    /** Default in words: the text, "required", or "none". */
+    /** Default in words: as it would be written, "required", or "none". */
     public String standardInWords() {
         return switch (need) {
             case REQUIRED -> "required";
             case DEFAULTED -> standard;
             case OPTIONAL -> "none";
         };
-    }
-
-    /** Everything about the key, line by line, for a person who asks. */
-    public List<String> explained() {
-        List<String> lines = new ArrayList<>();
-        lines.add(path + ": " + meaning);
-        lines.add("takes    " + kind.inWords());
-        lines.add("range    " + range());
-        if (!unitSymbol().isEmpty()) {
-            lines.add("unit     " + unitSymbol());
-        }
-        lines.add("default  " + standardInWords());
-        if (!neededBy.isEmpty()) {
-            lines.add("needed   by " + neededBy);
-        }
-        return lines;
     }
 
     /** A value inside the window, to go on reading with when the one that stood there was refused. */

@@ -41,7 +41,7 @@ public final class KeyCatalogue {
         return List.copyOf(byPath.values());
     }
 
-    /** A key by its whole path, such as clip.dropper or unijunction.standoff. */
+    /** A key by its whole path, such as clip.dropper or unijunction.standoff; list indices in it do not count. */
     public Optional<Key> find(String path) {
         String plain = path.indexOf('[') < 0 ? path : path.replaceAll("\\[\\d+]", "");
         return Optional.ofNullable(byPath.get(plain));
@@ -50,6 +50,8 @@ public final class KeyCatalogue {
     /**
      * Keys that a person may mean: the whole path; a path through a device, such as trigger.device.standoff; or the last
      * part alone, such as standoff.
+     *
+     * @return all that fit; empty where nothing does
      */
     public List<Key> meant(String words) {
         String plain = words.strip().replaceAll("\\[\\d+]", "");
@@ -68,11 +70,6 @@ public final class KeyCatalogue {
         return byPath.values().stream()
                 .filter(k -> k.path().endsWith("." + plain))
                 .toList();
-    }
-
-    /** The nearest paths to one that is not known. */
-    public List<String> nearest(String words) {
-        return Nearest.several(words.strip(), List.copyOf(byPath.keySet()), 3);
     }
 
     Key require(String path) {

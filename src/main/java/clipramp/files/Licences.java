@@ -28,6 +28,7 @@ public final class Licences {
      * A full text.
      *
      * @param id one of {@link #ids()}
+     * @throws IllegalArgumentException for any other
      */
     public static String text(String id) {
         if (!IDS.contains(id)) {

@@ -11,7 +11,7 @@ import java.util.List;
  * @param assumed every default that was used
  * @param profiles every profile that was used
  * @param notes what the reader must tell: data that were the middle of a band, comments that cannot be kept
- * @param overrides the overrides as given
+ * @param overrides path=value, as given and in their order
  * @param inputDigest SHA-256, hexadecimal, over design, profiles and overrides
  */
 public record LoadedDesign(
@@ -23,20 +23,25 @@ public record LoadedDesign(
         List<String> overrides,
         String inputDigest) {
     /**
+     * A default that was used.
+     *
      * @param path the key, such as gate.overdrive
      * @param value the default in words, such as 3
      */
     public record Assumed(String path, String value) {}
 
     /**
+     * A profile that was used.
+     *
      * @param id the profile's id
      * @param kind its kind
      * @param from where it was found: program, beside the design, user folder
      * @param digest SHA-256 of its text, hexadecimal
-     * @param hides what it hides with different content: the shipped profile, or empty
+     * @param hides profiles of the same id and other content that it hides, in words; empty where there are none
      */
     public record ProfileUse(String id, String kind, String from, String digest, String hides) {}
 
+    /** Keeps the lists as they are. */
     public LoadedDesign {
         assumed = List.copyOf(assumed);
         profiles = List.copyOf(profiles);

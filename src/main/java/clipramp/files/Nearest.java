@@ -7,13 +7,17 @@ import java.util.Locale;
 public final class Nearest {
     private Nearest() {}
 
-    /** Empty where nothing is near enough to be meant. */
+    /**
+     * The nearest of the known words; a beginning counts as near, and so does the last part of a key.
+     *
+     * @return empty where nothing is near enough to be meant: half of the word's length, at least two signs
+     */
     public static String to(String word, List<String> known) {
         String best = "";
         int bestDistance = Math.max(2, word.length() / 2) + 1;
         String folded = word.toLowerCase(Locale.ROOT);
         for (String candidate : known) {
-            int distance = isBeginning(folded, candidate) ? 1 : distance(folded, candidate);
+            int distance = isPartOf(folded, candidate) ? 1 : distance(folded, candidate);
             if (distance < bestDistance) {
                 best = candidate;
                 bestDistance = distance;
@@ -22,11 +26,12 @@ public final class Nearest {
         return best;
     }
 
-    private static boolean isBeginning(String a, String b) {
-        return Math.min(a.length(), b.length()) > 2 && (a.startsWith(b) || b.startsWith(a));
+    private static boolean isPartOf(String word, String known) {
+        return Math.min(word.length(), known.length()) > 2
+                && (word.startsWith(known) || known.startsWith(word) || known.endsWith("." + word));
     }
 
-    /** Several of them, nearest first. */
+    /** The nearest of the known words, nearest first, at most so many. */
     public static List<String> several(String word, List<String> known, int most) {
         String folded = word.toLowerCase(Locale.ROOT);
         return known.stream()
@@ -35,25 +40,25 @@ public final class Nearest {
                 .toList();
     }
 
-    /** Levenshtein distance with neighbours swapped counted once. */
+    /** Levenshtein's distance, two neighbours exchanged counted once. */
     static int distance(String a, String b) {
         if (a.length() > 64 || b.length() > 64) {
             return Integer.MAX_VALUE / 2;
         }
-        int[][] d = new int[a.length() + 1][b.length() + 1];
+        int[][] steps = new int[a.length() + 1][b.length() + 1];
         for (int i = 0; i <= a.length(); i++) {
             for (int j = 0; j <= b.length(); j++) {
                 if (i == 0 || j == 0) {
-                    d[i][j] = i + j;
+                    steps[i][j] = i + j;
                     continue;
                 }
                 int change = a.charAt(i - 1) == b.charAt(j - 1) ? 0 : 1;
-                d[i][j] = Math.min(Math.min(d[i - 1][j], d[i][j - 1]) + 1, d[i - 1][j - 1] + change);
+                steps[i][j] = Math.min(Math.min(steps[i - 1][j], steps[i][j - 1]) + 1, steps[i - 1][j - 1] + change);
                 if (i > 1 && j > 1 && a.charAt(i - 1) == b.charAt(j - 2) && a.charAt(i - 2) == b.charAt(j - 1)) {
-                    d[i][j] = Math.min(d[i][j], d[i - 2][j - 2] + 1);
+                    steps[i][j] = Math.min(steps[i][j], steps[i - 2][j - 2] + 1);
                 }
             }
         }
-        return d[a.length()][b.length()];
+        return steps[a.length()][b.length()];
     }
 }

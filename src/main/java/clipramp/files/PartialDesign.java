@@ -9,11 +9,13 @@ import clipramp.sizing.OpenPart;
 import clipramp.sizing.SizingRequest;
 import clipramp.units.PreferredSeries;
 import java.util.ArrayList;
+import java.util.Collections;
 import java.util.EnumSet;
 import java.util.HashSet;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
+import java.util.TreeSet;
 
 /**
  * A design file that may lack parts, which are then open to be chosen. What is missing is filled in with a start that is
@@ -30,8 +32,9 @@ public record PartialDesign(DesignText text, LoadedDesign loaded, Set<OpenPart> 
 
     private static final String RESISTOR = "1 kΩ ±5 % 0.25 W";
 
+    /** Puts the open parts in the order of the signal. */
     public PartialDesign {
-        open = java.util.Collections.unmodifiableSet(new java.util.TreeSet<>(open));
+        open = Collections.unmodifiableSet(new TreeSet<>(open));
         notes = List.copyOf(notes);
     }
 
@@ -48,7 +51,12 @@ public record PartialDesign(DesignText text, LoadedDesign loaded, Set<OpenPart> 
         return new Filling(DesignText.of(source), library).read(free, keep);
     }
 
-    /** The request that it makes, with the devices that the library has. */
+    /**
+     * The request that it makes.
+     *
+     * @param library whose devices may be chosen
+     * @param series preferred values
+     */
     public SizingRequest request(ProfileLibrary library, PreferredSeries series) {
         return new SizingRequest(loaded.design(), open, new StockReader(text, library).read(open), series);
     }

@@ -22,12 +22,15 @@ import java.util.Map;
  */
 public record Profile(String id, String kind, String from, String digest, String like, List<Figure> figures) {
     /**
+     * One figure.
+     *
      * @param key key within the profile, such as valley.current
      * @param text as written, such as {min: 8 mA, typ: 10 mA, max: 18 mA}
      * @param source where it comes from
      */
     public record Figure(String key, String text, String source) {}
 
+    /** Keeps the figures as they are. */
     public Profile {
         figures = List.copyOf(figures);
     }

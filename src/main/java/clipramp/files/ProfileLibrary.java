@@ -33,12 +33,16 @@ public final class ProfileLibrary {
     private static final String ENDING = ".yaml";
 
     /**
+     * A place where a user's own profiles lie.
+     *
      * @param folder holds KIND/ID.yaml
      * @param from how answers name it
      */
-    public record Folder(Path folder, String from) {}
+    record Folder(Path folder, String from) {}
 
     /**
+     * A profile that is there.
+     *
      * @param kind kind of device
      * @param id its id
      * @param from where it was found
@@ -66,7 +70,8 @@ public final class ProfileLibrary {
         return new ProfileLibrary(List.of());
     }
 
-    public static ProfileLibrary of(List<Folder> folders) {
+    /** Folders in their order, then the program. */
+    static ProfileLibrary of(List<Folder> folders) {
         return new ProfileLibrary(folders);
     }
 
@@ -89,8 +94,8 @@ public final class ProfileLibrary {
         return new ProfileLibrary(folders);
     }
 
-    /** The folder of a user's own profiles. */
-    public static Path userFolder(Map<String, String> environment, Path home, boolean windows) {
+    /** The folder of a user's own profiles; a relative path in the environment counts as none. */
+    static Path userFolder(Map<String, String> environment, Path home, boolean windows) {
         String variable = environment.getOrDefault(windows ? "APPDATA" : "XDG_CONFIG_HOME", "");
         Path base = windows ? home.resolve("AppData").resolve("Roaming") : home.resolve(".config");
         if (!variable.isBlank() && Path.of(variable).isAbsolute()) {
@@ -99,13 +104,18 @@ public final class ProfileLibrary {
         return base.resolve("clipramp").resolve("profiles");
     }
 
-    /** The first profile of this kind and id, in the order of the places; empty where there is none. */
+    /**
+     * The first profile of a kind and id, in the order of the places; empty where there is none.
+     *
+     * @throws UncheckedIOException where a file is there and cannot be read
+     * @throws InvalidInputException where it is too large or not UTF-8
+     */
     public Optional<Found> find(String kind, String id) {
         return everywhere(kind, id).stream().findFirst();
     }
 
     /** Every profile of this kind and id, the one that is used first, then those that it hides. */
-    public List<Found> everywhere(String kind, String id) {
+    List<Found> everywhere(String kind, String id) {
         List<Found> found = new ArrayList<>();
         if (!isId(id)) {
             return found;
@@ -144,7 +154,11 @@ public final class ProfileLibrary {
         return tree;
     }
 
-    /** Ids of a kind in every place, sorted. */
+    /**
+     * Ids of a kind in every place, sorted.
+     *
+     * @throws UncheckedIOException where a folder is there and cannot be read
+     */
     public List<String> ids(String kind) {
         Stream<String> own =
                 Shipped.NAMES.stream().filter(n -> n.startsWith(kind + "/")).map(n -> n.substring(kind.length() + 1));
@@ -152,14 +166,19 @@ public final class ProfileLibrary {
         return Stream.concat(own, others).distinct().sorted().toList();
     }
 
-    /** Every profile that can be used, kind by kind. */
+    /**
+     * Every profile that can be used, kind by kind.
+     *
+     * @throws UncheckedIOException where a folder or file is there and cannot be read
+     * @throws InvalidInputException where a file is too large or not UTF-8
+     */
     public List<Found> all() {
         return DevicePlace.allKinds().stream()
                 .flatMap(kind -> ids(kind).stream().flatMap(id -> find(kind, id).stream()))
                 .toList();
     }
 
-    /** Profiles of an id, whatever their kind. */
+    /** Profiles of an id, whatever their kind; throws as {@link #find}. */
     public List<Found> named(String id) {
         return DevicePlace.allKinds().stream()
                 .flatMap(kind -> find(kind, id).stream())
@@ -194,8 +213,10 @@ public final class ProfileLibrary {
         }
     }
 
-    // Class path resources cannot be listed, so the place that this class came from is walked: a folder, a jar, or the
-    // Java runtime itself, into which an application image has linked the program.
+    /**
+     * Class path resources cannot be listed, so the place that this class came from is walked: a folder, a jar, or the Java
+     * runtime itself, into which an application image has linked the program.
+     */
     private static List<String> shippedNames() {
         try {
             Module module = ProfileLibrary.class.getModule();

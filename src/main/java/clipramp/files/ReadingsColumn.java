@@ -15,6 +15,7 @@ import java.util.Locale;
 import java.util.Optional;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
+import org.jspecify.annotations.Nullable;
 
 /**
  * One column of a readings file, from its head: {@code firing angle (deg) ±1}.
@@ -55,14 +56,7 @@ record ReadingsColumn(String head, Kind kind, double scale, Accuracy accuracy) {
             this(name, usualUnit, meter.unit(), 0, high, meter.usual(), meter);
         }
 
-        Kind(
-                String name,
-                String usualUnit,
-                Unit unit,
-                double low,
-                double high,
-                Accuracy usual,
-                @org.jspecify.annotations.Nullable Meter meter) {
+        Kind(String name, String usualUnit, Unit unit, double low, double high, Accuracy usual, @Nullable Meter meter) {
             this.name = name;
             this.usualUnit = usualUnit;
             this.unit = unit;

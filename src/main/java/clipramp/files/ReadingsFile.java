@@ -29,8 +29,10 @@ public final class ReadingsFile {
     }
 
     /**
+     * The readings of a session.
+     *
      * @param source the file's name and text
-     * @param design what was measured: whether it has a knob
+     * @param design what was measured, which says whether a knob must be told
      * @param celsius ambient temperature of the session, °C
      * @throws InvalidInputException with everything that is wrong, in the order of its lines
      */

@@ -8,9 +8,10 @@ import java.util.stream.Collectors;
  * Bench readings as they stand in a table, before anything is made of them: heads and fields as written.
  *
  * @param heads one a column
- * @param rows fields under them, as many as there are heads in every row
+ * @param rows fields under them; kept with as many in every row as there are heads
  */
 public record ReadingsTable(List<String> heads, List<List<String>> rows) {
+    /** Fills short rows up and cuts long ones. */
     public ReadingsTable {
         heads = List.copyOf(heads);
         int width = heads.size();

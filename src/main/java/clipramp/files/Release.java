@@ -7,7 +7,7 @@ import java.util.Optional;
 public final class Release {
     private Release() {}
 
-    /** Such as 0.1.0: from the jar's manifest, or in an application image from the module; unpackaged where there is neither. */
+    /** The version, such as 0.1.0: the jar's manifest or an application image's module has it; "unpackaged" without either. */
     public static String version() {
         ModuleDescriptor module = Release.class.getModule().getDescriptor();
         Optional<String> packaged = module == null

@@ -26,6 +26,8 @@ public final class Remedied {
     private Remedied() {}
 
     /**
+     * A design's text with a remedy.
+     *
      * @param text the design as its author wrote it
      * @param design the same, read
      * @param remedy what is taken over

@@ -15,6 +15,8 @@ import clipramp.units.QuantityText;
 import clipramp.units.Refusal;
 import clipramp.units.RefusedQuantityException;
 import clipramp.units.Unit;
+import java.time.LocalDate;
+import java.time.format.DateTimeParseException;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -61,9 +63,9 @@ final class RestSections {
 
     private static boolean isDate(String text) {
         try {
-            java.time.LocalDate.parse(text);
+            LocalDate.parse(text);
             return true;
-        } catch (java.time.format.DateTimeParseException e) {
+        } catch (DateTimeParseException e) {
             return false;
         }
     }

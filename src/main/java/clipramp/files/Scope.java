@@ -87,11 +87,7 @@ final class Scope {
         return node.placeOf(dotted);
     }
 
-    String textOf(String name) {
-        return node.textOf(name);
-    }
-
-    // What a key holds as one text; empty where it is missing, which has then been dealt with.
+    /** What a key holds as one text; empty where it is missing, which has then been dealt with. */
     private Optional<Scalar> scalar(String name) {
         Key key = catalogue.require(catalogued(name));
         Optional<Node> found = take(name);

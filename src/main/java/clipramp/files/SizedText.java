@@ -19,12 +19,20 @@ import java.util.Set;
 public final class SizedText {
     private SizedText() {}
 
-    /** The request's text with every open part as the design has it. */
+    /**
+     * The request's text with every open part as a design has it.
+     *
+     * @throws InvalidInputException where the text is no YAML of ours
+     */
     public static DesignText of(PartialDesign request, Design design) {
         return of(request.text(), request.open(), design);
     }
 
-    /** A text with the given parts as the design has them. */
+    /**
+     * A text with some parts as a design has them; parts that it does not have stay.
+     *
+     * @throws InvalidInputException where the text is no YAML of ours
+     */
     public static DesignText of(DesignText text, Set<OpenPart> parts, Design design) {
         DesignText changed = text;
         for (OpenPart part : parts) {
@@ -56,11 +64,15 @@ public final class SizedText {
                 : changed.without("ramp.pot.half");
     }
 
-    /** A text with the design's pot, law and shunt included. */
+    /**
+     * A text with a design's whole pot, law and shunt included; the same text where it has none.
+     *
+     * @throws InvalidInputException where the text is no YAML of ours
+     */
     public static DesignText withPot(DesignText text, Design design) {
         return design.ramp()
                 .pot()
-                .map(pot -> text.withValue("ramp.pot", DesignWriter.pot(pot)))
+                .map(pot -> text.withValue("ramp.pot", pot(pot)))
                 .orElse(text);
     }
 
@@ -99,7 +111,39 @@ public final class SizedText {
         return Optional.of(FlowText.partText(part, Unit.OHM));
     }
 
-    private static String transformer(PulseTransformer transformer) {
-        return DesignWriter.transformer(transformer);
+    /** A pulse transformer with all its keys, in braces. */
+    static String transformer(PulseTransformer transformer) {
+        return new FlowText()
+                .quantity("ratio", transformer.ratio(), Unit.NUMBER)
+                .raw("secondaries", String.valueOf(transformer.secondaries()))
+                .quantity("magnetising", transformer.magnetisingHenries(), Unit.HENRY)
+                .quantity("primary-resistance", transformer.primaryOhms(), Unit.OHM)
+                .quantity("secondary-resistance", transformer.secondaryOhms(), Unit.OHM)
+                .raw("clamp", transformer.clampDiode() ? "diode" : "none")
+                .optional("volt-seconds", transformer.voltSeconds(), Unit.VOLT_SECOND)
+                .text();
+    }
+
+    /** A pot with all its keys, in braces. */
+    static String pot(Pot pot) {
+        FlowText text = new FlowText()
+                .part("track", pot.track(), Unit.OHM)
+                .quantity("end", pot.endOhms(), Unit.OHM)
+                .raw("law", pot.law().word());
+        if (pot.law() instanceof PotLaw.Logarithmic log) {
+            text.quantity("half", log.half(), Unit.FRACTION);
+        } else if (pot.law() instanceof PotLaw.ReverseLogarithmic log) {
+            text.quantity("half", log.half(), Unit.FRACTION);
+        } else if (pot.law() instanceof PotLaw.Table table) {
+            text.raw(
+                    "points",
+                    FlowText.list(table.points().stream()
+                            .map(p -> "[" + QuantityText.exact(p.rotation(), Unit.FRACTION) + ", "
+                                    + QuantityText.exact(p.share(), Unit.FRACTION) + "]")
+                            .toList()));
+        }
+        return text.raw("sense", pot.sense().word())
+                .part("shunt", pot.shunt(), Unit.OHM)
+                .text();
     }
 }

@@ -20,6 +20,7 @@ public record Source(String name, String text) {
     /** Largest design or profile that is read, bytes. */
     public static final int LARGEST_BYTES = 1 << 20;
 
+    /** Takes a byte order mark off. */
     public Source {
         if (text.startsWith("\ufeff")) {
             text = text.substring(1);
@@ -38,7 +39,12 @@ public record Source(String name, String text) {
         }
     }
 
-    /** Reads a stream to its end, such as standard input under the name "-". */
+    /**
+     * Reads a stream to its end, such as standard input under the name "-".
+     *
+     * @throws IOException where it cannot be read
+     * @throws InvalidInputException where it is too large or not UTF-8
+     */
     public static Source of(String name, InputStream in) throws IOException {
         return decoded(name, in.readNBytes(LARGEST_BYTES + 1));
     }

@@ -24,19 +24,35 @@ public final class WholeFile {
     /** What is to be in the file. */
     @FunctionalInterface
     public interface Content {
+        /**
+         * Writes all of it.
+         *
+         * @throws IOException where that fails; the file then stays as it was
+         */
         void writeTo(OutputStream out) throws IOException;
     }
 
-    /** Writes a text as UTF-8. */
+    /**
+     * Writes a text as UTF-8.
+     *
+     * @param file where to; a link is followed, a device or pipe is written to directly
+     * @param text what is to be in the file
+     * @param replace whether a file that is there may be replaced
+     * @throws FileAlreadyExistsException where it is there and may not be
+     * @throws IOException where it cannot be written; what was there stays
+     */
     public static void write(Path file, String text, boolean replace) throws IOException {
         write(file, out -> out.write(text.getBytes(StandardCharsets.UTF_8)), replace);
     }
 
     /**
+     * Writes bytes.
+     *
      * @param file where to; a link is followed, a device or pipe is written to directly
      * @param content writes the bytes; when it throws, the file stays as it was
      * @param replace whether a file that is there may be replaced
      * @throws FileAlreadyExistsException where it is there and may not be
+     * @throws IOException where it cannot be written; what was there stays
      */
     public static void write(Path file, Content content, boolean replace) throws IOException {
         Path target = Files.exists(file) ? file.toRealPath() : file.toAbsolutePath();
@@ -66,8 +82,9 @@ public final class WholeFile {
             Path name = target.resolveSibling("." + target.getFileName() + ".part" + i);
             try {
                 return Files.createFile(name);
-            } catch (FileAlreadyExistsException e) {
-                // somebody else writes the same file, or once crashed doing so: the next name
+            } catch (FileAlreadyExistsException taken) {
+                // Somebody else writes the same file, or once crashed doing so.
+                continue;
             }
         }
         throw new IOException("no free temporary name beside " + target);

@@ -1,6 +1,7 @@
 package clipramp.files;
 
 import clipramp.files.Key.Kind;
+import java.util.Locale;
 import java.util.regex.Pattern;
 
 /** Writes values so that they read back as they are. */
@@ -51,7 +52,7 @@ final class YamlText {
                 case '\t' -> out.append("\\t");
                 default -> {
                     if (c < ' ' || c >= 0x7f && c < 0xa0 || c == 0x2028 || c == 0x2029 || c == 0xfeff) {
-                        out.append(String.format(java.util.Locale.ROOT, "\\u%04x", c));
+                        out.append(String.format(Locale.ROOT, "\\u%04x", c));
                     } else {
                         out.appendCodePoint(c);
                     }

@@ -5,6 +5,7 @@ import com.fasterxml.jackson.core.JsonProcessingException;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
 import java.util.regex.Matcher;
@@ -54,8 +55,7 @@ final class YamlWords {
             if (isRefused(sign) && line != lastRefusedLine) {
                 String what = sign == '\t'
                         ? "a tab stands here. Indent and separate with spaces."
-                        : String.format(
-                                java.util.Locale.ROOT, "a control sign (U+%04X) stands here. Take it out.", sign);
+                        : String.format(Locale.ROOT, "a control sign (U+%04X) stands here. Take it out.", sign);
                 findings.problem(Place.of(source.name(), line, column), "", what);
                 found = true;
                 lastRefusedLine = line;
@@ -89,8 +89,10 @@ final class YamlWords {
         findings.problem(place, "", sentence);
     }
 
-    // The parser names where a brace or quote was opened, then where it gave up. The opening helps more where giving up
-    // came lines later.
+    /**
+     * The parser names where a brace or quote was opened, then where it gave up. The opening helps more where giving up came
+     * lines later.
+     */
     private static Place place(JsonProcessingException e, String said, String file) {
         List<Place> named = new ArrayList<>();
         Matcher position = POSITION.matcher(said);

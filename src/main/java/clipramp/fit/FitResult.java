@@ -47,7 +47,7 @@ public record FitResult(
     }
 
     /** Values of which the readings leave half the uncertainty or less. */
-    public List<Fitted> told() {
+    List<Fitted> told() {
         return values.stream()
                 .filter(value -> value.knowledge() == Fitted.Knowledge.TOLD)
                 .toList();

@@ -34,7 +34,7 @@ public enum Meter {
     }
 
     /** What is read, in words. */
-    public String words() {
+    String words() {
         return words;
     }
 

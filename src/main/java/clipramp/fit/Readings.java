@@ -29,7 +29,7 @@ public record Readings(String name, double celsius, List<BenchLine> lines) {
     }
 
     /** Whether an instrument was read on any line. */
-    public boolean has(Meter meter) {
+    boolean has(Meter meter) {
         return lines.stream().flatMap(line -> line.readings().stream()).anyMatch(reading -> reading.meter() == meter);
     }
 

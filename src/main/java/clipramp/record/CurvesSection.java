@@ -8,6 +8,7 @@ import clipramp.figures.NumberTable;
 import clipramp.figures.SpreadBands;
 import clipramp.margins.Check;
 import clipramp.units.Unit;
+import java.util.Arrays;
 import java.util.stream.IntStream;
 
 /** Knob and power, the half cycle, and the gate's drive: each a figure with its numbers. */
@@ -98,7 +99,7 @@ final class CurvesSection {
     private void table(NumberTable numbers) {
         int columns = numbers.heads().size();
         float[] widths = new float[columns];
-        java.util.Arrays.fill(widths, 1);
+        Arrays.fill(widths, 1);
         int[] right = IntStream.range(0, columns - 1).toArray();
         Grid grid = new Grid(paper.faces(), widths, right);
         grid.heads(numbers.heads().toArray(String[]::new));

@@ -9,4 +9,4 @@ package clipramp.record;
  * @param tolerance how far a good unit may be off, with unit; empty where it is not computed
  * @param instrument what is fit to measure it
  */
-public record Expectation(String where, String what, String expected, String tolerance, String instrument) {}
+record Expectation(String where, String what, String expected, String tolerance, String instrument) {}

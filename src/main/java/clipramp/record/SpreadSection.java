@@ -5,6 +5,7 @@ import clipramp.spread.PositionSpread;
 import clipramp.spread.SpreadResult;
 import clipramp.spread.SpreadWords;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 import java.util.Locale;
 import java.util.stream.IntStream;
@@ -44,7 +45,7 @@ final class SpreadSection {
         SpreadResult.PERCENTAGES.forEach(p -> heads.add(String.format(Locale.ROOT, "P %.0f %%", p)));
         heads.addAll(List.of("least", "greatest"));
         float[] widths = new float[heads.size()];
-        java.util.Arrays.fill(widths, 1);
+        Arrays.fill(widths, 1);
         Grid grid =
                 new Grid(paper.faces(), widths, IntStream.range(0, heads.size()).toArray());
         grid.heads(heads.toArray(String[]::new));

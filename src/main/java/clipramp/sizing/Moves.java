@@ -13,6 +13,7 @@ import clipramp.units.PreferredSeries;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalDouble;
 import java.util.function.UnaryOperator;
 
 /** The next values of one part. */
@@ -181,7 +182,7 @@ final class Moves {
                             now.primaryOhms(),
                             now.secondaryOhms(),
                             true,
-                            java.util.OptionalDouble.of(voltSeconds));
+                            OptionalDouble.of(voltSeconds));
                     if (!other.equals(now)) {
                         all.add(Edit.transformer(design, other));
                     }

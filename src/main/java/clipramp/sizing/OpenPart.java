@@ -4,6 +4,7 @@ import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
+import java.util.TreeSet;
 import java.util.stream.Collectors;
 
 /** What sizing can decide, in the order of the signal. */
@@ -61,7 +62,7 @@ public enum OpenPart {
     }
 
     /** The word that names it together with its neighbours: clip, ramp, trigger, bases, gate, thyristor. */
-    public String group() {
+    String group() {
         return group;
     }
 
@@ -77,7 +78,7 @@ public enum OpenPart {
     public static Optional<Set<OpenPart>> named(String word) {
         Set<OpenPart> parts = Arrays.stream(values())
                 .filter(p -> p.key.equals(word) || p.group.equals(word))
-                .collect(Collectors.toCollection(java.util.TreeSet::new));
+                .collect(Collectors.toCollection(TreeSet::new));
         return parts.isEmpty() ? Optional.empty() : Optional.of(parts);
     }
 }

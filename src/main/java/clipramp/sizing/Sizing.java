@@ -73,8 +73,8 @@ public final class Sizing {
     private static SizingAnswer searched(SizingRequest request, Watch watch) {
         Search search = new Search(request, watch);
         Judged first = search.first();
-        Optional<Nearest> nearest = failing(first).stream().anyMatch(m -> m.kind() == MarginKind.WANTED_HIGHEST)
-                ? Nearest.of(first.design(), first.reach())
+        Optional<NearestSetting> nearest = failing(first).stream().anyMatch(m -> m.kind() == MarginKind.WANTED_HIGHEST)
+                ? NearestSetting.of(first.design(), first.reach())
                 : Optional.empty();
         if (nearest.isPresent()) {
             return nearer(request, nearest.get(), watch);
@@ -84,9 +84,9 @@ public final class Sizing {
     }
 
     /** The design for the nearest setting that can be had, judged by what was wanted. */
-    private static SizingAnswer nearer(SizingRequest request, Nearest nearest, Watch watch) {
+    private static SizingAnswer nearer(SizingRequest request, NearestSetting nearest, Watch watch) {
         Wanted wanted = request.design().wanted();
-        Nearest asked = nearest;
+        NearestSetting asked = nearest;
         Search search = new Search(easier(request, asked), watch);
         Judged best = search.first();
         int candidates = search.all().size();
@@ -103,12 +103,12 @@ public final class Sizing {
         return answer(new Kept(judged, List.of()), again.all(), Optional.of(said(wanted, asked, kept)), candidates);
     }
 
-    private static SizingRequest easier(SizingRequest request, Nearest nearest) {
+    private static SizingRequest easier(SizingRequest request, NearestSetting nearest) {
         return new SizingRequest(
                 request.design().withWanted(nearest.wanted()), request.open(), request.stock(), request.series());
     }
 
-    private static String said(Wanted wanted, Nearest nearest, Kept kept) {
+    private static String said(Wanted wanted, NearestSetting nearest, Kept kept) {
         double from = wanted.highest().orElseThrow().from();
         Goal goal = nearest.wanted().highest().orElseThrow();
         String holds = !kept.judged().grade().holds()
@@ -116,8 +116,8 @@ public final class Sizing {
                 : kept.corners().isEmpty()
                         ? "; the design shown holds with that, in the worst case too"
                         : "; the design shown holds with that, with nominal parts";
-        return "The nearest that can be met: " + Nearest.text(goal.measure(), goal.from()) + " in place of "
-                + Nearest.text(goal.measure(), from) + " at "
+        return "The nearest that can be met: " + NearestSetting.text(goal.measure(), goal.from()) + " in place of "
+                + NearestSetting.text(goal.measure(), from) + " at "
                 + QuantityText.format(goal.position(), Unit.FRACTION, FIGURES) + holds + ". " + nearest.why();
     }
 

@@ -1,5 +1,6 @@
 package clipramp.spread;
 
+import clipramp.margins.MarginKind;
 import clipramp.units.QuantityText;
 import java.util.ArrayList;
 import java.util.List;
@@ -29,11 +30,16 @@ public final class SpreadWords {
         if (!spread.sentence().isEmpty()) {
             all.add(spread.sentence());
         }
-        all.add("Parts lie " + spread.options().law().words()
-                + "; data-sheet figures triangular through minimum, typical and"
-                + " maximum, or uniform where no typical value is given; line voltage, frequency and temperature uniform."
-                + " Every figure is drawn by itself.");
+        all.add(laws(spread.options().law()));
         return all;
+    }
+
+    /** How everything that differs is drawn, with parts by the given law. */
+    public static String laws(DrawLaw parts) {
+        return "Parts lie " + parts.words()
+                + "; data-sheet figures triangular through minimum, typical and maximum, or uniform where no typical value is"
+                + " given; line voltage, frequency (1 % either way, EN 50160) and temperature uniform. Every factor is drawn by"
+                + " itself.";
     }
 
     private static String share(String what, Yield yield) {
@@ -47,8 +53,8 @@ public final class SpreadWords {
     }
 
     private static String failure(Map.Entry<String, Double> worst) {
-        return "Failed most often: " + worst.getKey().replace('-', ' ') + ", by " + ofUnits(worst.getValue())
-                + " of the judged units.";
+        String margin = MarginKind.byId(worst.getKey()).map(MarginKind::title).orElse(worst.getKey());
+        return "Failed most often: " + margin + ", by " + ofUnits(worst.getValue()) + " of the judged units.";
     }
 
     private static void states(SpreadResult spread, List<String> all) {

@@ -205,6 +205,22 @@ class CliTest {
     }
 
     @Test
+    void aFileWithoutAFiringCircuitIsLedToSize() {
+        String request = "clipramp: 1\nwanted: {lowest: 5 % at 0 %, highest: 95 % at 100 %}\n";
+        assertThat(CliRun.withInput(request, "check", "-").err())
+                .contains("line: is missing", "clipramp size - makes a design from line, stage, load and wanted");
+        assertThat(CliRun.withInput(request, "size", "-").err()).contains("line: is missing");
+    }
+
+    @Test
+    void aFileNameInPlaceOfAnOptionIsProposedAsOne() {
+        assertThat(CliRun.of("new", "target/x.yaml").err())
+                .contains("--out is missing. Is it --out=target/x.yaml? See clipramp new --help.");
+        assertThat(CliRun.of("record", DESIGN, "my.pdf").err()).contains("Is it --out=my.pdf?");
+        assertThat(CliRun.of("record", DESIGN).err()).doesNotContain("Is it");
+    }
+
+    @Test
     void signsThatTheLocaleSwallowedAreExplained() {
         assertThat(CliRun.of("map", DESIGN, "--with=clip.dropper=10 k\uFFFD\uFFFD")
                         .err())

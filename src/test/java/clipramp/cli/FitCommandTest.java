@@ -124,6 +124,25 @@ class FitCommandTest {
         assertThat(run.err()).contains("--with and --out");
     }
 
+    @Test
+    void aFileThatCannotBeWrittenIsRefusedBeforeTheFit(@TempDir Path folder) throws IOException {
+        // The readings are not there either: whoever looked at them first would say so.
+        Path nowhere = folder.resolve("nowhere.csv");
+        assertThat(CliRun.of("fit", DESIGN, nowhere.toString(), "--record=unit.yaml")
+                        .err())
+                .contains("ends in .pdf");
+        assertThat(CliRun.of("fit", DESIGN, nowhere.toString(), "--record=" + folder.resolve("no/unit.pdf")))
+                .satisfies(run -> assertThat(run.code()).isEqualTo(4))
+                .satisfies(run -> assertThat(run.err()).contains("there is no folder " + folder.resolve("no")));
+        Path there = Files.createFile(folder.resolve("there.yaml"));
+        assertThat(CliRun.of("fit", DESIGN, nowhere.toString(), "--out=" + there)
+                        .err())
+                .contains("exists already");
+        assertThat(CliRun.of("fit", DESIGN, nowhere.toString(), "--out=" + folder)
+                        .err())
+                .contains("it is a folder");
+    }
+
     private static JsonNode json(CliRun run) throws IOException {
         assertThat(run.code()).isZero();
         JsonNode answer = new ObjectMapper().readTree(run.out());

@@ -63,6 +63,8 @@ class SizeCommandTest {
     @Test
     void refusesWhatIsNoPartAndNoSeries() {
         assertThat(CliRun.withInput(REQUEST, "size", "-", "--free=rampp").err()).contains("rampp", "Nearest: ramp");
+        assertThat(CliRun.withInput(REQUEST, "size", "-", "--free=capacitor").err())
+                .contains("capacitor", "Nearest: ramp.capacitor");
         assertThat(CliRun.withInput(REQUEST, "size", "-", "--series=E13").err()).contains("E13", "Nearest: E3");
         assertThat(CliRun.withInput(REQUEST, "size", "-", "--shape=colour").code())
                 .isEqualTo(2);

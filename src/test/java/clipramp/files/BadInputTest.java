@@ -509,7 +509,6 @@ class BadInputTest {
         assertThat(Conditions.celsius("-5")).isEqualTo(-5);
         assertThat(Conditions.knob("50%")).isEqualTo(0.5);
         assertThat(Conditions.rampOhms("50k")).isEqualTo(50_000);
-        assertThat(Conditions.firingRad("90")).isEqualTo(Math.PI / 2);
         assertThatThrownBy(() -> Conditions.knob("50"))
                 .hasMessage("--knob read \"50\" (5000 %); expected 0 %..100 %. 50 %?");
     }

@@ -23,7 +23,6 @@ class KeyCatalogueTest {
         assertThat(CATALOGUE.all()).hasSizeGreaterThan(150).allSatisfy(key -> {
             assertThat(key.meaning()).as(key.path()).endsWith(".");
             assertThat(key.range()).as(key.path()).isNotBlank();
-            assertThat(key.explained()).hasSizeGreaterThan(2);
         });
     }
 
@@ -56,7 +55,6 @@ class KeyCatalogueTest {
                 .containsExactly("line.harmonics.share");
         assertThat(CATALOGUE.meant("standoff")).extracting(Key::path).containsExactly("unijunction.standoff");
         assertThat(CATALOGUE.meant("nonsense")).isEmpty();
-        assertThat(CATALOGUE.nearest("clip.droper")).first().isEqualTo("clip.dropper");
     }
 
     @Test

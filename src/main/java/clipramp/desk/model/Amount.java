@@ -4,7 +4,7 @@ import clipramp.units.QuantityText;
 import clipramp.units.Unit;
 
 /** An amount with its unit symbol, as rows show it. */
-public final class Amount {
+final class Amount {
     private static final int DIGITS = 3;
 
     private Amount() {}
@@ -15,7 +15,7 @@ public final class Amount {
      * @param value in SI units; angles in degrees where the symbol is a degree sign
      * @param symbol SI unit symbol, empty for a plain number
      */
-    public static String text(double value, String symbol) {
+    static String text(double value, String symbol) {
         if (Double.isNaN(value)) {
             return "–";
         }

@@ -55,7 +55,7 @@ public final class Bench {
      * @param home the thread of this bench
      * @param troubles takes what could not be solved
      */
-    public Bench(Executor turning, Executor sweeping, Executor home, Consumer<RuntimeException> troubles) {
+    Bench(Executor turning, Executor sweeping, Executor home, Consumer<RuntimeException> troubles) {
         reader = new LatestWins<>(Reading::of, turning, home, this::take, trouble -> {
             aimedRad = OptionalDouble.empty();
             reading.ifPresent(r -> setting = r.setting());
@@ -78,7 +78,7 @@ public final class Bench {
     }
 
     /** Puts a design on the bench; the knob stays where it is. */
-    public void put(Design design, Condition condition) {
+    void put(Design design, Condition condition) {
         Knob next = new Knob(design, condition);
         knob = Optional.of(next);
         aimedRad = OptionalDouble.empty();
@@ -165,7 +165,7 @@ public final class Bench {
     }
 
     /** Whether an answer is still to come. */
-    public boolean isBusy() {
+    boolean isBusy() {
         return reader.isBusy() || curves.isBusy();
     }
 }

@@ -113,12 +113,12 @@ public final class BenchSheet {
     }
 
     /** Whether a row holds nothing at all. */
-    public boolean isEmpty(int row) {
+    boolean isEmpty(int row) {
         return rows.get(row).values().stream().allMatch(String::isBlank);
     }
 
     /** A number with a decimal comma as one with a dot; what could be a thousand as well stays, to be asked back. */
-    public static String tidied(String typed) {
+    static String tidied(String typed) {
         String plain = typed.strip();
         boolean clear = plain.matches("[+-]?\\d+,\\d+( ?%)?") && !plain.matches("[+-]?\\d{1,3},\\d{3}");
         return clear ? plain.replace(',', '.') : plain;

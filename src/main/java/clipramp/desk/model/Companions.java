@@ -14,7 +14,7 @@ import java.util.List;
  * What must change together: another stage asks for another rectifier or coupling (DEVELOPERS.md, The circuit laws; the table of
  * sound combinations), another coupling for a transformer or none. One choice, one step back.
  */
-public final class Companions {
+final class Companions {
     /** A small one-to-one pulse transformer, typical of the class, for a design that had none. */
     private static final String TRANSFORMER =
             "{ratio: 1, secondaries: %s, magnetising: 2 mH, primary-resistance: 0.5 ohm, secondary-resistance: 0.5 ohm}";
@@ -41,7 +41,7 @@ public final class Companions {
      * @param design the design as it stands
      * @param programmable whether the choice is a programmable unijunction transistor
      */
-    public static List<Change> of(String key, String word, Design design, boolean programmable) {
+    static List<Change> of(String key, String word, Design design, boolean programmable) {
         List<Change> changes = new ArrayList<>();
         changes.add(new Change(key, Extra.at(key).map(f -> f.written(word)).orElse(word)));
         if (key.equals("load.kind")) {

@@ -38,7 +38,7 @@ public final class Draft {
      * @param recovery keeps unsaved work
      * @param troubles takes what went wrong where nobody waits for the answer
      */
-    public Draft(Workers workers, Workshop workshop, Recovery recovery, Consumer<Trouble> troubles) {
+    Draft(Workers workers, Workshop workshop, Recovery recovery, Consumer<Trouble> troubles) {
         this.workers = workers;
         this.workshop = workshop;
         this.recovery = recovery;
@@ -78,7 +78,7 @@ public final class Draft {
     }
 
     /** Whether something is being read or written. */
-    public boolean isBusy() {
+    boolean isBusy() {
         return editing || errands.isRunning() || !edits.isEmpty();
     }
 

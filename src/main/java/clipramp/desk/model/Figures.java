@@ -32,7 +32,7 @@ public record Figures(
     }
 
     /** An angle with the decimal that an arrow key with Shift moves. */
-    public static String degrees(double rad) {
+    static String degrees(double rad) {
         return String.format(Locale.ROOT, "%.1f°", Math.toDegrees(rad));
     }
 

@@ -3,6 +3,7 @@ package clipramp.desk.model;
 import clipramp.desk.model.LongRun.Telling;
 import clipramp.files.AsBuilt;
 import clipramp.files.DesignText;
+import clipramp.files.InvalidInputException;
 import clipramp.files.ReadingsFile;
 import clipramp.files.ReadingsTable;
 import clipramp.files.Source;
@@ -10,6 +11,7 @@ import clipramp.fit.Fit;
 import clipramp.fit.FitResult;
 import clipramp.fit.FitWords;
 import clipramp.fit.Readings;
+import clipramp.fit.UnsettledFitException;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
@@ -61,17 +63,17 @@ public final class Fitting {
     /**
      * @param workshop reads the design as built
      */
-    public Fitting(Workshop workshop) {
+    Fitting(Workshop workshop) {
         this.workshop = workshop;
     }
 
     /**
      * Fits; seconds.
      *
-     * @throws clipramp.files.InvalidInputException with everything that is wrong with the readings
-     * @throws clipramp.fit.UnsettledFitException where no values can be found
+     * @throws InvalidInputException with everything that is wrong with the readings
+     * @throws UnsettledFitException where no values can be found
      */
-    public Answer of(Asked asked, Telling telling) {
+    Answer of(Asked asked, Telling telling) {
         Source source = new Source(asked.name(), asked.table().csv());
         Readings read = ReadingsFile.read(source, asked.sheet().design(), asked.celsius());
         if (asked.lineVolts().isPresent()) {

@@ -9,7 +9,7 @@ import java.util.Optional;
  *
  * @param <T> what is stepped through; never changes itself
  */
-public final class History<T> {
+final class History<T> {
     /** Designs are a few kilobytes; this many are no burden. */
     private static final int MOST = 500;
 
@@ -19,16 +19,16 @@ public final class History<T> {
     private final Deque<Step<T>> after = new ArrayDeque<>();
     private T now;
 
-    public History(T start) {
+    History(T start) {
         this.now = start;
     }
 
-    public T now() {
+    T now() {
         return now;
     }
 
     /** Goes on to another state; what was taken back before can no longer be taken again. */
-    public void step(String name, T next) {
+    void step(String name, T next) {
         before.push(new Step<>(name, now));
         if (before.size() > MOST) {
             before.removeLast();
@@ -38,15 +38,15 @@ public final class History<T> {
     }
 
     /** What undo would take back, such as "ramp capacitor to 100 nF". */
-    public Optional<String> undoName() {
+    Optional<String> undoName() {
         return Optional.ofNullable(before.peek()).map(Step::name);
     }
 
-    public Optional<String> redoName() {
+    Optional<String> redoName() {
         return Optional.ofNullable(after.peek()).map(Step::name);
     }
 
-    public void undo() {
+    void undo() {
         if (!before.isEmpty()) {
             Step<T> step = before.pop();
             after.push(new Step<>(step.name(), now));
@@ -54,7 +54,7 @@ public final class History<T> {
         }
     }
 
-    public void redo() {
+    void redo() {
         if (!after.isEmpty()) {
             Step<T> step = after.pop();
             before.push(new Step<>(step.name(), now));

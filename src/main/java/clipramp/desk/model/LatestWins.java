@@ -51,7 +51,7 @@ public final class LatestWins<Q, A> {
     }
 
     /** Whether an answer is still to come. */
-    public boolean isBusy() {
+    boolean isBusy() {
         return running;
     }
 

@@ -72,7 +72,7 @@ public final class LineNow {
     }
 
     /** Whether an answer is still to come. */
-    public boolean isBusy() {
+    boolean isBusy() {
         return solver.isBusy();
     }
 }

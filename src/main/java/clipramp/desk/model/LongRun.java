@@ -94,7 +94,7 @@ public final class LongRun<Q, A> {
      * @param away where it is done
      * @param home the thread that asks and is answered
      */
-    public LongRun(String what, Work<Q, A> work, Executor away, Executor home) {
+    LongRun(String what, Work<Q, A> work, Executor away, Executor home) {
         this(what, work, away, home, told -> {});
     }
 

@@ -53,7 +53,7 @@ public final class Recovery {
     public record Left(Path kept, Optional<Path> file, String text) {}
 
     /** Keeps the work as it stands. */
-    public void keep(Optional<Path> file, String text) throws IOException {
+    void keep(Optional<Path> file, String text) throws IOException {
         Files.createDirectories(folder);
         Path beside = own.resolveSibling(own.getFileName() + ".part");
         String head = HEAD + file.map(Path::toString).orElse(UNTITLED) + "\n";
@@ -62,7 +62,7 @@ public final class Recovery {
     }
 
     /** Forgets this window's work: it is saved, or given up. */
-    public void forget() throws IOException {
+    void forget() throws IOException {
         Files.deleteIfExists(own);
     }
 

@@ -5,6 +5,7 @@ import clipramp.circuit.Part;
 import clipramp.circuit.Trigger.UnijunctionTrigger;
 import clipramp.desk.model.LongRun.Telling;
 import clipramp.files.DesignText;
+import clipramp.files.InvalidInputException;
 import clipramp.files.PartialDesign;
 import clipramp.files.ProfileLibrary;
 import clipramp.files.SizedText;
@@ -85,17 +86,17 @@ public final class Resizing {
     /**
      * @param workshop where profiles are found
      */
-    public Resizing(Workshop workshop) {
+    Resizing(Workshop workshop) {
         this.workshop = workshop;
     }
 
     /**
      * Searches; seconds.
      *
-     * @throws clipramp.files.InvalidInputException where the design does not read
+     * @throws InvalidInputException where the design does not read
      * @throws IllegalArgumentException where there is nothing to look for, in words
      */
-    public Resized of(Asked asked, Telling telling) {
+    Resized of(Asked asked, Telling telling) {
         ProfileLibrary library = workshop.library(asked.file());
         Set<OpenPart> kept = EnumSet.allOf(OpenPart.class);
         kept.removeAll(asked.free());

@@ -1,7 +1,7 @@
 package clipramp.desk.model;
 
 /** Where the ramp's resistance is set, as it was last asked for. */
-public sealed interface Setting {
+sealed interface Setting {
     /**
      * By the shaft.
      *

@@ -31,7 +31,7 @@ public final class SpreadRun {
      * @param workers where work is done
      * @param troubles takes what went wrong
      */
-    public SpreadRun(Workers workers, Consumer<Trouble> troubles) {
+    SpreadRun(Workers workers, Consumer<Trouble> troubles) {
         home = workers.home();
         run = new LongRun<>(
                 "The units of this design could not be drawn", this::draw, workers.drawing(), home, troubles);

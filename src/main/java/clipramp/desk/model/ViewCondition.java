@@ -28,7 +28,7 @@ public enum ViewCondition {
     }
 
     /** What lanes and knob are solved at. */
-    public Condition solvedAt(Design design) {
+    Condition solvedAt(Design design) {
         return new Condition(
                 pinnedLineVolts(design).orElse(design.line().volts()),
                 design.line().hertz(),
@@ -36,7 +36,7 @@ public enum ViewCondition {
     }
 
     /** The only line voltage that margins are judged at, V; empty for low, nominal and high. */
-    public OptionalDouble pinnedLineVolts(Design design) {
+    OptionalDouble pinnedLineVolts(Design design) {
         return switch (this) {
             case NOMINAL -> OptionalDouble.of(design.line().volts());
             case LOW_LINE -> OptionalDouble.of(design.line().lowVolts());
@@ -46,7 +46,7 @@ public enum ViewCondition {
     }
 
     /** The only temperature that margins are judged at, °C; empty for coldest, 25 °C and hottest. */
-    public OptionalDouble pinnedCelsius(Design design) {
+    OptionalDouble pinnedCelsius(Design design) {
         return switch (this) {
             case NOMINAL -> OptionalDouble.of(ROOM_CELSIUS);
             case COLD -> OptionalDouble.of(design.surroundings().coldestCelsius());

@@ -31,7 +31,7 @@ public final class Workshop {
      * @param file where it lies, for profiles beside it; empty for a design that was never saved
      * @throws InvalidInputException with everything that is wrong with it
      */
-    public Sheet read(DesignText text, Optional<Path> file) {
+    Sheet read(DesignText text, Optional<Path> file) {
         // Under its whole path, for a recorded line is looked for beside it; people read the name.
         String place = file.map(Path::toString).orElse(text.name());
         DesignText.Reading reading = text.named(place).read(libraries.apply(file));
@@ -66,7 +66,7 @@ public final class Workshop {
     }
 
     /** Ids of the profiles that may stand at a key of a design; empty where none may. */
-    public List<String> profileIds(String key, Stage stage, Optional<Path> file) {
+    List<String> profileIds(String key, Stage stage, Optional<Path> file) {
         ProfileLibrary library = libraries.apply(file);
         return kinds(key, stage).flatMap(kind -> library.ids(kind).stream()).toList();
     }
@@ -90,12 +90,12 @@ public final class Workshop {
     }
 
     /** The profiles that a design file sees. */
-    public ProfileLibrary library(Optional<Path> file) {
+    ProfileLibrary library(Optional<Path> file) {
         return libraries.apply(file);
     }
 
     /** Whether an id names a programmable unijunction transistor. */
-    public boolean isProgrammable(String id, Optional<Path> file) {
+    boolean isProgrammable(String id, Optional<Path> file) {
         return libraries.apply(file).ids("programmable-unijunction").contains(id);
     }
 }

@@ -21,7 +21,7 @@ import java.util.Optional;
  * @param wanted what was wanted, with that setting in place of the highest
  * @param why what takes the rest, a sentence
  */
-record Nearest(Wanted wanted, String why) {
+record NearestSetting(Wanted wanted, String why) {
     /** The slowest unit is set to some three quarters of the nominal R_E, and must not feed the valley current either. */
     private static final double RESERVE = 1.4;
 
@@ -33,7 +33,7 @@ record Nearest(Wanted wanted, String why) {
     private static final double LESS = 0.94;
 
     /** The setting for a design; empty where what is wanted lies in reach, or no angle or share was wanted. */
-    static Optional<Nearest> of(Design design, Reach reach) {
+    static Optional<NearestSetting> of(Design design, Reach reach) {
         Optional<Goal> highest = design.wanted().highest();
         if (highest.isEmpty() || highest.get().measure() == Measure.ANGLE) {
             return Optional.empty();
@@ -59,16 +59,16 @@ record Nearest(Wanted wanted, String why) {
         if (!goal.isBand()) {
             nearer = new Goal(goal.measure(), there, there, goal.position());
         }
-        return Optional.of(new Nearest(
+        return Optional.of(new NearestSetting(
                 new Wanted(design.wanted().lowest(), Optional.of(nearer)), why(design, goal, atZero, there)));
     }
 
     /** The same with a little less asked of the highest setting. */
-    Nearest less() {
+    NearestSetting less() {
         Goal goal = wanted.highest().orElseThrow();
         double from = rounded(goal.from() * LESS);
         double to = goal.isBand() ? goal.to() : from;
-        return new Nearest(
+        return new NearestSetting(
                 new Wanted(wanted.lowest(), Optional.of(new Goal(goal.measure(), from, to, goal.position()))), why);
     }
 

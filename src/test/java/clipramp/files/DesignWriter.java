@@ -6,9 +6,6 @@ import clipramp.circuit.Document;
 import clipramp.circuit.GateDrive;
 import clipramp.circuit.Line;
 import clipramp.circuit.Load;
-import clipramp.circuit.Pot;
-import clipramp.circuit.PotLaw;
-import clipramp.circuit.PulseTransformer;
 import clipramp.circuit.Ramp;
 import clipramp.circuit.Snubber;
 import clipramp.circuit.StageDiodes;
@@ -17,15 +14,15 @@ import clipramp.circuit.Trigger;
 import clipramp.circuit.Wanted.Goal;
 import clipramp.units.QuantityText;
 import clipramp.units.Unit;
+import java.math.BigDecimal;
 import java.util.Optional;
 import java.util.TreeMap;
 
 /**
  * Writes a design that was made in memory: every key in the order of the format, devices with all their figures in place.
- * What is written reads back as an equal design. To change a design that somebody wrote, use {@link DesignText}, which
- * keeps the author's comments and profiles.
+ * What is written reads back as an equal design, which is how reading is tested.
  */
-public final class DesignWriter {
+final class DesignWriter {
     private final StringBuilder out = new StringBuilder();
     private final Design design;
 
@@ -33,8 +30,7 @@ public final class DesignWriter {
         this.design = design;
     }
 
-    /** The design file's text. */
-    public static String write(Design design) {
+    static String write(Design design) {
         return new DesignWriter(design).all();
     }
 
@@ -144,7 +140,7 @@ public final class DesignWriter {
     private static String limit(double volts, double nominal) {
         double percent = Math.rint((volts / nominal - 1) * 1e4) / 1e2;
         String text = QuantityText.number(percent, 6);
-        double share = new java.math.BigDecimal(text).scaleByPowerOfTen(-2).doubleValue();
+        double share = new BigDecimal(text).scaleByPowerOfTen(-2).doubleValue();
         return nominal + nominal * share == volts
                 ? (percent > 0 ? "+" : "") + text + " %"
                 : QuantityText.exact(volts, Unit.VOLT);
@@ -200,31 +196,9 @@ public final class DesignWriter {
                 new FlowText()
                         .part("capacitor", ramp.capacitor(), Unit.FARAD)
                         .part("fixed", ramp.fixed(), Unit.OHM)
-                        .raw("pot", ramp.pot().map(DesignWriter::pot).orElse("none"))
+                        .raw("pot", ramp.pot().map(SizedText::pot).orElse("none"))
                         .part("trim-high", ramp.trimmers().high(), Unit.OHM)
                         .part("trim-low", ramp.trimmers().low(), Unit.OHM));
-    }
-
-    static String pot(Pot pot) {
-        FlowText text = new FlowText()
-                .part("track", pot.track(), Unit.OHM)
-                .quantity("end", pot.endOhms(), Unit.OHM)
-                .raw("law", pot.law().word());
-        if (pot.law() instanceof PotLaw.Logarithmic log) {
-            text.quantity("half", log.half(), Unit.FRACTION);
-        } else if (pot.law() instanceof PotLaw.ReverseLogarithmic log) {
-            text.quantity("half", log.half(), Unit.FRACTION);
-        } else if (pot.law() instanceof PotLaw.Table table) {
-            text.raw(
-                    "points",
-                    FlowText.list(table.points().stream()
-                            .map(p -> "[" + QuantityText.exact(p.rotation(), Unit.FRACTION) + ", "
-                                    + QuantityText.exact(p.share(), Unit.FRACTION) + "]")
-                            .toList()));
-        }
-        return text.raw("sense", pot.sense().word())
-                .part("shunt", pot.shunt(), Unit.OHM)
-                .text();
     }
 
     private void trigger(Trigger trigger) {
@@ -249,20 +223,8 @@ public final class DesignWriter {
                 .quantity("overdrive", gate.overdrive(), Unit.NUMBER)
                 .quantity("charge-time", gate.chargeSeconds(), Unit.SECOND)
                 .raw("polarity", gate.polarity().word());
-        gate.transformer().ifPresent(t -> text.raw("transformer", transformer(t)));
+        gate.transformer().ifPresent(t -> text.raw("transformer", SizedText.transformer(t)));
         return text.text();
-    }
-
-    static String transformer(PulseTransformer transformer) {
-        return new FlowText()
-                .quantity("ratio", transformer.ratio(), Unit.NUMBER)
-                .raw("secondaries", String.valueOf(transformer.secondaries()))
-                .quantity("magnetising", transformer.magnetisingHenries(), Unit.HENRY)
-                .quantity("primary-resistance", transformer.primaryOhms(), Unit.OHM)
-                .quantity("secondary-resistance", transformer.secondaryOhms(), Unit.OHM)
-                .raw("clamp", transformer.clampDiode() ? "diode" : "none")
-                .optional("volt-seconds", transformer.voltSeconds(), Unit.VOLT_SECOND)
-                .text();
     }
 
     private void wanted() {
