@@ -3,13 +3,13 @@ package clipramp.faults;
 import clipramp.units.Unit;
 
 /**
- * What a part bears beyond its rating.
+ * What a part bears against one of its ratings.
  *
  * @param part design key
  * @param what which rating, in words
  * @param unit its unit
- * @param borne what there is; POSITIVE_INFINITY where only the line and its fuse limit it
- * @param rating what the part is rated at; NaN where it does not matter
+ * @param borne what there is, in the SI unit; POSITIVE_INFINITY where only the line and its fuse limit it
+ * @param rating what the part is rated at, in the SI unit; NaN where that is not stated or does not matter
  */
 public record Burden(String part, String what, Unit unit, double borne, double rating) {
     /** A current that only the line and its fuse limit. */
@@ -17,7 +17,7 @@ public record Burden(String part, String what, Unit unit, double borne, double r
         return new Burden(part, what, Unit.AMPERE, Double.POSITIVE_INFINITY, Double.NaN);
     }
 
-    /** How many times its rating. */
+    /** How many times its rating; NaN where that is not stated. */
     public double ratio() {
         return isUnlimited() ? Double.POSITIVE_INFINITY : borne / rating;
     }
@@ -27,6 +27,7 @@ public record Burden(String part, String what, Unit unit, double borne, double r
         return borne == Double.POSITIVE_INFINITY;
     }
 
+    /** Whether it is more than the rating, as far as that is stated. */
     boolean isOver() {
         return isUnlimited() || borne > rating;
     }

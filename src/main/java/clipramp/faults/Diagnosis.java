@@ -5,7 +5,7 @@ import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
 
-/** The symptom sheet read backwards: which single faults fit what was seen. */
+/** The symptom sheet read backwards: which single faults fit what was seen (DEVELOPERS.md, Single faults). */
 public final class Diagnosis {
     /** A reading fits within this share of the larger of it and what is expected: parts and meters stray so far. */
     private static final double SHARE = 0.15;
@@ -24,10 +24,12 @@ public final class Diagnosis {
      * @param effect the fault and what follows from it; the healthy circuit is a candidate too
      * @param fits observations that it explains
      * @param contradicts observations that it does not, each with what would be seen instead
-     * @param misfit how far the readings that were seen lie from those expected, as a sum of shares; smaller is better
+     * @param misfit how far the readings that were seen lie from those expected, as a sum of multiples of what
+     *     good parts and meters stray; smaller is better
      */
     public record Candidate(
             FaultEffect effect, List<Observation> fits, List<Contradiction> contradicts, double misfit) {
+        /** Keeps copies of the lists. */
         public Candidate {
             fits = List.copyOf(fits);
             contradicts = List.copyOf(contradicts);
@@ -35,18 +37,26 @@ public final class Diagnosis {
     }
 
     /**
+     * An observation that a fault does not explain.
+     *
      * @param seen what was seen
      * @param instead what would be seen with that fault
      */
     public record Contradiction(Observation seen, String instead) {}
 
-    /** All faults and the healthy circuit: most observations explained first, then the nearest readings. */
+    /**
+     * All faults and the healthy circuit: fewest contradictions first, then the nearest readings.
+     *
+     * @param sheet every single fault, worked out
+     * @param seen what was seen, on the circuit that the sheet is for
+     */
     public static List<Candidate> rank(FaultSheet sheet, List<Observation> seen) {
         List<FaultEffect> effects = new ArrayList<>(sheet.faults());
         effects.add(sheet.healthy());
         return effects.stream()
                 .map(effect -> candidate(effect, seen))
-                .sorted(Comparator.comparingInt((Candidate c) -> c.contradicts().size())
+                .sorted(Comparator.comparingInt(
+                                (Candidate candidate) -> candidate.contradicts().size())
                         .thenComparingDouble(Candidate::misfit))
                 .toList();
     }

@@ -24,6 +24,7 @@ public record FaultEffect(
         Map<TestPoint, Reading> readings,
         List<Burden> over,
         List<String> remarks) {
+    /** Keeps copies of the collections. */
     public FaultEffect {
         knob = List.copyOf(knob);
         readings = Map.copyOf(readings);
@@ -31,7 +32,7 @@ public record FaultEffect(
         remarks = List.copyOf(remarks);
     }
 
-    /** What a meter shows at a test point, V; 0 where there is nothing. */
+    /** What a meter shows at a test point at mid-knob, V against what the point is read against; 0 without a reading. */
     public double volts(TestPoint point, Meter meter) {
         return meter.of(readings.getOrDefault(point, Reading.ZERO));
     }

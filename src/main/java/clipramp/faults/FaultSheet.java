@@ -26,11 +26,14 @@ public record FaultSheet(
                     + " local rules ask for; a reading near zero never means that a wire is dead.";
 
     /**
+     * A fault without figures.
+     *
      * @param fault the fault
      * @param reason why there is no figure
      */
     public record NotComputed(Fault fault, String reason) {}
 
+    /** Keeps copies of the lists. */
     public FaultSheet {
         faults = List.copyOf(faults);
         notComputed = List.copyOf(notComputed);

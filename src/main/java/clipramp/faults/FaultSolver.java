@@ -44,13 +44,21 @@ final class FaultSolver {
         this.condition = condition;
     }
 
-    /** One knob position with a fault. */
+    /**
+     * One knob position with a fault.
+     *
+     * @param load what the load gets
+     * @param burdens every rating and what is borne of it
+     * @param readings what the test points show
+     * @param remarks what else to know
+     */
     record Setting(LoadAt load, List<Burden> burdens, Map<TestPoint, Reading> readings, List<String> remarks) {}
 
+    /** The circuit without a fault; to be asked for first, since what is worse than there is measured against it. */
     FaultEffect healthy() {
         List<Setting> settings = settings(Fault.NONE);
         settings.stream()
-                .flatMap(s -> s.burdens().stream())
+                .flatMap(setting -> setting.burdens().stream())
                 .forEach(burden -> healthyRatios.merge(key(burden), burden.ratio(), Math::max));
         List<LoadAt> knob = settings.stream().map(Setting::load).toList();
         return new FaultEffect(
@@ -63,12 +71,13 @@ final class FaultSolver {
                 List.of());
     }
 
+    /** What follows from a fault, held against the healthy circuit. */
     FaultEffect effect(Fault fault, FaultEffect healthy) {
         List<Setting> settings = settings(fault);
         List<LoadAt> knob = settings.stream().map(Setting::load).toList();
         List<String> remarks = new ArrayList<>(fault.remark().isEmpty() ? List.of() : List.of(fault.remark()));
         Stream.concat(Stream.of(middle(settings)), settings.stream())
-                .flatMap(s -> s.remarks().stream())
+                .flatMap(setting -> setting.remarks().stream())
                 .limit(1)
                 .forEach(remarks::add);
         LoadGets gets = Judgement.gets(
@@ -90,10 +99,11 @@ final class FaultSolver {
     private List<Burden> over(List<Setting> settings) {
         Map<String, Burden> worst = new HashMap<>();
         settings.stream()
-                .flatMap(s -> s.burdens().stream())
+                .flatMap(setting -> setting.burdens().stream())
                 .filter(Burden::isOver)
-                .filter(b -> b.ratio() > WORSE * healthyRatios.getOrDefault(key(b), 0.0))
-                .forEach(b -> worst.merge(key(b), b, (one, other) -> one.ratio() >= other.ratio() ? one : other));
+                .filter(burden -> burden.ratio() > WORSE * healthyRatios.getOrDefault(key(burden), 0.0))
+                .forEach(burden ->
+                        worst.merge(key(burden), burden, (one, other) -> one.ratio() >= other.ratio() ? one : other));
         return worst.values().stream()
                 .sorted(Comparator.comparingDouble(Burden::ratio).reversed().thenComparing(FaultSolver::key))
                 .toList();
@@ -162,7 +172,7 @@ final class FaultSolver {
         return new Setting(load, burdens, readings(network, waves, power, share), remarks);
     }
 
-    /** What the load gets and what stands across the thyristor. */
+    /** What load and thyristor get, and what stands across the thyristor. */
     private record Power(LoadResult load, LoadResult thyristor, OptionalDouble firingRad, Reading acrossThyristor) {
         /** Where the thyristor carries what the load does. */
         Power(LoadResult load, OptionalDouble firingRad, Reading acrossThyristor) {

@@ -15,7 +15,7 @@ import java.util.concurrent.CancellationException;
 
 /**
  * Single faults of a design: every part open, shorted, drifted or dead in turn, and what follows, computed by the same
- * engine as the healthy circuit.
+ * engine as the healthy circuit (DEVELOPERS.md, Single faults).
  */
 public final class Faults {
     private static final double MID_KNOB = 0.5;

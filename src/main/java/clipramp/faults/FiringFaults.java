@@ -13,6 +13,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.function.Consumer;
+import java.util.function.UnaryOperator;
 
 /** Faults of the parts that make the pulse: supply, ramp, trigger device, gate drive. */
 final class FiringFaults {
@@ -29,7 +30,7 @@ final class FiringFaults {
     private static final double NEVER_VOLTS = 1e7;
 
     /** A current that no part of this circuit reaches, A. */
-    private static final double NEVER_AMPS = 1e6;
+    static final double NEVER_AMPS = 1e6;
 
     private static final double DRIFTED_UP = 2;
     private static final double DRIFTED_DOWN = 0.5;
@@ -50,6 +51,9 @@ final class FiringFaults {
     }
 
     /**
+     * All of them, in the order of the signal.
+     *
+     * @param design the design
      * @param names designators by key
      * @param midOhms R_E at mid-knob, ohm
      * @param healthy the healthy circuit's pulse there, if there is one
@@ -64,18 +68,21 @@ final class FiringFaults {
         return all.faults;
     }
 
-    private Fault add(String id, String part, How how, String what, Consumer<Network> change) {
+    /** Notes a fault; @ in its words stands for the part's designator. */
+    private void add(String id, String part, How how, String what, Consumer<Network> change) {
         String words = what.replace("@", names.getOrDefault(part, part));
-        Fault fault = Fault.of(id, part, how, words, network -> {
+        faults.add(Fault.of(id, part, how, words, network -> {
             change.accept(network);
             network.derive();
-        });
-        faults.add(fault);
-        return fault;
+        }));
     }
 
     private void say(String remark) {
-        faults.set(faults.size() - 1, faults.get(faults.size() - 1).saying(remark));
+        reviseLast(fault -> fault.saying(remark));
+    }
+
+    private void reviseLast(UnaryOperator<Fault> change) {
+        faults.add(change.apply(faults.remove(faults.size() - 1)));
     }
 
     private void supply() {
@@ -166,8 +173,7 @@ final class FiringFaults {
                     How.LEAKY,
                     "ramp capacitor @ leaks, " + Said.ohms(ohms),
                     network -> Leak.across(network, ohms / (network.rampOhms + ohms)));
-            int last = faults.size() - 1;
-            faults.set(last, faults.get(last).leaking(ohms));
+            reviseLast(fault -> fault.leaking(ohms));
             say("That leak just holds the ramp of mid-knob under its peak point; a smaller resistance silences more of"
                     + " the travel. The energy of the pulses that remain is not computed.");
         });
@@ -248,8 +254,7 @@ final class FiringFaults {
     private void gateLeadOpen(boolean pair) {
         if (pair) {
             add("gate-open", "gate.series", How.OPEN, "one gate lead (@) open", n -> {});
-            int last = faults.size() - 1;
-            faults.set(last, faults.get(last).along(LoadPath.ONE_HALF));
+            reviseLast(fault -> fault.along(LoadPath.ONE_HALF));
             say("TP4 is the other thyristor's gate.");
         } else {
             add("gate-open", "gate.series", How.OPEN, "gate lead (@) open", n -> n.gateSeriesOhms = OPEN_OHMS);

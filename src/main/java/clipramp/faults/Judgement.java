@@ -22,6 +22,8 @@ final class Judgement {
     private Judgement() {}
 
     /**
+     * That word.
+     *
      * @param there the load with the fault
      * @param before the load without it
      * @param most share of full power that the stage gives when fired at the line's zero
@@ -47,6 +49,7 @@ final class Judgement {
         return at.rmsAmps() > 0 ? Math.abs(at.dcAmps()) / at.rmsAmps() : 0;
     }
 
+    /** Whether the knob moves the power; the load at its positions is given. */
     static boolean knobActs(List<LoadAt> knob) {
         double least = knob.stream().mapToDouble(LoadAt::fraction).min().orElse(0);
         double most = knob.stream().mapToDouble(LoadAt::fraction).max().orElse(0);

@@ -6,7 +6,7 @@ import clipramp.engine.Network;
  * A resistance R_leak across the ramp capacitor, told to a network that has none. With x = V_C/k, k = R_leak/(R_E +
  * R_leak), the ramp's law becomes k C_E dx/dt = (V_S - x)/R_E: the same circuit with capacitor k C_E and a peak point
  * 1/k as high. Peak-point current and stall come out exactly; the pulse's energy 1/k too large, which is why only firing
- * angle and ramp are to be believed, and the load of the leak on the supply is left out.
+ * angle and ramp are to be believed, and the load of the leak on the supply is left out (DEVELOPERS.md, Single faults).
  */
 final class Leak {
     /** A programmable device's divider cannot ask for more than the supply: nearer to it than this counts as silent. */
@@ -14,6 +14,7 @@ final class Leak {
 
     private Leak() {}
 
+    /** Changes a network for a leak; its share k is above 0 and under 1. */
     static void across(Network network, double share) {
         double peak = network.peakShare() / share;
         network.capacitorFarads *= share;

@@ -5,13 +5,13 @@ import java.util.OptionalDouble;
 /**
  * What the load gets at one knob position.
  *
- * @param position 0..1; empty for a fixed ramp
+ * @param position of the knob, 0..1; empty for a fixed ramp
  * @param rampOhms R_E, ohm
- * @param firingRad firing angle, rad; empty where the thyristor is not fired, or always on
+ * @param firingRad firing angle, from the zero of the half cycle, rad; empty where the thyristor is not fired, or always on
  * @param watts power, W
  * @param fraction of full power, 0..1
  * @param rmsAmps rms current, A
- * @param dcAmps dc in the line, A
+ * @param dcAmps dc in the line, A, signed
  */
 public record LoadAt(
         OptionalDouble position,

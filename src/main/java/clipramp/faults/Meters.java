@@ -15,8 +15,8 @@ final class Meters {
     /**
      * A voltage sampled over whole cycles of it.
      *
-     * @param seconds instants, never falling
-     * @param volts values; the trapezoid between two of them
+     * @param seconds instants, s, never falling
+     * @param volts values, V; straight lines between two of them
      */
     static Reading of(double[] seconds, double[] volts) {
         double area = 0;

@@ -15,6 +15,7 @@ public sealed interface Observation {
      * @param gets any of these
      */
     record Load(String text, Set<LoadGets> gets) implements Observation {
+        /** Keeps a copy of the set. */
         public Load {
             gets = Set.copyOf(gets);
         }
@@ -30,8 +31,11 @@ public sealed interface Observation {
 
     /** Which instrument. */
     enum Meter {
+        /** A meter on dc: the mean. */
         DC("dc"),
+        /** A true-rms meter on ac: the mean taken off. */
         AC("ac"),
+        /** An oscilloscope: the value of largest magnitude. */
         PEAK("peak");
 
         private final String word;
@@ -40,12 +44,13 @@ public sealed interface Observation {
             this.word = word;
         }
 
+        /** The word that observations are written with. */
         public String word() {
             return word;
         }
 
         /** What it shows of a reading, V. */
-        public double of(Reading reading) {
+        double of(Reading reading) {
             return switch (this) {
                 case DC -> reading.dcVolts();
                 case AC -> reading.acVolts();
@@ -60,7 +65,7 @@ public sealed interface Observation {
      * @param text as it was said
      * @param point where
      * @param meter with what
-     * @param volts V
+     * @param volts what it showed, V against what the point is read against
      */
     record Volts(String text, TestPoint point, Meter meter, double volts) implements Observation {}
 

@@ -40,6 +40,8 @@ public final class ObservationReader {
     private final Map<String, String> names;
 
     /**
+     * A reader for one design.
+     *
      * @param design whose parts may be named, by designator or by key
      */
     public ObservationReader(Design design) {
@@ -47,6 +49,8 @@ public final class ObservationReader {
     }
 
     /**
+     * The observations that a text means, in its order.
+     *
      * @param text observations with commas between
      * @throws RefusedObservationException naming the one that is not understood, and what would be
      */
@@ -103,7 +107,8 @@ public final class ObservationReader {
 
     private String part(String text, String said) {
         return names.entrySet().stream()
-                .filter(e -> e.getKey().equalsIgnoreCase(said) || e.getValue().equalsIgnoreCase(said))
+                .filter(name ->
+                        name.getKey().equalsIgnoreCase(said) || name.getValue().equalsIgnoreCase(said))
                 .map(Map.Entry::getKey)
                 .findFirst()
                 .orElseThrow(() -> refused(
@@ -116,13 +121,13 @@ public final class ObservationReader {
         String[] parts = place.split("\\.", -1);
         String wanted = parts[0].toUpperCase(Locale.ROOT);
         TestPoint point = Arrays.stream(TestPoint.values())
-                .filter(p -> p != TestPoint.TP0 && p.name().equals(wanted))
+                .filter(named -> named != TestPoint.TP0 && named.name().equals(wanted))
                 .findFirst()
                 .orElseThrow(() -> refused(text, "the test points are TP1 to TP5, against TP0 or as the drawing says"));
         Meter meter = parts.length == 1
                 ? Meter.DC
                 : Arrays.stream(Meter.values())
-                        .filter(m -> parts.length == 2 && m.word().equalsIgnoreCase(parts[1]))
+                        .filter(named -> parts.length == 2 && named.word().equalsIgnoreCase(parts[1]))
                         .findFirst()
                         .orElseThrow(() -> refused(text, "the meters are dc, ac and peak, such as " + wanted + ".ac"));
         try {

@@ -17,9 +17,6 @@ import java.util.function.Consumer;
 
 /** Faults of thyristor, rectifiers and load. */
 final class PowerFaults {
-    /** A trigger current that no pulse reaches, A. */
-    private static final double NEVER_AMPS = 1e6;
-
     private final Design design;
     private final Map<String, String> names;
     private final List<Fault> faults = new ArrayList<>();
@@ -29,9 +26,7 @@ final class PowerFaults {
         this.names = names;
     }
 
-    /**
-     * @param names designators by key
-     */
+    /** All of them, in the order of the signal; designators come by key. */
     static List<Fault> of(Design design, Map<String, String> names) {
         PowerFaults all = new PowerFaults(design, names);
         all.thyristor();
@@ -52,6 +47,10 @@ final class PowerFaults {
     /** What a supply across the thyristor gets once there is no voltage there any more. */
     private Consumer<Network> unfed() {
         return fedAcrossThyristor() ? n -> n.dropperOhms = FiringFaults.OPEN_OHMS : n -> {};
+    }
+
+    private static void neverTriggers(Network network) {
+        network.triggerAmps = FiringFaults.NEVER_AMPS;
     }
 
     private void thyristor() {
@@ -79,8 +78,7 @@ final class PowerFaults {
                     .along(LoadPath.ONE_HALF));
         }
         if (!pair) {
-            faults.add(
-                    fault("thyristor-dead", key, How.DEAD, "thyristor @ dead (open)", n -> n.triggerAmps = NEVER_AMPS));
+            faults.add(fault("thyristor-dead", key, How.DEAD, "thyristor @ dead (open)", PowerFaults::neverTriggers));
         }
     }
 
@@ -167,7 +165,7 @@ final class PowerFaults {
         Consumer<Network> unfed = unfed();
         faults.add(fault("load-open", "load", How.OPEN, "load @ open", n -> {
                     unfed.accept(n);
-                    n.triggerAmps = NEVER_AMPS;
+                    neverTriggers(n);
                 })
                 .along(LoadPath.LOAD_OPEN));
         faults.add(fault("load-shorted", "load", How.SHORTED, "load @ shorted", n -> {})

@@ -9,7 +9,7 @@ import java.util.List;
  *
  * @param point where
  * @param meter on what
- * @param decimals with which such volts are worth showing
+ * @param decimals how many are worth showing of such volts
  */
 public record Probe(TestPoint point, Meter meter, int decimals) {
     /** The readings that part the faults best: what every sheet of faults shows. */
@@ -21,7 +21,7 @@ public record Probe(TestPoint point, Meter meter, int decimals) {
             new Probe(TestPoint.TP5, Meter.DC, 0),
             new Probe(TestPoint.TP5, Meter.AC, 0));
 
-    /** What it shows of a fault, V. */
+    /** What it shows of a fault at mid-knob, V. */
     public double volts(FaultEffect effect) {
         return effect.volts(point, meter);
     }

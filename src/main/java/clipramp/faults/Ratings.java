@@ -37,6 +37,8 @@ public final class Ratings {
     /**
      * Firing circuit and gate.
      *
+     * @param design whose ratings count
+     * @param condition whose temperature derates the trigger device
      * @param bears what its parts bear
      * @param leakShare share of the computed ramp voltage that is really there; 1 in a sound circuit
      * @param position of the knob, 0..1; empty for a fixed ramp
@@ -56,7 +58,7 @@ public final class Ratings {
         return all.burdens;
     }
 
-    /** The thyristor's currents. */
+    /** The thyristor's currents, of which the result's count. */
     public static List<Burden> ofThyristor(Design design, LoadResult load) {
         ThyristorDevice.Limits limits = design.thyristor().device().limits();
         return List.of(

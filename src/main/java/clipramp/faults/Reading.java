@@ -8,8 +8,10 @@ package clipramp.faults;
  * @param peakVolts value of largest magnitude, which an oscilloscope shows, V
  */
 public record Reading(double dcVolts, double acVolts, double peakVolts) {
+    /** Nothing on any instrument. */
     static final Reading ZERO = new Reading(0, 0, 0);
 
+    /** The same of a voltage of which only a share is there. */
     Reading times(double share) {
         return new Reading(share * dcVolts, share * acVolts, share * peakVolts);
     }

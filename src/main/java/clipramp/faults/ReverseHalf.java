@@ -9,7 +9,8 @@ import clipramp.firing.Waveforms;
 
 /**
  * The half cycle that a shorted rectifier diode lets through backwards: the dropper carries it, the zener conducts
- * forwards. The engine knows what that leaves of the ramp; this is what the parts bear and the meters read meanwhile.
+ * forwards. The engine knows what that leaves of the ramp; this is what the parts bear and the meters read meanwhile
+ * (DEVELOPERS.md, Single faults). Only for a supply that works over whole periods.
  */
 final class ReverseHalf {
     /** Forward voltage of a conducting zener, V (common practice). */
@@ -42,7 +43,7 @@ final class ReverseHalf {
         return forward.withMore(square / network.dropperOhms, peak, mean / network.dropperOhms * network.reverseVolts);
     }
 
-    /** The supply as it stands: backwards in the second half of every period. */
+    /** V_S at the samples, V to common: backwards in the second half of every period. */
     static double[] supplyVolts(Waveforms waves, Network network) {
         double[] volts = waves.supplyVolts().clone();
         double begins = middle(waves);
@@ -52,7 +53,7 @@ final class ReverseHalf {
         return volts;
     }
 
-    /** The ramp as it stands then. */
+    /** V_C at the samples, V to common. */
     static double[] rampVolts(Waveforms waves, Network network) {
         double[] volts = waves.rampVolts().clone();
         double begins = middle(waves);

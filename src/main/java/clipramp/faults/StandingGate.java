@@ -9,7 +9,8 @@ import java.util.OptionalDouble;
 
 /**
  * The gate between pulses: the base bar's current through R1 and gate network. The engine's pulses leave the junction off
- * there, which holds as long as that voltage is small; a fault can make it large enough to fire the thyristor by itself.
+ * there, which holds as long as that voltage is small; a fault can make it large enough to fire the thyristor by itself
+ * (DEVELOPERS.md, Single faults).
  */
 final class StandingGate {
     private final Network network;
@@ -37,7 +38,7 @@ final class StandingGate {
         return 1 / (1 / (baseOne + network.gateSeriesOhms) + network.gateShuntSiemens);
     }
 
-    /** Largest gate voltage between pulses with a supply of so many volts, V. */
+    /** Gate voltage between pulses with a supply of so many volts, V to the thyristor's cathode. */
     double volts(double supplyVolts) {
         if (!present) {
             return 0;
@@ -54,7 +55,7 @@ final class StandingGate {
                 : 0;
     }
 
-    /** Angle of the half cycle at which that current reaches the trigger current, rad; empty if it never does. */
+    /** Angle from the half cycle's zero at which that current reaches the trigger current, rad; empty if it never does. */
     OptionalDouble firesAtRad(Waveforms waves) {
         for (int i = 0; i < waves.supplyVolts().length; i++) {
             if (amps(waves.supplyVolts()[i]) >= network.triggerAmps) {
