@@ -1,0 +1,279 @@
+package clipramp.engine;
+
+import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.assertThatThrownBy;
+import static org.assertj.core.api.Assertions.within;
+
+import clipramp.circuit.Condition;
+import clipramp.circuit.SampleDesigns;
+import java.util.ArrayList;
+import java.util.List;
+import org.junit.jupiter.api.Test;
+
+/** The swift way through a half cycle against the reference way, event by event, on drawn circuits. */
+class SwiftStepperTest {
+    private static final int CIRCUITS = 400;
+    private static final int HALF_CYCLES = 4;
+    /** Both are good to a billionth of a half cycle (DEVELOPERS.md, Many units at once). */
+    private static final double SHARE = 1e-9;
+
+    /** Where a switch's form hardly bends the swift search ends a little sooner; firing and valley do not feel it, s. */
+    private static final double SWITCHING = 1e-10;
+
+    /** What is told of each event on both ways. */
+    private interface Witness {
+        void both(SwiftStepper swift, Stepper stepper, double from, Event event, String which);
+    }
+
+    private static void everyCircuit(int circuits, Witness witness) {
+        for (long seed = 0; seed < circuits; seed++) {
+            Network n = DrawnNetworks.direct(seed);
+            run(n, new SwiftStepper(n), DrawnNetworks.sine(seed), witness, "seed " + seed);
+        }
+    }
+
+    private static void run(Network n, SwiftStepper swift, SourceWave wave, Witness witness, String which) {
+        Stepper stepper = new Stepper(n);
+        swift.take(wave);
+        Mode mode = Mode.OFF;
+        double ramp = 0;
+        for (int half = 0; half < HALF_CYCLES; half++) {
+            swift.start(mode, ramp, false, false);
+            stepper.start(wave, mode, ramp, 0);
+            while (stepper.seconds() < wave.seconds()) {
+                double from = stepper.seconds();
+                Event event = stepper.advance(wave.seconds());
+                String here = which + " half cycle " + half + " to " + stepper.seconds();
+                assertThat(advance(swift, event)).as(here).isEqualTo(event);
+                witness.both(swift, stepper, from, event, here);
+            }
+            mode = stepper.mode();
+            ramp = stepper.rampVolts();
+        }
+    }
+
+    /**
+     * The next event that takes time, or the expected one: where a switch's instant was met a picosecond early, it turns
+     * back and over again on the spot.
+     */
+    private static Event advance(SwiftStepper swift, Event expected) {
+        double before = swift.seconds();
+        Event event = swift.advance();
+        while (event != expected
+                && (event == Event.RECTIFIER || event == Event.ZENER || event == Event.GATE)
+                && swift.seconds() - before < SWITCHING) {
+            event = swift.advance();
+        }
+        return event;
+    }
+
+    private static void agree(SwiftStepper swift, Stepper stepper, Event event, String which) {
+        boolean switches = event == Event.RECTIFIER || event == Event.ZENER || event == Event.GATE;
+        assertThat(swift.seconds()).as(which).isCloseTo(stepper.seconds(), within(switches ? SWITCHING : SHARE * 0.01));
+        assertThat(swift.rampVolts()).as(which).isCloseTo(stepper.rampVolts(), within(1e-6));
+        assertThat(swift.mode()).as(which).isEqualTo(stepper.mode());
+        assertThat(swift.clips()).as(which).isEqualTo(stepper.clips());
+    }
+
+    @Test
+    void everyEventIsTheReferencesOwn() {
+        everyCircuit(CIRCUITS, (swift, stepper, from, event, which) -> agree(swift, stepper, event, which));
+    }
+
+    /** A single diode's supply works over whole periods, its second half unfed. */
+    @Test
+    void wholePeriodsToo() {
+        for (long seed = 0; seed < 60; seed++) {
+            SourceWave half = DrawnNetworks.sine(seed);
+            SourceWave wave = new SourceWave();
+            wave.setSine(half.rates[0], half.amplitudes[0], 0.7, 2 * half.seconds);
+            Network n = DrawnNetworks.direct(seed);
+            Witness agrees = (swift, stepper, from, event, which) -> agree(swift, stepper, event, which);
+            run(n, new SwiftStepper(n), wave, agrees, "period of seed " + seed);
+        }
+    }
+
+    /** One stepper for circuit after circuit, as many units are drawn: what it remembers of one misleads no other. */
+    @Test
+    void whatItRemembersOfOneUnitMisleadsNoOther() {
+        Network n = new Network();
+        SwiftStepper swift = new SwiftStepper(n);
+        for (int i = 0; i < 300; i++) {
+            UnitValues unit = UnitValues.nominal(SampleDesigns.heater());
+            unit.lineVolts = 207 + i % 7 * 8;
+            unit.standoff = 0.56 + 0.19 * (i % 11) / 10;
+            unit.capacitorFarads *= 0.9 + 0.2 * (i % 5) / 4;
+            unit.fill(n, 6e3 + 1e3 * (i % 13) * (i % 13));
+            SourceWave wave = new SourceWave();
+            wave.setSine(100 * Math.PI, unit.lineVolts * Math.sqrt(2), 1.4, 0.01);
+            Witness agrees = (s, stepper, from, event, which) -> agree(s, stepper, event, which);
+            run(n, swift, wave, agrees, "unit " + i);
+        }
+        assertThat(swift.pieces()).isGreaterThan(5000);
+        assertThat((double) swift.carefulPieces() / swift.pieces())
+                .as("left to the reference way: that is what makes it swift")
+                .isLessThan(2e-3);
+    }
+
+    /** Until when a pulse holds the trigger current, against the piece's own first crossing. */
+    @Test
+    void theTriggerCurrentIsHeldAsLongAsThePieceSays() {
+        int[] told = new int[3];
+        everyCircuit(CIRCUITS, (swift, stepper, from, event, which) -> {
+            double held = swift.triggerHeldUntil();
+            Piece piece = stepper.piece();
+            Network n = stepper.network();
+            piece.look(from);
+            double before = piece.gateAmps(n) - n.triggerAmps;
+            if (Double.isNaN(held)) {
+                return;
+            }
+            if (before < 0) {
+                told[0]++;
+                assertThat(held).as(which).isEqualTo(Double.NEGATIVE_INFINITY);
+                return;
+            }
+            double until = piece.gateReaches(n, n.triggerAmps, false, from, stepper.seconds());
+            told[until < Double.POSITIVE_INFINITY ? 1 : 2]++;
+            if (until < Double.POSITIVE_INFINITY) {
+                assertThat(held).as(which).isCloseTo(until, within(SHARE * 0.01));
+            } else {
+                assertThat(held).as(which).isEqualTo(until);
+            }
+        });
+        assertThat(told).as("under it, falling to it, over it").doesNotContain(0);
+        assertThat(told[1]).as("falling to it").isGreaterThan(CIRCUITS);
+    }
+
+    /** DEVELOPERS.md: R_E alone feeds more than the valley current. */
+    @Test
+    void aDeviceHeldOnByItsResistorIsSeen() {
+        int[] seen = new int[2];
+        everyCircuit(CIRCUITS, (swift, stepper, from, event, which) -> {
+            Piece piece = stepper.piece();
+            piece.look(stepper.seconds());
+            if (piece.mode == Mode.STALLED) {
+                return;
+            }
+            Kirchhoff nodes = Kirchhoff.where(stepper.network(), piece);
+            double over = nodes.rampResistorAmps() - stepper.network().valleySiemens * nodes.supplyVolts;
+            if (Math.abs(over) > 1e-9) {
+                seen[over > 0 ? 1 : 0]++;
+                assertThat(swift.isHeldByResistor()).as(which).isEqualTo(over > 0);
+            }
+        });
+        assertThat(seen[0]).isGreaterThan(100);
+        assertThat(seen[1]).isGreaterThan(20);
+    }
+
+    private record Half(List<Event> events, double ramp, double firing, double kept, double shift, boolean edge) {}
+
+    private static Half half(SwiftStepper swift, SourceWave wave, double startVolts, boolean rough, boolean proven) {
+        List<Event> events = new ArrayList<>();
+        double firing = Double.NaN;
+        swift.start(Mode.OFF, startVolts, rough, proven);
+        while (swift.seconds() < wave.seconds()) {
+            Event event = swift.advance();
+            events.add(event);
+            firing = event == Event.FIRES ? swift.seconds() : firing;
+        }
+        return new Half(events, swift.rampVolts(), firing, swift.kept(), swift.firingShift(), swift.nearEdge());
+    }
+
+    /** Ramp at the end and last firing instant by the ramp at the start, against a central difference quotient. */
+    @Test
+    void itKnowsHowTheEndMovesWithTheStart() {
+        int followed = 0;
+        double step = 1e-5;
+        for (long seed = 0; seed < CIRCUITS; seed++) {
+            Network n = DrawnNetworks.direct(seed);
+            SourceWave wave = DrawnNetworks.sine(seed);
+            SwiftStepper swift = new SwiftStepper(n);
+            swift.take(wave);
+            Half middle = half(swift, wave, 0.5, false, false);
+            Half above = half(swift, wave, 0.5 + step, false, false);
+            Half below = half(swift, wave, 0.5 - step, false, false);
+            if (middle.edge || Double.isNaN(middle.kept) || !above.events.equals(below.events)) {
+                continue;
+            }
+            followed++;
+            double kept = (above.ramp - below.ramp) / (2 * step);
+            assertThat(middle.kept).as("seed " + seed).isCloseTo(kept, within(1e-3 * Math.abs(kept) + 1e-6));
+            if (Double.isNaN(middle.firing)) {
+                assertThat(middle.shift).as("seed " + seed).isNaN();
+            } else {
+                double shift = (above.firing - below.firing) / (2 * step);
+                assertThat(middle.shift).as("seed " + seed).isCloseTo(shift, within(1e-3 * Math.abs(shift) + 1e-8));
+            }
+        }
+        assertThat(followed).isGreaterThan(CIRCUITS / 4);
+    }
+
+    /** Where it says that no event nearly took another's place, a tenth of a millivolt takes none away and brings none. */
+    @Test
+    void awayFromEdgesANeighbourPassesTheSameEvents() {
+        int inside = 0;
+        for (long seed = 0; seed < CIRCUITS; seed++) {
+            Network n = DrawnNetworks.direct(seed);
+            SourceWave wave = DrawnNetworks.sine(seed);
+            SwiftStepper swift = new SwiftStepper(n);
+            swift.take(wave);
+            Half middle = half(swift, wave, 0.5, false, false);
+            if (!middle.edge) {
+                inside++;
+                assertThat(half(swift, wave, 0.5 + 1e-4, false, false).events)
+                        .as("seed " + seed)
+                        .isEqualTo(middle.events);
+            }
+        }
+        assertThat(inside).isGreaterThan(CIRCUITS / 3);
+    }
+
+    @Test
+    void aRoughHalfCycleIsRoughlyRight() {
+        for (long seed = 0; seed < CIRCUITS; seed++) {
+            Network n = DrawnNetworks.direct(seed);
+            SourceWave wave = DrawnNetworks.sine(seed);
+            SwiftStepper swift = new SwiftStepper(n);
+            swift.take(wave);
+            Half fine = half(swift, wave, 0.5, false, false);
+            Half rough = half(swift, wave, 0.5, true, false);
+            Half known = half(swift, wave, 0.5, false, true);
+            if (fine.edge) {
+                continue;
+            }
+            assertThat(rough.events).as("seed " + seed).isEqualTo(fine.events);
+            assertThat(known.events).as("seed " + seed).isEqualTo(fine.events);
+            if (!Double.isNaN(fine.firing)) {
+                assertThat(rough.firing).as("seed " + seed).isCloseTo(fine.firing, within(1e-6));
+                assertThat(known.firing).as("seed " + seed).isCloseTo(fine.firing, within(1e-11));
+            }
+        }
+    }
+
+    @Test
+    void whatItIsNotForIsRefused() {
+        Network direct = DrawnNetworks.direct(1);
+        SourceWave constant = new SourceWave();
+        constant.setConstant(1, 0.01);
+        SourceWave late = DrawnNetworks.sine(1);
+        late.phases[0] = 0.1;
+        SwiftStepper swift = new SwiftStepper(direct);
+        for (SourceWave wave : List.of(constant, late)) {
+            assertThatThrownBy(() -> swift.take(wave)).isInstanceOf(IllegalArgumentException.class);
+        }
+        SwiftStepper coupled = new SwiftStepper(DrawnNetworks.throughTransformer(1));
+        assertThatThrownBy(() -> coupled.take(DrawnNetworks.sine(1))).isInstanceOf(IllegalArgumentException.class);
+    }
+
+    @Test
+    void aConditionOfADesignIsANetworkLikeAnyOther() {
+        Network n = NetworkOfDesign.of(SampleDesigns.heater(), new Condition(230, 50, 25), 33e3);
+        SourceWave wave = new SourceWave();
+        wave.setSine(100 * Math.PI, 230 * Math.sqrt(2), 1.4, 0.01);
+        SwiftStepper swift = new SwiftStepper(n);
+        swift.take(wave);
+        Half half = half(swift, wave, 0.5, false, false);
+        assertThat(half.events).contains(Event.FIRES, Event.VALLEY, Event.ZENER).endsWith(Event.END);
+    }
+}
