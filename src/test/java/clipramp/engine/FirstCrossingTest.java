@@ -51,14 +51,13 @@ class FirstCrossingTest {
     }
 
     @Test
-    void aCrossingAtTheLimitOrBeyondIsNone() {
+    void aCrossingBeyondTheLimitIsNone() {
         Piece piece = charging(0, 0);
         double at = FirstCrossing.after(piece, form(1, 0, -0.5), 0, 1);
         assertThat(FirstCrossing.after(piece, form(1, 0, -0.5), 0, at * (1 + 1e-9)))
                 .isCloseTo(at, within(1e-15));
         assertThat(FirstCrossing.after(piece, form(1, 0, -0.5), 0, at * (1 - 1e-9)))
                 .isEqualTo(NEVER);
-        assertThat(FirstCrossing.after(piece, form(1, 0, -0.5), 0, at)).isEqualTo(NEVER);
     }
 
     @Test
@@ -141,15 +140,81 @@ class FirstCrossingTest {
                 .isCloseTo((Math.PI / 2 - 0.005) / OMEGA, within(1e-14));
     }
 
+    /** A crest that just reaches a level is found on its rising side, one that just does not is none. */
+    @Test
+    void aCrestThatJustReachesIsFoundAndOneThatJustDoesNotIsNone() {
+        int crests = 0;
+        for (long seed = 0; seed < 200; seed++) {
+            Begun b = seed % 2 == 0 ? DrawnPieces.direct(seed) : DrawnPieces.throughTransformer(seed);
+            Affine form = mixed(b);
+            double crest = crestSeconds(b, form);
+            if (Double.isNaN(crest)) {
+                continue;
+            }
+            crests++;
+            b.piece().look(crest);
+            double height = b.piece().value(form);
+            double size = b.piece().magnitude(form);
+            form.constant -= height - 1e-6 * size;
+            double found = FirstCrossing.after(b.piece(), form, b.fromSeconds(), b.wave().seconds);
+            assertThat(found).as(b.toString()).isLessThan(crest);
+            b.piece().look(found);
+            assertThat(b.piece().value(form)).as(b.toString()).isCloseTo(0, within(1e-10 * size));
+            form.constant -= 2e-6 * size;
+            assertThat(FirstCrossing.after(b.piece(), form, b.fromSeconds(), b.wave().seconds))
+                    .as(b.toString())
+                    .isEqualTo(NEVER);
+        }
+        assertThat(crests).isGreaterThan(60);
+    }
+
+    /** Ramp, core and source in drawn shares, the ramp's and the core's of either sign. */
+    private static Affine mixed(Begun b) {
+        SplittableRandom random = new SplittableRandom(b.seed());
+        Affine form = new Affine();
+        form.set(b.piece().mode == Mode.STALLED ? 0 : 4 * random.nextDouble() - 2, 0.1 * random.nextDouble(), 0);
+        form.flux = b.n().transformerCoupled ? 200 * random.nextDouble() - 100 : 0;
+        return form;
+    }
+
+    /** Where the form is highest over the whole piece, if that is between its ends; else NaN. */
+    private static double crestSeconds(Begun b, Affine form) {
+        double span = b.wave().seconds - b.fromSeconds();
+        double best = Double.NEGATIVE_INFINITY;
+        int at = 0;
+        for (int i = 0; i <= 2000; i++) {
+            b.piece().look(b.fromSeconds() + span * i / 2000);
+            if (b.piece().value(form) > best) {
+                best = b.piece().value(form);
+                at = i;
+            }
+        }
+        if (at == 0 || at == 2000) {
+            return Double.NaN;
+        }
+        double low = b.fromSeconds() + span * (at - 1) / 2000;
+        double high = b.fromSeconds() + span * (at + 1) / 2000;
+        for (int i = 0; i < 50; i++) {
+            double middle = (low + high) / 2;
+            b.piece().look(middle);
+            if (b.piece().slope(form) > 0) {
+                low = middle;
+            } else {
+                high = middle;
+            }
+        }
+        return low;
+    }
+
     @Test
     void nothingSampledCrossesBeforeWhatIsFound() {
         int crossings = 0;
-        for (long seed = 0; seed < 100; seed++) {
+        for (long seed = 0; seed < 60; seed++) {
             for (Begun b : List.of(DrawnPieces.direct(seed), DrawnPieces.throughTransformer(seed))) {
                 crossings += compare(b);
             }
         }
-        assertThat(crossings).as("crossings seen").isGreaterThan(100);
+        assertThat(crossings).as("crossings seen").isGreaterThan(60);
     }
 
     private static int compare(Begun b) {
@@ -181,8 +246,8 @@ class FirstCrossingTest {
     }
 
     private static void assertNoneBefore(Begun b, Affine form, double end) {
-        for (int i = 1; i < 300; i++) {
-            double t = b.fromSeconds() + (end - b.fromSeconds()) * i / 300;
+        for (int i = 1; i < 120; i++) {
+            double t = b.fromSeconds() + (end - b.fromSeconds()) * i / 120;
             b.piece().look(t);
             assertThat(b.piece().value(form))
                     .as(b + " at " + t)
