@@ -103,6 +103,8 @@ class PieceReadingsTest {
             assertThat(b.piece().emitterAmps()).isEqualTo(nodes.emitterAmps);
             assertThat(b.piece().peakPointVolts()).isEqualTo(nodes.peakVolts);
             assertThat(b.piece().gateAmps(b.n())).as(b.toString()).isCloseTo(nodes.junctionAmps(), within(1e-12));
+            assertThat(b.piece().dropperAmps(b.n())).as(b.toString()).isCloseTo(nodes.dropperAmps(), within(1e-12));
+            assertThat(b.piece().zenerAmps(b.n())).as(b.toString()).isCloseTo(nodes.zenerAmps(), within(1e-12));
             if (b.n().transformerCoupled) {
                 assertThat(b.piece().primaryVolts()).isEqualTo(nodes.primaryVolts);
             }

@@ -22,7 +22,7 @@ class SwiftStepperTest {
 
     /** What is told of each event on both ways. */
     private interface Witness {
-        void both(SwiftStepper swift, Stepper stepper, double from, Event event, String which);
+        void both(Network n, SwiftStepper swift, Stepper stepper, double from, Event event, String which);
     }
 
     private static void everyCircuit(int circuits, Witness witness) {
@@ -45,7 +45,7 @@ class SwiftStepperTest {
                 Event event = stepper.advance(wave.seconds());
                 String here = which + " half cycle " + half + " to " + stepper.seconds();
                 assertThat(advance(swift, event)).as(here).isEqualTo(event);
-                witness.both(swift, stepper, from, event, here);
+                witness.both(n, swift, stepper, from, event, here);
             }
             mode = stepper.mode();
             ramp = stepper.rampVolts();
@@ -77,7 +77,7 @@ class SwiftStepperTest {
 
     @Test
     void everyEventIsTheReferencesOwn() {
-        everyCircuit(CIRCUITS, (swift, stepper, from, event, which) -> agree(swift, stepper, event, which));
+        everyCircuit(CIRCUITS, (n, swift, stepper, from, event, which) -> agree(swift, stepper, event, which));
     }
 
     /** A single diode's supply works over whole periods, its second half unfed. */
@@ -88,7 +88,7 @@ class SwiftStepperTest {
             SourceWave wave = new SourceWave();
             wave.setSine(half.rates[0], half.amplitudes[0], 0.7, 2 * half.seconds);
             Network n = DrawnNetworks.direct(seed);
-            Witness agrees = (swift, stepper, from, event, which) -> agree(swift, stepper, event, which);
+            Witness agrees = (network, swift, stepper, from, event, which) -> agree(swift, stepper, event, which);
             run(n, new SwiftStepper(n), wave, agrees, "period of seed " + seed);
         }
     }
@@ -106,7 +106,7 @@ class SwiftStepperTest {
             unit.fill(n, 6e3 + 1e3 * (i % 13) * (i % 13));
             SourceWave wave = new SourceWave();
             wave.setSine(100 * Math.PI, unit.lineVolts * Math.sqrt(2), 1.4, 0.01);
-            Witness agrees = (s, stepper, from, event, which) -> agree(s, stepper, event, which);
+            Witness agrees = (network, s, stepper, from, event, which) -> agree(s, stepper, event, which);
             run(n, swift, wave, agrees, "unit " + i);
         }
         assertThat(swift.pieces()).isGreaterThan(2000);
@@ -119,10 +119,9 @@ class SwiftStepperTest {
     @Test
     void theTriggerCurrentIsHeldAsLongAsThePieceSays() {
         int[] told = new int[3];
-        everyCircuit(CIRCUITS, (swift, stepper, from, event, which) -> {
+        everyCircuit(CIRCUITS, (n, swift, stepper, from, event, which) -> {
             double held = swift.triggerHeldUntil();
             Piece piece = stepper.piece();
-            Network n = stepper.network();
             piece.look(from);
             double before = piece.gateAmps(n) - n.triggerAmps;
             if (Double.isNaN(held)) {
@@ -149,14 +148,14 @@ class SwiftStepperTest {
     @Test
     void aDeviceHeldOnByItsResistorIsSeen() {
         int[] seen = new int[2];
-        everyCircuit(CIRCUITS, (swift, stepper, from, event, which) -> {
+        everyCircuit(CIRCUITS, (n, swift, stepper, from, event, which) -> {
             Piece piece = stepper.piece();
             piece.look(stepper.seconds());
             if (piece.mode == Mode.STALLED) {
                 return;
             }
-            Kirchhoff nodes = Kirchhoff.where(stepper.network(), piece);
-            double over = nodes.rampResistorAmps() - stepper.network().valleySiemens * nodes.supplyVolts;
+            Kirchhoff nodes = Kirchhoff.where(n, piece);
+            double over = nodes.rampResistorAmps() - n.valleySiemens * nodes.supplyVolts;
             if (Math.abs(over) > 1e-9) {
                 seen[over > 0 ? 1 : 0]++;
                 assertThat(swift.isHeldByResistor()).as(which).isEqualTo(over > 0);
