@@ -34,6 +34,7 @@ public final class Piece {
 
     private boolean coupled;
     private TwoStates states = new TwoStates();
+    private final Outlook outlook = new Outlook(this);
     private final Affine rampDrive = new Affine();
     private final Affine fluxDrive = new Affine();
 
@@ -49,23 +50,34 @@ public final class Piece {
     private SourceWave wave = new SourceWave();
     private double[] sines = new double[1];
     private double[] cosines = new double[1];
+    // Sine and cosine of each of the source's angles where last looked at.
+    private double[] sinesNow = new double[1];
+    private double[] cosinesNow = new double[1];
 
     // Where the piece was last looked at.
     double rampVolts;
     double rampSlope;
+    double rampBend;
     double fluxAmps;
     double fluxSlope;
+    double fluxBend;
     double sourceVolts;
     double sourceSlope;
     double sourceBend;
+    double sourceJerk;
     private double decay;
 
     // The same at the piece's start, where every search begins.
     private double startRamp;
     private double startRampSlope;
+    private double startRampBend;
+    private double startFlux;
+    private double startFluxSlope;
+    private double startFluxBend;
     private double startSource;
     private double startSourceSlope;
     private double startSourceBend;
+    private double startSourceJerk;
 
     Piece() {}
 
@@ -73,20 +85,14 @@ public final class Piece {
      * Fills in the piece that begins at a time with a ramp voltage and a magnetising current; node equations must be set
      * already.
      */
-    void begin(Network n, SourceWave source, double seconds, double startVolts, double startFlux) {
+    void begin(Network n, SourceWave source, double seconds, double startVolts, double startFluxAmps) {
         wave = source;
         startSeconds = seconds;
         coupled = n.transformerCoupled;
+        makeRoom(source.count);
         if (coupled) {
-            couple(n, source, startVolts, startFlux);
-            look(seconds);
-            return;
-        }
-        if (sines.length < source.count) {
-            sines = new double[source.count];
-            cosines = new double[source.count];
-        }
-        if (mode == Mode.STALLED) {
+            couple(n, source, startVolts, startFluxAmps);
+        } else if (mode == Mode.STALLED) {
             follow(source);
         } else {
             charge(n, source, startVolts);
@@ -94,30 +100,39 @@ public final class Piece {
         look(seconds);
         startRamp = rampVolts;
         startRampSlope = rampSlope;
+        startRampBend = rampBend;
+        startFlux = fluxAmps;
+        startFluxSlope = fluxSlope;
+        startFluxBend = fluxBend;
         startSource = sourceVolts;
         startSourceSlope = sourceSlope;
         startSourceBend = sourceBend;
+        startSourceJerk = sourceJerk;
     }
 
     /** As a look at the start, without working it out again. */
     void lookAtStart() {
         if (coupled) {
-            look(startSeconds);
-            return;
+            states.lookAtStart();
         }
         decay = exponential;
         rampVolts = startRamp;
         rampSlope = startRampSlope;
+        rampBend = startRampBend;
+        fluxAmps = startFlux;
+        fluxSlope = startFluxSlope;
+        fluxBend = startFluxBend;
         sourceVolts = startSource;
         sourceSlope = startSourceSlope;
         sourceBend = startSourceBend;
+        sourceJerk = startSourceJerk;
     }
 
     /**
      * Ramp and magnetising current together: L_m dI_m/dt = V_prim. In a stall the ramp is no state of its own; a silent
      * one that decays like the flux keeps its place.
      */
-    private void couple(Network n, SourceWave source, double startVolts, double startFlux) {
+    private void couple(Network n, SourceWave source, double startVolts, double startFluxAmps) {
         fluxDrive.zero();
         fluxDrive.add(1 / n.magnetisingHenries, primary);
         rampDrive.zero();
@@ -128,8 +143,17 @@ public final class Piece {
             rampDrive.ramp -= 1 / (n.rampOhms * n.capacitorFarads);
             rampDrive.add(-1 / n.capacitorFarads, emitter);
         }
-        states.begin(rampDrive, fluxDrive, source, startSeconds, mode == Mode.STALLED ? 0 : startVolts, startFlux);
+        states.begin(rampDrive, fluxDrive, source, startSeconds, mode == Mode.STALLED ? 0 : startVolts, startFluxAmps);
         rate = states.fastestRate();
+    }
+
+    private void makeRoom(int count) {
+        if (sines.length < count) {
+            sines = new double[count];
+            cosines = new double[count];
+            sinesNow = new double[count];
+            cosinesNow = new double[count];
+        }
     }
 
     /** The capacitor held at the peak point: V_C = kappa V_S + V_D. */
@@ -177,53 +201,59 @@ public final class Piece {
      * @param seconds at or after the piece's start and not beyond its end, s
      */
     public void look(double seconds) {
-        if (coupled) {
-            lookAtBoth(seconds);
+        lookAtSource(seconds);
+        if (!coupled) {
+            lookAtRamp(seconds);
             return;
         }
-        decay = exponential == 0 ? 0 : exponential * Math.exp(-rate * (seconds - startSeconds));
-        double ramp = steady + decay;
-        double slope = -rate * decay;
+        states.look(this, seconds, sinesNow, cosinesNow);
+        if (mode == Mode.STALLED) {
+            rampVolts = value(peak);
+            rampSlope = slope(peak);
+            rampBend = bend(peak);
+        }
+    }
+
+    private void lookAtSource(double seconds) {
         double source = -wave.dropVolts;
-        double sourceRate = 0;
+        double slope = 0;
         double bend = 0;
+        double jerk = 0;
         for (int i = 0; i < wave.count; i++) {
             double w = wave.rates[i];
             double angle = w * seconds + wave.phases[i];
             double sin = Math.sin(angle);
             double cos = Math.cos(angle);
-            ramp += sines[i] * sin + cosines[i] * cos;
-            slope += w * (sines[i] * cos - cosines[i] * sin);
-            source += wave.amplitudes[i] * sin;
-            sourceRate += w * wave.amplitudes[i] * cos;
-            bend -= w * w * wave.amplitudes[i] * sin;
+            sinesNow[i] = sin;
+            cosinesNow[i] = cos;
+            double volts = wave.amplitudes[i] * sin;
+            double rising = w * wave.amplitudes[i] * cos;
+            source += volts;
+            slope += rising;
+            bend -= w * w * volts;
+            jerk -= w * w * rising;
+        }
+        sourceVolts = source;
+        sourceSlope = slope;
+        sourceBend = bend;
+        sourceJerk = jerk;
+    }
+
+    private void lookAtRamp(double seconds) {
+        decay = exponential == 0 ? 0 : exponential * Math.exp(-rate * (seconds - startSeconds));
+        double ramp = steady + decay;
+        double slope = -rate * decay;
+        double bend = rate * rate * decay;
+        for (int i = 0; i < wave.count; i++) {
+            double w = wave.rates[i];
+            double swing = sines[i] * sinesNow[i] + cosines[i] * cosinesNow[i];
+            ramp += swing;
+            slope += w * (sines[i] * cosinesNow[i] - cosines[i] * sinesNow[i]);
+            bend -= w * w * swing;
         }
         rampVolts = ramp;
         rampSlope = slope;
-        sourceVolts = source;
-        sourceSlope = sourceRate;
-        sourceBend = bend;
-    }
-
-    private void lookAtBoth(double seconds) {
-        double source = -wave.dropVolts;
-        double sourceRate = 0;
-        double bend = 0;
-        for (int i = 0; i < wave.count; i++) {
-            double w = wave.rates[i];
-            double sin = wave.amplitudes[i] * Math.sin(w * seconds + wave.phases[i]);
-            source += sin;
-            sourceRate += w * wave.amplitudes[i] * Math.cos(w * seconds + wave.phases[i]);
-            bend -= w * w * sin;
-        }
-        sourceVolts = source;
-        sourceSlope = sourceRate;
-        sourceBend = bend;
-        states.look(this, seconds);
-        if (mode == Mode.STALLED) {
-            rampVolts = value(peak);
-            rampSlope = slope(peak);
-        }
+        rampBend = bend;
     }
 
     /** A linear form where the piece was last looked at. */
@@ -243,22 +273,64 @@ public final class Piece {
                 + form.sourceSlope * sourceBend;
     }
 
-    /**
-     * An upper bound of a linear form's second derivative from where the piece was last looked at to any later time:
-     * the sinusoids at full swing, and the exponential only where it bends upwards.
-     */
-    double bendBound(Affine form) {
-        if (coupled) {
-            return states.bendBound(form);
-        }
-        double bound = Math.max(0, form.ramp * decay) * rate * rate;
-        for (int i = 0; i < wave.count; i++) {
-            double w = wave.rates[i];
-            double sin = form.ramp * sines[i] + form.source * wave.amplitudes[i];
-            double cos = form.ramp * cosines[i] + form.sourceSlope * w * wave.amplitudes[i];
-            bound += w * w * Math.sqrt(sin * sin + cos * cos);
-        }
-        return bound;
+    /** Second time derivative of a linear form where the piece was last looked at. */
+    double bend(Affine form) {
+        return form.ramp * rampBend + form.flux * fluxBend + form.source * sourceBend + form.sourceSlope * sourceJerk;
+    }
+
+    /** How a linear form may go on; to be asked after a look. */
+    Outlook outlook(Affine form) {
+        outlook.of(form);
+        return outlook;
+    }
+
+    int sinusoids() {
+        return wave.count;
+    }
+
+    /** Angular frequency of the source's i-th sinusoid, rad/s. */
+    double sinusoidRate(int i) {
+        return wave.rates[i];
+    }
+
+    /** What that sinusoid's sine gives a linear form. */
+    double sineOf(Affine form, int i) {
+        double swing = coupled ? states.sineOf(form, i) : form.ramp * sines[i];
+        return swing + form.source * wave.amplitudes[i];
+    }
+
+    /** What its cosine gives. */
+    double cosineOf(Affine form, int i) {
+        double swing = coupled ? states.cosineOf(form, i) : form.ramp * cosines[i];
+        return swing + form.sourceSlope * wave.rates[i] * wave.amplitudes[i];
+    }
+
+    /** What the (faster) exponential gives a linear form where the piece was last looked at. */
+    double quickPart(Affine form) {
+        return coupled ? states.quickPart(form) : form.ramp * decay;
+    }
+
+    double quickRate() {
+        return rate;
+    }
+
+    /** What the slower exponential gives it; 0 without a pulse transformer. */
+    double slowPart(Affine form) {
+        return coupled ? states.slowPart(form) : 0;
+    }
+
+    double slowRate() {
+        return coupled ? states.slowestRate() : 0;
+    }
+
+    /** Bound of the second derivative that two exponentials give a linear form where they cannot be told apart; else 0. */
+    double meshedBend(Affine form) {
+        return coupled ? states.meshedBend(form) : 0;
+    }
+
+    /** The same of the third derivative. */
+    double meshedJerk(Affine form) {
+        return coupled ? states.meshedJerk(form) : 0;
     }
 
     /**
@@ -481,6 +553,8 @@ public final class Piece {
         other.wave = wave;
         other.sines = sines.clone();
         other.cosines = cosines.clone();
+        other.sinesNow = new double[sines.length];
+        other.cosinesNow = new double[sines.length];
         return other;
     }
 }

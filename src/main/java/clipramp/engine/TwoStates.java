@@ -11,12 +11,16 @@ final class TwoStates {
     /** Below this d t, sinh(d t)/d is its own series' first terms. */
     private static final double SERIES = 1e-4;
 
+    /** Decays nearer than this share to each other are not told apart. */
+    private static final double APART = 1e-3;
+
     private SourceWave wave = new SourceWave();
     private double startSeconds;
     private double mean;
     private double spreadSquared;
     private double spread;
     private double slow;
+    private boolean meshed;
     private double fast;
     private double a11;
     private double a12;
@@ -75,6 +79,7 @@ final class TwoStates {
             fast = mean;
             slow = mean;
         }
+        meshed = !(fast - slow > APART * fast);
     }
 
     /** What both states begin with beyond the particular solution: the part that fades. */
@@ -119,27 +124,40 @@ final class TwoStates {
         }
     }
 
-    /** Works out both states and their slopes and puts them into the piece. */
-    void look(Piece piece, double seconds) {
+    /**
+     * Works out both states with their slopes and bends and puts them into the piece.
+     *
+     * @param seconds the time
+     * @param sines sine of each of the source's angles then
+     * @param cosines their cosines
+     */
+    void look(Piece piece, double seconds, double[] sines, double[] cosines) {
         fade(seconds - startSeconds);
         double ramp = rampNow + rampSteady;
         double flux = fluxNow + fluxSteady;
         double rampSlope = -a11 * rampNow - a12 * fluxNow;
         double fluxSlope = -a21 * rampNow - a22 * fluxNow;
+        double rampBend = -a11 * rampSlope - a12 * fluxSlope;
+        double fluxBend = -a21 * rampSlope - a22 * fluxSlope;
         for (int i = 0; i < wave.count; i++) {
             double w = wave.rates[i];
-            double angle = w * seconds + wave.phases[i];
-            double sin = Math.sin(angle);
-            double cos = Math.cos(angle);
-            ramp += rampSines[i] * sin + rampCosines[i] * cos;
-            flux += fluxSines[i] * sin + fluxCosines[i] * cos;
+            double sin = sines[i];
+            double cos = cosines[i];
+            double rampSwing = rampSines[i] * sin + rampCosines[i] * cos;
+            double fluxSwing = fluxSines[i] * sin + fluxCosines[i] * cos;
+            ramp += rampSwing;
+            flux += fluxSwing;
+            rampBend -= w * w * rampSwing;
+            fluxBend -= w * w * fluxSwing;
             rampSlope += w * (rampSines[i] * cos - rampCosines[i] * sin);
             fluxSlope += w * (fluxSines[i] * cos - fluxCosines[i] * sin);
         }
         piece.rampVolts = ramp;
         piece.rampSlope = rampSlope;
+        piece.rampBend = rampBend;
         piece.fluxAmps = flux;
         piece.fluxSlope = fluxSlope;
+        piece.fluxBend = fluxBend;
     }
 
     /** The homogeneous part so long after the start. */
@@ -165,25 +183,73 @@ final class TwoStates {
         fluxNow = even * flux0 - odd * fluxTurned;
     }
 
-    /** Bound of a form's second derivative from where last looked at to any later time. */
-    double bendBound(Affine form) {
-        // f.A²x, and f.A²(A - m)x, which q multiplies; q never exceeds 1/(slow + fast) by more than a factor of e.
+    /** What the i-th sinusoid's sine gives a form by way of both states. */
+    double sineOf(Affine form, int i) {
+        return form.ramp * rampSines[i] + form.flux * fluxSines[i];
+    }
+
+    /** What its cosine gives. */
+    double cosineOf(Affine form, int i) {
+        return form.ramp * rampCosines[i] + form.flux * fluxCosines[i];
+    }
+
+    /** As a look at the start, without working it out again. */
+    void lookAtStart() {
+        rampNow = ramp0;
+        fluxNow = flux0;
+    }
+
+    /** What the faster exponential gives a form where last looked at; 0 where both are meshed. */
+    double quickPart(Affine form) {
+        if (meshed) {
+            return 0;
+        }
+        double rampQuick = (a11 - slow) * rampNow + a12 * fluxNow;
+        double fluxQuick = a21 * rampNow + (a22 - slow) * fluxNow;
+        return (form.ramp * rampQuick + form.flux * fluxQuick) / (fast - slow);
+    }
+
+    /** What the slower one gives it. */
+    double slowPart(Affine form) {
+        return meshed ? 0 : form.ramp * rampNow + form.flux * fluxNow - quickPart(form);
+    }
+
+    /** Bound of a form's second derivative from where last looked at to any later time where both exponentials are meshed. */
+    double meshedBend(Affine form) {
+        if (!meshed) {
+            return 0;
+        }
         double first = a11 * rampNow + a12 * fluxNow;
         double second = a21 * rampNow + a22 * fluxNow;
-        double rampBend = a11 * first + a12 * second;
-        double fluxBend = a21 * first + a22 * second;
-        double now = form.ramp * rampBend + form.flux * fluxBend;
-        double turned = form.ramp * ((a11 - mean) * rampBend + a12 * fluxBend)
-                + form.flux * (a21 * rampBend + (a22 - mean) * fluxBend);
-        double bound = Math.abs(now) + Math.abs(turned) / fast;
-        for (int i = 0; i < wave.count; i++) {
-            double w = wave.rates[i];
-            double sin = form.ramp * rampSines[i] + form.flux * fluxSines[i] + form.source * wave.amplitudes[i];
-            double cos =
-                    form.ramp * rampCosines[i] + form.flux * fluxCosines[i] + form.sourceSlope * w * wave.amplitudes[i];
-            bound += w * w * Math.sqrt(sin * sin + cos * cos);
+        return fadingBound(form, a11 * first + a12 * second, a21 * first + a22 * second);
+    }
+
+    /** The same for its third derivative. */
+    double meshedJerk(Affine form) {
+        if (!meshed) {
+            return 0;
         }
-        return bound;
+        double first = a11 * rampNow + a12 * fluxNow;
+        double second = a21 * rampNow + a22 * fluxNow;
+        double third = a11 * first + a12 * second;
+        double fourth = a21 * first + a22 * second;
+        return fadingBound(form, a11 * third + a12 * fourth, a21 * third + a22 * fourth);
+    }
+
+    /**
+     * How great a form of states that fade by the same law may become: f.y, and f.(A - m)y, which q multiplies; q never
+     * exceeds one over the fastest decay.
+     */
+    private double fadingBound(Affine form, double rampPart, double fluxPart) {
+        double now = form.ramp * rampPart + form.flux * fluxPart;
+        double turned = form.ramp * ((a11 - mean) * rampPart + a12 * fluxPart)
+                + form.flux * (a21 * rampPart + (a22 - mean) * fluxPart);
+        return Math.abs(now) + Math.abs(turned) / fast;
+    }
+
+    /** Slowest decay, 1/s. */
+    double slowestRate() {
+        return slow;
     }
 
     /** Fastest decay, 1/s. */
@@ -199,6 +265,7 @@ final class TwoStates {
         other.spreadSquared = spreadSquared;
         other.spread = spread;
         other.slow = slow;
+        other.meshed = meshed;
         other.fast = fast;
         other.a11 = a11;
         other.a12 = a12;
