@@ -184,7 +184,7 @@ final class CheckText {
                 .amount("base one, peak", pulse.peakBaseOneVolts(), Unit.VOLT)
                 .amount("from the capacitor", pulse.capacitorJoules(), Unit.JOULE)
                 .amount("above trigger current", pulse.aboveTriggerSeconds(), Unit.SECOND)
-                .amount("gate between pulses", summary.quiescentGateVolts(), Unit.VOLT)
+                .amount("standing gate voltage", summary.quiescentGateVolts(), Unit.VOLT)
                 .lines());
         out.line("");
     }

@@ -27,6 +27,7 @@ public final class CircuitFigure implements Figure {
     private final Sheet sheet;
     private final Map<String, String> names;
 
+    /** The circuit of a sound design, nothing highlighted. */
     public CircuitFigure(Design design) {
         this(design, Set.of(), Schematic.of(design));
     }
@@ -38,7 +39,7 @@ public final class CircuitFigure implements Figure {
         this.names = new PartText(design).names();
     }
 
-    /** The same drawing with some parts highlighted. */
+    /** The same drawing with some parts highlighted, by their design keys; a key that is not drawn does nothing. */
     public CircuitFigure withChosen(Set<String> keys) {
         return new CircuitFigure(design, keys, sheet);
     }
@@ -80,7 +81,7 @@ public final class CircuitFigure implements Figure {
         return Schematic.WIDTH / Schematic.HEIGHT;
     }
 
-    /** Where the parts lie when the figure is drawn at a size; a smaller box stands before a larger one around it. */
+    /** Where the parts lie when the figure is drawn at a size in user units; a smaller box stands before a larger one around it. */
     public List<PartBox> parts(double width, double height) {
         AffineTransform at = placement(width, height);
         return sheet.boxes().entrySet().stream()

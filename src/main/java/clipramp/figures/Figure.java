@@ -20,8 +20,8 @@ public interface Figure {
      * Draws it into the rectangle from 0, 0 to width, height, ground included.
      *
      * @param g surface, in user units with y downwards
-     * @param width in user units
-     * @param height in user units
+     * @param width in user units, above 0
+     * @param height in user units, above 0
      * @param style colours and sizes
      */
     void draw(Graphics2D g, double width, double height, Style style);

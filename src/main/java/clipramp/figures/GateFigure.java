@@ -28,6 +28,11 @@ import org.jfree.chart.axis.LogAxis;
 public record GateFigure(Design design, double[] gateAmps, double[] gateVolts) implements Figure {
     private static final double LEAST_VOLTS = 0.05;
 
+    /**
+     * Refuses a path of unequal halves.
+     *
+     * @throws IllegalArgumentException where there are not as many voltages as currents
+     */
     public GateFigure {
         if (gateAmps.length != gateVolts.length) {
             throw new IllegalArgumentException("a path needs as many voltages as currents");
@@ -37,6 +42,7 @@ public record GateFigure(Design design, double[] gateAmps, double[] gateVolts) i
     /**
      * The path of one pulse.
      *
+     * @param design for the device's limits and the coldest junction
      * @param waves sampled half cycle
      * @param fromSeconds when the pulse begins, s on the waveforms' clock
      * @param toSeconds when it ends, s

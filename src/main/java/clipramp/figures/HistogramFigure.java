@@ -23,10 +23,7 @@ public record HistogramFigure(Histogram histogram) implements Figure {
     @Override
     public String sentence() {
         List<Integer> counts = histogram.counts();
-        int fullest = 0;
-        for (int i = 1; i < counts.size(); i++) {
-            fullest = counts.get(i) > counts.get(fullest) ? i : fullest;
-        }
+        int fullest = counts.indexOf(histogram.most());
         return "Of " + histogram.units() + " units drawn, most (" + counts.get(fullest) + ") get between "
                 + Numerals.plain(edge(fullest)) + " % and " + Numerals.plain(edge(fullest + 1)) + " % of full power.";
     }

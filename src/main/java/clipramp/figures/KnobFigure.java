@@ -24,6 +24,8 @@ import java.util.OptionalDouble;
 public record KnobFigure(List<OperatingPoint> points, Wanted wanted, OptionalDouble position, Optional<Band> band)
         implements Figure {
     /**
+     * Between which powers the units of a spread lie.
+     *
      * @param positions knob positions, 0..1
      * @param lowFractions lowest share of full power at each
      * @param highFractions highest share of full power at each
@@ -33,6 +35,11 @@ public record KnobFigure(List<OperatingPoint> points, Wanted wanted, OptionalDou
     private static final double SWATCH = 10;
     private static final int MOST_MARKED = 21;
 
+    /**
+     * Refuses a curve without a point.
+     *
+     * @throws IllegalArgumentException without a position
+     */
     public KnobFigure {
         points = List.copyOf(points);
         if (points.isEmpty()) {
@@ -40,14 +47,17 @@ public record KnobFigure(List<OperatingPoint> points, Wanted wanted, OptionalDou
         }
     }
 
+    /** The bare curve, without a mark for the knob and without a band. */
     public KnobFigure(List<OperatingPoint> points, Wanted wanted) {
         this(points, wanted, OptionalDouble.empty(), Optional.empty());
     }
 
+    /** The same with the knob at a position, 0..1; without a mark where it is empty. */
     public KnobFigure withPosition(OptionalDouble wantedPosition) {
         return new KnobFigure(points, wanted, wantedPosition, band);
     }
 
+    /** The same with a spread's band, or without one. */
     public KnobFigure withBand(Optional<Band> wantedBand) {
         return new KnobFigure(points, wanted, position, wantedBand);
     }

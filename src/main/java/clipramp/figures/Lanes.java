@@ -7,13 +7,18 @@ import java.util.OptionalDouble;
 /**
  * What the lanes show: one half cycle, or one period of the line for a half-wave stage.
  *
- * @param waves sampled firing circuit
+ * @param waves sampled firing circuit, two samples or more
  * @param loadRad line angles of the load's samples, rad, never falling
  * @param loadVolts voltage across the load at those angles, V
  * @param firingRad angle at which the thyristor is turned on, rad; empty when it stays off
  * @param hertz line frequency, Hz
  */
 public record Lanes(Waveforms waves, double[] loadRad, double[] loadVolts, OptionalDouble firingRad, double hertz) {
+    /**
+     * Refuses lanes that no line can be drawn through.
+     *
+     * @throws IllegalArgumentException for fewer than two samples of anything, or a frequency that is not above 0
+     */
     public Lanes {
         if (waves.angleRad().length < 2 || loadRad.length < 2 || loadRad.length != loadVolts.length) {
             throw new IllegalArgumentException("lanes need two samples or more of everything");
@@ -55,6 +60,8 @@ public record Lanes(Waveforms waves, double[] loadRad, double[] loadVolts, Optio
     }
 
     /**
+     * The top of a gate pulse.
+     *
      * @param angleRad where the gate current of the firing pulse is largest, rad
      * @param amps how large it is, A
      */

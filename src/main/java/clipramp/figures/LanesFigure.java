@@ -19,8 +19,10 @@ import java.util.OptionalDouble;
 public record LanesFigure(Lanes lanes, double fromRad, double toRad, OptionalDouble crosshairRad, Optional<Band> band)
         implements Figure {
     /**
-     * @param fromRad rad
-     * @param toRad rad, not below {@code fromRad}
+     * Between which angles the units of a spread fire.
+     *
+     * @param fromRad earliest, rad
+     * @param toRad latest, rad, not below {@code fromRad}
      */
     public record Band(double fromRad, double toRad) {}
 
@@ -28,6 +30,11 @@ public record LanesFigure(Lanes lanes, double fromRad, double toRad, OptionalDou
     /** Far shorter than anything in the circuit: to read either side of a jump. */
     private static final double INSTANT_RAD = 1e-7;
 
+    /**
+     * Refuses a view of nothing.
+     *
+     * @throws IllegalArgumentException where the first angle is not below the last
+     */
     public LanesFigure {
         if (!(fromRad < toRad)) {
             throw new IllegalArgumentException("shown angles run from low to high, not " + fromRad + ".." + toRad);
@@ -39,15 +46,17 @@ public record LanesFigure(Lanes lanes, double fromRad, double toRad, OptionalDou
         this(lanes, 0, lanes.spanRad(), OptionalDouble.empty(), Optional.empty());
     }
 
-    /** A closer look at some of its angles. */
+    /** A closer look, from one angle to another, rad. */
     public LanesFigure withView(double from, double to) {
         return new LanesFigure(lanes, from, to, crosshairRad, band);
     }
 
+    /** The same with the values at an angle, rad, lettered beside the lanes; without them where it is empty. */
     public LanesFigure withCrosshair(OptionalDouble angleRad) {
         return new LanesFigure(lanes, fromRad, toRad, angleRad, band);
     }
 
+    /** The same with a spread's band, or without one. */
     public LanesFigure withBand(Optional<Band> wanted) {
         return new LanesFigure(lanes, fromRad, toRad, crosshairRad, wanted);
     }
@@ -118,7 +127,7 @@ public record LanesFigure(Lanes lanes, double fromRad, double toRad, OptionalDou
         return 1.5;
     }
 
-    /** Where the lanes lie when drawn at a size. */
+    /** Where the lanes lie when drawn at a size in user units. */
     public LanesFrame frame(double width, double height, Style style) {
         return LanesFrame.of(this, width, height, style);
     }

@@ -11,7 +11,9 @@ import java.io.UncheckedIOException;
 
 /** The one type family, DejaVu Sans, from the program's own font files: nothing depends on what a machine has installed. */
 public final class Lettering {
+    /** The family's name, as a style sheet and an SVG know it. */
     public static final String FAMILY = "DejaVu Sans";
+
     private static final String FOLDER = "/net/sf/jasperreports/fonts/dejavu/";
     /** Measures alike for every surface: fractional widths, no hinting. */
     private static final FontRenderContext MEASURE = new FontRenderContext(null, true, true);
@@ -43,7 +45,11 @@ public final class Lettering {
         width("0", regular(1));
     }
 
-    /** The TrueType file of a face, for a surface that embeds or loads it itself. */
+    /**
+     * The TrueType file of a face, for a surface that embeds or loads it itself.
+     *
+     * @param bold whether the bold face is meant; the regular one else
+     */
     public static byte[] fontFile(boolean bold) {
         String name = FOLDER + (bold ? "DejaVuSans-Bold.ttf" : "DejaVuSans.ttf");
         try (InputStream in = Lettering.class.getResourceAsStream(name)) {
@@ -71,11 +77,12 @@ public final class Lettering {
         return text.isEmpty() ? 0 : font.getStringBounds(text, MEASURE).getWidth();
     }
 
-    /** Height of the box that a line of text keeps free: ascent of capitals and figures, and descent. */
+    /** How far the box that a line of text keeps free reaches over the baseline: to the tops of capitals and figures. */
     static double ascent(Font font) {
         return font.getSize2D() * 0.76;
     }
 
+    /** And how far of that box lies under the baseline. */
     static double descent(Font font) {
         return font.getSize2D() * 0.24;
     }

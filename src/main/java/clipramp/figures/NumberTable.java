@@ -9,6 +9,11 @@ import java.util.List;
  * @param rows cells as text, as many as there are heads in every row
  */
 public record NumberTable(List<String> heads, List<List<String>> rows) {
+    /**
+     * Refuses a ragged table.
+     *
+     * @throws IllegalArgumentException where a row has not as many cells as there are heads
+     */
     public NumberTable {
         heads = List.copyOf(heads);
         rows = rows.stream().map(List::copyOf).toList();

@@ -41,7 +41,7 @@ final class Numerals {
     }
 
     private static String trimmed(BigDecimal value) {
-        BigDecimal short_ = value.signum() == 0 ? BigDecimal.ZERO : value.stripTrailingZeros();
-        return short_.toPlainString().replace("-", "−");
+        BigDecimal shortest = value.signum() == 0 ? BigDecimal.ZERO : value.stripTrailingZeros();
+        return shortest.toPlainString().replace("-", "−");
     }
 }

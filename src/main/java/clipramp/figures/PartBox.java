@@ -10,7 +10,7 @@ import java.awt.geom.Rectangle2D;
  * @param box its symbol and label, in user units of the surface
  */
 public record PartBox(String key, String designator, Rectangle2D box) {
-    /** Whether a point lies in it. */
+    /** Whether a point, in user units of the surface, lies in it. */
     public boolean contains(double x, double y) {
         return box.contains(x, y);
     }

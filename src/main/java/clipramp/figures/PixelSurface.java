@@ -9,6 +9,8 @@ public final class PixelSurface {
     private final BufferedImage image;
 
     /**
+     * An empty surface.
+     *
      * @param columns pixels across, 1 or more
      * @param rows pixels down, 1 or more
      */
@@ -16,10 +18,12 @@ public final class PixelSurface {
         image = new BufferedImage(columns, rows, BufferedImage.TYPE_INT_ARGB_PRE);
     }
 
+    /** Pixels across. */
     public int columns() {
         return image.getWidth();
     }
 
+    /** Pixels down. */
     public int rows() {
         return image.getHeight();
     }
@@ -27,7 +31,9 @@ public final class PixelSurface {
     /**
      * Draws a figure over all of it.
      *
-     * @param scale pixels per px, above 0
+     * @param figure what is drawn
+     * @param scale pixels per user unit, above 0
+     * @param style colours and sizes
      */
     public void draw(Figure figure, double scale, Style style) {
         Graphics2D g = image.createGraphics();

@@ -21,6 +21,11 @@ public record ShapeFigure(KnobShape before, KnobShape after) implements Figure {
     /** One row of numbers for so many solved positions. */
     private static final int ROW_EVERY = 9;
 
+    /**
+     * Refuses what cannot be compared.
+     *
+     * @throws IllegalArgumentException where one shows power and the other light, or they are solved at different positions
+     */
     public ShapeFigure {
         if (before.what() != after.what()
                 || before.values().size() != after.values().size()) {

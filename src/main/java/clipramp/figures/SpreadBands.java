@@ -12,7 +12,7 @@ public final class SpreadBands {
 
     private SpreadBands() {}
 
-    /** Power over the knob; empty for a fixed ramp. */
+    /** Power over the knob; empty for a fixed ramp, and where no unit was drawn. */
     public static Optional<KnobFigure.Band> knob(SpreadResult spread) {
         List<PositionSpread> all = spread.positions();
         if (all.size() < 2) {
@@ -29,8 +29,9 @@ public final class SpreadBands {
     }
 
     /**
-     * Firing angles at a knob position, between the drawn positions in proportion.
+     * Firing angles at a knob position, between the drawn positions in proportion; empty where no unit was drawn.
      *
+     * @param spread what the units do
      * @param position 0..1; ignored for a fixed ramp
      */
     public static Optional<LanesFigure.Band> lanes(SpreadResult spread, double position) {

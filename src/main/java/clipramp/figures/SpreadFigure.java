@@ -22,6 +22,11 @@ public record SpreadFigure(SpreadResult spread) implements Figure {
     private static final double[] TINTS = {0.14, 0.26, 0.42};
     private static final String[] MEANINGS = {"98 % of the units", "90 %", "half", "middle unit", "worst case"};
 
+    /**
+     * Refuses a spread that shows nothing.
+     *
+     * @throws IllegalArgumentException where no unit was drawn
+     */
     public SpreadFigure {
         if (spread.positions().isEmpty()) {
             throw new IllegalArgumentException("a spread of no unit cannot be drawn");

@@ -4,7 +4,7 @@ import java.awt.BasicStroke;
 import java.awt.Font;
 
 /**
- * How a figure is lettered and ruled: a palette, and one factor on the three type sizes and all line widths.
+ * How a figure is lettered and ruled: a palette, and one factor on both type sizes and all line widths.
  *
  * @param palette colours
  * @param zoom 1 on a screen at 100 %; above 0
@@ -12,19 +12,24 @@ import java.awt.Font;
 public record Style(Palette palette, double zoom) {
     private static final double SMALL = 11;
     private static final double TEXT = 13;
-    private static final double HEAD = 17;
 
     /** A screen at 100 %, and pictures. */
     public static final Style SCREEN = new Style(Palette.PAPER, 1);
     /** A printed page, whose unit is the point: the same drawing at two thirds. */
     public static final Style PRINT = new Style(Palette.PAPER, 0.66);
 
+    /**
+     * Refuses a style that draws nothing.
+     *
+     * @throws IllegalArgumentException for a zoom that is not above 0
+     */
     public Style {
         if (!(zoom > 0)) {
             throw new IllegalArgumentException("zoom must be above 0, is " + zoom);
         }
     }
 
+    /** The same sizes in other colours. */
     public Style with(Palette other) {
         return new Style(other, zoom);
     }
@@ -33,20 +38,12 @@ public record Style(Palette palette, double zoom) {
         return Lettering.regular(SMALL * zoom);
     }
 
-    Font text() {
-        return Lettering.regular(TEXT * zoom);
-    }
-
     Font textBold() {
         return Lettering.bold(TEXT * zoom);
     }
 
     Font smallBold() {
         return Lettering.bold(SMALL * zoom);
-    }
-
-    Font head() {
-        return Lettering.bold(HEAD * zoom);
     }
 
     /** Half the eight-unit rhythm, scaled. */

@@ -23,7 +23,7 @@ public final class Surfaces {
 
     private Surfaces() {}
 
-    /** Draws a figure onto any surface, smoothly where the surface can be told so. */
+    /** Draws a figure onto any surface in a size in user units, smoothly where the surface can be told so. */
     public static void draw(Figure figure, Graphics2D g, double width, double height, Style style) {
         g.setRenderingHint(RenderingHints.KEY_ANTIALIASING, RenderingHints.VALUE_ANTIALIAS_ON);
         g.setRenderingHint(RenderingHints.KEY_TEXT_ANTIALIASING, RenderingHints.VALUE_TEXT_ANTIALIAS_ON);
@@ -35,8 +35,10 @@ public final class Surfaces {
     /**
      * The figure as an SVG document, in UTF-8, with real text, title and description; alike for alike input.
      *
+     * @param figure what is drawn
      * @param width in px, above 0
      * @param height in px, above 0
+     * @throws IllegalArgumentException for a size that is not above 0
      */
     public static String toSvg(Figure figure, double width, double height) {
         requireSize(width, height);
@@ -86,16 +88,18 @@ public final class Surfaces {
     /**
      * The figure as a PNG file.
      *
+     * @param figure what is drawn
      * @param width in px at scale 1, above 0
      * @param height in px at scale 1, above 0
      * @param scale pixels per px, above 0; 2 for a sharp print
+     * @throws IllegalArgumentException for a size that is not above 0, or of more than 64 million pixels
      */
     public static byte[] toPng(Figure figure, double width, double height, double scale) {
         return png(toImage(figure, width, height, scale, Style.SCREEN));
     }
 
-    /** The figure as a picture in memory, in any style. */
-    public static BufferedImage toImage(Figure figure, double width, double height, double scale, Style style) {
+    /** The figure as a picture in memory, in any style; sizes and refusals as for {@link #toPng}. */
+    static BufferedImage toImage(Figure figure, double width, double height, double scale, Style style) {
         requireSize(width, height);
         double columns = Math.ceil(width * scale);
         double rows = Math.ceil(height * scale);

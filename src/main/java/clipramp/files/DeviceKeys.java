@@ -225,7 +225,7 @@ final class DeviceKeys {
                 "Largest trigger current and voltage of any device, against junction temperature.");
         keys.add(other(gate + ".non-trigger", Kind.MAPPING)
                 .optional()
-                .by("the quiescent margin")
+                .by("the standing gate voltage")
                 .means("Gate voltage that fires no device, V_GD."));
         keys.add(quantity(gate + ".non-trigger.voltage", Unit.VOLT, 1e-3, 5).means("The voltage."));
         keys.add(quantity(gate + ".non-trigger.at", Unit.CELSIUS, -60, 300)

@@ -1,6 +1,7 @@
 package clipramp.record;
 
 import clipramp.fit.FitResult;
+import clipramp.fit.FitWords;
 import clipramp.fit.Fitted;
 import clipramp.fit.Fitted.Knowledge;
 import clipramp.fit.Fitted.Within;
@@ -9,14 +10,11 @@ import clipramp.fit.Residual;
 import clipramp.units.QuantityText;
 import clipramp.units.Unit;
 import com.lowagie.text.Font;
-import java.math.BigDecimal;
-import java.math.RoundingMode;
 import java.util.List;
 import java.util.stream.Collectors;
 
 /** One unit as its bench readings have it: design, as built, difference, tolerance; and what the readings cannot tell. */
 final class AsBuiltSection {
-    private static final int FIGURES = 4;
 
     private AsBuiltSection() {}
 
@@ -27,11 +25,7 @@ final class AsBuiltSection {
         paper.text("One unit, fitted from " + quality.used() + " of " + quality.readings() + " bench readings ("
                 + fit.readings().name() + ") at "
                 + QuantityText.format(fit.readings().celsius(), Unit.CELSIUS)
-                + ". Intervals hold 19 times in 20. "
-                + (quality.widened() > 1
-                        ? "The readings scatter " + decimals(quality.widened(), 1)
-                                + " times as far as their instruments explain; the intervals are widened by that."
-                        : "The readings scatter no more than their instruments explain."));
+                + ". Intervals hold 19 times in 20. " + String.join(" ", FitWords.quality(fit)));
         values(paper, fit);
         paper.quiet(
                 "Before any reading, every value is taken as its design's, one standard deviation to its limit. Told: half"
@@ -62,47 +56,32 @@ final class AsBuiltSection {
 
     private static List<String> cells(Fitted value) {
         Unit unit = value.unit();
-        String difference = decimals(100 * value.difference(), 1);
         return List.of(
                 value.name(),
-                amount(value.nominal(), unit),
-                amount(value.value(), unit),
-                amount(value.from(), unit) + " to " + amount(value.to(), unit),
-                (difference.startsWith("-") ? "" : "+") + difference + " %",
-                amount(value.low(), unit) + " to " + amount(value.high(), unit) + (value.limitsAssumed() ? " *" : ""),
-                value.knowledge() == Knowledge.NARROWED && value.within() == Within.UNKNOWN
-                        ? "not told"
-                        : value.within().word());
+                FitWords.amount(value.nominal(), unit),
+                FitWords.amount(value.value(), unit),
+                FitWords.amount(value.from(), unit) + " to " + FitWords.amount(value.to(), unit),
+                FitWords.signedPercent(value.difference()),
+                FitWords.amount(value.low(), unit) + " to " + FitWords.amount(value.high(), unit)
+                        + (value.limitsAssumed() ? " *" : ""),
+                value.within().word());
     }
 
     private static void untold(Paper paper, FitResult fit) {
-        String untold = fit.values().stream()
-                .filter(value -> value.knowledge() == Knowledge.NOT_TOLD)
-                .map(Fitted::name)
-                .collect(Collectors.joining(", "));
-        if (!untold.isEmpty()) {
-            paper.text("These readings cannot tell: " + untold + ".");
-        }
+        FitWords.untold(fit).ifPresent(paper::text);
         if (!fit.together().isEmpty()) {
             paper.text("Told only together (correlation): "
                     + fit.together().stream()
-                            .map(pair -> name(fit, pair.first()) + " and " + name(fit, pair.second()) + " "
-                                    + decimals(pair.correlation(), 2))
+                            .map(pair -> FitWords.together(fit, pair))
                             .collect(Collectors.joining("; "))
                     + ".");
         }
     }
 
-    private static String name(FitResult fit, String path) {
-        return fit.value(path).map(Fitted::name).orElse(path);
-    }
-
     private static void strangers(Paper paper, FitResult fit) {
         for (Residual stranger : fit.strangers()) {
-            paper.text(
-                    "Does not belong, and was left out: line " + stranger.line() + ", " + stranger.column() + ", read "
-                            + amount(stranger.read(), stranger.unit()) + "; the others say "
-                            + amount(stranger.shown(), stranger.unit()) + ".");
+            paper.text("Does not belong, and was left out: line " + stranger.line() + ", " + stranger.column() + ": "
+                    + FitWords.stranger(stranger));
         }
     }
 
@@ -113,20 +92,11 @@ final class AsBuiltSection {
             grid.row(
                     Integer.toString(residual.line()),
                     residual.what(),
-                    amount(residual.read(), residual.unit()),
-                    amount(residual.shown(), residual.unit()),
-                    decimals(residual.deviations(), 1),
+                    FitWords.amount(residual.read(), residual.unit()),
+                    FitWords.amount(residual.shown(), residual.unit()),
+                    QuantityText.fixed(residual.deviations(), 1),
                     residual.belongs() ? "" : "does not belong");
         }
         paper.add(grid.table());
-    }
-
-    private static String amount(double value, Unit unit) {
-        return QuantityText.format(value, unit, FIGURES);
-    }
-
-    private static String decimals(double value, int places) {
-        BigDecimal rounded = new BigDecimal(value).setScale(places, RoundingMode.HALF_EVEN);
-        return rounded.signum() == 0 ? rounded.abs().toPlainString() : rounded.toPlainString();
     }
 }

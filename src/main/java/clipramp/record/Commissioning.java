@@ -29,6 +29,7 @@ final class Commissioning {
         this.design = check.design();
     }
 
+    /** The lines of the sheet, in the order in which they are measured. */
     static List<Expectation> of(Check check) {
         Commissioning sheet = new Commissioning(check);
         sheet.line();
@@ -69,7 +70,7 @@ final class Commissioning {
         check.pulse()
                 .ifPresent(pulse -> lines.add(new Expectation(
                         "TP4",
-                        "standing voltage between pulses",
+                        "standing gate voltage, between pulses",
                         "≤ " + Shown.brief(pulse.quiescentGateVolts(), Unit.VOLT),
                         "",
                         PROBE)));

@@ -36,7 +36,13 @@ public final class DesignRecord {
         out.write(bytes(content, size));
     }
 
-    /** The record as a PDF file in memory. */
+    /**
+     * The record as a PDF file in memory.
+     *
+     * @param content what it prints
+     * @param size paper
+     * @throws IOException where the PDF cannot be put together
+     */
     public static byte[] bytes(RecordContent content, PageSize size) throws IOException {
         ByteArrayOutputStream pdf = new ByteArrayOutputStream();
         Document document = new Document(size.points(), SIDE, SIDE, TOP, BOTTOM);

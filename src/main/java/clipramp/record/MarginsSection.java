@@ -54,7 +54,7 @@ final class MarginsSection {
         grid.bare(Shown.word(margin.verdict()), name, 6);
         grid.bareAcross(margin.formula(), faces.small());
         if (!margin.remedy().isEmpty()) {
-            grid.bareAcross("remedy: " + margin.remedy(), faces.quiet());
+            grid.bareAcross("what to do: " + margin.remedy(), faces.quiet());
         }
         String parts = margin.parts().isEmpty() ? "" : " · moved by: " + String.join(", ", margin.parts());
         grid.across("source: " + margin.source() + parts, faces.quiet());

@@ -4,7 +4,9 @@ import com.lowagie.text.Rectangle;
 
 /** The paper that a record is laid out for. */
 public enum PageSize {
+    /** 210 mm by 297 mm (ISO 216). */
     A4("A4", com.lowagie.text.PageSize.A4),
+    /** 8.5 in by 11 in. */
     LETTER("letter", com.lowagie.text.PageSize.LETTER);
 
     private final String word;
@@ -15,7 +17,7 @@ public enum PageSize {
         this.points = points;
     }
 
-    /** The word that stands in an option. */
+    /** What people call it. */
     public String word() {
         return word;
     }

@@ -28,6 +28,9 @@ final class PartEnds {
     /**
      * A reading and how far off it may be.
      *
+     * @param nominal of the nominal unit, in the reading's SI unit
+     * @param low least of a good unit
+     * @param high greatest of a good unit
      * @param sure whether a part at either end still gives a reading at all
      */
     record Band(double nominal, double low, double high, boolean sure) {}

@@ -1,5 +1,6 @@
 package clipramp.record;
 
+import clipramp.circuit.RefusedCircuit;
 import clipramp.faults.FaultSheet;
 import clipramp.faults.Faults;
 import clipramp.figures.Lanes;
@@ -43,12 +44,13 @@ public record RecordContent(
     private static final int SAMPLES = 2000;
     private static final double MID_KNOB = 0.5;
 
+    /** Keeps the lists as they are. */
     public RecordContent {
         profiles = List.copyOf(profiles);
         commissioning = List.copyOf(commissioning);
     }
 
-    /** The same with a page on what many units of this design do. */
+    /** The same with a page on what many units of this design do, where they were drawn. */
     public RecordContent withSpread(Optional<SpreadResult> drawn) {
         return new RecordContent(loaded, check, profiles, lanes, commissioning, faults, programVersion, fit, drawn);
     }
@@ -61,6 +63,7 @@ public record RecordContent(
      * @param check the same design judged
      * @param library where its profiles were found, for their sources
      * @param programVersion version of this program
+     * @throws RefusedCircuit where the circuit cannot be solved
      */
     public static RecordContent of(LoadedDesign loaded, Check check, ProfileLibrary library, String programVersion) {
         OperatingPoint middle = KnobMap.at(check.design(), check.condition(), MID_KNOB);

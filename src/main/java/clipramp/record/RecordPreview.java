@@ -18,14 +18,14 @@ public final class RecordPreview {
      * @param count how many there are
      * @param width in pixels
      * @param height in pixels
-     * @param argb pixels row by row, 0xAARRGGBB, as many as width times height
+     * @param argb pixels row by row, 0xAARRGGBB, as many as width times height; not copied
      */
     public record Page(int number, int count, int width, int height, int[] argb) {}
 
     /** Takes the pages as they are drawn. */
     @FunctionalInterface
     public interface Pages {
-        /** Takes a page; {@code false} to draw no more. */
+        /** Takes a page, and says whether more are wanted. */
         boolean take(Page page);
     }
 

@@ -19,6 +19,7 @@ final class Reproducible {
 
     private Reproducible() {}
 
+    /** The same file without chance and clock. */
     static byte[] settled(byte[] pdf) {
         // Latin 1 maps every byte to one character and back.
         String text = new String(pdf, StandardCharsets.ISO_8859_1);

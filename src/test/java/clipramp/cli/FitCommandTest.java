@@ -112,7 +112,7 @@ class FitCommandTest {
             String text = new PDFTextStripper().getText(document).replaceAll("\\s+", " ");
             assertThat(text)
                     .contains("As built", "fitted from 24 of 24 bench readings", "95 % interval", "within tolerance")
-                    .contains("These readings cannot tell:");
+                    .contains("The readings cannot tell:");
         }
     }
 
