@@ -40,12 +40,6 @@ final class FilamentLaw {
         return Math.pow(rmsVolts / filament.ratedVolts(), LIGHT_EXPONENT);
     }
 
-    /** Rms voltage, V, at which a power in W is taken. */
-    double voltsFor(double watts) {
-        double warm = filament.ratedVolts() * Math.pow(watts / filament.ratedWatts(), 1 / filament.exponent());
-        return Math.min(warm, Math.sqrt(watts * ohmsAt(warm)));
-    }
-
     /** What rms voltage, V, a resistance in ohms gets where the filament is. */
     interface RmsVolts {
         double over(double ohms);

@@ -20,8 +20,8 @@ public final class HoldingGap {
     private static final int TRIALS = 200;
     private static final double STEP_RAD = 0.002;
 
-    /** At the line's zero nothing drives a current yet; so much later something does, rad. */
-    private static final double AFTER_ZERO_RAD = 1e-3;
+    /** So much after the angle at which the line begins to drive a path there is no doubt which way, rad. */
+    private static final double AFTER_RAD = 1e-6;
 
     private HoldingGap() {}
 
@@ -95,10 +95,7 @@ public final class HoldingGap {
         for (double zero : new double[] {line.positiveStartRad(), line.negativeStartRad()}) {
             double carried = freewheelingAmps(period, zero);
             if (carried <= holdingAmps) {
-                double from = zero + AFTER_ZERO_RAD;
-                InductiveCurrent grown = loop.throughThyristor(from, loop.directionAt(from), carried);
-                double until = PulseLength.reachesRad(grown, from, zero + Math.PI / 2, holdingAmps);
-                least = Math.min(least, Math.min(until, zero + Math.PI / 2) - zero);
+                least = Math.min(least, grownRad(loop, zero, carried, holdingAmps));
                 continue;
             }
             double slope = loop.freewheel().map(d -> d.slopeOhms()).orElse(0.0);
@@ -131,14 +128,30 @@ public final class HoldingGap {
             }
             double before =
                     reachRad(rad -> span.amps().applyAsDouble(Math.max(span.fromRad(), end - rad)), holdingAmps);
-            double after = Math.PI / 2;
-            if (loop.drivingVolts(end) > 0) {
-                InductiveCurrent next = loop.throughThyristor(end, loop.directionAt(end), 0);
-                after = Math.min(after, PulseLength.reachesRad(next, end, end + Math.PI / 2, holdingAmps) - end);
-            }
-            least = Math.min(least, before + after);
+            least = Math.min(least, before + grownRad(loop, end, 0, holdingAmps));
         }
         return least;
+    }
+
+    /** From an angle until a current that the line drives again has reached the holding current, a quarter turn at most. */
+    private static double grownRad(LoadLoop loop, double fromRad, double amps, double holdingAmps) {
+        double latest = fromRad + Math.PI / 2;
+        double start = drivenFromRad(loop, fromRad, latest);
+        InductiveCurrent grown = loop.throughThyristor(start, loop.directionAt(start), amps);
+        return Math.min(PulseLength.reachesRad(grown, start, latest, holdingAmps), latest) - fromRad;
+    }
+
+    /** An angle at once if the line exceeds the drops there, else just after it first does. */
+    private static double drivenFromRad(LoadLoop loop, double fromRad, double latestRad) {
+        double from = fromRad;
+        while (loop.drivingVolts(from) <= 0 && from < latestRad) {
+            double to = from + STEP_RAD;
+            if (loop.drivingVolts(to) > 0) {
+                return new BrentSolver(ACCURACY_RAD).solve(TRIALS, loop::drivingVolts, from, to) + AFTER_RAD;
+            }
+            from = to;
+        }
+        return from;
     }
 
     /** From the end of a current to the line's next zero: until then the line reverses the thyristor. */

@@ -75,6 +75,30 @@ final class Fired {
                 latches ? 0 : -1);
     }
 
+    /** The first pulse of a half cycle, but so weak that it never reaches the trigger current. */
+    static Pulse weak(HalfCycle half) {
+        Pulse p = half.pulses().get(0);
+        return new Pulse(
+                p.startRad(),
+                p.startSeconds(),
+                p.endSeconds(),
+                p.supplyVolts(),
+                p.peakPointVolts(),
+                false,
+                false,
+                1e-3,
+                0.5,
+                0,
+                1,
+                0,
+                0,
+                0,
+                0,
+                false,
+                0,
+                false);
+    }
+
     /** A textbook stage: a resistor and a thyristor without drops, no bridge diodes' drops either. */
     static Design textbook(Stage stage, double loadOhms) {
         Design heater = SampleDesigns.heater();
