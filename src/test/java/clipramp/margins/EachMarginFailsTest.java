@@ -112,7 +112,7 @@ class EachMarginFailsTest {
     }
 
     /** A circuit whose last ramp of a half cycle meets the collapsing supply in every second one only. */
-    private static Design hunting() {
+    static Design hunting() {
         Design design = SampleDesigns.heater()
                 .withLine(new Line(240, 50, 240, 240, List.of()))
                 .withSurroundings(new Surroundings(25, 25))
@@ -210,7 +210,7 @@ class EachMarginFailsTest {
     }
 
     /** A triac on a coil of 25 degrees, behind a snubber; the knob begins beyond its angle. */
-    private static Design coil(Design heater) {
+    static Design coil(Design heater) {
         Design design = heater.withLoad(new Load.Inductive(40, 0.06, Optional.empty()))
                 .withSnubber(Optional.of(new Snubber(100, 220e-9)))
                 .withRamp(SampleDesigns.ramp(220e-9, 5_600, 27_000))
