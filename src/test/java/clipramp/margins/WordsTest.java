@@ -37,9 +37,7 @@ class WordsTest {
         assertThat(List.of(LineCheck.Standing.values()))
                 .extracting(LineCheck.Standing::word)
                 .containsExactly("no limits", "under the limits", "over the limits", "ruled out");
-        assertThat(LineTable.CLASS_A.title()).isEqualTo("class A");
         assertThat(LineTable.CLASS_A.source()).contains("table 1").contains("from memory");
-        assertThat(LineTable.CLASS_C.title()).isEqualTo("class C");
         assertThat(LineTable.CLASS_C.source()).contains("table 2").contains("from memory");
     }
 
