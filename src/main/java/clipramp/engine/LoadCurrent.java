@@ -22,7 +22,7 @@ public final class LoadCurrent {
     /**
      * The load's path of a design, nominal parts.
      *
-     * @throws RefusedCircuit as {@link LineWave}
+     * @throws clipramp.circuit.RefusedCircuit as {@link LineWave}
      */
     public LoadCurrent(Design design, Condition condition) {
         this(design, new LineWave(design.line(), condition));

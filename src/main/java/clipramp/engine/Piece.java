@@ -362,7 +362,7 @@ public final class Piece {
     }
 
     /** Source voltage e, before the dropper, where last looked at, V; negative where the rectifier blocks it. */
-    public double sourceVolts() {
+    double sourceVolts() {
         return sourceVolts;
     }
 
@@ -511,12 +511,12 @@ public final class Piece {
     }
 
     /** Whether the rectifier feeds the supply throughout. */
-    public boolean isRectifying() {
+    boolean isRectifying() {
         return rectifies;
     }
 
     /** Whether the zener conducts throughout. */
-    public boolean isClipping() {
+    boolean isClipping() {
         return clips;
     }
 

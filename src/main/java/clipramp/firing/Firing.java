@@ -8,8 +8,8 @@ import clipramp.engine.Network;
 /**
  * The firing circuit solved: what every other room asks. Event instants are right to 1e-6 of a half cycle or better, the
  * energies of pulses to 1e-6 of them (DEVELOPERS.md, Half cycle and periodic state). Every method throws {@link
- * RefusedCircuit} where the line has more than two zeros a period, where the trigger device's data contradict themselves,
- * and where the circuit switches too often within a half cycle to be followed.
+ * clipramp.circuit.RefusedCircuit} where the line has more than two zeros a period, where the trigger device's data
+ * contradict themselves, and where the circuit switches too often within a half cycle to be followed.
  */
 public final class Firing {
     private Firing() {}

@@ -46,35 +46,4 @@ public final class GatePower {
         return OptionalDouble.of(Math.min(
                 peak, Math.max(peak * length / widthSeconds, limits.meanWatts().orElse(0))));
     }
-
-    /**
-     * Where a straight load line gives a gate a power: i with (E - R i) i = P. A gate between the two currents may be
-     * given more than P.
-     *
-     * @param openVolts E, open-circuit voltage of the drive, V, above 0
-     * @param ohms R, its resistance, ohm, above 0
-     * @param watts P, gate power, W, 0 or more
-     * @return smaller and larger current, A; empty where the drive never gives as much
-     */
-    public static double[] currentsAtPower(double openVolts, double ohms, double watts) {
-        double discriminant = openVolts * openVolts - 4 * ohms * watts;
-        if (discriminant < 0) {
-            return new double[0];
-        }
-        double larger = (openVolts + Math.sqrt(discriminant)) / (2 * ohms);
-        return new double[] {watts / (ohms * larger), larger};
-    }
-
-    /**
-     * Current at which a gate v = knee + slope i takes a power: what a series resistor must hold it to; the root of
-     * slope i² + knee i = P.
-     *
-     * @param kneeVolts V, 0 or more
-     * @param slopeOhms ohm, 0 or more
-     * @param watts gate power, W, above 0
-     * @return A
-     */
-    public static double ampsAtPower(double kneeVolts, double slopeOhms, double watts) {
-        return 2 * watts / (kneeVolts + Math.sqrt(kneeVolts * kneeVolts + 4 * slopeOhms * watts));
-    }
 }

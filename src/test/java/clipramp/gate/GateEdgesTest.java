@@ -77,12 +77,6 @@ class GateEdgesTest {
     }
 
     @Test
-    void aMatchedDriveGivesItsMostPowerAtOneCurrent() {
-        // Maximum power transfer: E²/(4 R) into a load equal to the source, at E/(2 R).
-        assertThat(GatePower.currentsAtPower(4, 1, 4)).containsExactly(2, 2);
-    }
-
-    @Test
     void theEquivalentWidthOfAPulseTimesItsPeakPowerIsItsEnergy() {
         Pulse pulse = Firing.solve(SampleDesigns.heater(), NOMINAL, 20_000)
                 .shown()

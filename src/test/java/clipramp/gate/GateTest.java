@@ -23,24 +23,6 @@ class GateTest {
     private static final Condition NOMINAL = new Condition(230, 50, 25);
 
     @Test
-    void bimbhraExample4Point4WhereALoadLineGivesTheGateItsPower() {
-        // Bimbhra, Power Electronics, example 4.4: 15 V, load line of 120 V/A, 0.4 W.
-        double[] amps = GatePower.currentsAtPower(15, 120, 0.4);
-        assertThat(amps[0]).isCloseTo(38.56e-3, within(5e-6));
-        assertThat(15 - 120 * amps[0]).isCloseTo(10.37, within(5e-3));
-        assertThat(amps[1]).isCloseTo(86.44e-3, within(5e-6));
-        assertThat(15 - 120 * amps[1]).isCloseTo(4.628, within(2e-3));
-        assertThat(GatePower.currentsAtPower(15, 120, 0.5)).isEmpty();
-    }
-
-    @Test
-    void bimbhraExample4Point5SeriesResistance() {
-        // Bimbhra, Power Electronics, example 4.5: v = 1 + 10 i, 5 W peak, 15 V.
-        double amps = GatePower.ampsAtPower(1, 10, 5);
-        assertThat((15 - (1 + 10 * amps)) / amps).isCloseTo(11.248, within(1e-3));
-    }
-
-    @Test
     void peakPowerBeyondItsPulseLengthIsThatOfEqualEnergyAndNeverUnderTheMean() {
         GateLimits limits = SampleDesigns.scr16Amps().gate().limits();
         assertThat(GatePower.allowedPeakWatts(limits, 0.5e-6)).hasValue(20);
