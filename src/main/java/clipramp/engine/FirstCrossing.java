@@ -19,11 +19,15 @@ final class FirstCrossing {
     private FirstCrossing() {}
 
     /**
+     * When a form first rises to zero, to rounding.
+     *
      * @param piece the piece; it is left looked at somewhere before the limit
      * @param form what must rise to zero
-     * @param from start of the search, s
-     * @param limit end of the search, s
-     * @return time in s, or POSITIVE_INFINITY for none before the limit
+     * @param from start of the search, s since the line zero
+     * @param limit end of the search, s since the line zero
+     * @return s since the line zero; {@code from} itself where the form is past zero there; POSITIVE_INFINITY for none before
+     *     the limit
+     * @throws ArithmeticException where the steps come to no end
      */
     static double after(Piece piece, Affine form, double from, double limit) {
         lookAt(piece, from);

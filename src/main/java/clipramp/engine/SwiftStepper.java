@@ -7,6 +7,9 @@ package clipramp.engine;
  * with a second-order term ({@link SwiftPiece}), and then proven: every form that may end the piece is bounded over all of
  * it ({@link SwiftProof}). Where the proof fails, or the device is stalled, {@link Stepper} does the piece. Longer
  * than most files: events, their settling and the way to the careful stepper and back all turn over the same state.
+ *
+ * <p>Events are {@link Stepper}'s to within 1e-14 s where the steps are its own (DEVELOPERS.md, Many units at once). Times are
+ * seconds since the line zero that begins the half cycle, voltages against the firing common. Not for two threads at once.
  */
 public final class SwiftStepper {
     private static final int MOST_TARGETS = 6;
@@ -48,6 +51,7 @@ public final class SwiftStepper {
     private long carefulPieces;
     private long pieces;
 
+    /** A stepper for a network that may be filled anew, and must be taken up by {@link #take} then. */
     public SwiftStepper(Network network) {
         n = network;
         laws = new SwiftLaws(network);
@@ -57,7 +61,12 @@ public final class SwiftStepper {
         careful = new Stepper(network);
     }
 
-    /** Takes up a network whose numbers have changed, or another supply: a pure sine from its zero on. */
+    /**
+     * Takes up a network whose numbers have changed, or another supply.
+     *
+     * @param source a pure sine from its zero on; it must stay as it is until another is taken up
+     * @throws IllegalArgumentException for another source, or a network with a pulse transformer
+     */
     public void take(SourceWave source) {
         if (source.count != 1 || source.phases[0] != 0 || n.transformerCoupled) {
             throw new IllegalArgumentException("the swift stepper is for a sinusoidal supply and direct coupling");
@@ -72,6 +81,8 @@ public final class SwiftStepper {
     /**
      * Begins a half cycle.
      *
+     * @param startMode what the device does
+     * @param startRampVolts V_C, V
      * @param rough whether instants good to 1e-8 s will do
      * @param proven whether the pieces are known to be those of a half cycle before, or a look at their ends will do
      */
@@ -390,12 +401,12 @@ public final class SwiftStepper {
         return rampVolts;
     }
 
-    /** How the ramp voltage now moves with the one at the start; NaN where that was not followed. */
+    /** How the ramp voltage now moves with the one at the start, V/V; NaN where that was not followed. */
     public double kept() {
         return kept;
     }
 
-    /** How the instant of the last firing moves with the ramp voltage at the start, s/V. */
+    /** How the instant of the last firing moves with the ramp voltage at the start, s/V; NaN where that was not followed. */
     public double firingShift() {
         return firingShift;
     }

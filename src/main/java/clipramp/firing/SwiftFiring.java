@@ -88,12 +88,20 @@ public final class SwiftFiring {
     private Mode residualMode = Mode.OFF;
     private long halves;
 
+    /** For a network that is filled anew, and derived, before each {@link #solve}. */
     public SwiftFiring(Network network) {
         n = network;
         stepper = new SwiftStepper(network);
     }
 
-    /** Sets the load's current with the thyristor on: i = (crest |sin| - drop)/loop, in the positive half or in both. */
+    /**
+     * Sets the load's current with the thyristor on: i = (crest |sin| - drop)/loop.
+     *
+     * @param lineCrestVolts crest of the line that feeds the load, V
+     * @param dropVolts fixed drops in its path, V
+     * @param loopOhms everything resistive in its path, ohm, above 0
+     * @param inBothHalves whether both half cycles are used, or the positive one only
+     */
     public void load(double lineCrestVolts, double dropVolts, double loopOhms, boolean inBothHalves) {
         crestVolts = lineCrestVolts;
         loadDropVolts = dropVolts;
@@ -392,12 +400,17 @@ public final class SwiftFiring {
         return shown;
     }
 
-    /** Firing angle in one of them, the positive one first, rad; NaN if the thyristor stays off. */
+    /**
+     * Firing angle in one of the half cycles that differ.
+     *
+     * @param half 0 to {@link #shown} less 1, the positive one first
+     * @return rad from that half cycle's zero; NaN if the thyristor stays off
+     */
     public double firingRad(int half) {
         return omega * fired[half];
     }
 
-    /** In one word. */
+    /** What it comes to, in one word, as {@link Solution#state} has it. */
     public FiringState state() {
         if (begun == 0) {
             return FiringState.SILENT;
@@ -414,7 +427,7 @@ public final class SwiftFiring {
         return endPulse ? FiringState.END_PULSE : FiringState.FIRES;
     }
 
-    /** Ramp voltage at the line zero, V. */
+    /** Ramp voltage at the line zero, V to common. */
     public double residualVolts() {
         return residualVolts;
     }
