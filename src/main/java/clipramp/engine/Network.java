@@ -180,6 +180,11 @@ public final class Network {
         return (from + reverseVolts) * Math.exp(-seconds / (rampOhms * capacitorFarads)) - reverseVolts;
     }
 
+    /** Gate voltage per volt of supply with the device off and the gate junction blocking, with direct coupling. */
+    public double standingGateShare() {
+        return quiescentShare * (1 - gateSeriesOhms * gateOffSiemens);
+    }
+
     /** What base bar or divider draws from the supply with the device off, S. */
     public double standingSiemens() {
         return standingSiemens;

@@ -22,15 +22,6 @@ final class StandingGate {
                 design.gate().coupling() == Coupling.DIRECT && design.trigger() instanceof Trigger.UnijunctionTrigger;
     }
 
-    /** Open-circuit gate voltage per volt of supply, no junction. */
-    private double share() {
-        double bar = network.baseTwoOhms + network.interbaseOhms;
-        double lead = network.gateSeriesOhms + 1 / network.gateShuntSiemens;
-        double baseOne = 1 / (1 / network.baseOneOhms + (Double.isInfinite(lead) ? 0 : 1 / lead));
-        double divided = Double.isInfinite(lead) ? 1 : 1 / network.gateShuntSiemens / lead;
-        return baseOne / (baseOne + bar) * divided;
-    }
-
     /** Resistance that the junction sees, ohm. */
     private double sourceOhms() {
         double bar = network.baseTwoOhms + network.interbaseOhms;
@@ -43,7 +34,7 @@ final class StandingGate {
         if (!present) {
             return 0;
         }
-        double open = share() * supplyVolts;
+        double open = network.standingGateShare() * supplyVolts;
         double knee = network.gateKneeVolts;
         return open <= knee ? open : knee + network.gateSlopeOhms * amps(supplyVolts);
     }
@@ -51,7 +42,8 @@ final class StandingGate {
     /** Gate current between pulses with a supply of so many volts, A. */
     double amps(double supplyVolts) {
         return present
-                ? Math.max(0, share() * supplyVolts - network.gateKneeVolts) / (sourceOhms() + network.gateSlopeOhms)
+                ? Math.max(0, network.standingGateShare() * supplyVolts - network.gateKneeVolts)
+                        / (sourceOhms() + network.gateSlopeOhms)
                 : 0;
     }
 

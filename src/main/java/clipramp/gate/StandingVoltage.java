@@ -1,12 +1,13 @@
 package clipramp.gate;
 
+import clipramp.circuit.Characteristic;
 import clipramp.circuit.Condition;
 import clipramp.circuit.Design;
 import clipramp.circuit.GateDrive.Coupling;
-import clipramp.circuit.Part;
 import clipramp.circuit.Trigger;
-import clipramp.circuit.Unijunction;
-import clipramp.circuit.Zener;
+import clipramp.engine.ClippedSupply;
+import clipramp.engine.Network;
+import clipramp.engine.UnitValues;
 
 /**
  * The gate's voltage between pulses at its highest: smallest R_BB of the type, highest zener of the type, crest of the
@@ -19,44 +20,32 @@ import clipramp.circuit.Zener;
  * @param baseOneOhms R1p, ohm; NaN likewise
  */
 public record StandingVoltage(double volts, double supplyVolts, double interbaseOhms, double baseOneOhms) {
-    private static final double SHEET_CELSIUS = 25;
-
     /** No base bar's current reaches the gate: a transformer, or a programmable device, whose cathode is off. */
     private static final StandingVoltage NONE = new StandingVoltage(0, Double.NaN, Double.NaN, Double.NaN);
 
-    /** The highest standing gate voltage of a design at a condition. */
+    /**
+     * The highest standing gate voltage of a design at a condition.
+     *
+     * @throws clipramp.circuit.RefusedCircuit where the device's data contradict themselves
+     */
     public static StandingVoltage of(Design design, Condition condition) {
         if (design.gate().coupling() == Coupling.TRANSFORMER
                 || !(design.trigger() instanceof Trigger.UnijunctionTrigger trigger)) {
             return NONE;
         }
-        double warmth = condition.celsius() - SHEET_CELSIUS;
-        Unijunction device = trigger.device();
-        double interbase = device.interbaseOhms().lowest()
-                * (1 + device.interbaseDriftPerKelvin().nominal() * warmth);
-        double shunt = design.gate().shunt().map(Part::value).orElse(Double.POSITIVE_INFINITY);
-        double series = design.gate().series().value();
-        double base = 1 / (1 / trigger.baseOne().value() + 1 / (series + shunt));
-        double bar = trigger.baseTwo().value() + interbase + base;
-        double supply = crestSupply(design, condition, 1 / bar);
-        double divided = Double.isInfinite(shunt) ? 1 : shunt / (series + shunt);
-        return new StandingVoltage(supply * base / bar * divided, supply, interbase, base);
-    }
-
-    private static double crestSupply(Design design, Condition condition, double loadSiemens) {
-        double ratio = design.clip().winding().map(w -> w.ratio()).orElse(1.0);
-        double crest = design.line().crestVolts(condition.lineVolts());
-        double source = crest * ratio
-                - design.clip().rectifier().diodesInPath() * design.clip().diodeDropVolts();
-        Zener zener = design.clip().zener();
-        double warmth = condition.celsius() - SHEET_CELSIUS;
-        double knee = zener.volts().highest() * (1 + zener.driftPerKelvin() * warmth)
-                - zener.slopeOhms() * zener.testCurrentAmps();
-        double dropperSiemens = 1 / design.clip().dropper().value();
-        double unclipped = source * dropperSiemens / (dropperSiemens + loadSiemens);
-        double zenerSiemens = 1 / zener.slopeOhms();
-        double clipped =
-                (source * dropperSiemens + knee * zenerSiemens) / (dropperSiemens + zenerSiemens + loadSiemens);
-        return Math.max(0, unclipped > knee ? clipped : unclipped);
+        UnitValues highest = UnitValues.nominal(design).at(condition);
+        highest.zenerVolts = design.clip().zener().volts().highest();
+        Network network = new Network();
+        // What the ramp draws from the supply would lower it a little: left out, on the safe side.
+        highest.fill(network, Double.POSITIVE_INFINITY);
+        Characteristic interbase = trigger.device().interbaseOhms();
+        network.interbaseOhms *= interbase.lowest() / interbase.nominal();
+        network.derive();
+        double supply = ClippedSupply.crestVolts(design, condition, network);
+        return new StandingVoltage(
+                network.standingGateShare() * supply,
+                supply,
+                network.interbaseOhms,
+                network.quiescentShare() / network.standingSiemens());
     }
 }

@@ -2,6 +2,7 @@ package clipramp.margins;
 
 import clipramp.circuit.Condition;
 import clipramp.circuit.Design;
+import clipramp.engine.ClippedSupply;
 import clipramp.engine.Network;
 import clipramp.engine.NetworkOfDesign;
 import clipramp.firing.HalfCycle;

@@ -14,6 +14,7 @@ import clipramp.circuit.Surroundings;
 import clipramp.circuit.Trigger.ProgrammableTrigger;
 import clipramp.circuit.Trigger.UnijunctionTrigger;
 import clipramp.circuit.Winding;
+import clipramp.engine.ClippedSupply;
 import clipramp.engine.Network;
 import clipramp.engine.NetworkOfDesign;
 import clipramp.margins.Margin.Sense;

@@ -1,20 +1,23 @@
-package clipramp.margins;
+package clipramp.engine;
 
 import clipramp.circuit.Condition;
 import clipramp.circuit.Design;
-import clipramp.engine.Network;
+import clipramp.circuit.Winding;
 
 /** The clipped supply at the line's crest, the ramp held at the peak point (DEVELOPERS.md, The clipped supply). */
-final class ClippedSupply {
+public final class ClippedSupply {
     private ClippedSupply() {}
 
     /**
-     * V_S at the crest, V: (e - V_S)/R_D = i_Z + V_S/R_bar + (V_S - V_P)/R_E.
+     * V_S at the crest, from (e - V_S)/R_D = i_Z + V_S/R_bar + (V_S - V_P)/R_E with e the crest behind winding and rectifier.
      *
-     * @param network the design's network at the condition
+     * @param design line and supply
+     * @param condition line voltage
+     * @param network the firing circuit there, derived; with an infinite R_E nothing flows into the ramp
+     * @return V to the firing common, 0 or more
      */
-    static double crestVolts(Design design, Condition condition, Network network) {
-        double ratio = design.clip().winding().map(w -> w.ratio()).orElse(1.0);
+    public static double crestVolts(Design design, Condition condition, Network network) {
+        double ratio = design.clip().winding().map(Winding::ratio).orElse(1.0);
         double source = design.line().crestVolts(condition.lineVolts()) * ratio
                 - design.clip().rectifier().diodesInPath() * design.clip().diodeDropVolts();
         double dropper = 1 / network.dropperOhms;
