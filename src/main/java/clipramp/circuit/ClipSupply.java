@@ -68,6 +68,26 @@ public record ClipSupply(
         }
     }
 
+    /** What all rectifier diodes take that the supply's current passes: n V_F, V. */
+    public double rectifierVolts() {
+        return rectifier.diodesInPath() * diodeDropVolts;
+    }
+
+    /** Secondary over primary voltage of the winding; 1 without one. */
+    public double windingRatio() {
+        return winding.map(Winding::ratio).orElse(1.0);
+    }
+
+    /** Angle by which the supply lags the load's line, rad; 0 without a winding. */
+    public double lagRad() {
+        return winding.map(Winding::lagRad).orElse(0.0);
+    }
+
+    /** Whether a winding turns the supply over against the load's line. */
+    public boolean isTurnedOver() {
+        return winding.map(Winding::opposite).orElse(false);
+    }
+
     /** Whether the firing circuit is separated from the line by a winding. */
     public boolean isIsolated() {
         return winding.isPresent();

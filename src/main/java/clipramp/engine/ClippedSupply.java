@@ -2,7 +2,6 @@ package clipramp.engine;
 
 import clipramp.circuit.Condition;
 import clipramp.circuit.Design;
-import clipramp.circuit.Winding;
 
 /** The clipped supply at the line's crest, the ramp held at the peak point (DEVELOPERS.md, The clipped supply). */
 public final class ClippedSupply {
@@ -17,9 +16,9 @@ public final class ClippedSupply {
      * @return V to the firing common, 0 or more
      */
     public static double crestVolts(Design design, Condition condition, Network network) {
-        double ratio = design.clip().winding().map(Winding::ratio).orElse(1.0);
-        double source = design.line().crestVolts(condition.lineVolts()) * ratio
-                - design.clip().rectifier().diodesInPath() * design.clip().diodeDropVolts();
+        double source =
+                design.line().crestVolts(condition.lineVolts()) * design.clip().windingRatio()
+                        - design.clip().rectifierVolts();
         double dropper = 1 / network.dropperOhms;
         double ramp = (1 - network.peakShare()) / network.rampOhms;
         double load = network.standingSiemens() + Math.max(0, ramp);

@@ -28,7 +28,7 @@ final class ReverseHalf {
     /** Dropper and zener with their second half cycle. */
     static Dissipation borne(Design design, Condition condition, Network network, Dissipation forward) {
         LineWave line = new LineWave(design.line(), condition);
-        double ratio = design.clip().winding().map(w -> w.ratio()).orElse(1.0);
+        double ratio = design.clip().windingRatio();
         double square = 0;
         double mean = 0;
         double peak = 0;

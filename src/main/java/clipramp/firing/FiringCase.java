@@ -55,7 +55,7 @@ record FiringCase(
         ClipSupply clip = design.clip();
         boolean stageBridge = clip.rectifier() == ClipSupply.Rectifier.BRIDGE
                 && (design.stage() == Stage.BRIDGE_DC || design.stage() == Stage.BRIDGE_AC);
-        double ownDrops = stageBridge ? 0 : clip.rectifier().diodesInPath() * clip.diodeDropVolts();
+        double ownDrops = stageBridge ? 0 : clip.rectifierVolts();
         return Math.max(0, design.thyristor().device().onState().thresholdVolts() - ownDrops);
     }
 

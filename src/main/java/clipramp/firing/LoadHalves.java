@@ -12,7 +12,7 @@ final class LoadHalves {
     private LoadHalves() {}
 
     static List<HalfCycle> fromSupplyHalves(FiringCase firing, List<HalfCycle> halves) {
-        double lag = firing.design().clip().winding().map(w -> w.lagRad()).orElse(0.0);
+        double lag = firing.design().clip().lagRad();
         if (lag == 0 || firing.timing().isWholePeriods()) {
             return halves;
         }

@@ -24,10 +24,10 @@ final class SupplyTiming {
 
     static SupplyTiming of(Design design, LineWave line) {
         ClipSupply clip = design.clip();
-        double ratio = clip.winding().map(w -> w.ratio()).orElse(1.0);
-        double lag = clip.winding().map(w -> w.lagRad()).orElse(0.0);
-        boolean opposite = clip.winding().map(w -> w.opposite()).orElse(false);
-        double drop = clip.rectifier().diodesInPath() * clip.diodeDropVolts();
+        double ratio = clip.windingRatio();
+        double lag = clip.lagRad();
+        boolean opposite = clip.isTurnedOver();
+        double drop = clip.rectifierVolts();
         double[] zeros = {line.positiveStartRad(), line.negativeStartRad()};
         double firstLength = (zeros[1] - zeros[0]) / line.omega();
         double period = 2 * Math.PI / line.omega();

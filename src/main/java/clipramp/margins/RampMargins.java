@@ -35,7 +35,9 @@ final class RampMargins {
         margins.add(peakPointCurrent());
         margins.add(latchedOn());
         margins.add(endPulse());
-        design.clip().winding().filter(w -> w.lagRad() != 0).ifPresent(w -> margins.add(fullPowerPulse()));
+        if (design.clip().lagRad() != 0) {
+            margins.add(fullPowerPulse());
+        }
         margins.add(silent());
         return margins;
     }
@@ -210,7 +212,7 @@ final class RampMargins {
                     spills,
                     kind.sense(),
                     spills + " of " + settings.size() + " settings fire the next half cycle at once; the winding lags "
-                            + Say.angle(design.clip().winding().orElseThrow().lagRad())));
+                            + Say.angle(design.clip().lagRad())));
         }
         return Finding.worst(kind, findings);
     }

@@ -1,7 +1,6 @@
 package clipramp.power;
 
 import clipramp.circuit.Design;
-import clipramp.circuit.Winding;
 import clipramp.firing.HalfCycle;
 import clipramp.firing.Pulse;
 import clipramp.firing.Solution;
@@ -43,8 +42,8 @@ public final class ActingPulses {
 
     /** How often a pulse was folded back by a half cycle; the rough angle of its making tells. */
     private static long folds(Design design, Solution solution, Pulse pulse) {
-        double lagRad = design.clip().winding().map(Winding::lagRad).orElse(0.0);
-        double roughRad = solution.condition().omega() * pulse.startSeconds() + lagRad;
+        double roughRad = solution.condition().omega() * pulse.startSeconds()
+                + design.clip().lagRad();
         return Math.round((roughRad - pulse.startRad()) / Math.PI);
     }
 

@@ -5,7 +5,7 @@ import clipramp.circuit.Design;
 import clipramp.circuit.GateDrive;
 import clipramp.circuit.Load;
 import clipramp.circuit.Stage;
-import clipramp.circuit.Winding;
+import clipramp.engine.LoadCurrent;
 import clipramp.engine.Network;
 import clipramp.engine.SourceWave;
 import clipramp.engine.UnitValues;
@@ -45,14 +45,12 @@ public final class SwiftPoint {
         ClipSupply clip = design.clip();
         bothHalves = design.stage().isFullWave();
         halvesASupplyCycle = clip.rectifier() == ClipSupply.Rectifier.BRIDGE ? 1 : 2;
-        windingRatio = clip.winding().map(Winding::ratio).orElse(1.0);
-        supplyDropVolts = clip.rectifier().diodesInPath() * clip.diodeDropVolts();
-        var onState = design.thyristor().device().onState();
-        int diodes = design.stage().bridgeDiodes();
-        loadDropVolts = onState.thresholdVolts() + diodes * design.stageDiodes().dropVolts();
+        windingRatio = clip.windingRatio();
+        supplyDropVolts = clip.rectifierVolts();
+        LoadCurrent path = new LoadCurrent(design, design.nominalCondition());
+        loadDropVolts = path.dropVolts();
         loadOhms = design.load().resistanceOhms();
-        pathOhms =
-                loadOhms + onState.slopeOhms() + diodes * design.stageDiodes().slopeOhms();
+        pathOhms = path.loopOhms();
     }
 
     /**
@@ -61,13 +59,11 @@ public final class SwiftPoint {
      */
     public static boolean suits(Design design) {
         ClipSupply clip = design.clip();
-        boolean inTime = clip.winding().map(w -> w.lagRad() == 0).orElse(true);
-        boolean turnedOver = clip.winding().map(Winding::opposite).orElse(false);
-        boolean fedWithTheLoad =
-                clip.rectifier() == ClipSupply.Rectifier.BRIDGE || (design.stage() == Stage.HALF_WAVE && !turnedOver);
+        boolean fedWithTheLoad = clip.rectifier() == ClipSupply.Rectifier.BRIDGE
+                || (design.stage() == Stage.HALF_WAVE && !clip.isTurnedOver());
         return design.line().harmonics().isEmpty()
                 && clip.tap() == ClipSupply.Tap.LINE
-                && inTime
+                && clip.lagRad() == 0
                 && fedWithTheLoad
                 && design.gate().coupling() == GateDrive.Coupling.DIRECT
                 && design.load() instanceof Load.Resistor;

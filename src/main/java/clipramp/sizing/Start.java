@@ -11,7 +11,6 @@ import clipramp.circuit.ThyristorDevice;
 import clipramp.circuit.Tolerance;
 import clipramp.circuit.Trigger.UnijunctionTrigger;
 import clipramp.circuit.Unijunction;
-import clipramp.circuit.Winding;
 import clipramp.circuit.Zener;
 import clipramp.firing.PublishedRelations;
 import clipramp.power.LoadPower;
@@ -168,7 +167,7 @@ final class Start {
 
     /** Crest of the low line as the supply sees it, V. */
     static double crestVolts(Design design) {
-        double ratio = design.clip().winding().map(Winding::ratio).orElse(1.0);
+        double ratio = design.clip().windingRatio();
         return design.line().crestVolts(design.line().lowVolts()) * ratio;
     }
 
@@ -190,7 +189,7 @@ final class Start {
 
     /** (crest of the low line - zener - rectifier)/crest current, ohm. */
     static double dropperOhms(Design design) {
-        double drops = design.clip().rectifier().diodesInPath() * design.clip().diodeDropVolts();
+        double drops = design.clip().rectifierVolts();
         double over = crestVolts(design) - design.clip().zener().volts().nominal() - drops;
         return over / (design.clip().isIsolated() ? WINDING_CREST_AMPS : CREST_AMPS);
     }
