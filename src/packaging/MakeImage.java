@@ -226,6 +226,7 @@ public final class MakeImage {
         Path share = image().resolve("share");
         say(share.resolve("man/man1/clipramp.1"), "manual");
         say(share.resolve("bash-completion/completions/clipramp"), "completion", "bash");
+        say(share.resolve("zsh/vendor-completions/_clipramp"), "completion", "zsh");
         say(share.resolve("doc/clipramp/third-party.txt"), "explain", "licences");
         for (String id : List.of("Apache-2.0", "LGPL-2.1", "MPL-2.0", "BSD-3-Clause", "GPL-2.0-CE", "DejaVu", "notices")) {
             say(share.resolve("doc/clipramp/licences/" + id + ".txt"), "explain", id);

@@ -15,27 +15,36 @@ import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Model.OptionSpec;
 
 /**
- * The shell's completion, written from the commands' own options: one bash function, which zsh runs through its
- * bashcompinit. The command-line library's generator completes neither what stands behind an equals sign nor file names.
+ * The shell's completion, written from the commands' own options: what fits stands in one function, which bash and zsh each
+ * ask in their own way. The command-line library's generator completes neither what stands behind an equals sign nor file
+ * names, and zsh's emulation of bash puts a blank behind an equals sign.
  */
 final class Completion {
-    private static final String SCRIPT = """
-            # Completion of clipramp for bash, and for zsh after: autoload -U compinit bashcompinit; compinit; bashcompinit
-            _clipramp() {
-              local line=${COMP_LINE:0:$COMP_POINT}
-              local current=${line##* } place= offered= files=
-              local value=$current
-              case "$current" in
-                --*=*) place=${current%%=*}=; value=${current#*=} ;;
+    private static final String OFFERS = """
+            # What fits: $1 the command, empty in its own place; $2 the word so far. Sets place, value, and offered or files.
+            _clipramp_offers() {
+              place= value=$2 offered= files=
+              case "$2" in
+                --*=*) place=${2%%=*}=; value=${2#*=} ;;
                 -*) place=- ;;
               esac
-              [ "$COMP_CWORD" -gt 1 ] && place="${COMP_WORDS[1]} $place" || place=
+              if [ -n "$1" ]; then place="$1 $place"; else place=; fi
               case "$place" in
             @CASES@
               esac
+            }
+            """;
+
+    private static final String BASH = """
+            # Completion of clipramp for bash.
+            @OFFERS@
+            _clipramp() {
+              local line=${COMP_LINE:0:$COMP_POINT} command= place value offered files
+              [ "$COMP_CWORD" -gt 1 ] && command=${COMP_WORDS[1]}
+              _clipramp_offers "$command" "${line##* }"
               COMPREPLY=()
               if [ -n "$files" ]; then
-                local IFS=$'\\n'
+                local IFS=$'\n'
                 COMPREPLY=($(compgen -f -- "$value"))
                 compopt -o filenames
               else
@@ -43,32 +52,53 @@ final class Completion {
                 # What ends in = goes on with its value.
                 case "${COMPREPLY[0]}" in *=) compopt -o nospace ;; esac
               fi
-              # bash replaces only what follows the first =; zsh, which parts no words there, all of it.
+              # bash replaces only what follows the first =, unless it is told not to part words there.
               case "$COMP_WORDBREAKS" in *=*) return 0 ;; esac
               case "$place" in *=) COMPREPLY=("${COMPREPLY[@]/#/${place##* }}") ;; esac
             } 2>/dev/null
             complete -F _clipramp clipramp
             """;
 
+    private static final String ZSH = """
+            #compdef clipramp
+            # Completion of clipramp for zsh: sourced, or as _clipramp in a folder of fpath.
+            @OFFERS@
+            _clipramp() {
+              local command= place value offered files word
+              (( CURRENT > 2 )) && command=$words[2]
+              _clipramp_offers "$command" "$PREFIX"
+              [[ $place = *= ]] && compset -P '*='
+              if [[ -n $files ]]; then
+                _files
+                return
+              fi
+              for word in ${=offered}; do
+                # What ends in = goes on with its value.
+                if [[ $word = *= ]]; then compadd -S '' -- $word; else compadd -- $word; fi
+              done
+            }
+            if [[ $funcstack[1] = _clipramp ]]; then
+              _clipramp "$@"
+            else
+              (( $+functions[compdef] )) || { autoload -Uz compinit; compinit }
+              compdef _clipramp clipramp
+            fi
+            """;
+
     private static final List<String> FILE_LABELS = List.of("FILE", "OUT", "OUT.svg", "OUT.pdf", "READINGS.csv");
 
     private Completion() {}
 
-    /** The script for a program with its commands. */
-    static String script(CommandLine root) {
+    /** The script for one of {@link CompletionCommand#SHELLS}, for a program with its commands. */
+    static String script(CommandLine root, String shell) {
         Map<String, List<String>> words = words();
-        String commands = String.join(" ", root.getSubcommands().keySet()) + " help --help --version";
+        String commands = String.join(" ", root.getSubcommands().keySet());
+        Stream<String> first = Stream.of(line("", commands + " help --help --version"), line("help ", commands));
         Stream<String> cases = root.getSubcommands().entrySet().stream()
                 .flatMap(command -> cases(command.getKey(), command.getValue().getCommandSpec(), words));
-        String all = Stream.concat(
-                        Stream.of(
-                                line("", commands),
-                                line(
-                                        "help ",
-                                        String.join(" ", root.getSubcommands().keySet()))),
-                        cases)
-                .collect(Collectors.joining("\n"));
-        return SCRIPT.replace("@CASES@", all);
+        String all = Stream.concat(first, cases).collect(Collectors.joining("\n"));
+        String offers = OFFERS.replace("@CASES@", all).stripTrailing();
+        return (shell.equals("zsh") ? ZSH : BASH).replace("@OFFERS@", offers);
     }
 
     /** What each place of a command takes: its options, each option's value, what stands free. */

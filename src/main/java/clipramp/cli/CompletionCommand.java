@@ -13,8 +13,7 @@ import picocli.CommandLine.Parameters;
         sortSynopsis = false,
         description = {
             "Prints what a shell needs to complete commands, options, examples, profiles and keys.",
-            "Into .bashrc: source <(clipramp completion bash). Into .zshrc:",
-            "autoload -U compinit bashcompinit; compinit; bashcompinit; source <(clipramp completion zsh)"
+            "Into .bashrc: source <(clipramp completion bash). Into .zshrc: source <(clipramp completion zsh)."
         })
 final class CompletionCommand implements Callable<Integer> {
     static final List<String> SHELLS = List.of("bash", "zsh");
@@ -34,8 +33,7 @@ final class CompletionCommand implements Callable<Integer> {
     @Override
     public Integer call() {
         Problems.word("SHELL", shell, SHELLS);
-        // One script serves both.
-        session.out().exactly(Completion.script(CommandTree.of(session)));
+        session.out().exactly(Completion.script(CommandTree.of(session), shell));
         return ExitCode.ANSWERED;
     }
 }

@@ -14,9 +14,13 @@ import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
 
-/** The shell's completion, asked as the shell asks it; bash(1), Programmable Completion, names the variables. */
+/**
+ * The shell's completion, asked as the shell asks it; bash(1), Programmable Completion, and zshcompwid(1), Completion
+ * Special Parameters, name the variables.
+ */
 class CompletionTest {
     private static final Path BASH = Path.of("/bin/bash");
+    private static final Path ZSH = Path.of("/usr/bin/zsh");
 
     @TempDir
     private Path folder;
@@ -55,6 +59,25 @@ class CompletionTest {
         assertThat(run.err()).contains("\"fish\" is not what SHELL takes");
     }
 
+    /** zsh itself keeps what the word so far begins; here its builtins only say what they were given. */
+    @ParameterizedTest
+    @CsvSource({
+        "clipramp, ma, map",
+        "clipramp map, --for, --for-angle=",
+        "clipramp new, --from=ta, tasting-lamps",
+        "clipramp check, exa, files",
+        "clipramp record x.yaml, --out=m, files"
+    })
+    void zshIsOfferedTheSame(String before, String word, String offered) throws IOException, InterruptedException {
+        assumeTrue(Files.isExecutable(ZSH), "no zsh here");
+        String builtins = "compdef() { }; compset() { }; _files() { print files }; compadd() { print -r -- ${@[$#]} }\n";
+        String typed = "words=(" + before + " " + word + "); CURRENT=$#words; PREFIX=" + word + "; _clipramp\n";
+        Path script = folder.resolve("ask");
+        Files.writeString(script, builtins + CliRun.of("completion", "zsh").out() + typed, StandardCharsets.UTF_8);
+
+        assertThat(said(ZSH.toString(), "-f", script.toString())).contains(offered);
+    }
+
     private List<String> asked(String typed) throws IOException, InterruptedException {
         Path script = folder.resolve("ask");
         // bash breaks words at blanks and at =, which stands as a word of its own.
@@ -65,11 +88,13 @@ class CompletionTest {
                         + ")\nCOMP_CWORD=$((${#COMP_WORDS[@]}-1))\n" + "COMP_LINE='" + typed
                         + "'\nCOMP_POINT=${#COMP_LINE}\n_clipramp\nprintf '%s\\n' \"${COMPREPLY[@]}\"\n",
                 StandardCharsets.UTF_8);
-        Process bash = new ProcessBuilder(BASH.toString(), "--norc", script.toString())
-                .redirectErrorStream(true)
-                .start();
-        String said = new String(bash.getInputStream().readAllBytes(), StandardCharsets.UTF_8);
-        assertThat(bash.waitFor(20, TimeUnit.SECONDS)).isTrue();
+        return said(BASH.toString(), "--norc", script.toString());
+    }
+
+    private static List<String> said(String... command) throws IOException, InterruptedException {
+        Process shell = new ProcessBuilder(command).redirectErrorStream(true).start();
+        String said = new String(shell.getInputStream().readAllBytes(), StandardCharsets.UTF_8);
+        assertThat(shell.waitFor(20, TimeUnit.SECONDS)).isTrue();
         return said.lines().toList();
     }
 }
