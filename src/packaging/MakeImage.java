@@ -237,8 +237,20 @@ public final class MakeImage {
             copy(icons.resolve("icon-" + size + ".png"), share.resolve("icons/hicolor/" + size + "x" + size + "/apps/clipramp.png"));
         }
         copy(icons.resolve("icon.svg"), share.resolve("icons/hicolor/scalable/apps/clipramp.svg"));
-        copy(Path.of("CHANGES.md"), share.resolve("doc/clipramp/CHANGES.md"));
-        copy(Path.of("SAFETY.md"), share.resolve("doc/clipramp/SAFETY.md"));
+        documents(share.resolve("doc/clipramp"));
+    }
+
+    /** What the README names by its place in the sources lies beside it here too, so that its commands find it. */
+    private static void documents(Path into) throws IOException {
+        List<Path> all = new ArrayList<>();
+        for (String each : List.of("README.md", "SAFETY.md", "CHANGES.md", "DEVELOPERS.md", "LICENSE", "examples", "profiles", "src/docs")) {
+            try (Stream<Path> found = Files.walk(Path.of(each))) {
+                found.filter(Files::isRegularFile).forEach(all::add);
+            }
+        }
+        for (Path each : all) {
+            copy(each, into.resolve(each));
+        }
     }
 
     /** What the packaged program itself says; so no image is made whose program does not start. */

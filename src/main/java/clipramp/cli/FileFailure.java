@@ -1,5 +1,6 @@
 package clipramp.cli;
 
+import clipramp.files.Example;
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.AccessDeniedException;
@@ -27,7 +28,7 @@ final class FileFailure extends RuntimeException {
      * @param cause why it cannot be read
      */
     static FileFailure reading(String name, IOException cause) {
-        String suggestion = cause instanceof NoSuchFileException ? neighbours(name) : "";
+        String suggestion = cause instanceof NoSuchFileException ? example(name) + neighbours(name) : "";
         return new FileFailure(name + " cannot be read: " + reason(cause, Path.of(name)) + "." + suggestion, cause);
     }
 
@@ -75,6 +76,15 @@ final class FileFailure extends RuntimeException {
         }
         String said = cause.getMessage();
         return said == null ? cause.getClass().getSimpleName() : said;
+    }
+
+    /** An example of the program's own, asked for where the examples are not. */
+    private static String example(String name) {
+        String file = String.valueOf(Path.of(name).getFileName());
+        String id = file.endsWith(".yaml") ? file.substring(0, file.length() - ".yaml".length()) : file;
+        return Example.named(id).isEmpty()
+                ? ""
+                : " The program has that example with it: clipramp new --from=" + id + " --out=" + id + ".yaml.";
     }
 
     /** Designs in the same folder, for somebody who mistyped a name. */
