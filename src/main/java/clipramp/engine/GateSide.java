@@ -15,6 +15,13 @@ final class GateSide {
     /** Drop of a conducting SCR's own gate junction, which bleeds latching and holding current away, V. */
     private static final double BLEED_VOLTS = 0.7;
 
+    /**
+     * Slowest decay R_p/L_m of a pulse transformer, 1/s. Without any resistance a diode would reset the core along a straight
+     * line, which is no sum of exponentials. The slower, the straighter, and the more figures cancel: at this, windings
+     * without resistance agree with the integrator to 1e-7.
+     */
+    private static final double SLOWEST_RESET = 1e-5;
+
     private final ThyristorDevice thyristor;
     private final TriggerDemand[] demands;
     private final @Nullable TemperatureCurve latching;
@@ -36,7 +43,7 @@ final class GateSide {
             n.turnsRatio = pulses.ratio();
             n.secondaries = pulses.secondaries();
             n.magnetisingHenries = pulses.magnetisingHenries();
-            n.primaryOhms = pulses.primaryOhms();
+            n.primaryOhms = Math.max(pulses.primaryOhms(), SLOWEST_RESET * pulses.magnetisingHenries());
             n.secondaryOhms = pulses.secondaryOhms();
             n.clampVolts = pulses.clampDiode() ? clampVolts : Double.POSITIVE_INFINITY;
         }

@@ -262,6 +262,9 @@ final class LanesPainter {
 
     /** A lane's ordinate. */
     private record Scale(double low, double high, Rectangle2D plot, int most) {
+        /** Steps that no ordinate needs; what is no number would look for its marks for ever. */
+        private static final int MOST_STEPS = 100;
+
         double y(double value) {
             return plot.getMaxY() - (value - low) / (high - low) * plot.getHeight();
         }
@@ -270,7 +273,7 @@ final class LanesPainter {
         List<Double> marks() {
             int steps = most;
             List<Double> marks = Ticks.between(low, high, Ticks.step(high - low, steps));
-            while (marks.size() < 2) {
+            while (marks.size() < 2 && steps < MOST_STEPS) {
                 steps++;
                 marks = Ticks.between(low, high, Ticks.step(high - low, steps));
             }

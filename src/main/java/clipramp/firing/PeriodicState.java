@@ -31,6 +31,14 @@ final class PeriodicState {
             return new State(run.mode(), run.rampVolts(), run.fluxAmps(), run.conductsUntilSeconds());
         }
 
+        /** What is no number would pass for a circuit that stays off. */
+        State requireFinite() {
+            if (!Double.isFinite(rampVolts) || !Double.isFinite(fluxAmps)) {
+                throw new IllegalStateException("a half cycle ended at " + rampVolts + " V, " + fluxAmps + " A");
+            }
+            return this;
+        }
+
         boolean isSameAs(State other) {
             return mode == other.mode
                     && Math.abs(rampVolts - other.rampVolts) < SAME_VOLTS
@@ -49,7 +57,7 @@ final class PeriodicState {
         int repeats = 0;
         while (states.size() <= MOST_HALVES && repeats == 0) {
             run.skip();
-            states.add(State.of(run));
+            states.add(State.of(run).requireFinite());
             if (repeatsAfter(states, period)) {
                 settling = Solution.Settling.STEADY;
                 repeats = period;

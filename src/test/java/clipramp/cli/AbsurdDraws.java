@@ -1,13 +1,13 @@
 package clipramp.cli;
 
-import clipramp.files.DesignText;
+import clipramp.files.DesignFiles;
+import clipramp.files.InvalidInputException;
 import clipramp.files.Key;
 import clipramp.files.Key.Kind;
 import clipramp.files.KeyCatalogue;
 import clipramp.files.ProfileLibrary;
 import clipramp.files.Source;
 import java.io.IOException;
-import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
@@ -56,15 +56,11 @@ final class AbsurdDraws {
             "wanted.highest=1000 V at 100 %");
 
     private final List<String> candidates = candidates();
-    private final DesignText text;
+    private final Source example;
     private final Random random;
 
-    AbsurdDraws(Path example, long seed) {
-        try {
-            text = DesignText.of(new Source(example.toString(), Files.readString(example)));
-        } catch (IOException unreadable) {
-            throw new java.io.UncheckedIOException(unreadable);
-        }
+    AbsurdDraws(Path file, long seed) throws IOException {
+        example = Source.of(file);
         random = new Random(seed);
     }
 
@@ -75,11 +71,20 @@ final class AbsurdDraws {
         while (changes.size() < wanted) {
             List<String> more = new ArrayList<>(changes);
             more.add(candidates.get(random.nextInt(candidates.size())));
-            if (text.read(more, SHIPPED) instanceof DesignText.Reading.Good) {
+            if (isRead(more)) {
                 changes = more;
             }
         }
         return changes.stream().map(change -> "--with=" + change).toList();
+    }
+
+    private boolean isRead(List<String> changes) {
+        try {
+            DesignFiles.load(example, changes, SHIPPED);
+            return true;
+        } catch (InvalidInputException refused) {
+            return false;
+        }
     }
 
     private static List<String> candidates() {

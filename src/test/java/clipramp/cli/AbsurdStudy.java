@@ -11,8 +11,9 @@ import java.util.List;
 import java.util.Locale;
 
 /**
- * Puts absurd but legal designs through every analysis of the command line: {@code FILE DRAWS SEED}. What is our fault, what
- * prints a figure that is none, and what takes longer than {@value #LONG_SECONDS} s is printed with the changes that did it.
+ * Puts absurd but legal designs through every analysis of the command line: {@code FILE DRAWS SEED EVERY}; check judges each
+ * draw, the other commands answer every so many-th. What is our fault, what prints a figure that is none, and what takes more
+ * than {@value #LONG_SECONDS} s of processor time is printed with the changes that did it.
  */
 final class AbsurdStudy {
     private static final PrintStream OUT = new PrintStream(System.out, true, StandardCharsets.UTF_8);
@@ -47,7 +48,10 @@ final class AbsurdStudy {
                 if (i >= FIRST_DEAR && (runs[0] - refused) % rarely != 0) {
                     break;
                 }
-                List<String> words = words(COMMANDS.get(i), example, changes, record);
+                List<String> words = words(COMMANDS.get(i), example, changes);
+                if (words.get(0).equals("record")) {
+                    words.add("--out=" + record);
+                }
                 double from = processorSeconds();
                 CliRun run = CliRun.of(words.toArray(String[]::new));
                 double seconds = processorSeconds() - from;
@@ -90,13 +94,11 @@ final class AbsurdStudy {
                 * 1e-9;
     }
 
-    private static List<String> words(List<String> command, Path example, List<String> changes, Path record) {
+    /** A command line: the command on an example with its changes. */
+    static List<String> words(List<String> command, Path example, List<String> changes) {
         List<String> words = new ArrayList<>(command);
         words.add(1, example.toString());
         words.addAll(changes);
-        if (command.get(0).equals("record")) {
-            words.add("--out=" + record);
-        }
         return words;
     }
 
@@ -105,6 +107,10 @@ final class AbsurdStudy {
         String said = run.out() + run.err();
         if (run.code() > ExitCode.UNUSABLE) {
             return "exit " + run.code() + " " + run.err().replace("\n", " ");
+        }
+        int waves = said.indexOf("\"waveforms\"");
+        if (waves >= 0 && said.indexOf("null", waves) >= 0) {
+            return "no number in the waveforms";
         }
         for (String word : List.of("Exception", "NaN", "Infinity", "∞")) {
             if (said.contains(word)) {

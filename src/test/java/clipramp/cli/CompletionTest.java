@@ -70,7 +70,8 @@ class CompletionTest {
     })
     void zshIsOfferedTheSame(String before, String word, String offered) throws IOException, InterruptedException {
         assumeTrue(Files.isExecutable(ZSH), "no zsh here");
-        String builtins = "compdef() { }; compset() { }; _files() { print files }; compadd() { print -r -- ${@[$#]} }\n";
+        String builtins =
+                "compdef() { }; compset() { }; _files() { print files }; compadd() { print -r -- ${@[$#]} }\n";
         String typed = "words=(" + before + " " + word + "); CURRENT=$#words; PREFIX=" + word + "; _clipramp\n";
         Path script = folder.resolve("ask");
         Files.writeString(script, builtins + CliRun.of("completion", "zsh").out() + typed, StandardCharsets.UTF_8);

@@ -24,6 +24,8 @@ import org.junit.jupiter.api.TestReporter;
 class AgainstIntegratorTest {
     private static final int CIRCUITS = 300;
     private static final int COUPLED = 150;
+
+    private static final int IDEAL = 12;
     /** Among so many none hunts: these do. */
     private static final long[] HUNTING = {1283, 1639, 1772, 3508, 3648, 3700};
 
@@ -69,6 +71,16 @@ class AgainstIntegratorTest {
     @Test
     void programmableDevicesAndPulseTransformersAgreeToo(TestReporter reporter) {
         judge(LongStream.range(0, COUPLED).mapToObj(RandomCircuits::drawCoupled).toList(), reporter);
+    }
+
+    @Test
+    void windingsWithoutResistanceAgreeToo(TestReporter reporter) {
+        List<Drawn> ideal = LongStream.range(0, IDEAL)
+                .mapToObj(RandomCircuits::drawCoupled)
+                .filter(drawn -> drawn.design().gate().transformer().isPresent())
+                .map(RandomCircuits::withIdealWindings)
+                .toList();
+        judge(ideal, reporter);
     }
 
     private void judge(List<Drawn> circuits, TestReporter reporter) {

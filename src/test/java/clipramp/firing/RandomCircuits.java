@@ -135,6 +135,23 @@ final class RandomCircuits {
                 drawn.rampOhms());
     }
 
+    /** The same circuit with windings that have no resistance and a diode that resets the core. */
+    static Drawn withIdealWindings(Drawn drawn) {
+        GateDrive gate = drawn.design().gate();
+        PulseTransformer own = gate.transformer().orElseThrow();
+        PulseTransformer ideal = new PulseTransformer(
+                own.ratio(), own.secondaries(), own.magnetisingHenries(), 0, 0, true, OptionalDouble.empty());
+        GateDrive through = new GateDrive(
+                gate.coupling(),
+                gate.series(),
+                gate.shunt(),
+                gate.overdrive(),
+                gate.chargeSeconds(),
+                gate.polarity(),
+                Optional.of(ideal));
+        return new Drawn(drawn.seed(), drawn.design().withGate(through), drawn.condition(), drawn.rampOhms());
+    }
+
     /** Independent figures do not always make a unijunction: its saturated line must rise and end under the peak. */
     private static boolean isADevice(Drawn drawn) {
         ReferenceParameters p = new ReferenceParameters(drawn.design(), drawn.condition(), drawn.rampOhms());
