@@ -1,6 +1,8 @@
 package clipramp.engine;
 
 import clipramp.circuit.RefusedCircuit;
+import clipramp.units.QuantityText;
+import clipramp.units.Unit;
 
 /**
  * The saturated emitter line I_E = (V_EB1 - V_D - xi V_S)/r_on, drawn through data-sheet points at 25 °C.
@@ -22,8 +24,9 @@ final class EmitterLine {
         if (!(slope > 0) || Double.isInfinite(slope)) {
             throw new RefusedCircuit(
                     "trigger.device",
-                    "the saturated emitter line of " + unit.deviceId + " comes out with a slope of " + slope
-                            + " Ω; it must rise. Check saturation, valley and base-one-pulse against the data sheet.");
+                    "the saturated emitter line of " + unit.deviceId + " comes out with a slope of "
+                            + QuantityText.format(slope, Unit.OHM)
+                            + "; it must rise. Check saturation, valley and base-one-pulse against the data sheet.");
         }
         return slope;
     }

@@ -100,8 +100,10 @@ class ReadmeTest {
                 last = lines.size();
             }
         }
-        return "```\n$ " + parts[0] + "\n" + (first > 0 ? "...\n" : "")
+        String block = "```\n$ " + parts[0] + "\n" + (first > 0 ? "...\n" : "")
                 + String.join("\n", lines.subList(first, last))
                 + (last < lines.size() ? "\n..." : "") + "\n```\n";
+        // A reader's own files lie where he works.
+        return block.replace("target/", "");
     }
 }
