@@ -8,6 +8,9 @@ package clipramp.circuit;
  * @param celsius ambient temperature, °C; parts are taken to be at it
  */
 public record Condition(double lineVolts, double lineHertz, double celsius) {
+    /** Temperature that data-sheet figures hold at, and that benches are read at, °C. */
+    public static final double SHEET_CELSIUS = 25;
+
     /** @throws IllegalArgumentException outside the stated ranges */
     public Condition {
         Require.positive("line voltage", lineVolts);

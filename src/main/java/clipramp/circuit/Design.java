@@ -51,7 +51,7 @@ public record Design(
 
     /** Nominal line at 25 °C. */
     public Condition nominalCondition() {
-        return new Condition(line.volts(), line.hertz(), 25);
+        return new Condition(line.volts(), line.hertz(), Condition.SHEET_CELSIUS);
     }
 
     /** Whether the stage's own bridge feeds the firing supply too, so that there is no other rectifier. */

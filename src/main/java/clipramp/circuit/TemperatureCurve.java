@@ -43,7 +43,7 @@ public record TemperatureCurve(List<Point> points) {
 
     /** A curve of one point: a current above zero, A, at 25 °C. */
     public static TemperatureCurve at25(double amps) {
-        return new TemperatureCurve(List.of(new Point(25, amps)));
+        return new TemperatureCurve(List.of(new Point(Condition.SHEET_CELSIUS, amps)));
     }
 
     /** Current, A, at a junction temperature in °C. */

@@ -21,9 +21,6 @@ import clipramp.units.Unit;
  * #fill} again, which allocates nothing.
  */
 public final class UnitValues {
-    /** Temperature that data-sheet figures hold at, °C. */
-    private static final double SHEET_CELSIUS = 25;
-
     /** rms of the line's fundamental, V. */
     public double lineVolts;
     /** Line frequency, Hz. */
@@ -99,7 +96,7 @@ public final class UnitValues {
     private UnitValues(Design design) {
         lineVolts = design.line().volts();
         lineHertz = design.line().hertz();
-        celsius = SHEET_CELSIUS;
+        celsius = Condition.SHEET_CELSIUS;
         parts(design);
         Zener zener = design.clip().zener();
         zenerSlopeOhms = zener.slopeOhms();
@@ -235,7 +232,7 @@ public final class UnitValues {
      * @throws RefusedCircuit where the device's data contradict themselves
      */
     public void fill(Network n, double rampOhms) {
-        double warmth = celsius - SHEET_CELSIUS;
+        double warmth = celsius - Condition.SHEET_CELSIUS;
         n.dropperOhms = dropperOhms;
         n.zenerSlopeOhms = zenerSlopeOhms;
         n.zenerKneeVolts =
@@ -267,7 +264,7 @@ public final class UnitValues {
 
     /** A sheet's value at this unit's temperature; a drift that leaves nothing of it is no drift of a real part. */
     private double warmed(String path, String name, double at25, double driftPerKelvin) {
-        double share = 1 + driftPerKelvin * (celsius - SHEET_CELSIUS);
+        double share = 1 + driftPerKelvin * (celsius - Condition.SHEET_CELSIUS);
         if (!(share > 0)) {
             throw new RefusedCircuit(
                     path,

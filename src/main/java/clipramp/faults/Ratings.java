@@ -20,8 +20,6 @@ import java.util.OptionalDouble;
  * rating that is not stated is NaN.
  */
 public final class Ratings {
-    private static final double SHEET_CELSIUS = 25;
-
     /** Below this share of the track next to none of it is in use. */
     private static final double LEAST_TRACK = 0.02;
 
@@ -114,7 +112,7 @@ public final class Ratings {
     }
 
     private OptionalDouble derated(OptionalDouble watts, OptionalDouble derating) {
-        double warmth = Math.max(0, condition.celsius() - SHEET_CELSIUS);
+        double warmth = Math.max(0, condition.celsius() - Condition.SHEET_CELSIUS);
         return watts.isEmpty()
                 ? watts
                 : OptionalDouble.of(Math.max(0, watts.getAsDouble() - derating.orElse(0) * warmth));

@@ -35,7 +35,7 @@ public record Solution(Condition condition, double rampOhms, Settling settling, 
     /** The same, with every pulse gone that came while the line was negative: what a load feels that gets one half only. */
     public Solution firingOnlyPositive() {
         List<HalfCycle> kept = new ArrayList<>();
-        boolean periods = halves.get(0).seconds() > 1.5 * condition.halfCycleSeconds();
+        boolean periods = spansPeriods();
         for (HalfCycle half : halves) {
             boolean negative = !periods && !half.positive();
             kept.add(half.withPulses(
@@ -49,6 +49,11 @@ public record Solution(Condition condition, double rampOhms, Settling settling, 
             kept.add(halves.get(0).inOtherHalf().withPulses(List.of()));
         }
         return new Solution(condition, rampOhms, settling, kept);
+    }
+
+    /** Whether each of its halves spans a whole period of the line, as a single-diode supply's does. */
+    public boolean spansPeriods() {
+        return halves.get(0).seconds() > 1.5 * condition.halfCycleSeconds();
     }
 
     /** Whether half cycles differ that line and load treat alike, be it by turns or without end. */

@@ -49,7 +49,7 @@ final class Bench {
         this.usual = new Condition(
                 pinnedVolts.orElse(design.line().volts()),
                 design.line().hertz(),
-                pinnedCelsius.orElse(JudgedCondition.USUAL_CELSIUS));
+                pinnedCelsius.orElse(Condition.SHEET_CELSIUS));
         double atStart = design.ramp().rampOhms(0);
         double atEnd = design.ramp().rampOhms(1);
         this.leastOhms = Math.min(atStart, atEnd);

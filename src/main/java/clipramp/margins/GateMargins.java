@@ -1,5 +1,6 @@
 package clipramp.margins;
 
+import clipramp.circuit.Condition;
 import clipramp.circuit.Design;
 import clipramp.circuit.GateDrive.Polarity;
 import clipramp.circuit.Load;
@@ -42,7 +43,7 @@ final class GateMargins {
 
     private Margin polarity() {
         MarginKind kind = MarginKind.GATE_POLARITY;
-        TriggerNeed need = TriggerNeed.of(design, 25);
+        TriggerNeed need = TriggerNeed.of(design, Condition.SHEET_CELSIUS);
         String pulse = design.gate().polarity().word() + " pulse";
         Finding finding;
         if (device.kind() == Kind.SCR) {

@@ -18,9 +18,6 @@ import java.util.TreeSet;
  * @param words such as "low line, 0 °C"
  */
 record JudgedCondition(Condition condition, String words) {
-    /** Temperature at which data sheets and benches are read, °C. */
-    static final double USUAL_CELSIUS = 25;
-
     /** Line low, nominal, high by coldest, 25 °C, hottest; a pinned axis has one value. */
     static List<JudgedCondition> of(Design design, OptionalDouble pinnedVolts, OptionalDouble pinnedCelsius) {
         List<JudgedCondition> all = new ArrayList<>();
@@ -58,7 +55,7 @@ record JudgedCondition(Condition condition, String words) {
         }
         return new TreeSet<>(List.of(
                 design.surroundings().coldestCelsius(),
-                USUAL_CELSIUS,
+                Condition.SHEET_CELSIUS,
                 design.surroundings().hottestCelsius()));
     }
 }

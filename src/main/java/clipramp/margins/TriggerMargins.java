@@ -1,5 +1,6 @@
 package clipramp.margins;
 
+import clipramp.circuit.Condition;
 import clipramp.circuit.Design;
 import clipramp.circuit.ProgrammableUnijunction;
 import clipramp.circuit.Trigger;
@@ -13,8 +14,6 @@ import java.util.function.ToDoubleFunction;
 
 /** The trigger device against its absolute ratings (DEVELOPERS.md, Margins). */
 final class TriggerMargins {
-    private static final double SHEET_CELSIUS = 25;
-
     private final Bench bench;
     private final Design design;
 
@@ -150,7 +149,7 @@ final class TriggerMargins {
         }
         List<Finding> findings = new ArrayList<>();
         for (JudgedCondition at : bench.conditions()) {
-            double warmth = Math.max(0, at.condition().celsius() - SHEET_CELSIUS);
+            double warmth = Math.max(0, at.condition().celsius() - Condition.SHEET_CELSIUS);
             double allowed = watts.getAsDouble() - derating.getAsDouble() * warmth;
             double there = bench.hardest(at.condition(), Dissipation::deviceWatts);
             findings.add(new Finding(

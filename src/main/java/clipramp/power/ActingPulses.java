@@ -49,7 +49,7 @@ public final class ActingPulses {
 
     /** Whether the thyristor is fired, in some half cycle, by a pulse made in the half cycle before: full power. */
     public static boolean spillOver(Design design, Solution solution) {
-        boolean periods = spansPeriods(solution);
+        boolean periods = solution.spansPeriods();
         return solution.halves().stream()
                 .flatMap(half -> half.pulses().stream())
                 .filter(Pulse::latches)
@@ -57,17 +57,12 @@ public final class ActingPulses {
                         folds(design, solution, pulse) > 0 || (periods && madeRad(design, solution, pulse) >= Math.PI));
     }
 
-    /** Whether one of the solution's halves spans a whole period, as a single-diode supply's does. */
-    static boolean spansPeriods(Solution solution) {
-        return solution.halves().get(0).seconds() > 1.5 * solution.condition().halfCycleSeconds();
-    }
-
     /**
      * Successive half cycles of the load, an even number of them where the solution has one or two halves. Of every
      * pulse that latches the thyristor in one, the earliest counts.
      */
     static List<Slot> slots(Solution solution) {
-        return spansPeriods(solution) ? ofPeriods(solution) : ofHalves(solution);
+        return solution.spansPeriods() ? ofPeriods(solution) : ofHalves(solution);
     }
 
     private static List<Slot> ofHalves(Solution solution) {

@@ -25,7 +25,7 @@ record GateWindow(double fromRad, double toRad, int half) {
     static List<GateWindow> of(Solution solution) {
         List<GateWindow> windows = new ArrayList<>();
         List<HalfCycle> halves = solution.halves();
-        boolean periods = ActingPulses.spansPeriods(solution);
+        boolean periods = solution.spansPeriods();
         for (int index = 0; index < halves.size(); index++) {
             for (Pulse pulse : halves.get(index).pulses()) {
                 double start = pulse.startRad() + (periods ? 2 : 1) * index * Math.PI;

@@ -29,7 +29,7 @@ public record LoadWave(double[] rad, double[] volts) {
      * @param solution the firing circuit's periodic state there
      */
     public static LoadWave of(Design design, Condition condition, Solution solution) {
-        boolean whole = design.stage() == Stage.HALF_WAVE || ActingPulses.spansPeriods(solution);
+        boolean whole = design.stage() == Stage.HALF_WAVE || solution.spansPeriods();
         double start = whole ? 0 : shownHalf(solution) * Math.PI;
         double end = start + (whole ? 2 : 1) * Math.PI;
         List<double[]> samples = new ArrayList<>();

@@ -136,7 +136,7 @@ final class Start {
     static List<ThyristorDevice> thyristors(SizingRequest request, Design design) {
         boolean triac = design.stage() == Stage.TRIAC;
         double crest = design.line().crestVolts(design.line().highVolts());
-        Condition high = new Condition(design.line().highVolts(), design.line().hertz(), 25);
+        Condition high = new Condition(design.line().highVolts(), design.line().hertz(), Condition.SHEET_CELSIUS);
         double amps = LoadPower.atFiringAngle(design, high, 0).thyristorRmsAmps();
         double cold = design.surroundings().coldestCelsius();
         return request.stock().thyristors().stream()
@@ -162,7 +162,7 @@ final class Start {
     }
 
     private static boolean isSensitive(ThyristorDevice device) {
-        return device.gate().trigger().ampsAt(25) < SENSITIVE_AMPS;
+        return device.gate().trigger().ampsAt(Condition.SHEET_CELSIUS) < SENSITIVE_AMPS;
     }
 
     /** Crest of the low line as the supply sees it, V. */
