@@ -75,14 +75,12 @@ class LengthTest {
             entry("desk/model/NewDesign.request", "a design file as text"),
             entry("desk/DeskWindow.<init>", PAGE),
             entry("desk/NewPage.<init>", PAGE),
-            entry("desk/SpreadPage.<init>", PAGE),
             entry("desk/SpreadPage.ask", PAGE),
             entry("firing/HalfCycleRun.next", "one loop over the events of a half cycle"),
             entry("spread/Spread.run", LAID_OUT),
             entry("desk/LinePage.<init>", PAGE),
             entry("desk/ProposalPage.<init>", PAGE),
             entry("desk/ReadoutView.<init>", PAGE),
-            entry("desk/BenchPage.<init>", PAGE),
             entry("desk/HeaderView.<init>", PAGE));
 
     private final Map<String, Integer> fileLines = new TreeMap<>();

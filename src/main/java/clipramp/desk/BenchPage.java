@@ -4,7 +4,6 @@ import clipramp.desk.model.DeskModel;
 import clipramp.desk.model.MarginRow;
 import java.util.List;
 import javafx.scene.control.Button;
-import javafx.scene.control.ScrollPane;
 import javafx.scene.control.ToggleButton;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Pane;
@@ -34,7 +33,7 @@ final class BenchPage extends Pane implements PageView {
     private final MarginsView margins;
     private final KnobView knob;
     private final VBox left = new VBox();
-    private final ScrollPane leftScroll = new ScrollPane();
+    private final Scroller leftScroll = Scroller.ofControls(left);
     private final VBox right = new VBox();
     private final HBox tabs = new HBox();
     private final ToggleButton partsTab = tab("parts", "Circuit and parts");
@@ -56,11 +55,7 @@ final class BenchPage extends Pane implements PageView {
         VBox.setVgrow(lanes.node(), Priority.ALWAYS);
         knob.node().setMinHeight(Region.USE_PREF_SIZE);
         left.getChildren().addAll(lanes.node(), readout.node(), knob.node());
-        leftScroll.setContent(left);
-        leftScroll.setFitToWidth(true);
         leftScroll.setFitToHeight(true);
-        leftScroll.setHbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);
-        leftScroll.setFocusTraversable(false);
         tabs.getStyleClass().add("tabs");
         tabs.setMinHeight(Region.USE_PREF_SIZE);
         marginsTab.setOnAction(event -> choose(false));

@@ -10,7 +10,6 @@ import javafx.scene.control.ButtonType;
 import javafx.scene.control.Dialog;
 import javafx.scene.control.DialogPane;
 import javafx.scene.control.Label;
-import javafx.scene.control.ScrollPane;
 import javafx.scene.control.TableView;
 import javafx.scene.layout.Region;
 import javafx.scene.layout.VBox;
@@ -73,13 +72,9 @@ final class Dialogs {
 
     /** A text that may be longer than the screen. */
     Node scrolling(Node body) {
-        ScrollPane scroll = new ScrollPane(body);
-        scroll.setFitToWidth(true);
+        Scroller scroll = Scroller.ofText(body, "Text; arrow keys scroll");
         scroll.setPrefWidth(TEXT_EMS * em() + 2 * em());
         scroll.setPrefHeight(MOST_HEIGHT_EMS * em());
-        scroll.setHbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);
-        scroll.setFocusTraversable(true);
-        scroll.setAccessibleText("Text; arrow keys scroll");
         return scroll;
     }
 

@@ -8,7 +8,6 @@ import java.util.Map;
 import java.util.function.Consumer;
 import javafx.application.Platform;
 import javafx.scene.control.Label;
-import javafx.scene.control.ScrollPane;
 import javafx.scene.layout.VBox;
 
 /** One row a check, worst first; a row opens to its formula, its source and what moves it. */
@@ -16,7 +15,7 @@ final class MarginsView {
     private static final int AT_ONCE = 12;
 
     private final VBox rows = new VBox();
-    private final ScrollPane scroll = new ScrollPane(rows);
+    private final Scroller scroll = Scroller.ofControls(rows);
     private final Label empty = new Label("Margins follow once the circuit is solved.");
     private final Map<String, MarginRowView> byId = new HashMap<>();
     private final Consumer<String> chosen;
@@ -30,12 +29,9 @@ final class MarginsView {
         rows.getStyleClass().add("margins");
         rows.setId("margins");
         rows.getChildren().add(empty);
-        scroll.setFitToWidth(true);
-        scroll.setHbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);
-        scroll.setFocusTraversable(false);
     }
 
-    ScrollPane node() {
+    Scroller node() {
         return scroll;
     }
 

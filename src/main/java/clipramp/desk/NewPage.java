@@ -12,7 +12,6 @@ import javafx.scene.control.Button;
 import javafx.scene.control.ComboBox;
 import javafx.scene.control.Control;
 import javafx.scene.control.Label;
-import javafx.scene.control.ScrollPane;
 import javafx.scene.control.TextField;
 import javafx.scene.layout.ColumnConstraints;
 import javafx.scene.layout.FlowPane;
@@ -33,7 +32,7 @@ final class NewPage {
     private final Label about = new Label();
     private final Label complaint = new Label();
     private final VBox page = new VBox();
-    private final ScrollPane scroll = new ScrollPane(page);
+    private final Scroller scroll = Scroller.ofControls(page);
     private final List<String> lineIds = new ArrayList<>();
 
     /**
@@ -98,9 +97,6 @@ final class NewPage {
         });
         RunBar bar = new RunBar(run, "new", "searching for values that hold");
         page.getChildren().addAll(title, form, complaint, buttons, bar.node());
-        scroll.setFitToWidth(true);
-        scroll.setFocusTraversable(false);
-        scroll.setHbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);
         usual();
     }
 
@@ -142,7 +138,7 @@ final class NewPage {
         return new VBox(title, Words.quiet(words));
     }
 
-    ScrollPane node() {
+    Scroller node() {
         return scroll;
     }
 

@@ -14,7 +14,6 @@ import java.util.Optional;
 import java.util.Set;
 import javafx.scene.Cursor;
 import javafx.scene.control.Button;
-import javafx.scene.control.ScrollPane;
 import javafx.scene.control.ToggleButton;
 import javafx.scene.input.MouseEvent;
 import javafx.scene.layout.HBox;
@@ -33,7 +32,7 @@ final class PartsView {
     private final TilePane slots = new TilePane();
     private final Map<PartGroup, ToggleButton> stations = new EnumMap<>(PartGroup.class);
     private final VBox box = new VBox();
-    private final ScrollPane whole = new ScrollPane(box);
+    private final Scroller whole = Scroller.ofControls(box);
     private final List<SlotView> views = new ArrayList<>();
     private PartGroup station = PartGroup.RAMP;
     private String chosen = "";
@@ -49,24 +48,18 @@ final class PartsView {
                 MouseEvent.MOUSE_MOVED,
                 event -> drawing.setCursor(partAt(event).isPresent() ? Cursor.HAND : Cursor.DEFAULT));
         slots.getStyleClass().add("slots");
-        ScrollPane scroll = new ScrollPane(slots);
-        scroll.setFitToWidth(true);
-        scroll.setHbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);
-        scroll.setFocusTraversable(false);
+        Scroller scroll = Scroller.ofControls(slots);
         scroll.getStyleClass().add("slot-scroll");
         VBox.setVgrow(drawing, Priority.ALWAYS);
         box.getStyleClass().add("parts");
         box.getChildren().addAll(drawing, strip(), scroll);
-        whole.setFitToWidth(true);
         whole.setFitToHeight(true);
-        whole.setHbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);
-        whole.setFocusTraversable(false);
         theme.onChange(() -> drawing.setMinHeight(LEAST_DRAWING * theme.zoom()));
         drawing.setMinHeight(LEAST_DRAWING * theme.zoom());
         draft.onChange(this::refresh);
     }
 
-    ScrollPane node() {
+    Scroller node() {
         return whole;
     }
 

@@ -7,7 +7,6 @@ import clipramp.figures.KnobFigure;
 import clipramp.margins.Check;
 import javafx.scene.control.Button;
 import javafx.scene.control.Label;
-import javafx.scene.control.ScrollPane;
 import javafx.scene.layout.FlowPane;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
@@ -34,7 +33,7 @@ final class ProposalPage {
     private final VBox page = new VBox();
     private final HBox sides = new HBox();
     private final VBox stacked = new VBox();
-    private final ScrollPane scroll = new ScrollPane();
+    private final Scroller scroll = Scroller.ofText(words.node(), "The proposal in words; arrow keys scroll");
 
     ProposalPage(Theme theme, Actions actions) {
         this.theme = theme;
@@ -61,9 +60,6 @@ final class ProposalPage {
         back.setOnAction(event -> actions.giveUpNew());
         FlowPane buttons = new FlowPane(take, record, again, back);
         buttons.getStyleClass().add("flow-buttons");
-        scroll.setFitToWidth(true);
-        scroll.setHbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);
-        scroll.setAccessibleText("The proposal in words; arrow keys scroll");
         scroll.getStyleClass().add("record-scroll");
         sides.getStyleClass().add("proposal-sides");
         stacked.getStyleClass().add("proposal-sides");

@@ -20,7 +20,6 @@ import javafx.scene.control.Button;
 import javafx.scene.control.CheckBox;
 import javafx.scene.control.ComboBox;
 import javafx.scene.control.Label;
-import javafx.scene.control.ScrollPane;
 import javafx.scene.image.ImageView;
 import javafx.scene.image.PixelFormat;
 import javafx.scene.image.WritableImage;
@@ -71,10 +70,7 @@ final class RecordPage implements PageView {
         this.maker = maker;
         pages.getStyleClass().add("record-pages");
         pages.setId("record-pages");
-        ScrollPane scroll = new ScrollPane(pages);
-        scroll.setFitToWidth(true);
-        scroll.setHbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);
-        scroll.setAccessibleText("Pages of the record; arrow keys scroll");
+        Scroller scroll = Scroller.ofText(pages, "Pages of the record; arrow keys scroll");
         scroll.getStyleClass().add("record-scroll");
         save.setId("record-save");
         save.setDefaultButton(true);
@@ -85,7 +81,7 @@ final class RecordPage implements PageView {
         theme.onChange(() -> maker.setZoom(theme.zoom()));
     }
 
-    private ScrollPane side() {
+    private Scroller side() {
         side.getStyleClass().add("record-side");
         progress.getStyleClass().add("quiet");
         progress.setId("record-progress");
@@ -99,10 +95,7 @@ final class RecordPage implements PageView {
         spreadHint.setId("record-spread-hint");
         spreadHint.managedProperty().bind(spreadHint.textProperty().isNotEmpty());
         side.getChildren().addAll(save, progress, paper(), unit, spread, spreadHint);
-        ScrollPane sideScroll = new ScrollPane(side);
-        sideScroll.setFitToWidth(true);
-        sideScroll.setHbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);
-        sideScroll.setFocusTraversable(false);
+        Scroller sideScroll = Scroller.ofControls(side);
         sideScroll.getStyleClass().add("record-side-scroll");
         return sideScroll;
     }

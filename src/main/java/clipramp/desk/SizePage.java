@@ -24,7 +24,6 @@ import javafx.scene.control.Button;
 import javafx.scene.control.CheckBox;
 import javafx.scene.control.ComboBox;
 import javafx.scene.control.Label;
-import javafx.scene.control.ScrollPane;
 import javafx.scene.layout.BorderPane;
 import javafx.scene.layout.Region;
 import javafx.scene.layout.VBox;
@@ -125,10 +124,7 @@ final class SizePage implements PageView {
         tables.getStyleClass().add("sized");
         result.getChildren().setAll(state, take, curve, tables, found.node());
         result.getStyleClass().add("spread-middle");
-        ScrollPane scroll = new ScrollPane(result);
-        scroll.setFitToWidth(true);
-        scroll.setHbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);
-        scroll.setAccessibleText("What was found; arrow keys scroll");
+        Scroller scroll = Scroller.ofText(result, "What was found; arrow keys scroll");
         scroll.getStyleClass().add("record-scroll");
         box.setCenter(scroll);
     }

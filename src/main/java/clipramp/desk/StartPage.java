@@ -6,7 +6,6 @@ import java.nio.file.Path;
 import java.util.List;
 import javafx.scene.control.Button;
 import javafx.scene.control.Label;
-import javafx.scene.control.ScrollPane;
 import javafx.scene.layout.FlowPane;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.VBox;
@@ -17,7 +16,7 @@ final class StartPage {
     private final VBox page = new VBox();
     private final VBox recent = column("Opened lately");
     private final VBox left = new VBox();
-    private final ScrollPane scroll = new ScrollPane(page);
+    private final Scroller scroll = Scroller.ofControls(page);
 
     StartPage(Actions actions) {
         this.actions = actions;
@@ -32,13 +31,10 @@ final class StartPage {
         page.getChildren().addAll(title, line, left, columns);
         left.getStyleClass().add("start-column");
         left.setManaged(false);
-        scroll.setFitToWidth(true);
-        scroll.setHbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);
-        scroll.setFocusTraversable(false);
         scroll.setId("start");
     }
 
-    ScrollPane node() {
+    Scroller node() {
         return scroll;
     }
 

@@ -2,7 +2,6 @@ package clipramp.desk;
 
 import java.util.Optional;
 import javafx.geometry.Insets;
-import javafx.scene.control.ScrollPane;
 import javafx.scene.layout.BorderPane;
 import javafx.scene.layout.Region;
 import javafx.scene.layout.VBox;
@@ -18,7 +17,7 @@ final class TwoColumns {
     private final SidePanel side;
     private final VBox middle;
     private final VBox stacked = new VBox();
-    private final ScrollPane scroll = new ScrollPane();
+    private final Scroller scroll;
     private final BorderPane box = new BorderPane();
     private Optional<Region> first = Optional.empty();
     private Optional<Boolean> arranged = Optional.empty();
@@ -33,10 +32,8 @@ final class TwoColumns {
         this.side = side;
         this.middle = middle;
         middle.getStyleClass().add("spread-middle");
-        scroll.setFitToWidth(true);
-        scroll.setHbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);
+        scroll = Scroller.ofText(middle, said);
         scroll.getStyleClass().add("record-scroll");
-        scroll.setAccessibleText(said);
         box.setCenter(scroll);
         box.widthProperty().addListener(property -> arrange());
         theme.onChange(this::arrange);
@@ -47,7 +44,7 @@ final class TwoColumns {
         return box;
     }
 
-    ScrollPane scroll() {
+    Scroller scroll() {
         return scroll;
     }
 
