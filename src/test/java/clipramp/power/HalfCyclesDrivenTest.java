@@ -209,7 +209,12 @@ class HalfCyclesDrivenTest {
         HalfCycle second = Fired.half(EUROPE, true, 2, true);
         Solution hunts = new Solution(EUROPE, 1e4, Settling.HUNTS, List.of(first, second));
         LoadWave wave = LoadWave.of(Fired.textbook(Stage.TRIAC, 50), EUROPE, hunts);
-        assertThat(wave.rad()).endsWith(Math.PI);
+        assertThat(wave.rad()).isSorted().startsWith(0).endsWith(Math.PI);
+        for (int i = 0; i < wave.rad().length; i++) {
+            double line = wave.rad()[i] > 2 + 1e-9 ? CREST * Math.sin(wave.rad()[i]) : 0;
+            assertThat(Math.abs(wave.rad()[i] - 2) < 1e-9 ? line : wave.volts()[i])
+                    .isCloseTo(line, within(1e-9));
+        }
         assertThat(Arrays.stream(wave.volts()).min().orElseThrow()).isGreaterThan(-1e-9);
     }
 

@@ -91,11 +91,7 @@ class HoldingGapTest {
                 .withStageDiodes(new StageDiodes(0.9, 0))
                 .withLoad(new Load.Inductive(40, 0.4, Optional.of(new StageDiodes(0.7, slope))));
         LoadPeriod period = LoadPower.periodAtFiringAngle(design, EUROPE, 1);
-        double carried = period.spans().stream()
-                .filter(span -> !span.throughThyristor() && span.fromRad() <= Math.PI && Math.PI <= span.toRad())
-                .mapToDouble(span -> span.amps().applyAsDouble(Math.PI))
-                .findFirst()
-                .orElseThrow();
+        double carried = carried(period, Math.PI);
         assertThat(carried).isGreaterThan(1);
         double needed = 2.8 + pathSlope * holding - 0.7 - slope * (carried - holding);
         assertThat(HoldingGap.seconds(design, EUROPE, period, holding))
@@ -139,6 +135,30 @@ class HoldingGapTest {
         };
         double reached = root(rad -> amps.applyAsDouble(rad) - holding, edge, Math.PI / 2);
         assertThat(HoldingGap.seconds(design, line, period, holding)).isCloseTo(reached / line.omega(), within(1e-5));
+    }
+
+    @Test
+    void ofTwoZerosTheOneWhereTheDiodeCarriesMoreLeavesTheShorterGap() {
+        // Half cycles fired at 1 rad and at 2.4 rad: more is left at pi than at 2 pi, and the slope counts it.
+        Design design = Changed.with(Fired.textbook(Stage.BRIDGE_DC, 10), "thyristor.device.onState", new OnState(1, 0))
+                .withStageDiodes(new StageDiodes(0.9, 0))
+                .withLoad(new Load.Inductive(4, 0.04, Optional.of(new StageDiodes(0.7, 0.05))));
+        LoadPeriod period = LoadPower.period(design, EUROPE, Fired.unlike(EUROPE, 1, 2.4));
+        assertThat(period.settled()).isTrue();
+        assertThat(period.halfCycles()).isEqualTo(2);
+        double first = carried(period, Math.PI);
+        assertThat(first).isGreaterThan(carried(period, 2 * Math.PI) + 1);
+        double needed = 2.8 - 0.7 - 0.05 * (first - 0.1);
+        assertThat(HoldingGap.seconds(design, EUROPE, period, 0.1))
+                .isCloseTo(2 * Math.asin(needed / CREST) / EUROPE.omega(), within(1e-9));
+    }
+
+    private static double carried(LoadPeriod period, double rad) {
+        return period.spans().stream()
+                .filter(span -> !span.throughThyristor() && span.fromRad() <= rad && rad <= span.toRad())
+                .mapToDouble(span -> span.amps().applyAsDouble(rad))
+                .findFirst()
+                .orElseThrow();
     }
 
     @Test

@@ -3,17 +3,21 @@ package clipramp.power;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
+import clipramp.circuit.Changed;
 import clipramp.circuit.Condition;
 import clipramp.circuit.Design;
 import clipramp.circuit.Pot;
 import clipramp.circuit.PotLaw;
 import clipramp.circuit.Ramp;
 import clipramp.circuit.SampleDesigns;
+import clipramp.circuit.TemperatureCurve;
 import clipramp.firing.Firing;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import org.junit.jupiter.api.Test;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.ValueSource;
 
 class KnobSearchTest {
     private static final Condition NOMINAL = new Condition(230, 50, 25);
@@ -47,6 +51,43 @@ class KnobSearchTest {
         // The supply reaches no peak point so early.
         assertThat(KnobSearch.rampOhmsForAngle(HEATER, NOMINAL, Math.toRadians(0.05)))
                 .isEmpty();
+    }
+
+    @ParameterizedTest
+    @ValueSource(doubles = {22, 32.5, 36.5, 51})
+    void anAngleThatIsJumpedOverGetsTheNearerSideOfTheJump(double degrees) {
+        // One pulse more fits in before the line's zero, so the next ramp begins with another charge.
+        double wanted = Math.toRadians(degrees);
+        assertThat(KnobSearch.rampOhmsForAngle(HEATER, NOMINAL, wanted)).isEmpty();
+        double ohms =
+                KnobSearch.nearestRampOhmsForAngle(HEATER, NOMINAL, wanted).orElseThrow();
+        double off = Math.abs(fires(ohms) - degrees);
+        double less = Math.abs(fires(ohms * (1 - 1e-6)) - degrees);
+        double more = Math.abs(fires(ohms * (1 + 1e-6)) - degrees);
+        assertThat(Math.abs(fires(ohms * (1 - 1e-6)) - fires(ohms * (1 + 1e-6))))
+                .as("it does jump there")
+                .isGreaterThan(0.02);
+        assertThat(off).isLessThan(3).isLessThanOrEqualTo(Math.min(less, more) + 1e-3);
+    }
+
+    private static double fires(double ohms) {
+        return Math.toDegrees(
+                Firing.solve(HEATER, NOMINAL, ohms).shown().firingRad().orElseThrow());
+    }
+
+    @Test
+    void theNearestIsTheAngleItselfWhereThereIsNoJumpAndNothingWhereItIsFar() {
+        for (double degrees : new double[] {60, 90, 120}) {
+            double wanted = Math.toRadians(degrees);
+            double found =
+                    KnobSearch.nearestRampOhmsForAngle(HEATER, NOMINAL, wanted).orElseThrow();
+            assertThat(fires(found)).isCloseTo(degrees, within(1e-6));
+        }
+        assertThat(KnobSearch.nearestRampOhmsForAngle(HEATER, NOMINAL, Math.toRadians(0.05)))
+                .isEmpty();
+        // With an I_L of 20 A it never fires, so that no R_E is near any angle.
+        Design lazy = Changed.with(HEATER, "thyristor.device.latching", Optional.of(TemperatureCurve.at25(20)));
+        assertThat(KnobSearch.nearestRampOhmsForAngle(lazy, NOMINAL, 1)).isEmpty();
     }
 
     @Test
