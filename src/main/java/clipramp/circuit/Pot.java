@@ -60,6 +60,7 @@ public record Pot(Part track, double endOhms, PotLaw law, Sense sense, Optional<
      */
     public static double ohms(double share, double endOhms, double trackOhms, double shuntOhms) {
         double used = endOhms + trackOhms * share;
-        return Double.isInfinite(shuntOhms) ? used : used * shuntOhms / (used + shuntOhms);
+        // Nothing across nothing is nothing: a trimmer alone may be turned to zero.
+        return used == 0 || Double.isInfinite(shuntOhms) ? used : used * shuntOhms / (used + shuntOhms);
     }
 }

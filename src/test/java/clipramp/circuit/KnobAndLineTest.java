@@ -43,6 +43,12 @@ class KnobAndLineTest {
     }
 
     @Test
+    void aTrimmerAtZeroAcrossATrackAtItsEndLeavesNothing() {
+        assertThat(Pot.ohms(0, 0, 100_000, 0)).isZero();
+        assertThat(Pot.ohms(1, 0, 100_000, 0)).isZero();
+    }
+
+    @Test
     void aShuntLiesAcrossTheUsedSectionOnly() {
         // Resistors in parallel: 30 k of a 40 k track (and 10 k of its end) across 40 k are 20 k.
         Pot pot = new Pot(Part.of(40_000), 10_000, new PotLaw.Linear(), Pot.Sense.RISING, Optional.of(Part.of(40_000)));
