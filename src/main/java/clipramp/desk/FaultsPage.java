@@ -46,7 +46,7 @@ final class FaultsPage implements PageView {
     private final Label complaint = Words.wrapped("");
     private final SeenForm seen = new SeenForm(this::rank);
     private final Label heading = Words.quiet("");
-    private final TableView<List<String>> table = new TableView<>();
+    private final TableView<List<String>> table = Tables.empty();
     private final FaultDetail detail = new FaultDetail();
     private final VBox middle = new VBox();
     private final TwoColumns box;
@@ -59,6 +59,7 @@ final class FaultsPage implements PageView {
         this.model = model;
         this.run = model.faults();
         table.setId("faults-table");
+        table.setVisible(false);
         table.getStyleClass().add("two-line-heads");
         table.setRowFactory(view -> new NamedRow());
         table.widthProperty().addListener(property -> columns());
@@ -157,6 +158,7 @@ final class FaultsPage implements PageView {
             Optional<String> chosen = chosen().map(c -> c.effect().fault().id());
             shown = words.candidates(observations);
             Tables.fill(table, words.table(shown));
+            table.setVisible(true);
             ranked = !observations.isEmpty();
             columns();
             select(observations.isEmpty() ? chosen : Optional.empty());

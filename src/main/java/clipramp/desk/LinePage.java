@@ -48,7 +48,7 @@ final class LinePage implements PageView {
         figure = new FigurePane(theme);
         figure.setId("line-figure");
         figure.setMinHeight(Region.USE_PREF_SIZE);
-        orders = new TableView<>();
+        orders = Tables.empty();
         orders.setColumnResizePolicy(TableView.CONSTRAINED_RESIZE_POLICY_ALL_COLUMNS);
         orders.setId("line-orders");
         orders.getStyleClass().add("two-line-heads");

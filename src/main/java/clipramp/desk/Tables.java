@@ -5,13 +5,21 @@ import java.util.List;
 import javafx.beans.property.ReadOnlyStringWrapper;
 import javafx.scene.control.TableColumn;
 import javafx.scene.control.TableView;
+import javafx.scene.layout.Region;
 
 /** Tables of numbers on the screen: in the order they come in, neither sorted nor moved about. */
 final class Tables {
     private Tables() {}
 
-    static TableView<List<String>> of(NumberTable table) {
+    /** Nothing in it yet, and no words about that: what is being worked out is told beside it. */
+    static TableView<List<String>> empty() {
         TableView<List<String>> view = new TableView<>();
+        view.setPlaceholder(new Region());
+        return view;
+    }
+
+    static TableView<List<String>> of(NumberTable table) {
+        TableView<List<String>> view = empty();
         view.setColumnResizePolicy(TableView.CONSTRAINED_RESIZE_POLICY_ALL_COLUMNS);
         fill(view, table);
         return view;

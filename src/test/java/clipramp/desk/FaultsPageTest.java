@@ -5,6 +5,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 import java.nio.file.Path;
 import java.util.List;
 import javafx.css.PseudoClass;
+import javafx.scene.control.ButtonBase;
 import javafx.scene.control.ComboBox;
 import javafx.scene.control.Label;
 import javafx.scene.control.TableView;
@@ -55,6 +56,22 @@ class FaultsPageTest {
             combo.setValue(word);
             return null;
         });
+    }
+
+    /** An answer comes by way of the window's own thread, so within one turn of that thread there is none yet. */
+    @Test
+    void noTableStandsBeforeThereAreFaultsInIt() {
+        try (Harness window = Harness.start(home).example("drying-cabinet")) {
+            ButtonBase page = window.find("#page-faults", ButtonBase.class);
+            boolean stands = Harness.at(() -> {
+                page.fire();
+                page.getScene().getRoot().applyCss();
+                return page.getScene().lookup("#faults-table").isVisible();
+            });
+            assertThat(stands).isFalse();
+            window.await(() -> window.model.faults().answer().isPresent());
+            assertThat(Harness.at(() -> table(window).isVisible())).isTrue();
+        }
     }
 
     /** A shorted thyristor gives full power whatever the knob does: no source needed beyond the circuit itself. */
