@@ -1,5 +1,6 @@
 package clipramp.firing;
 
+import clipramp.circuit.RefusedCircuit;
 import clipramp.circuit.Stage;
 import clipramp.engine.Mode;
 import java.util.ArrayList;
@@ -31,10 +32,13 @@ final class PeriodicState {
             return new State(run.mode(), run.rampVolts(), run.fluxAmps(), run.conductsUntilSeconds());
         }
 
-        /** What is no number would pass for a circuit that stays off. */
+        /** A device whose conducting line feeds itself; without a refusal it would pass for a circuit that stays off. */
         State requireFinite() {
             if (!Double.isFinite(rampVolts) || !Double.isFinite(fluxAmps)) {
-                throw new IllegalStateException("a half cycle ended at " + rampVolts + " V, " + fluxAmps + " A");
+                throw new RefusedCircuit(
+                        "trigger.device",
+                        "with these values the ramp grows without end while trigger.device conducts. Check its valley and"
+                                + " saturation against the data sheet, or make trigger.base-one smaller.");
             }
             return this;
         }
@@ -49,6 +53,9 @@ final class PeriodicState {
 
     /** Solves, and shows the sink every piece of the half cycles that make up the solution. */
     static Solution solve(FiringCase firing, PieceSink sink) {
+        if (!Double.isFinite(firing.network().rampOhms)) {
+            throw new IllegalArgumentException("R_E is " + firing.network().rampOhms + " ohm");
+        }
         HalfCycleRun run = new HalfCycleRun(firing);
         int period = firing.timing().period();
         List<State> states = new ArrayList<>();

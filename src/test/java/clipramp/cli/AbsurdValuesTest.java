@@ -12,7 +12,9 @@ class AbsurdValuesTest {
         "drying-cabinet, --temperature=125degC, 1",
         "cabinet-gone-wrong, --with=trigger.device.interbase-drift=-5 %/K --temperature=125degC, 2",
         "drying-cabinet, --with=trigger.device.interbase-drift=5 %/K --temperature=0degC, 2",
-        "cabinet-gone-wrong, --with=trigger.device.valley.at=500 mV --with=clip.dropper=100 Ω, 2"
+        "cabinet-gone-wrong, --with=trigger.device.valley.at=500 mV --with=clip.dropper=100 Ω, 2",
+        "cabinet-gone-wrong, --with=trigger.device.valley.at=500 mV --with=trigger.base-one=1 MΩ --with=clip.dropper=1 MΩ, 2",
+        "upper-heaters, --with=gate.transformer.primary-resistance=0 Ω, 0"
     })
     void areAnsweredOrRefusedInWords(String example, String options, int code) {
         String[] words = ("check#examples/" + example + ".yaml#" + options.replace(" --", "#--")).split("#");
