@@ -8,7 +8,7 @@ public final class ClippedSupply {
     private ClippedSupply() {}
 
     /**
-     * V_S at the crest, from (e - V_S)/R_D = i_Z + V_S/R_bar + (V_S - V_P)/R_E with e the crest behind winding and rectifier.
+     * V_S at the crest, from (e - V_S)/R_D = i_Z + V_S/R_bar + (V_S - V_P)/R_E, e the crest behind winding and rectifier.
      *
      * @param design line and supply
      * @param condition line voltage

@@ -7,9 +7,10 @@ import clipramp.units.Unit;
 /**
  * The saturated emitter line I_E = (V_EB1 - V_D - xi V_S)/r_on, drawn through data-sheet points at 25 °C.
  *
- * <p>DEVELOPERS.md, The conducting device. Through the valley point (I_V, V_V at V_spec) it always goes, both scaled with the supply. Its second point is the
+ * <p>Through the valley point (I_V, V_V at V_spec) it always goes, both scaled with the supply. Its second point is the
  * saturation voltage, or, where the sheet has it, the base-one pulse V_OB1 in its test circuit: the valley voltage is on
- * no sheet, and a line through the saturation point alone gives less pulse than the sheet's minimum.
+ * no sheet, and a line through the saturation point alone gives less pulse than the sheet's minimum (DEVELOPERS.md, The
+ * conducting device).
  */
 final class EmitterLine {
     private EmitterLine() {}

@@ -25,8 +25,8 @@ final class FirstCrossing {
      * @param form what must rise to zero
      * @param from start of the search, s since the line zero
      * @param limit end of the search, s since the line zero
-     * @return s since the line zero; {@code from} itself where the form is past zero there; POSITIVE_INFINITY for none before
-     *     the limit
+     * @return s since the line zero; {@code from} itself where the form is past zero there; POSITIVE_INFINITY for none
+     *     before the limit
      * @throws ArithmeticException where the steps come to no end
      */
     static double after(Piece piece, Affine form, double from, double limit) {

@@ -4,10 +4,10 @@ package clipramp.engine;
  * The firing circuit as numbers at one condition. A mutable kitchen vessel: whoever draws a million units fills the
  * same instance again and calls {@link #derive()}; everybody else gets one from {@link NetworkOfDesign}.
  *
- * <p>SI units throughout; laws and letters as in DEVELOPERS.md, The circuit laws. The device is described generally enough for both trigger devices: off, it loads the supply
- * with {@code standingSiemens} and fires at kappa V_S + V_D; on, its emitter carries (V_C - V_B1 - onDrop - xi
- * V_S)/r_on, and base two carries g2 (V_S - V_B1 - gateDrop), of which lowerSiemens (V_B1 + gateDrop) is lost to a
- * programmable device's lower resistor.
+ * <p>SI units throughout; laws and letters are those of DEVELOPERS.md, The circuit laws. The device is described generally
+ * enough for both trigger devices: off, it loads the supply with {@code standingSiemens} and fires at kappa V_S + V_D; on,
+ * its emitter carries (V_C - V_B1 - onDrop - xi V_S)/r_on, and base two carries g2 (V_S - V_B1 - gateDrop), of which
+ * lowerSiemens (V_B1 + gateDrop) is lost to a programmable device's lower resistor.
  */
 public final class Network {
     /** Drop of a programmable device's gate-cathode junction while it conducts, V. */

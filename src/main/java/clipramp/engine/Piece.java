@@ -431,7 +431,7 @@ public final class Piece {
         return low;
     }
 
-    /** i_D through the dropping resistor where last looked at, A; the network is the one that the piece was shaped for. */
+    /** i_D through the dropper where last looked at, A; the network is the one that the piece was shaped for. */
     public double dropperAmps(Network n) {
         return rectifies ? (sourceVolts - value(supply)) / n.dropperOhms : 0;
     }
@@ -463,8 +463,8 @@ public final class Piece {
     }
 
     /**
-     * Voltage at base two (a programmable device: at its gate node) where last looked at, V; the network is the one that the
-     * piece was shaped for.
+     * Voltage at base two (a programmable device: at its gate node) where last looked at, V; the network is the one that
+     * the piece was shaped for.
      */
     public double baseTwoVolts(Network n) {
         if (n.programmable) {

@@ -8,8 +8,8 @@ package clipramp.engine;
  * it ({@link SwiftProof}). Where the proof fails, or the device is stalled, {@link Stepper} does the piece. Longer
  * than most files: events, their settling and the way to the careful stepper and back all turn over the same state.
  *
- * <p>Events are {@link Stepper}'s to within 1e-14 s where the steps are its own (DEVELOPERS.md, Many units at once). Times are
- * seconds since the line zero that begins the half cycle, voltages against the firing common. Not for two threads at once.
+ * <p>Events are {@link Stepper}'s to within 1e-14 s (DEVELOPERS.md, Many units at once). Times are seconds since the line
+ * zero that begins the half cycle, voltages against the firing common. Not for two threads at once.
  */
 public final class SwiftStepper {
     private static final int MOST_TARGETS = 6;

@@ -13,8 +13,8 @@ import java.util.OptionalDouble;
  * @param endVolts ramp capacitor at the line zero that ends it, V to common
  * @param clipFromRad angle, counted as {@link Pulse#startRad} is, from which the zener conducts, rad; empty if it never
  *     does
- * @param collapseRad angle, counted alike, at which the supply collapses: the zener's last stop, or the supply's crest if it never
- *     conducts, rad
+ * @param collapseRad angle, counted alike, at which the supply collapses: the zener's last stop, or the supply's crest if
+ *     it never conducts, rad
  * @param stalled whether the first pulse came out of a stall (the ramp held at the peak point for want of peak-point
  *     current), or none came of one
  * @param latchedOn whether the trigger device stayed on after a pulse until the supply collapsed

@@ -6,7 +6,8 @@ package clipramp.firing;
  * @param startRad angle of the line (the load's, from the positive-going zero of its fundamental; folded by pi to the
  *     half cycle that the pulse acts in; 0..2 pi where the supply works over whole periods) at which it fires, rad
  * @param startSeconds the same instant as time since the zero of the supply's half cycle, s
- * @param endSeconds instant of the valley, s on the same clock; beyond the half cycle's length if it goes on over the line zero
+ * @param endSeconds instant of the valley, s on the same clock; beyond the half cycle's length if it goes on over the line
+ *     zero
  * @param supplyVolts clipped supply at the instant before firing, V to common
  * @param peakPointVolts emitter voltage at firing, V to common
  * @param afterStall whether the ramp was held at the peak point before it fired

@@ -10,8 +10,8 @@ import java.util.List;
  * @param condition line and temperature
  * @param rampOhms R_E, ohm
  * @param settling whether and how it repeats
- * @param halves every half cycle that differs, at least one: one where all are alike; two (positive half first, or the two that
- *     alternate) otherwise; more only when it hunts without settling
+ * @param halves every half cycle that differs, at least one: one where all are alike; two (positive half first, or the
+ *     two that alternate) otherwise; more only when it hunts without settling
  */
 public record Solution(Condition condition, double rampOhms, Settling settling, List<HalfCycle> halves) {
     /** How successive half cycles follow each other. */

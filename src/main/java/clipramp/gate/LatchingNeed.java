@@ -21,8 +21,8 @@ public final class LatchingNeed {
     }
 
     /**
-     * By how much the gate circuit raises both, A: 0.7 V/(R_GK parallel (R_G + R1)), behind a pulse transformer 0.7 V/R_GK;
-     * 0 for a triac.
+     * By how much the gate circuit raises both, A: 0.7 V/(R_GK parallel (R_G + R1)), behind a pulse transformer 0.7
+     * V/R_GK; 0 for a triac.
      */
     public static double bleedAmps(Design design) {
         return NetworkOfDesign.gateBleedAmps(design);

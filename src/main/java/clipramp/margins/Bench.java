@@ -206,8 +206,8 @@ final class Bench {
     }
 
     /**
-     * The largest R_E in ohms, of eleven knob settings, whose first pulse comes before the supply's collapse: the latest firing
-     * that is meant as one.
+     * The largest R_E in ohms, of eleven knob settings, whose first pulse comes before the supply's collapse: the latest
+     * firing that is meant as one.
      */
     OptionalDouble latestOhms(Condition condition) {
         return settings().stream()

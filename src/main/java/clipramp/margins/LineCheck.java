@@ -32,7 +32,7 @@ public record LineCheck(List<Setting> settings, int worst, List<Order> orders, L
     /** Power up to which asymmetrical control is let through, W. */
     static final double ASYMMETRICAL_WATTS = 100;
 
-    /** Full power up to which an independent dimmer for incandescent lamps, or from which professional equipment, is free, W. */
+    /** Full power up to which an independent dimmer for lamps, or from which professional equipment, is free, W. */
     static final double LARGE_WATTS = 1000;
 
     /**

@@ -20,7 +20,7 @@ public final class KnobMap {
      * @param condition line and temperature
      * @param positions how many, 2 or more
      * @throws IllegalArgumentException for fewer
-     * @throws RefusedCircuit as {@link Firing}
+     * @throws clipramp.circuit.RefusedCircuit as {@link Firing}
      */
     public static List<OperatingPoint> of(Design design, Condition condition, int positions) {
         if (positions < 2) {
@@ -43,7 +43,7 @@ public final class KnobMap {
      * @param condition line and temperature
      * @param position knob position, 0 fully anticlockwise .. 1 fully clockwise; ignored for a fixed ramp
      * @throws IllegalArgumentException for a position outside 0..1 of a ramp with a pot
-     * @throws RefusedCircuit as {@link Firing}
+     * @throws clipramp.circuit.RefusedCircuit as {@link Firing}
      */
     public static OperatingPoint at(Design design, Condition condition, double position) {
         return design.ramp().pot().isEmpty()
@@ -61,7 +61,7 @@ public final class KnobMap {
      * @param design the design
      * @param condition line and temperature
      * @param rampOhms R_E, ohm, above 0
-     * @throws RefusedCircuit as {@link Firing}
+     * @throws clipramp.circuit.RefusedCircuit as {@link Firing}
      */
     public static OperatingPoint atRampOhms(Design design, Condition condition, double rampOhms) {
         return point(design, condition, KnobSearch.position(design.ramp(), rampOhms), rampOhms);

@@ -15,7 +15,7 @@ import java.util.OptionalDouble;
  * What a load gets from the pulses of a solution. A resistor's means are closed forms (quadrature on a line with
  * harmonics); a filament is a resistor at the temperature that its own rms voltage gives it; an inductive load is run
  * from pulse to extinction until it repeats within 1e-12 of the crest current. Derivations: DEVELOPERS.md, Power, and
- * Loads with memory. Every method throws {@link RefusedCircuit} where the line has more than two zeros a period.
+ * Loads with memory. Every method throws {@link clipramp.circuit.RefusedCircuit} where the line has more than two zeros a period.
  */
 public final class LoadPower {
     private LoadPower() {}

@@ -101,7 +101,7 @@ public final class SwiftPoint {
         return network;
     }
 
-    /** Firing angle from the zero of the line, rad, of the positive half cycle where the unit hunts; NaN where the thyristor stays off. */
+    /** Firing angle from the line's zero, rad (the positive one's where the unit hunts); NaN where the thyristor stays off. */
     public double firingRad() {
         return firing.firingRad();
     }

@@ -55,7 +55,7 @@ public final class QuantityText {
         return format(value, Unit.NUMBER, digits);
     }
 
-    /** A value with a fixed number of decimals, 0 or more, so that a column lines up; what rounds to nothing has no sign. */
+    /** A value with a fixed number of decimals, so that a column lines up; what rounds to nothing has no sign. */
     public static String fixed(double value, int decimals) {
         String text = String.format(Locale.ROOT, "%." + decimals + "f", value);
         return text.matches("-0(\\.0*)?") ? text.substring(1) : text;
