@@ -19,7 +19,14 @@ interface Actions {
     /** Asks for a file of readings and takes it apart. */
     void openReadings(Consumer<ReadingsTable> then);
 
-    void saveReadings(ReadingsTable table);
+    /** Asks where to save readings; {@code then} runs once they are saved. */
+    void saveReadings(ReadingsTable table, Runnable then);
+
+    /** Asks whether readings that are in no file give way to others, and goes on if they do. */
+    void replaceReadings(Runnable then);
+
+    /** Asks whether readings that are in no file are saved first, and goes on unless the user would rather go back. */
+    void leaveReadings(Runnable save, Runnable then);
 
     /** Takes a file that was dropped on the window: readings onto the Fit page, anything else as a design. */
     void takeFile(Path file);

@@ -159,10 +159,25 @@ final class DeskWindow {
         mark();
     }
 
-    /** Brings readings up where a unit is fitted to them. */
+    /** Brings readings from a file up where a unit is fitted to them. */
     void showReadings(ReadingsTable readings) {
         showPage(Page.FIT);
-        fit.get().load(readings);
+        fit.get().offer(readings);
+    }
+
+    /** Brings readings back that were typed and never saved. */
+    void takeBack(ReadingsTable readings) {
+        showPage(Page.FIT);
+        fit.get().takeBack(readings);
+    }
+
+    /** Goes on once readings that are in no file are saved or given up. */
+    void whenReadingsSaved(Runnable then) {
+        if (fit.isMade()) {
+            fit.get().whenSaved(then);
+        } else {
+            then.run();
+        }
     }
 
     private PageView view(Page of) {

@@ -20,6 +20,8 @@ import javafx.stage.Window;
 final class Dialogs {
     static final ButtonType SAVE = new ButtonType("Save", ButtonData.YES);
     static final ButtonType DISCARD = new ButtonType("Do not save", ButtonData.NO);
+    static final ButtonType REPLACE = new ButtonType("Replace them", ButtonData.YES);
+    private static final ButtonType LEAVE = new ButtonType("Keep them", ButtonData.CANCEL_CLOSE);
     static final ButtonType BACK = new ButtonType("Back to the design", ButtonData.CANCEL_CLOSE);
     private static final ButtonType CLOSE = new ButtonType("Close", ButtonData.OK_DONE);
     private static final double TEXT_EMS = 46;
@@ -42,6 +44,18 @@ final class Dialogs {
     void unsaved(String name, Consumer<ButtonType> then) {
         Label words = words("“" + name + "” differs from what is saved.");
         show("unsaved", "Save the design first?", words, List.of(SAVE, DISCARD, BACK), then);
+    }
+
+    /** Whether readings that are in no file are saved, given up, or gone on with. */
+    void unsavedReadings(Consumer<ButtonType> then) {
+        Label words = words("The readings on the page Fit are in no file.");
+        show("unsaved-readings", "Save the readings first?", words, List.of(SAVE, DISCARD, BACK), then);
+    }
+
+    /** Whether readings that are in no file give way to others. */
+    void replaceReadings(Consumer<ButtonType> then) {
+        Label words = words("The readings on the page Fit are in no file.");
+        show("replace", "Replace the readings?", words, List.of(REPLACE, LEAVE), then);
     }
 
     /** A long text with a heading. */

@@ -38,7 +38,7 @@ final class FileActions {
     }
 
     void recover(Recovery.Left work) {
-        whenSaved(() -> draft.recover(work));
+        whenSaved(() -> draft.recover(work, () -> work.readings().ifPresent(service.window()::takeBack)));
     }
 
     void forget(Recovery.Left work) {

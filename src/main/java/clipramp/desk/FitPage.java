@@ -45,6 +45,11 @@ final class FitPage implements PageView {
     private Optional<Boolean> knob = Optional.empty();
     private Optional<Fitting.Answer> told = Optional.empty();
     private boolean typed;
+    /** The readings as some file has them. */
+    private Optional<ReadingsTable> saved = Optional.empty();
+
+    /** The readings as they are kept against a sudden end. */
+    private Optional<ReadingsTable> kept = Optional.empty();
 
     FitPage(Theme theme, Draft draft, LongRun<Fitting.Asked, Fitting.Answer> run, Actions actions) {
         this.draft = draft;
@@ -86,7 +91,7 @@ final class FitPage implements PageView {
         Button open = new Button("Open readings…");
         open.setId("fit-open");
         open.setAccessibleText("Open a file of readings, comma-separated");
-        open.setOnAction(event -> actions.openReadings(this::load));
+        open.setOnAction(event -> actions.openReadings(this::offer));
         Button paste = new Button("Paste");
         paste.setId("fit-paste");
         paste.setAccessibleText("Paste a table from the clipboard, from the first line on");
@@ -94,7 +99,7 @@ final class FitPage implements PageView {
         Button save = new Button("Save readings…");
         save.setId("fit-save");
         save.setAccessibleText("Save the readings as a file, comma-separated");
-        save.setOnAction(event -> actions.saveReadings(table.sheet().table()));
+        save.setOnAction(event -> saveThen(() -> {}));
         take.setId("fit-take");
         take.setOnAction(event -> take());
         state.setId("fit-state");
@@ -114,14 +119,14 @@ final class FitPage implements PageView {
             boolean turns = sheet.design().ramp().pot().isPresent();
             if (!knob.equals(Optional.of(turns)) && !typed) {
                 table.show(new BenchSheet(turns));
-                offer();
+                offerColumns();
             }
             knob = Optional.of(turns);
         });
         refresh();
     }
 
-    private void offer() {
+    private void offerColumns() {
         columns.getChildren().clear();
         List<BenchSheet.Column> all = table.sheet().columns();
         for (BenchSheet.Column column : all) {
@@ -138,13 +143,60 @@ final class FitPage implements PageView {
         }
     }
 
-    /** Takes readings in place of what stands in the table. */
-    void load(ReadingsTable read) {
+    /** Takes readings from a file in place of what stands in the table; what is not saved there is asked about first. */
+    void offer(ReadingsTable read) {
+        if (unsaved().isPresent()) {
+            actions.replaceReadings(() -> load(read, true));
+        } else {
+            load(read, true);
+        }
+    }
+
+    /** Takes readings back that were typed in another window and never saved. */
+    void takeBack(ReadingsTable read) {
+        load(read, false);
+    }
+
+    private void load(ReadingsTable read, boolean isSaved) {
         table.sheet().load(read);
         table.draw();
-        offer();
+        offerColumns();
         complaint.setText("");
+        saved = isSaved ? Optional.of(table.sheet().table()) : Optional.empty();
         typed();
+    }
+
+    private void saveThen(Runnable then) {
+        ReadingsTable written = table.sheet().table();
+        actions.saveReadings(written, () -> {
+            saved = Optional.of(written);
+            keep(unsaved(), then);
+        });
+    }
+
+    /** Goes on at once, or after the user has decided about readings that are in no file. */
+    void whenSaved(Runnable then) {
+        if (unsaved().isPresent()) {
+            actions.leaveReadings(() -> saveThen(then), () -> keep(Optional.empty(), then));
+        } else {
+            then.run();
+        }
+    }
+
+    /** What was read and stands in no file; empty where there is no such thing. */
+    private Optional<ReadingsTable> unsaved() {
+        ReadingsTable now = table.sheet().table();
+        boolean empty = now.rows().stream().allMatch(row -> row.stream().allMatch(String::isBlank));
+        return Optional.of(now).filter(all -> typed && !empty && !saved.equals(Optional.of(all)));
+    }
+
+    private void keep(Optional<ReadingsTable> readings, Runnable then) {
+        if (readings.equals(kept)) {
+            then.run();
+        } else {
+            kept = readings;
+            draft.keepReadings(readings, then);
+        }
     }
 
     private void pasteAll() {
@@ -153,13 +205,14 @@ final class FitPage implements PageView {
             complaint.setText("Tick a column first.");
         } else {
             table.paste(0, shown.get(0));
-            offer();
+            offerColumns();
         }
     }
 
     /** Readings have changed: what was marked may not hold. */
     private void typed() {
         typed = true;
+        keep(unsaved(), () -> {});
         table.mark(List.of());
         refresh();
     }

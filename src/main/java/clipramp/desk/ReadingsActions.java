@@ -3,7 +3,6 @@ package clipramp.desk;
 import clipramp.files.ReadingsTable;
 import clipramp.files.Source;
 import clipramp.files.WholeFile;
-import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
@@ -38,13 +37,15 @@ final class ReadingsActions {
         return String.valueOf(file.getFileName()).toLowerCase(Locale.ROOT).endsWith("." + FileAsk.Kind.CSV.ending());
     }
 
-    void save(ReadingsTable table, Optional<Path> beside) {
+    void save(ReadingsTable table, Optional<Path> beside, Runnable then) {
         service.asks()
                 .toWrite(FileAsk.Kind.CSV, NAME, beside)
                 .ifPresent(file -> service.away(
                         "The readings cannot be saved",
-                        () -> WholeFile.write(
-                                file, out -> out.write(table.csv().getBytes(StandardCharsets.UTF_8)), true),
-                        () -> service.window().say("Saved " + file.getFileName())));
+                        () -> WholeFile.write(file, table.csv(), true),
+                        () -> {
+                            then.run();
+                            service.window().say("Saved " + file.getFileName());
+                        }));
     }
 }

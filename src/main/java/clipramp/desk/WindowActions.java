@@ -143,8 +143,28 @@ final class WindowActions implements Actions {
     }
 
     @Override
-    public void saveReadings(ReadingsTable table) {
-        new ReadingsActions(served().service()).save(table, draft().file());
+    public void saveReadings(ReadingsTable table, Runnable then) {
+        new ReadingsActions(served().service()).save(table, draft().file(), then);
+    }
+
+    @Override
+    public void replaceReadings(Runnable then) {
+        dialogs().replaceReadings(answer -> {
+            if (answer == Dialogs.REPLACE) {
+                then.run();
+            }
+        });
+    }
+
+    @Override
+    public void leaveReadings(Runnable save, Runnable then) {
+        dialogs().unsavedReadings(answer -> {
+            if (answer == Dialogs.SAVE) {
+                save.run();
+            } else if (answer == Dialogs.DISCARD) {
+                then.run();
+            }
+        });
     }
 
     @Override
@@ -228,10 +248,10 @@ final class WindowActions implements Actions {
 
     @Override
     public void close() {
-        files().whenSaved(() -> {
+        files().whenSaved(() -> window().whenReadingsSaved(() -> {
             window().stage().hide();
             closed.run();
-        });
+        }));
     }
 
     private void rememberFile() {

@@ -108,6 +108,58 @@ class FitPageTest {
         }
     }
 
+    private static String cell(Harness window, String selector) {
+        return window.find(selector, TextField.class).getText();
+    }
+
+    @Test
+    void readingsThatWereTypedGiveWayToAFileOnlyWhereTheUserAgrees() throws Exception {
+        try (Harness window = onThePage(home)) {
+            window.type("#fit-cell-0-0", "33");
+            window.ask.answer = Files.writeString(home.resolve("mine.csv"), example(), StandardCharsets.UTF_8);
+            window.press("#fit-open");
+            Node question = window.find("#dialog-replace", Node.class);
+            window.robot.clickOn((Node) Texts.button(question, "Keep them"));
+            window.settle();
+            assertThat(cell(window, "#fit-cell-0-0")).isEqualTo("33");
+            window.press("#fit-open");
+            question = window.find("#dialog-replace", Node.class);
+            window.robot.clickOn((Node) Texts.button(question, "Replace them"));
+            assertThat(cell(window, "#fit-cell-5-4")).isEqualTo("4.55");
+            // What came from a file and stands there still is replaced unasked.
+            window.press("#fit-open");
+            window.settle();
+            assertThat(cell(window, "#fit-cell-5-4")).isEqualTo("4.55");
+        }
+    }
+
+    @Test
+    void readingsThatWereTypedAreAskedAboutBeforeTheWindowClosesAndSurviveASuddenEnd() throws Exception {
+        Path unsaved;
+        String left;
+        try (Harness window = onThePage(home)) {
+            unsaved = window.places.state().resolve("unsaved");
+            window.type("#fit-cell-0-0", "33");
+            window.await(() -> !window.model.isBusy());
+            Path kept = Files.list(unsaved).findFirst().orElseThrow();
+            left = Files.readString(kept);
+            assertThat(left).contains("# unsaved reading: 33,");
+            window.menu("File", "Close");
+            Node question = window.find("#dialog-unsaved", Node.class);
+            window.robot.clickOn((Node) Texts.button(question, "Do not save"));
+            question = window.find("#dialog-unsaved-readings", Node.class);
+            window.robot.clickOn((Node) Texts.button(question, "Do not save"));
+            window.await(() -> window.closed);
+            assertThat(unsaved).isEmptyDirectory();
+        }
+        // As a process that is gone would have left it: its id is above any that Linux gives.
+        Files.writeString(unsaved.resolve("99999999-1-1.yaml"), left);
+        try (Harness next = Harness.start(home)) {
+            next.click(".recover");
+            assertThat(cell(next, "#fit-cell-0-0")).isEqualTo("33");
+        }
+    }
+
     @Test
     void aReadingThatDoesNotBelongIsMarkedInTheTable() throws Exception {
         try (Harness window = onThePage(home)) {

@@ -1,6 +1,7 @@
 package clipramp.desk.model;
 
 import clipramp.files.DesignText;
+import clipramp.files.ReadingsTable;
 import clipramp.files.Source;
 import clipramp.files.WholeFile;
 import java.io.IOException;
@@ -120,8 +121,8 @@ public final class Draft {
                 });
     }
 
-    /** Puts work on the desk that a window left behind when its process ended. */
-    public void recover(Recovery.Left left) {
+    /** Puts work on the desk that a window left behind when its process ended; {@code then} runs once it lies there. */
+    public void recover(Recovery.Left left, Runnable then) {
         errands.fetch(
                 "The work that was left cannot be read",
                 () -> {
@@ -129,11 +130,13 @@ public final class Draft {
                             .map(f -> String.valueOf(f.getFileName()))
                             .orElse("recovered");
                     Sheet sheet = workshop.read(DesignText.of(new Source(title, left.text())), left.file());
-                    recovery.keep(left.file(), left.text());
-                    recovery.forget(left);
+                    recovery.take(left);
                     return sheet;
                 },
-                sheet -> put(sheet, left.file(), "recovered", ""));
+                sheet -> {
+                    put(sheet, left.file(), "recovered", "");
+                    then.run();
+                });
     }
 
     private void put(Sheet sheet, Optional<Path> belongs, String title, String savedText) {
@@ -142,6 +145,8 @@ public final class Draft {
         file = belongs;
         name = title;
         saved = savedText;
+        String text = sheet.text().text();
+        errands.run("The unsaved work could not be kept", () -> recovery.follow(belongs, text), () -> {});
         changed();
     }
 
@@ -259,7 +264,8 @@ public final class Draft {
                 "The design cannot be saved",
                 () -> {
                     WholeFile.write(absolute, sheet.text().text(), true);
-                    recovery.forget();
+                    recovery.forgetDesign();
+                    recovery.follow(Optional.of(absolute), sheet.text().text());
                 },
                 () -> {
                     file = Optional.of(absolute);
@@ -274,8 +280,18 @@ public final class Draft {
         errands.run("The file cannot be written", () -> WholeFile.write(target, out -> out.write(content), true), then);
     }
 
-    /** Gives the unsaved work up. */
+    /**
+     * Keeps readings that were typed against a sudden end.
+     *
+     * @param typed the readings; empty once they are saved or given up
+     * @param then runs once they are kept
+     */
+    public void keepReadings(Optional<ReadingsTable> typed, Runnable then) {
+        errands.run("The readings could not be kept", () -> recovery.keepReadings(typed), then);
+    }
+
+    /** Gives unsaved changes of the design up. */
     public void abandon(Runnable then) {
-        errands.run("The unsaved work could not be forgotten", recovery::forget, then);
+        errands.run("The unsaved work could not be forgotten", recovery::forgetDesign, then);
     }
 }

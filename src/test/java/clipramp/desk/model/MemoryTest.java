@@ -4,6 +4,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 
 import clipramp.figures.NumberTable;
 import clipramp.files.Example;
+import clipramp.files.ReadingsTable;
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
@@ -75,6 +76,32 @@ class MemoryTest {
         assertThat(left.get(0).text()).isEqualTo("clipramp: 1\n");
         other.forget(left.get(0));
         assertThat(other.leftBehind()).isEmpty();
+    }
+
+    @Test
+    void typedReadingsAreKeptWithTheDesignUntilTheyAreSaved() throws IOException {
+        ReadingsTable typed = new ReadingsTable(
+                List.of("knob (%)", "firing angle (deg)", "note"), List.of(List.of("50", "75.2", "warm, \"noon\"")));
+        Recovery own = new Recovery(places(), ProcessHandle.current(), 1);
+        own.follow(Optional.of(folder.resolve("mine.yaml")), "clipramp: 1\n# unsaved reading: says the author's remark\n");
+        Path unsaved = places().state().resolve("unsaved");
+        assertThat(unsaved).doesNotExist();
+        own.keepReadings(Optional.of(typed));
+        assertThat(unsaved).isDirectoryContaining(file -> true);
+        Path left = unsaved.resolve(ProcessHandle.current().pid() + "-1-1.yaml");
+        Files.copy(Files.list(unsaved).findFirst().orElseThrow(), left);
+        Recovery other = new Recovery(places(), ProcessHandle.current(), 2);
+        assertThat(other.leftBehind()).singleElement().satisfies(work -> {
+            assertThat(work.file()).hasValue(folder.resolve("mine.yaml"));
+            assertThat(work.text()).isEqualTo("clipramp: 1\n# unsaved reading: says the author's remark\n");
+            assertThat(work.readings()).hasValue(typed);
+        });
+        own.keep(Optional.of(folder.resolve("mine.yaml")), "clipramp: 1\ntitle: changed\n");
+        own.forgetDesign();
+        Files.delete(left);
+        assertThat(unsaved).isDirectoryContaining(file -> true);
+        own.keepReadings(Optional.empty());
+        assertThat(unsaved).isEmptyDirectory();
     }
 
     @Test
