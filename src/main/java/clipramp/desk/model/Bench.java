@@ -44,6 +44,7 @@ public final class Bench {
      * @param points operating points at even steps of rotation; one for a fixed ramp
      */
     public record Curve(Design design, Condition condition, List<OperatingPoint> points) {
+        /** Keeps the points as they are. */
         public Curve {
             points = List.copyOf(points);
         }
@@ -69,10 +70,12 @@ public final class Bench {
         return new Curve(knob.design(), knob.condition(), KnobMap.of(knob.design(), knob.condition(), CURVE_POINTS));
     }
 
+    /** Told at home whenever the knob was read anew. */
     public void onReading(Runnable listener) {
         readingListeners.add(listener);
     }
 
+    /** Told at home whenever there is another power curve, or another spread over it. */
     public void onCurve(Runnable listener) {
         curveListeners.add(listener);
     }
@@ -94,17 +97,17 @@ public final class Bench {
         set(new Setting.AtKnob(Math.min(1, Math.max(0, position))));
     }
 
-    /** Turns the knob by a share of its rotation. */
+    /** Turns the knob by a share of its rotation, -1..1. */
     public void turnBy(double share) {
         turnTo(position() + share);
     }
 
-    /** Moves the firing line; the ramp's resistance follows. */
+    /** Moves the firing line to an angle, rad; the ramp's resistance follows. */
     public void fireAt(double rad) {
         set(new Setting.AtAngle(rad));
     }
 
-    /** Moves the firing line from where it is. */
+    /** Moves the firing line from where it is by an angle, rad; earlier where it is negative. */
     public void fireLaterBy(double rad) {
         double from = aimedRad.orElseGet(() ->
                 reading.map(r -> r.firingRad().orElse(Math.PI / 2)).orElse(Math.PI / 2));
@@ -142,10 +145,12 @@ public final class Bench {
         return reading.map(r -> r.point().position().orElse(0.5)).orElse(0.5);
     }
 
+    /** What was read last; empty before the first design. */
     public Optional<Reading> reading() {
         return reading;
     }
 
+    /** The power curve that was solved last; empty before the first design. */
     public Optional<Curve> curve() {
         return curve;
     }

@@ -45,14 +45,17 @@ public final class BenchSheet {
             return accuracy;
         }
 
+        /** Takes an accuracy as typed, such as 1 or 2 %; one decimal comma becomes a dot. */
         public void setAccuracy(String typed) {
             accuracy = tidied(typed);
         }
 
+        /** Whether it is to be seen. */
         public boolean isShown() {
             return shown;
         }
 
+        /** Shows it or hides it; what stands in it stays. */
         public void setShown(boolean wanted) {
             shown = wanted;
         }
@@ -91,6 +94,7 @@ public final class BenchSheet {
         return columns.stream().filter(Column::isShown).toList();
     }
 
+    /** Rows there are, empty ones included. */
     public int rowCount() {
         return rows.size();
     }
@@ -102,6 +106,7 @@ public final class BenchSheet {
         }
     }
 
+    /** What stands in a cell; empty where nothing does. Rows count from 0. */
     public String cell(int row, Column column) {
         return rows.get(row).getOrDefault(column.head(), "");
     }

@@ -10,6 +10,8 @@ import java.util.List;
 /** The safety cautions that go with the program. */
 public final class Cautions {
     /**
+     * One paragraph.
+     *
      * @param heading whether it is a heading
      * @param text the words
      */

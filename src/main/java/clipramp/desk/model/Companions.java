@@ -26,6 +26,8 @@ final class Companions {
     private static final String BASE_TWO = "470 Ω ±5 % 0.25 W";
 
     /**
+     * One key that changes.
+     *
      * @param key design key
      * @param value what is to stand there; empty to take the key out
      */

@@ -37,6 +37,8 @@ public final class DeskModel {
     private Optional<Judgement> judgement = Optional.empty();
 
     /**
+     * An empty desk.
+     *
      * @param workers where work is done
      * @param workshop reads and edits design files
      * @param recovery keeps unsaved work
@@ -80,10 +82,12 @@ public final class DeskModel {
         judgementListeners.forEach(Runnable::run);
     }
 
+    /** The design file on the desk. */
     public Draft draft() {
         return draft;
     }
 
+    /** Draws many units. */
     public SpreadRun spread() {
         return spread;
     }
@@ -108,10 +112,12 @@ public final class DeskModel {
         return faults;
     }
 
+    /** The line current at the knob's setting. */
     public LineNow line() {
         return line;
     }
 
+    /** Where the design is solved and its knob turned. */
     public Bench bench() {
         return bench;
     }
@@ -121,10 +127,12 @@ public final class DeskModel {
         judgementListeners.add(listener);
     }
 
+    /** Told whenever another condition was chosen. */
     public void onCondition(Runnable listener) {
         conditionListeners.add(listener);
     }
 
+    /** The margins as they were judged last; empty before the first design. */
     public Optional<Judgement> judgement() {
         return judgement;
     }
@@ -134,10 +142,12 @@ public final class DeskModel {
         return draft.isBusy() || judge.isBusy() || bench.isBusy() || proposing.isRunning() || line.isBusy();
     }
 
+    /** What lanes, knob and margins are shown at. */
     public ViewCondition condition() {
         return condition;
     }
 
+    /** Shows lanes, knob and margins at another condition. */
     public void setCondition(ViewCondition other) {
         condition = other;
         draft.sheet().ifPresent(this::solve);

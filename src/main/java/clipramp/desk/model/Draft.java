@@ -46,6 +46,7 @@ public final class Draft {
         this.errands = new Errands(workers, troubles);
     }
 
+    /** What reads and edits its text. */
     public Workshop workshop() {
         return workshop;
     }
@@ -55,6 +56,7 @@ public final class Draft {
         listeners.add(listener);
     }
 
+    /** Whether a design lies on the desk. */
     public boolean isOpen() {
         return history.isPresent();
     }
@@ -64,6 +66,7 @@ public final class Draft {
         return history.map(History::now);
     }
 
+    /** Where the design is saved; empty where it never was. */
     public Optional<Path> file() {
         return file;
     }
@@ -166,7 +169,13 @@ public final class Draft {
         edit(label + " to " + value, sheet -> sheet.text().withValue(key, value), done);
     }
 
-    /** Chooses a word at a key, with whatever else must change for the circuit to stay sound. */
+    /**
+     * Chooses a word at a key, with whatever else must change for the circuit to stay sound.
+     *
+     * @param key design key
+     * @param word the choice
+     * @param done told at home what was wrong with it, or nothing
+     */
     public void choose(String key, String word, Consumer<Optional<Trouble>> done) {
         edit(
                 key + " to " + word,
@@ -186,7 +195,13 @@ public final class Draft {
         return workshop.isProgrammable(word, file);
     }
 
-    /** Changes the text by one step that can be taken back. */
+    /**
+     * Changes the text by one step that can be taken back.
+     *
+     * @param stepName what the step is called by
+     * @param change makes the new text, away from home
+     * @param done told at home what was wrong with it, or nothing
+     */
     public void edit(String stepName, Function<Sheet, DesignText> change, Consumer<Optional<Trouble>> done) {
         edits.add(new Edit(stepName, change, done));
         nextEdit();
@@ -231,18 +246,22 @@ public final class Draft {
         nextEdit();
     }
 
+    /** What undo would take back; empty where there is nothing. */
     public Optional<String> undoName() {
         return history.flatMap(History::undoName);
     }
 
+    /** What redo would do again; empty where there is nothing. */
     public Optional<String> redoName() {
         return history.flatMap(History::redoName);
     }
 
+    /** Takes the last step back, if there is one. */
     public void undo() {
         step(History::undo);
     }
 
+    /** Does the step again that was taken back last, if there is one. */
     public void redo() {
         step(History::redo);
     }
@@ -257,7 +276,7 @@ public final class Draft {
         });
     }
 
-    /** Saves the design, whole or not at all. */
+    /** Saves the design, whole or not at all, and works on under that file's name; {@code then} runs once it is saved. */
     public void save(Path target, Runnable then) {
         Path absolute = target.toAbsolutePath().normalize();
         sheet().ifPresent(sheet -> errands.run(
@@ -275,7 +294,7 @@ public final class Draft {
                 }));
     }
 
-    /** Writes any other file, such as a picture or the record, whole or not at all. */
+    /** Writes any other file, such as a picture or the record, whole or not at all; {@code then} runs once it is written. */
     public void export(Path target, byte[] content, Runnable then) {
         errands.run("The file cannot be written", () -> WholeFile.write(target, out -> out.write(content), true), then);
     }
@@ -290,7 +309,7 @@ public final class Draft {
         errands.run("The readings could not be kept", () -> recovery.keepReadings(typed), then);
     }
 
-    /** Gives unsaved changes of the design up. */
+    /** Gives unsaved changes of the design up; {@code then} runs once nothing is kept of them. */
     public void abandon(Runnable then) {
         errands.run("The unsaved work could not be forgotten", recovery::forgetDesign, then);
     }

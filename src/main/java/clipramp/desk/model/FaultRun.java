@@ -9,13 +9,17 @@ import java.util.Optional;
 /** Works every single fault of a design out, away from the window. */
 public final class FaultRun {
     /**
+     * What is to be worked out.
+     *
      * @param loaded the design as read
      * @param condition line and temperature that the figures hold at
      */
     public record Asked(LoadedDesign loaded, Condition condition) {}
 
     /**
-     * @param asked what of
+     * What came of it.
+     *
+     * @param asked what was asked
      * @param sheet every fault
      */
     public record Answer(Asked asked, FaultSheet sheet) {}
@@ -32,7 +36,7 @@ public final class FaultRun {
         return new Answer(asked, sheet);
     }
 
-    /** What is to be asked of a design as it stands. */
+    /** What is to be asked of a design as it stands; empty where none lies on the desk. */
     public static Optional<Asked> of(Draft draft, ViewCondition condition) {
         return draft.sheet().map(sheet -> new Asked(sheet.loaded(), condition.solvedAt(sheet.design())));
     }

@@ -27,9 +27,10 @@ public final class FaultWords {
                     Probe.TELLING.stream().map(p -> p.point() + " " + p.meter().word() + " V"))
             .toList();
 
-    /** Where the fits stand, and from where the test points do. */
+    /** In which column of the table the fits stand, counted from 0. */
     public static final int FITS = 1;
 
+    /** From which column of the table the test points stand, counted from 0. */
     public static final int POINTS_FROM = 5;
     private static final String NOTHING = "–";
     private static final double LEAST_WATTS = 1e-3;
@@ -38,6 +39,7 @@ public final class FaultWords {
     private final FaultSheet sheet;
     private final Map<String, String> names;
 
+    /** The words of one sheet. */
     public FaultWords(FaultSheet sheet) {
         this.sheet = sheet;
         this.names = Designators.of(sheet.design());

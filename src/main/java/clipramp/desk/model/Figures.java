@@ -7,7 +7,17 @@ import clipramp.units.Unit;
 import java.util.Locale;
 import java.util.OptionalDouble;
 
-/** A reading as the words and figures that stand under the lanes. */
+/**
+ * A reading as the words and figures that stand under the lanes.
+ *
+ * @param angle firing angle with its sign, or none
+ * @param delay from the line's zero to the firing pulse, with unit
+ * @param resistance whole R_E, with unit
+ * @param position where the knob stands, in per cent, or why it stands nowhere
+ * @param power load power, with unit
+ * @param share the same in per cent of full power
+ * @param state what the circuit does, in a few words
+ */
 public record Figures(
         String angle, String delay, String resistance, String position, String power, String share, String state) {
     private static final int DIGITS = 3;

@@ -21,6 +21,8 @@ import java.util.OptionalDouble;
 /** From what was read on the bench to the unit as built. */
 public final class Fitting {
     /**
+     * What is to be fitted.
+     *
      * @param sheet the design that the unit was built to
      * @param file where it lies, for profiles beside it
      * @param name what the readings are called
@@ -37,12 +39,15 @@ public final class Fitting {
             OptionalDouble lineVolts) {}
 
     /**
+     * What came of it.
+     *
      * @param asked what was fitted
      * @param result what the unit is
      * @param built the design with the unit's values
      * @param notes what to know about both
      */
     public record Answer(Asked asked, FitResult result, Sheet built, List<String> notes) {
+        /** Keeps the notes as they are. */
         public Answer {
             notes = List.copyOf(notes);
         }

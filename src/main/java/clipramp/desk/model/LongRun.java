@@ -25,6 +25,13 @@ public final class LongRun<Q, A> {
      */
     @FunctionalInterface
     public interface Work<Q, A> {
+        /**
+         * Does it, away from home.
+         *
+         * @param request what was asked
+         * @param telling told of the steps
+         * @throws CancellationException where a watch was told that the run is to end
+         */
         A done(Q request, Telling telling);
     }
 
@@ -42,11 +49,14 @@ public final class LongRun<Q, A> {
     /** Progress in words. */
     @FunctionalInterface
     public interface Words {
+        /** Words for so many steps done, of so many in all. */
         String of(int done, int of);
     }
 
     /**
-     * @param words how far it is
+     * How far a run is.
+     *
+     * @param words in words
      * @param share the same as a share, 0..1; empty where nobody knows how much there will be
      */
     public record Progress(String words, OptionalDouble share) {}
@@ -154,7 +164,7 @@ public final class LongRun<Q, A> {
         changed();
     }
 
-    /** Ends the run that goes on, as soon as its work looks. */
+    /** Tells the run that goes on to end; it does as soon as its work asks the watch. */
     public void cancel() {
         running.ifPresent(r -> r.cancelled = true);
         changed();
@@ -167,6 +177,7 @@ public final class LongRun<Q, A> {
         changed();
     }
 
+    /** Whether a run goes on. */
     public boolean isRunning() {
         return running.isPresent();
     }
@@ -176,6 +187,7 @@ public final class LongRun<Q, A> {
         return running.map(r -> r.cancelled).orElse(false);
     }
 
+    /** How far the run is; empty before its first word. */
     public Optional<Progress> progress() {
         return progress;
     }

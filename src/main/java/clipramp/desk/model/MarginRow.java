@@ -39,7 +39,7 @@ public record MarginRow(
         String source,
         String remedy,
         List<String> parts) {
-    /** The track runs from ratio 0 to this. */
+    /** The ratio at the right end of the bar's track; 0 stands at its left end. */
     public static final double TRACK = 2;
 
     private static final double MOST_SHOWN = 100;

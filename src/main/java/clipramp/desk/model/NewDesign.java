@@ -47,7 +47,12 @@ public final class NewDesign {
         };
     }
 
-    /** The first answer that cannot be read, in words; the answers as they are to be written otherwise. */
+    /**
+     * Answers that were looked at.
+     *
+     * @param wish the answers as they are to be written, or as typed where one is refused
+     * @param refusal the first answer that cannot be read, in words; empty where all can
+     */
     public record Checked(Wish wish, Optional<String> refusal) {}
 
     /**

@@ -11,12 +11,14 @@ import java.util.List;
 
 /** The stations of the signal, in its order, and after them what is asked of the whole. */
 public enum PartGroup {
+    /** The line. */
     LINE("line") {
         @Override
         List<String> keys(Design design) {
             return List.of("line", "line.voltage", "line.frequency", "line.low", "line.high", "line.recorded");
         }
     },
+    /** The clipped supply. */
     CLIP("clip") {
         @Override
         List<String> keys(Design design) {
@@ -24,6 +26,7 @@ public enum PartGroup {
                     "clip.tap", "clip.rectifier", "clip.winding", "clip.dropper", "clip.zener", "clip.diode-drop");
         }
     },
+    /** The ramp. */
     RAMP("ramp") {
         @Override
         List<String> keys(Design design) {
@@ -42,6 +45,7 @@ public enum PartGroup {
             return keys;
         }
     },
+    /** The trigger device and its resistors. */
     TRIGGER("trigger") {
         @Override
         List<String> keys(Design design) {
@@ -50,6 +54,7 @@ public enum PartGroup {
                     : List.of("trigger.device", "trigger.base-one", "trigger.upper", "trigger.lower");
         }
     },
+    /** What the pulse passes on its way to the gate. */
     GATE("gate") {
         @Override
         List<String> keys(Design design) {
@@ -68,6 +73,7 @@ public enum PartGroup {
             return keys;
         }
     },
+    /** Stage, thyristor and load. */
     LOAD("load") {
         @Override
         List<String> keys(Design design) {
@@ -92,6 +98,7 @@ public enum PartGroup {
             return keys;
         }
     },
+    /** What is wanted of the knob, and the surroundings. */
     ASKED("asked") {
         @Override
         List<String> keys(Design design) {
@@ -111,6 +118,7 @@ public enum PartGroup {
         this.word = word;
     }
 
+    /** The word on its tab. */
     public String word() {
         return word;
     }

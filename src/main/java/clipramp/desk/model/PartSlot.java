@@ -71,6 +71,7 @@ public record PartSlot(
             Map.entry("wanted.highest", "highest wanted"),
             Map.entry("derating.resistors", "use of resistors"));
 
+    /** Keeps the choices as they are. */
     public PartSlot {
         choices = List.copyOf(choices);
     }
@@ -85,7 +86,14 @@ public record PartSlot(
         return text.isEmpty() ? standIn : text;
     }
 
-    /** Every place of a station that the design has. */
+    /**
+     * Every place of a station that the design has.
+     *
+     * @param group the station
+     * @param sheet the design as it stands
+     * @param workshop knows the profiles to choose from
+     * @param file where the design lies, for profiles beside it; empty where it was never saved
+     */
     public static List<PartSlot> of(PartGroup group, Sheet sheet, Workshop workshop, Optional<Path> file) {
         List<PartSlot> slots = new ArrayList<>();
         for (String path : group.keys(sheet.design())) {

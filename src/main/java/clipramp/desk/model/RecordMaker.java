@@ -92,7 +92,7 @@ public final class RecordMaker {
         listeners.forEach(Runnable::run);
     }
 
-    /** Chooses the paper; the record is laid out anew. */
+    /** Chooses the paper; a record that was asked for is laid out anew. */
     public void setSize(PageSize other) {
         size = other;
         wanted.ifPresent(w -> show(w.loaded(), w.file()));
@@ -109,7 +109,7 @@ public final class RecordMaker {
         spread = drawn;
     }
 
-    /** Pages are drawn for this zoom of the window. */
+    /** Draws the pages for a zoom of the window, above 0; 1 is 100 %. */
     public void setZoom(double other) {
         zoom = other;
         wanted.ifPresent(w -> show(w.loaded(), w.file()));

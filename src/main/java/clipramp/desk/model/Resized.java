@@ -33,12 +33,16 @@ public record Resized(
         Optional<Knobs> knobs,
         Optional<Steadied> steadied) {
     /**
+     * A knob before and after.
+     *
      * @param before the knob as it stands
      * @param after the straightest that was found
      */
     public record Knobs(KnobShape before, KnobShape after) {}
 
     /**
+     * Base two's resistor before and after.
+     *
      * @param found the flattest resistor, and what the published rules leave
      * @param nowOhms base two's resistor as it stands, ohm
      * @param nowDriftRad how far the firing angle moves with it, rad
@@ -56,11 +60,13 @@ public record Resized(
      * @param after what would stand there
      */
     public record Change(PartSlot slot, String before, String after) {
+        /** Whether anything else would stand there. */
         public boolean differs() {
             return !before.equals(after);
         }
     }
 
+    /** Keeps the lists as they are. */
     public Resized {
         reasons = List.copyOf(reasons);
         notes = List.copyOf(notes);

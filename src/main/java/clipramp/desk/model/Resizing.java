@@ -45,6 +45,8 @@ public final class Resizing {
     }
 
     /**
+     * What is looked for, and among what.
+     *
      * @param source the design, or as much of it as there is
      * @param file where it lies, for profiles beside it
      * @param before the design as it stands; empty for a new one
@@ -113,7 +115,7 @@ public final class Resizing {
     private Resized parts(Asked asked, PartialDesign partial, SizingRequest request, Telling telling) {
         if (partial.open().isEmpty()) {
             throw new IllegalArgumentException(
-                    "No part is free, so there is nothing to choose. Tick those that may" + " change.");
+                    "No part is free, so there is nothing to choose. Tick those that may change.");
         }
         SizingAnswer answer = Sizing.propose(request, telling.of(Resizing::candidates));
         return finished(asked, partial, request, answer, telling);

@@ -23,31 +23,41 @@ import java.util.Properties;
 public record Settings(Look look, int zoomPercent, boolean cautionsRead, List<Path> recent) {
     /** Which palette the window takes. */
     public enum Look {
+        /** As the system has it, where it can be asked. */
         SYSTEM,
+        /** Dark on light. */
         PAPER,
+        /** Light on dark. */
         INK
     }
 
+    /** Least zoom, per cent. */
     public static final int LEAST_ZOOM = 100;
+    /** Greatest zoom, per cent. */
     public static final int MOST_ZOOM = 200;
+    /** What holds on the first start. */
     public static final Settings FIRST = new Settings(Look.SYSTEM, LEAST_ZOOM, false, List.of());
 
     private static final String FILE = "desk.properties";
     private static final int MOST_RECENT = 8;
 
+    /** Keeps the zoom within its limits. */
     public Settings {
         zoomPercent = Math.max(LEAST_ZOOM, Math.min(MOST_ZOOM, zoomPercent));
         recent = List.copyOf(recent);
     }
 
+    /** The same with another palette. */
     public Settings withLook(Look other) {
         return new Settings(other, zoomPercent, cautionsRead, recent);
     }
 
+    /** The same at another zoom, kept within its limits. */
     public Settings withZoomPercent(int percent) {
         return new Settings(look, percent, cautionsRead, recent);
     }
 
+    /** The same with the safety cautions closed. */
     public Settings withCautionsRead() {
         return new Settings(look, zoomPercent, true, recent);
     }
@@ -95,7 +105,11 @@ public record Settings(Look look, int zoomPercent, boolean cautionsRead, List<Pa
         return text.matches("\\d{1,4}") ? Integer.parseInt(text) : LEAST_ZOOM;
     }
 
-    /** Writes them, whole or not at all. */
+    /**
+     * Writes them, whole or not at all.
+     *
+     * @throws IOException where they cannot be written
+     */
     public void save(Places places) throws IOException {
         Properties kept = new Properties();
         kept.setProperty("look", look.name().toLowerCase(Locale.ROOT));

@@ -11,6 +11,7 @@ import clipramp.files.LoadedDesign;
  * @param loaded what it says
  */
 public record Sheet(DesignText text, LoadedDesign loaded) {
+    /** The design that the text says. */
     public Design design() {
         return loaded.design();
     }

@@ -15,6 +15,8 @@ import java.util.function.Consumer;
 /** Draws many units of the design on the desk, tells how far it is, and can be cancelled: then the finished part counts. */
 public final class SpreadRun {
     /**
+     * What came of a run.
+     *
      * @param loaded the design as read when the run began
      * @param spread what its units do
      */
@@ -77,6 +79,7 @@ public final class SpreadRun {
         run.cancel();
     }
 
+    /** Whether units are being drawn. */
     public boolean isRunning() {
         return run.isRunning();
     }
@@ -86,6 +89,7 @@ public final class SpreadRun {
         return run.isEnding();
     }
 
+    /** How far it is; empty before the first run. */
     public Optional<LongRun.Progress> progress() {
         return run.progress().or(() -> beginning);
     }
@@ -95,6 +99,7 @@ public final class SpreadRun {
         return histogram;
     }
 
+    /** The last answer. */
     public Optional<Answer> answer() {
         return run.answer();
     }

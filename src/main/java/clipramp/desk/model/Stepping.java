@@ -22,6 +22,8 @@ public final class Stepping {
     private Stepping() {}
 
     /**
+     * An entry so many steps up or down.
+     *
      * @param key design key
      * @param text the entry as it stands
      * @param steps how many, negative for down

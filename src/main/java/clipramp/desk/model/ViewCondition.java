@@ -8,11 +8,17 @@ import java.util.OptionalDouble;
 
 /** The condition that lanes, knob and margins are shown at. */
 public enum ViewCondition {
+    /** Lanes and knob nominal, every margin at its worst. */
     WORST("worst case"),
+    /** Nominal line, 25 °C. */
     NOMINAL("nominal"),
+    /** The lowest line that the design must work at. */
     LOW_LINE("low line"),
+    /** The highest. */
     HIGH_LINE("high line"),
+    /** The coldest ambient. */
     COLD("cold"),
+    /** The hottest. */
     HOT("hot");
 
     private static final double ROOM_CELSIUS = 25;
@@ -23,6 +29,7 @@ public enum ViewCondition {
         this.word = word;
     }
 
+    /** What it is called. */
     public String word() {
         return word;
     }

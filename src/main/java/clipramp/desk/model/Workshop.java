@@ -65,7 +65,13 @@ public final class Workshop {
                 problem.message());
     }
 
-    /** Ids of the profiles that may stand at a key of a design; empty where none may. */
+    /**
+     * Ids of the profiles that may stand at a key of a design; empty where none may.
+     *
+     * @param key design key, such as clip.zener
+     * @param stage the design's, which says what kind of thyristor it takes
+     * @param file where the design lies, for profiles beside it; empty where it was never saved
+     */
     List<String> profileIds(String key, Stage stage, Optional<Path> file) {
         ProfileLibrary library = libraries.apply(file);
         return kinds(key, stage).flatMap(kind -> library.ids(kind).stream()).toList();
