@@ -135,11 +135,7 @@ final class FaultsText {
     }
 
     private String said(Burden burden) {
-        String part = names.getOrDefault(burden.part(), burden.part());
-        return burden.isUnlimited()
-                ? part + ", " + burden.what()
-                : part + " " + burden.what() + " " + Shown.amount(burden.borne(), burden.unit()) + " where it is rated "
-                        + Shown.amount(burden.rating(), burden.unit());
+        return burden.said(names.getOrDefault(burden.part(), burden.part()), Shown::amount);
     }
 
     private void ranking(List<Diagnosis.Candidate> ranked) {

@@ -24,7 +24,7 @@ final class LineText {
                 .amount("rms", current.rmsAmps(), Unit.AMPERE)
                 .amount("fundamental", current.fundamentalAmps(), Unit.AMPERE)
                 .amount("distortion", current.distortion(), Unit.FRACTION)
-                .amount("direct part", Math.abs(current.dcAmps()) < 1e-9 ? 0 : current.dcAmps(), Unit.AMPERE)
+                .amount("direct part", current.toldDcAmps(), Unit.AMPERE)
                 .fact("power factor", Shown.fixed(current.powerFactor(), 3))
                 .fact("of displacement", Shown.fixed(current.displacementFactor(), 3))
                 .lines());

@@ -29,7 +29,6 @@ import picocli.CommandLine.Option;
             "Exit code 1 when a drawn unit misses what is wanted or fails a margin."
         })
 final class SpreadCommand extends Analysis {
-    private static final int MOST_UNITS = 2_000_000;
 
     @Option(
             names = "--samples",
@@ -95,10 +94,10 @@ final class SpreadCommand extends Analysis {
         SpreadOptions usual = SpreadOptions.DEFAULT;
         List<String> laws = Arrays.stream(DrawLaw.values()).map(DrawLaw::word).toList();
         return new SpreadOptions(
-                samples == null ? usual.samples() : Problems.whole("--samples", samples, 1, MOST_UNITS),
-                seed == null ? usual.seed() : Problems.whole("--seed", seed, 0, Integer.MAX_VALUE),
+                samples == null ? usual.samples() : Problems.whole("--samples", samples, 1, SpreadOptions.MOST_SAMPLES),
+                seed == null ? usual.seed() : Problems.whole("--seed", seed, 0, SpreadOptions.HIGHEST_SEED),
                 law == null ? usual.law() : DrawLaw.values()[laws.indexOf(Problems.word("--law", law, laws))],
-                judged == null ? usual.judged() : Problems.whole("--judged", judged, 0, MOST_UNITS));
+                judged == null ? usual.judged() : Problems.whole("--judged", judged, 0, SpreadOptions.MOST_SAMPLES));
     }
 
     private void answer(LoadedDesign loaded, SpreadResult result) {

@@ -94,10 +94,6 @@ final class BenchPage extends Pane implements PageView {
         return knob;
     }
 
-    PartsView parts() {
-        return parts;
-    }
-
     /** What it is put together from. */
     List<Region> pieces() {
         return List.of(leftScroll, tabs, parts.node(), right);

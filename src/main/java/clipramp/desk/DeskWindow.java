@@ -11,7 +11,6 @@ import clipramp.figures.CircuitFigure;
 import clipramp.figures.Figure;
 import clipramp.figures.HarmonicsFigure;
 import clipramp.files.ReadingsTable;
-import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.EnumMap;
 import java.util.List;
@@ -273,9 +272,5 @@ final class DeskWindow {
                         .map(check -> new HarmonicsFigure(check, model.line().setting()));
             case CIRCUIT -> model.draft().sheet().map(s -> new CircuitFigure(s.design()));
         };
-    }
-
-    Optional<Path> file() {
-        return model.draft().file();
     }
 }

@@ -2,6 +2,7 @@ package clipramp.desk;
 
 import clipramp.desk.model.Bench;
 import clipramp.desk.model.Figures;
+import clipramp.sizing.KnobShape;
 import javafx.geometry.Pos;
 import javafx.scene.AccessibleRole;
 import javafx.scene.input.KeyEvent;
@@ -17,7 +18,6 @@ final class DialView {
     private static final double FINE = 0.001;
     private static final double STEP = 0.01;
     private static final double COARSE = 0.1;
-    private static final double TRAVEL_DEGREES = 270;
     private static final int MARKS = 10;
 
     private final Bench bench;
@@ -78,7 +78,7 @@ final class DialView {
         double x = event.getX() - pane.getWidth() / 2;
         double y = event.getY() - pane.getHeight() / 2;
         double fromTop = Math.toDegrees(Math.atan2(x, -y));
-        bench.turnTo((fromTop + TRAVEL_DEGREES / 2) / TRAVEL_DEGREES);
+        bench.turnTo((fromTop + KnobShape.ROTATION_DEGREES / 2) / KnobShape.ROTATION_DEGREES);
         refresh();
     }
 
@@ -122,7 +122,7 @@ final class DialView {
         }
 
         private static void place(Line line, double x, double y, double from, double to, double position) {
-            double angle = Math.toRadians(-TRAVEL_DEGREES / 2 + TRAVEL_DEGREES * position);
+            double angle = Math.toRadians(-KnobShape.ROTATION_DEGREES / 2 + KnobShape.ROTATION_DEGREES * position);
             line.setStartX(x + from * Math.sin(angle));
             line.setStartY(y - from * Math.cos(angle));
             line.setEndX(x + to * Math.sin(angle));

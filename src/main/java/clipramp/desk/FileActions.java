@@ -4,6 +4,7 @@ import clipramp.desk.model.Draft;
 import clipramp.desk.model.RecordMaker;
 import clipramp.desk.model.Recovery;
 import clipramp.desk.model.Trouble;
+import clipramp.files.WholeFile;
 import java.io.IOException;
 import java.nio.file.Path;
 import java.util.function.Consumer;
@@ -96,8 +97,10 @@ final class FileActions {
             String name = draft.name().replaceFirst("\\.ya?ml$", "") + ".pdf";
             service.asks()
                     .toWrite(FileAsk.Kind.RECORD, name, draft.file())
-                    .ifPresent(file ->
-                            draft.export(file, pdf, () -> service.window().say("Saved " + file.getFileName())));
+                    .ifPresent(file -> service.away(
+                            "The record cannot be saved",
+                            () -> WholeFile.write(file, out -> out.write(pdf), true),
+                            () -> service.window().say("Saved " + file.getFileName())));
         });
     }
 }

@@ -99,7 +99,7 @@ final class MarginRowView {
         }
         bar.set(margin.barShare(), margin.limitShare());
         row.setId("margin-" + margin.id());
-        row.setAccessibleText(margin.sentence() + ". Opens to formula, source and remedy.");
+        row.setAccessibleText(margin.sentence() + ". Opens to formula, source and what to do.");
         if (open) {
             fillDetails();
         }

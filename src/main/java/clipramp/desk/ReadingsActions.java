@@ -41,9 +41,7 @@ final class ReadingsActions {
         service.asks()
                 .toWrite(FileAsk.Kind.CSV, NAME, beside)
                 .ifPresent(file -> service.away(
-                        "The readings cannot be saved",
-                        () -> WholeFile.write(file, table.csv(), true),
-                        () -> {
+                        "The readings cannot be saved", () -> WholeFile.write(file, table.csv(), true), () -> {
                             then.run();
                             service.window().say("Saved " + file.getFileName());
                         }));

@@ -31,7 +31,6 @@ import javafx.scene.layout.VBox;
 
 /** What the next thousand units do: asked on the left, drawn in the middle while it runs, told underneath. */
 final class SpreadPage implements PageView {
-    private static final int MOST_UNITS = 1_000_000;
     private static final double HISTOGRAM_SHARE = 0.42;
     private static final double CURVES_SHARE = 0.55;
     private static final double LEAST_HISTOGRAM = 200;
@@ -165,13 +164,14 @@ final class SpreadPage implements PageView {
     }
 
     private void start() {
-        Optional<Long> count = whole(units, 1, MOST_UNITS);
-        Optional<Long> number = whole(seed, 0, Long.MAX_VALUE);
+        Optional<Long> count = whole(units, 1, SpreadOptions.MOST_SAMPLES);
+        Optional<Long> number = whole(seed, 0, SpreadOptions.HIGHEST_SEED);
         if (count.isEmpty()) {
-            complaint.setText(
-                    "Units are a whole number from 1 to " + MOST_UNITS + ", not \"" + units.getText() + "\".");
+            complaint.setText("Units are a whole number from 1 to " + SpreadOptions.MOST_SAMPLES + ", not \""
+                    + units.getText() + "\".");
         } else if (number.isEmpty()) {
-            complaint.setText("The seed is a whole number, 0 or more, not \"" + seed.getText() + "\".");
+            complaint.setText("The seed is a whole number from 0 to " + SpreadOptions.HIGHEST_SEED + ", not \""
+                    + seed.getText() + "\".");
         } else {
             complaint.setText("");
             SpreadOptions options = new SpreadOptions(

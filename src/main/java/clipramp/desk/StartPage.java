@@ -101,7 +101,8 @@ final class StartPage {
             left.getChildren().add(new Label("Unsaved work was left when the program ended."));
         }
         for (Recovery.Left work : works) {
-            String name = work.file().map(f -> String.valueOf(f.getFileName())).orElse("a design that was never saved");
+            String name = work.file().map(f -> String.valueOf(f.getFileName())).orElse("a design that was never saved")
+                    + (work.readings().isPresent() ? " with its readings" : "");
             Button back = new Button("Take back " + name);
             back.getStyleClass().add("recover");
             back.setOnAction(event -> actions.recover(work));

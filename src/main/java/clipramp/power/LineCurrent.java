@@ -41,9 +41,17 @@ public record LineCurrent(
      */
     public record Harmonic(int order, double amps, double phaseRad) {}
 
+    /** Below this a direct part is what rounding leaves of two equal half cycles, A. */
+    private static final double ROUNDING_AMPS = 1e-9;
+
     /** Keeps a copy of the harmonics. */
     public LineCurrent {
         harmonics = List.copyOf(harmonics);
+    }
+
+    /** The direct part as it is told, A, signed: 0 where only rounding is left of it. */
+    public double toldDcAmps() {
+        return Math.abs(dcAmps) < ROUNDING_AMPS ? 0 : dcAmps;
     }
 
     /**

@@ -83,10 +83,6 @@ final class FaultsSection {
     }
 
     private String said(Burden burden) {
-        String part = names.getOrDefault(burden.part(), burden.part());
-        return burden.isUnlimited()
-                ? part + ", " + burden.what()
-                : part + " " + burden.what() + " " + Shown.brief(burden.borne(), burden.unit()) + " against "
-                        + Shown.brief(burden.rating(), burden.unit());
+        return burden.said(names.getOrDefault(burden.part(), burden.part()), Shown::brief);
     }
 }

@@ -12,7 +12,9 @@ import java.util.OptionalDouble;
 
 /** The line current: its orders beside the table that others will hold it against, and what the standard's rules say. */
 final class LineCurrentSection {
-    private static final double NO_DIRECT_PART = 1e-9;
+    /** Up to this an order is what rounding leaves, A. */
+    private static final double ROUNDING_AMPS = 1e-9;
+
     private static final int[] NUMBERS = {0, 1, 2, 3, 4, 5, 6, 7, 8, 9};
 
     private final Paper paper;
@@ -46,7 +48,6 @@ final class LineCurrentSection {
 
     private void totals() {
         LineCurrent current = check.worstSetting().current();
-        double dc = Math.abs(current.dcAmps()) < NO_DIRECT_PART ? 0 : current.dcAmps();
         Grid grid = new Grid(paper.faces(), new float[] {1.2f, 1, 1, 1, 1, 1, 1.3f, 1.2f}, 0, 1, 2, 3, 4, 5, 6, 7);
         grid.heads(
                 "knob",
@@ -62,7 +63,7 @@ final class LineCurrentSection {
                 Shown.quantity(check.worstSetting().watts(), Unit.WATT),
                 Shown.quantity(current.rmsAmps(), Unit.AMPERE),
                 Shown.quantity(current.fundamentalAmps(), Unit.AMPERE),
-                Shown.quantity(dc, Unit.AMPERE),
+                Shown.quantity(current.toldDcAmps(), Unit.AMPERE),
                 Shown.quantity(current.distortion(), Unit.FRACTION),
                 Shown.number(current.displacementFactor(), 3),
                 Shown.number(current.powerFactor(), 3));
@@ -99,7 +100,7 @@ final class LineCurrentSection {
     }
 
     private static List<String> cells(Order order) {
-        boolean flows = order.amps() > NO_DIRECT_PART;
+        boolean flows = order.amps() > ROUNDING_AMPS;
         return List.of(
                 Integer.toString(order.order()),
                 flows ? Shown.brief(order.amps(), Unit.AMPERE) : Shown.NOTHING,

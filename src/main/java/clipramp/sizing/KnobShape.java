@@ -29,8 +29,10 @@ public record KnobShape(
         List<Double> values) {
     /** How far a pot turns, degrees (common practice for single-turn pots). */
     public static final double ROTATION_DEGREES = 270;
+
     /** One for every two degrees. */
     private static final int STEPS = 135;
+
     /** Share of full that nobody sees or feels: half a per cent. */
     private static final double UNNOTICED = 0.005;
 

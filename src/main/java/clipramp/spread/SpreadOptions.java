@@ -12,6 +12,12 @@ public record SpreadOptions(int samples, long seed, DrawLaw law, int judged) {
     /** Units to draw, unless said. */
     public static final int USUAL_SAMPLES = 20_000;
 
+    /** Most units that are drawn: their figures lie in memory together. */
+    public static final int MOST_SAMPLES = 2_000_000;
+
+    /** Highest seed that window and command take, so that either draws what the other drew. */
+    public static final int HIGHEST_SEED = Integer.MAX_VALUE;
+
     /** Units put before the judge, unless said. */
     public static final int USUAL_JUDGED = 200;
 

@@ -94,7 +94,7 @@ class FaultsPageTest {
             });
             assertThat(detail(window))
                     .contains("dropper R1 shorted", "Over its rating, burns next", "TP1", "TP5")
-                    .anyMatch(text -> text.startsWith("V1 power: ") && text.contains("where it is rated 1 W"));
+                    .anyMatch(text -> text.startsWith("V1 power ") && text.contains("where it is rated 1 W"));
             assertThat(window.find("#faults-live", Label.class).getText()).contains("live at line potential");
         }
     }

@@ -117,7 +117,7 @@ class SpreadPageTest {
                 return null;
             });
             window.press("#spread-start");
-            assertThat(window.find("#spread-complaint", Label.class).getText()).contains("1 to 1000000", "many");
+            assertThat(window.find("#spread-complaint", Label.class).getText()).contains("1 to 2000000", "many");
             assertThat(window.model.spread().isRunning()).isFalse();
             assertThat(window.find("#page-spread", ToggleButton.class).isSelected())
                     .isTrue();

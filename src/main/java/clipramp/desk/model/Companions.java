@@ -6,6 +6,7 @@ import clipramp.circuit.GateDrive;
 import clipramp.circuit.Load;
 import clipramp.circuit.Stage;
 import clipramp.circuit.Trigger;
+import clipramp.files.DesignText;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
@@ -31,19 +32,27 @@ final class Companions {
      * @param key design key
      * @param value what is to stand there; empty to take the key out
      */
-    public record Change(String key, String value) {}
+    record Change(String key, String value) {}
 
     private Companions() {}
 
     /**
-     * The choice itself and what goes with it, in the order in which they are written.
+     * The design's text with the choice itself and what goes with it.
      *
+     * @param sheet the design as it stands
      * @param key design key that is chosen for
      * @param word the choice
-     * @param design the design as it stands
      * @param programmable whether the choice is a programmable unijunction transistor
      */
-    static List<Change> of(String key, String word, Design design, boolean programmable) {
+    static DesignText chosen(Sheet sheet, String key, String word, boolean programmable) {
+        DesignText text = sheet.text();
+        for (Change change : of(key, word, sheet.design(), programmable)) {
+            text = change.value().isEmpty() ? text.without(change.key()) : text.withValue(change.key(), change.value());
+        }
+        return text;
+    }
+
+    private static List<Change> of(String key, String word, Design design, boolean programmable) {
         List<Change> changes = new ArrayList<>();
         changes.add(new Change(key, Extra.at(key).map(f -> f.written(word)).orElse(word)));
         if (key.equals("load.kind")) {

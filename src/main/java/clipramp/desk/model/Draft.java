@@ -112,13 +112,11 @@ public final class Draft {
 
     /** Puts a design on the desk that a search has found; {@code then} runs once it lies there. */
     public void take(Resized found, Runnable then) {
-        errands.fetch(
+        Sheet sheet = found.sheet();
+        errands.run(
                 "The design cannot be taken over",
+                () -> recovery.keep(Optional.empty(), sheet.text().text()),
                 () -> {
-                    recovery.keep(Optional.empty(), found.sheet().text().text());
-                    return found.sheet();
-                },
-                sheet -> {
                     put(sheet, Optional.empty(), sheet.text().name(), "");
                     then.run();
                 });
@@ -148,8 +146,10 @@ public final class Draft {
         file = belongs;
         name = title;
         saved = savedText;
-        String text = sheet.text().text();
-        errands.run("The unsaved work could not be kept", () -> recovery.follow(belongs, text), () -> {});
+        errands.run(
+                "The unsaved work could not be kept",
+                () -> recovery.follow(belongs, sheet.text().text()),
+                () -> {});
         changed();
     }
 
@@ -179,20 +179,8 @@ public final class Draft {
     public void choose(String key, String word, Consumer<Optional<Trouble>> done) {
         edit(
                 key + " to " + word,
-                sheet -> {
-                    DesignText text = sheet.text();
-                    for (Companions.Change change : Companions.of(key, word, sheet.design(), programmable(word))) {
-                        text = change.value().isEmpty()
-                                ? text.without(change.key())
-                                : text.withValue(change.key(), change.value());
-                    }
-                    return text;
-                },
+                sheet -> Companions.chosen(sheet, key, word, workshop.isProgrammable(word, file)),
                 done);
-    }
-
-    private boolean programmable(String word) {
-        return workshop.isProgrammable(word, file);
     }
 
     /**
@@ -292,11 +280,6 @@ public final class Draft {
                     changed();
                     then.run();
                 }));
-    }
-
-    /** Writes any other file, such as a picture or the record, whole or not at all; {@code then} runs once it is written. */
-    public void export(Path target, byte[] content, Runnable then) {
-        errands.run("The file cannot be written", () -> WholeFile.write(target, out -> out.write(content), true), then);
     }
 
     /**

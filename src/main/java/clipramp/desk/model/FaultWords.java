@@ -32,6 +32,7 @@ public final class FaultWords {
 
     /** From which column of the table the test points stand, counted from 0. */
     public static final int POINTS_FROM = 5;
+
     private static final String NOTHING = "–";
     private static final double LEAST_WATTS = 1e-3;
     private static final double WHOLE_FROM = 100;
@@ -116,12 +117,10 @@ public final class FaultWords {
     }
 
     private String said(Burden burden) {
-        String part = names.getOrDefault(burden.part(), burden.part());
-        return burden.isUnlimited()
-                ? part + ": " + burden.what() + "."
-                : part + " " + burden.what() + ": "
-                        + QuantityText.format(burden.borne(), burden.unit(), 3) + " where it is rated "
-                        + QuantityText.format(burden.rating(), burden.unit(), 3) + ".";
+        return burden.said(
+                        names.getOrDefault(burden.part(), burden.part()),
+                        (value, unit) -> QuantityText.format(value, unit, 3))
+                + ".";
     }
 
     /** What speaks for a candidate and what against it; empty where nothing was seen. */

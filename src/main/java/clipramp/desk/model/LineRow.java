@@ -1,7 +1,6 @@
 package clipramp.desk.model;
 
 import clipramp.margins.LineCheck;
-import clipramp.power.LineCurrent;
 import clipramp.units.QuantityText;
 import clipramp.units.Unit;
 import java.util.List;
@@ -16,7 +15,6 @@ import java.util.OptionalDouble;
  */
 public record LineRow(String name, String now, String worst) {
     private static final String NOTHING = "–";
-    private static final double NO_DIRECT_PART = 1e-9;
 
     /** Every figure, in the order of the page. */
     public static List<LineRow> all(LineCheck.Setting now, LineCheck.Setting worst) {
@@ -28,9 +26,9 @@ public record LineRow(String name, String now, String worst) {
                         "fundamental",
                         now.current().fundamentalAmps(),
                         worst.current().fundamentalAmps()),
-                amps("direct part", direct(now.current()), direct(worst.current())),
+                amps("direct part", now.current().toldDcAmps(), worst.current().toldDcAmps()),
                 row(
-                        "distortion (THD)",
+                        "distortion",
                         Unit.FRACTION,
                         now.current().distortion(),
                         worst.current().distortion()),
@@ -39,7 +37,7 @@ public record LineRow(String name, String now, String worst) {
                         factor(now.current().displacementFactor()),
                         factor(worst.current().displacementFactor())),
                 new LineRow(
-                        "true power factor",
+                        "power factor",
                         factor(now.current().powerFactor()),
                         factor(worst.current().powerFactor())));
     }
@@ -56,10 +54,6 @@ public record LineRow(String name, String now, String worst) {
                 + QuantityText.format(binding.limitAmps(), Unit.AMPERE, 3) + " in class A" + where
                 + ". Such a load would reach that limit at "
                 + QuantityText.format(check.bindsAtWatts(), Unit.WATT, 3) + " of full power.";
-    }
-
-    private static double direct(LineCurrent current) {
-        return Math.abs(current.dcAmps()) < NO_DIRECT_PART ? 0 : current.dcAmps();
     }
 
     private static LineRow amps(String name, double now, double worst) {

@@ -129,8 +129,9 @@ public final class Recovery {
         }
         StringBuilder whole = new StringBuilder(HEAD);
         whole.append(file.map(Path::toString).orElse(UNTITLED)).append('\n');
-        readings.ifPresent(table ->
-                table.csv().lines().forEach(line -> whole.append(READING).append(line).append('\n')));
+        readings.ifPresent(table -> table.csv()
+                .lines()
+                .forEach(line -> whole.append(READING).append(line).append('\n')));
         Files.createDirectories(folder);
         Path beside = own.resolveSibling(own.getFileName() + ".part");
         Files.writeString(beside, whole.append(text), StandardCharsets.UTF_8);

@@ -83,7 +83,8 @@ class MemoryTest {
         ReadingsTable typed = new ReadingsTable(
                 List.of("knob (%)", "firing angle (deg)", "note"), List.of(List.of("50", "75.2", "warm, \"noon\"")));
         Recovery own = new Recovery(places(), ProcessHandle.current(), 1);
-        own.follow(Optional.of(folder.resolve("mine.yaml")), "clipramp: 1\n# unsaved reading: says the author's remark\n");
+        own.follow(
+                Optional.of(folder.resolve("mine.yaml")), "clipramp: 1\n# unsaved reading: says the author's remark\n");
         Path unsaved = places().state().resolve("unsaved");
         assertThat(unsaved).doesNotExist();
         own.keepReadings(Optional.of(typed));
