@@ -23,6 +23,16 @@ final class DrawnNetworks {
         return new DrawnNetworks(seed).fill(seed % 3 == 0, true);
     }
 
+    /** Either coupling, with a ramp resistor that at the zener's voltage brings too little for the peak-point current. */
+    static Network starved(long seed) {
+        Network n = seed % 2 == 0 ? direct(seed) : throughTransformer(seed);
+        DrawnNetworks drawn = new DrawnNetworks(~seed);
+        n.peakCurrentAmps = drawn.between(3e-6, 5e-6);
+        n.rampOhms = n.zenerKneeVolts * (1 - n.peakShare) / n.peakCurrentAmps * drawn.between(1, 2);
+        n.capacitorFarads = drawn.between(1e-3, 3e-3) / n.rampOhms;
+        return n;
+    }
+
     /** Half cycle of a sinusoidal line that suits the network of the same seed. */
     static SourceWave sine(long seed) {
         DrawnNetworks drawn = new DrawnNetworks(seed);

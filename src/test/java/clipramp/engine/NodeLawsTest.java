@@ -166,13 +166,16 @@ class NodeLawsTest {
         }
     }
 
-    /** Nothing stored, no line: every switch stands exactly on its edge and stays open. */
+    /** Nothing stored, no line: every switch stands exactly on its edge and opens. */
     @Test
-    void aDeadCircuitSwitchesNothingOn() {
+    void aDeadCircuitSwitchesEverythingOff() {
         Network n = DrawnNetworks.throughTransformer(1);
         n.zenerKneeVolts = 0;
         n.clampVolts = 0;
         Piece piece = new Piece();
+        piece.rectifies = true;
+        piece.clips = true;
+        piece.clamps = true;
         NodeLaws.settle(n, piece, 0, 0, 0);
         assertThat(piece.rectifies).isFalse();
         assertThat(piece.clips).isFalse();

@@ -11,6 +11,8 @@ import org.junit.jupiter.api.Test;
 class StepperDetoursTest {
     private static final int CIRCUITS = 40;
 
+    private static final int MOST_EVENTS = 1500;
+
     private record Happened(Event event, double seconds, double ramp) {}
 
     private static Happened next(Stepper stepper, double limit) {
@@ -30,6 +32,7 @@ class StepperDetoursTest {
             double limit = wave.seconds() * stop / stops;
             while (stepper.seconds() < limit) {
                 Happened now = next(stepper, limit);
+                assertThat(list.size()).isLessThan(MOST_EVENTS);
                 if (now.event != Event.END || stop == stops) {
                     list.add(now);
                 }
@@ -72,6 +75,7 @@ class StepperDetoursTest {
             while (stepper.seconds() < wave.seconds()) {
                 Happened now = next(stepper, wave.seconds());
                 list.add(now);
+                assertThat(list.size()).isLessThan(MOST_EVENTS);
                 if (now.event == Event.FIRES) {
                     tried++;
                     double flux = stepper.fluxAmps();
@@ -94,7 +98,9 @@ class StepperDetoursTest {
     private static void collapsed(Network n, Stepper stepper, double limit, String which) {
         double before = stepper.rampVolts();
         Event event;
+        int events = 0;
         do {
+            assertThat(++events).as(which).isLessThan(MOST_EVENTS);
             double from = stepper.seconds();
             event = stepper.advance(limit);
             Piece piece = stepper.piece();
@@ -188,6 +194,98 @@ class StepperDetoursTest {
         assertThat(fires).hasSize(12);
         assertThat(fires.get(0)).isCloseTo(period, within(1e-4 * period));
         assertThat(fires.get(1) - fires.get(0)).isCloseTo(period, within(2e-3 * period));
+    }
+
+    /** The same on a line that swings so high that the supply clips from its zero on, every half cycle anew. */
+    @Test
+    void idealPartsOnALineNeitherHoldItUp() {
+        double period = 1 / 1287.8;
+        for (double crest : new double[] {1e3, 1e4, 1e5, 1e6}) {
+            Network n = ideal();
+            n.dropperOhms = crest / 10;
+            n.zenerSlopeOhms = 1e-6;
+            SourceWave sine = new SourceWave();
+            sine.setSine(100 * Math.PI, crest, 0, 0.01);
+            Stepper stepper = new Stepper(n);
+            Mode mode = Mode.OFF;
+            double ramp = 0;
+            for (int half = 0; half < 3; half++) {
+                List<Double> fires = new ArrayList<>();
+                stepper.start(sine, mode, ramp, 0);
+                int events = 0;
+                while (stepper.seconds() < 0.01) {
+                    if (next(stepper, 0.01).event == Event.FIRES) {
+                        fires.add(stepper.seconds());
+                    }
+                    assertThat(++events).as("events of a half cycle at " + crest).isLessThan(300);
+                }
+                double clips = 20 / crest / (100 * Math.PI);
+                assertThat(fires.get(0)).as("at " + crest).isCloseTo(period, within(clips + 2e-3 * period));
+                mode = stepper.mode();
+                ramp = stepper.rampVolts();
+            }
+        }
+    }
+
+    /**
+     * Found among three hundred absurd networks: these switch to and fro on a threshold without getting on, until their
+     * searches pause a little.
+     */
+    @Test
+    void aCircuitThatRestsOnAThresholdGoesOnAllTheSame() {
+        for (long seed : new long[] {11, 23, 37, 45, 79, 87, 97, 127, 209}) {
+            SourceWave wave = AbsurdNetworks.sine(seed);
+            Stepper stepper = new Stepper(AbsurdNetworks.throughTransformer(seed));
+            stepper.start(wave, Mode.OFF, 0, 0);
+            int events = 0;
+            while (stepper.seconds() < wave.seconds()) {
+                double before = stepper.seconds();
+                stepper.advance(wave.seconds());
+                assertThat(stepper.seconds()).as("seed " + seed).isGreaterThanOrEqualTo(before);
+                assertThat(++events).as("events with seed " + seed).isLessThan(300);
+            }
+            assertThat(stepper.rampVolts()).as("seed " + seed).isFinite();
+        }
+    }
+
+    /**
+     * A programmable device on a low divider: at half a volt of supply its emitter already gets the peak-point current, but
+     * its saturated line, which begins at 0.6 V, carries nothing yet. It waits until that carries more than the valley current.
+     */
+    @Test
+    void aStallOnANearlyDeadSupplyWaitsUntilThePulseWouldRegenerate() {
+        Network n = DrawnNetworks.direct(3);
+        n.upperOhms = 40e3;
+        n.lowerOhms = 10e3;
+        n.emitterDropVolts = 0.35;
+        n.peakCurrentAmps = 1e-6;
+        n.rampOhms = 20e3;
+        n.capacitorFarads = 1e-9;
+        n.dropperOhms = 1e3;
+        n.derive();
+        SourceWave wave = new SourceWave();
+        wave.setSine(100 * Math.PI, 34, 0, 0.01);
+        Stepper stepper = new Stepper(n);
+        stepper.start(wave, Mode.OFF, 0, 0);
+        Event event = stepper.advance(wave.seconds());
+        while (event != Event.STALLS) {
+            event = stepper.advance(wave.seconds());
+        }
+        assertThat(stepper.advance(wave.seconds())).isEqualTo(Event.FIRES);
+        Piece held = stepper.piece();
+        assertThat(held.emitterAmps()).isGreaterThan(n.peakCurrentAmps);
+        assertThat(overValley(n, stepper.seconds(), held)).as("just enough").isBetween(0.0, 1e-9);
+        assertThat(overValley(n, stepper.seconds() - 1e-6, held)).as("a microsecond before").isNegative();
+    }
+
+    /** By how much the saturated line would exceed the valley current were it fired at a time, A. */
+    private static double overValley(Network n, double seconds, Piece held) {
+        held.look(seconds);
+        Piece on = new Piece();
+        on.mode = Mode.ON;
+        NodeLaws.settle(n, on, held.rampVolts(), 0, held.sourceVolts());
+        Kirchhoff fired = Kirchhoff.at(n, on, held.rampVolts(), 0, held.sourceVolts());
+        return fired.emitterAmps - n.valleySiemens * fired.supplyVolts;
     }
 
     private static Network ideal() {

@@ -14,6 +14,9 @@ import org.junit.jupiter.api.Test;
 class StepperTest {
     private static final int CIRCUITS = 60;
     private static final int HALF_CYCLES = 3;
+    /** None of these circuits passes more events in a half cycle: one that does has lost its way. */
+    private static final int MOST_EVENTS = 1500;
+
     private static final double VOLTS = 1e-8;
     private static final double AMPS = 1e-10;
 
@@ -29,7 +32,9 @@ class StepperTest {
         double flux = 0;
         for (int half = 0; half < HALF_CYCLES; half++) {
             stepper.start(wave, mode, ramp, flux);
+            int events = 0;
             while (stepper.seconds() < wave.seconds()) {
+                assertThat(++events).as(which).isLessThan(MOST_EVENTS);
                 double from = stepper.seconds();
                 Event event = stepper.advance(wave.seconds());
                 witness.passed(n, stepper, from, event, which + " half cycle " + half + " to " + stepper.seconds());
@@ -44,6 +49,9 @@ class StepperTest {
         for (long seed = 0; seed < CIRCUITS; seed++) {
             Network n = seed % 2 == 0 ? DrawnNetworks.direct(seed) : DrawnNetworks.throughTransformer(seed);
             run(n, DrawnNetworks.sine(seed), witness, "seed " + seed);
+            if (seed % 3 == 0) {
+                run(DrawnNetworks.starved(seed), DrawnNetworks.sine(seed), witness, "starved " + seed);
+            }
         }
     }
 
@@ -164,6 +172,20 @@ class StepperTest {
             assertThat(event).as(which).isEqualTo(given && regenerates ? Event.FIRES : Event.STALLS);
             assertThat(stepper.mode()).as(which).isEqualTo(event == Event.FIRES ? Mode.ON : Mode.STALLED);
         });
+    }
+
+    @Test
+    void aStallFiresAsSoonAsItsEmitterGetsThePeakPointCurrent() {
+        int[] fired = new int[1];
+        everyCircuit((n, stepper, from, event, which) -> {
+            Piece piece = stepper.piece();
+            if (piece.mode == Mode.STALLED && event == Event.FIRES) {
+                fired[0]++;
+                assertThat(piece.emitterAmps()).as(which).isGreaterThanOrEqualTo(n.peakCurrentAmps - 1e-12);
+                assertThat(overValley(n, piece, Kirchhoff.where(n, piece))).as(which).isPositive();
+            }
+        });
+        assertThat(fired[0]).isGreaterThan(10);
     }
 
     @Test
