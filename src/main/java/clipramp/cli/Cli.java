@@ -45,7 +45,7 @@ public final class Cli {
             return ExitCode.ANSWERED;
         }
         String first = meant.get(0);
-        if (first.equals("--help") || first.equals("help") && meant.size() == 1) {
+        if (first.equals("--help") || (first.equals("help") && meant.size() == 1)) {
             Overview.print(session);
             return ExitCode.ANSWERED;
         }

@@ -75,7 +75,7 @@ final class FaultsText {
         Probe.TELLING.forEach(
                 p -> table.column(Align.DECIMAL, p.point().name(), p.meter().word() + " V"));
         for (FaultEffect effect : effects) {
-            boolean healthy = effect == sheet.healthy();
+            boolean healthy = effect.equals(sheet.healthy());
             List<String> row = new ArrayList<>(List.of(
                     effect.fault().words(),
                     healthy ? "" : effect.gets().word(),
@@ -160,7 +160,7 @@ final class FaultsText {
         ranked.stream()
                 .limit(shown)
                 .map(Diagnosis.Candidate::effect)
-                .filter(effect -> effect != sheet.healthy())
+                .filter(effect -> !effect.equals(sheet.healthy()))
                 .forEach(best::add);
         out.lines(table(best).lines());
         out.line("");

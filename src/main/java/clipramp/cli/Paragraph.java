@@ -28,7 +28,7 @@ final class Paragraph {
         StringBuilder line = new StringBuilder(firstIndent);
         int bare = firstIndent.length();
         for (String part : glued(text).split("\n", -1)) {
-            for (String word : part.strip().split(" +")) {
+            for (String word : part.strip().split(" +", -1)) {
                 if (line.length() > bare && line.length() + 1 + word.length() > WIDTH) {
                     lines.add(unglued(line));
                     line = new StringBuilder(indent);

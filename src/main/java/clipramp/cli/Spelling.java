@@ -28,7 +28,7 @@ enum Spelling {
     }
 
     private static boolean isPlain(String text) {
-        return text.chars().allMatch(c -> c == '\n' || c >= ' ' && c <= '~');
+        return text.chars().allMatch(c -> c == '\n' || (c >= ' ' && c <= '~'));
     }
 
     private int shown(int point) {

@@ -1,6 +1,7 @@
 package clipramp.cli;
 
 import java.io.BufferedInputStream;
+import java.io.Console;
 import java.io.FileDescriptor;
 import java.io.FileInputStream;
 import java.io.FileOutputStream;
@@ -44,8 +45,21 @@ public record Terminal(
                 new FileOutputStream(FileDescriptor.out),
                 new FileOutputStream(FileDescriptor.err),
                 System.getenv(),
-                System.console() != null,
+                isWatched(),
                 nativeCharset());
+    }
+
+    /** Since Java 22 a redirected process has a console too, which then says itself that it is no terminal. */
+    private static boolean isWatched() {
+        Console console = System.console();
+        if (console == null) {
+            return false;
+        }
+        try {
+            return (Boolean) Console.class.getMethod("isTerminal").invoke(console);
+        } catch (ReflectiveOperationException before22) {
+            return true;
+        }
     }
 
     /** The charset to write in: the terminal's if it has every sign that answers use, else ASCII. */

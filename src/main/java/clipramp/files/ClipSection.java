@@ -69,7 +69,7 @@ final class ClipSection {
 
     private static Optional<Winding> winding(Scope clip, Devices devices) {
         Optional<Node> node = clip.take("winding");
-        if (node.isEmpty() || node.get() instanceof Node.Scalar s && s.isNone()) {
+        if (node.isEmpty() || (node.get() instanceof Node.Scalar s && s.isNone())) {
             return Optional.empty();
         }
         return devices.resolve(node.get(), DevicePlace.WINDING).flatMap(device -> {

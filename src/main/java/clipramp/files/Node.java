@@ -77,7 +77,7 @@ sealed interface Node {
             Mapping merged = new Mapping(entries, other.place);
             for (Entry entry : other.entries) {
                 Node below = get(entry.key()).orElse(entry.value());
-                Node value = below instanceof Mapping b && entry.value() instanceof Mapping o && b != o
+                Node value = below instanceof Mapping b && entry.value() instanceof Mapping o
                         ? b.overlaidBy(o)
                         : entry.value();
                 merged = merged.without(entry.key()).withEntry(new Entry(entry.key(), entry.place(), value));

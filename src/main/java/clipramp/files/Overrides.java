@@ -161,8 +161,8 @@ final class Overrides {
         Optional<DevicePlace> place = Arrays.stream(DevicePlace.values())
                 .filter(p -> p.path().equals(path))
                 .findFirst();
-        boolean profile = node instanceof Scalar s && !s.isNone()
-                || node instanceof Mapping m && m.get("like").isPresent();
+        boolean profile = (node instanceof Scalar s && !s.isNone())
+                || (node instanceof Mapping m && m.get("like").isPresent());
         if (place.isPresent() && profile) {
             return devices.resolve(node, place.get()).map(Overrides::spelledOut).orElse(Mapping.empty(node.place()));
         }

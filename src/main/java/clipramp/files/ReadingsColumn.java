@@ -111,7 +111,7 @@ record ReadingsColumn(String head, Kind kind, double scale, Accuracy accuracy) {
     private static Optional<Kind> kind(List<Kind> named, String how, String head, Place place, Findings findings) {
         String said = how.toLowerCase(Locale.ROOT).replace(' ', '-');
         if (named.size() == 1) {
-            if (said.isEmpty() || named.get(0) == Kind.LINE && said.matches("(true-)?rms")) {
+            if (said.isEmpty() || (named.get(0) == Kind.LINE && said.matches("(true-)?rms"))) {
                 return Optional.of(named.get(0));
             }
         } else if (said.matches("(true-)?rms")) {

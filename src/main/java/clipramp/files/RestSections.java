@@ -153,7 +153,7 @@ final class RestSections {
     static Map<String, String> designators(Scope root) {
         Map<String, String> names = new TreeMap<>();
         Node node = root.take("designators").orElse(null);
-        if (node == null || node instanceof Scalar s && s.isNone()) {
+        if (node == null || (node instanceof Scalar s && s.isNone())) {
             return names;
         }
         if (!(node instanceof Mapping mapping)) {

@@ -83,8 +83,7 @@ public final class WholeFile {
             try {
                 return Files.createFile(name);
             } catch (FileAlreadyExistsException taken) {
-                // Somebody else writes the same file, or once crashed doing so.
-                continue;
+                // Somebody else writes the same file, or once crashed doing so: the next name may be free.
             }
         }
         throw new IOException("no free temporary name beside " + target);

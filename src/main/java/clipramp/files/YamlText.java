@@ -51,7 +51,7 @@ final class YamlText {
                 case '\r' -> out.append("\\r");
                 case '\t' -> out.append("\\t");
                 default -> {
-                    if (c < ' ' || c >= 0x7f && c < 0xa0 || c == 0x2028 || c == 0x2029 || c == 0xfeff) {
+                    if (c < ' ' || (c >= 0x7f && c < 0xa0) || c == 0x2028 || c == 0x2029 || c == 0xfeff) {
                         out.append(String.format(Locale.ROOT, "\\u%04x", c));
                     } else {
                         out.appendCodePoint(c);

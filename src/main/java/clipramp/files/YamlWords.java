@@ -70,9 +70,9 @@ final class YamlWords {
     }
 
     private static boolean isRefused(int sign) {
-        return sign < ' ' && sign != '\n' && sign != '\r'
-                || sign >= 0x7f && sign < 0xa0
-                || sign >= 0xd800 && sign < 0xe000
+        return (sign < ' ' && sign != '\n' && sign != '\r')
+                || (sign >= 0x7f && sign < 0xa0)
+                || (sign >= 0xd800 && sign < 0xe000)
                 || sign == 0xfeff
                 || sign == 0xfffe
                 || sign == 0xffff;

@@ -8,7 +8,6 @@ import java.util.Optional;
  * Every margin that is judged: its id in answers, its name, what it means, its formula, source and remedy. One table,
  * so that check, explain, window and record say the same; hence its length.
  */
-@SuppressWarnings("ImmutableEnumChecker") // parts come of List.of
 public enum MarginKind {
     WANTED_LOWEST(
             "wanted-lowest",

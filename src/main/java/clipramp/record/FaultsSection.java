@@ -61,7 +61,7 @@ final class FaultsSection {
     }
 
     private void row(FaultEffect effect) {
-        boolean healthy = effect == sheet.healthy();
+        boolean healthy = effect.equals(sheet.healthy());
         List<String> row = new ArrayList<>(List.of(
                 effect.fault().words(),
                 healthy ? Shown.NOTHING : effect.gets().word(),

@@ -27,7 +27,7 @@ public final class Cautions {
     /** The paragraphs of a text with headings and points; its first heading is left out. */
     public static List<Paragraph> paragraphs(String markdown) {
         List<Paragraph> paragraphs = new ArrayList<>();
-        for (String line : markdown.split("\n")) {
+        for (String line : markdown.lines().toList()) {
             if (line.startsWith("## ")) {
                 paragraphs.add(new Paragraph(true, line.substring(3)));
             } else if (line.startsWith("- ")) {

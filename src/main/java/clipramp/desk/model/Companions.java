@@ -92,7 +92,7 @@ final class Companions {
                 (half && !isolated ? ClipSupply.Rectifier.DIODE : ClipSupply.Rectifier.BRIDGE).word()));
         changes.add(new Change("clip.tap", (acrossThyristor ? ClipSupply.Tap.THYRISTOR : ClipSupply.Tap.LINE).word()));
         boolean twin = word.equals(Stage.INVERSE_PARALLEL.word());
-        boolean transformer = twin || word.equals(Stage.TRIAC.word()) && !isolated;
+        boolean transformer = twin || (word.equals(Stage.TRIAC.word()) && !isolated);
         if (transformer) {
             changes.add(new Change("gate.coupling", GateDrive.Coupling.TRANSFORMER.word()));
             changes.add(new Change("gate.transformer", transformer(twin ? 2 : 1)));

@@ -16,6 +16,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.concurrent.atomic.AtomicInteger;
 import java.util.function.Consumer;
 
 /** Lays the record out, and draws its pages one after the other; a newer design makes it begin again. */
@@ -46,7 +47,7 @@ public final class RecordMaker {
     private Optional<FitResult> fit = Optional.empty();
     private Optional<Asked> wanted = Optional.empty();
     private Optional<Made> made = Optional.empty();
-    private volatile int turn;
+    private final AtomicInteger turn = new AtomicInteger();
 
     /**
      * @param workers where work is done
@@ -85,8 +86,7 @@ public final class RecordMaker {
     }
 
     private void ask(LoadedDesign loaded, Optional<Path> file) {
-        turn++;
-        Asked asked = new Asked(loaded, file, size, spread, fit, zoom, turn);
+        Asked asked = new Asked(loaded, file, size, spread, fit, zoom, turn.incrementAndGet());
         wanted = Optional.of(asked);
         maker.ask(asked);
         listeners.forEach(Runnable::run);
@@ -139,7 +139,7 @@ public final class RecordMaker {
         try {
             RecordPreview.draw(answer.pdf(), PIXELS_PER_POINT * answer.asked().zoom(), page -> {
                 workers.home().execute(() -> add(answer, page));
-                return answer.asked().turn() == turn;
+                return answer.asked().turn() == turn.get();
             });
         } catch (IOException e) {
             throw new UncheckedIOException(e);
