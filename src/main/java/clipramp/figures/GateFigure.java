@@ -6,6 +6,7 @@ import clipramp.circuit.ThyristorDevice;
 import clipramp.circuit.ThyristorDevice.GateLimits;
 import clipramp.circuit.TriggerDemand;
 import clipramp.firing.Waveforms;
+import clipramp.gate.GatePower;
 import clipramp.units.QuantityText;
 import clipramp.units.Unit;
 import java.awt.Graphics2D;
@@ -131,9 +132,20 @@ public record GateFigure(Design design, double[] gateAmps, double[] gateVolts) i
         device().gate().nonTrigger().ifPresent(v -> rows.add(List.of("V_GD", Numerals.NOTHING, volts(v.volts()))));
         limits.amps().ifPresent(a -> rows.add(List.of("I_GM", amps(a), Numerals.NOTHING)));
         limits.volts().ifPresent(v -> rows.add(List.of("V_GM", Numerals.NOTHING, volts(v))));
-        limits.peakWatts().ifPresent(w -> rows.add(List.of("P_GM", watts(w), Numerals.NOTHING)));
+        limits.peakWatts().ifPresent(w -> {
+            rows.add(List.of("P_GM", watts(w), Numerals.NOTHING));
+            rows.add(typicalAt(w));
+        });
         limits.meanWatts().ifPresent(w -> rows.add(List.of("P_G(AV)", watts(w), Numerals.NOTHING)));
         return new NumberTable(List.of("what", "current or power", "voltage"), rows);
+    }
+
+    /** Where the typical gate itself takes a power: what a series resistor would have to hold its current to. */
+    private List<String> typicalAt(double watts) {
+        double knee = device().gate().kneeVolts();
+        double slope = device().gate().slopeOhms();
+        double amps = GatePower.ampsAtPower(knee, slope, watts).orElseThrow();
+        return List.of("P_GM in the typical gate", amps(amps), volts(knee + slope * amps));
     }
 
     @Override

@@ -46,4 +46,21 @@ public final class GatePower {
         return OptionalDouble.of(Math.min(
                 peak, Math.max(peak * length / widthSeconds, limits.meanWatts().orElse(0))));
     }
+
+    /**
+     * The current at which a straight line v = V + r i meets the curve v i = P of one power: the smaller root of r i² + V i =
+     * P. A gate is such a line, with r its slope; a drive's load line is one too, with r the drive's resistance taken off, and
+     * meets the curve again at P/(|r| i).
+     *
+     * @param volts V, where the line begins, V, above 0
+     * @param slopeOhms r, ohm; under 0 for a load line
+     * @param watts P, W, above 0
+     * @return A; empty where a load line stays under the curve
+     */
+    public static OptionalDouble ampsAtPower(double volts, double slopeOhms, double watts) {
+        double discriminant = volts * volts + 4 * slopeOhms * watts;
+        return discriminant < 0
+                ? OptionalDouble.empty()
+                : OptionalDouble.of(2 * watts / (volts + Math.sqrt(discriminant)));
+    }
 }

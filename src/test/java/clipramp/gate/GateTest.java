@@ -23,6 +23,34 @@ class GateTest {
     private static final Condition NOMINAL = new Condition(230, 50, 25);
 
     @Test
+    void bimbhraExample4Point4WhereALoadLineGivesTheGateItsPower() {
+        // Bimbhra, Power Electronics, example 4.4: 15 V, load line of 120 V/A, 0.4 W.
+        double smaller = GatePower.ampsAtPower(15, -120, 0.4).orElseThrow();
+        assertThat(smaller).isCloseTo(38.56e-3, within(5e-6));
+        assertThat(15 - 120 * smaller).isCloseTo(10.37, within(5e-3));
+        double larger = 0.4 / (120 * smaller);
+        assertThat(larger).isCloseTo(86.44e-3, within(5e-6));
+        assertThat(15 - 120 * larger).isCloseTo(4.628, within(2e-3));
+        // Maximum power transfer: E²/(4 R) at E/(2 R), and never more.
+        assertThat(GatePower.ampsAtPower(4, -1, 4)).hasValue(2);
+        assertThat(GatePower.ampsAtPower(4, -1, 4.001)).isEmpty();
+    }
+
+    @Test
+    void bimbhraExample4Point5SeriesResistanceAndPulseRate() {
+        // Bimbhra, Power Electronics, example 4.5: v = 1 + 10 i, 5 W peak for 20 us, 0.3 W mean, 15 V; 11.248 ohm, 3
+        // kHz.
+        double amps = GatePower.ampsAtPower(1, 10, 5).orElseThrow();
+        assertThat((15 - (1 + 10 * amps)) / amps).isCloseTo(11.248, within(1e-3));
+        OptionalDouble any = OptionalDouble.empty();
+        GateLimits limits =
+                new GateLimits(any, any, any, OptionalDouble.of(5), OptionalDouble.of(20e-6), OptionalDouble.of(0.3));
+        // The energy of 20 us at 5 W spread over a period of 3 kHz is the mean rating, over less it is more.
+        assertThat(GatePower.allowedPeakWatts(limits, 1 / 3000.).orElseThrow()).isCloseTo(0.3, within(1e-9));
+        assertThat(GatePower.allowedPeakWatts(limits, 1 / 3100.).orElseThrow()).isCloseTo(0.31, within(1e-9));
+    }
+
+    @Test
     void peakPowerBeyondItsPulseLengthIsThatOfEqualEnergyAndNeverUnderTheMean() {
         GateLimits limits = SampleDesigns.scr16Amps().gate().limits();
         assertThat(GatePower.allowedPeakWatts(limits, 0.5e-6)).hasValue(20);
