@@ -50,6 +50,7 @@ public record Terminal(
     }
 
     /** Since Java 22 a redirected process has a console too, which then says itself that it is no terminal. */
+    @SuppressWarnings("SystemConsoleNull") // asks on
     private static boolean isWatched() {
         Console console = System.console();
         if (console == null) {
