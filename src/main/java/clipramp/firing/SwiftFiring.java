@@ -84,9 +84,6 @@ public final class SwiftFiring {
     private final double[] volts = new double[MOST_HALVES + 1];
     private final double[] fired = new double[SHOWN_UNSETTLED];
     private int shown = 1;
-    private double residualVolts;
-    private Mode residualMode = Mode.OFF;
-    private long halves;
 
     /** For a network that is filled anew, and derived, before each {@link #solve}. */
     public SwiftFiring(Network network) {
@@ -145,7 +142,7 @@ public final class SwiftFiring {
                 kept = (end - endBefore) / (volts - voltsBefore);
             }
             if (pass > 0 && endMode == mode && Math.abs(end - volts) < SAME_VOLTS) {
-                return settled(mode, volts);
+                return settled();
             }
             double next = end;
             if (!Double.isNaN(kept)) {
@@ -172,7 +169,7 @@ public final class SwiftFiring {
                     if (straight) {
                         firedSeconds += firedShift * step;
                     }
-                    return (straight || Double.isNaN(firedSeconds) || fireFrom(mode, next)) && settled(mode, next);
+                    return (straight || Double.isNaN(firedSeconds) || fireFrom(mode, next)) && settled();
                 }
             }
             keptBefore = kept;
@@ -191,7 +188,7 @@ public final class SwiftFiring {
         return run(mode, volts, false, 0)
                 && stepper.mode() == mode
                 && Math.abs(stepper.rampVolts() - volts) * sensitivity() < LEFT_SECONDS
-                && settled(mode, volts);
+                && settled();
     }
 
     /** How the firing instant moves with the residual, s/V; a whole time constant's worth where that is not known. */
@@ -199,9 +196,7 @@ public final class SwiftFiring {
         return !Double.isNaN(firedShift) ? Math.abs(firedShift) : n.rampOhms * n.capacitorFarads;
     }
 
-    private boolean settled(Mode mode, double volts) {
-        residualMode = mode;
-        residualVolts = volts;
+    private boolean settled() {
         fired[0] = firedSeconds;
         doubt = begun > 0 && clipUntil == Double.NEGATIVE_INFINITY;
         return !doubt;
@@ -218,7 +213,7 @@ public final class SwiftFiring {
             modes[half] = stepper.mode();
             volts[half] = stepper.rampVolts();
             if (repeats(half, 1)) {
-                return run(modes[half], volts[half], false, 0) && settled(modes[half], volts[half]);
+                return run(modes[half], volts[half], false, 0) && settled();
             }
             if (repeats(half, 2) || half == MOST_HALVES) {
                 return bothHalves && hunts(half, repeats(half, 2) ? 2 : fired.length);
@@ -244,8 +239,6 @@ public final class SwiftFiring {
             mode = stepper.mode();
             volt = stepper.rampVolts();
         }
-        residualMode = mode;
-        residualVolts = volt;
         int begunFirst = 0;
         for (int i = 0; i < count; i++) {
             if (!run(mode, volt, false, 0) || (begun > 0 && clipUntil == Double.NEGATIVE_INFINITY)) {
@@ -283,7 +276,6 @@ public final class SwiftFiring {
 
     private boolean run(Mode mode, double volts, boolean rough, int onlyToPulse) {
         following = !rough && onlyToPulse == 0;
-        halves++;
         watch = Watch.NONE;
         begun = 0;
         going = mode == Mode.ON;
@@ -425,30 +417,5 @@ public final class SwiftFiring {
             return FiringState.LATCHED_ON;
         }
         return endPulse ? FiringState.END_PULSE : FiringState.FIRES;
-    }
-
-    /** Ramp voltage at the line zero, V to common. */
-    public double residualVolts() {
-        return residualVolts;
-    }
-
-    /** What the device does at the line zero. */
-    public Mode residualMode() {
-        return residualMode;
-    }
-
-    /** Half cycles run since made. */
-    public long halves() {
-        return halves;
-    }
-
-    /** Pieces run since made. */
-    public long pieces() {
-        return stepper.pieces();
-    }
-
-    /** Those of them that the careful stepper did. */
-    public long carefulPieces() {
-        return stepper.carefulPieces();
     }
 }

@@ -6,6 +6,7 @@ import clipramp.circuit.Condition;
 import clipramp.circuit.Design;
 import clipramp.circuit.GateDrive.Coupling;
 import clipramp.circuit.Stage;
+import clipramp.circuit.ThyristorDevice;
 import clipramp.circuit.Trigger;
 import clipramp.circuit.Unijunction;
 import clipramp.firing.HalfCycle;
@@ -14,7 +15,9 @@ import clipramp.firing.Solution;
 import clipramp.gate.TriggerNeed;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.stream.Stream;
 
 /** What a reader of a check should know beside its margins: the model's assumptions, with their size here. */
 final class Notes {
@@ -105,6 +108,25 @@ final class Notes {
                             + " lie outside the sheet's points and are extended from them (from a single point: I_GT"
                             + " doubles and V_GT gains 1 V from 25 °C to -40 °C, common practice).");
         }
+        ThyristorDevice device = design.thyristor().device();
+        if (Stream.of(device.latching(), device.holding())
+                .flatMap(Optional::stream)
+                .anyMatch(curve -> curve.isExtendedAt(coldest))) {
+            add(
+                    "latching-data-extended",
+                    "Latching and holding current at " + Say.celsius(coldest)
+                            + " lie outside the sheet's points and are extended from them (a single point doubles from"
+                            + " 25 °C to -40 °C, common practice).");
+        }
+        typicalDrive();
+        if (design.gate().coupling() == Coupling.TRANSFORMER) {
+            add(
+                    "leakage-inductance",
+                    "The pulse transformer's leakage inductance is left out: the computed gate peak is optimistic.");
+        }
+    }
+
+    private void typicalDrive() {
         if (design.trigger() instanceof Trigger.UnijunctionTrigger trigger
                 && trigger.device()
                         .baseOnePulse()
@@ -114,11 +136,6 @@ final class Notes {
                     "typical-drive",
                     "The profile states no smallest base-one pulse: the drive margins are those of a typical trigger"
                             + " device, not of the weakest.");
-        }
-        if (design.gate().coupling() == Coupling.TRANSFORMER) {
-            add(
-                    "leakage-inductance",
-                    "The pulse transformer's leakage inductance is left out: the computed gate peak is optimistic.");
         }
     }
 

@@ -120,9 +120,4 @@ public final class SwiftPoint {
     public double fraction() {
         return fraction;
     }
-
-    /** How the swift path has fared since it was made. */
-    public SwiftFiring firing() {
-        return firing;
-    }
 }

@@ -99,8 +99,10 @@ class NotesTest {
     void figuresOfTheSheetThatWereExtendedOrMissingAreNamed() {
         Bench cold = OnTheBench.at(HEATER, 230, -60);
         assertThat(new Notes(cold, cold.usual()).all())
-                .anySatisfy(note -> assertThat(note.text()).startsWith("I_GT and V_GT at -60 °C lie outside"));
+                .anySatisfy(note -> assertThat(note.text()).startsWith("I_GT and V_GT at -60 °C lie outside"))
+                .anySatisfy(note -> assertThat(note.text()).startsWith("Latching and holding current at -60 °C lie"));
         assertThat(text(HEATER, "trigger-data-extended")).isEmpty();
+        assertThat(text(HEATER, "latching-data-extended")).isEmpty();
         Design untold = Changed.with(HEATER, "trigger.device.baseOnePulse", Optional.empty());
         assertThat(text(untold, "typical-drive").orElseThrow()).startsWith("The profile states no smallest base-one");
         Design typical = Changed.with(HEATER, "trigger.device.baseOnePulse.minVolts", OptionalDouble.empty());
