@@ -110,6 +110,10 @@ class FindingTest {
         assertThat(JudgedCondition.of(steady.withSurroundings(new Surroundings(25, 25)), FREE, FREE))
                 .extracting(JudgedCondition::condition)
                 .containsExactlyInAnyOrder(new Condition(230, 60, 25), new Condition(253, 60, 25));
+        Design capped = heater.withLine(new Line(230, 50, 207, 230, List.of()));
+        assertThat(JudgedCondition.of(capped.withSurroundings(new Surroundings(25, 25)), FREE, FREE))
+                .extracting(JudgedCondition::words)
+                .containsExactlyInAnyOrder("nominal line, 25 °C", "low line, 25 °C");
         assertThat(JudgedCondition.of(heater, OptionalDouble.of(200), OptionalDouble.of(70)))
                 .containsExactly(new JudgedCondition(new Condition(200, 50, 70), "200 V, 70 °C"));
     }
