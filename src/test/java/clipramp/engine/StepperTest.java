@@ -182,7 +182,9 @@ class StepperTest {
             if (piece.mode == Mode.STALLED && event == Event.FIRES) {
                 fired[0]++;
                 assertThat(piece.emitterAmps()).as(which).isGreaterThanOrEqualTo(n.peakCurrentAmps - 1e-12);
-                assertThat(overValley(n, piece, Kirchhoff.where(n, piece))).as(which).isPositive();
+                assertThat(overValley(n, piece, Kirchhoff.where(n, piece)))
+                        .as(which)
+                        .isPositive();
             }
         });
         assertThat(fired[0]).isGreaterThan(10);

@@ -113,6 +113,8 @@ class SwiftMemoryTest {
         assertThat(piece.ahead).as("looked at nowhere").isZero();
         assertThat(memory.usual(SwiftLaws.DEVICE)).isEqualTo(SwiftLaws.ZENER);
         recall(STATE, false);
-        assertThat(memory.usual(SwiftLaws.DEVICE)).as("a second visit was never seen").isEqualTo(SwiftLaws.DEVICE);
+        assertThat(memory.usual(SwiftLaws.DEVICE))
+                .as("a second visit was never seen")
+                .isEqualTo(SwiftLaws.DEVICE);
     }
 }

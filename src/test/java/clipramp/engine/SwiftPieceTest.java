@@ -89,8 +89,7 @@ class SwiftPieceTest {
             form(-0.5 - random.nextDouble(), 0.2 * random.nextDouble() - 0.1, 0.2 * random.nextDouble() - 0.1);
             rows[FORM + 3] = -truth(zero);
             double from = zero + (random.nextDouble() - 0.5) * 0.4 * zero;
-            piece.lookAfter(
-                    from, Math.exp(-piece.rate * from), Math.sin(OMEGA * from), Math.cos(OMEGA * from));
+            piece.lookAfter(from, Math.exp(-piece.rate * from), Math.sin(OMEGA * from), Math.cos(OMEGA * from));
             if (!(piece.slope(FORM) > 0.1 * piece.rate)) {
                 continue;
             }

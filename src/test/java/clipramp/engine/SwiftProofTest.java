@@ -144,7 +144,9 @@ class SwiftProofTest {
             boolean asked = at != SwiftLaws.JUNCTION;
             assertThat(proof.judge(SwiftPiece.END, true, true)).isEqualTo(at);
             assertThat(proof.judge(SwiftPiece.END, false, true)).isEqualTo(asked ? at : SwiftPiece.NONE);
-            assertThat(proof.judge(SwiftPiece.END, true, false)).as("without proof too").isEqualTo(at);
+            assertThat(proof.judge(SwiftPiece.END, true, false))
+                    .as("without proof too")
+                    .isEqualTo(at);
         }
     }
 
