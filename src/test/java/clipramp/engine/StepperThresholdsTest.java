@@ -84,8 +84,21 @@ class StepperThresholdsTest {
                 stepper.advance(wave.seconds());
                 assertThat(stepper.seconds()).as("seed " + seed).isGreaterThanOrEqualTo(before);
                 assertThat(++events).as("events with seed " + seed).isLessThan(300);
+                assertDeviceAgrees(stepper, before, "seed " + seed + " at " + before);
             }
             assertThat(stepper.rampVolts()).as("seed " + seed).isFinite();
+        }
+    }
+
+    /** A pause is short enough for nothing to be missed meanwhile. */
+    private static void assertDeviceAgrees(Stepper stepper, double from, String which) {
+        Piece piece = stepper.piece();
+        piece.look((from + stepper.seconds()) / 2);
+        double rounding = 1e-6 * (1 + Math.abs(piece.rampVolts()));
+        if (piece.mode() == Mode.OFF) {
+            assertThat(piece.rampVolts()).as(which).isLessThan(piece.peakPointVolts() + rounding);
+        } else if (piece.mode() == Mode.STALLED && stepper.seconds() - from > 1e-9) {
+            assertThat(piece.emitterAmps()).as(which).isGreaterThan(-1e-9);
         }
     }
 
