@@ -225,6 +225,44 @@ class PieceTest {
         }
     }
 
+    /** Long after its start only the source's sinusoids move a form, each by as much as it is said to give. */
+    @Test
+    void whenTheExponentialsAreGoneTheSinusoidsAreLeft() {
+        each(b -> {
+            Piece piece = b.piece();
+            if (piece.mode == Mode.STALLED) {
+                return;
+            }
+            double slowest = b.n().transformerCoupled ? piece.slowRate() : piece.quickRate();
+            double late = b.fromSeconds() + 60 / slowest;
+            for (Affine form : new Affine[] {piece.supply, piece.baseOne, mixed(b)}) {
+                double apart = swung(b, form, late + 2e-3) - swung(b, form, late);
+                piece.look(late + 2e-3);
+                double moved = piece.value(form);
+                piece.look(late);
+                moved -= piece.value(form);
+                assertThat(moved).as(b.toString()).isCloseTo(apart, within(1e-9));
+            }
+        });
+    }
+
+    private static Affine mixed(Begun b) {
+        Affine form = new Affine();
+        form.set(1, 0, 0);
+        form.flux = b.n().transformerCoupled ? 300 : 0;
+        return form;
+    }
+
+    private static double swung(Begun b, Affine form, double seconds) {
+        Piece piece = b.piece();
+        double sum = 0;
+        for (int i = 0; i < piece.sinusoids(); i++) {
+            double angle = piece.sinusoidRate(i) * seconds + b.wave().phases[i];
+            sum += piece.sineOf(form, i) * Math.sin(angle) + piece.cosineOf(form, i) * Math.cos(angle);
+        }
+        return sum;
+    }
+
     /** 1 V behind 1 kilohm onto 1 uF: a millisecond's time constant, and 1 - 1/e of a volt after it. */
     @Test
     void aResistorChargesACapacitorExponentially() {

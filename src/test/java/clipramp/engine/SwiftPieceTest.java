@@ -163,13 +163,18 @@ class SwiftPieceTest {
         assertThat(piece.aim(FORM)).as("beyond the half cycle").isEqualTo(SwiftPiece.END);
     }
 
-    /** Where the sinusoid falls, a form may turn round: it is aimed at while it still rises. */
+    /**
+     * Where the sinusoid falls meanwhile, the form turns round: alone the exponential would come to a hundredth of itself,
+     * when the sinusoid already falls faster than it rises. It is aimed at while it still rises.
+     */
     @Test
     void itIsAimedAtWhereTheFormStillRises() {
         begin(3e3);
-        form(-1, 8, 0);
-        rows[FORM + 3] = -3.2 - 8 * Math.sin(START) + 7;
+        form(-1, -2, 0);
+        rows[FORM + 3] = 0.04 + 2 * Math.sin(START);
         rows[FORM + 4] = 0;
+        piece.lookWhere(0.01);
+        assertThat(piece.slope(FORM)).isNegative();
         piece.aim(FORM);
         assertThat(piece.slope(FORM)).isPositive();
     }
