@@ -7,6 +7,7 @@ import clipramp.circuit.Condition;
 import clipramp.circuit.Design;
 import clipramp.circuit.Line;
 import clipramp.circuit.Load;
+import clipramp.circuit.SampleDesigns;
 import clipramp.circuit.Stage;
 import clipramp.engine.LineWave;
 import clipramp.firing.HalfCycle;
@@ -90,6 +91,34 @@ class HalfCyclesDrivenTest {
         assertThat(wave.voltsAt(negative.toRad())).isCloseTo(0, within(1e-9));
         assertThat(wave.voltsAt((negative.fromRad() + negative.toRad()) / 2)).isLessThan(-200);
         assertThat(negative.toRad() - negative.fromRad()).isBetween(2.9, 3.4);
+    }
+
+    @Test
+    void ofHalfCyclesThatNeverSettleEveryPositiveOneKeepsItsPulse() {
+        Design coil = Fired.textbook(Stage.BRIDGE_AC, 50).withLoad(new Load.Inductive(50, 1e-3, Optional.empty()));
+        List<HalfCycle> four = List.of(
+                Fired.half(EUROPE, true, 1, true),
+                Fired.half(EUROPE, false, 1.2, true),
+                Fired.half(EUROPE, true, 1.4, true),
+                Fired.half(EUROPE, false, 1.6, true));
+        Firings free = Firings.of(coil, EUROPE, new Solution(EUROPE, 1e4, Settling.NEVER, four))
+                .withNegativeHalvesFree(new LineWave(coil.line(), EUROPE));
+        assertThat(free.windows()).extracting(GateWindow::half).containsExactly(0, 1, 2, 3);
+        assertThat(free.windows().get(2).fromRad()).isCloseTo(2 * Math.PI + 1.4, within(1e-12));
+        assertThat(free.windows().get(3).fromRad()).isCloseTo(3 * Math.PI, within(1e-12));
+    }
+
+    @Test
+    void aPulseOfALongLagIsCountedFromTheHalfCycleThatItWasMadeIn() {
+        // Made at 150 degrees of the supply, which lags 60 degrees: 210 degrees of the load, 30 degrees of its next
+        // half.
+        double lag = Math.toRadians(60);
+        Design design = SampleDesigns.windingHeater(lag, false);
+        HalfCycle late = Fired.half(EUROPE, true, Math.toRadians(150), Math.toRadians(30), true);
+        Solution solution = new Solution(EUROPE, 1e5, Settling.STEADY, List.of(late));
+        assertThat(ActingPulses.madeRad(design, solution, late.pulses().get(0)))
+                .isCloseTo(Math.toRadians(210), within(1e-12));
+        assertThat(ActingPulses.spillOver(design, solution)).isTrue();
     }
 
     @Test

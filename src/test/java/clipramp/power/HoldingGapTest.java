@@ -6,6 +6,7 @@ import static org.assertj.core.api.Assertions.within;
 import clipramp.circuit.Changed;
 import clipramp.circuit.Condition;
 import clipramp.circuit.Design;
+import clipramp.circuit.Line;
 import clipramp.circuit.Load;
 import clipramp.circuit.Stage;
 import clipramp.circuit.StageDiodes;
@@ -159,6 +160,27 @@ class HoldingGapTest {
                 .mapToDouble(span -> span.amps().applyAsDouble(rad))
                 .findFirst()
                 .orElseThrow();
+    }
+
+    @Test
+    void onADistortedLineEitherSideOfTheZeroHasItsOwnSlope() {
+        // |v| = R I_H to the left and to the right of each of the line's zeros, each found by itself.
+        Line line =
+                new Line(230, 50, 207, 253, List.of(new Line.Harmonic(2, 0.15, 1.2), new Line.Harmonic(3, 0.15, 0.5)));
+        Design design = Fired.textbook(Stage.BRIDGE_DC, 10).withLine(line);
+        DoubleUnaryOperator volts = rad -> line.voltsAt(230, rad);
+        double holding = 8;
+        double least = Double.POSITIVE_INFINITY;
+        for (double near : new double[] {0, Math.PI}) {
+            double zero = root(volts, near - 0.5, near + 0.5);
+            double left = root(rad -> Math.abs(volts.applyAsDouble(rad)) - 10 * holding, zero - 0.6, zero);
+            double right = root(rad -> Math.abs(volts.applyAsDouble(rad)) - 10 * holding, zero, zero + 0.6);
+            assertThat(Math.abs(zero - left - (right - zero))).isGreaterThan(1e-3);
+            least = Math.min(least, right - left);
+        }
+        LoadPeriod period = LoadPower.periodAtFiringAngle(design, EUROPE, 1);
+        assertThat(HoldingGap.seconds(design, EUROPE, period, holding))
+                .isCloseTo(least / EUROPE.omega(), within(1e-10));
     }
 
     @Test

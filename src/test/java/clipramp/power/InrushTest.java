@@ -108,6 +108,7 @@ class InrushTest {
     @Test
     void aBarelyGlowingFilamentIsNeverColderThanCold() {
         FilamentLaw law = new FilamentLaw(new Load.Filament(300, 230, 1.55, 10));
+        assertThat(law.coldOhms()).isCloseTo(230.0 * 230 / 300 / 10, within(1e-9));
         assertThat(law.ohmsAt(0)).isEqualTo(law.coldOhms());
         assertThat(law.ohmsAt(230)).isCloseTo(230.0 * 230 / 300, within(1e-9));
     }

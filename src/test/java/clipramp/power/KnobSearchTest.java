@@ -1,6 +1,7 @@
 package clipramp.power;
 
 import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.assertThatThrownBy;
 import static org.assertj.core.api.Assertions.within;
 
 import clipramp.circuit.Changed;
@@ -91,6 +92,23 @@ class KnobSearchTest {
     }
 
     @Test
+    void theLastAngleBeforeSilenceServesThreeDegreesBeyondItAndNoFurther() {
+        // Through 40 kohm of dropper the last pulse comes a little short of 176 degrees; then there is none.
+        Design starved = Changed.with(HEATER, "clip.dropper.value", 40_000.0);
+        double last = KnobSearch.nearestRampOhmsForAngle(starved, NOMINAL, Math.toRadians(178))
+                .orElseThrow();
+        double fires = Math.toDegrees(
+                Firing.solve(starved, NOMINAL, last).shown().firingRad().orElseThrow());
+        assertThat(fires).isBetween(175.0, 176.0);
+        assertThat(KnobSearch.rampOhmsForAngle(starved, NOMINAL, Math.toRadians(178)))
+                .isEmpty();
+        assertThat(KnobSearch.nearestRampOhmsForAngle(starved, NOMINAL, Math.toRadians(fires + 2.99)))
+                .isPresent();
+        assertThat(KnobSearch.nearestRampOhmsForAngle(starved, NOMINAL, Math.toRadians(fires + 3.01)))
+                .isEmpty();
+    }
+
+    @Test
     void aPositionIsFoundForEveryLawAndEitherSense() {
         List<PotLaw> laws = List.of(
                 new PotLaw.Linear(),
@@ -131,6 +149,14 @@ class KnobSearchTest {
         assertThat(map.get(0).position()).hasValue(0);
         assertThat(map.get(4).rampOhms()).isCloseTo(5_600, within(1e-9));
         assertThat(map).extracting(p -> p.load().watts()).isSorted();
+        assertThat(KnobMap.of(HEATER, NOMINAL, 2)).hasSize(2);
+        assertThatThrownBy(() -> KnobMap.of(HEATER, NOMINAL, 1))
+                .isInstanceOf(IllegalArgumentException.class)
+                .hasMessageContaining("2 positions or more, not 1");
+        List<OperatingPoint> fixed = KnobMap.of(Changed.with(HEATER, "ramp.pot", Optional.empty()), NOMINAL, 5);
+        assertThat(fixed).hasSize(1);
+        assertThat(fixed.get(0).position()).isEmpty();
+        assertThat(fixed.get(0).rampOhms()).isEqualTo(5_600);
     }
 
     @Test
