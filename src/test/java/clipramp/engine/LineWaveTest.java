@@ -9,6 +9,7 @@ import clipramp.circuit.Line;
 import clipramp.circuit.Line.Harmonic;
 import clipramp.circuit.RefusedCircuit;
 import java.util.List;
+import java.util.stream.IntStream;
 import org.junit.jupiter.api.Test;
 
 /** The line and what stands behind the dropper, against the sums of sines that DEVELOPERS.md (Line and source) writes. */
@@ -74,6 +75,17 @@ class LineWaveTest {
         assertThat(wave(new Harmonic(50, 0.019, Math.PI)).positiveStartRad()).isCloseTo(0, within(1e-12));
         assertThatThrownBy(() -> wave(new Harmonic(50, 0.021, Math.PI), new Harmonic(2, 0.001, 0)))
                 .isInstanceOf(RefusedCircuit.class);
+    }
+
+    /** Ten harmonics that add up to a notch at each crest, a twentieth of a radian wide: ten zeros by dense sampling. */
+    @Test
+    void aNotchFarFromAnyOtherZeroIsSeen() {
+        Harmonic[] notch = IntStream.range(0, 10)
+                .mapToObj(i -> new Harmonic(11 + 2 * i, 0.11, i % 2 == 0 ? 0 : Math.PI))
+                .toArray(Harmonic[]::new);
+        assertThatThrownBy(() -> wave(notch))
+                .isInstanceOf(RefusedCircuit.class)
+                .hasMessageContaining("10 zeros");
     }
 
     @Test

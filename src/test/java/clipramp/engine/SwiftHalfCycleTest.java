@@ -85,7 +85,9 @@ class SwiftHalfCycleTest {
             SwiftStepper swift = new SwiftStepper(n);
             swift.take(wave);
             Half fine = half(swift, wave, 0.5, false, false);
-            Half rough = half(swift, wave, 0.5, true, false);
+            SwiftStepper other = new SwiftStepper(n);
+            other.take(wave);
+            Half rough = half(other, wave, 0.5, true, true);
             Half known = half(swift, wave, 0.5, false, true);
             if (fine.edge) {
                 continue;
@@ -93,7 +95,7 @@ class SwiftHalfCycleTest {
             assertThat(rough.events).as("seed " + seed).isEqualTo(fine.events);
             assertThat(known.events).as("seed " + seed).isEqualTo(fine.events);
             if (!Double.isNaN(fine.firing)) {
-                otherwise += Math.abs(rough.firing - fine.firing) > 1e-14 ? 1 : 0;
+                otherwise += rough.firing == fine.firing ? 0 : 1;
                 assertThat(rough.firing).as("seed " + seed).isCloseTo(fine.firing, within(1e-6));
                 assertThat(known.firing).as("seed " + seed).isCloseTo(fine.firing, within(1e-11));
             }
