@@ -83,9 +83,7 @@ class LineWaveTest {
         Harmonic[] notch = IntStream.range(0, 10)
                 .mapToObj(i -> new Harmonic(11 + 2 * i, 0.11, i % 2 == 0 ? 0 : Math.PI))
                 .toArray(Harmonic[]::new);
-        assertThatThrownBy(() -> wave(notch))
-                .isInstanceOf(RefusedCircuit.class)
-                .hasMessageContaining("10 zeros");
+        assertThatThrownBy(() -> wave(notch)).isInstanceOf(RefusedCircuit.class).hasMessageContaining("10 zeros");
     }
 
     @Test

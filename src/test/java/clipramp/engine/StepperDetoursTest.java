@@ -190,7 +190,7 @@ class StepperDetoursTest {
         Stepper stepper = new Stepper(n);
         stepper.start(wave, Mode.OFF, 0, 0);
         Event event = stepper.advance(wave.seconds());
-        while (event != Event.STALLS) {
+        for (int events = 0; events < 100 && event != Event.STALLS; events++) {
             event = stepper.advance(wave.seconds());
         }
         assertThat(stepper.advance(wave.seconds())).isEqualTo(Event.FIRES);

@@ -66,9 +66,12 @@ class SwiftStepperTest {
     private static Event advance(SwiftStepper swift, Event expected) {
         double before = swift.seconds();
         Event event = swift.advance();
-        while (event != expected
-                && (event == Event.RECTIFIER || event == Event.ZENER || event == Event.GATE)
-                && swift.seconds() - before < SWITCHING) {
+        for (int turns = 0;
+                turns < 20
+                        && event != expected
+                        && (event == Event.RECTIFIER || event == Event.ZENER || event == Event.GATE)
+                        && swift.seconds() - before < SWITCHING;
+                turns++) {
             event = swift.advance();
         }
         return event;
