@@ -17,7 +17,7 @@ public final class Stepper {
     static final double ABOVE_VOLTS = 1e-9;
 
     /** By how much more than the valley current a pulse must begin with, as a share of it. */
-    private static final double VALLEY_ROUNDING = 1e-6;
+    static final double VALLEY_ROUNDING = 1e-6;
 
     /**
      * A branch that has just switched is asked again after this part of the half cycle: what it switched by and what it
@@ -97,12 +97,16 @@ public final class Stepper {
         clips = nowClips;
         gateConducts = nowGateConducts;
         clamps = false;
+        boolean elsewhere = nowSeconds != seconds;
         seconds = nowSeconds;
         rampVolts = nowRampVolts;
         fluxAmps = 0;
         idle = 0;
         pause = 0;
-        nothingSwitched();
+        if (elsewhere) {
+            // At the very instant where it stopped, what has just switched still rests.
+            nothingSwitched();
+        }
     }
 
     /** Finds the switches that agree with a state that was just resumed. */

@@ -225,7 +225,8 @@ public final class SwiftStepper {
         settle();
         int at = laws.row(state);
         // Regenerative: the saturated line carries more than the valley current.
-        if (now(at + SwiftLaws.DEVICE, decaying(at)) < 0) {
+        double spare = Stepper.VALLEY_ROUNDING * n.valleySiemens * supplyVolts(state);
+        if (now(at + SwiftLaws.DEVICE, decaying(at)) < -spare) {
             switched(true);
             return Event.FIRES;
         }
@@ -383,10 +384,15 @@ public final class SwiftStepper {
 
     /** Whether, at the end of the piece just passed, the ramp resistor alone feeds more than the valley current. */
     public boolean isHeldByResistor() {
-        int at = laws.row(passedState);
-        double overKnee = now(at + SwiftLaws.ZENER, decaying(at));
-        double supply = n.zenerKneeVolts + ((passedState & SwiftLaws.CLIPS) != 0 ? -overKnee : overKnee);
+        double supply = supplyVolts(passedState);
         return (supply - rampVolts) / n.rampOhms > n.valleySiemens * supply;
+    }
+
+    /** V_S now under a state's law, V. */
+    private double supplyVolts(int under) {
+        int at = laws.row(under);
+        double overKnee = now(at + SwiftLaws.ZENER, decaying(at));
+        return n.zenerKneeVolts + ((under & SwiftLaws.CLIPS) != 0 ? -overKnee : overKnee);
     }
 
     // --- what the caller sees ---------------------------------------------------------------------------------------

@@ -63,7 +63,8 @@ final class Sampling {
             count(from, to);
             done = to;
             watch.progress(done, samples);
-            drawn.accept(new Histogram(position, done, Arrays.stream(counts).boxed().toList()));
+            drawn.accept(
+                    new Histogram(position, done, Arrays.stream(counts).boxed().toList()));
         }
     }
 

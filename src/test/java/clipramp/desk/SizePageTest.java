@@ -110,7 +110,8 @@ class SizePageTest {
             // Law, end and shunt alone are fewer knobs to draw.
             untick(window, "ramp-fixed", "ramp-pot-track");
             search(window);
-            ShapeFigure figure = (ShapeFigure) ((FigurePane) window.find("#size-curve", FigurePane.class)).figure();
+            ShapeFigure figure =
+                    (ShapeFigure) window.find("#size-curve", FigurePane.class).figure();
             assertThat(figure.after().largestDeparture())
                     .isLessThan(figure.before().largestDeparture());
             assertThat(Texts.of(window.find("#size-shape", Node.class)))

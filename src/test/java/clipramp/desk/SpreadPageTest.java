@@ -43,12 +43,11 @@ class SpreadPageTest {
         try (Harness window = onThePage(home)) {
             draw(window, 40);
             window.await(() -> isOver(window));
-            assertThat(((FigurePane) window.find("#spread-histogram", FigurePane.class)).figure())
+            assertThat(window.find("#spread-histogram", FigurePane.class).figure())
                     .isInstanceOfSatisfying(
                             HistogramFigure.class,
                             f -> assertThat(f.histogram().units()).isEqualTo(40));
-            assertThat(((FigurePane) window.find("#spread-figure", FigurePane.class)).figure())
-                    .isInstanceOf(SpreadFigure.class);
+            assertThat(window.find("#spread-figure", FigurePane.class).figure()).isInstanceOf(SpreadFigure.class);
             assertThat(Harness.at(() -> Texts.all(window.stage.getScene().lookup("#spread-words")).stream()
                             .filter(Label.class::isInstance)
                             .map(n -> ((Label) n).getText())

@@ -90,6 +90,30 @@ class SwiftStepperTest {
         everyCircuit(CIRCUITS, (n, swift, stepper, from, event, which) -> agree(swift, stepper, event, which));
     }
 
+    /** After a doubt the careful stepper's rest after a switch holds on, or the two would turn it to and fro on the spot. */
+    @Test
+    void noSwitchTurnsForEverWhereTheTwoSteppersMeet() {
+        for (long seed : List.of(1428L, 2409L, 2616L)) {
+            Network n = DrawnNetworks.direct(seed);
+            SwiftStepper swift = new SwiftStepper(n);
+            swift.take(DrawnNetworks.sine(seed));
+            swift.start(Mode.OFF, 0.5, false, false);
+            int events = 1;
+            while (swift.advance() != Event.END && events < MOST_EVENTS) {
+                events++;
+            }
+            assertThat(events).as("seed " + seed).isLessThan(100);
+        }
+    }
+
+    @Test
+    void aDyingSupplyThatOnlyJustFeedsTheValleyFiresNothing() {
+        long seed = 96;
+        Network n = DrawnNetworks.starved(seed);
+        Witness agrees = (network, swift, stepper, from, event, which) -> agree(swift, stepper, event, which);
+        run(n, new SwiftStepper(n), DrawnNetworks.sine(seed), agrees, "starved " + seed);
+    }
+
     /** A single diode's supply works over whole periods, its second half unfed. */
     @Test
     void wholePeriodsToo() {
