@@ -61,12 +61,11 @@ final class Outlook {
 
     /** Whether a form that stands at zero may rise at once; one that stays at zero (nothing charged, no supply) does not. */
     boolean rises() {
-        look(0);
+        look();
         return slope > 0 || (slope == 0 && bendBound() > 0);
     }
 
-    private void look(double valueNow) {
-        value = valueNow;
+    private void look() {
         slope = piece.slope(form);
         bend = piece.bend(form);
         quick = piece.quickPart(form);
@@ -82,7 +81,8 @@ final class Outlook {
      * @param rest how far to look, s
      */
     double surelyNegative(double valueNow, double rest) {
-        look(valueNow);
+        look();
+        value = valueNow;
         double guess = firstRoot(value, slope, bend);
         double way = FADES / Math.min(guess, rest);
         if ((quick < 0 && quickRate > way) || (slow < 0 && slowRate > way)) {

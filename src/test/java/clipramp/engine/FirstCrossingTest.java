@@ -13,28 +13,11 @@ class FirstCrossingTest {
     private static final double NEVER = Double.POSITIVE_INFINITY;
     private static final double OMEGA = 2000;
 
-    /** 1 V behind 1 kilohm onto 1 uF from a start voltage: a millisecond's time constant. */
-    private static Piece charging(double fromSeconds, double startVolts) {
-        SourceWave volt = new SourceWave();
-        volt.setConstant(1, 1);
-        return lag(volt, fromSeconds, startVolts);
-    }
-
-    /** sin(2000 t) behind it. */
+    /** sin(2000 t) behind a millisecond's lag. */
     private static Piece swinging() {
         SourceWave sine = new SourceWave();
         sine.setSine(OMEGA, 1, 0, 1);
-        return lag(sine, 0, 0);
-    }
-
-    private static Piece lag(SourceWave wave, double fromSeconds, double startVolts) {
-        Network n = new Network();
-        n.rampOhms = 1e3;
-        n.capacitorFarads = 1e-6;
-        Piece piece = new Piece();
-        piece.supply.set(0, 1, 0);
-        piece.begin(n, wave, fromSeconds, startVolts, 0);
-        return piece;
+        return Lag.behind(sine, 0, 0);
     }
 
     private static Affine form(double ofRamp, double ofSource, double constant) {
@@ -46,13 +29,13 @@ class FirstCrossingTest {
     @Test
     void aRampReachesALevelAfterTheLogarithmOfTheBooks() {
         double eta = 0.655;
-        double found = FirstCrossing.after(charging(2e-3, 0), form(1, 0, -eta), 2e-3, 1);
+        double found = FirstCrossing.after(Lag.charging(2e-3, 0), form(1, 0, -eta), 2e-3, 1);
         assertThat(found).isCloseTo(2e-3 + 1e-3 * Math.log(1 / (1 - eta)), within(1e-15));
     }
 
     @Test
     void aCrossingBeyondTheLimitIsNone() {
-        Piece piece = charging(0, 0);
+        Piece piece = Lag.charging(0, 0);
         double at = FirstCrossing.after(piece, form(1, 0, -0.5), 0, 1);
         assertThat(FirstCrossing.after(piece, form(1, 0, -0.5), 0, at * (1 + 1e-9)))
                 .isCloseTo(at, within(1e-15));
@@ -62,20 +45,21 @@ class FirstCrossingTest {
 
     @Test
     void whatItNeverReachesIsNotFound() {
-        assertThat(FirstCrossing.after(charging(0, 0), form(1, 0, -1.001), 0, 1))
+        assertThat(FirstCrossing.after(Lag.charging(0, 0), form(1, 0, -1.001), 0, 1))
                 .isEqualTo(NEVER);
-        assertThat(FirstCrossing.after(charging(0, 0.9), form(-1, 0, 0.5), 0, 1))
+        assertThat(FirstCrossing.after(Lag.charging(0, 0.9), form(-1, 0, 0.5), 0, 1))
                 .isEqualTo(NEVER);
-        assertThat(FirstCrossing.after(charging(0, 0), form(0, 0, -1), 0, 1)).isEqualTo(NEVER);
+        assertThat(FirstCrossing.after(Lag.charging(0, 0), form(0, 0, -1), 0, 1))
+                .isEqualTo(NEVER);
     }
 
     @Test
     void aFormThatIsPastItsZeroCrossesAtOnce() {
-        assertThat(FirstCrossing.after(charging(0, 0.7), form(1, 0, -0.5), 0, 1))
+        assertThat(FirstCrossing.after(Lag.charging(0, 0.7), form(1, 0, -0.5), 0, 1))
                 .isZero();
-        assertThat(FirstCrossing.after(charging(0, 0), form(1, 0, -0.5), 0.9e-3, 1))
+        assertThat(FirstCrossing.after(Lag.charging(0, 0), form(1, 0, -0.5), 0.9e-3, 1))
                 .isEqualTo(0.9e-3);
-        assertThat(FirstCrossing.after(charging(0, 0), form(-1, 0, 0.5), 1e-4, 1))
+        assertThat(FirstCrossing.after(Lag.charging(0, 0), form(-1, 0, 0.5), 1e-4, 1))
                 .isEqualTo(1e-4);
     }
 
@@ -113,11 +97,11 @@ class FirstCrossingTest {
     /** Adding 1e-13 V to something of a volt is rounding, adding 1e-9 V is not. */
     @Test
     void whatRoundingLeavesUnderZeroIsZero() {
-        assertThat(FirstCrossing.after(charging(0, 0.5), form(1, 0, -0.5 - 1e-13), 0, 1))
+        assertThat(FirstCrossing.after(Lag.charging(0, 0.5), form(1, 0, -0.5 - 1e-13), 0, 1))
                 .isZero();
-        assertThat(FirstCrossing.after(charging(0, 0.5), form(1, 0, -0.5 - 1e-9), 0, 1))
+        assertThat(FirstCrossing.after(Lag.charging(0, 0.5), form(1, 0, -0.5 - 1e-9), 0, 1))
                 .isCloseTo(2e-12, within(1e-15));
-        assertThat(FirstCrossing.after(charging(0, 0.5), form(-1, 0, 0.5 + 1e-13), 0, 1))
+        assertThat(FirstCrossing.after(Lag.charging(0, 0.5), form(-1, 0, 0.5 + 1e-13), 0, 1))
                 .as("falls from it")
                 .isEqualTo(NEVER);
     }

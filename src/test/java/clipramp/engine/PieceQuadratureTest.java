@@ -24,10 +24,7 @@ class PieceQuadratureTest {
         Network n = new Network();
         n.rampOhms = 1 / rate;
         n.capacitorFarads = 1;
-        Piece piece = new Piece();
-        piece.supply.set(0, 1, 0);
-        piece.begin(n, wave, startSeconds, startVolts, 0);
-        return piece;
+        return Lag.begin(n, wave, startSeconds, startVolts);
     }
 
     private static double square(double x) {

@@ -60,14 +60,9 @@ class PieceReadingsTest {
     /** sin wt alone: its crest is a quarter of a turn from its zero. */
     @Test
     void theCrestOfASineIsAtItsQuarter() {
-        Network n = new Network();
-        n.rampOhms = 1e3;
-        n.capacitorFarads = 1e-6;
-        Piece piece = new Piece();
-        piece.supply.set(0, 1, 0);
         SourceWave sine = new SourceWave();
         sine.setSine(100 * Math.PI, 325, 0, 0.01);
-        piece.begin(n, sine, 0, 0, 0);
+        Piece piece = Lag.behind(sine, 0, 0);
         assertThat(piece.supplyCrestSeconds(0, 0.01)).isCloseTo(0.005, within(1e-12));
         assertThat(piece.supplyCrestSeconds(0, 0.004)).isEqualTo(0.004);
         assertThat(piece.supplyCrestSeconds(0.006, 0.01)).isEqualTo(0.006);
@@ -142,18 +137,12 @@ class PieceReadingsTest {
     /** 1 V behind 1 kilohm onto 1 uF at the gate: 20 mA through 10 ohm over a knee of 0.2 V flow at 0.4 V. */
     @Test
     void aRisingGateCurrentPassesALevelOnItsWayUp() {
-        Network n = new Network();
-        n.rampOhms = 1e3;
-        n.capacitorFarads = 1e-6;
+        Network n = Lag.network();
         n.gateKneeVolts = 0.2;
         n.gateSlopeOhms = 10;
-        Piece piece = new Piece();
-        piece.supply.set(0, 1, 0);
+        Piece piece = Lag.charging(0, 0);
         piece.gate.set(1, 0, 0);
         piece.gateConducts = true;
-        SourceWave volt = new SourceWave();
-        volt.setConstant(1, 1);
-        piece.begin(n, volt, 0, 0, 0);
         assertThat(piece.gateReaches(n, 20e-3, true, 0, 1)).isCloseTo(-1e-3 * Math.log(0.6), within(1e-15));
         assertThat(piece.gateReaches(n, 20e-3, false, 2e-3, 1)).isEqualTo(Double.POSITIVE_INFINITY);
         piece.gateConducts = false;
@@ -206,14 +195,7 @@ class PieceReadingsTest {
     /** 1 V behind 1 kilohm onto 1 uF from -9 V: near V_C = 0 a volt and a volt cancel. */
     @Test
     void theMagnitudeOfARampNearZeroIsThatOfWhatCancels() {
-        Network n = new Network();
-        n.rampOhms = 1e3;
-        n.capacitorFarads = 1e-6;
-        Piece piece = new Piece();
-        piece.supply.set(0, 1, 0);
-        SourceWave volt = new SourceWave();
-        volt.setConstant(1, 1);
-        piece.begin(n, volt, 0, -9, 0);
+        Piece piece = Lag.charging(0, -9);
         piece.look(1e-3 * Math.log(10));
         Affine ramp = new Affine();
         ramp.set(-1, 0, 0);

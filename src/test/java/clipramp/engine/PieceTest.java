@@ -266,14 +266,7 @@ class PieceTest {
     /** 1 V behind 1 kilohm onto 1 uF: a millisecond's time constant, and 1 - 1/e of a volt after it. */
     @Test
     void aResistorChargesACapacitorExponentially() {
-        Network n = new Network();
-        n.rampOhms = 1e3;
-        n.capacitorFarads = 1e-6;
-        Piece piece = new Piece();
-        piece.supply.set(0, 1, 0);
-        SourceWave volt = new SourceWave();
-        volt.setConstant(1, 1);
-        piece.begin(n, volt, 2e-3, 0, 0);
+        Piece piece = Lag.charging(2e-3, 0);
         piece.look(3e-3);
         assertThat(piece.rampVolts()).isCloseTo(1 - Math.exp(-1), within(1e-15));
         assertThat(piece.ratePerSecond()).isCloseTo(1e3, within(1e-9));
@@ -283,14 +276,9 @@ class PieceTest {
     /** sin wt behind R onto C, long after its start: |V_C| = 1/sqrt(1 + (w R C)²), an angle atan(w R C) behind. */
     @Test
     void aResistorAndACapacitorLag() {
-        Network n = new Network();
-        n.rampOhms = 1e3;
-        n.capacitorFarads = 1e-6;
-        Piece piece = new Piece();
-        piece.supply.set(0, 1, 0);
         SourceWave sine = new SourceWave();
         sine.setSine(2000, 1, 0, 1);
-        piece.begin(n, sine, 0, 0, 0);
+        Piece piece = Lag.behind(sine, 0, 0);
         piece.look(0.5);
         assertThat(piece.rampVolts()).isCloseTo(Math.sin(1000 - Math.atan(2)) / Math.sqrt(5), within(1e-12));
         assertThat(piece.fastestRate()).isEqualTo(2000);

@@ -14,6 +14,12 @@ class SwiftHalfCycleTest {
 
     private record Half(List<Event> events, double ramp, double firing, double kept, double shift, boolean edge) {}
 
+    private static SwiftStepper stepper(long seed, SourceWave wave) {
+        SwiftStepper swift = new SwiftStepper(DrawnNetworks.direct(seed));
+        swift.take(wave);
+        return swift;
+    }
+
     private static Half half(SwiftStepper swift, SourceWave wave, double startVolts, boolean rough, boolean proven) {
         List<Event> events = new ArrayList<>();
         double firing = Double.NaN;
@@ -33,10 +39,8 @@ class SwiftHalfCycleTest {
         int followed = 0;
         double step = 1e-5;
         for (long seed = 0; seed < CIRCUITS; seed++) {
-            Network n = DrawnNetworks.direct(seed);
             SourceWave wave = DrawnNetworks.sine(seed);
-            SwiftStepper swift = new SwiftStepper(n);
-            swift.take(wave);
+            SwiftStepper swift = stepper(seed, wave);
             Half middle = half(swift, wave, 0.5, false, false);
             Half above = half(swift, wave, 0.5 + step, false, false);
             Half below = half(swift, wave, 0.5 - step, false, false);
@@ -61,10 +65,8 @@ class SwiftHalfCycleTest {
     void awayFromEdgesANeighbourPassesTheSameEvents() {
         int inside = 0;
         for (long seed = 0; seed < CIRCUITS; seed++) {
-            Network n = DrawnNetworks.direct(seed);
             SourceWave wave = DrawnNetworks.sine(seed);
-            SwiftStepper swift = new SwiftStepper(n);
-            swift.take(wave);
+            SwiftStepper swift = stepper(seed, wave);
             Half middle = half(swift, wave, 0.5, false, false);
             if (!middle.edge) {
                 inside++;
@@ -80,14 +82,10 @@ class SwiftHalfCycleTest {
     void aRoughHalfCycleIsRoughlyRight() {
         int otherwise = 0;
         for (long seed = 0; seed < CIRCUITS; seed++) {
-            Network n = DrawnNetworks.direct(seed);
             SourceWave wave = DrawnNetworks.sine(seed);
-            SwiftStepper swift = new SwiftStepper(n);
-            swift.take(wave);
+            SwiftStepper swift = stepper(seed, wave);
             Half fine = half(swift, wave, 0.5, false, false);
-            SwiftStepper other = new SwiftStepper(n);
-            other.take(wave);
-            Half rough = half(other, wave, 0.5, true, true);
+            Half rough = half(stepper(seed, wave), wave, 0.5, true, true);
             Half known = half(swift, wave, 0.5, false, true);
             if (fine.edge) {
                 continue;
