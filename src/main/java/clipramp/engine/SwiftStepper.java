@@ -8,8 +8,9 @@ package clipramp.engine;
  * it ({@link SwiftProof}). Where the proof fails, or the device is stalled, {@link Stepper} does the piece. Longer
  * than most files: events, their settling and the way to the careful stepper and back all turn over the same state.
  *
- * <p>Events are {@link Stepper}'s to within 1e-14 s (DEVELOPERS.md, Many units at once). Times are seconds since the line
- * zero that begins the half cycle, voltages against the firing common. Not for two threads at once.
+ * <p>It fires and leaves the valley at {@link Stepper}'s instants to within 1e-11 s; a switch of rectifier, zener or gate near
+ * where its form bends round may be up to 1e-10 s off (DEVELOPERS.md, Many units at once). Times are seconds since the
+ * line zero that begins the half cycle, voltages against the firing common. Not for two threads at once.
  */
 public final class SwiftStepper {
     private static final int MOST_TARGETS = 6;
